@@ -1,0 +1,111 @@
+import { ARCSEC_RAD, GYR_S, MPC_KM, SPEED_OF_LIGHT_KM_S } from '../constants'
+import { at } from '../numeric/at'
+import { createAntipode } from './antipode'
+import { transverseFactor, volumeFactor } from './curvature'
+import { createDensity } from './density'
+import { createInverse } from './inverse'
+import { checkParameters, type CosmologyParameters } from './parameters'
+import { createRedshiftCheck } from './redshiftCheck'
+import { ScienceError } from '../ScienceError'
+import { createTimeline } from './timeline'
+import type { Cosmology, CosmologyQuantity } from './types'
+import { classify, type Universe } from './universe'
+
+/**
+ * Sets a universe up once; each redshift then costs some tens of nanoseconds.
+ *
+ * E^2 = Or(z) + Om0 (1+z)^3 + Ok0 (1+z)^2 + Ode0 (1+z)^{3(1+w0+wa)} exp(-3 wa z/(1+z)).
+ * Distances, volumes and times: Hogg 1999 (astro-ph/9905116). Neutrinos: Komatsu et al. 2011, eq. 26.
+ * Throws a ScienceError on parameters no universe can have.
+ */
+export function createCosmology(parameters: CosmologyParameters): Cosmology {
+  checkParameters(parameters)
+  const density = createDensity(parameters)
+  const timeline = createTimeline(density)
+  const check = createRedshiftCheck(parameters.name, timeline)
+  const { Ok0, Ode0, Om0 } = density
+  const hubbleDistanceMpc = SPEED_OF_LIGHT_KM_S / parameters.H0
+  const hubbleTimeGyr = MPC_KM / parameters.H0 / GYR_S
+  const antipode = createAntipode(parameters.name, Ok0, timeline)
+  let universe: Universe | null = null
+
+  /** Line-of-sight distance in Hubble units; across the sky it must stay short of the antipode. */
+  const chi = (z: number): number => timeline.distance().read(check.seen(z))
+  const chiAcross = (z: number): number => antipode.guard(chi(z), z)
+  const transverse = (z: number): number => {
+    const d = chiAcross(z)
+    return hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)
+  }
+  const luminosity = (z: number): number => (1 + z) * transverse(z)
+  const E2 = (z: number): number => density.E2(check.any(z))
+  const kpcComovingPerArcsec = (z: number): number => transverse(z) * ARCSEC_RAD * 1e3
+
+  const quantities: Record<CosmologyQuantity, (z: number) => number> = {
+    E: (z) => Math.sqrt(E2(z)),
+    hubbleKmSMpc: (z) => parameters.H0 * Math.sqrt(E2(z)),
+    comovingMpc: (z) => hubbleDistanceMpc * chi(z),
+    transverseComovingMpc: transverse,
+    angularDiameterMpc: (z) => transverse(z) / (1 + z),
+    luminosityMpc: luminosity,
+    distanceModulusMag(z) {
+      const d = luminosity(z)
+      if (d > 0) return 5 * Math.log10(d) + 25
+      throw new ScienceError('bad-redshift', 'A distance modulus needs a redshift above 0.')
+    },
+    lookbackGyr(z) {
+      const x = check.any(z)
+      return hubbleTimeGyr * (x >= 0 ? timeline.pastTime() : timeline.futureTime()).read(x)
+    },
+    ageGyr(z) {
+      const x = check.any(z)
+      const age = timeline.age()
+      if (age) return hubbleTimeGyr * age(x)
+      throw new ScienceError('no-beginning', `${parameters.name} has no big bang to count an age from.`)
+    },
+    comovingVolumeMpc3(z) {
+      const d = chiAcross(z)
+      return 4 * Math.PI * hubbleDistanceMpc ** 3 * d ** 3 * volumeFactor(Ok0 * d * d)
+    },
+    differentialVolumeMpc3Sr: (z) => (hubbleDistanceMpc * transverse(z) ** 2) / Math.sqrt(E2(z)),
+    kpcPerArcsec: (z) => kpcComovingPerArcsec(z) / (1 + z),
+    kpcComovingPerArcsec,
+    criticalDensityGCm3: (z) => density.criticalDensity0GCm3 * E2(z),
+    Om: (z) => (Om0 * (1 + z) ** 3) / E2(z),
+    Ode: (z) => density.darkEnergy(check.any(z)) / E2(z),
+    Ok: (z) => (Ok0 * (1 + z) ** 2) / E2(z),
+    Or: (z) => density.radiation(check.any(z)) / E2(z),
+    q(z) {
+      const x = check.any(z)
+      return density.slopeE2(x) / (2 * density.E2(x)) - 1
+    },
+    dimmingMag: (z) => 10 * Math.log10(1 + z) + 0 * check.any(z),
+  }
+
+  return {
+    ...quantities,
+    parameters,
+    Ok0,
+    Ode0,
+    Or0: density.Ogamma0 + density.Onu0,
+    hubbleDistanceMpc,
+    hubbleTimeGyr,
+    deepestRedshift: Math.expm1(timeline.pastEnd),
+    get antipodeRedshift() {
+      return antipode.redshift()
+    },
+    get universe() {
+      universe ??= classify(parameters, density, timeline, hubbleTimeGyr)
+      return universe
+    },
+    angularDiameterBetweenMpc(z1, z2) {
+      const d = chiAcross(z2) - chiAcross(z1)
+      return (hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)) / (1 + z2)
+    },
+    batch(quantity, redshifts, out = new Float64Array(redshifts.length)) {
+      const f = quantities[quantity]
+      for (let i = 0; i < redshifts.length; i += 1) out[i] = f(at(redshifts, i))
+      return out
+    },
+    redshiftsAt: createInverse(quantities, timeline, antipode),
+  }
+}

@@ -1,0 +1,75 @@
+import type { Density } from './density'
+import { createIntegralTable } from './integralTable'
+import { createPath, type Path } from './path'
+import { DEEPEST_X, findTurn, FURTHEST_X, type Turn } from './turns'
+
+/** How far from a static state a redshift must stay: nearer, time and distance grow without limit. */
+const STATIC_MARGIN = 1e-3
+
+/** What the expansion does on both sides of now, with its running integrals, each made when first asked for. */
+export interface Timeline {
+  readonly pastTurn: Turn | null
+  /** ln(1+z) of the largest redshift there is, or that the engine follows. */
+  readonly pastEnd: number
+  futureTurn(): Turn | null
+  /** ln(1+z) of the furthest future. */
+  futureEnd(): number
+  /** Line-of-sight comoving distance over the Hubble distance. */
+  distance(): Path
+  /** Lookback time over the Hubble time, past and future. */
+  pastTime(): Path
+  futureTime(): Path
+  /** Time since the big bang over the Hubble time; null where there was none. */
+  age(): ((x: number) => number) | null
+}
+
+/** A value computed when first asked for and kept. */
+function once<T>(make: () => T): () => T {
+  let kept: { value: T } | null = null
+  return () => {
+    kept ??= { value: make() }
+    return kept.value
+  }
+}
+
+function endOf(turn: Turn | null, open: number): number {
+  if (!turn) return open
+  return turn.kind === 'turn' ? turn.x : turn.x - Math.sign(turn.x) * STATIC_MARGIN
+}
+
+/**
+ * Time before x = DEEPEST_X, where E grows as a power n of 1+z: 1/(n E). Null when E does not grow, as in
+ * de Sitter space: such a universe had no beginning.
+ */
+function timeBefore(density: Density): number | null {
+  const E2 = density.E2(DEEPEST_X)
+  const n = density.slopeE2(DEEPEST_X) / (2 * E2)
+  return n > 1e-9 ? 1 / (n * Math.sqrt(E2)) : null
+}
+
+export function createTimeline(density: Density): Timeline {
+  const pastTurn = findTurn(density, DEEPEST_X)
+  const pastEnd = endOf(pastTurn, DEEPEST_X)
+  const pastTurns = pastTurn?.kind === 'turn'
+  const futureTurn = once(() => findTurn(density, FURTHEST_X))
+  const futureEnd = once(() => endOf(futureTurn(), FURTHEST_X))
+  const futureTime = once(() => createPath(density, 0, futureEnd(), futureTurn()?.kind === 'turn'))
+  return {
+    pastTurn,
+    pastEnd,
+    futureTurn,
+    futureEnd,
+    distance: once(() => createPath(density, 1, pastEnd, pastTurns)),
+    pastTime: once(() => createPath(density, 0, pastEnd, pastTurns)),
+    futureTime,
+    age: once(() => {
+      const before = pastTurn ? null : timeBefore(density)
+      if (before === null) return null
+      // Counted from the early end, so that the small ages of high redshifts keep their relative accuracy.
+      const g = (s: number): number => 1 / Math.sqrt(density.E2(DEEPEST_X - s))
+      const table = createIntegralTable(g, 0, DEEPEST_X, 0.5)
+      const now = before + table.total
+      return (x) => (x >= 0 ? before + table.read(DEEPEST_X - x) : now - futureTime().read(x))
+    }),
+  }
+}
