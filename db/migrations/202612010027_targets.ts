@@ -1,0 +1,51 @@
+import type { Knex } from 'knex'
+import { createdAt, measured, reference, version } from '../columns.ts'
+
+export async function up(knex: Knex): Promise<void> {
+  await knex.schema.createTable('targets', (t) => {
+    t.comment('Targets; a target of opportunity has no position yet')
+    t.increments('id').comment('key')
+    reference(t, 'proposal_id', 'proposals', 'CASCADE', 'which proposal').notNullable()
+    reference(t, 'group_id', 'target_groups', 'SET NULL', 'group')
+    t.integer('position').unsigned().notNullable().comment('order in the table')
+    t.string('name', 120).notNullable().comment('name as typed, never shortened')
+    t.string('ra_typed', 40).notNullable().defaultTo('').comment('right ascension as typed')
+    t.string('dec_typed', 40).notNullable().defaultTo('').comment('declination as typed')
+    measured(t, 'ra_deg', 'ICRS right ascension')
+    measured(t, 'dec_deg', 'ICRS declination')
+    measured(t, 'epoch_yr', 'epoch of the position, Julian year').notNullable().defaultTo(2016)
+    measured(t, 'pm_ra_mas_yr', 'proper motion in RA times cos dec, mas a year')
+    measured(t, 'pm_dec_mas_yr', 'proper motion in declination, mas a year')
+    t.enum('geometry', ['point', 'sersic', 'uniform'])
+      .notNullable()
+      .defaultTo('point')
+      .comment('shape of the source')
+    measured(t, 'effective_radius_arcsec', 'half-light radius, Sersic')
+    measured(t, 'sersic_index', 'Sersic index')
+    t.string('redshift_typed', 20).notNullable().defaultTo('').comment('redshift as typed')
+    measured(t, 'redshift', 'redshift')
+    measured(t, 'redshift_error', 'its one-sigma error')
+    t.enum('redshift_frame', ['heliocentric', 'cmb']).notNullable().defaultTo('heliocentric').comment('frame')
+    t.enum('redshift_type', ['spectroscopic', 'photometric', 'assumed'])
+      .notNullable()
+      .defaultTo('spectroscopic')
+      .comment('how it is known')
+    t.enum('need', ['required', 'optional', 'backup'])
+      .notNullable()
+      .defaultTo('required')
+      .comment('how much it is needed')
+    t.string('opportunity_class', 120).comment('class of a target of opportunity')
+    t.string('opportunity_trigger', 240).comment('what triggers it')
+    t.integer('opportunity_reaction_s').unsigned().comment('reaction time, seconds')
+    t.integer('opportunity_count').unsigned().comment('number of triggers asked')
+    version(t)
+    createdAt(t)
+    t.unique(['proposal_id', 'name'])
+    t.check('ra_deg IS NULL OR (ra_deg >= 0 AND ra_deg < 360)', [], 'targets_ra_in_range')
+    t.check('dec_deg IS NULL OR (dec_deg BETWEEN -90 AND 90)', [], 'targets_dec_in_range')
+  })
+}
+
+export async function down(knex: Knex): Promise<void> {
+  await knex.schema.dropTable('targets')
+}

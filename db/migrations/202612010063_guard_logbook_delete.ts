@@ -1,0 +1,12 @@
+import type { Knex } from 'knex'
+
+// What is written here is a record of what happened: the database itself refuses to change it.
+export async function up(knex: Knex): Promise<void> {
+  await knex.raw(
+    "CREATE TRIGGER logbook_no_delete BEFORE DELETE ON logbook FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'logbook is append-only'",
+  )
+}
+
+export async function down(knex: Knex): Promise<void> {
+  await knex.raw('DROP TRIGGER logbook_no_delete')
+}

@@ -1,0 +1,12 @@
+import type { Knex } from 'knex'
+
+// What is written here is a record of what happened: the database itself refuses to change it.
+export async function up(knex: Knex): Promise<void> {
+  await knex.raw(
+    "CREATE TRIGGER time_entries_no_update BEFORE UPDATE ON time_entries FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'time_entries is append-only'",
+  )
+}
+
+export async function down(knex: Knex): Promise<void> {
+  await knex.raw('DROP TRIGGER time_entries_no_update')
+}

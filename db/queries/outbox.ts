@@ -1,0 +1,91 @@
+import type { Database } from '../client.ts'
+import type { OutboxRow } from '../tables.ts'
+
+export interface NewLetter {
+  dedupeKey: string
+  messageId: string
+  template: string
+  personId: number | null
+  toEmail: string
+  toName: string
+  subject: string
+  text: string
+  html: string
+}
+
+/** Adds a letter; the same cause and person a second time is the same letter, and nothing happens. */
+export async function insertLetter(db: Database, letter: NewLetter): Promise<void> {
+  await db('outbox')
+    .insert({
+      dedupe_key: letter.dedupeKey,
+      message_id: letter.messageId,
+      template: letter.template,
+      person_id: letter.personId,
+      to_email: letter.toEmail,
+      to_name: letter.toName,
+      subject: letter.subject,
+      text_body: letter.text,
+      html_body: letter.html,
+      next_attempt_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
+    })
+    .onConflict('dedupe_key')
+    .ignore()
+}
+
+/** Takes up to `limit` letters that are due, so that no second relay sends them; a dead relay's come back. */
+export async function claimLetters(db: Database, limit: number, holdSeconds: number): Promise<OutboxRow[]> {
+  return db.transaction(async (trx) => {
+    const due = await trx('outbox')
+      .whereIn('state', ['queued', 'sending'])
+      .andWhere('next_attempt_at', '<=', trx.raw('UTC_TIMESTAMP(3)'))
+      .andWhere((q) =>
+        q.whereNull('claimed_until').orWhere('claimed_until', '<', trx.raw('UTC_TIMESTAMP(3)')),
+      )
+      .orderBy('id')
+      .limit(limit)
+      .forUpdate()
+      .skipLocked()
+    if (due.length > 0)
+      await trx('outbox')
+        .whereIn(
+          'id',
+          due.map((row) => row.id),
+        )
+        .update({
+          state: 'sending',
+          claimed_until: trx.raw('UTC_TIMESTAMP(3) + INTERVAL ? SECOND', [holdSeconds]) as unknown as Date,
+        })
+    return due
+  })
+}
+
+export async function markSent(db: Database, id: number): Promise<void> {
+  await db('outbox')
+    .where({ id })
+    .update({
+      state: 'sent',
+      sent_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
+      attempts: db.raw('attempts + 1') as unknown as number,
+      claimed_until: null,
+      last_error: null,
+    })
+}
+
+/** Puts a letter back for a later try, or parks it. */
+export async function markFailed(
+  db: Database,
+  id: number,
+  outcome: { error: string; waitSeconds: number; park: boolean },
+): Promise<void> {
+  await db('outbox')
+    .where({ id })
+    .update({
+      state: outcome.park ? 'parked' : 'queued',
+      attempts: db.raw('attempts + 1') as unknown as number,
+      claimed_until: null,
+      last_error: outcome.error.slice(0, 300),
+      next_attempt_at: db.raw('UTC_TIMESTAMP(3) + INTERVAL ? SECOND', [
+        outcome.waitSeconds,
+      ]) as unknown as Date,
+    })
+}

@@ -1,0 +1,10 @@
+/** A letter before it is set: plain data, so that text, HTML and previews agree. */
+export interface Letter {
+  template: string
+  subject: string
+  greeting: string
+  paragraphs: readonly string[]
+  facts?: readonly (readonly [label: string, value: string])[]
+  action?: { label: string; url: string }
+  closing?: string
+}

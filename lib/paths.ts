@@ -1,0 +1,69 @@
+/** Every address of the product. Nothing else writes one by hand. */
+const part = encodeURIComponent
+
+export type ProposalSection =
+  'question' | 'targets' | 'cosmology' | 'observing' | 'feasibility' | 'people' | 'papers' | 'send'
+
+export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
+export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
+
+export const paths = {
+  home: () => '/',
+  calls: () => '/calls',
+  call: (slug: string) => `/calls/${part(slug)}`,
+  yardstick: () => '/tools/yardstick',
+  season: () => '/tools/season',
+  exposure: () => '/tools/exposure',
+  help: () => '/help',
+  helpMarks: () => '/help/marks',
+
+  signIn: (next?: string) => (next ? `/sign-in?next=${part(next)}` : '/sign-in'),
+  register: () => '/register',
+  confirm: (token: string) => `/confirm/${part(token)}`,
+  forgotPassword: () => '/forgot-password',
+  resetPassword: (token: string) => `/reset-password/${part(token)}`,
+  invitation: (token: string) => `/invitations/${part(token)}`,
+  account: () => '/account',
+
+  proposals: () => '/proposals',
+  newProposal: (callSlug?: string) => (callSlug ? `/proposals/new?call=${part(callSlug)}` : '/proposals/new'),
+  proposal: (reference: string) => `/proposals/${part(reference)}`,
+  proposalSection: (reference: string, section: ProposalSection) =>
+    `/proposals/${part(reference)}/${section}`,
+  proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
+  proposalHistory: (reference: string) => `/proposals/${part(reference)}/history`,
+  proposalOutcome: (reference: string) => `/proposals/${part(reference)}/outcome`,
+  proposalPacket: (reference: string) => `/proposals/${part(reference)}/packet`,
+  proposalRecord: (reference: string) => `/proposals/${part(reference)}/record`,
+  proposalReceipt: (reference: string) => `/proposals/${part(reference)}/receipt`,
+  proposalCalendar: (reference: string) => `/proposals/${part(reference)}/calendar.ics`,
+  proposalPaid: (reference: string) => `/proposals/${part(reference)}/paid`,
+
+  assessments: () => '/assessments',
+  assessment: (request: number | string) => `/assessments/${part(String(request))}`,
+  assessmentPacket: (request: number | string) => `/assessments/${part(String(request))}/packet`,
+
+  reviews: () => '/reviews',
+  interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
+  review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
+  reviewPacket: (assignment: number | string) => `/reviews/${part(String(assignment))}/packet`,
+
+  panel: (callSlug: string, page: PanelPage) => `/panel/${part(callSlug)}/${page}`,
+  panelPacket: (callSlug: string, reviewNumber: string) =>
+    `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
+
+  office: (page: OfficePage) => `/office/${page}`,
+  officeCall: (slug: string) => `/office/calls/${part(slug)}`,
+
+  api: {
+    health: () => '/api/health',
+    stripeWebhook: () => '/api/webhooks/stripe',
+    table: (name: string) => `/api/tables/${name}`,
+  },
+} as const
+
+/** A return address from outside: only a path of ours is followed, never another site. */
+export function ownPath(given: string | null | undefined, otherwise: string): string {
+  if (!given || !/^\/(?![/\\])[^\s\\]*$/.test(given)) return otherwise
+  return given
+}

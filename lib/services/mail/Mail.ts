@@ -1,0 +1,13 @@
+export interface OutgoingLetter {
+  messageId: string
+  to: { email: string; name: string }
+  subject: string
+  text: string
+  html: string
+}
+
+export interface Mail {
+  /** Resolves once the mail server has taken the letter; rejects with what it said. */
+  send(letter: OutgoingLetter): Promise<void>
+  isUp(): Promise<boolean>
+}

@@ -1,0 +1,39 @@
+import nodemailer from 'nodemailer'
+import { step } from '../step'
+import type { Mail } from './Mail'
+
+/** Mail by SMTP; the local inbox and a real server differ by address alone. */
+export function smtpMail(settings: { url: string; from: string }): Mail {
+  const transport = nodemailer.createTransport({
+    url: settings.url,
+    pool: true,
+    maxConnections: 2,
+    connectionTimeout: 5_000,
+    greetingTimeout: 5_000,
+    socketTimeout: 10_000,
+  })
+  return {
+    send: (letter) =>
+      step('mail:send', async () => {
+        await transport.sendMail({
+          messageId: letter.messageId,
+          from: settings.from,
+          to: { address: letter.to.email, name: letter.to.name },
+          subject: letter.subject,
+          text: letter.text,
+          html: letter.html,
+          headers: { 'Auto-Submitted': 'auto-generated' },
+          disableFileAccess: true,
+          disableUrlAccess: true,
+        })
+      }),
+    isUp: async () => {
+      try {
+        await step('mail:verify', () => transport.verify())
+        return true
+      } catch {
+        return false
+      }
+    },
+  }
+}

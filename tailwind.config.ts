@@ -1,0 +1,78 @@
+import type { Config } from 'tailwindcss'
+
+const token = (name: string) => `var(--${name})`
+
+/** The only names pages may use: colours by role, sizes by use. Values live in app/styles/tokens.css. */
+const config: Config = {
+  content: [],
+  theme: {
+    screens: { sm: '640px', md: '800px', lg: '1025px', xl: '1180px', '2xl': '1440px' },
+    colors: {
+      transparent: 'transparent',
+      current: 'currentColor',
+      ground: token('ground'),
+      surface: token('surface'),
+      tint: token('tint'),
+      wash: token('wash'),
+      'lamp-wash': token('lamp-wash'),
+      rule: token('rule'),
+      grid: token('grid'),
+      edge: token('edge'),
+      ink: token('ink'),
+      muted: token('ink-muted'),
+      accent: token('accent'),
+      'accent-hover': token('accent-hover'),
+      'accent-pressed': token('accent-pressed'),
+      'on-accent': token('on-accent'),
+      lamp: token('lamp'),
+      'on-lamp': token('on-lamp'),
+      feasible: token('feasible'),
+      marginal: token('marginal'),
+      'not-feasible': token('not-feasible'),
+      now: token('now'),
+      target: token('target'),
+      moon: token('moon'),
+      'night-text': token('night-text'),
+      s1: token('s1'),
+      s2: token('s2'),
+      s3: token('s3'),
+      s4: token('s4'),
+      veil: token('veil'),
+      'veil-text': token('veil-text'),
+      'moon-dark': token('moon-dark'),
+      'moon-grey': token('moon-grey'),
+      'moon-bright': token('moon-bright'),
+      'toast-ground': token('toast-ground'),
+      'toast-ink': token('toast-ink'),
+      'toast-edge': token('toast-edge'),
+    },
+    fontFamily: {
+      sans: ['Work Sans Variable', 'Noto Sans', 'Noto Sans Math', 'sans-serif'],
+    },
+    fontSize: {
+      hero: ['3.5625rem', { lineHeight: '3.75rem', letterSpacing: '-0.032em', fontWeight: '600' }],
+      reference: ['5.1875rem', { lineHeight: '5.5rem', letterSpacing: '-0.02em', fontWeight: '600' }],
+      display: ['2.5rem', { lineHeight: '2.875rem', letterSpacing: '-0.024em', fontWeight: '600' }],
+      title: ['2.0625rem', { lineHeight: '2.5rem', letterSpacing: '-0.018em', fontWeight: '600' }],
+      figure: ['1.75rem', { lineHeight: '2rem', letterSpacing: '-0.018em', fontWeight: '600' }],
+      h2: ['1.4375rem', { lineHeight: '1.875rem', letterSpacing: '-0.01em', fontWeight: '600' }],
+      section: ['1.1875rem', { lineHeight: '1.75rem', fontWeight: '600' }],
+      lead: ['1.1875rem', { lineHeight: '1.875rem' }],
+      formula: ['1.0625rem', { lineHeight: '1.625rem' }],
+      body: ['1rem', { lineHeight: '1.5rem' }],
+      strip: ['0.9375rem', { lineHeight: '1.25rem' }],
+      table: ['0.875rem', { lineHeight: '1.25rem' }],
+      caption: ['0.8125rem', { lineHeight: '1.125rem' }],
+      tick: ['0.75rem', { lineHeight: '1rem' }],
+    },
+    borderRadius: { none: '0', cell: '3px', DEFAULT: '4px' },
+    boxShadow: { none: 'none', float: token('float-shadow') },
+    extend: {
+      maxWidth: { prose: '68ch', page: '81rem' },
+      transitionTimingFunction: { DEFAULT: 'ease-out' },
+      transitionDuration: { DEFAULT: '120ms', float: '180ms', move: '240ms' },
+    },
+  },
+}
+
+export default config
