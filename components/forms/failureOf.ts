@@ -1,0 +1,19 @@
+import type { FormFailure, RefusedResult } from './actionFormTypes'
+
+/** The connection failed before an answer came: what was typed is still there. */
+export const networkFailure: FormFailure = {
+  heading: 'The observatory did not answer',
+  message: 'Nothing you typed is lost. Check the connection, then send it again.',
+}
+
+/** Words for a refusal that no field is to blame for. */
+export function failureOf(result: RefusedResult): FormFailure {
+  if (result.kind === 'unexpected') {
+    return {
+      heading: 'Something went wrong on our side',
+      message: result.message,
+      reference: result.reference,
+    }
+  }
+  return { heading: 'That could not be done', message: result.message, reference: result.reference }
+}

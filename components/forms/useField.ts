@@ -1,0 +1,32 @@
+'use client'
+
+import { useFormContext, type RegisterOptions } from 'react-hook-form'
+import { useActionFormState } from './ActionFormContext'
+import { fieldId } from './fieldId'
+
+/** Everything a field needs from its form: ids that tie label, help and message together, and the current message. */
+export function useField(name: string, options?: RegisterOptions) {
+  const { id: formId, busy } = useActionFormState()
+  const { register, trigger, getFieldState, formState, control } = useFormContext()
+  const id = fieldId(formId, name)
+  const { error } = getFieldState(name, formState)
+
+  /** A message goes as soon as the value is right; a new one comes only on leaving the field. */
+  const recheck = () => {
+    if (getFieldState(name).error) void trigger(name)
+  }
+
+  return {
+    id,
+    name,
+    busy,
+    control,
+    error: error?.message,
+    helpId: `${id}-help`,
+    errorId: `${id}-error`,
+    recheck,
+    register: () => register(name, { ...options, onChange: recheck }),
+  }
+}
+
+export type FieldHandle = ReturnType<typeof useField>

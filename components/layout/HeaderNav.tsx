@@ -1,0 +1,50 @@
+'use client'
+
+import Link from 'next/link'
+import { usePathname } from 'next/navigation'
+import { classNames } from '@/components/ui/classNames'
+import { currentLink } from './currentLink'
+
+export interface HeaderLink {
+  href: string
+  label: string
+  /** Addresses that count as being here too, when they do not begin with `href`. */
+  also?: readonly string[]
+}
+
+export interface HeaderNavProps {
+  links: readonly HeaderLink[]
+  label?: string
+  /** Smaller, and without the underline of the place one is in. */
+  quiet?: boolean
+  className?: string
+}
+
+/** The links of the head; the current one is bold, with an ink line flush with the rule below. */
+export function HeaderNav({ links, label = 'Main', quiet = false, className }: HeaderNavProps) {
+  const pathname = usePathname()
+  if (links.length === 0) return null
+  const current = currentLink(links, pathname)
+  return (
+    <nav aria-label={label} className={className}>
+      <ul className="plain-list flex h-full items-stretch gap-7">
+        {links.map((link) => (
+          <li key={link.href} className="flex">
+            <Link
+              href={link.href}
+              aria-current={link === current ? 'page' : undefined}
+              className={classNames(
+                '-mb-px flex items-center whitespace-nowrap no-underline hover:text-ink',
+                quiet ? 'text-table' : 'text-strip',
+                link === current ? 'font-semibold text-ink' : 'text-muted',
+                link === current && !quiet && 'border-b-2 border-ink pt-0.5',
+              )}
+            >
+              {link.label}
+            </Link>
+          </li>
+        ))}
+      </ul>
+    </nav>
+  )
+}
