@@ -44,7 +44,14 @@ export function installedMatchesLock(folder) {
 }
 
 function npmCi() {
-  const args = ['ci', '--include=dev', '--no-audit', '--no-fund', '--fetch-retries=5', '--fetch-timeout=120000']
+  const args = [
+    'ci',
+    '--include=dev',
+    '--no-audit',
+    '--no-fund',
+    '--fetch-retries=5',
+    '--fetch-timeout=120000',
+  ]
   return new Promise((resolve) => {
     const child = spawn('npm', args, { cwd: root, stdio: ['ignore', 'pipe', 'pipe'] })
     let output = ''

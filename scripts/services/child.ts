@@ -80,7 +80,11 @@ function signalGroup(pid: number, signal: NodeJS.Signals): void {
 }
 
 /** Waits until a service answers; fails at once, with the end of its log, if it ends before that. */
-export async function untilReady(child: Child, answers: () => Promise<boolean>, seconds: number): Promise<void> {
+export async function untilReady(
+  child: Child,
+  answers: () => Promise<boolean>,
+  seconds: number,
+): Promise<void> {
   const deadline = Date.now() + seconds * 1000
   while (Date.now() < deadline) {
     if (child.hasEnded()) throw childProblem(child, 'ended while starting')

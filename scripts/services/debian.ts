@@ -76,12 +76,23 @@ export async function ensurePrograms(wanted: readonly Program[], logFile: string
 }
 
 async function aptGet(args: readonly string[], byHand: string): Promise<{ code: number; output: string }> {
-  const settings = ['-y', '-q', '--no-install-recommends', '-o', 'DPkg::Lock::Timeout=180', '-o', 'Acquire::Retries=3']
+  const settings = [
+    '-y',
+    '-q',
+    '--no-install-recommends',
+    '-o',
+    'DPkg::Lock::Timeout=180',
+    '-o',
+    'Acquire::Retries=3',
+  ]
   const command = ['env', 'DEBIAN_FRONTEND=noninteractive', 'apt-get', ...settings, ...args]
   const isRoot = process.getuid?.() === 0
   if (isRoot) return run(command)
   if (!findCommand(['sudo'])) {
-    throw new Problem('A package has to be installed, and this user is neither root nor has sudo.', `Ask for \`${byHand}\`, then run again.`)
+    throw new Problem(
+      'A package has to be installed, and this user is neither root nor has sudo.',
+      `Ask for \`${byHand}\`, then run again.`,
+    )
   }
   const canAsk = process.stdin.isTTY === true
   return run(canAsk ? ['sudo', ...command] : ['sudo', '-n', ...command], canAsk)

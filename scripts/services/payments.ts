@@ -10,7 +10,12 @@ export interface PaymentsPlan {
 }
 
 /** The payment mock: hosted page, API and signed webhooks, all on loopback. */
-export async function startPayments({ folder, port, webhookUrl, webhookSecret }: PaymentsPlan): Promise<Child> {
+export async function startPayments({
+  folder,
+  port,
+  webhookUrl,
+  webhookSecret,
+}: PaymentsPlan): Promise<Child> {
   const child = startChild({
     name: 'the payment mock',
     command: process.execPath,

@@ -64,7 +64,11 @@ export function noteRunning(
   children: readonly { pid: number; name: string }[],
   address?: string,
 ): void {
-  const describe = (pid: number, name: string): ProcessNote => ({ pid, name, startedAt: startTime(pid) ?? '' })
+  const describe = (pid: number, name: string): ProcessNote => ({
+    pid,
+    name,
+    startedAt: startTime(pid) ?? '',
+  })
   const note: RunningNote = {
     supervisor: describe(process.pid, 'supervisor'),
     children: children.map(({ pid, name }) => describe(pid, name)),

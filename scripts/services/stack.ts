@@ -1,6 +1,13 @@
 import { join } from 'node:path'
 import { ensurePrograms, programs } from './debian'
-import { appEnvironment, databases, ownerEnvironment, writeEnvironment, type Environment, type ServicePorts } from './environment'
+import {
+  appEnvironment,
+  databases,
+  ownerEnvironment,
+  writeEnvironment,
+  type Environment,
+  type ServicePorts,
+} from './environment'
 import { openDataFolder, type DataFolder } from './folders'
 import { startMail } from './mail'
 import { startMariadb } from './mariadb'

@@ -11,7 +11,10 @@ const wishes = [
 ] as const
 
 /** The usual ports, or the next free ones, saying which had to move. */
-export async function usualPorts(appPort = 3000, say: (sentence: string) => void = console.log): Promise<ServicePorts> {
+export async function usualPorts(
+  appPort = 3000,
+  say: (sentence: string) => void = console.log,
+): Promise<ServicePorts> {
   const { ports, moved } = await pickPorts(
     wishes.map(({ name, label, port }) => ({ name, label, port: name === 'app' ? appPort : port })),
   )

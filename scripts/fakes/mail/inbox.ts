@@ -21,11 +21,14 @@ function route(request: FakeRequest, letterbox: Letterbox, fault: MailFault): Fa
     return { status: 204 }
   }
   if (name === 'POST /faults') return setFault(request.body, fault)
-  return request.method === 'GET' ? oneLetter(request.path, letterbox) : json(405, { error: 'Not offered here.' })
+  return request.method === 'GET'
+    ? oneLetter(request.path, letterbox)
+    : json(405, { error: 'Not offered here.' })
 }
 
 function oneLetter(path: string, letterbox: Letterbox): FakeResponse {
-  const [, prefix, id = '', view = ''] = /^\/(api\/messages|messages)\/(\d+)(?:\/(html|raw))?$/.exec(path) ?? []
+  const [, prefix, id = '', view = ''] =
+    /^\/(api\/messages|messages)\/(\d+)(?:\/(html|raw))?$/.exec(path) ?? []
   const letter = letterbox.find(id)
   if (!prefix || !letter) return json(404, { error: 'There is no such letter.' })
   if (prefix === 'api/messages') return json(200, letter)

@@ -27,7 +27,9 @@ export class Letterbox {
   constructor(folder: string) {
     this.#folder = folder
     mkdirSync(folder, { recursive: true })
-    for (const file of readdirSync(folder).filter((name) => name.endsWith('.json')).sort()) {
+    for (const file of readdirSync(folder)
+      .filter((name) => name.endsWith('.json'))
+      .sort()) {
       this.#letters.push(JSON.parse(readFileSync(join(folder, file), 'utf8')))
       this.#next = Math.max(this.#next, Number.parseInt(file, 10) + 1)
     }
@@ -49,7 +51,7 @@ export class Letterbox {
       subject: parsed.subject ?? '',
       messageId: parsed.messageId ?? '',
       text: parsed.text ?? '',
-      html: parsed.html === false ? '' : parsed.html,
+      html: parsed.html || '',
       attachments: parsed.attachments.map(({ filename, contentType, size }) => ({
         filename: filename ?? 'unnamed',
         contentType,

@@ -8,6 +8,9 @@ import { json, type FakeResponse } from '../web/httpServer'
 export const faultKinds = ['500', '503', '429', 'reset', 'timeout', 'lost-answer', 'slow-answer'] as const
 export type FaultKind = (typeof faultKinds)[number]
 
+/** The work of one request; given an answer, it takes that in place of doing anything. */
+type Work = (instead?: FakeResponse) => Promise<FakeResponse>
+
 interface Armed {
   kind: FaultKind
   left: number
@@ -28,7 +31,7 @@ export class Faults {
     this.#armed = []
   }
 
-  async around(request: string, work: () => Promise<FakeResponse>): Promise<FakeResponse> {
+  async around(request: string, work: Work): Promise<FakeResponse> {
     const armed = this.#armed.find(({ path }) => request.includes(path))
     if (!armed) return work()
     armed.left -= 1
@@ -36,12 +39,19 @@ export class Faults {
     switch (armed.kind) {
       case '500':
       case '503':
-        return json(Number(armed.kind), {
-          error: { type: 'api_error', message: 'Something went wrong on our end (fault switched on).' },
-        })
+        // Part of the execution, so remembered under the idempotency key, unlike what happens to the line.
+        return work(
+          json(Number(armed.kind), {
+            error: { type: 'api_error', message: 'Something went wrong on our end (fault switched on).' },
+          }),
+        )
       case '429':
         return json(429, {
-          error: { type: 'invalid_request_error', code: 'rate_limit', message: 'Too many requests (fault switched on).' },
+          error: {
+            type: 'invalid_request_error',
+            code: 'rate_limit',
+            message: 'Too many requests (fault switched on).',
+          },
         })
       case 'reset':
         return { status: 0, cut: true }

@@ -19,7 +19,7 @@ const waits = [1, 2, 5, 10, 30, 60]
 export class Webhooks {
   readonly #store: PaymentStore
   readonly #target: WebhookTarget
-  readonly #active = new Set<string>()
+  readonly #active = new Map<string, Promise<void>>()
   readonly #timer: NodeJS.Timeout
   #on = true
 
@@ -54,7 +54,10 @@ export class Webhooks {
   }
 
   /** One POST of one event; the status received, or 0 when nobody answered. */
-  async send(event: ApiEvent, { shift = 0, secret = this.#target.secret }: SendOptions = {}): Promise<number> {
+  async send(
+    event: ApiEvent,
+    { shift = 0, secret = this.#target.secret }: SendOptions = {},
+  ): Promise<number> {
     const payload = JSON.stringify(event, null, 2)
     try {
       const response = await fetch(this.#target.url, {
@@ -77,18 +80,19 @@ export class Webhooks {
 
   async #deliverDue(): Promise<void> {
     if (!this.#on) return
-    const due = this.#store.state.deliveries.filter(
-      ({ eventId, nextAt }) => nextAt <= Date.now() && !this.#active.has(eventId),
-    )
-    await Promise.all(due.map((delivery) => this.#deliver(delivery)))
+    const due = this.#store.state.deliveries.filter(({ nextAt }) => nextAt <= Date.now())
+    for (const delivery of due) {
+      if (this.#active.has(delivery.eventId)) continue
+      const attempt = this.#deliver(delivery).finally(() => this.#active.delete(delivery.eventId))
+      this.#active.set(delivery.eventId, attempt)
+    }
+    await Promise.all(due.map(({ eventId }) => this.#active.get(eventId)))
   }
 
   async #deliver(delivery: Delivery): Promise<void> {
     const { state } = this.#store
     const event = state.events.find(({ id }) => id === delivery.eventId)
-    this.#active.add(delivery.eventId)
     const status = event ? await this.send(event) : 200
-    this.#active.delete(delivery.eventId)
     delivery.attempts += 1
     if (status >= 200 && status < 300) {
       if (event) event.pending_webhooks = 0

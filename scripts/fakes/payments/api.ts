@@ -13,7 +13,10 @@ export interface Api {
   store: PaymentStore
   pageBase: string
   /** Makes events of what happened and has them delivered. */
-  announce: (happenings: readonly (Happening | { type: string; object: Refund })[], idempotencyKey: string | null) => void
+  announce: (
+    happenings: readonly (Happening | { type: string; object: Refund })[],
+    idempotencyKey: string | null,
+  ) => void
 }
 
 type Endpoint = (api: Api, form: FormTree, id: string, request: FakeRequest) => unknown
@@ -24,13 +27,26 @@ const endpoints: readonly [method: string, path: RegExp, endpoint: Endpoint][] =
   ['GET', /^\/v1\/checkout\/sessions\/([^/]+)$/, (api, _form, id) => findSession(api.store, id).session],
   ['GET', /^\/v1\/checkout\/sessions\/([^/]+)\/line_items$/, listLineItems],
   ['POST', /^\/v1\/checkout\/sessions\/([^/]+)\/expire$/, expireSession],
-  ['GET', /^\/v1\/payment_intents\/([^/]+)$/, (api, _f, id) => found(api.store.state.intents[id], 'payment_intent', id)],
+  [
+    'GET',
+    /^\/v1\/payment_intents\/([^/]+)$/,
+    (api, _f, id) => found(api.store.state.intents[id], 'payment_intent', id),
+  ],
   ['GET', /^\/v1\/charges\/([^/]+)$/, (api, _form, id) => found(api.store.state.charges[id], 'charge', id)],
   ['POST', /^\/v1\/refunds$/, refund],
   ['GET', /^\/v1\/refunds$/, listRefunds],
   ['GET', /^\/v1\/refunds\/([^/]+)$/, (api, _form, id) => found(api.store.state.refunds[id], 'refund', id)],
   ['GET', /^\/v1\/events$/, listEvents],
-  ['GET', /^\/v1\/events\/([^/]+)$/, (api, _f, id) => found(api.store.state.events.find((e) => e.id === id), 'event', id)],
+  [
+    'GET',
+    /^\/v1\/events\/([^/]+)$/,
+    (api, _f, id) =>
+      found(
+        api.store.state.events.find((e) => e.id === id),
+        'event',
+        id,
+      ),
+  ],
 ]
 
 /** Answers one call of the API; every expected failure is an ApiError. */
@@ -43,7 +59,11 @@ export function callApi(api: Api, request: FakeRequest): FakeResponse {
     const result = endpoint(api, form, match[1] ?? '', request)
     return json(200, expanded(api.store, result, listOf(form, 'expand').map(String)))
   }
-  throw new ApiError(404, 'invalid_request_error', `Unrecognized request URL (${request.method}: ${request.path}).`)
+  throw new ApiError(
+    404,
+    'invalid_request_error',
+    `Unrecognized request URL (${request.method}: ${request.path}).`,
+  )
 }
 
 function checkKey(request: FakeRequest): void {
@@ -76,7 +96,9 @@ function listLineItems({ store }: Api, _query: FormTree, id: string): unknown {
 function expireSession(api: Api, _form: FormTree, id: string, request: FakeRequest): unknown {
   const { session } = findSession(api.store, id)
   if (session.status !== 'open') {
-    throw invalid(`Only Checkout Sessions with a status in ["open"] can be expired. This one is ${session.status}.`)
+    throw invalid(
+      `Only Checkout Sessions with a status in ["open"] can be expired. This one is ${session.status}.`,
+    )
   }
   Object.assign(session, { status: 'expired', url: null })
   api.store.changed()
@@ -92,7 +114,9 @@ function refund(api: Api, form: FormTree, _id: string, request: FakeRequest): un
 
 function listRefunds({ store }: Api, query: FormTree): unknown {
   const intent = textOf(query, 'payment_intent')
-  const refunds = Object.values(store.state.refunds).filter((each) => !intent || each.payment_intent === intent)
+  const refunds = Object.values(store.state.refunds).filter(
+    (each) => !intent || each.payment_intent === intent,
+  )
   return listPage(refunds, query, '/v1/refunds')
 }
 

@@ -2,7 +2,14 @@ import type { Charge, PaymentError, PaymentIntent, StoredSession } from './objec
 import { newId, unixNow, type PaymentStore } from './store'
 
 /** What the person at the hosted page may choose to happen. */
-export const outcomes = ['pays', 'declined', 'insufficient-funds', 'authentication', 'approve', 'refuse'] as const
+export const outcomes = [
+  'pays',
+  'declined',
+  'insufficient-funds',
+  'authentication',
+  'approve',
+  'refuse',
+] as const
 export type Outcome = (typeof outcomes)[number]
 
 export interface Happening {
@@ -121,7 +128,11 @@ function fail(
   error: PaymentError,
   happenings: Happening[],
 ): void {
-  Object.assign(intent, { status: 'requires_payment_method', last_payment_error: error, payment_method: null })
+  Object.assign(intent, {
+    status: 'requires_payment_method',
+    last_payment_error: error,
+    payment_method: null,
+  })
   if (error.code === 'card_declined') {
     const charge = makeCharge(store, intent, method, error)
     intent.latest_charge = charge.id
@@ -130,7 +141,12 @@ function fail(
   happenings.push({ type: 'payment_intent.payment_failed', object: intent })
 }
 
-function makeCharge(store: PaymentStore, intent: PaymentIntent, method: string, error: PaymentError | null): Charge {
+function makeCharge(
+  store: PaymentStore,
+  intent: PaymentIntent,
+  method: string,
+  error: PaymentError | null,
+): Charge {
   const paid = error === null
   const charge: Charge = {
     id: newId('ch'),
@@ -151,7 +167,10 @@ function makeCharge(store: PaymentStore, intent: PaymentIntent, method: string, 
     paid,
     payment_intent: intent.id,
     payment_method: method,
-    payment_method_details: { type: 'card', card: { brand: 'visa', last4: '4242', exp_month: 12, exp_year: 2040 } },
+    payment_method_details: {
+      type: 'card',
+      card: { brand: 'visa', last4: '4242', exp_month: 12, exp_year: 2040 },
+    },
     receipt_url: null,
     refunded: false,
     status: paid ? 'succeeded' : 'failed',

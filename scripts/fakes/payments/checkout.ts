@@ -9,17 +9,22 @@ const day = 24 * 60 * 60
 /** POST /v1/checkout/sessions: payment mode, hosted page, prices given in the request. */
 export function createSession(store: PaymentStore, form: FormTree, pageBase: string): CheckoutSession {
   const mode = textOf(form, 'mode')
-  if (mode !== 'payment') throw invalid('This mock knows only mode=payment.', 'mode', 'parameter_invalid_string')
+  if (mode !== 'payment')
+    throw invalid('This mock knows only mode=payment.', 'mode', 'parameter_invalid_string')
   const uiMode = textOf(form, 'ui_mode')
-  if (uiMode !== null && uiMode !== 'hosted_page') throw invalid('This mock knows only ui_mode=hosted_page.', 'ui_mode')
+  if (uiMode !== null && uiMode !== 'hosted_page')
+    throw invalid('This mock knows only ui_mode=hosted_page.', 'ui_mode')
   const lines = listOf(form, 'line_items')
-  if (lines.length === 0) throw invalid('Missing required param: line_items.', 'line_items', 'parameter_missing')
+  if (lines.length === 0)
+    throw invalid('Missing required param: line_items.', 'line_items', 'parameter_missing')
   const lineItems = lines.map(readLine)
   const currencies = new Set(lineItems.map((line) => line.currency))
   const [currency] = currencies
-  if (!currency || currencies.size > 1) throw invalid('All line items must have the same currency.', 'line_items')
+  if (!currency || currencies.size > 1)
+    throw invalid('All line items must have the same currency.', 'line_items')
   const total = lineItems.reduce((sum, line) => sum + line.amount_total, 0)
-  if (total < 50) throw invalid('The amount is below the smallest that can be charged.', 'line_items', 'amount_too_small')
+  if (total < 50)
+    throw invalid('The amount is below the smallest that can be charged.', 'line_items', 'amount_too_small')
 
   const now = unixNow()
   const id = newId('cs_test')
@@ -85,10 +90,16 @@ function readLine(value: FormValue, index: number): LineItem {
   const unitAmount = integerOf(priceData, 'unit_amount')
   const currency = textOf(priceData, 'currency')?.toLowerCase()
   const name = textOf(treeOf(priceData, 'product_data'), 'name')
-  if (!currency || !/^[a-z]{3}$/.test(currency)) throw invalid('Invalid currency', `${at}[price_data][currency]`)
+  if (!currency || !/^[a-z]{3}$/.test(currency))
+    throw invalid('Invalid currency', `${at}[price_data][currency]`)
   if (unitAmount === null || unitAmount < 0) throw invalid('Invalid amount', `${at}[price_data][unit_amount]`)
   if (quantity < 1) throw invalid('Invalid quantity', `${at}[quantity]`)
-  if (!name) throw invalid('Missing required param: name', `${at}[price_data][product_data][name]`, 'parameter_missing')
+  if (!name)
+    throw invalid(
+      'Missing required param: name',
+      `${at}[price_data][product_data][name]`,
+      'parameter_missing',
+    )
   const amount = unitAmount * quantity
   return {
     id: newId('li'),

@@ -35,9 +35,11 @@ export async function controlMock(
     if (webhooks.isOn) await webhooks.deliverNow()
     return json(200, { webhooks: webhooks.isOn })
   }
-  const [, eventId] = (request.method === 'POST' && /^\/mock\/events\/([^/]+)\/resend$/.exec(request.path)) || []
+  const [, eventId] =
+    (request.method === 'POST' && /^\/mock\/events\/([^/]+)\/resend$/.exec(request.path)) || []
   if (eventId !== undefined) return resend(eventId, wish, store, webhooks)
-  const [, sessionId] = (request.method === 'POST' && /^\/mock\/sessions\/([^/]+)\/run-out$/.exec(request.path)) || []
+  const [, sessionId] =
+    (request.method === 'POST' && /^\/mock\/sessions\/([^/]+)\/run-out$/.exec(request.path)) || []
   if (sessionId !== undefined) return runOut(sessionId, store)
   return json(404, { error: 'There is no such switch.' })
 }
@@ -50,7 +52,12 @@ function armFault({ next, times, path, seconds }: Wish, faults: Faults): FakeRes
 }
 
 /** The same event again, `count` times one after another; tells the status of each. */
-async function resend(id: string, wish: Wish, store: PaymentStore, webhooks: Webhooks): Promise<FakeResponse> {
+async function resend(
+  id: string,
+  wish: Wish,
+  store: PaymentStore,
+  webhooks: Webhooks,
+): Promise<FakeResponse> {
   const event = store.state.events.find((each) => each.id === id)
   if (!event) throw missing('event', id)
   const statuses: number[] = []

@@ -33,6 +33,11 @@ function lineItems(store: PaymentStore, session: { [key: string]: Json }): Json 
   const id = session.id
   const stored = typeof id === 'string' ? store.state.sessions[id] : undefined
   if (!stored) return undefined
-  const list = { object: 'list', data: stored.lineItems, has_more: false, url: `/v1/checkout/sessions/${id}/line_items` }
+  const list = {
+    object: 'list',
+    data: stored.lineItems,
+    has_more: false,
+    url: `/v1/checkout/sessions/${id}/line_items`,
+  }
   return JSON.parse(JSON.stringify(list))
 }

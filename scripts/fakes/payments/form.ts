@@ -10,7 +10,8 @@ export function parseForm(text: string): FormTree {
   const root: FormTree = Object.create(null)
   for (const [name, value] of new URLSearchParams(text)) {
     const path = [...name.matchAll(/([^[\]]+)|\[\]/g)].map((match) => match[1] ?? '')
-    if (path.some((key) => key === '__proto__' || key === 'constructor')) throw invalid('That name is not allowed.', name)
+    if (path.some((key) => key === '__proto__' || key === 'constructor'))
+      throw invalid('That name is not allowed.', name)
     insert(root, path, value)
   }
   return withArrays(root)
@@ -40,7 +41,8 @@ function withArrays(tree: FormTree): FormTree {
     }
     const inner = withArrays(value)
     const keys = Object.keys(inner)
-    result[key] = keys.length > 0 && keys.every((name, index) => name === String(index)) ? Object.values(inner) : inner
+    result[key] =
+      keys.length > 0 && keys.every((name, index) => name === String(index)) ? Object.values(inner) : inner
   }
   return result
 }

@@ -15,7 +15,12 @@ export function listPage<Item extends Listed>(items: readonly Item[], query: For
   const before = textOf(query, 'ending_before')
   if (before !== null) {
     const end = positionOf(newestFirst, before, 'ending_before')
-    return { object: 'list', data: newestFirst.slice(Math.max(0, end - limit), end), has_more: end > limit, url }
+    return {
+      object: 'list',
+      data: newestFirst.slice(Math.max(0, end - limit), end),
+      has_more: end > limit,
+      url,
+    }
   }
   const start = after === null ? 0 : positionOf(newestFirst, after, 'starting_after') + 1
   const data = newestFirst.slice(start, start + limit)
@@ -46,5 +51,6 @@ export function typeFilter(query: FormTree): (type: string) => boolean {
   const single = textOf(query, 'type')
   const wanted = single === null ? listOf(query, 'types').map(String) : [single]
   if (wanted.length === 0) return () => true
-  return (type) => wanted.some((name) => (name.endsWith('.*') ? type.startsWith(name.slice(0, -1)) : type === name))
+  return (type) =>
+    wanted.some((name) => (name.endsWith('.*') ? type.startsWith(name.slice(0, -1)) : type === name))
 }

@@ -39,7 +39,8 @@ export class PaymentMock {
     this.#api = {
       store: this.#store,
       pageBase: `http://127.0.0.1:${port}`,
-      announce: (happenings, key) => happenings.forEach(({ type, object }) => this.#record(type, object, key)),
+      announce: (happenings, key) =>
+        happenings.forEach(({ type, object }) => this.#record(type, object, key)),
     }
     this.#sweep = setInterval(() => this.#expireOverdue(), 1000)
     this.#sweep.unref()
@@ -77,9 +78,8 @@ export class PaymentMock {
 
   async #callApi(request: FakeRequest): Promise<FakeResponse> {
     const requestId = newId('req')
-    const call = async () => callApi(this.#api, request)
-    const response = await this.#idempotency.once(request, () =>
-      this.#faults.around(`${request.method} ${request.path}`, call),
+    const response = await this.#faults.around(`${request.method} ${request.path}`, (instead) =>
+      this.#idempotency.once(request, async () => instead ?? callApi(this.#api, request)),
     )
     return { ...response, headers: { ...response.headers, 'request-id': requestId } }
   }

@@ -109,7 +109,10 @@ export interface Charge {
   paid: boolean
   payment_intent: string
   payment_method: string
-  payment_method_details: { type: 'card'; card: { brand: 'visa'; last4: string; exp_month: number; exp_year: number } }
+  payment_method_details: {
+    type: 'card'
+    card: { brand: 'visa'; last4: string; exp_month: number; exp_year: number }
+  }
   receipt_url: null
   refunded: boolean
   status: 'succeeded' | 'failed'

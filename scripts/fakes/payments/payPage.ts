@@ -68,7 +68,18 @@ export function successUrl(session: StoredSession['session']): string {
   return session.success_url.replaceAll('{CHECKOUT_SESSION_ID}', session.id)
 }
 
-const currenciesWithoutMinorUnits = new Set(['jpy', 'krw', 'clp', 'vnd', 'isk', 'ugx', 'xaf', 'xof', 'pyg', 'rwf'])
+const currenciesWithoutMinorUnits = new Set([
+  'jpy',
+  'krw',
+  'clp',
+  'vnd',
+  'isk',
+  'ugx',
+  'xaf',
+  'xof',
+  'pyg',
+  'rwf',
+])
 
 function money(amount: number, currency: string): string {
   const digits = currenciesWithoutMinorUnits.has(currency) ? 0 : 2

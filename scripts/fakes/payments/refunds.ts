@@ -24,7 +24,8 @@ export function createRefund(store: PaymentStore, form: FormTree): RefundHappeni
     throw invalid(`Refund amount (${amount}) is greater than unrefunded amount on charge (${left})`, 'amount')
   }
   const reason = textOf(form, 'reason')
-  if (reason !== null && !reasons.includes(reason)) throw invalid(`reason is one of ${reasons.join(', ')}.`, 'reason')
+  if (reason !== null && !reasons.includes(reason))
+    throw invalid(`reason is one of ${reasons.join(', ')}.`, 'reason')
   const refund: Refund = {
     id: newId('re'),
     object: 'refund',
@@ -58,7 +59,9 @@ function chargeOf(store: PaymentStore, form: FormTree): Charge {
   if (intentId !== null && !intent) throw missing('payment_intent', intentId)
   const chargeId = textOf(form, 'charge') ?? intent?.latest_charge ?? null
   if (chargeId === null) {
-    throw invalid('One of the following params should be provided for this request: payment_intent or charge.')
+    throw invalid(
+      'One of the following params should be provided for this request: payment_intent or charge.',
+    )
   }
   const charge = store.state.charges[chargeId]
   if (!charge) throw missing('charge', chargeId)

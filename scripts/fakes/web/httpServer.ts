@@ -45,7 +45,8 @@ export function listenOnLoopback(port: number, handle: Handler): Promise<Server>
 
 async function answer(incoming: IncomingMessage, handle: Handler): Promise<FakeResponse> {
   const host = (incoming.headers.host ?? '').replace(/:\d+$/, '')
-  if (host !== '127.0.0.1' && host !== 'localhost') return json(421, { error: 'This service answers on loopback only.' })
+  if (host !== '127.0.0.1' && host !== 'localhost')
+    return json(421, { error: 'This service answers on loopback only.' })
   const url = new URL(incoming.url ?? '/', 'http://127.0.0.1')
   const chunks: Buffer[] = []
   let size = 0
