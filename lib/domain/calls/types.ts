@@ -1,0 +1,49 @@
+/** Where a call stands: planned, open and closed by the clock, the rest by acts of the office and the chair. */
+export type CallPhase = 'planned' | 'open' | 'closed' | 'review' | 'ranking' | 'decided' | 'archived'
+
+export interface CallDates {
+  opensAt: Date
+  closesAt: Date
+  graceUntil: Date
+  assessmentsDueAt: Date
+  reviewsDueAt: Date
+  panelMeetsAt: Date
+  lettersAt: Date
+}
+
+export interface CallKind {
+  id: number
+  kind: string
+  title: string
+  closesAt: Date | null
+  pageLimit: number
+  abstractLimit: number
+  maxSeconds: number | null
+  feeMinor: number
+  panelId: number
+}
+
+export interface CallCriterion {
+  id: number
+  position: number
+  title: string
+  prompt: string
+  weight: number
+  criterionVersion: number
+}
+
+export interface Call extends CallDates {
+  id: number
+  number: number
+  slug: string
+  title: string
+  summary: string
+  siteId: number
+  stage: 'planned' | 'published' | 'review' | 'ranking' | 'decided' | 'archived'
+  /** Evening dates, inclusive. */
+  seasonFrom: string
+  seasonTo: string
+  /** Null when the call has no fee: then nothing on screen speaks of one. */
+  currency: string | null
+  version: number
+}

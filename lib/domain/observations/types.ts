@@ -1,0 +1,65 @@
+export type Verdict = 'feasible' | 'marginal' | 'not-feasible'
+
+export interface FeasibilityCheck {
+  id: string
+  name: string
+  measured: string
+  feasibleTo: string
+  failsAt: string
+  verdict: Verdict
+  why: string
+  fix: string | null
+}
+
+/** Numbers of one target under the chosen cosmology; null where the target has no redshift or no position. */
+export interface TargetComputation {
+  targetId: number
+  luminosityMpc: number | null
+  angularDiameterMpc: number | null
+  comovingMpc: number | null
+  kpcPerArcsec: number | null
+  distanceModulusMag: number | null
+  lookbackGyr: number | null
+  ageGyr: number | null
+  /** Dark hours in the season above the airmass asked for, and by month ('2027-07'). */
+  visibleHours: number | null
+  visibleHoursByMonth: { month: string; hours: number }[]
+  /** Hours a night, in the order of the season's evenings. */
+  visibleHoursByNight: number[]
+  /** Why something could not be computed, in a sentence. */
+  refusal: string | null
+  /** The same under the comparison cosmology. */
+  comparison: { luminosityMpc: number; kpcPerArcsec: number; lookbackGyr: number } | null
+}
+
+export interface ObservationComputation {
+  observationId: number
+  targetId: number
+  neededSeconds: number | null
+  openShutterSeconds: number | null
+  overheadSeconds: number | null
+  subExposures: number | null
+  subExposureSeconds: number | null
+  snrReached: number | null
+  regime: string | null
+  observedFeatureA: number | null
+  checks: FeasibilityCheck[]
+  verdict: Verdict
+  refusal: string | null
+}
+
+/** Everything computed for a proposal: same contents and engine, same bytes. */
+export interface ProposalComputation {
+  engineVersion: string
+  cosmologyName: string
+  recordVersions: Record<string, number>
+  targets: TargetComputation[]
+  observations: ObservationComputation[]
+  askedSeconds: number
+  neededSeconds: number
+  /** Asked hours over the mean dark hours of a night. */
+  askedNights: number
+  checksClear: number
+  checksTotal: number
+  verdict: Verdict | null
+}

@@ -1,0 +1,3 @@
+export { parseDeclination } from './parseDeclination'
+export { parseRightAscension } from './parseRightAscension'
+export type { ParsedAngle } from './sexagesimal'

@@ -1,0 +1,19 @@
+/** Sun, Moon, targets and nights at a site. */
+export { airmassKastenYoung1989, airmassYoung1994, altitudeOfAirmassDeg } from './airmass'
+export { createAlmanac, type Almanac } from './almanac'
+export { parseDeclination, parseRightAscension, type ParsedAngle } from './coordinates'
+export {
+  localSiderealHours,
+  moonAltitudeDeg,
+  moonIlluminationAt,
+  moonSeparationDeg,
+  sunAltitudeDeg,
+} from './instants'
+export { moonlitSkyV, type MoonlitSky } from './moonlight'
+export { moonPhases, type MoonPhase } from './moonPhases'
+export { eveningDateAt, nightAt } from './nightAt'
+export { positionsAt, type InstantPositions, type PositionsInput, type TargetPosition } from './positionsAt'
+export { seasonGrid, type SeasonGrid, type SeasonNight } from './seasonGrid'
+export type { MoonLimits, Night, Site, SkyTarget, Twilight } from './types'
+export { skyEngineVersion } from './version'
+export { visibility, type TargetVisibility, type Visibility, type VisibilityInput } from './visibility'
