@@ -1,0 +1,73 @@
+'use client'
+
+import type { RowData } from '@tanstack/react-table'
+import type { ReactNode } from 'react'
+import { TableBody } from './TableBody'
+import { TableFrame } from './TableFrame'
+import { TableHead } from './TableHead'
+import { TableTools } from './TableTools'
+import { TableTotals } from './TableTotals'
+import type { TableChip, TableColumn } from './tableColumn'
+import { useRows } from './useRows'
+import { useTableState } from './useTableState'
+
+export type RowTone = 'attention' | 'feasible' | 'marginal' | 'not-feasible'
+
+export interface DataTableProps<Row> {
+  /** Names the table for screen readers; also shown where no title stands above. */
+  caption: string
+  columns: readonly TableColumn<Row>[]
+  rows: readonly Row[]
+  rowId: (row: Row) => string
+  /** What stands instead of an empty table: an `EmptyState`. */
+  empty?: ReactNode
+  /** The words in the search box, `Reference or name`; without them there is no box. */
+  find?: string
+  chips?: readonly TableChip<Row>[]
+  /** The name of the file, without its ending; without it there is no CSV. */
+  csv?: string
+  /** The row that is open beside or below. */
+  selectedId?: string | null
+  /** Rows that want attention: a wash, and a bar in the verdict's colour. */
+  tone?: (row: Row) => RowTone | null
+  /** A line of its own under a row. */
+  detail?: (row: Row) => ReactNode
+  /** Tells the addresses of several tables on a page apart. */
+  urlPrefix?: string
+  /** On phones: cards (the default over five columns), or sideways scrolling with the first column held. */
+  phone?: 'cards' | 'scroll'
+  /** More at the right of the tools: links, a small button. */
+  actions?: ReactNode
+}
+
+/** Every table of the product: sorts, searches, filters, exports what is shown, keeps its state in the address. */
+export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
+  const { caption, columns, rows, rowId, empty, find, chips = [], csv, urlPrefix = '', actions } = props
+  const [state, setState] = useTableState(urlPrefix)
+  const shown = useRows(rows, columns, chips, state)
+  const phone = props.phone ?? (columns.length > 5 ? 'cards' : 'scroll')
+  const change = (next: Partial<typeof state>) => void setState(next)
+
+  if (rows.length === 0 && empty) return <>{empty}</>
+  return (
+    <div>
+      <TableTools
+        find={find}
+        chips={chips}
+        columns={columns}
+        rows={rows}
+        shown={shown}
+        csv={csv}
+        state={state}
+        onChange={change}
+        phoneSort={phone === 'cards'}
+        actions={actions}
+      />
+      <TableFrame caption={caption} phone={phone}>
+        <TableHead columns={columns} sort={state.sort} onSort={(sort) => change({ sort })} />
+        <TableBody {...props} rows={shown} rowId={rowId} onShowAll={() => change({ find: '', show: '' })} />
+        <TableTotals columns={columns} rows={shown} />
+      </TableFrame>
+    </div>
+  )
+}

@@ -1,0 +1,34 @@
+import type { ReactNode } from 'react'
+import type { CsvValue } from '@/lib/format'
+
+/** What a cell is sorted, searched and exported by. */
+export type CellValue = string | number | boolean | Date | null | undefined
+
+/** One column of a `DataTable`. Keep the list at module scope, so that it never changes between renders. */
+export interface TableColumn<Row> {
+  id: string
+  /** The head's words; they are the sort button, too. */
+  head: string
+  /** The second line of the head: a unit, or what the column holds. */
+  unit?: string
+  /** The plain value behind the cell. */
+  value: (row: Row) => CellValue
+  /** How it looks; without it the value is shown as text. */
+  cell?: (row: Row) => ReactNode
+  /** Numbers stand right, with decimals alike in a column. */
+  align?: 'left' | 'right'
+  /** False where an order would mean nothing. */
+  sortable?: boolean
+  /** Tinted: computed, not typed. */
+  computed?: boolean
+  /** The cell of the closing row, for the rows shown. */
+  total?: (rows: readonly Row[]) => ReactNode
+  /** What the file holds; without it the value. */
+  csv?: (row: Row) => CsvValue
+}
+
+export interface TableChip<Row> {
+  id: string
+  label: string
+  matches: (row: Row) => boolean
+}
