@@ -1,0 +1,133 @@
+import type { ModeRecord, SiteRecord } from '@/lib/domain/facility/types'
+import type { Database } from '../client.ts'
+import type {
+  InstrumentModesRow,
+  InstrumentsRow,
+  ModeRecordsRow,
+  SiteRecordsRow,
+  TelescopeRecordsRow,
+  TelescopesRow,
+} from '../tables.ts'
+
+const parsed = <T>(json: string): T => JSON.parse(json) as T
+
+function siteOf(row: SiteRecordsRow & { name: string }): SiteRecord {
+  return {
+    siteId: row.site_id,
+    name: row.name,
+    recordVersion: row.record_version,
+    latitudeDeg: row.latitude_deg,
+    longitudeDeg: row.longitude_deg,
+    elevationM: row.elevation_m,
+    timeZone: row.time_zone,
+    utcOffsetHours: row.utc_offset_hours,
+    lowestAltitudeDeg: row.lowest_altitude_deg,
+    extinctionMagPerAirmass: parsed(row.extinction_mag_per_airmass),
+    darkSkyMagArcsec2: parsed(row.dark_sky_mag_arcsec2),
+    seeingArcsec: parsed(row.seeing_arcsec),
+  }
+}
+
+/** The site's record in force on a date: the highest version whose validity has begun. */
+export async function siteRecordAt(db: Database, siteId: number, onDate: string): Promise<SiteRecord> {
+  const row = await db('site_records as r')
+    .join('sites as s', 's.id', 'r.site_id')
+    .where('r.site_id', siteId)
+    .andWhere('r.valid_from', '<=', onDate)
+    .orderBy('r.record_version', 'desc')
+    .first<(SiteRecordsRow & { name: string }) | undefined>('r.*', 's.name')
+  if (!row) throw new Error(`site ${siteId} has no record for ${onDate}`)
+  return siteOf(row)
+}
+
+type ModeRow = ModeRecordsRow & {
+  mode_slug: InstrumentModesRow['slug']
+  mode_name: InstrumentModesRow['name']
+  instrument_id: InstrumentsRow['id']
+  instrument_slug: string
+  instrument_name: string
+  telescope_id: TelescopesRow['id']
+  telescope_slug: string
+  telescope_name: string
+}
+
+function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
+  return {
+    modeId: row.mode_id,
+    slug: row.mode_slug,
+    name: row.mode_name,
+    recordVersion: row.record_version,
+    instrument: { id: row.instrument_id, slug: row.instrument_slug, name: row.instrument_name },
+    telescope: {
+      id: row.telescope_id,
+      slug: row.telescope_slug,
+      name: row.telescope_name,
+      recordVersion: telescope.record_version,
+      apertureM: telescope.aperture_m,
+      collectingAreaM2: telescope.collecting_area_m2,
+    },
+    kind: row.kind,
+    wavelengthMinA: row.wavelength_min_a,
+    wavelengthMaxA: row.wavelength_max_a,
+    medium: row.medium,
+    band: row.band,
+    pixelScaleArcsec: row.pixel_scale_arcsec,
+    dispersionAPerPixel: row.dispersion_a_per_pixel,
+    slitWidthArcsec: row.slit_width_arcsec,
+    resolvingPower: row.resolving_power,
+    readNoiseE: row.read_noise_e,
+    darkEPerS: row.dark_e_per_s,
+    fullWellE: row.full_well_e,
+    gainEPerAdu: row.gain_e_per_adu,
+    minSubExposureS: row.min_sub_exposure_s,
+    maxSubExposureS: row.max_sub_exposure_s,
+    systematicFloor: row.systematic_floor,
+    twilightLimitDeg: row.twilight_limit_deg,
+    throughput: parsed(row.throughput),
+    throughputIncludes: parsed(row.throughput_includes),
+    overheads: parsed(row.overheads),
+  }
+}
+
+/** The last row of each key, rows being ordered by version. */
+const latestBy = <Row>(rows: readonly Row[], key: (row: Row) => number): Map<number, Row> =>
+  new Map(rows.map((row) => [key(row), row]))
+
+/** Modes on offer in a call as their records stood on a date, in order of telescope, instrument and mode. */
+export async function modeRecordsOnOffer(
+  db: Database,
+  callId: number,
+  onDate: string,
+): Promise<ModeRecord[]> {
+  const rows = await db('call_modes as c')
+    .join('instrument_modes as m', 'm.id', 'c.mode_id')
+    .join('instruments as i', 'i.id', 'm.instrument_id')
+    .join('telescopes as t', 't.id', 'i.telescope_id')
+    .join('mode_records as r', 'r.mode_id', 'm.id')
+    .where('c.call_id', callId)
+    .andWhere('r.valid_from', '<=', onDate)
+    .orderBy(['t.id', 'i.id', 'm.id', 'r.record_version'])
+    .select<ModeRow[]>('r.*', {
+      mode_slug: 'm.slug',
+      mode_name: 'm.name',
+      instrument_id: 'i.id',
+      instrument_slug: 'i.slug',
+      instrument_name: 'i.name',
+      telescope_id: 't.id',
+      telescope_slug: 't.slug',
+      telescope_name: 't.name',
+    })
+  const latest = [...latestBy(rows, (row) => row.mode_id).values()]
+  const telescopes = latestBy(
+    await db('telescope_records')
+      .whereIn('telescope_id', [...new Set(latest.map((row) => row.telescope_id))])
+      .andWhere('valid_from', '<=', onDate)
+      .orderBy('record_version'),
+    (row) => row.telescope_id,
+  )
+  return latest.map((row) => {
+    const telescope = telescopes.get(row.telescope_id)
+    if (!telescope) throw new Error(`telescope ${row.telescope_id} has no record for ${onDate}`)
+    return modeOf(row, telescope)
+  })
+}
