@@ -1,0 +1,138 @@
+import { nightAt } from '../../lib/science/sky/index.ts'
+import type { Database } from '../client.ts'
+import { callDates, type SeedCallDates } from './callDates.ts'
+import { modes, site } from './facilityData.ts'
+
+const criteria = [
+  ['Worth of the question', 'Would the answer change what others do next?', 4],
+  ['Will this answer it', 'Sample, method, and what could go wrong.', 3],
+  ['Good use of this telescope', 'Hours, instrument, Moon; see the checks.', 2],
+  ['Afterwards', 'Reduction, release and follow-up.', 1],
+] as const
+
+const kinds = [
+  {
+    kind: 'regular',
+    title: 'Regular proposal',
+    page_limit: 4,
+    abstract_limit: 1500,
+    max_seconds: 120 * 3600,
+    fee_minor: 12_000,
+  },
+  {
+    kind: 'large',
+    title: 'Large programme',
+    page_limit: 8,
+    abstract_limit: 2000,
+    max_seconds: 250 * 3600,
+    fee_minor: 24_000,
+  },
+  {
+    kind: 'thesis',
+    title: 'Thesis proposal',
+    page_limit: 4,
+    abstract_limit: 1500,
+    max_seconds: 80 * 3600,
+    fee_minor: 0,
+  },
+] as const
+
+export interface SeededCall {
+  id: number
+  number: number
+  panelId: number
+  kindIds: Map<string, number>
+  dates: SeedCallDates
+}
+
+export interface Facility {
+  siteId: number
+  telescopeIds: Map<string, number>
+  instrumentIds: Map<string, number>
+  modeIds: Map<string, number>
+}
+
+/** Evenings from one date to another, both inclusive. */
+function evenings(from: string, to: string): string[] {
+  const list: string[] = []
+  for (let t = Date.parse(from); t <= Date.parse(to); t += 86_400_000)
+    list.push(new Date(t).toISOString().slice(0, 10))
+  return list
+}
+
+/**
+ * The night calendar: of ten nights of the Aldous two or three are offered in the call, of the Fennel two; the
+ * rest is promised to partners, and one bright night a month is kept for engineering.
+ */
+async function seedNights(
+  db: Database,
+  callId: number,
+  facility: Facility,
+  dates: SeedCallDates,
+): Promise<void> {
+  const place = {
+    latitudeDeg: site.latitude_deg,
+    longitudeDeg: site.longitude_deg,
+    elevationM: site.elevation_m,
+  }
+  const rows = evenings(dates.season_from, dates.season_to).flatMap((evening_date, index) => {
+    const night = nightAt(place, evening_date)
+    const isEngineering = night.moonIllumination > 0.97 && index % 2 === 0
+    const block = (telescope: string, isOffered: boolean) => ({
+      call_id: callId,
+      telescope_id: facility.telescopeIds.get(telescope) as number,
+      evening_date,
+      use_for: isEngineering ? 'engineering' : isOffered ? 'science' : 'promised',
+      dark_seconds: Math.round(night.darkHours * 3600),
+    })
+    return [block('aldous', index % 9 < 2), block('fennel', index % 6 === 1)]
+  })
+  await db.batchInsert('night_blocks', rows as never, 200)
+}
+
+async function seedCall(
+  db: Database,
+  facility: Facility,
+  call: { number: number; stage: 'published' | 'review' | 'decided'; dates: SeedCallDates; summary: string },
+): Promise<SeededCall> {
+  const [callId] = (await db('calls').insert({
+    number: call.number,
+    slug: `call-${call.number}`,
+    title: `Call ${call.number}`,
+    summary: call.summary,
+    site_id: facility.siteId,
+    stage: call.stage,
+    currency: 'EUR',
+    ...call.dates,
+  })) as [number]
+  const [panelId] = (await db('panels').insert({ call_id: callId, name: 'Distant universe', quorum: 5 })) as [
+    number,
+  ]
+  const kindIds = new Map<string, number>()
+  for (const kind of kinds) {
+    const [id] = (await db('call_kinds').insert({ ...kind, call_id: callId, panel_id: panelId })) as [number]
+    kindIds.set(kind.kind, id)
+  }
+  for (const [index, [title, prompt, weight]] of criteria.entries())
+    await db('call_criteria').insert({ call_id: callId, position: index + 1, title, prompt, weight })
+  for (const mode of modes)
+    await db('call_modes').insert({ call_id: callId, mode_id: facility.modeIds.get(mode.slug) as number })
+  await seedNights(db, callId, facility, call.dates)
+  return { id: callId, number: call.number, panelId, kindIds, dates: call.dates }
+}
+
+/** One decided call, one in review, one open: dated around the day of the first start. */
+export async function seedCalls(
+  db: Database,
+  facility: Facility,
+  anchor: Date,
+): Promise<{ decided: SeededCall; inReview: SeededCall; open: SeededCall }> {
+  const dates = callDates(anchor)
+  const summary =
+    'Time on the Aldous 3.8 m with LANTERN, SPINDLE and EMBER, and on the Fennel 1.5 m with WICK, for targets at cosmological distances. Proposals are judged without names.'
+  return {
+    decided: await seedCall(db, facility, { number: 12, stage: 'decided', dates: dates.decided, summary }),
+    inReview: await seedCall(db, facility, { number: 13, stage: 'review', dates: dates.inReview, summary }),
+    open: await seedCall(db, facility, { number: 14, stage: 'published', dates: dates.open, summary }),
+  }
+}
