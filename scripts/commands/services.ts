@@ -9,10 +9,11 @@ export async function main(args: string[]): Promise<number> {
     args,
     options: { mode: { type: 'string', default: 'dev' }, 'app-port': { type: 'string', default: '3000' } },
   })
-  const stack = await startStack(values.mode, async () => {
-    const appPort = Number(values['app-port'])
+  const appPort = Number(values['app-port'])
+  const stack = await startStack({
+    mode: values.mode,
     // The application is not started here, so its port may well be in use already: by it.
-    return { ...(await usualPorts(appPort, () => undefined)), app: appPort }
+    choosePorts: async () => ({ ...(await usualPorts(appPort, () => undefined)), app: appPort }),
   })
   console.log(`Services are up; the settings are in ${relativeToProject(stack.environmentFile)}.`)
   console.log(`Letters: ${stack.appEnv.INBOX_URL}   Payments: ${stack.appEnv.PAYMENT_MOCK_URL}`)

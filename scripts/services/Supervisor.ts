@@ -6,6 +6,7 @@ import { claimDataFolder, forgetRunning, noteRunning } from './runningNote'
 export class Supervisor {
   readonly #folder: DataFolder
   readonly #children: Child[] = []
+  readonly #abort = new AbortController()
   #stopping: Promise<void> | undefined
   #address: string | undefined
   #settle: (reason: string) => void = () => undefined
@@ -47,13 +48,15 @@ export class Supervisor {
     noteRunning(this.#folder, this.#children, address)
   }
 
-  get isStopping(): boolean {
-    return this.#stopping !== undefined
+  /** Aborts when stopping begins, so that builds and migrations under way end too. */
+  get signal(): AbortSignal {
+    return this.#abort.signal
   }
 
   /** The application first, the database last; the whole lot is given half a minute at most. */
   stopAll(): Promise<void> {
     this.#stopping ??= (async () => {
+      this.#abort.abort()
       for (const child of [...this.#children].reverse()) await child.stop()
       forgetRunning(this.#folder)
     })()

@@ -1,7 +1,7 @@
-import { spawn } from 'node:child_process'
 import { accessSync, constants, existsSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { Problem } from './Problem'
+import { runToEnd, type RunResult } from './runToEnd'
 
 /** A program that comes from Debian's packages. */
 export interface Program {
@@ -75,7 +75,7 @@ export async function ensurePrograms(wanted: readonly Program[], logFile: string
   )
 }
 
-async function aptGet(args: readonly string[], byHand: string): Promise<{ code: number; output: string }> {
+async function aptGet(args: readonly string[], byHand: string): Promise<RunResult> {
   const settings = [
     '-y',
     '-q',
@@ -85,9 +85,9 @@ async function aptGet(args: readonly string[], byHand: string): Promise<{ code: 
     '-o',
     'Acquire::Retries=3',
   ]
-  const command = ['env', 'DEBIAN_FRONTEND=noninteractive', 'apt-get', ...settings, ...args]
+  const command = ['DEBIAN_FRONTEND=noninteractive', 'apt-get', ...settings, ...args]
   const isRoot = process.getuid?.() === 0
-  if (isRoot) return run(command)
+  if (isRoot) return runToEnd({ command: 'env', args: command })
   if (!findCommand(['sudo'])) {
     throw new Problem(
       'A package has to be installed, and this user is neither root nor has sudo.',
@@ -95,21 +95,6 @@ async function aptGet(args: readonly string[], byHand: string): Promise<{ code: 
     )
   }
   const canAsk = process.stdin.isTTY === true
-  return run(canAsk ? ['sudo', ...command] : ['sudo', '-n', ...command], canAsk)
-}
-
-/** The terminal is lent out for sudo's question only. */
-function run(command: readonly string[], lendTerminal = false): Promise<{ code: number; output: string }> {
-  return new Promise((resolve) => {
-    const stdin = lendTerminal ? 'inherit' : 'ignore'
-    const child = spawn(command[0] ?? '', command.slice(1), { stdio: [stdin, 'pipe', 'pipe'] })
-    let output = ''
-    const collect = (chunk: Buffer) => {
-      output += chunk.toString()
-    }
-    child.stdout.on('data', collect)
-    child.stderr.on('data', collect)
-    child.once('error', (error) => resolve({ code: 1, output: `${output}${error.message}\n` }))
-    child.once('close', (code) => resolve({ code: code ?? 1, output }))
-  })
+  const withSudo = canAsk ? ['env', ...command] : ['-n', 'env', ...command]
+  return runToEnd({ command: 'sudo', args: withSudo, lendTerminal: canAsk })
 }

@@ -51,10 +51,8 @@ export function ownerEnvironment(
   ports: ServicePorts,
   database: string = databases.main,
 ): Environment {
-  return {
-    ...appEnvironment(folder, secrets, ports),
-    DATABASE_URL: databaseUrl('owner', secrets, ports.database, database),
-  }
+  const url = databaseUrl('owner', secrets, ports.database, database)
+  return { ...appEnvironment(folder, secrets, ports), DATABASE_URL: url, MIGRATION_DATABASE_URL: url }
 }
 
 /** Leaves the settings where developers' own runs of the tests and tools find them. */
@@ -62,7 +60,7 @@ export function writeEnvironment(folder: DataFolder, secrets: Secrets, ports: Se
   const file = join(folder.path, 'env.json')
   const content = {
     ...appEnvironment(folder, secrets, ports),
-    OWNER_DATABASE_URL: databaseUrl('owner', secrets, ports.database, databases.main),
+    MIGRATION_DATABASE_URL: databaseUrl('owner', secrets, ports.database, databases.main),
     TEST_DATABASE_URL: databaseUrl('owner', secrets, ports.database, databases.test),
   }
   writeFileSync(file, `${JSON.stringify(content, null, 2)}\n`, { mode: 0o600 })

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import { accessSync, chmodSync, constants, mkdirSync, readFileSync } from 'node:fs'
+import { accessSync, chmodSync, constants, mkdirSync, readFileSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { dirname, join, relative } from 'node:path'
 import { fileURLToPath } from 'node:url'
@@ -34,6 +34,14 @@ export function openDataFolder(mode: string): DataFolder {
   chmodSync(path, 0o700)
   for (const each of [folder.objects, folder.mail, folder.payments, folder.logs]) makeFolder(each)
   return folder
+}
+
+/** Throws away what the services kept; secrets and logs stay. */
+export function emptyDataFolder(folder: DataFolder): void {
+  for (const each of [folder.mariadb, folder.objects, folder.mail, folder.payments]) {
+    rmSync(each, { recursive: true, force: true })
+  }
+  for (const each of [folder.objects, folder.mail, folder.payments]) makeFolder(each)
 }
 
 function makeFolder(path: string): void {

@@ -1,4 +1,3 @@
-import { spawn } from 'node:child_process'
 import { existsSync, renameSync, rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { createConnection } from 'mysql2/promise'
@@ -7,6 +6,7 @@ import { findCommand, programs } from './debian'
 import { openToThisUser, relativeToProject, socketFolder, tailOf, type DataFolder } from './folders'
 import { accountStatements, databaseUrl } from './mariadbAccounts'
 import { Problem } from './Problem'
+import { runToEnd } from './runToEnd'
 import type { Secrets } from './secrets'
 
 export interface MariadbPlan {
@@ -85,8 +85,7 @@ async function makeDataFolder(folder: DataFolder): Promise<void> {
     '--skip-test-db',
     '--skip-name-resolve',
   ]
-  const { code, output } = await runToEnd(installer, args)
-  writeFileSync(log, output)
+  const { code } = await runToEnd({ command: installer, args, logFile: log })
   if (code !== 0) {
     throw new Problem(
       'MariaDB could not make its data folder.',
@@ -106,18 +105,4 @@ async function answers(uri: string): Promise<boolean> {
   await connection.query('SELECT 1')
   await connection.end()
   return true
-}
-
-function runToEnd(command: string, args: readonly string[]): Promise<{ code: number; output: string }> {
-  return new Promise((resolve) => {
-    const child = spawn(command, [...args], { stdio: ['ignore', 'pipe', 'pipe'] })
-    let output = ''
-    const collect = (chunk: Buffer) => {
-      output += chunk.toString()
-    }
-    child.stdout.on('data', collect)
-    child.stderr.on('data', collect)
-    child.once('error', (error) => resolve({ code: 1, output: `${output}${error.message}\n` }))
-    child.once('close', (code) => resolve({ code: code ?? 1, output }))
-  })
 }

@@ -1,4 +1,5 @@
 import { createServer } from 'node:net'
+import { Problem } from './Problem'
 
 /** Whether we may listen on this port of the loopback address. */
 export function isPortFree(port: number): Promise<boolean> {
@@ -62,4 +63,14 @@ export async function anyFreePorts(count: number): Promise<number[]> {
   })
   await Promise.all(servers.map((server) => new Promise((resolve) => server.close(resolve))))
   return ports
+}
+
+/** A port given on the command line. */
+export function readPort(text: string): number {
+  const port = Number(text)
+  if (Number.isInteger(port) && port >= 1 && port <= 65_535) return port
+  throw new Problem(
+    `"${text}" is not a port.`,
+    'Give a whole number from 1 to 65535, for example --port=3000.',
+  )
 }

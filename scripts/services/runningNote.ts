@@ -1,7 +1,7 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { setTimeout as sleep } from 'node:timers/promises'
 import { join } from 'node:path'
-import { relativeToProject, type DataFolder } from './folders'
+import { projectRoot, relativeToProject, type DataFolder } from './folders'
 import { Problem } from './Problem'
 
 interface ProcessNote {
@@ -17,7 +17,7 @@ interface RunningNote {
   address?: string
 }
 
-const noteFile = (folder: DataFolder) => join(folder.path, 'running.json')
+const noteFile = (folder: Pick<DataFolder, 'path'>) => join(folder.path, 'running.json')
 
 /** Field 22 of /proc/pid/stat, counted after the bracketed name, which may hold spaces. */
 function startTime(pid: number): string | undefined {
@@ -33,13 +33,19 @@ function isAlive(note: ProcessNote): boolean {
   return startTime(note.pid) === note.startedAt
 }
 
-function readNote(folder: DataFolder): RunningNote | undefined {
+function readNote(folder: Pick<DataFolder, 'path'>): RunningNote | undefined {
   if (!existsSync(noteFile(folder))) return undefined
   try {
     return JSON.parse(readFileSync(noteFile(folder), 'utf8'))
   } catch {
     return undefined
   }
+}
+
+/** Where the application of that mode is served from this project now, if it is. */
+export function addressOfRunning(mode: string): string | undefined {
+  const note = readNote({ path: join(projectRoot, '.data', mode) })
+  return note && isAlive(note.supervisor) ? note.address : undefined
 }
 
 /** Refuses a second run on the same data; ends what a killed run left behind. */

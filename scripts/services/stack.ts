@@ -8,7 +8,7 @@ import {
   type Environment,
   type ServicePorts,
 } from './environment'
-import { openDataFolder, type DataFolder } from './folders'
+import { emptyDataFolder, openDataFolder, type DataFolder } from './folders'
 import { startMail } from './mail'
 import { startMariadb } from './mariadb'
 import { startObjectStore } from './objectStore'
@@ -29,12 +29,21 @@ export interface Stack {
   environmentFile: string
 }
 
+export interface StackPlan {
+  mode: string
+  /** Called once the data folder is ours. */
+  choosePorts: () => Promise<ServicePorts>
+  /** Begins with nothing: what an earlier run kept is thrown away. */
+  fresh?: boolean
+}
+
 /** Brings up database, object store, mail and payments; on any failure nothing is left running. */
-export async function startStack(mode: string, choosePorts: () => Promise<ServicePorts>): Promise<Stack> {
+export async function startStack({ mode, choosePorts, fresh = false }: StackPlan): Promise<Stack> {
   const folder = openDataFolder(mode)
   await ensurePrograms([programs.mariadb], join(folder.logs, 'apt-get.log'))
   const secrets = loadSecrets(folder)
   const supervisor = await Supervisor.claim(folder)
+  if (fresh) emptyDataFolder(folder)
   const ports = await choosePorts()
   try {
     const starts = [
