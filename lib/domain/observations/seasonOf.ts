@@ -1,0 +1,50 @@
+import type { SiteRecord } from '../facility/types'
+import type { ConstraintSet, Observation, ProposalContents, Target } from '../proposals/types'
+import { defaultConstraints } from './defaultConstraints'
+import { seasonVisibility, type SeasonVisibility } from './seasonVisibility'
+import { skyTargetOf } from './skyTargetOf'
+
+export type Conditions = Omit<ConstraintSet, 'id' | 'version'>
+
+/** The conditions an observation asks for. */
+export function conditionsOf(
+  contents: Pick<ProposalContents, 'constraintSets'>,
+  observation: Pick<Observation, 'constraintSetId'> | undefined,
+): Conditions {
+  const named = contents.constraintSets.find(({ id }) => id === observation?.constraintSetId)
+  return named ?? contents.constraintSets[0] ?? defaultConstraints
+}
+
+/** Evening dates from one to another, both included. */
+export function eveningsBetween(from: string, to: string): string[] {
+  const dates: string[] = []
+  for (let at = Date.parse(from); at <= Date.parse(to); at += 86_400_000)
+    dates.push(new Date(at).toISOString().slice(0, 10))
+  return dates
+}
+
+/**
+ * Hours of each target through the whole season of the call, dark and above the airmass its first observation
+ * asks for, whatever the Moon does. Targets that share an airmass are computed together.
+ */
+export function darkHours(
+  contents: Pick<ProposalContents, 'call' | 'targets' | 'observations' | 'constraintSets'> & {
+    site: SiteRecord
+  },
+): SeasonVisibility {
+  const byAirmass = new Map<number, Target[]>()
+  for (const target of contents.targets) {
+    const first = contents.observations.find(({ targetId }) => targetId === target.id)
+    const { maxAirmass } = conditionsOf(contents, first)
+    byAirmass.set(maxAirmass, [...(byAirmass.get(maxAirmass) ?? []), target])
+  }
+  const season = { from: contents.call.seasonFrom, to: contents.call.seasonTo }
+  const whole = seasonVisibility(contents.site, { ...season, maxAirmass: defaultConstraints.maxAirmass }, [])
+  const byTarget: SeasonVisibility['byTarget'] = new Map()
+  for (const [maxAirmass, targets] of byAirmass) {
+    const sky = targets.flatMap((target) => skyTargetOf(target) ?? [])
+    for (const [id, one] of seasonVisibility(contents.site, { ...season, maxAirmass }, sky).byTarget)
+      byTarget.set(id, one)
+  }
+  return { nights: whole.nights, byTarget }
+}
