@@ -17,3 +17,48 @@ export async function appendLogbook(db: Database, row: Omit<LogbookRow, 'id'>): 
 export function readLogbookPage(db: Database, afterId: number, limit: number): Promise<LogbookRow[]> {
   return db('logbook').where('id', '>', afterId).orderBy('id').limit(limit)
 }
+
+export interface SubjectEntry {
+  at: Date
+  personId: number | null
+  name: string | null
+  actingAs: string
+  action: string
+  before: unknown
+  after: unknown
+}
+
+const parsed = (json: string | null): unknown => (json === null ? null : (JSON.parse(json) as unknown))
+
+/** Entries about one subject, the newest first, with the names of those who acted. */
+export async function entriesOf(
+  db: Database,
+  subjectKind: string,
+  subjectId: string,
+  limit: number,
+): Promise<SubjectEntry[]> {
+  const rows = await db('logbook as l')
+    .leftJoin('people as p', 'p.id', 'l.person_id')
+    .where({ 'l.subject_kind': subjectKind, 'l.subject_id': subjectId })
+    .orderBy('l.id', 'desc')
+    .limit(limit)
+    .select('l.at', 'l.person_id', 'p.name', 'l.acting_as', 'l.action', 'l.before_value', 'l.after_value')
+  return rows.map((row) => ({
+    at: row.at,
+    personId: row.person_id,
+    name: row.name,
+    actingAs: row.acting_as,
+    action: row.action,
+    before: parsed(row.before_value),
+    after: parsed(row.after_value),
+  }))
+}
+
+/** Who changed a subject last; null when nobody has. */
+export async function lastChangeOf(
+  db: Database,
+  subjectKind: string,
+  subjectId: string,
+): Promise<SubjectEntry | null> {
+  return (await entriesOf(db, subjectKind, subjectId, 1))[0] ?? null
+}
