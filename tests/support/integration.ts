@@ -1,3 +1,4 @@
+import './loadEnvironment'
 import { afterEach } from 'vitest'
 import { checkInvariants } from './invariants'
 import { openTransaction } from './database'

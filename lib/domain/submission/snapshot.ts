@@ -1,0 +1,48 @@
+import { createHash } from 'node:crypto'
+import type { ProposalComputation } from '../observations/types.ts'
+import type { ProposalContents } from '../proposals/types.ts'
+
+/** A proposal as it was sent: what it said, what was computed from it, and by which engine. */
+export interface Snapshot {
+  contents: ProposalContents
+  computation: ProposalComputation
+  engineVersion: string
+}
+
+/** Values in an order of their own, so that the same proposal always gives the same bytes. */
+function ordered(value: unknown): unknown {
+  if (value instanceof Date) return value.toISOString()
+  if (Array.isArray(value)) return value.map(ordered)
+  if (typeof value !== 'object' || value === null) return value
+  return Object.fromEntries(
+    Object.entries(value)
+      .sort(([a], [b]) => (a < b ? -1 : 1))
+      .map(([key, inner]) => [key, ordered(inner)]),
+  )
+}
+
+/** The text that is stored and its fingerprint (SHA-256, hex). */
+export function freeze(snapshot: Snapshot): { text: string; sha256: string } {
+  const text = JSON.stringify(ordered(snapshot))
+  return { text, sha256: createHash('sha256').update(text).digest('hex') }
+}
+
+const moments = new Set([
+  'updatedAt',
+  'uploadedAt',
+  'confirmedAt',
+  'opensAt',
+  'closesAt',
+  'graceUntil',
+  'assessmentsDueAt',
+  'reviewsDueAt',
+  'panelMeetsAt',
+  'lettersAt',
+])
+
+/** The snapshot back from its text, moments as `Date` again. */
+export function thaw(text: string): Snapshot {
+  return JSON.parse(text, (key, value: unknown) =>
+    moments.has(key) && typeof value === 'string' ? new Date(value) : value,
+  ) as Snapshot
+}
