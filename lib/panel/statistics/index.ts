@@ -1,0 +1,8 @@
+export { agreement, type Agreement } from './agreement'
+export { connectedGroups } from './connectedGroups'
+export { fitMerit, leniencyLimit } from './fitMerit'
+export { krippendorffAlpha } from './krippendorffAlpha'
+export { chanceAbove, rankDraws, rankQuantile, type RankDistribution } from './rankDraws'
+export { rawScores, type RawScore } from './rawScores'
+export type { Leniency, LeniencyTest, Merit, MeritFit, Score } from './types'
+export { weightedScore } from './weightedScore'
