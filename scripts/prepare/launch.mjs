@@ -5,8 +5,9 @@ import { installPackages } from './packages.mjs'
 /**
  * Makes sure Node and the npm packages fit, then hands over to a TypeScript program.
  * @param {() => Promise<{ main: (args: string[]) => Promise<number> }>} load imports the program, once tsx can read it
+ * @param {() => void} [afterFailure] the last word when the program could not run to its end
  */
-export async function launch(load) {
+export async function launch(load, afterFailure = () => undefined) {
   try {
     checkNode()
     await installPackages()
@@ -16,6 +17,7 @@ export async function launch(load) {
     process.exitCode = await main(process.argv.slice(2))
   } catch (error) {
     report(error)
+    afterFailure()
     process.exitCode = 1
   }
 }
