@@ -522,6 +522,7 @@ export interface RankingEntriesRow {
   proposal_id: number
   place: number
   raw_mean: number | null
+  set_aside_at: Date | null
 }
 
 export interface RankMovesRow {
@@ -967,7 +968,10 @@ declare module 'knex/types/tables.js' {
         'id' | 'line_after' | 'frozen_at' | 'made_by' | 'superseded_at' | 'version' | 'created_at'
       >
     >
-    ranking_entries: Knex.CompositeTableType<RankingEntriesRow, Insert<RankingEntriesRow, 'id' | 'raw_mean'>>
+    ranking_entries: Knex.CompositeTableType<
+      RankingEntriesRow,
+      Insert<RankingEntriesRow, 'id' | 'raw_mean' | 'set_aside_at'>
+    >
     rank_moves: Knex.CompositeTableType<RankMovesRow, Insert<RankMovesRow, 'id' | 'moved_by' | 'created_at'>>
     receipts: Knex.CompositeTableType<ReceiptsRow, Insert<ReceiptsRow, 'id' | 'created_at'>>
     recusals: Knex.CompositeTableType<RecusalsRow, Insert<RecusalsRow, 'id' | 'created_at'>>
