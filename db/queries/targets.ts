@@ -1,4 +1,4 @@
-import type { Brightness, Target } from '@/lib/domain/proposals/types'
+import type { Brightness, Observation, Target } from '@/lib/domain/proposals/types'
 import type { Database } from '../client.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
@@ -133,4 +133,23 @@ export async function placeTarget(db: Database, id: number, position: number): P
 
 export async function deleteTarget(db: Database, id: number): Promise<void> {
   await db('targets').where({ id }).del()
+}
+
+export interface RemovedTarget {
+  target: Target
+  observations: Observation[]
+}
+
+/** What the logbook kept when a target was last taken out of a proposal; null when it never was. */
+export async function removedTarget(
+  db: Database,
+  reference: string,
+  targetId: number,
+): Promise<RemovedTarget | null> {
+  const row = await db('logbook')
+    .where({ subject_kind: 'proposal', subject_id: reference, action: 'target.remove' })
+    .andWhereRaw("JSON_VALUE(before_value, '$.target.id') = ?", [targetId])
+    .orderBy('id', 'desc')
+    .first()
+  return row?.before_value ? (JSON.parse(row.before_value) as RemovedTarget) : null
 }

@@ -45,8 +45,7 @@ export function seasonVisibility(
   const place = [site.latitudeDeg, site.longitudeDeg, site.elevationM]
   const season = JSON.stringify([place, conditions.from, conditions.to, conditions.twilightLimitDeg ?? -18])
   const under = JSON.stringify([season, site.lowestAltitudeDeg, conditions.maxAirmass, conditions.moon ?? {}])
-  const keyOf = (t: SkyTarget) =>
-    `${under} ${t.raDeg} ${t.decDeg} ${t.pmRaMasYr ?? 0} ${t.pmDecMasYr ?? 0}`
+  const keyOf = (t: SkyTarget) => `${under} ${t.raDeg} ${t.decDeg} ${t.pmRaMasYr ?? 0} ${t.pmDecMasYr ?? 0}`
 
   const missing = new Map(
     targets.filter((target) => !targetsKept.get(keyOf(target))).map((target) => [keyOf(target), target]),

@@ -5,8 +5,7 @@ const order: readonly Verdict[] = ['feasible', 'marginal', 'not-feasible']
 /** The worst of several verdicts; null of none. */
 export function worstVerdict(verdicts: readonly Verdict[]): Verdict | null {
   return verdicts.reduce<Verdict | null>(
-    (worst, verdict) =>
-      worst === null || order.indexOf(verdict) > order.indexOf(worst) ? verdict : worst,
+    (worst, verdict) => (worst === null || order.indexOf(verdict) > order.indexOf(worst) ? verdict : worst),
     null,
   )
 }

@@ -1,0 +1,36 @@
+import { z } from 'zod'
+import { touchProposal } from '@/db/queries/proposals'
+import { findTarget, insertTarget, targetsOf } from '@/db/queries/targets'
+import { refuse } from '@/lib/errors'
+import type { Context } from '../context'
+import { inTransaction } from '../inTransaction'
+import { writeLogbook } from '../logbook/writeLogbook'
+import { openForEditing } from '../proposals/openProposal'
+import type { Target } from '../proposals/types'
+import { nextPosition, requireFreeName, requireRoom } from './rules'
+import { targetRowSchema } from './schema'
+
+export const addTargetSchema = z.object({ reference: z.string().max(10), row: targetRowSchema })
+
+export type AddTargetInput = z.output<typeof addTargetSchema>
+
+/** Adds a target at the end of the table. */
+export async function addTarget(ctx: Context, input: AddTargetInput): Promise<Target> {
+  return inTransaction(ctx, async (tx) => {
+    const { row } = await openForEditing(tx, input.reference)
+    const present = await targetsOf(tx.db, row.id)
+    requireRoom(present.length, 1)
+    requireFreeName(present, input.row.name, null, 'row.name')
+    const id = await insertTarget(tx.db, row.id, { ...input.row, position: nextPosition(present) })
+    const target = await findTarget(tx.db, row.id, id)
+    if (!target) throw refuse.integrity('The target could not be read back.')
+    await touchProposal(tx.db, row.id)
+    await writeLogbook(tx, {
+      action: 'target.add',
+      subject: { kind: 'proposal', id: input.reference },
+      actingAs: 'investigator',
+      after: { target },
+    })
+    return target
+  })
+}

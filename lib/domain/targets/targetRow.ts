@@ -1,0 +1,56 @@
+import { TRUE_MINUS } from '@/lib/format'
+import type { Target } from '../proposals/types'
+import { bandChoice } from './bands'
+import type { TargetRow } from './schema'
+
+const text = (value: number | null | undefined) =>
+  value === null || value === undefined ? '' : String(value).replace('-', TRUE_MINUS)
+
+/** A row in which nothing has been typed yet. */
+export const emptyTargetRow: TargetRow = {
+  name: '',
+  ra: '',
+  dec: '',
+  redshift: '',
+  redshiftType: 'spectroscopic',
+  redshiftError: '',
+  redshiftFrame: 'heliocentric',
+  magnitude: '',
+  magnitudeError: '',
+  band: 'r AB',
+  provenance: 'observed',
+  source: '',
+  need: 'required',
+  geometry: 'point',
+  effectiveRadius: '',
+  sersicIndex: '',
+  pmRa: '',
+  pmDec: '',
+  epoch: '2016',
+}
+
+/** A kept target as the text of its row: what was typed where that is kept, else the value written out. */
+export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): TargetRow {
+  const { brightness } = target
+  return {
+    name: target.name,
+    ra: target.raTyped,
+    dec: target.decTyped,
+    redshift: target.redshiftTyped || text(target.redshift),
+    redshiftType: target.redshiftType,
+    redshiftError: text(target.redshiftError),
+    redshiftFrame: target.redshiftFrame,
+    magnitude: text(brightness?.value),
+    magnitudeError: text(brightness?.error),
+    band: brightness ? bandChoice(brightness.band, brightness.system) : emptyTargetRow.band,
+    provenance: brightness?.provenance ?? 'observed',
+    source: brightness?.source ?? '',
+    need: target.need,
+    geometry: target.geometry,
+    effectiveRadius: text(target.effectiveRadiusArcsec),
+    sersicIndex: text(target.sersicIndex),
+    pmRa: text(target.pmRaMasYr),
+    pmDec: text(target.pmDecMasYr),
+    epoch: text(target.epochYr),
+  }
+}
