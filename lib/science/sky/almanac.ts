@@ -16,6 +16,9 @@ export const TURN_DEG_PER_DAY = 360.985_647_366_29
 /** Speed of light, astronomical units a day. */
 const LIGHT_AU_PER_DAY = 173.144_632_674
 
+/** Days kept before starting afresh. */
+const MOST_DAYS = 20_000
+
 /** Three rows of a rotation. */
 export type Rotation = readonly [Vector3, Vector3, Vector3]
 
@@ -55,6 +58,7 @@ export function createAlmanac(): Almanac {
     const rest = SiderealTime(MakeTime(day)) * 15 - TURN_DEG_PER_DAY * day
     // Taken near 280.46 deg, its value at J2000, so that neighbouring days never differ by a turn.
     const near = rest - 360 * Math.round((rest - 280.46) / 360)
+    if (equinox.size >= MOST_DAYS) equinox.clear()
     equinox.set(day, near)
     return near
   }
@@ -83,8 +87,12 @@ export function createAlmanac(): Almanac {
         [cell(0, 1), cell(1, 1), cell(2, 1)],
         [cell(0, 2), cell(1, 2), cell(2, 2)],
       ]
+      if (rotations.size >= MOST_DAYS) rotations.clear()
       rotations.set(day, made)
       return made
     },
   }
 }
+
+/** One almanac for a whole process: the same moments are asked for again and again. Bounded in size. */
+export const sharedAlmanac: Almanac = createAlmanac()

@@ -1,6 +1,6 @@
 /** Sun, Moon, targets and nights at a site. */
 export { airmassKastenYoung1989, airmassYoung1994, altitudeOfAirmassDeg } from './airmass'
-export { createAlmanac, type Almanac } from './almanac'
+export { createAlmanac, sharedAlmanac, type Almanac } from './almanac'
 export { parseDeclination, parseRightAscension, type ParsedAngle } from './coordinates'
 export {
   localSiderealHours,

@@ -1,4 +1,4 @@
-import { createAlmanac, type Almanac } from './almanac'
+import { sharedAlmanac, type Almanac } from './almanac'
 import { createNightSky, describeNight } from './nightSky'
 import { createObserver } from './observer'
 import { calendarDate, dateAfter, dateOf, daysOf } from './time'
@@ -12,7 +12,7 @@ export function nightAt(
   site: Site,
   eveningDate: string,
   twilightLimitDeg = -18,
-  almanac: Almanac = createAlmanac(),
+  almanac: Almanac = sharedAlmanac,
 ): Night {
   const observer = createObserver(site, almanac)
   return describeNight(createNightSky(observer, almanac, eveningDate), almanac, twilightLimitDeg)

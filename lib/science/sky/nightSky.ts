@@ -10,6 +10,9 @@ const SAMPLES = 48
 /** Altitude of the Sun's centre at sunset: 34' of refraction and 16' of radius. */
 const SUNSET_DEG = -50 / 60
 
+/** Nights kept before starting afresh. */
+const MOST_NIGHTS = 10_000
+
 /** One night at a site in days since J2000, with what its windows are cut from. */
 export interface NightSky {
   readonly date: string
@@ -23,8 +26,7 @@ export interface NightSky {
   darkness(limitDeg: number): Interval[]
 }
 
-/** Computes Sun and Moon through one night, once. */
-export function createNightSky(observer: Observer, almanac: Almanac, date: string): NightSky {
+function computeNightSky(observer: Observer, almanac: Almanac, date: string): NightSky {
   // Noon by the site's own longitude, so that a night never splits between two dates.
   const longitude = ((observer.site.longitudeDeg + 540) % 360) - 180
   const noon = midnightOf(date) + 0.5 - longitude / 360
@@ -34,12 +36,18 @@ export function createNightSky(observer: Observer, almanac: Almanac, date: strin
   const moonAltitude = (days: number): number =>
     observer.altitudeDeg(observer.topocentric(almanac.moon(days), days), days)
   const sunValues = times.map(sunAltitude)
-  const darkness = (limitDeg: number): Interval[] =>
-    intervalsAbove(
-      (days) => limitDeg - sunAltitude(days),
-      times,
-      sunValues.map((altitude) => limitDeg - altitude),
-    )
+  const known = new Map<number, Interval[]>()
+  const darkness = (limitDeg: number): Interval[] => {
+    const dark =
+      known.get(limitDeg) ??
+      intervalsAbove(
+        (days) => limitDeg - sunAltitude(days),
+        times,
+        sunValues.map((altitude) => limitDeg - altitude),
+      )
+    known.set(limitDeg, dark)
+    return dark
+  }
   return {
     date,
     noons: [noon, noon + 1],
@@ -48,6 +56,20 @@ export function createNightSky(observer: Observer, almanac: Almanac, date: strin
     moonUp: intervalsAbove(moonAltitude, times),
     darkness,
   }
+}
+
+const kept = new WeakMap<Almanac, Map<string, NightSky>>()
+
+/** Sun and Moon through one night, computed once for a site and almanac. */
+export function createNightSky(observer: Observer, almanac: Almanac, date: string): NightSky {
+  const { latitudeDeg, longitudeDeg, elevationM } = observer.site
+  const key = `${latitudeDeg} ${longitudeDeg} ${elevationM} ${date}`
+  const nights = kept.get(almanac) ?? new Map<string, NightSky>()
+  kept.set(almanac, nights)
+  const sky = nights.get(key) ?? computeNightSky(observer, almanac, date)
+  if (nights.size >= MOST_NIGHTS) nights.clear()
+  nights.set(key, sky)
+  return sky
 }
 
 /** First edge after noon and last edge before the next, unless it is the noon itself. */

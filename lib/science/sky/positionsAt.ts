@@ -1,5 +1,5 @@
 import { airmassYoung1994 } from './airmass'
-import { createAlmanac } from './almanac'
+import { sharedAlmanac } from './almanac'
 import { apparentVector, checkTarget } from './apparentPlace'
 import { moonIllumination, moonPhaseAngleDeg } from './moonIllumination'
 import { moonlitSkyV } from './moonlight'
@@ -46,7 +46,7 @@ export interface PositionsInput {
 /** Where Sun, Moon and targets stand at some moments. Altitudes within 0.02 degrees, the Moon within 0.05. */
 export function positionsAt(input: PositionsInput): InstantPositions[] {
   input.targets.forEach(checkTarget)
-  const almanac = createAlmanac()
+  const almanac = sharedAlmanac
   const observer = createObserver(input.site, almanac)
   return input.instants.map((at) => {
     const days = daysOf(at)

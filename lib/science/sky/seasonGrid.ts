@@ -1,4 +1,4 @@
-import { createAlmanac, type Almanac } from './almanac'
+import { sharedAlmanac, type Almanac } from './almanac'
 import { createNightSky, describeNight } from './nightSky'
 import { createObserver } from './observer'
 import { dateOf, datesBetween, daysOf, midnightOf } from './time'
@@ -31,7 +31,7 @@ export function seasonGrid(
   utcOffsetHours: number,
   options: { stepHours?: number; twilightLimitDeg?: number; almanac?: Almanac } = {},
 ): SeasonGrid {
-  const { stepHours = 0.5, twilightLimitDeg = -18, almanac = createAlmanac() } = options
+  const { stepHours = 0.5, twilightLimitDeg = -18, almanac = sharedAlmanac } = options
   const observer = createObserver(site, almanac)
   const count = Math.round(24 / stepHours)
   const hours = Array.from({ length: count + 1 }, (_, i) => 12 + (24 * i) / count)

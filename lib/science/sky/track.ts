@@ -17,6 +17,9 @@ function weights(f: number): [number, number, number, number, number, number] {
   ]
 }
 
+/** Samples kept before starting afresh, so that a long-lived process does not grow: decades of days. */
+const MOST_SAMPLES = 20_000
+
 /**
  * A smooth path in space, sampled on an even grid of times when first needed and read between the samples by
  * six-point interpolation. `stepDays` must be short against the path's periods.
@@ -31,6 +34,7 @@ export function createTrack(
     const known = kept.get(index)
     if (known) return known
     const made = sample(index * stepDays)
+    if (kept.size >= MOST_SAMPLES) kept.clear()
     kept.set(index, made)
     return made
   }

@@ -1,6 +1,6 @@
 import { ScienceError } from '../ScienceError'
 import { altitudeOfAirmassDeg } from './airmass'
-import { createAlmanac, type Almanac } from './almanac'
+import { sharedAlmanac, type Almanac } from './almanac'
 import { apparentVector, checkTarget } from './apparentPlace'
 import { culmination, timesAbove } from './hourAngle'
 import { intersect, totalDays, without, type Interval } from './intervals'
@@ -25,7 +25,7 @@ export interface VisibilityInput {
   readonly lowestAltitudeDeg?: number
   /** Highest altitude the telescope can follow, degrees: an altazimuth mount has a blind spot overhead. */
   readonly highestAltitudeDeg?: number
-  /** Kept by the caller to share Sun and Moon between calls. */
+  /** Where Sun and Moon are kept; the process-wide one when not given. */
   readonly almanac?: Almanac
 }
 
@@ -66,7 +66,7 @@ function check(input: VisibilityInput): void {
  */
 export function visibility(input: VisibilityInput): Visibility {
   check(input)
-  const almanac = input.almanac ?? createAlmanac()
+  const almanac = input.almanac ?? sharedAlmanac
   const observer = createObserver(input.site, almanac)
   const limitDeg = input.twilightLimitDeg ?? -18
   const lowest = Math.max(altitudeOfAirmassDeg(input.maxAirmass), input.lowestAltitudeDeg ?? -90)

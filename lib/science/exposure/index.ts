@@ -1,0 +1,17 @@
+/** Signal-to-noise and exposure time. */
+export { ccd, type CcdInput, type CcdResult } from './ccd'
+export { exposure, type ExposureInput } from './exposure'
+export { deliveredImageArcsec } from './imageQuality'
+export type { ExposureReport, Regime } from './report'
+export { skyAbArcsec2 } from './skyBrightness'
+export type {
+  Conditions,
+  Geometry,
+  ModeRecord,
+  MoonClass,
+  Provenance,
+  SiteRecord,
+  SnrPer,
+  Source,
+} from './types'
+export { exposureEngineVersion } from './version'

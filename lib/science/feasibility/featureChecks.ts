@@ -1,0 +1,79 @@
+import type { ModeRecord } from '../exposure'
+import { airToVacuumA } from '../light'
+import { judgeAtLeast } from './judge'
+import { sayAngstrom } from './saying'
+import { telluricBands } from './telluric'
+import type { Check } from './types'
+
+interface Feature {
+  readonly name: string
+  /** Observed, vacuum. */
+  readonly observedA: number
+  readonly restA: number
+}
+
+/** Ends of a mode's range in vacuum wavelengths. */
+export function vacuumRange(mode: ModeRecord): [number, number] {
+  if (mode.medium === 'vacuum') return [mode.wavelengthMinA, mode.wavelengthMaxA]
+  return [airToVacuumA(mode.wavelengthMinA), airToVacuumA(mode.wavelengthMaxA)]
+}
+
+/** Width over which a feature must be clean: 400 km/s or a resolution element, whichever is wider. */
+export function featureWidthA(mode: ModeRecord, observedA: number): number {
+  const element = mode.resolvingPower ? observedA / mode.resolvingPower : 0
+  return Math.max(element, (observedA * 400) / 299_792.458)
+}
+
+/** Does the feature fall where the mode sees? */
+export function checkInRange(mode: ModeRecord, feature: Feature): Check {
+  const [low, high] = vacuumRange(mode)
+  const inside = Math.min(feature.observedA - low, high - feature.observedA)
+  const width = featureWidthA(mode, feature.observedA)
+  const verdict = judgeAtLeast(inside, width, 0)
+  const zLow = Math.max(0, low / feature.restA - 1)
+  const zHigh = high / feature.restA - 1
+  const range =
+    zHigh > 0
+      ? `This mode sees ${feature.name} from z = ${zLow.toFixed(2)} to ${zHigh.toFixed(2)}.`
+      : `This mode never sees ${feature.name}.`
+  return {
+    id: 'feature-in-range',
+    name: 'Feature in range',
+    measured: inside >= 0 ? `${sayAngstrom(inside)} inside` : `${sayAngstrom(-inside)} outside`,
+    feasibleTo: `${sayAngstrom(width)}, one line width`,
+    failsAt: 'outside',
+    verdict,
+    why: `${feature.name} at ${sayAngstrom(feature.observedA)}; the mode spans ${sayAngstrom(low)} to ${sayAngstrom(high)} in vacuum.`,
+    fix: verdict === 'feasible' ? null : `Choose another mode or another line. ${range}`,
+  }
+}
+
+/** Is the feature clear of the bands where the air swallows light? */
+export function checkClearOfBands(mode: ModeRecord, feature: Feature): Check {
+  const width = featureWidthA(mode, feature.observedA)
+  const nearest = telluricBands
+    .map((band) => ({
+      band,
+      clear: Math.max(band.fromA - feature.observedA, feature.observedA - band.toA),
+    }))
+    .reduce((best, next) => (next.clear < best.clear ? next : best))
+  const verdict = judgeAtLeast(nearest.clear, 2 * width, width)
+  const { band, clear } = nearest
+  const edges = `${sayAngstrom(band.fromA)} to ${sayAngstrom(band.toA)}`
+  return {
+    id: 'clear-of-bands',
+    name: 'Clear of telluric bands',
+    measured: clear >= 0 ? sayAngstrom(clear) : 'inside a band',
+    feasibleTo: `${sayAngstrom(2 * width)}, two line widths`,
+    failsAt: `${sayAngstrom(width)}, one`,
+    verdict,
+    why:
+      clear >= 0
+        ? `The nearest is ${band.name}, ${edges}.`
+        : `${feature.name} falls in ${band.name}, ${edges}.`,
+    fix:
+      verdict === 'feasible'
+        ? null
+        : 'Measure another line as well, or take a telluric standard close in time.',
+  }
+}

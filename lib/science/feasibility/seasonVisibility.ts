@@ -1,0 +1,30 @@
+import { visibility, type TargetVisibility } from '../sky'
+import { moonClassLimits } from './moonClass'
+import type { ReportInput } from './types'
+
+export interface SeasonVisibility {
+  readonly visible: TargetVisibility
+  readonly usableHours: number
+  readonly nights: number
+}
+
+/** Hours of a target through the season, the Moon left aside and within its limits; null without a position. */
+export function seasonVisibility(input: ReportInput): SeasonVisibility | null {
+  const { target, site, mode, observation, season } = input
+  if (target.raDeg === null || target.decDeg === null) return null
+  const { raDeg, decDeg, pmRaMasYr, pmDecMasYr } = target
+  const asked = {
+    site,
+    targets: [{ id: String(target.id), raDeg, decDeg, pmRaMasYr, pmDecMasYr }],
+    from: season.from,
+    to: season.to,
+    maxAirmass: observation.maxAirmass,
+    twilightLimitDeg: mode.twilightLimitDeg,
+    lowestAltitudeDeg: site.lowestAltitudeDeg,
+  }
+  const limits = { ...moonClassLimits[observation.moon], minSeparationDeg: observation.minMoonSeparationDeg }
+  const [visible] = visibility(asked).targets
+  const [usable] = visibility({ ...asked, moon: limits }).targets
+  if (!visible || !usable) return null
+  return { visible, usableHours: usable.totalHours, nights: visible.byNight.length }
+}

@@ -1,0 +1,90 @@
+import type { Cosmology } from '../cosmology'
+import type {
+  ExposureReport,
+  Geometry,
+  ModeRecord,
+  MoonClass,
+  Provenance,
+  SiteRecord,
+  SnrPer,
+} from '../exposure'
+import type { TargetVisibility } from '../sky'
+
+export type Verdict = 'feasible' | 'marginal' | 'not-feasible'
+
+/** One question asked of a request: what was measured, its own two limits, and what follows. */
+export interface Check {
+  readonly id: string
+  readonly name: string
+  readonly measured: string
+  readonly feasibleTo: string
+  readonly failsAt: string
+  readonly verdict: Verdict
+  readonly why: string
+  readonly fix: string | null
+}
+
+export interface ReportTarget {
+  readonly id: string | number
+  readonly name: string
+  readonly raDeg: number | null
+  readonly decDeg: number | null
+  readonly pmRaMasYr?: number
+  readonly pmDecMasYr?: number
+  readonly redshift: number | null
+  readonly redshiftError?: number | null
+  readonly redshiftType?: 'spectroscopic' | 'photometric' | 'assumed'
+  readonly geometry?: Geometry
+  readonly brightness: {
+    readonly value: number
+    readonly system: 'AB' | 'Vega' | 'ST'
+    readonly band: string
+    readonly provenance: Provenance
+  } | null
+}
+
+export interface ReportObservation {
+  readonly id: string | number
+  readonly snr: number
+  readonly snrPer: SnrPer
+  /** The line or edge a spectrum is taken for, vacuum rest wavelength. */
+  readonly feature: { readonly name: string; readonly restA: number } | null
+  readonly askedS: number
+  readonly maxAirmass: number
+  /** Poorest seeing accepted, at the zenith and 500 nm. */
+  readonly seeingArcsec: number
+  readonly moon: MoonClass
+  readonly minMoonSeparationDeg?: number
+  /** Share of light let through by the thickest clouds accepted. */
+  readonly transparency?: number
+}
+
+export interface Season {
+  /** First and last evening date, both included. */
+  readonly from: string
+  readonly to: string
+}
+
+export interface ReportInput {
+  readonly cosmology: Cosmology
+  readonly site: SiteRecord
+  readonly target: ReportTarget
+  readonly mode: ModeRecord
+  readonly observation: ReportObservation
+  readonly season: Season
+}
+
+export interface ObservationReport {
+  readonly engineVersion: string
+  readonly checks: Check[]
+  readonly clear: number
+  readonly verdict: Verdict
+  /** Null when it could not be computed; `refusal` says why. */
+  readonly exposure: ExposureReport | null
+  readonly refusal: string | null
+  readonly observedFeatureA: number | null
+  /** Dark hours above the airmass limit, the Moon left aside; null without a position. */
+  readonly visibility: TargetVisibility | null
+  /** The same within the Moon limits of the request. */
+  readonly usableHours: number | null
+}
