@@ -1,0 +1,73 @@
+import { formatHours } from '@/lib/format'
+import { upBar } from './geometry/upBar'
+
+export interface UpBarsRow {
+  name: string
+  byNight: readonly number[]
+  totalHours: number
+  tone?: 'marginal' | 'not-feasible'
+}
+
+export interface UpBarsProps {
+  rows: readonly UpBarsRow[]
+  months: readonly { count: number; name: string }[]
+  /** The height of a row, in hours; without it the longest night of any row. */
+  maxHours?: number
+  label: string
+}
+
+const height = 26
+const width = 500
+
+/** When targets are up: hours a night, a row each, with their sum. */
+export function UpBars({ rows, months, maxHours, label }: UpBarsProps) {
+  const most = maxHours ?? Math.max(1, ...rows.flatMap(({ byNight }) => byNight))
+  return (
+    <figure className="m-0" role="img" aria-label={label}>
+      <div
+        aria-hidden="true"
+        className="grid grid-cols-[7rem_minmax(0,1fr)_5rem] items-end gap-x-3 gap-y-1.5 text-caption"
+      >
+        {rows.map((row) => {
+          const colour = row.tone ? `var(--${row.tone})` : 'var(--s1)'
+          const shape = upBar(row.byNight, width, height, most)
+          return (
+            <div key={row.name} className="contents">
+              <span className="truncate text-right">{row.name}</span>
+              <svg
+                viewBox={`0 0 ${width} ${height}`}
+                width="100%"
+                height={height}
+                preserveAspectRatio="none"
+                className="block overflow-visible"
+              >
+                <path d={shape.area} fill={colour} opacity="0.16" />
+                <path
+                  d={shape.line}
+                  fill="none"
+                  stroke={colour}
+                  strokeWidth="1.6"
+                  vectorEffect="non-scaling-stroke"
+                />
+              </svg>
+              <span className="text-right">{formatHours(row.totalHours)}</span>
+            </div>
+          )
+        })}
+        <div className="col-start-2 flex border-t border-ink text-tick text-muted">
+          {months.map((month) => (
+            <div
+              key={month.name}
+              className="overflow-hidden text-center"
+              style={{ flex: `${month.count} 0 0` }}
+            >
+              <span className="block h-1.5 w-px bg-ink" />
+              <span className="max-sm:hidden">{month.name}</span>
+              <span className="sm:hidden">{month.name.slice(0, 3)}</span>
+            </div>
+          ))}
+        </div>
+      </div>
+    </figure>
+  )
+}
