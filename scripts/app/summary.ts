@@ -1,11 +1,5 @@
+import type { DemoAccount } from '../../db/seeds/accounts'
 import type { Environment } from '../services/environment'
-
-export interface DemoAccount {
-  role: string
-  name: string
-  email: string
-  password: string
-}
 
 /** The one tidy block that `npm start` ends with. */
 export function summary(

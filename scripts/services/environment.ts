@@ -32,7 +32,7 @@ export function appEnvironment(folder: DataFolder, secrets: Secrets, ports: Serv
     STRIPE_WEBHOOK_SECRET: secrets.webhook,
     STRIPE_API_BASE: `http://127.0.0.1:${ports.payments}`,
     SMTP_URL: `smtp://127.0.0.1:${ports.smtp}`,
-    MAIL_FROM: 'Quillon Ridge Observatory <proposals@quillon-ridge.example>',
+    MAIL_FROM: 'Quillon Ridge Observatory <proposals@quillonridge.example>',
     NEXTAUTH_URL: `http://127.0.0.1:${ports.app}`,
     NEXTAUTH_SECRET: secrets.sessions,
     NEXT_SERVER_ACTIONS_ENCRYPTION_KEY: secrets.serverActions,

@@ -9,6 +9,7 @@ import { attempt, outcomes } from './attempts'
 import { findSession } from './checkout'
 import { controlMock } from './controls'
 import { Faults } from './Faults'
+import { homePage } from './homePage'
 import { Idempotency } from './idempotency'
 import type { ApiEvent } from './objects'
 import { payPage, successUrl } from './payPage'
@@ -68,6 +69,7 @@ export class PaymentMock {
       if (request.path.startsWith('/mock/')) {
         return await controlMock(request, this.#store, this.#webhooks, this.#faults)
       }
+      if (request.path === '/') return homePage(this.#store)
       if (request.path === fontPath) return fontFile()
       return json(404, { error: 'There is nothing here.' })
     } catch (error) {

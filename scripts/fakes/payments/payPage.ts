@@ -1,5 +1,6 @@
 import type { FakeResponse } from '../web/httpServer'
 import { escapeHtml, htmlPage } from '../web/page'
+import { money } from './money'
 import type { StoredSession } from './objects'
 
 const style = `
@@ -66,26 +67,4 @@ function closedPage({ session }: StoredSession): FakeResponse {
 /** Where the person goes after paying; the API's placeholder becomes the session's id. */
 export function successUrl(session: StoredSession['session']): string {
   return session.success_url.replaceAll('{CHECKOUT_SESSION_ID}', session.id)
-}
-
-const currenciesWithoutMinorUnits = new Set([
-  'jpy',
-  'krw',
-  'clp',
-  'vnd',
-  'isk',
-  'ugx',
-  'xaf',
-  'xof',
-  'pyg',
-  'rwf',
-])
-
-function money(amount: number, currency: string): string {
-  const digits = currenciesWithoutMinorUnits.has(currency) ? 0 : 2
-  const value = (amount / 10 ** digits).toLocaleString('en-GB', {
-    minimumFractionDigits: digits,
-    maximumFractionDigits: digits,
-  })
-  return `${currency.toUpperCase()} ${value}`
 }
