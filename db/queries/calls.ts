@@ -1,6 +1,6 @@
 import type { Call, CallCriterion, CallKind } from '../../lib/domain/calls/types.ts'
 import type { Database } from '../client.ts'
-import type { CallsRow } from '../tables.ts'
+import type { CallKindsRow, CallsRow } from '../tables.ts'
 
 function callOf(row: CallsRow): Call {
   return {
@@ -40,10 +40,8 @@ export async function listCalls(db: Database): Promise<Call[]> {
   return (await db('calls').orderBy('number', 'desc')).map(callOf)
 }
 
-/** Kinds of proposal a call takes, in the order they were written. */
-export async function callKinds(db: Database, callId: number): Promise<CallKind[]> {
-  const rows = await db('call_kinds').where({ call_id: callId }).orderBy('id')
-  return rows.map((row) => ({
+function kindOf(row: CallKindsRow): CallKind {
+  return {
     id: row.id,
     kind: row.kind,
     title: row.title,
@@ -53,7 +51,23 @@ export async function callKinds(db: Database, callId: number): Promise<CallKind[
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,
-  }))
+  }
+}
+
+/** Kinds of proposal a call takes, in the order they were written. */
+export async function callKinds(db: Database, callId: number): Promise<CallKind[]> {
+  const rows = await db('call_kinds').where({ call_id: callId }).orderBy('id')
+  return rows.map(kindOf)
+}
+
+/** A kind and the call it belongs to; null when there is none. */
+export async function findCallOfKind(
+  db: Database,
+  kindId: number,
+): Promise<{ call: Call; kind: CallKind } | null> {
+  const row = await db('call_kinds').where({ id: kindId }).first()
+  const call = row ? await findCall(db, row.call_id) : null
+  return row && call ? { call, kind: kindOf(row) } : null
 }
 
 /** What proposals are judged by, in the order of the sheet. */

@@ -17,10 +17,17 @@ function investigatorOf(row: ProposalPeopleRow): Investigator {
   }
 }
 
-/** Investigators in the order of names. */
+/**
+ * Investigators in the order of names. Someone named by an address and owner of an account that has proved
+ * that address is that person, whether or not the row has been tied to the account yet.
+ */
 export async function investigatorsOf(db: Database, proposalId: number): Promise<Investigator[]> {
-  const rows = await db('proposal_people').where({ proposal_id: proposalId }).orderBy(['position', 'id'])
-  return rows.map(investigatorOf)
+  const rows = await db('proposal_people as q')
+    .leftJoin('people as a', (on) => on.on('a.email', 'q.email').onNotNull('a.email_confirmed_at'))
+    .where('q.proposal_id', proposalId)
+    .orderBy(['q.position', 'q.id'])
+    .select<(ProposalPeopleRow & { owner_id: number | null })[]>('q.*', 'a.id as owner_id')
+  return rows.map((row) => ({ ...investigatorOf(row), personId: row.person_id ?? row.owner_id }))
 }
 
 export interface NewInvestigator {
@@ -82,12 +89,4 @@ export async function updateInvestigator(
 
 export async function deleteInvestigator(db: Database, id: number): Promise<void> {
   await db('proposal_people').where({ id }).delete()
-}
-
-/** Ties rows that name this address to the account that has proved it; returns how many. */
-export function linkInvestigators(db: Database, person: { id: number; email: string }): Promise<number> {
-  return db('proposal_people')
-    .where({ email: person.email })
-    .whereNull('person_id')
-    .update({ person_id: person.id })
 }

@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { ProposalsRow } from '../tables.ts'
+import { utcNow } from '../utcNow.ts'
 
 const isKey = (which: string | number): which is number => typeof which === 'number'
 
@@ -51,7 +52,7 @@ export async function insertProposal(db: Database, given: NewProposal): Promise<
     cosmology_parameters: JSON.stringify(given.cosmologyParameters),
     sections_done: '[]',
     created_by: given.createdBy,
-    updated_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
+    updated_at: utcNow(db),
   })
   return Number(id)
 }
@@ -81,7 +82,7 @@ export async function updateProposal(
 ): Promise<boolean> {
   const count = await db('proposals')
     .where({ id, version })
-    .update({ ...changes, version: version + 1, updated_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ ...changes, version: version + 1, updated_at: utcNow(db) })
   return count === 1
 }
 
@@ -89,5 +90,18 @@ export async function updateProposal(
 export async function touchProposal(db: Database, id: number): Promise<void> {
   await db('proposals')
     .where({ id })
-    .update({ updated_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ updated_at: utcNow(db) })
+}
+
+/** Reference of a draft the same person began a moment ago with the same words; null when there is none. */
+export async function findTwin(
+  db: Database,
+  given: { personId: number; kindId: number; title: string },
+): Promise<string | null> {
+  const row = await db('proposals')
+    .where({ created_by: given.personId, call_kind_id: given.kindId, title: given.title, state: 'draft' })
+    .andWhere('created_at', '>', db.raw('UTC_TIMESTAMP(3) - INTERVAL 10 SECOND'))
+    .orderBy('id', 'desc')
+    .first('reference')
+  return row?.reference ?? null
 }

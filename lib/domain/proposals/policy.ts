@@ -75,3 +75,31 @@ export function mayManagePeople(actor: Actor, subject: ProposalSubject, now: Dat
   if (!mayLead(row)) return no('role', 'The principal investigator or a deputy says who is named.')
   return inTime(subject, now)
 }
+
+/** A draft that was never sent, by the principal investigator or a deputy; the deadline does not matter. */
+export function mayPutAway(actor: Actor, subject: Pick<ProposalSubject, 'people' | 'state'>): Decision {
+  const row = investigatorRow(actor, subject)
+  if (!row)
+    return holds(actor, 'office') ? no('role', 'The office does not put drafts away.') : unseen('proposal')
+  if (!mayLead(row)) return no('role', 'The principal investigator or a deputy puts a draft away.')
+  return subject.state === 'draft'
+    ? yes
+    : no('window', 'Only a draft can be put away. A sent proposal is withdrawn.')
+}
+
+/** A co-investigator, while names can still change. The principal investigator cannot leave. */
+export function mayLeave(actor: Actor, subject: ProposalSubject): Decision {
+  const row = investigatorRow(actor, subject)
+  if (!row) return unseen('proposal')
+  if (row.role === 'pi')
+    return no('role', 'The principal investigator cannot leave. Put the draft away instead.')
+  return isOpenForWriting(subject)
+    ? yes
+    : no('window', 'The proposal has been sent with your name. Write to the office to take it off.')
+}
+
+/** The person named, once, whatever the hour: agreeing changes nobody's text. */
+export function mayConfirm(actor: Actor, subject: ProposalSubject): Decision {
+  if (!investigatorRow(actor, subject)) return unseen('proposal')
+  return subject.state === 'withdrawn' ? no('window', 'This proposal has been put away.') : yes
+}

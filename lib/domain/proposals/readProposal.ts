@@ -1,0 +1,43 @@
+import { databaseNow } from '@/db/queries/clock'
+import { authorize } from '@/lib/auth/authorize'
+import { refuse } from '@/lib/errors'
+import { deadlineOf } from '../calls/rules'
+import type { Context } from '../context'
+import type { ProposalComputation } from '../observations/types'
+import { completeness, type SectionReport } from './completeness'
+import { computationOf } from './computationOf'
+import { investigatorRow, mayEditProposal, mayManagePeople, mayReadProposal } from './policy'
+import { readContents } from './readContents'
+import type { Investigator, ProposalContents } from './types'
+
+export interface ReadProposal {
+  contents: ProposalContents
+  computation: ProposalComputation
+  sections: SectionReport[]
+  now: Date
+  deadline: Date
+  /** The reader's own row; null for the office. */
+  own: Investigator | null
+  /** Why it cannot be changed now, in a sentence; null when it can. */
+  readOnly: string | null
+  mayManage: boolean
+}
+
+/** One proposal as its pages show it, for those who may read it. */
+export async function readProposal(ctx: Context, reference: string): Promise<ReadProposal> {
+  if (!ctx.actor) throw refuse.notSignedIn()
+  const [contents, now] = await Promise.all([readContents(ctx.db, reference), databaseNow(ctx.db)])
+  authorize(mayReadProposal(ctx.actor, contents))
+  const computation = computationOf(contents)
+  const mayEdit = mayEditProposal(ctx.actor, contents, now)
+  return {
+    contents,
+    computation,
+    sections: completeness(contents, computation),
+    now,
+    deadline: deadlineOf(contents.call, contents.kind, contents),
+    own: investigatorRow(ctx.actor, contents),
+    readOnly: mayEdit.allowed ? null : mayEdit.sentence,
+    mayManage: mayManagePeople(ctx.actor, contents, now).allowed,
+  }
+}
