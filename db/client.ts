@@ -49,12 +49,5 @@ export function connect(url: string, pool: { min?: number; max?: number } = {}):
       },
     },
     acquireConnectionTimeout: 5_000,
-    migrations: migrationSettings,
   })
-}
-
-export const migrationSettings: Knex.MigratorConfig = {
-  directory: new URL('./migrations', import.meta.url).pathname,
-  loadExtensions: ['.ts'],
-  tableName: 'migrations',
 }

@@ -1,4 +1,5 @@
 import type { Database } from '../client.ts'
+import { utcNow } from '../utcNow.ts'
 
 /** Now, by the database's clock: the only clock that decides a deadline. */
 export async function databaseNow(db: Database): Promise<Date> {
@@ -7,3 +8,6 @@ export async function databaseNow(db: Database): Promise<Date> {
   if (!row) throw new Error('the database gave no time')
   return row.now_utc
 }
+
+/** The same moment as a value to write: Knex's types know no expression in place of a column's value. */
+export const atNow = (db: Database): Date => utcNow(db)

@@ -23,10 +23,10 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE NOT EXISTS (SELECT 1 FROM outbox b WHERE b.template = 'proposal-sent' AND b.dedupe_key LIKE CONCAT('sent:', v.proposal_id, ':', v.version_number, ':%'))`,
   ],
   [
-    'I2 a paid fee has exactly its amount in succeeded payments less refunds',
+    'I2 a paid fee has exactly its amount in succeeded payments less refunds, made or promised',
     `SELECT f.id FROM fees f
       LEFT JOIN (SELECT fee_id, SUM(amount_minor) paid FROM payments WHERE state = 'succeeded' GROUP BY fee_id) p ON p.fee_id = f.id
-      LEFT JOIN (SELECT q.fee_id, SUM(r.amount_minor) back FROM refunds r JOIN payments q ON q.id = r.payment_id WHERE r.state = 'succeeded' GROUP BY q.fee_id) r ON r.fee_id = f.id
+      LEFT JOIN (SELECT q.fee_id, SUM(r.amount_minor) back FROM refunds r JOIN payments q ON q.id = r.payment_id WHERE r.state <> 'failed' GROUP BY q.fee_id) r ON r.fee_id = f.id
       WHERE (f.state = 'paid' AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> f.amount_minor)
          OR (f.state IN ('due', 'waived', 'lapsed') AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> 0)`,
   ],

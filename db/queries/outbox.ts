@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { OutboxRow } from '../tables.ts'
+import { utcIn, utcNow } from '../utcNow.ts'
 
 export interface NewLetter {
   dedupeKey: string
@@ -26,7 +27,7 @@ export async function insertLetter(db: Database, letter: NewLetter): Promise<voi
       subject: letter.subject,
       text_body: letter.text,
       html_body: letter.html,
-      next_attempt_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
+      next_attempt_at: utcNow(db),
     })
     .onConflict('dedupe_key')
     .ignore()
@@ -53,7 +54,7 @@ export async function claimLetters(db: Database, limit: number, holdSeconds: num
         )
         .update({
           state: 'sending',
-          claimed_until: trx.raw('UTC_TIMESTAMP(3) + INTERVAL ? SECOND', [holdSeconds]) as unknown as Date,
+          claimed_until: utcIn(trx, holdSeconds),
         })
     return due
   })
@@ -64,7 +65,7 @@ export async function markSent(db: Database, id: number): Promise<void> {
     .where({ id })
     .update({
       state: 'sent',
-      sent_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
+      sent_at: utcNow(db),
       attempts: db.raw('attempts + 1') as unknown as number,
       claimed_until: null,
       last_error: null,
@@ -84,8 +85,6 @@ export async function markFailed(
       attempts: db.raw('attempts + 1') as unknown as number,
       claimed_until: null,
       last_error: outcome.error.slice(0, 300),
-      next_attempt_at: db.raw('UTC_TIMESTAMP(3) + INTERVAL ? SECOND', [
-        outcome.waitSeconds,
-      ]) as unknown as Date,
+      next_attempt_at: utcIn(db, outcome.waitSeconds),
     })
 }

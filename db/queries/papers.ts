@@ -1,5 +1,6 @@
 import type { Paper } from '../../lib/domain/proposals/types.ts'
 import type { Database } from '../client.ts'
+import { utcNow } from '../utcNow.ts'
 
 const columns = [
   'p.id',
@@ -41,7 +42,7 @@ export async function supersedePapers(
   return await db('papers')
     .where({ proposal_id: proposalId, kind })
     .whereNull('superseded_at')
-    .update({ superseded_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ superseded_at: utcNow(db) })
 }
 
 export interface NewPaper {

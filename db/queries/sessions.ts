@@ -1,4 +1,5 @@
 import type { Database } from '../client.ts'
+import { utcIn, utcNow } from '../utcNow.ts'
 
 export interface LiveSession {
   personId: number
@@ -29,8 +30,8 @@ export async function insertSession(
   await db('sessions').insert({
     id_hash: session.idHash,
     person_id: session.personId,
-    last_seen_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date,
-    expires_at: db.raw('UTC_TIMESTAMP(3) + INTERVAL ? SECOND', [session.lifeSeconds]) as unknown as Date,
+    last_seen_at: utcNow(db),
+    expires_at: utcIn(db, session.lifeSeconds),
     user_agent: session.userAgent.slice(0, 200),
   })
 }
@@ -38,14 +39,14 @@ export async function insertSession(
 export async function touchSession(db: Database, idHash: string): Promise<void> {
   await db('sessions')
     .where({ id_hash: idHash })
-    .update({ last_seen_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ last_seen_at: utcNow(db) })
 }
 
 export async function endSession(db: Database, idHash: string): Promise<void> {
   await db('sessions')
     .where({ id_hash: idHash })
     .whereNull('ended_at')
-    .update({ ended_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ ended_at: utcNow(db) })
 }
 
 /** Ends every session of a person, but for one to keep. */
@@ -60,5 +61,28 @@ export async function endSessionsOf(
     .modify((q) => {
       if (keepHash) q.whereNot({ id_hash: keepHash })
     })
-    .update({ ended_at: db.raw('UTC_TIMESTAMP(3)') as unknown as Date })
+    .update({ ended_at: utcNow(db) })
+}
+
+export interface SessionLine {
+  idHash: string
+  createdAt: Date
+  lastSeenAt: Date
+  userAgent: string
+}
+
+/** Browsers a person is signed in with, the last used first. */
+export async function listLiveSessions(db: Database, personId: number): Promise<SessionLine[]> {
+  const rows = await db('sessions')
+    .where({ person_id: personId })
+    .whereNull('ended_at')
+    .andWhere('expires_at', '>', utcNow(db))
+    .orderBy('last_seen_at', 'desc')
+    .limit(50)
+  return rows.map((row) => ({
+    idHash: row.id_hash,
+    createdAt: row.created_at,
+    lastSeenAt: row.last_seen_at,
+    userAgent: row.user_agent,
+  }))
 }

@@ -1,3 +1,4 @@
+import type { Investigator } from '../../lib/domain/proposals/types.ts'
 import { thaw, type Snapshot } from '../../lib/domain/submission/snapshot.ts'
 import type { Database } from '../client.ts'
 import type { ProposalVersionsRow } from '../tables.ts'
@@ -48,4 +49,71 @@ export async function findVersion(db: Database, id: number): Promise<SentVersion
 export async function findVersionByKey(db: Database, idempotencyKey: string): Promise<SentVersion | null> {
   const row = await db('proposal_versions').where({ idempotency_key: idempotencyKey }).first()
   return row ? versionOf(row) : null
+}
+
+export interface NewVersion {
+  proposalId: number
+  versionNumber: number
+  snapshot: string
+  sha256: string
+  engineVersion: string
+  paperId: number
+  idempotencyKey: string
+  arrivedAt: Date
+  committedAt: Date
+  submittedBy: number
+}
+
+/** The number the next version takes; numbers are never used twice. */
+export async function nextVersionNumber(db: Database, proposalId: number): Promise<number> {
+  const row = await db('proposal_versions')
+    .where({ proposal_id: proposalId })
+    .max({ last: 'version_number' })
+    .first()
+  return Number(row?.last ?? 0) + 1
+}
+
+/** Retires the version that stood. */
+export async function supersedeVersions(db: Database, proposalId: number, at: Date): Promise<void> {
+  await db('proposal_versions')
+    .where({ proposal_id: proposalId })
+    .whereNull('superseded_at')
+    .update({ superseded_at: at })
+}
+
+export async function insertVersion(db: Database, version: NewVersion): Promise<number> {
+  const [id] = await db('proposal_versions').insert({
+    proposal_id: version.proposalId,
+    version_number: version.versionNumber,
+    snapshot: version.snapshot,
+    snapshot_sha256: version.sha256,
+    engine_version: version.engineVersion,
+    paper_id: version.paperId,
+    idempotency_key: version.idempotencyKey,
+    arrived_at: version.arrivedAt,
+    committed_at: version.committedAt,
+    submitted_by: version.submittedBy,
+  })
+  return Number(id)
+}
+
+/** Keeps names and institutes as they are today: both change later. */
+export async function insertVersionPeople(
+  db: Database,
+  versionId: number,
+  people: readonly Investigator[],
+): Promise<void> {
+  const known = people.flatMap(({ personId }) => (personId === null ? [] : [personId]))
+  const stages = await db('people').whereIn('id', known).select('id', 'career_stage')
+  await db('proposal_version_people').insert(
+    people.map((person) => ({
+      proposal_version_id: versionId,
+      person_id: person.personId,
+      name: person.name,
+      institute: person.institute,
+      career_stage: stages.find(({ id }) => id === person.personId)?.career_stage ?? null,
+      role: person.role,
+      position: person.position,
+    })),
+  )
 }

@@ -1,14 +1,10 @@
 import { hashPassword } from '../../lib/domain/people/password.ts'
+import { sortName } from '../../lib/domain/people/sortName.ts'
 import type { Database } from '../client.ts'
 import { demoPassword } from './accounts.ts'
 import { institutes, investigators, panel, staff, type SeedPerson } from './peopleData.ts'
 
 const long = new Date('2020-01-01T00:00:00Z')
-
-const sortName = (name: string) => {
-  const parts = name.split(' ')
-  return [parts.at(-1), ...parts.slice(0, -1)].join(', ')
-}
 
 /** Adds the institutes and people; all share one password, hashed once. Returns keys by name. */
 export async function seedPeople(db: Database): Promise<Map<string, number>> {

@@ -1,0 +1,116 @@
+import type { Database } from '../client.ts'
+import { atNow } from './clock.ts'
+import type { FeesRow, MoneyEntriesRow, WaiversRow } from '../tables.ts'
+
+export type FeeState = FeesRow['state']
+
+export async function findFee(db: Database, id: number): Promise<FeesRow | null> {
+  return (await db('fees').where({ id }).first()) ?? null
+}
+
+/** The fee of a proposal; null where there is none. */
+export async function feeOf(db: Database, proposalId: number): Promise<FeesRow | null> {
+  return (await db('fees').where({ proposal_id: proposalId }).first()) ?? null
+}
+
+/** The same, locked until the transaction ends: whatever settles or cancels it begins here. */
+export async function lockFee(db: Database, id: number): Promise<FeesRow | null> {
+  return (await db('fees').where({ id }).forUpdate().first()) ?? null
+}
+
+export async function insertFee(
+  db: Database,
+  fee: { proposalId: number; amountMinor: number; currency: string; dueAt: Date },
+): Promise<number> {
+  const [id] = await db('fees').insert({
+    proposal_id: fee.proposalId,
+    amount_minor: fee.amountMinor,
+    currency: fee.currency,
+    due_at: fee.dueAt,
+  })
+  return Number(id)
+}
+
+/** Moves a fee to another state if it still stands as read; false when someone was first. */
+export async function updateFee(
+  db: Database,
+  fee: Pick<FeesRow, 'id' | 'version' | 'state'>,
+  state: FeeState,
+): Promise<boolean> {
+  const count = await db('fees')
+    .where({ id: fee.id, version: fee.version, state: fee.state })
+    .update({ state, version: fee.version + 1, settled_at: atNow(db) })
+  return count === 1
+}
+
+/** Fees whose grace is over, that nobody has been asked to waive, of proposals still in the running. */
+export async function feesPastGrace(
+  db: Database,
+  now: Date,
+): Promise<{ feeId: number; proposalId: number; reference: string }[]> {
+  return db('fees as f')
+    .join('proposals as p', 'p.id', 'f.proposal_id')
+    .where('f.state', 'due')
+    .andWhere('f.due_at', '<=', now)
+    .whereIn('p.state', ['submitted', 'under-review'])
+    .whereNotExists(db('waivers').select('id').whereRaw("fee_id = f.id AND state = 'asked'"))
+    .orderBy('f.id')
+    .select({ feeId: 'f.id', proposalId: 'p.id', reference: 'p.reference' })
+}
+
+export interface MoneyMovement {
+  /** Unique name of the movement, e.g. 'billed:12': written twice, it fails. */
+  movement: string
+  feeId: number
+  from: MoneyEntriesRow['account']
+  to: MoneyEntriesRow['account']
+  amountMinor: number
+  currency: string
+}
+
+/** Two entries of the money ledger that sum to zero. */
+export async function moveMoney(db: Database, move: MoneyMovement): Promise<void> {
+  const common = { movement: move.movement, fee_id: move.feeId, currency: move.currency }
+  await db('money_entries').insert([
+    { ...common, account: move.to, amount_minor: move.amountMinor },
+    { ...common, account: move.from, amount_minor: -move.amountMinor },
+  ])
+}
+
+export async function insertWaiver(
+  db: Database,
+  waiver: { feeId: number; reason: string; askedBy: number },
+): Promise<number> {
+  const [id] = await db('waivers').insert({
+    fee_id: waiver.feeId,
+    reason: waiver.reason,
+    asked_by: waiver.askedBy,
+  })
+  return Number(id)
+}
+
+export async function findWaiver(db: Database, id: number): Promise<WaiversRow | null> {
+  return (await db('waivers').where({ id }).first()) ?? null
+}
+
+/** The last request to waive a fee. */
+export async function latestWaiver(db: Database, feeId: number): Promise<WaiversRow | null> {
+  return (await db('waivers').where({ fee_id: feeId }).orderBy('id', 'desc').first()) ?? null
+}
+
+/** Decides a request that is still open; false when it was decided before. */
+export async function closeWaiver(
+  db: Database,
+  id: number,
+  outcome: { state: 'granted' | 'refused'; note: string; decidedBy: number },
+): Promise<boolean> {
+  const count = await db('waivers')
+    .where({ id, state: 'asked' })
+    .update({
+      state: outcome.state,
+      decision_note: outcome.note,
+      decided_by: outcome.decidedBy,
+      decided_at: atNow(db),
+    })
+  return count === 1
+}

@@ -1,0 +1,93 @@
+import type { Database } from '../client.ts'
+import type { InvitationsRow } from '../tables.ts'
+import { utcIn, utcNow } from '../utcNow.ts'
+
+export interface NewInvitation {
+  tokenHash: string
+  email: string
+  name: string
+  role: InvitationsRow['role']
+  callId: number | null
+  panelId: number | null
+  instrumentId: number | null
+  invitedBy: number
+  lifeDays: number
+}
+
+export async function insertInvitation(db: Database, invitation: NewInvitation): Promise<number> {
+  const [id] = await db('invitations').insert({
+    token_hash: invitation.tokenHash,
+    email: invitation.email,
+    name: invitation.name,
+    role: invitation.role,
+    call_id: invitation.callId,
+    panel_id: invitation.panelId,
+    instrument_id: invitation.instrumentId,
+    invited_by: invitation.invitedBy,
+    expires_at: utcIn(db, 86_400 * invitation.lifeDays),
+  })
+  return id as number
+}
+
+export interface OpenInvitation extends InvitationsRow {
+  call_number: number | null
+  panel_name: string | null
+  instrument_name: string | null
+  inviter: string | null
+}
+
+/** An invitation that can still be accepted; null when it is unknown, used, withdrawn or too old. */
+export async function findOpenInvitation(db: Database, tokenHash: string): Promise<OpenInvitation | null> {
+  const row = await db('invitations as i')
+    .leftJoin('calls as c', 'c.id', 'i.call_id')
+    .leftJoin('panels as p', 'p.id', 'i.panel_id')
+    .leftJoin('instruments as n', 'n.id', 'i.instrument_id')
+    .leftJoin('people as b', 'b.id', 'i.invited_by')
+    .where('i.token_hash', tokenHash)
+    .whereNull('i.accepted_at')
+    .whereNull('i.withdrawn_at')
+    .andWhere('i.expires_at', '>', db.raw('UTC_TIMESTAMP(3)'))
+    .first<OpenInvitation | undefined>(
+      'i.*',
+      'c.number as call_number',
+      'p.name as panel_name',
+      'n.name as instrument_name',
+      'b.name as inviter',
+    )
+  return row ?? null
+}
+
+/** Takes an invitation; false when someone took it first. */
+export async function takeInvitation(db: Database, id: number, personId: number): Promise<boolean> {
+  const changed = await db('invitations')
+    .where({ id })
+    .whereNull('accepted_at')
+    .whereNull('withdrawn_at')
+    .update({ accepted_at: utcNow(db), accepted_by: personId })
+  return changed === 1
+}
+
+export async function withdrawInvitation(db: Database, id: number): Promise<boolean> {
+  const changed = await db('invitations')
+    .where({ id })
+    .whereNull('accepted_at')
+    .whereNull('withdrawn_at')
+    .update({ withdrawn_at: utcNow(db) })
+  return changed === 1
+}
+
+/** The next free number on a panel, under a lock, so that two members never share one. */
+export async function addPanelMember(
+  db: Database,
+  member: { panelId: number; personId: number; seat: 'chair' | 'deputy' | 'member' },
+): Promise<void> {
+  const taken = await db('panel_members').where({ panel_id: member.panelId }).forUpdate()
+  if (taken.some((row) => row.person_id === member.personId)) return
+  const number = Math.max(0, ...taken.map((row) => row.number)) + 1
+  await db('panel_members').insert({
+    panel_id: member.panelId,
+    person_id: member.personId,
+    seat: member.seat,
+    number,
+  })
+}

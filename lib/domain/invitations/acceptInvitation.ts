@@ -1,0 +1,36 @@
+import type { z } from 'zod'
+import { findOpenInvitation } from '@/db/queries/invitations'
+import { confirmEmail, findPersonByEmail, insertGrant, insertPerson } from '@/db/queries/people'
+import { refuse } from '@/lib/errors'
+import type { Context } from '../context'
+import { inTransaction } from '../inTransaction'
+import { hashPassword } from '../people/password'
+import { sortName } from '../people/sortName'
+import { secretHash } from '../sessions/secretHash'
+import { grantInvited } from './grantInvited'
+import type { acceptInvitationSchema } from './schema'
+
+/** Accepts an invitation with a new account; the mailed link proves the address. */
+export async function acceptInvitation(
+  ctx: Context,
+  input: z.output<typeof acceptInvitationSchema>,
+): Promise<{ email: string }> {
+  const passwordHash = await hashPassword(input.password)
+  return inTransaction(ctx, async (tx) => {
+    const invitation = await findOpenInvitation(tx.db, secretHash(input.token))
+    if (!invitation) throw refuse.closed('This invitation has been accepted, withdrawn or is too old.')
+    if (await findPersonByEmail(tx.db, invitation.email))
+      throw refuse.closed('This address has an account. Sign in with it, then open the link again.')
+    const personId = await insertPerson(tx.db, {
+      email: invitation.email,
+      name: input.name,
+      sortName: sortName(input.name),
+      institute: input.institute,
+      passwordHash,
+    })
+    await confirmEmail(tx.db, personId)
+    await insertGrant(tx.db, { personId, role: 'investigator' })
+    await grantInvited(tx, invitation, personId)
+    return { email: invitation.email }
+  })
+}

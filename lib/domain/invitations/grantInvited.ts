@@ -1,0 +1,33 @@
+import { addPanelMember, takeInvitation, type OpenInvitation } from '@/db/queries/invitations'
+import { insertGrant } from '@/db/queries/people'
+import { refuse } from '@/lib/errors'
+import type { Context } from '../context'
+import { writeLogbook } from '../logbook/writeLogbook'
+
+/** Takes the invitation and gives the role it promised; within the caller's transaction. */
+export async function grantInvited(tx: Context, invitation: OpenInvitation, personId: number): Promise<void> {
+  if (!(await takeInvitation(tx.db, invitation.id, personId)))
+    throw refuse.closed('This invitation has been accepted already.')
+  const grant = {
+    personId,
+    callId: invitation.call_id,
+    panelId: invitation.panel_id,
+    grantedBy: invitation.invited_by,
+  }
+  await insertGrant(tx.db, { ...grant, role: invitation.role, instrumentId: invitation.instrument_id })
+  if (invitation.panel_id !== null) {
+    // A chair also reads and scores.
+    if (invitation.role === 'chair') await insertGrant(tx.db, { ...grant, role: 'reviewer' })
+    await addPanelMember(tx.db, {
+      panelId: invitation.panel_id,
+      personId,
+      seat: invitation.role === 'chair' ? 'chair' : 'member',
+    })
+  }
+  await writeLogbook(tx, {
+    action: 'accept-invitation',
+    subject: { kind: 'invitation', id: invitation.id },
+    actingAs: 'visitor',
+    after: { personId, role: invitation.role },
+  })
+}
