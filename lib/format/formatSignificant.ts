@@ -16,7 +16,8 @@ const superscripts: Record<string, string> = {
 }
 
 /**
- * A number to so many significant figures; very large and very small ones as `8.0 × 10⁻¹⁶`.
+ * A number to at least so many significant figures (whole digits are never rounded away); very large and very
+ * small ones as `8.0 × 10⁻¹⁶`.
  * The plain form is kept from 0.001 to a million, where people read it faster.
  */
 export function formatSignificant(value: number | null | undefined, figures = 3): string {
