@@ -17,17 +17,19 @@ export async function panelAssignments(db: Database, panelId: number): Promise<P
     .where('a.panel_id', panelId)
     .whereNull('a.withdrawn_at')
     .orderBy(['a.proposal_id', 'a.id'])
-    .select<(Omit<PanelAssignment, 'begun'> & { begun: number })[]>({
-      id: 'a.id',
-      proposalId: 'a.proposal_id',
-      personId: 'a.person_id',
-      seat: 'a.seat',
-      assignedAt: 'a.assigned_at',
-      finishedAt: 'a.finished_at',
-      begun: db.raw(
-        'EXISTS (SELECT 1 FROM score_events s WHERE s.assignment_id = a.id) OR EXISTS (SELECT 1 FROM review_texts x WHERE x.assignment_id = a.id)',
+    .select<(Omit<PanelAssignment, 'begun'> & { begun: number })[]>(
+      {
+        id: 'a.id',
+        proposalId: 'a.proposal_id',
+        personId: 'a.person_id',
+        seat: 'a.seat',
+        assignedAt: 'a.assigned_at',
+        finishedAt: 'a.finished_at',
+      },
+      db.raw(
+        'EXISTS (SELECT 1 FROM score_events s WHERE s.assignment_id = a.id) OR EXISTS (SELECT 1 FROM review_texts x WHERE x.assignment_id = a.id) AS begun',
       ),
-    })
+    )
   return rows.map((row) => ({ ...row, begun: Boolean(Number(row.begun)) }))
 }
 

@@ -1,0 +1,45 @@
+import { z } from 'zod'
+import { panelKeySchema, rowKey } from '../panels/schema'
+
+export const seats = ['first', 'second', 'reader'] as const
+export type Seat = (typeof seats)[number]
+
+const reason = z.string().trim().min(3, 'Say in a few words why.').max(200, 'At most 200 characters.')
+
+export const assignSchema = panelKeySchema.extend({
+  pairs: z
+    .array(z.object({ proposalId: rowKey, personId: rowKey, seat: z.enum(seats) }))
+    .min(1, 'Choose a reviewer.')
+    .max(2000),
+})
+export type AssignInput = z.output<typeof assignSchema>
+
+export const takeOffSchema = panelKeySchema.extend({
+  assignmentIds: z.array(rowKey).min(1).max(2000),
+})
+export type TakeOffInput = z.output<typeof takeOffSchema>
+
+export const seatSchema = panelKeySchema.extend({ assignmentId: rowKey, seat: z.enum(seats) })
+export type SeatInput = z.output<typeof seatSchema>
+
+export const replaceSchema = panelKeySchema.extend({
+  assignmentId: rowKey,
+  personId: z.coerce
+    .number<string | number>('Choose who takes over.')
+    .int()
+    .positive('Choose who takes over.'),
+  reason,
+})
+export type ReplaceInput = z.output<typeof replaceSchema>
+
+export const suggestSchema = panelKeySchema.extend({
+  each: z.coerce
+    .number<string | number>()
+    .int()
+    .min(1, 'At least one reader.')
+    .max(14, 'At most 14 readers.'),
+})
+export type SuggestInput = z.output<typeof suggestSchema>
+
+export const remindSchema = panelKeySchema.extend({ personId: rowKey })
+export type RemindInput = z.output<typeof remindSchema>

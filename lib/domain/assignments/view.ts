@@ -1,0 +1,54 @@
+import { z } from 'zod'
+import { seats } from './schema'
+
+const reader = z.object({
+  assignmentId: z.number(),
+  personId: z.number(),
+  seat: z.enum(seats),
+  state: z.enum(['to-read', 'begun', 'finished']),
+})
+
+/** A proposal with its readers; those who may not read it are left out of `mayRead`. */
+export const assignmentRow = z.object({
+  proposalId: z.number(),
+  reviewNumber: z.string(),
+  title: z.string(),
+  kind: z.string(),
+  pages: z.number(),
+  readers: z.array(reader),
+  interests: z.array(z.object({ personId: z.number(), words: z.string() })),
+})
+export type AssignmentRow = z.output<typeof assignmentRow>
+
+export const panelReviewer = z.object({
+  personId: z.number(),
+  number: z.number(),
+  name: z.string(),
+  mayReview: z.boolean(),
+  hasDeclared: z.boolean(),
+  proposals: z.number(),
+  pages: z.number(),
+  finished: z.number(),
+  /** Review numbers of what is not finished. */
+  owed: z.array(z.string()),
+  remindedAt: z.string().nullable(),
+  /** Why no reminder can go now; null when one can. */
+  whyNotReminded: z.string().nullable(),
+})
+export type PanelReviewer = z.output<typeof panelReviewer>
+
+export const assignmentsView = z.object({
+  panelId: z.number(),
+  panelName: z.string(),
+  callId: z.number(),
+  callNumber: z.number(),
+  callSlug: z.string(),
+  phase: z.enum(['planned', 'open', 'closed', 'review', 'ranking', 'decided', 'archived']),
+  quorum: z.number(),
+  reviewsDueAt: z.string(),
+  rows: z.array(assignmentRow),
+  reviewers: z.array(panelReviewer),
+  /** How many groups of reviewers share no proposal with the others; one is what is wanted. */
+  groups: z.number(),
+})
+export type AssignmentsView = z.output<typeof assignmentsView>

@@ -1,0 +1,15 @@
+import { z } from 'zod'
+
+const id = z.coerce.number<number | string>().int().positive()
+
+export const panelKeySchema = z.object({ panelId: id })
+export type PanelKeyInput = z.output<typeof panelKeySchema>
+
+/** A panel's table: by the call's address, and the panel where a person leads two. */
+export const panelQuery = z.object({
+  call: z.string().min(1).max(60),
+  panel: z.coerce.number<string>().int().positive().optional(),
+})
+
+export const panelProposalSchema = panelKeySchema.extend({ proposalId: id })
+export const rowKey = id
