@@ -1,11 +1,29 @@
+import type { Cosmology } from '@/lib/science/cosmology'
 import type { ProposalContents } from '../proposals/types'
 import { computeTarget } from './computeTarget'
 import { comparisonOf, cosmologyOf } from './cosmologyOf'
 import { engineVersion } from './engineVersion'
 import { proposalVerdict } from './proposalVerdict'
 import { recordVersions } from './recordVersions'
+import { rememberedObservation } from './rememberedObservation'
+import { notAskedTwice } from './requestChecks'
 import { darkHours } from './seasonOf'
 import type { ObservationComputation, ProposalComputation } from './types'
+import { worstVerdict } from './worstVerdict'
+
+function computeObservations(contents: ProposalContents, cosmology: Cosmology): ObservationComputation[] {
+  const targets = new Map(contents.targets.map((target) => [target.id, target]))
+  return contents.observations.flatMap((observation): ObservationComputation[] => {
+    const target = targets.get(observation.targetId)
+    if (!target) return []
+    const mode = contents.modes.find(({ modeId }) => modeId === observation.modeId)
+    const one = rememberedObservation({ contents, target, observation, mode, cosmology })
+    const twice = notAskedTwice(observation, mode, contents.observations, targets)
+    if (!twice) return [one]
+    const verdict = worstVerdict([one.verdict, twice.verdict]) ?? one.verdict
+    return [{ ...one, checks: [...one.checks, twice], verdict }]
+  })
+}
 
 /**
  * Everything computed for a proposal: distances and hours of each target, exposure and checks of each observation,
@@ -26,7 +44,7 @@ export function computeProposal(contents: ProposalContents): ProposalComputation
       dates,
     }),
   )
-  const observations: ObservationComputation[] = []
+  const observations = computeObservations(contents, cosmology)
   const checks = observations.flatMap((observation) => observation.checks)
   const askedSeconds = contents.observations.reduce((sum, { askedSeconds: asked }) => sum + asked, 0)
   const darkSeconds = season.nights.reduce((sum, night) => sum + night.darkHours * 3600, 0)

@@ -32,6 +32,28 @@ export interface TargetComputation {
   comparison: { luminosityMpc: number; kpcPerArcsec: number; lookbackGyr: number } | null
 }
 
+/** What the exposure rests on, for those who want to check it. */
+export interface ExposureFacts {
+  /** Delivered image, full width at half maximum. */
+  imageArcsec: number
+  /** Radius of the aperture of best signal-to-noise, and its share of the light. */
+  apertureRadiusArcsec: number
+  enclosedFraction: number
+  pixels: number
+  skyAbArcsec2: number
+  skyBand: string
+  /** Of full well, in the brightest pixel. */
+  peakFraction: number
+  wavelengthA: number
+  regime: 'source' | 'sky' | 'read' | 'floor'
+  regimeShare: number
+  /** Time goes as the flux to this power, and as the luminosity distance to that. */
+  timeExponentOfFlux: number
+  timeExponentOfDistance: number
+  cosmologyMatters: boolean
+  warnings: string[]
+}
+
 export interface ObservationComputation {
   observationId: number
   targetId: number
@@ -41,8 +63,12 @@ export interface ObservationComputation {
   subExposures: number | null
   subExposureSeconds: number | null
   snrReached: number | null
+  /** What limits it, in a sentence. */
   regime: string | null
   observedFeatureA: number | null
+  /** Dark hours within the Moon and date limits asked for; null without a position. */
+  usableHours: number | null
+  exposure: ExposureFacts | null
   checks: FeasibilityCheck[]
   verdict: Verdict
   refusal: string | null
