@@ -59,6 +59,8 @@ export const paths = {
     health: () => '/api/health',
     stripeWebhook: () => '/api/webhooks/stripe',
     table: (name: string) => `/api/tables/${name}`,
+    reviewRecomputed: (assignment: number | string, cosmology: string) =>
+      `/api/reviews/${part(String(assignment))}/recomputed?cosmology=${part(cosmology)}`,
   },
 } as const
 
