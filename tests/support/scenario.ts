@@ -1,5 +1,6 @@
 import { randomBytes } from 'node:crypto'
 import type { Database } from '@/db/client'
+import { referenceFrom } from '@/lib/domain/proposals/reference'
 import type { ObjectStore } from '@/lib/services/storage/ObjectStore'
 import { makeCall, type ScenarioCall, type ScenarioCallOptions } from './scenario/call'
 import { makeDraft, type ScenarioDraft } from './scenario/draft'
@@ -16,14 +17,6 @@ export interface Scenario extends ScenarioFacility, ScenarioCall, ScenarioPeople
   tag: string
 }
 
-const alphabet = '0123456789ABCDEFGHJKMNPQRSTVWXYZ'
-
-/** A public reference in the right shape; its check character is not computed here. */
-export function anyReference(): string {
-  const letters = [...randomBytes(6)].map((byte) => alphabet[byte % 32] ?? '0').join('')
-  return `${letters.slice(0, 3)}-${letters.slice(3)}`
-}
-
 /** Builds the scenario in `db`: a transaction that is rolled back, or a database of the test's own. */
 export async function makeScenario(db: Database, options: ScenarioOptions = {}): Promise<Scenario> {
   const tag = randomBytes(4).toString('hex')
@@ -31,7 +24,7 @@ export async function makeScenario(db: Database, options: ScenarioOptions = {}):
   const call = await makeCall(db, tag, facility, options)
   const people = await makePeople(db, tag, facility, call)
   const draft = await makeDraft(db, {
-    reference: anyReference(),
+    reference: referenceFrom(randomBytes(5)),
     facility,
     call,
     pi: people.pi,

@@ -31,6 +31,8 @@ export interface PaymentNotice {
   createdAt: Date
   sessionId: string | null
   paymentId: string | null
+  /** What was sent along as `reference` when the checkout was made. */
+  reference: string | null
   failure: string | null
   body: string
 }

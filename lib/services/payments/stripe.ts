@@ -71,6 +71,7 @@ export function stripePayments(settings: StripeSettings): Payments {
               },
             ],
             metadata: { reference: request.reference },
+            payment_intent_data: { metadata: { reference: request.reference } },
             success_url: request.successUrl,
             cancel_url: request.cancelUrl,
             expires_at: Math.floor(request.expiresAt.getTime() / 1000),
@@ -138,6 +139,7 @@ function readNotice(
     createdAt: new Date(event.created * 1000),
     sessionId: isSession ? object.id : null,
     paymentId: isSession ? idOf(object.payment_intent) : isIntent ? object.id : null,
+    reference: isSession || isIntent ? (object.metadata?.reference ?? null) : null,
     failure: isIntent ? (object.last_payment_error?.message ?? null) : null,
     body,
   }

@@ -1,0 +1,42 @@
+import { feeOf, insertWaiver, latestWaiver, lockFee } from '@/db/queries/fees'
+import { authorize } from '@/lib/auth/authorize'
+import { refuse } from '@/lib/errors'
+import type { ActingContext } from '../context'
+import { inTransaction } from '../inTransaction'
+import { writeLogbook } from '../logbook/writeLogbook'
+import { readContents } from '../proposals/readContents'
+import { mayAskForWaiver } from './policy'
+import { whyNotPayable } from './rules'
+
+/** Asks the office to waive the fee of a proposal. Until it is decided, the proposal does not lapse for the fee. */
+export async function askForWaiver(
+  ctx: ActingContext,
+  input: { reference: string; reason: string },
+): Promise<{ waiverId: number }> {
+  return inTransaction(ctx, async (tx) => {
+    const contents = await readContents(tx.db, input.reference)
+    authorize(mayAskForWaiver(tx.actor, contents))
+    const known = await feeOf(tx.db, contents.id)
+    const fee = known && (await lockFee(tx.db, known.id))
+    if (!fee) throw refuse.closed('Nothing is owed for this proposal.')
+    const why = whyNotPayable(fee.state)
+    if (why) throw refuse.closed(why)
+    const last = await latestWaiver(tx.db, fee.id)
+    if (last?.state === 'asked')
+      throw refuse.closed('A waiver has been asked for already. The office decides it.')
+    if (last?.state === 'refused')
+      throw refuse.closed('A waiver was asked for and refused. Write to the office.')
+    const waiverId = await insertWaiver(tx.db, {
+      feeId: fee.id,
+      reason: input.reason,
+      askedBy: tx.actor.personId,
+    })
+    await writeLogbook(tx, {
+      action: 'fee.ask-waiver',
+      subject: { kind: 'proposal', id: contents.reference },
+      actingAs: 'investigator',
+      after: { waiverId },
+    })
+    return { waiverId }
+  })
+}
