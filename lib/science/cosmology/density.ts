@@ -35,7 +35,8 @@ export function createDensity(p: CosmologyParameters): Density {
   const flat = p.Ode0 === 'flat'
   const Ode0 = p.Ode0 === 'flat' ? 1 - Om0 - Ogamma0 - Onu0 : p.Ode0
   const Ok0 = flat ? 0 : 1 - Om0 - Ode0 - Ogamma0 - Onu0
-  const constant = w0 === -1 && wa === 0
+  // Without dark energy its exponent must not be looked at: it may overflow.
+  const constant = (w0 === -1 && wa === 0) || Ode0 === 0
   const masslessRadiation = Ogamma0 + Onu0
 
   const darkEnergy = constant
@@ -78,7 +79,7 @@ export function createDensity(p: CosmologyParameters): Density {
         Ogamma0 * neutrinos.slope(x) * onePlusZ ** 4 +
         3 * Om0 * onePlusZ ** 3 +
         2 * Ok0 * onePlusZ ** 2 +
-        darkEnergy(x) * (3 * (1 + w0 + wa) - 3 * wa * Math.exp(-x))
+        (constant ? 0 : darkEnergy(x) * (3 * (1 + w0 + wa) - 3 * wa * Math.exp(-x)))
       )
     },
   }
