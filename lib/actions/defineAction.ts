@@ -11,9 +11,11 @@ import { readActor } from '@/lib/auth/readActor'
 import { requestFacts } from '@/lib/auth/requestFacts'
 import type { Actor } from '@/lib/domain/actor'
 import type { Context } from '@/lib/domain/context'
+import { stampArrival } from '@/lib/domain/submission/stampArrival'
 import { refuse } from '@/lib/errors'
+import { services } from '@/lib/services/services'
 import { failure } from './failure'
-import { fieldErrorsOf } from './fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import type { ActionResult } from './result'
 
 type ActorOf<N extends ActionName> = (typeof access)['actions'][N] extends 'anyone' ? Actor | null : Actor
@@ -22,7 +24,12 @@ interface ActionSpec<N extends ActionName, S extends z.ZodType, R> {
   /** Row of the access matrix. */
   name: N
   schema: S
-  run: (ctx: Context & { readonly actor: ActorOf<N> }, input: z.output<S>) => Promise<R>
+  run: (
+    ctx: Context & { readonly actor: ActorOf<N> },
+    input: z.output<S>,
+    /** When the request reached us, by the database's clock. */
+    arrivedAt: Date,
+  ) => Promise<R>
   /** Pages to make anew after success. */
   revalidate?: (data: R, input: z.output<S>) => string | string[]
   /** Where to go after success; outside any try, since a redirect throws. */
@@ -42,6 +49,8 @@ export function defineAction<N extends ActionName, S extends z.ZodType, R>(
     let data: R
     let parsed: z.output<S>
     try {
+      // First of all: a deadline is held against the arrival, however long the rest takes.
+      const arrivedAt = await stampArrival(services().db)
       // Next refuses a foreign origin but lets a missing one pass.
       const origin = (await headers()).get('origin')
       if (origin !== request.origin) throw refuse.forbidden('This request did not come from our own pages.')
@@ -62,7 +71,7 @@ export function defineAction<N extends ActionName, S extends z.ZodType, R>(
         throw refuse.invalid('Something here needs mending.', fieldErrors)
       }
       parsed = result.data
-      data = await spec.run(contextFor(actor as ActorOf<N>, request), parsed)
+      data = await spec.run(contextFor(actor as ActorOf<N>, request), parsed, arrivedAt)
     } catch (error) {
       unstable_rethrow(error)
       return failure(error, spec.name, request.id)
