@@ -28,18 +28,18 @@ export async function receiptOfPayment(db: Database, paymentId: number): Promise
   return (await db('receipts').where({ payment_id: paymentId }).first()) ?? null
 }
 
-/** The receipt of a fee with what was paid; the last one where a fee was paid twice. */
-export async function receiptOfFee(
-  db: Database,
-  feeId: number,
-): Promise<{
+/** A receipt with what was paid. */
+export interface Receipt {
   number: string
   payer: string
   paidAt: Date
   amountMinor: number
   currency: string
   cardLast4: string | null
-} | null> {
+}
+
+/** The receipt of a fee; the last one where a fee was paid twice. */
+export async function receiptOfFee(db: Database, feeId: number): Promise<Receipt | null> {
   const row = await db('receipts as r')
     .join('payments as p', 'p.id', 'r.payment_id')
     .where({ 'r.fee_id': feeId })
@@ -53,14 +53,13 @@ export async function receiptOfFee(
       'p.currency',
       'p.card_last4',
     )
-  return row
-    ? {
-        number: row.number,
-        payer: row.payer,
-        paidAt: row.succeeded_at ?? row.created_at,
-        amountMinor: row.amount_minor,
-        currency: row.currency,
-        cardLast4: row.card_last4,
-      }
-    : null
+  if (!row) return null
+  return {
+    number: row.number,
+    payer: row.payer,
+    paidAt: row.succeeded_at ?? row.created_at,
+    amountMinor: row.amount_minor,
+    currency: row.currency,
+    cardLast4: row.card_last4,
+  }
 }

@@ -3,26 +3,36 @@ import { env } from '@/lib/env'
 import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
 import { relayLetters } from './relayLetters'
+import { settleFees } from './settleFees'
 
-const kept = globalThis as typeof globalThis & { noctuaryJobs?: NodeJS.Timeout }
+const kept = globalThis as typeof globalThis & { noctuaryJobs?: NodeJS.Timeout[] }
 
-/** Runs the letter relay every few seconds; one run at a time, and a failure waits for the next. */
-export function startJobs(): void {
-  if (kept.noctuaryJobs) return
+/** Runs a job every so many seconds; one run at a time, and a failure waits for the next. */
+function every(seconds: number, name: string, run: () => Promise<void>): NodeJS.Timeout {
   let isBusy = false
   const tick = async () => {
     if (isBusy) return
     isBusy = true
     try {
-      const { db, mail } = services()
-      const report = await relayLetters(db, mail)
-      if (report.sent + report.delayed + report.parked > 0) log.info(report, 'letters relayed')
+      await run()
     } catch (error) {
-      log.error({ err: error }, 'the letter relay failed')
+      log.error({ err: error, job: name }, 'a job failed')
     } finally {
       isBusy = false
     }
   }
-  kept.noctuaryJobs = setInterval(() => void tick(), env().LETTER_RELAY_SECONDS * 1000)
-  kept.noctuaryJobs.unref()
+  const timer = setInterval(() => void tick(), seconds * 1000)
+  timer.unref()
+  return timer
+}
+
+async function relay(): Promise<void> {
+  const { db, mail } = services()
+  const report = await relayLetters(db, mail)
+  if (report.sent + report.delayed + report.parked > 0) log.info(report, 'letters relayed')
+}
+
+/** Starts the scheduled work of this process, once. */
+export function startJobs(): void {
+  kept.noctuaryJobs ??= [every(env().LETTER_RELAY_SECONDS, 'letters', relay), every(60, 'fees', settleFees)]
 }

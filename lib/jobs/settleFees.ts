@@ -1,0 +1,14 @@
+import 'server-only'
+import { lapseFees } from '@/lib/domain/fees/lapseFees'
+import { reconcilePayments } from '@/lib/domain/fees/reconcilePayments'
+import { log } from '@/lib/log'
+import { jobContext } from './jobContext'
+
+/** Asks after open payments first, so that nobody lapses whose money has come without its notice. */
+export async function settleFees(): Promise<void> {
+  const ctx = jobContext()
+  const report = await reconcilePayments(ctx)
+  const lapsed = report.unanswered === 0 ? await lapseFees(ctx) : 0
+  if (report.settled + report.refunded + report.unanswered + lapsed > 0)
+    log.info({ ...report, lapsed, requestId: ctx.request.id }, 'fees looked through')
+}
