@@ -33,7 +33,7 @@ export function SeasonChartTurned({ picture, moons, target, monthValues }: Seaso
             className="absolute right-2 -translate-y-1/2 text-right text-caption font-medium text-ink"
             style={{ top: down(month.first + month.count / 2) }}
           >
-            {month.name.slice(0, 3)}
+            {month.count >= 6 ? month.name.slice(0, 3) : ''}
             {monthValues ? (
               <span className="block text-tick font-normal text-muted">{monthValues[index]}</span>
             ) : null}

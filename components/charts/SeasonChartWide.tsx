@@ -1,10 +1,14 @@
 import { useId } from 'react'
 import { classNames } from '@/components/ui/classNames'
-import { seasonHours } from './geometry/season'
+import { seasonHours, type SeasonMonth } from './geometry/season'
 import { hourLabels } from './geometry/seasonLabels'
 import { SeasonNights } from './SeasonNights'
 import { SeasonNotes } from './SeasonNotes'
 import type { SeasonChartProps } from './seasonTypes'
+
+/** A month cut short by the season's edge has room for less of its name, or for none. */
+const monthName = ({ name, count }: SeasonMonth) =>
+  count >= 14 ? name : count >= 6 ? name.slice(0, 3) : '\u00a0'
 
 const height = 312
 const width = 1176
@@ -67,14 +71,14 @@ export function SeasonChartWide({ picture, moons, target, notes = [], monthValue
         {picture.months.map((month, index) => (
           <div
             key={month.name}
-            className="border-ink text-center text-ink"
+            className="min-w-0 text-center text-ink"
             style={{ flex: `${month.count} 0 0` }}
           >
-            <div className={classNames('flex justify-between', 'h-1.5')}>
+            <div className="flex h-1.5 justify-between">
               <span className="w-px bg-ink" />
               {index === picture.months.length - 1 ? <span className="w-px bg-ink" /> : null}
             </div>
-            <div className="truncate text-caption font-medium">{month.name}</div>
+            <div className="truncate text-caption font-medium">{monthName(month)}</div>
             {monthValues ? <div className="truncate pt-1">{monthValues[index]}</div> : null}
           </div>
         ))}

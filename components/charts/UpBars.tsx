@@ -58,7 +58,7 @@ export function UpBars({ rows, months, maxHours, label }: UpBarsProps) {
           {months.map((month) => (
             <div
               key={month.name}
-              className="overflow-hidden text-center"
+              className="min-w-0 overflow-hidden text-center"
               style={{ flex: `${month.count} 0 0` }}
             >
               <span className="block h-1.5 w-px bg-ink" />

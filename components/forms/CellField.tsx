@@ -26,6 +26,7 @@ export function CellField({
     <span className="block">
       <input
         {...field.register()}
+        defaultValue={field.initialText}
         id={field.id}
         aria-label={label}
         inputMode={inputMode}

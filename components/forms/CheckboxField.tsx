@@ -32,6 +32,11 @@ export function CheckboxField({ name, label, help, value, offReason }: CheckboxF
           id={id}
           type="checkbox"
           value={value}
+          defaultChecked={
+            value === undefined
+              ? field.initial === true
+              : Array.isArray(field.initial) && field.initial.includes(value)
+          }
           disabled={Boolean(offReason)}
           aria-invalid={field.error ? true : undefined}
           aria-describedby={describedBy(field, Boolean(shownHelp))}

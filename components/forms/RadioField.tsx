@@ -36,6 +36,7 @@ export function RadioField({ name, label, help, hideLabel, options, offReason }:
                 id={id}
                 type="radio"
                 value={option.value}
+                defaultChecked={field.initial === option.value}
                 disabled={Boolean(offReason)}
                 aria-describedby={describedBy(field, Boolean(shownHelp), option.help ? `${id}-about` : false)}
                 className="radio"

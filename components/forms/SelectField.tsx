@@ -68,6 +68,7 @@ export function SelectField(props: SelectFieldProps) {
       <div className={`relative ${widthClasses[width]}`}>
         <select
           {...field.register()}
+          defaultValue={field.initialText}
           id={field.id}
           disabled={Boolean(offReason)}
           aria-invalid={field.error ? true : undefined}

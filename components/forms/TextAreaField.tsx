@@ -44,6 +44,7 @@ export function TextAreaField(props: TextAreaFieldProps) {
     >
       <textarea
         {...field.register()}
+        defaultValue={field.initialText}
         id={field.id}
         rows={rows}
         readOnly={Boolean(offReason)}

@@ -56,6 +56,7 @@ export function TextField(props: TextFieldProps) {
       <div className={`relative ${widthClasses[width]}`}>
         <input
           {...field.register()}
+          defaultValue={field.initialText}
           id={field.id}
           type={type}
           readOnly={Boolean(offReason)}

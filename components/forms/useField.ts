@@ -1,5 +1,6 @@
 'use client'
 
+import { useState } from 'react'
 import { useFormContext, type RegisterOptions } from 'react-hook-form'
 import { useActionFormState } from './ActionFormContext'
 import { fieldId } from './fieldId'
@@ -7,7 +8,8 @@ import { fieldId } from './fieldId'
 /** Everything a field needs from its form: ids that tie label, help and message together, and the current message. */
 export function useField(name: string, options?: RegisterOptions) {
   const { id: formId, busy } = useActionFormState()
-  const { register, trigger, getFieldState, formState, control } = useFormContext()
+  const { register, trigger, getFieldState, getValues, formState, control } = useFormContext()
+  const [initial] = useState<unknown>(() => getValues(name))
   const id = fieldId(formId, name)
   const { error } = getFieldState(name, formState)
 
@@ -25,6 +27,9 @@ export function useField(name: string, options?: RegisterOptions) {
     helpId: `${id}-help`,
     errorId: `${id}-error`,
     recheck,
+    /** What the server renders, so that nothing is empty until the page has come to life. */
+    initial,
+    initialText: typeof initial === 'string' || typeof initial === 'number' ? String(initial) : undefined,
     register: () => register(name, { ...options, onChange: recheck }),
   }
 }

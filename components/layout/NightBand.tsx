@@ -25,11 +25,17 @@ export interface NightBandProps {
   href: string
 }
 
+/** Characters of words and date that leave room for days, hours and minutes. */
+const longestWithMinutes = 36
+
 /** Tonight at the observatory, across the top of every page: deadline, night, clocks. */
 export function NightBand({ site, now, utcOffsetHours, next, href }: NightBandProps) {
   const night = nightAt(site, eveningDateAt(site, now))
   const geometry = nightBandGeometry(night, utcOffsetHours, (at) => sunAltitudeDeg(site, at))
   const serverNowMs = now.getTime()
+  const date = next ? (next.dayOnly ? formatDay(next.at) : formatUtc(next.at)) : ''
+  // The text has 320 px: where the date is long, the minutes left give way to it.
+  const parts = next?.dayOnly ? 1 : (next?.words.length ?? 0) + date.length > longestWithMinutes ? 2 : 3
   return (
     <div className="night-band" data-no-print>
       <div className="night-band-next">
@@ -38,24 +44,13 @@ export function NightBand({ site, now, utcOffsetHours, next, href }: NightBandPr
             {next.words}{' '}
             <strong className="font-semibold text-lamp">
               <span className="max-lg:hidden">
-                <Countdown
-                  untilMs={next.at.getTime()}
-                  serverNowMs={serverNowMs}
-                  parts={next.dayOnly ? 1 : 3}
-                />
+                <Countdown untilMs={next.at.getTime()} serverNowMs={serverNowMs} parts={parts} />
               </span>
               <span className="lg:hidden">
-                <Countdown
-                  untilMs={next.at.getTime()}
-                  serverNowMs={serverNowMs}
-                  parts={next.dayOnly ? 1 : 2}
-                />
+                <Countdown untilMs={next.at.getTime()} serverNowMs={serverNowMs} parts={Math.min(2, parts)} />
               </span>
-            </strong>
-            <span className="text-muted max-lg:hidden">
-              {' '}
-              · {next.dayOnly ? formatDay(next.at) : formatUtc(next.at)}
-            </span>
+            </strong>{' '}
+            <span className="text-muted max-lg:hidden">· {date}</span>
           </>
         ) : null}
       </div>
