@@ -30,6 +30,8 @@ export const paths = {
   proposal: (reference: string) => `/proposals/${part(reference)}`,
   proposalSection: (reference: string, section: ProposalSection) =>
     `/proposals/${part(reference)}/${section}`,
+  proposalPaper: (reference: string, paper: number | string) =>
+    `/proposals/${part(reference)}/papers/${part(String(paper))}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
   proposalHistory: (reference: string) => `/proposals/${part(reference)}/history`,
   proposalOutcome: (reference: string) => `/proposals/${part(reference)}/outcome`,

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { fieldErrorsOf } from '@/lib/actions/fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'

@@ -1,6 +1,6 @@
 import type { z } from 'zod'
 import { refuse } from '@/lib/errors'
-import { fieldErrorsOf } from '@/lib/actions/fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { openForEditing } from './openProposal'

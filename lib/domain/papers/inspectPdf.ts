@@ -1,0 +1,56 @@
+import { EncryptedPDFError, PDFDocument } from 'pdf-lib'
+import { refuse } from '@/lib/errors'
+import { countInWords, formatBytes } from '@/lib/format'
+import { activeContent } from './activeContent'
+import { fileKind } from './fileKind'
+import { maxPaperBytes } from './limits'
+import { pdfText } from './pdfText'
+
+export interface Inspected {
+  pages: number
+}
+
+const no = (sentence: string) => refuse.field('file', sentence)
+
+/** A PDF ends with its own mark; what follows, or the lack of it, betrays a cut or a disguised file. */
+function checkEnd(bytes: Uint8Array): void {
+  const tail = Buffer.from(bytes.subarray(Math.max(0, bytes.length - 4096))).toString('latin1')
+  const end = tail.lastIndexOf('%%EOF')
+  if (end < 0) throw no('The file ends in the middle: it did not arrive whole, or was cut before.')
+  if (tail.slice(end + 5).replace(/[\s\0]/g, '').length > 0)
+    throw no('Something else hangs on the end of this PDF. Print it to a new PDF and send that.')
+}
+
+async function opened(bytes: Uint8Array): Promise<PDFDocument> {
+  try {
+    return await PDFDocument.load(bytes, { updateMetadata: false, throwOnInvalidObject: true })
+  } catch (error) {
+    if (error instanceof EncryptedPDFError)
+      throw no('The file is locked with a password. Send it without one: reviewers could not open it.')
+    throw no('The file says it is a PDF but cannot be read as one. Export it anew and send that.')
+  }
+}
+
+/**
+ * Looks a document through before it is kept: what it is, whole, unlocked, passive, not too long.
+ * Each cause has one sentence, at the field `file`.
+ */
+export async function inspectPdf(bytes: Uint8Array, fileName: string, pageLimit: number): Promise<Inspected> {
+  if (bytes.length === 0) throw no(`${fileName} is empty.`)
+  if (bytes.length > maxPaperBytes)
+    throw no(`${fileName} has ${formatBytes(bytes.length)}; at most ${formatBytes(maxPaperBytes)} are taken.`)
+  const kind = fileKind(bytes)
+  if (kind !== 'pdf') throw no(`${fileName} is not a PDF: by its contents it is ${kind.instead}.`)
+  checkEnd(bytes)
+  const document = await opened(bytes)
+  const active = activeContent(document)
+  if (active)
+    throw no(`The PDF carries ${active}. Print it to a new PDF, which leaves that out, and send that.`)
+  const pages = document.getPageCount()
+  if (pages === 0) throw no('The PDF has no pages.')
+  if (pages > pageLimit)
+    throw no(`The PDF has ${pages} pages; this document may have ${countInWords(pageLimit, 'page')}.`)
+  if ((await pdfText(bytes)).pages.length !== pages)
+    throw no('The PDF counts its pages in two ways. Print it to a new PDF and send that.')
+  return { pages }
+}

@@ -1,0 +1,111 @@
+import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
+import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
+import { questionWords } from './questionWords'
+
+type Words = (entry: EntryValues) => string
+
+const quoted = (text: string) =>
+  text === '' ? 'an empty one' : `“${text.length > 60 ? `${text.slice(0, 57)}…` : text}”`
+
+const paperNames: Readonly<Record<string, string>> = {
+  justification: 'the justification',
+  'team-expertise': 'the page on the team',
+}
+
+const accessWords: Readonly<Record<string, string>> = {
+  read: 'may read it',
+  edit: 'may change it',
+  deputy: 'may change and send it',
+}
+
+const target = (value: unknown) => textAt(value, 'target', 'name') ?? 'a target'
+
+function askedWords({ before, after }: EntryValues): string {
+  const total = (value: unknown) =>
+    (Array.isArray(field(value, 'asked')) ? (field(value, 'asked') as unknown[]) : []).reduce<number>(
+      (sum, row) => sum + (numberAt(row, 'askedSeconds') ?? 0),
+      0,
+    )
+  return `Asked hours: ${formatHoursFromSeconds(total(before))} to ${formatHoursFromSeconds(total(after))}`
+}
+
+function paperWords({ before, after }: EntryValues): string {
+  const what = paperNames[textAt(after, 'kind') ?? ''] ?? 'a document'
+  const name = textAt(after, 'fileName') ?? 'a file'
+  const old = textAt(before, 'fileName')
+  return old ? `Papers: ${name} in place of ${old}` : `Papers: ${name} as ${what}`
+}
+
+function sectionWords({ before, after }: EntryValues): string {
+  const read = (value: unknown): string[] => {
+    const text = textAt(value, 'sections_done')
+    return text ? (JSON.parse(text) as string[]) : []
+  }
+  const [was, is] = [read(before), read(after)]
+  const added = is.filter((one) => !was.includes(one))
+  const taken = was.filter((one) => !is.includes(one))
+  return added.length > 0 ? `Marked ${formatList(added)} as done` : `Opened ${formatList(taken)} again`
+}
+
+/** The acts an investigator may read about, each in a sentence; what is not listed is not shown. */
+export const entryWords: Readonly<Record<string, Words>> = {
+  'proposal.begin': ({ after }) => `Began the proposal ${quoted(textAt(after, 'title') ?? '')}`,
+  'proposal.question': questionWords,
+  'proposal.cosmology': ({ before, after }) => {
+    const name = (value: unknown) => {
+      const json = textAt(value, 'cosmology_parameters')
+      return json ? textAt(JSON.parse(json), 'name') : null
+    }
+    const chosen = name(after)
+    const was = name(before)
+    if (chosen && was && chosen !== was) return `Chose ${chosen} in place of ${was}`
+    return chosen ? `Changed the parameters of ${chosen}` : 'Chose another cosmology to stand beside'
+  },
+  'proposal.section': sectionWords,
+  'proposal.put-away': () => 'Put the draft away',
+  'proposal.take-back': () => 'Took the draft back',
+  'proposal.send': () => 'Sent the proposal in',
+  'proposal.reopen': () => 'Reopened the proposal; what was sent stands meanwhile',
+  'proposal.withdraw': () => 'Withdrew the proposal',
+  'proposal.lapse': () => 'The proposal lapsed: its fee was not settled in time',
+  'people.add': ({ after }) =>
+    `Named ${textAt(after, 'name') ?? 'somebody'}, who ${accessWords[textAt(after, 'access') ?? ''] ?? 'may read it'}`,
+  'people.agree': () => 'Agreed to be named',
+  'people.remove': ({ before }) => `Took ${textAt(before, 'name') ?? 'somebody'} off`,
+  'people.leave': () => 'Left the proposal',
+  'people.access': ({ after }) =>
+    `${textAt(after, 'name') ?? 'Somebody'} ${accessWords[textAt(after, 'access') ?? ''] ?? 'may read it'} now`,
+  'people.order': () => 'Changed the order of names',
+  'papers.add': paperWords,
+  'papers.remove': ({ before }) => `Papers: took ${textAt(before, 'fileName') ?? 'a file'} off`,
+  'target.add': ({ after }) => `Added ${target(after)}`,
+  'target.save': ({ before, after }) => {
+    const [was, is] = [target(before), target(after)]
+    return was === is ? `Changed ${is}` : `Renamed ${was} to ${is}`
+  },
+  'target.remove': ({ before }) => `Took ${target(before)} off`,
+  'target.restore': ({ after }) => `Brought ${target(after)} back`,
+  'target.reorder': () => 'Changed the order of targets',
+  'target.import': ({ after }) => {
+    const names = namesAt(after, 'names')
+    return names.length > 4
+      ? `Added ${formatNumber(names.length)} targets from a list`
+      : `Added ${formatList(names)}`
+  },
+  'observation.add': () => 'Added an observation',
+  'observation.save': ({ before, after }) => {
+    const asked = (value: unknown) => numberAt(value, 'observation', 'askedSeconds')
+    const [was, is] = [asked(before), asked(after)]
+    return was !== null && is !== null && was !== is
+      ? `Asked hours of an observation: ${formatHoursFromSeconds(was)} to ${formatHoursFromSeconds(is)}`
+      : 'Changed an observation'
+  },
+  'observation.remove': () => 'Took an observation off',
+  'observation.ask': askedWords,
+  'constraints.save': ({ after }) => `Changed the conditions ${quoted(textAt(after, 'set', 'name') ?? '')}`,
+  'fee.pay': () => 'The fee was paid',
+  'fee.ask-waiver': () => 'Asked for the fee to be waived',
+  'fee.decide-waiver': ({ after }) =>
+    textAt(after, 'decision') === 'granted' ? 'Waived the fee' : 'Did not waive the fee',
+  answerQuestion: () => 'Answered a question about the request',
+}
