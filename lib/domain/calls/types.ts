@@ -1,3 +1,5 @@
+import type { SeasonGrid } from '@/lib/science/sky'
+
 /** Where a call stands: planned, open and closed by the clock, the rest by acts of the office and the chair. */
 export type CallPhase = 'planned' | 'open' | 'closed' | 'review' | 'ranking' | 'decided' | 'archived'
 
@@ -46,4 +48,21 @@ export interface Call extends CallDates {
   /** Null when the call has no fee: then nothing on screen speaks of one. */
   currency: string | null
   version: number
+}
+
+/** Sun and Moon over a season at the site. */
+export interface Season {
+  grid: SeasonGrid
+  phases: { phase: string; at: Date }[]
+  /** Astronomical night in all, hours. */
+  darkHours: number
+}
+
+/** What a call offers on one telescope. */
+export interface TelescopeOfferView {
+  telescope: string
+  apertureM: number
+  instruments: string[]
+  nights: number
+  darkSeconds: number
 }

@@ -1,0 +1,65 @@
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import type { CallCriterion, CallKind } from '@/lib/domain/calls/types'
+import { formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
+
+interface CallRulesProps {
+  kinds: readonly CallKind[]
+  criteria: readonly CallCriterion[]
+  /** Null when the call has no fee: then nothing here speaks of one. */
+  currency: string | null
+  graceUntil: Date
+}
+
+/** Kinds of proposal with their limits, and what proposals are judged by. */
+export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesProps) {
+  const parts = criteria.reduce((sum, criterion) => sum + criterion.weight, 0)
+  return (
+    <>
+      <SectionHeading title="Kinds of proposal" />
+      <ul className="plain-list mt-3">
+        {kinds.map((kind) => (
+          <li key={kind.id} className="border-t border-rule py-3">
+            <span className="font-semibold">{kind.title}</span>
+            <span className="block text-table text-muted">
+              {kind.pageLimit} pages of justification
+              {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
+              {currency
+                ? `, ${kind.feeMinor > 0 ? formatMoneyShort(kind.feeMinor, currency) : 'no fee'}`
+                : ''}
+              {kind.closesAt ? `, closes ${formatUtc(kind.closesAt)}` : ''}
+            </span>
+          </li>
+        ))}
+      </ul>
+      {currency ? (
+        <p className="mt-3 text-table text-muted">
+          A proposal is in as soon as it is sent; its fee is settled by {formatUtc(graceUntil)}, by card or by
+          a waiver.
+        </p>
+      ) : null}
+      <div className="mt-10">
+        <SectionHeading title="What proposals are judged by" />
+      </div>
+      <ol className="plain-list mt-3">
+        {criteria.map((criterion) => (
+          <li
+            key={criterion.id}
+            className="flex items-baseline justify-between gap-6 border-t border-rule py-3"
+          >
+            <span>
+              <span className="font-semibold">{criterion.title}</span>
+              <span className="block text-table text-muted">{criterion.prompt}</span>
+            </span>
+            <span className="shrink-0 text-table">
+              counts {criterion.weight} of {parts}
+            </span>
+          </li>
+        ))}
+      </ol>
+      <p className="mt-3 text-table text-muted">
+        Scores run from 0 to 10 in halves, 10 best. Reviewers see no names, and nobody reviews where they have
+        an interest.
+      </p>
+    </>
+  )
+}
