@@ -1,0 +1,116 @@
+import { standingAwards, standingDecisions } from '@/db/queries/decisions'
+import { offeredTime } from '@/db/queries/panel'
+import { currentRanking } from '@/db/queries/rankings'
+import { snapshotHeads } from '@/db/queries/snapshotHeads'
+import type { ActingContext } from '../context'
+import { openPanel } from '../panels/openPanel'
+import { planNights } from './planNights'
+import type { WantedLine } from './wantedLines'
+
+export interface NightsLine extends WantedLine {
+  givenSeconds: number
+  isReserve: boolean
+  service: 'queue' | 'visitor'
+  conditions: string
+  /** What the suggestion gives; with why not where it gives nothing. */
+  suggestedSeconds: number
+  whyNot: { reason: 'not-possible' | 'too-little-left' | 'set-aside'; left: number } | null
+}
+
+export interface NightsRow {
+  proposalId: number
+  reviewNumber: string
+  title: string
+  rank: number
+  isAbove: boolean
+  setAside: boolean
+  decisionVersion: number
+  lines: NightsLine[]
+}
+
+export interface NightsView {
+  panelId: number
+  callNumber: number
+  callSlug: string
+  phase: string
+  hasRanking: boolean
+  line: number
+  rows: NightsRow[]
+  telescopes: {
+    id: number
+    name: string
+    offeredSeconds: number
+    givenSeconds: number
+    suggestedSeconds: number
+    halves: { month: string; half: 1 | 2; seconds: number }[]
+  }[]
+}
+
+/** Hours on offer and hours given, as their reader may see them. */
+export async function readNights(
+  ctx: ActingContext,
+  key: { callSlug: string; panelId?: number },
+): Promise<NightsView> {
+  const desk = await openPanel(ctx, key)
+  const ranking = await currentRanking(ctx.db, desk.panel.id)
+  const blocks = await offeredTime(ctx.db, desk.call.id)
+  const planned = ranking ? await planNights(ctx, desk, ranking) : null
+  const order = planned?.order ?? []
+  const [heads, awards, decisions] = await Promise.all([
+    snapshotHeads(ctx.db, order),
+    standingAwards(ctx.db, order),
+    standingDecisions(ctx.db, order),
+  ])
+  const rows = order.map((id, index): NightsRow => ({
+    proposalId: id,
+    reviewNumber: desk.proposals.find((proposal) => proposal.id === id)?.reviewNumber ?? '',
+    title: heads.get(id)?.title ?? '',
+    rank: index + 1,
+    isAbove: index < (planned?.line ?? 0),
+    setAside: planned?.setAside.has(id) ?? false,
+    decisionVersion: decisions.get(id)?.version ?? 0,
+    lines: (planned?.wanted ?? [])
+      .filter((line) => line.proposalId === id)
+      .map((line) => {
+        const is = (one: { proposal: number; instrument: number }) =>
+          one.proposal === id && one.instrument === line.instrumentId
+        const given = awards.find((a) => a.proposalId === id && a.instrumentId === line.instrumentId)
+        const not = planned?.plan.notGiven.find(is)
+        return {
+          ...line,
+          givenSeconds: given?.seconds ?? 0,
+          isReserve: given?.isReserve ?? false,
+          service: given?.service ?? 'queue',
+          conditions: given?.conditions ?? '',
+          suggestedSeconds: planned?.plan.given.find(is)?.seconds ?? 0,
+          whyNot: planned?.setAside.has(id)
+            ? { reason: 'set-aside' as const, left: 0 }
+            : not
+              ? { reason: not.reason, left: not.left }
+              : null,
+        }
+      }),
+  }))
+  const all = rows.flatMap((row) => row.lines)
+  return {
+    panelId: desk.panel.id,
+    callNumber: desk.call.number,
+    callSlug: desk.call.slug,
+    phase: desk.phase,
+    hasRanking: ranking !== null,
+    line: planned?.line ?? 0,
+    rows,
+    telescopes: [...new Set(blocks.map((block) => block.telescopeId))].map((id) => {
+      const own = blocks.filter((block) => block.telescopeId === id)
+      const lines = all.filter((line) => line.telescopeId === id)
+      return {
+        id,
+        name: own[0]?.telescope ?? '',
+        offeredSeconds: own.reduce((sum, block) => sum + block.seconds, 0),
+        givenSeconds: lines.reduce((sum, line) => sum + (line.isReserve ? 0 : line.givenSeconds), 0),
+        suggestedSeconds: lines.reduce((sum, line) => sum + line.suggestedSeconds, 0),
+        halves: own.map(({ month, half, seconds }) => ({ month, half, seconds })),
+      }
+    }),
+  }
+}

@@ -1,0 +1,37 @@
+import { z } from 'zod'
+import { panelKeySchema, rowKey } from '../panels/schema'
+
+const reason = z
+  .string()
+  .trim()
+  .min(10, 'Give the reason in a sentence: the panel reads it.')
+  .max(300, 'At most 300 characters.')
+
+/** Names the list as it was on screen, so that two people never move over one another. */
+const listKey = panelKeySchema.extend({ rankingId: rowKey, version: rowKey })
+export type ListKeyInput = z.output<typeof listKey>
+
+export const moveSchema = listKey.extend({
+  proposalId: rowKey,
+  place: z.coerce
+    .number<string | number>('Give the rank as a number.')
+    .int('Ranks are whole numbers.')
+    .min(1, 'The first rank is 1.'),
+  reason,
+})
+export type MoveInput = z.output<typeof moveSchema>
+
+export const lineSchema = listKey.extend({ direction: z.enum(['up', 'down']) })
+export type LineInput = z.output<typeof lineSchema>
+
+export const freezeSchema = listKey
+export const setAsideSchema = listKey.extend({ proposalIds: z.array(rowKey).min(1), aside: z.boolean() })
+export type SetAsideInput = z.output<typeof setAsideSchema>
+
+export const consensusSchema = panelKeySchema.extend({
+  proposalId: rowKey,
+  /** Version of the draft decision; 0 while there is none. */
+  version: z.coerce.number<string | number>().int().min(0),
+  statement: z.string().trim().max(4000, 'At most 4,000 characters.'),
+})
+export type ConsensusInput = z.output<typeof consensusSchema>
