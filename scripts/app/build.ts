@@ -24,7 +24,7 @@ export async function build(folder: DataFolder, env: Environment, signal?: Abort
   const { code, output } = await runToEnd({
     command: process.execPath,
     args: [next, 'build'],
-    env: { ...env, NODE_ENV: 'production' },
+    env: { ...env, NODE_ENV: 'production', NO_COLOR: '1', FORCE_COLOR: undefined },
     logFile,
     signal,
   })

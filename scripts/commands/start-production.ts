@@ -20,7 +20,7 @@ export async function main(args: string[]): Promise<number> {
       faults,
     )
   }
-  warnings.forEach((warning) => console.warn(warning))
+  for (const warning of warnings) console.warn(warning)
 
   const folder = openDataFolder('production')
   const supervisor = await Supervisor.claim(folder)

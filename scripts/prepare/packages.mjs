@@ -1,7 +1,7 @@
-import { spawn } from 'node:child_process'
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
+import { npmCi } from './npmCi.mjs'
 
 const root = fileURLToPath(new URL('../../', import.meta.url))
 
@@ -11,7 +11,7 @@ export async function installPackages() {
   console.log('Installing the npm packages (one to three minutes the first time) ...')
   const started = Date.now()
   for (let attempt = 1; attempt <= 2; attempt += 1) {
-    const { code, output } = await npmCi()
+    const { code, output } = await npmCi(root)
     if (code === 0) {
       console.log(`npm packages installed in ${Math.round((Date.now() - started) / 1000)} s.`)
       return
@@ -41,28 +41,6 @@ export function installedMatchesLock(folder) {
   } catch {
     return false
   }
-}
-
-function npmCi() {
-  const args = [
-    'ci',
-    '--include=dev',
-    '--no-audit',
-    '--no-fund',
-    '--fetch-retries=5',
-    '--fetch-timeout=120000',
-  ]
-  return new Promise((resolve) => {
-    const child = spawn('npm', args, { cwd: root, stdio: ['ignore', 'pipe', 'pipe'] })
-    let output = ''
-    const collect = (chunk) => {
-      output += chunk
-    }
-    child.stdout.on('data', collect)
-    child.stderr.on('data', collect)
-    child.on('error', (error) => resolve({ code: 1, output: `${output}${error.message}` }))
-    child.on('close', (code) => resolve({ code: code ?? 1, output }))
-  })
 }
 
 function explain(output) {
@@ -101,6 +79,7 @@ function problem(message, remedy, output) {
   writeFileSync(file, output)
   const error = new Error(`${message} (npm ci; all of its output is in .data/logs/npm-ci.log)`)
   error.remedy = remedy
-  error.details = output.trim().split('\n').slice(-12)
+  const noise = /^npm (info|http (?!.*failed with)|warn EBADENGINE)/
+  error.details = output.split('\n').filter((line) => line.trim() && !noise.test(line)).slice(-8)
   return error
 }

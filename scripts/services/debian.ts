@@ -68,6 +68,12 @@ export async function ensurePrograms(wanted: readonly Program[], logFile: string
   }
   writeFileSync(logFile, output)
   if (result.code === 0 && missing.every((program) => findCommand(program.commands))) return
+  if (/sudo: .*(password|terminal)|not in the sudoers/.test(output)) {
+    throw new Problem(
+      `${names} has to be installed, and this user may not use sudo without a password.`,
+      `Run in a terminal, where sudo can ask, or as root; or install by hand with \`${byHand}\`, then run again.`,
+    )
+  }
   throw new Problem(
     `${names} could not be installed.`,
     `Check the network and the package sources, or install by hand with \`${byHand}\`, then run again.`,

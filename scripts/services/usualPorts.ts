@@ -18,6 +18,6 @@ export async function usualPorts(
   const { ports, moved } = await pickPorts(
     wishes.map(({ name, label, port }) => ({ name, label, port: name === 'app' ? appPort : port })),
   )
-  moved.forEach(say)
+  for (const sentence of moved) say(sentence)
   return ports
 }
