@@ -80,6 +80,9 @@ function problem(message, remedy, output) {
   const error = new Error(`${message} (npm ci; all of its output is in .data/logs/npm-ci.log)`)
   error.remedy = remedy
   const noise = /^npm (info|http (?!.*failed with)|warn EBADENGINE)/
-  error.details = output.split('\n').filter((line) => line.trim() && !noise.test(line)).slice(-8)
+  error.details = output
+    .split('\n')
+    .filter((line) => line.trim() && !noise.test(line))
+    .slice(-8)
   return error
 }
