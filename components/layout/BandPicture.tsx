@@ -1,18 +1,22 @@
 import { bandColour } from '@/components/charts/geometry/bandColour'
 import type { NightBandGeometry } from '@/components/charts/geometry/nightBand'
+import { BandMark } from './BandMark'
 import { BandNow } from './BandNow'
 
 export interface BandPictureProps {
   id: string
   geometry: NightBandGeometry
-  serverNowMs: number
+  /** Now, where the lamp moves with it. */
+  serverNowMs?: number
+  /** A moment that stands still, in place of now. */
+  markMs?: number
   height?: number
 }
 
 const percent = (share: number) => `${(share * 100).toFixed(2)}%`
 
 /** The night as a strip: twilight, the Moon while it is up, the hours, the lamp at now. As wide as what holds it. */
-export function BandPicture({ id, geometry, serverNowMs, height = 28 }: BandPictureProps) {
+export function BandPicture({ id, geometry, serverNowMs, markMs, height = 28 }: BandPictureProps) {
   const { fromMs, toMs, stops, moonBars, moonThickness, ticks } = geometry
   const thickness = (moonThickness * height) / 28
   return (
@@ -36,7 +40,10 @@ export function BandPicture({ id, geometry, serverNowMs, height = 28 }: BandPict
           fill="var(--moon)"
         />
       ))}
-      <BandNow fromMs={fromMs} toMs={toMs} serverNowMs={serverNowMs} height={height} ticks={ticks} />
+      {serverNowMs === undefined ? null : (
+        <BandNow fromMs={fromMs} toMs={toMs} serverNowMs={serverNowMs} height={height} ticks={ticks} />
+      )}
+      {markMs === undefined ? null : <BandMark share={(markMs - fromMs) / (toMs - fromMs)} height={height} />}
     </svg>
   )
 }

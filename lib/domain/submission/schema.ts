@@ -9,7 +9,12 @@ export const sendSchema = z
   .object({
     reference,
     idempotencyKey: z.uuid('This form is out of date. Load the page again.'),
-    declaration: z.literal(true, 'Say that all named have read this version and agree to it being sent.'),
+    declaration: z
+      .boolean()
+      .refine(
+        (isTicked) => isTicked,
+        'Say that everyone named has read this version and agrees to it being sent.',
+      ),
     then: z.enum(['pay', 'later', 'waiver']),
     waiverReason: z.string().trim().max(2000, 'Keep the reason below 2,000 characters.'),
   })
@@ -18,7 +23,7 @@ export const sendSchema = z
     message: 'Say in a sentence why the fee should be waived.',
   })
 
-export type SendForm = Omit<z.input<typeof sendSchema>, 'declaration'> & { declaration: boolean }
+export type SendInput = z.input<typeof sendSchema>
 
 export const reopenSchema = z.object({ reference })
 

@@ -22,7 +22,8 @@ export interface SubmitInput {
   reference: string
   /** One press of the button: the same key twice is the same submission and the same answer. */
   idempotencyKey: string
-  declaration: true
+  /** Everyone named has read this version and agrees to it being sent. */
+  declaration: boolean
   /** Stamped by the database's clock as the first thing the request did: it alone is held against the deadline. */
   arrivedAt: Date
 }
@@ -31,6 +32,8 @@ export interface SubmitInput {
 export async function submitProposal(ctx: ActingContext, input: SubmitInput): Promise<Submission> {
   const draft = await readContents(ctx.db, input.reference)
   authorize(mayReadProposal(ctx.actor, draft))
+  if (!input.declaration)
+    throw refuse.field('declaration', 'Say that everyone named agrees to it being sent.')
   if (draft.state === 'draft' || draft.isReopened) await checkPaper(ctx, draft)
 
   return inTransaction(ctx, async (tx) => {

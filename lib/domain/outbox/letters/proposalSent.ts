@@ -1,4 +1,5 @@
 import { formatMoneyShort, formatUtcInstant, formatUtcWithYear } from '@/lib/format'
+import { fingerprint } from '../../submission/fingerprint'
 import type { Letter } from '../letter'
 
 export interface SentFacts {
@@ -35,7 +36,7 @@ export function proposalSent(sent: SentFacts): Letter {
       ['Reference', sent.reference],
       ['Received', formatUtcInstant(sent.arrivedAt)],
       ['Version', String(sent.versionNumber)],
-      ['Fingerprint', (sent.sha256.slice(0, 16).match(/.{4}/g) ?? []).join(' ')],
+      ['Fingerprint', fingerprint(sent.sha256)],
     ],
     action: { label: 'See the confirmation', url: sent.url },
   }

@@ -1,0 +1,39 @@
+import { Facts, type Fact } from '@/components/ui/Facts'
+import { TextLink } from '@/components/ui/TextLink'
+import { fingerprint } from '@/lib/domain/submission/fingerprint'
+import type { SentProposal } from '@/lib/domain/submission/readSent'
+import { formatMoney, formatUtcClock, formatUtcInstant } from '@/lib/format'
+import { paths } from '@/lib/paths'
+
+/** What was received: the money where there is some, the version, its fingerprint. */
+export function ReceiptFacts({ sent }: { sent: SentProposal }) {
+  const { version, fee, contents } = sent
+  const receipt = fee?.receipt ?? null
+  const facts: Fact[] = []
+  if (receipt) {
+    const amount = formatMoney(receipt.amountMinor, receipt.currency)
+    const isSameDay = receipt.paidAt.toDateString() === version.arrivedAt.toDateString()
+    facts.push(
+      { term: 'Number', value: receipt.number },
+      { term: 'Paid', value: receipt.cardLast4 ? `${amount}, card ending ${receipt.cardLast4}` : amount },
+      { term: 'At', value: (isSameDay ? formatUtcClock : formatUtcInstant)(receipt.paidAt) },
+    )
+  } else if (fee?.state === 'waived') facts.push({ term: 'Fee', value: 'waived' })
+  else if (fee?.state === 'invoiced') facts.push({ term: 'Fee', value: 'by invoice' })
+  facts.push(
+    { term: 'Version', value: `${version.versionNumber}, engine ${version.engineVersion}` },
+    { term: 'Fingerprint', value: fingerprint(version.sha256) },
+  )
+  return (
+    <div>
+      <Facts title={receipt ? 'Receipt' : 'Received'} facts={facts} />
+      {receipt ? (
+        <p className="mt-4 mb-0 text-table">
+          <TextLink href={paths.proposalReceipt(contents.reference)} download>
+            Receipt as PDF
+          </TextLink>
+        </p>
+      ) : null}
+    </div>
+  )
+}

@@ -1,0 +1,2 @@
+/** Where the office of the observatory is written to. */
+export const officeAddress = 'office@quillonridge.example'
