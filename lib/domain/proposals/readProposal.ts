@@ -1,4 +1,5 @@
 import { databaseNow } from '@/db/queries/clock'
+import { feeOf, type FeeState } from '@/db/queries/fees'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { deadlineOf } from '../calls/rules'
@@ -16,6 +17,8 @@ export interface ReadProposal {
   sections: SectionReport[]
   now: Date
   deadline: Date
+  /** What is owed since it was sent; null before that, and where there is no fee. */
+  fee: { amountMinor: number; currency: string; state: FeeState } | null
   /** The reader's own row; null for the office. */
   own: Investigator | null
   /** Why it cannot be changed now, in a sentence; null when it can. */
@@ -29,6 +32,7 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
   const [contents, now] = await Promise.all([readContents(ctx.db, reference), databaseNow(ctx.db)])
   authorize(mayReadProposal(ctx.actor, contents))
   const computation = computationOf(contents)
+  const fee = await feeOf(ctx.db, contents.id)
   const mayEdit = mayEditProposal(ctx.actor, contents, now)
   return {
     contents,
@@ -36,6 +40,7 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
     sections: completeness(contents, computation),
     now,
     deadline: deadlineOf(contents.call, contents.kind, contents),
+    fee: fee ? { amountMinor: fee.amount_minor, currency: fee.currency, state: fee.state } : null,
     own: investigatorRow(ctx.actor, contents),
     readOnly: mayEdit.allowed ? null : mayEdit.sentence,
     mayManage: mayManagePeople(ctx.actor, contents, now).allowed,

@@ -1,0 +1,70 @@
+import type { Metadata } from 'next'
+import { Main } from '@/components/layout/Main'
+import { TwoColumns } from '@/components/layout/TwoColumns'
+import { ChangeList } from '@/components/proposals/ChangeList'
+import { homeLead } from '@/components/proposals/homeLead'
+import { PutAwayButton } from '@/components/proposals/PutAwayButton'
+import { SettlePanel } from '@/components/proposals/SettlePanel'
+import { TargetsUp } from '@/components/proposals/TargetsUp'
+import { TaskList } from '@/components/proposals/TaskList'
+import { Breadcrumb } from '@/components/ui/Breadcrumb'
+import { LinkButton } from '@/components/ui/LinkButton'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import { readHistory } from '@/lib/domain/proposals/history/readHistory'
+import { mayPutAway } from '@/lib/domain/proposals/policy'
+import { paths } from '@/lib/paths'
+import { putAwayDraftAction, takeBackDraftAction } from './actions'
+import { proposalOf } from './proposalOf'
+
+export const metadata: Metadata = { title: 'Proposal' }
+
+export default async function ProposalPage({ params }: { params: Promise<{ reference: string }> }) {
+  const ctx = await openPage('/proposals/[reference]')
+  const read = await orNotFound(proposalOf((await params).reference))
+  const { contents, now, sections } = read
+  const { changes } = await readHistory(ctx, contents)
+  const hasPaper = contents.papers.some(({ kind }) => kind === 'justification')
+  return (
+    <Main>
+      <TwoColumns
+        side={
+          <>
+            <SettlePanel read={read} />
+            <section>
+              <SectionHeading dense title="Latest changes" />
+              <div className="mt-2">
+                <ChangeList changes={changes.slice(0, 5)} now={now} />
+              </div>
+            </section>
+          </>
+        }
+      >
+        <Breadcrumb
+          steps={[{ label: 'My proposals', href: paths.proposals() }, { label: contents.call.title }]}
+        />
+        <PageTitle display title={contents.title || 'A proposal without a title'} lead={homeLead(read)} />
+        <div className="mt-6">
+          <TaskList reference={contents.reference} sections={sections} />
+        </div>
+        <div className="mt-6 flex flex-wrap items-center gap-6">
+          {hasPaper ? (
+            <LinkButton look="secondary" href={paths.proposalPacket(contents.reference)} download>
+              Read the packet as reviewers will
+            </LinkButton>
+          ) : null}
+          {mayPutAway(ctx.actor, contents).allowed ? (
+            <PutAwayButton
+              reference={contents.reference}
+              putAway={putAwayDraftAction}
+              takeBack={takeBackDraftAction}
+            />
+          ) : null}
+        </div>
+        <TargetsUp read={read} />
+      </TwoColumns>
+    </Main>
+  )
+}

@@ -1,0 +1,9 @@
+import type { OpenKind } from '@/lib/domain/proposals/readOpenKinds'
+import { countInWords, formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
+
+/** What a kind of proposal allows and asks, in a line under its name. */
+export function kindWords({ call, kind, deadline }: OpenKind): string {
+  const most = kind.maxSeconds === null ? '' : `at most ${formatHoursFromSeconds(kind.maxSeconds)}, `
+  const fee = call.currency && kind.feeMinor > 0 ? `, ${formatMoneyShort(kind.feeMinor, call.currency)}` : ''
+  return `${most}${countInWords(kind.pageLimit, 'page')} of justification${fee}, closes ${formatUtc(deadline)}`
+}

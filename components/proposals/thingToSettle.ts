@@ -1,0 +1,46 @@
+import type { FeasibilityCheck } from '@/lib/domain/observations/types'
+import type { ReadProposal } from '@/lib/domain/proposals/readProposal'
+import type { Missing } from '@/lib/domain/proposals/sections/finding'
+
+export type ThingToSettle =
+  | {
+      kind: 'check'
+      verdict: 'not-feasible' | 'marginal'
+      target: string
+      check: FeasibilityCheck
+      observationId: number
+    }
+  | { kind: 'missing'; missing: Missing; others: number }
+  | { kind: 'nothing' }
+
+/** The one thing worth doing next: a verdict against a required target first, then what is missing, then a doubt. */
+export function thingToSettle({ contents, computation, sections }: ReadProposal): ThingToSettle {
+  const needs = { required: 0, optional: 1, backup: 2 }
+  const found = computation.observations
+    .flatMap((observation) => {
+      const target = contents.targets.find(({ id }) => id === observation.targetId)
+      return target
+        ? observation.checks.map((check) => ({ check, target, observationId: observation.observationId }))
+        : []
+    })
+    .sort((a, b) => needs[a.target.need] - needs[b.target.need])
+  const asThing = (verdict: 'not-feasible' | 'marginal'): ThingToSettle | null => {
+    const first = found.find(({ check }) => check.verdict === verdict)
+    return first
+      ? {
+          kind: 'check',
+          verdict,
+          target: first.target.name,
+          check: first.check,
+          observationId: first.observationId,
+        }
+      : null
+  }
+  const isAnswered = contents.sectionsDone.includes('feasibility')
+  const failing = isAnswered ? null : asThing('not-feasible')
+  if (failing) return failing
+  const missing = sections.flatMap((section) => section.missing)
+  const first = missing[0]
+  if (first) return { kind: 'missing', missing: first, others: missing.length - 1 }
+  return (isAnswered ? null : asThing('marginal')) ?? { kind: 'nothing' }
+}
