@@ -7,7 +7,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
 import type { Target } from '../proposals/types'
-import { nextPosition, requireFreeName, requireRoom } from './rules'
+import { nextPosition, requireFreeName, requireRoom } from './targetRules'
 import { targetRowSchema } from './schema'
 
 export const addTargetSchema = z.object({ reference: z.string().max(10), row: targetRowSchema })

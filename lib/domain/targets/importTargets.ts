@@ -6,7 +6,7 @@ import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
-import { mostTargets, nameKey, nextPosition, requireRoom, saysTheSame } from './rules'
+import { mostTargets, nameKey, nextPosition, requireRoom, saysTheSame } from './targetRules'
 import { targetRowSchema } from './schema'
 import type { TargetValues } from './types'
 

@@ -1,7 +1,7 @@
 import { bandChoice, magnitudeBands } from './bands'
 import { delimiterOf, readRecords } from './csv'
 import { readHeads, type KnownHeads, type TargetColumn } from './headers'
-import { mostTargets } from './rules'
+import { mostTargets } from './targetRules'
 import { targetRowSchema, type TargetRow } from './schema'
 import { splitPosition } from './splitPosition'
 import { emptyTargetRow } from './targetRow'

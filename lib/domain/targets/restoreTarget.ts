@@ -7,7 +7,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
 import type { RemoveTargetInput } from './removeTarget'
-import { requireFreeName, requireRoom } from './rules'
+import { requireFreeName, requireRoom } from './targetRules'
 
 /** Puts a target back that was taken out, with its observations, as the logbook remembers them. */
 export async function restoreTarget(ctx: Context, input: RemoveTargetInput): Promise<{ id: number }> {

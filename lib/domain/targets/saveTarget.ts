@@ -8,7 +8,7 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
 import { staleProposal } from '../proposals/staleProposal'
 import type { Target } from '../proposals/types'
-import { requireFreeName } from './rules'
+import { requireFreeName } from './targetRules'
 import { targetRowSchema } from './schema'
 import { targetRow } from './targetRow'
 

@@ -1,0 +1,41 @@
+import type { Metadata } from 'next'
+import { Main } from '@/components/layout/Main'
+import { TargetsEditor } from '@/components/targets/TargetsEditor'
+import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import {
+  addTargetAction,
+  askTimesAction,
+  importTargetsAction,
+  removeTargetAction,
+  reorderTargetsAction,
+  restoreTargetAction,
+  saveTargetAction,
+} from './actions'
+import { proposalOf } from '../proposalOf'
+
+export const metadata: Metadata = { title: 'Targets' }
+
+export default async function TargetsPage({ params }: { params: Promise<{ reference: string }> }) {
+  await openPage('/proposals/[reference]/targets')
+  const { reference } = await params
+  const { contents, computation, readOnly } = await orNotFound(proposalOf(reference))
+  return (
+    <Main>
+      <TargetsEditor
+        contents={{ ...contents, people: [], papers: [] }}
+        computation={computation}
+        readOnly={readOnly}
+        actions={{
+          add: addTargetAction,
+          save: saveTargetAction,
+          remove: removeTargetAction,
+          restore: restoreTargetAction,
+          reorder: reorderTargetsAction,
+          importRows: importTargetsAction,
+          ask: askTimesAction,
+        }}
+      />
+    </Main>
+  )
+}

@@ -1,0 +1,102 @@
+'use client'
+
+import { useState } from 'react'
+import { Button } from '@/components/ui/Button'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { showToast } from '@/components/ui/showToast'
+import { countInWords, formatList, formatUtcClock } from '@/lib/format'
+import { cellNames } from './cellNames'
+import { ImportRows } from './ImportRows'
+import type { TargetActions } from './targetActions'
+import type { Import, ReadFile } from './useImport'
+
+export interface ImportPreviewProps {
+  file: ReadFile
+  incoming: Import
+  reference: string
+  importRows: TargetActions['importRows']
+}
+
+/** What a file holds: counts, the first thing wrong, and the rows to be looked at and mended. */
+export function ImportPreview({ file, incoming, reference, importRows }: ImportPreviewProps) {
+  const [showsRows, setShowsRows] = useState(false)
+  const [busy, setBusy] = useState(false)
+  const count = (standing: string) => incoming.standings.filter((one) => one === standing).length
+  const wrong = file.rows.filter((_, index) => incoming.standings[index] === 'wrong')
+  const clashes = file.rows.filter((_, index) => incoming.standings[index] === 'clash')
+  const bad = wrong.length + clashes.length
+  const fresh = count('new')
+
+  const keep = async () => {
+    setBusy(true)
+    const result = await importRows({ reference, rows: file.rows.map(({ row }) => row) })
+    setBusy(false)
+    if (!result.ok) {
+      const [field, sentence] = Object.entries(result.fieldErrors)[0] ?? []
+      const at = Number(field?.split('.')[1])
+      const row = Number.isInteger(at) ? file.rows[at]?.number : undefined
+      return incoming.setProblem(row ? `Row ${row}: ${sentence}` : result.message)
+    }
+    incoming.leave()
+    showToast(`${countInWords(result.data.added, 'target', 'targets', true)} added`)
+  }
+
+  return (
+    <div>
+      <h3 className="text-section">
+        {file.name}{' '}
+        <span className="text-table font-normal text-muted">
+          read {formatUtcClock(file.readAt)}, not kept yet
+        </span>
+      </h3>
+      <dl className="mt-3 grid grid-cols-[2rem_1fr] gap-x-4 gap-y-1.5 text-table">
+        <dt className="text-right font-semibold">{file.rows.length}</dt>
+        <dd className="m-0">
+          {file.rows.length === 1 ? 'row' : 'rows'} read; {formatList(file.recognised)} recognised
+          {file.ignored.length > 0 ? `; ${formatList(file.ignored)} left out` : ''}
+        </dd>
+        {count('same') > 0 ? (
+          <>
+            <dt className="text-right font-semibold">{count('same')}</dt>
+            <dd className="m-0">already here, the same to the last digit</dd>
+          </>
+        ) : null}
+        {[...wrong, ...clashes].slice(0, 4).map(({ number, row, errors }) => {
+          const [cell, sentence] = Object.entries(errors)[0] ?? ['name', 'is here already with other values.']
+          const key = cell as keyof typeof cellNames
+          return (
+            <div key={number} className="contents font-semibold text-not-feasible">
+              <dt className="text-right">1</dt>
+              <dd className="m-0">
+                Row {number}, {cellNames[key].toLowerCase()} {row[key] || 'missing'}:{' '}
+                <span className="font-normal text-ink">{sentence}</span>
+              </dd>
+            </div>
+          )
+        })}
+        {bad > 4 ? (
+          <>
+            <dt className="text-right font-semibold">{bad - 4}</dt>
+            <dd className="m-0">more to mend</dd>
+          </>
+        ) : null}
+      </dl>
+      <div className="mt-4 flex flex-wrap items-center gap-4">
+        {bad > 0 ? (
+          <Button size="small" look="secondary" onClick={() => setShowsRows(true)}>
+            {`Mend row ${[...wrong, ...clashes][0]?.number ?? ''}`}
+          </Button>
+        ) : (
+          <Button size="small" busy={busy} busyWord="Keeping" onClick={() => void keep()}>
+            {fresh === 0 ? 'Nothing new to keep' : `Keep ${countInWords(fresh, 'target')}`}
+          </Button>
+        )}
+        <LinkLikeButton aria-expanded={showsRows} onClick={() => setShowsRows(!showsRows)}>
+          {showsRows ? 'Hide the rows' : 'See all rows'}
+        </LinkLikeButton>
+        <LinkLikeButton onClick={incoming.leave}>Leave it</LinkLikeButton>
+      </div>
+      {showsRows ? <ImportRows file={file} incoming={incoming} /> : null}
+    </div>
+  )
+}

@@ -1,0 +1,53 @@
+'use client'
+
+import { useFormContext, useWatch } from 'react-hook-form'
+import { ReadBack } from '@/components/ui/ReadBack'
+import { formatNumber } from '@/lib/format'
+import { parseDeclination, parseRightAscension } from '@/lib/science/sky/coordinates'
+import { splitPosition } from '@/lib/domain/targets/rules'
+import type { TargetRow } from '@/lib/domain/targets/schema'
+import { TypedCell } from './TypedCell'
+
+export interface PositionCellProps {
+  name: string
+  row: number
+  readOnly: boolean
+  messageId: string
+}
+
+/** Right ascension and declination as typed, and the degrees they were understood as. */
+export function PositionCell({ name, row, readOnly, messageId }: PositionCellProps) {
+  const { control, setValue } = useFormContext<TargetRow>()
+  const [ra = '', dec = ''] = useWatch({ control, name: ['ra', 'dec'] })
+  const read = { ra: parseRightAscension(ra), dec: parseDeclination(dec) }
+
+  // A whole position pasted into either half fills both.
+  const paste = (text: string) => {
+    const halves = splitPosition(text)
+    if (!halves || readOnly) return false
+    setValue('ra', halves.ra, { shouldDirty: true })
+    setValue('dec', halves.dec, { shouldDirty: true, shouldValidate: true })
+    return true
+  }
+  const shared = { row, readOnly, messageId, onPasteText: paste }
+  return (
+    <>
+      <span className="flex gap-2">
+        <TypedCell
+          {...shared}
+          name="ra"
+          label={`Right ascension of ${name}`}
+          placeholder="h m s or degrees"
+        />
+        <TypedCell {...shared} name="dec" label={`Declination of ${name}`} placeholder="± d m s" />
+      </span>
+      {read.ra.ok && read.dec.ok ? (
+        <ReadBack>
+          <span className="text-tick text-muted">
+            {formatNumber(read.ra.deg, 5)}° {formatNumber(read.dec.deg, 5)}°
+          </span>
+        </ReadBack>
+      ) : null}
+    </>
+  )
+}

@@ -1,0 +1,176 @@
+'use client'
+
+import { ChevronDown } from 'lucide-react'
+import { useEffect, useId, useState } from 'react'
+import { FormProvider, useWatch } from 'react-hook-form'
+import { classNames } from '@/components/ui/classNames'
+import { VerdictMark } from '@/components/ui/VerdictMark'
+import { ABSENT } from '@/lib/format'
+import { bandChoice, magnitudeBands } from '@/lib/domain/targets/rules'
+import type { TargetRow } from '@/lib/domain/targets/schema'
+import { AskedCell } from './AskedCell'
+import { CellSelect } from './CellSelect'
+import { DarkHoursCell } from './DarkHoursCell'
+import { NeededCell } from './NeededCell'
+import { NumberCell } from './NumberCell'
+import { PositionCell } from './PositionCell'
+import { RowMessages, useHasMessages } from './RowMessages'
+import { TargetDetails } from './TargetDetails'
+import { TypedCell } from './TypedCell'
+import type { RowView, TargetTableProps } from './targetTableTypes'
+import { useRowForm } from './useRowForm'
+
+const needs = ['required', 'optional', 'backup'].map((value) => ({ value, label: value }))
+const bandOptions = magnitudeBands.map(({ band, system }) => {
+  const value = bandChoice(band, system)
+  return { value, label: value }
+})
+
+export interface TargetTableRowProps extends Omit<TargetTableProps, 'rows'> {
+  view: RowView
+  number: number
+  isFirst: boolean
+  isLast: boolean
+}
+
+/** One target: typed cells that save themselves, computed cells that open, and what is wrong beneath. */
+export function TargetTableRow(props: TargetTableRowProps) {
+  const { view, number, columns, readOnly, reference, actions, onTyped, onSave, onMove, onRemove } = props
+  const { key, target, computed, observations, verdict } = view
+  const messageId = useId()
+  const [isOpen, setOpen] = useState(false)
+  const [asking, setAsking] = useState<string | null>(null)
+  const row = useRowForm(view.kept, (values, version) => onSave(key, values, version))
+  const { form, commit } = row
+  const typed = useWatch({ control: form.control }) as TargetRow
+  const hasMessages = useHasMessages(row, asking)
+  const name = typed.name.trim() || `target ${number}`
+  const isOff = readOnly !== null
+
+  useEffect(() => onTyped(key, typed), [key, typed, onTyped])
+
+  const cell = { row: number, readOnly: isOff, messageId }
+  const save = () => void commit()
+  const span = columns.length + 9
+  return (
+    <FormProvider {...form}>
+      <tr
+        role="row"
+        id={view.kept ? `target-${view.kept.id}` : undefined}
+        onBlur={save}
+        className={classNames((hasMessages || isOpen) && 'has-detail', hasMessages && 'is-attention')}
+      >
+        <td role="cell" className="w-7 text-muted max-sm:!hidden">
+          {number}
+        </td>
+        <th role="rowheader" scope="row" className="min-w-36">
+          <TypedCell {...cell} name="name" label={`Name of target ${number}`} strong placeholder="Name" />
+          <CellSelect
+            name="need"
+            label={`How much ${name} is needed`}
+            options={needs}
+            readOnly={isOff}
+            onChosen={save}
+          />
+        </th>
+        <td role="cell" data-head="Position" className="min-w-56">
+          <span className="block max-sm:w-60">
+            <PositionCell {...cell} name={name} />
+          </span>
+        </td>
+        <td role="cell" data-head="z" className="is-right max-sm:!pl-0 sm:w-16">
+          <span className="block max-sm:w-32">
+            <TypedCell {...cell} name="redshift" label={`Redshift of ${name}`} align="right" />
+          </span>
+        </td>
+        <td role="cell" data-head="Magnitude" className="is-right max-sm:!pl-0 sm:w-18">
+          <span className="block max-sm:w-32">
+            <TypedCell {...cell} name="magnitude" label={`Magnitude of ${name}`} align="right" />
+            <CellSelect
+              name="band"
+              label={`Band and system of the magnitude of ${name}`}
+              options={bandOptions}
+              readOnly={isOff}
+              align="right"
+              onChosen={save}
+            />
+          </span>
+        </td>
+        {columns.map((column) => (
+          <td
+            key={column.id}
+            role="cell"
+            data-head={`${column.what}, ${column.unit}`}
+            className="is-right is-computed"
+          >
+            {computed ? (
+              <NumberCell {...props.numbers} column={column} target={target} computed={computed} />
+            ) : (
+              ABSENT
+            )}
+          </td>
+        ))}
+        <td role="cell" data-head="Dark hours" className="is-right is-computed whitespace-nowrap">
+          {computed ? (
+            <DarkHoursCell
+              {...props.season}
+              {...props.numbers}
+              name={name}
+              computed={computed}
+              maxAirmass={view.maxAirmass}
+            />
+          ) : (
+            ABSENT
+          )}
+        </td>
+        <td role="cell" data-head="Needed, h" className="is-right is-computed">
+          <NeededCell name={name} computed={view.observationNumbers} />
+        </td>
+        <td role="cell" data-head="Asked, h" className="is-right max-sm:!pl-0 sm:w-16">
+          <span className="block max-sm:w-32">
+            <AskedCell
+              reference={reference}
+              name={name}
+              row={number}
+              observations={observations}
+              neededSeconds={view.neededSeconds}
+              ask={actions.ask}
+              readOnly={isOff}
+              onMessage={setAsking}
+            />
+          </span>
+        </td>
+        <td role="cell" data-head="Verdict" className="whitespace-nowrap">
+          <span className="flex items-start justify-between gap-3">
+            {verdict ? <VerdictMark verdict={verdict} /> : <span className="text-muted">{ABSENT}</span>}
+            <button
+              type="button"
+              aria-expanded={isOpen}
+              aria-label={isOpen ? `Less about ${name}` : `More about ${name}`}
+              onClick={() => setOpen(!isOpen)}
+              className="rounded-cell text-muted hover:text-ink max-sm:min-h-11 max-sm:min-w-11"
+            >
+              <ChevronDown size={18} aria-hidden="true" className={isOpen ? 'rotate-180' : undefined} />
+            </button>
+          </span>
+        </td>
+      </tr>
+      {hasMessages || isOpen || computed?.refusal ? (
+        <tr role="row" className={classNames('is-detail', hasMessages && 'is-attention')} onBlur={save}>
+          <td role="cell" colSpan={span} className="sm:!pl-7">
+            {computed?.refusal ? <p className="m-0 pb-1 text-not-feasible">{computed.refusal}</p> : null}
+            <RowMessages id={messageId} row={row} extra={asking} />
+            {isOpen ? (
+              <TargetDetails
+                readOnly={readOnly}
+                onUp={view.kept && !props.isFirst ? () => onMove(key, -1) : null}
+                onDown={view.kept && !props.isLast ? () => onMove(key, 1) : null}
+                onRemove={() => onRemove(key)}
+              />
+            ) : null}
+          </td>
+        </tr>
+      ) : null}
+    </FormProvider>
+  )
+}

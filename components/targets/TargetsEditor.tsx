@@ -1,0 +1,122 @@
+'use client'
+
+import { parseAsArrayOf, parseAsStringLiteral, useQueryState } from 'nuqs'
+import { useEffect, useMemo, useRef } from 'react'
+import { useLiveComputation } from '@/components/observations/useLiveComputation'
+import { saveText } from '@/components/tables/saveText'
+import { Button } from '@/components/ui/Button'
+import { EmptyState } from '@/components/ui/EmptyState'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { formatCalendarDate } from '@/lib/format'
+import { comparisonOf } from '@/lib/domain/observations/rules'
+import type { ProposalComputation } from '@/lib/domain/observations/types'
+import type { ProposalContents } from '@/lib/domain/proposals/types'
+import { targetsCsv } from '@/lib/domain/targets/rules'
+import { ColumnChooser } from './ColumnChooser'
+import { ImportPanel } from './ImportPanel'
+import { numberColumns, type NumberColumnId } from './numberColumns'
+import { rowViews } from './rowViews'
+import { TargetTable } from './TargetTable'
+import type { TargetActions } from './targetActions'
+import { useTargetRows } from './useTargetRows'
+
+const columnIds = numberColumns.map(({ id }) => id)
+const shownFirst = numberColumns.filter((column) => column.shownFirst).map(({ id }) => id)
+
+export interface TargetsEditorProps {
+  contents: ProposalContents
+  computation: ProposalComputation
+  readOnly: string | null
+  actions: TargetActions
+}
+
+const monthName = (date: string) => formatCalendarDate(date, false).replace(/^\d+ /, '')
+
+/** The targets page: the table one types into, the file one drops, and what both come to. */
+export function TargetsEditor({ contents, computation, readOnly, actions }: TargetsEditorProps) {
+  const { places, typedContents, onTyped, onSave, onRemove, onMove, addRow } = useTargetRows(
+    contents,
+    actions,
+  )
+  const live = useLiveComputation(contents, computation, typedContents)
+  const [shown, setShown] = useQueryState(
+    'columns',
+    parseAsArrayOf(parseAsStringLiteral<NumberColumnId>(columnIds)).withDefault(shownFirst),
+  )
+  const rows = useMemo(() => rowViews(places, typedContents, live), [places, typedContents, live])
+  const count = useRef(rows.length)
+
+  // A row just begun is where one types next.
+  useEffect(() => {
+    if (rows.length > count.current)
+      document.querySelector<HTMLElement>(`[data-row="${rows.length}"][data-cell="name"]`)?.focus()
+    count.current = rows.length
+  }, [rows.length])
+
+  const { cosmologyName, engineVersion } = live
+  const { seasonFrom, seasonTo } = contents.call
+  const fullBar = Math.max(
+    1,
+    ...live.targets.flatMap(({ visibleHoursByMonth }) => visibleHoursByMonth.map(({ hours }) => hours)),
+  )
+  const download = () =>
+    saveText(
+      `targets-${contents.reference}.csv`,
+      targetsCsv(typedContents.targets, live.targets, cosmologyName),
+    )
+
+  return (
+    <>
+      <PageTitle
+        title="Targets"
+        lead={
+          readOnly ??
+          `Dotted cells are yours to type in; tinted columns are computed under ${cosmologyName}. Every row saves itself.`
+        }
+        actions={
+          <>
+            <ColumnChooser shown={shown} onChange={(next) => void setShown(next)} />
+            {rows.length > 0 ? <LinkLikeButton onClick={download}>CSV</LinkLikeButton> : null}
+            {readOnly ? null : <Button onClick={addRow}>Add a target</Button>}
+          </>
+        }
+      />
+      <div className="mt-6">
+        {rows.length === 0 ? (
+          <EmptyState title="No target yet">
+            {readOnly
+              ? 'This proposal names no target.'
+              : 'Add one and type its name, position and redshift, or paste a whole table below.'}
+          </EmptyState>
+        ) : (
+          <TargetTable
+            reference={contents.reference}
+            rows={rows}
+            shown={shown}
+            totals={live}
+            maxAirmass={rows[0]?.maxAirmass ?? 1.8}
+            months={`${monthName(seasonFrom)}–${monthName(seasonTo)}`}
+            readOnly={readOnly}
+            numbers={{
+              cosmologyName,
+              comparisonName: comparisonOf(contents.cosmology)?.parameters.name ?? null,
+              engineVersion,
+            }}
+            season={{ seasonFrom, seasonTo, fullBar }}
+            actions={actions}
+            onTyped={onTyped}
+            onSave={onSave}
+            onMove={(key, by) => void onMove(key, by)}
+            onRemove={(key) => void onRemove(key)}
+          />
+        )}
+      </div>
+      {readOnly ? null : (
+        <div className="mt-6">
+          <ImportPanel contents={contents} importRows={actions.importRows} />
+        </div>
+      )}
+    </>
+  )
+}

@@ -1,0 +1,25 @@
+import type { Target } from '../proposals/types'
+import { targetRowSchema, type TargetRow } from './schema'
+
+/**
+ * A row as it is being typed, for computing while one types: cells that cannot be read yet count as empty.
+ * `target` gives the key, the place and the version.
+ */
+export function liveTarget(
+  target: Pick<Target, 'id' | 'position' | 'version'>,
+  row: TargetRow,
+): Target | null {
+  const first = targetRowSchema.safeParse(row)
+  if (first.success) return { ...first.data, ...target }
+  const emptied: TargetRow = { ...row, name: row.name.trim() || '–' }
+  for (const issue of first.error.issues) {
+    const cell = issue.path[0]
+    if (cell === 'band') emptied.magnitude = ''
+    else if (cell === 'effectiveRadius') emptied.geometry = 'point'
+    else if (cell === 'ra' || cell === 'dec') Object.assign(emptied, { ra: '', dec: '' })
+    else if (typeof cell === 'string' && cell in emptied && cell !== 'name')
+      Object.assign(emptied, { [cell]: '' })
+  }
+  const second = targetRowSchema.safeParse(emptied)
+  return second.success ? { ...second.data, ...target } : null
+}
