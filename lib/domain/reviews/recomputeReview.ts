@@ -4,7 +4,7 @@ import { refuse } from '@/lib/errors'
 import { cosmologyPresets } from '@/lib/science/cosmology'
 import type { ActingContext } from '../context'
 import { computeProposal } from '../observations/computeProposal'
-import type { Recomputation } from './recomputation'
+import type { Recomputation } from './recomputationSchema'
 import { canOpenReview } from './policy'
 import { reviewFacts } from './reviewFacts'
 

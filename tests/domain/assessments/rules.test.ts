@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { fieldErrorsOf } from '@/lib/actions/fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import { hoursProblem } from '@/lib/domain/assessments/rules'
 import { assessRequestSchema } from '@/lib/domain/assessments/schema'
 

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { fieldErrorsOf } from '@/lib/actions/fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import { declareInterestsSchema } from '@/lib/domain/conflicts/schema'
 
 const key = 'n0123456789abcdef'

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { givesAway } from '@/lib/domain/reviews/givesAway'
+import { givesAway } from '@/lib/domain/reviews/giveawayWords'
 import {
   partsScored,
   reviewGaps,

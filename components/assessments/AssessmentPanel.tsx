@@ -1,0 +1,36 @@
+import { Panel } from '@/components/ui/Panel'
+import type { RequestView } from '@/lib/domain/assessments/readRequest'
+import { formatUtc } from '@/lib/format'
+import { AssessmentForm, type AssessmentFormProps } from './AssessmentForm'
+
+export interface AssessmentPanelProps {
+  view: RequestView
+  action: AssessmentFormProps['action']
+}
+
+/** The one panel that wants action: the assessment, or why it is settled. */
+export function AssessmentPanel({ view, action }: AssessmentPanelProps) {
+  const standing = view.history[0] ?? null
+  const sum = (of: 'askedSeconds' | 'neededSeconds') =>
+    view.targets.reduce((total, row) => total + row[of], 0)
+  return (
+    <Panel
+      bar="accent"
+      title="Your assessment"
+      aside={standing ? `Saved ${formatUtc(standing.assessedAt)}` : `Due ${formatUtc(view.assessmentsDueAt)}`}
+    >
+      {view.shut ? (
+        <p className="m-0">{view.shut}</p>
+      ) : (
+        <AssessmentForm
+          key={standing?.id ?? 0}
+          requestId={view.requestId}
+          standing={standing}
+          askedSeconds={sum('askedSeconds')}
+          computedSeconds={sum('neededSeconds')}
+          action={action}
+        />
+      )}
+    </Panel>
+  )
+}

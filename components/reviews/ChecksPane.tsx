@@ -1,0 +1,26 @@
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
+import { ChecksList } from './ChecksList'
+import { TargetsTable } from './TargetsTable'
+import { TimeTable } from './TimeTable'
+import { UpTable } from './UpTable'
+
+/** What was computed and checked when the proposal was sent, frozen. */
+export function ChecksPane({ proposal }: { proposal: AnonymousProposal }) {
+  const parts = [
+    { id: 'targets', title: 'Targets', content: <TargetsTable proposal={proposal} /> },
+    { id: 'checks', title: 'Checks', content: <ChecksList proposal={proposal} /> },
+    { id: 'up', title: 'When they are up', content: <UpTable proposal={proposal} /> },
+    { id: 'time', title: 'Time asked', content: <TimeTable proposal={proposal} /> },
+  ]
+  return (
+    <div className="flex flex-col gap-10">
+      {parts.map(({ id, title, content }) => (
+        <section key={id} id={id} aria-labelledby={`${id}-title`}>
+          <SectionHeading id={`${id}-title`} title={title} />
+          <div className="mt-3">{content}</div>
+        </section>
+      ))}
+    </div>
+  )
+}

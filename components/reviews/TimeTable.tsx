@@ -1,0 +1,56 @@
+import { TableFrame } from '@/components/tables/TableFrame'
+import { VerdictMark } from '@/components/ui/VerdictMark'
+import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
+import { formatNumber } from '@/lib/format'
+
+const hours = (seconds: number | null | undefined) =>
+  formatNumber(seconds === null || seconds === undefined ? null : seconds / 3600, 1)
+
+/** Time asked against time needed, an observation a row. */
+export function TimeTable({ proposal }: { proposal: AnonymousProposal }) {
+  const { computation, observations } = proposal
+  const computed = new Map(computation.observations.map((row) => [row.observationId, row]))
+  const names = new Map(proposal.targets.map(({ id, name }) => [id, name]))
+  const modes = new Map(proposal.modes.map((mode) => [mode.modeId, mode]))
+  return (
+    <TableFrame caption="Time asked" phone="scroll">
+      <thead>
+        <tr>
+          <th scope="col">Target</th>
+          <th scope="col">Instrument, mode</th>
+          {['S/N', 'Needed', 'Asked'].map((head) => (
+            <th key={head} scope="col" className="is-right">
+              {head}
+              <span className="unit">{head === 'S/N' ? 'wanted' : 'h'}</span>
+            </th>
+          ))}
+          <th scope="col">Verdict</th>
+        </tr>
+      </thead>
+      <tbody>
+        {observations.map((observation) => {
+          const row = computed.get(observation.id)
+          const mode = modes.get(observation.modeId)
+          return (
+            <tr key={observation.id}>
+              <th scope="row">{names.get(observation.targetId)}</th>
+              <td>{mode ? `${mode.instrument.name}, ${mode.name}` : ''}</td>
+              <td className="is-right">{formatNumber(observation.wantedSnr, 0)}</td>
+              <td className="is-right is-computed">{hours(row?.neededSeconds)}</td>
+              <td className="is-right">{hours(observation.askedSeconds)}</td>
+              <td className="whitespace-nowrap">{row ? <VerdictMark verdict={row.verdict} /> : null}</td>
+            </tr>
+          )
+        })}
+      </tbody>
+      <tfoot>
+        <tr>
+          <td colSpan={3}>All</td>
+          <td className="is-right is-computed">{hours(computation.neededSeconds)}</td>
+          <td className="is-right">{hours(computation.askedSeconds)}</td>
+          <td>{formatNumber(computation.askedNights, 2)} nights</td>
+        </tr>
+      </tfoot>
+    </TableFrame>
+  )
+}
