@@ -43,3 +43,5 @@ export type SuggestInput = z.output<typeof suggestSchema>
 
 export const remindSchema = panelKeySchema.extend({ personId: rowKey })
 export type RemindInput = z.output<typeof remindSchema>
+
+export const startReviewSchema = z.object({ callId: rowKey })

@@ -8,7 +8,7 @@ const hoursAsSeconds = z
   .regex(/^(\d{1,4}([.,]\d{1,3})?)?$/, 'Give hours as a number, such as 13.5.')
   .transform((text) => Math.round(Number(text.replace(',', '.') || '0') * 3600))
 
-const version = z.coerce.number<string | number>().int().min(0)
+const version = z.number().int().min(0)
 
 export const awardSchema = panelKeySchema.extend({
   proposalId: rowKey,

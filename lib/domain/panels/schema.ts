@@ -1,6 +1,6 @@
 import { z } from 'zod'
 
-const id = z.coerce.number<number | string>().int().positive()
+const id = z.number().int().positive()
 
 export const panelKeySchema = z.object({ panelId: id })
 export type PanelKeyInput = z.output<typeof panelKeySchema>

@@ -31,7 +31,7 @@ export type SetAsideInput = z.output<typeof setAsideSchema>
 export const consensusSchema = panelKeySchema.extend({
   proposalId: rowKey,
   /** Version of the draft decision; 0 while there is none. */
-  version: z.coerce.number<string | number>().int().min(0),
+  version: z.number().int().min(0),
   statement: z.string().trim().max(4000, 'At most 4,000 characters.'),
 })
 export type ConsensusInput = z.output<typeof consensusSchema>

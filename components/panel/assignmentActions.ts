@@ -1,0 +1,22 @@
+import type { ActionResult } from '@/lib/actions/result'
+import type { Seat } from '@/lib/domain/assignments/schema'
+
+type Pair = { proposalId: number; personId: number; seat: Seat }
+
+/** The deeds of the assignments page, handed down from its actions. */
+export interface AssignmentActions {
+  startReview: (input: { callId: number }) => Promise<ActionResult<void>>
+  assign: (input: { panelId: number; pairs: Pair[] }) => Promise<ActionResult<{ assignmentIds: number[] }>>
+  takeOff: (input: { panelId: number; assignmentIds: number[] }) => Promise<ActionResult<{ taken: number }>>
+  changeSeat: (input: { panelId: number; assignmentId: number; seat: Seat }) => Promise<ActionResult<void>>
+  replace: (input: {
+    panelId: number
+    assignmentId: number
+    personId: number | string
+    reason: string
+  }) => Promise<ActionResult<{ assignmentId: number }>>
+  suggest: (input: {
+    panelId: number
+    each: number | string
+  }) => Promise<ActionResult<{ pairs: Pair[]; short: { reviewNumber: string; lacking: number }[] }>>
+}
