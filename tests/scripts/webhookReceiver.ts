@@ -1,5 +1,5 @@
 import { createServer, type Server } from 'node:http'
-import Stripe from 'stripe'
+import type Stripe from 'stripe'
 
 export const webhookSecret = 'whsec_for_these_tests'
 
