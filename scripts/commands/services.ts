@@ -15,8 +15,10 @@ export async function main(args: string[]): Promise<number> {
     // The application is not started here, so its port may well be in use already: by it.
     choosePorts: async () => ({ ...(await usualPorts(appPort, () => undefined)), app: appPort }),
   })
-  console.log(`Services are up; the settings are in ${relativeToProject(stack.environmentFile)}.`)
-  console.log(`Letters: ${stack.appEnv.INBOX_URL}   Payments: ${stack.appEnv.PAYMENT_MOCK_URL}`)
+  if (!stack.supervisor.signal.aborted) {
+    console.log(`Services are up; the settings are in ${relativeToProject(stack.environmentFile)}.`)
+    console.log(`Letters: ${stack.appEnv.INBOX_URL}   Payments: ${stack.appEnv.PAYMENT_MOCK_URL}`)
+  }
   const { reason, failed } = await stack.supervisor.stopAsked
   console.log(reason)
   await stack.supervisor.stopAll()

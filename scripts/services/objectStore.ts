@@ -3,11 +3,13 @@ import { join } from 'node:path'
 import { startChild, untilReady, type Child } from './child'
 import { projectRoot, type DataFolder } from './folders'
 
+const require = createRequire(import.meta.url)
+
 export const bucketName = 'noctuary'
 
 /** The object store of demo and tests: S3's protocol on loopback, files in the data folder. */
 export async function startObjectStore(folder: DataFolder, port: number): Promise<Child> {
-  const program = createRequire(import.meta.url).resolve('s3rver/bin/s3rver.js')
+  const program = require.resolve('s3rver/bin/s3rver.js')
   const child = startChild({
     name: 'the object store',
     command: process.execPath,

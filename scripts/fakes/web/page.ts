@@ -32,7 +32,7 @@ button.main { background: var(--ink); color: var(--paper); }
 :focus-visible { outline: 3px solid var(--link); outline-offset: 2px; }
 .notice { border-left: 4px solid #a3341f; padding: .5rem 1rem; margin: 0 0 1.5rem; background: #fff; }
 pre { white-space: pre-wrap; overflow-wrap: anywhere; font: inherit; margin: 0 0 1.5rem; }
-iframe { width: 100%; height: 34rem; border: 1px solid var(--line); background: #fff; }
+iframe { width: 100%; height: 24rem; border: 1px solid var(--line); background: #fff; }
 `
 
 /** A whole page in the quiet style the fakes share. `extraStyle` is for one page's own parts. */
