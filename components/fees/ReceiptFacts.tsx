@@ -1,6 +1,6 @@
 import { Facts, type Fact } from '@/components/ui/Facts'
 import { TextLink } from '@/components/ui/TextLink'
-import { fingerprint } from '@/lib/domain/submission/fingerprint'
+import { engineName, fingerprint } from '@/lib/domain/submission/fingerprint'
 import type { SentProposal } from '@/lib/domain/submission/readSent'
 import { formatMoney, formatUtcClock, formatUtcInstant } from '@/lib/format'
 import { paths } from '@/lib/paths'
@@ -21,7 +21,7 @@ export function ReceiptFacts({ sent }: { sent: SentProposal }) {
   } else if (fee?.state === 'waived') facts.push({ term: 'Fee', value: 'waived' })
   else if (fee?.state === 'invoiced') facts.push({ term: 'Fee', value: 'by invoice' })
   facts.push(
-    { term: 'Version', value: `${version.versionNumber}, engine ${version.engineVersion}` },
+    { term: 'Version', value: `${version.versionNumber}, engine ${engineName(version.engineVersion)}` },
     { term: 'Fingerprint', value: fingerprint(version.sha256) },
   )
   return (

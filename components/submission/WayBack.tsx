@@ -45,9 +45,11 @@ export function WayBack({ reference, fee, isEarly, may, reopen, withdraw }: WayB
             Until the deadline you may write it again. The version that was sent stands until you send the
             next.
           </p>
-          <SubmitButton look="secondary" size="small" busyWord="Reopening">
-            Reopen it
-          </SubmitButton>
+          <div>
+            <SubmitButton look="secondary" size="small" busyWord="Reopening">
+              Reopen it
+            </SubmitButton>
+          </div>
         </ActionForm>
       ) : null}
       {may.withdraw ? (

@@ -1,18 +1,18 @@
 import { formatUtc } from '@/lib/format'
 
 interface WhatSendingDoesProps {
-  engineVersion: string
+  engine: string
   deadline: Date
   feeDueAt: Date | null
 }
 
 /** What the button does and what it does not, before it is pressed. */
-export function WhatSendingDoes({ engineVersion, deadline, feeDueAt }: WhatSendingDoesProps) {
+export function WhatSendingDoes({ engine, deadline, feeDueAt }: WhatSendingDoesProps) {
   return (
     <section className="pt-3 text-table rule-open">
       <h2 className="mb-2 text-body font-semibold">What sending does</h2>
       <p className="mt-0 mb-3">
-        It freezes this version, with every computed number and engine {engineVersion} that made it. Until{' '}
+        It freezes this version, with every computed number and engine {engine} that made it. Until{' '}
         {formatUtc(deadline)} you may reopen it; the version you sent stands until you send the next.
       </p>
       {feeDueAt ? (

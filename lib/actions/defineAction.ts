@@ -49,7 +49,7 @@ export function defineAction<N extends ActionName, S extends z.ZodType, R>(
     let data: R
     let parsed: z.output<S>
     try {
-      // First of all: a deadline is held against the arrival, however long the rest takes.
+      // First of all: a deadline is held against this stamp, however long the rest takes.
       const arrivedAt = await stampArrival(services().db)
       // Next refuses a foreign origin but lets a missing one pass.
       const origin = (await headers()).get('origin')

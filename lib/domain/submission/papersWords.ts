@@ -1,4 +1,4 @@
-import { countInWords, formatBytes, formatList } from '@/lib/format'
+import { formatBytes, formatList } from '@/lib/format'
 import type { Context } from '../context'
 import { readPaperNames } from '../papers/readPaperNames'
 import type { ProposalContents } from '../proposals/types'
@@ -10,7 +10,7 @@ export async function papersWords(
 ): Promise<string> {
   const paper = contents.papers.find(({ kind }) => kind === 'justification')
   if (!paper) return 'Nothing yet'
-  const size = `${paper.fileName}, ${paper.pages} of ${countInWords(contents.kind.pageLimit, 'page')}, ${formatBytes(paper.sizeBytes)}`
+  const size = `${paper.fileName}, ${paper.pages} of ${contents.kind.pageLimit} ${contents.kind.pageLimit === 1 ? 'page' : 'pages'}, ${formatBytes(paper.sizeBytes)}`
   const found = await readPaperNames(ctx, paper, contents.people)
   if (found === null) return size
   if (found.length === 0) return `${size}; no names found in text or properties`

@@ -1,4 +1,4 @@
-import { countInWords, formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
+import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
 import type { ProposalSection } from '@/lib/paths'
 import { findPreset } from '@/lib/science/cosmology'
 import type { ProposalComputation } from '../observations/types'
@@ -35,7 +35,7 @@ function targetWords({ targets }: ProposalContents): string {
   const required = targets.filter(({ need }) => need === 'required').length
   const redshifts = targets.flatMap(({ redshift }) => (redshift === null ? [] : [redshift]))
   const span = [Math.min(...redshifts), Math.max(...redshifts)].map((z) => formatNumber(z, 3))
-  const parts = [countInWords(targets.length, 'target'), `${required} required`]
+  const parts = [targets.length === 1 ? '1 target' : `${targets.length} targets`, `${required} required`]
   if (redshifts.length > 0) parts.push(`z = ${[...new Set(span)].join(' to ')}`)
   return parts.join(', ')
 }

@@ -13,6 +13,7 @@ import { Panel } from '@/components/ui/Panel'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { declarationFor, leadFor } from '@/lib/domain/submission/sendWords'
+import { engineName } from '@/lib/domain/submission/fingerprint'
 import { readForSending, type ForSending } from '@/lib/domain/submission/readForSending'
 import { reopenProposal } from '@/app/(investigator)/(confirmation)/proposals/[reference]/sent/actions'
 import { proposalOf } from '../proposalOf'
@@ -37,7 +38,7 @@ export default async function SendPage({ params }: Props) {
             <Sending read={read} isTestMode={ctx.payments.isTestMode} />
             {read.isIn ? null : (
               <WhatSendingDoes
-                engineVersion={computation.engineVersion}
+                engine={engineName(computation.engineVersion)}
                 deadline={read.deadline}
                 feeDueAt={read.due?.dueAt ?? null}
               />
@@ -89,7 +90,7 @@ function Sending({ read, isTestMode }: { read: ForSending; isTestMode: boolean }
       </Panel>
     )
   }
-  const label = `${contents.kind.title} proposal, call ${contents.call.number}`
+  const label = `${contents.kind.title}, call ${contents.call.number}`
   return (
     <FeePanel label={label} fee={fee} deadline={read.deadline} isTestMode={isTestMode}>
       {form}
