@@ -6,7 +6,7 @@ import { useForm, useWatch, type DefaultValues, type FieldValues, type Path } fr
 import type { z } from 'zod'
 import type { ActionFormHandle } from '@/components/forms/actionFormTypes'
 import { useAutosave } from '@/components/forms/useAutosave'
-import { fieldErrorsOf } from '@/lib/actions/fieldErrorsOf'
+import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
 import type { ActionResult } from '@/lib/actions/result'
 import type { Saved } from '@/lib/domain/proposals/writeProposal'
 import { useReportSaving } from './useReportSaving'

@@ -1,0 +1,85 @@
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import { TextLink } from '@/components/ui/TextLink'
+import type { ActionResult } from '@/lib/actions/result'
+import type { NameFound } from '@/lib/domain/papers/namesIn'
+import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
+import type { Paper } from '@/lib/domain/proposals/types'
+import { countInWords, formatBytes, formatUtc } from '@/lib/format'
+import { paths } from '@/lib/paths'
+import { NamesFound } from './NamesFound'
+import { PaperUpload } from './PaperUpload'
+import { RemovePaper } from './RemovePaper'
+
+export interface PaperSlotProps {
+  reference: string
+  kind: Paper['kind']
+  title: string
+  help: string
+  pageLimit: number
+  paper: Paper | null
+  /** Undefined where names are meant to stand. */
+  names?: readonly NameFound[] | null
+  /** Null for those who only look. */
+  actions: {
+    upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
+    remove: (input: { reference: string; kind: Paper['kind'] }) => Promise<ActionResult<unknown>>
+  } | null
+}
+
+/** One document of a proposal: what stands, what was found in it, and how to put another in its place. */
+export function PaperSlot({
+  reference,
+  kind,
+  title,
+  help,
+  pageLimit,
+  paper,
+  names,
+  actions,
+}: PaperSlotProps) {
+  return (
+    <section className="mb-10">
+      <SectionHeading dense title={title} aside={`at most ${countInWords(pageLimit, 'page')}`} />
+      {paper ? (
+        <div className="mt-3 mb-4">
+          <p className="m-0 flex flex-wrap items-baseline gap-x-4 gap-y-1 [overflow-wrap:anywhere]">
+            <TextLink plain strong href={paths.proposalPaper(reference, paper.id)}>
+              {paper.fileName}
+            </TextLink>
+            <span className="text-table text-muted">
+              {countInWords(paper.pages, 'page')}, {formatBytes(paper.sizeBytes)}, kept{' '}
+              {formatUtc(paper.uploadedAt)}
+            </span>
+            {actions ? (
+              <span className="text-table">
+                <RemovePaper
+                  reference={reference}
+                  kind={kind}
+                  fileName={paper.fileName}
+                  remove={actions.remove}
+                />
+              </span>
+            ) : null}
+          </p>
+          {names === undefined ? null : (
+            <div className="mt-3">
+              <NamesFound found={names} />
+            </div>
+          )}
+        </div>
+      ) : null}
+      {actions ? (
+        <div className="mt-3">
+          <PaperUpload
+            reference={reference}
+            kind={kind}
+            label={paper ? 'Put another in its place' : 'The file'}
+            help={help}
+            upload={actions.upload}
+          />
+        </div>
+      ) : null}
+      {!paper && !actions ? <p className="mt-3 text-muted">None.</p> : null}
+    </section>
+  )
+}
