@@ -94,18 +94,24 @@ const latestBy = <Row>(rows: readonly Row[], key: (row: Row) => number): Map<num
   new Map(rows.map((row) => [key(row), row]))
 
 /** Modes on offer in a call as their records stood on a date, in order of telescope, instrument and mode. */
-export async function modeRecordsOnOffer(
+export function modeRecordsOnOffer(db: Database, callId: number, onDate: string): Promise<ModeRecord[]> {
+  return modeRecordsAt(db, onDate, callId)
+}
+
+/** Every mode of the observatory as its record stood on a date; with a call, only those on offer in it. */
+export async function modeRecordsAt(
   db: Database,
-  callId: number,
   onDate: string,
+  callId: number | null,
 ): Promise<ModeRecord[]> {
-  const rows = await db('call_modes as c')
-    .join('instrument_modes as m', 'm.id', 'c.mode_id')
+  const rows = await db('instrument_modes as m')
     .join('instruments as i', 'i.id', 'm.instrument_id')
     .join('telescopes as t', 't.id', 'i.telescope_id')
     .join('mode_records as r', 'r.mode_id', 'm.id')
-    .where('c.call_id', callId)
-    .andWhere('r.valid_from', '<=', onDate)
+    .where('r.valid_from', '<=', onDate)
+    .modify((q) => {
+      if (callId !== null) q.whereIn('m.id', db('call_modes').where({ call_id: callId }).select('mode_id'))
+    })
     .orderBy(['t.id', 'i.id', 'm.id', 'r.record_version'])
     .select<ModeRow[]>('r.*', {
       mode_slug: 'm.slug',
@@ -130,4 +136,10 @@ export async function modeRecordsOnOffer(
     if (!telescope) throw new Error(`telescope ${row.telescope_id} has no record for ${onDate}`)
     return modeOf(row, telescope)
   })
+}
+
+/** Every site with its record in force on a date. */
+export async function siteRecordsAt(db: Database, onDate: string): Promise<SiteRecord[]> {
+  const sites = await db('sites').orderBy('id').select('id')
+  return Promise.all(sites.map(({ id }) => siteRecordAt(db, id, onDate)))
 }

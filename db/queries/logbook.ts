@@ -62,3 +62,39 @@ export async function lastChangeOf(
 ): Promise<SubjectEntry | null> {
   return (await entriesOf(db, subjectKind, subjectId, 1))[0] ?? null
 }
+
+export interface LogbookLine {
+  id: number
+  at: Date
+  person: string | null
+  acting_as: string
+  action: string
+  subject_kind: string
+  subject_id: string
+  before_value: string | null
+  after_value: string | null
+  address: string
+}
+
+/** The newest rows with the names of who acted; older ones by the id of the last one seen. */
+export function listLogbook(db: Database, limit: number, beforeId: number | null): Promise<LogbookLine[]> {
+  return db('logbook as l')
+    .leftJoin('people as p', 'p.id', 'l.person_id')
+    .modify((q) => {
+      if (beforeId !== null) q.where('l.id', '<', beforeId)
+    })
+    .orderBy('l.id', 'desc')
+    .limit(limit)
+    .select<LogbookLine[]>(
+      'l.id',
+      'l.at',
+      'p.name as person',
+      'l.acting_as',
+      'l.action',
+      'l.subject_kind',
+      'l.subject_id',
+      'l.before_value',
+      'l.after_value',
+      'l.address',
+    )
+}

@@ -88,3 +88,39 @@ export async function markFailed(
       next_attempt_at: utcIn(db, outcome.waitSeconds),
     })
 }
+
+/** Letters, the newest first, without their texts. */
+export function listLetters(
+  db: Database,
+  limit: number,
+): Promise<Omit<OutboxRow, 'text_body' | 'html_body'>[]> {
+  return db('outbox')
+    .orderBy('id', 'desc')
+    .limit(limit)
+    .select(
+      'id',
+      'dedupe_key',
+      'message_id',
+      'template',
+      'person_id',
+      'to_email',
+      'to_name',
+      'subject',
+      'state',
+      'attempts',
+      'next_attempt_at',
+      'claimed_until',
+      'last_error',
+      'sent_at',
+      'created_at',
+    )
+}
+
+/** Puts a parked or waiting letter at the head of the queue; false when it has been sent or is being sent. */
+export async function requeueLetter(db: Database, id: number): Promise<boolean> {
+  const changed = await db('outbox')
+    .where({ id })
+    .whereIn('state', ['queued', 'parked'])
+    .update({ state: 'queued', attempts: 0, next_attempt_at: utcNow(db), claimed_until: null })
+  return changed === 1
+}

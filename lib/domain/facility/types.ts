@@ -53,3 +53,9 @@ export interface ModeRecord {
   throughputIncludes: string[]
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
 }
+
+/** Every site and instrument mode with the record in force. */
+export interface FacilityView {
+  sites: SiteRecord[]
+  modes: ModeRecord[]
+}

@@ -1,5 +1,4 @@
-import { formatMoneyShort, formatUtcInstant, formatUtcWithYear } from '@/lib/format'
-import { fingerprint } from '../../submission/fingerprint'
+import { formatFingerprint, formatMoneyShort, formatUtcInstant, formatUtcWithYear } from '@/lib/format'
 import type { Letter } from '../letter'
 
 export interface SentFacts {
@@ -36,7 +35,7 @@ export function proposalSent(sent: SentFacts): Letter {
       ['Reference', sent.reference],
       ['Received', formatUtcInstant(sent.arrivedAt)],
       ['Version', String(sent.versionNumber)],
-      ['Fingerprint', fingerprint(sent.sha256)],
+      ['Fingerprint', formatFingerprint(sent.sha256)],
     ],
     action: { label: 'See the confirmation', url: sent.url },
   }

@@ -1,0 +1,71 @@
+import type { Metadata } from 'next'
+import { callDates } from '@/components/calls/callDates'
+import { OfferRows } from '@/components/calls/OfferRows'
+import { phaseWords } from '@/components/calls/phaseWords'
+import { seasonWords } from '@/components/calls/seasonWords'
+import { CallSteps } from '@/components/office/CallSteps'
+import { DatesForm } from '@/components/office/DatesForm'
+import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
+import { Main } from '@/components/layout/Main'
+import { TwoColumns } from '@/components/layout/TwoColumns'
+import { Breadcrumb } from '@/components/ui/Breadcrumb'
+import { DateLine } from '@/components/ui/DateLine'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import { readCall } from '@/lib/domain/calls/readCall'
+import { readOfficeProposals } from '@/lib/domain/calls/readOfficeProposals'
+import { paths } from '@/lib/paths'
+import { closeCallAction, openCallAction, saveDatesAction } from './actions'
+
+export const metadata: Metadata = { title: 'Call' }
+
+export default async function OfficeCallPage({ params }: { params: Promise<{ slug: string }> }) {
+  const ctx = await openPage('/office/calls/[slug]')
+  const { slug } = await params
+  const view = await orNotFound(readCall(ctx, slug))
+  const proposals = await orNotFound(readOfficeProposals(ctx, slug))
+  const { call, phase } = view
+  return (
+    <Main>
+      <Breadcrumb
+        steps={[
+          { label: 'Calls', href: paths.office('calls') },
+          { label: seasonWords(call.seasonFrom, call.seasonTo) },
+        ]}
+      />
+      <PageTitle
+        title={call.title}
+        lead={`It is ${phaseWords[phase]}.`}
+        actions={<CallSteps call={call} phase={phase} open={openCallAction} close={closeCallAction} />}
+      />
+      <div className="mt-8">
+        <DateLine entries={callDates(call)} now={view.now} label={`Dates of ${call.title}`} />
+      </div>
+      <section className="mt-10">
+        <SectionHeading title="Proposals" />
+        <div className="mt-4">
+          <ProposalsOfCall slug={slug} initial={proposals} />
+        </div>
+      </section>
+      <section className="mt-12">
+        <TwoColumns
+          side={
+            <section>
+              <SectionHeading title="On offer" dense />
+              <div className="mt-3">
+                <OfferRows offer={view.offer} />
+              </div>
+            </section>
+          }
+        >
+          <SectionHeading title="Dates" aside="Whoever has a draft is told when the deadline moves." />
+          <div className="mt-4">
+            <DatesForm call={call} utcOffsetHours={view.site.utcOffsetHours} action={saveDatesAction} />
+          </div>
+        </TwoColumns>
+      </section>
+    </Main>
+  )
+}

@@ -1,0 +1,29 @@
+import type { Metadata } from 'next'
+import { LettersTable } from '@/components/office/LettersTable'
+import { Main } from '@/components/layout/Main'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { TextLink } from '@/components/ui/TextLink'
+import { openPage } from '@/lib/auth/openPage'
+import { readLetters } from '@/lib/domain/outbox/readLetters'
+import { env } from '@/lib/env'
+import { retryLetterAction } from './actions'
+
+export const metadata: Metadata = { title: 'Mail' }
+
+export default async function OfficeMailPage() {
+  const ctx = await openPage('/office/mail')
+  const letters = await readLetters(ctx)
+  const inbox = env().INBOX_URL
+  return (
+    <Main>
+      <PageTitle
+        title="Mail"
+        lead="Every letter the product writes. One that fails is tried again, and set aside after eight tries."
+        actions={inbox ? <TextLink href={inbox}>Open the local inbox</TextLink> : undefined}
+      />
+      <div className="mt-6">
+        <LettersTable initial={letters} retry={retryLetterAction} />
+      </div>
+    </Main>
+  )
+}

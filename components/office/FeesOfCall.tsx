@@ -1,0 +1,84 @@
+'use client'
+
+import { DataTable } from '@/components/tables/DataTable'
+import { useTableQuery } from '@/components/tables/useTableQuery'
+import { EmptyState } from '@/components/ui/EmptyState'
+import { ShareBar } from '@/components/ui/ShareBar'
+import type { FormAction } from '@/components/forms/actionFormTypes'
+import { officeProposalsReply, type OfficeProposalsReply } from '@/lib/domain/calls/officeProposalSchema'
+import type { DecideWaiverInput } from '@/lib/domain/fees/schema'
+import { formatAmount } from '@/lib/format'
+import { paths } from '@/lib/paths'
+import { feeColumns } from './feeColumns'
+import { feeSums } from './feeSums'
+import { WaiverForm } from './WaiverForm'
+
+interface FeesOfCallProps {
+  slug: string
+  initial: OfficeProposalsReply
+  decide: FormAction<DecideWaiverInput, unknown>
+}
+
+/** Fees of a call: the sum in a bar, the table, and a decision under each waiver that is asked for. */
+export function FeesOfCall({ slug, initial, decide }: FeesOfCallProps) {
+  const { data = initial } = useTableQuery({
+    key: ['office-proposals', slug],
+    url: `${paths.api.table('office-proposals')}?call=${encodeURIComponent(slug)}`,
+    schema: officeProposalsReply,
+    initialData: initial,
+  })
+  const rows = data.rows.filter((row) => row.feeMinor !== null)
+  const sums = feeSums(rows)
+  const currency = rows[0]?.currency ?? 'EUR'
+  return (
+    <>
+      {rows.length > 0 ? (
+        <ShareBar
+          label="Fees by what became of them"
+          parts={[
+            {
+              label: 'paid and kept',
+              amount: sums.kept,
+              value: formatAmount(sums.kept, currency),
+              colour: 'feasible',
+            },
+            {
+              label: 'waived',
+              amount: sums.waived,
+              value: formatAmount(sums.waived, currency),
+              colour: 'accent',
+            },
+            { label: 'owed', amount: sums.owed, value: formatAmount(sums.owed, currency), colour: 'lamp' },
+          ]}
+        />
+      ) : null}
+      <div className="mt-6">
+        <DataTable
+          caption="Fees"
+          columns={feeColumns}
+          rows={rows}
+          rowId={(row) => row.reference}
+          find="Reference or name"
+          chips={[
+            { id: 'owed', label: 'Owed', matches: (row) => row.feeState === 'due' },
+            { id: 'waiver', label: 'Waiver asked', matches: (row) => row.waiverId !== null },
+            { id: 'refunded', label: 'Refunded', matches: (row) => row.refundedMinor > 0 },
+          ]}
+          csv={`fees-${slug}`}
+          tone={(row) => (row.waiverId === null ? null : 'attention')}
+          detail={(row) =>
+            row.waiverId === null ? null : (
+              <WaiverForm
+                waiverId={row.waiverId}
+                reason={row.waiverReason ?? ''}
+                slug={slug}
+                action={decide}
+              />
+            )
+          }
+          empty={<EmptyState title="Nothing billed yet">A fee is billed when a proposal is sent.</EmptyState>}
+        />
+      </div>
+    </>
+  )
+}

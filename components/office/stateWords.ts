@@ -1,0 +1,9 @@
+const words: Readonly<Record<string, string>> = {
+  'under-review': 'under review',
+  due: 'owed',
+}
+
+/** States of proposals and fees as they are called on screen. */
+export function stateWords(state: string): string {
+  return words[state] ?? state
+}

@@ -1,0 +1,44 @@
+import { updateCall, lockCall, type CallChange } from '@/db/queries/callChanges'
+import { databaseNow } from '@/db/queries/clock'
+import type { CallsRow } from '@/db/tables'
+import { authorize } from '@/lib/auth/authorize'
+import { refuse } from '@/lib/errors'
+import type { ActingContext } from '../context'
+import { inTransaction } from '../inTransaction'
+import { writeLogbook } from '../logbook/writeLogbook'
+import { mayManageCalls } from './policy'
+import { staleCall } from './staleCall'
+
+interface Change {
+  action: string
+  slug: string
+  version: number
+  /** Pure: the call as it stands and the database's now; throws a refusal or gives what changes. */
+  decide: (row: CallsRow, now: Date) => CallChange
+  /** Letters and the like, in the same transaction. */
+  then?: (tx: ActingContext, before: CallsRow, change: CallChange) => Promise<void>
+}
+
+/** The one way the office changes a call: lock, decide, guard by version, tell, log. */
+export async function changeCall(
+  ctx: ActingContext,
+  { action, slug, version, decide, then }: Change,
+): Promise<void> {
+  authorize(mayManageCalls(ctx.actor))
+  await inTransaction(ctx, async (tx) => {
+    const row = await lockCall(tx.db, slug)
+    if (!row) throw refuse.notFound('call')
+    if (row.version !== version) throw staleCall(row)
+    const change = decide(row, await databaseNow(tx.db))
+    if (!(await updateCall(tx.db, row.id, version, change))) throw staleCall(row)
+    await then?.(tx, row, change)
+    const before = Object.fromEntries(Object.keys(change).map((key) => [key, row[key as keyof CallsRow]]))
+    await writeLogbook(tx, {
+      action,
+      subject: { kind: 'call', id: row.number },
+      actingAs: 'office',
+      before,
+      after: change,
+    })
+  })
+}

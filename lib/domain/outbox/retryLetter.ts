@@ -1,0 +1,21 @@
+import { requeueLetter } from '@/db/queries/outbox'
+import { authorize } from '@/lib/auth/authorize'
+import { refuse } from '@/lib/errors'
+import type { ActingContext } from '../context'
+import { inTransaction } from '../inTransaction'
+import { writeLogbook } from '../logbook/writeLogbook'
+import { mayReadOutbox } from './policy'
+
+/** Sends a letter that waits or was parked at the next turn of the relay. */
+export async function retryLetter(ctx: ActingContext, input: { letterId: number }): Promise<void> {
+  authorize(mayReadOutbox(ctx.actor))
+  await inTransaction(ctx, async (tx) => {
+    if (!(await requeueLetter(tx.db, input.letterId)))
+      throw refuse.closed('This letter has been sent already.')
+    await writeLogbook(tx, {
+      action: 'letter.retry',
+      subject: { kind: 'letter', id: input.letterId },
+      actingAs: 'office',
+    })
+  })
+}

@@ -1,5 +1,0 @@
-/** The first 16 digits of a SHA-256 in groups of four, as people compare them: `7c1e 94af 02d8 b35f`. */
-export const fingerprint = (sha256: string): string => (sha256.slice(0, 16).match(/.{4}/g) ?? []).join(' ')
-
-/** The engine's own version as people name it, without those of its parts, which the record keeps. */
-export const engineName = (engineVersion: string): string => engineVersion.split('+')[0] ?? engineVersion
