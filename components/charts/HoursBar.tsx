@@ -41,7 +41,14 @@ export function HoursBar({
           stroke="var(--edge)"
         />
         <rect y="3" width={bar.given} height={height} fill={`var(--${tone})`} />
-        {bar.least !== null ? <rect x={bar.least - 0.7} width="1.4" height="20" fill="var(--ink)" /> : null}
+        {bar.least !== null ? (
+          <path
+            d={`M${bar.least} 0V20`}
+            stroke="var(--ink)"
+            strokeWidth="1.4"
+            style={{ filter: 'drop-shadow(1px 0 0 var(--surface)) drop-shadow(-1px 0 0 var(--surface))' }}
+          />
+        ) : null}
       </g>
     </svg>
   )

@@ -82,7 +82,6 @@ export function FileField({
           aria-describedby={describedBy(field, Boolean(help))}
           className="sr-only"
           tabIndex={-1}
-          onBlur={bound.onBlur}
           onChange={(event) => {
             take(event.target.files?.[0])
             event.target.value = ''

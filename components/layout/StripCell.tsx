@@ -8,18 +8,27 @@ export interface StripCellProps {
   trailing?: ReactNode
   /** `lamp` for what is about time. */
   tone?: 'lamp'
-  /** Left out on phones, which have room for six. */
+  /** Left out on phones, which have room for five beside the time of saving. */
   wideOnly?: boolean
+  /** Shown on phones alone: what stands elsewhere on wide screens, such as when it was saved. */
+  phoneOnly?: boolean
 }
 
 /** One cell of the request strip: label, value, trailing words. */
-export function StripCell({ label, value, trailing, tone, wideOnly = false }: StripCellProps) {
+export function StripCell({
+  label,
+  value,
+  trailing,
+  tone,
+  wideOnly = false,
+  phoneOnly = false,
+}: StripCellProps) {
   return (
     <div
       className={classNames(
-        'flex min-w-0 flex-col justify-center border-rule px-5 not-last:border-r first:pl-0',
-        'max-lg:px-3 max-sm:min-h-15 max-sm:border-r max-sm:border-b max-sm:px-4 max-sm:first:pl-4',
+        'strip-cell flex min-w-0 flex-col justify-center border-rule sm:border-r sm:px-5 sm:first:pl-0 sm:last:border-r-0 sm:max-lg:px-3',
         wideOnly && 'max-sm:hidden',
+        phoneOnly && 'sm:hidden',
       )}
     >
       <dt className="text-tick leading-[1.125rem] whitespace-nowrap text-muted">{label}</dt>

@@ -1,7 +1,6 @@
 'use client'
 
 import { parseAsString, useQueryStates } from 'nuqs'
-import { useTransition } from 'react'
 
 export interface TableState {
   /** The column sorted by, with a minus in front when largest first; empty for the given order. */
@@ -17,7 +16,6 @@ export interface TableState {
  * `prefix` tells several tables on one page apart.
  */
 export function useTableState(prefix: string) {
-  const [, startTransition] = useTransition()
   const text = parseAsString.withDefault('')
   return useQueryStates(
     { sort: text, find: text, show: text },
@@ -25,7 +23,6 @@ export function useTableState(prefix: string) {
       urlKeys: prefix ? { sort: `${prefix}-sort`, find: `${prefix}-find`, show: `${prefix}-show` } : {},
       history: 'replace',
       scroll: false,
-      startTransition,
     },
   )
 }

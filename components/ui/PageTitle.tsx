@@ -15,7 +15,7 @@ export interface PageTitleProps {
 export function PageTitle({ title, lead, display = false, actions }: PageTitleProps) {
   return (
     <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4">
-      <div className="max-w-prose">
+      <div className={display ? undefined : 'max-w-prose'}>
         <h1
           className={classNames(
             display ? 'text-display max-sm:text-figure' : 'text-title',
@@ -24,7 +24,7 @@ export function PageTitle({ title, lead, display = false, actions }: PageTitlePr
         >
           {title}
         </h1>
-        {lead ? <p className="mt-1 text-body text-muted">{lead}</p> : null}
+        {lead ? <p className="mt-1 max-w-prose text-body text-muted">{lead}</p> : null}
       </div>
       {actions ? (
         <div className="flex flex-wrap items-center gap-4 text-table max-sm:w-full">{actions}</div>

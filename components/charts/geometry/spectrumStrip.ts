@@ -16,7 +16,8 @@ const tallestSkyLine = 18
 export function spectrumStrip({ from, to, width, height, model = [], skyLines = [] }: SpectrumInput) {
   const x = scaleLinear().domain([from, to]).range([0, width])
   const peak = Math.max(1e-30, ...model.map(([, flux]) => flux))
-  const strongest = Math.max(1e-30, ...skyLines.map(({ strength }) => strength))
+  const inside = skyLines.filter(({ at }) => at >= from && at <= to)
+  const strongest = Math.max(1e-30, ...inside.map(({ strength }) => strength))
   const path = line<readonly [number, number]>()
     .x(([at]) => Math.round(x(at) * 10) / 10)
     .y(([, flux]) => Math.round((height * 0.75 - (height * 0.6 * flux) / peak) * 10) / 10)
@@ -24,8 +25,9 @@ export function spectrumStrip({ from, to, width, height, model = [], skyLines = 
     x,
     ticks: x.ticks(10),
     model: path(model.filter(([at]) => at >= from && at <= to)) ?? '',
-    skyLines: skyLines
-      .filter(({ at }) => at >= from && at <= to)
-      .map(({ at, strength }) => ({ x: x(at), tall: 3 + (tallestSkyLine - 3) * (strength / strongest) })),
+    skyLines: inside.map(({ at, strength }) => ({
+      x: x(at),
+      tall: 3 + (tallestSkyLine - 3) * (strength / strongest),
+    })),
   }
 }
