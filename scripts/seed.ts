@@ -1,5 +1,6 @@
 import { connect } from '../db/client.ts'
 import { seedDemo } from '../db/seeds/demo.ts'
+import { s3Store } from '../lib/services/storage/s3.ts'
 
 const url = process.env.DATABASE_URL
 if (!url)
@@ -9,9 +10,24 @@ if (process.env.NOCTUARY_MODE === 'production')
     'The demonstration is never seeded into production. Remove NOCTUARY_MODE=production to use it.',
   )
 
+const setting = (name: string) => {
+  const value = process.env[name]
+  if (!value)
+    throw new Error(`${name} is not set. \`npm start\` sets it; by hand, take it from .data/dev/env.json.`)
+  return value
+}
+
+const storage = s3Store({
+  endpoint: setting('S3_ENDPOINT'),
+  region: setting('S3_REGION'),
+  bucket: setting('S3_BUCKET'),
+  accessKeyId: setting('S3_ACCESS_KEY_ID'),
+  secretAccessKey: setting('S3_SECRET_ACCESS_KEY'),
+})
+
 const db = connect(url)
 try {
-  const isNew = await seedDemo(db, new Date())
+  const isNew = await seedDemo(db, new Date(), { storage, origin: setting('NEXTAUTH_URL') })
   console.log(isNew ? 'Demonstration seeded.' : 'Demonstration already there.')
 } finally {
   await db.destroy()

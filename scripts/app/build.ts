@@ -33,7 +33,11 @@ export async function build(folder: DataFolder, env: Environment, signal?: Abort
     throw new Problem(
       'The application could not be built.',
       `The lines above say why (all of it: ${relativeToProject(logFile)}). Put it right and run again.`,
-      output.trim().split('\n').slice(-25),
+      output
+        .trim()
+        .split('\n')
+        .filter((line) => !/^\s*at <unknown>/.test(line))
+        .slice(-25),
     )
   }
   writeFileSync(stamp, hash)

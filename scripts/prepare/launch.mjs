@@ -1,4 +1,5 @@
 // Plain Node, no packages: this runs before anything is installed.
+import { stripVTControlCharacters } from 'node:util'
 import { checkNode } from './node.mjs'
 import { installPackages } from './packages.mjs'
 
@@ -30,6 +31,6 @@ function report(error) {
     return
   }
   console.error(`\n  ${error.message}`)
-  for (const line of error.details ?? []) console.error(`    | ${line}`)
+  for (const line of error.details ?? []) console.error(`    | ${stripVTControlCharacters(line)}`)
   console.error(`  ${remedy}\n`)
 }
