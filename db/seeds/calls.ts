@@ -93,7 +93,7 @@ async function seedNights(
 async function seedCall(
   db: Database,
   facility: Facility,
-  call: { number: number; stage: 'published' | 'review' | 'decided'; dates: SeedCallDates; summary: string },
+  call: { number: number; dates: SeedCallDates; summary: string },
 ): Promise<SeededCall> {
   const [callId] = (await db('calls').insert({
     number: call.number,
@@ -101,7 +101,7 @@ async function seedCall(
     title: `Call ${call.number}`,
     summary: call.summary,
     site_id: facility.siteId,
-    stage: call.stage,
+    stage: 'published',
     currency: 'EUR',
     ...call.dates,
   })) as [number]
@@ -131,8 +131,8 @@ export async function seedCalls(
   const summary =
     'Time on the Aldous 3.8 m with LANTERN, SPINDLE and EMBER, and on the Fennel 1.5 m with WICK, for targets at cosmological distances. Proposals are judged without names.'
   return {
-    decided: await seedCall(db, facility, { number: 12, stage: 'decided', dates: dates.decided, summary }),
-    inReview: await seedCall(db, facility, { number: 13, stage: 'review', dates: dates.inReview, summary }),
-    open: await seedCall(db, facility, { number: 14, stage: 'published', dates: dates.open, summary }),
+    decided: await seedCall(db, facility, { number: 12, dates: dates.decided, summary }),
+    inReview: await seedCall(db, facility, { number: 13, dates: dates.inReview, summary }),
+    open: await seedCall(db, facility, { number: 14, dates: dates.open, summary }),
   }
 }

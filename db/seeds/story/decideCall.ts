@@ -1,0 +1,26 @@
+import { prepareDecisions } from '../../../lib/domain/decisions/prepareDecisions.ts'
+import { releaseDecisions } from '../../../lib/domain/decisions/releaseDecisions.ts'
+import { takePlan } from '../../../lib/domain/decisions/takePlan.ts'
+import { freezeRanking } from '../../../lib/domain/rankings/freezeRanking.ts'
+import { startRanking } from '../../../lib/domain/rankings/startRanking.ts'
+import type { SeededCall } from '../calls.ts'
+import type { Teller } from './teller.ts'
+
+/** The panel meets: ranks, divides the nights, and the letters go out. */
+export async function decideCall(story: Teller, call: SeededCall): Promise<void> {
+  await story.at(call.dates.panel_meets_at)
+  const chair = await story.as('Edda Vorskell')
+  const key = { panelId: call.panelId }
+  await startRanking(chair, key)
+  const ranking = await story
+    .db('rankings')
+    .where({ panel_id: call.panelId })
+    .whereNull('superseded_at')
+    .first()
+  if (!ranking) throw new Error('the ranking was not started')
+  await freezeRanking(chair, { ...key, rankingId: ranking.id, version: ranking.version })
+  await takePlan(chair, key)
+  await prepareDecisions(chair, key)
+  await story.at(call.dates.letters_at)
+  await releaseDecisions(chair, { ...key, typed: String(call.number) })
+}

@@ -1,0 +1,177 @@
+import { createHash, randomUUID } from 'node:crypto'
+import { modes } from '../facilityData.ts'
+import { addInvestigator } from '../../../lib/domain/proposals/addInvestigator.ts'
+import { beginProposal } from '../../../lib/domain/proposals/beginProposal.ts'
+import { confirmMembership } from '../../../lib/domain/proposals/confirmMembership.ts'
+import { markSectionDone } from '../../../lib/domain/proposals/markSectionDone.ts'
+import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
+import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
+import { readContents } from '../../../lib/domain/proposals/readContents.ts'
+import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
+import { targetRowSchema } from '../../../lib/domain/targets/schema.ts'
+import { addObservation } from '../../../lib/domain/observations/addObservation.ts'
+import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
+import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
+import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
+import { uploadPaper } from '../../../lib/domain/papers/uploadPaper.ts'
+import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
+import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
+import type { SeededCall } from '../calls.ts'
+import type { Facility } from '../calls.ts'
+import { paperPdf } from './paperPdf.ts'
+import type { SeedProposal } from './proposalData.ts'
+import type { Dice } from './random.ts'
+import type { Teller } from './teller.ts'
+
+export interface WriteOptions {
+  call: SeededCall
+  facility: Facility
+  /** Right ascensions that cross the meridian in the dark of that season, hours. */
+  raHours: [number, number]
+  begunAt: Date
+  /** Null leaves a draft. */
+  sentAt: Date | null
+}
+
+const abstractOf = (seed: SeedProposal) =>
+  `We ask for ${seed.hours} hours to settle a question that the present data leave open. ${seed.title}: with ${seed.targets === 1 ? 'one target' : `${seed.targets} targets`} at z of ${seed.redshift[0]} to ${seed.redshift[1]} we measure one quantity in the same way throughout, to a depth that decides between the two readings in the literature. Each target stands alone, so that a part of the time gives a part of the answer.`
+
+function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) {
+  const raDeg = (chance.between(...raHours) * 15 + 360) % 360
+  const decDeg = chance.between(-62, 2)
+  const ra = formatRightAscension(raDeg, 2)
+  const dec = formatDeclination(decDeg, 1)
+  const digits = (text: string) => text.replace(/\s/g, '')
+  const band =
+    modes.find((mode) => mode.slug === seed.mode)?.band ??
+    (seed.mode.startsWith('ember') ? 'J' : seed.mode === 'spindle-blue' ? 'g' : 'r')
+  return targetRowSchema.parse({
+    name: `QR J${digits(ra).slice(0, 4)}${digits(dec).slice(0, 5)}`,
+    ra,
+    dec,
+    redshift: chance.between(...seed.redshift).toFixed(4),
+    redshiftType: 'spectroscopic',
+    redshiftError: '',
+    redshiftFrame: 'heliocentric',
+    magnitude: chance.between(...seed.magnitude).toFixed(2),
+    magnitudeError: '',
+    band: `${band} AB`,
+    provenance: 'observed',
+    source: '',
+    need: 'required',
+    geometry: 'point',
+    effectiveRadius: '',
+    sersicIndex: '',
+    pmRa: '',
+    pmDec: '',
+    epoch: '',
+  })
+}
+
+/** Writes a proposal from its first line as its investigators would, and sends it unless it is to stay a draft. */
+export async function writeProposal(
+  story: Teller,
+  chance: Dice,
+  seed: SeedProposal,
+  options: WriteOptions,
+): Promise<string> {
+  const { call, facility } = options
+  await story.at(options.begunAt)
+  const lead = await story.as(seed.lead)
+  const kindId = call.kindIds.get(seed.kind ?? 'regular') ?? 0
+  const { reference } = await beginProposal(lead, { kindId, title: seed.title })
+  const version = async () => (await readContents(lead.db, reference)).version
+  await saveQuestion(
+    lead,
+    saveQuestionSchema.parse({
+      reference,
+      version: await version(),
+      title: seed.title,
+      abstract: abstractOf(seed),
+      category: seed.category,
+    }),
+  )
+  for (const name of seed.with) {
+    const other = await story.as(name)
+    await addInvestigator(lead, {
+      reference,
+      name,
+      email: other.actor.email,
+      institute: '',
+      access: 'edit',
+      isStudent: false,
+    })
+    await confirmMembership(other, { reference })
+  }
+  for (let n = 0; n < seed.targets; n += 1)
+    await addTarget(lead, { reference, row: targetRow(seed, chance, options.raHours) })
+  await askForHours(lead, reference, seed, facility)
+  const bytes = await paperPdf(seed.title)
+  await uploadPaper(lead, {
+    reference,
+    kind: 'justification',
+    file: new File([Buffer.from(bytes)], 'justification.pdf', { type: 'application/pdf' }),
+    sha256: createHash('sha256').update(bytes).digest('hex'),
+    sizeBytes: bytes.byteLength,
+  })
+  for (const section of sections) await markSectionDone(lead, { reference, section, done: true })
+  if (options.sentAt) {
+    await story.at(options.sentAt)
+    await submitProposal(lead, {
+      reference,
+      idempotencyKey: randomUUID(),
+      declaration: true,
+      arrivedAt: options.sentAt,
+    })
+  }
+  return reference
+}
+
+/** One observation a target, deep enough to need the hours the proposal is about. */
+async function askForHours(
+  lead: Awaited<ReturnType<Teller['as']>>,
+  reference: string,
+  seed: SeedProposal,
+  facility: Facility,
+): Promise<void> {
+  const modeId = facility.modeIds.get(seed.mode) ?? 0
+  const row = (targetId: number, wantedSnr: number, askedHours: number) =>
+    observationRowSchema.parse({
+      targetId,
+      modeId,
+      constraintSetId: null,
+      wantedSnr: wantedSnr.toFixed(1),
+      snrPer: seed.line ? 'resolution-element' : 'image',
+      feature: seed.line ?? '',
+      ownName: '',
+      ownRestA: '',
+      askedHours: askedHours.toFixed(1),
+    })
+  const each = (seed.hours / seed.targets) * 3600
+  const { targets } = await readContents(lead.db, reference)
+  for (const target of targets) {
+    let wanted = 10
+    let observation = await addObservation(lead, { reference, row: row(target.id, wanted, each / 3600) })
+    const save = async (askedHours: number) => {
+      const change = { reference, id: observation.id, version: observation.version }
+      observation = await saveObservation(lead, { ...change, row: row(target.id, wanted, askedHours) })
+    }
+    let possible = 0
+    for (let round = 0; round < 9; round += 1) {
+      const computed = computeProposal(await readContents(lead.db, reference))
+      const needed = computed.observations.find((one) => one.observationId === observation.id)?.neededSeconds
+      if (needed && (round > 5 || Math.abs(needed / each - 1) < 0.2)) {
+        await save(Math.ceil(needed / 360) / 10)
+        break
+      }
+      if (needed) {
+        possible = wanted
+        wanted *= Math.min(4, Math.max(0.4, Math.sqrt(each / needed)))
+      } else {
+        // The sky's own residue forbids this depth: go back towards one that can be reached.
+        wanted = possible > 0 ? (round > 5 ? possible : (possible + wanted) / 2) : wanted * 0.6
+      }
+      await save(each / 3600)
+    }
+  }
+}
