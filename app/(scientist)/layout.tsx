@@ -1,0 +1,6 @@
+import type { ReactNode } from 'react'
+import { Chrome } from '../Chrome'
+
+export default function Layout({ children }: { children: ReactNode }) {
+  return <Chrome area="scientist">{children}</Chrome>
+}
