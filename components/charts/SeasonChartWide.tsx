@@ -23,7 +23,7 @@ export function SeasonChartWide({ picture, moons, target, notes = [], monthValue
   const hours = hourLabels(picture.utcOffsetHours, 2)
   return (
     <div className="grid grid-cols-[60px_minmax(0,1fr)_60px] text-tick text-muted">
-      <span className="pr-3 text-right">hour</span>
+      <span>hour</span>
       <div className="relative h-6">
         {moons.map((moon) => (
           <span
@@ -39,7 +39,7 @@ export function SeasonChartWide({ picture, moons, target, notes = [], monthValue
           </span>
         ))}
       </div>
-      <span className="pl-3">UTC</span>
+      <span className="text-right">UTC</span>
       <div className="relative">
         {hours.map(({ hour, local }) => (
           <span key={hour} className="absolute right-3 -translate-y-1/2" style={{ top: up(hour) }}>

@@ -14,7 +14,7 @@ export interface SaveWordsProps {
 /** What became of the last change, for the right of the request strip. */
 export function SaveWords({ state, savedBefore, kept = false }: SaveWordsProps) {
   return (
-    <span role="status" className="text-table text-muted">
+    <span role="status" className="text-caption text-muted">
       {words(state, savedBefore, kept)}
     </span>
   )

@@ -34,8 +34,8 @@ export function HeaderNav({ links, label = 'Main', quiet = false, className }: H
               href={link.href}
               aria-current={link === current ? 'page' : undefined}
               className={classNames(
-                '-mb-px flex items-center whitespace-nowrap no-underline hover:text-ink',
-                quiet ? 'text-table' : 'text-strip',
+                'flex items-center whitespace-nowrap no-underline hover:text-ink',
+                quiet ? 'text-table' : '-mb-px text-strip',
                 link === current ? 'font-semibold text-ink' : 'text-muted',
                 link === current && !quiet && 'border-b-2 border-ink pt-0.5',
               )}

@@ -26,7 +26,7 @@ export function StripCell({
   return (
     <div
       className={classNames(
-        'strip-cell flex min-w-0 flex-col justify-center border-rule sm:border-r sm:px-5 sm:first:pl-0 sm:last:border-r-0 sm:max-lg:px-3',
+        'strip-cell flex min-w-0 flex-col justify-center border-rule sm:border-l sm:px-5 sm:first:border-l-0 sm:first:pl-0 sm:max-lg:px-3',
         wideOnly && 'max-sm:hidden',
         phoneOnly && 'sm:hidden',
       )}

@@ -2,9 +2,8 @@
 
 import { Popover } from 'radix-ui'
 import { useState } from 'react'
-import { themeCookie, themes, type ThemeId } from './themes'
-
-const oneYearInSeconds = 31_536_000
+import { applyTheme } from './applyTheme'
+import { themes, type ThemeId } from './themes'
 
 function Swatch({ theme }: { theme: ThemeId }) {
   return (
@@ -25,8 +24,7 @@ export function ThemeSwitch({ initial }: { initial: ThemeId }) {
   const choose = (next: ThemeId) => {
     setTheme(next)
     setOpen(false)
-    document.documentElement.dataset.theme = next
-    document.cookie = `${themeCookie}=${next}; path=/; max-age=${oneYearInSeconds}; samesite=lax`
+    applyTheme(next)
   }
 
   return (

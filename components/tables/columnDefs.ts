@@ -1,6 +1,6 @@
 import { createColumnHelper, type ColumnDef, type RowData } from '@tanstack/react-table'
 import { compareValues } from './compareValues'
-import { features } from './features'
+import type { features } from './features'
 import { isAbsent } from './isAbsent'
 import type { CellValue, TableColumn } from './tableColumn'
 

@@ -9,8 +9,8 @@ export interface LedgerGroupProps {
 export function LedgerGroup({ title, children }: LedgerGroupProps) {
   const id = useId()
   return (
-    <section aria-labelledby={id} className="grid rule-open sm:grid-cols-[13.25rem_1fr]">
-      <h3 id={id} className="py-3 pr-4 text-body font-semibold max-sm:text-table">
+    <section aria-labelledby={id} className="grid rule-open sm:grid-cols-[13.375rem_minmax(0,1fr)]">
+      <h3 id={id} className="py-3 pr-1 text-body font-semibold max-sm:text-table">
         {title}
       </h3>
       <div className="divide-y divide-rule max-sm:border-t max-sm:border-rule sm:border-l sm:border-rule">
