@@ -22,7 +22,7 @@ export function PersonTools({ reference, person, isFirst, isLast, actions }: Per
   const { busy, run } = useDeed()
   const move = (by: -1 | 1) => () => run(() => actions.move({ reference, id: person.id, by }))
   return (
-    <div className="flex flex-wrap items-center gap-3" aria-busy={busy || undefined}>
+    <div className="flex flex-wrap items-center gap-3 text-table" aria-busy={busy || undefined}>
       <select
         aria-label={`What ${person.name} may do`}
         value={person.access}
@@ -30,7 +30,7 @@ export function PersonTools({ reference, person, isFirst, isLast, actions }: Per
           const access = event.target.value as typeof person.access
           run(() => actions.setAccess({ reference, id: person.id, access }))
         }}
-        className="min-h-8 rounded border border-edge bg-surface px-2 text-table max-sm:min-h-11"
+        className="min-h-8 rounded border border-edge bg-surface px-2 text-table max-sm:min-h-11 max-sm:w-full"
       >
         {accessOptions.map(({ value, label }) => (
           <option key={value} value={value}>

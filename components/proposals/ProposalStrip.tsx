@@ -5,7 +5,7 @@ import { TextLink } from '@/components/ui/TextLink'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { isOpenForWriting } from '@/lib/domain/proposals/policy'
 import type { ReadProposal } from '@/lib/domain/proposals/readProposal'
-import { ABSENT, formatHoursFromSeconds, formatNights } from '@/lib/format'
+import { ABSENT, formatHoursFromSeconds, formatNights, formatUtcMinute } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { feeWords } from './feeWords'
 import { stateWords } from './stateWords'
@@ -15,11 +15,21 @@ const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
 
 function timeCell({ contents, deadline, now }: ReadProposal): StripCellProps[] {
   if (!isOpenForWriting(contents)) return []
+  const left = { untilMs: deadline.getTime(), serverNowMs: now.getTime(), passed: 'closed' }
   return [
     {
       label: 'Time left',
       tone: 'lamp',
-      value: <Countdown untilMs={deadline.getTime()} serverNowMs={now.getTime()} passed="closed" />,
+      value: (
+        <>
+          <span className="max-sm:hidden">
+            <Countdown {...left} />
+          </span>
+          <span className="sm:hidden">
+            <Countdown {...left} parts={2} />
+          </span>
+        </>
+      ),
     },
   ]
 }
@@ -59,6 +69,7 @@ export function ProposalStrip({ read }: { read: ReadProposal }) {
         ]
       : []),
     ...timeCell(read),
+    { label: 'Changed', value: formatUtcMinute(contents.updatedAt), phoneOnly: true },
   ]
   return (
     <RequestStrip

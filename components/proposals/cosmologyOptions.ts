@@ -3,11 +3,11 @@ import { formatNumber } from '@/lib/format'
 
 /** The published cosmologies with where they are printed, then one's own. */
 export const cosmologyChoices = [
-  ...cosmologyPresets.map(({ id, parameters, citation, standing }) => ({
-    value: id as string,
-    label: `${parameters.name}, H₀ ${formatNumber(parameters.H0, 2)}, Ωm ${formatNumber(parameters.Om0, 3)}`,
-    help: standing === 'limiting' ? `${citation}. A limiting case.` : citation,
-  })),
+  ...cosmologyPresets.map(({ id, parameters, citation, standing }) => {
+    const numbers = `H₀ ${formatNumber(parameters.H0, 2)}, Ωm ${formatNumber(parameters.Om0, 3)}`
+    const limit = standing === 'limiting' ? '. A limiting case' : ''
+    return { value: id as string, label: parameters.name, help: `${numbers}. ${citation}${limit}.` }
+  }),
   { value: 'custom', label: 'Own parameters', help: 'Any universe the equations allow, curved or not.' },
 ]
 

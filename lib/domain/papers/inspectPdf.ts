@@ -1,4 +1,4 @@
-import { EncryptedPDFError, PDFDocument } from 'pdf-lib'
+import { PDFDocument } from 'pdf-lib'
 import { refuse } from '@/lib/errors'
 import { countInWords, formatBytes } from '@/lib/format'
 import { activeContent } from './activeContent'
@@ -21,14 +21,26 @@ function checkEnd(bytes: Uint8Array): void {
     throw no('Something else hangs on the end of this PDF. Print it to a new PDF and send that.')
 }
 
-async function opened(bytes: Uint8Array): Promise<PDFDocument> {
+const locked = () =>
+  no('The file is locked with a password. Send it without one: reviewers could not open it.')
+
+/** The document and its pages. Broken files make the library fail in many ways; all read the same here. */
+async function opened(bytes: Uint8Array): Promise<{ document: PDFDocument; pages: number }> {
+  let document: PDFDocument
+  let pages: number
   try {
-    return await PDFDocument.load(bytes, { updateMetadata: false, throwOnInvalidObject: true })
-  } catch (error) {
-    if (error instanceof EncryptedPDFError)
-      throw no('The file is locked with a password. Send it without one: reviewers could not open it.')
+    document = await PDFDocument.load(bytes, {
+      updateMetadata: false,
+      throwOnInvalidObject: true,
+      ignoreEncryption: true,
+    })
+    pages = document.getPageCount()
+  } catch {
+    if (Buffer.from(bytes).includes('/Encrypt')) throw locked()
     throw no('The file says it is a PDF but cannot be read as one. Export it anew and send that.')
   }
+  if (document.isEncrypted) throw locked()
+  return { document, pages }
 }
 
 /**
@@ -42,11 +54,10 @@ export async function inspectPdf(bytes: Uint8Array, fileName: string, pageLimit:
   const kind = fileKind(bytes)
   if (kind !== 'pdf') throw no(`${fileName} is not a PDF: by its contents it is ${kind.instead}.`)
   checkEnd(bytes)
-  const document = await opened(bytes)
+  const { document, pages } = await opened(bytes)
   const active = activeContent(document)
   if (active)
     throw no(`The PDF carries ${active}. Print it to a new PDF, which leaves that out, and send that.`)
-  const pages = document.getPageCount()
   if (pages === 0) throw no('The PDF has no pages.')
   if (pages > pageLimit)
     throw no(`The PDF has ${pages} pages; this document may have ${countInWords(pageLimit, 'page')}.`)

@@ -5,6 +5,7 @@ import { cosmologyProblem } from './cosmologyProblem'
 import type { ChosenCosmology } from './types'
 
 const presetIds = cosmologyPresets.map(({ id }) => id as string)
+const presetNames = cosmologyPresets.map(({ parameters }) => parameters.name.toLowerCase())
 const isPreset = (id: string) => presetIds.includes(id)
 
 /** The form as typed. Parameters count only when the choice is `custom`; they stay typed when it is not. */
@@ -70,6 +71,14 @@ function understood(form: CosmologyForm, ctx: z.RefinementCtx): ChosenCosmology 
     const { mNuEv, ...parameters } = findPreset(form.choice).parameters
     return { id: form.choice, parameters: { ...parameters, mNuEv: [...mNuEv] }, comparisonId }
   }
+  if (presetNames.includes(form.name.trim().toLowerCase())) {
+    ctx.addIssue({
+      code: 'custom',
+      path: ['name'],
+      message: 'A published cosmology has this name. Choose another.',
+    })
+    return z.NEVER
+  }
   const parameters = parametersOf(form)
   const problem = 'sentence' in parameters ? parameters : cosmologyProblem(parameters)
   if (problem) ctx.addIssue({ code: 'custom', path: [problem.field], message: problem.sentence })
@@ -87,7 +96,7 @@ export function cosmologyFormOf({ id, parameters: p, comparisonId }: ChosenCosmo
   return {
     choice: id,
     comparison: comparisonId ?? '',
-    name: p.name,
+    name: id === 'custom' ? p.name : '',
     H0: text(p.H0),
     Om0: text(p.Om0),
     Ode0: p.Ode0 === 'flat' ? '' : text(p.Ode0),

@@ -32,7 +32,9 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
       <TwoColumns
         side={
           <>
-            <SettlePanel read={read} />
+            <div className="max-lg:hidden">
+              <SettlePanel read={read} />
+            </div>
             <section>
               <SectionHeading dense title="Latest changes" />
               <div className="mt-2">
@@ -46,6 +48,9 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
           steps={[{ label: 'My proposals', href: paths.proposals() }, { label: contents.call.title }]}
         />
         <PageTitle display title={contents.title || 'A proposal without a title'} lead={homeLead(read)} />
+        <div className="mt-6 lg:hidden">
+          <SettlePanel read={read} />
+        </div>
         <div className="mt-6">
           <TaskList reference={contents.reference} sections={sections} />
         </div>

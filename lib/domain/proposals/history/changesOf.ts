@@ -29,11 +29,18 @@ function whoActed(entry: SubjectEntry, readerId: number): string | null {
   return entry.personId === readerId ? 'you' : (entry.name ?? 'somebody')
 }
 
-const merged = (later: SubjectEntry, earlier: SubjectEntry): SubjectEntry => ({
-  ...later,
-  before: { ...(later.before as object | null), ...(earlier.before as object | null) },
-  after: { ...(earlier.after as object | null), ...(later.after as object | null) },
-})
+/** Two changes as one: every field as the earlier found it, and as the later left it. */
+function merged(later: SubjectEntry, earlier: SubjectEntry): SubjectEntry {
+  const before = { ...(later.before as object | null), ...(earlier.before as object | null) }
+  const after = { ...(earlier.after as object | null), ...(later.after as object | null) }
+  const inOrder = (values: Record<string, unknown>) =>
+    Object.fromEntries(Object.keys(before).map((name) => [name, values[name]]))
+  return {
+    ...later,
+    before: inOrder(before as Record<string, unknown>),
+    after: inOrder(after as Record<string, unknown>),
+  }
+}
 
 function subjectOf(entry: SubjectEntry): string {
   const target = (entry.after as { target?: { id?: number } } | null)?.target?.id
@@ -59,6 +66,8 @@ export function changesOf(entries: readonly SubjectEntry[], readerId: number): C
     } else spells.push({ entry, since: entry.at })
   }
   return spells.flatMap(({ entry }) => {
+    // Changed and changed back within a spell: nothing to tell.
+    if (goesOn.has(entry.action) && JSON.stringify(entry.before) === JSON.stringify(entry.after)) return []
     const who = whoActed(entry, readerId)
     const words = entryWords[entry.action]?.(entry)
     return who && words ? [{ at: entry.at.toISOString(), who, words }] : []
