@@ -6,8 +6,8 @@ import { ABSENT, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 import { askFor, hoursText } from '@/lib/domain/observations/rules'
 import type { Observation } from '@/lib/domain/proposals/types'
 import { paths } from '@/lib/paths'
-import { cellClasses } from './cellClasses'
-import { nextCellOnEnter } from './nextCellOnEnter'
+import { cellClasses } from '@/components/rows/cellClasses'
+import { nextCellOnEnter } from '@/components/rows/nextCellOnEnter'
 import type { TargetActions } from './targetActions'
 
 export interface AskedCellProps {

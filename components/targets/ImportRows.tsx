@@ -3,7 +3,7 @@
 import { TableFrame } from '@/components/tables/TableFrame'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { TargetRow } from '@/lib/domain/targets/schema'
-import { cellClasses } from './cellClasses'
+import { cellClasses } from '@/components/rows/cellClasses'
 import { cellNames } from './cellNames'
 import type { Import, ReadFile } from './useImport'
 

@@ -6,7 +6,7 @@ import { formatNumber } from '@/lib/format'
 import { parseDeclination, parseRightAscension } from '@/lib/science/sky/coordinates'
 import { splitPosition } from '@/lib/domain/targets/rules'
 import type { TargetRow } from '@/lib/domain/targets/schema'
-import { TypedCell } from './TypedCell'
+import { TypedCell } from '@/components/rows/TypedCell'
 
 export interface PositionCellProps {
   name: string

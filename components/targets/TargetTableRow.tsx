@@ -6,19 +6,20 @@ import { FormProvider, useWatch } from 'react-hook-form'
 import { classNames } from '@/components/ui/classNames'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { ABSENT } from '@/lib/format'
-import { bandChoice, magnitudeBands } from '@/lib/domain/targets/rules'
-import type { TargetRow } from '@/lib/domain/targets/schema'
+import { bandChoice, emptyTargetRow, magnitudeBands, targetRow } from '@/lib/domain/targets/rules'
+import { targetRowSchema, type TargetRow } from '@/lib/domain/targets/schema'
 import { AskedCell } from './AskedCell'
-import { CellSelect } from './CellSelect'
+import { CellSelect } from '@/components/rows/CellSelect'
 import { DarkHoursCell } from './DarkHoursCell'
 import { NeededCell } from './NeededCell'
 import { NumberCell } from './NumberCell'
 import { PositionCell } from './PositionCell'
-import { RowMessages, useHasMessages } from './RowMessages'
+import { hasMessages, RowMessages } from '@/components/rows/RowMessages'
+import { cellNames } from './cellNames'
 import { TargetDetails } from './TargetDetails'
-import { TypedCell } from './TypedCell'
+import { TypedCell } from '@/components/rows/TypedCell'
 import type { RowView, TargetTableProps } from './targetTableTypes'
-import { useRowForm } from './useRowForm'
+import { useSelfSavingRow } from '@/components/rows/useSelfSavingRow'
 
 const needs = ['required', 'optional', 'backup'].map((value) => ({ value, label: value }))
 const bandOptions = magnitudeBands.map(({ band, system }) => {
@@ -40,10 +41,16 @@ export function TargetTableRow(props: TargetTableRowProps) {
   const messageId = useId()
   const [isOpen, setOpen] = useState(false)
   const [asking, setAsking] = useState<string | null>(null)
-  const row = useRowForm(view.kept, (values, version) => onSave(key, values, version))
+  const row = useSelfSavingRow({
+    schema: targetRowSchema,
+    kept: view.kept,
+    empty: emptyTargetRow,
+    rowOf: targetRow,
+    save: (values, version) => onSave(key, values, version),
+  })
   const { form, commit } = row
   const typed = useWatch({ control: form.control }) as TargetRow
-  const hasMessages = useHasMessages(row, asking)
+  const isWrong = hasMessages(form.formState.errors, row, asking)
   const name = typed.name.trim() || `target ${number}`
   const isOff = readOnly !== null
 
@@ -58,7 +65,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
         role="row"
         id={view.kept ? `target-${view.kept.id}` : undefined}
         onBlur={save}
-        className={classNames((hasMessages || isOpen) && 'has-detail', hasMessages && 'is-attention')}
+        className={classNames((isWrong || isOpen) && 'has-detail', isWrong && 'is-attention')}
       >
         <td role="cell" className="w-7 text-muted max-sm:!hidden">
           {number}
@@ -155,11 +162,11 @@ export function TargetTableRow(props: TargetTableRowProps) {
           </span>
         </td>
       </tr>
-      {hasMessages || isOpen || computed?.refusal ? (
-        <tr role="row" className={classNames('is-detail', hasMessages && 'is-attention')} onBlur={save}>
+      {isWrong || isOpen || computed?.refusal ? (
+        <tr role="row" className={classNames('is-detail', isWrong && 'is-attention')} onBlur={save}>
           <td role="cell" colSpan={span} className="sm:!pl-7">
             {computed?.refusal ? <p className="m-0 pb-1 text-not-feasible">{computed.refusal}</p> : null}
-            <RowMessages id={messageId} row={row} extra={asking} />
+            <RowMessages id={messageId} row={row} cellNames={cellNames} extra={asking} />
             {isOpen ? (
               <TargetDetails
                 readOnly={readOnly}

@@ -1,6 +1,6 @@
 'use client'
 
-import { useCallback, useMemo, useState } from 'react'
+import { useCallback, useMemo, useRef, useState } from 'react'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
@@ -20,6 +20,8 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
   const [begun, setBegun] = useState<readonly string[]>([])
   const [keys, setKeys] = useState<ReadonlyMap<number, string>>(new Map())
   const [typed, setTyped] = useState<Readonly<Record<string, TargetRow>>>({})
+  // Known at once, before the page comes back with the new row: a second save must not add it again.
+  const ids = useRef(new Map<string, number>())
 
   const places = useMemo((): RowPlace[] => {
     const live = (key: string, seat: Pick<Target, 'id' | 'position' | 'version'>, kept: Target | null) => {
@@ -53,10 +55,13 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
 
   const onSave = useCallback(
     async (key: string, row: TargetRow, version: number | null): Promise<ActionResult<Target>> => {
-      const id = places.find((place) => place.key === key)?.kept?.id
+      const id = places.find((place) => place.key === key)?.kept?.id ?? ids.current.get(key)
       if (id !== undefined && version !== null) return actions.save({ reference, id, version, row })
       const result = await actions.add({ reference, row })
-      if (result.ok) setKeys((before) => new Map(before).set(result.data.id, key))
+      if (result.ok) {
+        ids.current.set(key, result.data.id)
+        setKeys((before) => new Map(before).set(result.data.id, key))
+      }
       return result
     },
     [places, actions, reference],

@@ -1,8 +1,9 @@
 import type { Cosmology } from '@/lib/science/cosmology'
 import { observationReport, type ObservationReport } from '@/lib/science/feasibility'
 import type { ModeRecord } from '../facility/types'
-import type { Observation, ProposalContents, Target } from '../proposals/types'
+import type { Observation, Target } from '../proposals/types'
 import { regimeSentence } from './regimeSentence'
+import type { ReportContents } from './reportContents'
 import { gapChecks, modeGone, outsideSeason } from './requestChecks'
 import { moonClass, scienceGeometry, scienceMode, scienceSite, transparencyShare } from './scienceRecords'
 import { conditionsOf } from './seasonOf'
@@ -11,7 +12,7 @@ import type { ExposureFacts, FeasibilityCheck, ObservationComputation } from './
 import { worstVerdict } from './worstVerdict'
 
 export interface ObservationInput {
-  contents: ProposalContents
+  contents: ReportContents
   target: Target
   observation: Observation
   mode: ModeRecord | undefined
@@ -43,7 +44,12 @@ function withoutExposure(input: ObservationInput, checks: FeasibilityCheck[]): O
 }
 
 /** The request as the engine takes it. */
-function reportOf(input: ObservationInput & { mode: ModeRecord }, from: string, to: string) {
+export function reportOf(
+  input: ObservationInput & { mode: ModeRecord },
+  from: string,
+  to: string,
+  { searchNights = true } = {},
+): ObservationReport {
   const { contents, target, observation, cosmology } = input
   const conditions = conditionsOf(contents, observation)
   const sky = skyTargetOf(target)
@@ -54,7 +60,7 @@ function reportOf(input: ObservationInput & { mode: ModeRecord }, from: string, 
     target: {
       id: target.id,
       name: target.name,
-      raDeg: sky?.raDeg ?? null,
+      raDeg: searchNights ? (sky?.raDeg ?? null) : null,
       decDeg: sky?.decDeg ?? null,
       pmRaMasYr: sky?.pmRaMasYr,
       pmDecMasYr: sky?.pmDecMasYr,
@@ -96,6 +102,8 @@ function factsOf(exposure: NonNullable<ObservationReport['exposure']>): Exposure
     timeExponentOfFlux: exposure.timeExponentOfFlux,
     timeExponentOfDistance: exposure.timeExponentOfDistance,
     cosmologyMatters: exposure.cosmologyMatters,
+    signalE: exposure.signalE,
+    variance: { ...exposure.variance },
     warnings: [...exposure.warnings],
   }
 }

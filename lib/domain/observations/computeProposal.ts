@@ -1,17 +1,17 @@
 import type { Cosmology } from '@/lib/science/cosmology'
-import type { ProposalContents } from '../proposals/types'
 import { computeTarget } from './computeTarget'
 import { comparisonOf, cosmologyOf } from './cosmologyOf'
 import { engineVersion } from './engineVersion'
 import { proposalVerdict } from './proposalVerdict'
 import { recordVersions } from './recordVersions'
 import { rememberedObservation } from './rememberedObservation'
+import type { ReportContents } from './reportContents'
 import { notAskedTwice } from './requestChecks'
 import { darkHours } from './seasonOf'
 import type { ObservationComputation, ProposalComputation } from './types'
 import { worstVerdict } from './worstVerdict'
 
-function computeObservations(contents: ProposalContents, cosmology: Cosmology): ObservationComputation[] {
+function computeObservations(contents: ReportContents, cosmology: Cosmology): ObservationComputation[] {
   const targets = new Map(contents.targets.map((target) => [target.id, target]))
   return contents.observations.flatMap((observation): ObservationComputation[] => {
     const target = targets.get(observation.targetId)
@@ -29,7 +29,7 @@ function computeObservations(contents: ProposalContents, cosmology: Cosmology): 
  * Everything computed for a proposal: distances and hours of each target, exposure and checks of each observation,
  * and what the request comes to. Pure and the same on server and in the browser: same contents, same bytes.
  */
-export function computeProposal(contents: ProposalContents): ProposalComputation {
+export function computeProposal(contents: ReportContents): ProposalComputation {
   const cosmology = cosmologyOf(contents.cosmology.parameters)
   const comparison = comparisonOf(contents.cosmology)
   const season = darkHours(contents)

@@ -1,6 +1,6 @@
-import type { ProposalContents } from '../proposals/types'
 import { boundedMap } from './boundedMap'
 import { computeObservation, type ObservationInput } from './computeObservation'
+import type { ReportContents } from './reportContents'
 import { conditionsOf } from './seasonOf'
 import type { ObservationComputation, ProposalComputation } from './types'
 
@@ -28,7 +28,7 @@ export function rememberedObservation(input: ObservationInput): ObservationCompu
 
 /** Takes over what the server computed, so that the browser need not do it again. */
 export function takeOver(
-  contents: ProposalContents,
+  contents: ReportContents,
   computation: ProposalComputation,
   cosmology: ObservationInput['cosmology'],
 ): void {

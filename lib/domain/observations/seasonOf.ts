@@ -1,6 +1,6 @@
-import type { SiteRecord } from '../facility/types'
 import type { ConstraintSet, Observation, ProposalContents, Target } from '../proposals/types'
 import { defaultConstraints } from './defaultConstraints'
+import type { ReportContents } from './reportContents'
 import { seasonVisibility, type SeasonVisibility } from './seasonVisibility'
 import { skyTargetOf } from './skyTargetOf'
 
@@ -27,11 +27,7 @@ export function eveningsBetween(from: string, to: string): string[] {
  * Hours of each target through the whole season of the call, dark and above the airmass its first observation
  * asks for, whatever the Moon does. Targets that share an airmass are computed together.
  */
-export function darkHours(
-  contents: Pick<ProposalContents, 'call' | 'targets' | 'observations' | 'constraintSets'> & {
-    site: SiteRecord
-  },
-): SeasonVisibility {
+export function darkHours(contents: ReportContents): SeasonVisibility {
   const byAirmass = new Map<number, Target[]>()
   for (const target of contents.targets) {
     const first = contents.observations.find(({ targetId }) => targetId === target.id)

@@ -51,6 +51,9 @@ export interface ExposureFacts {
   timeExponentOfFlux: number
   timeExponentOfDistance: number
   cosmologyMatters: boolean
+  /** Electrons gathered in the open shutter needed, and their variances. */
+  signalE: number
+  variance: { source: number; sky: number; dark: number; read: number; floor: number }
   warnings: string[]
 }
 

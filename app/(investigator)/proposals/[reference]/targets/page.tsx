@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
+import { SectionFoot } from '@/components/proposals/SectionFoot'
 import { TargetsEditor } from '@/components/targets/TargetsEditor'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
@@ -12,6 +13,7 @@ import {
   restoreTargetAction,
   saveTargetAction,
 } from './actions'
+import { markSectionDoneAction } from '../actions'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'Targets' }
@@ -35,6 +37,13 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
           importRows: importTargetsAction,
           ask: askTimesAction,
         }}
+      />
+      <SectionFoot
+        reference={contents.reference}
+        section="targets"
+        done={contents.sectionsDone.includes('targets')}
+        offReason={readOnly}
+        mark={markSectionDoneAction}
       />
     </Main>
   )

@@ -1,12 +1,11 @@
 'use client'
 
 import { useFormContext } from 'react-hook-form'
-import type { TargetRow } from '@/lib/domain/targets/schema'
 import { cellClasses } from './cellClasses'
 import { nextCellOnEnter } from './nextCellOnEnter'
 
 export interface TypedCellProps {
-  name: keyof TargetRow
+  name: string
   /** Names the cell for screen readers: `Redshift of HE 0047−1756`. */
   label: string
   /** The row's place, for moving down with Enter. */
@@ -23,13 +22,13 @@ export interface TypedCellProps {
 /** A cell to type in: dotted line at rest, boxed in focus, a heavy red line while it cannot be read. */
 export function TypedCell(props: TypedCellProps) {
   const { name, label, row, align = 'left', strong, readOnly, placeholder, messageId, onPasteText } = props
-  const { register, resetField, getFieldState, formState } = useFormContext<TargetRow>()
+  const { register, resetField, getFieldState, formState } = useFormContext()
   const { error } = getFieldState(name, formState)
   return (
     <input
       {...register(name)}
       // What the server sends must show the text before the form wakes up.
-      defaultValue={formState.defaultValues?.[name]}
+      defaultValue={formState.defaultValues?.[name] as string | undefined}
       aria-label={label}
       aria-invalid={error ? true : undefined}
       aria-describedby={error ? messageId : undefined}

@@ -1,33 +1,32 @@
 'use client'
 
-import { useFormContext } from 'react-hook-form'
+import { useFormContext, type FieldErrors, type FieldValues } from 'react-hook-form'
 import { BarNote } from '@/components/ui/BarNote'
 import { Button } from '@/components/ui/Button'
 import { formatUtcInstant } from '@/lib/format'
-import type { TargetRow } from '@/lib/domain/targets/schema'
-import { cellNames } from './cellNames'
-import type { RowForm } from './useRowForm'
+import type { SelfSavingRow } from './useSelfSavingRow'
+
+type RowState = Pick<SelfSavingRow<FieldValues, unknown>, 'message' | 'stale' | 'keepMine' | 'takeTheirs'>
 
 export interface RowMessagesProps {
   id: string
-  row: RowForm
-  /** A message of a cell outside the row's own form: the hours asked. */
-  extra: string | null
+  row: RowState
+  /** What each cell is called. */
+  cellNames: Readonly<Record<string, string>>
+  /** A message of a cell outside the row's own form. */
+  extra?: string | null
 }
 
-const isCell = (key: string): key is keyof TargetRow => key in cellNames
-
 /** True when the row has something to say. */
-export function useHasMessages(row: RowForm, extra: string | null): boolean {
-  const { errors } = row.form.formState
-  return Object.keys(errors).length > 0 || row.message !== null || row.stale !== null || extra !== null
+export function hasMessages(errors: FieldErrors, row: RowState, extra?: string | null): boolean {
+  return Object.keys(errors).length > 0 || row.message !== null || row.stale !== null || Boolean(extra)
 }
 
 /** Under a row: what each wrong cell wants, and both versions when someone else saved first. */
-export function RowMessages({ id, row, extra }: RowMessagesProps) {
-  const { formState, getValues, setFocus } = useFormContext<TargetRow>()
+export function RowMessages({ id, row, cellNames, extra = null }: RowMessagesProps) {
+  const { formState, getValues, setFocus } = useFormContext()
   const wrong = Object.entries(formState.errors).flatMap(([key, error]) =>
-    isCell(key) && error?.message ? [{ key, message: error.message }] : [],
+    typeof error?.message === 'string' ? [{ key, message: error.message }] : [],
   )
   const { stale } = row
   return (
@@ -35,7 +34,7 @@ export function RowMessages({ id, row, extra }: RowMessagesProps) {
       {wrong.map(({ key, message }) => (
         <p key={key} className="m-0 font-semibold text-not-feasible">
           <button type="button" className="underline underline-offset-4" onClick={() => setFocus(key)}>
-            {cellNames[key]}
+            {cellNames[key] ?? 'This row'}
           </button>
           : {message}
         </p>
@@ -54,15 +53,17 @@ export function RowMessages({ id, row, extra }: RowMessagesProps) {
             Nothing of yours is lost.
           </p>
           <ul className="plain-list my-2">
-            {Object.entries(stale.theirs).map(([key, theirs]) =>
-              isCell(key) && String(theirs) !== getValues(key) ? (
+            {Object.entries(stale.theirs).map(([key, theirs]) => {
+              const mine: unknown = getValues(key)
+              if (!(key in cellNames) || String(theirs) === String(mine)) return null
+              return (
                 <li key={key}>
                   <span className="text-muted">{cellNames[key]}:</span> theirs{' '}
                   <strong>{String(theirs) || 'empty'}</strong>, yours{' '}
-                  <strong>{getValues(key) || 'empty'}</strong>
+                  <strong>{String(mine) || 'empty'}</strong>
                 </li>
-              ) : null,
-            )}
+              )
+            })}
           </ul>
           <span className="flex gap-3">
             <Button size="small" look="secondary" onClick={() => void row.keepMine()}>

@@ -1,0 +1,45 @@
+import type { Metadata } from 'next'
+import { Main } from '@/components/layout/Main'
+import { ObservingEditor } from '@/components/observations/ObservingEditor'
+import { SectionFoot } from '@/components/proposals/SectionFoot'
+import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import { markSectionDoneAction } from '../actions'
+import { proposalOf } from '../proposalOf'
+import {
+  addObservationAction,
+  askForAction,
+  removeObservationAction,
+  saveConstraintSetAction,
+  saveObservationAction,
+} from './actions'
+
+export const metadata: Metadata = { title: 'Observing' }
+
+export default async function ObservingPage({ params }: { params: Promise<{ reference: string }> }) {
+  await openPage('/proposals/[reference]/observing')
+  const { contents, computation, readOnly } = await orNotFound(proposalOf((await params).reference))
+  return (
+    <Main>
+      <ObservingEditor
+        contents={{ ...contents, people: [], papers: [] }}
+        computation={computation}
+        readOnly={readOnly}
+        actions={{
+          add: addObservationAction,
+          save: saveObservationAction,
+          ask: askForAction,
+          remove: removeObservationAction,
+          saveConstraints: saveConstraintSetAction,
+        }}
+      />
+      <SectionFoot
+        reference={contents.reference}
+        section="observing"
+        done={contents.sectionsDone.includes('observing')}
+        offReason={readOnly}
+        mark={markSectionDoneAction}
+      />
+    </Main>
+  )
+}

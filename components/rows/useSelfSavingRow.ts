@@ -1,0 +1,132 @@
+'use client'
+
+import { zodResolver } from '@hookform/resolvers/zod'
+import { useEffect, useRef, useState } from 'react'
+import { useForm, type DefaultValues, type FieldValues, type Path, type UseFormReturn } from 'react-hook-form'
+import type { z } from 'zod'
+import { savingStore } from '@/components/proposals/savingStore'
+import type { ActionResult } from '@/lib/actions/result'
+
+type Failure = Extract<ActionResult<unknown>, { ok: false }>
+export type StaleRow = NonNullable<Failure['stale']>
+
+export interface SelfSavingRow<Row extends FieldValues, Values> {
+  form: UseFormReturn<Row, unknown, Values>
+  /** Saves what differs from what is kept; does nothing while a cell cannot be read. */
+  commit: () => Promise<void>
+  message: string | null
+  stale: StaleRow | null
+  /** Keeps one's own row over theirs. */
+  keepMine: () => Promise<void>
+  /** Takes theirs over one's own. */
+  takeTheirs: () => void
+}
+
+export interface SelfSavingRowOptions<Row extends FieldValues, Values, Kept extends { version: number }> {
+  schema: z.ZodType<Values, Row>
+  /** As the server keeps it; null for a row not kept yet. */
+  kept: Kept | null
+  empty: Row
+  rowOf: (kept: Kept) => Row
+  /** Saves against the version it was read with; null makes a new one. */
+  save: (row: Row, version: number | null) => Promise<ActionResult<Kept>>
+}
+
+const text = (row: object) =>
+  JSON.stringify(row, (_, value: unknown) => (typeof value === 'string' ? value.trim() : value))
+
+/** One row of a table as a form that saves itself, one save at a time, each naming the version it was read with. */
+export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends { version: number }>(
+  options: SelfSavingRowOptions<Row, Values, Kept>,
+): SelfSavingRow<Row, Values> {
+  const { schema, kept, empty, rowOf, save } = options
+  const known = useRef<Row>(kept ? rowOf(kept) : empty)
+  const version = useRef<number | null>(kept?.version ?? null)
+  const running = useRef(false)
+  const again = useRef(false)
+  const [message, setMessage] = useState<string | null>(null)
+  const [stale, setStale] = useState<StaleRow | null>(null)
+  const form = useForm<Row, unknown, Values>({
+    resolver: zodResolver(schema),
+    defaultValues: known.current as DefaultValues<Row>,
+    mode: 'onBlur',
+    reValidateMode: 'onChange',
+  })
+
+  // Someone else's save, or an undo, came with the page: shown unless something is being typed here.
+  useEffect(() => {
+    if (!kept || kept.version === version.current || running.current) return
+    if (text(form.getValues()) !== text(known.current)) return
+    version.current = kept.version
+    known.current = rowOf(kept)
+    form.reset(known.current)
+  }, [kept, form, rowOf])
+
+  const refused = (failure: Failure) => {
+    const { fieldErrors, message: sentence } = failure
+    for (const [field, words] of Object.entries(fieldErrors))
+      form.setError(field.replace(/^row\./, '') as Path<Row>, { type: 'server', message: words })
+    setStale(failure.stale ?? null)
+    setMessage(Object.keys(fieldErrors).length > 0 || failure.stale ? null : sentence)
+    savingStore.report(
+      failure.stale
+        ? { name: 'stale', stale: failure.stale }
+        : { name: 'refused', message: sentence, fieldErrors },
+    )
+  }
+
+  const send = async (row: Row) => {
+    const result = await save(row, version.current)
+    if (!result.ok) return refused(result)
+    known.current = row
+    version.current = result.data.version
+    savingStore.report({ name: 'saved', at: new Date() })
+    setMessage(null)
+    setStale(null)
+  }
+
+  const commit = async (): Promise<void> => {
+    if (text(form.getValues()) === text(known.current)) return
+    if (!(await form.trigger()))
+      return savingStore.report({ name: 'refused', message: 'a cell cannot be read', fieldErrors: {} })
+    if (running.current) {
+      again.current = true
+      return
+    }
+    running.current = true
+    savingStore.report({ name: 'saving' })
+    try {
+      await send({ ...form.getValues() })
+    } catch {
+      savingStore.report({ name: 'offline' })
+      setMessage(
+        'The observatory did not answer. What you typed is still here; it is saved with the next change.',
+      )
+    } finally {
+      running.current = false
+    }
+    if (!again.current) return
+    again.current = false
+    await commit()
+  }
+
+  return {
+    form,
+    commit,
+    message,
+    stale,
+    keepMine: async () => {
+      version.current = stale?.version ?? version.current
+      setStale(null)
+      await commit()
+    },
+    takeTheirs: () => {
+      if (!stale) return
+      known.current = { ...empty, ...(stale.theirs as Partial<Row>) }
+      version.current = stale.version
+      form.reset(known.current)
+      setStale(null)
+      savingStore.report({ name: 'idle' })
+    },
+  }
+}
