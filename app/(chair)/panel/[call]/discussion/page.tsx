@@ -1,0 +1,54 @@
+import type { Metadata } from 'next'
+import { Main } from '@/components/layout/Main'
+import { DiscussedProposal } from '@/components/panel/DiscussedProposal'
+import { DiscussionList } from '@/components/panel/DiscussionList'
+import { SetAsideTail } from '@/components/panel/SetAsideTail'
+import { EmptyState } from '@/components/ui/EmptyState'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import { readDiscussion } from '@/lib/domain/rankings/readDiscussion'
+import { countInWords } from '@/lib/format'
+import { panelKey, type PanelPageProps } from '../panelKey'
+import { saveConsensusAction, setAsideAction } from './actions'
+
+export const metadata: Metadata = { title: 'Discussion' }
+
+export default async function DiscussionPage(props: PanelPageProps) {
+  const ctx = await openPage('/panel/[call]/discussion')
+  const view = await orNotFound(readDiscussion(ctx, await panelKey(props)))
+  const { proposal: wanted } = await props.searchParams
+  const open =
+    view.proposals.find((one) => one.reviewNumber === wanted) ??
+    view.proposals.find((one) => !one.setAside) ??
+    view.proposals[0]
+  const aside = view.proposals.filter((one) => one.setAside).length
+  const toDiscuss = countInWords(view.proposals.length - aside, 'proposal', 'proposals', true)
+  return (
+    <Main>
+      <PageTitle
+        title="Discussion"
+        lead={`${toDiscuss} to discuss, in the order of the ranking${aside > 0 ? `; ${aside} set aside` : ''}. Reviewers by number.`}
+      />
+      <SetAsideTail view={view} action={setAsideAction} />
+      {open ? (
+        <div className="mt-6 grid gap-x-16 gap-y-10 lg:grid-cols-[20rem_minmax(0,1fr)]">
+          <DiscussionList view={view} openId={open.proposalId} />
+          <DiscussedProposal
+            key={`${open.proposalId}-${open.decisionVersion}`}
+            proposal={open}
+            view={view}
+            save={saveConsensusAction}
+            setAside={setAsideAction}
+          />
+        </div>
+      ) : (
+        <div className="mt-6">
+          <EmptyState title="Nothing to discuss yet">
+            Proposals stand here once reviews are in and the ranking has begun.
+          </EmptyState>
+        </div>
+      )}
+    </Main>
+  )
+}

@@ -1,0 +1,146 @@
+'use client'
+
+import { useState } from 'react'
+import type { SaveStatementAction } from '@/components/panel/discussionActions'
+import { sentenceOf, useDeed } from '@/components/panel/useDeed'
+import { DataTable } from '@/components/tables/DataTable'
+import { BarNote } from '@/components/ui/BarNote'
+import { Button } from '@/components/ui/Button'
+import { ConfirmTyped } from '@/components/ui/ConfirmTyped'
+import { EmptyState } from '@/components/ui/EmptyState'
+import { LinkButton } from '@/components/ui/LinkButton'
+import { PageTitle } from '@/components/ui/PageTitle'
+import { showToast } from '@/components/ui/showToast'
+import type { ActionResult } from '@/lib/actions/result'
+import type { DecisionsView } from '@/lib/domain/decisions/readDecisions'
+import { countInWords, formatUtc } from '@/lib/format'
+import { paths } from '@/lib/paths'
+import { useRouter } from 'next/navigation'
+import { decisionColumns } from './decisionColumns'
+import { StatementForm } from './StatementForm'
+
+export interface DecisionsBoardProps {
+  view: DecisionsView
+  prepare: (input: { panelId: number }) => Promise<ActionResult<{ prepared: number }>>
+  save: SaveStatementAction
+  release: (input: { panelId: number; typed: string }) => Promise<ActionResult<{ released: number }>>
+}
+
+/** Two steps: prepare each decision, then make all of them known at once. */
+export function DecisionsBoard({ view, prepare, save, release }: DecisionsBoardProps) {
+  const { busy, deed } = useDeed()
+  const router = useRouter()
+  const [open, setOpen] = useState<number | null>(null)
+  const { panelId, rows } = view
+  const count = (outcome: string) => rows.filter((row) => row.outcome === outcome).length
+  const prepared = rows.filter((row) => row.isPrepared).length
+  const canPrepare =
+    view.hasRanking && !view.isReleased && view.phase !== 'decided' && view.phase !== 'archived'
+
+  const makeKnown = async (): Promise<string | null> => {
+    const result = await release({ panelId, typed: String(view.callNumber) })
+    if (!result.ok) return sentenceOf(result)
+    showToast(
+      `${countInWords(result.data.released, 'decision is', 'decisions are', true)} known; letters are on their way`,
+    )
+    router.refresh()
+    return null
+  }
+
+  return (
+    <>
+      <PageTitle
+        title="Decisions"
+        lead={`${count('awarded')} awarded, ${count('reserve')} in reserve, ${count('declined')} declined. ${prepared} of ${rows.length} prepared.`}
+        actions={
+          canPrepare ? (
+            <>
+              <Button
+                look="secondary"
+                busy={busy === 'prepare'}
+                busyWord="Preparing"
+                onClick={() =>
+                  deed(
+                    'prepare',
+                    () => prepare({ panelId }),
+                    (data) =>
+                      showToast(
+                        `${countInWords(data.prepared, 'decision is', 'decisions are', true)} prepared`,
+                      ),
+                  )
+                }
+              >
+                {prepared > 0 ? 'Prepare them again' : 'Prepare decisions'}
+              </Button>
+              <ConfirmTyped
+                trigger="Make them known …"
+                triggerProps={{ look: 'primary', size: 'regular', offReason: view.whyNot }}
+                title={`Make the decisions of call ${view.callNumber} known?`}
+                expected={String(view.callNumber)}
+                expectedName="the number of the call"
+                confirm="Make them known"
+                busyWord="Making known"
+                onConfirm={makeKnown}
+              >
+                Every investigator gets one letter, and reads the outcome at once. The hours are booked. This
+                cannot be done twice, and cannot be taken back.
+              </ConfirmTyped>
+            </>
+          ) : null
+        }
+      />
+      <div className="mt-6">
+        {view.isReleased ? (
+          <BarNote tone="accent">These decisions are made known, and the letters are written.</BarNote>
+        ) : (
+          <BarNote tone="lamp">
+            Letters are announced for {formatUtc(new Date(view.lettersAt))}. Outcomes follow from the hours
+            given under Nights; statements begin with the comments to the investigators, unsigned.
+          </BarNote>
+        )}
+      </div>
+      <div className="mt-6">
+        <DataTable
+          caption={`Decisions of call ${view.callNumber}`}
+          columns={decisionColumns(open, setOpen)}
+          rows={rows}
+          rowId={(row) => String(row.proposalId)}
+          find="Number or title"
+          chips={[
+            { id: 'awarded', label: 'Awarded', matches: (row) => row.outcome === 'awarded' },
+            { id: 'reserve', label: 'Reserve', matches: (row) => row.outcome === 'reserve' },
+            { id: 'declined', label: 'Declined', matches: (row) => row.outcome === 'declined' },
+            { id: 'open', label: 'Not prepared', matches: (row) => !row.isPrepared },
+          ]}
+          csv={`decisions-call-${view.callNumber}`}
+          selectedId={open === null ? null : String(open)}
+          detail={(row) =>
+            row.proposalId === open ? (
+              <StatementForm
+                key={row.version}
+                row={row}
+                panelId={panelId}
+                canEdit={canPrepare}
+                action={save}
+                onLeave={() => setOpen(null)}
+              />
+            ) : null
+          }
+          phone="cards"
+          empty={
+            <EmptyState
+              title="Nothing to decide yet"
+              actions={
+                <LinkButton look="secondary" href={paths.panel(view.callSlug, 'ranking')}>
+                  Go to the ranking
+                </LinkButton>
+              }
+            >
+              Decisions rest on the ranking and the hours given. Begin the ranking first.
+            </EmptyState>
+          }
+        />
+      </div>
+    </>
+  )
+}

@@ -1,0 +1,90 @@
+import type { TableColumn } from '@/components/tables/tableColumn'
+import { linkClasses } from '@/components/ui/linkClasses'
+import type { DecisionRow } from '@/lib/domain/decisions/readDecisions'
+import { formatNumber } from '@/lib/format'
+import { OutcomeMark } from './OutcomeMark'
+
+const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.seconds, 0) / 3600
+
+export function decisionColumns(
+  open: number | null,
+  onOpen: (proposalId: number | null) => void,
+): TableColumn<DecisionRow>[] {
+  return [
+    { id: 'rank', head: 'Rank', align: 'right', value: (row) => row.rank },
+    {
+      id: 'number',
+      head: 'Review',
+      unit: 'number',
+      value: (row) => row.reviewNumber,
+      cell: (row) => (
+        <button
+          type="button"
+          aria-expanded={open === row.proposalId}
+          onClick={() => onOpen(open === row.proposalId ? null : row.proposalId)}
+          className={`${linkClasses} font-semibold max-sm:min-h-11`}
+        >
+          {row.reviewNumber}
+        </button>
+      ),
+    },
+    { id: 'title', head: 'Title', value: (row) => row.title },
+    {
+      id: 'outcome',
+      head: 'Outcome',
+      value: (row) => row.outcome,
+      cell: (row) => <OutcomeMark outcome={row.outcome} />,
+    },
+    {
+      id: 'given',
+      head: 'Given',
+      unit: 'h',
+      align: 'right',
+      value: (row) => (row.lines.length > 0 ? given(row) : null),
+      cell: (row) => (row.lines.length > 0 ? formatNumber(given(row), 1) : '–'),
+      total: (rows) =>
+        formatNumber(
+          rows
+            .flatMap((row) => row.lines)
+            .reduce((sum, line) => sum + (line.isReserve ? 0 : line.seconds / 3600), 0),
+          1,
+        ),
+    },
+    {
+      id: 'asked',
+      head: 'Asked',
+      unit: 'h',
+      align: 'right',
+      value: (row) => row.askedSeconds / 3600,
+      cell: (row) => formatNumber(row.askedSeconds / 3600, 1),
+      total: (rows) =>
+        formatNumber(
+          rows.reduce((sum, row) => sum + row.askedSeconds / 3600, 0),
+          1,
+        ),
+    },
+    {
+      id: 'lines',
+      head: 'On',
+      sortable: false,
+      value: (row) =>
+        row.lines
+          .map((line) =>
+            [line.instrument, line.isReserve ? 'reserve' : '', line.conditions].filter(Boolean).join(', '),
+          )
+          .join('; '),
+    },
+    {
+      id: 'statement',
+      head: 'Statement',
+      value: (row) => [...row.statement].length,
+      cell: (row) =>
+        row.isPrepared ? (
+          `${formatNumber([...row.statement].length)} characters`
+        ) : (
+          <span className="font-semibold text-lamp">not written</span>
+        ),
+      csv: (row) => row.statement,
+    },
+  ]
+}

@@ -1,0 +1,16 @@
+import type { ActionResult } from '@/lib/actions/result'
+
+export type SaveAwardAction = (input: {
+  panelId: number
+  proposalId: number
+  version: number
+  lines: {
+    instrumentId: number
+    hours: string
+    isReserve: boolean
+    service: 'queue' | 'visitor'
+    conditions: string
+  }[]
+}) => Promise<ActionResult<void>>
+
+export type TakePlanAction = (input: { panelId: number }) => Promise<ActionResult<{ awarded: number }>>

@@ -1,0 +1,43 @@
+import Link from 'next/link'
+import { classNames } from '@/components/ui/classNames'
+import type { DiscussionView } from '@/lib/domain/rankings/readDiscussion'
+import { isGrey } from '@/lib/domain/rankings/rules'
+import { formatNumber } from '@/lib/format'
+import { paths } from '@/lib/paths'
+
+/** The proposals in order, the line through them; one is open beside. */
+export function DiscussionList({ view, openId }: { view: DiscussionView; openId: number }) {
+  const { line, callSlug } = view.ranking
+  return (
+    <nav aria-label="Proposals in order">
+      <ol className="plain-list text-table rule-open">
+        {view.proposals.map((one) => (
+          <li
+            key={one.proposalId}
+            className={one.rank === line ? 'border-b-2 border-lamp' : 'border-b border-rule'}
+          >
+            <Link
+              href={`${paths.panel(callSlug, 'discussion')}?proposal=${encodeURIComponent(one.reviewNumber)}`}
+              aria-current={one.proposalId === openId ? 'true' : undefined}
+              className={classNames(
+                'flex items-baseline gap-3 py-2 no-underline hover:bg-wash max-sm:min-h-11',
+                one.proposalId === openId && 'border-l-4 border-accent bg-wash pl-2',
+                one.setAside && 'text-muted',
+              )}
+            >
+              <span className="w-6 shrink-0 text-right text-muted">{one.rank}</span>
+              <span className="shrink-0 font-semibold">{one.reviewNumber}</span>
+              <span className="min-w-0 grow truncate">{one.setAside ? 'set aside' : one.title}</span>
+              <span className={isGrey(one.chance) ? 'font-semibold text-lamp' : undefined}>
+                {formatNumber(one.raw, 2)}
+              </span>
+            </Link>
+          </li>
+        ))}
+      </ol>
+      <p className="mt-2 text-caption text-muted">
+        Raw means at the right; in lamp, the grey zone of the line.
+      </p>
+    </nav>
+  )
+}

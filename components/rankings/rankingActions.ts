@@ -1,0 +1,17 @@
+import type { ActionResult } from '@/lib/actions/result'
+
+interface ListKey {
+  panelId: number
+  rankingId: number
+  version: number
+}
+
+/** The deeds of the ranking page, handed down from its actions. */
+export interface RankingActions {
+  start: (input: { panelId: number }) => Promise<ActionResult<void>>
+  move: (
+    input: ListKey & { proposalId: number; place: number | string; reason: string },
+  ) => Promise<ActionResult<void>>
+  line: (input: ListKey & { direction: 'up' | 'down' }) => Promise<ActionResult<void>>
+  freeze: (input: ListKey) => Promise<ActionResult<void>>
+}

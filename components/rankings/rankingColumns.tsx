@@ -1,0 +1,131 @@
+import { ChanceBar } from '@/components/charts/ChanceBar'
+import { RankInterval } from '@/components/charts/RankInterval'
+import type { TableColumn } from '@/components/tables/tableColumn'
+import { linkClasses } from '@/components/ui/linkClasses'
+import { isGrey } from '@/lib/domain/rankings/rules'
+import type { RankingRow } from '@/lib/domain/rankings/view'
+import { ABSENT, formatNumber, formatSigned } from '@/lib/format'
+
+export interface RankingColumnsInput {
+  callSlug: string
+  count: number
+  line: number
+  zone: { first: number; last: number } | null
+  selected: number | null
+  onSelect: (proposalId: number | null) => void
+}
+
+/** The interval, or a dash where nothing could be drawn. */
+function Interval({
+  row,
+  count,
+  line,
+  zone,
+}: { row: RankingRow } & Pick<RankingColumnsInput, 'count' | 'line' | 'zone'>) {
+  const { meritRank, rawRank, low, high, lowerHalf, upperHalf } = row
+  if (meritRank === null || rawRank === null || low === null || high === null) return <>{ABSENT}</>
+  return (
+    <RankInterval
+      count={count}
+      line={line}
+      zone={zone ? [zone.first, zone.last] : undefined}
+      grey={isGrey(row.chance)}
+      merit={meritRank}
+      raw={rawRank}
+      low={low}
+      high={high}
+      lowerHalf={lowerHalf ?? low}
+      upperHalf={upperHalf ?? high}
+    />
+  )
+}
+
+export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingRow>[] {
+  const { count, line, zone, selected, onSelect } = input
+  return [
+    { id: 'rank', head: 'Rank', align: 'right', value: (row) => row.rank },
+    {
+      id: 'number',
+      head: 'Review',
+      unit: 'number',
+      value: (row) => row.reviewNumber,
+      cell: (row) => (
+        <button
+          type="button"
+          aria-expanded={selected === row.proposalId}
+          onClick={() => onSelect(selected === row.proposalId ? null : row.proposalId)}
+          className={`${linkClasses} font-semibold max-sm:min-h-11`}
+        >
+          {row.reviewNumber}
+        </button>
+      ),
+    },
+    {
+      id: 'title',
+      head: 'Title',
+      value: (row) => row.title,
+      cell: (row) => (
+        <>
+          {row.title}
+          {row.setAside ? <span className="text-muted"> · set aside</span> : null}
+        </>
+      ),
+    },
+    {
+      id: 'asked',
+      head: 'Asked',
+      unit: 'h',
+      value: (row) => row.askedSeconds / 3600,
+      cell: (row) => (
+        <span className="whitespace-nowrap">
+          {row.lines.map((one) => (
+            <span key={one.instrumentId} className="block">
+              {one.instrument} <span className="text-muted">{formatNumber(one.seconds / 3600, 1)}</span>
+            </span>
+          ))}
+        </span>
+      ),
+    },
+    {
+      id: 'raw',
+      head: 'Raw',
+      unit: 'mean',
+      align: 'right',
+      value: (row) => row.raw,
+      cell: (row) => <span className="font-semibold">{formatNumber(row.raw, 2)}</span>,
+    },
+    {
+      id: 'merit',
+      head: 'Merit',
+      unit: 'and shift',
+      align: 'right',
+      value: (row) => row.merit,
+      cell: (row) => (
+        <span className="whitespace-nowrap">
+          {formatNumber(row.merit, 2)}{' '}
+          <span className="text-tick text-muted">{formatSigned(row.shift, 2)}</span>
+        </span>
+      ),
+    },
+    {
+      id: 'chance',
+      head: 'P above the line',
+      unit: 'half is the tick',
+      value: (row) => row.chance,
+      cell: (row) =>
+        row.chance === null ? ABSENT : <ChanceBar chance={row.chance} grey={isGrey(row.chance)} />,
+    },
+    {
+      id: 'interval',
+      head: 'Where the rank could lie',
+      unit: `1 to ${count}`,
+      sortable: false,
+      value: (row) => (row.low === null ? null : `${row.low} to ${row.high ?? row.low}`),
+      cell: (row) => (
+        <span className="-my-2 inline-block align-middle">
+          <Interval row={row} count={count} line={line} zone={zone} />
+        </span>
+      ),
+    },
+  ]
+}
