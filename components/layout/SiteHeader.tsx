@@ -44,10 +44,13 @@ export function SiteHeader({
           <HeaderNav links={links} className="max-lg:hidden" />
         </div>
         <div className="flex items-center gap-5 text-table">
-          {tag ? <span className="max-lg:hidden">{tag}</span> : null}
+          {tag ? <span className="whitespace-nowrap max-2xl:hidden">{tag}</span> : null}
           <HeaderNav links={asideLinks} quiet label="More" className="max-lg:hidden" />
           {account ? (
-            <Link href={account.href} className="font-medium no-underline hover:underline max-lg:hidden">
+            <Link
+              href={account.href}
+              className="font-medium whitespace-nowrap no-underline hover:underline max-lg:hidden"
+            >
               {account.name}
             </Link>
           ) : (
@@ -55,7 +58,7 @@ export function SiteHeader({
               Sign in
             </Link>
           )}
-          {signOut ? <span className="max-lg:hidden">{signOut}</span> : null}
+          {signOut ? <span className="whitespace-nowrap max-lg:hidden">{signOut}</span> : null}
           <span className="max-lg:hidden">
             <ThemeSwitch initial={theme} />
           </span>

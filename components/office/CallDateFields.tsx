@@ -13,7 +13,7 @@ const fields = [
 /** The seven dates of a call, in the order they come. */
 export function CallDateFields({ utcOffsetHours }: { utcOffsetHours?: number }) {
   return (
-    <div className="grid gap-x-8 gap-y-6 sm:grid-cols-2">
+    <div className="grid gap-x-8 gap-y-6 xl:grid-cols-2">
       {fields.map(([name, label]) => (
         <DateTimeField key={name} name={name} label={label} utcOffsetHours={utcOffsetHours} />
       ))}
