@@ -2,7 +2,7 @@
 
 import { Plus } from 'lucide-react'
 import { Popover } from '@/components/ui/Popover'
-import type { AssignmentRow } from '@/lib/domain/assignments/view'
+import type { AssignmentRow } from '@/lib/domain/assignments/assignmentsView'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { freeReviewers } from './freeReviewers'
 

@@ -3,7 +3,7 @@
 import { DataTable } from '@/components/tables/DataTable'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { EmptyState } from '@/components/ui/EmptyState'
-import type { AssignmentRow, AssignmentsView } from '@/lib/domain/assignments/view'
+import type { AssignmentRow, AssignmentsView } from '@/lib/domain/assignments/assignmentsView'
 
 const of = (row: AssignmentRow, state: AssignmentRow['readers'][number]['state']) =>
   row.readers.filter((reader) => reader.state === state).length

@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/Button'
 import { classNames } from '@/components/ui/classNames'
 import { Popover } from '@/components/ui/Popover'
 import type { Seat } from '@/lib/domain/assignments/schema'
-import type { AssignmentRow } from '@/lib/domain/assignments/view'
+import type { AssignmentRow } from '@/lib/domain/assignments/assignmentsView'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { ReplaceForm } from './ReplaceForm'
 

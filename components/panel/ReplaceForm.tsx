@@ -8,7 +8,7 @@ import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { showToast } from '@/components/ui/showToast'
 import { replaceSchema } from '@/lib/domain/assignments/schema'
-import type { AssignmentRow, AssignmentsView } from '@/lib/domain/assignments/view'
+import type { AssignmentRow, AssignmentsView } from '@/lib/domain/assignments/assignmentsView'
 import type { AssignmentActions } from './assignmentActions'
 import { freeReviewers } from './freeReviewers'
 

@@ -3,7 +3,7 @@
 import { DataTable } from '@/components/tables/DataTable'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { EmptyState } from '@/components/ui/EmptyState'
-import type { PanelReviewer } from '@/lib/domain/assignments/view'
+import type { PanelReviewer } from '@/lib/domain/assignments/assignmentsView'
 import { formatNumber } from '@/lib/format'
 import { PagesBar } from './PagesBar'
 

@@ -4,7 +4,7 @@ import { DataTable } from '@/components/tables/DataTable'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
-import type { AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/view'
+import type { AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/assignmentsView'
 import { PagesBar } from './PagesBar'
 
 export interface ReviewerProgressProps {

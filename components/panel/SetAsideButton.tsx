@@ -3,7 +3,7 @@
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
 import type { DiscussedProposal } from '@/lib/domain/rankings/readDiscussion'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 import type { SetAsideAction } from './discussionActions'
 import { useDeed } from './useDeed'
 

@@ -1,4 +1,4 @@
-import type { AssignmentRow, AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/view'
+import type { AssignmentRow, AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/assignmentsView'
 
 /** Who may still be given a proposal, the lightest load first. */
 export function freeReviewers(view: AssignmentsView, row: AssignmentRow): PanelReviewer[] {

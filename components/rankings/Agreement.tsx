@@ -1,5 +1,5 @@
 import { Facts } from '@/components/ui/Facts'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 import { ABSENT, formatNumber } from '@/lib/format'
 
 /** How far reviewers agree, and what is left over in one score. */

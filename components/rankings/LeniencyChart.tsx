@@ -1,7 +1,7 @@
 import { SpreadMark } from '@/components/charts/SpreadMark'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { Tag } from '@/components/ui/Tag'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 import { formatNumber, formatSigned } from '@/lib/format'
 
 const chanceOf = (p: number) => (p < 0.0001 ? 'p below 0.0001' : `p ${p.toPrecision(1)}`)

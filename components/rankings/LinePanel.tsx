@@ -3,7 +3,7 @@
 import { Button } from '@/components/ui/Button'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { greyZone, isGrey } from '@/lib/domain/rankings/rules'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 import { countInWords, formatHoursFromSeconds } from '@/lib/format'
 
 export interface LinePanelProps {

@@ -10,7 +10,7 @@ import { useActionForm } from '@/components/forms/useActionForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
 import { moveSchema } from '@/lib/domain/rankings/schema'
-import type { RankingRow } from '@/lib/domain/rankings/view'
+import type { RankingRow } from '@/lib/domain/rankings/rankingView'
 import type { MovePanelProps } from './MovePanel'
 
 export interface MoveFormProps extends Pick<MovePanelProps, 'listKey' | 'action'> {

@@ -3,7 +3,7 @@
 import { useState } from 'react'
 import { Button } from '@/components/ui/Button'
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import type { RankingRow } from '@/lib/domain/rankings/view'
+import type { RankingRow } from '@/lib/domain/rankings/rankingView'
 import { MoveForm } from './MoveForm'
 import type { RankingActions } from './rankingActions'
 

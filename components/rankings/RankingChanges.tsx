@@ -1,5 +1,5 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 
 /** What differs from the version frozen last; nothing while there is none. */
 export function RankingChanges({ view }: { view: RankingView }) {

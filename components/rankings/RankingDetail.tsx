@@ -1,4 +1,4 @@
-import type { RankingRow } from '@/lib/domain/rankings/view'
+import type { RankingRow } from '@/lib/domain/rankings/rankingView'
 import { formatNumber, formatUtc } from '@/lib/format'
 
 export interface RankingDetailProps {

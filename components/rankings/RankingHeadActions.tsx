@@ -4,7 +4,7 @@ import { useTableState } from '@/components/tables/useTableState'
 import { Button } from '@/components/ui/Button'
 import { classNames } from '@/components/ui/classNames'
 import { LinkButton } from '@/components/ui/LinkButton'
-import type { RankingView } from '@/lib/domain/rankings/view'
+import type { RankingView } from '@/lib/domain/rankings/rankingView'
 import { paths } from '@/lib/paths'
 
 const orders = [

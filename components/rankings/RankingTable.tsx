@@ -5,7 +5,7 @@ import { DataTable } from '@/components/tables/DataTable'
 import { useTableState } from '@/components/tables/useTableState'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { greyZone, isGrey } from '@/lib/domain/rankings/rules'
-import type { RankingRow, RankingView } from '@/lib/domain/rankings/view'
+import type { RankingRow, RankingView } from '@/lib/domain/rankings/rankingView'
 import { RankingDetail } from './RankingDetail'
 import { rankingColumns } from './rankingColumns'
 

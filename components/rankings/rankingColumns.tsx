@@ -3,7 +3,7 @@ import { RankInterval } from '@/components/charts/RankInterval'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
 import { isGrey } from '@/lib/domain/rankings/rules'
-import type { RankingRow } from '@/lib/domain/rankings/view'
+import type { RankingRow } from '@/lib/domain/rankings/rankingView'
 import { ABSENT, formatNumber, formatSigned } from '@/lib/format'
 
 export interface RankingColumnsInput {

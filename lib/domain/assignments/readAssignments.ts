@@ -12,7 +12,7 @@ import { barredPairs } from '../conflicts/barredPairs'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
 import { interestInWords, whyNotReminded } from './rules'
-import type { AssignmentsView } from './view'
+import type { AssignmentsView } from './assignmentsView'
 
 const stateOf = (a: PanelAssignment) => (a.finishedAt ? 'finished' : a.begun ? 'begun' : 'to-read')
 

@@ -11,5 +11,4 @@ export const panelQuery = z.object({
   panel: z.coerce.number<string>().int().positive().optional(),
 })
 
-export const panelProposalSchema = panelKeySchema.extend({ proposalId: id })
 export const rowKey = id

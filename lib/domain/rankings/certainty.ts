@@ -9,7 +9,7 @@ import {
   type Score,
 } from '@/lib/panel/statistics'
 import { shiftSentence } from './shiftSentence'
-import type { RankingView } from './view'
+import type { RankingView } from './rankingView'
 
 export const draws = 2000
 

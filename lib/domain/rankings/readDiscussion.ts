@@ -4,7 +4,7 @@ import { assessedLines, panelMembers } from '@/db/queries/panel'
 import type { ActingContext } from '../context'
 import { readRanking } from './readRanking'
 import { clearTail } from './rules'
-import type { RankingRow, RankingView } from './view'
+import type { RankingRow, RankingView } from './rankingView'
 
 export interface DiscussedProposal extends RankingRow {
   /** Reviewers by number, first reader and second voice named as such. */

@@ -11,7 +11,7 @@ import { changesBetween } from './changesBetween'
 import { offeredByTelescope } from './offered'
 import { visibleLine, visibleOrder } from './order'
 import { panelScores } from './panelScores'
-import type { RankingView } from './view'
+import type { RankingView } from './rankingView'
 
 /** The day the panel meets, as a number: the same draws for everyone who looks. */
 const seedOf = (meets: Date) => Number(meets.toISOString().slice(0, 10).replaceAll('-', ''))

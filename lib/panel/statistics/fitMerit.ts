@@ -7,7 +7,7 @@ import { remlFit } from './remlFit'
 import type { MeritFit, Score } from './types'
 
 /** Leniency is taken out only where chance would give so large a difference in less than one case in twenty. */
-export const leniencyLimit = 0.05
+const leniencyLimit = 0.05
 
 export interface FittedModel {
   design: Design

@@ -1,6 +1,6 @@
 export { agreement, type Agreement } from './agreement'
 export { connectedGroups } from './connectedGroups'
-export { fitMerit, leniencyLimit } from './fitMerit'
+export { fitMerit } from './fitMerit'
 export { krippendorffAlpha } from './krippendorffAlpha'
 export { chanceAbove, rankDraws, rankQuantile, type RankDistribution } from './rankDraws'
 export { rawScores, type RawScore } from './rawScores'

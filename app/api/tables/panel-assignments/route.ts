@@ -1,5 +1,5 @@
 import { readAssignments } from '@/lib/domain/assignments/readAssignments'
-import { assignmentsView } from '@/lib/domain/assignments/view'
+import { assignmentsView } from '@/lib/domain/assignments/assignmentsView'
 import { panelQuery } from '@/lib/domain/panels/schema'
 import { defineRoute } from '@/lib/http/defineRoute'
 

@@ -1,5 +1,5 @@
 import { readRanking } from '@/lib/domain/rankings/readRanking'
-import { rankingView } from '@/lib/domain/rankings/view'
+import { rankingView } from '@/lib/domain/rankings/rankingView'
 import { panelQuery } from '@/lib/domain/panels/schema'
 import { defineRoute } from '@/lib/http/defineRoute'
 
