@@ -1,4 +1,4 @@
-import type { Child, Ending } from './child'
+import { sentenceStart, type Child, type Ending } from './child'
 import { relativeToProject, tailOf, type DataFolder } from './folders'
 import { claimDataFolder, forgetRunning, noteRunning } from './runningNote'
 
@@ -68,7 +68,7 @@ function describeEnding(child: Child, { code, signal }: Ending): string {
   const how = signal ? `was ended by ${signal}` : `ended with code ${code ?? 'unknown'}`
   const tail = tailOf(child.logFile, 8).map((line) => `    | ${line}`)
   return [
-    `${child.name} ${how}, so everything else is being stopped.`,
+    `${sentenceStart(child.name)} ${how}, so everything else is being stopped.`,
     ...tail,
     `Its log is ${relativeToProject(child.logFile)}; put the cause right and start again.`,
   ].join('\n  ')

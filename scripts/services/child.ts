@@ -96,8 +96,12 @@ export async function untilReady(
 
 export function childProblem(child: Child, what: string): Problem {
   return new Problem(
-    `${child.name} ${what}.`,
+    `${sentenceStart(child.name)} ${what}.`,
     `The reason is at the end of ${relativeToProject(child.logFile)} (shown above). Put it right and run again.`,
     tailOf(child.logFile),
   )
+}
+
+export function sentenceStart(words: string): string {
+  return words.charAt(0).toUpperCase() + words.slice(1)
 }

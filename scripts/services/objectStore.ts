@@ -13,9 +13,10 @@ export async function startObjectStore(folder: DataFolder, port: number): Promis
   const child = startChild({
     name: 'the object store',
     command: process.execPath,
-    // s3rver is old; Node's warnings about what it uses would fill the log.
+    // s3rver is old: Node would warn of what it uses, and long listings need a cipher that OpenSSL 3 put away.
     args: [
       '--no-deprecation',
+      '--openssl-legacy-provider',
       program,
       ...['--directory', folder.objects, '--address', '127.0.0.1', '--port', String(port)],
       ...['--no-vhost-buckets', '--allow-mismatched-signatures', '--configure-bucket', bucketName],
@@ -23,7 +24,7 @@ export async function startObjectStore(folder: DataFolder, port: number): Promis
     cwd: projectRoot,
     logFile: join(folder.logs, 'objects.log'),
   })
-  await untilReady(child, () => responds(`http://127.0.0.1:${port}/${bucketName}?list-type=2&max-keys=1`), 30)
+  await untilReady(child, () => responds(`http://127.0.0.1:${port}/${bucketName}/is-it-up`), 30)
   return child
 }
 
