@@ -16,6 +16,9 @@ export interface UpBarsProps {
   label: string
 }
 
+/** Name, line, sum; on phones the line has the whole width under the two words. */
+const rowGrid = 'grid grid-cols-2 items-end gap-x-3 sm:grid-cols-[7rem_minmax(0,1fr)_5rem]'
+
 const height = 26
 const width = 500
 
@@ -24,22 +27,19 @@ export function UpBars({ rows, months, maxHours, label }: UpBarsProps) {
   const most = maxHours ?? Math.max(1, ...rows.flatMap(({ byNight }) => byNight))
   return (
     <figure className="m-0" role="img" aria-label={label}>
-      <div
-        aria-hidden="true"
-        className="grid grid-cols-[7rem_minmax(0,1fr)_5rem] items-end gap-x-3 gap-y-1.5 text-caption"
-      >
+      <div aria-hidden="true" className="flex flex-col gap-y-1.5 text-caption">
         {rows.map((row) => {
           const colour = row.tone ? `var(--${row.tone})` : 'var(--s1)'
           const shape = upBar(row.byNight, width, height, most)
           return (
-            <div key={row.name} className="contents">
-              <span className="truncate text-right">{row.name}</span>
+            <div key={row.name} className={rowGrid}>
+              <span className="truncate sm:text-right">{row.name}</span>
               <svg
                 viewBox={`0 0 ${width} ${height}`}
                 width="100%"
                 height={height}
                 preserveAspectRatio="none"
-                className="block overflow-visible"
+                className="block overflow-visible max-sm:order-last max-sm:col-span-2"
               >
                 <path d={shape.area} fill={colour} opacity="0.16" />
                 <path
@@ -54,18 +54,20 @@ export function UpBars({ rows, months, maxHours, label }: UpBarsProps) {
             </div>
           )
         })}
-        <div className="col-start-2 flex border-t border-ink text-tick text-muted">
-          {months.map((month) => (
-            <div
-              key={month.name}
-              className="min-w-0 overflow-hidden text-center"
-              style={{ flex: `${month.count} 0 0` }}
-            >
-              <span className="block h-1.5 w-px bg-ink" />
-              <span className="max-sm:hidden">{month.name}</span>
-              <span className="sm:hidden">{month.name.slice(0, 3)}</span>
-            </div>
-          ))}
+        <div className={rowGrid}>
+          <div className="flex border-t border-ink text-tick text-muted max-sm:col-span-2 sm:col-start-2">
+            {months.map((month) => (
+              <div
+                key={month.name}
+                className="min-w-0 overflow-hidden text-center"
+                style={{ flex: `${month.count} 0 0` }}
+              >
+                <span className="block h-1.5 w-px bg-ink" />
+                <span className="max-sm:hidden">{month.name}</span>
+                <span className="sm:hidden">{month.name.slice(0, 3)}</span>
+              </div>
+            ))}
+          </div>
         </div>
       </div>
     </figure>
