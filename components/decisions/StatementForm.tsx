@@ -52,7 +52,9 @@ export function StatementForm({ row, panelId, canEdit, action, onLeave }: Statem
           limit={8000}
         />
         <div className="flex flex-wrap items-center gap-5 text-table">
-          <SubmitButton busyWord="Keeping">Keep the statement</SubmitButton>
+          <SubmitButton look="secondary" busyWord="Keeping">
+            Keep the statement
+          </SubmitButton>
           <LinkLikeButton onClick={onLeave}>Leave it</LinkLikeButton>
         </div>
       </ActionForm>

@@ -63,7 +63,9 @@ export function AwardForm({ row, view, save, onSaved, onLeave }: AwardFormProps)
           />
         ))}
         <div className="flex flex-wrap items-center gap-5 text-table">
-          <SubmitButton busyWord="Keeping">Keep these hours</SubmitButton>
+          <SubmitButton look="secondary" busyWord="Keeping">
+            Keep these hours
+          </SubmitButton>
           <LinkLikeButton onClick={onLeave}>Leave it</LinkLikeButton>
         </div>
       </ActionForm>

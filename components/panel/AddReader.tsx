@@ -6,12 +6,12 @@ import type { AssignmentRow } from '@/lib/domain/assignments/assignmentsView'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { freeReviewers } from './freeReviewers'
 
-export interface AddReaderProps extends Pick<AssignmentsTableProps, 'view' | 'busy' | 'onAdd'> {
+export interface AddReaderProps extends Pick<AssignmentsTableProps, 'view' | 'onAdd'> {
   row: AssignmentRow
 }
 
 /** Adds a reader: who may, lightest load first; who may not, and why. */
-export function AddReader({ view, row, busy, onAdd }: AddReaderProps) {
+export function AddReader({ view, row, onAdd }: AddReaderProps) {
   const free = freeReviewers(view, row)
   const has = (seat: 'first' | 'second') => row.readers.some((reader) => reader.seat === seat)
   const seat = has('first') ? (has('second') ? 'reader' : 'second') : 'first'
@@ -37,13 +37,12 @@ export function AddReader({ view, row, busy, onAdd }: AddReaderProps) {
             <button
               type="button"
               className="flex min-h-8 w-full items-baseline justify-between gap-4 border-t border-rule py-1 text-left hover:bg-wash max-sm:min-h-11"
-              onClick={() => {
-                if (busy) return
+              onClick={() =>
                 onAdd(
                   { proposalId: row.proposalId, personId: reviewer.personId, seat },
                   `${reviewer.name} reads ${row.reviewNumber}`,
                 )
-              }}
+              }
             >
               <span>{reviewer.name}</span>
               <span className="text-muted">

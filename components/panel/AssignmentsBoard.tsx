@@ -38,9 +38,9 @@ export function AssignmentsBoard({ initial, actions }: AssignmentsBoardProps) {
 
   const undoAssign = (assignmentIds: number[]) => () =>
     deed('undo', () => actions.takeOff({ panelId, assignmentIds }))
-  const assign = (pairs: SuggestedPairs['pairs'], words: string) =>
+  const assign = (name: string, pairs: SuggestedPairs['pairs'], words: string) =>
     deed(
-      'assign',
+      name,
       () => actions.assign({ panelId, pairs }),
       ({ assignmentIds }) => {
         setSuggestion(null)
@@ -91,7 +91,7 @@ export function AssignmentsBoard({ initial, actions }: AssignmentsBoardProps) {
           busy={busy}
           onSuggest={(each) => deed('suggest', () => actions.suggest({ panelId, each }), setSuggestion)}
           onAssign={(pairs) =>
-            assign(pairs, `${countInWords(pairs.length, 'assignment', 'assignments', true)} made`)
+            assign('assign', pairs, `${countInWords(pairs.length, 'assignment', 'assignments', true)} made`)
           }
           onLeave={() => setSuggestion(null)}
         />
@@ -101,20 +101,19 @@ export function AssignmentsBoard({ initial, actions }: AssignmentsBoardProps) {
           view={data}
           canAssign={canAssign}
           suggested={suggestion?.pairs ?? []}
-          busy={busy !== null}
-          onAdd={(pair, words) => assign([pair], words)}
+          onAdd={(pair, words) => assign(`add-${pair.proposalId}-${pair.personId}`, [pair], words)}
           onTakeOff={(pair, assignmentId, words) =>
             deed(
-              'take-off',
+              `take-off-${assignmentId}`,
               () => actions.takeOff({ panelId, assignmentIds: [assignmentId] }),
               () =>
                 showToast(words, {
-                  undo: () => deed('undo', () => actions.assign({ panelId, pairs: [pair] })),
+                  undo: () => deed(`undo-${assignmentId}`, () => actions.assign({ panelId, pairs: [pair] })),
                 }),
             )
           }
           onSeat={(assignmentId, seat) =>
-            deed('seat', () => actions.changeSeat({ panelId, assignmentId, seat }))
+            deed(`seat-${assignmentId}-${seat}`, () => actions.changeSeat({ panelId, assignmentId, seat }))
           }
           replace={actions.replace}
         />

@@ -18,7 +18,6 @@ export interface AssignmentsTableProps {
   view: AssignmentsView
   canAssign: boolean
   suggested: readonly Pair[]
-  busy: boolean
   onAdd: (pair: Pair, words: string) => void
   onTakeOff: (pair: Pair, assignmentId: number, words: string) => void
   onSeat: (assignmentId: number, seat: Seat) => void

@@ -13,7 +13,7 @@ const stateWords = { 'to-read': 'not begun', begun: 'begun', finished: 'finished
 
 export interface ReaderChipProps extends Pick<
   AssignmentsTableProps,
-  'view' | 'canAssign' | 'busy' | 'onTakeOff' | 'onSeat' | 'replace'
+  'view' | 'canAssign' | 'onTakeOff' | 'onSeat' | 'replace'
 > {
   row: AssignmentRow
   reader: AssignmentRow['readers'][number]
@@ -22,7 +22,7 @@ export interface ReaderChipProps extends Pick<
 
 /** A reader by name; opened: how far the review is, the seat, taking off, replacing. */
 export function ReaderChip(props: ReaderChipProps) {
-  const { row, reader, name, view, canAssign, busy, onTakeOff, onSeat, replace } = props
+  const { row, reader, name, view, canAssign, onTakeOff, onSeat, replace } = props
   const { assignmentId, seat, state, personId } = reader
   return (
     <Popover
@@ -50,14 +50,7 @@ export function ReaderChip(props: ReaderChipProps) {
         {(['first', 'second', 'reader'] as const)
           .filter((other) => other !== seat)
           .map((other) => (
-            <Button
-              key={other}
-              look="secondary"
-              size="small"
-              onClick={() => {
-                if (!busy) onSeat(assignmentId, other)
-              }}
-            >
+            <Button key={other} look="secondary" size="small" onClick={() => onSeat(assignmentId, other)}>
               {`Make ${seatWords[other]}`}
             </Button>
           ))}

@@ -12,11 +12,11 @@ export interface AssignmentActions {
   replace: (input: {
     panelId: number
     assignmentId: number
-    personId: number | string
+    personId: string
     reason: string
   }) => Promise<ActionResult<{ assignmentId: number }>>
   suggest: (input: {
     panelId: number
-    each: number | string
+    each: string
   }) => Promise<ActionResult<{ pairs: Pair[]; short: { reviewNumber: string; lacking: number }[] }>>
 }

@@ -2,7 +2,7 @@
 
 import { useQueryClient } from '@tanstack/react-query'
 import { unstable_rethrow, useRouter } from 'next/navigation'
-import { useState } from 'react'
+import { useRef, useState } from 'react'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 
@@ -13,14 +13,17 @@ export function sentenceOf(result: Extract<ActionResult<never>, { ok: false }>):
 }
 
 /**
- * Does something small on a panel's page: one deed at a time; the tables are read anew afterwards, and a refusal is
- * said in a toast.
+ * Does small things on a panel's page, one after another, each named; the same thing pressed twice is done once.
+ * The tables are read anew afterwards, and a refusal is said in a toast.
  */
 export function useDeed(): {
+  /** The name of the deed being done. */
   busy: string | null
   deed: <T>(name: string, act: () => Promise<ActionResult<T>>, done?: (data: T) => void) => void
 } {
   const [busy, setBusy] = useState<string | null>(null)
+  const waiting = useRef(new Set<string>())
+  const last = useRef(Promise.resolve())
   const client = useQueryClient()
   const router = useRouter()
   const run = async <T>(name: string, act: () => Promise<ActionResult<T>>, done?: (data: T) => void) => {
@@ -35,13 +38,16 @@ export function useDeed(): {
       unstable_rethrow(error)
       showToast('The observatory did not answer. Nothing was changed; try again.')
     } finally {
+      waiting.current.delete(name)
       setBusy(null)
     }
   }
   return {
     busy,
     deed: (name, act, done) => {
-      if (!busy) void run(name, act, done)
+      if (waiting.current.has(name)) return
+      waiting.current.add(name)
+      last.current = last.current.then(() => run(name, act, done))
     },
   }
 }

@@ -29,7 +29,7 @@ export function MoveForm({ row, place, listKey, action, onLeave }: MoveFormProps
     defaultValues: {
       ...listKey,
       proposalId: row.proposalId,
-      place: place === 'ask' ? '' : place,
+      place: place === 'ask' ? '' : String(place),
       reason: '',
     },
     onDone: () => {

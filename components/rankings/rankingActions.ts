@@ -10,7 +10,7 @@ interface ListKey {
 export interface RankingActions {
   start: (input: { panelId: number }) => Promise<ActionResult<void>>
   move: (
-    input: ListKey & { proposalId: number; place: number | string; reason: string },
+    input: ListKey & { proposalId: number; place: string; reason: string },
   ) => Promise<ActionResult<void>>
   line: (input: ListKey & { direction: 'up' | 'down' }) => Promise<ActionResult<void>>
   freeze: (input: ListKey) => Promise<ActionResult<void>>

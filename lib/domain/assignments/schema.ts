@@ -24,20 +24,21 @@ export type SeatInput = z.output<typeof seatSchema>
 
 export const replaceSchema = panelKeySchema.extend({
   assignmentId: rowKey,
-  personId: z.coerce
-    .number<string | number>('Choose who takes over.')
-    .int()
-    .positive('Choose who takes over.'),
+  personId: z
+    .string()
+    .regex(/^[1-9]\d{0,9}$/, 'Choose who takes over.')
+    .transform(Number),
   reason,
 })
 export type ReplaceInput = z.output<typeof replaceSchema>
 
 export const suggestSchema = panelKeySchema.extend({
-  each: z.coerce
-    .number<string | number>()
-    .int()
-    .min(1, 'At least one reader.')
-    .max(14, 'At most 14 readers.'),
+  each: z
+    .string()
+    .trim()
+    .regex(/^(\d|1[0-4])$/, 'Readers are a whole number up to 14.')
+    .transform(Number)
+    .refine((each) => each > 0, 'At least one reader.'),
 })
 export type SuggestInput = z.output<typeof suggestSchema>
 

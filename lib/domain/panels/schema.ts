@@ -8,7 +8,11 @@ export type PanelKeyInput = z.output<typeof panelKeySchema>
 /** A panel's table: by the call's address, and the panel where a person leads two. */
 export const panelQuery = z.object({
   call: z.string().min(1).max(60),
-  panel: z.coerce.number<string>().int().positive().optional(),
+  panel: z
+    .string()
+    .regex(/^[1-9]\d{0,9}$/)
+    .transform(Number)
+    .optional(),
 })
 
 export const rowKey = id

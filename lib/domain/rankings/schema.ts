@@ -13,10 +13,12 @@ export type ListKeyInput = z.output<typeof listKey>
 
 export const moveSchema = listKey.extend({
   proposalId: rowKey,
-  place: z.coerce
-    .number<string | number>('Give the rank as a number.')
-    .int('Ranks are whole numbers.')
-    .min(1, 'The first rank is 1.'),
+  place: z
+    .string()
+    .trim()
+    .regex(/^\d{1,4}$/, 'Give the rank as a whole number.')
+    .transform(Number)
+    .refine((place) => place > 0, 'The first rank is 1.'),
   reason,
 })
 export type MoveInput = z.output<typeof moveSchema>
