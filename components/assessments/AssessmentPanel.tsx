@@ -1,6 +1,6 @@
 import { Panel } from '@/components/ui/Panel'
 import type { RequestView } from '@/lib/domain/assessments/readRequest'
-import { formatUtc } from '@/lib/format'
+import { formatDay } from '@/lib/format'
 import { AssessmentForm, type AssessmentFormProps } from './AssessmentForm'
 
 export interface AssessmentPanelProps {
@@ -17,7 +17,7 @@ export function AssessmentPanel({ view, action }: AssessmentPanelProps) {
     <Panel
       bar="accent"
       title="Your assessment"
-      aside={standing ? `Saved ${formatUtc(standing.assessedAt)}` : `Due ${formatUtc(view.assessmentsDueAt)}`}
+      aside={standing ? `Saved ${formatDay(standing.assessedAt)}` : `Due ${formatDay(view.assessmentsDueAt)}`}
     >
       {view.shut ? (
         <p className="m-0">{view.shut}</p>

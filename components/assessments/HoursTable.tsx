@@ -1,20 +1,21 @@
 import { AskedBar } from '@/components/charts/AskedBar'
 import { TableFrame } from '@/components/tables/TableFrame'
 import { VerdictMark } from '@/components/ui/VerdictMark'
-import type { TargetHours } from '@/lib/domain/assessments/rules'
-import { countInWords, formatHoursFromSeconds, formatNumber } from '@/lib/format'
+import { trueSecondsByTarget, type TargetHours } from '@/lib/domain/assessments/rules'
+import { ABSENT, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 
 const hours = (seconds: number, decimals = 2) => formatNumber(seconds / 3600, decimals)
 const heads = [
   ['Open', 'h'],
   ['Overheads', 'h'],
   ['Computed', 'h'],
+  ['True', 'h'],
   ['Asked', 'h'],
 ] as const
 
 export interface HoursTableProps {
   targets: readonly TargetHours[]
-  /** The hours the standing assessment calls true; bars are drawn in its proportion. */
+  /** The hours the standing assessment calls true; null before there is one. */
   trueSeconds: number | null
 }
 
@@ -24,9 +25,9 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
   const needed = total((row) => row.neededSeconds)
   const asked = total((row) => row.askedSeconds)
   const said = trueSeconds ?? needed
-  const share = needed > 0 ? said / needed : 1
-  const most =
-    Math.max(0.1, ...targets.map((row) => Math.max(row.askedSeconds, row.neededSeconds * share))) / 3600
+  const shares = trueSecondsByTarget(targets, said)
+  const longest = Math.max(360, ...shares, ...targets.map((row) => row.askedSeconds))
+  const most = longest / 3600
   const spare = asked - said
   return (
     <div>
@@ -44,7 +45,7 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
           </tr>
         </thead>
         <tbody>
-          {targets.map((row) => (
+          {targets.map((row, index) => (
             <tr key={row.targetId}>
               <th scope="row">
                 {row.name}
@@ -56,10 +57,13 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
               <td className="is-right">{hours(row.openSeconds)}</td>
               <td className="is-right">{hours(row.overheadSeconds)}</td>
               <td className="is-right is-computed">{hours(row.neededSeconds)}</td>
+              <td className="is-right font-semibold">
+                {trueSeconds === null ? ABSENT : hours(shares[index] ?? 0)}
+              </td>
               <td className="is-right">{hours(row.askedSeconds)}</td>
               <td>
                 <AskedBar
-                  trueHours={(row.neededSeconds * share) / 3600}
+                  trueHours={(shares[index] ?? 0) / 3600}
                   computedHours={row.neededSeconds / 3600}
                   askedHours={row.askedSeconds / 3600}
                   maxHours={most}
@@ -70,10 +74,11 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
         </tbody>
         <tfoot>
           <tr>
-            <td>{countInWords(targets.length, 'target')}</td>
+            <td>{targets.length === 1 ? '1 target' : `${targets.length} targets`}</td>
             <td className="is-right">{hours(total((row) => row.openSeconds))}</td>
             <td className="is-right">{hours(total((row) => row.overheadSeconds))}</td>
             <td className="is-right is-computed">{hours(needed)}</td>
+            <td className="is-right">{trueSeconds === null ? ABSENT : hours(trueSeconds)}</td>
             <td className="is-right">{hours(asked)}</td>
             <td>
               <VerdictMark
@@ -89,8 +94,11 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
         </tfoot>
       </TableFrame>
       <p className="mt-2 text-caption text-muted">
-        Bar: {trueSeconds === null ? 'computed hours' : 'true hours, shared as computed'}. Dashed line:
-        computed. Tick: asked, the limit.
+        Bar:{' '}
+        {trueSeconds === null
+          ? 'computed hours'
+          : 'true hours, with what differs from the computed shared over the overheads'}
+        . Dashed line: computed. Tick: asked, the limit.
       </p>
     </div>
   )

@@ -9,7 +9,7 @@ export interface QuestionExchangeProps {
 
 function Said({ who, at, bar, children }: { who: string; at: Date; bar?: boolean; children: string }) {
   return (
-    <div className="grid gap-x-5 gap-y-1 border-t border-rule py-3 text-table sm:grid-cols-[9.5rem_minmax(0,1fr)]">
+    <div className="grid gap-x-5 gap-y-1 border-t border-rule py-3 text-table sm:grid-cols-[11.5rem_minmax(0,1fr)]">
       <div>
         <strong className="font-semibold">{who}</strong>
         <span className="block text-muted">{formatUtc(at)}</span>

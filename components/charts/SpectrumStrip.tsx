@@ -44,7 +44,7 @@ export function SpectrumStrip(props: SpectrumStripProps) {
   return (
     <svg
       viewBox={`-8 0 ${width + 16} ${top + height + 48}`}
-      className="block w-full min-w-[720px]"
+      className="block w-full min-w-[720px] overflow-visible"
       role="img"
       aria-label={label}
     >

@@ -1,8 +1,7 @@
 import { Facts, type Fact } from '@/components/ui/Facts'
 import { TextLink } from '@/components/ui/TextLink'
-import { engineName, fingerprint } from '@/lib/domain/submission/fingerprint'
 import type { SentProposal } from '@/lib/domain/submission/readSent'
-import { formatMoney, formatUtcClock, formatUtcInstant } from '@/lib/format'
+import { formatEngine, formatFingerprint, formatMoney, formatUtcClock, formatUtcInstant } from '@/lib/format'
 import { paths } from '@/lib/paths'
 
 /** What was received: the money where there is some, the version, its fingerprint. */
@@ -21,8 +20,8 @@ export function ReceiptFacts({ sent }: { sent: SentProposal }) {
   } else if (fee?.state === 'waived') facts.push({ term: 'Fee', value: 'waived' })
   else if (fee?.state === 'invoiced') facts.push({ term: 'Fee', value: 'by invoice' })
   facts.push(
-    { term: 'Version', value: `${version.versionNumber}, engine ${engineName(version.engineVersion)}` },
-    { term: 'Fingerprint', value: fingerprint(version.sha256) },
+    { term: 'Version', value: `${version.versionNumber}, engine ${formatEngine(version.engineVersion)}` },
+    { term: 'Fingerprint', value: formatFingerprint(version.sha256) },
   )
   return (
     <div>

@@ -37,7 +37,7 @@ export function NightBand({ site, now, utcOffsetHours, next, href }: NightBandPr
   // The text has 320 px: where the date is long, the minutes left give way to it.
   const parts = next?.dayOnly ? 1 : (next?.words.length ?? 0) + date.length > longestWithMinutes ? 2 : 3
   return (
-    <div className="night-band" data-no-print>
+    <section aria-label="Tonight and the next date" className="night-band" data-no-print>
       <div className="night-band-next">
         {next ? (
           <>
@@ -60,6 +60,6 @@ export function NightBand({ site, now, utcOffsetHours, next, href }: NightBandPr
       <div className="night-band-clock">
         <BandClock serverNowMs={serverNowMs} utcOffsetHours={utcOffsetHours} />
       </div>
-    </div>
+    </section>
   )
 }

@@ -32,7 +32,12 @@ export function StripCell({
       )}
     >
       <dt className="text-tick leading-[1.125rem] whitespace-nowrap text-muted">{label}</dt>
-      <dd className={classNames('m-0 truncate text-strip font-semibold', tone === 'lamp' && 'text-lamp')}>
+      <dd
+        className={classNames(
+          'm-0 truncate text-strip font-semibold max-sm:leading-5 max-sm:whitespace-normal',
+          tone === 'lamp' && 'text-lamp',
+        )}
+      >
         {value}
         {trailing ? <span className="font-normal text-muted max-xl:hidden"> · {trailing}</span> : null}
       </dd>

@@ -72,7 +72,7 @@ export function ObservationTable(props: ObservationTableProps) {
           <td role="cell" className="is-right" data-head="Asked, h">
             {formatNumber(computation.askedSeconds / 3600, 1)}
           </td>
-          <td role="cell" data-head="Verdict">
+          <td role="cell" data-head="Verdict" className="whitespace-nowrap">
             {computation.verdict ? <VerdictMark verdict={computation.verdict} strong /> : null}
           </td>
         </tr>

@@ -13,7 +13,7 @@ export interface ObservationTab {
 /** Which observation the report is about: each with its verdict, the chosen one filled. */
 export function ObservationTabs({ tabs, chosen }: { tabs: readonly ObservationTab[]; chosen: number }) {
   return (
-    <nav aria-label="Observations" className="-mx-2 overflow-x-auto">
+    <nav aria-label="Observations" className="relative -mx-2 overflow-x-auto">
       <ul className="plain-list flex gap-2 pb-1">
         {tabs.map(({ id, name, verdict, href }) => {
           const isChosen = id === chosen

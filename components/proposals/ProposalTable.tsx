@@ -22,7 +22,8 @@ export function ProposalTable({ initial }: { initial: ProposalsReply }) {
     schema: proposalsReply,
     initialData: initial,
   })
-  const reply = data ?? initial
+  // The page just rendered may know more than what the browser kept from an earlier visit.
+  const reply = data && data.now > initial.now ? data : initial
   const rows = useMemo(() => reply.rows.map((row) => ({ ...row, now: reply.now })), [reply])
   return (
     <>

@@ -11,7 +11,10 @@ export function homeLead({ contents, sections, readOnly, deadline }: ReadProposa
   const own = sections.filter(({ section }) => section !== 'send')
   const done = own.filter(({ state }) => state === 'done').length
   const whole = countInWords(own.length, 'section')
-  const count = `${countInWords(done, `of ${whole} is`, `of ${whole} are`, true)} done`
+  const count =
+    done === 0
+      ? `None of ${whole} is done yet`
+      : `${countInWords(done, `of ${whole} is`, `of ${whole} are`, true)} done`
   const hour = formatUtc(deadline)
   return contents.isReopened
     ? `Reopened: what was sent stands until you send it again, by ${hour}. ${count}.`

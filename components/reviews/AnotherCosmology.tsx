@@ -30,12 +30,9 @@ export function AnotherCosmology({ assignmentId, stated, presets }: AnotherCosmo
     staleTime: Infinity,
   })
   return (
-    <section
-      aria-labelledby="another-cosmology"
-      className="mt-6 grid rounded border border-rule bg-surface md:grid-cols-[15.5rem_minmax(0,1fr)]"
-    >
-      <div className="border-rule p-5 max-md:border-b md:border-r">
-        <h2 id="another-cosmology" className="text-body font-semibold">
+    <section className="mt-6 grid rounded border border-rule bg-surface md:grid-cols-[15.5rem_minmax(0,1fr)]">
+      <div className="min-w-0 border-rule p-5 max-md:border-b max-sm:p-4 md:border-r">
+        <h2 className="text-body font-semibold">
           <label htmlFor="cosmology">Under another cosmology</label>
         </h2>
         <div className="relative mt-3">
@@ -60,7 +57,7 @@ export function AnotherCosmology({ assignmentId, stated, presets }: AnotherCosmo
         </div>
         <p className="mt-2 text-caption text-muted">The packet itself does not change.</p>
       </div>
-      <div className="p-5" aria-live="polite" aria-busy={isFetching}>
+      <div className="min-w-0 overflow-x-auto p-5 max-sm:p-4" aria-live="polite" aria-busy={isFetching}>
         {error ? (
           <p className="m-0 text-table font-semibold text-not-feasible">{error.message}</p>
         ) : (

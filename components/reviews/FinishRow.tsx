@@ -11,6 +11,8 @@ export interface FinishRowProps extends Pick<
   'assignmentId' | 'version' | 'isFinished' | 'shut' | 'mayReopen' | 'nextHref' | 'actions'
 > {
   saveAll: () => Promise<void>
+  /** Some field still carries its message. */
+  hasGaps: boolean
   /** Messages by field; the first one takes the focus. */
   onGaps: (gaps: Record<string, string>) => void
 }
@@ -19,8 +21,9 @@ const placeOf = (field: string) => (field.startsWith('score-') ? field : `text-$
 
 /** Finish, open again, go on to the next one. */
 export function FinishRow(props: FinishRowProps) {
-  const { assignmentId, version, isFinished, shut, mayReopen, nextHref, actions, saveAll, onGaps } = props
-  const [failure, setFailure] = useState<string | null>(null)
+  const { assignmentId, version, isFinished, shut, mayReopen, nextHref, actions, saveAll, hasGaps, onGaps } =
+    props
+  const [failure, setFailure] = useState<{ message: string; isOfFields: boolean } | null>(null)
   const [busy, start] = useTransition()
 
   const send = (act: typeof actions.finish, done: string) =>
@@ -28,23 +31,24 @@ export function FinishRow(props: FinishRowProps) {
       try {
         await saveAll()
         const result = await act({ assignmentId, version })
-        setFailure(result.ok ? null : result.message)
+        const gaps = result.ok ? [] : Object.keys(result.fieldErrors)
+        setFailure(result.ok ? null : { message: result.message, isOfFields: gaps.length > 0 })
         onGaps(result.ok ? {} : result.fieldErrors)
         if (result.ok) showToast(done)
-        else {
-          const first = Object.keys(result.fieldErrors)[0]
-          if (first) document.getElementById(placeOf(first))?.focus()
-        }
+        else if (gaps[0]) document.getElementById(placeOf(gaps[0]))?.focus()
       } catch {
-        setFailure('The observatory did not answer. Nothing you typed is lost; try again.')
+        setFailure({
+          message: 'The observatory did not answer. Nothing you typed is lost; try again.',
+          isOfFields: false,
+        })
       }
     })
 
   return (
     <div>
-      {failure ? (
+      {failure && (hasGaps || !failure.isOfFields) ? (
         <p role="alert" className="mb-3 text-table font-semibold text-not-feasible">
-          {failure}
+          {failure.message}
         </p>
       ) : null}
       {shut ? <p className="mb-3 text-table text-muted">{shut}</p> : null}

@@ -3,7 +3,7 @@ import { VerdictMark } from '@/components/ui/VerdictMark'
 import type { InstrumentAssessment } from '@/lib/domain/assessments/types'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { instrumentWords } from '@/lib/domain/reviews/instrumentWords'
-import { countInWords, formatHoursFromSeconds } from '@/lib/format'
+import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
 import { AssessmentNote } from './AssessmentNote'
 import { PacketFrame } from './PacketFrame'
 
@@ -45,11 +45,13 @@ export function PacketPane({ proposal, assessments, packetUrl }: PacketPaneProps
           </TextLink>
         </span>
       </div>
-      <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 py-4 text-table">
-        <strong className="font-semibold">
+      <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 pb-4 text-table lg:pt-4">
+        <strong className="font-semibold max-lg:hidden">
           {formatHoursFromSeconds(computation.askedSeconds)}, {instruments}
         </strong>
-        <span>{countInWords(proposal.targets.length, 'target')}</span>
+        <span>
+          {formatNumber(proposal.targets.length)} {proposal.targets.length === 1 ? 'target' : 'targets'}
+        </span>
         {assessments.map(({ instrumentId, instrument, verdict }) => (
           <VerdictMark
             key={instrumentId}

@@ -6,8 +6,8 @@ import { formatDay, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 
 /** How far a reviewer is in a call, and how long there is. */
-export function ReviewProgress({ group, serverNowMs }: { group: ReviewsOfCall; serverNowMs: number }) {
-  const { call, lines, declaredAt } = group
+export function ReviewProgress({ group }: { group: ReviewsOfCall }) {
+  const { call, lines, declaredAt, now } = group
   const finished = lines.filter(({ state }) => state === 'finished').length
   const words = `${finished} of ${lines.length} finished`
   return (
@@ -21,7 +21,7 @@ export function ReviewProgress({ group, serverNowMs }: { group: ReviewsOfCall; s
           <strong className="font-semibold text-lamp">
             <Countdown
               untilMs={call.reviewsDueAt.getTime()}
-              serverNowMs={serverNowMs}
+              serverNowMs={now.getTime()}
               parts={2}
               passed="past: finish before the panel meets"
             />

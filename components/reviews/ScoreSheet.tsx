@@ -75,7 +75,12 @@ export function ScoreSheet(props: SheetProps) {
           save={actions.saveText}
         />
       ))}
-      <FinishRow {...props} saveAll={saving.saveAll} onGaps={setErrors} />
+      <FinishRow
+        {...props}
+        saveAll={saving.saveAll}
+        hasGaps={Object.keys(errors).length > 0}
+        onGaps={setErrors}
+      />
     </section>
   )
 }

@@ -17,7 +17,7 @@ export function TimeTable({ proposal }: { proposal: AnonymousProposal }) {
       <thead>
         <tr>
           <th scope="col">Target</th>
-          <th scope="col">Instrument, mode</th>
+          <th scope="col">Mode</th>
           {['S/N', 'Needed', 'Asked'].map((head) => (
             <th key={head} scope="col" className="is-right">
               {head}
@@ -34,7 +34,7 @@ export function TimeTable({ proposal }: { proposal: AnonymousProposal }) {
           return (
             <tr key={observation.id}>
               <th scope="row">{names.get(observation.targetId)}</th>
-              <td>{mode ? `${mode.instrument.name}, ${mode.name}` : ''}</td>
+              <td>{mode?.name}</td>
               <td className="is-right">{formatNumber(observation.wantedSnr, 0)}</td>
               <td className="is-right is-computed">{hours(row?.neededSeconds)}</td>
               <td className="is-right">{hours(observation.askedSeconds)}</td>

@@ -5,7 +5,8 @@ import { formatNumber } from '@/lib/format'
 /** The weighted mean of what is scored so far, double ruled. */
 export function WeightedMean({ criteria }: { criteria: readonly SheetCriterion[] }) {
   const { scored, all } = partsScored(criteria)
-  const words = scored === all ? 'Weighted' : `Weighted, of the ${scored} of ${all} parts scored`
+  const isPart = scored > 0 && scored < all
+  const words = isPart ? `Weighted, of the ${scored} parts scored` : 'Weighted'
   return (
     <p role="status" className="m-0 flex items-baseline justify-between gap-4 py-2 font-semibold rule-total">
       {words}

@@ -22,11 +22,11 @@ export interface TypedCellProps {
 /** A cell to type in: dotted line at rest, boxed in focus, a heavy red line while it cannot be read. */
 export function TypedCell(props: TypedCellProps) {
   const { name, label, row, align = 'left', strong, readOnly, placeholder, messageId, onPasteText } = props
-  const { register, resetField, getFieldState, formState } = useFormContext()
+  const { register, resetField, trigger, getFieldState, formState } = useFormContext()
   const { error } = getFieldState(name, formState)
   return (
     <input
-      {...register(name)}
+      {...register(name, { onChange: () => (error ? void trigger(name) : undefined) })}
       // What the server sends must show the text before the form wakes up.
       defaultValue={formState.defaultValues?.[name] as string | undefined}
       aria-label={label}

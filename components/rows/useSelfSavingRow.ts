@@ -49,8 +49,9 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
   const form = useForm<Row, unknown, Values>({
     resolver: zodResolver(schema),
     defaultValues: known.current as DefaultValues<Row>,
-    mode: 'onBlur',
-    reValidateMode: 'onChange',
+    // Checked by `commit`, when a cell is left; a message goes as soon as its cell is right (TypedCell).
+    mode: 'onSubmit',
+    reValidateMode: 'onSubmit',
   })
 
   // Someone else's save, or an undo, came with the page: shown unless something is being typed here.

@@ -109,7 +109,7 @@ export function TargetTable({ shown, totals, maxAirmass, months, ...props }: Tar
           <td role="cell" className="is-right" data-head="Asked, h">
             {formatNumber(totals.askedSeconds / 3600, 1)}
           </td>
-          <td role="cell" data-head="Verdict">
+          <td role="cell" data-head="Verdict" className="whitespace-nowrap">
             {totals.verdict ? <VerdictMark verdict={totals.verdict} strong /> : null}
           </td>
         </tr>

@@ -1,7 +1,7 @@
 'use client'
 
 import { ChevronDown } from 'lucide-react'
-import { useEffect, useId, useState } from 'react'
+import { useEffect, useId, useState, type FocusEvent } from 'react'
 import { FormProvider, useWatch } from 'react-hook-form'
 import { classNames } from '@/components/ui/classNames'
 import { VerdictMark } from '@/components/ui/VerdictMark'
@@ -58,13 +58,23 @@ export function TargetTableRow(props: TargetTableRowProps) {
 
   const cell = { row: number, readOnly: isOff, messageId }
   const save = () => void commit()
+  // From one half of a position to the other nothing is judged yet.
+  const leave = (event: FocusEvent) => {
+    const [from, to] = [event.target, event.relatedTarget].map(
+      (at) => at instanceof HTMLElement && at.dataset,
+    )
+    const halves = ['ra', 'dec']
+    const isWithin =
+      from && to && from.row === to.row && halves.includes(from.cell ?? '') && halves.includes(to.cell ?? '')
+    if (!isWithin) save()
+  }
   const span = columns.length + 9
   return (
     <FormProvider {...form}>
       <tr
         role="row"
         id={view.kept ? `target-${view.kept.id}` : undefined}
-        onBlur={save}
+        onBlur={leave}
         className={classNames((isWrong || isOpen) && 'has-detail', isWrong && 'is-attention')}
       >
         <td role="cell" className="w-7 text-muted max-sm:!hidden">
@@ -148,7 +158,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
           </span>
         </td>
         <td role="cell" data-head="Verdict" className="whitespace-nowrap">
-          <span className="flex items-start justify-between gap-3">
+          <span className="flex items-start justify-between gap-3 max-sm:items-center">
             {verdict ? <VerdictMark verdict={verdict} /> : <span className="text-muted">{ABSENT}</span>}
             <button
               type="button"

@@ -70,9 +70,11 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
   const onRemove = useCallback(
     async (key: string) => {
       const kept = places.find((place) => place.key === key)?.kept
-      if (!kept) return setBegun((before) => before.filter((one) => one !== key))
+      const forget = () => setBegun((before) => before.filter((one) => one !== key))
+      if (!kept) return forget()
       const result = await actions.remove({ reference, id: kept.id })
       if (!result.ok) return showToast(result.message)
+      forget()
       showToast(`${kept.name} taken out`, {
         undo: () => {
           void actions.restore({ reference, id: kept.id }).then((back) => {

@@ -23,7 +23,7 @@ export function EmptyState({ title, children, actions }: EmptyStateProps) {
         <path d="M0 7.5H160M0 13.5H160M0 19.5H160" stroke="currentColor" />
         <circle cx="4" cy="3.5" r="3.5" fill="var(--lamp)" />
       </svg>
-      <h3 className="mt-3 text-body font-semibold">{title}</h3>
+      <h2 className="mt-3 text-body font-semibold">{title}</h2>
       <p className="mt-1 max-w-prose text-table text-muted">{children}</p>
       {actions ? <div className="mt-4 flex flex-wrap gap-3">{actions}</div> : null}
     </div>

@@ -27,7 +27,7 @@ export function VerdictMark({ verdict, words, size = 'text', strong = false }: V
       )}
     >
       <VerdictGlyph shape={shape} height={heights[size]} />
-      <span>{words ?? word}</span>
+      <span className={words === undefined ? 'whitespace-nowrap' : undefined}>{words ?? word}</span>
     </span>
   )
 }

@@ -14,9 +14,9 @@ export async function pdfWith(
 }
 
 /** Sets an entry of the catalogue: where scripts and opening actions hang. */
-export function inCatalog(key: string, value: Parameters<PDFDocument['context']['obj']>[0]) {
+export function inCatalog(key: string, value: Record<string, unknown>) {
   return (document: PDFDocument) => {
-    document.catalog.set(PDFName.of(key), document.context.obj(value))
+    document.catalog.set(PDFName.of(key), document.context.obj(value as never))
   }
 }
 

@@ -23,7 +23,7 @@ export default async function ReviewsPage() {
       <div className="mt-6 flex flex-col gap-8">
         {calls.map((group) =>
           group.hasDeclared ? (
-            <ReviewProgress key={group.call.slug} group={group} serverNowMs={Date.now()} />
+            <ReviewProgress key={group.call.slug} group={group} />
           ) : (
             <DeclareFirst key={group.call.slug} group={group} />
           ),

@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { assessmentVerdicts } from './types'
 
-export const requestLine = z.object({
+const requestLine = z.object({
   requestId: z.number(),
   callNumber: z.number(),
   instrumentId: z.number(),

@@ -24,7 +24,10 @@ interface RequestParts {
   targets: readonly Pick<Target, 'id' | 'name' | 'need'>[]
   observations: readonly Pick<Observation, 'id' | 'targetId' | 'modeId' | 'askedSeconds'>[]
   modes: readonly Pick<ModeRecord, 'modeId' | 'name' | 'instrument'>[]
-  computed: readonly ObservationComputation[]
+  computed: readonly Pick<
+    ObservationComputation,
+    'observationId' | 'openShutterSeconds' | 'overheadSeconds' | 'neededSeconds' | 'verdict'
+  >[]
 }
 
 /** The observations of a request made with one instrument. */
@@ -64,6 +67,19 @@ export function targetHours(parts: RequestParts, instrumentId: number): TargetHo
       },
     ]
   })
+}
+
+/**
+ * True seconds of each target when only their sum was said: the open shutter stays, what is more or less than computed
+ * is shared over the overheads.
+ */
+export function trueSecondsByTarget(rows: readonly TargetHours[], trueSeconds: number): number[] {
+  const total = (of: 'neededSeconds' | 'overheadSeconds') => rows.reduce((sum, row) => sum + row[of], 0)
+  const more = trueSeconds - total('neededSeconds')
+  const overheads = total('overheadSeconds')
+  return rows.map(({ neededSeconds, overheadSeconds }) =>
+    Math.max(0, neededSeconds + (overheads > 0 ? (more * overheadSeconds) / overheads : more / rows.length)),
+  )
 }
 
 /** Why a verdict and true hours do not go together, as a message at the true hours; null when they do. */

@@ -66,7 +66,8 @@ export function completeness(contents: ProposalContents, computation: ProposalCo
       section,
       state: stateOf(finding, contents.sectionsDone.includes(section)),
       waitsFor: finding.waitsFor ?? null,
-      detail: finding.detail,
+      // What is wrong is worth more than what stands there.
+      detail: (finding.wrong ? finding.missing[0]?.sentence : null) ?? finding.detail,
       missing: finding.missing,
     }
   })

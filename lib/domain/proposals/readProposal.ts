@@ -1,13 +1,16 @@
 import { databaseNow } from '@/db/queries/clock'
 import { feeOf, type FeeState } from '@/db/queries/fees'
+import { findProposal } from '@/db/queries/proposals'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { deadlineOf } from '../calls/rules'
+import type { Actor } from '../actor'
 import type { Context } from '../context'
 import type { ProposalComputation } from '../observations/types'
 import { completeness, type SectionReport } from './completeness'
 import { computationOf } from './computationOf'
 import { investigatorRow, mayEditProposal, mayManagePeople, mayReadProposal } from './policy'
+import { putAwayReason } from './putAwayDraft'
 import { readContents } from './readContents'
 import type { Investigator, ProposalContents } from './types'
 
@@ -24,6 +27,21 @@ export interface ReadProposal {
   /** Why it cannot be changed now, in a sentence; null when it can. */
   readOnly: string | null
   mayManage: boolean
+  /** A draft put away that may be taken back. */
+  mayTakeBack: boolean
+}
+
+/** Whether it is a draft the investigators put away, and could still be written on. */
+async function mayTakeBack(
+  ctx: Context,
+  actor: Actor,
+  contents: ProposalContents,
+  now: Date,
+): Promise<boolean> {
+  if (contents.state !== 'withdrawn') return false
+  const row = await findProposal(ctx.db, contents.id)
+  const asDraft = { ...contents, state: 'draft' as const }
+  return row?.withdrawn_reason === putAwayReason && mayManagePeople(actor, asDraft, now).allowed
 }
 
 /** One proposal as its pages show it, for those who may read it. */
@@ -44,5 +62,6 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
     own: investigatorRow(ctx.actor, contents),
     readOnly: mayEdit.allowed ? null : mayEdit.sentence,
     mayManage: mayManagePeople(ctx.actor, contents, now).allowed,
+    mayTakeBack: await mayTakeBack(ctx, ctx.actor, contents, now),
   }
 }

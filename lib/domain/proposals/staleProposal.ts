@@ -11,7 +11,7 @@ export async function staleProposal(
   const last = await lastChangeOf(tx.db, 'proposal', proposal.reference)
   const isOwn = last?.personId !== null && last?.personId === tx.actor?.personId
   return refuse.stale({
-    changedBy: isOwn ? 'You, in another window,' : (last?.name ?? 'Someone else'),
+    changedBy: isOwn ? 'Another window of yours' : (last?.name ?? 'Someone else'),
     changedAt: (last?.at ?? proposal.updated_at).toISOString(),
     version: proposal.version,
     theirs,

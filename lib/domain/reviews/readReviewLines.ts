@@ -20,6 +20,7 @@ export interface ReviewsOfCall {
   /** Shown before the declaration, when nothing else is. */
   assigned: number
   lines: ReviewLine[]
+  now: Date
 }
 
 interface OneCall {
@@ -104,6 +105,7 @@ export async function readReviewLines(ctx: ActingContext): Promise<ReviewsOfCall
       declaredAt,
       hasDeclared,
       assigned: assignments.length,
+      now,
       lines: hasDeclared ? await linesOf(ctx, { call, hasDeclared, assignments }) : [],
     })
   }

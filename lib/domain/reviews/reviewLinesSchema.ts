@@ -1,6 +1,6 @@
 import { z } from 'zod'
 
-export const reviewLine = z.object({
+const reviewLine = z.object({
   assignmentId: z.number(),
   callSlug: z.string(),
   callNumber: z.number(),

@@ -3,7 +3,7 @@ import type { Call } from '../calls/types'
 import type { ReviewState, SheetCriterion } from './types'
 
 /** Fewest characters the investigators are given to read. */
-export const shortestText = 50
+const shortestText = 50
 export const longestText = 4000
 
 /** Weighted mean of the criteria scored so far, 0 to 10; null while none is. */

@@ -37,7 +37,7 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     return hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)
   }
   const luminosity = (z: number): number => (1 + z) * transverse(z)
-  const E2 = (z: number): number => density.E2(check.any(z))
+  const E2 = (z: number): number => density.E2(check.any(z), 1 + z)
   const kpcComovingPerArcsec = (z: number): number => transverse(z) * ARCSEC_RAD * 1e3
 
   const quantities: Record<CosmologyQuantity, (z: number) => number> = {
@@ -78,7 +78,7 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
       const x = check.any(z)
       return density.slopeE2(x) / (2 * density.E2(x)) - 1
     },
-    dimmingMag: (z) => 10 * Math.log10(1 + z) + 0 * check.any(z),
+    dimmingMag: (z) => (10 / Math.LN10) * check.any(z),
   }
 
   return {

@@ -12,8 +12,8 @@ export interface Density {
   readonly Onu0: number
   /** Critical density now, g/cm^3: 3 H0^2 / (8 pi G). */
   readonly criticalDensity0GCm3: number
-  /** E^2 = (H/H0)^2. */
-  E2(x: number): number
+  /** E^2 = (H/H0)^2; `onePlusZ` spares an exponential where it is known. */
+  E2(x: number, onePlusZ?: number): number
   /** d(E^2)/dx. */
   slopeE2(x: number): number
   /** E^2(x + d) - E^2(x), without cancellation for small d: what E^2 is next to a turn. */
@@ -55,8 +55,7 @@ export function createDensity(p: CosmologyParameters): Density {
     criticalDensity0GCm3: criticalDensityKgM3 / 1e3,
     darkEnergy,
     radiation,
-    E2(x) {
-      const onePlusZ = Math.exp(x)
+    E2(x, onePlusZ = Math.exp(x)) {
       const radiationNow = neutrinos.massive ? Ogamma0 * (1 + neutrinos.ratio(x)) : masslessRadiation
       return ((radiationNow * onePlusZ + Om0) * onePlusZ + Ok0) * onePlusZ * onePlusZ + darkEnergy(x)
     },

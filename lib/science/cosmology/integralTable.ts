@@ -39,20 +39,11 @@ function collect(g: (s: number) => number, low: number, high: number, depth: num
   return [...collect(g, low, middle, depth + 1), ...collect(g, middle, high, depth + 1)]
 }
 
-/** Table of the running integral of g over [low, high], started from pieces of at most `width`. */
-export function createIntegralTable(
-  g: (s: number) => number,
-  low: number,
-  high: number,
-  width: number,
-): IntegralTable {
-  const count = Math.max(1, Math.ceil((high - low) / width))
-  const pieces: Piece[] = []
-  for (let i = 0; i < count; i += 1) {
-    const from = low + ((high - low) * i) / count
-    const to = i === count - 1 ? high : low + ((high - low) * (i + 1)) / count
-    pieces.push(...collect(g, from, to, 0))
-  }
+/** Table of the running integral of g between the first and last knot, started from the pieces between knots. */
+export function createIntegralTable(g: (s: number) => number, knots: readonly number[]): IntegralTable {
+  const low = knots[0] ?? 0
+  const high = knots.at(-1) ?? low
+  const pieces = knots.slice(1).flatMap((to, i) => collect(g, knots[i] ?? low, to, 0))
   const n = pieces.length
   const lows = Float64Array.from(pieces, (piece) => piece.low)
   const inverseWidths = Float64Array.from(pieces, (piece) => 1 / piece.width)

@@ -1,7 +1,10 @@
 import type { Density } from './density'
 import { createIntegralTable, type IntegralTable } from './integralTable'
 
+/** Pieces tables start from, in x: shorter where dark energy, matter and radiation take turns. */
 const PIECE = 0.5
+const SETTLED = 8
+const LONG_PIECE = 2
 /** Reach of the square-root variable around a turn, in x. */
 const NEAR_TURN = 0.5
 
@@ -18,6 +21,13 @@ export interface Path {
   read(x: number): number
 }
 
+/** Knots from 0 to `length`: every half unit at first, every two units past x = 8. */
+export function knotsTo(length: number): number[] {
+  const knots = [0]
+  for (let s = PIECE; s < length; s += s < SETTLED ? PIECE : LONG_PIECE) knots.push(s)
+  return [...knots, length]
+}
+
 /** A path that ends where nothing special happens. `end` may lie on either side of now. */
 function plainPath(density: Density, weight: Weight, end: number): Path {
   const direction = end < 0 ? -1 : 1
@@ -25,7 +35,7 @@ function plainPath(density: Density, weight: Weight, end: number): Path {
     const x = direction * s
     return Math.exp(weight * x) / Math.sqrt(density.E2(x))
   }
-  const table = createIntegralTable(g, 0, Math.abs(end), PIECE)
+  const table = createIntegralTable(g, knotsTo(Math.abs(end)))
   return {
     end,
     total: direction * table.total,
@@ -49,8 +59,8 @@ function turningPath(density: Density, weight: Weight, end: number): Path {
     const d = -direction * u * u
     return (2 * u * Math.exp(weight * (end + d))) / Math.sqrt(density.riseE2(end, d))
   }
-  const far: IntegralTable | null = length > near ? createIntegralTable(g, 0, length - near, PIECE) : null
-  const last = createIntegralTable(gNear, 0, Math.sqrt(near), PIECE)
+  const far: IntegralTable | null = length > near ? createIntegralTable(g, knotsTo(length - near)) : null
+  const last = createIntegralTable(gNear, knotsTo(Math.sqrt(near)))
   const total = (far ? far.total : 0) + last.total
   return {
     end,

@@ -1,6 +1,6 @@
 import type { Density } from './density'
 import { createIntegralTable } from './integralTable'
-import { createPath, type Path } from './path'
+import { createPath, knotsTo, type Path } from './path'
 import { DEEPEST_X, findTurn, FURTHEST_X, type Turn } from './turns'
 
 /** How far from a static state a redshift must stay: nearer, time and distance grow without limit. */
@@ -67,7 +67,10 @@ export function createTimeline(density: Density): Timeline {
       if (before === null) return null
       // Counted from the early end, so that the small ages of high redshifts keep their relative accuracy.
       const g = (s: number): number => 1 / Math.sqrt(density.E2(DEEPEST_X - s))
-      const table = createIntegralTable(g, 0, DEEPEST_X, 0.5)
+      const knots = knotsTo(DEEPEST_X)
+        .map((x) => DEEPEST_X - x)
+        .reverse()
+      const table = createIntegralTable(g, knots)
       const now = before + table.total
       return (x) => (x >= 0 ? before + table.read(DEEPEST_X - x) : now - futureTime().read(x))
     }),

@@ -85,7 +85,8 @@ export function classify(
   const turnTime = toBounce ?? toGreatest
   const rip = phantom && !recollapses ? ripTime(density, timeline) : null
   const facts: Omit<Universe, 'sentence'> = {
-    shape: density.Ok0 === 0 ? 'flat' : density.Ok0 > 0 ? 'open' : 'closed',
+    // 1 − 0.3 − 0.7 is not quite 0 in a computer.
+    shape: Math.abs(density.Ok0) < 1e-12 ? 'flat' : density.Ok0 > 0 ? 'open' : 'closed',
     origin: bounce ? 'bounce' : ageNow === null ? 'no-beginning' : 'big-bang',
     fate: recollapses ? 'recollapses' : rip !== null ? 'big-rip' : 'expands-forever',
     ageGyr: ageNow === null ? null : hubbleTimeGyr * ageNow,

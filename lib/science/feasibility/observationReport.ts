@@ -57,6 +57,8 @@ export function observationReport(input: ReportInput): ObservationReport {
     verdict: worst(checks.map((check) => check.verdict)),
     exposure: plan.needed,
     refusal: plan.refusal,
+    totalAtMedianS: plan.totalAtMedianS,
+    totalAtBestS: plan.totalAtBestS,
     observedFeatureA: observedA,
     visibility: season?.visible ?? null,
     usableHours: season?.usableHours ?? null,

@@ -1,7 +1,7 @@
 import { exposure, type Conditions, type ExposureReport, type ModeRecord, type Source } from '../exposure'
 import { toAb, vacuumToAirA } from '../light'
 import { ScienceError } from '../ScienceError'
-import { feasibilityAirmass } from './planningAirmass'
+import { planningAirmass } from './planningAirmass'
 import { vacuumRange } from './featureChecks'
 import type { ReportInput } from './types'
 
@@ -10,10 +10,17 @@ export interface Plan {
   readonly needed: ExposureReport | null
   readonly reached: ExposureReport | null
   readonly refusal: string | null
+  readonly totalAtMedianS: number | null
+  readonly totalAtBestS: number | null
+}
+
+interface Attempt {
+  readonly report: ExposureReport | null
+  readonly refusal: string | null
 }
 
 /** A value, or the sentence of the ScienceError that stood in its way. */
-function attempt(make: () => ExposureReport): { report: ExposureReport | null; refusal: string | null } {
+function attempt(make: () => ExposureReport): Attempt {
   try {
     return { report: make(), refusal: null }
   } catch (error) {
@@ -30,42 +37,63 @@ function openWithin(mode: ModeRecord, askedS: number, subExposureS: number): num
   return (left / perFrame) * subExposureS
 }
 
-/** The exposure at the poorest conditions accepted, averaged airmass of the window. */
-export function planExposure(input: ReportInput, observedA: number | null): Plan {
-  const { target, mode, observation, site } = input
+/** The source as the exposure engine takes it, in the mode's own kind of wavelength. */
+function sourceOf({ target, mode }: ReportInput, observedA: number | null): Source {
   const { brightness } = target
-  if (!brightness) return { needed: null, reached: null, refusal: 'No brightness is given.' }
+  if (!brightness) throw new ScienceError('bad-source', 'No brightness is given.')
   if (observedA !== null) {
     const [low, high] = vacuumRange(mode)
     if (observedA < low || observedA > high) {
-      return { needed: null, reached: null, refusal: 'The feature lies outside the range of this mode.' }
+      throw new ScienceError('outside-range', 'The feature lies outside the range of this mode.')
     }
   }
   const inMode = observedA === null || mode.medium === 'vacuum' ? observedA : vacuumToAirA(observedA)
-  const source: Source = {
+  return {
     kind: 'magnitude',
     ab: toAb(brightness.value, brightness.system, brightness.band),
+    // Conversion to air and back may step over the edge by rounding.
     wavelengthA:
       inMode === null ? undefined : Math.min(mode.wavelengthMaxA, Math.max(mode.wavelengthMinA, inMode)),
     geometry: target.geometry ?? { kind: 'point' },
     provenance: brightness.provenance,
   }
-  const conditions: Conditions = {
-    site,
-    airmass: feasibilityAirmass(input),
-    seeingArcsec: observation.seeingArcsec,
-    moon: observation.moon,
-    transparency: observation.transparency,
-  }
+}
+
+/**
+ * The exposure at the poorest seeing accepted and the airmass averaged over the window; what it would be
+ * at the site's median seeing and on its best tenth of nights stands beside it.
+ */
+export function planExposure(input: ReportInput, observedA: number | null): Plan {
+  const { mode, observation, site } = input
   const per = mode.kind === 'imaging' ? 'image' : observation.snrPer
-  const shared = { mode, source, conditions, per }
-  const { report: needed, refusal } = attempt(() =>
-    exposure({ ...shared, solve: 'time', snr: observation.snr }),
-  )
-  const open = openWithin(mode, observation.askedS, needed?.subExposureS ?? mode.maxSubExposureS)
+  const under = (seeingArcsec: number, solve: { solve: 'time' } | { solve: 'snr'; timeS: number }): Attempt =>
+    attempt(() => {
+      const conditions: Conditions = {
+        site,
+        airmass: planningAirmass(input),
+        seeingArcsec,
+        moon: observation.moon,
+        transparency: observation.transparency,
+      }
+      return exposure({
+        mode,
+        source: sourceOf(input, observedA),
+        conditions,
+        per,
+        snr: observation.snr,
+        ...solve,
+      })
+    })
+  const { report: needed, refusal } = under(observation.seeingArcsec, { solve: 'time' })
+  const timeS = openWithin(mode, observation.askedS, needed?.subExposureS ?? mode.maxSubExposureS)
   const reached =
-    open >= mode.minSubExposureS
-      ? attempt(() => exposure({ ...shared, solve: 'snr', timeS: open })).report
-      : null
-  return { needed, reached, refusal }
+    timeS >= mode.minSubExposureS ? under(observation.seeingArcsec, { solve: 'snr', timeS }).report : null
+  const { best10, median } = site.seeingQuantilesArcsec
+  return {
+    needed,
+    reached,
+    refusal,
+    totalAtMedianS: under(median, { solve: 'time' }).report?.totalS ?? null,
+    totalAtBestS: under(best10, { solve: 'time' }).report?.totalS ?? null,
+  }
 }

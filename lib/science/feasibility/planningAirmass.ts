@@ -10,7 +10,7 @@ const STEPS = 24
  * Airmass averaged over the hour angles at which a target stands above its airmass limit; that limit
  * itself when it has no position or never rises above it.
  */
-export function feasibilityAirmass({ target, site, observation }: ReportInput): number {
+export function planningAirmass({ target, site, observation }: ReportInput): number {
   if (target.decDeg === null) return observation.maxAirmass
   const latitude = site.latitudeDeg * DEG_RAD
   const declination = target.decDeg * DEG_RAD

@@ -82,6 +82,9 @@ export interface ObservationReport {
   /** Null when it could not be computed; `refusal` says why. */
   readonly exposure: ExposureReport | null
   readonly refusal: string | null
+  /** Open shutter and overheads at the site's median seeing, and on its best tenth of nights. */
+  readonly totalAtMedianS: number | null
+  readonly totalAtBestS: number | null
   readonly observedFeatureA: number | null
   /** Dark hours above the airmass limit, the Moon left aside; null without a position. */
   readonly visibility: TargetVisibility | null

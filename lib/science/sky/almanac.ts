@@ -19,8 +19,13 @@ const LIGHT_AU_PER_DAY = 173.144_632_674
 /** Days kept before starting afresh. */
 const MOST_DAYS = 20_000
 
-/** Three rows of a rotation. */
-export type Rotation = readonly [Vector3, Vector3, Vector3]
+/** The true equator and equinox of a day, and the Earth's motion on it. */
+export interface Frame {
+  /** Rows of the rotation from J2000: precession and nutation. */
+  readonly rotation: readonly [Vector3, Vector3, Vector3]
+  /** The Earth's velocity over that of light. */
+  readonly velocity: Vector3
+}
 
 /**
  * Sun, Moon and the turning Earth, seen from the Earth's centre and referred to the true equator and
@@ -34,10 +39,8 @@ export interface Almanac {
   moon(days: number): Vector3
   /** Greenwich apparent sidereal time, degrees, not reduced to one turn. */
   siderealDeg(days: number): number
-  /** The Earth's velocity over that of light. */
-  velocity(days: number): Vector3
-  /** Precession and nutation from J2000 to the day of `days`. */
-  rotation(days: number): Rotation
+  /** What turns a J2000 direction into an apparent one, good for the day of `days`. */
+  frame(days: number): Frame
 }
 
 function ofDate(days: number, vector: Vector): Vector3 {
@@ -49,7 +52,7 @@ export function createAlmanac(): Almanac {
   const sun = createTrack((days) => ofDate(days, GeoVector(Body.Sun, MakeTime(days), true)), 1)
   const moon = createTrack((days) => ofDate(days, GeoMoon(MakeTime(days))), 0.25)
   const equinox = new Map<number, number>()
-  const rotations = new Map<number, Rotation>()
+  const frames = new Map<number, Frame>()
 
   /** Sidereal time at the start of a day less its even part: precession and nutation of the equinox. */
   function equinoxDeg(day: number): number {
@@ -71,24 +74,24 @@ export function createAlmanac(): Almanac {
       const f = days - day
       return TURN_DEG_PER_DAY * days + (1 - f) * equinoxDeg(day) + f * equinoxDeg(day + 1)
     },
-    velocity(days) {
-      const [x, y, z] = subtract(sun(days - 0.5), sun(days + 0.5))
-      return [x / LIGHT_AU_PER_DAY, y / LIGHT_AU_PER_DAY, z / LIGHT_AU_PER_DAY]
-    },
-    rotation(days) {
+    frame(days) {
       const day = Math.floor(days)
-      const known = rotations.get(day)
+      const known = frames.get(day)
       if (known) return known
       const { rot } = Rotation_EQJ_EQD(MakeTime(day + 0.5))
       const cell = (i: number, j: number): number => rot[i]?.[j] ?? 0
-      // astronomy-engine keeps columns first.
-      const made: Rotation = [
-        [cell(0, 0), cell(1, 0), cell(2, 0)],
-        [cell(0, 1), cell(1, 1), cell(2, 1)],
-        [cell(0, 2), cell(1, 2), cell(2, 2)],
-      ]
-      if (rotations.size >= MOST_DAYS) rotations.clear()
-      rotations.set(day, made)
+      const [x, y, z] = subtract(sun(day), sun(day + 1))
+      const made: Frame = {
+        // astronomy-engine keeps columns first.
+        rotation: [
+          [cell(0, 0), cell(1, 0), cell(2, 0)],
+          [cell(0, 1), cell(1, 1), cell(2, 1)],
+          [cell(0, 2), cell(1, 2), cell(2, 2)],
+        ],
+        velocity: [x / LIGHT_AU_PER_DAY, y / LIGHT_AU_PER_DAY, z / LIGHT_AU_PER_DAY],
+      }
+      if (frames.size >= MOST_DAYS) frames.clear()
+      frames.set(day, made)
       return made
     },
   }

@@ -36,7 +36,6 @@ export function checkTarget(target: SkyTarget): void {
  */
 export function apparentVector(almanac: Almanac, target: SkyTarget, days: number): Vector3 {
   const p = astrometric(target, days / 365.25)
-  const r = almanac.rotation(days)
-  const v = almanac.velocity(days)
+  const { rotation: r, velocity: v } = almanac.frame(days)
   return [dot(r[0], p) + v[0], dot(r[1], p) + v[1], dot(r[2], p) + v[2]]
 }

@@ -82,8 +82,18 @@ function edges(intervals: readonly Interval[], noons: Interval): [Date | null, D
   ]
 }
 
-/** The record of a night that pages and tables use. */
+const described = new WeakMap<NightSky, Map<number, Night>>()
+
+/** The record of a night that pages and tables use, made once for a twilight limit. */
 export function describeNight(sky: NightSky, almanac: Almanac, twilightLimitDeg: number): Night {
+  const known = described.get(sky) ?? new Map<number, Night>()
+  described.set(sky, known)
+  const night = known.get(twilightLimitDeg) ?? makeNight(sky, almanac, twilightLimitDeg)
+  known.set(twilightLimitDeg, night)
+  return night
+}
+
+function makeNight(sky: NightSky, almanac: Almanac, twilightLimitDeg: number): Night {
   const [sunset, sunrise] = edges(sky.sunDown, sky.noons)
   const civil = edges(sky.darkness(-6), sky.noons)
   const nautical = edges(sky.darkness(-12), sky.noons)

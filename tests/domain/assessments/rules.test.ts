@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
-import { hoursProblem } from '@/lib/domain/assessments/rules'
+import { hoursProblem, targetHours, trueSecondsByTarget } from '@/lib/domain/assessments/rules'
 import { assessRequestSchema } from '@/lib/domain/assessments/schema'
 
 describe('hoursProblem', () => {
@@ -50,5 +50,62 @@ describe('assessRequestSchema', () => {
   ])('a message at %s for %j', (field, over) => {
     const result = assessRequestSchema.safeParse({ ...good, ...over })
     expect(result.success ? [] : Object.keys(fieldErrorsOf(result.error))).toEqual([field])
+  })
+})
+
+const target = (id: number, need: 'required' | 'backup' = 'required') => ({ id, name: `T${id}`, need })
+const mode = (modeId: number, instrumentId: number) => ({
+  modeId,
+  name: `mode ${modeId}`,
+  instrument: { id: instrumentId, slug: 'i', name: 'I' },
+})
+const asked = (id: number, targetId: number, modeId: number) => ({
+  id,
+  targetId,
+  modeId,
+  askedSeconds: 100 * id,
+})
+const computed = (observationId: number, open: number, over: number, verdict: 'feasible' | 'marginal') => ({
+  observationId,
+  neededSeconds: open + over,
+  openShutterSeconds: open,
+  overheadSeconds: over,
+  verdict,
+})
+
+describe('targetHours', () => {
+  const rows = targetHours(
+    {
+      targets: [target(1), target(2, 'backup'), target(3)],
+      observations: [asked(1, 1, 10), asked(2, 1, 11), asked(3, 2, 10), asked(4, 3, 20)],
+      modes: [mode(10, 5), mode(11, 5), mode(20, 6)],
+      computed: [
+        computed(1, 40, 10, 'feasible'),
+        computed(2, 80, 30, 'marginal'),
+        computed(3, 200, 0, 'feasible'),
+      ],
+    },
+    5,
+  )
+
+  it('adds up the observations on one instrument, target by target, with the worst verdict', () => {
+    expect(rows).toMatchObject([
+      {
+        targetId: 1,
+        modes: ['mode 10', 'mode 11'],
+        openSeconds: 120,
+        overheadSeconds: 40,
+        neededSeconds: 160,
+        askedSeconds: 300,
+        verdict: 'marginal',
+      },
+      { targetId: 2, need: 'backup', neededSeconds: 200, askedSeconds: 300, verdict: 'feasible' },
+    ])
+  })
+
+  it('shares true hours over the overheads and keeps the open shutter', () => {
+    expect(trueSecondsByTarget(rows, 400)).toEqual([200, 200])
+    expect(trueSecondsByTarget(rows, 360)).toEqual([160, 200])
+    expect(trueSecondsByTarget(rows, 0)).toEqual([0, 200])
   })
 })

@@ -12,7 +12,12 @@ const entry = (minute: number, over: Partial<SubjectEntry>): SubjectEntry => ({
   after: null,
   ...over,
 })
-const read = (entries: SubjectEntry[]) => changesOf(entries, 1).map(({ who, words }) => `${who}: ${words}`)
+const names = {
+  target: (id: number) => (id === 11 ? '3C 273' : null),
+  observation: (id: number) => (id === 21 ? '3C 273' : null),
+}
+const read = (entries: SubjectEntry[]) =>
+  changesOf(entries, 1, names).map(({ who, words }) => `${who}: ${words}`)
 
 // Seen to fail: without the merging of spells, and with people of the panel let through by name.
 describe('the history as an investigator reads it', () => {
@@ -101,6 +106,20 @@ describe('the history as an investigator reads it', () => {
         after: { sections_done: '["targets"]' },
       },
       'Marked targets as done',
+    ],
+    [
+      'an observation',
+      { action: 'observation.add', after: { observation: { targetId: 11 } } },
+      'Added an observation of 3C 273',
+    ],
+    [
+      'time asked of one',
+      {
+        action: 'observation.ask',
+        before: { asked: [{ id: 21, askedSeconds: 3600 }] },
+        after: { asked: [{ id: 21, askedSeconds: 7200 }] },
+      },
+      'Asked hours for 3C 273: 1.0\u00a0h to 2.0\u00a0h',
     ],
     ['values that are not there', { action: 'people.add', after: null }, 'Named somebody, who may read it'],
   ])('words %s', (_, over, words) => {

@@ -64,6 +64,8 @@ const computed = (
       snrReached: 20,
       regime: null,
       observedFeatureA: 7604,
+      usableHours: 300,
+      exposure: null,
       checks: [
         {
           id: 'band',

@@ -30,9 +30,10 @@ describe('a question to the investigators', () => {
     expect(letter?.to_email).toBe(call.pi.email)
     expect(letter?.text_body).toContain('Must the slit cover both images')
     expect(letter?.text_body).not.toContain(call.scientist.name)
-    expect(await readStaffQuestions(call.as(call.coInvestigator), call.reference)).toMatchObject([
-      { answer: null },
-    ])
+    expect(await readStaffQuestions(call.as(call.coInvestigator), call.reference)).toMatchObject({
+      questions: [{ answer: null }],
+      mayAnswer: true,
+    })
     expect(await readRequestLines(call.as(call.scientist))).toMatchObject([{ question: 'asked' }])
   })
 
@@ -44,7 +45,7 @@ describe('a question to the investigators', () => {
     expect(letter?.subject).toContain(call.reviewNumber)
     for (const secret of [call.pi.name, call.reference, 'Sollvik'])
       expect(`${letter?.subject}${letter?.text_body}`).not.toContain(secret)
-    const [question] = await readStaffQuestions(call.as(call.pi), call.reference)
+    const [question] = (await readStaffQuestions(call.as(call.pi), call.reference)).questions
     expect(question?.answer).toBe('Both, at 152 degrees.')
     expect(question?.answeredAt).toBeInstanceOf(Date)
     expect(await readRequestLines(call.as(call.scientist))).toMatchObject([{ question: 'answered' }])
@@ -57,8 +58,9 @@ describe('a question to the investigators', () => {
   it('is not there for a stranger, and not answered under another proposal', async () => {
     const { questionId } = await ask()
     await expect(answer(questionId, call.stranger)).rejects.toMatchObject({ kind: 'not-found' })
-    await expect(readStaffQuestions(call.as(call.stranger), call.reference)).rejects.toMatchObject({
-      kind: 'not-found',
+    expect(await readStaffQuestions(call.as(call.stranger), call.reference)).toEqual({
+      questions: [],
+      mayAnswer: false,
     })
     const other = answerQuestion(call.as(call.pi), { reference: 'ZZZ-ZZZ', questionId, answer: 'x' })
     await expect(other).rejects.toMatchObject({ kind: 'not-found' })

@@ -1,9 +1,11 @@
+import { extractText, getDocumentProxy } from 'unpdf'
 import { beforeEach, describe, expect, it } from 'vitest'
 import { recordDeclaration } from '@/db/queries/conflicts'
 import type { ActingContext } from '@/lib/domain/context'
 import { finishReview } from '@/lib/domain/reviews/finishReview'
 import { readReviewDesk } from '@/lib/domain/reviews/readReviewDesk'
 import { readReviewLines } from '@/lib/domain/reviews/readReviewLines'
+import { readReviewPacket } from '@/lib/domain/reviews/readReviewPacket'
 import { recomputeReview } from '@/lib/domain/reviews/recomputeReview'
 import { reopenReview } from '@/lib/domain/reviews/reopenReview'
 import { saveReviewText } from '@/lib/domain/reviews/saveReviewText'
@@ -81,6 +83,25 @@ describe('the desk', () => {
     await db()('interest_declarations').where({ person_id: ctx.actor.personId }).delete()
     expect(await readReviewLines(ctx)).toMatchObject([{ hasDeclared: false, assigned: 1, lines: [] }])
     await expect(score(0, 10)).rejects.toMatchObject({ kind: 'forbidden' })
+  })
+})
+
+describe('the packet', () => {
+  it('comes under the review number and carries no name', async () => {
+    const { bytes, fileName } = await readReviewPacket(ctx, assignmentId)
+    expect(fileName).toBe(`${call.reviewNumber}.pdf`)
+    const { text } = await extractText(await getDocumentProxy(bytes.slice()), { mergePages: true })
+    expect(text).toContain('Broad lines behind a lens')
+    for (const secret of ['Sollvik', 'Pellering', call.reference]) expect(text).not.toContain(secret)
+  })
+
+  it('is refused to others, before the names were gone through, and to whoever has an interest', async () => {
+    const other = call.as(call.reviewers[1])
+    await expect(readReviewPacket(other, assignmentId)).rejects.toMatchObject({ kind: 'not-found' })
+    await db()('interest_declarations').where({ person_id: ctx.actor.personId }).delete()
+    await expect(readReviewPacket(ctx, assignmentId)).rejects.toMatchObject({ kind: 'forbidden' })
+    await db()('people').where({ id: ctx.actor.personId }).update({ institute_text: 'Sollvik Institute' })
+    await expect(readReviewPacket(ctx, assignmentId)).rejects.toMatchObject({ kind: 'not-found' })
   })
 })
 

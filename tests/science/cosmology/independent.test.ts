@@ -23,7 +23,7 @@ const { source, models } = fixture<{ source: string; models: Model[] }>('cosmolo
  * closed space takes the wrong branch of the arcsine. Ages too: its own integral to infinity is off by up to
  * 3e-6 at z = 1100.
  * Tolerances: 1e-8 to z = 20 and 1e-6 at z = 1100 are what is promised. Quadrature noise of the reference is
- * some 1e-10. Seen to fail: with (4/11)^(1/3) rounded to 0.71 the heavy-neutrino model is off by 1e-4.
+ * some 1e-10. Seen to fail: with (4/11)^(1/3) rounded to 0.71 52 rows fail.
  */
 const quantities: readonly CosmologyQuantity[] = [
   'E',

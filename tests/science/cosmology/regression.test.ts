@@ -27,6 +27,7 @@ describe('regression', () => {
     )
     expect(universe({ Ode0: 'flat', w0: -1.5 }).universe.sentence).toContain('and tears apart in 21.7 Gyr.')
     expect(universe({ Ode0: 1.7 }).universe.loitering).toBe(true)
+    expect(universe({ Om0: 0.3, Ode0: 0.7 }).universe.shape).toBe('flat')
   })
 
   it('the eight presets keep their ids', () => {

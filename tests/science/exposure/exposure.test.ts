@@ -111,6 +111,35 @@ describe('analytic limit or identity', () => {
     expect(relativeError(report.signalE / report.enclosedFraction, photons)).toBeLessThan(1e-9)
   })
 
+  it('a throughput measured through the air holds one airmass of extinction already', () => {
+    const signal = (includes: string[], airmass: number): number => {
+      const mode = { ...imager, throughputIncludes: includes }
+      const report = exposure({
+        mode,
+        source: faint,
+        conditions: { ...dark, airmass },
+        solve: 'snr',
+        timeS: 600,
+      })
+      return report.signalE / report.enclosedFraction
+    }
+    // 0.11 mag an airmass in r: a factor 10^-0.044.
+    expect(relativeError(signal([], 1.5), signal(['atmosphere'], 1.5) * 10 ** -0.044)).toBeLessThan(1e-12)
+    expect(relativeError(signal(['atmosphere'], 2), signal(['atmosphere'], 1) * 10 ** -0.044)).toBeLessThan(
+      1e-12,
+    )
+  })
+
+  it('a slit loses light that a table measured with the slit has lost already', () => {
+    const share = (includes: string[], seeingArcsec: number): number => {
+      const mode = { ...slit, throughputIncludes: includes }
+      const conditions = { ...dark, seeingArcsec }
+      return exposure({ mode, source: continuum, conditions, solve: 'time', snr: 10 }).enclosedFraction
+    }
+    expect(share([], 1.5)).toBeLessThan(share([], 0.7) - 0.1)
+    expect(share(['slit'], 1.5)).toBeGreaterThan(share([], 1.5) + 0.1)
+  })
+
   it('an extended source needs more, a uniform one is summed over its area', () => {
     const time = (geometry: Source['geometry']): number =>
       exposure({ mode: imager, source: { ...faint, geometry }, conditions: dark, solve: 'time', snr: 10 })

@@ -43,6 +43,12 @@ describe('a request that can be done', () => {
     }
   })
 
+  it('better seeing than the poorest accepted needs less time', () => {
+    const { exposure, totalAtMedianS, totalAtBestS } = report
+    expect(totalAtMedianS).toBeLessThan(exposure?.totalS ?? 0)
+    expect(totalAtBestS).toBeLessThan(totalAtMedianS ?? 0)
+  })
+
   it('is the same bytes for the same input', () => {
     expect(JSON.stringify(observationReport(request({})))).toBe(JSON.stringify(report))
   })
@@ -93,6 +99,16 @@ describe('each check has its own margins', () => {
     else expect(check.fix).toMatch(/\.$/)
   })
 
+  it('a darker Moon leaves fewer hours: none, dark and grey from a season’s whole', () => {
+    const hours = (moon: 'dark' | 'grey' | 'bright'): number =>
+      observationReport(request({ observation: { moon, minMoonSeparationDeg: 0 } })).usableHours ?? 0
+    const whole = observationReport(request({})).visibility?.totalHours ?? 0
+    expect(hours('bright')).toBeCloseTo(whole, 9)
+    expect(hours('grey')).toBeLessThan(hours('bright') - 20)
+    expect(hours('dark')).toBeLessThan(hours('grey') - 10)
+    expect(hours('dark')).toBeGreaterThan(0.4 * whole)
+  })
+
   it('a star that fills the pixel in the shortest exposure fails saturation', () => {
     const brightness = { value: 3, system: 'AB', band: 'r', provenance: 'observed' } as const
     const report = observationReport(request({ target: { brightness } }))
@@ -107,6 +123,12 @@ describe('what is missing is left out, not guessed', () => {
     expect(report.checks).toEqual([])
     expect([report.visibility, report.usableHours, report.exposure]).toEqual([null, null, null])
     expect(report.refusal).toBe('No brightness is given.')
+  })
+
+  it('a band that no table knows is a refusal, not a crash', () => {
+    const brightness = { value: 20, system: 'Vega', band: 'Q', provenance: 'observed' } as const
+    const report = observationReport(request({ target: { brightness } }))
+    expect([report.exposure, report.refusal]).toEqual([null, 'No band is called “Q”.'])
   })
 
   it('an image has no feature to look for', () => {

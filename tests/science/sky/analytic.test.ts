@@ -18,6 +18,8 @@ import { intersect, without, totalDays, type Interval } from '../../../lib/scien
 
 const ridge = { latitudeDeg: -37.4, longitudeDeg: -70.2, elevationM: 2390 }
 const target = { id: 'Fornax', raDeg: 53.1, decDeg: -27.8 }
+/** Never sets at 37.4 S. */
+const polar = { id: 'polar', raDeg: 10, decDeg: -85 }
 
 describe('analytic limit or identity', () => {
   it('airmass: 1 overhead, the secant high up, its inverse everywhere', () => {
@@ -75,7 +77,6 @@ describe('analytic limit or identity', () => {
   })
 
   it('a target that never sets is up all night, one that never rises never, and opposite latitudes agree', () => {
-    const polar = { id: 'polar', raDeg: 10, decDeg: -85 }
     const other = { id: 'other', raDeg: 10, decDeg: 85 }
     const asked = {
       site: ridge,
@@ -104,6 +105,29 @@ describe('analytic limit or identity', () => {
     expect(nights.map((night) => night.polar)).toEqual(['night', 'night', 'night'])
     expect(targets[0]?.byNight.map((hours) => Math.round(hours))).toEqual([24, 24, 24])
     expect(visibility({ ...asked, maxAirmass: 1.2 }).targets[0]?.totalHours).toBe(0)
+  })
+
+  it('with the Moon to be below, what is left is the dark less the hours it is up', () => {
+    const asked = { site: ridge, targets: [polar], from: '2027-08-10', to: '2027-08-20', maxAirmass: 3 }
+    const below = visibility({ ...asked, moon: { below: true } })
+    for (const [i, night] of below.nights.entries()) {
+      const [from, to] = [night.darkFrom?.getTime() ?? 0, night.darkTo?.getTime() ?? 0]
+      const up = night.moonUp.reduce((sum, [rise, set]) => {
+        return sum + Math.max(0, Math.min(to, set.getTime()) - Math.max(from, rise.getTime())) / 3.6e6
+      }, 0)
+      expect(below.targets[0]?.byNight[i]).toBeCloseTo(night.darkHours - up, 5)
+    }
+    // At most a thousandth lit is the same as below, but for the nights of new Moon.
+    const unlit = visibility({ ...asked, moon: { maxIllumination: 0.001 } })
+    expect(unlit.targets[0]?.totalHours).toBeCloseTo(below.targets[0]?.totalHours ?? 0, 5)
+  })
+
+  it('the lowest altitude of the telescope counts where the airmass limit lies lower', () => {
+    const asked = { site: ridge, targets: [target], from: '2027-10-08', to: '2027-10-08' }
+    const byAltitude = visibility({ ...asked, maxAirmass: 5, lowestAltitudeDeg: altitudeOfAirmassDeg(1.5) })
+    const byAirmass = visibility({ ...asked, maxAirmass: 1.5, lowestAltitudeDeg: 10 })
+    expect(byAltitude.targets).toEqual(byAirmass.targets)
+    expect(byAirmass.targets[0]?.totalHours).toBeGreaterThan(1)
   })
 
   it('a blind spot overhead takes its time out of the middle', () => {

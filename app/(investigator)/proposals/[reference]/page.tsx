@@ -6,11 +6,13 @@ import { homeLead } from '@/components/proposals/homeLead'
 import { PutAwayButton } from '@/components/proposals/PutAwayButton'
 import { SettlePanel } from '@/components/proposals/SettlePanel'
 import { TargetsUp } from '@/components/proposals/TargetsUp'
+import { TakeBackButton } from '@/components/proposals/TakeBackButton'
 import { TaskList } from '@/components/proposals/TaskList'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
+import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
@@ -21,11 +23,14 @@ import { proposalOf } from './proposalOf'
 
 export const metadata: Metadata = { title: 'Proposal' }
 
+const decided = new Set<string>(['awarded', 'reserve', 'declined'])
+
 export default async function ProposalPage({ params }: { params: Promise<{ reference: string }> }) {
   const ctx = await openPage('/proposals/[reference]')
   const read = await orNotFound(proposalOf((await params).reference))
   const { contents, now, sections } = read
   const { changes } = await readHistory(ctx, contents)
+  const isSent = contents.state !== 'draft' && contents.state !== 'withdrawn'
   const hasPaper = contents.papers.some(({ kind }) => kind === 'justification')
   return (
     <Main>
@@ -56,9 +61,22 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
         </div>
         <div className="mt-6 flex flex-wrap items-center gap-6">
           {hasPaper ? (
-            <LinkButton look="secondary" href={paths.proposalPacket(contents.reference)} download>
+            <LinkButton
+              look="secondary"
+              href={paths.proposalPacket(contents.reference, 'anonymised')}
+              download
+            >
               Read the packet as reviewers will
             </LinkButton>
+          ) : null}
+          {isSent ? (
+            <TextLink href={paths.proposalSent(contents.reference)}>What was sent, and its fee</TextLink>
+          ) : null}
+          {decided.has(contents.state) ? (
+            <TextLink href={paths.proposalOutcome(contents.reference)}>Outcome and feedback</TextLink>
+          ) : null}
+          {read.mayTakeBack ? (
+            <TakeBackButton reference={contents.reference} takeBack={takeBackDraftAction} />
           ) : null}
           {mayPutAway(ctx.actor, contents).allowed ? (
             <PutAwayButton

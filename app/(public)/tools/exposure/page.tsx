@@ -15,7 +15,7 @@ export const metadata: Metadata = { title: 'Exposure' }
 
 const usual = {
   mode: 'lantern-r',
-  magnitude: '22.0',
+  magnitude: '24.5',
   snr: '30',
   moon: 'dark' as const,
   airmass: '1.2',

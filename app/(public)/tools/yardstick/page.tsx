@@ -55,18 +55,20 @@ export default async function YardstickPage({
             ))}
           </ul>
           <h2 className="mt-8 mb-2 text-caption font-semibold">Angular-diameter distance, Mpc</h2>
-          <LineChart
-            label={`Angular-diameter distance against redshift to z = ${furthest}.`}
-            xLabel="redshift z"
-            marks={redshifts}
-            series={universes.map((universe, index) => ({
-              id: String(index),
-              name: universe.name,
-              tone: tones[index] ?? 's1',
-              points: universe.curve,
-              chosen: index === 0,
-            }))}
-          />
+          <div className="max-w-3xl">
+            <LineChart
+              label={`Angular-diameter distance against redshift to z = ${furthest}.`}
+              xLabel="redshift z"
+              marks={redshifts}
+              series={universes.map((universe, index) => ({
+                id: String(index),
+                name: universe.name,
+                tone: tones[index] ?? 's1',
+                points: universe.curve,
+                chosen: index === 0,
+              }))}
+            />
+          </div>
         </div>
       </div>
       <section className="mt-12">

@@ -35,7 +35,7 @@ export default async function ReviewPage({ params }: { params: Promise<{ assignm
   const next = others.find(({ state }) => state !== 'finished') ?? null
   const scored = desk.sheet.criteria.filter(({ halfPoints }) => halfPoints !== null).length
   const { cosmologyName, neededSeconds, verdict } = proposal.computation
-  const left = 'pl-gutter lg:pr-10 max-lg:px-gutter'
+  const left = 'lg:pl-(--page-margin) lg:pr-10 max-lg:px-gutter'
   return (
     <>
       <ReviewStrip callNumber={desk.call.number} lines={lines} currentId={assignmentId} />

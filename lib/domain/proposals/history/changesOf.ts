@@ -1,5 +1,5 @@
 import type { SubjectEntry } from '@/db/queries/logbook'
-import { entryWords } from './entryWords'
+import { entryWords, type RowNames } from './entryWords'
 
 export interface Change {
   at: string
@@ -51,7 +51,7 @@ function subjectOf(entry: SubjectEntry): string {
  * Entries of the logbook, newest first, as an investigator reads them: long typing drawn together, people of the
  * panel left out, and nothing that has no words of its own.
  */
-export function changesOf(entries: readonly SubjectEntry[], readerId: number): Change[] {
+export function changesOf(entries: readonly SubjectEntry[], readerId: number, names: RowNames): Change[] {
   const spells: { entry: SubjectEntry; since: Date }[] = []
   for (const entry of entries) {
     const last = spells.at(-1)
@@ -69,7 +69,7 @@ export function changesOf(entries: readonly SubjectEntry[], readerId: number): C
     // Changed and changed back within a spell: nothing to tell.
     if (goesOn.has(entry.action) && JSON.stringify(entry.before) === JSON.stringify(entry.after)) return []
     const who = whoActed(entry, readerId)
-    const words = entryWords[entry.action]?.(entry)
+    const words = entryWords[entry.action]?.(entry, names)
     return who && words ? [{ at: entry.at.toISOString(), who, words }] : []
   })
 }

@@ -2,7 +2,13 @@ import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
 import { questionWords } from './questionWords'
 
-type Words = (entry: EntryValues) => string
+/** What rows are called now, by their keys; null for those that are gone. */
+export interface RowNames {
+  target: (id: number) => string | null
+  observation: (id: number) => string | null
+}
+
+type Words = (entry: EntryValues, names: RowNames) => string
 
 const quoted = (text: string) =>
   text === '' ? 'an empty one' : `“${text.length > 60 ? `${text.slice(0, 57)}…` : text}”`
@@ -20,13 +26,21 @@ const accessWords: Readonly<Record<string, string>> = {
 
 const target = (value: unknown) => textAt(value, 'target', 'name') ?? 'a target'
 
-function askedWords({ before, after }: EntryValues): string {
+const observed = (value: unknown, names: RowNames) => {
+  const name = names.target(numberAt(value, 'observation', 'targetId') ?? 0)
+  return name ? `an observation of ${name}` : 'an observation'
+}
+
+function askedWords({ before, after }: EntryValues, names: RowNames): string {
   const total = (value: unknown) =>
     (Array.isArray(field(value, 'asked')) ? (field(value, 'asked') as unknown[]) : []).reduce<number>(
       (sum, row) => sum + (numberAt(row, 'askedSeconds') ?? 0),
       0,
     )
-  return `Asked hours: ${formatHoursFromSeconds(total(before))} to ${formatHoursFromSeconds(total(after))}`
+  const rows = field(after, 'asked')
+  const only =
+    Array.isArray(rows) && rows.length === 1 ? names.observation(numberAt(rows[0], 'id') ?? 0) : null
+  return `Asked hours${only ? ` for ${only}` : ''}: ${formatHoursFromSeconds(total(before))} to ${formatHoursFromSeconds(total(after))}`
 }
 
 function paperWords({ before, after }: EntryValues): string {
@@ -92,15 +106,15 @@ export const entryWords: Readonly<Record<string, Words>> = {
       ? `Added ${formatNumber(names.length)} targets from a list`
       : `Added ${formatList(names)}`
   },
-  'observation.add': () => 'Added an observation',
-  'observation.save': ({ before, after }) => {
+  'observation.add': ({ after }, names) => `Added ${observed(after, names)}`,
+  'observation.save': ({ before, after }, names) => {
     const asked = (value: unknown) => numberAt(value, 'observation', 'askedSeconds')
     const [was, is] = [asked(before), asked(after)]
     return was !== null && is !== null && was !== is
-      ? `Asked hours of an observation: ${formatHoursFromSeconds(was)} to ${formatHoursFromSeconds(is)}`
-      : 'Changed an observation'
+      ? `Asked hours of ${observed(after, names)}: ${formatHoursFromSeconds(was)} to ${formatHoursFromSeconds(is)}`
+      : `Changed ${observed(after, names)}`
   },
-  'observation.remove': () => 'Took an observation off',
+  'observation.remove': ({ before }, names) => `Took ${observed(before, names)} off`,
   'observation.ask': askedWords,
   'constraints.save': ({ after }) => `Changed the conditions ${quoted(textAt(after, 'set', 'name') ?? '')}`,
   'fee.pay': () => 'The fee was paid',

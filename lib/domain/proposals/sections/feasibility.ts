@@ -30,10 +30,9 @@ export function feasibilityFinding(contents: ProposalContents, computation: Prop
   })
   const isAnswered = sectionsDone.includes('feasibility')
   const { checksClear, checksTotal } = computation
-  const first = found[0]
   return {
     begun: true,
-    detail: first && !isAnswered ? first.sentence : `${checksClear} of ${checksTotal} checks clear`,
+    detail: `${checksClear} of ${checksTotal} checks clear`,
     missing: isAnswered ? [] : found,
     wrong: found.length > 0 && !isAnswered,
     settled: found.length === 0,

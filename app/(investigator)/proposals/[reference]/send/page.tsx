@@ -10,10 +10,10 @@ import { ReadThrough } from '@/components/submission/ReadThrough'
 import { WhatSendingDoes } from '@/components/submission/WhatSendingDoes'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { Panel } from '@/components/ui/Panel'
+import { formatEngine } from '@/lib/format'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { declarationFor, leadFor } from '@/lib/domain/submission/sendWords'
-import { engineName } from '@/lib/domain/submission/fingerprint'
 import { readForSending, type ForSending } from '@/lib/domain/submission/readForSending'
 import { reopenProposal } from '@/app/(investigator)/(confirmation)/proposals/[reference]/sent/actions'
 import { proposalOf } from '../proposalOf'
@@ -38,7 +38,7 @@ export default async function SendPage({ params }: Props) {
             <Sending read={read} isTestMode={ctx.payments.isTestMode} />
             {read.isIn ? null : (
               <WhatSendingDoes
-                engine={engineName(computation.engineVersion)}
+                engine={formatEngine(computation.engineVersion)}
                 deadline={read.deadline}
                 feeDueAt={read.due?.dueAt ?? null}
               />

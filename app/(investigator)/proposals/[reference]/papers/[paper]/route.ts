@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { readPaper } from '@/lib/domain/papers/readPaper'
 import { defineRoute } from '@/lib/http/defineRoute'
+import { pdfResponse } from '@/lib/http/pdfResponse'
 
 const params = z.object({
   reference: z.string().max(10),
@@ -14,15 +15,6 @@ const params = z.object({
 export const GET = defineRoute({
   name: 'GET /proposals/[reference]/papers/[paper]',
   params,
-  run: async (ctx, { params: { reference, paper } }) => {
-    const { bytes, fileName } = await readPaper(ctx, { reference, paperId: paper })
-    return new Response(new Uint8Array(bytes), {
-      headers: {
-        'content-type': 'application/pdf',
-        'content-disposition': `attachment; filename*=UTF-8''${encodeURIComponent(fileName)}`,
-        'content-security-policy': 'sandbox',
-        'cache-control': 'no-store',
-      },
-    })
-  },
+  run: async (ctx, { params: { reference, paper } }) =>
+    pdfResponse(await readPaper(ctx, { reference, paperId: paper })),
 })

@@ -1,0 +1,77 @@
+import { createHash } from 'node:crypto'
+import { createElement } from 'react'
+import { formatEngine, formatFingerprint } from '@/lib/format'
+import { assemble } from '@/pdf/assembly/assemble'
+import { packetData } from '@/pdf/packet/packetData'
+import { PacketDocument } from '@/pdf/packet/PacketDocument'
+import { render } from '@/pdf/render'
+import type { Snapshot } from '../submission/snapshot'
+import { anonymise } from './anonymise'
+
+export type PacketVariant = 'anonymised' | 'full'
+
+/** Raised when the drawing changes, so that kept packets are made anew. */
+const layout = 1
+
+export interface PacketInput {
+  snapshot: Snapshot
+  variant: PacketVariant
+  /** Null for a draft that was not sent. */
+  versionNumber: number | null
+  /** SHA-256 of the justification; null when there is none yet. */
+  paperSha256: string | null
+}
+
+function labelOf({ snapshot, variant }: PacketInput): string {
+  if (variant === 'full') return snapshot.contents.reference
+  return snapshot.contents.reviewNumber ?? 'Draft'
+}
+
+function contentOf(input: PacketInput) {
+  const { contents } = input.snapshot
+  const people =
+    input.variant === 'full' ? contents.people.map(({ name, institute }) => ({ name, institute })) : []
+  return packetData(anonymise(input.snapshot), { label: labelOf(input), people })
+}
+
+/** Hash of everything that goes into a packet: the same in gives the same packet, and its fingerprint. */
+export function packetHash(input: PacketInput): string {
+  const { variant, versionNumber, paperSha256, snapshot } = input
+  const all = {
+    layout,
+    variant,
+    versionNumber,
+    paperSha256,
+    engine: snapshot.engineVersion,
+    content: contentOf(input),
+  }
+  return createHash('sha256').update(JSON.stringify(all)).digest('hex')
+}
+
+function audience({ variant, versionNumber }: PacketInput): string {
+  if (versionNumber === null) return 'Preview of a draft, not sent'
+  return variant === 'full' ? 'With names, not for the panel' : 'Without names, for the panel'
+}
+
+/** Draws the packet: our pages, then the justification, one footer through all of them. */
+export async function makePacket(
+  input: PacketInput,
+  paper: Uint8Array | null,
+): Promise<{ bytes: Uint8Array; pages: number }> {
+  const data = contentOf(input)
+  const engine = `engine ${formatEngine(input.snapshot.engineVersion)}`
+  const made = input.versionNumber === null ? engine : `version ${input.versionNumber}, ${engine}`
+  const left = `${audience(input)}. ${made.charAt(0).toUpperCase()}${made.slice(1)}.`
+  return assemble({
+    title: input.variant === 'full' ? `${data.label}, ${data.title}` : data.label,
+    parts: [
+      {
+        bytes: await render(() => createElement(PacketDocument, { data })),
+        bookmark: 'The request',
+        isOwn: true,
+      },
+      ...(paper ? [{ bytes: paper, bookmark: 'Justification', isOwn: false }] : []),
+    ],
+    footer: { left, middle: formatFingerprint(packetHash(input)), right: data.label },
+  })
+}

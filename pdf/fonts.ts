@@ -1,0 +1,54 @@
+import { join } from 'node:path'
+import { Font } from '@react-pdf/renderer'
+
+// woff2 is refused by the renderer. A glyph that no font has would print as another one without an error.
+const folder = join(process.cwd(), 'node_modules', '@fontsource')
+const file = (font: string, subset: string, weight: number) =>
+  join(folder, font, 'files', `${font}-${subset}-${weight}-normal.woff`)
+
+const families = [
+  ['Work Sans', 'work-sans', 'latin', 600],
+  ['Work Sans Ext', 'work-sans', 'latin-ext', 600],
+  ['Work Sans Vietnamese', 'work-sans', 'vietnamese', 600],
+  ['Noto Sans Greek', 'noto-sans', 'greek', 600],
+  ['Noto Sans Cyrillic', 'noto-sans', 'cyrillic', 600],
+  // Shipped in one weight.
+  ['Noto Sans Math', 'noto-sans-math', 'latin', 400],
+] as const
+
+/** Families in the order a glyph is looked for. */
+export const fontFamily: string[] = families.map(([name]) => name)
+
+let ready: Promise<void> | null = null
+
+/** Registers and reads the fonts, once in a process. */
+export function loadFonts(): Promise<void> {
+  ready ??= (async () => {
+    for (const [family, font, subset, bold] of families)
+      Font.register({
+        family,
+        fonts: [
+          { src: file(font, subset, 400), fontWeight: 400 },
+          { src: file(font, subset, bold), fontWeight: 600 },
+        ],
+      })
+    // Words are not broken: names of objects must stay readable.
+    Font.registerHyphenationCallback((word) => [word])
+    for (const family of fontFamily) await Font.load({ fontFamily: family, fontWeight: 400 })
+  })()
+  return ready
+}
+
+const known = new Map<number, boolean>()
+
+/** Whether any of the fonts has a character; only after `loadFonts`. */
+export function canPrint(codePoint: number): boolean {
+  const kept = known.get(codePoint)
+  if (kept !== undefined) return kept
+  const found = fontFamily.some((family) => {
+    const data = Font.getFont({ fontFamily: family, fontWeight: 400 })?.data
+    return data && 'hasGlyphForCodePoint' in data ? data.hasGlyphForCodePoint(codePoint) : false
+  })
+  known.set(codePoint, found)
+  return found
+}

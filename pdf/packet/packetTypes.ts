@@ -1,0 +1,55 @@
+import type { FactRow } from '../parts/FactRows'
+import type { PrintedVerdict } from '../parts/Verdict'
+
+export interface PacketRow {
+  /** Number of the target, on its first row only. */
+  number: string
+  name: string
+  position: string
+  redshift: string
+  magnitude: string
+  luminosityMpc: string
+  kpcPerArcsec: string
+  feature: string
+  needed: string
+  asked: string
+  verdict: PrintedVerdict | null
+}
+
+export interface UpRow {
+  name: string
+  byNight: readonly number[]
+  total: string
+  tone: 'plain' | 'marginal' | 'not-feasible'
+}
+
+export interface UpChartData {
+  note: string
+  rows: readonly UpRow[]
+  maxHours: number
+  nights: number
+  /** First night of each month, from 0, and its name. */
+  months: readonly { night: number; name: string }[]
+  moons: readonly { night: number; words: 'new' | 'full' }[]
+}
+
+/** A packet in words and numbers, ready to be set. */
+export interface PacketData {
+  observatory: string
+  season: string
+  /** Review number, reference, or what a draft is called. */
+  label: string
+  title: string
+  abstract: string
+  category: string
+  /** Only in the variant with names. */
+  people: readonly { name: string; institute: string }[]
+  facts: readonly FactRow[]
+  /** `J` over `AB`; `mag` where the targets differ. */
+  magnitudeHead: { head: string; unit: string }
+  rows: readonly PacketRow[]
+  total: { words: string; needed: string; asked: string; verdict: PrintedVerdict | null }
+  cosmology: string
+  up: UpChartData | null
+  notes: readonly { verdict: PrintedVerdict; words: string; text: string }[]
+}

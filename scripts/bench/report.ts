@@ -1,0 +1,12 @@
+import { sayTime } from './measure'
+
+/** Prints one row for the table: our time and, in the same run, that of an independent library. */
+export function report(name: string, ours: number, theirs: number | undefined): void {
+  const row = {
+    name,
+    ours: sayTime(ours),
+    theirs: theirs === undefined ? 'skipped: python3-astropy is not installed' : sayTime(theirs),
+    ratio: theirs === undefined ? '' : `${(theirs / ours).toPrecision(2)}`,
+  }
+  process.stdout.write(`${JSON.stringify(row)}\n`)
+}
