@@ -61,7 +61,6 @@ describe('the packet without names', () => {
       .update({ abstract: `Signs ${signs} and 10⁵ L☉, H₀, Żółć, Ωₘ.` })
     const { bytes } = await readPacket(ctx, { reference: scenario.reference, variant: 'anonymised' })
     const text = pdfText(bytes)
-    console.log('LINE', JSON.stringify(text.split('\n').find((l) => l.includes('Signs'))))
     expect(signs.split(' ').filter((sign) => !text.includes(sign))).toEqual([])
     expect(text).toContain('Żółć')
     expect(text).not.toContain('□')
