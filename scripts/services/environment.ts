@@ -41,6 +41,7 @@ export function appEnvironment(folder: DataFolder, secrets: Secrets, ports: Serv
     LOG_LEVEL: 'info',
     LETTER_RELAY_SECONDS: folder.mode === 'test' ? '1' : '3',
     NEXT_TELEMETRY_DISABLED: '1',
+    AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
   }
 }
 
