@@ -19,6 +19,17 @@ const families = [
 /** Families in the order a glyph is looked for. */
 export const fontFamily: string[] = families.map(([name]) => name)
 
+/**
+ * Reads a font and looks every character up once. A glyph met first as a part of another (the prime in a double
+ * prime) would be remembered without its character, and could not be copied or searched in any later document.
+ */
+async function readFont(family: string, weight: number): Promise<void> {
+  await Font.load({ fontFamily: family, fontWeight: weight })
+  const { data } = Font.getFont({ fontFamily: family, fontWeight: weight })
+  if (!data || !('characterSet' in data)) throw new Error(`the font ${family} could not be read`)
+  for (const codePoint of data.characterSet) data.glyphForCodePoint(codePoint)
+}
+
 let ready: Promise<void> | null = null
 
 /** Registers and reads the fonts, once in a process. */
@@ -34,7 +45,7 @@ export function loadFonts(): Promise<void> {
       })
     // Words are not broken: names of objects must stay readable.
     Font.registerHyphenationCallback((word) => [word])
-    for (const family of fontFamily) await Font.load({ fontFamily: family, fontWeight: 400 })
+    for (const family of fontFamily) for (const weight of [400, 600]) await readFont(family, weight)
   })()
   return ready
 }

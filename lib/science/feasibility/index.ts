@@ -1,5 +1,4 @@
 /** Can it be done: the checks of a request and the verdict of a proposal. */
-export { moonClassLimits } from './moonClass'
 export { observationReport } from './observationReport'
 export {
   proposalVerdict,

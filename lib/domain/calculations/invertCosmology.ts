@@ -1,0 +1,36 @@
+import { z } from 'zod'
+import { cosmologyEngineVersion } from '@/lib/science/cosmology'
+import { eachOrRefused } from './asRefused'
+import { describeCosmology } from './computeCosmology'
+import { cosmologyInput, universeOf } from './cosmologySchema'
+import { mostRedshifts, requireAtMost } from './limits'
+
+export const inverseRequest = z.object({
+  cosmology: cosmologyInput,
+  quantity: z.enum([
+    'lookbackGyr',
+    'ageGyr',
+    'comovingMpc',
+    'luminosityMpc',
+    'angularDiameterMpc',
+    'distanceModulusMag',
+  ]),
+  values: z.array(z.number('A value is a number.')),
+})
+
+export type InverseRequest = z.output<typeof inverseRequest>
+
+/** Every redshift at which a quantity has each value; an empty list where there is none. */
+export function invertCosmology(input: InverseRequest) {
+  requireAtMost(input.values, mostRedshifts, 'values')
+  const universe = universeOf(input.cosmology)
+  return {
+    engine: cosmologyEngineVersion,
+    cosmology: describeCosmology(universe),
+    quantity: input.quantity,
+    rows: eachOrRefused(input.values, 'values', (value) => ({
+      value,
+      redshifts: universe.redshiftsAt(input.quantity, value),
+    })),
+  }
+}

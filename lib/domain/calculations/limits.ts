@@ -1,0 +1,16 @@
+import { refuse } from '@/lib/errors'
+import { formatNumber } from '@/lib/format'
+
+/** What one call may ask for. */
+export const mostRedshifts = 100_000
+export const mostTargets = 500
+export const mostNights = 400
+export const mostInstants = 1_000
+
+/** Refuses a list that is longer than one call may be. */
+export function requireAtMost(list: readonly unknown[], most: number, what: string): void {
+  if (list.length > most)
+    throw refuse.tooLarge(
+      `${formatNumber(list.length)} ${what} were given; one call takes at most ${formatNumber(most)}.`,
+    )
+}
