@@ -42,8 +42,18 @@ module.exports = {
     {
       name: 'db-only-from-domain',
       severity: 'error',
-      comment: 'Rows are reached by verbs, and by the edge that opens the services. Pages and components never.',
-      from: { pathNot: ['^db/', '^lib/domain/', '^lib/jobs/', '^lib/services/services\\.ts$', '^tests/', '^scripts/'] },
+      comment:
+        'Rows are reached by verbs, and by the edge that opens the services. Pages and components never.',
+      from: {
+        pathNot: [
+          '^db/',
+          '^lib/domain/',
+          '^lib/jobs/',
+          '^lib/services/services\\.ts$',
+          '^tests/',
+          '^scripts/',
+        ],
+      },
       to: { path: '^db/' },
     },
     {
@@ -65,8 +75,10 @@ module.exports = {
           '^lib/paths\\.ts$',
           '^lib/actions/result\\.ts$',
           '^lib/domain/actor\\.ts$',
+          '^lib/fieldErrorsOf\\.ts$',
           pure,
-          '^lib/domain/[^/]+/[a-z][A-Za-z]+(Words|List|View|Schema)\\.ts$',
+          '^lib/domain/[^/]+/[a-z][A-Za-z]+(Words|List|View|Schema|Form)\\.ts$',
+          '^lib/domain/[^/]+/(categories|limits)\\.ts$',
         ],
         dependencyTypesNot: ['type-only'],
       },
@@ -85,7 +97,11 @@ module.exports = {
       from: { path: '^pdf/' },
       to: {
         path: '^(lib|db|app|components)/',
-        pathNot: ['^lib/(format|science)/', '^components/charts/geometry/', '^components/ui/verdictGlyphPath\\.ts$'],
+        pathNot: [
+          '^lib/(format|science)/',
+          '^components/charts/geometry/',
+          '^components/ui/verdictGlyphPath\\.ts$',
+        ],
         dependencyTypesNot: ['type-only'],
       },
     },
@@ -108,6 +124,10 @@ module.exports = {
     tsConfig: { fileName: 'tsconfig.json' },
     tsPreCompilationDeps: true,
     doNotFollow: { path: 'node_modules' },
-    enhancedResolveOptions: { exportsFields: ['exports'], conditionNames: ['import', 'require', 'node', 'default', 'types'], extensions: ['.ts', '.tsx', '.mjs', '.js', '.json'] },
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'require', 'node', 'default', 'types'],
+      extensions: ['.ts', '.tsx', '.mjs', '.js', '.json'],
+    },
   },
 }

@@ -8,7 +8,7 @@ import { showToast } from '@/components/ui/showToast'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { officePeopleReply, type OfficePeopleReply } from '@/lib/domain/people/officeSchema'
 import { paths } from '@/lib/paths'
-import { OfficeStep, OfficeSteps } from './OfficeStep'
+import { OfficeSteps, type OfficeStep } from './OfficeStep'
 import { invitationColumns, peopleColumns } from './peopleColumns'
 
 interface PeopleTableProps {

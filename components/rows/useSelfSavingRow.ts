@@ -40,7 +40,8 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
   options: SelfSavingRowOptions<Row, Values, Kept>,
 ): SelfSavingRow<Row, Values> {
   const { schema, kept, empty, rowOf, save } = options
-  const known = useRef<Row>(kept ? rowOf(kept) : empty)
+  const [first] = useState<Row>(() => (kept ? rowOf(kept) : empty))
+  const known = useRef<Row>(first)
   const version = useRef<number | null>(kept?.version ?? null)
   const running = useRef(false)
   const again = useRef(false)
@@ -48,7 +49,7 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
   const [stale, setStale] = useState<StaleRow | null>(null)
   const form = useForm<Row, unknown, Values>({
     resolver: zodResolver(schema),
-    defaultValues: known.current as DefaultValues<Row>,
+    defaultValues: first as DefaultValues<Row>,
     // Checked by `commit`, when a cell is left; a message goes as soon as its cell is right (TypedCell).
     mode: 'onSubmit',
     reValidateMode: 'onSubmit',

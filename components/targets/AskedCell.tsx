@@ -1,6 +1,6 @@
 'use client'
 
-import { useEffect, useRef, useState } from 'react'
+import { useRef, useState } from 'react'
 import { TextLink } from '@/components/ui/TextLink'
 import { ABSENT, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 import { askFor, hoursText } from '@/lib/domain/observations/rules'
@@ -32,7 +32,12 @@ export function AskedCell(props: AskedCellProps) {
   const [wrong, setWrong] = useState(false)
   const busy = useRef(false)
 
-  useEffect(() => setText(kept), [kept])
+  // A save elsewhere is shown at once; while rendering, so that the old hours are never painted.
+  const [shown, setShown] = useState(kept)
+  if (shown !== kept) {
+    setShown(kept)
+    setText(kept)
+  }
 
   if (!only)
     return readOnly ? ABSENT : <TextLink href={paths.proposalSection(reference, 'observing')}>ask</TextLink>

@@ -4,10 +4,6 @@ import type { FeesRow, MoneyEntriesRow, WaiversRow } from '../tables.ts'
 
 export type FeeState = FeesRow['state']
 
-export async function findFee(db: Database, id: number): Promise<FeesRow | null> {
-  return (await db('fees').where({ id }).first()) ?? null
-}
-
 /** The fee of a proposal; null where there is none. */
 export async function feeOf(db: Database, proposalId: number): Promise<FeesRow | null> {
   return (await db('fees').where({ proposal_id: proposalId }).first()) ?? null

@@ -1,5 +1,4 @@
 import type { Database } from '../client.ts'
-import type { ReceiptsRow } from '../tables.ts'
 
 /** Draws the next number of a series; the row stays locked until the transaction ends, so that none is left out. */
 export async function drawNumber(db: Database, series: string): Promise<number> {
@@ -22,10 +21,6 @@ export async function insertReceipt(
     payment_id: receipt.paymentId,
     payer: receipt.payer,
   })
-}
-
-export async function receiptOfPayment(db: Database, paymentId: number): Promise<ReceiptsRow | null> {
-  return (await db('receipts').where({ payment_id: paymentId }).first()) ?? null
 }
 
 /** A receipt with what was paid. */

@@ -1,5 +1,4 @@
 import 'server-only'
-import { headers } from 'next/headers'
 import type { NextAuthOptions } from 'next-auth'
 import Credentials from 'next-auth/providers/credentials'
 import { z } from 'zod'
@@ -73,9 +72,4 @@ export function authOptions(): NextAuthOptions {
       debug: () => undefined,
     },
   }
-}
-
-/** True on a request that carries a session cookie, alive or not; only for wording, never for access. */
-export async function carriesSessionCookie(): Promise<boolean> {
-  return /next-auth\.session-token/.test((await headers()).get('cookie') ?? '')
 }

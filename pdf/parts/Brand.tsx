@@ -1,5 +1,5 @@
 import { Circle, Path, Svg, View } from '@react-pdf/renderer'
-import { colour, size } from '../theme'
+import { colour } from '../theme'
 import { Words } from './Words'
 
 /** Head of a document: the mark and what it belongs to at the left, a date at the right, a double ink line below. */

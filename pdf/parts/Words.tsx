@@ -1,6 +1,8 @@
 import { Text } from '@react-pdf/renderer'
-import type { Style } from '@react-pdf/types'
+import type { ComponentProps } from 'react'
 import { runsOf } from '../scripts'
+
+type Style = Exclude<NonNullable<ComponentProps<typeof Text>['style']>, readonly unknown[]>
 
 interface WordsProps {
   children: string

@@ -3,7 +3,6 @@ import type { Page } from '@playwright/test'
 import { fillDate } from './support/fillDate'
 import { letter, lettersTo, linkIn } from './support/inbox'
 import { pdfOf, textOf } from './support/pdf'
-import { desk } from './support/people'
 import { expect, test } from './support/test'
 
 /**

@@ -15,14 +15,6 @@ export function conditionsOf(
   return named ?? contents.constraintSets[0] ?? defaultConstraints
 }
 
-/** Evening dates from one to another, both included. */
-export function eveningsBetween(from: string, to: string): string[] {
-  const dates: string[] = []
-  for (let at = Date.parse(from); at <= Date.parse(to); at += 86_400_000)
-    dates.push(new Date(at).toISOString().slice(0, 10))
-  return dates
-}
-
 /**
  * Hours of each target through the whole season of the call, dark and above the airmass its first observation
  * asks for, whatever the Moon does. Targets that share an airmass are computed together.

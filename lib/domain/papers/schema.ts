@@ -9,7 +9,10 @@ export const uploadPaperSchema = z.object({
   kind: paperKind,
   file: z.instanceof(File, { message: 'Choose a file.' }),
   sha256: z.string().regex(/^[0-9a-f]{64}$/, 'The browser did not say what it sent. Try again.'),
-  sizeBytes: z.coerce.number().int().nonnegative(),
+  sizeBytes: z
+    .string()
+    .regex(/^\d{1,10}$/, 'The browser did not say how much it sent. Try again.')
+    .transform(Number),
 })
 
 export const removePaperSchema = z.object({ reference, kind: paperKind })

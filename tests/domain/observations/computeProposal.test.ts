@@ -67,7 +67,12 @@ describe('the computation of a proposal', () => {
   })
 
   it('needs more for a fainter target, and the same whatever the cosmology when it was observed', () => {
-    const faint = target({ brightness: { ...target().brightness!, value: 21 } })
+    const faint = target({
+      brightness: {
+        ...(target().brightness as NonNullable<ReturnType<typeof target>['brightness']>),
+        value: 21,
+      },
+    })
     const needed = one(contents({ targets: [faint] })).neededSeconds ?? 0
     expect(needed).toBeGreaterThan(one(contents()).neededSeconds ?? Infinity)
     const other = findPreset('einstein-de-sitter').parameters

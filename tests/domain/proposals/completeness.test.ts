@@ -66,8 +66,6 @@ const computed = (
       observedFeatureA: 7604,
       usableHours: 300,
       exposure: null,
-      usableHours: 300,
-      exposure: null,
       checks: [
         {
           id: 'band',

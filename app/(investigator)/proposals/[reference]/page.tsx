@@ -18,6 +18,7 @@ import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
 import { mayPutAway } from '@/lib/domain/proposals/policy'
 import { paths } from '@/lib/paths'
+import { ProposalQuestions } from './answers/ProposalQuestions'
 import { putAwayDraftAction, takeBackDraftAction } from './actions'
 import { proposalOf } from './proposalOf'
 
@@ -53,6 +54,9 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
           steps={[{ label: 'My proposals', href: paths.proposals() }, { label: contents.call.title }]}
         />
         <PageTitle display title={contents.title || 'A proposal without a title'} lead={homeLead(read)} />
+        <div className="mt-6 empty:hidden">
+          <ProposalQuestions ctx={ctx} reference={contents.reference} />
+        </div>
         <div className="mt-6 lg:hidden">
           <SettlePanel read={read} />
         </div>
