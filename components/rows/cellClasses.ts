@@ -20,8 +20,8 @@ export function cellClasses({ align = 'left', strong, wrong, readOnly }: CellLoo
 
 /** A small choice in the second line of a cell. */
 export const smallSelect =
-  'max-w-full appearance-none border-0 bg-transparent p-0 text-tick font-normal text-muted hover:text-ink max-sm:min-h-7'
+  'max-w-full appearance-none border-0 bg-transparent p-0 text-tick font-normal text-muted hover:text-ink min-h-6 max-sm:min-h-7'
 
 /** A choice that is a cell of its own: the dotted line of what one may change. */
 export const largeSelect =
-  'w-full min-w-0 appearance-none border-0 border-b border-dotted border-edge bg-transparent p-0 text-table text-ink disabled:border-transparent max-sm:min-h-9'
+  'w-full min-w-0 appearance-none border-0 border-b border-dotted border-edge bg-transparent p-0 text-table text-ink min-h-6 disabled:border-transparent max-sm:min-h-9'

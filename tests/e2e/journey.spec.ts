@@ -244,11 +244,7 @@ test.describe.serial('a whole call', () => {
       await page.goto(`/reviews/interests/${slug}`)
       await expect(page.getByText('Marrowby').first()).toBeVisible()
       await page.getByLabel('I have been through all the names').check()
-      await page
-        .locator('#main')
-        .getByRole('button', { name: /declare|keep|done/i })
-        .last()
-        .click()
+      await page.locator('#main').getByRole('button', { name: 'Save and go to my reviews' }).last().click()
       await page.waitForURL(/\/reviews$/)
       await page.getByRole('link', { name: reviewNumber }).first().click()
       await page.waitForURL(/\/reviews\/\d+/)
@@ -284,24 +280,20 @@ test.describe.serial('a whole call', () => {
     test.setTimeout(180_000)
     await signIn('edda@velm.example')
     await page.goto(`/panel/${slug}/ranking`)
-    await page.getByRole('button', { name: 'Start the ranking' }).click()
+    await page.getByRole('button', { name: 'Begin the ranking' }).click()
     await expect(page.getByRole('row').filter({ hasText: title })).toContainText('7.5')
     await page.getByRole('button', { name: 'Freeze this ranking' }).click()
     await expect(page.getByRole('button', { name: 'Freeze this ranking' })).toBeHidden()
 
     await page.goto(`/panel/${slug}/nights`)
-    await page
-      .getByRole('button', { name: /Take this plan|Take the suggestion|as suggested/ })
-      .first()
-      .click()
+    await page.getByRole('button', { name: 'Take the suggestion over' }).click()
+    await expect(page.getByText(/given the hours suggested/)).toBeVisible()
     await page.goto(`/panel/${slug}/decisions`)
     await page.getByRole('button', { name: /Prepare/ }).click()
-    await page
-      .getByRole('button', { name: /Release|Make known|Send the letters/ })
-      .first()
-      .click()
+    await expect(page.getByText(/decisions? (is|are) prepared/).first()).toBeVisible()
+    await page.getByRole('button', { name: 'Make them known …' }).click()
     await page.getByRole('dialog').getByRole('textbox').fill(number)
-    await page.getByRole('dialog').getByRole('button').last().click()
+    await page.getByRole('button', { name: 'Make them known', exact: true }).click()
     const told = await letter(
       request,
       'ilse@tarnhead.example',
