@@ -57,7 +57,8 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
 
   // Someone else's save, or an undo, came with the page: shown unless something is being typed here.
   useEffect(() => {
-    if (!kept || kept.version === version.current || running.current) return
+    // An answer to an earlier save can arrive late: only what is newer than one's own last save is taken over.
+    if (!kept || kept.version <= (version.current ?? 0) || running.current) return
     if (text(form.getValues()) !== text(known.current)) return
     version.current = kept.version
     known.current = rowOf(kept)
