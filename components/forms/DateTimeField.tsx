@@ -38,7 +38,7 @@ export function DateTimeField({ name, label, help, optional, utcOffsetHours }: D
   }
   return (
     <FieldFrame {...field} as="fieldset" label={label} help={help} optional={optional}>
-      <div className="flex max-w-96 items-center gap-3">
+      <div className="flex max-w-96 flex-wrap items-center gap-3">
         <input
           {...shared}
           id={field.id}

@@ -12,7 +12,7 @@ export function OfferedHours({ telescope }: { telescope: NightsView['telescopes'
   const step = 44
   const left = offeredSeconds - givenSeconds
   return (
-    <section aria-label={`Hours on offer on ${name}`}>
+    <section aria-label={`Hours on offer on ${name}`} className="min-w-0">
       <div className="flex flex-wrap items-baseline justify-between gap-x-6 pt-3 rule-open">
         <h2 className="text-body font-semibold">{name}</h2>
         <p className="m-0 text-table">

@@ -9,7 +9,7 @@ import { paths } from '@/lib/paths'
 export function DiscussionList({ view, openId }: { view: DiscussionView; openId: number }) {
   const { line, callSlug } = view.ranking
   return (
-    <nav aria-label="Proposals in order">
+    <nav aria-label="Proposals in order" className="min-w-0">
       <ol className="plain-list text-table rule-open">
         {view.proposals.map((one) => (
           <li
