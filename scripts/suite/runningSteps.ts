@@ -2,7 +2,7 @@ import { rmSync } from 'node:fs'
 import { join } from 'node:path'
 import { build, buildIsCurrent } from '../app/build'
 import { openDataFolder } from '../services/folders'
-import { good, type Outcome, type Step } from './outcome'
+import { bad, good, type Outcome, type Step } from './outcome'
 import { readPlaywrightReport } from './playwrightReport'
 import type { TestStack } from './TestStack'
 import { runTool } from './tool'
@@ -37,6 +37,8 @@ async function makeBuild(stack: TestStack, signal: AbortSignal): Promise<Outcome
 }
 
 async function endToEnd(stack: TestStack, signal: AbortSignal, pattern?: string): Promise<Outcome> {
+  const { env: buildEnv } = await stack.buildEnvironment()
+  if (!buildIsCurrent(buildEnv)) return bad('No journey ran: there is no build of these sources.')
   const env = await stack.serve(signal)
   const reportFile = join(openDataFolder('test').logs, 'playwright.json')
   rmSync(reportFile, { force: true })
