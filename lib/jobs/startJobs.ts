@@ -4,6 +4,7 @@ import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
 import { relayLetters } from './relayLetters'
 import { settleFees } from './settleFees'
+import { sweepObjects } from './sweepObjects'
 
 const kept = globalThis as typeof globalThis & { noctuaryJobs?: NodeJS.Timeout[] }
 
@@ -32,7 +33,17 @@ async function relay(): Promise<void> {
   if (report.sent + report.delayed + report.parked > 0) log.info(report, 'letters relayed')
 }
 
+async function sweep(): Promise<void> {
+  const { db, storage } = services()
+  const removed = await sweepObjects(db, storage)
+  if (removed > 0) log.info({ removed }, 'objects without a row swept')
+}
+
 /** Starts the scheduled work of this process, once. */
 export function startJobs(): void {
-  kept.noctuaryJobs ??= [every(env().LETTER_RELAY_SECONDS, 'letters', relay), every(60, 'fees', settleFees)]
+  kept.noctuaryJobs ??= [
+    every(env().LETTER_RELAY_SECONDS, 'letters', relay),
+    every(60, 'fees', settleFees),
+    every(3600, 'objects', sweep),
+  ]
 }
