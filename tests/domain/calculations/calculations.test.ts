@@ -27,7 +27,8 @@ describe('the cosmology calculation', () => {
 
   it('gives every quantity at each redshift and between pairs', () => {
     const answer = compute({ cosmology: 'planck-2018', z: [0, 1], pairs: [[0.5, 1]] })
-    expect(answer.rows[0]).toMatchObject({ z: 0, E: 1, luminosityMpc: 0, distanceModulusMag: null })
+    expect(answer.rows[0]).toMatchObject({ z: 0, luminosityMpc: 0, distanceModulusMag: null })
+    expect(answer.rows[0]?.E).toBeCloseTo(1, 14)
     expect(answer.rows[1]?.luminosityMpc).toBeCloseTo((answer.rows[1]?.angularDiameterMpc ?? 0) * 4, 6)
     expect(answer.pairs[0]?.angularDiameterMpc).toBeGreaterThan(0)
     expect(answer.universe).toMatchObject({ origin: 'big-bang', fate: 'expands-forever' })
