@@ -3,6 +3,7 @@ import { LinkButton } from '@/components/ui/LinkButton'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import { VerdictMark } from '@/components/ui/VerdictMark'
+import { isOpenForWriting } from '@/lib/domain/proposals/policy'
 import type { ReadProposal } from '@/lib/domain/proposals/readProposal'
 import { countInWords } from '@/lib/format'
 import { paths } from '@/lib/paths'
@@ -43,6 +44,14 @@ function CheckNote({
   )
 }
 
+/** What stands where nothing is to settle; it never says more than is so. */
+function restfulWords({ contents, computation }: ReadProposal): string {
+  if (!isOpenForWriting(contents)) return 'Nothing is asked of you at the moment.'
+  return computation.checksClear === computation.checksTotal
+    ? 'Every check is clear. Read it through, then send it.'
+    : 'What the checks say against it you have answered. Read it through, then send it.'
+}
+
 /** The one thing worth doing next, at the side of a proposal's home. */
 export function SettlePanel({ read }: { read: ReadProposal }) {
   const { reference } = read.contents
@@ -65,9 +74,7 @@ export function SettlePanel({ read }: { read: ReadProposal }) {
             </p>
           </BarNote>
         ) : null}
-        {thing.kind === 'nothing' ? (
-          <p className="m-0 text-table text-muted">Everything that can be checked has been, and is clear.</p>
-        ) : null}
+        {thing.kind === 'nothing' ? <p className="m-0 text-table text-muted">{restfulWords(read)}</p> : null}
       </div>
     </section>
   )
