@@ -11,7 +11,7 @@ export async function main(): Promise<number> {
     group: 'unit',
     run: (signal: AbortSignal) => runVitest({ project: 'unit' }, signal),
   } as const
-  const { passed, failed } = await runSteps([...staticSteps(true), typeStep, unit], stop.signal)
+  const { passed, failed } = await runSteps([typeStep, ...staticSteps(true), unit], stop.signal)
   console.log(`\n${passed} passed, ${failed} failed`)
   return failed > 0 ? 1 : 0
 }

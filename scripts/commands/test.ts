@@ -24,7 +24,7 @@ export async function main(args: string[]): Promise<number> {
   const stack = new TestStack()
   // Services come up while the checks that need none are running.
   if (wanted.some((group) => needingServices.includes(group))) void stack.start()
-  const steps = [...staticSteps(), typeStep, ...runningSteps(stack, positionals[0])]
+  const steps = [typeStep, ...staticSteps(), ...runningSteps(stack, positionals[0])]
   const tally = await runSteps(
     steps.filter(({ group }) => wanted.includes(group)),
     stop.signal,
