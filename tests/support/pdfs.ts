@@ -13,9 +13,6 @@ export async function pdfWith(
   return document.save({ useObjectStreams: objectStreams })
 }
 
-/** A dictionary as the library builds one. */
-type Dictionary = NonNullable<Parameters<PDFDocument['context']['stream']>[1]>
-
 /** Sets an entry of the catalogue: where scripts and opening actions hang. */
 export function inCatalog(key: string, value: Record<string, unknown>) {
   return (document: PDFDocument) => {
