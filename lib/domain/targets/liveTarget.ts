@@ -3,14 +3,15 @@ import { targetRowSchema, type TargetRow } from './schema'
 
 /**
  * A row as it is being typed, for computing while one types: cells that cannot be read yet count as empty.
- * `target` gives the key, the place and the version.
+ * The first argument gives the key, the place and the version.
  */
 export function liveTarget(
-  target: Pick<Target, 'id' | 'position' | 'version'>,
+  { id, position, version }: Pick<Target, 'id' | 'position' | 'version'>,
   row: TargetRow,
 ): Target | null {
+  const seat = { id, position, version }
   const first = targetRowSchema.safeParse(row)
-  if (first.success) return { ...first.data, ...target }
+  if (first.success) return { ...first.data, ...seat }
   const emptied: TargetRow = { ...row, name: row.name.trim() || '–' }
   for (const issue of first.error.issues) {
     const cell = issue.path[0]
@@ -21,5 +22,5 @@ export function liveTarget(
       Object.assign(emptied, { [cell]: '' })
   }
   const second = targetRowSchema.safeParse(emptied)
-  return second.success ? { ...second.data, ...target } : null
+  return second.success ? { ...second.data, ...seat } : null
 }

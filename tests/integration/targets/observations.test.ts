@@ -40,7 +40,7 @@ beforeEach(async () => {
   ctx = testContext(db(), scenario.pi)
 })
 
-// Seen to fail with hours kept as floating point, and with the check of modes on offer left out.
+// Seen to fail with the check of modes on offer left out.
 describe('observations of a draft', () => {
   it('are asked for in hours and kept in whole seconds', async () => {
     const added = await add({ askedHours: '2.45', feature: 'halpha' })
