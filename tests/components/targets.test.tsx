@@ -20,7 +20,7 @@ vi.setConfig({ testTimeout: 20_000 })
 function show(over: Partial<TargetActions> = {}, readOnly: string | null = null) {
   const save = vi.fn<TargetActions['save']>(async () => ({
     ok: true,
-    data: { ...contents().targets[0]!, version: 2 },
+    data: { ...(contents().targets[0] as ReturnType<typeof contents>['targets'][number]), version: 2 },
   }))
   const no = refusedAs('not in this test')
   const actions: TargetActions = {
