@@ -1,10 +1,10 @@
 import { parseArgs } from 'node:util'
 import { build, buildIsCurrent } from '../app/build'
 import { migrate } from '../app/database'
-import { startServer } from '../app/server'
+import { readHealth, startServer } from '../app/server'
 import { checkEnvironment } from '../production/checkEnvironment'
 import { demoSecrets, refuseDemoDatabase } from '../production/demoTraces'
-import type { Environment } from '../services/environment'
+import { quiet, type Environment } from '../services/environment'
 import { openDataFolder } from '../services/folders'
 import { Problem } from '../services/Problem'
 import { Supervisor } from '../services/Supervisor'
@@ -34,8 +34,10 @@ export async function main(args: string[]): Promise<number> {
     }
     const host = process.env.HOST || '127.0.0.1'
     const port = Number(process.env.PORT || 3000)
-    await supervisor.add(startServer({ folder, env, host, port }))
+    await supervisor.add(startServer({ folder, env, host, port, evenIfParted: true }))
     supervisor.noteAddress(`${host}:${port}`)
+    const { up, parts } = await readHealth(host, port)
+    if (!up) console.warn(`It serves, but not everything it leans on is up: ${parts}`)
     console.log(`Noctuary serves on ${host}:${port} for ${env.NEXTAUTH_URL}.`)
   } catch (error) {
     await supervisor.stopAll()
@@ -51,5 +53,5 @@ function settings(): Environment {
   const given = Object.entries(process.env).filter(
     (entry): entry is [string, string] => entry[1] !== undefined,
   )
-  return { ...Object.fromEntries(given), NOCTUARY_MODE: 'production', NEXT_TELEMETRY_DISABLED: '1' }
+  return { ...Object.fromEntries(given), NOCTUARY_MODE: 'production', ...quiet }
 }

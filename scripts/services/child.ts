@@ -79,7 +79,7 @@ function signalGroup(pid: number, signal: NodeJS.Signals): void {
   }
 }
 
-/** Waits until a service answers; fails at once, with the end of its log, if it ends before that. */
+/** Waits until a service answers; one that ends before, or never answers, is put away and its log's end shown. */
 export async function untilReady(
   child: Child,
   answers: () => Promise<boolean>,
@@ -91,7 +91,9 @@ export async function untilReady(
     if (await answers().catch(() => false)) return
     await sleep(100)
   }
-  throw childProblem(child, `did not answer within ${seconds} s`)
+  const problem = childProblem(child, `did not answer within ${seconds} s`)
+  await child.stop()
+  throw problem
 }
 
 export function childProblem(child: Child, what: string): Problem {

@@ -18,6 +18,12 @@ export const databases = { main: 'noctuary', test: 'noctuary_test' } as const
 
 export type Environment = Record<string, string>
 
+/** Keeps notices that are not about us out of the logs. */
+export const quiet: Environment = {
+  NEXT_TELEMETRY_DISABLED: '1',
+  AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
+}
+
 /** What the application reads, for the services of one data folder. */
 export function appEnvironment(folder: DataFolder, secrets: Secrets, ports: ServicePorts): Environment {
   return {
@@ -40,8 +46,7 @@ export function appEnvironment(folder: DataFolder, secrets: Secrets, ports: Serv
     PAYMENT_MOCK_URL: `http://127.0.0.1:${ports.payments}`,
     LOG_LEVEL: 'info',
     LETTER_RELAY_SECONDS: folder.mode === 'test' ? '1' : '3',
-    NEXT_TELEMETRY_DISABLED: '1',
-    AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
+    ...quiet,
   }
 }
 
