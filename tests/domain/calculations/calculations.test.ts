@@ -67,7 +67,10 @@ describe('the cosmology calculation', () => {
   })
 
   it('does not take text for numbers', () => {
-    const read = cosmologyRequest.safeParse({ cosmology: 'planck-2018', z: ['1', null, Number.POSITIVE_INFINITY] })
+    const read = cosmologyRequest.safeParse({
+      cosmology: 'planck-2018',
+      z: ['1', null, Number.POSITIVE_INFINITY],
+    })
     expect(read.error && Object.keys(fieldErrorsOf(read.error))).toEqual(['z.0', 'z.1', 'z.2'])
   })
 
