@@ -5,11 +5,26 @@ import { step } from '../lib/services/step.ts'
 /** A connection pool, or a transaction on one of its connections. */
 export type Database = Knex
 
+interface DriverConnection {
+  /** Knex does not give a connection out again that carries this. */
+  __knex__disposed?: unknown
+  destroy(): void
+}
+
 // Every statement, BEGIN and COMMIT included, passes `step`, where a test can make it fail.
 class SteppedClient extends MysqlClient {
-  override _query(connection: unknown, statement: { sql: string }): Promise<unknown> {
-    const verb = statement.sql.trimStart().split(/[\s;(]/, 1)[0] ?? 'query'
-    return step(`db:${verb.toLowerCase()}`, () => super._query(connection, statement))
+  override async _query(connection: DriverConnection, statement: { sql: string }): Promise<unknown> {
+    const verb = (statement.sql.trimStart().split(/[\s;(]/, 1)[0] ?? 'query').toLowerCase()
+    try {
+      return await step(`db:${verb}`, () => super._query(connection, statement))
+    } catch (error) {
+      // A transaction that could not be ended would live on in the pool, and its locks with it.
+      if (verb === 'commit' || verb === 'rollback') {
+        connection.__knex__disposed = error
+        connection.destroy()
+      }
+      throw error
+    }
   }
 }
 

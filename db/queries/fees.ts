@@ -14,6 +14,19 @@ export async function lockFee(db: Database, id: number): Promise<FeesRow | null>
   return (await db('fees').where({ id }).forUpdate().first()) ?? null
 }
 
+/**
+ * The fee of a proposal by its reference, locked as the first thing a transaction reads: of two people who press
+ * Pay together the second then sees what the first wrote. Null where there is none.
+ */
+export async function lockFeeOf(db: Database, reference: string): Promise<FeesRow | null> {
+  const row = await db('fees as f')
+    .join('proposals as p', 'p.id', 'f.proposal_id')
+    .where('p.reference', reference)
+    .forUpdate()
+    .first('f.*')
+  return (row as FeesRow | undefined) ?? null
+}
+
 export async function insertFee(
   db: Database,
   fee: { proposalId: number; amountMinor: number; currency: string; dueAt: Date },

@@ -1,16 +1,20 @@
 import type { Database } from '../client.ts'
 import type { LogbookRow } from '../tables.ts'
+import { newest } from './newest.ts'
 
 /** Locks the end of the chain and returns its hash; held until the transaction ends. */
 export async function lockLogbookHead(db: Database): Promise<string> {
-  const head = await db('logbook_head').where({ id: 1 }).forUpdate().first()
+  const [rows] = (await newest(db, 'SELECT last_hash FROM logbook_head WHERE id = ? FOR UPDATE', [1])) as [
+    { last_hash: string }[],
+  ]
+  const head = rows[0]
   if (!head) throw new Error('the logbook has no head row: run the migrations')
   return head.last_hash
 }
 
 export async function appendLogbook(db: Database, row: Omit<LogbookRow, 'id'>): Promise<void> {
   await db('logbook').insert(row)
-  await db('logbook_head').where({ id: 1 }).update({ last_hash: row.hash })
+  await newest(db, 'UPDATE logbook_head SET last_hash = ? WHERE id = ?', [row.hash, 1])
 }
 
 /** All rows in order, a page at a time. */

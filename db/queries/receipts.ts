@@ -1,8 +1,10 @@
 import type { Database } from '../client.ts'
+import { newest } from './newest.ts'
 
 /** Draws the next number of a series; the row stays locked until the transaction ends, so that none is left out. */
 export async function drawNumber(db: Database, series: string): Promise<number> {
-  await db.raw(
+  await newest(
+    db,
     'INSERT INTO counters (name, last_number) VALUES (?, 1) ON DUPLICATE KEY UPDATE last_number = last_number + 1',
     [series],
   )

@@ -74,12 +74,14 @@ export async function setAssessmentRequests(
   proposalId: number,
   instrumentIds: readonly number[],
 ): Promise<void> {
-  await db('assessment_requests')
+  const givenUp = await db('assessment_requests')
     .where({ proposal_id: proposalId })
     .whereNotIn('instrument_id', [...instrumentIds])
     .whereNotExists(db('assessments').select('id').whereRaw('request_id = assessment_requests.id'))
     .whereNotExists(db('assessment_questions').select('id').whereRaw('request_id = assessment_requests.id'))
-    .delete()
+    .pluck('id')
+  // A delete that finds nothing would lock the gap that parallel first sends insert into.
+  if (givenUp.length > 0) await db('assessment_requests').whereIn('id', givenUp).delete()
   const rows = instrumentIds.map((instrument_id) => ({ proposal_id: proposalId, instrument_id }))
   if (rows.length > 0)
     await db('assessment_requests').insert(rows).onConflict(['proposal_id', 'instrument_id']).ignore()

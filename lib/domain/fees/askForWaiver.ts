@@ -1,4 +1,4 @@
-import { feeOf, insertWaiver, latestWaiver, lockFee } from '@/db/queries/fees'
+import { insertWaiver, latestWaiver, lockFeeOf } from '@/db/queries/fees'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
@@ -14,10 +14,9 @@ export async function askForWaiver(
   input: { reference: string; reason: string },
 ): Promise<{ waiverId: number }> {
   return inTransaction(ctx, async (tx) => {
+    const fee = await lockFeeOf(tx.db, input.reference)
     const contents = await readContents(tx.db, input.reference)
     authorize(mayAskForWaiver(tx.actor, contents))
-    const known = await feeOf(tx.db, contents.id)
-    const fee = known && (await lockFee(tx.db, known.id))
     if (!fee) throw refuse.closed('Nothing is owed for this proposal.')
     const why = whyNotPayable(fee.state)
     if (why) throw refuse.closed(why)

@@ -1,5 +1,5 @@
 import { databaseNow } from '@/db/queries/clock'
-import { feeOf, lockFee } from '@/db/queries/fees'
+import { lockFeeOf } from '@/db/queries/fees'
 import { findPayment, insertPayment, paymentsOf, updatePayment } from '@/db/queries/payments'
 import { findPerson } from '@/db/queries/people'
 import type { PaymentsRow } from '@/db/tables'
@@ -19,10 +19,9 @@ export interface BegunPayment {
 
 /** The attempt to pay a fee that is under way, or a new one; its amount is that of the fee row. */
 export async function beginPayment(tx: ActingContext, reference: string): Promise<BegunPayment> {
+  const fee = await lockFeeOf(tx.db, reference)
   const contents = await readContents(tx.db, reference)
   authorize(mayPayFee(tx.actor, contents))
-  const known = await feeOf(tx.db, contents.id)
-  const fee = known && (await lockFee(tx.db, known.id))
   if (!fee) throw refuse.closed('Nothing is owed for this proposal.')
   const why = whyNotPayable(fee.state)
   if (why) throw refuse.closed(why)

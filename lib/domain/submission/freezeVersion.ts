@@ -29,7 +29,8 @@ export async function freezeVersion(
   const { text, sha256 } = freeze(snapshot)
   const committedAt = await databaseNow(tx.db)
   const versionNumber = await nextVersionNumber(tx.db, contents.id)
-  await supersedeVersions(tx.db, contents.id, committedAt)
+  // Only where there is one: an update that finds no row locks the gap that parallel first sends insert into.
+  if (versionNumber > 1) await supersedeVersions(tx.db, contents.id, committedAt)
   const versionId = await insertVersion(tx.db, {
     ...given,
     proposalId: contents.id,

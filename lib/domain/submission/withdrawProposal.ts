@@ -1,4 +1,5 @@
 import { authorize } from '@/lib/auth/authorize'
+import { log } from '@/lib/log'
 import { paths } from '@/lib/paths'
 import { deadlineOf } from '../calls/rules'
 import type { ActingContext } from '../context'
@@ -45,6 +46,15 @@ export async function withdrawProposal(
     })
     return outcome
   })
-  if (fee === 'refunded') await carryOutRefunds(ctx)
+  if (fee === 'refunded') await tryRefunds(ctx)
   return { fee }
+}
+
+/** The withdrawal stands and its refund is on record: what fails now is done by the job. */
+async function tryRefunds(ctx: ActingContext): Promise<void> {
+  try {
+    await carryOutRefunds(ctx)
+  } catch (error) {
+    log.warn({ requestId: ctx.request.id, error }, 'a refund waits for the job')
+  }
 }
