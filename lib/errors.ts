@@ -19,7 +19,18 @@ export interface StaleDetails {
   theirs: Record<string, unknown>
 }
 
+const mark = Symbol.for('noctuary.refusal')
+
+/**
+ * An expected failure. Recognised by a mark, not by its class: the built server may hold this file in several
+ * bundles, each with a class of its own, and `instanceof` must be true across them.
+ */
 export class Refusal extends Error {
+  static override [Symbol.hasInstance](value: unknown): value is Refusal {
+    return typeof value === 'object' && value !== null && mark in value
+  }
+
+  readonly [mark] = true
   override readonly name = 'Refusal'
   readonly kind: RefusalKind
   readonly fieldErrors: Readonly<Record<string, string>>
