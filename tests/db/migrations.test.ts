@@ -1,28 +1,9 @@
 import { readdirSync } from 'node:fs'
-import { basename } from 'node:path'
-import type { Knex } from 'knex'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { connect, type Database } from '@/db/client'
+import { migrationSettings as settings, steps } from '../support/migrationSource'
 
 // Seen to fail: a `down` that dropped too little, and a table without a comment.
-
-interface Step {
-  name: string
-  up(knex: Knex): Promise<void>
-  down(knex: Knex): Promise<void>
-}
-
-const modules = import.meta.glob<Omit<Step, 'name'>>('../../db/migrations/*.ts', { eager: true })
-const steps: Step[] = Object.entries(modules)
-  .map(([path, step]) => ({ name: basename(path), up: step.up, down: step.down }))
-  .sort((a, b) => a.name.localeCompare(b.name))
-
-const source: Knex.MigrationSource<Step> = {
-  getMigrations: async () => steps,
-  getMigrationName: (step) => step.name,
-  getMigration: async (step) => step,
-}
-const settings = { migrationSource: source, tableName: 'migrations' }
 
 const address = new URL(process.env.DATABASE_URL ?? '')
 const name = `noctuary_migrations_${process.pid}`

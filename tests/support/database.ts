@@ -1,6 +1,7 @@
 import type { Knex } from 'knex'
 import { afterAll, afterEach, beforeEach } from 'vitest'
 import { connect, type Database } from '@/db/client'
+import { checkInvariants } from './invariants'
 
 let pool: Database | null = null
 let current: Knex.Transaction | null = null
@@ -18,18 +19,22 @@ export function pooled(): Database {
   return pool
 }
 
-export function openTransaction(): Knex.Transaction | null {
-  return current
-}
-
-/** Each test of the file runs in a transaction that is rolled back; returns how to reach it. */
+/**
+ * Each test of the file runs in a transaction that is rolled back; what trust promises is checked before that,
+ * whatever the test did. Returns how to reach the transaction.
+ */
 export function useRolledBackDatabase(): () => Database {
   beforeEach(async () => {
     current = await pooled().transaction()
   })
   afterEach(async () => {
-    await current?.rollback().catch(() => undefined)
+    const ended = current
     current = null
+    try {
+      if (ended) await checkInvariants(ended)
+    } finally {
+      await ended?.rollback()
+    }
   })
   afterAll(async () => {
     await pool?.destroy()

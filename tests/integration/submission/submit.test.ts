@@ -8,11 +8,11 @@ import type { Actor } from '@/lib/domain/actor'
 import type { ActingContext } from '@/lib/domain/context'
 import { reopenProposal } from '@/lib/domain/submission/reopenProposal'
 import { freeze } from '@/lib/domain/submission/snapshot'
-import { testContext } from '../support/context'
-import { useRolledBackDatabase } from '../support/database'
-import { memoryStore } from '../support/memoryStore'
-import { makeScenario, type Scenario, type ScenarioOptions } from '../support/scenario'
-import { sendIn } from '../support/sendIn'
+import { testContext } from '../../support/context'
+import { useRolledBackDatabase } from '../../support/database'
+import { memoryStore } from '../../support/memoryStore'
+import { makeScenario, type Scenario, type ScenarioOptions } from '../../support/scenario'
+import { sendIn } from '../../support/sendIn'
 
 const db = useRolledBackDatabase()
 let scenario: Scenario
