@@ -1,6 +1,6 @@
-import { GRAVITATION_SI, MPC_KM, SPEED_OF_LIGHT_KM_S, STEFAN_BOLTZMANN_SI } from '../constants'
 import { createNeutrinos } from './neutrinos'
 import type { CosmologyParameters } from './parameters'
+import { criticalDensityKgM3, photonDensity } from './photons'
 
 /** Densities of a model over the critical density now, as functions of x = ln(1+z). */
 export interface Density {
@@ -24,11 +24,7 @@ export interface Density {
 
 /** Sum of the densities of a model. Ode0 'flat' gives Ok0 exactly 0. */
 export function createDensity(p: CosmologyParameters): Density {
-  const H0PerS = p.H0 / MPC_KM
-  const criticalDensityKgM3 = (3 * H0PerS * H0PerS) / (8 * Math.PI * GRAVITATION_SI)
-  const c = SPEED_OF_LIGHT_KM_S * 1e3
-  const photonsKgM3 = (4 * STEFAN_BOLTZMANN_SI * p.Tcmb0 ** 4) / c ** 3
-  const Ogamma0 = photonsKgM3 / criticalDensityKgM3
+  const Ogamma0 = photonDensity(p.H0, p.Tcmb0)
   const neutrinos = createNeutrinos(p)
   const Onu0 = Ogamma0 * neutrinos.ratio(0)
   const { Om0, w0, wa } = p
@@ -52,7 +48,7 @@ export function createDensity(p: CosmologyParameters): Density {
     Ok0,
     Ogamma0,
     Onu0,
-    criticalDensity0GCm3: criticalDensityKgM3 / 1e3,
+    criticalDensity0GCm3: criticalDensityKgM3(p.H0) / 1e3,
     darkEnergy,
     radiation,
     E2(x, onePlusZ = Math.exp(x)) {

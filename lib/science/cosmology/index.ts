@@ -2,8 +2,17 @@
 export { createCosmology } from './createCosmology'
 export { expansionHistory, type Moment } from './expansionHistory'
 export { findPreset, presetCosmology } from './findPreset'
+export {
+  nearbyDistance,
+  NEARBY_REDSHIFT,
+  USUAL_PECULIAR_KM_S,
+  type NearbyDistance,
+  type NearbyInput,
+} from './nearby'
 export type { CosmologyParameters } from './parameters'
 export { cosmologyPresets, type CosmologyId, type CosmologyPreset } from './presets'
+export { massiveNeutrinoDensity, matterWithoutNeutrinos, type PublishedMatter } from './publishedMatter'
+export { cmbRedshift, heliocentricRedshift, SOLAR_SPEED_KM_S, type SkyPosition } from './solarMotion'
 export type { Cosmology, CosmologyQuantity, InvertibleQuantity } from './types'
 export type { Universe } from './universe'
 export { cosmologyEngineVersion } from './version'

@@ -18,6 +18,8 @@ interface Species {
 /** Energy density of all neutrinos over that of the photons, and its slope, against x = ln(1+z). */
 export interface Neutrinos {
   readonly massive: boolean
+  /** What the species with a mass have of the ratio now. */
+  readonly massiveNow: number
   ratio(x: number): number
   slope(x: number): number
 }
@@ -27,7 +29,7 @@ export function createNeutrinos(p: CosmologyParameters): Neutrinos {
   const masses = p.Tcmb0 > 0 ? p.mNuEv.filter((mass) => mass > 0) : []
   if (masses.length === 0) {
     const constant = MASSLESS_SHARE * p.Neff
-    return { massive: false, ratio: () => constant, slope: () => 0 }
+    return { massive: false, massiveNow: 0, ratio: () => constant, slope: () => 0 }
   }
   const kT = BOLTZMANN_EV_K * p.Tcmb0 * (4 / 11) ** (1 / 3)
   const speciesCount = Math.floor(p.Neff)
@@ -49,6 +51,7 @@ export function createNeutrinos(p: CosmologyParameters): Neutrinos {
   const ratio = createSmoothTable(exact, -0.25, 7.25, 0.25)
   return {
     massive: true,
+    massiveNow: exact(0) - share * massless,
     ratio,
     slope(x) {
       let sum = 0
