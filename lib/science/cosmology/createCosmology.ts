@@ -1,6 +1,6 @@
 import { ARCSEC_RAD, GYR_S, MPC_KM, SPEED_OF_LIGHT_KM_S } from '../constants'
-import { at } from '../numeric/at'
 import { createAntipode } from './antipode'
+import { createBatch, modulusMag } from './batch'
 import { transverseFactor, volumeFactor } from './curvature'
 import { createDensity } from './density'
 import { createInverse } from './inverse'
@@ -29,8 +29,27 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
   const antipode = createAntipode(parameters.name, Ok0, timeline)
   let universe: Universe | null = null
 
-  /** Line-of-sight distance in Hubble units; across the sky it must stay short of the antipode. */
-  const chi = (z: number): number => timeline.distance().read(check.seen(z))
+  const { tables } = timeline
+  // In Hubble units: by the table of the quantity, or more slowly where that has none.
+  const chi = (z: number): number => {
+    const d = tables.distance().read(z)
+    return Number.isNaN(d) ? timeline.distance().read(check.seen(z)) : d
+  }
+  const lookback = (z: number): number => {
+    const t = tables.pastTime().read(z)
+    if (!Number.isNaN(t)) return t
+    const x = check.any(z)
+    return (x >= 0 ? timeline.pastTime() : timeline.futureTime()).read(x)
+  }
+  const ageOf = (z: number): number => {
+    const t = tables.age()?.read(z) ?? NaN
+    if (!Number.isNaN(t)) return t
+    const x = check.any(z)
+    const age = timeline.age()
+    if (age) return age(x)
+    throw new ScienceError('no-beginning', `${parameters.name} has no big bang to count an age from.`)
+  }
+  /** What is seen across the sky must stay short of the antipode. */
   const chiAcross = (z: number): number => antipode.guard(chi(z), z)
   const transverse = (z: number): number => {
     const d = chiAcross(z)
@@ -47,26 +66,17 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     transverseComovingMpc: transverse,
     angularDiameterMpc: (z) => transverse(z) / (1 + z),
     luminosityMpc: luminosity,
-    distanceModulusMag(z) {
-      const d = luminosity(z)
-      if (d > 0) return 5 * Math.log10(d) + 25
-      throw new ScienceError('bad-redshift', 'A distance modulus needs a redshift above 0.')
-    },
-    lookbackGyr(z) {
-      const x = check.any(z)
-      return hubbleTimeGyr * (x >= 0 ? timeline.pastTime() : timeline.futureTime()).read(x)
-    },
-    ageGyr(z) {
-      const x = check.any(z)
-      const age = timeline.age()
-      if (age) return hubbleTimeGyr * age(x)
-      throw new ScienceError('no-beginning', `${parameters.name} has no big bang to count an age from.`)
-    },
+    distanceModulusMag: (z) => modulusMag(luminosity(z)),
+    lookbackGyr: (z) => hubbleTimeGyr * lookback(z),
+    ageGyr: (z) => hubbleTimeGyr * ageOf(z),
     comovingVolumeMpc3(z) {
       const d = chiAcross(z)
-      return 4 * Math.PI * hubbleDistanceMpc ** 3 * d ** 3 * volumeFactor(Ok0 * d * d)
+      return 4 * Math.PI * hubbleDistanceMpc ** 3 * (d * d * d) * volumeFactor(Ok0 * d * d)
     },
-    differentialVolumeMpc3Sr: (z) => (hubbleDistanceMpc * transverse(z) ** 2) / Math.sqrt(E2(z)),
+    differentialVolumeMpc3Sr(z) {
+      const d = transverse(z)
+      return (hubbleDistanceMpc * d * d) / Math.sqrt(E2(z))
+    },
     kpcPerArcsec: (z) => kpcComovingPerArcsec(z) / (1 + z),
     kpcComovingPerArcsec,
     criticalDensityGCm3: (z) => density.criticalDensity0GCm3 * E2(z),
@@ -101,11 +111,17 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
       const d = chiAcross(z2) - chiAcross(z1)
       return (hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)) / (1 + z2)
     },
-    batch(quantity, redshifts, out = new Float64Array(redshifts.length)) {
-      const f = quantities[quantity]
-      for (let i = 0; i < redshifts.length; i += 1) out[i] = f(at(redshifts, i))
-      return out
-    },
+    batch: createBatch({
+      Ok0,
+      hubbleDistanceMpc,
+      hubbleTimeGyr,
+      one: quantities,
+      tables,
+      chi,
+      lookback,
+      age: ageOf,
+      guard: (d, z) => antipode.guard(d, z),
+    }),
     redshiftsAt: createInverse(quantities, timeline, antipode),
   }
 }

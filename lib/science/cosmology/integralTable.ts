@@ -1,4 +1,4 @@
-import { at } from '../numeric/at'
+import { slot } from '../numeric/slot'
 import { chebyshevFit, ORDER } from '../numeric/chebyshevFit'
 
 /**
@@ -64,22 +64,22 @@ export function createIntegralTable(g: (s: number) => number, knots: readonly nu
     read(s) {
       const x = s < low ? low : s > high ? high : s
       let i = last
-      if (x < at(lows, i) || (i + 1 < n && x >= at(lows, i + 1))) {
+      if (x < slot(lows, i) || (i + 1 < n && x >= slot(lows, i + 1))) {
         let upper = n
         i = 0
         while (upper - i > 1) {
           const middle = (i + upper) >> 1
-          if (at(lows, middle) <= x) i = middle
+          if (slot(lows, middle) <= x) i = middle
           else upper = middle
         }
         last = i
       }
-      const offset = x - at(lows, i)
-      const t = offset * at(inverseWidths, i)
+      const offset = x - slot(lows, i)
+      const t = offset * slot(inverseWidths, i)
       const base = i * ORDER
-      let mean = at(means, base + ORDER - 1)
-      for (let j = ORDER - 2; j >= 0; j -= 1) mean = mean * t + at(means, base + j)
-      return at(starts, i) + offset * mean
+      let mean = slot(means, base + ORDER - 1)
+      for (let j = ORDER - 2; j >= 0; j -= 1) mean = mean * t + slot(means, base + j)
+      return slot(starts, i) + offset * mean
     },
   }
 }

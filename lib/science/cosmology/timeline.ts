@@ -1,6 +1,8 @@
 import type { Density } from './density'
 import { createIntegralTable } from './integralTable'
 import { createPath, knotsTo, type Path } from './path'
+import { meansOnPieces, overOnePlusZ, pieceLow, startsOfPieces, valuesOnPieces } from './redshiftPieces'
+import { createRedshiftTable, type RedshiftTable } from './redshiftTable'
 import { DEEPEST_X, findTurn, FURTHEST_X, type Turn } from './turns'
 
 /** How far from a static state a redshift must stay: nearer, time and distance grow without limit. */
@@ -21,6 +23,12 @@ export interface Timeline {
   futureTime(): Path
   /** Time since the big bang over the Hubble time; null where there was none. */
   age(): ((x: number) => number) | null
+  /** The same three by redshift, for z from 0 to some 2000 and away from turns. */
+  readonly tables: {
+    distance(): RedshiftTable
+    pastTime(): RedshiftTable
+    age(): RedshiftTable | null
+  }
 }
 
 /** A value computed when first asked for and kept. */
@@ -54,25 +62,61 @@ export function createTimeline(density: Density): Timeline {
   const futureTurn = once(() => findTurn(density, FURTHEST_X))
   const futureEnd = once(() => endOf(futureTurn(), FURTHEST_X))
   const futureTime = once(() => createPath(density, 0, futureEnd(), futureTurn()?.kind === 'turn'))
+  const distance = once(() => createPath(density, 1, pastEnd, pastTurns))
+  const pastTime = once(() => createPath(density, 0, pastEnd, pastTurns))
+  const age = once(() => createAge(density, pastTurn, futureTime))
   return {
     pastTurn,
     pastEnd,
     futureTurn,
     futureEnd,
-    distance: once(() => createPath(density, 1, pastEnd, pastTurns)),
-    pastTime: once(() => createPath(density, 0, pastEnd, pastTurns)),
+    distance,
+    pastTime,
     futureTime,
+    age,
+    tables: createTables(density, { pastEnd, distance, pastTime, age }),
+  }
+}
+
+function createAge(
+  density: Density,
+  pastTurn: Turn | null,
+  futureTime: () => Path,
+): ((x: number) => number) | null {
+  const before = pastTurn ? null : timeBefore(density)
+  if (before === null) return null
+  // Counted from the early end, so that the small ages of high redshifts keep their relative accuracy.
+  const g = (s: number): number => 1 / Math.sqrt(density.E2(DEEPEST_X - s))
+  const knots = knotsTo(DEEPEST_X)
+    .map((x) => DEEPEST_X - x)
+    .reverse()
+  const table = createIntegralTable(g, knots)
+  const now = before + table.total
+  return (x) => (x >= 0 ? before + table.read(DEEPEST_X - x) : now - futureTime().read(x))
+}
+
+function createTables(
+  density: Density,
+  slow: Pick<Timeline, 'pastEnd' | 'distance' | 'pastTime' | 'age'>,
+): Timeline['tables'] {
+  const end = Math.expm1(slow.pastEnd)
+  const distanceValues = once(() =>
+    valuesOnPieces((z) => 1 / Math.sqrt(density.E2(Math.log1p(z), 1 + z)), end),
+  )
+  const timeMeans = once(() => meansOnPieces(overOnePlusZ(distanceValues())))
+  return {
+    distance: once(() => {
+      const means = meansOnPieces(distanceValues())
+      const start = startsOfPieces(means, end, (z) => slow.distance().read(Math.log1p(z)))
+      return createRedshiftTable(means, start, 1)
+    }),
+    pastTime: once(() => {
+      const start = startsOfPieces(timeMeans(), end, (z) => slow.pastTime().read(Math.log1p(z)))
+      return createRedshiftTable(timeMeans(), start, 1)
+    }),
     age: once(() => {
-      const before = pastTurn ? null : timeBefore(density)
-      if (before === null) return null
-      // Counted from the early end, so that the small ages of high redshifts keep their relative accuracy.
-      const g = (s: number): number => 1 / Math.sqrt(density.E2(DEEPEST_X - s))
-      const knots = knotsTo(DEEPEST_X)
-        .map((x) => DEEPEST_X - x)
-        .reverse()
-      const table = createIntegralTable(g, knots)
-      const now = before + table.total
-      return (x) => (x >= 0 ? before + table.read(DEEPEST_X - x) : now - futureTime().read(x))
+      const age = slow.age()
+      return age && createRedshiftTable(timeMeans(), (i) => age(Math.log1p(pieceLow(i))), -1)
     }),
   }
 }

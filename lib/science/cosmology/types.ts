@@ -2,27 +2,30 @@ import type { CosmologyParameters } from './parameters'
 import type { Universe } from './universe'
 
 /** Quantities that need one redshift and give one number. */
-export type CosmologyQuantity =
-  | 'E'
-  | 'hubbleKmSMpc'
-  | 'comovingMpc'
-  | 'transverseComovingMpc'
-  | 'angularDiameterMpc'
-  | 'luminosityMpc'
-  | 'distanceModulusMag'
-  | 'lookbackGyr'
-  | 'ageGyr'
-  | 'comovingVolumeMpc3'
-  | 'differentialVolumeMpc3Sr'
-  | 'kpcPerArcsec'
-  | 'kpcComovingPerArcsec'
-  | 'criticalDensityGCm3'
-  | 'Om'
-  | 'Ode'
-  | 'Ok'
-  | 'Or'
-  | 'q'
-  | 'dimmingMag'
+export const cosmologyQuantities = [
+  'E',
+  'hubbleKmSMpc',
+  'comovingMpc',
+  'transverseComovingMpc',
+  'angularDiameterMpc',
+  'luminosityMpc',
+  'distanceModulusMag',
+  'lookbackGyr',
+  'ageGyr',
+  'comovingVolumeMpc3',
+  'differentialVolumeMpc3Sr',
+  'kpcPerArcsec',
+  'kpcComovingPerArcsec',
+  'criticalDensityGCm3',
+  'Om',
+  'Ode',
+  'Ok',
+  'Or',
+  'q',
+  'dimmingMag',
+] as const
+
+export type CosmologyQuantity = (typeof cosmologyQuantities)[number]
 
 /** Quantities a redshift can be found from. */
 export type InvertibleQuantity =
@@ -50,7 +53,11 @@ export interface Cosmology extends Readonly<Record<CosmologyQuantity, (z: number
   readonly antipodeRedshift: number | null
   /** Angular-diameter distance of z2 seen from z1, Mpc, any curvature; negative when z2 < z1. */
   angularDiameterBetweenMpc(z1: number, z2: number): number
-  /** A quantity for a whole array; writes into `out` when given and allocates nothing per redshift. */
+  /**
+   * A quantity for a whole array, the same numbers as one by one, at some ten nanoseconds each. Writes into
+   * `out` when given, which must be as long and may be the array of redshifts itself; allocates nothing per
+   * redshift. Throws on the first redshift the quantity does not have; `out` is then left half written.
+   */
   batch(quantity: CosmologyQuantity, redshifts: Float64Array, out?: Float64Array): Float64Array
   /** Every redshift, smallest first, at which a quantity has a value; empty when there is none. */
   redshiftsAt(quantity: InvertibleQuantity, value: number): number[]

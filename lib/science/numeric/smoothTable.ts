@@ -1,4 +1,4 @@
-import { at } from './at'
+import { slot } from './slot'
 import { chebyshevFit, ORDER } from './chebyshevFit'
 
 /**
@@ -23,8 +23,8 @@ export function createSmoothTable(
     const i = Math.floor(s)
     const t = s - i
     const base = i * ORDER
-    let value = at(coefficients, base + ORDER - 1)
-    for (let j = ORDER - 2; j >= 0; j -= 1) value = value * t + at(coefficients, base + j)
+    let value = slot(coefficients, base + ORDER - 1)
+    for (let j = ORDER - 2; j >= 0; j -= 1) value = value * t + slot(coefficients, base + j)
     return value
   }
 }

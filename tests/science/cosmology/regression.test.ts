@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest'
-import { cosmologyPresets, expansionHistory, presetCosmology } from '../../../lib/science/cosmology'
+import {
+  cosmologyPresets,
+  expansionHistory,
+  presetCosmology,
+  cosmologyQuantities,
+} from '../../../lib/science/cosmology'
+import { ScienceError } from '../../../lib/science/ScienceError'
 import { universe } from '../support/models'
 
 describe('regression', () => {
@@ -56,11 +62,60 @@ describe('regression', () => {
     expect(crunch.at(-1)?.scaleFactor).toBeCloseTo(0.01, 9)
   })
 
-  it('a batch gives the same numbers as one at a time, into the array given', () => {
-    const cosmology = presetCosmology('planck-2018')
-    const redshifts = Float64Array.from([0, 5, 0.1, 1100, 0.1])
-    const out = new Float64Array(5)
-    expect(cosmology.batch('luminosityMpc', redshifts, out)).toBe(out)
-    expect([...out]).toEqual([...redshifts].map((z) => cosmology.luminosityMpc(z)))
+  const models = {
+    'flat, massive neutrinos': presetCosmology('planck-2018'),
+    open: presetCosmology('open-30'),
+    closed: universe({ Om0: 0.3, Ode0: 0.9, Tcmb0: 2.7255, Neff: 3.046 }),
+    bounce: universe({ Om0: 0.3, Ode0: 1.75 }),
+    loitering: universe({ Ode0: 1.7 }),
+    'steep dark energy': universe({ Ode0: 'flat', w0: -20, wa: 15 }),
+    recollapsing: universe({ Om0: 2, Ode0: -0.5 }),
+  }
+  it.each(Object.entries(models))(
+    '%s: a batch gives the same numbers as one at a time, bit for bit',
+    (_, c) => {
+      expect.assertions(4 * (c.universe.origin === 'bounce' ? 19 : 20))
+      const farthest = c.antipodeRedshift ?? Math.min(c.deepestRedshift, 3000)
+      // To the very end, over the ends of pieces, out of order.
+      const redshifts = Float64Array.from([
+        1, 0.3, 1e-9, 5e-4, 0.0625, 0.06249999999999999, 0.999, 0.5, 0.01, 0.7,
+      ]).map((share) => share * farthest * (1 - 1e-9))
+      for (const quantity of cosmologyQuantities) {
+        if (quantity === 'ageGyr' && c.universe.origin === 'bounce') continue
+        const out = new Float64Array(redshifts.length)
+        expect(c.batch(quantity, redshifts, out)).toBe(out)
+        expect({ quantity, values: [...out] }).toEqual({
+          quantity,
+          values: [...redshifts].map((z) => c[quantity](z)),
+        })
+        expect({ quantity, values: [...c.batch(quantity, redshifts.slice())] }).toEqual({
+          quantity,
+          values: [...out],
+        })
+        const inPlace = redshifts.slice()
+        expect({ quantity, values: [...c.batch(quantity, inPlace, inPlace)] }).toEqual({
+          quantity,
+          values: [...out],
+        })
+      }
+    },
+  )
+
+  it('a batch refuses what one at a time refuses, and an array of another length', () => {
+    const c = models.bounce
+    for (const bad of [NaN, -1, 2, Infinity, -0.1]) {
+      expect(() => c.batch('luminosityMpc', Float64Array.of(0.1, bad))).toThrow(ScienceError)
+      expect(() => c.luminosityMpc(bad)).toThrow(ScienceError)
+    }
+    expect(() => models.closed.batch('comovingVolumeMpc3', Float64Array.of(0.1, NaN))).toThrow(
+      'must be a number',
+    )
+    expect(() => universe({ Ode0: 1.7 }).batch('luminosityMpc', Float64Array.of(0.1, 2))).toThrow('antipode')
+    expect(() => c.batch('ageGyr', Float64Array.of(0.1))).toThrow('no big bang')
+    expect(() => c.batch('E', Float64Array.of(1, 1), new Float64Array(1))).toThrow('another length')
+    expect([...c.batch('lookbackGyr', Float64Array.of(-0.5, 0.5))]).toEqual([
+      c.lookbackGyr(-0.5),
+      c.lookbackGyr(0.5),
+    ])
   })
 })
