@@ -79,6 +79,24 @@ module.exports = {
           pure,
           '^lib/domain/[^/]+/[a-z][A-Za-z]+(Words|List|View|Schema|Form)\\.ts$',
           '^lib/domain/[^/]+/(categories|limits)\\.ts$',
+          '^lib/domain/tools/yardstick/',
+        ],
+        dependencyTypesNot: ['type-only'],
+      },
+    },
+    {
+      name: 'yardstick-computes-anywhere',
+      severity: 'error',
+      comment:
+        'The same folder runs in the browser and on the server: science, formats, units and pure schemas.',
+      from: { path: '^lib/domain/tools/yardstick/' },
+      to: {
+        path: '^(lib|db|app|components|pdf)/|node_modules/',
+        pathNot: [
+          '^lib/(format|science)/',
+          '^lib/domain/tools/yardstick/',
+          '^lib/domain/proposals/cosmologyForm\\.ts$',
+          'node_modules/(mathjs|zod)/',
         ],
         dependencyTypesNot: ['type-only'],
       },

@@ -29,6 +29,7 @@ const labels = {
   name: 'Name',
   H0: 'H₀',
   Om0: 'Ωm',
+  omCounts: 'Ωm counts',
   Ode0: 'ΩΛ',
   w0: 'w₀',
   wa: 'wₐ',

@@ -1,6 +1,7 @@
 import { z } from 'zod'
-import { cosmologyPresets, findPreset } from '@/lib/science/cosmology'
+import { cosmologyPresets, findPreset, matterWithoutNeutrinos } from '@/lib/science/cosmology'
 import { readNumber } from '@/lib/science/redshift'
+import { ScienceError } from '@/lib/science/ScienceError'
 import { cosmologyProblem } from './cosmologyProblem'
 import type { ChosenCosmology } from './types'
 
@@ -15,6 +16,8 @@ const typed = z.object({
   name: z.string().max(60, 'A name has at most 60 characters.'),
   H0: z.string().max(40),
   Om0: z.string().max(40),
+  /** Whether the matter density typed counts massive neutrinos; the engine's own never does. */
+  omCounts: z.enum(['matter', 'all']).optional(),
   Ode0: z.string().max(40),
   w0: z.string().max(40),
   wa: z.string().max(40),
@@ -52,7 +55,7 @@ function parametersOf(
   const mNuEv = masses.map(readNumber)
   if (mNuEv.some((mass) => mass === null))
     return { field: 'mNuEv', sentence: 'Give the masses in eV, parted by commas: 0, 0, 0.06.' }
-  return {
+  const parameters: ChosenCosmology['parameters'] = {
     name: form.name.trim() || 'Own parameters',
     H0: numbers.H0 ?? 0,
     Om0: numbers.Om0 ?? 0,
@@ -62,6 +65,23 @@ function parametersOf(
     Tcmb0: numbers.Tcmb0 ?? 0,
     Neff: numbers.Neff ?? 0,
     mNuEv: mNuEv.map((mass) => mass ?? 0),
+  }
+  return form.omCounts === 'all' ? withoutNeutrinos(parameters) : parameters
+}
+
+/** The same universe from a matter density that counts its massive neutrinos. */
+function withoutNeutrinos(
+  parameters: ChosenCosmology['parameters'],
+): ChosenCosmology['parameters'] | { field: string; sentence: string } {
+  const { H0, Om0, Tcmb0, Neff, mNuEv } = parameters
+  // A wrong parameter is named by itself, at its own field.
+  if (cosmologyProblem(parameters)) return parameters
+  try {
+    const given = { H0KmSMpc: H0, publishedOm: Om0, Tcmb0K: Tcmb0, Neff, mNuEv }
+    return { ...parameters, Om0: matterWithoutNeutrinos(given) }
+  } catch (error) {
+    if (error instanceof ScienceError) return { field: 'Om0', sentence: error.message }
+    throw error
   }
 }
 

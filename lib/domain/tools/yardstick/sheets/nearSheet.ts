@@ -1,0 +1,127 @@
+import { cmbRedshift, heliocentricRedshift, nearbyDistance, type NearbyInput } from '@/lib/science/cosmology'
+import { ScienceError } from '@/lib/science/ScienceError'
+import type { ReadyUniverse } from '../universes'
+import { redshiftColumn } from './redshiftColumn'
+import { withDecimals, type Sheet, type SheetCell, type SheetColumn } from './sheet'
+
+export type Surroundings = Omit<NearbyInput, 'redshift'>
+
+const frameColumn = (id: string, unit: string, description: string, latex: string): SheetColumn => ({
+  id,
+  head: 'z',
+  unit,
+  fileUnit: '',
+  description,
+  latex,
+  decimals: 5,
+  place: null,
+})
+
+const columnsOf = ({ place, name }: ReadyUniverse): SheetColumn[] => [
+  {
+    id: `luminosityMpc_${place + 1}`,
+    head: 'D',
+    below: 'L',
+    unit: 'Mpc',
+    fileUnit: 'Mpc',
+    description: `luminosity distance (1 + z_hel) D_M(z_cmb) under ${name}`,
+    latex: 'D_\\mathrm{L}',
+    decimals: 1,
+    place,
+  },
+  {
+    id: `luminosityErrorMpc_${place + 1}`,
+    head: '±',
+    unit: 'Mpc',
+    fileUnit: 'Mpc',
+    description: `error of the luminosity distance from own motion under ${name}`,
+    latex: '\\sigma(D_\\mathrm{L})',
+    decimals: 1,
+    place,
+  },
+]
+
+/** The distance, its error and what is left open; a refusal becomes the sentence of every cell. */
+function cellsOf(redshift: number, { cosmology }: ReadyUniverse, around: Surroundings) {
+  try {
+    const near = nearbyDistance(cosmology, { ...around, redshift })
+    const cells: SheetCell[] = [{ value: near.luminosityMpc }, { value: near.luminosityErrorMpc }]
+    return { cells, share: near.errorShare, advice: near.advice }
+  } catch (error) {
+    if (!(error instanceof ScienceError)) throw error
+    const absent = { words: 'no distance', sentence: error.message }
+    const cells: SheetCell[] = [
+      { value: null, absent },
+      { value: null, absent },
+    ]
+    return { cells, share: null, advice: error.message }
+  }
+}
+
+function framesOf(redshift: number, around: Surroundings): [number, number] {
+  return around.frame === 'heliocentric'
+    ? [redshift, cmbRedshift(redshift, around)]
+    : [heliocentricRedshift(redshift, around), redshift]
+}
+
+/** Distances of galaxies near by: both frames, the error from a galaxy's own motion, and when not to trust them. */
+export function nearSheet(
+  redshifts: readonly number[],
+  universes: readonly ReadyUniverse[],
+  around: Surroundings,
+): Sheet {
+  return withDecimals({
+    title: 'Near by',
+    columns: [
+      redshiftColumn(redshifts),
+      frameColumn('z_heliocentric', 'seen from the Sun', 'heliocentric redshift', 'z_\\mathrm{hel}'),
+      frameColumn(
+        'z_cmb',
+        'against the background',
+        'redshift in the frame of the microwave background',
+        'z_\\mathrm{CMB}',
+      ),
+      ...universes.flatMap(columnsOf),
+      {
+        id: 'share',
+        head: 'left open',
+        unit: '% of the distance',
+        fileUnit: '%',
+        description: 'error over distance from own motion',
+        latex: '\\sigma/D',
+        decimals: 1,
+        place: null,
+      },
+      {
+        id: 'trust',
+        head: 'Is it a distance?',
+        fileUnit: '',
+        description: 'whether the redshift can be trusted as a distance',
+        latex: null,
+        decimals: null,
+        place: null,
+        words: true,
+      },
+    ],
+    rows: redshifts.map((z, id) => {
+      const [sun, background] = framesOf(z, around)
+      const under = universes.map((universe) => cellsOf(z, universe, around))
+      const [first] = under
+      const share: SheetCell = { value: typeof first?.share === 'number' ? first.share * 100 : null }
+      const trust: SheetCell = first?.advice
+        ? { value: first.advice, caution: first.advice }
+        : { value: 'yes' }
+      return {
+        id,
+        cells: [
+          { value: z },
+          { value: sun },
+          { value: background },
+          ...under.flatMap(({ cells }) => cells),
+          share,
+          trust,
+        ],
+      }
+    }),
+  })
+}
