@@ -11,7 +11,7 @@ import { log } from '@/lib/log'
 import { paths } from '@/lib/paths'
 import { services } from '@/lib/services/services'
 import { contextFor } from './contextFor'
-import { limitSignIn } from './limits'
+import { forgiveSignIn, limitSignIn } from './limits'
 import { requestFacts } from './requestFacts'
 
 const credentials = z.object({
@@ -40,6 +40,7 @@ export function authOptions(): NextAuthOptions {
           try {
             await limitSignIn(parsed.data.email, request.address)
             const signed = await signIn(contextFor(null, request), parsed.data)
+            await forgiveSignIn(parsed.data.email, request.address)
             return { id: String(signed.personId), sessionId: signed.sessionId }
           } catch (error) {
             // next-auth shows the message to the person, so nothing unexpected may pass.

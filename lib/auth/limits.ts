@@ -25,8 +25,24 @@ export async function spend(name: string, key: string, points: number, seconds: 
   }
 }
 
-/** Five tries a quarter of an hour for an account from one address, thirty for the address: the owner is never locked out. */
+/** Gives back what a try took that turned out well. */
+async function giveBack(name: string, key: string): Promise<void> {
+  await kept.get(name)?.reward(key, 1)
+}
+
+const accountKey = (email: string, address: string) => `${email.toLowerCase()}|${address}`
+
+/**
+ * Five failures a quarter of an hour for an account from one address, thirty for the address: the owner is never
+ * locked out from elsewhere, and whoever knows the password may sign in as often as they like.
+ */
 export async function limitSignIn(email: string, address: string): Promise<void> {
-  await spend('sign-in-account', `${email.toLowerCase()}|${address}`, 5, 15 * minutes)
+  await spend('sign-in-account', accountKey(email, address), 5, 15 * minutes)
   await spend('sign-in-address', address, 30, 15 * minutes)
+}
+
+/** A sign-in went well: it counts against nobody, and earlier slips of this account are forgotten. */
+export async function forgiveSignIn(email: string, address: string): Promise<void> {
+  await kept.get('sign-in-account')?.delete(accountKey(email, address))
+  await giveBack('sign-in-address', address)
 }

@@ -3,6 +3,8 @@ import type { Page } from '@playwright/test'
 import { fillDate } from './support/fillDate'
 import { letter, lettersTo, linkIn } from './support/inbox'
 import { pdfOf, textOf } from './support/pdf'
+import { sentComputation } from './support/sentComputation'
+import { savedAfter } from './support/savedAfter'
 import { expect, test } from './support/test'
 
 /**
@@ -39,13 +41,6 @@ async function typeCell(page: Page, label: string, text: string): Promise<void> 
   const cell = page.getByLabel(label, { exact: true })
   await cell.fill(text)
   await cell.blur()
-}
-
-/** Does something that saves by itself, and waits until the server has answered. */
-async function savedAfter(page: Page, deed: () => Promise<unknown>): Promise<void> {
-  const answered = page.waitForResponse((reply) => reply.request().method() === 'POST')
-  await deed()
-  await answered
 }
 
 test.describe.serial('a whole call', () => {
@@ -173,6 +168,12 @@ test.describe.serial('a whole call', () => {
       expect(text).toContain(comma(object.luminosityMpc, 1))
     }
     for (const glyph of ['σ', 'λ', 'Ω']) expect(text).toContain(glyph)
+
+    const frozen = await sentComputation(reference)
+    expect(frozen.map(({ name }) => name)).toEqual(objects.map(({ name }) => name))
+    for (const [index, object] of objects.entries())
+      for (const quantity of ['luminosityMpc', 'kpcPerArcsec', 'lookbackGyr'] as const)
+        expect(Math.abs((frozen[index]?.[quantity] ?? 0) / object[quantity] - 1)).toBeLessThan(1e-8)
   })
 
   test('the office closes the call, sees who paid, and invites a reviewer who accepts', async ({

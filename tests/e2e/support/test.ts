@@ -1,5 +1,6 @@
 import { AxeBuilder } from '@axe-core/playwright'
 import { expect, test as base, type Page } from '@playwright/test'
+import { brokenPromises } from './promises'
 
 export const password = 'night-after-night'
 
@@ -10,6 +11,8 @@ interface Fixtures {
   checkAccessible: () => Promise<void>
   /** Console errors that the test provokes on purpose; anything else fails it. */
   expectedNoise: RegExp[]
+  /** What trust promises of the data holds after every journey. */
+  promises: void
 }
 
 async function signInOn(page: Page, email: string, secret: string): Promise<void> {
@@ -33,6 +36,13 @@ export const test = base.extend<Fixtures>({
     const unexpected = noise.filter((text) => !expectedNoise.some((shape) => shape.test(text)))
     expect(unexpected, 'console errors').toEqual([])
   },
+  promises: [
+    async ({}, use) => {
+      await use()
+      expect(await brokenPromises(), 'promises of the data').toEqual([])
+    },
+    { auto: true },
+  ],
   signIn: async ({ page }, use) => {
     await use((email, secret = password) => signInOn(page, email, secret))
   },

@@ -2,6 +2,7 @@ import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
 import { BeginForm } from '@/components/proposals/BeginForm'
 import { kindWords } from '@/components/proposals/kindWords'
+import { BarNote } from '@/components/ui/BarNote'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkButton } from '@/components/ui/LinkButton'
@@ -33,6 +34,13 @@ export default async function NewProposalPage({
         lead={only ? `For ${only.title}. It is saved as you type; nobody but you sees it.` : undefined}
       />
       <div className="mt-6 max-w-2xl">
+        {wanted && ofCall.length === 0 && shown.length > 0 ? (
+          <div className="mb-6">
+            <BarNote tone="lamp">
+              The call you came for is not open. A proposal is begun in one that is.
+            </BarNote>
+          </div>
+        ) : null}
         {shown.length === 0 ? (
           <EmptyState
             title="No call is open"
