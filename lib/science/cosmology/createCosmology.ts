@@ -89,6 +89,10 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
       return density.slopeE2(x) / (2 * density.E2(x)) - 1
     },
     dimmingMag: (z) => (10 / Math.LN10) * check.any(z),
+    timeDilation(z) {
+      check.any(z)
+      return 1 + z
+    },
   }
 
   return {
@@ -100,6 +104,9 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     hubbleDistanceMpc,
     hubbleTimeGyr,
     deepestRedshift: Math.expm1(timeline.pastEnd),
+    get furthestRedshift() {
+      return Math.expm1(timeline.futureEnd())
+    },
     get antipodeRedshift() {
       return antipode.redshift()
     },

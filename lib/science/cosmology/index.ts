@@ -16,3 +16,5 @@ export { cmbRedshift, heliocentricRedshift, SOLAR_SPEED_KM_S, type SkyPosition }
 export { cosmologyQuantities, type Cosmology, type CosmologyQuantity, type InvertibleQuantity } from './types'
 export type { Universe } from './universe'
 export { cosmologyEngineVersion } from './version'
+export { disturbStatic, staticUniverse, type StaticUniverse } from './staticUniverse'
+export { surveyVolumeMpc3, type Survey } from './surveyVolume'

@@ -23,6 +23,7 @@ export const cosmologyQuantities = [
   'Or',
   'q',
   'dimmingMag',
+  'timeDilation',
 ] as const
 
 export type CosmologyQuantity = (typeof cosmologyQuantities)[number]
@@ -49,6 +50,8 @@ export interface Cosmology extends Readonly<Record<CosmologyQuantity, (z: number
   readonly universe: Universe
   /** The largest redshift there is, or 10^9, where the engine stops. */
   readonly deepestRedshift: number
+  /** The most negative redshift there is: of greatest size or, where growth goes on, where the engine stops. */
+  readonly furthestRedshift: number
   /** Redshift of the antipode of a closed space, where light from every direction has met; null elsewhere. */
   readonly antipodeRedshift: number | null
   /** Angular-diameter distance of z2 seen from z1, Mpc, any curvature; negative when z2 < z1. */

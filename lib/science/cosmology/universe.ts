@@ -16,6 +16,10 @@ export interface Universe {
   readonly turnaroundRedshift: number | null
   /** Time from now back to the bounce, or on to greatest size. */
   readonly turnaroundGyr: number | null
+  /** From now to greatest size, whatever came before; null where growth goes on. */
+  readonly greatestSizeInGyr: number | null
+  /** Age at greatest size; null without one, or without a beginning. */
+  readonly greatestSizeAgeGyr: number | null
   /** From big bang to big crunch; null unless both happen. */
   readonly recollapseAgeGyr: number | null
   /** From now to the big rip. */
@@ -92,6 +96,8 @@ export function classify(
     ageGyr: ageNow === null ? null : hubbleTimeGyr * ageNow,
     turnaroundRedshift: turn === null ? null : Math.expm1(turn),
     turnaroundGyr: turnTime === null ? null : hubbleTimeGyr * turnTime,
+    greatestSizeInGyr: toGreatest === null ? null : hubbleTimeGyr * toGreatest,
+    greatestSizeAgeGyr: ageNow === null || toGreatest === null ? null : hubbleTimeGyr * (ageNow + toGreatest),
     recollapseAgeGyr:
       ageNow === null || toGreatest === null ? null : 2 * hubbleTimeGyr * (ageNow + toGreatest),
     ripInGyr: rip === null ? null : hubbleTimeGyr * rip,

@@ -74,7 +74,7 @@ describe('regression', () => {
   it.each(Object.entries(models))(
     '%s: a batch gives the same numbers as one at a time, bit for bit',
     (_, c) => {
-      expect.assertions(4 * (c.universe.origin === 'bounce' ? 19 : 20))
+      expect.assertions(4 * (c.universe.origin === 'bounce' ? 20 : 21))
       const farthest = c.antipodeRedshift ?? Math.min(c.deepestRedshift, 3000)
       // To the very end, over the ends of pieces, out of order.
       const redshifts = Float64Array.from([
