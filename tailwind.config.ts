@@ -37,6 +37,8 @@ const config: Config = {
       s2: token('s2'),
       s3: token('s3'),
       s4: token('s4'),
+      s5: token('s5'),
+      s6: token('s6'),
       veil: token('veil'),
       'veil-text': token('veil-text'),
       'moon-dark': token('moon-dark'),

@@ -1,9 +1,11 @@
 'use client'
 
-import { useState } from 'react'
+import { useMemo, useState } from 'react'
 import { LineChartHover } from './LineChartHover'
-import { LineChartPlot, type LineGuide } from './LineChartPlot'
+import type { LineGuide, LineNote, LineUpright } from './LineChartMarks'
+import { LineChartPlot } from './LineChartPlot'
 import { lineChart, type LineSeries } from './geometry/lineChart'
+import { useMeasuredWidth } from './useMeasuredWidth'
 
 export interface LineChartProps {
   /** What screen readers hear: the chart in a sentence. */
@@ -14,10 +16,22 @@ export interface LineChartProps {
   xDomain?: readonly [number, number]
   yDomain?: readonly [number, number]
   log?: boolean
+  /** For x over many decades; its domain must then be given, above 0. */
+  xLog?: boolean
+  /** Where the names stand: at the right of the plot (the default), or inside at their lines. */
+  labels?: 'beside' | 'inside'
+  /** As wide as its place, with type that keeps its size; else it is scaled from 640. */
+  fluid?: boolean
   /** Level lines with words: `wanted: 30`. */
   guides?: readonly LineGuide[]
+  /** Upright lines with words: `now`. */
+  uprights?: readonly LineUpright[]
+  /** Points with words over a stem: where a curve is largest. */
+  notes?: readonly LineNote[]
   /** Values marked on the x axis: the reader's redshifts. */
   marks?: readonly number[]
+  /** What x is called where its value is read: `z`; without it the words of the axis. */
+  xName?: string
   xDecimals?: number
   yDecimals?: number
   /** Told of the x under the pointer, so that a table row can light. */
@@ -25,21 +39,23 @@ export interface LineChartProps {
   height?: number
 }
 
-const width = 640
-const margin = { top: 12, right: 132, bottom: 44, left: 64 }
+const usualWidth = 640
+const roomBeside = 132
 
 /** Lines with their names beside them; the pointer (or the arrow keys) reads values off every line at once. */
 export function LineChart(props: LineChartProps) {
-  const { label, series, xDomain, yDomain, log, height = 320, onPoint, marks = [] } = props
+  const { label, height = 320, labels = 'beside', fluid = false, onPoint, marks = [] } = props
+  const { series, xDomain, yDomain, log, xLog } = props
   const [at, setAt] = useState<number | null>(null)
-  const geometry = lineChart({
-    series,
-    width: width - margin.left - margin.right,
-    height: height - margin.top - margin.bottom,
-    xDomain,
-    yDomain,
-    log,
-  })
+  const { element, width } = useMeasuredWidth<SVGSVGElement>(usualWidth, fluid)
+  const left = width < 420 ? 52 : 64
+  const right = labels === 'beside' ? roomBeside : 10
+  const margin = { top: labels === 'beside' ? 12 : 22, bottom: 44, left, right }
+  const [plotWidth, plotHeight] = [width - left - right, height - margin.top - margin.bottom]
+  const geometry = useMemo(
+    () => lineChart({ series, width: plotWidth, height: plotHeight, xDomain, yDomain, log, xLog, labels }),
+    [series, plotWidth, plotHeight, xDomain, yDomain, log, xLog, labels],
+  )
   const [from = 0, to = 1] = geometry.x.domain()
 
   const point = (x: number | null) => {
@@ -52,6 +68,9 @@ export function LineChart(props: LineChartProps) {
 
   return (
     <svg
+      ref={element}
+      style={fluid ? { height } : undefined}
+      preserveAspectRatio="xMinYMin meet"
       viewBox={`0 0 ${width} ${height}`}
       className="block w-full overflow-visible focus-visible:outline-3 focus-visible:outline-lamp"
       role="img"
@@ -68,7 +87,8 @@ export function LineChart(props: LineChartProps) {
         const step = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0
         if (step === 0) return
         event.preventDefault()
-        point((at ?? from) + (step * (to - from)) / 50)
+        const px = geometry.x(at ?? from) + (step * plotWidth) / 50
+        point(geometry.x.invert(px))
       }}
     >
       <g transform={`translate(${margin.left} ${margin.top})`}>

@@ -1,16 +1,11 @@
-import { formatNumber } from '@/lib/format'
+import { formatNumber, formatSignificant } from '@/lib/format'
+import { LineChartMarks, type LineChartMarksProps } from './LineChartMarks'
 import { seriesDashes } from './geometry/chartTypes'
-import type { LineChartGeometry } from './geometry/lineChart'
+import { LABEL_DROP, LABEL_GAP, type LineChartGeometry } from './geometry/lineChart'
 
-export interface LineGuide {
-  y: number
-  words: string
-}
-
-export interface LineChartPlotProps {
+export interface LineChartPlotProps extends Partial<Omit<LineChartMarksProps, 'geometry'>> {
   geometry: LineChartGeometry
   xLabel: string
-  guides?: readonly LineGuide[]
   marks: readonly number[]
 }
 
@@ -19,13 +14,28 @@ const decimalsOf = (ticks: readonly number[]) => {
   return step >= 1 ? 0 : Math.min(6, Math.ceil(-Math.log10(step)))
 }
 
+const formatTick = (tick: number, decimals: number) =>
+  Math.abs(tick) >= 1e7 ? formatSignificant(tick, 2) : formatNumber(tick, decimals)
+
+/** Decades of a logarithmic axis are not evenly apart: each has its own decimals. */
+function xWords(tick: number, ticks: readonly number[]): string {
+  const [a = 0, b = 0, c = 0] = ticks
+  const decades = ticks.length > 2 && a > 0 && c - b > 2 * (b - a)
+  return decades
+    ? formatTick(tick, Math.max(0, -Math.floor(Math.log10(tick))))
+    : formatTick(tick, decimalsOf(ticks))
+}
+
 /** Grid, axis, lines and their names. */
 export function LineChartPlot({
-  geometry: { x, y, xTicks, yTicks, paths },
+  geometry,
   xLabel,
   guides = [],
+  uprights = [],
+  notes = [],
   marks,
 }: LineChartPlotProps) {
+  const { x, y, xTicks, yTicks, paths } = geometry
   const [, width = 0] = x.range()
   const [height = 0] = y.range()
   return (
@@ -34,7 +44,7 @@ export function LineChartPlot({
         <g key={tick} transform={`translate(0 ${y(tick)})`}>
           <path d={`M0 0H${width}`} stroke="var(--grid)" />
           <text x="-10" dy="4" textAnchor="end" fontSize="12" fill="var(--ink-muted)">
-            {formatNumber(tick, decimalsOf(yTicks))}
+            {formatTick(tick, decimalsOf(yTicks))}
           </text>
         </g>
       ))}
@@ -43,7 +53,7 @@ export function LineChartPlot({
         <g key={tick} transform={`translate(${x(tick)} ${height})`}>
           <path d="M0 0V6" stroke="var(--ink)" />
           <text y="20" textAnchor="middle" fontSize="12" fill="var(--ink-muted)">
-            {formatNumber(tick, decimalsOf(xTicks))}
+            {xWords(tick, xTicks)}
           </text>
         </g>
       ))}
@@ -53,21 +63,7 @@ export function LineChartPlot({
       {marks.map((mark) => (
         <path key={mark} d={`M${x(mark)} ${height}V${height - 7}`} stroke="var(--lamp)" strokeWidth="2" />
       ))}
-      {guides.map((guide) => (
-        <g key={guide.words}>
-          <path d={`M0 ${y(guide.y)}H${width}`} stroke="var(--lamp)" strokeDasharray="4 3.6" />
-          <text
-            x="4"
-            y={y(guide.y) - 5}
-            fontSize="12"
-            fontWeight="600"
-            fill="var(--lamp)"
-            className="ground-halo"
-          >
-            {guide.words}
-          </text>
-        </g>
-      ))}
+      <LineChartMarks geometry={geometry} guides={guides} uprights={uprights} notes={notes} />
       {paths.map((path) => (
         <g key={path.id}>
           <path
@@ -78,8 +74,8 @@ export function LineChartPlot({
             strokeDasharray={seriesDashes[path.tone]}
           />
           <text
-            x={path.label.x + 8}
-            y={path.label.y + 4}
+            x={path.label.x + LABEL_GAP}
+            y={path.label.y + LABEL_DROP}
             fontSize="13"
             fontWeight="600"
             fill={`var(--${path.tone})`}

@@ -47,6 +47,8 @@ const filled: [string, string][] = [
   ['s2', 'ground'],
   ['s3', 'ground'],
   ['s4', 'ground'],
+  ['s5', 'ground'],
+  ['s6', 'ground'],
 ]
 
 describe.each(Object.entries(themes))('theme %s', (name, tokens) => {

@@ -1,4 +1,4 @@
-export type SeriesTone = 's1' | 's2' | 's3' | 's4'
+export type SeriesTone = 's1' | 's2' | 's3' | 's4' | 's5' | 's6'
 
 /** Series are told apart by dash as well as by colour. */
 export const seriesDashes: Record<SeriesTone, string | undefined> = {
@@ -6,4 +6,9 @@ export const seriesDashes: Record<SeriesTone, string | undefined> = {
   s2: '7 3',
   s3: '2 3',
   s4: '11 3 2 3',
+  s5: '16 4',
+  s6: '4 3 1 3 1 3',
 }
+
+/** The tones in the order in which series get them. */
+export const seriesTones = ['s1', 's2', 's3', 's4', 's5', 's6'] as const satisfies readonly SeriesTone[]

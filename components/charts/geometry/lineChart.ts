@@ -1,6 +1,7 @@
 import { scaleLinear, scaleLog, type ScaleContinuousNumeric } from 'd3-scale'
 import { line } from 'd3-shape'
 import type { SeriesTone } from './chartTypes'
+import { placeLabels } from './placeLabels'
 
 export interface LineSeries {
   id: string
@@ -20,6 +21,10 @@ export interface LineChartInput {
   xDomain?: readonly [number, number]
   yDomain?: readonly [number, number]
   log?: boolean
+  /** For x over many decades; its domain must then be given, above 0. */
+  xLog?: boolean
+  /** Where the names stand: at the right of the plot (the default), or inside at their lines. */
+  labels?: 'beside' | 'inside'
 }
 
 export interface LinePath {
@@ -41,6 +46,9 @@ export interface LineChartGeometry {
 }
 
 const labelGap = 16
+/** A name begins this far right of its line's end, and this far below it. */
+export const LABEL_GAP = 8
+export const LABEL_DROP = 4
 
 /** Scales, ticks, paths and label places of a line chart, in the plot's own coordinates. */
 export function lineChart({
@@ -50,11 +58,13 @@ export function lineChart({
   xDomain,
   yDomain,
   log,
+  xLog,
+  labels = 'beside',
 }: LineChartInput): LineChartGeometry {
   const xs = series.flatMap(({ points }) => points.map(([x]) => x))
   const ys = series.flatMap(({ points }) => points.map(([, y]) => y)).filter(Number.isFinite)
   const scale = log ? scaleLog : scaleLinear
-  const x = scaleLinear()
+  const x = (xLog ? scaleLog : scaleLinear)()
     .domain(xDomain ?? [Math.min(0, ...xs), Math.max(...xs)])
     .range([0, width])
   const y = scale()
@@ -76,7 +86,29 @@ export function lineChart({
       label: { x: x(last[0]), y: y(last[1]) },
     }
   })
-  return { x, y, xTicks: x.ticks(7), yTicks: y.ticks(5), paths: spreadLabels(paths, height) }
+  const xTicks = xLog ? decadeTicks(x.domain()) : x.ticks(width < 360 ? 4 : 7)
+  if (labels === 'beside') return { x, y, xTicks, yTicks: y.ticks(5), paths: spreadLabels(paths, height) }
+  const inside = placeLabels(
+    series.map(({ id, name, points }) => ({
+      id,
+      words: name,
+      points: points.filter(([, value]) => Number.isFinite(value)).map(([px, py]) => [x(px), y(py)] as const),
+    })),
+    width,
+    height,
+  )
+  inside.forEach((label, index) => {
+    const path = paths[index]
+    if (path) path.label = { x: label.x - LABEL_GAP, y: label.y - LABEL_DROP }
+  })
+  return { x, y, xTicks, yTicks: y.ticks(5), paths }
+}
+
+/** Whole powers of ten within a domain. */
+function decadeTicks(domain: readonly number[]): number[] {
+  const [from = 1, to = 1] = domain.map(Math.log10)
+  const first = Math.ceil(from - 1e-9)
+  return Array.from({ length: Math.floor(to + 1e-9) - first + 1 }, (_, i) => 10 ** (first + i))
 }
 
 /** Keeps names that would touch apart, moving each as little as the order allows. */

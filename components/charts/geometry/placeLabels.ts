@@ -1,0 +1,81 @@
+export interface LabelledLine {
+  id: string
+  words: string
+  /** In the plot's own pixels, in order of x. */
+  points: readonly (readonly [number, number])[]
+}
+
+export interface PlacedLabel {
+  id: string
+  /** Where the words begin, on their baseline. */
+  x: number
+  y: number
+}
+
+interface Box {
+  left: number
+  right: number
+  top: number
+  bottom: number
+}
+
+const LETTER = 7.1
+const HEIGHT = 15
+/** Shares of a line's length that are tried, its end first. */
+const PLACES = [1, 0.94, 0.88, 0.8, 0.72, 0.64, 0.56, 0.48, 0.4, 0.3, 0.2, 0.1]
+
+const overlaps = (a: Box, b: Box) =>
+  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom
+
+/** How many steps of a line pass through a box. */
+function crossed(points: LabelledLine['points'], box: Box): number {
+  let count = 0
+  for (let i = 1; i < points.length; i += 1) {
+    const [x0, y0] = points[i - 1] as readonly [number, number]
+    const [x1, y1] = points[i] as readonly [number, number]
+    const inX = Math.max(x0, x1) >= box.left && Math.min(x0, x1) <= box.right
+    if (inX && Math.max(y0, y1) >= box.top && Math.min(y0, y1) <= box.bottom) count += 1
+  }
+  return count
+}
+
+function boxesAt([x, y]: readonly [number, number], length: number, width: number): Box[] {
+  const right = Math.min(width, Math.max(length, x + length * 0.3))
+  const left = right - length
+  return [-8, 19, -24, 36].map((shift) => ({
+    left,
+    right,
+    top: y + shift - HEIGHT + 3,
+    bottom: y + shift + 3,
+  }))
+}
+
+/**
+ * A place for the name of every line, as near its end as leaves all lines and names in sight: above or below the
+ * line, where the fewest lines pass under the words. `taken` are boxes of words that already stand there.
+ */
+export function placeLabels(
+  lines: readonly LabelledLine[],
+  width: number,
+  height: number,
+  taken: readonly Box[] = [],
+): PlacedLabel[] {
+  const placed: Box[] = [...taken]
+  return lines.map(({ id, words, points }) => {
+    const length = [...words].length * LETTER
+    let best = { cost: Infinity, box: { left: 0, right: length, top: 0, bottom: HEIGHT } }
+    PLACES.forEach((share, order) => {
+      const point = points[Math.round((points.length - 1) * share)]
+      if (!point) return
+      boxesAt(point, length, width).forEach((box, side) => {
+        const outside = box.top < 0 || box.bottom > height ? 60 : 0
+        const covered = placed.filter((other) => overlaps(box, other)).length * 40
+        const under = lines.reduce((sum, line) => sum + crossed(line.points, box), 0) * 3
+        const cost = outside + covered + under + order * 0.6 + (side > 1 ? 6 : 0)
+        if (cost < best.cost) best = { cost, box }
+      })
+    })
+    placed.push(best.box)
+    return { id, x: best.box.left, y: best.box.bottom - 3 }
+  })
+}
