@@ -1,14 +1,16 @@
 'use client'
 
 import type { RowData } from '@tanstack/react-table'
-import type { ReactNode } from 'react'
+import { useEffect, type ReactNode } from 'react'
 import { TableBody } from './TableBody'
 import { TableFrame } from './TableFrame'
+import type { TableGroup } from './TableGroups'
 import { TableHead } from './TableHead'
 import { TableTools } from './TableTools'
 import { TableTotals } from './TableTotals'
 import type { TableChip, TableColumn } from './tableColumn'
 import { useRows } from './useRows'
+import { useRowWindow } from './useRowWindow'
 import { useTableState } from './useTableState'
 
 export type RowTone = 'attention' | 'feasible' | 'marginal' | 'not-feasible'
@@ -36,6 +38,12 @@ export interface DataTableProps<Row> {
   urlPrefix?: string
   /** On phones: cards (the default over five columns), or sideways scrolling with the first column held. */
   phone?: 'cards' | 'scroll'
+  /** Names over neighbouring columns. */
+  groups?: readonly TableGroup[]
+  /** The one height of its rows, px: a long table is then scrolled in its frame and rendered only where it is seen. */
+  rowHeight?: number
+  /** Told of the rows shown, in their order, so that files hold the same. */
+  onShown?: (rows: readonly Row[]) => void
   /** More at the right of the tools: links, a small button. */
   actions?: ReactNode
 }
@@ -45,6 +53,9 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
   const { caption, columns, rows, rowId, empty, find, chips = [], csv, urlPrefix = '', actions } = props
   const [state, setState] = useTableState(urlPrefix)
   const shown = useRows(rows, columns, chips, state)
+  const { frame, view } = useRowWindow(shown.length, props.rowHeight)
+  const { onShown } = props
+  useEffect(() => onShown?.(shown), [onShown, shown])
   const phone = props.phone ?? (columns.length > 5 ? 'cards' : 'scroll')
   const change = (next: Partial<typeof state>) => void setState(next)
 
@@ -63,9 +74,25 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
         phoneSort={phone === 'cards'}
         actions={actions}
       />
-      <TableFrame caption={caption} phone={phone}>
-        <TableHead columns={columns} sort={state.sort} onSort={(sort) => change({ sort })} />
-        <TableBody {...props} rows={shown} rowId={rowId} onShowAll={() => change({ find: '', show: '' })} />
+      <TableFrame
+        caption={caption}
+        phone={phone}
+        frame={frame}
+        rowCount={view ? shown.length + 1 : undefined}
+      >
+        <TableHead
+          columns={columns}
+          sort={state.sort}
+          onSort={(sort) => change({ sort })}
+          groups={props.groups}
+        />
+        <TableBody
+          {...props}
+          rows={shown}
+          rowId={rowId}
+          view={view}
+          onShowAll={() => change({ find: '', show: '' })}
+        />
         <TableTotals columns={columns} rows={shown} />
       </TableFrame>
     </div>

@@ -3,12 +3,15 @@ import { classNames } from '@/components/ui/classNames'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { DataTableProps } from './DataTable'
 import { TableCell } from './TableCell'
+import type { RowWindow } from './useRowWindow'
 
 export interface TableBodyProps<Row> extends Pick<
   DataTableProps<Row>,
   'columns' | 'rows' | 'rowId' | 'selectedId' | 'tone' | 'detail'
 > {
   onShowAll: () => void
+  /** The part of a long table to render. */
+  view?: RowWindow | null
 }
 
 function FullRow({ span, children, className }: { span: number; children: ReactNode; className?: string }) {
@@ -17,6 +20,15 @@ function FullRow({ span, children, className }: { span: number; children: ReactN
       <td role="cell" colSpan={span}>
         {children}
       </td>
+    </tr>
+  )
+}
+
+/** The room of rows that are not rendered. */
+function Gap({ span, height }: { span: number; height: number }) {
+  return (
+    <tr aria-hidden="true" className="is-gap">
+      <td colSpan={span} style={{ height, padding: 0 }} />
     </tr>
   )
 }
@@ -30,7 +42,9 @@ export function TableBody<Row>({
   tone,
   detail,
   onShowAll,
+  view,
 }: TableBodyProps<Row>) {
+  const part = view ? rows.slice(view.from, view.to) : rows
   return (
     <tbody role="rowgroup">
       {rows.length === 0 ? (
@@ -39,7 +53,8 @@ export function TableBody<Row>({
           <LinkLikeButton onClick={onShowAll}>Show all</LinkLikeButton>
         </FullRow>
       ) : null}
-      {rows.map((row) => {
+      {view && view.above > 0 ? <Gap span={columns.length} height={view.above} /> : null}
+      {part.map((row, index) => {
         const id = rowId(row)
         const selected = id === selectedId
         const rowTone = tone?.(row) ?? null
@@ -49,11 +64,12 @@ export function TableBody<Row>({
           <Fragment key={id}>
             <tr
               role="row"
+              aria-rowindex={view ? view.from + index + 2 : undefined}
               aria-current={selected || undefined}
               className={classNames(marks, more ? 'has-detail' : null)}
             >
-              {columns.map((column, index) => (
-                <TableCell key={column.id} column={column} row={row} first={index === 0} />
+              {columns.map((column, at) => (
+                <TableCell key={column.id} column={column} row={row} first={at === 0} />
               ))}
             </tr>
             {more ? (
@@ -64,6 +80,7 @@ export function TableBody<Row>({
           </Fragment>
         )
       })}
+      {view && view.below > 0 ? <Gap span={columns.length} height={view.below} /> : null}
     </tbody>
   )
 }

@@ -12,6 +12,8 @@ export interface TableCellProps<Row> {
 
 /** One cell. The first of a row is its name: bold, and what a screen reader says before the others. */
 export function TableCell<Row>({ column, row, first }: TableCellProps<Row>) {
+  const span = column.span?.(row) ?? 1
+  if (span === 0) return null
   const value = column.value(row)
   const absent = isAbsent(value) && !column.cell
   const className = classNames(
@@ -30,6 +32,7 @@ export function TableCell<Row>({ column, row, first }: TableCellProps<Row>) {
   return (
     <td
       role="cell"
+      colSpan={span > 1 ? span : undefined}
       data-head={column.unit ? `${column.head}, ${column.unit}` : column.head}
       className={className}
     >

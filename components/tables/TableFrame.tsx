@@ -1,8 +1,12 @@
-import type { ReactNode } from 'react'
+import type { ReactNode, Ref } from 'react'
+import { classNames } from '@/components/ui/classNames'
 
 export interface TableFrameProps {
   caption: string
   phone: 'cards' | 'scroll'
+  /** Set for a long table that scrolls within its frame, its head held: how many rows it has in all. */
+  rowCount?: number
+  frame?: Ref<HTMLDivElement>
   children: ReactNode
 }
 
@@ -10,15 +14,16 @@ export interface TableFrameProps {
  * The table element in a frame that scrolls sideways where it must. The roles are said aloud because cards on phones
  * are made by CSS `display`, which would take a table's own meaning away.
  */
-export function TableFrame({ caption, phone, children }: TableFrameProps) {
+export function TableFrame({ caption, phone, rowCount, frame, children }: TableFrameProps) {
   return (
     <div
-      className="overflow-x-auto focus-visible:-outline-offset-3"
+      ref={frame}
+      className={classNames('focus-visible:-outline-offset-3', rowCount ? 'table-tall' : 'overflow-x-auto')}
       role="region"
       aria-label={`${caption}, scrolls sideways where it is wider than the screen`}
       tabIndex={0}
     >
-      <table role="table" className={`data-table data-table-${phone}`}>
+      <table role="table" aria-rowcount={rowCount} className={`data-table data-table-${phone}`}>
         <caption className="sr-only">{caption}</caption>
         {children}
       </table>

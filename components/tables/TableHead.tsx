@@ -1,11 +1,13 @@
 import { classNames } from '@/components/ui/classNames'
 import { nextSort } from './sortingOf'
 import type { TableColumn } from './tableColumn'
+import { TableGroups, type TableGroup } from './TableGroups'
 
 export interface TableHeadProps<Row> {
   columns: readonly TableColumn<Row>[]
   sort: string
   onSort: (sort: string) => void
+  groups?: readonly TableGroup[]
 }
 
 /** 8 px, pointing the way the values grow. */
@@ -25,9 +27,10 @@ function SortArrow({ down }: { down: boolean }) {
 }
 
 /** The head: words that sort, units under them, aligned with their columns. */
-export function TableHead<Row>({ columns, sort, onSort }: TableHeadProps<Row>) {
+export function TableHead<Row>({ columns, sort, onSort, groups }: TableHeadProps<Row>) {
   return (
     <thead role="rowgroup">
+      {groups ? <TableGroups groups={groups} /> : null}
       <tr role="row">
         {columns.map((column) => {
           const direction =
@@ -38,13 +41,14 @@ export function TableHead<Row>({ columns, sort, onSort }: TableHeadProps<Row>) {
               role="columnheader"
               scope="col"
               aria-sort={column.sortable === false ? undefined : (direction ?? 'none')}
+              style={column.width ? { minWidth: column.width } : undefined}
               className={classNames(column.align === 'right' && 'is-right', column.computed && 'is-computed')}
             >
               {column.sortable === false ? (
-                column.head
+                (column.shownHead ?? column.head)
               ) : (
                 <button type="button" onClick={() => onSort(nextSort(sort, column.id))}>
-                  {column.head}
+                  {column.shownHead ?? column.head}
                   {direction ? <SortArrow down={direction === 'descending'} /> : null}
                 </button>
               )}

@@ -9,12 +9,18 @@ export interface TableColumn<Row> {
   id: string
   /** The head's words; they are the sort button, too. */
   head: string
+  /** How the head looks where plain words are not enough: a letter with an index. */
+  shownHead?: ReactNode
   /** The second line of the head: a unit, or what the column holds. */
   unit?: string
   /** The plain value behind the cell. */
   value: (row: Row) => CellValue
   /** How it looks; without it the value is shown as text. */
   cell?: (row: Row) => ReactNode
+  /** How many columns the cell takes; 0 where the cell before it covers this one. */
+  span?: (row: Row) => number
+  /** Least width, as CSS, for columns that must not move while a long table is scrolled. */
+  width?: string
   /** Numbers stand right, with decimals alike in a column. */
   align?: 'left' | 'right'
   /** False where an order would mean nothing. */

@@ -36,5 +36,6 @@ export function useRows<Row extends RowData>(
     globalFilterFn: (row, columnId, wanted: string) =>
       plainText(row.getValue<CellValue>(columnId)).toLowerCase().includes(wanted.trim().toLowerCase()),
   })
-  return table.getRowModel().rows.map((row) => row.original)
+  const model = table.getRowModel()
+  return useMemo(() => model.rows.map((row) => row.original), [model])
 }
