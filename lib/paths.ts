@@ -51,7 +51,9 @@ export const paths = {
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
   reviewPacket: (assignment: number | string) => `/reviews/${part(String(assignment))}/packet`,
 
-  panel: (callSlug: string, page: PanelPage) => `/panel/${part(callSlug)}/${page}`,
+  /** With the panel where its leader has another in the same call; without it, the first. */
+  panel: (callSlug: string, page: PanelPage, panelId?: number) =>
+    `/panel/${part(callSlug)}/${page}${panelId === undefined ? '' : `?panel=${panelId}`}`,
   panelPacket: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
 

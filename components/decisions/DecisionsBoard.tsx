@@ -3,6 +3,7 @@
 import { useState } from 'react'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { sentenceOf, useDeed } from '@/components/panel/useDeed'
+import { usePanelPath } from '@/components/panel/usePanelPath'
 import { DataTable } from '@/components/tables/DataTable'
 import { BarNote } from '@/components/ui/BarNote'
 import { Button } from '@/components/ui/Button'
@@ -14,7 +15,6 @@ import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import type { DecisionsView } from '@/lib/domain/decisions/readDecisions'
 import { countInWords, formatUtc } from '@/lib/format'
-import { paths } from '@/lib/paths'
 import { useRouter } from 'next/navigation'
 import { decisionColumns } from './decisionColumns'
 import { StatementForm } from './StatementForm'
@@ -29,6 +29,7 @@ export interface DecisionsBoardProps {
 /** Two steps: prepare each decision, then make all of them known at once. */
 export function DecisionsBoard({ view, prepare, save, release }: DecisionsBoardProps) {
   const { busy, deed } = useDeed()
+  const panelPath = usePanelPath(view.callSlug)
   const router = useRouter()
   const [open, setOpen] = useState<number | null>(null)
   const { panelId, rows } = view
@@ -131,7 +132,7 @@ export function DecisionsBoard({ view, prepare, save, release }: DecisionsBoardP
             <EmptyState
               title="Nothing to decide yet"
               actions={
-                <LinkButton look="secondary" href={paths.panel(view.callSlug, 'ranking')}>
+                <LinkButton look="secondary" href={panelPath('ranking')}>
                   Go to the ranking
                 </LinkButton>
               }

@@ -4,12 +4,15 @@ import Link from 'next/link'
 import { usePathname } from 'next/navigation'
 import { classNames } from '@/components/ui/classNames'
 import { currentLink } from './currentLink'
+import { useCarriedLinks } from './useCarriedLinks'
 
 export interface HeaderLink {
   href: string
   label: string
   /** Addresses that count as being here too, when they do not begin with `href`. */
   also?: readonly string[]
+  /** Names in the address that go along, such as which panel is looked at. */
+  carries?: readonly string[]
 }
 
 export interface HeaderNavProps {
@@ -23,15 +26,16 @@ export interface HeaderNavProps {
 /** The links of the head; the current one is bold, with an ink line flush with the rule below. */
 export function HeaderNav({ links, label = 'Main', quiet = false, className }: HeaderNavProps) {
   const pathname = usePathname()
+  const carried = useCarriedLinks(links)
   if (links.length === 0) return null
-  const current = currentLink(links, pathname)
+  const current = currentLink(carried, pathname)
   return (
     <nav aria-label={label} className={className}>
       <ul className="plain-list flex h-full items-stretch gap-7">
-        {links.map((link) => (
+        {carried.map((link) => (
           <li key={link.href} className="flex">
             <Link
-              href={link.href}
+              href={link.to}
               aria-current={link === current ? 'page' : undefined}
               className={classNames(
                 'flex items-center whitespace-nowrap no-underline hover:text-ink',

@@ -6,6 +6,7 @@ import { useEffect, useId, useRef, useState, type ReactNode } from 'react'
 import { classNames } from '@/components/ui/classNames'
 import { currentLink } from './currentLink'
 import type { HeaderLink } from './HeaderNav'
+import { useCarriedLinks } from './useCarriedLinks'
 
 export interface PhoneMenuProps {
   links: readonly HeaderLink[]
@@ -21,7 +22,8 @@ export function PhoneMenu({ links, children }: PhoneMenuProps) {
   const button = useRef<HTMLButtonElement>(null)
   // Moving to another page closes the menu without an effect: it is open only for the page it was opened on.
   const open = openAt === pathname
-  const current = currentLink(links, pathname)
+  const carried = useCarriedLinks(links)
+  const current = currentLink(carried, pathname)
 
   useEffect(() => {
     if (!open) return
@@ -56,10 +58,10 @@ export function PhoneMenu({ links, children }: PhoneMenuProps) {
       >
         <nav aria-label="Menu">
           <ul className="plain-list divide-y divide-rule">
-            {links.map((link) => (
+            {carried.map((link) => (
               <li key={link.href}>
                 <Link
-                  href={link.href}
+                  href={link.to}
                   aria-current={link === current ? 'page' : undefined}
                   className={classNames(
                     'flex min-h-11 items-center no-underline',

@@ -1,6 +1,6 @@
 import type { Actor } from '@/lib/domain/actor'
 import { holds } from '@/lib/domain/actor'
-import { paths } from '@/lib/paths'
+import { paths, type PanelPage } from '@/lib/paths'
 import type { HeaderLink } from './HeaderNav'
 
 export type Area = 'public' | 'investigator' | 'scientist' | 'reviewer' | 'chair' | 'office'
@@ -41,13 +41,18 @@ const officeLinks: readonly HeaderLink[] = [
 ]
 
 function panelLinks(call: string): HeaderLink[] {
+  const link = (page: PanelPage, label: string): HeaderLink => ({
+    href: paths.panel(call, page),
+    label,
+    carries: ['panel'],
+  })
   return [
-    { href: paths.panel(call, 'assignments'), label: 'Assignments' },
-    { href: paths.panel(call, 'progress'), label: 'Progress' },
-    { href: paths.panel(call, 'ranking'), label: 'Ranking' },
-    { href: paths.panel(call, 'discussion'), label: 'Discussion' },
-    { href: paths.panel(call, 'nights'), label: 'Nights' },
-    { href: paths.panel(call, 'decisions'), label: 'Decisions' },
+    link('assignments', 'Assignments'),
+    link('progress', 'Progress'),
+    link('ranking', 'Ranking'),
+    link('discussion', 'Discussion'),
+    link('nights', 'Nights'),
+    link('decisions', 'Decisions'),
   ]
 }
 

@@ -2,6 +2,7 @@
 
 import { useState } from 'react'
 import { useDeed } from '@/components/panel/useDeed'
+import { usePanelPath } from '@/components/panel/usePanelPath'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkButton } from '@/components/ui/LinkButton'
@@ -9,7 +10,6 @@ import { PageTitle } from '@/components/ui/PageTitle'
 import { showToast } from '@/components/ui/showToast'
 import type { NightsView } from '@/lib/domain/decisions/readNights'
 import { countInWords } from '@/lib/format'
-import { paths } from '@/lib/paths'
 import { FacingTable } from './FacingTable'
 import { NightsCsv } from './NightsCsv'
 import type { SaveAwardAction, TakePlanAction } from './nightsActions'
@@ -24,6 +24,7 @@ export interface NightsBoardProps {
 /** The ranking laid into the hours on offer: a suggestion, what is given, and the running total against the offer. */
 export function NightsBoard({ view, save, takePlan }: NightsBoardProps) {
   const { busy, deed } = useDeed()
+  const panelPath = usePanelPath(view.callSlug)
   const [open, setOpen] = useState<number | null>(null)
   const canGive = view.hasRanking && view.phase !== 'decided' && view.phase !== 'archived'
   return (
@@ -35,7 +36,7 @@ export function NightsBoard({ view, save, takePlan }: NightsBoardProps) {
           view.hasRanking ? (
             <>
               <NightsCsv view={view} />
-              <LinkButton href={paths.panel(view.callSlug, 'decisions')}>Go on to decisions</LinkButton>
+              <LinkButton href={panelPath('decisions')}>Go on to decisions</LinkButton>
             </>
           ) : null
         }
@@ -92,7 +93,7 @@ export function NightsBoard({ view, save, takePlan }: NightsBoardProps) {
           <EmptyState
             title="No ranking yet"
             actions={
-              <LinkButton look="secondary" href={paths.panel(view.callSlug, 'ranking')}>
+              <LinkButton look="secondary" href={panelPath('ranking')}>
                 Go to the ranking
               </LinkButton>
             }

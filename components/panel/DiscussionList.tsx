@@ -3,11 +3,18 @@ import { classNames } from '@/components/ui/classNames'
 import type { DiscussionView } from '@/lib/domain/rankings/readDiscussion'
 import { isGrey } from '@/lib/domain/rankings/rules'
 import { formatNumber } from '@/lib/format'
-import { paths } from '@/lib/paths'
+
+export interface DiscussionListProps {
+  view: DiscussionView
+  openId: number
+  /** The panel's page; a proposal is named after it. */
+  address: string
+}
 
 /** The proposals in order, the line through them; one is open beside. */
-export function DiscussionList({ view, openId }: { view: DiscussionView; openId: number }) {
-  const { line, callSlug } = view.ranking
+export function DiscussionList({ view, openId, address }: DiscussionListProps) {
+  const { line } = view.ranking
+  const at = address.includes('?') ? '&' : '?'
   return (
     <nav aria-label="Proposals in order" className="min-w-0">
       <ol className="plain-list text-table rule-open">
@@ -17,7 +24,7 @@ export function DiscussionList({ view, openId }: { view: DiscussionView; openId:
             className={one.rank === line ? 'border-b-2 border-lamp' : 'border-b border-rule'}
           >
             <Link
-              href={`${paths.panel(callSlug, 'discussion')}?proposal=${encodeURIComponent(one.reviewNumber)}`}
+              href={`${address}${at}proposal=${encodeURIComponent(one.reviewNumber)}`}
               aria-current={one.proposalId === openId ? 'true' : undefined}
               className={classNames(
                 'flex items-baseline gap-3 py-2 no-underline hover:bg-wash max-sm:min-h-11',

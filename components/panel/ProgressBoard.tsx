@@ -14,6 +14,7 @@ import { paths } from '@/lib/paths'
 import { ProposalProgress } from './ProposalProgress'
 import { ReviewerProgress } from './ReviewerProgress'
 import { useDeed } from './useDeed'
+import { usePanelPath } from './usePanelPath'
 
 export interface ProgressBoardProps {
   initial: AssignmentsView
@@ -29,6 +30,7 @@ export function ProgressBoard({ initial, remind }: ProgressBoardProps) {
     initialData: initial,
   })
   const { busy, deed } = useDeed()
+  const panelPath = usePanelPath(data.callSlug)
   const all = data.reviewers.reduce((sum, reviewer) => sum + reviewer.proposals, 0)
   const finished = data.reviewers.reduce((sum, reviewer) => sum + reviewer.finished, 0)
   const waiting = data.rows.filter((row) => row.readers.some((reader) => reader.state !== 'finished')).length
@@ -39,7 +41,7 @@ export function ProgressBoard({ initial, remind }: ProgressBoardProps) {
         lead={`Reviews are due on ${formatUtc(new Date(data.reviewsDueAt))}. A late one counts until the panel meets.`}
         actions={
           data.phase === 'review' && finished > 0 ? (
-            <LinkButton href={paths.panel(data.callSlug, 'ranking')}>Go on to the ranking</LinkButton>
+            <LinkButton href={panelPath('ranking')}>Go on to the ranking</LinkButton>
           ) : null
         }
       />

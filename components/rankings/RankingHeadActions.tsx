@@ -1,11 +1,11 @@
 'use client'
 
+import { usePanelPath } from '@/components/panel/usePanelPath'
 import { useTableState } from '@/components/tables/useTableState'
 import { Button } from '@/components/ui/Button'
 import { classNames } from '@/components/ui/classNames'
 import { LinkButton } from '@/components/ui/LinkButton'
 import type { RankingView } from '@/lib/domain/rankings/rankingView'
-import { paths } from '@/lib/paths'
 
 const orders = [
   { sort: '', words: 'raw mean' },
@@ -24,6 +24,7 @@ export interface RankingHeadActionsProps {
 /** The orders to look at, and the next step: begin, freeze, go on to the nights. */
 export function RankingHeadActions({ view, busy, canChange, onStart, onFreeze }: RankingHeadActionsProps) {
   const [{ sort }, setState] = useTableState('')
+  const panelPath = usePanelPath(view.callSlug)
   return (
     <>
       <span className="flex flex-wrap items-baseline gap-4" role="group" aria-label="Order by">
@@ -65,7 +66,7 @@ export function RankingHeadActions({ view, busy, canChange, onStart, onFreeze }:
               Freeze this ranking
             </Button>
           ) : null}
-          <LinkButton href={paths.panel(view.callSlug, 'nights')}>Go on to nights</LinkButton>
+          <LinkButton href={panelPath('nights')}>Go on to nights</LinkButton>
         </>
       )}
     </>

@@ -11,7 +11,12 @@ import { themeFrom } from '@/components/layout/themes'
 // Seen to fail with aria-current left out of HeaderNav, and with the lamp drawn by day, too.
 
 let place = '/proposals/4F7-K2M'
-vi.mock('next/navigation', async (original) => ({ ...(await original<object>()), usePathname: () => place }))
+const query = ''
+vi.mock('next/navigation', async (original) => ({
+  ...(await original<object>()),
+  usePathname: () => place,
+  useSearchParams: () => new URLSearchParams(query),
+}))
 
 const ridge = { latitudeDeg: -37.4, longitudeDeg: -70.2, elevationM: 2390 }
 

@@ -1,12 +1,13 @@
 import { findCall, findCallBySlug } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
-import { lockPanel, panelProposals, seatsHeld, type LedPanel, type PanelProposal } from '@/db/queries/panel'
+import { lockPanel, panelProposals, type LedPanel, type PanelProposal } from '@/db/queries/panel'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { callPhase } from '../calls/rules'
 import type { Call, CallPhase } from '../calls/types'
 import { barredFrom } from '../conflicts/barredPairs'
 import type { ActingContext } from '../context'
+import { ledPanels } from './ledPanels'
 import { canLeadPanel } from './policy'
 
 /** A panel as its leader may see it: proposals in which they have an interest are not in it, nor counted. */
@@ -29,9 +30,7 @@ export type PanelKey = { callSlug: string; panelId?: number } | { panelId: numbe
 export async function openPanel(ctx: ActingContext, key: PanelKey): Promise<PanelDesk> {
   const call = 'lock' in key ? await lockedCall(ctx, key.panelId) : await findCallBySlug(ctx.db, key.callSlug)
   if (!call) throw refuse.notFound('panel')
-  const led = (await seatsHeld(ctx.db, call.id, ctx.actor.personId)).filter(
-    (seat) => canLeadPanel(ctx.actor, { ...seat, callId: call.id }).allowed,
-  )
+  const led = await ledPanels(ctx, call.id)
   const panel = led.find((seat) => key.panelId === undefined || seat.id === key.panelId)
   if (!panel) throw refuse.notFound('panel')
   authorize(canLeadPanel(ctx.actor, { ...panel, callId: call.id }))

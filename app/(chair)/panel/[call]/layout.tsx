@@ -1,5 +1,10 @@
 import type { ReactNode } from 'react'
 import { Chrome } from '@/app/Chrome'
+import { PanelSwitch } from '@/components/panel/PanelSwitch'
+import { contextFor } from '@/lib/auth/contextFor'
+import { readActor } from '@/lib/auth/readActor'
+import { requestFacts } from '@/lib/auth/requestFacts'
+import { readLedPanels } from '@/lib/domain/panels/readLedPanels'
 
 export default async function Layout({
   children,
@@ -8,13 +13,15 @@ export default async function Layout({
   children: ReactNode
   params: Promise<{ call: string }>
 }) {
-  const { call } = await params
+  const [{ call }, actor] = await Promise.all([params, readActor()])
+  const panels = actor ? await readLedPanels(contextFor(actor, await requestFacts()), call) : []
   return (
     <Chrome
       area="chair"
       panelCall={call}
       caution="Proposals come without names. A rank moved by hand is kept in the logbook with who, when and why."
     >
+      <PanelSwitch panels={panels} />
       {children}
     </Chrome>
   )

@@ -1,3 +1,5 @@
+import { panelNumber } from '@/lib/domain/panels/schema'
+
 export interface PanelPageProps {
   params: Promise<{ call: string }>
   searchParams: Promise<Record<string, string | string[] | undefined>>
@@ -9,6 +11,6 @@ export async function panelKey({
   searchParams,
 }: PanelPageProps): Promise<{ callSlug: string; panelId?: number }> {
   const [{ call }, { panel }] = await Promise.all([params, searchParams])
-  const panelId = typeof panel === 'string' && /^[1-9]\d{0,9}$/.test(panel) ? Number(panel) : undefined
-  return { callSlug: call, ...(panelId === undefined ? {} : { panelId }) }
+  const asked = panelNumber.safeParse(panel)
+  return { callSlug: call, ...(asked.success ? { panelId: asked.data } : {}) }
 }

@@ -22,6 +22,7 @@ export default async function AssignmentsPage(props: PanelPageProps) {
   return (
     <Main>
       <AssignmentsBoard
+        key={view.panelId}
         initial={view}
         actions={{
           startReview: startReviewAction,

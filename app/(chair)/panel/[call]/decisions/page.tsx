@@ -15,6 +15,7 @@ export default async function DecisionsPage(props: PanelPageProps) {
   return (
     <Main>
       <DecisionsBoard
+        key={view.panelId}
         view={view}
         prepare={prepareDecisionsAction}
         save={saveStatementAction}

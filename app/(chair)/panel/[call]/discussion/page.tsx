@@ -9,6 +9,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readDiscussion } from '@/lib/domain/rankings/readDiscussion'
 import { countInWords } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { panelKey, type PanelPageProps } from '../panelKey'
 import { saveConsensusAction, setAsideAction } from './actions'
 
@@ -16,7 +17,8 @@ export const metadata: Metadata = { title: 'Discussion' }
 
 export default async function DiscussionPage(props: PanelPageProps) {
   const ctx = await openPage('/panel/[call]/discussion')
-  const view = await orNotFound(readDiscussion(ctx, await panelKey(props)))
+  const key = await panelKey(props)
+  const view = await orNotFound(readDiscussion(ctx, key))
   const { proposal: wanted } = await props.searchParams
   const open =
     view.proposals.find((one) => one.reviewNumber === wanted) ??
@@ -33,7 +35,11 @@ export default async function DiscussionPage(props: PanelPageProps) {
       <SetAsideTail view={view} action={setAsideAction} />
       {open ? (
         <div className="mt-6 grid gap-x-16 gap-y-10 lg:grid-cols-[20rem_minmax(0,1fr)]">
-          <DiscussionList view={view} openId={open.proposalId} />
+          <DiscussionList
+            view={view}
+            openId={open.proposalId}
+            address={paths.panel(key.callSlug, 'discussion', key.panelId)}
+          />
           <DiscussedProposal
             key={`${open.proposalId}-${open.decisionVersion}`}
             proposal={open}

@@ -14,7 +14,7 @@ export default async function ProgressPage(props: PanelPageProps) {
   const view = await orNotFound(readAssignments(ctx, await panelKey(props)))
   return (
     <Main>
-      <ProgressBoard initial={view} remind={remindReviewerAction} />
+      <ProgressBoard key={view.panelId} initial={view} remind={remindReviewerAction} />
     </Main>
   )
 }

@@ -15,6 +15,7 @@ export default async function RankingPage(props: PanelPageProps) {
   return (
     <Main>
       <RankingBoard
+        key={view.panelId}
         initial={view}
         actions={{
           start: startRankingAction,
