@@ -6,7 +6,7 @@ const token = (name: string) => `var(--${name})`
 const config: Config = {
   content: [],
   theme: {
-    screens: { sm: '640px', md: '800px', lg: '1025px', xl: '1180px', '2xl': '1440px' },
+    screens: { sm: '640px', md: '800px', lg: '1025px', xl: '1180px', strip: '1380px', '2xl': '1440px' },
     colors: {
       transparent: 'transparent',
       current: 'currentColor',

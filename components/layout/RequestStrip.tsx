@@ -22,7 +22,7 @@ export function RequestStrip({ cells, saved, history }: RequestStripProps) {
       </dl>
       <div
         className={classNames(
-          'strip-cell flex flex-col justify-center text-tick text-muted sm:pl-5 sm:text-right',
+          'strip-cell flex flex-col justify-center text-tick text-muted sm:pl-5 sm:text-right sm:whitespace-nowrap',
           cells.some((cell) => cell.phoneOnly) && 'max-sm:hidden',
         )}
       >

@@ -39,7 +39,7 @@ export function StripCell({
         )}
       >
         {value}
-        {trailing ? <span className="font-normal text-muted max-xl:hidden"> · {trailing}</span> : null}
+        {trailing ? <span className="font-normal text-muted max-strip:hidden"> · {trailing}</span> : null}
       </dd>
     </div>
   )

@@ -62,7 +62,7 @@ export function ProposalStrip({ read }: { read: ReadProposal }) {
             label: 'Fee',
             value: (
               <>
-                {fee.amount} <span className="font-normal text-muted max-xl:hidden">{fee.standing}</span>
+                {fee.amount} <span className="font-normal text-muted max-strip:hidden">{fee.standing}</span>
               </>
             ),
           },

@@ -2,6 +2,10 @@ import type { CallPhase } from '../calls/types'
 
 export type Outcome = 'awarded' | 'reserve' | 'declined'
 
+/** A state that is an outcome: the decision has been made known. */
+export const isOutcome = (state: string): state is Outcome =>
+  ['awarded', 'reserve', 'declined'].includes(state)
+
 /** What given lines make of a proposal: any hour given is an award, hours in reserve alone are reserve, none is declined. */
 export function outcomeOf(lines: readonly { seconds: number; isReserve: boolean }[]): Outcome {
   const some = lines.filter((line) => line.seconds > 0)

@@ -3,6 +3,7 @@ import { ProposalSectionLinks } from '@/components/proposals/ProposalSectionLink
 import { ProposalStrip } from '@/components/proposals/ProposalStrip'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
+import { isOutcome } from '@/lib/domain/decisions/rules'
 import { proposalOf } from './proposalOf'
 
 /** Request strip and section links around every page of a proposal. */
@@ -18,7 +19,7 @@ export default async function ProposalLayout({
   return (
     <>
       <ProposalStrip read={read} />
-      <ProposalSectionLinks reference={read.contents.reference} />
+      <ProposalSectionLinks reference={read.contents.reference} isDecided={isOutcome(read.contents.state)} />
       {children}
     </>
   )

@@ -38,6 +38,7 @@ export default async function SendPage({ params }: Props) {
             <Sending read={read} isTestMode={ctx.payments.isTestMode} />
             {read.isIn ? null : (
               <WhatSendingDoes
+                reference={contents.reference}
                 engine={formatEngine(computation.engineVersion)}
                 deadline={read.deadline}
                 feeDueAt={read.due?.dueAt ?? null}
