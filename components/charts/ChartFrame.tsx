@@ -14,13 +14,16 @@ export interface ChartFrameProps {
   numbers: Numbers
   /** The name of the file, without its ending. */
   fileName: string
+  /** Shorter words for the links, where plots stand side by side. */
+  brief?: boolean
   children: ReactNode
 }
 
 /** A chart with its numbers one press away, as a table and as a file. */
-export function ChartFrame({ title, note, numbers, fileName, children }: ChartFrameProps) {
+export function ChartFrame({ title, note, numbers, fileName, brief, children }: ChartFrameProps) {
   const id = useId()
   const [open, setOpen] = useState(false)
+  const words = open ? 'Hide the table' : 'These numbers as a table'
   const save = () =>
     saveText(
       `${fileName}.csv`,
@@ -35,8 +38,13 @@ export function ChartFrame({ title, note, numbers, fileName, children }: ChartFr
         <span className="text-caption font-semibold">{title}</span>
         <span className="flex flex-wrap items-baseline gap-x-3 text-table text-muted" data-no-print>
           {note ? <span>{note}</span> : null}
-          <LinkLikeButton aria-expanded={open} aria-controls={id} onClick={() => setOpen(!open)}>
-            {open ? 'Hide the table' : 'These numbers as a table'}
+          <LinkLikeButton
+            aria-label={brief ? `${words}: ${title ?? numbers.caption}` : undefined}
+            aria-expanded={open}
+            aria-controls={id}
+            onClick={() => setOpen(!open)}
+          >
+            {brief ? (open ? 'Hide' : 'Table') : words}
           </LinkLikeButton>
           <LinkLikeButton onClick={save}>CSV</LinkLikeButton>
         </span>

@@ -42,19 +42,33 @@ export interface LineChartProps {
 const usualWidth = 640
 const roomBeside = 132
 
+/** Words that stand on a plot whatever its lines do. */
+function standingWords(
+  notes: LineChartProps['notes'] = [],
+  uprights: LineChartProps['uprights'] = [],
+  yDomain: LineChartProps['yDomain'],
+) {
+  return [
+    ...notes.map(({ x, y, words }) => ({ x, y, text: words, dy: -18 })),
+    ...uprights.map(({ x, words }) => ({ x, y: yDomain?.[0] ?? 0, text: words, dy: -10 })),
+  ]
+}
+
 /** Lines with their names beside them; the pointer (or the arrow keys) reads values off every line at once. */
 export function LineChart(props: LineChartProps) {
   const { label, height = 320, labels = 'beside', fluid = false, onPoint, marks = [] } = props
-  const { series, xDomain, yDomain, log, xLog } = props
+  const { series, xDomain, yDomain, log, xLog, notes, uprights } = props
   const [at, setAt] = useState<number | null>(null)
   const { element, width } = useMeasuredWidth<SVGSVGElement>(usualWidth, fluid)
   const left = width < 420 ? 52 : 64
   const right = labels === 'beside' ? roomBeside : 10
-  const margin = { top: labels === 'beside' ? 12 : 22, bottom: 44, left, right }
+  const margin = { top: labels === 'beside' ? 12 : props.notes?.length ? 36 : 22, bottom: 44, left, right }
   const [plotWidth, plotHeight] = [width - left - right, height - margin.top - margin.bottom]
+  const words = useMemo(() => standingWords(notes, uprights, yDomain), [notes, uprights, yDomain])
   const geometry = useMemo(
-    () => lineChart({ series, width: plotWidth, height: plotHeight, xDomain, yDomain, log, xLog, labels }),
-    [series, plotWidth, plotHeight, xDomain, yDomain, log, xLog, labels],
+    () =>
+      lineChart({ series, width: plotWidth, height: plotHeight, xDomain, yDomain, log, xLog, labels, words }),
+    [series, plotWidth, plotHeight, xDomain, yDomain, log, xLog, labels, words],
   )
   const [from = 0, to = 1] = geometry.x.domain()
 

@@ -14,6 +14,8 @@ export interface LineNote {
   x: number
   y: number
   words: string
+  /** What stands there where the words have no room. */
+  short?: string
 }
 
 export interface LineChartMarksProps {
@@ -22,6 +24,9 @@ export interface LineChartMarksProps {
   uprights: readonly LineUpright[]
   notes: readonly LineNote[]
 }
+
+/** Width of a letter at 12 px. */
+const LETTER = 6.3
 
 /** What is pointed out on a plot, under its lines: levels and uprights in lamp, stems in ink. */
 export function LineChartMarks({ geometry: { x, y }, guides, uprights, notes }: LineChartMarksProps) {
@@ -60,7 +65,9 @@ export function LineChartMarks({ geometry: { x, y }, guides, uprights, notes }: 
         </g>
       ))}
       {notes.map((note) => {
-        const left = x(note.x) > width * 0.6
+        const words =
+          note.words.length * LETTER > width - x(note.x) - 12 ? (note.short ?? note.words) : note.words
+        const left = x(note.x) + words.length * LETTER > width
         return (
           <g key={note.words} transform={`translate(${x(note.x)} ${y(note.y)})`}>
             <path d="M0 -4V-26" stroke="var(--ink-muted)" />
@@ -72,7 +79,7 @@ export function LineChartMarks({ geometry: { x, y }, guides, uprights, notes }: 
               fill="var(--ink)"
               className="ground-halo"
             >
-              {note.words}
+              {words}
             </text>
           </g>
         )

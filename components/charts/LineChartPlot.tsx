@@ -64,9 +64,11 @@ export function LineChartPlot({
         <path key={mark} d={`M${x(mark)} ${height}V${height - 7}`} stroke="var(--lamp)" strokeWidth="2" />
       ))}
       <LineChartMarks geometry={geometry} guides={guides} uprights={uprights} notes={notes} />
+      {/* Powers may differ in their last bit between server and browser: a tenth of a pixel, redrawn in a moment. */}
       {paths.map((path) => (
         <g key={path.id}>
           <path
+            suppressHydrationWarning
             d={path.d}
             fill="none"
             stroke={`var(--${path.tone})`}
@@ -74,6 +76,7 @@ export function LineChartPlot({
             strokeDasharray={seriesDashes[path.tone]}
           />
           <text
+            suppressHydrationWarning
             x={path.label.x + LABEL_GAP}
             y={path.label.y + LABEL_DROP}
             fontSize="13"

@@ -7,7 +7,7 @@ export interface FieldFrameProps {
   label: ReactNode
   help?: ReactNode
   helpId: string
-  error?: string
+  error?: ReactNode
   errorId: string
   optional?: boolean
   muted?: boolean
@@ -43,7 +43,9 @@ export function FieldFrame({
     </>
   )
   return (
-    <Frame className={classNames('m-0 min-w-0 border-0 p-0', error && 'border-l-4 border-not-feasible pl-3')}>
+    <Frame
+      className={classNames('m-0 min-w-0 border-0 p-0', error ? 'border-l-4 border-not-feasible pl-3' : null)}
+    >
       {Frame === 'fieldset' ? (
         <legend className={classNames(labelClass, 'p-0')}>{words}</legend>
       ) : (

@@ -24,11 +24,14 @@ export interface ComputedNumberProps {
   second?: ComputedRow
   /** Where the formula is printed, the engine and its accuracy. */
   source: ReactNode
+  /** Made because it was just asked for. */
+  initiallyOpen?: boolean
 }
 
 /** A number that opens to its formula, inputs, second opinion and source. */
-export function ComputedNumber({ shown, value, what, formula, inputs, second, source }: ComputedNumberProps) {
-  const [open, setOpen] = useState(false)
+export function ComputedNumber(props: ComputedNumberProps) {
+  const { shown, value, what, formula, inputs, second, source, initiallyOpen = false } = props
+  const [open, setOpen] = useState(initiallyOpen)
   const trigger = (
     <button
       type="button"
@@ -42,7 +45,12 @@ export function ComputedNumber({ shown, value, what, formula, inputs, second, so
     </button>
   )
   return (
-    <Popover trigger={trigger} label={`How ${what} was computed`} onOpenChange={setOpen}>
+    <Popover
+      trigger={trigger}
+      label={`How ${what} was computed`}
+      initiallyOpen={initiallyOpen}
+      onOpenChange={setOpen}
+    >
       <div className="flex items-baseline justify-between gap-4">
         <strong className="text-body font-semibold">{value}</strong>
         <span className="text-caption text-muted">{what}</span>

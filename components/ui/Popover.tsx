@@ -8,14 +8,15 @@ export interface PopoverProps {
   trigger: ReactNode
   /** Names the floating panel for screen readers. */
   label: string
+  initiallyOpen?: boolean
   onOpenChange?: (open: boolean) => void
   children: ReactNode
 }
 
 /** A floating panel of 376 px, 10 px under what opened it; Escape closes it and gives the focus back. */
-export function Popover({ trigger, label, onOpenChange, children }: PopoverProps) {
+export function Popover({ trigger, label, initiallyOpen, onOpenChange, children }: PopoverProps) {
   return (
-    <Radix.Root onOpenChange={onOpenChange}>
+    <Radix.Root defaultOpen={initiallyOpen} onOpenChange={onOpenChange}>
       <Radix.Trigger asChild>{trigger}</Radix.Trigger>
       <Radix.Portal>
         <Radix.Content

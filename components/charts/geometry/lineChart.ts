@@ -1,7 +1,7 @@
 import { scaleLinear, scaleLog, type ScaleContinuousNumeric } from 'd3-scale'
 import { line } from 'd3-shape'
 import type { SeriesTone } from './chartTypes'
-import { placeLabels } from './placeLabels'
+import { placeLabels, wordBox } from './placeLabels'
 
 export interface LineSeries {
   id: string
@@ -25,6 +25,8 @@ export interface LineChartInput {
   xLog?: boolean
   /** Where the names stand: at the right of the plot (the default), or inside at their lines. */
   labels?: 'beside' | 'inside'
+  /** Words that stand on the plot already: names inside keep clear of them. `dy` from their point to their baseline. */
+  words?: readonly { x: number; y: number; text: string; dy: number }[]
 }
 
 export interface LinePath {
@@ -60,6 +62,7 @@ export function lineChart({
   log,
   xLog,
   labels = 'beside',
+  words = [],
 }: LineChartInput): LineChartGeometry {
   const xs = series.flatMap(({ points }) => points.map(([x]) => x))
   const ys = series.flatMap(({ points }) => points.map(([, y]) => y)).filter(Number.isFinite)
@@ -96,6 +99,7 @@ export function lineChart({
     })),
     width,
     height,
+    words.map(({ x: at, y: level, text, dy }) => wordBox(x(at), y(level) + dy, text, width)),
   )
   inside.forEach((label, index) => {
     const path = paths[index]

@@ -12,7 +12,7 @@ export interface PlacedLabel {
   y: number
 }
 
-interface Box {
+export interface Box {
   left: number
   right: number
   top: number
@@ -21,8 +21,17 @@ interface Box {
 
 const LETTER = 7.1
 const HEIGHT = 15
+/** Left free beside words, px. */
+const CLEAR = 4
 /** Shares of a line's length that are tried, its end first. */
 const PLACES = [1, 0.94, 0.88, 0.8, 0.72, 0.64, 0.56, 0.48, 0.4, 0.3, 0.2, 0.1]
+
+/** The box of small words beginning at a point, moved left where they would leave the plot. */
+export function wordBox(x: number, baseline: number, text: string, width: number): Box {
+  const length = [...text].length * 6.3 + 6
+  const left = Math.max(0, Math.min(x, width - length))
+  return { left, right: left + length, top: baseline - HEIGHT, bottom: baseline + 4 }
+}
 
 const overlaps = (a: Box, b: Box) =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom
@@ -33,21 +42,29 @@ function crossed(points: LabelledLine['points'], box: Box): number {
   for (let i = 1; i < points.length; i += 1) {
     const [x0, y0] = points[i - 1] as readonly [number, number]
     const [x1, y1] = points[i] as readonly [number, number]
-    const inX = Math.max(x0, x1) >= box.left && Math.min(x0, x1) <= box.right
-    if (inX && Math.max(y0, y1) >= box.top && Math.min(y0, y1) <= box.bottom) count += 1
+    const inX = Math.max(x0, x1) >= box.left - CLEAR && Math.min(x0, x1) <= box.right + CLEAR
+    if (inX && Math.max(y0, y1) >= box.top && Math.min(y0, y1) <= box.bottom + 1) count += 1
   }
   return count
 }
 
+/** Places for words at a point: above and below it, at its left and right, then a line further off. */
 function boxesAt([x, y]: readonly [number, number], length: number, width: number): Box[] {
   const right = Math.min(width, Math.max(length, x + length * 0.3))
-  const left = right - length
-  return [-8, 19, -24, 36].map((shift) => ({
+  const box = (left: number, baseline: number): Box => ({
     left,
-    right,
-    top: y + shift - HEIGHT + 3,
-    bottom: y + shift + 3,
-  }))
+    right: left + length,
+    top: baseline - HEIGHT + 3,
+    bottom: baseline + 3,
+  })
+  return [
+    box(right - length, y - 8),
+    box(right - length, y + 19),
+    box(Math.max(0, x - length - 9), y + 4),
+    box(Math.min(width - length, x + 9), y + 4),
+    box(right - length, y - 24),
+    box(right - length, y + 36),
+  ]
 }
 
 /**
@@ -71,7 +88,7 @@ export function placeLabels(
         const outside = box.top < 0 || box.bottom > height ? 60 : 0
         const covered = placed.filter((other) => overlaps(box, other)).length * 40
         const under = lines.reduce((sum, line) => sum + crossed(line.points, box), 0) * 3
-        const cost = outside + covered + under + order * 0.6 + (side > 1 ? 6 : 0)
+        const cost = outside + covered + under + order * 0.6 + (side > 3 ? 6 : side > 1 ? 1 : 0)
         if (cost < best.cost) best = { cost, box }
       })
     })

@@ -1,7 +1,5 @@
 import { z } from 'zod'
-import { cosmologyPresets } from '@/lib/science/cosmology'
 import { parseMagnitude } from '@/lib/science/magnitude'
-import { parseRedshift } from '@/lib/science/redshift'
 import { parseDeclination, parseRightAscension } from '@/lib/science/sky'
 
 type Read = (text: string) => { ok: true } | { ok: false; message: string }
@@ -27,32 +25,6 @@ const numberBetween = (what: string, low: number, high: number) =>
       return Number.isNaN(value) || (value >= low && value <= high)
     }, `${what} lies between ${low} and ${high}.`)
 
-const presetId = z
-  .string()
-  .refine((id) => cosmologyPresets.some((preset) => preset.id === id), 'Choose a cosmology.')
-
-/** Redshifts one a line, and up to three cosmologies. */
-export const yardstickSchema = z.object({
-  z: z
-    .string()
-    .max(20_000, 'That is more than the page holds.')
-    .superRefine((text, context) => {
-      const lines = text.split(/[\s,;]+/).filter(Boolean)
-      if (lines.length === 0) context.addIssue({ code: 'custom', message: 'Give a redshift, one a line.' })
-      if (lines.length > 1000)
-        context.addIssue({ code: 'custom', message: 'At most 1,000 redshifts at once.' })
-      for (const line of lines.slice(0, 1000)) {
-        const answer = parseRedshift(line)
-        if (answer.ok) continue
-        context.addIssue({ code: 'custom', message: `${line}: ${answer.message}` })
-        break
-      }
-    }),
-  first: presetId,
-  second: z.union([z.literal(''), presetId]),
-  third: z.union([z.literal(''), presetId]),
-})
-
 export const seasonSchema = z.object({
   ra: readable(parseRightAscension),
   dec: readable(parseDeclination),
@@ -68,6 +40,5 @@ export const exposureSchema = z.object({
   seeing: numberBetween('An image quality', 0.3, 4),
 })
 
-export type YardstickInput = z.input<typeof yardstickSchema>
 export type SeasonInput = z.input<typeof seasonSchema>
 export type ExposureInput = z.input<typeof exposureSchema>

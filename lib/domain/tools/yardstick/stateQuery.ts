@@ -9,6 +9,22 @@ export type Query = Record<string, string | string[] | undefined>
 /** Beyond this servers and mail programs cut addresses. */
 const LONGEST_LINK = 12_000
 
+/** Every key of the address that belongs to the state. */
+export const stateKeys = [
+  'mode',
+  'z',
+  'c',
+  'q',
+  'draw',
+  'ref',
+  'frame',
+  'ra',
+  'dec',
+  'motion',
+  'from',
+  'values',
+]
+
 export const invertible = [
   'lookbackGyr',
   'ageGyr',

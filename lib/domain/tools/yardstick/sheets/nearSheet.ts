@@ -6,16 +6,20 @@ import { withDecimals, type Sheet, type SheetCell, type SheetColumn } from './sh
 
 export type Surroundings = Omit<NearbyInput, 'redshift'>
 
-const frameColumn = (id: string, unit: string, description: string, latex: string): SheetColumn => ({
-  id,
-  head: 'z',
-  unit,
-  fileUnit: '',
-  description,
-  latex,
-  decimals: 5,
-  place: null,
-})
+const frames = {
+  heliocentric: {
+    id: 'z_heliocentric',
+    unit: 'seen from the Sun',
+    description: 'heliocentric redshift',
+    latex: 'z_\\mathrm{hel}',
+  },
+  cmb: {
+    id: 'z_cmb',
+    unit: 'against the background',
+    description: 'redshift in the frame of the microwave background',
+    latex: 'z_\\mathrm{CMB}',
+  },
+} as const
 
 const columnsOf = ({ place, name }: ReadyUniverse): SheetColumn[] => [
   {
@@ -58,11 +62,8 @@ function cellsOf(redshift: number, { cosmology }: ReadyUniverse, around: Surroun
   }
 }
 
-function framesOf(redshift: number, around: Surroundings): [number, number] {
-  return around.frame === 'heliocentric'
-    ? [redshift, cmbRedshift(redshift, around)]
-    : [heliocentricRedshift(redshift, around), redshift]
-}
+const inOtherFrame = (redshift: number, around: Surroundings): number =>
+  around.frame === 'heliocentric' ? cmbRedshift(redshift, around) : heliocentricRedshift(redshift, around)
 
 /** Distances of galaxies near by: both frames, the error from a galaxy's own motion, and when not to trust them. */
 export function nearSheet(
@@ -70,17 +71,12 @@ export function nearSheet(
   universes: readonly ReadyUniverse[],
   around: Surroundings,
 ): Sheet {
+  const other = around.frame === 'cmb' ? 'heliocentric' : 'cmb'
   return withDecimals({
     title: 'Near by',
     columns: [
-      redshiftColumn(redshifts),
-      frameColumn('z_heliocentric', 'seen from the Sun', 'heliocentric redshift', 'z_\\mathrm{hel}'),
-      frameColumn(
-        'z_cmb',
-        'against the background',
-        'redshift in the frame of the microwave background',
-        'z_\\mathrm{CMB}',
-      ),
+      { ...redshiftColumn(redshifts), ...frames[around.frame] },
+      { head: 'z', fileUnit: '', decimals: 5, place: null, ...frames[other] },
       ...universes.flatMap(columnsOf),
       {
         id: 'share',
@@ -94,7 +90,7 @@ export function nearSheet(
       },
       {
         id: 'trust',
-        head: 'Is it a distance?',
+        head: 'a distance?',
         fileUnit: '',
         description: 'whether the redshift can be trusted as a distance',
         latex: null,
@@ -104,19 +100,17 @@ export function nearSheet(
       },
     ],
     rows: redshifts.map((z, id) => {
-      const [sun, background] = framesOf(z, around)
       const under = universes.map((universe) => cellsOf(z, universe, around))
       const [first] = under
       const share: SheetCell = { value: typeof first?.share === 'number' ? first.share * 100 : null }
       const trust: SheetCell = first?.advice
-        ? { value: first.advice, caution: first.advice }
+        ? { value: first.advice, shown: 'no: measure it', caution: first.advice }
         : { value: 'yes' }
       return {
         id,
         cells: [
           { value: z },
-          { value: sun },
-          { value: background },
+          { value: inOtherFrame(z, around) },
           ...under.flatMap(({ cells }) => cells),
           share,
           trust,

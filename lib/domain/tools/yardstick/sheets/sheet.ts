@@ -31,6 +31,8 @@ export interface SheetCell {
   value: number | string | null
   /** Why there is no value: a few words for the cell, and the sentence behind them. */
   absent?: { words: string; sentence: string }
+  /** What the cell shows where that is shorter than its value. */
+  shown?: string
   /** A note the reader should not miss: the row wants attention. */
   caution?: string
 }

@@ -1,0 +1,73 @@
+'use client'
+
+import { useCallback, useMemo, useRef, type ReactNode } from 'react'
+import { DataTable } from '@/components/tables/DataTable'
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import { groupsOf } from '@/lib/domain/tools/yardstick/sheets/groupsOf'
+import type { Sheet, SheetRow } from '@/lib/domain/tools/yardstick/sheets/sheet'
+import type { ReadyUniverse } from '@/lib/domain/tools/yardstick/universes'
+import { ExportBar } from './ExportBar'
+import { sheetColumns } from './sheetColumns'
+import { toneOf } from './toneOf'
+
+export interface NumbersProps {
+  sheet: Sheet
+  universes: readonly ReadyUniverse[]
+  /** The redshift pointed at in a plot: its row lights. */
+  pointed: number | null
+  linkable: boolean
+  /** Before the exports: the choice of columns. */
+  tools?: ReactNode
+}
+
+const ROW_PX = 36
+
+/** The table of every mode, in column groups a cosmology, with its files. */
+export function Numbers({ sheet, universes, pointed, linkable, tools }: NumbersProps) {
+  const columns = useMemo(() => sheetColumns(sheet, universes), [sheet, universes])
+  const groups = useMemo(
+    () =>
+      groupsOf(sheet.columns, universes).map(({ place, name, span }) =>
+        place === null ? { name: '', span } : { name, span, tone: toneOf(place) },
+      ),
+    [sheet, universes],
+  )
+  const shown = useRef<readonly SheetRow[]>(sheet.rows)
+  const onShown = useCallback((rows: readonly SheetRow[]) => {
+    shown.current = rows
+  }, [])
+  return (
+    <section className="mt-12">
+      <SectionHeading
+        title={sheet.title === 'Distances, times and sizes' ? 'The numbers' : sheet.title}
+        aside={
+          <span className="flex flex-wrap items-baseline gap-x-6 gap-y-1" data-no-print>
+            {tools}
+            <ExportBar
+              sheet={() => ({ ...sheet, rows: [...shown.current] })}
+              universes={universes}
+              linkable={linkable}
+            />
+          </span>
+        }
+      />
+      <div className="table-figures mt-3">
+        <DataTable
+          caption={sheet.title}
+          columns={columns}
+          rows={sheet.rows}
+          rowId={(row) => String(row.id)}
+          tone={({ cells }) =>
+            (pointed !== null && cells[0]?.value === pointed) || cells.some(({ caution }) => caution)
+              ? 'attention'
+              : null
+          }
+          groups={groups.some((group) => 'tone' in group) ? groups : undefined}
+          rowHeight={ROW_PX}
+          onShown={onShown}
+          phone="scroll"
+        />
+      </div>
+    </section>
+  )
+}

@@ -1,0 +1,51 @@
+'use client'
+
+import type { YardstickState } from '@/lib/domain/tools/yardstick/state'
+import type { YardstickView } from '@/lib/domain/tools/yardstick/viewOf'
+import { CompareNotes } from './CompareNotes'
+import { ModePlots } from './ModePlots'
+import { NearNotes } from './NearNotes'
+import { NearPlots } from './NearPlots'
+import { UniverseLedger } from './UniverseLedger'
+
+export interface RightColumnProps {
+  view: YardstickView
+  /** The redshift under the pointer, for which a comparison is said. */
+  pointed: number | null
+  onChange: (next: Partial<YardstickState>) => void
+  onPoint: (z: number | null) => void
+}
+
+/** What kind of universes they are, then what a mode has to say, then the plots. */
+export function RightColumn({ view, pointed, onChange, onPoint }: RightColumnProps) {
+  const { state, ready, reference, redshifts, near, around, sheet } = view
+  const { mode } = state
+  const furthest = redshifts.reduce((most, z) => Math.max(most, z), 0)
+  return (
+    <>
+      <UniverseLedger universes={view.universes} redshifts={redshifts} />
+      {mode === 'compare' && reference && redshifts.length > 0 ? (
+        <CompareNotes
+          universes={ready}
+          reference={reference}
+          z={pointed !== null && redshifts.includes(pointed) ? pointed : furthest}
+        />
+      ) : null}
+      {mode === 'near' && sheet && near?.motionKmS ? (
+        <NearNotes sheet={sheet} motionKmS={near.motionKmS} />
+      ) : null}
+      {mode === 'near' && around && reference ? (
+        <NearPlots
+          universes={ready}
+          reference={reference}
+          around={around}
+          redshifts={redshifts}
+          onPoint={onPoint}
+        />
+      ) : null}
+      {mode !== 'near' && reference ? (
+        <ModePlots view={view} reference={reference} onChange={onChange} onPoint={onPoint} />
+      ) : null}
+    </>
+  )
+}
