@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { ScienceError } from '@/lib/science/ScienceError'
 import { cosmologyEngineVersion, type Cosmology } from '@/lib/science/cosmology'
-import { eachOrRefused } from './asRefused'
+import { asRefused, eachOrRefused } from './asRefused'
 import { cosmologyInput, universeOf } from './cosmologySchema'
 import { mostRedshifts, requireAtMost } from './limits'
 
@@ -43,6 +43,9 @@ function rowOf(c: Cosmology, z: number) {
     Ode: c.Ode(z),
     Ok: c.Ok(z),
     q: c.q(z),
+    Or: c.Or(z),
+    kpcComovingPerArcsec: c.kpcComovingPerArcsec(z),
+    dimmingMag: c.dimmingMag(z),
   }
 }
 
@@ -66,7 +69,7 @@ export function computeCosmology(input: CosmologyRequest) {
   return {
     engine: cosmologyEngineVersion,
     cosmology: describeCosmology(universe),
-    universe: universe.universe,
+    universe: asRefused('cosmology', () => universe.universe),
     rows,
     pairs,
   }

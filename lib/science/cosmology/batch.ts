@@ -1,6 +1,7 @@
 import { ARCSEC_RAD } from '../constants'
 import { slot } from '../numeric/slot'
 import { ScienceError } from '../ScienceError'
+import { finite } from './finite'
 import { transverseFactor, volumeFactor } from './curvature'
 import type { Timeline } from './timeline'
 import type { CosmologyQuantity } from './types'
@@ -74,14 +75,14 @@ export function createBatch(
       const whole = 4 * Math.PI * dH ** 3
       for (let i = 0; i < out.length; i += 1) {
         const d = Ok0 < 0 ? source.guard(slot(out, i), slot(z, i)) : slot(out, i)
-        out[i] = whole * (d * d * d) * volumeFactor(Ok0 * d * d)
+        out[i] = finite(whole * (d * d * d) * volumeFactor(Ok0 * d * d))
       }
     },
     differentialVolumeMpc3Sr(z, out) {
       across(z, out)
       for (let i = 0; i < out.length; i += 1) {
         const d = slot(out, i)
-        out[i] = (dH * d * d) / one.E(slot(z, i))
+        out[i] = finite((dH * d * d) / one.E(slot(z, i)))
       }
     },
     lookbackGyr(z, out) {

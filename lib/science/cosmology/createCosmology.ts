@@ -1,6 +1,7 @@
 import { ARCSEC_RAD, GYR_S, MPC_KM, SPEED_OF_LIGHT_KM_S } from '../constants'
 import { createAntipode } from './antipode'
 import { createBatch, modulusMag } from './batch'
+import { finite } from './finite'
 import { transverseFactor, volumeFactor } from './curvature'
 import { createDensity } from './density'
 import { createInverse } from './inverse'
@@ -56,12 +57,12 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     return hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)
   }
   const luminosity = (z: number): number => (1 + z) * transverse(z)
-  const E2 = (z: number): number => density.E2(check.any(z), 1 + z)
+  const E2 = (z: number): number => finite(density.E2(check.any(z), 1 + z))
   const kpcComovingPerArcsec = (z: number): number => transverse(z) * ARCSEC_RAD * 1e3
 
   const quantities: Record<CosmologyQuantity, (z: number) => number> = {
     E: (z) => Math.sqrt(E2(z)),
-    hubbleKmSMpc: (z) => parameters.H0 * Math.sqrt(E2(z)),
+    hubbleKmSMpc: (z) => finite(parameters.H0 * Math.sqrt(E2(z))),
     comovingMpc: (z) => hubbleDistanceMpc * chi(z),
     transverseComovingMpc: transverse,
     angularDiameterMpc: (z) => transverse(z) / (1 + z),
@@ -71,22 +72,22 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     ageGyr: (z) => hubbleTimeGyr * ageOf(z),
     comovingVolumeMpc3(z) {
       const d = chiAcross(z)
-      return 4 * Math.PI * hubbleDistanceMpc ** 3 * (d * d * d) * volumeFactor(Ok0 * d * d)
+      return finite(4 * Math.PI * hubbleDistanceMpc ** 3 * (d * d * d) * volumeFactor(Ok0 * d * d))
     },
     differentialVolumeMpc3Sr(z) {
       const d = transverse(z)
-      return (hubbleDistanceMpc * d * d) / Math.sqrt(E2(z))
+      return finite((hubbleDistanceMpc * d * d) / Math.sqrt(E2(z)))
     },
     kpcPerArcsec: (z) => kpcComovingPerArcsec(z) / (1 + z),
     kpcComovingPerArcsec,
-    criticalDensityGCm3: (z) => density.criticalDensity0GCm3 * E2(z),
+    criticalDensityGCm3: (z) => finite(density.criticalDensity0GCm3 * E2(z)),
     Om: (z) => (Om0 * (1 + z) ** 3) / E2(z),
     Ode: (z) => density.darkEnergy(check.any(z)) / E2(z),
     Ok: (z) => (Ok0 * (1 + z) ** 2) / E2(z),
     Or: (z) => density.radiation(check.any(z)) / E2(z),
     q(z) {
       const x = check.any(z)
-      return density.slopeE2(x) / (2 * density.E2(x)) - 1
+      return finite(density.slopeE2(x)) / (2 * finite(density.E2(x))) - 1
     },
     dimmingMag: (z) => (10 / Math.LN10) * check.any(z),
     timeDilation(z) {

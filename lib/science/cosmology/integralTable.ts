@@ -1,5 +1,6 @@
 import { slot } from '../numeric/slot'
 import { chebyshevFit, ORDER } from '../numeric/chebyshevFit'
+import { ScienceError } from '../ScienceError'
 
 /**
  * A running integral F(s) = integral of g from the table's low end to s, ready to be read many times.
@@ -30,7 +31,7 @@ interface Piece {
 function collect(g: (s: number) => number, low: number, high: number, depth: number): Piece[] {
   const { coefficients, tail, largest } = chebyshevFit(g, low, high)
   if (!Number.isFinite(largest))
-    throw new RangeError(`The integrand is not finite between ${low} and ${high}`)
+    throw new ScienceError('bad-parameter', 'These parameters are too extreme to compute with.')
   if (tail <= CONVERGED * largest || depth >= DEEPEST) {
     // Integral of sum b_j t^j over [0, t] is t times sum b_j/(j+1) t^j: the mean of g, times t.
     return [{ low, width: high - low, mean: coefficients.map((b, j) => b / (j + 1)) }]

@@ -28,6 +28,8 @@ interface Range {
   readonly high: number
   readonly lowAllowed: boolean
   readonly sentence: string
+  /** Said of a number above the range, where the sentence is about its low end. */
+  readonly tooLarge?: string
 }
 
 const ranges = {
@@ -36,8 +38,15 @@ const ranges = {
     high: 1e6,
     lowAllowed: false,
     sentence: 'The Hubble constant H₀ must be above 0 km/s/Mpc.',
+    tooLarge: 'The Hubble constant H₀ must be at most 1 000 000 km/s/Mpc.',
   },
-  Om0: { low: 0, high: 1e3, lowAllowed: true, sentence: 'The matter density Ωm must be 0 or more.' },
+  Om0: {
+    low: 0,
+    high: 1e3,
+    lowAllowed: true,
+    sentence: 'The matter density Ωm must be 0 or more.',
+    tooLarge: 'The matter density Ωm must be at most 1000.',
+  },
   w0: { low: -20, high: 20, lowAllowed: true, sentence: 'w₀ must lie between −20 and 20.' },
   wa: { low: -20, high: 20, lowAllowed: true, sentence: 'wₐ must lie between −20 and 20.' },
   Tcmb0: {
@@ -56,7 +65,8 @@ const ranges = {
 
 function check(value: number, range: Range): void {
   const aboveLow = range.lowAllowed ? value >= range.low : value > range.low
-  if (!(aboveLow && value <= range.high)) throw new ScienceError('bad-parameter', range.sentence)
+  if (aboveLow && value <= range.high) return
+  throw new ScienceError('bad-parameter', (value > range.high && range.tooLarge) || range.sentence)
 }
 
 /** Throws a ScienceError with a sentence on the first parameter that no universe can have. */
@@ -72,6 +82,10 @@ export function checkParameters(p: CosmologyParameters): void {
   check(p.w0, ranges.w0)
   check(p.wa, ranges.wa)
   check(p.Tcmb0, ranges.Tcmb0)
+  // Colder, the masses of neutrinos over their temperature run out of numbers.
+  if (p.Tcmb0 > 0 && p.Tcmb0 < 1e-3) {
+    throw new ScienceError('bad-parameter', 'The background temperature must be 0, or 0.001 K or more.')
+  }
   check(p.Neff, ranges.Neff)
   if (p.mNuEv.some((mass) => !(mass >= 0 && mass <= 1e3))) {
     throw new ScienceError('bad-parameter', 'A neutrino mass must lie between 0 and 1000 eV.')

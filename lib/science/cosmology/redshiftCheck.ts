@@ -1,8 +1,15 @@
 import { ScienceError } from '../ScienceError'
 import type { Timeline } from './timeline'
 
-/** A redshift as it is said: 3 significant figures, no trailing zeros beyond two decimals. */
+const superscript = (n: number): string =>
+  String(n).replace(/\d/g, (digit) => '⁰¹²³⁴⁵⁶⁷⁸⁹'.charAt(Number(digit)))
+
+/** A redshift as it is said: two decimals, or as many digits as its size asks for. */
 export function sayRedshift(z: number): string {
+  if (z >= 1e6) {
+    const [mantissa, exponent] = z.toExponential(1).split('e')
+    return `${mantissa} × 10${superscript(Number(exponent))}`
+  }
   const digits = Math.abs(z) >= 100 ? z.toFixed(0) : Math.abs(z) >= 0.1 ? z.toFixed(2) : z.toPrecision(2)
   return digits.replace('-', '−')
 }
@@ -20,6 +27,7 @@ export function createRedshiftCheck(name: string, timeline: Timeline): RedshiftC
   const deepest = Math.expm1(pastEnd)
 
   function refusePast(z: number): never {
+    if (z === Infinity) throw new ScienceError('bad-redshift', 'A redshift must be a finite number.')
     const asked = sayRedshift(z)
     if (pastTurn?.kind === 'turn') {
       throw new ScienceError(

@@ -31,12 +31,20 @@ export interface Timeline {
   }
 }
 
-/** A value computed when first asked for and kept. */
+/** A value computed when first asked for and kept; so is a refusal, which would cost as much again each time. */
 function once<T>(make: () => T): () => T {
-  let kept: { value: T } | null = null
+  let kept: (() => T) | null = null
   return () => {
-    kept ??= { value: make() }
-    return kept.value
+    if (kept) return kept()
+    try {
+      const value = make()
+      kept = () => value
+    } catch (error) {
+      kept = () => {
+        throw error
+      }
+    }
+    return kept()
   }
 }
 
