@@ -1,10 +1,13 @@
 'use client'
 
+import { useQueryClient } from '@tanstack/react-query'
+import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { sentenceOf, useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
 import { DataTable } from '@/components/tables/DataTable'
+import { useTableQuery } from '@/components/tables/useTableQuery'
 import { BarNote } from '@/components/ui/BarNote'
 import { Button } from '@/components/ui/Button'
 import { ConfirmTyped } from '@/components/ui/ConfirmTyped'
@@ -13,21 +16,28 @@ import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
-import type { DecisionsView } from '@/lib/domain/decisions/readDecisions'
+import { decisionsView, type DecisionsView } from '@/lib/domain/decisions/decisionsView'
 import { countInWords, formatUtc } from '@/lib/format'
-import { useRouter } from 'next/navigation'
+import { paths } from '@/lib/paths'
 import { decisionColumns } from './decisionColumns'
 import { StatementForm } from './StatementForm'
 
 export interface DecisionsBoardProps {
-  view: DecisionsView
+  initial: DecisionsView
   prepare: (input: { panelId: number }) => Promise<ActionResult<{ prepared: number }>>
   save: SaveStatementAction
   release: (input: { panelId: number; typed: string }) => Promise<ActionResult<{ released: number }>>
 }
 
 /** Two steps: prepare each decision, then make all of them known at once. */
-export function DecisionsBoard({ view, prepare, save, release }: DecisionsBoardProps) {
+export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoardProps) {
+  const { data: view = initial } = useTableQuery({
+    key: ['panel', 'decisions', initial.panelId],
+    url: `${paths.api.table('panel-decisions')}?call=${initial.callSlug}&panel=${initial.panelId}`,
+    schema: decisionsView,
+    initialData: initial,
+  })
+  const client = useQueryClient()
   const { busy, deed } = useDeed()
   const panelPath = usePanelPath(view.callSlug)
   const router = useRouter()
@@ -44,6 +54,7 @@ export function DecisionsBoard({ view, prepare, save, release }: DecisionsBoardP
     showToast(
       `${countInWords(result.data.released, 'decision is', 'decisions are', true)} known; letters are on their way`,
     )
+    await client.invalidateQueries({ queryKey: ['panel'] })
     router.refresh()
     return null
   }

@@ -1,6 +1,6 @@
 'use client'
 
-import { useRouter } from 'next/navigation'
+import { useQueryClient } from '@tanstack/react-query'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextAreaField } from '@/components/forms/TextAreaField'
@@ -8,7 +8,7 @@ import { useActionForm } from '@/components/forms/useActionForm'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
-import type { DecisionRow } from '@/lib/domain/decisions/readDecisions'
+import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { statementSchema } from '@/lib/domain/decisions/schema'
 
 export interface StatementFormProps {
@@ -21,7 +21,7 @@ export interface StatementFormProps {
 
 /** What the panel says to the investigators, edited until it is made known. */
 export function StatementForm({ row, panelId, canEdit, action, onLeave }: StatementFormProps) {
-  const router = useRouter()
+  const client = useQueryClient()
   const form = useActionForm({
     schema: statementSchema,
     action,
@@ -33,7 +33,7 @@ export function StatementForm({ row, panelId, canEdit, action, onLeave }: Statem
     },
     onDone: () => {
       showToast(`The statement on ${row.reviewNumber} is kept`)
-      router.refresh()
+      void client.invalidateQueries({ queryKey: ['panel'] })
       onLeave()
     },
   })

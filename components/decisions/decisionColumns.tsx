@@ -1,6 +1,6 @@
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
-import type { DecisionRow } from '@/lib/domain/decisions/readDecisions'
+import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { formatNumber } from '@/lib/format'
 import { OutcomeMark } from './OutcomeMark'
 

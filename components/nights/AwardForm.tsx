@@ -1,12 +1,12 @@
 'use client'
 
-import { useRouter } from 'next/navigation'
+import { useQueryClient } from '@tanstack/react-query'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
-import type { NightsRow, NightsView } from '@/lib/domain/decisions/readNights'
+import type { NightsRow, NightsView } from '@/lib/domain/decisions/nightsView'
 import { awardSchema } from '@/lib/domain/decisions/schema'
 import { AwardLine } from './AwardLine'
 import type { SaveAwardAction } from './nightsActions'
@@ -23,7 +23,7 @@ const typed = (seconds: number) => (seconds === 0 ? '' : String(Math.round((seco
 
 /** Gives one proposal its hours, line by line: whole, part or none, with conditions, in reserve or not. */
 export function AwardForm({ row, view, save, onSaved, onLeave }: AwardFormProps) {
-  const router = useRouter()
+  const client = useQueryClient()
   const form = useActionForm({
     schema: awardSchema,
     action: save,
@@ -41,7 +41,7 @@ export function AwardForm({ row, view, save, onSaved, onLeave }: AwardFormProps)
     },
     onDone: () => {
       showToast(`The hours of ${row.reviewNumber} are kept`)
-      router.refresh()
+      void client.invalidateQueries({ queryKey: ['panel'] })
       onSaved()
     },
   })

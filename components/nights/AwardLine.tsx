@@ -5,7 +5,7 @@ import { NumberField } from '@/components/forms/NumberField'
 import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
 import { Button } from '@/components/ui/Button'
-import type { NightsLine, NightsView } from '@/lib/domain/decisions/readNights'
+import type { NightsLine, NightsView } from '@/lib/domain/decisions/nightsView'
 import { formatHoursFromSeconds } from '@/lib/format'
 
 export interface AwardLineProps {

@@ -1,7 +1,7 @@
 import { HoursBar } from '@/components/charts/HoursBar'
 import { linkClasses } from '@/components/ui/linkClasses'
-import type { NightsLine, NightsRow } from '@/lib/domain/decisions/readNights'
-import { hoursOf, whyNotInWords } from './nightsWords'
+import type { NightsLine, NightsRow } from '@/lib/domain/decisions/nightsView'
+import { hoursOf, termsInWords, whyNotInWords } from './nightsWords'
 
 export interface FacingRowProps {
   row: NightsRow
@@ -11,7 +11,17 @@ export interface FacingRowProps {
   onOpen: (() => void) | null
 }
 
-const isPart = (seconds: number, line: NightsLine) => seconds > 0 && seconds < line.wholeSeconds
+const barPx = 150
+const lineClasses =
+  'flex flex-wrap items-center gap-x-3 max-sm:justify-between max-sm:text-right max-sm:[&_svg]:hidden'
+
+/** On phones the sides lie under each other and say which they are. */
+const Side = ({ children }: { children: string }) => <span className="text-muted sm:hidden">{children}</span>
+
+function Hours({ line, seconds }: { line: NightsLine; seconds: number }) {
+  const isPart = seconds > 0 && seconds < line.wholeSeconds
+  return <span className={isPart ? 'text-marginal' : undefined}>{hoursOf(line, seconds)}</span>
+}
 
 /** One proposal: what is suggested at the left, what is given at the right, a bar for each instrument. */
 export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: FacingRowProps) {
@@ -23,28 +33,26 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
       maxHours={mostHours}
       side={side}
       tone={line.telescopeId === firstTelescope ? 's1' : 's3'}
-      width={150}
+      width={barPx}
     />
   )
-  const words = (line: NightsLine, seconds: number) => (
-    <span className={isPart(seconds, line) ? 'text-marginal' : undefined}>{hoursOf(line, seconds)}</span>
-  )
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] items-center gap-x-6 py-1.5 text-table max-sm:grid-cols-1 max-sm:gap-y-1">
-      <div className="flex flex-col items-end gap-0.5 max-sm:items-start">
+    <div role="row" className="facing-grid items-center py-1.5 text-table max-sm:py-3">
+      <div role="cell">
         {row.lines.map((line) => (
-          <span key={line.instrumentId} className="inline-flex flex-wrap items-center justify-end gap-3">
+          <div key={line.instrumentId} className={`${lineClasses} justify-end`}>
+            <Side>{`Suggested, ${line.instrument}`}</Side>
             {line.suggestedSeconds > 0 ? (
-              words(line, line.suggestedSeconds)
+              <Hours line={line} seconds={line.suggestedSeconds} />
             ) : (
-              <span className="text-muted">{whyNotInWords(line)}</span>
+              <span className="text-muted max-sm:ml-auto">{whyNotInWords(line)}</span>
             )}
-            <span className="max-sm:hidden">{bar(line, line.suggestedSeconds, 'left')}</span>
-          </span>
+            {bar(line, line.suggestedSeconds, 'left')}
+          </div>
         ))}
       </div>
-      <div className="flex w-56 items-baseline gap-3 max-sm:order-first max-sm:w-auto">
-        <span className="w-6 shrink-0 text-right text-muted">{row.rank}</span>
+      <div role="rowheader" className="flex items-baseline gap-3 max-sm:order-first">
+        <span className="w-6 shrink-0 text-right text-muted max-sm:w-5">{row.rank}</span>
         {onOpen ? (
           <button
             type="button"
@@ -57,29 +65,27 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
         ) : (
           <span className="shrink-0 font-semibold">{row.reviewNumber}</span>
         )}
-        <span className="truncate text-muted" title={row.title}>
-          {row.title}
-        </span>
+        <span className="text-muted">{row.title}</span>
       </div>
-      <div className="flex flex-col items-start gap-0.5">
+      <div role="cell">
         {row.lines.map((line) => (
-          <span key={line.instrumentId} className="inline-flex flex-wrap items-center gap-3">
+          <div key={line.instrumentId} className={lineClasses}>
             {bar(line, line.givenSeconds, 'right')}
+            <Side>{`Given, ${line.instrument}`}</Side>
             {line.givenSeconds > 0 ? (
-              <span>
-                {words(line, line.givenSeconds)}
+              <span className="max-sm:ml-auto">
+                <Hours line={line} seconds={line.givenSeconds} />
                 <span className="text-muted">
-                  {' '}
-                  {line.instrument}
-                  {line.isReserve ? ', in reserve' : ''}
-                  {line.service === 'visitor' ? ', visitor' : ''}
-                  {line.conditions ? `, ${line.conditions}` : ''}
+                  <span className="max-sm:hidden"> {line.instrument}</span>
+                  {termsInWords(line)}
                 </span>
               </span>
             ) : (
-              <span className="text-muted">none, {line.instrument}</span>
+              <span className="text-muted">
+                none<span className="max-sm:hidden">, {line.instrument}</span>
+              </span>
             )}
-          </span>
+          </div>
         ))}
       </div>
     </div>

@@ -1,7 +1,17 @@
-import type { NightsView } from '@/lib/domain/decisions/readNights'
+'use client'
+
+import { TableTools } from '@/components/tables/TableTools'
+import { useRows } from '@/components/tables/useRows'
+import { useTableState } from '@/components/tables/useTableState'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import type { NightsView } from '@/lib/domain/decisions/nightsView'
 import { AwardForm } from './AwardForm'
+import { FacingHead } from './FacingHead'
+import { FacingKey } from './FacingKey'
 import { FacingRow } from './FacingRow'
+import { NightsCsv } from './NightsCsv'
 import type { SaveAwardAction } from './nightsActions'
+import { nightsChips, nightsColumns } from './nightsColumns'
 
 export interface FacingTableProps {
   view: NightsView
@@ -12,59 +22,70 @@ export interface FacingTableProps {
   onSaved: () => void
 }
 
-/** Hours suggested and hours given, facing each other in the order of the ranking. */
+/** Hours suggested and hours given, facing each other; in the order of the ranking, the line among them. */
 export function FacingTable({ view, openId, onOpen, save, onSaved }: FacingTableProps) {
+  const [state, setState] = useTableState('')
+  const shown = useRows(view.rows, nightsColumns, nightsChips, state)
+  const change = (next: Partial<typeof state>) => void setState(next)
   const most = Math.max(
     1,
     ...view.rows.flatMap((row) => row.lines.map((line) => Math.max(line.askedSeconds, line.wholeSeconds))),
   )
-  const first = view.telescopes[0]?.id
+  const lastAbove =
+    state.sort === '' || state.sort === 'rank' ? shown.findLast((row) => row.isAbove) : undefined
   return (
     <section aria-label="Hours suggested and hours given" className="mt-4">
-      <div className="grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] gap-x-6 py-2 text-caption font-semibold rule-open max-sm:hidden">
-        <span>Suggested, or why not</span>
-        <span>Rank, review number</span>
-        <span className="text-right">Given</span>
-      </div>
-      <ol className="plain-list">
-        {view.rows.map((row) => (
-          <li
-            key={row.proposalId}
-            className={
-              row.rank === view.line ? 'border-b-2 border-dashed border-lamp' : 'border-b border-rule'
-            }
-          >
-            <FacingRow
-              row={row}
-              mostHours={most / 3600}
-              firstTelescope={first}
-              isOpen={openId === row.proposalId}
-              onOpen={onOpen ? () => onOpen(openId === row.proposalId ? null : row.proposalId) : null}
-            />
-            {openId === row.proposalId ? (
-              <AwardForm
-                key={row.decisionVersion}
+      <TableTools
+        find="Number, title or instrument"
+        chips={nightsChips}
+        columns={nightsColumns}
+        rows={view.rows}
+        shown={shown}
+        state={state}
+        onChange={change}
+        phoneSort
+        actions={<NightsCsv callNumber={view.callNumber} rows={shown} />}
+      />
+      <div role="table" aria-label={`Hours of call ${view.callNumber}`}>
+        <FacingHead sort={state.sort} onSort={(sort) => change({ sort })} />
+        <div role="rowgroup" className="max-sm:rule-open">
+          {shown.map((row) => (
+            <div
+              key={row.proposalId}
+              className={row === lastAbove ? 'border-b-2 border-dashed border-lamp' : 'border-b border-rule'}
+            >
+              <FacingRow
                 row={row}
-                view={view}
-                save={save}
-                onSaved={onSaved}
-                onLeave={() => onOpen?.(null)}
+                mostHours={most / 3600}
+                firstTelescope={view.telescopes[0]?.id}
+                isOpen={openId === row.proposalId}
+                onOpen={onOpen ? () => onOpen(openId === row.proposalId ? null : row.proposalId) : null}
               />
-            ) : null}
-          </li>
-        ))}
-      </ol>
-      <p className="mt-3 flex flex-wrap gap-x-6 gap-y-1 text-caption text-muted">
-        {view.telescopes.map((telescope) => (
-          <span key={telescope.id} className="inline-flex items-center gap-2">
-            <svg width="20" height="12" aria-hidden="true" focusable="false">
-              <rect width="20" height="12" fill={telescope.id === first ? 'var(--s1)' : 'var(--s3)'} />
-            </svg>
-            {telescope.name}
-          </span>
-        ))}
-        <span>outline: asked; tick: least useful award; dashed: the line</span>
-      </p>
+              {openId === row.proposalId ? (
+                <div role="row">
+                  <div role="cell" aria-colspan={3}>
+                    <AwardForm
+                      key={row.decisionVersion}
+                      row={row}
+                      view={view}
+                      save={save}
+                      onSaved={onSaved}
+                      onLeave={() => onOpen?.(null)}
+                    />
+                  </div>
+                </div>
+              ) : null}
+            </div>
+          ))}
+        </div>
+      </div>
+      {shown.length === 0 ? (
+        <p className="my-3 text-table text-muted">
+          Nothing matches.{' '}
+          <LinkLikeButton onClick={() => change({ find: '', show: '' })}>Show all</LinkLikeButton>
+        </p>
+      ) : null}
+      <FacingKey telescopes={view.telescopes} />
     </section>
   )
 }

@@ -3,26 +3,33 @@
 import { useState } from 'react'
 import { useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
+import { useTableQuery } from '@/components/tables/useTableQuery'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { showToast } from '@/components/ui/showToast'
-import type { NightsView } from '@/lib/domain/decisions/readNights'
+import { nightsView, type NightsView } from '@/lib/domain/decisions/nightsView'
 import { countInWords } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { FacingTable } from './FacingTable'
-import { NightsCsv } from './NightsCsv'
 import type { SaveAwardAction, TakePlanAction } from './nightsActions'
 import { OfferedHours } from './OfferedHours'
 
 export interface NightsBoardProps {
-  view: NightsView
+  initial: NightsView
   save: SaveAwardAction
   takePlan: TakePlanAction
 }
 
 /** The ranking laid into the hours on offer: a suggestion, what is given, and the running total against the offer. */
-export function NightsBoard({ view, save, takePlan }: NightsBoardProps) {
+export function NightsBoard({ initial, save, takePlan }: NightsBoardProps) {
+  const { data: view = initial } = useTableQuery({
+    key: ['panel', 'nights', initial.panelId],
+    url: `${paths.api.table('panel-nights')}?call=${initial.callSlug}&panel=${initial.panelId}`,
+    schema: nightsView,
+    initialData: initial,
+  })
   const { busy, deed } = useDeed()
   const panelPath = usePanelPath(view.callSlug)
   const [open, setOpen] = useState<number | null>(null)
@@ -33,12 +40,7 @@ export function NightsBoard({ view, save, takePlan }: NightsBoardProps) {
         title="Nights"
         lead="The ranking laid into the hours on offer, telescope by telescope."
         actions={
-          view.hasRanking ? (
-            <>
-              <NightsCsv view={view} />
-              <LinkButton href={panelPath('decisions')}>Go on to decisions</LinkButton>
-            </>
-          ) : null
+          view.hasRanking ? <LinkButton href={panelPath('decisions')}>Go on to decisions</LinkButton> : null
         }
       />
       <div className="mt-6 grid gap-x-16 gap-y-8 md:grid-cols-2">

@@ -2,7 +2,7 @@
 
 import { saveText } from '@/components/tables/saveText'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
-import type { NightsView } from '@/lib/domain/decisions/readNights'
+import type { NightsRow } from '@/lib/domain/decisions/nightsView'
 import { csvText } from '@/lib/format'
 
 const head = [
@@ -20,14 +20,20 @@ const head = [
   'Conditions',
 ]
 
-/** The hours as a file. */
-export function NightsCsv({ view }: { view: NightsView }) {
+export interface NightsCsvProps {
+  callNumber: number
+  /** The proposals shown, in their order. */
+  rows: readonly NightsRow[]
+}
+
+/** The hours as a file, a line for each instrument. */
+export function NightsCsv({ callNumber, rows }: NightsCsvProps) {
   const save = () =>
     saveText(
-      `nights-call-${view.callNumber}.csv`,
+      `nights-call-${callNumber}.csv`,
       csvText(
         head,
-        view.rows.flatMap((row) =>
+        rows.flatMap((row) =>
           row.lines.map((line) => [
             row.rank,
             row.reviewNumber,

@@ -1,5 +1,6 @@
 'use client'
 
+import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
@@ -19,6 +20,7 @@ export interface ConsensusFormProps {
 /** The panel's statement, kept as the draft of the decision's. */
 export function ConsensusForm({ proposal, panelId, action }: ConsensusFormProps) {
   const router = useRouter()
+  const client = useQueryClient()
   const form = useActionForm({
     schema: consensusSchema,
     action,
@@ -30,6 +32,7 @@ export function ConsensusForm({ proposal, panelId, action }: ConsensusFormProps)
     },
     onDone: () => {
       showToast('The statement is kept')
+      void client.invalidateQueries({ queryKey: ['panel'] })
       router.refresh()
     },
   })

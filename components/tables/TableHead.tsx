@@ -1,4 +1,5 @@
 import { classNames } from '@/components/ui/classNames'
+import { SortButton } from './SortButton'
 import { nextSort } from './sortingOf'
 import type { TableColumn } from './tableColumn'
 import { TableGroups, type TableGroup } from './TableGroups'
@@ -8,22 +9,6 @@ export interface TableHeadProps<Row> {
   sort: string
   onSort: (sort: string) => void
   groups?: readonly TableGroup[]
-}
-
-/** 8 px, pointing the way the values grow. */
-function SortArrow({ down }: { down: boolean }) {
-  return (
-    <svg
-      width="8"
-      height="8"
-      viewBox="0 0 8 8"
-      aria-hidden="true"
-      focusable="false"
-      className="ml-1 inline-block"
-    >
-      <path d={down ? 'M0 1.5H8L4 7Z' : 'M0 6.5H8L4 1Z'} fill="currentColor" />
-    </svg>
-  )
 }
 
 /** The head: words that sort, units under them, aligned with their columns. */
@@ -47,10 +32,9 @@ export function TableHead<Row>({ columns, sort, onSort, groups }: TableHeadProps
               {column.sortable === false ? (
                 (column.shownHead ?? column.head)
               ) : (
-                <button type="button" onClick={() => onSort(nextSort(sort, column.id))}>
+                <SortButton direction={direction} onSort={() => onSort(nextSort(sort, column.id))}>
                   {column.shownHead ?? column.head}
-                  {direction ? <SortArrow down={direction === 'descending'} /> : null}
-                </button>
+                </SortButton>
               )}
               {column.unit ? <span className="unit">{column.unit}</span> : null}
             </th>

@@ -80,6 +80,8 @@ export const access = {
     'GET /panel/[call]/packets/[number]': chair,
     'GET /api/tables/panel-assignments': chair,
     'GET /api/tables/panel-ranking': chair,
+    'GET /api/tables/panel-nights': chair,
+    'GET /api/tables/panel-decisions': chair,
     'GET /api/v1/cosmologies': 'anyone',
     'POST /api/v1/cosmology': 'anyone',
     'POST /api/v1/cosmology/inverse': 'anyone',

@@ -1,39 +1,11 @@
-import { standingAwards, standingDecisions, type StandingAward } from '@/db/queries/decisions'
+import { standingAwards, standingDecisions } from '@/db/queries/decisions'
 import { currentRanking, rankingEntries } from '@/db/queries/rankings'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
 import { visibleLine, visibleOrder } from '../rankings/order'
-import { outcomeOf, whyNotReleased, type Outcome } from './rules'
-
-export interface DecisionRow {
-  proposalId: number
-  reviewNumber: string
-  title: string
-  rank: number
-  isAbove: boolean
-  outcome: Outcome
-  lines: StandingAward[]
-  askedSeconds: number
-  statement: string
-  version: number
-  isPrepared: boolean
-  releasedAt: string | null
-}
-
-export interface DecisionsView {
-  panelId: number
-  callNumber: number
-  callSlug: string
-  phase: string
-  lettersAt: string
-  hasRanking: boolean
-  isFrozen: boolean
-  rows: DecisionRow[]
-  /** Why they cannot be made known yet, by what the reader may see. */
-  whyNot: string | null
-  isReleased: boolean
-}
+import type { DecisionRow, DecisionsView } from './decisionsView'
+import { outcomeOf, whyNotReleased } from './rules'
 
 /** The decisions being prepared, or made known, as their reader may see them. */
 export async function readDecisions(

@@ -4,47 +4,8 @@ import { currentRanking } from '@/db/queries/rankings'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
+import type { NightsRow, NightsView } from './nightsView'
 import { planNights } from './planNights'
-import type { WantedLine } from './wantedLines'
-
-export interface NightsLine extends WantedLine {
-  givenSeconds: number
-  isReserve: boolean
-  service: 'queue' | 'visitor'
-  conditions: string
-  /** What the suggestion gives; with why not where it gives nothing. */
-  suggestedSeconds: number
-  whyNot: { reason: 'not-possible' | 'too-little-left' | 'set-aside'; left: number } | null
-}
-
-export interface NightsRow {
-  proposalId: number
-  reviewNumber: string
-  title: string
-  rank: number
-  isAbove: boolean
-  setAside: boolean
-  decisionVersion: number
-  lines: NightsLine[]
-}
-
-export interface NightsView {
-  panelId: number
-  callNumber: number
-  callSlug: string
-  phase: string
-  hasRanking: boolean
-  line: number
-  rows: NightsRow[]
-  telescopes: {
-    id: number
-    name: string
-    offeredSeconds: number
-    givenSeconds: number
-    suggestedSeconds: number
-    halves: { month: string; half: 1 | 2; seconds: number }[]
-  }[]
-}
 
 /** Hours on offer and hours given, as their reader may see them. */
 export async function readNights(

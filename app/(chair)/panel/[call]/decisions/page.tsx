@@ -16,7 +16,7 @@ export default async function DecisionsPage(props: PanelPageProps) {
     <Main>
       <DecisionsBoard
         key={view.panelId}
-        view={view}
+        initial={view}
         prepare={prepareDecisionsAction}
         save={saveStatementAction}
         release={releaseDecisionsAction}

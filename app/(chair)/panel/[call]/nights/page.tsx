@@ -14,7 +14,7 @@ export default async function NightsPage(props: PanelPageProps) {
   const view = await orNotFound(readNights(ctx, await panelKey(props)))
   return (
     <Main>
-      <NightsBoard key={view.panelId} view={view} save={saveAwardAction} takePlan={takePlanAction} />
+      <NightsBoard key={view.panelId} initial={view} save={saveAwardAction} takePlan={takePlanAction} />
     </Main>
   )
 }

@@ -1,0 +1,139 @@
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
+import { render, screen, waitFor, within } from '@testing-library/react'
+import userEvent from '@testing-library/user-event'
+import { NuqsTestingAdapter } from 'nuqs/adapters/testing'
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
+import { NightsBoard } from '@/components/nights/NightsBoard'
+import type { NightsLine, NightsRow, NightsView } from '@/lib/domain/decisions/nightsView'
+
+// Seen to fail with the tables not read anew after a deed, with the chip left out of the rows, and with the line drawn
+// whatever the order.
+
+const saved = vi.hoisted(() => vi.fn())
+vi.mock('@/components/tables/saveText', () => ({ saveText: saved }))
+vi.mock('next/navigation', async (original) => ({
+  ...(await original<object>()),
+  useRouter: () => ({ refresh: () => undefined }),
+  useSearchParams: () => new URLSearchParams('panel=7'),
+}))
+
+const hour = 3600
+const line = (given: number, suggested: number): NightsLine => ({
+  proposalId: 0,
+  instrumentId: 1,
+  instrument: 'SPINDLE',
+  telescopeId: 1,
+  telescope: 'Aldous',
+  askedSeconds: 20 * hour,
+  wholeSeconds: 20 * hour,
+  leastSeconds: 10 * hour,
+  possible: true,
+  assessment: null,
+  givenSeconds: given * hour,
+  isReserve: false,
+  service: 'queue',
+  conditions: '',
+  suggestedSeconds: suggested * hour,
+  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour },
+})
+const row = (rank: number, given: number, suggested: number): NightsRow => ({
+  proposalId: rank,
+  reviewNumber: `13-00${rank}`,
+  title: `Question ${rank}`,
+  rank,
+  isAbove: rank <= 2,
+  setAside: false,
+  decisionVersion: 1,
+  lines: [line(given, suggested)],
+})
+const view = (...rows: NightsRow[]): NightsView => ({
+  panelId: 7,
+  callNumber: 13,
+  callSlug: 'call-13',
+  phase: 'ranking',
+  hasRanking: true,
+  line: 2,
+  rows,
+  telescopes: [
+    {
+      id: 1,
+      name: 'Aldous',
+      offeredSeconds: 34 * hour,
+      givenSeconds: rows.reduce((sum, one) => sum + (one.lines[0]?.givenSeconds ?? 0), 0),
+      suggestedSeconds: 30 * hour,
+      halves: [{ month: '2027-03', half: 2, seconds: 34 * hour }],
+    },
+  ],
+})
+const before = view(row(1, 20, 20), row(2, 12, 10), row(3, 0, 0))
+
+const takePlan = vi.fn(() => Promise.resolve({ ok: true as const, data: { awarded: 2 } }))
+const show = (search = '') =>
+  render(
+    <QueryClientProvider
+      client={new QueryClient({ defaultOptions: { queries: { staleTime: 30_000, retry: false } } })}
+    >
+      <NuqsTestingAdapter searchParams={search} hasMemory>
+        <NightsBoard
+          initial={before}
+          save={() => Promise.resolve({ ok: true, data: undefined })}
+          takePlan={takePlan}
+        />
+      </NuqsTestingAdapter>
+    </QueryClientProvider>,
+  )
+const numbers = () =>
+  screen.getAllByRole('rowheader').map((head) => /13-\d{3}/.exec(head.textContent ?? '')?.[0])
+const lamp = () => document.querySelectorAll('.border-lamp.border-dashed').length
+
+describe('the nights', () => {
+  const fetched = vi.fn<(url: string) => Promise<Response>>()
+  beforeEach(() => {
+    fetched.mockResolvedValue(Response.json(view(row(1, 20, 20), row(2, 10, 10), row(3, 0, 0))))
+    vi.stubGlobal('fetch', fetched)
+  })
+  afterEach(() => vi.unstubAllGlobals())
+
+  it('face each other in the order of the ranking, with the line among them', () => {
+    show()
+    expect(numbers()).toEqual(['13-001', '13-002', '13-003'])
+    const last = screen.getAllByRole('row').at(-1) as HTMLElement
+    expect(within(last).getByText('4.0 h left, 10.0 h is the least')).toBeTruthy()
+    expect(lamp()).toBe(1)
+    expect(fetched).not.toHaveBeenCalled()
+  })
+
+  it('are ordered by their heads; the line is not drawn through another order', async () => {
+    show()
+    const given = () => screen.getByRole('columnheader', { name: /^Given/ })
+    await userEvent.click(within(given()).getByRole('button'))
+    expect(numbers()).toEqual(['13-003', '13-002', '13-001'])
+    expect(given().getAttribute('aria-sort')).toBe('ascending')
+    expect(lamp()).toBe(0)
+  })
+
+  it('are narrowed by a chip and by words, and the file holds what is shown', async () => {
+    show('?show=part')
+    expect(numbers()).toEqual(['13-002'])
+    await userEvent.click(screen.getByRole('button', { name: 'CSV' }))
+    const [name, text] = saved.mock.lastCall as [string, string]
+    expect(name).toBe('nights-call-13.csv')
+    expect(text.trim().split(/\r?\n/)).toHaveLength(2)
+    expect(text).toContain('13-002,Question 2,Aldous,SPINDLE,20,10,10,12')
+    await userEvent.type(screen.getByRole('searchbox'), 'Question 3')
+    expect(screen.queryAllByRole('rowheader')).toEqual([])
+    await userEvent.click(screen.getByRole('button', { name: 'Show all' }))
+    expect(numbers()).toHaveLength(3)
+  })
+
+  it('are read anew from their handler once the suggestion is taken over', async () => {
+    show()
+    expect(screen.getByText('12.0 of 20.0')).toBeTruthy()
+    await userEvent.click(screen.getByRole('button', { name: 'Take the suggestion over' }))
+    await waitFor(() => expect(screen.queryByText('12.0 of 20.0')).toBeNull())
+    expect(fetched.mock.calls.map(([url]) => url)).toEqual(['/api/tables/panel-nights?call=call-13&panel=7'])
+    expect(screen.getByRole('link', { name: 'Go on to decisions' }).getAttribute('href')).toBe(
+      '/panel/call-13/decisions?panel=7',
+    )
+  })
+})
