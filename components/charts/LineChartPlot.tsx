@@ -9,6 +9,9 @@ export interface LineChartPlotProps extends Partial<Omit<LineChartMarksProps, 'g
   marks: readonly number[]
 }
 
+/** More values than this are drawn as the stretch they cover. */
+const MOST_TICKS = 60
+
 const decimalsOf = (ticks: readonly number[]) => {
   const step = Math.abs((ticks[1] ?? 1) - (ticks[0] ?? 0))
   return step >= 1 ? 0 : Math.min(6, Math.ceil(-Math.log10(step)))
@@ -60,9 +63,17 @@ export function LineChartPlot({
       <text x={width} y={height + 38} textAnchor="end" fontSize="12.5" fill="var(--ink-muted)">
         {xLabel}
       </text>
-      {marks.map((mark) => (
-        <path key={mark} d={`M${x(mark)} ${height}V${height - 7}`} stroke="var(--lamp)" strokeWidth="2" />
-      ))}
+      {marks.length > MOST_TICKS ? (
+        <path
+          d={`M${x(Math.min(...marks))} ${height - 2}H${x(Math.max(...marks))}`}
+          stroke="var(--lamp)"
+          strokeWidth="4"
+        />
+      ) : (
+        marks.map((mark, index) => (
+          <path key={index} d={`M${x(mark)} ${height}V${height - 7}`} stroke="var(--lamp)" strokeWidth="2" />
+        ))
+      )}
       <LineChartMarks geometry={geometry} guides={guides} uprights={uprights} notes={notes} />
       {/* Powers may differ in their last bit between server and browser: a tenth of a pixel, redrawn in a moment. */}
       {paths.map((path) => (

@@ -33,6 +33,9 @@ export function wordBox(x: number, baseline: number, text: string, width: number
   return { left, right: left + length, top: baseline - HEIGHT, bottom: baseline + 4 }
 }
 
+/** What each place beside a point costs, in the order of `boxesAt`. */
+const sideCosts = [0, 0, 1, 1, 6, 6, 8, 11, 14]
+
 const overlaps = (a: Box, b: Box) =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom
 
@@ -48,7 +51,7 @@ function crossed(points: LabelledLine['points'], box: Box): number {
   return count
 }
 
-/** Places for words at a point: above and below it, at its left and right, then a line further off. */
+/** Places for words at a point: above and below it, at its left and right, then further and further off. */
 function boxesAt([x, y]: readonly [number, number], length: number, width: number): Box[] {
   const right = Math.min(width, Math.max(length, x + length * 0.3))
   const box = (left: number, baseline: number): Box => ({
@@ -64,6 +67,9 @@ function boxesAt([x, y]: readonly [number, number], length: number, width: numbe
     box(Math.min(width - length, x + 9), y + 4),
     box(right - length, y - 24),
     box(right - length, y + 36),
+    box(right - length, y - 42),
+    box(right - length, y - 66),
+    box(right - length, y - 92),
   ]
 }
 
@@ -85,10 +91,10 @@ export function placeLabels(
       const point = points[Math.round((points.length - 1) * share)]
       if (!point) return
       boxesAt(point, length, width).forEach((box, side) => {
-        const outside = box.top < 0 || box.bottom > height ? 60 : 0
+        const outside = box.top < -16 || box.bottom > height ? 500 : 0
         const covered = placed.filter((other) => overlaps(box, other)).length * 40
-        const under = lines.reduce((sum, line) => sum + crossed(line.points, box), 0) * 3
-        const cost = outside + covered + under + order * 0.6 + (side > 3 ? 6 : side > 1 ? 1 : 0)
+        const under = lines.reduce((sum, line) => sum + Math.min(14, crossed(line.points, box) * 3), 0)
+        const cost = outside + covered + under + order * 0.6 + (sideCosts[side] ?? 0)
         if (cost < best.cost) best = { cost, box }
       })
     })

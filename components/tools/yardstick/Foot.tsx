@@ -1,3 +1,4 @@
+import { memo } from 'react'
 import { citationLine } from '@/lib/domain/tools/yardstick/exports/citation'
 import type { ReadyUniverse } from '@/lib/domain/tools/yardstick/universes'
 import { formatNumber } from '@/lib/format'
@@ -16,7 +17,7 @@ function parameterWords({ cosmology }: ReadyUniverse): string {
 }
 
 /** The parameters behind the numbers, how good they are, and the line to cite them by. */
-export function Foot({ universes }: { universes: readonly ReadyUniverse[] }) {
+export const Foot = memo(function Foot({ universes }: { universes: readonly ReadyUniverse[] }) {
   return (
     <div className="mt-6 grid gap-x-12 gap-y-5 text-caption text-muted md:grid-cols-2">
       <ul className="plain-list flex flex-col gap-1">
@@ -36,4 +37,4 @@ export function Foot({ universes }: { universes: readonly ReadyUniverse[] }) {
       </div>
     </div>
   )
-}
+})

@@ -1,11 +1,13 @@
 'use client'
 
-import { useCallback, useMemo, useRef, type ReactNode } from 'react'
+import { memo, useCallback, useMemo, useRef } from 'react'
 import { DataTable } from '@/components/tables/DataTable'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { groupsOf } from '@/lib/domain/tools/yardstick/sheets/groupsOf'
 import type { Sheet, SheetRow } from '@/lib/domain/tools/yardstick/sheets/sheet'
 import type { ReadyUniverse } from '@/lib/domain/tools/yardstick/universes'
+import type { CosmologyQuantity } from '@/lib/science/cosmology'
+import { ColumnChoice } from './ColumnChoice'
 import { ExportBar } from './ExportBar'
 import { sheetColumns } from './sheetColumns'
 import { toneOf } from './toneOf'
@@ -16,14 +18,16 @@ export interface NumbersProps {
   /** The redshift pointed at in a plot: its row lights. */
   pointed: number | null
   linkable: boolean
-  /** Before the exports: the choice of columns. */
-  tools?: ReactNode
+  /** The quantities chosen, where a mode lets one choose. */
+  columns: readonly CosmologyQuantity[] | null
+  onChange: (next: { columns: CosmologyQuantity[] }) => void
 }
 
 const ROW_PX = 36
 
-/** The table of every mode, in column groups a cosmology, with its files. */
-export function Numbers({ sheet, universes, pointed, linkable, tools }: NumbersProps) {
+/** The table of every mode, in column groups a cosmology, with its files. Memoised: typing must not wait for it. */
+export const Numbers = memo(function Numbers(props: NumbersProps) {
+  const { sheet, universes, pointed, linkable, columns: chosen, onChange } = props
   const columns = useMemo(() => sheetColumns(sheet, universes), [sheet, universes])
   const groups = useMemo(
     () =>
@@ -42,7 +46,9 @@ export function Numbers({ sheet, universes, pointed, linkable, tools }: NumbersP
         title={sheet.title === 'Distances, times and sizes' ? 'The numbers' : sheet.title}
         aside={
           <span className="flex flex-wrap items-baseline gap-x-6 gap-y-1" data-no-print>
-            {tools}
+            {chosen ? (
+              <ColumnChoice columns={chosen} onChange={(next) => onChange({ columns: next })} />
+            ) : null}
             <ExportBar
               sheet={() => ({ ...sheet, rows: [...shown.current] })}
               universes={universes}
@@ -70,4 +76,4 @@ export function Numbers({ sheet, universes, pointed, linkable, tools }: NumbersP
       </div>
     </section>
   )
-}
+})

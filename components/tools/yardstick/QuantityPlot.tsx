@@ -1,5 +1,6 @@
 'use client'
 
+import { useMemo } from 'react'
 import { ChartFrame } from '@/components/charts/ChartFrame'
 import { LineChart } from '@/components/charts/LineChart'
 import type { LineGuide } from '@/components/charts/LineChartMarks'
@@ -28,13 +29,11 @@ function numbersOf({ curves }: CurvePlot, title: string) {
   const longest = curves.reduce((best, one) => (one.points.length > best.points.length ? one : best), {
     points: [] as [number, number][],
   })
+  const values = curves.map(({ points }) => new Map(points))
   return {
     caption: title,
     columns: [{ head: 'z', decimals: 4 }, ...curves.map(({ name }) => ({ head: name, decimals: 4 }))],
-    rows: longest.points.map(([z]) => [
-      z,
-      ...curves.map(({ points }) => points.find(([other]) => other === z)?.[1] ?? null),
-    ]),
+    rows: longest.points.map(([z]) => [z, ...values.map((of) => of.get(z) ?? null)]),
   }
 }
 
@@ -42,11 +41,12 @@ function numbersOf({ curves }: CurvePlot, title: string) {
 export function QuantityPlot(props: QuantityPlotProps) {
   const { title, name, plot, redshifts, decimals, guides, yDomain, fileName, height = 360, onPoint } = props
   const { curves, domain, log, peak } = plot
+  const numbers = useMemo(() => numbersOf(plot, title), [plot, title])
   const shown = curves.filter(({ points }) => points.length > 1)
   const upTo = formatNumber(domain[1], domain[1] < 1 ? 2 : 0)
   const ends = shown.flatMap(({ name: whose, ends: words }) => (words ? [`${whose} ${words}.`] : []))
   return (
-    <ChartFrame brief title={title} fileName={fileName} numbers={numbersOf(plot, title)}>
+    <ChartFrame brief title={title} fileName={fileName} numbers={numbers}>
       <LineChart
         label={`${name} against redshift up to z = ${upTo}. ${ends.join(' ')}`}
         xLabel="redshift z"

@@ -1,5 +1,6 @@
 'use client'
 
+import { memo } from 'react'
 import type { YardstickState } from '@/lib/domain/tools/yardstick/state'
 import type { YardstickView } from '@/lib/domain/tools/yardstick/viewOf'
 import { CompareNotes } from './CompareNotes'
@@ -16,8 +17,9 @@ export interface RightColumnProps {
   onPoint: (z: number | null) => void
 }
 
-/** What kind of universes they are, then what a mode has to say, then the plots. */
-export function RightColumn({ view, pointed, onChange, onPoint }: RightColumnProps) {
+/** What kind of universes they are, then what a mode has to say, then the plots. Memoised: typing must not wait for it. */
+export const RightColumn = memo(function RightColumn(props: RightColumnProps) {
+  const { view, pointed, onChange, onPoint } = props
   const { state, ready, reference, redshifts, near, around, sheet } = view
   const { mode } = state
   const furthest = redshifts.reduce((most, z) => Math.max(most, z), 0)
@@ -48,4 +50,4 @@ export function RightColumn({ view, pointed, onChange, onPoint }: RightColumnPro
       ) : null}
     </>
   )
-}
+})

@@ -4,8 +4,9 @@ import { useDeferredValue, useMemo, useState } from 'react'
 import { BarNote } from '@/components/ui/BarNote'
 import { UnderlineChoice } from '@/components/ui/UnderlineChoice'
 import type { OwnText, YardstickState } from '@/lib/domain/tools/yardstick/state'
+import { writeState } from '@/lib/domain/tools/yardstick/stateQuery'
+import { chosenUniverses } from '@/lib/domain/tools/yardstick/universes'
 import { viewOf } from '@/lib/domain/tools/yardstick/viewOf'
-import { ColumnChoice } from './ColumnChoice'
 import { Foot } from './Foot'
 import { Numbers } from './Numbers'
 import { OwnParameters } from './OwnParameters'
@@ -29,10 +30,12 @@ const modes = [
 
 /** Redshifts in, distances and times out: computed here as one types, by the engine the server uses. */
 export function Yardstick({ initial, troubles }: YardstickProps) {
-  const { state, change, linkable } = useYardstickState(initial)
+  const { state, change } = useYardstickState(initial)
   // Typing goes first; tables and plots follow when there is time.
   const deferred = useDeferredValue(state)
-  const view = useMemo(() => viewOf(deferred), [deferred])
+  const chosen = useMemo(() => chosenUniverses(deferred.cosmologies), [deferred.cosmologies])
+  const view = useMemo(() => viewOf(deferred, chosen), [deferred, chosen])
+  const linkable = useMemo(() => writeState(deferred) !== null, [deferred])
   const [pointed, setPointed] = useState<number | null>(null)
   const [editing, setEditing] = useState<number | null>(() => {
     const wrong = view.universes.find(({ cosmology }) => cosmology === null)
@@ -76,11 +79,8 @@ export function Yardstick({ initial, troubles }: YardstickProps) {
           universes={view.ready}
           pointed={pointed}
           linkable={linkable}
-          tools={
-            view.state.mode === 'distances' || view.state.mode === 'compare' ? (
-              <ColumnChoice columns={state.columns} onChange={(columns) => change({ columns })} />
-            ) : null
-          }
+          columns={deferred.mode === 'distances' || deferred.mode === 'compare' ? deferred.columns : null}
+          onChange={change}
         />
       ) : null}
       <Foot universes={view.ready} />

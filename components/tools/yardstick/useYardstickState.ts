@@ -36,7 +36,7 @@ export function useYardstickState(initial: YardstickState) {
     }, PAUSE_MS)
     return () => clearTimeout(timer)
   }, [state])
-  return { state, change, linkable: writeState(state) !== null }
+  return { state, change }
 }
 
 /** Redshifts that suit a mode: those near by where nothing of one's own was typed yet. */

@@ -1,4 +1,4 @@
-import { parseDeclination, parseRightAscension } from '@/lib/science/sky'
+import { parseDeclination, parseRightAscension } from '@/lib/science/sky/coordinates'
 import type { YardstickState } from './state'
 import { typedQuantity } from './typedQuantity'
 

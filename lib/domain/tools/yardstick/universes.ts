@@ -75,6 +75,18 @@ function universeOf(chosen: Chosen, place: number): MeasuredUniverse {
   }
 }
 
+/** The chosen cosmologies, and those of them that can be computed with. */
+export interface Universes {
+  universes: MeasuredUniverse[]
+  ready: ReadyUniverse[]
+}
+
+/** Sets up what was chosen; kept apart from the rest of the page, so that typing a redshift leaves it as it is. */
+export function chosenUniverses(chosen: readonly Chosen[]): Universes {
+  const universes = universesOf(chosen)
+  return { universes, ready: readyUniverses(universes) }
+}
+
 /** The chosen cosmologies in their order, names told apart where two are alike. */
 export function universesOf(chosen: readonly Chosen[]): MeasuredUniverse[] {
   const universes = chosen.slice(0, MOST_COSMOLOGIES).map(universeOf)

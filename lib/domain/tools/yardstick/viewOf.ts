@@ -7,7 +7,7 @@ import { inverseSheet } from './sheets/inverseSheet'
 import { nearSheet, type Surroundings } from './sheets/nearSheet'
 import type { Sheet } from './sheets/sheet'
 import type { YardstickState } from './state'
-import { readyUniverses, universesOf, type MeasuredUniverse, type ReadyUniverse } from './universes'
+import type { MeasuredUniverse, ReadyUniverse, Universes } from './universes'
 
 /** All that follows from what was typed. */
 export interface YardstickView {
@@ -51,9 +51,7 @@ const foundIn = ({ columns, rows }: Sheet): number[] => [
 ]
 
 /** Computes the page from its state: the same on the server, which renders it first, and in the browser. */
-export function viewOf(state: YardstickState): YardstickView {
-  const universes = universesOf(state.cosmologies)
-  const ready = readyUniverses(universes)
+export function viewOf(state: YardstickState, { universes, ready }: Universes): YardstickView {
   const reference = ready.find(({ place }) => place === state.reference) ?? ready[0] ?? null
   const common = { state, universes, ready, reference, near: null, around: null }
   if (state.mode === 'inverse') {
