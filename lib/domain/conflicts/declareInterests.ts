@@ -17,6 +17,7 @@ import { interestsToRecord } from './interestsToRecord'
 import { listNames } from './listNames'
 import { canDeclareInterests } from './policy'
 import type { DeclareInterestsInput } from './schema'
+import { writeToLeaders } from './writeToLeaders'
 
 export interface Declared {
   callSlug: string
@@ -26,7 +27,8 @@ export interface Declared {
 
 /**
  * Records what a reviewer said of the names of a call, finds the own proposals and those of the own institute, and
- * takes back every assignment they touch. It may be said again later; what was declared once stays.
+ * takes back every assignment they touch; whoever leads the panel is told. It may be said again later; what was
+ * declared once stays.
  */
 export function declareInterests(ctx: ActingContext, input: DeclareInterestsInput): Promise<Declared> {
   return inTransaction(ctx, async (tx) => {
@@ -71,6 +73,7 @@ export function declareInterests(ctx: ActingContext, input: DeclareInterestsInpu
         after: { withdrawn: true },
       })
     }
+    await writeToLeaders(tx, call, hit)
     await writeLogbook(tx, {
       action: 'declareInterests',
       actingAs: 'reviewer',

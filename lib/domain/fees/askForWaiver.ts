@@ -1,14 +1,21 @@
 import { insertWaiver, latestWaiver, lockFeeOf } from '@/db/queries/fees'
+import { officePeople } from '@/db/queries/roleHolders'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
+import { paths } from '@/lib/paths'
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
+import { waiverAsked } from '../outbox/letters/waiverAsked'
+import { queueLetter } from '../outbox/queueLetter'
 import { readContents } from '../proposals/readContents'
 import { mayAskForWaiver } from './policy'
 import { whyNotPayable } from './rules'
 
-/** Asks the office to waive the fee of a proposal. Until it is decided, the proposal does not lapse for the fee. */
+/**
+ * Asks the office to waive the fee of a proposal; everyone in the office is written to. Until it is decided, the
+ * proposal does not lapse for the fee.
+ */
 export async function askForWaiver(
   ctx: ActingContext,
   input: { reference: string; reason: string },
@@ -30,6 +37,18 @@ export async function askForWaiver(
       reason: input.reason,
       askedBy: tx.actor.personId,
     })
+    const facts = {
+      reference: contents.reference,
+      title: contents.title,
+      askedBy: tx.actor.name,
+      reason: input.reason,
+      amountMinor: fee.amount_minor,
+      currency: fee.currency,
+      dueAt: fee.due_at,
+      url: `${tx.request.origin}${paths.office('fees')}?call=${encodeURIComponent(contents.call.slug)}`,
+    }
+    for (const person of await officePeople(tx.db))
+      await queueLetter(tx, person, waiverAsked({ name: person.name, ...facts }), `waiver-asked:${waiverId}`)
     await writeLogbook(tx, {
       action: 'fee.ask-waiver',
       subject: { kind: 'proposal', id: contents.reference },

@@ -4,6 +4,7 @@ import { decideWaiver } from '@/lib/domain/fees/decideWaiver'
 import { lapseFees } from '@/lib/domain/fees/lapseFees'
 import { makeBilled, type Billed } from '../../support/billed'
 import { useRolledBackDatabase } from '../../support/database'
+import { makePerson } from '../../support/scenario/people'
 
 const db = useRolledBackDatabase()
 let billed: Billed
@@ -24,13 +25,52 @@ beforeEach(async () => {
   billed = await makeBilled(db())
 })
 
-// Seen to fail with the waiver left out of the query for what lapses.
+// Seen to fail with the waiver left out of the query for what lapses, and with revoked grants left in the query of the
+// office.
 describe('a waiver', () => {
   it('granted, settles the fee and is told', async () => {
     const { waiverId } = await ask()
     await decide(waiverId, 'granted')
     expect(await billed.rows()).toMatchObject({ fee: 'waived', receipts: 0 })
     expect(await letters()).toBe(1)
+  })
+
+  it('asked for, is told to everyone in the office now, once, with the reason', async () => {
+    const disabled = await makePerson(db(), `${billed.scenario.tag}d`, 'Lena Moorgate', 'office')
+    await db()('people').where({ id: disabled.personId }).update({ disabled_at: new Date() })
+    const gone = await makePerson(db(), `${billed.scenario.tag}g`, 'Nils Oxbarrow', 'office')
+    await db()('role_grants').where({ person_id: gone.personId }).update({ revoked_at: new Date() })
+    const second = await makePerson(db(), `${billed.scenario.tag}s`, 'Pia Quarrel', 'office')
+    await db()('role_grants').insert({
+      person_id: second.personId,
+      role: 'office',
+      from_at: new Date(Date.now() - 1000),
+    })
+    const { waiverId } = await ask()
+    await expect(ask()).rejects.toThrow('asked for already')
+    const told = await db()('outbox')
+      .where({ template: 'waiver-asked' })
+      .whereIn('person_id', [
+        billed.scenario.office.personId,
+        disabled.personId,
+        gone.personId,
+        second.personId,
+      ])
+    expect(told.map(({ person_id }) => person_id)).toEqual([billed.scenario.office.personId, second.personId])
+    const [letter] = told
+    expect(letter?.dedupe_key).toContain(`waiver-asked:${waiverId}:`)
+    for (const words of [
+      billed.scenario.reference,
+      billed.scenario.pi.name,
+      'Our institute has no funds for fees.',
+      `/office/fees?call=${billed.scenario.callSlug}`,
+    ])
+      expect(letter?.text_body).toContain(words)
+  })
+
+  it('not asked for after all leaves no letter', async () => {
+    await expect(ask('coInvestigator')).rejects.toMatchObject({ kind: 'forbidden' })
+    expect(await db()('outbox').where({ template: 'waiver-asked' })).toEqual([])
   })
 
   it('refused, leaves it due', async () => {
