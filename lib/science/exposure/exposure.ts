@@ -1,15 +1,14 @@
 import { minimum } from '../numeric/minimum'
 import { ScienceError } from '../ScienceError'
+import { backgroundPixels } from './backgroundPixels'
 import { ccd, type CcdInput, type CcdResult } from './ccd'
 import { computeRates, type Rates } from './rates'
 import { exponentOfDistance, type ExposureReport, type Regime } from './report'
-import { chooseSubExposure, readVarianceE2, type SubExposure } from './subExposure'
+import { chooseSubExposure, FEWEST_FRAMES, readVarianceE2, type SubExposure } from './subExposure'
+import { overheadOf } from './overhead'
 import type { Conditions, ModeRecord, SnrPer, Source } from './types'
 import { exposureEngineVersion } from './version'
 import { exposureWarnings } from './warnings'
-
-/** Fewest frames, so that a cosmic ray in one can be told from a source. */
-const FEWEST_FRAMES = 3
 
 export interface ExposureInput {
   readonly mode: ModeRecord
@@ -38,6 +37,7 @@ function solver(input: ExposureInput, rates: Rates, sub: SubExposure): Solve {
       darkRatePerPixel: mode.darkEPerS + continuum / pixels + readRate,
       readNoise: exposures === null ? 0 : Math.sqrt(readVarianceE2(mode)),
       pixels,
+      backgroundPixels: backgroundPixels(mode, pixels),
       exposures: exposures ?? 1,
       systematicFloor: mode.systematicFloor,
       solve: input.solve,
@@ -54,7 +54,8 @@ function bestRadius(rates: Rates, mode: ModeRecord, sub: SubExposure): number {
   const cost = (radius: number): number => {
     const { share, continuum, pixels } = rates.aperture(radius)
     const signal = rates.sourceWhole * share
-    return (signal + continuum + pixels * perPixel) / (signal * signal)
+    const area = pixels * (1 + pixels / (backgroundPixels(mode, pixels) ?? Infinity))
+    return (signal + continuum + area * perPixel) / (signal * signal)
   }
   return minimum(cost, 0.3 * rates.imageArcsec, 2.5 * rates.imageArcsec, 1e-4)
 }
@@ -105,12 +106,7 @@ export function exposure(input: ExposureInput): ExposureReport {
     frames,
   )
   const { regime, share: regimeShare } = regimeOf(reached.variance)
-  const { overheads } = mode
-  const overheadS =
-    overheads.acquisitionS +
-    frames * overheads.readoutS +
-    (frames - 1) * overheads.ditherS +
-    overheads.calibrationFraction * openS
+  const overheadS = overheadOf(mode, frames, openS)
   const peakFraction = (preferred.peakFraction * subExposureS) / preferred.seconds
   return {
     engineVersion: exposureEngineVersion,

@@ -1,6 +1,4 @@
 import { ScienceError } from '../ScienceError'
-import { widthOfHalfLight } from './moffat'
-import type { Geometry } from './types'
 
 /** Outer scale of the turbulence, metres, a common median. */
 const OUTER_SCALE_M = 20
@@ -32,10 +30,4 @@ export function deliveredImageArcsec(input: {
   const diameterM = 2 * Math.sqrt(input.collectingAreaM2 / Math.PI)
   const diffraction = (1.03 * wavelengthA * 1e-10 * ARCSEC) / diameterM
   return Math.hypot(air, diffraction, input.opticsArcsec ?? 0)
-}
-
-/** Width of a source as delivered: a galaxy's own width joins the point's in quadrature, a rough convolution. */
-export function sourceWidthArcsec(pointArcsec: number, geometry: Geometry): number {
-  if (geometry.kind !== 'extended') return pointArcsec
-  return Math.hypot(pointArcsec, widthOfHalfLight(geometry.effectiveRadiusArcsec))
 }

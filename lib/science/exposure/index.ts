@@ -1,6 +1,9 @@
 /** Signal-to-noise and exposure time. */
 export { ccd, type CcdInput, type CcdResult } from './ccd'
+export { airAt, airDispersionArcsec, type Air } from './airDispersion'
 export { exposure, type ExposureInput } from './exposure'
+export { exposureTimes } from './exposureTimes'
+export { faintest, type Faintest, type FaintestInput } from './faintest'
 export { deliveredImageArcsec } from './imageQuality'
 export type { ExposureReport, Regime } from './report'
 export { skyAbArcsec2 } from './skyBrightness'

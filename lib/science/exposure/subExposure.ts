@@ -1,6 +1,9 @@
 import { DIGITISATION } from './ccd'
 import type { ModeRecord } from './types'
 
+/** Fewest frames, so that a cosmic ray in one can be told from a source. */
+export const FEWEST_FRAMES = 3
+
 /** Share of the full well that the brightest pixel may fill: beyond it detectors bend. */
 const LINEAR = 0.8
 /** Steps of a 16-bit converter. */

@@ -31,6 +31,17 @@ export interface ModeRecord {
   }
   /** Width of the image the optics alone would make, arcseconds. */
   readonly opticsArcsec?: number
+  /**
+   * How the sky is taken off: from pixels around the source, from the same pixels of the next frame (pairs, which
+   * doubles its noise), or from frames of blank sky, which take as long again. From around when not given.
+   */
+  readonly skySubtraction?: 'around' | 'paired' | 'blank-sky'
+  /** Pixels the sky around is measured from; unlimited when not given. */
+  readonly backgroundPixels?: number
+  /** Glow of telescope and instrument themselves, electrons a second and pixel. */
+  readonly thermalEPerS?: number
+  /** Prisms undo the dispersion of the air. */
+  readonly dispersionCorrected?: boolean
 }
 
 /** What a site is, as far as light is concerned. */
@@ -59,8 +70,8 @@ export type Provenance = 'observed' | 'predicted'
 
 export type Geometry =
   | { readonly kind: 'point' }
-  /** Half its light inside `effectiveRadiusArcsec`. */
-  | { readonly kind: 'extended'; readonly effectiveRadiusArcsec: number }
+  /** A Sersic profile, exponential when no index is given, with half its light inside `effectiveRadiusArcsec`. */
+  | { readonly kind: 'extended'; readonly effectiveRadiusArcsec: number; readonly sersicIndex?: number }
   /** Brightness is per square arcsecond; the signal is summed over `areaArcsec2`. */
   | { readonly kind: 'uniform'; readonly areaArcsec2: number }
 
@@ -95,6 +106,10 @@ export interface Conditions {
   readonly transparency?: number
   /** Sky as measured, AB magnitudes per square arcsecond, in place of the computed one. */
   readonly skyAbArcsec2?: number
+  /** A slit that does not follow the dispersion of the air loses light; along it when not given. */
+  readonly slitAngle?: 'parallactic' | 'across'
+  /** Where the slit is centred by, angstroms; 5500 when not given. */
+  readonly guideWavelengthA?: number
 }
 
 /** What the signal-to-noise ratio counts: the whole image of a source, or a stretch of its spectrum. */

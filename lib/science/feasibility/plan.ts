@@ -33,7 +33,8 @@ function attempt(make: () => ExposureReport): Attempt {
 function openWithin(mode: ModeRecord, askedS: number, subExposureS: number): number {
   const { acquisitionS, readoutS, ditherS, calibrationFraction } = mode.overheads
   const left = askedS - acquisitionS + ditherS
-  const perFrame = subExposureS * (1 + calibrationFraction) + readoutS + ditherS
+  const frame = subExposureS + readoutS + ditherS
+  const perFrame = subExposureS * calibrationFraction + (mode.skySubtraction === 'blank-sky' ? 2 : 1) * frame
   return (left / perFrame) * subExposureS
 }
 

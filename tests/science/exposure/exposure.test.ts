@@ -208,7 +208,7 @@ describe('refusals and warnings are sentences', () => {
 describe('regression', () => {
   it('a spectrum of AB 20 at 6000 A: hours and regime', () => {
     const report = exposure({ mode: slit, source: continuum, conditions: dark, solve: 'time', snr: 15 })
-    expect(report.engineVersion).toBe('1.0.0')
+    expect(report.engineVersion).toBe('1.1.0')
     expect(report.totalS / 3600).toBeCloseTo(0.3998, 3)
     expect(JSON.stringify(report)).toBe(
       JSON.stringify(exposure({ mode: slit, source: continuum, conditions: dark, solve: 'time', snr: 15 })),

@@ -1,46 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import { deliveredImageArcsec, skyAbArcsec2 } from '../../../lib/science/exposure'
-import { moffatInCircle, moffatInRectangle, widthOfHalfLight } from '../../../lib/science/exposure/moffat'
-import { fixture } from '../support/fixture'
 import { ridge } from '../support/instruments'
-import { relativeError } from '../support/relativeError'
-
-interface Aperture {
-  fwhm: number
-  beta: number
-  halfWidth: number
-  halfHeight: number
-  rectangle: number
-  circle: number
-}
-
-const { source, apertures } = fixture<{ source: string; apertures: Aperture[] }>('exposure')
-
-describe(`independent code: ${source}`, () => {
-  it('has eighteen apertures', () => {
-    expect(apertures).toHaveLength(18)
-  })
-
-  it.each(apertures)('FWHM $fwhm, beta $beta, $halfWidth by $halfHeight', (row) => {
-    // A 20-point rule over a smooth quarter: 1e-7 is far below any photometry.
-    const rectangle = moffatInRectangle(row.fwhm, row.halfWidth, row.halfHeight, row.beta)
-    expect(relativeError(rectangle, row.rectangle)).toBeLessThan(1e-7)
-    expect(relativeError(moffatInCircle(row.fwhm, row.halfWidth, row.beta), row.circle)).toBeLessThan(1e-9)
-  })
-})
 
 describe('analytic limit or identity', () => {
-  it('half the light lies inside the half-light radius', () => {
-    for (const beta of [2.5, 3, 4]) {
-      expect(moffatInCircle(widthOfHalfLight(0.7, beta), 0.7, beta)).toBeCloseTo(0.5, 12)
-    }
-  })
-
-  it('a wide aperture holds all the light', () => {
-    expect(moffatInCircle(1, 100)).toBeCloseTo(1, 6)
-    expect(moffatInRectangle(1, 8, 8)).toBeGreaterThan(0.999)
-  })
-
   it('the image grows with airmass and shrinks to the red; the outer scale and diffraction join in', () => {
     const at = (change: object): number =>
       deliveredImageArcsec({
