@@ -82,6 +82,7 @@ export const access = {
     'GET /api/tables/panel-ranking': chair,
     'GET /api/tables/panel-nights': chair,
     'GET /api/tables/panel-decisions': chair,
+    'GET /api/v1/openapi.json': 'anyone',
     'GET /api/v1/cosmologies': 'anyone',
     'POST /api/v1/cosmology': 'anyone',
     'POST /api/v1/cosmology/inverse': 'anyone',

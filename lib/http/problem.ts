@@ -16,6 +16,9 @@ const titles: Readonly<Record<number, string>> = {
   503: 'Not available',
 }
 
+/** How many values are named one by one: a list of a million wrong ones makes no answer of a million lines. */
+const mostNamed = 100
+
 const pointer = (field: string) => `/${field.split('.').join('/')}`
 
 /** Problem details (RFC 9457) of a failure; an unexpected one says only its reference number. */
@@ -23,7 +26,9 @@ export function problem(error: unknown, requestId: string): Response {
   const refusal = asRefusal(error)
   const status = refusal ? statusOf[refusal.kind] : 500
   const errors = refusal
-    ? Object.entries(refusal.fieldErrors).map(([field, detail]) => ({ pointer: pointer(field), detail }))
+    ? Object.entries(refusal.fieldErrors)
+        .slice(0, mostNamed)
+        .map(([field, detail]) => ({ pointer: pointer(field), detail }))
     : []
   const body = {
     type: 'about:blank',

@@ -7,8 +7,14 @@ import { mostRedshifts, requireAtMost } from './limits'
 
 export const cosmologyRequest = z.object({
   cosmology: cosmologyInput,
-  z: z.array(z.number('A redshift is a number.')),
-  pairs: z.array(z.tuple([z.number(), z.number()])).optional(),
+  z: z.array(z.number('A redshift is a number.')).meta({ maxItems: mostRedshifts }),
+  pairs: z
+    .array(z.tuple([z.number('A redshift is a number.'), z.number('A redshift is a number.')]))
+    .optional()
+    .meta({
+      maxItems: mostRedshifts,
+      description: 'Angular-diameter distance of the second seen from the first',
+    }),
 })
 
 export type CosmologyRequest = z.output<typeof cosmologyRequest>
@@ -60,12 +66,17 @@ export function computeCosmology(input: CosmologyRequest) {
   requireAtMost(input.z, mostRedshifts, 'redshifts')
   requireAtMost(input.pairs ?? [], mostRedshifts, 'pairs')
   const universe = universeOf(input.cosmology)
-  const rows = eachOrRefused(input.z, 'z', (z) => rowOf(universe, z))
-  const pairs = eachOrRefused(input.pairs ?? [], 'pairs', ([z1, z2]) => ({
-    z1,
-    z2,
-    angularDiameterMpc: universe.angularDiameterBetweenMpc(z1, z2),
-  }))
+  const { z: rows, pairs } = eachOrRefused({
+    z: [input.z, (z: number) => rowOf(universe, z)],
+    pairs: [
+      input.pairs ?? [],
+      ([z1, z2]: readonly [number, number]) => ({
+        z1,
+        z2,
+        angularDiameterMpc: universe.angularDiameterBetweenMpc(z1, z2),
+      }),
+    ],
+  })
   return {
     engine: cosmologyEngineVersion,
     cosmology: describeCosmology(universe),

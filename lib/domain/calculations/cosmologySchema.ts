@@ -1,5 +1,12 @@
 import { z } from 'zod'
-import { cosmologyPresets, createCosmology, presetCosmology, type Cosmology } from '@/lib/science/cosmology'
+import {
+  cosmologyPresets,
+  createCosmology,
+  parameterTroubles,
+  presetCosmology,
+  type Cosmology,
+  type CosmologyParameters,
+} from '@/lib/science/cosmology'
 import { refuse } from '@/lib/errors'
 import { asRefused } from './asRefused'
 
@@ -38,17 +45,25 @@ export function universeOf(given: CosmologyInput): Cosmology {
   if (flat && Ode0 !== undefined)
     throw refuse.field('cosmology.Ode0', 'Give either Ode0 or flat: true, not both.')
   if (!flat && Ode0 === undefined) throw refuse.field('cosmology.Ode0', 'Give Ode0, or flat: true.')
-  return asRefused('cosmology', () =>
-    createCosmology({
-      name: given.name ?? 'As given',
-      H0: given.H0,
-      Om0: given.Om0,
-      Ode0: flat ? 'flat' : (Ode0 ?? 'flat'),
-      w0: given.w0 ?? -1,
-      wa: given.wa ?? 0,
-      Tcmb0,
-      Neff: given.Neff ?? (Tcmb0 > 0 ? 3.046 : 0),
-      mNuEv: given.mNu ?? [],
-    }),
-  )
+  const parameters: CosmologyParameters = {
+    name: given.name ?? 'As given',
+    H0: given.H0,
+    Om0: given.Om0,
+    Ode0: flat ? 'flat' : (Ode0 ?? 'flat'),
+    w0: given.w0 ?? -1,
+    wa: given.wa ?? 0,
+    Tcmb0,
+    Neff: given.Neff ?? (Tcmb0 > 0 ? 3.046 : 0),
+    mNuEv: given.mNu ?? [],
+  }
+  const wrong = Object.entries(parameterTroubles(parameters)).map(([key, sentence]) => [
+    `cosmology.${key === 'mNuEv' ? 'mNu' : key}`,
+    sentence,
+  ])
+  if (wrong.length > 0)
+    throw refuse.invalid(
+      'No universe has these parameters.',
+      Object.fromEntries(wrong) as Record<string, string>,
+    )
+  return asRefused('cosmology', () => createCosmology(parameters))
 }

@@ -15,7 +15,7 @@ export const inverseRequest = z.object({
     'angularDiameterMpc',
     'distanceModulusMag',
   ]),
-  values: z.array(z.number('A value is a number.')),
+  values: z.array(z.number('A value is a number.')).meta({ maxItems: mostRedshifts }),
 })
 
 export type InverseRequest = z.output<typeof inverseRequest>
@@ -24,13 +24,16 @@ export type InverseRequest = z.output<typeof inverseRequest>
 export function invertCosmology(input: InverseRequest) {
   requireAtMost(input.values, mostRedshifts, 'values')
   const universe = universeOf(input.cosmology)
+  const { values: rows } = eachOrRefused({
+    values: [
+      input.values,
+      (value: number) => ({ value, redshifts: universe.redshiftsAt(input.quantity, value) }),
+    ],
+  })
   return {
     engine: cosmologyEngineVersion,
     cosmology: describeCosmology(universe),
     quantity: input.quantity,
-    rows: eachOrRefused(input.values, 'values', (value) => ({
-      value,
-      redshifts: universe.redshiftsAt(input.quantity, value),
-    })),
+    rows,
   }
 }

@@ -9,7 +9,7 @@ export {
   type NearbyDistance,
   type NearbyInput,
 } from './nearby'
-export type { CosmologyParameters } from './parameters'
+export { parameterTroubles, type CosmologyParameters } from './parameters'
 export { cosmologyPresets, type CosmologyId, type CosmologyPreset } from './presets'
 export { massiveNeutrinoDensity, matterWithoutNeutrinos, type PublishedMatter } from './publishedMatter'
 export { cmbRedshift, heliocentricRedshift, SOLAR_SPEED_KM_S, type SkyPosition } from './solarMotion'

@@ -97,3 +97,42 @@ export function checkParameters(p: CosmologyParameters): void {
     )
   }
 }
+
+/** Every parameter no universe can have, with its sentence; empty when there is none. */
+export function parameterTroubles(
+  p: CosmologyParameters,
+): Partial<Record<keyof CosmologyParameters, string>> {
+  // Each is tried among values that are certainly good; masses need the number of species as given.
+  const good: CosmologyParameters = {
+    name: p.name,
+    H0: 70,
+    Om0: 0.3,
+    Ode0: 'flat',
+    w0: -1,
+    wa: 0,
+    Tcmb0: 0,
+    Neff: 100,
+    mNuEv: [],
+  }
+  const tried: readonly (keyof CosmologyParameters)[] = [
+    'H0',
+    'Om0',
+    'Ode0',
+    'w0',
+    'wa',
+    'Tcmb0',
+    'Neff',
+    'mNuEv',
+  ]
+  const found: Partial<Record<keyof CosmologyParameters, string>> = {}
+  for (const key of tried) {
+    const species = key === 'mNuEv' && !found.Neff ? { Neff: p.Neff } : {}
+    try {
+      checkParameters({ ...good, ...species, [key]: p[key] })
+    } catch (error) {
+      if (!(error instanceof ScienceError)) throw error
+      found[key] = error.message
+    }
+  }
+  return found
+}

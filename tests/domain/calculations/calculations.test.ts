@@ -55,10 +55,37 @@ describe('the cosmology calculation', () => {
     ['an unknown preset', { cosmology: 'nowhere', z: [] }, 'cosmology'],
     ['no dark energy and not flat', { cosmology: { H0: 70, Om0: 0.3 }, z: [] }, 'cosmology.Ode0'],
     ['both', { cosmology: { H0: 70, Om0: 0.3, Ode0: 0.7, flat: true }, z: [] }, 'cosmology.Ode0'],
-    ['a Hubble constant of 0', { cosmology: { H0: 0, Om0: 0.3, Ode0: 0.7 }, z: [] }, 'cosmology'],
+    ['a Hubble constant of 0', { cosmology: { H0: 0, Om0: 0.3, Ode0: 0.7 }, z: [] }, 'cosmology.H0'],
     ['a negative redshift', { cosmology: 'planck-2018', z: [-2] }, 'z.0'],
   ])('refuses %s at its place', (_, body, field) => {
     expect(Object.keys(refused(() => compute(body)).fieldErrors)).toEqual([field])
+  })
+
+  it('names every parameter and every value that is wrong, in redshifts and pairs alike', () => {
+    const own = { H0: 0, Om0: -1, Ode0: 0.7, Tcmb0: 2.7, mNu: [1, 2, 3, 4] }
+    expect(refused(() => compute({ cosmology: own, z: [] })).fieldErrors).toEqual({
+      'cosmology.H0': 'The Hubble constant H₀ must be above 0 km/s/Mpc.',
+      'cosmology.Om0': 'The matter density Ωm must be 0 or more.',
+      'cosmology.mNu': '4 neutrino masses were given for 3 species.',
+    })
+    const body = {
+      cosmology: { H0: 70, Om0: 0.3, Ode0: 1.75 },
+      z: [0.5, 2],
+      pairs: [
+        [0.1, 0.2],
+        [0.1, 9],
+      ],
+    }
+    const refusal = refused(() => compute(body))
+    expect(Object.keys(refusal.fieldErrors)).toEqual(['z.1', 'pairs.1'])
+    expect(refusal.message).toBe('2 of 4 values cannot be in this model.')
+  })
+
+  it('counts all wrong values of many and names the first hundred', () => {
+    const z = Array.from({ length: 100_000 }, () => 5)
+    const refusal = refused(() => compute({ cosmology: { H0: 70, Om0: 0.3, Ode0: 1.75 }, z }))
+    expect(Object.keys(refusal.fieldErrors)).toHaveLength(100)
+    expect(refusal.message).toBe('100000 of 100000 values cannot be in this model. The first 100 are named.')
   })
 
   it('refuses more than 100,000 redshifts by size', () => {
