@@ -283,6 +283,11 @@ export interface ModeRecordsRow {
   throughput_includes: string
   overheads: string
   created_at: Date
+  sky_subtraction: 'around' | 'paired' | 'blank-sky'
+  background_pixels: number | null
+  thermal_e_per_s: number
+  optics_arcsec: number
+  dispersion_corrected: 0 | 1
 }
 
 export interface MoneyEntriesRow {
@@ -852,7 +857,17 @@ declare module 'knex/types/tables.js' {
       ModeRecordsRow,
       Insert<
         ModeRecordsRow,
-        'id' | 'band' | 'dispersion_a_per_pixel' | 'slit_width_arcsec' | 'resolving_power' | 'created_at'
+        | 'id'
+        | 'band'
+        | 'dispersion_a_per_pixel'
+        | 'slit_width_arcsec'
+        | 'resolving_power'
+        | 'created_at'
+        | 'sky_subtraction'
+        | 'background_pixels'
+        | 'thermal_e_per_s'
+        | 'optics_arcsec'
+        | 'dispersion_corrected'
       >
     >
     money_entries: Knex.CompositeTableType<MoneyEntriesRow, Insert<MoneyEntriesRow, 'id' | 'created_at'>>

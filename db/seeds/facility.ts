@@ -33,6 +33,8 @@ function modeRecord(mode: SeedMode, modeId: number): Record<string, unknown> {
     max_sub_exposure_s: mode.subExposureS[1],
     systematic_floor: mode.systematicFloor,
     twilight_limit_deg: mode.twilightLimitDeg,
+    sky_subtraction: mode.skySubtraction ?? 'around',
+    thermal_e_per_s: mode.thermalEPerS ?? 0,
     throughput: JSON.stringify([
       { wavelengthA: blue, efficiency: atBlue },
       { wavelengthA: (blue + red) / 2, efficiency: atMiddle },

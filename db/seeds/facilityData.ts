@@ -47,6 +47,8 @@ export interface SeedMode {
   subExposureS: [number, number]
   systematicFloor: number
   twilightLimitDeg: number
+  skySubtraction?: 'around' | 'paired' | 'blank-sky'
+  thermalEPerS?: number
   /** Efficiency at the blue end, the middle and the red end; atmosphere is not in it. */
   efficiency: [number, number, number]
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
@@ -111,7 +113,10 @@ const infrared = (arm: string, rangeA: [number, number], dispersion: number): Se
   fullWellE: 100_000,
   gainEPerAdu: 2.1,
   subExposureS: [10, 600],
-  systematicFloor: 0.01,
+  // Pairs nodded along the slit leave some 0.2 % of the sky, common practice.
+  systematicFloor: 0.002,
+  skySubtraction: 'paired',
+  thermalEPerS: 0.05,
   twilightLimitDeg: -15,
   efficiency: [0.16, 0.22, 0.2],
   overheads: { acquisitionS: 800, readoutS: 9, ditherS: 14, calibrationFraction: 0.12 },

@@ -49,6 +49,11 @@ export const slitMode: ModeRecord = {
   maxSubExposureS: 1800,
   systematicFloor: 0.002,
   twilightLimitDeg: -18,
+  skySubtraction: 'around',
+  backgroundPixels: null,
+  thermalEPerS: 0,
+  opticsArcsec: 0,
+  dispersionCorrected: false,
   throughput: [
     { wavelengthA: 5600, efficiency: 0.15 },
     { wavelengthA: 7700, efficiency: 0.27 },

@@ -49,6 +49,15 @@ export interface ModeRecord {
   maxSubExposureS: number
   systematicFloor: number
   twilightLimitDeg: number
+  /** From pixels around the source, from the next frame in pairs, or from frames of blank sky. */
+  skySubtraction: 'around' | 'paired' | 'blank-sky'
+  /** Pixels the sky around is measured from; null for as many as one likes. */
+  backgroundPixels: number | null
+  /** Glow of telescope and instrument, electrons a second and pixel. */
+  thermalEPerS: number
+  /** Width of the image the optics alone make. */
+  opticsArcsec: number
+  dispersionCorrected: boolean
   throughput: { wavelengthA: number; efficiency: number }[]
   throughputIncludes: string[]
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }

@@ -30,6 +30,12 @@ export function scienceMode(mode: ModeRecord): ScienceMode {
     band: mode.band,
     twilightLimitDeg: mode.twilightLimitDeg,
     overheads: mode.overheads,
+    // A version that was frozen before these were recorded holds none of them.
+    skySubtraction: mode.skySubtraction ?? 'around',
+    backgroundPixels: mode.backgroundPixels ?? undefined,
+    thermalEPerS: mode.thermalEPerS ?? 0,
+    opticsArcsec: mode.opticsArcsec ?? 0,
+    dispersionCorrected: mode.dispersionCorrected ?? false,
   }
 }
 
@@ -48,11 +54,13 @@ export function scienceSite(site: SiteRecord): ScienceSite {
 }
 
 /** The shape of a target as the exposure engine takes it. A uniform one is a disc of its half-light radius. */
-export function scienceGeometry(target: Pick<Target, 'geometry' | 'effectiveRadiusArcsec'>): Geometry {
+export function scienceGeometry(
+  target: Pick<Target, 'geometry' | 'effectiveRadiusArcsec' | 'sersicIndex'>,
+): Geometry {
   const radius = target.effectiveRadiusArcsec
   if (target.geometry === 'point' || radius === null) return { kind: 'point' }
   return target.geometry === 'sersic'
-    ? { kind: 'extended', effectiveRadiusArcsec: radius }
+    ? { kind: 'extended', effectiveRadiusArcsec: radius, sersicIndex: target.sersicIndex ?? 1 }
     : { kind: 'uniform', areaArcsec2: Math.PI * radius ** 2 }
 }
 

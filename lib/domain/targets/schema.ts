@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { parseDeclination, parseRightAscension } from '@/lib/science/sky'
+import { SERSIC_LEAST, SERSIC_MOST } from '@/lib/science/exposure'
 import { parseMagnitude } from '@/lib/science/magnitude'
 import { parseRedshift } from '@/lib/science/redshift'
 import type { TargetValues } from './types'
@@ -32,7 +33,7 @@ const cells = z.object({
   need: z.enum(['required', 'optional', 'backup']),
   geometry: z.enum(['point', 'sersic', 'uniform']),
   effectiveRadius: typedNumber('A half-light radius', 0.01, 600),
-  sersicIndex: typedNumber('A Sérsic index', 0.3, 10),
+  sersicIndex: typedNumber('A Sérsic index', SERSIC_LEAST, SERSIC_MOST),
   pmRa: typedNumber('A proper motion', -20_000, 20_000),
   pmDec: typedNumber('A proper motion', -20_000, 20_000),
   epoch: typedNumber('An epoch', 1900, 2100),
