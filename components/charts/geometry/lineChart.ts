@@ -1,11 +1,13 @@
 import { scaleLinear, scaleLog, type ScaleContinuousNumeric } from 'd3-scale'
 import { line } from 'd3-shape'
 import type { SeriesTone } from './chartTypes'
-import { placeLabels, wordBox } from './placeLabels'
+import { LETTER, placeLabels, wordBox } from './placeLabels'
 
 export interface LineSeries {
   id: string
   name: string
+  /** What stands at its line where the name would take most of the plot. */
+  brief?: string
   tone: SeriesTone
   /** In order of x; a gap is a new series. */
   points: readonly (readonly [number, number])[]
@@ -82,7 +84,7 @@ export function lineChart({
     const last = one.points[one.points.length - 1] ?? [0, 0]
     return {
       id: one.id,
-      name: one.name,
+      name: one.brief && one.name.length * LETTER > width * 0.8 ? one.brief : one.name,
       tone: one.tone,
       chosen: one.chosen ?? false,
       d: path(one.points) ?? '',
@@ -92,9 +94,9 @@ export function lineChart({
   const xTicks = xLog ? decadeTicks(x.domain()) : x.ticks(width < 360 ? 4 : 7)
   if (labels === 'beside') return { x, y, xTicks, yTicks: y.ticks(5), paths: spreadLabels(paths, height) }
   const inside = placeLabels(
-    series.map(({ id, name, points }) => ({
+    series.map(({ id, points }, index) => ({
       id,
-      words: name,
+      words: paths[index]?.name ?? '',
       points: points.filter(([, value]) => Number.isFinite(value)).map(([px, py]) => [x(px), y(py)] as const),
     })),
     width,

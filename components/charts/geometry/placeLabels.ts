@@ -19,7 +19,8 @@ export interface Box {
   bottom: number
 }
 
-const LETTER = 7.1
+/** Width of a letter at 13 px, px. */
+export const LETTER = 7.1
 const HEIGHT = 15
 /** Left free beside words, px. */
 const CLEAR = 4

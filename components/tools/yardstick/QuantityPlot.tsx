@@ -75,6 +75,7 @@ export function QuantityPlot(props: QuantityPlotProps) {
         series={shown.map((curve) => ({
           id: String(curve.place),
           name: curve.ends ? `${curve.name} ${curve.ends}` : curve.name,
+          brief: curve.ends ?? undefined,
           tone: toneOf(curve.place),
           points: curve.points,
           chosen: curve.place === 0,

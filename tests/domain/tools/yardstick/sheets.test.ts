@@ -17,8 +17,8 @@ import { nearSheet } from '@/lib/domain/tools/yardstick/sheets/nearSheet'
 import { emptyOwn, type Chosen } from '@/lib/domain/tools/yardstick/state'
 import { readyUniverses, universesOf } from '@/lib/domain/tools/yardstick/universes'
 
-// Seen to fail with D_M written for D_L, with the power of the sky-limited time as 2, with the apostrophe of csvCell
-// left out, and with values rounded in the files.
+// Seen to fail with D_M written for D_L, with the power of the sky-limited time as 2, and with values rounded in the
+// files.
 
 interface Reference {
   models: { name: string; rows: Record<string, number>[] }[]
