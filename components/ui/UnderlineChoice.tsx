@@ -1,6 +1,6 @@
 'use client'
 
-import { useId } from 'react'
+import { useEffect, useId, useRef } from 'react'
 import { classNames } from './classNames'
 
 export interface UnderlineChoiceProps<Value extends string> {
@@ -18,8 +18,17 @@ export interface UnderlineChoiceProps<Value extends string> {
 export function UnderlineChoice<Value extends string>(props: UnderlineChoiceProps<Value>) {
   const { label, shown = false, options, value, onChange, main = false } = props
   const name = useId()
+  const group = useRef<HTMLFieldSetElement>(null)
+  useEffect(() => {
+    // A choice made before the page had come to life stands in the page only.
+    const early = group.current?.querySelector<HTMLInputElement>('input:checked')?.value
+    const chosen = options.find((option) => option.value === early)
+    if (chosen && chosen.value !== value) onChange(chosen.value)
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [])
   return (
     <fieldset
+      ref={group}
       className={classNames(
         'm-0 flex min-w-0 flex-wrap items-stretch gap-x-5 border-0 p-0 text-table',
         main && 'gap-x-7 border-b border-rule max-sm:grid max-sm:grid-cols-2 max-sm:gap-x-4',

@@ -4,6 +4,7 @@ import { useId, type ReactNode } from 'react'
 import { FieldFrame } from '@/components/forms/FieldFrame'
 import { controlClasses } from '@/components/forms/controlClasses'
 import { classNames } from '@/components/ui/classNames'
+import { earlyMark } from './useTypedEarly'
 
 export interface LedgerAreaProps {
   label: string
@@ -42,6 +43,7 @@ export function LedgerArea({ label, help, value, onChange, troubles, read }: Led
         }
       >
         <textarea
+          {...earlyMark}
           id={id}
           rows={7}
           value={value}
