@@ -6,6 +6,7 @@ import { fileURLToPath } from 'node:url'
 const folder = fileURLToPath(new URL('./bench/', import.meta.url))
 const files = readdirSync(folder).filter((name) => name.endsWith('.bench.ts'))
 const rows = []
+spawnSync('npx', ['tsx', `${folder}ensureAstropy.ts`], { stdio: 'inherit' })
 let failed = false
 
 for (const file of files.sort()) {

@@ -8,6 +8,7 @@ import type { CosmologyQuantity } from './types'
 
 /** What loops over many redshifts read: tables, and the slower way for what no table has. */
 export interface BatchSource {
+  readonly H0: number
   readonly Ok0: number
   readonly hubbleDistanceMpc: number
   readonly hubbleTimeGyr: number
@@ -84,6 +85,13 @@ export function createBatch(
         const d = slot(out, i)
         out[i] = finite((dH * d * d) / one.E(slot(z, i)))
       }
+    },
+    E(z, out) {
+      source.tables.E().fill(z, out, one.E)
+    },
+    hubbleKmSMpc(z, out) {
+      source.tables.E().fill(z, out, one.E)
+      for (let i = 0; i < out.length; i += 1) out[i] = finite(source.H0 * slot(out, i))
     },
     lookbackGyr(z, out) {
       source.tables.pastTime().fill(z, out, source.lookback)

@@ -50,6 +50,11 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     if (age) return age(x)
     throw new ScienceError('no-beginning', `${parameters.name} has no big bang to count an age from.`)
   }
+  const E2 = (z: number): number => finite(density.E2(check.any(z), 1 + z))
+  const E = (z: number): number => {
+    const value = tables.E().read(z)
+    return Number.isNaN(value) ? Math.sqrt(E2(z)) : value
+  }
   /** What is seen across the sky must stay short of the antipode. */
   const chiAcross = (z: number): number => antipode.guard(chi(z), z)
   const transverse = (z: number): number => {
@@ -57,12 +62,11 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     return hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)
   }
   const luminosity = (z: number): number => (1 + z) * transverse(z)
-  const E2 = (z: number): number => finite(density.E2(check.any(z), 1 + z))
   const kpcComovingPerArcsec = (z: number): number => transverse(z) * ARCSEC_RAD * 1e3
 
   const quantities: Record<CosmologyQuantity, (z: number) => number> = {
-    E: (z) => Math.sqrt(E2(z)),
-    hubbleKmSMpc: (z) => finite(parameters.H0 * Math.sqrt(E2(z))),
+    E,
+    hubbleKmSMpc: (z) => finite(parameters.H0 * E(z)),
     comovingMpc: (z) => hubbleDistanceMpc * chi(z),
     transverseComovingMpc: transverse,
     angularDiameterMpc: (z) => transverse(z) / (1 + z),
@@ -76,7 +80,7 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
     },
     differentialVolumeMpc3Sr(z) {
       const d = transverse(z)
-      return finite((hubbleDistanceMpc * d * d) / Math.sqrt(E2(z)))
+      return finite((hubbleDistanceMpc * d * d) / E(z))
     },
     kpcPerArcsec: (z) => kpcComovingPerArcsec(z) / (1 + z),
     kpcComovingPerArcsec,
@@ -120,6 +124,7 @@ export function createCosmology(parameters: CosmologyParameters): Cosmology {
       return (hubbleDistanceMpc * d * transverseFactor(Ok0 * d * d)) / (1 + z2)
     },
     batch: createBatch({
+      H0: parameters.H0,
       Ok0,
       hubbleDistanceMpc,
       hubbleTimeGyr,

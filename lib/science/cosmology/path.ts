@@ -1,5 +1,5 @@
 import type { Density } from './density'
-import { createIntegralTable, type IntegralTable } from './integralTable'
+import { createIntegralTable } from './integralTable'
 
 /** Pieces tables start from, in x: shorter where dark energy, matter and radiation take turns. */
 const PIECE = 0.5
@@ -50,7 +50,8 @@ function plainPath(density: Density, weight: Weight, end: number): Path {
 function turningPath(density: Density, weight: Weight, end: number): Path {
   const direction = end < 0 ? -1 : 1
   const length = Math.abs(end)
-  const near = Math.min(NEAR_TURN, length)
+  // Never up to now: what is counted back from the turn has lost its relative accuracy by then.
+  const near = Math.min(NEAR_TURN, 0.5 * length)
   const g = (s: number): number => {
     const x = direction * s
     return Math.exp(weight * x) / Math.sqrt(density.E2(x))
@@ -59,16 +60,16 @@ function turningPath(density: Density, weight: Weight, end: number): Path {
     const d = -direction * u * u
     return (2 * u * Math.exp(weight * (end + d))) / Math.sqrt(density.riseE2(end, d))
   }
-  const far: IntegralTable | null = length > near ? createIntegralTable(g, knotsTo(length - near)) : null
+  const far = createIntegralTable(g, knotsTo(length - near))
   const last = createIntegralTable(gNear, knotsTo(Math.sqrt(near)))
-  const total = (far ? far.total : 0) + last.total
+  const total = far.total + last.total
   return {
     end,
     total: direction * total,
     read(x) {
       const s = Math.min(direction * x, length)
       if (s <= 0) return 0
-      if (far && s <= length - near) return direction * far.read(s)
+      if (s <= length - near) return direction * far.read(s)
       return direction * (total - last.read(Math.sqrt(length - s)))
     },
   }

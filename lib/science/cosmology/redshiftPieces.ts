@@ -9,42 +9,42 @@ import { slot } from '../numeric/slot'
 export const PIECES_PER_OCTAVE = 16
 const OCTAVES = 11
 export const PIECES = PIECES_PER_OCTAVE * OCTAVES
-/** The pieces end here. */
-export const PIECES_END = 2 ** OCTAVES - 1
 
 export const basis = createChebyshevBasis(10)
 
 /** Error, in units of the integrand, below which a piece is taken; above, it is left to the slower way. */
 const CONVERGED = 2e-13
 
+const octaveOf = (i: number): number => 2 ** Math.floor(i / PIECES_PER_OCTAVE)
+const widths = Float64Array.from({ length: PIECES }, (_, i) => octaveOf(i) / PIECES_PER_OCTAVE)
+const lows = Float64Array.from(
+  { length: PIECES },
+  (_, i) => octaveOf(i) * (1 + (i % PIECES_PER_OCTAVE) / PIECES_PER_OCTAVE) - 1,
+)
+/** Every node of every piece, in z. */
+const places = Float64Array.from({ length: PIECES * basis.order }, (_, index) => {
+  const i = Math.floor(index / basis.order)
+  return slot(lows, i) + slot(widths, i) * slot(basis.nodes, index % basis.order)
+})
+
 /** Width of a piece, in z. Exact. */
-export function pieceWidth(i: number): number {
-  return 2 ** Math.floor(i / PIECES_PER_OCTAVE) / PIECES_PER_OCTAVE
-}
+export const pieceWidth = (i: number): number => slot(widths, i)
 
 /** Low end of a piece, in z. Exact. */
-export function pieceLow(i: number): number {
-  const octave = Math.floor(i / PIECES_PER_OCTAVE)
-  return 2 ** octave * (1 + (i % PIECES_PER_OCTAVE) / PIECES_PER_OCTAVE) - 1
-}
+export const pieceLow = (i: number): number => slot(lows, i)
 
-/** f at the nodes of every piece that lies before `end`. */
+/** f at the nodes of every piece that lies before `end`, NaN at the others. */
 export function valuesOnPieces(f: (z: number) => number, end: number): Float64Array {
   const values = new Float64Array(PIECES * basis.order).fill(NaN)
   for (let i = 0; i < PIECES && pieceLow(i) + pieceWidth(i) <= end; i += 1) {
-    for (let j = 0; j < basis.order; j += 1) {
-      values[i * basis.order + j] = f(pieceLow(i) + pieceWidth(i) * slot(basis.nodes, j))
-    }
+    for (let j = i * basis.order; j < (i + 1) * basis.order; j += 1) values[j] = f(slot(places, j))
   }
   return values
 }
 
 /** Values on pieces, each over its 1 + z: the integrand of time from that of distance. */
 export function overOnePlusZ(values: Float64Array): Float64Array {
-  return values.map((value, index) => {
-    const i = Math.floor(index / basis.order)
-    return value / (1 + pieceLow(i) + pieceWidth(i) * slot(basis.nodes, index % basis.order))
-  })
+  return values.map((value, index) => value / (1 + slot(places, index)))
 }
 
 /**

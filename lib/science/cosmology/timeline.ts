@@ -23,8 +23,9 @@ export interface Timeline {
   futureTime(): Path
   /** Time since the big bang over the Hubble time; null where there was none. */
   age(): ((x: number) => number) | null
-  /** The same three by redshift, for z from 0 to some 2000 and away from turns. */
+  /** The same three, and E, by redshift, for z from 0 to some 2000 and away from turns. */
   readonly tables: {
+    E(): RedshiftTable
     distance(): RedshiftTable
     pastTime(): RedshiftTable
     age(): RedshiftTable | null
@@ -108,11 +109,15 @@ function createTables(
   slow: Pick<Timeline, 'pastEnd' | 'distance' | 'pastTime' | 'age'>,
 ): Timeline['tables'] {
   const end = Math.expm1(slow.pastEnd)
-  const distanceValues = once(() =>
-    valuesOnPieces((z) => 1 / Math.sqrt(density.E2(Math.log1p(z), 1 + z)), end),
-  )
+  const E = (z: number): number => Math.sqrt(density.E2(Math.log1p(z), 1 + z))
+  const distanceValues = once(() => valuesOnPieces((z) => 1 / E(z), end))
   const timeMeans = once(() => meansOnPieces(overOnePlusZ(distanceValues())))
   return {
+    // As the running integral of its own slope, it is a table like the others.
+    E: once(() => {
+      const slope = (z: number): number => density.slopeE2(Math.log1p(z)) / (2 * E(z) * (1 + z))
+      return createRedshiftTable(meansOnPieces(valuesOnPieces(slope, end)), (i) => E(pieceLow(i)), 1)
+    }),
     distance: once(() => {
       const means = meansOnPieces(distanceValues())
       const start = startsOfPieces(means, end, (z) => slow.distance().read(Math.log1p(z)))

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { createCosmology, type CosmologyParameters } from '../../../lib/science/cosmology'
+import { integrate } from '../../../lib/science/numeric/gaussLegendre'
 import { ScienceError } from '../../../lib/science/ScienceError'
 import { relativeError } from '../support/relativeError'
 
@@ -106,6 +107,107 @@ describe('property', () => {
         }
       }),
       { numRuns: 100, seed: SEED },
+    )
+  })
+
+  it('distance and lookback time are the integrals they claim to be, by another rule of quadrature', () => {
+    fc.assert(
+      fc.property(parameters, double(1e-3, 1100), (p, z) => {
+        const cosmology = createCosmology(p)
+        const distance = attempt(() => cosmology.comovingMpc(z))
+        // Next to a turn the integrand has no smooth rule; analytic bounces are checked elsewhere.
+        if (distance instanceof ScienceError || cosmology.universe.origin === 'bounce') return
+        const over = (f: (x: number) => number): number => {
+          const pieces = Math.ceil(Math.log1p(z) * 40)
+          const step = Math.log1p(z) / pieces
+          let sum = 0
+          for (let i = 0; i < pieces; i += 1) sum += integrate(f, i * step, (i + 1) * step)
+          return sum
+        }
+        const E = (x: number): number => cosmology.E(Math.expm1(x))
+        const chi = over((x) => Math.exp(x) / E(x))
+        const time = over((x) => 1 / E(x))
+        expect(relativeError(distance, cosmology.hubbleDistanceMpc * chi)).toBeLessThan(1e-11)
+        expect(relativeError(cosmology.lookbackGyr(z), cosmology.hubbleTimeGyr * time)).toBeLessThan(1e-11)
+      }),
+      { numRuns: 60, seed: SEED },
+    )
+  })
+
+  it('lookback time and age go on evenly, into the future too', () => {
+    fc.assert(
+      fc.property(parameters, double(-0.9, 1000), double(-0.9, 1000), (p, a, b) => {
+        const cosmology = createCosmology(p)
+        const [near, far] = [Math.min(a, b), Math.max(a, b)]
+        const [late, early] = [near, far].map((z) => attempt(() => cosmology.lookbackGyr(z)))
+        if (late instanceof ScienceError || early instanceof ScienceError) return
+        expect(early).toBeGreaterThanOrEqual(late ?? NaN)
+        if (near < 0) expect(late).toBeLessThanOrEqual(0)
+        const [old, young] = [near, far].map((z) => attempt(() => cosmology.ageGyr(z)))
+        if (old instanceof ScienceError || young instanceof ScienceError) return
+        // Past and future meet at z = 0 to rounding.
+        expect(young).toBeLessThanOrEqual((old ?? NaN) * (1 + 1e-14))
+      }),
+      { numRuns: 200, seed: SEED },
+    )
+  })
+
+  it('every quantity that can be turned round comes back, from random redshifts', () => {
+    const invertible = [
+      'lookbackGyr',
+      'ageGyr',
+      'comovingMpc',
+      'luminosityMpc',
+      'distanceModulusMag',
+    ] as const
+    fc.assert(
+      fc.property(parameters, double(0.01, 10), fc.constantFrom(...invertible), (p, z, quantity) => {
+        const cosmology = createCosmology(p)
+        const value = attempt(() => cosmology[quantity](z))
+        if (value instanceof ScienceError) return
+        const found = cosmology.redshiftsAt(quantity, value)
+        const nearest = Math.min(...found.map((root) => relativeError(root, z)))
+        // Where the quantity hardly changes with z, a value says little about z: then its own value must come back.
+        const again = Math.min(...found.map((root) => relativeError(cosmology[quantity](root), value)))
+        expect(again).toBeLessThan(1e-10)
+        const steps = [z * (1 - 1e-4), z].map((at) => cosmology[quantity](at))
+        const steepness = relativeError(steps[0] ?? NaN, steps[1] ?? NaN) / 1e-4
+        if (steepness > 0.1) expect(nearest).toBeLessThan(1e-8)
+      }),
+      { numRuns: 200, seed: SEED },
+    )
+  })
+
+  it('curvature goes through zero without a step, whatever the rest', () => {
+    fc.assert(
+      fc.property(parameters, double(0.01, 20), fc.constantFrom(1e-4, 1e-7, 1e-10), (p, z, small) => {
+        const flat = createCosmology({ ...p, Ode0: 'flat' })
+        const E = attempt(() => flat.E(z))
+        if (E instanceof ScienceError) return
+        // Small against all else at z, where curvature weighs (1+z)^2.
+        const weight = Math.min(1, (E / (1 + z)) ** 2)
+        const by = small * weight
+        const [closed, open] = [by, -by].map((more) => createCosmology({ ...p, Ode0: flat.Ode0 + more }))
+        for (const quantity of [
+          'luminosityMpc',
+          'comovingVolumeMpc3',
+          'lookbackGyr',
+          'kpcPerArcsec',
+        ] as const) {
+          const values = [flat, closed, open].map((c) => (c ? attempt(() => c[quantity](z)) : NaN))
+          if (values.some((value) => value instanceof ScienceError)) return
+          const [middle, below, above] = values as number[]
+          const [down, up] = [(below ?? NaN) - (middle ?? NaN), (above ?? NaN) - (middle ?? NaN)]
+          // The steps to either side are opposite to first order, so half their sum is of second order. Where
+          // curvature outweighs the rest, so does the rounding of Ode0 itself.
+          const second = Math.abs(down + up) / 2
+          const first = Math.max(Math.abs(down), Math.abs(up))
+          expect(second, `${quantity} at ${z}`).toBeLessThanOrEqual(
+            0.05 * first + (1e-12 / weight) * Math.abs(middle ?? NaN),
+          )
+        }
+      }),
+      { numRuns: 200, seed: SEED },
     )
   })
 })
