@@ -1,3 +1,4 @@
+import { classNames } from '@/components/ui/classNames'
 import { formatNumber } from '@/lib/format'
 
 export interface ChanceBarProps {
@@ -13,9 +14,10 @@ const words = (chance: number) =>
 export function ChanceBar({ chance, grey = false }: ChanceBarProps) {
   return (
     <span
-      className={
-        grey ? 'inline-flex items-center gap-2 font-semibold text-lamp' : 'inline-flex items-center gap-2'
-      }
+      className={classNames(
+        'inline-flex items-center gap-2 whitespace-nowrap',
+        grey && 'font-semibold text-lamp',
+      )}
     >
       <svg width="60" height="12" aria-hidden="true" focusable="false">
         <path d="M0 8.5H60M0.5 8.5V2M30 9V3" stroke="var(--edge)" />

@@ -11,7 +11,18 @@ export function decisionColumns(
   onOpen: (proposalId: number | null) => void,
 ): TableColumn<DecisionRow>[] {
   return [
-    { id: 'rank', head: 'Rank', align: 'right', value: (row) => row.rank },
+    {
+      id: 'rank',
+      head: 'Rank',
+      align: 'right',
+      value: (row) => row.rank,
+      cell: (row) => (
+        <>
+          <span className="sm:hidden">Rank </span>
+          {row.rank}
+        </>
+      ),
+    },
     {
       id: 'number',
       head: 'Review',
@@ -22,7 +33,7 @@ export function decisionColumns(
           type="button"
           aria-expanded={open === row.proposalId}
           onClick={() => onOpen(open === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} font-semibold max-sm:min-h-11`}
+          className={`${linkClasses} font-semibold whitespace-nowrap max-sm:min-h-11`}
         >
           {row.reviewNumber}
         </button>

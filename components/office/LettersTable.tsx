@@ -48,6 +48,7 @@ const columns: TableColumn<LetterRow>[] = [
   {
     id: 'error',
     head: 'The mail server said',
+    wide: true,
     value: (row) => row.lastError,
     cell: (row) => row.lastError ?? ABSENT,
   },
@@ -88,6 +89,7 @@ export function LettersTable({
           { id: 'sent', label: 'Sent', matches: (row) => row.state === 'sent' },
         ]}
         csv="letters"
+        page={50}
         tone={(row) => (row.state === 'parked' ? 'not-feasible' : null)}
         empty={
           <EmptyState title="No letter yet">Letters appear here as soon as they are written.</EmptyState>

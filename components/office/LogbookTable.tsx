@@ -20,12 +20,14 @@ const columns: TableColumn<LogbookTableRow>[] = [
   {
     id: 'before',
     head: 'Before',
+    wide: true,
     value: (row) => row.before,
     cell: (row) => <span className="[overflow-wrap:anywhere] text-muted">{short(row.before) || ABSENT}</span>,
   },
   {
     id: 'after',
     head: 'After',
+    wide: true,
     value: (row) => row.after,
     cell: (row) => <span className="[overflow-wrap:anywhere]">{short(row.after) || ABSENT}</span>,
   },
@@ -56,6 +58,7 @@ export function LogbookTable({ initial }: { initial: LogbookReply }) {
         rowId={(row) => String(row.id)}
         find="Who, what or of what"
         csv="logbook"
+        page={50}
         phone="cards"
       />
       {query.hasNextPage ? (

@@ -39,9 +39,11 @@ export function AssignmentsTable(props: AssignmentsTableProps) {
         unit: 'number',
         value: (row) => row.reviewNumber,
         cell: (row) => (
-          <TextLink href={paths.panelPacket(view.callSlug, row.reviewNumber)} plain strong>
-            {row.reviewNumber}
-          </TextLink>
+          <span className="whitespace-nowrap">
+            <TextLink href={paths.panelPacket(view.callSlug, row.reviewNumber)} plain strong>
+              {row.reviewNumber}
+            </TextLink>
+          </span>
         ),
       },
       { id: 'title', head: 'Title', value: (row) => row.title },
@@ -52,6 +54,7 @@ export function AssignmentsTable(props: AssignmentsTableProps) {
         head: 'Who reads it',
         unit: 'first reader, second voice, then the others',
         sortable: false,
+        wide: true,
         value: (row) => row.readers.map((reader) => nameOf(reader.personId)).join(', '),
         cell: (row) => (
           <span className="inline-flex flex-wrap items-center gap-1.5">

@@ -7,24 +7,23 @@ import { formatNumber } from '@/lib/format'
 export interface DiscussionListProps {
   view: DiscussionView
   openId: number
-  /** The panel's page; a proposal is named after it. */
-  address: string
+  /** Where a proposal is discussed, by its review number. */
+  addressOf: (reviewNumber: string) => string
 }
 
 /** The proposals in order, the line through them; one is open beside. */
-export function DiscussionList({ view, openId, address }: DiscussionListProps) {
+export function DiscussionList({ view, openId, addressOf }: DiscussionListProps) {
   const { line } = view.ranking
-  const at = address.includes('?') ? '&' : '?'
   return (
     <nav aria-label="Proposals in order" className="min-w-0">
-      <ol className="plain-list text-table rule-open">
+      <ol className="plain-list text-table rule-open max-lg:max-h-64 max-lg:overflow-y-auto max-lg:border-b max-lg:border-b-rule">
         {view.proposals.map((one) => (
           <li
             key={one.proposalId}
             className={one.rank === line ? 'border-b-2 border-lamp' : 'border-b border-rule'}
           >
             <Link
-              href={`${address}${at}proposal=${encodeURIComponent(one.reviewNumber)}`}
+              href={addressOf(one.reviewNumber)}
               aria-current={one.proposalId === openId ? 'true' : undefined}
               className={classNames(
                 'flex items-baseline gap-3 py-2 no-underline hover:bg-wash max-sm:min-h-11',
@@ -34,7 +33,7 @@ export function DiscussionList({ view, openId, address }: DiscussionListProps) {
             >
               <span className="w-6 shrink-0 text-right text-muted">{one.rank}</span>
               <span className="shrink-0 font-semibold">{one.reviewNumber}</span>
-              <span className="min-w-0 grow truncate">{one.setAside ? 'set aside' : one.title}</span>
+              <span className="min-w-0 grow">{one.setAside ? 'set aside' : one.title}</span>
               <span className={isGrey(one.chance) ? 'font-semibold text-lamp' : undefined}>
                 {formatNumber(one.raw, 2)}
               </span>

@@ -6,6 +6,7 @@ import { KeyFigure } from '@/components/ui/KeyFigure'
 import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
+import { TextLink } from '@/components/ui/TextLink'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import { assignmentsView, type AssignmentsView } from '@/lib/domain/assignments/assignmentsView'
@@ -48,14 +49,19 @@ export function ProgressBoard({ initial, remind }: ProgressBoardProps) {
       <div className="mt-6 flex flex-wrap gap-x-16 gap-y-4">
         <KeyFigure
           value={all > 0 ? formatPercent(finished / all) : '–'}
-          label={`${finished} of ${countInWords(all, 'review', 'reviews')} finished`}
+          label={
+            all > 0 ? `${finished} of ${countInWords(all, 'review', 'reviews')} finished` : 'nothing assigned'
+          }
         />
         <KeyFigure value={all - finished} label="owed" />
         <KeyFigure value={waiting} label="proposals wait for a review" />
       </div>
       {all === 0 ? (
         <div className="mt-6">
-          <BarNote tone="lamp">Nothing is assigned yet. Begin with the assignments.</BarNote>
+          <BarNote tone="lamp">
+            Nothing is assigned yet.{' '}
+            <TextLink href={panelPath('assignments')}>Begin with the assignments</TextLink>
+          </BarNote>
         </div>
       ) : null}
       <section className="mt-10">

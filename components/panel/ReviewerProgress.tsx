@@ -4,6 +4,7 @@ import { DataTable } from '@/components/tables/DataTable'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
+import { ABSENT } from '@/lib/format'
 import type { AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/assignmentsView'
 import { PagesBar } from './PagesBar'
 
@@ -39,6 +40,16 @@ function columnsFor({ view, busy, onRemind }: ReviewerProgressProps): TableColum
       unit: isLate ? 'late now' : 'not finished',
       sortable: false,
       value: (row) => row.owed.join(', '),
+      cell: (row) =>
+        row.owed.length === 0
+          ? ABSENT
+          : row.owed.map((number, index) => (
+              <span key={number} className="whitespace-nowrap">
+                {index > 0 ? ' ' : ''}
+                {number}
+                {index < row.owed.length - 1 ? ', ' : ''}
+              </span>
+            )),
     },
     {
       id: 'names',
@@ -56,15 +67,17 @@ function columnsFor({ view, busy, onRemind }: ReviewerProgressProps): TableColum
         ) : row.whyNotReminded ? (
           <span className="text-muted">{row.whyNotReminded}</span>
         ) : (
-          <Button
-            look="secondary"
-            size="small"
-            busy={busy === `remind-${row.personId}`}
-            busyWord="Writing"
-            onClick={() => onRemind(row)}
-          >
-            Remind
-          </Button>
+          <span className="-my-1.5 inline-block max-sm:my-0">
+            <Button
+              look="secondary"
+              size="small"
+              busy={busy === `remind-${row.personId}`}
+              busyWord="Writing"
+              onClick={() => onRemind(row)}
+            >
+              Remind
+            </Button>
+          </span>
         ),
     },
   ]

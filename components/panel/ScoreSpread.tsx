@@ -1,12 +1,19 @@
+import { stackLevels } from '@/components/charts/geometry/stackLevels'
 import type { DiscussedProposal } from '@/lib/domain/rankings/readDiscussion'
 import { formatNumber } from '@/lib/format'
 
-const width = 260
-const x = (score: number) => 8 + (score / 10) * (width - 16)
+const width = 288
+const step = 20
+const x = (score: number) => 8 + (score / 10) * (width - 24)
 
-/** The scores on the scale 0 to 10, each with its reviewer's number; the mean as a tick. */
+/** The scores on the scale 0 to 10, each with its reviewer's number beside it, stacked where they agree; the mean as a tick. */
 export function ScoreSpread({ proposal }: { proposal: DiscussedProposal }) {
   const { scores, raw } = proposal
+  const levels = stackLevels(
+    scores.map((one) => x(one.score)),
+    30,
+  )
+  const axis = (Math.max(0, ...levels) + 1) * step + 6
   return (
     <svg
       role="img"
@@ -16,32 +23,37 @@ export function ScoreSpread({ proposal }: { proposal: DiscussedProposal }) {
           : 'No scores yet'
       }
       width={width}
-      height="58"
+      height={axis + 20}
+      className="max-w-full"
     >
-      <path d={`M${x(0)} 38H${x(10)}`} stroke="var(--ink)" />
+      <path d={`M${x(0)} ${axis}H${x(10)}`} stroke="var(--ink)" />
       {[0, 2, 4, 6, 8, 10].map((tick) => (
         <g key={tick}>
-          <path d={`M${x(tick)} 38V44`} stroke="var(--ink)" />
-          <text x={x(tick)} y="56" textAnchor="middle" fontSize="12" fill="var(--ink-muted)">
+          <path d={`M${x(tick)} ${axis}V${axis + 6}`} stroke="var(--ink)" />
+          <text x={x(tick)} y={axis + 18} textAnchor="middle" fontSize="12" fill="var(--ink-muted)">
             {tick}
           </text>
         </g>
       ))}
-      {raw === null ? null : <path d={`M${x(raw)} 16V38`} stroke="var(--lamp)" strokeWidth="2" />}
-      {scores.map((one, index) => (
-        <g key={one.reviewer}>
-          <circle cx={x(one.score)} cy="30" r="4" fill="none" stroke="var(--s1)" strokeWidth="1.8" />
-          <text
-            x={x(one.score)}
-            y={index % 2 === 0 ? 20 : 10}
-            textAnchor="middle"
-            fontSize="11"
-            fill="var(--ink-muted)"
-          >
-            {one.reviewer}
-          </text>
-        </g>
-      ))}
+      {raw === null ? null : <path d={`M${x(raw)} 2V${axis}`} stroke="var(--lamp)" strokeWidth="2" />}
+      {scores.map((one, index) => {
+        const y = axis - 10 - (levels[index] ?? 0) * step
+        return (
+          <g key={one.reviewer}>
+            <circle
+              cx={x(one.score)}
+              cy={y}
+              r="4"
+              fill="var(--ground)"
+              stroke="var(--s1)"
+              strokeWidth="1.8"
+            />
+            <text x={x(one.score) + 8} y={y + 4} fontSize="11" fill="var(--ink)" className="ground-halo">
+              {one.reviewer}
+            </text>
+          </g>
+        )
+      })}
     </svg>
   )
 }

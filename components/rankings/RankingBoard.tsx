@@ -41,7 +41,11 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
     <>
       <PageTitle
         title="Ranking"
-        lead={`${countInWords(view.rows.length, 'proposal', 'proposals', true)}, ${countInWords(view.scores, 'score', 'scores')} from ${countInWords(view.reviewers, 'reviewer', 'reviewers')}, all given before discussion.`}
+        lead={
+          view.scores === 0
+            ? `${countInWords(view.rows.length, 'proposal', 'proposals', true)}, no score yet.`
+            : `${countInWords(view.rows.length, 'proposal', 'proposals', true)}, ${countInWords(view.scores, 'score', 'scores')} from ${countInWords(view.reviewers, 'reviewer', 'reviewers')}, all given before discussion.`
+        }
         actions={
           <RankingHeadActions
             view={view}

@@ -43,7 +43,18 @@ function Interval({
 export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingRow>[] {
   const { count, line, zone, selected, onSelect } = input
   return [
-    { id: 'rank', head: 'Rank', align: 'right', value: (row) => row.rank },
+    {
+      id: 'rank',
+      head: 'Rank',
+      align: 'right',
+      value: (row) => row.rank,
+      cell: (row) => (
+        <>
+          <span className="sm:hidden">Rank </span>
+          {row.rank}
+        </>
+      ),
+    },
     {
       id: 'number',
       head: 'Review',
@@ -54,7 +65,7 @@ export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingR
           type="button"
           aria-expanded={selected === row.proposalId}
           onClick={() => onSelect(selected === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} font-semibold max-sm:min-h-11`}
+          className={`${linkClasses} font-semibold whitespace-nowrap max-sm:min-h-11`}
         >
           {row.reviewNumber}
         </button>
@@ -120,6 +131,7 @@ export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingR
       head: 'Where the rank could lie',
       unit: `1 to ${count}`,
       sortable: false,
+      wide: true,
       value: (row) => (row.low === null ? null : `${row.low} to ${row.high ?? row.low}`),
       cell: (row) => (
         <span className="-my-2 inline-block align-middle">

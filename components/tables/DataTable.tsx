@@ -1,7 +1,8 @@
 'use client'
 
 import type { RowData } from '@tanstack/react-table'
-import { useEffect, type ReactNode } from 'react'
+import { useEffect, useState, type ReactNode } from 'react'
+import { Button } from '@/components/ui/Button'
 import { TableBody } from './TableBody'
 import { TableFrame } from './TableFrame'
 import type { TableGroup } from './TableGroups'
@@ -42,6 +43,8 @@ export interface DataTableProps<Row> {
   groups?: readonly TableGroup[]
   /** The one height of its rows, px: a long table is then scrolled in its frame and rendered only where it is seen. */
   rowHeight?: number
+  /** How many rows stand at first; a button shows as many more. Search, order and file know them all. */
+  page?: number
   /** Told of the rows shown, in their order, so that files hold the same. */
   onShown?: (rows: readonly Row[]) => void
   /** More at the right of the tools: links, a small button. */
@@ -53,7 +56,9 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
   const { caption, columns, rows, rowId, empty, find, chips = [], csv, urlPrefix = '', actions } = props
   const [state, setState] = useTableState(urlPrefix)
   const shown = useRows(rows, columns, chips, state)
-  const { frame, view } = useRowWindow(shown.length, props.rowHeight)
+  const [pages, setPages] = useState(1)
+  const standing = props.page === undefined ? shown : shown.slice(0, props.page * pages)
+  const { frame, view } = useRowWindow(standing.length, props.rowHeight)
   const { onShown } = props
   useEffect(() => onShown?.(shown), [onShown, shown])
   const phone = props.phone ?? (columns.length > 5 ? 'cards' : 'scroll')
@@ -88,13 +93,21 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
         />
         <TableBody
           {...props}
-          rows={shown}
+          rows={standing}
           rowId={rowId}
           view={view}
           onShowAll={() => change({ find: '', show: '' })}
         />
         <TableTotals columns={columns} rows={shown} />
       </TableFrame>
+      {props.page !== undefined && standing.length < shown.length ? (
+        <p className="mt-4 mb-0 flex flex-wrap items-center gap-4 text-table" data-no-print>
+          <Button look="secondary" size="small" onClick={() => setPages(pages + 1)}>
+            {`Show ${Math.min(props.page, shown.length - standing.length)} more`}
+          </Button>
+          <span className="text-muted">{`${standing.length} of ${shown.length} stand here; the file holds all of them.`}</span>
+        </p>
+      ) : null}
     </div>
   )
 }

@@ -14,14 +14,14 @@ export function PhoneSort<Row>({ columns, sort, onSort }: PhoneSortProps<Row>) {
   const id = useId()
   return (
     <div className="flex w-full items-center gap-3 sm:hidden">
-      <label htmlFor={id} className="text-table text-muted">
+      <label htmlFor={id} className="text-table whitespace-nowrap text-muted">
         Order by
       </label>
       <select
         id={id}
         value={sort}
         onChange={(event) => onSort(event.target.value)}
-        className="min-h-11 grow rounded border border-edge bg-surface px-3 text-table"
+        className="min-h-11 min-w-0 grow rounded border border-edge bg-surface px-3 text-table"
       >
         <option value="">as given</option>
         {columns

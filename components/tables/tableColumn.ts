@@ -21,6 +21,8 @@ export interface TableColumn<Row> {
   span?: (row: Row) => number
   /** Least width, as CSS, for columns that must not move while a long table is scrolled. */
   width?: string
+  /** On phones under its head and over the whole width: bars, and words that run long. */
+  wide?: boolean
   /** Numbers stand right, with decimals alike in a column. */
   align?: 'left' | 'right'
   /** False where an order would mean nothing. */

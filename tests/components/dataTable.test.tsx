@@ -130,6 +130,20 @@ describe('a table', () => {
     expect(order()).toHaveLength(3)
   })
 
+  it('stands a page at a time; search, sums and the file know every row', async () => {
+    const user = userEvent.setup()
+    show({ page: 2 })
+    expect(order()).toEqual(['4F7-K2M', 'T2R-6QV'])
+    expect(screen.getByRole('cell', { name: '3 proposals' })).toBeTruthy()
+    expect(screen.getByText('2 of 3 stand here; the file holds all of them.')).toBeTruthy()
+    await user.type(screen.getByRole('searchbox'), 'pavo')
+    expect(order()).toEqual(['2M0-YXC'])
+    await user.clear(screen.getByRole('searchbox'))
+    await user.click(screen.getByRole('button', { name: 'Show 1 more' }))
+    expect(order()).toHaveLength(3)
+    expect(screen.queryByRole('button', { name: /more$/ })).toBeNull()
+  })
+
   it('marks the chosen row and says more below one', () => {
     show({
       selectedId: '2M0-YXC',

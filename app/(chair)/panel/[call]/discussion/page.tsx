@@ -2,8 +2,10 @@ import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
 import { DiscussedProposal } from '@/components/panel/DiscussedProposal'
 import { DiscussionList } from '@/components/panel/DiscussionList'
+import { NextInOrder } from '@/components/panel/NextInOrder'
 import { SetAsideTail } from '@/components/panel/SetAsideTail'
 import { EmptyState } from '@/components/ui/EmptyState'
+import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
@@ -20,6 +22,9 @@ export default async function DiscussionPage(props: PanelPageProps) {
   const key = await panelKey(props)
   const view = await orNotFound(readDiscussion(ctx, key))
   const { proposal: wanted } = await props.searchParams
+  const page = paths.panel(key.callSlug, 'discussion', key.panelId)
+  const addressOf = (reviewNumber: string) =>
+    `${page}${page.includes('?') ? '&' : '?'}proposal=${encodeURIComponent(reviewNumber)}`
   const open =
     view.proposals.find((one) => one.reviewNumber === wanted) ??
     view.proposals.find((one) => !one.setAside) ??
@@ -35,23 +40,29 @@ export default async function DiscussionPage(props: PanelPageProps) {
       <SetAsideTail view={view} action={setAsideAction} />
       {open ? (
         <div className="mt-6 grid gap-x-16 gap-y-10 lg:grid-cols-[20rem_minmax(0,1fr)]">
-          <DiscussionList
-            view={view}
-            openId={open.proposalId}
-            address={paths.panel(key.callSlug, 'discussion', key.panelId)}
-          />
-          <DiscussedProposal
-            key={`${open.proposalId}-${open.decisionVersion}`}
-            proposal={open}
-            view={view}
-            save={saveConsensusAction}
-            setAside={setAsideAction}
-          />
+          <DiscussionList view={view} openId={open.proposalId} addressOf={addressOf} />
+          <div className="min-w-0">
+            <DiscussedProposal
+              key={`${open.proposalId}-${open.decisionVersion}`}
+              proposal={open}
+              view={view}
+              save={saveConsensusAction}
+              setAside={setAsideAction}
+            />
+            <NextInOrder proposals={view.proposals} openId={open.proposalId} addressOf={addressOf} />
+          </div>
         </div>
       ) : (
         <div className="mt-6">
-          <EmptyState title="Nothing to discuss yet">
-            Proposals stand here once reviews are in and the ranking has begun.
+          <EmptyState
+            title="Nothing to discuss yet"
+            actions={
+              <LinkButton look="secondary" href={paths.panel(key.callSlug, 'progress', key.panelId)}>
+                See how far the reviews are
+              </LinkButton>
+            }
+          >
+            Proposals stand here once they are sent in and the call has closed.
           </EmptyState>
         </div>
       )}
