@@ -61,7 +61,7 @@ export function SpectrumStrip(props: SpectrumStripProps) {
           fill="var(--surface)"
         />
         {bands.map((band) => (
-          <g key={band.words}>
+          <g key={band.from}>
             <rect
               x={x(band.from)}
               width={x(band.to) - x(band.from)}

@@ -8,6 +8,7 @@ import {
   cosmologyOf,
   hoursHangOn,
   seasonView,
+  whatWouldMove,
   type ReportContents,
 } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
@@ -62,6 +63,9 @@ export function FeasibilityReport({ contents, computation, chosen, hrefOf, aside
     const modeName = contents.modes.find(({ modeId }) => modeId === one.modeId)?.instrument.name ?? ''
     return own.length > 1 ? `${name}, ${modeName}` : name
   }
+
+  const cosmology = cosmologyOf(contents.cosmology.parameters)
+  const input = { contents, target, observation, mode, cosmology }
 
   return (
     <div className="flex flex-col gap-10">
@@ -147,13 +151,8 @@ export function FeasibilityReport({ contents, computation, chosen, hrefOf, aside
             exposure: computed.exposure,
             openShutterSeconds: computed.openShutterSeconds,
           }}
-          hangOn={hoursHangOn({
-            contents,
-            target,
-            observation,
-            mode,
-            cosmology: cosmologyOf(contents.cosmology.parameters),
-          })}
+          hangOn={hoursHangOn(input)}
+          moves={whatWouldMove(input, computed)}
           cosmologyName={computation.cosmologyName}
           fileName={`signal-${fileName}`}
         />

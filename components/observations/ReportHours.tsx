@@ -6,6 +6,7 @@ import { ABSENT, formatDuration, formatHoursFromSeconds, formatNumber, formatPer
 import { cosmologySentence, snrCurve, type HoursHangOn } from '@/lib/domain/observations/rules'
 import type { ExposureFacts, ObservationComputation } from '@/lib/domain/observations/types'
 import type { Observation, Target } from '@/lib/domain/proposals/types'
+import { HoursLedger } from './HoursLedger'
 import { HoursRows } from './HoursRows'
 import { snrWords } from './snrWords'
 
@@ -14,6 +15,8 @@ export interface ReportHoursProps {
   observation: Observation
   computed: ObservationComputation & { exposure: ExposureFacts; openShutterSeconds: number }
   hangOn: HoursHangOn
+  /** What would have to move, or could be spared. */
+  moves: readonly string[]
   cosmologyName: string
   fileName: string
 }
@@ -67,7 +70,11 @@ export function ReportHours(props: ReportHoursProps) {
           />
         </ChartFrame>
         <div className="flex flex-col gap-8">
-          <HoursRows hangOn={hangOn} askedSeconds={observation.askedSeconds} />
+          <HoursRows
+            hangOn={hangOn}
+            cosmologyName={props.cosmologyName}
+            askedSeconds={observation.askedSeconds}
+          />
           <Facts
             title="The exposure needed"
             facts={[
@@ -98,6 +105,12 @@ export function ReportHours(props: ReportHoursProps) {
           />
         </div>
       </div>
+      <HoursLedger
+        hangOn={hangOn}
+        computed={computed}
+        askedSeconds={observation.askedSeconds}
+        moves={props.moves}
+      />
     </section>
   )
 }

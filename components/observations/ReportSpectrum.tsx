@@ -4,7 +4,7 @@ import { formatNumber } from '@/lib/format'
 import type { Verdict } from '@/lib/domain/observations/types'
 import type { ModeRecord } from '@/lib/domain/facility/types'
 import type { Observation } from '@/lib/domain/proposals/types'
-import { airToVacuumA, restLines } from '@/lib/science/light'
+import { airToVacuumA, restLines, skyLinesA } from '@/lib/science/light'
 import { telluricBands } from '@/lib/science/feasibility/telluric'
 
 export interface ReportSpectrumProps {
@@ -49,7 +49,7 @@ export function ReportSpectrum({ mode, redshift, observation, verdict }: ReportS
     <section>
       <SectionHeading
         title="Where the lines fall"
-        aside="Lines of the list at this redshift; bands of oxygen and water above the site."
+        aside="Lines of the list at this redshift; bands of oxygen and water above the site; ticks at the foot are bright lines of the night sky."
       />
       <div className="mt-4 overflow-x-auto" tabIndex={0} role="region" aria-label="Where the lines fall">
         <SpectrumStrip
@@ -65,6 +65,7 @@ export function ReportSpectrum({ mode, redshift, observation, verdict }: ReportS
               heavy: band.fromA >= heavyFromA,
               words: band.name.replace(/^(a|the) /, '').replace(' band', ''),
             }))}
+          skyLines={skyLinesA.map((at) => ({ at, strength: 1 }))}
           features={features}
           xLabel="observed wavelength in vacuum, Å"
         />

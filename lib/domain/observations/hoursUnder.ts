@@ -1,57 +1,80 @@
-import { cosmologyPresets, presetCosmology, type Cosmology } from '@/lib/science/cosmology'
-import { reportOf, type ObservationInput } from './computeObservation'
+import { cosmologyPresets, presetCosmology } from '@/lib/science/cosmology'
+import { formatNumber } from '@/lib/format'
+import { brighterBy, furtherBy, neededWith, underOther, type Needed } from './change'
+import type { ObservationInput } from './computeObservation'
+import { drawnHours } from './drawnHours'
 import { conditionsOf } from './seasonOf'
 
-export interface HoursUnder {
+export interface HoursUnder extends Needed {
   name: string
-  /** Hours needed, overheads included; null when it cannot be reached at all. */
-  seconds: number | null
+}
+
+export interface HoursSpan {
+  name: string
+  /** Seconds; null where it is not reached. */
+  low: number | null
+  high: number | null
 }
 
 export interface HoursHangOn {
+  /** As asked, under the proposal's own cosmology. */
+  own: Needed
   /** The observation under each current cosmology; empty where the brightness was observed. */
   cosmologies: HoursUnder[]
-  /** Under the errors of the target itself: fainter and brighter by one sigma. */
-  errors: { name: string; low: HoursUnder; high: HoursUnder }[]
+  /** Within the errors of the target itself: by one sigma each, then all together. */
+  errors: HoursSpan[]
   /** At the poorest image accepted, the median of the site and its best tenth. */
   conditions: HoursUnder[]
 }
 
-type Change = Partial<Pick<ObservationInput, 'target' | 'contents' | 'cosmology'>>
-
-/** Without a right ascension no night is searched; the declination alone gives the mean airmass of its window. */
-function neededWith(input: ObservationInput, change: Change): number | null {
-  const { mode } = input
-  if (!mode) return null
-  const changed = { ...input, ...change, mode }
-  const { seasonFrom, seasonTo } = changed.contents.call
-  const report = reportOf(changed, seasonFrom, seasonTo, { searchNights: false })
-  return report.exposure ? report.exposure.totalS : null
+function underCosmologies(input: ObservationInput): HoursUnder[] {
+  const { brightness, redshift } = input.target
+  if (brightness?.provenance !== 'predicted' || !((redshift ?? 0) > 0)) return []
+  return cosmologyPresets
+    .filter(({ standing }) => standing === 'current')
+    .map(({ id, parameters }) => ({
+      name: parameters.name,
+      ...neededWith(input, underOther(input, presetCosmology(id))),
+    }))
 }
 
-function brighterBy(input: ObservationInput, magnitudes: number): Change {
-  const { brightness } = input.target
-  if (!brightness) return {}
-  return { target: { ...input.target, brightness: { ...brightness, value: brightness.value - magnitudes } } }
+function spanOf(name: string, ends: readonly Needed[]): HoursSpan {
+  const seconds = ends.map((end) => end.seconds ?? Infinity)
+  const finite = (value: number) => (Number.isFinite(value) ? value : null)
+  return { name, low: finite(Math.min(...seconds)), high: finite(Math.max(...seconds)) }
 }
 
-/** A magnitude predicted from a luminosity follows the distance: fainter where the other universe is larger. */
-function underCosmology(input: ObservationInput, other: Cosmology): Change {
-  const z = input.target.redshift ?? 0
-  const ratio = other.luminosityMpc(z) / input.cosmology.luminosityMpc(z)
-  return { ...brighterBy(input, -5 * Math.log10(ratio)), cosmology: other }
+function withinErrors(input: ObservationInput): HoursSpan[] {
+  const redshift = input.target.redshiftError ?? 0
+  const magnitude = input.target.brightness?.error ?? 0
+  const moved = [furtherBy(input, -redshift), furtherBy(input, redshift)].flatMap((change) => change ?? [])
+  const spans: HoursSpan[] = []
+  if (redshift > 0 && moved.length === 2)
+    spans.push(
+      spanOf(
+        `redshift ± ${formatNumber(redshift, redshift < 0.001 ? 5 : 3)}`,
+        moved.map((change) => neededWith(input, change)),
+      ),
+    )
+  if (magnitude > 0)
+    spans.push(
+      spanOf(
+        `magnitude ± ${formatNumber(magnitude, 2)}`,
+        [magnitude, -magnitude].map((by) => neededWith(input, brighterBy(input, by))),
+      ),
+    )
+  if (spans.length === 2)
+    spans.push({ name: 'both together, 68 of 100', ...drawnHours(input, { redshift, magnitude }) })
+  return spans
 }
 
 /** What the hours needed hang on: cosmology where it matters, the target's own errors, and the image. */
 export function hoursHangOn(input: ObservationInput): HoursHangOn {
-  const { target, contents, observation } = input
-  const { brightness } = target
-  const isPredicted = brightness?.provenance === 'predicted' && (target.redshift ?? 0) > 0
-  const current = cosmologyPresets.filter(({ standing }) => standing === 'current')
+  const { contents, observation } = input
   const set = conditionsOf(contents, observation)
   const image = (name: string, imageQualityArcsec: number): HoursUnder => ({
     name,
-    seconds: neededWith(input, {
+    ...neededWith(input, {
       contents: {
         ...contents,
         constraintSets: contents.constraintSets.map((one) => ({ ...one, imageQualityArcsec })),
@@ -60,21 +83,9 @@ export function hoursHangOn(input: ObservationInput): HoursHangOn {
   })
   const { median, best10 } = contents.site.seeingArcsec
   return {
-    cosmologies: isPredicted
-      ? current.map(({ id, parameters }) => ({
-          name: parameters.name,
-          seconds: neededWith(input, underCosmology(input, presetCosmology(id))),
-        }))
-      : [],
-    errors: brightness?.error
-      ? [
-          {
-            name: `magnitude ± ${brightness.error}`,
-            low: { name: 'brighter', seconds: neededWith(input, brighterBy(input, brightness.error)) },
-            high: { name: 'fainter', seconds: neededWith(input, brighterBy(input, -brightness.error)) },
-          },
-        ]
-      : [],
+    own: neededWith(input, {}),
+    cosmologies: underCosmologies(input),
+    errors: withinErrors(input),
     conditions: [
       image('the poorest you accept', set.imageQualityArcsec),
       image('the site’s median', median),

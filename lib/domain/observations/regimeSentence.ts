@@ -16,6 +16,7 @@ type Facts = Pick<
 /** What limits an exposure and how the time grows with distance, never a bare square. */
 export function regimeSentence(facts: Facts): string {
   const limited = `Limited by ${limits[facts.regime]}, ${formatPercent(facts.regimeShare, 0)} of the noise.`
+  if (facts.regime === 'floor') return `${limited} More time hardly helps.`
   return facts.cosmologyMatters
     ? `${limited} The time goes as the luminosity distance to the power ${formatNumber(facts.timeExponentOfDistance, 2)}.`
     : `${limited} The time goes as the flux to the power ${formatNumber(facts.timeExponentOfFlux, 2)}.`

@@ -1,5 +1,5 @@
 import type { ModeRecord } from '../exposure'
-import { airToVacuumA } from '../light'
+import { airToVacuumA, skyLinesA } from '../light'
 import { judgeAtLeast } from './judge'
 import { sayAngstrom } from './saying'
 import { telluricBands } from './telluric'
@@ -75,5 +75,28 @@ export function checkClearOfBands(mode: ModeRecord, feature: Feature): Check {
       verdict === 'feasible'
         ? null
         : 'Measure another line as well, or take a telluric standard close in time.',
+  }
+}
+
+/** Is the core of the feature clear of the bright lines of the night sky? They can be subtracted, at a price in noise. */
+export function checkClearOfSkyLines(mode: ModeRecord, feature: Feature): Check {
+  const element = mode.resolvingPower ? feature.observedA / mode.resolvingPower : 0
+  const nearest = skyLinesA.reduce((best, line) =>
+    Math.abs(line - feature.observedA) < Math.abs(best - feature.observedA) ? line : best,
+  )
+  const away = Math.abs(nearest - feature.observedA)
+  const verdict = judgeAtLeast(away, element, 0)
+  return {
+    id: 'clear-of-sky-lines',
+    name: 'Clear of sky lines',
+    measured: sayAngstrom(away),
+    feasibleTo: `${sayAngstrom(element)}, one resolution element`,
+    failsAt: 'never',
+    verdict,
+    why: `The nearest bright line of the night sky is at ${sayAngstrom(nearest)}.`,
+    fix:
+      verdict === 'feasible'
+        ? null
+        : 'The core sits on a sky line: plan for more frames, or measure another line as well.',
   }
 }

@@ -1,5 +1,5 @@
 import { seasonVisibility } from './seasonVisibility'
-import { checkClearOfBands, checkInRange } from './featureChecks'
+import { checkClearOfBands, checkClearOfSkyLines, checkInRange } from './featureChecks'
 import { checkHoursAsked, checkNotOverAsked, checkUp, checkUpWithMoon } from './hoursChecks'
 import { worst } from './judge'
 import { checkImage, checkSaturation, checkSignal } from './lightChecks'
@@ -30,7 +30,10 @@ export function observationReport(input: ReportInput): ObservationReport {
     const seen = { ...feature, observedA }
     const inRange = checkInRange(mode, seen)
     checks.push(inRange)
-    if (inRange.verdict !== 'not-feasible') checks.push(checkClearOfBands(mode, seen))
+    if (inRange.verdict !== 'not-feasible') {
+      checks.push(checkClearOfBands(mode, seen))
+      if (mode.kind === 'long-slit') checks.push(checkClearOfSkyLines(mode, seen))
+    }
   }
 
   const season = seasonVisibility(input)

@@ -20,6 +20,7 @@ describe('a request that can be done', () => {
         'distance-trusted',
         'feature-in-range',
         'clear-of-bands',
+        'clear-of-sky-lines',
         'up-in-the-dark',
         'hours-with-moon',
         'signal-to-noise',
@@ -29,8 +30,8 @@ describe('a request that can be done', () => {
         'delivered-image',
       ].map((id) => [id, 'feasible']),
     )
-    expect([report.verdict, report.clear, report.refusal]).toEqual(['feasible', 11, null])
-    expect(report.engineVersion).toMatch(/^1\.0\.0 \(cosmology 1\.1\.0, sky 1\.0\.0, exposure 1\.1\.0\)$/)
+    expect([report.verdict, report.clear, report.refusal]).toEqual(['feasible', 12, null])
+    expect(report.engineVersion).toMatch(/^1\.1\.0 \(cosmology 1\.1\.0, sky 1\.0\.0, exposure 1\.1\.0\)$/)
     expect(report.observedFeatureA).toBeCloseTo(5835.2, 1)
   })
 
@@ -73,6 +74,9 @@ describe('each check has its own margins', () => {
     ['feature-in-range', 'past the edge', { target: { redshift: 0.5 } }, 'not-feasible'],
     ['clear-of-bands', 'inside a band', { target: { redshift: 0.42 } }, 'not-feasible'],
     ['clear-of-bands', 'near a band', { target: { redshift: 0.4101 } }, 'marginal'],
+    // [O I] of the sky at 5578.9 A, Hbeta at 4862.7 A in vacuum.
+    ['clear-of-sky-lines', 'on a line', { target: { redshift: 0.1473 } }, 'marginal'],
+    ['clear-of-sky-lines', 'between lines', { target: { redshift: 0.17 } }, 'feasible'],
     ['up-in-the-dark', 'never up', { target: { decDeg: 70 } }, 'not-feasible'],
     [
       'hours-with-moon',

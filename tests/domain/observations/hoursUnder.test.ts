@@ -1,0 +1,138 @@
+import { describe, expect, it } from 'vitest'
+import { cosmologyOf } from '@/lib/domain/observations/cosmologyOf'
+import type { ObservationInput } from '@/lib/domain/observations/computeObservation'
+import { computeProposal } from '@/lib/domain/observations/computeProposal'
+import { hoursHangOn } from '@/lib/domain/observations/hoursUnder'
+import { whatWouldMove } from '@/lib/domain/observations/whatWouldMove'
+import type { Observation, ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { presetCosmology } from '@/lib/science/cosmology'
+import { contents, observation, target } from '@/tests/support/contents'
+
+const bright = {
+  value: 19,
+  error: 0.2,
+  system: 'AB',
+  band: 'V',
+  provenance: 'predicted',
+  source: '',
+} as const
+
+function inputOf(
+  change: { target?: Partial<Target>; observation?: Partial<Observation> } = {},
+  more: Partial<ProposalContents> = {},
+): ObservationInput {
+  const one = target({ brightness: bright, redshiftError: 0.002, ...change.target })
+  const asked = observation({ wantedSnr: 20, askedSeconds: 7200, ...change.observation })
+  const whole = contents({ targets: [one], observations: [asked], ...more })
+  return {
+    contents: whole,
+    target: one,
+    observation: asked,
+    mode: whole.modes.find(({ modeId }) => modeId === asked.modeId),
+    cosmology: cosmologyOf(whole.cosmology.parameters),
+  }
+}
+const computedOf = ({ contents: whole }: ObservationInput) => {
+  const [computed] = computeProposal(whole).observations
+  if (!computed) throw new Error('nothing was computed')
+  return computed
+}
+
+// Seen to fail with the magnitude moved the wrong way, and with the draws seeded by the clock.
+describe('what the hours hang on', () => {
+  it('is what the proposal needs, as asked', () => {
+    const input = inputOf()
+    expect(Math.ceil(hoursHangOn(input).own.seconds ?? 0)).toBe(computedOf(input).neededSeconds)
+  })
+
+  it('tries every current cosmology where the brightness was predicted, none where it was observed', () => {
+    const names = hoursHangOn(inputOf()).cosmologies.map(({ name }) => name)
+    expect(names).toContain('Planck 2018')
+    expect(names).not.toContain('Einstein–de Sitter')
+    expect(names.length).toBeGreaterThan(3)
+    const observed = inputOf({ target: { brightness: { ...bright, provenance: 'observed' } } })
+    expect(hoursHangOn(observed).cosmologies).toEqual([])
+  })
+
+  it('needs less time in a smaller universe, by the power of distance it states', () => {
+    const input = inputOf()
+    const { own, cosmologies } = hoursHangOn(input)
+    const ladder = cosmologies.find(({ name }) => name.startsWith('Local ladder'))
+    const ratio =
+      presetCosmology('local-ladder').luminosityMpc(0.15834) / input.cosmology.luminosityMpc(0.15834)
+    expect(ratio).toBeLessThan(1)
+    expect(ladder?.seconds).toBeLessThan(own.seconds ?? 0)
+    // Overheads do not shrink, so the fourth power is the most it can be.
+    expect(ladder?.seconds).toBeGreaterThan((own.seconds ?? 0) * ratio ** 4)
+  })
+
+  it('spans the errors of the target, together no wider than their sum and never beside the middle', () => {
+    const { own, errors } = hoursHangOn(inputOf())
+    expect(errors.map(({ name }) => name)).toEqual([
+      'redshift ± 0.002',
+      'magnitude ± 0.20',
+      'both together, 68 of 100',
+    ])
+    for (const { low, high } of errors) {
+      expect(low).toBeLessThanOrEqual(own.seconds ?? 0)
+      expect(high).toBeGreaterThanOrEqual(own.seconds ?? Infinity)
+    }
+    const [, magnitude, both] = errors
+    expect(both?.high).toBeLessThan(1.3 * (magnitude?.high ?? 0))
+    expect(both?.high).toBeGreaterThan(0.8 * (magnitude?.high ?? 0))
+  })
+
+  it('says the same whenever it is asked', () => {
+    expect(hoursHangOn(inputOf())).toEqual(hoursHangOn(inputOf()))
+  })
+
+  it('has no span for what states no error, and none past the edge of the mode', () => {
+    const exact = inputOf({ target: { redshiftError: null, brightness: { ...bright, error: null } } })
+    expect(hoursHangOn(exact).errors).toEqual([])
+    const vague = inputOf({ target: { redshiftError: 0.9 } })
+    expect(hoursHangOn(vague).errors.some(({ name }) => name.startsWith('redshift'))).toBe(false)
+  })
+})
+
+describe('what would have to move', () => {
+  const moves = (input: ObservationInput) => whatWouldMove(input, computedOf(input))
+
+  it('asks for the hours that lack, or a lower signal', () => {
+    const input = inputOf({ observation: { askedSeconds: 1800 } })
+    const needed = computedOf(input).neededSeconds ?? 0
+    expect(needed).toBeGreaterThan(1800)
+    const found = moves(input)
+    expect(found[0]).toMatch(/^Ask for \d+\.\d\u00a0h, \d+\.\d\u00a0h more\.$/)
+    expect(found[1]).toMatch(/^Or be content with S\/N \d+\.\d\.$/)
+  })
+
+  it('names the optional target whose hours would cover it, and no required one', () => {
+    const spare = (need: Target['need']) => {
+      const short = inputOf({ observation: { askedSeconds: 1800 } })
+      const other = target({ id: 99, name: 'Spare', need })
+      const own = observation({ id: 98, targetId: 99, askedSeconds: 36_000, position: 2 })
+      const whole = contents({ targets: [short.target, other], observations: [short.observation, own] })
+      return whatWouldMove({ ...short, contents: whole }, computedOf(short)).join(' ')
+    }
+    expect(spare('optional')).toContain('Leave out Spare, optional')
+    expect(spare('required')).not.toContain('Spare')
+  })
+
+  it('offers another mode of the kind that is quicker', () => {
+    const input = inputOf()
+    const [mode] = input.contents.modes
+    if (!mode) throw new Error('no mode')
+    const large = { ...mode.telescope, collectingAreaM2: 50 }
+    const better = { ...mode, modeId: 77, name: 'BEACON, 1.0″ slit', telescope: large }
+    const found = whatWouldMove(
+      { ...input, contents: { ...input.contents, modes: [mode, better] } },
+      computedOf(input),
+    )
+    expect(found.join(' ')).toMatch(/Another mode: BEACON, 1\.0″ slit takes \d+\.\d/)
+  })
+
+  it('has nothing to say where nothing helps', () => {
+    const dark = contents().constraintSets.map((set) => ({ ...set, moon: 'dark' as const }))
+    expect(moves(inputOf({}, { constraintSets: dark }))).toEqual([])
+  })
+})
