@@ -119,6 +119,7 @@ export function cosmologyFormOf({ id, parameters: p, comparisonId }: ChosenCosmo
     name: id === 'custom' ? p.name : '',
     H0: text(p.H0),
     Om0: text(p.Om0),
+    omCounts: 'matter',
     Ode0: p.Ode0 === 'flat' ? '' : text(p.Ode0),
     w0: text(p.w0),
     wa: text(p.wa),
