@@ -19,7 +19,8 @@ const titles: Readonly<Record<number, string>> = {
 /** How many values are named one by one: a list of a million wrong ones makes no answer of a million lines. */
 const mostNamed = 100
 
-const pointer = (field: string) => `/${field.split('.').join('/')}`
+/** A JSON pointer (RFC 6901); what is wrong with the whole body is told at its root. */
+const pointer = (field: string) => (field === 'form' || field === '' ? '' : `/${field.split('.').join('/')}`)
 
 /** Problem details (RFC 9457) of a failure; an unexpected one says only its reference number. */
 export function problem(error: unknown, requestId: string): Response {

@@ -3,19 +3,20 @@ import { ScienceError } from '@/lib/science/ScienceError'
 import { cosmologyEngineVersion, type Cosmology } from '@/lib/science/cosmology'
 import { asRefused, eachOrRefused } from './asRefused'
 import { cosmologyInput, universeOf } from './cosmologySchema'
-import { mostRedshifts, requireAtMost } from './limits'
+import { listOf, mostRedshifts } from './limits'
 
-export const cosmologyRequest = z.object({
-  cosmology: cosmologyInput,
-  z: z.array(z.number('A redshift is a number.')).meta({ maxItems: mostRedshifts }),
-  pairs: z
-    .array(z.tuple([z.number('A redshift is a number.'), z.number('A redshift is a number.')]))
-    .optional()
-    .meta({
-      maxItems: mostRedshifts,
-      description: 'Angular-diameter distance of the second seen from the first',
-    }),
-})
+const redshift = z.number('A redshift is a number.')
+
+export const cosmologyRequest = z.object(
+  {
+    cosmology: cosmologyInput,
+    z: listOf(redshift, mostRedshifts, 'redshifts'),
+    pairs: listOf(z.tuple([redshift, redshift]), mostRedshifts, 'pairs')
+      .optional()
+      .meta({ description: 'Angular-diameter distance of the second redshift seen from the first' }),
+  },
+  'Give an object of JSON.',
+)
 
 export type CosmologyRequest = z.output<typeof cosmologyRequest>
 
@@ -63,8 +64,6 @@ export function describeCosmology({ parameters, Ok0, Ode0 }: Cosmology) {
 
 /** Every quantity at each redshift, and distances between pairs. */
 export function computeCosmology(input: CosmologyRequest) {
-  requireAtMost(input.z, mostRedshifts, 'redshifts')
-  requireAtMost(input.pairs ?? [], mostRedshifts, 'pairs')
   const universe = universeOf(input.cosmology)
   const { z: rows, pairs } = eachOrRefused({
     z: [input.z, (z: number) => rowOf(universe, z)],

@@ -3,26 +3,28 @@ import { cosmologyEngineVersion } from '@/lib/science/cosmology'
 import { eachOrRefused } from './asRefused'
 import { describeCosmology } from './computeCosmology'
 import { cosmologyInput, universeOf } from './cosmologySchema'
-import { mostRedshifts, requireAtMost } from './limits'
+import { listOf, mostRedshifts } from './limits'
 
-export const inverseRequest = z.object({
-  cosmology: cosmologyInput,
-  quantity: z.enum([
-    'lookbackGyr',
-    'ageGyr',
-    'comovingMpc',
-    'luminosityMpc',
-    'angularDiameterMpc',
-    'distanceModulusMag',
-  ]),
-  values: z.array(z.number('A value is a number.')).meta({ maxItems: mostRedshifts }),
-})
+export const inverseRequest = z.object(
+  {
+    cosmology: cosmologyInput,
+    quantity: z.enum([
+      'lookbackGyr',
+      'ageGyr',
+      'comovingMpc',
+      'luminosityMpc',
+      'angularDiameterMpc',
+      'distanceModulusMag',
+    ]),
+    values: listOf(z.number('A value is a number.'), mostRedshifts, 'values'),
+  },
+  'Give an object of JSON.',
+)
 
 export type InverseRequest = z.output<typeof inverseRequest>
 
 /** Every redshift at which a quantity has each value; an empty list where there is none. */
 export function invertCosmology(input: InverseRequest) {
-  requireAtMost(input.values, mostRedshifts, 'values')
   const universe = universeOf(input.cosmology)
   const { values: rows } = eachOrRefused({
     values: [

@@ -1,3 +1,4 @@
+import { z } from 'zod'
 import { refuse } from '@/lib/errors'
 import { formatNumber } from '@/lib/format'
 
@@ -13,4 +14,18 @@ export function requireAtMost(list: readonly unknown[], most: number, what: stri
     throw refuse.tooLarge(
       `${formatNumber(list.length)} ${what} were given; one call takes at most ${formatNumber(most)}.`,
     )
+}
+
+/**
+ * A list schema that counts before it looks at what is in the list, so that a million wrong values cost no more
+ * than one. Its description stays that of the list.
+ */
+export function listOf<T extends z.ZodType>(item: T, most: number, what: string) {
+  return z.preprocess(
+    (value) => {
+      if (Array.isArray(value)) requireAtMost(value, most, what)
+      return value
+    },
+    z.array(item, `Give a list of ${what}.`).meta({ maxItems: most }),
+  )
 }

@@ -13,7 +13,7 @@ import type { Cosmology, CosmologyQuantity } from './types'
 import { classify, type Universe } from './universe'
 
 /**
- * Sets a universe up once; each redshift then costs some tens of nanoseconds.
+ * Sets a universe up once; each redshift then costs some ten nanoseconds.
  *
  * E^2 = Or(z) + Om0 (1+z)^3 + Ok0 (1+z)^2 + Ode0 (1+z)^{3(1+w0+wa)} exp(-3 wa z/(1+z)).
  * Distances, volumes and times: Hogg 1999 (astro-ph/9905116). Neutrinos: Komatsu et al. 2011, eq. 26.

@@ -91,6 +91,15 @@ describe('the cosmology calculation', () => {
   it('refuses more than 100,000 redshifts by size', () => {
     const z = Array.from({ length: 100_001 }, () => 1)
     expect(refused(() => compute({ cosmology: 'planck-2018', z })).kind).toBe('too-large')
+    const pairs = z.map(() => ['wrong', null])
+    expect(refused(() => compute({ cosmology: 'planck-2018', z: [], pairs })).message).toBe(
+      '100,001 pairs were given; one call takes at most 100,000.',
+    )
+    expect(
+      refused(() =>
+        invertCosmology(inverseRequest.parse({ cosmology: 'wmap-9', quantity: 'ageGyr', values: z })),
+      ).kind,
+    ).toBe('too-large')
   })
 
   it('does not take text for numbers', () => {
@@ -99,6 +108,19 @@ describe('the cosmology calculation', () => {
       z: ['1', null, Number.POSITIVE_INFINITY],
     })
     expect(read.error && Object.keys(fieldErrorsOf(read.error))).toEqual(['z.0', 'z.1', 'z.2'])
+  })
+
+  it.each([
+    [{ cosmology: 'planck-2018' }, { z: 'Give a list of redshifts.' }],
+    [{ cosmology: 'planck-2018', z: {} }, { z: 'Give a list of redshifts.' }],
+    [null, { form: 'Give an object of JSON.' }],
+    [
+      { z: [1], cosmology: ['planck-2018'] },
+      { cosmology: 'Give the id of a preset, or H0, Om0 and Ode0 (or flat: true).' },
+    ],
+  ])('says what is missing in %j', (body, errors) => {
+    const read = cosmologyRequest.safeParse(body)
+    expect(read.error && fieldErrorsOf(read.error)).toEqual(errors)
   })
 
   it('finds both redshifts of an angular-diameter distance', () => {

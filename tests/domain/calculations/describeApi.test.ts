@@ -144,5 +144,12 @@ describe('answers are as described', () => {
     const found = (await response.json()) as unknown
     expect(problemAnswer.parse(found)).toEqual(found)
     expect(found).toMatchObject({ status: 422, errors: [{ pointer: '/z/3' }] })
+    const whole = (await problem(refuse.field('form', 'Give an object.'), 'b5f0').json()) as unknown
+    expect(whole).toMatchObject({ errors: [{ pointer: '' }] })
+    const many = Object.fromEntries(
+      Array.from({ length: 500 }, (_, i) => [`z.${i}`, 'A redshift is a number.']),
+    )
+    const long = (await problem(refuse.invalid('No.', many), 'b5f0').json()) as { errors: unknown[] }
+    expect(long.errors).toHaveLength(100)
   })
 })
