@@ -18,6 +18,7 @@ import { ReportHours } from './ReportHours'
 import { ReportSeason } from './ReportSeason'
 import { ReportSpectrum } from './ReportSpectrum'
 import { snrWords } from './snrWords'
+import { StandsAbove, type AssessmentAbove } from './StandsAbove'
 
 export interface FeasibilityReportProps {
   contents: ReportContents
@@ -26,12 +27,21 @@ export interface FeasibilityReportProps {
   chosen: number | null
   /** Where the report of an observation is. */
   hrefOf: (observationId: number) => string
+  /** What the instrument scientists said, where the reader may know it: it stands above the computed verdict. */
+  assessments?: readonly AssessmentAbove[]
   /** Beside the title of the checks: other cosmologies, a note. */
   aside?: React.ReactNode
 }
 
 /** Can it be done: one observation at a time, with its season, its checks, its lines and its hours. Names nobody. */
-export function FeasibilityReport({ contents, computation, chosen, hrefOf, aside }: FeasibilityReportProps) {
+export function FeasibilityReport({
+  contents,
+  computation,
+  chosen,
+  hrefOf,
+  assessments = [],
+  aside,
+}: FeasibilityReportProps) {
   const targets = new Map(contents.targets.map((target) => [target.id, target]))
   const observation = contents.observations.find(({ id }) => id === chosen) ?? contents.observations[0]
   const target = observation ? targets.get(observation.targetId) : undefined
@@ -64,6 +74,7 @@ export function FeasibilityReport({ contents, computation, chosen, hrefOf, aside
     return own.length > 1 ? `${name}, ${modeName}` : name
   }
 
+  const assessed = assessments.find(({ instrument }) => instrument === mode?.instrument.name)
   const cosmology = cosmologyOf(contents.cosmology.parameters)
   const input = { contents, target, observation, mode, cosmology }
 
@@ -98,6 +109,7 @@ export function FeasibilityReport({ contents, computation, chosen, hrefOf, aside
           </p>
         </div>
         <div className="max-w-prose">
+          {assessed ? <StandsAbove assessment={assessed} /> : null}
           <BarNote tone={computed.verdict}>
             <VerdictMark
               verdict={computed.verdict}

@@ -7,6 +7,8 @@ import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
+import { readOutcome } from '@/lib/domain/decisions/readOutcome'
+import { isOutcome } from '@/lib/domain/decisions/rules'
 import { standingComputation } from '@/lib/domain/observations/standingComputation'
 import { underCosmology } from '@/lib/domain/observations/underCosmology'
 import { paths } from '@/lib/paths'
@@ -26,6 +28,7 @@ export default async function FeasibilityPage({ params, searchParams }: Props) {
   const read = await orNotFound(proposalOf(reference))
   const { contents, readOnly } = read
   const computation = await standingComputation(ctx, read)
+  const outcome = isOutcome(contents.state) ? await readOutcome(ctx, contents.reference) : null
   const here = paths.proposalSection(contents.reference, 'feasibility')
   const other = query.under ? underCosmology(contents, computation, query.under) : null
   const hrefOf = (id: number) => `${here}?observation=${id}${other ? `&under=${other.id}` : ''}`
@@ -49,6 +52,7 @@ export default async function FeasibilityPage({ params, searchParams }: Props) {
           computation={other?.computation ?? computation}
           chosen={chosen}
           hrefOf={hrefOf}
+          assessments={outcome?.decision?.assessments}
           aside={
             <OtherCosmologies
               here={`${here}?observation=${chosen ?? ''}`}
