@@ -157,6 +157,18 @@ describe('Yardstick', () => {
     expect(within(table).queryByRole('rowheader', { name: '0.001' })).toBeNull()
   })
 
+  it('takes the first thousand of hundreds of thousands pasted, and says so', async () => {
+    const user = userEvent.setup()
+    show({ z: '1', c: 'planck-2018' })
+    const list = screen.getByLabelText<HTMLTextAreaElement>('Redshifts')
+    list.setSelectionRange(0, 1)
+    list.focus()
+    await user.paste(Array.from({ length: 200_000 }, (_, i) => (i / 1e5).toFixed(5)).join(', '))
+    expect(screen.getByText(/^200,000 values were pasted and the first 1,000 taken\./)).toBeTruthy()
+    expect(list.value.split(', ')).toHaveLength(1000)
+    expect(list.value).toMatch(/, 0\.00999$/)
+  })
+
   it('takes one to six cosmologies, each with its own line', async () => {
     const user = userEvent.setup()
     show({ z: '1' })

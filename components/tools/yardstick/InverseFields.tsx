@@ -4,6 +4,7 @@ import { expectedOf } from '@/lib/domain/tools/yardstick/inverseFields'
 import { quantityOf } from '@/lib/domain/tools/yardstick/quantities'
 import type { YardstickState } from '@/lib/domain/tools/yardstick/state'
 import { invertible } from '@/lib/domain/tools/yardstick/stateQuery'
+import { pieces } from '@/lib/domain/tools/yardstick/firstValues'
 import { countInWords } from '@/lib/format'
 import { LedgerArea } from './LedgerArea'
 import { PlainSelect } from './PlainSelect'
@@ -42,6 +43,7 @@ export function InverseFields({ state, count, troubles, onChange }: InverseField
         value={state.values}
         onChange={(values) => onChange({ values })}
         troubles={troubles}
+        piece={pieces.quantities}
         read={`${countInWords(count, 'value', 'values', true)} read.`}
       />
     </div>

@@ -1,9 +1,12 @@
 'use client'
 
-import { useId, type ReactNode } from 'react'
+import { useId, useState, type ClipboardEvent, type ReactNode } from 'react'
 import { FieldFrame } from '@/components/forms/FieldFrame'
 import { controlClasses } from '@/components/forms/controlClasses'
 import { classNames } from '@/components/ui/classNames'
+import { firstValues, LONGEST_PASTE } from '@/lib/domain/tools/yardstick/firstValues'
+import { MOST_ROWS } from '@/lib/domain/tools/yardstick/parseRedshifts'
+import { formatNumber } from '@/lib/format'
 import { earlyMark } from './useTypedEarly'
 
 export interface LedgerAreaProps {
@@ -15,13 +18,29 @@ export interface LedgerAreaProps {
   troubles: readonly string[]
   /** How many were read, in words. */
   read: string
+  /** What one value looks like, for pastes too long to be taken whole. */
+  piece: RegExp
 }
 
 /** A list typed or pasted, one value a line on its own rule; what cannot be read stays and is named above. */
-export function LedgerArea({ label, help, value, onChange, troubles, read }: LedgerAreaProps) {
+export function LedgerArea(props: LedgerAreaProps) {
+  const { label, help, value, onChange, read, piece } = props
+  const [pasted, setPasted] = useState<string | null>(null)
   const id = useId()
   const [helpId, errorId] = [`${id}-help`, `${id}-error`]
+  const troubles = pasted ? [pasted, ...props.troubles] : props.troubles
   const wrong = troubles.length > 0
+  const takeSome = (event: ClipboardEvent<HTMLTextAreaElement>) => {
+    const text = event.clipboardData.getData('text')
+    if (text.length <= LONGEST_PASTE) return
+    event.preventDefault()
+    const { kept, count } = firstValues(text, piece)
+    const { selectionStart, selectionEnd } = event.currentTarget
+    onChange(value.slice(0, selectionStart) + kept + value.slice(selectionEnd))
+    setPasted(
+      `${formatNumber(count)} values were pasted and the first ${formatNumber(MOST_ROWS)} taken. The public interface takes 100,000 in one call.`,
+    )
+  }
   return (
     <div>
       <FieldFrame
@@ -47,7 +66,11 @@ export function LedgerArea({ label, help, value, onChange, troubles, read }: Led
           id={id}
           rows={7}
           value={value}
-          onChange={(event) => onChange(event.target.value)}
+          onChange={(event) => {
+            setPasted(null)
+            onChange(event.target.value)
+          }}
+          onPaste={takeSome}
           spellCheck={false}
           autoComplete="off"
           aria-invalid={wrong || undefined}

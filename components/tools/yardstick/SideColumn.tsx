@@ -2,6 +2,7 @@
 
 import type { YardstickState } from '@/lib/domain/tools/yardstick/state'
 import type { YardstickView } from '@/lib/domain/tools/yardstick/viewOf'
+import { pieces } from '@/lib/domain/tools/yardstick/firstValues'
 import { countInWords } from '@/lib/format'
 import { CosmologyList } from './CosmologyList'
 import { InverseFields } from './InverseFields'
@@ -34,6 +35,7 @@ export function SideColumn({ state, view, editing, onEdit, onChange }: SideColum
             value={state.z}
             onChange={(z) => onChange({ z })}
             troubles={view.troubles}
+            piece={pieces.numbers}
             read={`${countInWords(view.count, 'redshift', 'redshifts', true)} read.`}
           />
         )}

@@ -111,6 +111,8 @@ export function readState(query: Query): { state: YardstickState; troubles: stri
 
 /** The query of a state; what is usual is left out. Null when it is too long for an address. */
 export function writeState(state: YardstickState): URLSearchParams | null {
+  // Text this long stays too long however its blanks are written; hundreds of thousands of values are not spelled out.
+  if (state.z.length > 4 * LONGEST_LINK || state.values.length > 4 * LONGEST_LINK) return null
   const query = new URLSearchParams()
   const put = (key: string, value: string, usual: string) => {
     if (value !== usual) query.set(key, value)
