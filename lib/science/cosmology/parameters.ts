@@ -93,7 +93,7 @@ export function checkParameters(p: CosmologyParameters): void {
   if (p.mNuEv.length > Math.floor(p.Neff)) {
     throw new ScienceError(
       'bad-parameter',
-      `${p.mNuEv.length} neutrino masses were given for ${Math.floor(p.Neff)} species.`,
+      `${p.mNuEv.length} neutrino ${p.mNuEv.length === 1 ? 'mass was' : 'masses were'} given for ${Math.floor(p.Neff)} species.`,
     )
   }
 }

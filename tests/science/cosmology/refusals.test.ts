@@ -1,5 +1,10 @@
 import { describe, expect, it } from 'vitest'
-import { presetCosmology, type CosmologyParameters } from '../../../lib/science/cosmology'
+import {
+  cosmologyQuantities,
+  parameterTroubles,
+  presetCosmology,
+  type CosmologyParameters,
+} from '../../../lib/science/cosmology'
 import { ScienceError } from '../../../lib/science/ScienceError'
 import { universe } from '../support/models'
 
@@ -77,5 +82,64 @@ describe('refusals are sentences with a code', () => {
     expect(refusal(() => closed.lookbackGyr(-0.6)).message).toBe(
       'Dust stops growing at z = −0.50, so z = −0.60 does not exist in it.',
     )
+  })
+
+  it.each([
+    [NaN, 'A redshift must be a number.'],
+    [Infinity, 'A redshift must be a finite number.'],
+    [-Infinity, 'A redshift lies above −1.'],
+    [-1, 'A redshift lies above −1.'],
+    [1e9, 'z = 1.0 × 10⁹ is too large: the engine stops at z = 10⁹.'],
+    [1e300, 'z = 1.0 × 10³⁰⁰ is too large: the engine stops at z = 10⁹.'],
+  ])('redshift %d in words', (z, sentence) => {
+    const cosmology = presetCosmology('planck-2018')
+    for (const quantity of cosmologyQuantities)
+      expect(refusal(() => cosmology[quantity](z)).message).toBe(sentence)
+  })
+
+  it('every quantity answers for the future or says why not', () => {
+    const cosmology = presetCosmology('planck-2018')
+    const seenOnly = /Mpc|Mag|Arcsec|Volume/
+    for (const quantity of cosmologyQuantities) {
+      const timeless = ['hubbleKmSMpc', 'dimmingMag'].includes(quantity)
+      if (seenOnly.test(quantity) && !timeless)
+        expect(refusal(() => cosmology[quantity](-0.5)).message).toBe(
+          'A distance needs a redshift of 0 or more.',
+        )
+      else expect(Math.abs(cosmology[quantity](-0.5))).toBeLessThan(100)
+    }
+  })
+
+  it('a number that runs out of range is refused, not Infinity', () => {
+    const steep = universe({ Ode0: 'flat', w0: 20, wa: 20 })
+    expect(refusal(() => steep.E(9e8)).code).toBe('outside-range')
+    expect(refusal(() => steep.q(9e8)).message).toBe(
+      'In this model the number asked for is too large to compute.',
+    )
+  })
+
+  it('each parameter that is wrong is told, at its name', () => {
+    const { parameters } = universe({})
+    expect(parameterTroubles(parameters)).toEqual({})
+    expect(parameterTroubles({ ...parameters, H0: 0, wa: NaN, mNuEv: [1] })).toEqual({
+      H0: 'The Hubble constant H₀ must be above 0 km/s/Mpc.',
+      wa: 'wₐ must lie between −20 and 20.',
+      mNuEv: '1 neutrino mass was given for 0 species.',
+    })
+  })
+
+  it('hundreds of thousands of redshifts are answered without an array for each', () => {
+    const cosmology = presetCosmology('planck-2018')
+    const redshifts = Float64Array.from({ length: 400_000 }, (_, i) => i * 1e-4)
+    const out = new Float64Array(redshifts.length)
+    const grown = [1, 2, 3, 4, 5].map(() => {
+      const before = process.memoryUsage()
+      for (let i = 0; i < 4; i += 1) cosmology.batch('luminosityMpc', redshifts, out)
+      const after = process.memoryUsage()
+      return Math.abs(after.heapUsed - before.heapUsed) + Math.abs(after.arrayBuffers - before.arrayBuffers)
+    })
+    // 1.6 million redshifts a round: one byte each would show. The first rounds also compile and collect.
+    expect(Math.min(...grown)).toBeLessThan(400_000)
+    expect(out.at(-1)).toBe(cosmology.luminosityMpc(redshifts.at(-1) ?? NaN))
   })
 })
