@@ -7,11 +7,26 @@ import { historiesOf } from '@/lib/domain/tools/yardstick/histories'
 import type { ReadyUniverse } from '@/lib/domain/tools/yardstick/universes'
 import { toneOf } from './toneOf'
 
+const now = [{ x: 0, words: 'now' }]
 const title = 'Size of the universe a(t), now = 1'
 
 /** How each universe has grown and will: past at the left, now in lamp. */
 export function HistoryPlot({ universes, height }: { universes: readonly ReadyUniverse[]; height: number }) {
-  const { histories, domain } = useMemo(() => historiesOf(universes), [universes])
+  const { histories, domain, largest } = useMemo(() => historiesOf(universes), [universes])
+  const yDomain = useMemo(() => [0, largest] as const, [largest])
+  const series = useMemo(
+    () =>
+      histories
+        .filter(({ points }) => points.length > 1)
+        .map(({ place, name, points, event }) => ({
+          id: String(place),
+          name: event ?? name,
+          tone: toneOf(place),
+          points,
+          chosen: place === 0,
+        })),
+    [histories],
+  )
   const events = histories.flatMap(({ name, event }) => (event ? [`${name} ${event}.`] : []))
   return (
     <ChartFrame
@@ -33,20 +48,14 @@ export function HistoryPlot({ universes, height }: { universes: readonly ReadyUn
         xLabel="Gyr from now"
         xName="t"
         xDomain={domain}
-        yDomain={[0, 2.2]}
+        yDomain={yDomain}
         xDecimals={1}
         yDecimals={3}
         labels="inside"
         fluid
         height={height}
-        uprights={[{ x: 0, words: 'now' }]}
-        series={histories.map(({ place, name, points, event }) => ({
-          id: String(place),
-          name: event ?? name,
-          tone: toneOf(place),
-          points,
-          chosen: place === 0,
-        }))}
+        uprights={now}
+        series={series}
       />
     </ChartFrame>
   )

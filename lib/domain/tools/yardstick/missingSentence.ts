@@ -13,10 +13,13 @@ export function missingSentence(redshifts: readonly number[], { cosmology }: Rea
   const [first] = refused
   if (!first) return null
   if (refused.length === 1) return first.sentence
-  const named = refused.slice(0, NAMED).map(({ z }) => String(z))
-  const rest = refused.length - named.length
+  // The antipode's sentence names the first of them already.
+  const closed = cosmology.antipodeRedshift !== null
+  const listed = closed ? refused.slice(1) : refused
+  const named = listed.slice(0, NAMED).map(({ z }) => String(z))
+  const rest = listed.length - named.length
   const words = rest > 0 ? `${named.join(', ')} and ${rest} more` : formatList(named)
-  return cosmology.antipodeRedshift === null
-    ? `Of your redshifts, ${words} do not exist in it.`
-    : `${first.sentence} The same holds for ${words}.`
+  return closed
+    ? `${first.sentence} The same holds for ${words}.`
+    : `Of your redshifts, ${words} do not exist in it.`
 }

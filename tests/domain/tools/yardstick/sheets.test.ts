@@ -12,6 +12,7 @@ import { missingSentence } from '@/lib/domain/tools/yardstick/missingSentence'
 import { quantities } from '@/lib/domain/tools/yardstick/quantities'
 import { compareSheet } from '@/lib/domain/tools/yardstick/sheets/compareSheet'
 import { distancesSheet } from '@/lib/domain/tools/yardstick/sheets/distancesSheet'
+import { historiesOf } from '@/lib/domain/tools/yardstick/histories'
 import { inverseSheet } from '@/lib/domain/tools/yardstick/sheets/inverseSheet'
 import { nearSheet } from '@/lib/domain/tools/yardstick/sheets/nearSheet'
 import { emptyOwn, type Chosen } from '@/lib/domain/tools/yardstick/state'
@@ -216,5 +217,29 @@ describe('files', () => {
     expect(ecsv).toContain('# - {name: luminosityMpc_1, unit: "Mpc", datatype: float64')
     expect(ecsv).toContain('- name: "=1+1 & Ω_x \\"%"')
     expect(ecsv).toMatch(/\n2,\d+\.\d+,\d+\.?\d*,,\n$/)
+  })
+})
+
+describe('the history of a universe', () => {
+  it('runs from a big bang to its greatest size and back', () => {
+    // Closed, matter alone, Ωm = 2: Ωm/a³ + (1 − Ωm)/a² = 0 gives the greatest size Ωm / (Ωm − 1) = 2.
+    const { histories, domain, largest } = historiesOf(ready(own({ Om0: '2', Ode0: '0' })))
+    const [history] = histories
+    const sizes = history?.points.map(([, size]) => size) ?? []
+    expect(Math.max(...sizes)).toBeCloseTo(2, 3)
+    expect(largest).toBeGreaterThan(2)
+    expect(sizes[0]).toBeLessThan(0.01)
+    expect(sizes.at(-1)).toBeLessThan(0.01)
+    expect(history?.points.at(-1)?.[0]).toBeLessThan(domain[1])
+    expect(history?.event).toMatch(/^largest in \d+\.\d Gyr$/)
+  })
+
+  it('shrinks and grows about a bounce', () => {
+    const [history] = historiesOf(ready(bouncing)).histories
+    const sizes = history?.points.map(([, size]) => size) ?? []
+    // z = 0.92 is the largest redshift there is.
+    expect(Math.min(...sizes)).toBeCloseTo(1 / 1.92, 2)
+    expect(sizes[0]).toBeGreaterThan(1)
+    expect(history?.event).toMatch(/^turned 18\.4 Gyr ago$/)
   })
 })
