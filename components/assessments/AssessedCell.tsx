@@ -8,7 +8,7 @@ const questionWords = { none: '', asked: 'a question waits', answered: 'an answe
 export function AssessedCell({ line }: { line: RequestLine }) {
   const question = questionWords[line.question]
   return (
-    <>
+    <span>
       {line.assessed ? (
         <VerdictMark verdict={line.assessed} />
       ) : (
@@ -17,6 +17,6 @@ export function AssessedCell({ line }: { line: RequestLine }) {
       <span className="block text-caption text-muted">
         {question || (line.assessedAt ? formatDay(new Date(line.assessedAt)) : '')}
       </span>
-    </>
+    </span>
   )
 }

@@ -15,10 +15,16 @@ export interface PassToPanelProps {
 
 /** Hands all assessments of one instrument to the panel. */
 export function PassToPanel({ group, action }: PassToPanelProps) {
-  const { callNumber, instrumentId, instrument, count, open, toPass } = group
+  const { callNumber, instrumentId, instrument, count, open, toPass, isSettled } = group
   const [failure, setFailure] = useState<string | null>(null)
   const [busy, start] = useTransition()
   const router = useRouter()
+  if (isSettled)
+    return (
+      <p className="m-0 text-table text-muted">
+        Call {callNumber}, {instrument}: settled, the panel has begun to rank.
+      </p>
+    )
   if (toPass === 0)
     return (
       <p className="m-0 text-table text-muted">

@@ -7,7 +7,7 @@ import { TextLink } from '@/components/ui/TextLink'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { requestLinesReply } from '@/lib/domain/assessments/requestLinesSchema'
 import type { RequestLine } from '@/lib/domain/assessments/types'
-import { ABSENT, formatNumber } from '@/lib/format'
+import { ABSENT, countInWords, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { AssessedCell } from './AssessedCell'
 
@@ -40,9 +40,14 @@ const columns: readonly TableColumn<RequestLine>[] = [
         {line.reviewNumber}
       </TextLink>
     ),
-    total: (rows) => rows.length,
+    total: () => 'In all',
   },
-  { id: 'title', head: 'Title', value: (line) => line.title, total: () => 'requests' },
+  {
+    id: 'title',
+    head: 'Title',
+    value: (line) => line.title,
+    total: (rows) => countInWords(rows.length, 'request', 'requests'),
+  },
   {
     id: 'targets',
     head: 'Targets, mode',

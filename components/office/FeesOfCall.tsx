@@ -55,7 +55,7 @@ export function FeesOfCall({ slug, initial, decide }: FeesOfCallProps) {
       <div className="mt-6">
         <DataTable
           caption="Fees"
-          columns={feeColumns}
+          columns={feeColumns(currency)}
           rows={rows}
           rowId={(row) => row.reference}
           find="Reference or name"

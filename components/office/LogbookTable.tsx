@@ -6,13 +6,17 @@ import { fetchJson } from '@/components/tables/fetchJson'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { Button } from '@/components/ui/Button'
 import { logbookReply, type LogbookReply, type LogbookTableRow } from '@/lib/domain/logbook/schema'
-import { ABSENT, formatUtcInstant } from '@/lib/format'
+import { formatNumber, formatUtcInstant } from '@/lib/format'
 import { paths } from '@/lib/paths'
-
-const short = (json: string) => (json.length > 160 ? `${json.slice(0, 160)}…` : json)
+import { LoggedValue } from './LoggedValue'
 
 const columns: TableColumn<LogbookTableRow>[] = [
-  { id: 'at', head: 'When', value: (row) => row.at, cell: (row) => formatUtcInstant(new Date(row.at)) },
+  {
+    id: 'at',
+    head: 'When',
+    value: (row) => row.at,
+    cell: (row) => <span className="sm:whitespace-nowrap">{formatUtcInstant(new Date(row.at))}</span>,
+  },
   { id: 'person', head: 'Who', value: (row) => row.person ?? row.actingAs },
   { id: 'as', head: 'Acting as', value: (row) => row.actingAs },
   { id: 'action', head: 'What', value: (row) => row.action },
@@ -22,14 +26,14 @@ const columns: TableColumn<LogbookTableRow>[] = [
     head: 'Before',
     wide: true,
     value: (row) => row.before,
-    cell: (row) => <span className="[overflow-wrap:anywhere] text-muted">{short(row.before) || ABSENT}</span>,
+    cell: (row) => <LoggedValue json={row.before} quiet />,
   },
   {
     id: 'after',
     head: 'After',
     wide: true,
     value: (row) => row.after,
-    cell: (row) => <span className="[overflow-wrap:anywhere]">{short(row.after) || ABSENT}</span>,
+    cell: (row) => <LoggedValue json={row.after} />,
   },
   { id: 'address', head: 'From', value: (row) => row.address },
 ]
@@ -57,12 +61,13 @@ export function LogbookTable({ initial }: { initial: LogbookReply }) {
         rows={rows}
         rowId={(row) => String(row.id)}
         find="Who, what or of what"
+        chips={[{ id: 'deeds', label: 'Without signing in', matches: (row) => row.action !== 'sign-in' }]}
         csv="logbook"
         page={50}
         phone="cards"
       />
       {query.hasNextPage ? (
-        <div className="mt-4">
+        <div className="mt-4 flex flex-wrap items-center gap-4 text-table">
           <Button
             look="secondary"
             busy={query.isFetchingNextPage}
@@ -71,6 +76,7 @@ export function LogbookTable({ initial }: { initial: LogbookReply }) {
           >
             Read further back
           </Button>
+          <span className="text-muted">{`The newest ${formatNumber(rows.length)} rows are read; search and file hold these.`}</span>
         </div>
       ) : null}
     </>

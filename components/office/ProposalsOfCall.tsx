@@ -20,10 +20,11 @@ export function ProposalsOfCall({ slug, initial }: ProposalsOfCallProps) {
     schema: officeProposalsReply,
     initialData: initial,
   })
+  const currency = data.rows[0]?.currency ?? 'EUR'
   return (
     <DataTable
       caption="Proposals of this call"
-      columns={proposalColumns}
+      columns={proposalColumns(currency)}
       rows={data.rows}
       rowId={(row) => row.reference}
       find="Reference, title or name"

@@ -28,7 +28,7 @@ export function WaiverForm({ waiverId, reason, slug, action }: WaiverFormProps) 
   const form = useActionForm({
     schema: decideWaiverSchema,
     action,
-    defaultValues: { waiverId, decision: 'granted', note: '' },
+    defaultValues: { waiverId, note: '' },
     onDone: () => {
       showToast('Decided; the investigators are told')
       void client.invalidateQueries({ queryKey: ['office-proposals', slug] })
@@ -39,10 +39,12 @@ export function WaiverForm({ waiverId, reason, slug, action }: WaiverFormProps) 
       <blockquote className="m-0 max-w-prose">“{reason}”</blockquote>
       <ActionForm form={form}>
         <RadioField name="decision" label="Your answer" options={choices} />
-        <TextField name="note" label="Note to the investigators" optional />
-        <SubmitButton look="secondary" size="small" busyWord="Deciding">
-          Decide
-        </SubmitButton>
+        <TextField name="note" label="Note to the investigators" help="Wanted where you refuse." optional />
+        <div>
+          <SubmitButton look="secondary" size="small" busyWord="Deciding">
+            Decide
+          </SubmitButton>
+        </div>
       </ActionForm>
     </div>
   )

@@ -2,14 +2,16 @@ import type { TableColumn } from '@/components/tables/tableColumn'
 import type { OfficeProposalRow } from '@/lib/domain/calls/officeProposalSchema'
 import { ABSENT, formatAmount } from '@/lib/format'
 
-/** A column of amounts in minor units, with its sum. */
+/** A column of amounts in minor units, all of one currency, with its sum. */
 export const money = (
   id: string,
   head: string,
   amount: (row: OfficeProposalRow) => number,
+  currency: string,
 ): TableColumn<OfficeProposalRow> => ({
   id,
   head,
+  unit: currency,
   align: 'right',
   value: amount,
   cell: (row) => (amount(row) === 0 ? ABSENT : formatAmount(amount(row), row.currency)),
@@ -17,6 +19,6 @@ export const money = (
   total: (rows) =>
     formatAmount(
       rows.reduce((sum, row) => sum + amount(row), 0),
-      rows[0]?.currency ?? 'EUR',
+      currency,
     ),
 })

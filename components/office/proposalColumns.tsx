@@ -7,7 +7,7 @@ import { money } from './moneyColumn'
 import { stateWords } from './stateWords'
 
 /** Columns of the office's list of proposals. */
-export const proposalColumns: TableColumn<OfficeProposalRow>[] = [
+export const proposalColumns = (currency: string): TableColumn<OfficeProposalRow>[] => [
   {
     id: 'reference',
     head: 'Reference',
@@ -41,7 +41,7 @@ export const proposalColumns: TableColumn<OfficeProposalRow>[] = [
     total: (rows) =>
       formatHoursFromSeconds(rows.reduce((sum, row) => sum + row.askedSeconds, 0)).replace(/\s*h$/, ''),
   },
-  money('fee', 'Fee', (row) => row.feeMinor ?? 0),
-  money('paid', 'Paid', (row) => row.paidMinor - row.refundedMinor),
+  money('fee', 'Fee', (row) => row.feeMinor ?? 0, currency),
+  money('paid', 'Paid', (row) => row.paidMinor - row.refundedMinor, currency),
   { id: 'fee-state', head: 'Fee is', value: (row) => (row.feeState ? stateWords(row.feeState) : '') },
 ]

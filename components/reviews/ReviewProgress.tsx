@@ -17,22 +17,28 @@ export function ReviewProgress({ group }: { group: ReviewsOfCall }) {
           Call {call.number}: {words}
         </h2>
         <p className="m-0 text-table">
-          <span className="text-muted">Reviews are due in </span>
-          <strong className="font-semibold text-lamp">
-            <Countdown
-              untilMs={call.reviewsDueAt.getTime()}
-              serverNowMs={now.getTime()}
-              parts={2}
-              passed="past: finish before the panel meets"
-            />
-          </strong>
-          <span className="text-muted"> · {formatUtc(call.reviewsDueAt)}</span>
+          {now < call.reviewsDueAt ? (
+            <>
+              <span className="text-muted">Reviews are due in </span>
+              <strong className="font-semibold text-lamp">
+                <Countdown untilMs={call.reviewsDueAt.getTime()} serverNowMs={now.getTime()} parts={2} />
+              </strong>
+              <span className="text-muted"> · {formatUtc(call.reviewsDueAt)}</span>
+            </>
+          ) : (
+            <>
+              <span className="text-muted">Reviews were due on {formatUtc(call.reviewsDueAt)}</span>
+              {finished < lines.length && now < call.panelMeetsAt ? (
+                <strong className="font-semibold text-lamp">; finish before the panel meets</strong>
+              ) : null}
+            </>
+          )}
         </p>
       </div>
       <div className="mt-2">
         <ProgressBar share={lines.length ? finished / lines.length : 0} label={words} />
       </div>
-      {declaredAt ? (
+      {declaredAt && now < call.panelMeetsAt ? (
         <p className="mt-2 text-caption text-muted">
           You declared your interests on {formatDay(declaredAt)}, from the list of all names.{' '}
           <TextLink href={paths.interests(call.slug)}>Something has changed</TextLink>

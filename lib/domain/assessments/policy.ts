@@ -1,7 +1,7 @@
 import { no, unseen, yes, type Decision } from '@/lib/auth/decision'
 import { holdsForInstrument, type Actor } from '../actor'
 import { callPhase } from '../calls/rules'
-import type { Call } from '../calls/types'
+import type { Call, CallPhase } from '../calls/types'
 import type { ProposalState } from '../proposals/types'
 
 export interface RequestFacts {
@@ -22,12 +22,14 @@ export function canSeeRequest(actor: Actor, facts: RequestFacts): Decision {
   return phase === 'planned' || phase === 'open' || phase === 'archived' ? unseen('request') : yes
 }
 
+/** Whether assessments of a call are still made: from its closing until a panel begins to rank. */
+export const isAssessed = (phase: CallPhase): boolean => phase === 'closed' || phase === 'review'
+
 /** Assessing, asking and passing on end when the panel begins to rank. */
 export function canAssess(actor: Actor, facts: RequestFacts): Decision {
   const seen = canSeeRequest(actor, facts)
   if (!seen.allowed) return seen
-  const phase = callPhase(facts.call, facts.now)
-  return phase === 'closed' || phase === 'review'
+  return isAssessed(callPhase(facts.call, facts.now))
     ? yes
     : no('window', 'The panel has begun to rank: assessments of this call are settled.')
 }

@@ -1,10 +1,13 @@
 import { standingAssessments } from '@/db/queries/assessments'
+import { databaseNow } from '@/db/queries/clock'
 import { questionsOfRequests, type QuestionRow } from '@/db/queries/assessmentQuestions'
 import { requestParts, type RequestPart } from '@/db/queries/requestParts'
 import { modeNames, snapshotHeads } from '@/db/queries/snapshotHeads'
+import { callPhase } from '../calls/rules'
 import type { ActingContext } from '../context'
 import { worstVerdict } from '../observations/worstVerdict'
 import type { Assessment, RequestLine } from './types'
+import { isAssessed } from './policy'
 import { visibleRequests } from './visibleRequests'
 
 function questionState(questions: readonly QuestionRow[], assessed: Assessment | undefined) {
@@ -20,7 +23,7 @@ const sum = (parts: readonly RequestPart[], of: 'askedSeconds' | 'neededSeconds'
 
 /** Requests on the actor's instruments, hours and verdict of each on that instrument alone; no names anywhere. */
 export async function readRequestLines(ctx: ActingContext): Promise<RequestLine[]> {
-  const visible = await visibleRequests(ctx)
+  const [visible, now] = await Promise.all([visibleRequests(ctx), databaseNow(ctx.db)])
   const proposalIds = [...new Set(visible.map(({ request }) => request.proposalId))]
   const requestIds = visible.map(({ request }) => request.id)
   const [heads, parts, assessed, questions] = await Promise.all([
@@ -58,6 +61,7 @@ export async function readRequestLines(ctx: ActingContext): Promise<RequestLine[
         assessedAt: assessment?.assessedAt.toISOString() ?? null,
         reason: assessment?.reason ?? '',
         passedAt: request.passedAt?.toISOString() ?? null,
+        isSettled: !isAssessed(callPhase(call, now)),
         question: questionState(
           questions.filter(({ requestId }) => requestId === request.id),
           assessment,

@@ -18,6 +18,7 @@ const requestLine = z.object({
   assessedAt: z.string().nullable(),
   reason: z.string(),
   passedAt: z.string().nullable(),
+  isSettled: z.boolean(),
   question: z.enum(['none', 'asked', 'answered']),
 })
 

@@ -52,6 +52,8 @@ export interface RequestLine {
   assessedAt: string | null
   reason: string
   passedAt: string | null
+  /** The panel ranks or has decided: nothing is assessed or passed on any more. */
+  isSettled: boolean
   /** A question waits for its answer, or one came since the last assessment. */
   question: 'none' | 'asked' | 'answered'
 }

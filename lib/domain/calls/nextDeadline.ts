@@ -25,9 +25,9 @@ function datesFor(call: Dated, role: Role | null): Deadline[] {
   const all: Record<string, Deadline> = {
     opens: { words: `Call ${n} opens in`, at: call.opensAt, dayOnly: false },
     closes: { words: `Call ${n} closes in`, at: call.closesAt, dayOnly: false },
-    fees: { words: `Fees of call ${n} are due in`, at: call.graceUntil, dayOnly: false },
-    assessments: { words: 'Assessments are due in', at: call.assessmentsDueAt, dayOnly: false },
-    reviews: { words: 'Reviews are due in', at: call.reviewsDueAt, dayOnly: false },
+    fees: { words: `Call ${n}: fees due in`, at: call.graceUntil, dayOnly: false },
+    assessments: { words: 'Assessments due in', at: call.assessmentsDueAt, dayOnly: false },
+    reviews: { words: 'Reviews due in', at: call.reviewsDueAt, dayOnly: false },
     panel: { words: 'Panel meets in', at: call.panelMeetsAt, dayOnly: false },
     letters: { words: 'Letters go out in', at: call.lettersAt, dayOnly: true },
   }

@@ -39,6 +39,7 @@ const elsewhere = (): Actor => ({
 describe('requests', () => {
   it('show frozen hours and verdict and no names', async () => {
     const lines = await readRequestLines(ctx)
+    expect(lines.map((line) => line.isSettled)).toEqual([false])
     expect(lines).toMatchObject([
       {
         requestId: call.requestId,
@@ -117,6 +118,7 @@ describe('assessing', () => {
   it('ends when the panel ranks', async () => {
     await db()('calls').where({ id: call.callId }).update({ stage: 'ranking' })
     await expect(assess()).rejects.toMatchObject({ kind: 'closed' })
+    expect((await readRequestLines(ctx)).map((line) => line.isSettled)).toEqual([true])
   })
 })
 
