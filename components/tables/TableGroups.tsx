@@ -15,7 +15,7 @@ export function TableGroups({ groups }: { groups: readonly TableGroup[] }) {
       {groups.map(({ name, span, tone }, index) =>
         tone ? (
           <th key={index} role="columnheader" scope="colgroup" colSpan={span}>
-            <svg className="block w-full" height="3" aria-hidden="true" focusable="false">
+            <svg className="block w-0 min-w-full" height="3" aria-hidden="true" focusable="false">
               <line
                 x1="0"
                 x2="100%"

@@ -19,10 +19,17 @@ function wordsOf(error: ScienceError, cosmology: Cosmology, z: number): string {
   return z === 0 ? 'none at z = 0' : 'beyond the engine'
 }
 
+/** Exactly at a turn the expansion stands still, and what is divided by its rate has no value. */
+const atTheTurn = {
+  words: 'none at the turn',
+  sentence: 'Here the expansion stands still, and what is measured against its rate has no value.',
+}
+
 /** Reads one quantity; what a universe does not have becomes words, anything else that goes wrong is thrown on. */
 export function readQuantity(cosmology: Cosmology, quantity: CosmologyQuantity, z: number): Reading {
   try {
-    return { value: cosmology[quantity](z), absent: null }
+    const value = cosmology[quantity](z)
+    return Number.isFinite(value) ? { value, absent: null } : { value: null, absent: atTheTurn }
   } catch (error) {
     if (!(error instanceof ScienceError)) throw error
     return { value: null, absent: { words: wordsOf(error, cosmology, z), sentence: error.message } }

@@ -9,13 +9,13 @@ export type Surroundings = Omit<NearbyInput, 'redshift'>
 const frames = {
   heliocentric: {
     id: 'z_heliocentric',
-    unit: 'seen from the Sun',
+    unit: 'Sun’s frame',
     description: 'heliocentric redshift',
     latex: 'z_\\mathrm{hel}',
   },
   cmb: {
     id: 'z_cmb',
-    unit: 'against the background',
+    unit: 'CMB frame',
     description: 'redshift in the frame of the microwave background',
     latex: 'z_\\mathrm{CMB}',
   },
