@@ -23,7 +23,9 @@ export function exposureWarnings({ mode, conditions }: ExposureInput, facts: Fac
     found.push(`Read noise and dark current make ${percent(facts.regimeShare)} of the noise.`)
   }
   if (facts.regime === 'floor') {
-    found.push('What is left of the sky after subtraction makes most of the noise; a lower S/N takes far less time.')
+    found.push(
+      'What is left of the sky after subtraction makes most of the noise; a lower S/N takes far less time.',
+    )
   }
   const { best10 } = conditions.site.seeingQuantilesArcsec
   if (conditions.seeingArcsec < best10) {
