@@ -13,8 +13,3 @@ export function database(): Database {
 
 /** The promises that do not hold as the database stands. */
 export const brokenPromises = () => invariantBreaches(database())
-
-export async function closeDatabase(): Promise<void> {
-  await db?.destroy()
-  db = null
-}
