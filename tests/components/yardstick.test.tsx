@@ -169,6 +169,16 @@ describe('Yardstick', () => {
     expect(list.value).toMatch(/, 0\.00999$/)
   })
 
+  it('begins anew, and takes that back', async () => {
+    const user = userEvent.setup()
+    show({ z: '3', mode: 'compare' })
+    await user.click(screen.getByRole('button', { name: 'Begin anew' }))
+    await waitFor(() => expect(window.location.search).toBe(''))
+    expect(screen.queryByRole('button', { name: 'Begin anew' })).toBeNull()
+    act(() => toastStore.read().at(-1)?.undo?.())
+    await waitFor(() => expect(window.location.search).toBe('?mode=compare&z=3'))
+  })
+
   it('takes one to six cosmologies, each with its own line', async () => {
     const user = userEvent.setup()
     show({ z: '1' })

@@ -73,7 +73,7 @@ export function ModePlots({ view, reference, onChange, onPoint }: ModePlotsProps
         />
         {exposure ? (
           <QuantityPlot
-            title={`Exposure time, the sky limits, ${reference.name} = 1`}
+            title="Exposure, sky-limited, ratio"
             name={`Exposure time of a source of given luminosity where the sky limits, ${reference.name} = 1,`}
             plot={exposure}
             redshifts={redshifts}

@@ -1,6 +1,9 @@
 'use client'
 
-import type { YardstickState } from '@/lib/domain/tools/yardstick/state'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { showToast } from '@/components/ui/showToast'
+import { usualState, type YardstickState } from '@/lib/domain/tools/yardstick/state'
+import { writeState } from '@/lib/domain/tools/yardstick/stateQuery'
 import type { YardstickView } from '@/lib/domain/tools/yardstick/viewOf'
 import { pieces } from '@/lib/domain/tools/yardstick/firstValues'
 import { countInWords } from '@/lib/format'
@@ -23,6 +26,7 @@ export interface SideColumnProps {
 /** What is asked: redshifts or values, the cosmologies to read them under, and what a mode needs besides. */
 export function SideColumn({ state, view, editing, onEdit, onChange }: SideColumnProps) {
   const { cosmologies } = state
+  const changed = writeState(state)?.toString() !== ''
   return (
     <div className="flex flex-col gap-8">
       <div>
@@ -70,6 +74,19 @@ export function SideColumn({ state, view, editing, onEdit, onChange }: SideColum
           value={String(view.reference?.place ?? 0)}
           onChange={(place) => onChange({ reference: Number(place) })}
         />
+      ) : null}
+      {changed ? (
+        <p className="m-0 text-table">
+          <LinkLikeButton
+            onClick={() => {
+              onEdit(null)
+              onChange(usualState)
+              showToast('Begun anew.', { undo: () => onChange(state) })
+            }}
+          >
+            Begin anew
+          </LinkLikeButton>
+        </p>
       ) : null}
     </div>
   )
