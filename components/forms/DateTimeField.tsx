@@ -39,22 +39,26 @@ export function DateTimeField({ name, label, help, optional, utcOffsetHours }: D
   return (
     <FieldFrame {...field} as="fieldset" label={label} help={help} optional={optional}>
       <div className="flex max-w-96 flex-wrap items-center gap-3">
-        <input
-          {...shared}
-          id={field.id}
-          type="date"
-          aria-label="Date"
-          value={date}
-          onChange={(event) => change(event.target.value, time)}
-        />
-        <input
-          {...shared}
-          type="time"
-          step={1}
-          aria-label="Time, UTC"
-          value={time}
-          onChange={(event) => change(date, event.target.value)}
-        />
+        <span className="min-w-0 grow basis-34 max-sm:basis-full">
+          <input
+            {...shared}
+            id={field.id}
+            type="date"
+            aria-label="Date"
+            value={date}
+            onChange={(event) => change(event.target.value, time)}
+          />
+        </span>
+        <span className="min-w-0 grow basis-34">
+          <input
+            {...shared}
+            type="time"
+            step={1}
+            aria-label="Time, UTC"
+            value={time}
+            onChange={(event) => change(date, event.target.value)}
+          />
+        </span>
         <span className="text-table text-muted">UTC</span>
       </div>
       {at ? (

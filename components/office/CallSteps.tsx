@@ -37,6 +37,7 @@ export function CallSteps({ call, phase, open, close }: CallStepsProps) {
       {phase === 'planned' ? (
         <ConfirmTyped
           trigger="Open this call"
+          triggerProps={{ look: 'secondary', size: 'regular' }}
           title={`Open ${call.title}?`}
           expected={String(call.number)}
           expectedName="the number of the call"
@@ -50,6 +51,7 @@ export function CallSteps({ call, phase, open, close }: CallStepsProps) {
       {phase === 'open' ? (
         <ConfirmTyped
           trigger="Close this call"
+          triggerProps={{ look: 'secondary', size: 'regular' }}
           title={`Close ${call.title} now?`}
           expected={String(call.number)}
           expectedName="the number of the call"

@@ -48,9 +48,11 @@ export function DatesForm({ call, utcOffsetHours, action }: DatesFormProps) {
   return (
     <ActionForm form={form}>
       <CallDateFields utcOffsetHours={utcOffsetHours} />
-      <SubmitButton look="secondary" busyWord="Saving">
-        Save the dates
-      </SubmitButton>
+      <div>
+        <SubmitButton look="secondary" busyWord="Saving">
+          Save the dates
+        </SubmitButton>
+      </div>
     </ActionForm>
   )
 }

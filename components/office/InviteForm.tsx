@@ -70,7 +70,9 @@ export function InviteForm({ action, panels, instruments }: InviteFormProps) {
           placeholder="Choose an instrument"
         />
       ) : null}
-      <SubmitButton busyWord="Inviting">Send the invitation</SubmitButton>
+      <div>
+        <SubmitButton busyWord="Inviting">Send the invitation</SubmitButton>
+      </div>
     </ActionForm>
   )
 }

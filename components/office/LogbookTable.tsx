@@ -17,7 +17,12 @@ const columns: TableColumn<LogbookTableRow>[] = [
     value: (row) => row.at,
     cell: (row) => <span className="sm:whitespace-nowrap">{formatUtcInstant(new Date(row.at))}</span>,
   },
-  { id: 'person', head: 'Who', value: (row) => row.person ?? row.actingAs },
+  {
+    id: 'person',
+    head: 'Who',
+    value: (row) => row.person ?? row.actingAs,
+    cell: (row) => <span className="sm:whitespace-nowrap">{row.person ?? row.actingAs}</span>,
+  },
   { id: 'as', head: 'Acting as', value: (row) => row.actingAs },
   { id: 'action', head: 'What', value: (row) => row.action },
   { id: 'subject', head: 'Of what', value: (row) => row.subject },

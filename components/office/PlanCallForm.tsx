@@ -54,9 +54,11 @@ export function PlanCallForm({ action, patterns }: PlanCallFormProps) {
         />
       </div>
       <CallDateFields />
-      <SubmitButton look="secondary" busyWord="Planning">
-        Plan this call
-      </SubmitButton>
+      <div>
+        <SubmitButton look="secondary" busyWord="Planning">
+          Plan this call
+        </SubmitButton>
+      </div>
     </ActionForm>
   )
 }

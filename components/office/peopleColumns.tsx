@@ -7,6 +7,7 @@ import type { OfficePersonRow, OpenInvitationRow } from '@/lib/domain/people/off
 import { formatList, formatUtcWithYear } from '@/lib/format'
 import { OfficeSteps } from './OfficeStep'
 import { roleInWords } from './roleInWords'
+import { rolesInWords } from './rolesInWords'
 
 function Toggle({ person }: { person: OfficePersonRow }) {
   const steps = useContext(OfficeSteps)
@@ -35,13 +36,18 @@ function TakeBack({ line }: { line: OpenInvitationRow }) {
 
 /** Investigators are everybody: only further roles are worth a word. */
 const rolesOf = (row: OfficePersonRow) =>
-  [...new Set(row.roles.filter((role) => role.role !== 'investigator').map(roleInWords))].join('; ')
+  rolesInWords(row.roles.filter((role) => role.role !== 'investigator'))
 
 const stands = (row: OfficePersonRow) => (row.isDisabled ? 'shut' : row.isConfirmed ? '' : 'not confirmed')
 
 /** Columns of the accounts. */
 export const peopleColumns: TableColumn<OfficePersonRow>[] = [
-  { id: 'name', head: 'Name', value: (row) => row.name },
+  {
+    id: 'name',
+    head: 'Name',
+    value: (row) => row.name,
+    cell: (row) => <span className="sm:whitespace-nowrap">{row.name}</span>,
+  },
   { id: 'email', head: 'E-mail', value: (row) => row.email },
   { id: 'institute', head: 'Institute', value: (row) => row.institute },
   { id: 'roles', head: 'Roles', value: rolesOf, cell: (row) => rolesOf(row) || 'investigator' },

@@ -4,11 +4,13 @@ import { TextLink } from '@/components/ui/TextLink'
 export function PacketFrame({ url, label }: { url: string; label: string }) {
   return (
     <div className="mt-6">
-      <iframe
-        src={`${url}#view=FitH&navpanes=0`}
-        title={label}
-        className="block h-[70rem] max-h-[130vh] w-full rounded border border-rule bg-surface max-sm:hidden"
-      />
+      <div className="paper-frame max-sm:hidden">
+        <iframe
+          src={`${url}#view=FitH&navpanes=0`}
+          title={label}
+          className="block h-[70rem] max-h-[130vh] w-full rounded border border-rule bg-surface"
+        />
+      </div>
       <p className="mt-2 text-table text-muted">
         <TextLink href={url} plain>
           Open the packet as a PDF

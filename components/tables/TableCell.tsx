@@ -19,7 +19,7 @@ export function TableCell<Row>({ column, row, first }: TableCellProps<Row>) {
   const className = classNames(
     column.align === 'right' && 'is-right',
     column.computed && 'is-computed',
-    column.wide && 'is-wide',
+    column.wide && !isAbsent(value) && 'is-wide',
     absent && 'is-absent',
   )
   const content = column.cell ? column.cell(row) : absent ? ABSENT : plainText(value)
