@@ -27,7 +27,7 @@ test('Yardstick finds the redshift of an age and copies what it shows', async ({
   await page.getByRole('textbox', { name: 'Values' }).fill('3300 Myr\n20 Gyr')
   await expect(page.getByRole('cell', { name: 'Planck 2018 is younger' })).toBeVisible()
   await page.getByRole('button', { name: 'Copy as CSV' }).click()
-  await expect(page.getByText('Copied two rows as CSV.')).toBeVisible()
+  await expect(page.getByText('Copied two rows as CSV.', { exact: true })).toBeVisible()
   const copied = await page.evaluate(() => navigator.clipboard.readText())
   // Astropy, z_at_value(Planck18.age, 3.3 Gyr): 1.9856.
   expect(copied).toMatch(/^ageGyr \(Gyr\),z_1\r\n3\.3,1\.985\d+\r\n20,\r\n$/)
