@@ -59,6 +59,7 @@ export function ReportHours(props: ReportHoursProps) {
           }}
         >
           <LineChart
+            fluid
             label={`Signal-to-noise ${unit} grows to ${formatNumber(points.at(-1)?.[1], 0)} in ${formatHoursFromSeconds(until)} of open shutter.`}
             series={[{ id: 'snr', name: props.cosmologyName, tone: 's1', points, chosen: true }]}
             xLabel="open shutter, h"

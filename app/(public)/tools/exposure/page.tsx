@@ -1,25 +1,38 @@
 import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
-import { ExposureAnswer } from '@/components/tools/ExposureAnswer'
-import { ExposureForm } from '@/components/tools/ExposureForm'
+import { ExposureAnswer } from '@/components/tools/exposure/ExposureAnswer'
+import { ExposureForm } from '@/components/tools/exposure/ExposureForm'
 import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
 import { askedOf } from '@/lib/domain/tools/askedOf'
-import { expose } from '@/lib/domain/tools/expose'
-import { exposureSchema } from '@/lib/domain/tools/schema'
+import { expose } from '@/lib/domain/tools/exposure/expose'
+import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposure/schema'
 
 export const metadata: Metadata = { title: 'Exposure' }
 
-const usual = {
+const usual: ExposureInput = {
+  solve: 'time',
   mode: 'lantern-r',
-  magnitude: '24.5',
-  snr: '30',
-  moon: 'dark' as const,
+  snr: '20',
+  hours: '1',
+  source: 'continuum',
+  magnitude: '23.5',
+  band: 'r AB',
+  flux: '2e-17',
+  wavelength: '6565',
+  width: '200',
+  shape: 'point',
+  radius: '0.5',
+  sersic: '1',
+  area: '1',
+  moon: 'dark',
+  clouds: 'photometric',
   airmass: '1.2',
   seeing: '0.8',
+  slit: 'parallactic',
 }
 
 export default async function ExposurePage({
@@ -36,7 +49,7 @@ export default async function ExposurePage({
     <Main>
       <PageTitle
         title="Exposure"
-        lead="Signal-to-noise and time for every instrument on offer, with the sky as bright as it will be."
+        lead="How long, how good, or how faint: for every instrument on offer, with the sky as bright as it will be."
       />
       {trouble ? (
         <div className="mt-4">
@@ -49,11 +62,20 @@ export default async function ExposurePage({
             <ExposureForm
               key={JSON.stringify(asked)}
               asked={{ ...asked, mode: mode.slug }}
-              modes={view.modes.map((one) => ({ value: one.slug, label: one.name }))}
+              modes={view.modes.map((one) => ({
+                value: one.slug,
+                label: one.name,
+                group: one.telescope.name,
+              }))}
+              slitModes={view.modes.filter(({ kind }) => kind === 'long-slit').map(({ slug }) => slug)}
             />
           </div>
-          <div className="mt-10">
-            <ExposureAnswer mode={mode} asked={asked} answer={answer} />
+          <div className="mt-10 border-t border-ink pt-6">
+            {answer.exposed ? (
+              <ExposureAnswer mode={mode} asked={asked} exposed={answer.exposed} />
+            ) : (
+              <BarNote tone="not-feasible">{answer.refusal}</BarNote>
+            )}
           </div>
         </>
       ) : (
