@@ -26,7 +26,7 @@ export function OverheadsTable({ modes, targets }: OverheadsTableProps) {
           ].map(([term, value, per]) => (
             <div
               key={term}
-              className="grid grid-cols-[1fr_6rem_9rem] gap-x-3 border-t border-rule py-2 last:border-b"
+              className="grid grid-cols-[minmax(0,1fr)_5rem_minmax(0,9rem)] gap-x-3 border-t border-rule py-2 last:border-b"
             >
               <dt>{term}</dt>
               <dd className="m-0 text-right">{value}</dd>

@@ -6,7 +6,7 @@ import { formatNumber, formatOffset, formatPercent, formatQuantity, formatSigned
 
 const byBand = (values: Record<string, number>, decimals: number) =>
   Object.entries(values)
-    .map(([band, value]) => `${band} ${formatNumber(value, decimals)}`)
+    .map(([band, value]) => `${band}\u00a0${formatNumber(value, decimals)}`)
     .join(', ')
 
 /** Sites, telescopes, instruments and modes as they are computed with. */

@@ -49,7 +49,11 @@ export function DiscussedProposal({ proposal, view, save, setAside }: DiscussedP
           Raw mean <strong>{formatNumber(proposal.raw, 2)}</strong>, spread {formatNumber(proposal.spread, 2)}
           ; merit {formatNumber(proposal.merit, 2)}.
         </p>
-        {canWrite ? <SetAsideButton proposal={proposal} ranking={ranking} action={setAside} /> : null}
+        {canWrite ? (
+          <span className="text-table">
+            <SetAsideButton proposal={proposal} ranking={ranking} action={setAside} />
+          </span>
+        ) : null}
       </div>
       {proposal.notes.map((note) => (
         <div key={note.instrument} className="mt-4 text-table">

@@ -134,7 +134,7 @@ export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingR
       wide: true,
       value: (row) => (row.low === null ? null : `${row.low} to ${row.high ?? row.low}`),
       cell: (row) => (
-        <span className="-my-2 inline-block align-middle">
+        <span className="inline-block align-middle sm:-my-2">
           <Interval row={row} count={count} line={line} zone={zone} />
         </span>
       ),
