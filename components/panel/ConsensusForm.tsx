@@ -43,7 +43,7 @@ export function ConsensusForm({ proposal, panelId, action }: ConsensusFormProps)
         label="Statement"
         help="The investigators read it with the decision. It can be edited until decisions are made known."
         rows={5}
-        limit={4000}
+        limit={8000}
       />
       <div>
         <SubmitButton busyWord="Keeping">Keep the statement</SubmitButton>

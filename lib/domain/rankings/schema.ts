@@ -34,6 +34,6 @@ export const consensusSchema = panelKeySchema.extend({
   proposalId: rowKey,
   /** Version of the draft decision; 0 while there is none. */
   version: z.number().int().min(0),
-  statement: z.string().trim().max(4000, 'At most 4,000 characters.'),
+  statement: z.string().trim().max(8000, 'At most 8,000 characters.'),
 })
 export type ConsensusInput = z.output<typeof consensusSchema>
