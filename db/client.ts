@@ -18,8 +18,8 @@ class SteppedClient extends MysqlClient {
     try {
       return await step(`db:${verb}`, () => super._query(connection, statement))
     } catch (error) {
-      // A transaction that could not be ended would live on in the pool, and its locks with it.
-      if (verb === 'commit' || verb === 'rollback') {
+      // A transaction whose beginning or end is unknown would live on in the pool, and its locks with it.
+      if (verb === 'begin' || verb === 'commit' || verb === 'rollback') {
         connection.__knex__disposed = error
         connection.destroy()
       }

@@ -2,13 +2,20 @@
 
 import { ActionForm } from '@/components/forms/ActionForm'
 import { NumberField } from '@/components/forms/NumberField'
+import { SelectField } from '@/components/forms/SelectField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
 import { paths } from '@/lib/paths'
 import { useToolForm } from './useToolForm'
 
-/** A position and the highest airmass. */
+const moons = [
+  { value: 'any', label: 'any Moon' },
+  { value: 'grey', label: 'two thirds lit at most, or down' },
+  { value: 'dark', label: 'a quarter lit at most, or down' },
+]
+
+/** A position, the evenings, and how low, how bright and how near the Moon it may be. */
 export function SeasonForm({ asked }: { asked: SeasonInput }) {
   const form = useToolForm(paths.season(), seasonSchema, asked)
   return (
@@ -16,6 +23,10 @@ export function SeasonForm({ asked }: { asked: SeasonInput }) {
       <div className="grid items-end gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-4">
         <TextField name="ra" label="Right ascension" help="h m s, or degrees" />
         <TextField name="dec" label="Declination" help="± d m s, or degrees" />
+        <TextField name="from" label="First evening" />
+        <TextField name="to" label="Last evening" />
+        <SelectField name="moon" label="Under" options={moons} />
+        <NumberField name="separation" label="No nearer the Moon than" unit="°" />
         <NumberField name="airmass" label="Highest airmass" />
         <SubmitButton look="secondary" busyWord="Computing">
           Show the season

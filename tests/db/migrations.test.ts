@@ -44,7 +44,7 @@ describe('the migrations', () => {
     expect(await tables()).toEqual({})
     await db.migrate.latest(settings)
     expect(await tables()).toEqual(first)
-  })
+  }, 180_000)
 
   it('say of every table and column what it is, in utf8mb4', async () => {
     const [bare] = (await db.raw(

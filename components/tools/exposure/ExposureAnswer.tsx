@@ -4,8 +4,8 @@ import { BarNote } from '@/components/ui/BarNote'
 import { Facts } from '@/components/ui/Facts'
 import type { ModeRecord } from '@/lib/domain/facility/types'
 import { snrCurve } from '@/lib/domain/observations/rules'
-import { isFarFromBand, type Exposed } from '@/lib/domain/tools/exposure/expose'
-import type { ExposureInput } from '@/lib/domain/tools/exposure/schema'
+import type { Exposed } from '@/lib/domain/tools/expose'
+import type { ExposureInput } from '@/lib/domain/tools/exposureSchema'
 import { formatNumber, formatPercent, formatQuantity } from '@/lib/format'
 import { answerParts } from './answerWords'
 import { NoiseShares } from './NoiseShares'
@@ -14,6 +14,8 @@ interface ExposureAnswerProps {
   mode: ModeRecord
   asked: ExposureInput
   exposed: Exposed
+  /** The mode works far from the band in which the magnitude was measured. */
+  isFar: boolean
 }
 
 const skyWords = {
@@ -22,18 +24,15 @@ const skyWords = {
   'blank-sky': 'from frames of blank sky, which take as long again',
 } as const
 
+const farWords =
+  'The mode works far from the band of the magnitude: the source is taken as flat in f_ν between them.'
+
 /** The answer in one sentence, then what it is made of. */
-export function ExposureAnswer({ mode, asked, exposed }: ExposureAnswerProps) {
+export function ExposureAnswer({ mode, asked, exposed, isFar }: ExposureAnswerProps) {
   const { report } = exposed
   const isImage = mode.kind === 'imaging'
   const { before, figure, after } = answerParts(asked, exposed, mode.name, isImage)
   const points = snrCurve(report, report.openS, 2 * report.openS)
-  const warnings = isFarFromBand(asked, report.wavelengthA)
-    ? [
-        ...report.warnings,
-        'The mode works far from the band of the magnitude: the source is taken as flat in f_ν between them.',
-      ]
-    : report.warnings
   return (
     <>
       <p className="max-w-4xl text-lead" aria-live="polite">
@@ -41,7 +40,7 @@ export function ExposureAnswer({ mode, asked, exposed }: ExposureAnswerProps) {
         <strong className="font-semibold">{figure}</strong>
         {after}
       </p>
-      {warnings.map((warning) => (
+      {[...report.warnings, ...(isFar ? [farWords] : [])].map((warning) => (
         <div key={warning} className="mt-3">
           <BarNote tone="marginal">{warning}</BarNote>
         </div>

@@ -6,7 +6,7 @@ import { NumberField } from '@/components/forms/NumberField'
 import { RadioField } from '@/components/forms/RadioField'
 import { SelectField, type SelectOption } from '@/components/forms/SelectField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
-import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposure/schema'
+import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposureSchema'
 import { paths } from '@/lib/paths'
 import { useToolForm } from '../useToolForm'
 import { clouds, moons, questions, slits } from './choices'
@@ -17,12 +17,14 @@ interface ExposureFormProps {
   modes: readonly SelectOption[]
   /** Modes behind a slit, by their names in addresses. */
   slitModes: readonly string[]
+  /** Bands a magnitude can be given in. */
+  bands: readonly SelectOption[]
 }
 
 const column = 'flex flex-col gap-4 border-t border-rule pt-3'
 
 /** Question, source and sky in three columns; only what counts for the choice made is asked. */
-export function ExposureForm({ asked, modes, slitModes }: ExposureFormProps) {
+export function ExposureForm({ asked, modes, slitModes, bands }: ExposureFormProps) {
   const form = useToolForm(paths.exposure(), exposureSchema, asked)
   const { control } = form.form
   const [solve, mode] = useWatch({ control, name: ['solve', 'mode'] })
@@ -38,7 +40,7 @@ export function ExposureForm({ asked, modes, slitModes }: ExposureFormProps) {
         </div>
         <div className={column}>
           <h2 className="text-body font-semibold">The source</h2>
-          <SourceFields control={control} />
+          <SourceFields control={control} bands={bands} />
         </div>
         <div className={column}>
           <h2 className="text-body font-semibold">The sky</h2>

@@ -2,12 +2,18 @@
 
 import { useWatch, type Control } from 'react-hook-form'
 import { NumberField } from '@/components/forms/NumberField'
-import { SelectField } from '@/components/forms/SelectField'
-import type { ExposureInput } from '@/lib/domain/tools/exposure/schema'
-import { bandOptions, shapes, sources } from './choices'
+import { SelectField, type SelectOption } from '@/components/forms/SelectField'
+import type { ExposureInput } from '@/lib/domain/tools/exposureSchema'
+import { shapes, sources } from './choices'
 
 /** What is measured and how it lies on the sky; the brightness is left out where it is the answer. */
-export function SourceFields({ control }: { control: Control<ExposureInput> }) {
+export function SourceFields({
+  control,
+  bands,
+}: {
+  control: Control<ExposureInput>
+  bands: readonly SelectOption[]
+}) {
   const [solve, source, shape] = useWatch({ control, name: ['solve', 'source', 'shape'] })
   const isAnswer = solve === 'limit'
   return (
@@ -24,7 +30,7 @@ export function SourceFields({ control }: { control: Control<ExposureInput> }) {
           {isAnswer ? null : (
             <NumberField name="magnitude" label={shape === 'uniform' ? 'mag arcsec⁻²' : 'Magnitude'} />
           )}
-          <SelectField name="band" label="In the band" options={bandOptions} />
+          <SelectField name="band" label="In the band" options={bands} />
         </div>
       )}
       <SelectField name="shape" label="It looks like" options={shapes} />

@@ -1,5 +1,5 @@
-import type { Exposed } from '@/lib/domain/tools/exposure/expose'
-import type { ExposureInput } from '@/lib/domain/tools/exposure/schema'
+import type { Exposed } from '@/lib/domain/tools/expose'
+import type { ExposureInput } from '@/lib/domain/tools/exposureSchema'
 import { formatDuration, formatNumber } from '@/lib/format'
 
 /** 2.5 × 10⁻¹⁷ */

@@ -1,6 +1,5 @@
 import type { RadioOption } from '@/components/forms/RadioField'
 import type { SelectOption } from '@/components/forms/SelectField'
-import { bandChoice, magnitudeBands } from '@/lib/domain/targets/bands'
 
 export const questions: readonly RadioOption[] = [
   { value: 'time', label: 'How long does it take?' },
@@ -35,8 +34,3 @@ export const slits: readonly SelectOption[] = [
   { value: 'parallactic', label: 'along the dispersion of the air' },
   { value: 'across', label: 'across it' },
 ]
-
-export const bandOptions: readonly SelectOption[] = magnitudeBands.map(({ band, system }) => ({
-  value: bandChoice(band, system),
-  label: `${band}, ${system}`,
-}))

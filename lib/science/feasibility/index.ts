@@ -16,3 +16,4 @@ export type {
   Verdict,
 } from './types'
 export { feasibilityEngineVersion } from './version'
+export { moonClassLimits } from './moonClass'

@@ -7,9 +7,10 @@ import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
+import { bandChoice, magnitudeBands } from '@/lib/domain/targets/bands'
 import { askedOf } from '@/lib/domain/tools/askedOf'
-import { expose } from '@/lib/domain/tools/exposure/expose'
-import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposure/schema'
+import { expose, isFarFromBand } from '@/lib/domain/tools/expose'
+import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposureSchema'
 
 export const metadata: Metadata = { title: 'Exposure' }
 
@@ -67,12 +68,21 @@ export default async function ExposurePage({
                 label: one.name,
                 group: one.telescope.name,
               }))}
+              bands={magnitudeBands.map(({ band, system }) => ({
+                value: bandChoice(band, system),
+                label: `${band}, ${system}`,
+              }))}
               slitModes={view.modes.filter(({ kind }) => kind === 'long-slit').map(({ slug }) => slug)}
             />
           </div>
           <div className="mt-10 border-t border-ink pt-6">
             {answer.exposed ? (
-              <ExposureAnswer mode={mode} asked={asked} exposed={answer.exposed} />
+              <ExposureAnswer
+                mode={mode}
+                asked={asked}
+                exposed={answer.exposed}
+                isFar={isFarFromBand(asked, answer.exposed.report.wavelengthA)}
+              />
             ) : (
               <BarNote tone="not-feasible">{answer.refusal}</BarNote>
             )}

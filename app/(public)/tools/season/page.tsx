@@ -9,12 +9,23 @@ import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
 import { askedOf } from '@/lib/domain/tools/askedOf'
 import { positionOf } from '@/lib/domain/tools/positionOf'
-import { seasonSchema } from '@/lib/domain/tools/schema'
+import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
+import { numberOf } from '@/lib/domain/tools/texts'
 import { seasonView } from '@/lib/domain/observations/rules'
+import { moonClassLimits } from '@/lib/science/feasibility'
 
 export const metadata: Metadata = { title: 'Season' }
 
-const usual = { ra: '00 50 27.83', dec: '−17 40 08.8', airmass: '1.8' }
+/** What stands in the form at first, through the season of a call or, without one, of a year. */
+const usual = (call: { seasonFrom: string; seasonTo: string } | undefined): SeasonInput => ({
+  ra: '00 50 27.83',
+  dec: '−17 40 08.8',
+  airmass: '1.8',
+  from: call?.seasonFrom ?? '2027-07-01',
+  to: call?.seasonTo ?? '2027-12-31',
+  moon: 'any',
+  separation: '0',
+})
 
 export default async function SeasonPage({
   searchParams,
@@ -22,22 +33,19 @@ export default async function SeasonPage({
   searchParams: Promise<Record<string, string | string[] | undefined>>
 }) {
   const ctx = await openPage('/tools/season')
-  const { asked, trouble } = askedOf(seasonSchema, usual, await searchParams)
   const view = await readCurrentCall(ctx)
-  const maxAirmass = Number(asked.airmass.replace(',', '.'))
-  const season =
-    view &&
-    seasonView(
-      view.site,
-      { from: view.call.seasonFrom, to: view.call.seasonTo, maxAirmass },
-      positionOf(asked),
-    )
+  const { asked, trouble } = askedOf(seasonSchema, usual(view?.call), await searchParams)
+  const maxAirmass = numberOf(asked.airmass) ?? 2
+  const moon = {
+    ...moonClassLimits[asked.moon === 'any' ? 'bright' : asked.moon],
+    minSeparationDeg: numberOf(asked.separation) ?? 0,
+  }
+  const { from, to } = asked
+  const season = view && seasonView(view.site, { from, to, maxAirmass, moon }, positionOf(asked))
+  const isOfCall = from === view?.call.seasonFrom && to === view.call.seasonTo
   return (
     <Main>
-      <PageTitle
-        title="Season"
-        lead="When a target is up, in the dark, from the site, night by night through the call."
-      />
+      <PageTitle title="Season" lead="When a target is up, in the dark, from the site, night by night." />
       {trouble ? (
         <div className="mt-4">
           <BarNote tone="not-feasible">{trouble}</BarNote>
@@ -49,7 +57,7 @@ export default async function SeasonPage({
       <div className="mt-10">
         {view && season ? (
           <ReportSeason
-            title={`Through call ${view.call.number}`}
+            title={isOfCall ? `Through call ${view.call.number}` : 'Through these nights'}
             name="The target"
             site={view.site}
             view={season}

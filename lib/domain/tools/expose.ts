@@ -9,11 +9,11 @@ import {
 } from '@/lib/science/exposure'
 import { bands, toAb } from '@/lib/science/light'
 import { ScienceError } from '@/lib/science/ScienceError'
-import type { ModeRecord, SiteRecord } from '../../facility/types'
-import { scienceMode, scienceSite, transparencyShare } from '../../observations/scienceRecords'
-import { readBandChoice } from '../../targets/bands'
-import { numberOf } from '../texts'
-import type { ExposureInput } from './schema'
+import type { ModeRecord, SiteRecord } from '../facility/types'
+import { scienceMode, scienceSite, transparencyShare } from '../observations/scienceRecords'
+import { readBandChoice } from '../targets/bands'
+import { numberOf } from './texts'
+import type { ExposureInput } from './exposureSchema'
 
 export interface Exposed {
   report: ExposureReport

@@ -1,8 +1,8 @@
 import { z } from 'zod'
 import { SERSIC_LEAST, SERSIC_MOST } from '@/lib/science/exposure'
 import { parseMagnitude } from '@/lib/science/magnitude'
-import { readBandChoice } from '../../targets/bands'
-import { notBetween, numberBetween, numberOf } from '../texts'
+import { readBandChoice } from '../targets/bands'
+import { notBetween, numberBetween, numberOf } from './texts'
 
 const text = z.string().trim().max(60)
 

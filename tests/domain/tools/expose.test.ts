@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import { expose, isFarFromBand } from '@/lib/domain/tools/exposure/expose'
-import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposure/schema'
+import { expose, isFarFromBand } from '@/lib/domain/tools/expose'
+import { exposureSchema, type ExposureInput } from '@/lib/domain/tools/exposureSchema'
 import { site, slitMode } from '@/tests/support/contents'
 
 const asked = (change: Partial<ExposureInput> = {}): ExposureInput => ({
