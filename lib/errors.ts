@@ -7,6 +7,7 @@ export type RefusalKind =
   | 'stale'
   | 'closed'
   | 'too-large'
+  | 'wrong-media-type'
   | 'too-many'
   | 'unavailable'
   | 'integrity'
@@ -76,6 +77,7 @@ export const refuse = {
     ),
   closed: (sentence: string) => new Refusal('closed', sentence),
   tooLarge: (sentence: string) => new Refusal('too-large', sentence),
+  mediaType: (sentence: string) => new Refusal('wrong-media-type', sentence),
   tooMany: (retryAfterSeconds: number) =>
     new Refusal('too-many', 'That was tried too often. Wait a little, then try again.', {
       retryAfterSeconds,

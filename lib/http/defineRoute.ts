@@ -16,6 +16,7 @@ import { log } from '@/lib/log'
 import { asRefusal } from './asRefusal'
 import { problem } from './problem'
 import { readBody } from './readBody'
+import { requireMediaType } from './requireMediaType'
 
 type ActorOf<N extends RouteName> = (typeof access)['routes'][N] extends 'anyone' ? Actor | null : Actor
 type Parsed<S extends z.ZodType | undefined> = S extends z.ZodType ? z.output<S> : undefined
@@ -30,11 +31,15 @@ interface RouteSpec<
   name: N
   params?: P
   query?: Q
-  /** Schema of a JSON body. */
+  /** Schema of a JSON body; a body of another media type is refused unread. */
   body?: B
+  /** Media type of a body that is not JSON. */
+  accepts?: string
   /** Largest body, bytes; 1 MB unless told. */
   maxBytes?: number
   limit?: { points: number; seconds: number }
+  /** How a failure is told; problem details unless given. */
+  failure?: (error: unknown, requestId: string) => Response
   run: (
     ctx: Context & { readonly actor: ActorOf<N> },
     input: { params: Parsed<P>; query: Parsed<Q>; body: Parsed<B>; request: NextRequest; text: string },
@@ -74,6 +79,8 @@ export function defineRoute<
           spec.limit.seconds,
         )
 
+      const accepts = spec.body ? 'application/json' : spec.accepts
+      if (isWrite && accepts) requireMediaType(request, accepts)
       const text = isWrite ? await readBody(request, spec.maxBytes ?? 1_000_000) : ''
       const input = {
         params: parse(spec.params as P, await route.params),
@@ -90,7 +97,7 @@ export function defineRoute<
       unstable_rethrow(error)
       const refusal = asRefusal(error)
       if (!refusal) log.error({ err: error, route: spec.name, requestId: facts.id }, 'route failed')
-      return problem(error, facts.id)
+      return (spec.failure ?? problem)(error, facts.id)
     }
   }
 }

@@ -9,6 +9,7 @@ export const statusOf: Readonly<Record<RefusalKind, number>> = {
   stale: 409,
   closed: 403,
   'too-large': 413,
+  'wrong-media-type': 415,
   'too-many': 429,
   unavailable: 503,
   integrity: 409,
