@@ -148,3 +148,11 @@ export async function siteRecordsAt(db: Database, onDate: string): Promise<SiteR
   const sites = await db('sites').orderBy('id').select('id')
   return Promise.all(sites.map(({ id }) => siteRecordAt(db, id, onDate)))
 }
+
+/** Every telescope with the site it stands on. */
+export async function telescopesAtSites(
+  db: Database,
+): Promise<{ id: number; siteId: number; slug: string; name: string }[]> {
+  const rows = await db('telescopes').orderBy('id').select<TelescopesRow[]>('*')
+  return rows.map((row) => ({ id: row.id, siteId: row.site_id, slug: row.slug, name: row.name }))
+}

@@ -118,6 +118,114 @@ export const visibilityAnswer = z.object({
   ),
 })
 
+const through = z.number().describe('Share of the light, 0 to 1')
+
+export const lightAnswer = z.object({
+  engine,
+  cosmology: z.object(parameters),
+  z: z.number(),
+  magnitude: z
+    .object({
+      apparentAb: z.number().describe('With dust and lens; the intergalactic medium is told by wavelength'),
+      errorMag: z.number().describe('From the error of the magnification'),
+      absoluteAb: z.number(),
+      distanceModulusMag: z.number(),
+      kCorrectionMag: z.number(),
+      withoutDustOrLensAb: z.number(),
+      dustMag: z.number(),
+      magnificationMag: z.number().describe('Negative where the lens makes it brighter'),
+    })
+    .nullable(),
+  line: z
+    .object({
+      observedWavelengthA: maybe,
+      withoutDustOrLensErgSCm2: z.number(),
+      dustMag: z.number(),
+      magnificationMag: z.number(),
+      fluxErgSCm2: z.number().describe('With dust and lens'),
+    })
+    .nullable(),
+  kCorrectionMag: z.number(),
+  angularSizeArcsec: maybe.describe('Without the lens'),
+  dimming: z
+    .object({ bolometricMag: z.number(), perFrequencyMag: z.number() })
+    .describe('Of surface brightness: 10 log10(1 + z) and, per unit frequency, 7.5 log10(1 + z)'),
+  einsteinRadiusArcsec: maybe,
+  rows: z
+    .array(
+      z.object({
+        restA: z.number(),
+        observedA: z.number(),
+        throughDust: through,
+        throughIgm: through,
+        through,
+      }),
+    )
+    .describe('Rest wavelengths first, then observed ones, each in the order given'),
+})
+
+export const modesAnswer = z.object({
+  modes: z.array(
+    z.object({
+      id: z.number(),
+      slug: z.string(),
+      name: z.string(),
+      instrument: z.string(),
+      telescope: z.string(),
+      kind: z.enum(['imaging', 'long-slit']),
+      band: z.string().nullable(),
+      wavelengthMinA: z.number(),
+      wavelengthMaxA: z.number(),
+      medium: z.enum(['air', 'vacuum']).describe('What its wavelengths are measured in'),
+      pixelScaleArcsec: z.number(),
+      slitWidthArcsec: maybe,
+      resolvingPower: maybe,
+      minSubExposureS: z.number(),
+      maxSubExposureS: z.number(),
+      recordVersion: z.number(),
+    }),
+  ),
+})
+
+export const exposureAnswer = z.object({
+  engine,
+  mode: z.object({ id: z.number(), slug: z.string(), name: z.string() }),
+  records: z
+    .object({ site: z.number(), telescope: z.number(), mode: z.number() })
+    .describe('Versions of the records computed with'),
+  solve: z.enum(['snr', 'time', 'limit']),
+  snr: z.number(),
+  per: z.enum(['image', 'pixel', 'angstrom', 'resolution-element']),
+  limit: z
+    .object({ ab: maybe, fluxErgSCm2: maybe })
+    .nullable()
+    .describe('Faintest magnitude, or flux of a line, that reaches the S/N in the time'),
+  openS: z.number().describe('Open shutter over all sub-exposures'),
+  subExposures: z.number(),
+  subExposureS: z.number(),
+  overheadS: z.number(),
+  totalS: z.number().describe('Open shutter and overheads'),
+  signalE: z.number().describe('Electrons of the source in the aperture'),
+  varianceE2: z
+    .object({
+      source: z.number(),
+      sky: z.number(),
+      dark: z.number(),
+      read: z.number(),
+      floor: z.number().describe('What is left of the sky after subtraction'),
+    })
+    .describe('Noise squared: electrons of each part, sky subtraction included'),
+  noise: z.object({ mostly: z.enum(['source', 'sky', 'read', 'floor']), share: z.number() }),
+  wavelengthA: z.number(),
+  imageArcsec: z.number(),
+  apertureRadiusArcsec: z.number(),
+  enclosedFraction: z.number(),
+  pixels: z.number(),
+  skyAbArcsec2: z.number(),
+  peakFraction: z.number().describe('Of what the brightest pixel holds'),
+  warnings: z.array(z.string()),
+})
+
 export const ccdAnswer = z.object({ engine, snr: z.number(), timeS: z.number() })
 
 /** RFC 9457, with a JSON pointer for each value that is wrong. */

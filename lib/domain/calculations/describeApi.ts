@@ -1,69 +1,17 @@
-import { z } from 'zod'
-import * as answers from './answers'
-import { ccdRequest } from './computeCcd'
-import { cosmologyRequest } from './computeCosmology'
-import { positionsRequest } from './computePositions'
-import { visibilityRequest } from './computeVisibility'
-import { inverseRequest } from './invertCosmology'
-
-interface Described {
-  readonly path: string
-  readonly summary: string
-  readonly request?: z.ZodType
-  readonly answer: z.ZodType
-}
-
-const operations: readonly Described[] = [
-  {
-    path: '/api/v1/cosmologies',
-    summary: 'The cosmologies that have a name, with their citations',
-    answer: answers.cosmologiesAnswer,
-  },
-  {
-    path: '/api/v1/cosmology',
-    summary: 'Distances, times, volumes and scales at redshifts and between pairs of them',
-    request: cosmologyRequest,
-    answer: answers.cosmologyAnswer,
-  },
-  {
-    path: '/api/v1/cosmology/inverse',
-    summary: 'Every redshift at which a quantity has a value',
-    request: inverseRequest,
-    answer: answers.inverseAnswer,
-  },
-  {
-    path: '/api/v1/sky/positions',
-    summary: 'Sun, Moon and targets above a site at instants',
-    request: positionsRequest,
-    answer: answers.positionsAnswer,
-  },
-  {
-    path: '/api/v1/sky/visibility',
-    summary: 'When targets can be observed, night by night',
-    request: visibilityRequest,
-    answer: answers.visibilityAnswer,
-  },
-  {
-    path: '/api/v1/exposure/ccd',
-    summary: 'Signal-to-noise from time, or time from signal-to-noise',
-    request: ccdRequest,
-    answer: answers.ccdAnswer,
-  },
-]
-
-function schemaOf(schema: z.ZodType, io: 'input' | 'output'): Record<string, unknown> {
-  const { $schema: _, ...rest } = z.toJSONSchema(schema, { io, target: 'draft-2020-12' })
-  return rest
-}
+import { problemAnswer } from './answers'
+import { describeObservability } from './describeObservability'
+import { operations, type Operation } from './operations'
+import { schemaOf } from './schemaOf'
 
 const problem = {
   description: '',
   content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
 }
 
-function operationOf({ path, summary, request, answer }: Described) {
+function operationOf({ path, summary, request, answer }: Operation) {
   const refused = {
     '413': { ...problem, description: 'More than one call may ask for.' },
+    '415': { ...problem, description: 'A body that does not say it is application/json.' },
     '422': { ...problem, description: 'A value that cannot be read, or that this model cannot have.' },
   }
   return {
@@ -103,12 +51,15 @@ export function describeApi() {
     },
     jsonSchemaDialect: 'https://json-schema.org/draft/2020-12/schema',
     security: [],
-    paths: Object.fromEntries(
-      operations.map((described) => [
-        described.path,
-        { [described.request ? 'post' : 'get']: operationOf(described) },
-      ]),
-    ),
-    components: { schemas: { Problem: schemaOf(answers.problemAnswer, 'output') } },
+    paths: {
+      ...Object.fromEntries(
+        operations.map((operation) => [
+          operation.path,
+          { [operation.request ? 'post' : 'get']: operationOf(operation) },
+        ]),
+      ),
+      ...describeObservability(),
+    },
+    components: { schemas: { Problem: schemaOf(problemAnswer, 'output') } },
   }
 }

@@ -7,6 +7,7 @@ export const mostRedshifts = 100_000
 export const mostTargets = 500
 export const mostNights = 400
 export const mostInstants = 1_000
+export const mostWavelengths = 10_000
 
 /** Refuses a list that is longer than one call may be. */
 export function requireAtMost(list: readonly unknown[], most: number, what: string): void {

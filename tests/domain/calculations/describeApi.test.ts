@@ -73,11 +73,34 @@ describe('the OpenAPI document', () => {
     expect(JSON.stringify(document.paths['/api/v1/cosmology'])).toContain('"maxItems":100000')
   })
 
+  it('describes the parameters of a query, of which POS alone is wanted', () => {
+    const { parameters } = document.paths['/api/vo/observability/query']?.get as unknown as {
+      parameters: { name: string; in: string; required: boolean; description: string }[]
+    }
+    expect(parameters.map(({ name }) => name)).toEqual([
+      'POS',
+      'TIME',
+      'MAXREC',
+      'MIN_OBS',
+      'FACILITY',
+      'RESPONSEFORMAT',
+    ])
+    expect(parameters.filter(({ required }) => required).map(({ name }) => name)).toEqual(['POS'])
+    for (const parameter of parameters)
+      expect(parameter).toMatchObject({
+        in: 'query',
+        description: expect.any(String),
+        schema: { type: 'string' },
+      })
+  })
+
   it('describes each public calculation there is, and no other', () => {
-    const routes = readdirSync(new URL('../../../app/api/v1', import.meta.url), { recursive: true })
-      .map((name) => String(name))
-      .filter((name) => name.endsWith('/route.ts') && !name.startsWith('openapi.json'))
-      .map((name) => `/api/v1/${name.slice(0, -'/route.ts'.length)}`)
+    const routes = ['v1', 'vo'].flatMap((family) =>
+      readdirSync(new URL(`../../../app/api/${family}`, import.meta.url), { recursive: true })
+        .map((name) => String(name))
+        .filter((name) => name.endsWith('/route.ts') && !name.startsWith('openapi.json'))
+        .map((name) => `/api/${family}/${name.slice(0, -'/route.ts'.length)}`),
+    )
     expect(Object.keys(document.paths).sort()).toEqual(routes.sort())
   })
 })
