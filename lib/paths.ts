@@ -16,6 +16,9 @@ export const paths = {
   exposure: () => '/tools/exposure',
   help: () => '/help',
   helpMarks: () => '/help/marks',
+  helpCalculations: () => '/help/calculations',
+  /** Where the calculations for programs are described. */
+  calculations: () => '/api/v1/openapi.json',
 
   signIn: (next?: string) => (next ? `/sign-in?next=${part(next)}` : '/sign-in'),
   register: () => '/register',

@@ -23,6 +23,7 @@ export const access = {
     '/tools/exposure': 'anyone',
     '/help': 'anyone',
     '/help/marks': 'anyone',
+    '/help/calculations': 'anyone',
     '/sign-in': 'anyone',
     '/register': 'anyone',
     '/confirm/[token]': 'anyone',

@@ -46,6 +46,12 @@ export default async function HelpPage() {
               stands above it. <TextLink href={paths.helpMarks()}>How to read the signs</TextLink>
             </HelpQuestion>
           </LedgerGroup>
+          <LedgerGroup title="To compute elsewhere">
+            <HelpQuestion question="May my own program use these calculations?">
+              Yes, without signing in, and clients of the virtual observatory may ask when a position is up.{' '}
+              <TextLink href={paths.helpCalculations()}>Calculations for programs</TextLink>
+            </HelpQuestion>
+          </LedgerGroup>
           <LedgerGroup title="To judge">
             <HelpQuestion question="What do I declare?">
               Before you see any proposal you go through one list of everybody who is named in the call, and

@@ -8,7 +8,7 @@ const problem = {
   content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
 }
 
-function operationOf({ path, summary, request, answer }: Operation) {
+function operationOf({ group, path, summary, request, example, answer }: Operation) {
   const refused = {
     '413': { ...problem, description: 'More than one call may ask for.' },
     '415': { ...problem, description: 'A body that does not say it is application/json.' },
@@ -16,12 +16,13 @@ function operationOf({ path, summary, request, answer }: Operation) {
   }
   return {
     operationId: path.slice('/api/v1/'.length).replaceAll('/', '-'),
+    tags: [group],
     summary,
     ...(request
       ? {
           requestBody: {
             required: true,
-            content: { 'application/json': { schema: schemaOf(request, 'input') } },
+            content: { 'application/json': { schema: schemaOf(request, 'input'), example } },
           },
         }
       : {}),

@@ -7,7 +7,10 @@ const tooOften = {
   '429': { ...failed, description: 'Too often; Retry-After says how many seconds to wait.' },
 }
 
+const tags = ['Virtual observatory']
+
 const answered = {
+  tags,
   summary: 'When a position can be observed, as clients of the virtual observatory ask (ObjObsSAP, draft)',
   responses: {
     '200': {
@@ -22,6 +25,7 @@ const answered = {
 const told = (resource: string, summary: string) => ({
   get: {
     operationId: `vo-observability-${resource}`,
+    tags,
     summary,
     responses: {
       '200': { description: 'The document.', content: { 'text/xml': text } },
@@ -54,6 +58,7 @@ export function describeObservability() {
       get: { operationId: 'vo-observability-query', ...answered, parameters },
       post: {
         operationId: 'vo-observability-query-form',
+        tags,
         summary: answered.summary,
         requestBody: form,
         responses: { ...answered.responses, ...large, ...foreign },

@@ -13,8 +13,10 @@ import { computeCcd } from '@/lib/domain/calculations/computeCcd'
 import { computeCosmology } from '@/lib/domain/calculations/computeCosmology'
 import { computePositions } from '@/lib/domain/calculations/computePositions'
 import { computeVisibility } from '@/lib/domain/calculations/computeVisibility'
+import { callOf } from '@/lib/domain/calculations/callOf'
 import { describeApi } from '@/lib/domain/calculations/describeApi'
 import { invertCosmology } from '@/lib/domain/calculations/invertCosmology'
+import { operations } from '@/lib/domain/calculations/operations'
 import { listCosmologies } from '@/lib/domain/calculations/listCosmologies'
 import { refuse } from '@/lib/errors'
 import { problem } from '@/lib/http/problem'
@@ -102,6 +104,30 @@ describe('the OpenAPI document', () => {
         .map((name) => `/api/${family}/${name.slice(0, -'/route.ts'.length)}`),
     )
     expect(Object.keys(document.paths).sort()).toEqual(routes.sort())
+  })
+})
+
+describe('the examples', () => {
+  const asked = operations.filter(({ request }) => request)
+
+  it.each(asked)(
+    'of $path is a request that can be read, and typed in a shell',
+    ({ path, request, example }) => {
+      expect(request?.safeParse(example).error).toBeUndefined()
+      const call = callOf({ path, example }, 'https://x.example')
+      const typed = /^curl (\S+) \\\n {2}-H 'content-type: application\/json' \\\n {2}-d '([^']+)'$/.exec(
+        call,
+      )
+      expect(typed?.[1]).toBe(`https://x.example${path}`)
+      expect(JSON.parse(typed?.[2] ?? '')).toEqual(example)
+    },
+  )
+
+  it('have none where nothing is sent', () => {
+    const rest = operations.filter(({ request }) => !request)
+    expect(rest.length).toBeGreaterThan(0)
+    for (const operation of rest)
+      expect(callOf(operation, 'https://x.example')).toBe(`curl https://x.example${operation.path}`)
   })
 })
 
