@@ -114,6 +114,9 @@ describe('the examples', () => {
     'of $path is a request that can be read, and typed in a shell',
     ({ path, request, example }) => {
       expect(request?.safeParse(example).error).toBeUndefined()
+      expect(document.paths[path]?.post?.requestBody).toMatchObject({
+        content: { 'application/json': { example } },
+      })
       const call = callOf({ path, example }, 'https://x.example')
       const typed = /^curl (\S+) \\\n {2}-H 'content-type: application\/json' \\\n {2}-d '([^']+)'$/.exec(
         call,
