@@ -288,6 +288,9 @@ export interface ModeRecordsRow {
   thermal_e_per_s: number
   optics_arcsec: number
   dispersion_corrected: 0 | 1
+  read_noise_per: 'read' | 'ramp'
+  filters: string
+  calibration_policy: string
 }
 
 export interface MoneyEntriesRow {
@@ -674,6 +677,9 @@ export interface TargetsRow {
   opportunity_count: number | null
   version: number
   created_at: Date
+  galactic_ebv: number | null
+  magnification: number | null
+  magnification_error: number | null
 }
 
 export interface TargetGroupsRow {
@@ -698,6 +704,7 @@ export interface TargetQuantitiesRow {
   dust_corrected: 0 | 1
   magnification: number | null
   source: string
+  width_km_s: number | null
 }
 
 export interface TelescopesRow {
@@ -868,6 +875,9 @@ declare module 'knex/types/tables.js' {
         | 'thermal_e_per_s'
         | 'optics_arcsec'
         | 'dispersion_corrected'
+        | 'read_noise_per'
+        | 'filters'
+        | 'calibration_policy'
       >
     >
     money_entries: Knex.CompositeTableType<MoneyEntriesRow, Insert<MoneyEntriesRow, 'id' | 'created_at'>>
@@ -1048,6 +1058,9 @@ declare module 'knex/types/tables.js' {
         | 'opportunity_count'
         | 'version'
         | 'created_at'
+        | 'galactic_ebv'
+        | 'magnification'
+        | 'magnification_error'
       >
     >
     target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>
@@ -1064,6 +1077,7 @@ declare module 'knex/types/tables.js' {
         | 'dust_corrected'
         | 'magnification'
         | 'source'
+        | 'width_km_s'
       >
     >
     telescopes: Knex.CompositeTableType<TelescopesRow, Insert<TelescopesRow, 'id'>>

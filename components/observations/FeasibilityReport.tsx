@@ -2,11 +2,12 @@ import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { VerdictMark } from '@/components/ui/VerdictMark'
-import { countInWords, formatHoursFromSeconds, formatNumber } from '@/lib/format'
+import { countInWords, formatHoursFromSeconds, formatNumber, formatPower } from '@/lib/format'
 import {
   conditionsOf,
   cosmologyOf,
   hoursHangOn,
+  isForLine,
   seasonView,
   whatWouldMove,
   type ReportContents,
@@ -100,6 +101,10 @@ export function FeasibilityReport({
             {brightness
               ? `, ${brightness.band} = ${formatNumber(brightness.value, 1)} (${brightness.system})`
               : ''}
+            {isForLine(input) && target.line
+              ? `, ${target.line.name} of ${formatPower(target.line.value)} ${target.line.kind === 'flux' ? 'erg/s/cm²' : 'erg/s'}`
+              : ''}
+            {target.magnification ? `, magnified ${formatNumber(target.magnification, 1)} times` : ''}
             .
             <br />
             {mode?.name ?? 'A mode that is gone'}, S/N {formatNumber(observation.wantedSnr, 0)}{' '}
@@ -165,6 +170,7 @@ export function FeasibilityReport({
           }}
           hangOn={hoursHangOn(input)}
           moves={whatWouldMove(input, computed)}
+          isForLine={isForLine(input)}
           cosmologyName={computation.cosmologyName}
           fileName={`signal-${fileName}`}
         />

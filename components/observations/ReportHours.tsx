@@ -18,13 +18,17 @@ export interface ReportHoursProps {
   /** What would have to move, or could be spared. */
   moves: readonly string[]
   cosmologyName: string
+  /** The line's brightness counts, not the continuum's. */
+  isForLine: boolean
   fileName: string
 }
 
-const magnitudeOf = ({ brightness }: Target) =>
-  brightness
-    ? `${brightness.band} = ${formatNumber(brightness.value, 1)} (${brightness.system})`
-    : 'the magnitude'
+const lightOf = ({ brightness, line }: Target, isForLine: boolean) =>
+  isForLine && line
+    ? `the flux of ${line.name}`
+    : brightness
+      ? `${brightness.band} = ${formatNumber(brightness.value, 1)} (${brightness.system})`
+      : 'the magnitude'
 
 /** What the hours hang on: what limits them, signal-to-noise against time, and how they change with what is uncertain. */
 export function ReportHours(props: ReportHoursProps) {
@@ -38,7 +42,9 @@ export function ReportHours(props: ReportHoursProps) {
       <SectionHeading title="What the hours hang on" />
       <div className="mt-3 grid gap-x-10 gap-y-3 border-y border-rule py-4 text-table md:grid-cols-2">
         <p className="m-0">{computed.regime}</p>
-        <p className="m-0">{cosmologySentence(exposure.cosmologyMatters, magnitudeOf(target))}</p>
+        <p className="m-0">
+          {cosmologySentence(exposure.cosmologyMatters, lightOf(target, props.isForLine))}
+        </p>
         {exposure.warnings.map((warning) => (
           <p key={warning} className="m-0 text-marginal">
             {warning}

@@ -5,6 +5,7 @@ import { ActionFormContext } from '@/components/forms/ActionFormContext'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
+import { restLines } from '@/lib/science/light'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 
 export interface TargetDetailsProps {
@@ -31,6 +32,17 @@ const frames = [
 const provenances = [
   { value: 'observed', label: 'observed' },
   { value: 'predicted', label: 'predicted from a luminosity' },
+]
+
+const lines = [
+  { value: '', label: 'none' },
+  ...restLines
+    .filter(({ nature }) => nature === 'emission')
+    .map(({ name }) => ({ value: name, label: name })),
+]
+const lineKinds = [
+  { value: 'flux', label: 'flux, erg/s/cm²' },
+  { value: 'luminosity', label: 'luminosity, erg/s' },
 ]
 
 /** What does not fit in a row: kind and error of the redshift, shape, motion, source; and moving or taking out the row. */
@@ -63,6 +75,56 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
           offReason={offReason}
         />
         <NumberField name="sersicIndex" label="Sérsic index" optional width="full" offReason={offReason} />
+        <SelectField name="lineName" label="Line known besides" options={lines} offReason={offReason} />
+        <SelectField name="lineKind" label="Known as" options={lineKinds} offReason={offReason} />
+        <NumberField
+          name="lineValue"
+          label="Its value"
+          optional
+          unit="cgs"
+          width="full"
+          offReason={offReason}
+        />
+        <NumberField
+          name="lineError"
+          label="Error of it"
+          optional
+          unit="cgs"
+          width="full"
+          offReason={offReason}
+        />
+        <NumberField
+          name="lineWidth"
+          label="Width of the line"
+          optional
+          unit="km/s"
+          width="full"
+          offReason={offReason}
+        />
+        <NumberField
+          name="ebv"
+          label="Galactic E(B−V)"
+          help="SFD map; dims what is predicted"
+          optional
+          unit="mag"
+          width="full"
+          offReason={offReason}
+        />
+        <NumberField
+          name="magnification"
+          label="Magnification"
+          help="by a lens; brightens what is predicted"
+          optional
+          width="full"
+          offReason={offReason}
+        />
+        <NumberField
+          name="magnificationError"
+          label="Error of it"
+          optional
+          width="full"
+          offReason={offReason}
+        />
         <NumberField
           name="pmRa"
           label="Motion, RA cos δ"

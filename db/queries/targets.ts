@@ -1,4 +1,4 @@
-import type { Brightness, Observation, Target } from '@/lib/domain/proposals/types'
+import type { Brightness, LineLight, Observation, Target } from '@/lib/domain/proposals/types'
 import type { Database } from '../client.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
@@ -14,7 +14,18 @@ function brightnessOf(row: TargetQuantitiesRow | undefined): Brightness | null {
   }
 }
 
-function targetOf(row: TargetsRow, quantity: TargetQuantitiesRow | undefined): Target {
+function lineOf(row: TargetQuantitiesRow | undefined): LineLight | null {
+  if (!row?.band) return null
+  return {
+    name: row.band,
+    kind: row.quantity === 'luminosity' ? 'luminosity' : 'flux',
+    value: row.value,
+    error: row.error,
+    widthKmS: row.width_km_s ?? 0,
+  }
+}
+
+function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = []): Target {
   return {
     id: row.id,
     position: row.position,
@@ -35,24 +46,27 @@ function targetOf(row: TargetsRow, quantity: TargetQuantitiesRow | undefined): T
     redshiftFrame: row.redshift_frame,
     redshiftType: row.redshift_type,
     need: row.need,
-    brightness: brightnessOf(quantity),
+    brightness: brightnessOf(quantities.find(({ quantity }) => quantity === 'magnitude')),
+    line: lineOf(quantities.find(({ quantity }) => quantity === 'line-flux' || quantity === 'luminosity')),
+    galacticEbv: row.galactic_ebv,
+    magnification: row.magnification,
+    magnificationError: row.magnification_error,
     version: row.version,
   }
 }
 
-/** Magnitudes of targets, by target. */
-async function magnitudes(db: Database, targetIds: number[]): Promise<Map<number, TargetQuantitiesRow>> {
-  const rows = await db('target_quantities')
-    .whereIn('target_id', targetIds)
-    .andWhere({ quantity: 'magnitude' })
-    .orderBy('id')
-  return new Map(rows.map((row) => [row.target_id, row]))
+/** What is known of the light of targets, by target. */
+async function quantitiesOf(db: Database, targetIds: number[]): Promise<Map<number, TargetQuantitiesRow[]>> {
+  const rows = await db('target_quantities').whereIn('target_id', targetIds).orderBy('id')
+  const byTarget = new Map<number, TargetQuantitiesRow[]>()
+  for (const row of rows) byTarget.set(row.target_id, [...(byTarget.get(row.target_id) ?? []), row])
+  return byTarget
 }
 
 /** A proposal's targets in their order. */
 export async function targetsOf(db: Database, proposalId: number): Promise<Target[]> {
   const rows = await db('targets').where({ proposal_id: proposalId }).orderBy(['position', 'id'])
-  const quantities = await magnitudes(
+  const quantities = await quantitiesOf(
     db,
     rows.map((row) => row.id),
   )
@@ -63,7 +77,7 @@ export async function targetsOf(db: Database, proposalId: number): Promise<Targe
 export async function findTarget(db: Database, proposalId: number, id: number): Promise<Target | null> {
   const row = await db('targets').where({ id, proposal_id: proposalId }).first()
   if (!row) return null
-  return targetOf(row, (await magnitudes(db, [id])).get(id))
+  return targetOf(row, (await quantitiesOf(db, [id])).get(id))
 }
 
 export type TargetValues = Omit<Target, 'id' | 'version'>
@@ -88,11 +102,32 @@ function columnsOf(values: TargetValues) {
     redshift_frame: values.redshiftFrame,
     redshift_type: values.redshiftType,
     need: values.need,
+    galactic_ebv: values.galacticEbv,
+    magnification: values.magnification,
+    magnification_error: values.magnificationError,
   }
 }
 
-async function writeBrightness(db: Database, targetId: number, brightness: Brightness | null): Promise<void> {
-  await db('target_quantities').where({ target_id: targetId, quantity: 'magnitude' }).del()
+async function writeLine(db: Database, targetId: number, line: LineLight): Promise<void> {
+  await db('target_quantities').insert({
+    target_id: targetId,
+    quantity: line.kind === 'flux' ? 'line-flux' : 'luminosity',
+    value: line.value,
+    error: line.error,
+    unit: line.kind === 'flux' ? 'erg.s-1.cm-2' : 'erg.s-1',
+    band: line.name,
+    provenance: line.kind === 'flux' ? 'observed' : 'predicted',
+    width_km_s: line.widthKmS,
+  })
+}
+
+async function writeLight(
+  db: Database,
+  targetId: number,
+  { brightness, line }: Pick<TargetValues, 'brightness' | 'line'>,
+): Promise<void> {
+  await db('target_quantities').where({ target_id: targetId }).del()
+  if (line) await writeLine(db, targetId, line)
   if (!brightness) return
   await db('target_quantities').insert({
     target_id: targetId,
@@ -109,7 +144,7 @@ async function writeBrightness(db: Database, targetId: number, brightness: Brigh
 
 export async function insertTarget(db: Database, proposalId: number, values: TargetValues): Promise<number> {
   const [id = 0] = await db('targets').insert({ proposal_id: proposalId, ...columnsOf(values) })
-  await writeBrightness(db, id, values.brightness)
+  await writeLight(db, id, values)
   return id
 }
 
@@ -123,7 +158,7 @@ export async function updateTarget(
     .where({ id: target.id, version: target.version })
     .update({ ...columnsOf(values), version: target.version + 1 })
   if (changed === 0) return false
-  await writeBrightness(db, target.id, values.brightness)
+  await writeLight(db, target.id, values)
   return true
 }
 

@@ -1,7 +1,28 @@
 import { describe, expect, it } from 'vitest'
-import { formatNumber, formatPercent, formatQuantity, formatSigned, formatSignificant } from '@/lib/format'
+import {
+  formatNumber,
+  formatPercent,
+  formatPower,
+  formatQuantity,
+  formatSigned,
+  formatSignificant,
+} from '@/lib/format'
 
 // Seen to fail with the true minus replaced by a hyphen in glyphs.ts.
+
+describe('a power of ten', () => {
+  it.each([
+    [2.5e-17, '2.5 × 10⁻¹⁷'],
+    [1e42, '1.0 × 10⁴²'],
+    [9.97e-17, '1.0 × 10⁻¹⁶'],
+    [1, '1.0 × 10⁰'],
+    [0, '–'],
+    [NaN, '–'],
+    [-1, '–'],
+  ])('%s reads %s', (value, text) => {
+    expect(formatPower(value)).toBe(text)
+  })
+})
 
 describe('formatNumber', () => {
   it.each([

@@ -1,15 +1,6 @@
 import type { Exposed } from '@/lib/domain/tools/expose'
 import type { ExposureInput } from '@/lib/domain/tools/exposureSchema'
-import { formatDuration, formatNumber } from '@/lib/format'
-
-/** 2.5 × 10⁻¹⁷ */
-export function formatPower(value: number): string {
-  const exponent = Math.floor(Math.log10(value))
-  const raised = String(exponent)
-    .replace('-', '⁻')
-    .replace(/\d/g, (digit) => '⁰¹²³⁴⁵⁶⁷⁸⁹'[Number(digit)] ?? '')
-  return `${formatNumber(value / 10 ** exponent, 1)} × 10${raised}`
-}
+import { formatDuration, formatNumber, formatPower } from '@/lib/format'
 
 function sourceWords(asked: ExposureInput, { limit }: Exposed): string {
   if (asked.source === 'line') {

@@ -1,5 +1,6 @@
 import type { Cosmology } from '@/lib/science/cosmology'
 import { reportOf, type ObservationInput } from './computeObservation'
+import { isForLine } from './isForLine'
 import type { Verdict } from './types'
 
 /** A request with something about it changed. */
@@ -23,29 +24,46 @@ export function neededWith(input: ObservationInput, change: Change): Needed {
   return { seconds: report.exposure ? report.exposure.totalS : null, verdict: report.verdict }
 }
 
-/** The same target brighter by some magnitudes. */
-export function brighterBy(input: ObservationInput, magnitudes: number): Change {
+/** The same target brighter by some magnitudes: its continuum alone. */
+function continuumBrighterBy(input: ObservationInput, magnitudes: number): Change {
   const { brightness } = input.target
   if (!brightness) return {}
   return { target: { ...input.target, brightness: { ...brightness, value: brightness.value - magnitudes } } }
 }
 
-/** A magnitude predicted from a luminosity follows the distance: fainter where the other universe is larger. */
+/** The same target brighter by some magnitudes in what is asked for: the line where it is one, else the continuum. */
+export function brighterBy(input: ObservationInput, magnitudes: number): Change {
+  const { line } = input.target
+  if (!isForLine(input) || !line) return continuumBrighterBy(input, magnitudes)
+  return { target: { ...input.target, line: { ...line, value: line.value * 10 ** (0.4 * magnitudes) } } }
+}
+
+/** Whether what is asked for follows from a luminosity, and so from a cosmology and a lens. */
+export function isPredicted(input: ObservationInput): boolean {
+  const { line, brightness } = input.target
+  return isForLine(input) ? line?.kind === 'luminosity' : brightness?.provenance === 'predicted'
+}
+
+/**
+ * A magnitude predicted from a luminosity follows the distance: fainter where the other universe is larger. The flux
+ * of a line is computed from its luminosity under whatever cosmology there is.
+ */
 export function underOther(input: ObservationInput, other: Cosmology): Change {
   const z = input.target.redshift ?? 0
   const ratio = other.luminosityMpc(z) / input.cosmology.luminosityMpc(z)
-  return { ...brighterBy(input, -5 * Math.log10(ratio)), cosmology: other }
+  const isShifted = input.target.brightness?.provenance === 'predicted'
+  return { ...(isShifted ? continuumBrighterBy(input, -5 * Math.log10(ratio)) : {}), cosmology: other }
 }
 
 /** The same target at a redshift further by `by`; its predicted magnitude follows. Null where there is no such redshift. */
 export function furtherBy(input: ObservationInput, by: number): Change | null {
   const { redshift, brightness } = input.target
   if (redshift === null || redshift + by <= 0) return null
-  const isPredicted = brightness?.provenance === 'predicted'
+  const isShifted = brightness?.provenance === 'predicted'
   const { cosmology } = input
-  const dimmer = isPredicted
+  const dimmer = isShifted
     ? 5 * Math.log10(cosmology.luminosityMpc(redshift + by) / cosmology.luminosityMpc(redshift))
     : 0
-  const { target } = { target: input.target, ...brighterBy(input, -dimmer) }
+  const { target } = { target: input.target, ...continuumBrighterBy(input, -dimmer) }
   return { target: { ...target, redshift: redshift + by } }
 }

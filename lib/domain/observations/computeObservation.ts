@@ -5,6 +5,7 @@ import type { Observation, Target } from '../proposals/types'
 import { regimeSentence } from './regimeSentence'
 import type { ReportContents } from './reportContents'
 import { gapChecks, modeGone, outsideSeason } from './requestChecks'
+import { isForLine } from './isForLine'
 import { moonClass, scienceGeometry, scienceMode, scienceSite, transparencyShare } from './scienceRecords'
 import { conditionsOf } from './seasonOf'
 import { skyTargetOf } from './skyTargetOf'
@@ -69,6 +70,10 @@ export function reportOf(
       redshiftType: target.redshiftType,
       geometry: scienceGeometry(target),
       brightness: target.brightness,
+      // A version that was frozen before these were asked for holds none of them.
+      line: target.line ?? null,
+      galacticEbv: target.galacticEbv ?? null,
+      magnification: target.magnification ?? null,
     },
     mode: scienceMode(input.mode),
     observation: {
@@ -119,7 +124,7 @@ export function computeObservation(input: ObservationInput): ObservationComputat
   if (from > to) return withoutExposure(input, [outsideSeason(call.seasonFrom, call.seasonTo)])
 
   const report = reportOf({ ...input, mode }, from, to)
-  const checks = [...gapChecks(target), ...report.checks]
+  const checks = [...gapChecks(target, isForLine({ target, observation, mode })), ...report.checks]
   const { exposure } = report
   const signal = report.checks.find(({ id }) => id === 'signal-to-noise')
   const reached = signal ? Number(signal.measured.replaceAll(',', '')) : NaN

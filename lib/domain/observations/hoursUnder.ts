@@ -1,8 +1,9 @@
 import { cosmologyPresets, presetCosmology } from '@/lib/science/cosmology'
-import { formatNumber } from '@/lib/format'
-import { brighterBy, furtherBy, neededWith, underOther, type Needed } from './change'
+import { formatNumber, formatPercent } from '@/lib/format'
+import { brighterBy, furtherBy, isPredicted, neededWith, underOther, type Needed } from './change'
 import type { ObservationInput } from './computeObservation'
 import { drawnHours } from './drawnHours'
+import { isForLine } from './isForLine'
 import { conditionsOf } from './seasonOf'
 
 export interface HoursUnder extends Needed {
@@ -28,8 +29,7 @@ export interface HoursHangOn {
 }
 
 function underCosmologies(input: ObservationInput): HoursUnder[] {
-  const { brightness, redshift } = input.target
-  if (brightness?.provenance !== 'predicted' || !((redshift ?? 0) > 0)) return []
+  if (!isPredicted(input) || !((input.target.redshift ?? 0) > 0)) return []
   return cosmologyPresets
     .filter(({ standing }) => standing === 'current')
     .map(({ id, parameters }) => ({
@@ -44,9 +44,32 @@ function spanOf(name: string, ends: readonly Needed[]): HoursSpan {
   return { name, low: finite(Math.min(...seconds)), high: finite(Math.max(...seconds)) }
 }
 
+/** The error of what is asked for, in magnitudes, with its name; null where none is stated. */
+function lightError(input: ObservationInput): { name: string; magnitudes: number } | null {
+  const { line, brightness } = input.target
+  if (isForLine(input) && line) {
+    if (!line.error) return null
+    const share = line.error / line.value
+    return { name: `${line.name} ± ${formatPercent(share, 0)}`, magnitudes: 2.5 * Math.log10(1 + share) }
+  }
+  if (!brightness?.error) return null
+  return { name: `magnitude ± ${formatNumber(brightness.error, 2)}`, magnitudes: brightness.error }
+}
+
+/** Within the error of the lens; null where nothing is predicted or no error is stated. */
+function magnificationSpan(input: ObservationInput): HoursSpan | null {
+  const { magnification, magnificationError: error } = input.target
+  if (!magnification || !error || !isPredicted(input)) return null
+  const ends = [magnification + error, Math.max(0.01, magnification - error)].map((value) =>
+    neededWith(input, { target: { ...input.target, magnification: value } }),
+  )
+  return spanOf(`magnification ${formatNumber(magnification, 1)} ± ${formatNumber(error, 1)}`, ends)
+}
+
 function withinErrors(input: ObservationInput): HoursSpan[] {
   const redshift = input.target.redshiftError ?? 0
-  const magnitude = input.target.brightness?.error ?? 0
+  const light = lightError(input)
+  const magnitude = light?.magnitudes ?? 0
   const moved = [furtherBy(input, -redshift), furtherBy(input, redshift)].flatMap((change) => change ?? [])
   const spans: HoursSpan[] = []
   if (redshift > 0 && moved.length === 2)
@@ -59,11 +82,13 @@ function withinErrors(input: ObservationInput): HoursSpan[] {
   if (magnitude > 0)
     spans.push(
       spanOf(
-        `magnitude ± ${formatNumber(magnitude, 2)}`,
+        light?.name ?? '',
         [magnitude, -magnitude].map((by) => neededWith(input, brighterBy(input, by))),
       ),
     )
-  if (spans.length === 2)
+  const magnification = magnificationSpan(input)
+  if (magnification) spans.push(magnification)
+  if (redshift > 0 && magnitude > 0 && moved.length === 2)
     spans.push({ name: 'both together, 68 of 100', ...drawnHours(input, { redshift, magnitude }) })
   return spans
 }

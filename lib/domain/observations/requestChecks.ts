@@ -12,7 +12,7 @@ const check = (
 ): FeasibilityCheck => ({ id, name, feasibleTo: '–', failsAt: '–', ...rest })
 
 /** A request that names something the engine cannot start from: each gap is a check that is not clear. */
-export function gapChecks(target: Target): FeasibilityCheck[] {
+export function gapChecks(target: Target, isForLine: boolean): FeasibilityCheck[] {
   const gaps: FeasibilityCheck[] = []
   if (target.raDeg === null)
     gaps.push(
@@ -24,14 +24,16 @@ export function gapChecks(target: Target): FeasibilityCheck[] {
         fix: 'Give its right ascension and declination.',
       }),
     )
-  if (target.brightness === null)
+  if (target.brightness === null && !isForLine)
     gaps.push(
       check('brightness-given', 'Brightness given', {
         measured: 'none',
         feasibleTo: 'a magnitude',
         verdict: 'not-feasible',
         why: 'Without a brightness no exposure can be computed.',
-        fix: 'Give a magnitude with its band and system.',
+        fix: target.line
+          ? `Give a magnitude, or ask for ${target.line.name}, whose brightness is known.`
+          : 'Give a magnitude with its band and system.',
       }),
     )
   return gaps

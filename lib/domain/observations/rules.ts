@@ -6,6 +6,7 @@ export { constraintRow } from './constraintSchema'
 export { defaultConstraints } from './defaultConstraints'
 export { hoursText, newObservationRow, observationRow } from './observationRow'
 export { takeOver } from './rememberedObservation'
+export { isForLine } from './isForLine'
 export { cosmologySentence } from './regimeSentence'
 
 export { conditionsOf } from './seasonOf'

@@ -26,6 +26,17 @@ export interface Brightness {
   source: string
 }
 
+/** A line as measured, flux in erg/s/cm², or the luminosity in erg/s that predicts one. */
+export interface LineLight {
+  /** As in the list of rest lines: 'Hα'. */
+  name: string
+  kind: 'flux' | 'luminosity'
+  value: number
+  error: number | null
+  /** Intrinsic full width at half maximum. */
+  widthKmS: number
+}
+
 export interface Target {
   id: number
   position: number
@@ -47,6 +58,12 @@ export interface Target {
   redshiftType: 'spectroscopic' | 'photometric' | 'assumed'
   need: 'required' | 'optional' | 'backup'
   brightness: Brightness | null
+  line: LineLight | null
+  /** Reddening of the Galaxy as read from the SFD map; what is predicted is dimmed by it. */
+  galacticEbv: number | null
+  /** What is predicted is made brighter by it. */
+  magnification: number | null
+  magnificationError: number | null
   version: number
 }
 

@@ -3,7 +3,8 @@ import type { TargetRow } from './schema'
 /** What a column of a file may be: a cell of a row, or a position in one. */
 export type TargetColumn = keyof TargetRow | 'position' | 'system'
 
-const synonyms: Record<Exclude<TargetColumn, 'geometry' | 'sersicIndex' | 'effectiveRadius'>, string[]> = {
+const synonyms: Record<TargetColumn, string[]> = {
+  geometry: ['shape', 'geometry'],
   name: ['name', 'target', 'object', 'targetname', 'objectname', 'source', 'id'],
   position: ['position', 'coordinates', 'coord', 'coords', 'radec'],
   ra: ['ra', 'raj2000', 'sra', 'radeg', 'rightascension', 'alpha', 'raicrs'],
@@ -19,6 +20,16 @@ const synonyms: Record<Exclude<TargetColumn, 'geometry' | 'sersicIndex' | 'effec
   provenance: ['provenance', 'magprovenance'],
   source: ['magsource', 'reference', 'bibcode', 'ref'],
   need: ['need', 'priority', 'importance'],
+  effectiveRadius: ['re', 'reff', 'effectiveradius', 'halflightradius', 'radius', 'reffarcsec'],
+  sersicIndex: ['n', 'sersic', 'sersicindex', 'nser'],
+  ebv: ['ebv', 'ebminusv', 'reddening', 'galacticebv'],
+  magnification: ['mu', 'magnification'],
+  magnificationError: ['emu', 'muerr', 'magnificationerror'],
+  lineName: ['line', 'linename'],
+  lineKind: ['linekind'],
+  lineValue: ['linevalue', 'lineflux'],
+  lineError: ['lineerror', 'elineflux', 'linefluxerror'],
+  lineWidth: ['fwhm', 'linewidth', 'linefwhm'],
   pmRa: ['pmra', 'pmracosdec'],
   pmDec: ['pmdec', 'pmde'],
   epoch: ['epoch', 'refepoch'],

@@ -16,6 +16,7 @@ export function liveTarget(
   for (const issue of first.error.issues) {
     const cell = issue.path[0]
     if (cell === 'band') emptied.magnitude = ''
+    else if (cell === 'lineValue') Object.assign(emptied, { lineName: '', lineValue: '' })
     else if (cell === 'effectiveRadius') emptied.geometry = 'point'
     else if (cell === 'ra' || cell === 'dec') Object.assign(emptied, { ra: '', dec: '' })
     else if (typeof cell === 'string' && cell in emptied && cell !== 'name')

@@ -2,7 +2,8 @@ import { z } from 'zod'
 import { parseDeclination, parseRightAscension } from '@/lib/science/sky'
 import { SERSIC_LEAST, SERSIC_MOST } from '@/lib/science/exposure'
 import { parseMagnitude } from '@/lib/science/magnitude'
-import { parseRedshift } from '@/lib/science/redshift'
+import { restLines } from '@/lib/science/light'
+import { parseRedshift, readNumber } from '@/lib/science/redshift'
 import type { TargetValues } from './types'
 import { readBandChoice } from './bands'
 import { typedNumber } from './typedNumber'
@@ -12,6 +13,19 @@ const angle = (read: typeof parseRightAscension) => (text: string) => {
   const answer = read(text)
   return answer.ok ? { ok: true, value: answer.deg } : answer
 }
+
+const lineNames = restLines.map(({ name }) => name) as [string, ...string[]]
+
+/** A number above 0, most often in powers of ten. */
+const positive = (text: string) => {
+  const value = readNumber(text)
+  return value !== null && value > 0
+    ? { ok: true, value }
+    : { ok: false, message: 'Write a number above 0, such as 2.5e-17.' }
+}
+
+/** Far outside these, flux and luminosity have been taken for each other. */
+const lineRange = { flux: [1e-22, 1e-6], luminosity: [1e30, 1e52] } as const
 
 const cells = z.object({
   name: z
@@ -34,6 +48,14 @@ const cells = z.object({
   geometry: z.enum(['point', 'sersic', 'uniform']),
   effectiveRadius: typedNumber('A half-light radius', 0.01, 600),
   sersicIndex: typedNumber('A Sérsic index', SERSIC_LEAST, SERSIC_MOST),
+  ebv: typedNumber('A reddening E(B−V)', 0, 5),
+  magnification: typedNumber('A magnification', 0.01, 1000),
+  magnificationError: typedNumber('An error of the magnification', 0, 1000),
+  lineName: z.union([z.literal(''), z.enum(lineNames)], 'This line is not on the list.'),
+  lineKind: z.enum(['flux', 'luminosity']),
+  lineValue: typedText(positive),
+  lineError: typedText(positive),
+  lineWidth: typedNumber('A line width', 0, 20_000),
   pmRa: typedNumber('A proper motion', -20_000, 20_000),
   pmDec: typedNumber('A proper motion', -20_000, 20_000),
   epoch: typedNumber('An epoch', 1900, 2100),
@@ -52,6 +74,16 @@ function together(values: Cells, ctx: z.RefinementCtx): void {
     need('band', 'Say in which band and system the magnitude is.')
   if (values.geometry !== 'point' && values.effectiveRadius.value === null)
     need('effectiveRadius', 'An extended source needs its half-light radius.')
+  const line = values.lineValue.value
+  if (values.lineName !== '' && line === null) need('lineValue', `Give the ${values.lineKind} of the line.`)
+  const [least, most] = lineRange[values.lineKind]
+  if (values.lineName !== '' && line !== null && (line < least || line > most))
+    need(
+      'lineValue',
+      values.lineKind === 'flux'
+        ? 'A line flux is given in erg/s/cm², some 1e-17; this looks like a luminosity.'
+        : 'A line luminosity is given in erg/s, some 1e42; this looks like a flux.',
+    )
 }
 
 function toValues(c: Cells): TargetValues {
@@ -74,6 +106,19 @@ function toValues(c: Cells): TargetValues {
     redshiftFrame: c.redshiftFrame,
     redshiftType: c.redshiftType,
     need: c.need,
+    galacticEbv: c.ebv.value,
+    magnification: c.magnification.value,
+    magnificationError: c.magnificationError.value,
+    line:
+      c.lineName === '' || c.lineValue.value === null
+        ? null
+        : {
+            name: c.lineName,
+            kind: c.lineKind,
+            value: c.lineValue.value,
+            error: c.lineError.value,
+            widthKmS: c.lineWidth.value ?? 0,
+          },
     brightness:
       c.magnitude.value === null || !band
         ? null

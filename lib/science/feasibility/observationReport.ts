@@ -5,6 +5,7 @@ import { worst } from './judge'
 import { checkImage, checkSaturation, checkSignal } from './lightChecks'
 import { planExposure } from './plan'
 import { checkDistance, checkRedshiftExists } from './redshiftChecks'
+import { asksForLine } from './sourceOf'
 import type { Check, ObservationReport, ReportInput } from './types'
 import { feasibilityEngineVersion } from './version'
 
@@ -43,7 +44,7 @@ export function observationReport(input: ReportInput): ObservationReport {
   }
 
   const plan = planExposure(input, observedA)
-  if (target.brightness) {
+  if (target.brightness || asksForLine(input)) {
     checks.push(checkSignal(plan.reached, observation.snr, plan.refusal))
   }
   if (plan.needed) {

@@ -1,8 +1,7 @@
-import { exposure, type Conditions, type ExposureReport, type ModeRecord, type Source } from '../exposure'
-import { toAb, vacuumToAirA } from '../light'
+import { exposure, type Conditions, type ExposureReport, type ModeRecord } from '../exposure'
 import { ScienceError } from '../ScienceError'
 import { planningAirmass } from './planningAirmass'
-import { vacuumRange } from './featureChecks'
+import { sourceOf } from './sourceOf'
 import type { ReportInput } from './types'
 
 /** What a request needs, and what it reaches in the hours asked. */
@@ -36,28 +35,6 @@ function openWithin(mode: ModeRecord, askedS: number, subExposureS: number): num
   const frame = subExposureS + readoutS + ditherS
   const perFrame = subExposureS * calibrationFraction + (mode.skySubtraction === 'blank-sky' ? 2 : 1) * frame
   return (left / perFrame) * subExposureS
-}
-
-/** The source as the exposure engine takes it, in the mode's own kind of wavelength. */
-function sourceOf({ target, mode }: ReportInput, observedA: number | null): Source {
-  const { brightness } = target
-  if (!brightness) throw new ScienceError('bad-source', 'No brightness is given.')
-  if (observedA !== null) {
-    const [low, high] = vacuumRange(mode)
-    if (observedA < low || observedA > high) {
-      throw new ScienceError('outside-range', 'The feature lies outside the range of this mode.')
-    }
-  }
-  const inMode = observedA === null || mode.medium === 'vacuum' ? observedA : vacuumToAirA(observedA)
-  return {
-    kind: 'magnitude',
-    ab: toAb(brightness.value, brightness.system, brightness.band),
-    // Conversion to air and back may step over the edge by rounding.
-    wavelengthA:
-      inMode === null ? undefined : Math.min(mode.wavelengthMaxA, Math.max(mode.wavelengthMinA, inMode)),
-    geometry: target.geometry ?? { kind: 'point' },
-    provenance: brightness.provenance,
-  }
 }
 
 /**

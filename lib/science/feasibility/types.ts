@@ -35,6 +35,18 @@ export interface ReportTarget {
   readonly redshiftError?: number | null
   readonly redshiftType?: 'spectroscopic' | 'photometric' | 'assumed'
   readonly geometry?: Geometry
+  /** An emission line, by the name of the feature it is; its flux in erg/s/cm^2 or its luminosity in erg/s. */
+  readonly line?: {
+    readonly name: string
+    readonly kind: 'flux' | 'luminosity'
+    readonly value: number
+    /** Intrinsic full width at half maximum. */
+    readonly widthKmS: number
+  } | null
+  /** Of the Galaxy, from the SFD map; dims what is predicted. */
+  readonly galacticEbv?: number | null
+  /** By a lens; brightens what is predicted. */
+  readonly magnification?: number | null
   readonly brightness: {
     readonly value: number
     readonly system: 'AB' | 'Vega' | 'ST'

@@ -94,6 +94,44 @@ describe('what the hours hang on', () => {
   })
 })
 
+describe('a line and a lens', () => {
+  const line = { name: 'Hα', kind: 'luminosity', value: 2e40, error: 4e39, widthKmS: 300 } as const
+  const lensed = { line, magnification: 3, magnificationError: 0.5, redshiftError: null }
+
+  it('counts the line where the observation asks for it, and the continuum elsewhere', () => {
+    const ofLine = hoursHangOn(inputOf({ target: lensed }))
+    const brighter = hoursHangOn(inputOf({ target: { ...lensed, line: { ...line, value: 4e40 } } }))
+    expect(brighter.own.seconds).toBeLessThan(ofLine.own.seconds ?? 0)
+    const elsewhere = (value: number) =>
+      hoursHangOn(
+        inputOf({
+          target: { ...lensed, line: { ...line, value } },
+          observation: { feature: 'Hβ', featureRestA: 4862.68 },
+        }),
+      ).own.seconds
+    expect(elsewhere(4e40)).toBe(elsewhere(2e40))
+  })
+
+  it('spans the error of the line and of the magnification', () => {
+    const { own, errors, cosmologies } = hoursHangOn(inputOf({ target: lensed }))
+    expect(errors.map(({ name }) => name)).toEqual(['Hα ± 20\u00a0%', 'magnification 3.0 ± 0.5'])
+    for (const { low, high } of errors) {
+      expect(low).toBeLessThan(own.seconds ?? 0)
+      expect(high).toBeGreaterThan(own.seconds ?? Infinity)
+    }
+    expect(cosmologies.length).toBeGreaterThan(3)
+  })
+
+  it('leaves what was observed to itself: no lens, no dust, no cosmology', () => {
+    const observed = { brightness: { ...bright, provenance: 'observed', error: null } } as const
+    const plain = hoursHangOn(inputOf({ target: observed }))
+    const lensedToo = hoursHangOn(inputOf({ target: { ...observed, magnification: 9, galacticEbv: 0.5 } }))
+    expect(lensedToo.own).toEqual(plain.own)
+    const dimmed = hoursHangOn(inputOf({ target: { galacticEbv: 0.3 } }))
+    expect(dimmed.own.seconds).toBeGreaterThan(hoursHangOn(inputOf()).own.seconds ?? Infinity)
+  })
+})
+
 describe('what would have to move', () => {
   const moves = (input: ObservationInput) => whatWouldMove(input, computedOf(input))
 

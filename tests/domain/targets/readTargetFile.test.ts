@@ -1,3 +1,7 @@
+import { targetRowSchema } from '@/lib/domain/targets/schema'
+import { targetRow } from '@/lib/domain/targets/targetRow'
+import { targetsCsv } from '@/lib/domain/targets/targetsCsv'
+import { target } from '@/tests/support/contents'
 import { describe, expect, it } from 'vitest'
 import { readTargetFile, type TargetFile } from '@/lib/domain/targets/readTargetFile'
 
@@ -66,5 +70,32 @@ describe('a file of targets', () => {
   ])('refuses “%s” in words', (text, sentence) => {
     const file = readTargetFile(text)
     expect(file.ok ? '' : file.message).toContain(sentence)
+  })
+})
+
+// Seen to fail with the shape left out of the file, and with a luminosity read back as a flux.
+describe('what this product writes', () => {
+  const galaxy = {
+    geometry: 'sersic',
+    effectiveRadiusArcsec: 0.8,
+    sersicIndex: 2.5,
+    redshiftError: 0.0004,
+    pmRaMasYr: -1.25,
+    galacticEbv: 0.021,
+    magnification: 6,
+    magnificationError: 0.9,
+    line: { name: 'Hβ', kind: 'luminosity', value: 2.5e42, error: 3e41, widthKmS: 300 },
+  } as const
+
+  it.each([
+    ['a quasar', target()],
+    ['a lensed galaxy with a line', target(galaxy)],
+    ['a uniform cloud', target({ geometry: 'uniform', effectiveRadiusArcsec: 4 })],
+    ['a target of which nothing is known', target({ brightness: null, redshift: null, redshiftTyped: '' })],
+  ])('reads back unchanged: %s', (_, one) => {
+    const file = readTargetFile(targetsCsv([one], [], 'Planck 2018'))
+    if (!file.ok) throw new Error(file.message)
+    expect(file.rows.map(({ errors }) => errors)).toEqual([{}])
+    expect(targetRowSchema.parse(file.rows[0]?.row)).toEqual(targetRowSchema.parse(targetRow(one)))
   })
 })

@@ -30,6 +30,19 @@ describe('a row of the targets table', () => {
   it('reads back what it wrote', () => {
     const values = targetRowSchema.parse({ ...right, pmRa: '-1.5', epoch: '2020.5', need: 'backup' })
     expect(targetRowSchema.parse(targetRow(values))).toEqual(values)
+    const lensed = targetRowSchema.parse({
+      ...right,
+      ...{ lineName: 'Hβ', lineKind: 'luminosity', lineValue: '2.5e42', lineError: '3e41', lineWidth: '300' },
+      ...{ ebv: '0.02', magnification: '6', magnificationError: '0.9' },
+      ...{ geometry: 'sersic', effectiveRadius: '0.8', sersicIndex: '2' },
+    })
+    expect(lensed).toMatchObject({
+      line: { name: 'Hβ', kind: 'luminosity', value: 2.5e42, error: 3e41, widthKmS: 300 },
+      galacticEbv: 0.02,
+      magnification: 6,
+      magnificationError: 0.9,
+    })
+    expect(targetRowSchema.parse(targetRow(lensed))).toEqual(lensed)
   })
 
   it('may stay without redshift, magnitude and position', () => {
@@ -54,6 +67,25 @@ describe('a row of the targets table', () => {
     ['epoch', '1066', 'An epoch lies between 1,900 and 2,100.'],
   ])('says at %s what is wrong with “%s”', (cell, text, sentence) => {
     expect(rowErrors({ ...right, [cell]: text })).toEqual({ [cell]: sentence })
+  })
+
+  it.each<[Partial<TargetRow>, Partial<Record<keyof TargetRow, string>>]>([
+    [{ lineName: 'Hβ' }, { lineValue: 'Give the flux of the line.' }],
+    [{ lineName: 'Hβ', lineValue: '-1' }, { lineValue: 'Write a number above 0, such as 2.5e-17.' }],
+    [
+      { lineName: 'Hβ', lineValue: '1e42' },
+      { lineValue: 'A line flux is given in erg/s/cm², some 1e-17; this looks like a luminosity.' },
+    ],
+    [
+      { lineName: 'Hβ', lineKind: 'luminosity', lineValue: '1e-17' },
+      { lineValue: 'A line luminosity is given in erg/s, some 1e42; this looks like a flux.' },
+    ],
+    [{ lineName: 'Hω' }, { lineName: 'This line is not on the list.' }],
+    [{ magnification: '0' }, { magnification: 'A magnification lies between 0.01 and 1,000.' }],
+    [{ ebv: '9' }, { ebv: 'A reddening E(B−V) lies between 0 and 5.' }],
+    [{ sersicIndex: '0.3' }, { sersicIndex: 'A Sérsic index lies between 0.50 and 8.' }],
+  ])('says of %o what is wrong', (change, sentences) => {
+    expect(rowErrors({ ...right, ...change })).toEqual(sentences)
   })
 
   it('wants both halves of a position', () => {

@@ -48,6 +48,21 @@ describe('targets of a draft', () => {
     expect((await targets()).map(({ name }) => name)).toEqual(['QSO J2026−4536', 'HE 0047−1756'])
   })
 
+  it('keep a line, a lens and the dust before them, and lose them when they are taken out', async () => {
+    const line = { lineName: 'Hβ', lineKind: 'luminosity', lineValue: '2.5e42', lineWidth: '300' } as const
+    const added = await add({ ...line, redshift: '1.678', ebv: '0.02', magnification: '6' })
+    const kept = async () => (await targets()).find(({ id }) => id === added.id)
+    expect(await kept()).toMatchObject({
+      line: { name: 'Hβ', kind: 'luminosity', value: 2.5e42, error: null, widthKmS: 300 },
+      galacticEbv: 0.02,
+      magnification: 6,
+      brightness: null,
+    })
+    const { id, version } = added
+    await saveTarget(ctx, { reference: scenario.reference, id, version, row: row({ magnitude: '20' }) })
+    expect(await kept()).toMatchObject({ line: null, magnification: null, brightness: { value: 20 } })
+  })
+
   it('keep names apart', async () => {
     await add()
     const refusal = await refused(add({ name: ' he 0047−1756' }))
