@@ -2,20 +2,22 @@ import { z } from 'zod'
 import { refuse } from '@/lib/errors'
 import { ccd, exposureEngineVersion } from '@/lib/science/exposure'
 import { asRefused } from './asRefused'
+import { exactly } from './exactly'
 
-const amount = z.number().min(0, 'This is 0 or more.')
+const number = z.number('This is a number.')
+const amount = number.min(0, 'This is 0 or more.')
 
 /** Electrons and seconds; `timeS` is the total over all exposures. */
-export const ccdRequest = z.object({
-  sourceRate: z.number().gt(0, 'A source gives more than 0 electrons a second.'),
+export const ccdRequest = exactly({
+  sourceRate: number.gt(0, 'A source gives more than 0 electrons a second.'),
   skyRatePerPixel: amount,
   darkRatePerPixel: amount,
   readNoise: amount,
-  pixels: z.number().gt(0, 'A source covers more than 0 pixels.'),
-  exposures: z.number().int('This is a whole number.').min(1, 'There is at least one exposure.').default(1),
-  solve: z.enum(['snr', 'time']),
-  timeS: z.number().gt(0, 'A time is more than 0 s.').optional(),
-  snr: z.number().gt(0, 'A signal-to-noise is more than 0.').optional(),
+  pixels: number.gt(0, 'A source covers more than 0 pixels.'),
+  exposures: number.int('This is a whole number.').min(1, 'There is at least one exposure.').default(1),
+  solve: z.enum(['snr', 'time'], 'Solve for snr or time.'),
+  timeS: number.gt(0, 'A time is more than 0 s.').optional(),
+  snr: number.gt(0, 'A signal-to-noise is more than 0.').optional(),
 })
 
 export type CcdRequest = z.output<typeof ccdRequest>

@@ -3,20 +3,18 @@ import { ScienceError } from '@/lib/science/ScienceError'
 import { cosmologyEngineVersion, type Cosmology } from '@/lib/science/cosmology'
 import { asRefused, eachOrRefused } from './asRefused'
 import { cosmologyInput, universeOf } from './cosmologySchema'
+import { exactly } from './exactly'
 import { listOf, mostRedshifts } from './limits'
 
 const redshift = z.number('A redshift is a number.')
 
-export const cosmologyRequest = z.object(
-  {
-    cosmology: cosmologyInput,
-    z: listOf(redshift, mostRedshifts, 'redshifts'),
-    pairs: listOf(z.tuple([redshift, redshift]), mostRedshifts, 'pairs')
-      .optional()
-      .meta({ description: 'Angular-diameter distance of the second redshift seen from the first' }),
-  },
-  'Give an object of JSON.',
-)
+export const cosmologyRequest = exactly({
+  cosmology: cosmologyInput,
+  z: listOf(redshift, mostRedshifts, 'redshifts'),
+  pairs: listOf(z.tuple([redshift, redshift]), mostRedshifts, 'pairs')
+    .optional()
+    .meta({ description: 'Angular-diameter distance of the second redshift seen from the first' }),
+})
 
 export type CosmologyRequest = z.output<typeof cosmologyRequest>
 

@@ -1,14 +1,17 @@
 import { z } from 'zod'
 import { positionsAt, skyEngineVersion } from '@/lib/science/sky'
 import { asRefused } from './asRefused'
-import { mostInstants, mostTargets, requireAtMost } from './limits'
+import { exactly } from './exactly'
+import { listOf, mostInstants, mostTargets } from './limits'
 import { requireOwnIds, siteInput, targetInput } from './skySchema'
 
-export const positionsRequest = z.object({
+export const positionsRequest = exactly({
   site: siteInput,
-  targets: z.array(targetInput),
-  instants: z.array(
+  targets: listOf(targetInput, mostTargets, 'targets'),
+  instants: listOf(
     z.iso.datetime({ offset: true, error: 'An instant is written as 2027-07-01T03:00:00Z.' }),
+    mostInstants,
+    'instants',
   ),
 })
 
@@ -16,8 +19,6 @@ export type PositionsRequest = z.output<typeof positionsRequest>
 
 /** Where Sun, Moon and targets stand at each instant. */
 export function computePositions({ site, targets, instants }: PositionsRequest) {
-  requireAtMost(targets, mostTargets, 'targets')
-  requireAtMost(instants, mostInstants, 'instants')
   requireOwnIds(targets)
   const found = asRefused('instants', () =>
     positionsAt({ site, targets, instants: instants.map((at) => new Date(at)) }),

@@ -2,28 +2,34 @@ import { z } from 'zod'
 import { refuse } from '@/lib/errors'
 import { skyEngineVersion, visibility, type Night } from '@/lib/science/sky'
 import { asRefused } from './asRefused'
-import { mostNights, mostTargets, requireAtMost } from './limits'
+import { exactly } from './exactly'
+import { listOf, mostNights, mostTargets } from './limits'
 import { evening, requireOwnIds, siteInput, targetInput } from './skySchema'
+
+const number = z.number('This is a number.')
 
 const twilights = { astronomical: -18, nautical: -12, civil: -6 } as const
 
-export const visibilityRequest = z.object({
+export const visibilityRequest = exactly({
   site: siteInput,
-  targets: z.array(targetInput),
+  targets: listOf(targetInput, mostTargets, 'targets'),
   from: evening,
   to: evening,
-  maxAirmass: z
-    .number()
-    .min(1, 'An airmass lies between 1 and 30.')
-    .max(30, 'An airmass lies between 1 and 30.'),
-  twilight: z.enum(['astronomical', 'nautical', 'civil']).default('astronomical'),
-  moon: z
-    .object({
-      maxIllumination: z.number().min(0).max(1).optional(),
-      minSeparationDeg: z.number().min(0).max(180).optional(),
-      below: z.boolean().optional(),
-    })
-    .optional(),
+  maxAirmass: number.min(1, 'An airmass lies between 1 and 30.').max(30, 'An airmass lies between 1 and 30.'),
+  twilight: z
+    .enum(['astronomical', 'nautical', 'civil'], 'Twilight is astronomical, nautical or civil.')
+    .default('astronomical'),
+  moon: exactly({
+    maxIllumination: number
+      .min(0, 'A share lies between 0 and 1.')
+      .max(1, 'A share lies between 0 and 1.')
+      .optional(),
+    minSeparationDeg: number
+      .min(0, 'A separation lies between 0° and 180°.')
+      .max(180, 'A separation lies between 0° and 180°.')
+      .optional(),
+    below: z.boolean('This is true or false.').optional(),
+  }).optional(),
 })
 
 export type VisibilityRequest = z.output<typeof visibilityRequest>
@@ -52,7 +58,6 @@ function nightOf(night: Night, twilight: keyof typeof twilights) {
 /** When targets can be observed, night by night. */
 export function computeVisibility(input: VisibilityRequest) {
   const { site, targets, from, to, maxAirmass, twilight, moon } = input
-  requireAtMost(targets, mostTargets, 'targets')
   requireOwnIds(targets)
   requireSeason(from, to)
   const found = asRefused('from', () =>

@@ -9,6 +9,7 @@ import {
 } from '@/lib/science/cosmology'
 import { refuse } from '@/lib/errors'
 import { asRefused } from './asRefused'
+import { exactly } from './exactly'
 
 const number = z.number('This is a number.')
 
@@ -16,7 +17,7 @@ const number = z.number('This is a number.')
 export const cosmologyInput = z.union(
   [
     z.string().max(40),
-    z.object({
+    exactly({
       name: z.string().max(60).optional(),
       H0: number,
       Om0: number,
@@ -29,7 +30,13 @@ export const cosmologyInput = z.union(
       flat: z.boolean().optional(),
     }),
   ],
-  'Give the id of a preset, or H0, Om0 and Ode0 (or flat: true).',
+  {
+    error: (issue) => {
+      const unknown =
+        issue.code === 'invalid_union' && issue.errors.flat().find(({ code }) => code === 'unrecognized_keys')
+      return unknown ? unknown.message : 'Give the id of a preset, or H0, Om0 and Ode0 (or flat: true).'
+    },
+  },
 )
 
 export type CosmologyInput = z.output<typeof cosmologyInput>

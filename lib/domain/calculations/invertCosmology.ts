@@ -3,23 +3,17 @@ import { cosmologyEngineVersion } from '@/lib/science/cosmology'
 import { eachOrRefused } from './asRefused'
 import { describeCosmology } from './computeCosmology'
 import { cosmologyInput, universeOf } from './cosmologySchema'
+import { exactly } from './exactly'
 import { listOf, mostRedshifts } from './limits'
 
-export const inverseRequest = z.object(
-  {
-    cosmology: cosmologyInput,
-    quantity: z.enum([
-      'lookbackGyr',
-      'ageGyr',
-      'comovingMpc',
-      'luminosityMpc',
-      'angularDiameterMpc',
-      'distanceModulusMag',
-    ]),
-    values: listOf(z.number('A value is a number.'), mostRedshifts, 'values'),
-  },
-  'Give an object of JSON.',
-)
+export const inverseRequest = exactly({
+  cosmology: cosmologyInput,
+  quantity: z.enum(
+    ['lookbackGyr', 'ageGyr', 'comovingMpc', 'luminosityMpc', 'angularDiameterMpc', 'distanceModulusMag'],
+    'This is the name of a quantity: lookbackGyr, ageGyr, comovingMpc, luminosityMpc, angularDiameterMpc or distanceModulusMag.',
+  ),
+  values: listOf(z.number('A value is a number.'), mostRedshifts, 'values'),
+})
 
 export type InverseRequest = z.output<typeof inverseRequest>
 

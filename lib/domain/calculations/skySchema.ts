@@ -1,33 +1,34 @@
 import { z } from 'zod'
 import { refuse } from '@/lib/errors'
+import { exactly } from './exactly'
 
-export const siteInput = z.object({
-  latitudeDeg: z
-    .number()
+const number = z.number('This is a number.')
+
+export const siteInput = exactly({
+  latitudeDeg: number
     .min(-90, 'A latitude lies between −90° and +90°.')
     .max(90, 'A latitude lies between −90° and +90°.'),
-  longitudeDeg: z
-    .number()
+  longitudeDeg: number
     .min(-180, 'A longitude lies between −180° and +180°, east positive.')
     .max(360, 'A longitude lies between −180° and +180°, east positive.'),
-  elevationM: z
-    .number()
+  elevationM: number
     .min(-500, 'An elevation lies between −500 and 10,000 m.')
     .max(10_000, 'An elevation lies between −500 and 10,000 m.'),
 })
 
-export const targetInput = z.object({
-  id: z.string().min(1).max(120),
-  raDeg: z
-    .number()
+export const targetInput = exactly({
+  id: z
+    .string('An id has 1 to 120 characters.')
+    .min(1, 'An id has 1 to 120 characters.')
+    .max(120, 'An id has 1 to 120 characters.'),
+  raDeg: number
     .min(0, 'A right ascension lies between 0° and 360°.')
     .lt(360, 'A right ascension lies between 0° and 360°.'),
-  decDeg: z
-    .number()
+  decDeg: number
     .min(-90, 'A declination lies between −90° and +90°.')
     .max(90, 'A declination lies between −90° and +90°.'),
-  pmRaMasYr: z.number().optional(),
-  pmDecMasYr: z.number().optional(),
+  pmRaMasYr: number.optional(),
+  pmDecMasYr: number.optional(),
 })
 
 /** Ids tell the targets of an answer apart. */
@@ -40,7 +41,7 @@ export function requireOwnIds(targets: readonly { id: string }[]): void {
 }
 
 export const evening = z
-  .string()
+  .string('An evening date is written as 2027-07-01.')
   .refine(
     (text) =>
       /^\d{4}-\d{2}-\d{2}$/.test(text) && new Date(`${text}T00:00:00Z`).toJSON()?.slice(0, 10) === text,
