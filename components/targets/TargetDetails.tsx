@@ -5,8 +5,9 @@ import { ActionFormContext } from '@/components/forms/ActionFormContext'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
-import { restLines } from '@/lib/science/light'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { DetailGroup } from './DetailGroup'
+import { frames, lineKinds, lines, provenances, redshiftKinds, shapes } from './detailChoices'
 
 export interface TargetDetailsProps {
   readOnly: string | null
@@ -15,133 +16,52 @@ export interface TargetDetailsProps {
   onRemove: (() => void) | null
 }
 
-const shapes = [
-  { value: 'point', label: 'point source' },
-  { value: 'sersic', label: 'Sérsic profile' },
-  { value: 'uniform', label: 'uniform disc' },
-]
-const redshiftKinds = [
-  { value: 'spectroscopic', label: 'spectroscopic' },
-  { value: 'photometric', label: 'photometric' },
-  { value: 'assumed', label: 'assumed' },
-]
-const frames = [
-  { value: 'heliocentric', label: 'heliocentric' },
-  { value: 'cmb', label: 'CMB' },
-]
-const provenances = [
-  { value: 'observed', label: 'observed' },
-  { value: 'predicted', label: 'predicted from a luminosity' },
-]
-
-const lines = [
-  { value: '', label: 'none' },
-  ...restLines
-    .filter(({ nature }) => nature === 'emission')
-    .map(({ name }) => ({ value: name, label: name })),
-]
-const lineKinds = [
-  { value: 'flux', label: 'flux, erg/s/cm²' },
-  { value: 'luminosity', label: 'luminosity, erg/s' },
-]
-
-/** What does not fit in a row: kind and error of the redshift, shape, motion, source; and moving or taking out the row. */
+/**
+ * What does not fit in a row, in groups: redshift, magnitude, a line, shape, what lies on the way, motion; and moving
+ * or taking out the row.
+ */
 export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetailsProps) {
   const id = useId()
-  const offReason = readOnly ?? undefined
+  const shared = { offReason: readOnly ?? undefined }
+  const number = { ...shared, width: 'full' } as const
   return (
     <ActionFormContext value={{ id, busy: false }}>
-      <div className="grid gap-x-6 gap-y-4 border-t border-rule py-4 sm:grid-cols-2 lg:grid-cols-4">
-        <SelectField name="redshiftType" label="Redshift is" options={redshiftKinds} offReason={offReason} />
-        <NumberField name="redshiftError" label="Error of z" optional width="full" offReason={offReason} />
-        <SelectField name="redshiftFrame" label="Frame of z" options={frames} offReason={offReason} />
-        <SelectField name="provenance" label="Magnitude is" options={provenances} offReason={offReason} />
-        <NumberField
-          name="magnitudeError"
-          label="Error of it"
-          optional
-          unit="mag"
-          width="full"
-          offReason={offReason}
-        />
-        <TextField name="source" label="Source of it" optional offReason={offReason} />
-        <SelectField name="geometry" label="Shape" options={shapes} offReason={offReason} />
-        <NumberField
-          name="effectiveRadius"
-          label="Half-light radius"
-          optional
-          unit="″"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField name="sersicIndex" label="Sérsic index" optional width="full" offReason={offReason} />
-        <SelectField name="lineName" label="Line known besides" options={lines} offReason={offReason} />
-        <SelectField name="lineKind" label="Known as" options={lineKinds} offReason={offReason} />
-        <NumberField
-          name="lineValue"
-          label="Its value"
-          optional
-          unit="cgs"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="lineError"
-          label="Error of it"
-          optional
-          unit="cgs"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="lineWidth"
-          label="Width of the line"
-          optional
-          unit="km/s"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="ebv"
-          label="Galactic E(B−V)"
-          help="SFD map; dims what is predicted"
-          optional
-          unit="mag"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="magnification"
-          label="Magnification"
-          help="by a lens; brightens what is predicted"
-          optional
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="magnificationError"
-          label="Error of it"
-          optional
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="pmRa"
-          label="Motion, RA cos δ"
-          optional
-          unit="mas/yr"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField
-          name="pmDec"
-          label="Motion, δ"
-          optional
-          unit="mas/yr"
-          width="full"
-          offReason={offReason}
-        />
-        <NumberField name="epoch" label="Epoch" unit="yr" width="full" offReason={offReason} />
+      <div className="grid gap-x-10 gap-y-6 border-t border-rule py-4 md:grid-cols-2 xl:grid-cols-3">
+        <DetailGroup title="The redshift">
+          <SelectField name="redshiftType" label="Redshift is" options={redshiftKinds} {...shared} />
+          <NumberField name="redshiftError" label="Its error" {...number} />
+          <SelectField name="redshiftFrame" label="Frame of z" options={frames} {...shared} />
+        </DetailGroup>
+        <DetailGroup title="The magnitude">
+          <SelectField name="provenance" label="Magnitude is" options={provenances} {...shared} />
+          <NumberField name="magnitudeError" label="Its error" unit="mag" {...number} />
+          <TextField name="source" label="Its source" {...shared} />
+        </DetailGroup>
+        <DetailGroup title="The shape">
+          <SelectField name="geometry" label="Shape" options={shapes} {...shared} />
+          <NumberField name="effectiveRadius" label="Half-light radius" unit="″" {...number} />
+          <NumberField name="sersicIndex" label="Sérsic index" {...number} />
+        </DetailGroup>
+        <DetailGroup title="An emission line" note="Counts where an observation asks for just this line.">
+          <SelectField name="lineName" label="Line" options={lines} {...shared} />
+          <SelectField name="lineKind" label="Known as" options={lineKinds} {...shared} />
+          <NumberField name="lineValue" label="Its value" {...number} />
+          <NumberField name="lineError" label="Its error" {...number} />
+          <NumberField name="lineWidth" label="Its width" unit="km/s" {...number} />
+        </DetailGroup>
+        <DetailGroup
+          title="On the way"
+          note="Applied to what is predicted; what was observed has been through it."
+        >
+          <NumberField name="ebv" label="E(B−V) by SFD" unit="mag" {...number} />
+          <NumberField name="magnification" label="Magnification" {...number} />
+          <NumberField name="magnificationError" label="Its error" {...number} />
+        </DetailGroup>
+        <DetailGroup title="The motion">
+          <NumberField name="pmRa" label="In RA cos δ" unit="mas/yr" {...number} />
+          <NumberField name="pmDec" label="In declination" unit="mas/yr" {...number} />
+          <NumberField name="epoch" label="Epoch" unit="yr" width="full" {...shared} />
+        </DetailGroup>
       </div>
       {readOnly ? null : (
         <p className="m-0 flex flex-wrap gap-5 pb-4">
