@@ -10,6 +10,7 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
       '/calls/call-14',
       '/help',
       '/help/marks',
+      '/help/calculations',
       '/sign-in',
       '/register',
       '/forgot-password',
