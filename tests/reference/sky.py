@@ -29,13 +29,20 @@ TARGETS = {
     'near the south pole': SkyCoord(80.0, -75.0, unit=u.deg),
     'near the north pole': SkyCoord(210.0, 72.0, unit=u.deg),
     'Fornax': SkyCoord(53.1, -27.8, unit=u.deg),
+    'at 0 h': SkyCoord(0.0, -10.0, unit=u.deg),
+    'just before 0 h': SkyCoord(359.98, 20.0, unit=u.deg),
+    'a degree from the south pole': SkyCoord(120.0, -89.0, unit=u.deg),
+    'a degree from the north pole': SkyCoord(37.95, 89.0, unit=u.deg),
+    'on the ecliptic': SkyCoord(95.0, 23.4, unit=u.deg),
+    'the galactic centre': SkyCoord(266.417, -29.008, unit=u.deg),
+    'Lockman': SkyCoord(161.3, 58.0, unit=u.deg),
     # Barnard's star, ICRS J2000 and proper motion of Hipparcos (van Leeuwen 2007), to 1 mas/yr.
     'fast star': SkyCoord(269.452075 * u.deg, 4.693391 * u.deg, pm_ra_cosdec=-798.6 * u.mas / u.yr,
                           pm_dec=10328.1 * u.mas / u.yr, obstime=Time('J2000'), distance=1.83 * u.pc),
 }
 INSTANTS = ['2020-03-20T02:30:00', '2020-07-05T23:00:00', '2021-01-28T10:15:00', '2021-10-10T06:45:00',
-            '2027-07-19T04:00:00', '2027-12-13T07:30:00']
-NIGHTS = ['2020-03-20', '2020-06-21', '2021-10-02', '2021-12-30', '2027-07-01', '2027-10-05']
+            '2027-07-19T04:00:00', '2027-12-13T07:30:00', '2024-02-29T12:00:00', '2028-09-22T00:00:00']
+NIGHTS = ['2020-03-20', '2020-06-21', '2021-10-02', '2021-12-30', '2027-07-01', '2027-10-05', '2024-02-29', '2028-09-22']
 HORIZONS = {'sunset': -50 / 60, 'civil': -6, 'nautical': -12, 'astronomical': -18}
 
 
@@ -147,7 +154,7 @@ out = dict(
              for k, v in TARGETS.items()],
     positions=[position(s, i) for s in SITES for i in INSTANTS],
     nights=[night(s, d) for s in SITES for d in NIGHTS],
-    windows=[window(s, d, n) for s in ('south', 'north') for d in NIGHTS[::2] for n in ('3C 273', 'Fornax', 'near the north pole')],
+    windows=[window(s, d, n) for s in SITES for d in NIGHTS[::2] for n in TARGETS],
 )
 with open(os.path.join(os.path.dirname(__file__), 'sky.json'), 'w') as f:
     json.dump(out, f, indent=1)

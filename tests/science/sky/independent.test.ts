@@ -11,7 +11,7 @@ import { place, sky } from '../support/skyFixture'
  */
 describe(`independent code: ${sky.source}`, () => {
   it('has every row', () => {
-    expect([sky.positions.length, sky.nights.length, sky.windows.length]).toEqual([24, 24, 18])
+    expect([sky.positions.length, sky.nights.length, sky.windows.length]).toEqual([32, 32, 192])
   })
 
   it.each(sky.positions)('positions at $site, $at', (row) => {
