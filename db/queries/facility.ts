@@ -1,4 +1,4 @@
-import type { ModeRecord, SiteRecord } from '@/lib/domain/facility/types'
+import type { ModeFacts, ModeRecord, SiteFacts, SiteRecord } from '@/lib/domain/facility/types'
 import type { Database } from '../client.ts'
 import type {
   InstrumentModesRow,
@@ -11,11 +11,9 @@ import type {
 
 const parsed = <T>(json: string): T => JSON.parse(json) as T
 
-function siteOf(row: SiteRecordsRow & { name: string }): SiteRecord {
+/** What a row of a site's record says. */
+export function siteFactsOf(row: SiteRecordsRow): SiteFacts {
   return {
-    siteId: row.site_id,
-    name: row.name,
-    recordVersion: row.record_version,
     latitudeDeg: row.latitude_deg,
     longitudeDeg: row.longitude_deg,
     elevationM: row.elevation_m,
@@ -25,6 +23,15 @@ function siteOf(row: SiteRecordsRow & { name: string }): SiteRecord {
     extinctionMagPerAirmass: parsed(row.extinction_mag_per_airmass),
     darkSkyMagArcsec2: parsed(row.dark_sky_mag_arcsec2),
     seeingArcsec: parsed(row.seeing_arcsec),
+  }
+}
+
+function siteOf(row: SiteRecordsRow & { name: string }): SiteRecord {
+  return {
+    siteId: row.site_id,
+    name: row.name,
+    recordVersion: row.record_version,
+    ...siteFactsOf(row),
   }
 }
 
@@ -51,6 +58,40 @@ type ModeRow = ModeRecordsRow & {
   telescope_name: string
 }
 
+/** What a row of a mode's record says. */
+export function modeFactsOf(row: ModeRecordsRow): ModeFacts {
+  return {
+    kind: row.kind,
+    wavelengthMinA: row.wavelength_min_a,
+    wavelengthMaxA: row.wavelength_max_a,
+    medium: row.medium,
+    band: row.band,
+    pixelScaleArcsec: row.pixel_scale_arcsec,
+    dispersionAPerPixel: row.dispersion_a_per_pixel,
+    slitWidthArcsec: row.slit_width_arcsec,
+    resolvingPower: row.resolving_power,
+    readNoiseE: row.read_noise_e,
+    readNoisePer: row.read_noise_per,
+    darkEPerS: row.dark_e_per_s,
+    fullWellE: row.full_well_e,
+    gainEPerAdu: row.gain_e_per_adu,
+    minSubExposureS: row.min_sub_exposure_s,
+    maxSubExposureS: row.max_sub_exposure_s,
+    systematicFloor: row.systematic_floor,
+    twilightLimitDeg: row.twilight_limit_deg,
+    skySubtraction: row.sky_subtraction,
+    backgroundPixels: row.background_pixels,
+    thermalEPerS: row.thermal_e_per_s,
+    opticsArcsec: row.optics_arcsec,
+    dispersionCorrected: row.dispersion_corrected === 1,
+    filters: row.filters,
+    calibrationPolicy: row.calibration_policy,
+    throughput: parsed(row.throughput),
+    throughputIncludes: parsed(row.throughput_includes),
+    overheads: parsed(row.overheads),
+  }
+}
+
 function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
   return {
     modeId: row.mode_id,
@@ -66,31 +107,7 @@ function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
       apertureM: telescope.aperture_m,
       collectingAreaM2: telescope.collecting_area_m2,
     },
-    kind: row.kind,
-    wavelengthMinA: row.wavelength_min_a,
-    wavelengthMaxA: row.wavelength_max_a,
-    medium: row.medium,
-    band: row.band,
-    pixelScaleArcsec: row.pixel_scale_arcsec,
-    dispersionAPerPixel: row.dispersion_a_per_pixel,
-    slitWidthArcsec: row.slit_width_arcsec,
-    resolvingPower: row.resolving_power,
-    readNoiseE: row.read_noise_e,
-    darkEPerS: row.dark_e_per_s,
-    fullWellE: row.full_well_e,
-    gainEPerAdu: row.gain_e_per_adu,
-    minSubExposureS: row.min_sub_exposure_s,
-    maxSubExposureS: row.max_sub_exposure_s,
-    systematicFloor: row.systematic_floor,
-    twilightLimitDeg: row.twilight_limit_deg,
-    skySubtraction: row.sky_subtraction,
-    backgroundPixels: row.background_pixels,
-    thermalEPerS: row.thermal_e_per_s,
-    opticsArcsec: row.optics_arcsec,
-    dispersionCorrected: row.dispersion_corrected === 1,
-    throughput: parsed(row.throughput),
-    throughputIncludes: parsed(row.throughput_includes),
-    overheads: parsed(row.overheads),
+    ...modeFactsOf(row),
   }
 }
 

@@ -1,8 +1,12 @@
 /** Facility records as computed with: each cites the version of the record it was read from. */
-export interface SiteRecord {
+export interface SiteRecord extends SiteFacts {
   siteId: number
   name: string
   recordVersion: number
+}
+
+/** What a version of a site's record says. */
+export interface SiteFacts {
   latitudeDeg: number
   /** East positive. */
   longitudeDeg: number
@@ -18,7 +22,7 @@ export interface SiteRecord {
   seeingArcsec: { best10: number; median: number; worst90: number }
 }
 
-export interface ModeRecord {
+export interface ModeRecord extends ModeFacts {
   modeId: number
   slug: string
   name: string
@@ -32,6 +36,10 @@ export interface ModeRecord {
     apertureM: number
     collectingAreaM2: number
   }
+}
+
+/** What a version of a mode's record says. */
+export interface ModeFacts {
   kind: 'imaging' | 'long-slit'
   wavelengthMinA: number
   wavelengthMaxA: number
@@ -41,7 +49,9 @@ export interface ModeRecord {
   dispersionAPerPixel: number | null
   slitWidthArcsec: number | null
   resolvingPower: number | null
+  /** Counted once a sub-exposure: of one read, or of the ramp of reads it consists of. */
   readNoiseE: number
+  readNoisePer: 'read' | 'ramp'
   darkEPerS: number
   fullWellE: number
   gainEPerAdu: number
@@ -58,6 +68,10 @@ export interface ModeRecord {
   /** Width of the image the optics alone make. */
   opticsArcsec: number
   dispersionCorrected: boolean
+  /** Filters in the beam, in words; empty where there are none. */
+  filters: string
+  /** Which calibrations the observatory takes, and on whose time; in words. */
+  calibrationPolicy: string
   throughput: { wavelengthA: number; efficiency: number }[]
   throughputIncludes: string[]
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
@@ -67,4 +81,31 @@ export interface ModeRecord {
 export interface FacilityView {
   sites: SiteRecord[]
   modes: ModeRecord[]
+}
+
+/** What a version of a telescope's record says. */
+export interface TelescopeFacts {
+  apertureM: number
+  collectingAreaM2: number
+}
+
+/** One version of a record: what it says, since when it holds, who wrote it. Versions are never changed. */
+export interface RecordVersion<Facts> {
+  recordVersion: number
+  /** First evening it holds for. */
+  validFrom: string
+  savedAt: Date
+  /** Null for what was there from the beginning. */
+  savedBy: string | null
+  facts: Facts
+}
+
+/** Who computes with a record: what is said before it is changed. */
+export interface RecordUse {
+  /** Drafts of calls that still take proposals, by call. */
+  drafts: { callNumber: number; seasonFrom: string; count: number }[]
+  /** Proposals sent with an earlier or the present version; they keep it. */
+  sent: number
+  /** Somebody has computed with it: a new version cannot begin in the past. */
+  wasUsed: boolean
 }

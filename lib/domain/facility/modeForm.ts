@@ -1,0 +1,76 @@
+import { throughputParts, type ModeForm } from './modeSchema'
+import { typed, type FieldWords } from './recordForm'
+import type { ModeFacts } from './types'
+
+export type ModeTyped = Omit<ModeForm, 'slug' | 'over' | 'validFrom'>
+
+/** A mode's facts as the form holds them. */
+export function modeTyped(facts: ModeFacts): ModeTyped {
+  return {
+    kind: facts.kind,
+    wavelengthMinA: typed(facts.wavelengthMinA),
+    wavelengthMaxA: typed(facts.wavelengthMaxA),
+    medium: facts.medium,
+    band: facts.band ?? '',
+    pixelScaleArcsec: typed(facts.pixelScaleArcsec),
+    dispersionAPerPixel: typed(facts.dispersionAPerPixel),
+    slitWidthArcsec: typed(facts.slitWidthArcsec),
+    resolvingPower: typed(facts.resolvingPower),
+    readNoiseE: typed(facts.readNoiseE),
+    readNoisePer: facts.readNoisePer,
+    darkEPerS: typed(facts.darkEPerS),
+    fullWellE: typed(facts.fullWellE),
+    gainEPerAdu: typed(facts.gainEPerAdu),
+    minSubExposureS: typed(facts.minSubExposureS),
+    maxSubExposureS: typed(facts.maxSubExposureS),
+    systematicFloor: typed(facts.systematicFloor),
+    twilightLimitDeg: typed(facts.twilightLimitDeg),
+    skySubtraction: facts.skySubtraction,
+    backgroundPixels: typed(facts.backgroundPixels),
+    thermalEPerS: typed(facts.thermalEPerS),
+    opticsArcsec: typed(facts.opticsArcsec),
+    dispersionCorrected: facts.dispersionCorrected,
+    filters: facts.filters,
+    calibrationPolicy: facts.calibrationPolicy,
+    throughput: facts.throughput.map((row) => ({ at: typed(row.wavelengthA), value: typed(row.efficiency) })),
+    throughputIncludes: throughputParts.filter((part) => facts.throughputIncludes.includes(part)),
+    acquisitionS: typed(facts.overheads.acquisitionS),
+    readoutS: typed(facts.overheads.readoutS),
+    ditherS: typed(facts.overheads.ditherS),
+    calibrationFraction: typed(facts.overheads.calibrationFraction),
+  }
+}
+
+export const modeFields: Record<keyof ModeTyped, FieldWords> = {
+  kind: { label: 'Kind' },
+  wavelengthMinA: { label: 'Blue end', unit: 'Å' },
+  wavelengthMaxA: { label: 'Red end', unit: 'Å' },
+  medium: { label: 'Wavelengths in' },
+  band: { label: 'Band' },
+  filters: { label: 'Filters' },
+  pixelScaleArcsec: { label: 'Pixel scale', unit: '″ a pixel' },
+  dispersionAPerPixel: { label: 'Dispersion', unit: 'Å a pixel' },
+  slitWidthArcsec: { label: 'Slit width', unit: '″' },
+  resolvingPower: { label: 'Resolving power' },
+  opticsArcsec: { label: 'Image of the optics', unit: '″' },
+  dispersionCorrected: { label: 'Dispersion corrector' },
+  readNoiseE: { label: 'Read noise', unit: 'e⁻' },
+  readNoisePer: { label: 'Read noise of one' },
+  darkEPerS: { label: 'Dark current', unit: 'e⁻ a second' },
+  thermalEPerS: { label: 'Thermal glow', unit: 'e⁻ a second' },
+  fullWellE: { label: 'Full well', unit: 'e⁻' },
+  gainEPerAdu: { label: 'Gain', unit: 'e⁻ a count' },
+  minSubExposureS: { label: 'Shortest sub-exposure', unit: 's' },
+  maxSubExposureS: { label: 'Longest sub-exposure', unit: 's' },
+  skySubtraction: { label: 'Sky taken off from' },
+  backgroundPixels: { label: 'Pixels of sky around' },
+  systematicFloor: { label: 'Systematic floor' },
+  twilightLimitDeg: { label: 'Sun no higher than', unit: '°' },
+  acquisitionS: { label: 'Acquisition', unit: 's' },
+  readoutS: { label: 'Read-out', unit: 's' },
+  ditherS: { label: 'Dither', unit: 's' },
+  calibrationFraction: { label: 'Calibration, share of open time' },
+  calibrationPolicy: { label: 'Calibration policy' },
+  throughput: { label: 'Efficiency' },
+  throughputIncludes: { label: 'The efficiency includes' },
+}

@@ -1,0 +1,36 @@
+import { typed, typedBands, type FieldWords } from './recordForm'
+import type { SiteForm } from './siteSchema'
+import type { SiteFacts } from './types'
+
+export type SiteTyped = Omit<SiteForm, 'slug' | 'over' | 'validFrom'>
+
+/** A site's facts as the form holds them. */
+export function siteTyped(facts: SiteFacts): SiteTyped {
+  return {
+    latitudeDeg: typed(facts.latitudeDeg),
+    longitudeDeg: typed(facts.longitudeDeg),
+    elevationM: typed(facts.elevationM),
+    timeZone: facts.timeZone,
+    utcOffsetHours: typed(facts.utcOffsetHours),
+    lowestAltitudeDeg: typed(facts.lowestAltitudeDeg),
+    best10: typed(facts.seeingArcsec.best10),
+    median: typed(facts.seeingArcsec.median),
+    worst90: typed(facts.seeingArcsec.worst90),
+    extinction: typedBands(facts.extinctionMagPerAirmass),
+    darkSky: typedBands(facts.darkSkyMagArcsec2),
+  }
+}
+
+export const siteFields: Record<keyof SiteTyped, FieldWords> = {
+  latitudeDeg: { label: 'Latitude', unit: '°' },
+  longitudeDeg: { label: 'Longitude', unit: '°' },
+  elevationM: { label: 'Height', unit: 'm' },
+  timeZone: { label: 'Time zone' },
+  utcOffsetHours: { label: 'Offset from UTC', unit: 'h' },
+  lowestAltitudeDeg: { label: 'Lowest altitude', unit: '°' },
+  best10: { label: 'Image quality, best tenth', unit: '″' },
+  median: { label: 'Image quality, median', unit: '″' },
+  worst90: { label: 'Image quality, poorest tenth', unit: '″' },
+  extinction: { label: 'Extinction', unit: 'mag an airmass' },
+  darkSky: { label: 'Dark sky', unit: 'AB mag arcsec⁻²' },
+}

@@ -1,0 +1,16 @@
+import { typed, type FieldWords } from './recordForm'
+import type { TelescopeForm } from './telescopeSchema'
+import type { TelescopeFacts } from './types'
+
+export type TelescopeTyped = Omit<TelescopeForm, 'slug' | 'over' | 'validFrom'>
+
+/** A telescope's facts as the form holds them. */
+export const telescopeTyped = (facts: TelescopeFacts): TelescopeTyped => ({
+  apertureM: typed(facts.apertureM),
+  collectingAreaM2: typed(facts.collectingAreaM2),
+})
+
+export const telescopeFields: Record<keyof TelescopeTyped, FieldWords> = {
+  apertureM: { label: 'Aperture', unit: 'm' },
+  collectingAreaM2: { label: 'Collecting area', unit: 'm²' },
+}
