@@ -61,7 +61,7 @@ function evenings(from: string, to: string): string[] {
 }
 
 /**
- * The night calendar: one night of the Aldous in eleven and one of the Fennel in sixteen is offered in the call; the
+ * The night calendar: one night of the Aldous in eighteen and one of the Fennel in thirty is offered in the call; the
  * rest is promised to partners, and one bright night a month is kept for engineering.
  */
 async function seedNights(
@@ -85,7 +85,7 @@ async function seedNights(
       use_for: isEngineering ? 'engineering' : isOffered ? 'science' : 'promised',
       dark_seconds: Math.round(night.darkHours * 3600),
     })
-    return [block('aldous', index % 11 === 1), block('fennel', index % 16 === 1)]
+    return [block('aldous', index % 18 === 1), block('fennel', index % 30 === 1)]
   })
   await db.batchInsert('night_blocks', rows as never, 200)
 }

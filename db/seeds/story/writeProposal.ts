@@ -8,12 +8,16 @@ import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
 import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
 import { readContents } from '../../../lib/domain/proposals/readContents.ts'
 import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
-import { targetRowSchema } from '../../../lib/domain/targets/schema.ts'
+import { targetRowSchema, type TargetRow } from '../../../lib/domain/targets/schema.ts'
+import { emptyTargetRow } from '../../../lib/domain/targets/targetRow.ts'
+import { defaultConstraints } from '../../../lib/domain/observations/defaultConstraints.ts'
+import { saveConstraintSet } from '../../../lib/domain/observations/saveConstraintSet.ts'
 import { addObservation } from '../../../lib/domain/observations/addObservation.ts'
 import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
 import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
 import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
 import { uploadPaper } from '../../../lib/domain/papers/uploadPaper.ts'
+import { restLines } from '../../../lib/science/light/index.ts'
 import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
 import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
 import type { SeededCall } from '../calls.ts'
@@ -33,8 +37,22 @@ export interface WriteOptions {
   sentAt: Date | null
 }
 
-const abstractOf = (seed: SeedProposal) =>
-  `We ask for ${seed.hours} hours to settle a question that the present data leave open. ${seed.title}: with ${seed.targets === 1 ? 'one target' : `${seed.targets} targets`} at z of ${seed.redshift[0]} to ${seed.redshift[1]} we measure one quantity in the same way throughout, to a depth that decides between the two readings in the literature. Each target stands alone, so that a part of the time gives a part of the answer.`
+const abstractOf = (seed: SeedProposal, hours: number) =>
+  `We ask for ${hours.toFixed(1)} hours to settle a question that the present data leave open. ${seed.title}: with ${seed.targets === 1 ? 'one target' : `${seed.targets} targets`} at z of ${seed.redshift[0]} to ${seed.redshift[1]} we measure one quantity in the same way throughout, to a depth that decides between the two readings in the literature. Each target stands alone, so that a part of the time gives a part of the answer.`
+
+/** Faint sources are asked for in their line, whose flux follows from a luminosity of the order of those published. */
+function lineOf(seed: SeedProposal, chance: Dice): Partial<TargetRow> {
+  const line = restLines.find(({ id }) => id === seed.line)
+  if (line?.nature !== 'emission' || seed.magnitude[0] < faintFrom) return {}
+  const luminosity = 10 ** chance.between(41.9, 42.4)
+  return {
+    lineName: line.name,
+    lineKind: 'luminosity',
+    lineValue: luminosity.toPrecision(3),
+    lineError: (0.2 * luminosity).toPrecision(2),
+    lineWidth: '250',
+  }
+}
 
 function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) {
   const raDeg = (chance.between(...raHours) * 15 + 360) % 360
@@ -45,28 +63,24 @@ function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) 
   const band =
     modes.find((mode) => mode.slug === seed.mode)?.band ??
     (seed.mode.startsWith('ember') ? 'J' : seed.mode === 'spindle-blue' ? 'g' : 'r')
-  return targetRowSchema.parse({
+  const redshift = chance.between(...seed.redshift)
+  const row: TargetRow = {
+    ...emptyTargetRow,
     name: `QR J${digits(ra).slice(0, 4)}${digits(dec).slice(0, 5)}`,
     ra,
     dec,
-    redshift: chance.between(...seed.redshift).toFixed(4),
-    redshiftType: 'spectroscopic',
-    redshiftError: '',
-    redshiftFrame: 'heliocentric',
+    redshift: redshift.toFixed(4),
+    redshiftError: (0.0003 * (1 + redshift)).toFixed(4),
     magnitude: chance.between(...seed.magnitude).toFixed(2),
-    magnitudeError: '',
+    magnitudeError: '0.08',
     band: `${band} AB`,
-    provenance: 'observed',
-    source: '',
-    need: 'required',
-    geometry: 'point',
-    effectiveRadius: '',
-    sersicIndex: '',
-    pmRa: '',
-    pmDec: '',
-    epoch: '',
-  })
+    ...lineOf(seed, chance),
+  }
+  return targetRowSchema.parse(row)
 }
+
+/** Magnitude from which a source counts as faint. */
+const faintFrom = 20
 
 /** Writes a proposal from its first line as its investigators would, and sends it unless it is to stay a draft. */
 export async function writeProposal(
@@ -81,16 +95,6 @@ export async function writeProposal(
   const kindId = call.kindIds.get(seed.kind ?? 'regular') ?? 0
   const { reference } = await beginProposal(lead, { kindId, title: seed.title })
   const version = async () => (await readContents(lead.db, reference)).version
-  await saveQuestion(
-    lead,
-    saveQuestionSchema.parse({
-      reference,
-      version: await version(),
-      title: seed.title,
-      abstract: abstractOf(seed),
-      category: seed.category,
-    }),
-  )
   for (const name of seed.with) {
     const other = await story.as(name)
     await addInvestigator(lead, {
@@ -106,6 +110,18 @@ export async function writeProposal(
   for (let n = 0; n < seed.targets; n += 1)
     await addTarget(lead, { reference, row: targetRow(seed, chance, options.raHours) })
   await askForHours(lead, reference, seed, facility)
+  const { observations } = await readContents(lead.db, reference)
+  const hours = observations.reduce((sum, { askedSeconds }) => sum + askedSeconds, 0) / 3600
+  await saveQuestion(
+    lead,
+    saveQuestionSchema.parse({
+      reference,
+      version: await version(),
+      title: seed.title,
+      abstract: abstractOf(seed, hours),
+      category: seed.category,
+    }),
+  )
   const bytes = await paperPdf(seed.title)
   await uploadPaper(lead, {
     reference,
@@ -135,11 +151,14 @@ async function askForHours(
   facility: Facility,
 ): Promise<void> {
   const modeId = facility.modeIds.get(seed.mode) ?? 0
+  const isFaint = seed.magnitude[0] >= faintFrom
+  const set = { ...defaultConstraints, ...(isFaint ? { name: 'Dark time', moon: 'dark' as const } : {}) }
+  const { id: constraintSetId } = await saveConstraintSet(lead, { reference, id: null, version: 0, set })
   const row = (targetId: number, wantedSnr: number, askedHours: number) =>
     observationRowSchema.parse({
       targetId,
       modeId,
-      constraintSetId: null,
+      constraintSetId,
       wantedSnr: wantedSnr.toFixed(1),
       snrPer: seed.line ? 'resolution-element' : 'image',
       feature: seed.line ?? '',
@@ -161,7 +180,8 @@ async function askForHours(
       const computed = computeProposal(await readContents(lead.db, reference))
       const needed = computed.observations.find((one) => one.observationId === observation.id)?.neededSeconds
       if (needed && (round > 5 || Math.abs(needed / each - 1) < 0.2)) {
-        await save(Math.ceil(needed / 360) / 10)
+        // Whoever needs more than the proposal is about asks for that much and no more.
+        await save(Math.ceil(Math.min(needed, 1.2 * each) / 360) / 10)
         break
       }
       if (needed) {
