@@ -47,6 +47,8 @@ export const paths = {
 
   assessments: () => '/assessments',
   assessment: (request: number | string) => `/assessments/${part(String(request))}`,
+  ownInstruments: () => '/assessments/instruments',
+  ownMode: (slug: string) => `/assessments/instruments/${part(slug)}`,
   assessmentPacket: (request: number | string) => `/assessments/${part(String(request))}/packet`,
 
   reviews: () => '/reviews',
@@ -61,6 +63,8 @@ export const paths = {
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
+  facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
+    `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
 
   api: {

@@ -21,6 +21,9 @@ const strangers: Record<string, string> = {
   '[token]': 'x'.repeat(43),
   '[slug]': 'call-14',
   '[call]': 'call-13',
+  '[site]': 'quillon-ridge',
+  '[telescope]': 'aldous',
+  '[mode]': 'ember-short',
 }
 
 const passes = (who: Who, roles: readonly string[], signedIn: boolean) =>

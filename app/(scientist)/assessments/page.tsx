@@ -5,9 +5,11 @@ import { requestGroups } from '@/components/assessments/requestGroups'
 import { Main } from '@/components/layout/Main'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
+import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { readRequestLines } from '@/lib/domain/assessments/readRequestLines'
 import { formatList } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { passToPanelAction } from './actions'
 
 export const metadata: Metadata = { title: 'Assessments' }
@@ -23,6 +25,7 @@ export default async function AssessmentsPage() {
           instruments.length > 0 ? `Requests on ${formatList(instruments)}` : 'Requests on your instruments'
         }
         lead="What you say here stands above the computed verdict, both ways, with your reason. You see no names."
+        actions={<TextLink href={paths.ownInstruments()}>My instruments</TextLink>}
       />
       <div className="mt-6">
         {lines.length > 0 ? (
