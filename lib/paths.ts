@@ -51,9 +51,12 @@ export const paths = {
   ownMode: (slug: string) => `/assessments/instruments/${part(slug)}`,
   assessmentPacket: (request: number | string) => `/assessments/${part(String(request))}/packet`,
 
+  assessmentReport: (request: number | string) => `/assessments/${part(String(request))}/report`,
+
   reviews: () => '/reviews',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
+  reviewReport: (assignment: number | string) => `/reviews/${part(String(assignment))}/report`,
   reviewPacket: (assignment: number | string) => `/reviews/${part(String(assignment))}/packet`,
 
   /** With the panel where its leader has another in the same call; without it, the first. */
@@ -61,6 +64,9 @@ export const paths = {
     `/panel/${part(callSlug)}/${page}${panelId === undefined ? '' : `?panel=${panelId}`}`,
   panelPacket: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
+
+  panelReport: (callSlug: string, reviewNumber: string) =>
+    `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>

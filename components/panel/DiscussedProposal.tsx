@@ -30,9 +30,12 @@ export function DiscussedProposal({ proposal, view, save, setAside }: DiscussedP
         <h2 id="discussed" className="text-h2">
           {proposal.rank}. {proposal.title}
         </h2>
-        <TextLink href={paths.panelPacket(ranking.callSlug, proposal.reviewNumber)} plain strong>
-          {`Packet ${proposal.reviewNumber}`}
-        </TextLink>
+        <span className="flex flex-wrap gap-x-4">
+          <TextLink href={paths.panelPacket(ranking.callSlug, proposal.reviewNumber)} plain strong>
+            {`Packet ${proposal.reviewNumber}`}
+          </TextLink>
+          <TextLink href={paths.panelReport(ranking.callSlug, proposal.reviewNumber)}>Report</TextLink>
+        </span>
       </div>
       <p className="mt-1 text-table text-muted">
         {proposal.lines

@@ -1,3 +1,4 @@
+import { TextLink } from '@/components/ui/TextLink'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { ChecksList } from './ChecksList'
@@ -6,7 +7,7 @@ import { TimeTable } from './TimeTable'
 import { UpTable } from './UpTable'
 
 /** What was computed and checked when the proposal was sent, frozen. */
-export function ChecksPane({ proposal }: { proposal: AnonymousProposal }) {
+export function ChecksPane({ proposal, reportHref }: { proposal: AnonymousProposal; reportHref: string }) {
   const parts = [
     { id: 'targets', title: 'Targets', content: <TargetsTable proposal={proposal} /> },
     { id: 'checks', title: 'Checks', content: <ChecksList proposal={proposal} /> },
@@ -15,6 +16,10 @@ export function ChecksPane({ proposal }: { proposal: AnonymousProposal }) {
   ]
   return (
     <div className="flex flex-col gap-10">
+      <p className="m-0 text-table">
+        <TextLink href={reportHref}>The report in full</TextLink>, with its charts, each observation by
+        itself.
+      </p>
       {parts.map(({ id, title, content }) => (
         <section key={id} id={id} aria-labelledby={`${id}-title`}>
           <SectionHeading id={`${id}-title`} title={title} />

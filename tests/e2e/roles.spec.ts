@@ -21,6 +21,7 @@ const strangers: Record<string, string> = {
   '[token]': 'x'.repeat(43),
   '[slug]': 'call-14',
   '[call]': 'call-13',
+  '[number]': '00-000',
   '[site]': 'quillon-ridge',
   '[telescope]': 'aldous',
   '[mode]': 'ember-short',
@@ -39,7 +40,7 @@ for (const [name, person] of Object.entries(people)) {
       if (person.email) await signIn(person.email, password)
       for (const [path, who] of Object.entries(access.pages) as [string, Who][]) {
         const reply = await page.request.get(concrete(path), { maxRedirects: 0 })
-        const isAboutAStranger = /\[(reference|request|assignment)\]/.test(path)
+        const isAboutAStranger = /\[(reference|request|assignment|number)\]/.test(path)
         const status = passes(who, person.roles, person.email !== null)
           ? isAboutAStranger
             ? [404]

@@ -70,7 +70,7 @@ export default async function ReviewPage({ params }: { params: Promise<{ assignm
               label: 'Checks',
               content: (
                 <div className={`${left} pt-10 max-lg:pt-4`}>
-                  <ChecksPane proposal={proposal} />
+                  <ChecksPane proposal={proposal} reportHref={paths.reviewReport(assignmentId)} />
                 </div>
               ),
             },

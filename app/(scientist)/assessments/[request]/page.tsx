@@ -37,9 +37,12 @@ export default async function AssessmentPage({ params }: { params: Promise<{ req
         title={`${proposal.reviewNumber ?? ''}, ${proposal.title}`}
         lead={`Computed by engine ${proposal.engineVersion} on ${instrument}: ${records}.`}
         actions={
-          <TextLink href={paths.assessmentPacket(requestId)} plain>
-            Packet
-          </TextLink>
+          <>
+            <TextLink href={paths.assessmentReport(requestId)}>Report in full</TextLink>
+            <TextLink href={paths.assessmentPacket(requestId)} plain>
+              Packet
+            </TextLink>
+          </>
         }
       />
       <div className="mt-6">

@@ -1,0 +1,1 @@
+export type { AnonymousProposal } from './anonymise'
