@@ -51,8 +51,9 @@ function VersionChoice(props: {
 /** Every version with its dates and its writer, and any two of them field by field. */
 export function RecordVersions({ fields, versions, today }: RecordVersionsProps) {
   const [newest, before] = versions
-  const [left, setLeft] = useState(before?.recordVersion ?? 0)
-  const [right, setRight] = useState(newest?.recordVersion ?? 0)
+  const [chosen, setChosen] = useState<{ left?: number; right?: number }>({})
+  const left = chosen.left ?? before?.recordVersion ?? 0
+  const right = chosen.right ?? newest?.recordVersion ?? 0
   const inForce = versions.find(({ validFrom }) => validFrom <= today)?.recordVersion
   const find = (version: number) => versions.find(({ recordVersion }) => recordVersion === version)
   const [a, b] = [find(left), find(right)]
@@ -86,8 +87,18 @@ export function RecordVersions({ fields, versions, today }: RecordVersionsProps)
         <div className="mt-6">
           <SectionHeading title="Two versions compared" dense />
           <div className="mt-3 flex flex-wrap gap-x-5 gap-y-2">
-            <VersionChoice label="This" versions={versions} value={left} onChange={setLeft} />
-            <VersionChoice label="and" versions={versions} value={right} onChange={setRight} />
+            <VersionChoice
+              label="This"
+              versions={versions}
+              value={left}
+              onChange={(version) => setChosen({ ...chosen, left: version })}
+            />
+            <VersionChoice
+              label="and"
+              versions={versions}
+              value={right}
+              onChange={(version) => setChosen({ ...chosen, right: version })}
+            />
           </div>
           {rows.length === 0 ? (
             <p className="mt-3 text-table text-muted">They say the same.</p>

@@ -41,7 +41,7 @@ export function TableIntake({ kind, before, onTake, onLeave }: TableIntakeProps)
   const readPasted = () => setIncoming({ name: 'Pasted rows', read: readTable(pasted, kind) })
 
   return (
-    <div className="mt-4 rounded border border-rule bg-surface p-5 max-sm:p-4">
+    <div className="mt-4 rounded border border-rule p-5 max-sm:p-4">
       <p className="m-0 text-table text-muted">
         The first line names the columns: {expected[kind]}. Commas, semicolons or tabs part them; a decimal
         comma is read beside semicolons only. You see every row before it is taken.

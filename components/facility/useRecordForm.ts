@@ -31,22 +31,29 @@ export function useRecordForm<Input extends FieldValues & { over: number }, Outp
     },
     onStale: setStale,
   })
+  const [settled, setSettled] = useState(0)
   const setOver = (version: number) =>
     handle.form.setValue('over' as Path<Input>, version as PathValue<Input, Path<Input>>)
 
+  const settle = () => {
+    setStale(null)
+    setSettled(handle.attempt)
+  }
+
   return {
-    handle,
+    // Once one of the two was chosen, the refusal before it is no news any more.
+    handle: settled === handle.attempt ? { ...handle, failure: null } : handle,
     stale,
     keepTheirs: () => {
       if (!stale) return
       handle.form.reset({ ...handle.form.getValues(), ...stale.theirs, over: stale.version })
-      setStale(null)
+      settle()
       router.refresh()
     },
     keepMine: () => {
       if (!stale) return
       setOver(stale.version)
-      setStale(null)
+      settle()
       handle.submit()
     },
   }

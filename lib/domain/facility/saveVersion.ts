@@ -33,6 +33,21 @@ function staleRecord<Facts>(ctx: ActingContext, newest: RecordVersion<Facts>, ty
   })
 }
 
+/** Before and after, of what differs: every version is kept whole in its own row. */
+function changedFacts<Facts>(of: string, before: NewVersion<Facts>, after: NewVersion<Facts>) {
+  const { facts: old } = before
+  const differing = Object.entries(after.facts as object).filter(
+    ([name, value]) => JSON.stringify(old[name as keyof Facts]) !== JSON.stringify(value),
+  )
+  const pick = ({ recordVersion, validFrom, facts }: NewVersion<Facts>) => ({
+    of,
+    record: recordVersion,
+    validFrom,
+    ...Object.fromEntries(differing.map(([name]) => [name, facts[name as keyof Facts]])),
+  })
+  return { before: pick(before), after: pick(after) }
+}
+
 /**
  * The one way a record is changed: a new version beside the old ones, which stay as they are, so that what cites them
  * keeps its meaning. The caller has asked the policy.
@@ -63,8 +78,7 @@ export async function saveVersion<Facts>(
       action: `facility.${kind}`,
       subject: { kind: `${kind} record`, id: `${owner.id}.${version.recordVersion}` },
       actingAs: holds(tx.actor, 'office') ? 'office' : 'instrument-scientist',
-      before: { of: owner.name, validFrom: newest.validFrom, ...newest.facts },
-      after: { of: owner.name, validFrom: version.validFrom, ...version.facts },
+      ...changedFacts(owner.name, newest, version),
     })
     return { recordVersion: version.recordVersion }
   })

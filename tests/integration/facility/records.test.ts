@@ -93,8 +93,22 @@ describe('a mode’s record', () => {
       acting_as: 'office',
       person_id: scenario.office.personId,
     })
-    expect(JSON.parse(entry?.before_value ?? '')).toMatchObject({ readNoiseE: 3.5, validFrom: '2020-01-01' })
-    expect(JSON.parse(entry?.after_value ?? '')).toMatchObject({ readNoiseE: 5.5, validFrom: today })
+    expect(JSON.parse(entry?.before_value ?? '')).toEqual({
+      of: 'Red, 1.0″ slit',
+      record: 1,
+      validFrom: '2020-01-01',
+      readNoiseE: 3.5,
+      readNoisePer: 'read',
+      calibrationPolicy: '',
+    })
+    expect(JSON.parse(entry?.after_value ?? '')).toEqual({
+      of: 'Red, 1.0″ slit',
+      record: 2,
+      validFrom: today,
+      readNoiseE: 5.5,
+      readNoisePer: 'ramp',
+      calibrationPolicy: 'Arcs each evening.',
+    })
     const page = await readModeRecord(office, slugOf('mode'))
     expect(page.versions.map((v) => [v.recordVersion, v.savedBy])).toEqual([
       [2, scenario.office.name],
