@@ -35,6 +35,9 @@ function modeRecord(mode: SeedMode, modeId: number): Record<string, unknown> {
     twilight_limit_deg: mode.twilightLimitDeg,
     sky_subtraction: mode.skySubtraction ?? 'around',
     thermal_e_per_s: mode.thermalEPerS ?? 0,
+    read_noise_per: mode.readNoisePer ?? 'read',
+    filters: mode.filters ?? '',
+    calibration_policy: mode.calibrationPolicy,
     throughput: JSON.stringify([
       { wavelengthA: blue, efficiency: atBlue },
       { wavelengthA: (blue + red) / 2, efficiency: atMiddle },

@@ -11,8 +11,8 @@ export const site = {
   time_zone: 'Etc/GMT+3',
   utc_offset_hours: -3,
   lowest_altitude_deg: 20,
-  extinction: { B: 0.22, g: 0.18, V: 0.13, r: 0.1, i: 0.06, z: 0.05, Y: 0.05, J: 0.09, H: 0.05, K: 0.08 },
-  darkSky: { B: 22.5, g: 22.1, V: 21.7, r: 21.2, i: 20.4, z: 19.3, Y: 18.0, J: 16.7, H: 15.4, K: 15.0 },
+  extinction: { B: 0.22, g: 0.18, V: 0.13, r: 0.1, i: 0.06, z: 0.05, y: 0.05, J: 0.09, H: 0.05, K: 0.08 },
+  darkSky: { B: 22.5, g: 22.1, V: 21.7, r: 21.2, i: 20.4, z: 19.3, y: 18.0, J: 16.7, H: 15.4, K: 15.0 },
   seeing: { best10: 0.6, median: 0.8, worst90: 1.3 },
 } as const
 
@@ -49,12 +49,18 @@ export interface SeedMode {
   twilightLimitDeg: number
   skySubtraction?: 'around' | 'paired' | 'blank-sky'
   thermalEPerS?: number
+  /** Of one read where not given. */
+  readNoisePer?: 'read' | 'ramp'
+  filters?: string
+  calibrationPolicy: string
   /** Efficiency at the blue end, the middle and the red end; atmosphere is not in it. */
   efficiency: [number, number, number]
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
 }
 
 const optical = { medium: 'air', gainEPerAdu: 1.7, darkEPerS: 0.001, twilightLimitDeg: -18 } as const
+
+const evenly = 'Bias and flats each evening and dawn, on the observatory’s time.'
 
 const imager = (band: string, rangeA: [number, number], peak: number): SeedMode => ({
   ...optical,
@@ -74,6 +80,8 @@ const imager = (band: string, rangeA: [number, number], peak: number): SeedMode 
   systematicFloor: 0.001,
   efficiency: [peak * 0.8, peak, peak * 0.85],
   overheads: { acquisitionS: 240, readoutS: 35, ditherS: 12, calibrationFraction: 0 },
+  filters: `${band}, 90 mm, in the converging beam`,
+  calibrationPolicy: evenly,
 })
 
 const slit = (arm: string, rangeA: [number, number], dispersion: number, peak: number): SeedMode => ({
@@ -94,6 +102,7 @@ const slit = (arm: string, rangeA: [number, number], dispersion: number, peak: n
   systematicFloor: 0.01,
   efficiency: [peak * 0.55, peak, peak * 0.7],
   overheads: { acquisitionS: 600, readoutS: 48, ditherS: 0, calibrationFraction: 0.06 },
+  calibrationPolicy: `${evenly} Arcs at each position and one flux standard a night, on the proposal’s time.`,
 })
 
 const infrared = (arm: string, rangeA: [number, number], dispersion: number): SeedMode => ({
@@ -117,9 +126,12 @@ const infrared = (arm: string, rangeA: [number, number], dispersion: number): Se
   systematicFloor: 0.002,
   skySubtraction: 'paired',
   thermalEPerS: 0.05,
+  readNoisePer: 'ramp',
   twilightLimitDeg: -15,
   efficiency: [0.16, 0.22, 0.2],
   overheads: { acquisitionS: 800, readoutS: 9, ditherS: 14, calibrationFraction: 0.12 },
+  calibrationPolicy:
+    'Darks and flats each dawn, on the observatory’s time. A hot star an hour, on the proposal’s.',
 })
 
 const wide = (band: string, rangeA: [number, number], peak: number): SeedMode => ({
@@ -154,6 +166,8 @@ export const modes: readonly SeedMode[] = [
     resolvingPower: null,
     subExposureS: [2, 60],
     systematicFloor: 0.001,
+    filters: 'J, cold',
+    calibrationPolicy: 'Darks and flats each dawn, on the observatory’s time.',
     efficiency: [0.32, 0.38, 0.34],
     overheads: { acquisitionS: 240, readoutS: 3, ditherS: 8, calibrationFraction: 0 },
   },
