@@ -91,6 +91,11 @@ describe('the solver', () => {
   })
 
   it('says so in a sentence when it cannot be loaded', async () => {
+    // A stopped solve leaves no thread behind, so that the next one has to be started.
+    const desk = new AbortController()
+    const stopped = solveInWorker(stubborn(), { seconds: 60, relativeGap: 0, signal: desk.signal })
+    setTimeout(() => desk.abort(), 10)
+    await stopped
     vi.spyOn(process, 'cwd').mockReturnValue('/nowhere')
     expect(await solveInWorker(knapsack([[3, 1]], 1), limits)).toMatchObject({
       status: 'failed',

@@ -1,39 +1,48 @@
-import { parentPort, workerData } from 'node:worker_threads'
+import { parentPort } from 'node:worker_threads'
 import loadHighs from 'highs'
 
-/** Runs in a thread of its own, plain JavaScript so that it starts without a build: one programme in, one answer out. */
-const { programme, seconds, relativeGap } = workerData
+/** Runs in a thread of its own, plain JavaScript so that it starts without a build: a programme in, an answer out. */
 const highs = await loadHighs()
-const model = highs.createModel({
-  numCols: programme.objective.length,
-  numRows: programme.rowLower.length,
-  sense: highs.constants.objectiveSense.maximize,
-  colCost: programme.objective,
-  colLower: programme.lower,
-  colUpper: programme.upper,
-  rowLower: programme.rowLower,
-  rowUpper: programme.rowUpper,
-  integrality: programme.isInteger,
-  matrix: {
-    format: 'csr',
-    numRows: programme.rowLower.length,
-    numCols: programme.objective.length,
-    starts: programme.starts,
-    indices: programme.indices,
-    values: programme.values,
-  },
+parentPort?.on('message', ({ programme, seconds, relativeGap }) => {
+  const model = highs.createModel(modelOf(highs, programme))
+  try {
+    model.options.set({
+      output_flag: false,
+      time_limit: seconds,
+      mip_rel_gap: relativeGap,
+      mip_abs_gap: 1e-9,
+      random_seed: 1,
+    })
+    model.run()
+    parentPort?.postMessage(answerOf(highs, model, programme, seconds))
+  } finally {
+    model.dispose()
+  }
 })
-model.options.set({
-  output_flag: false,
-  time_limit: seconds,
-  mip_rel_gap: relativeGap,
-  mip_abs_gap: 1e-9,
-  random_seed: 1,
-})
-model.run()
-parentPort?.postMessage(answerOf())
 
-function answerOf() {
+function modelOf(highs, programme) {
+  return {
+    numCols: programme.objective.length,
+    numRows: programme.rowLower.length,
+    sense: highs.constants.objectiveSense.maximize,
+    colCost: programme.objective,
+    colLower: programme.lower,
+    colUpper: programme.upper,
+    rowLower: programme.rowLower,
+    rowUpper: programme.rowUpper,
+    integrality: programme.isInteger,
+    matrix: {
+      format: 'csr',
+      numRows: programme.rowLower.length,
+      numCols: programme.objective.length,
+      starts: programme.starts,
+      indices: programme.indices,
+      values: programme.values,
+    },
+  }
+}
+
+function answerOf(highs, model, programme, seconds) {
   const { optimal, infeasible, unbounded, unboundedOrInfeasible, timeLimit } = highs.constants.modelStatus
   const status = model.getModelStatus()
   if (status === infeasible) return none('infeasible', 'Nothing meets every condition.')

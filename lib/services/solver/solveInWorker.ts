@@ -4,6 +4,8 @@ import type { Answer, Programme, Solve, SolveLimits } from '@/lib/panel/solver/t
 
 /** Beyond its own limit the solver may need this long to look at its clock; after that it is ended. */
 const GRACE_SECONDS = 5
+/** A thread with nothing to do is ended after this long: its memory never shrinks. */
+const IDLE_SECONDS = 20
 
 const none = (status: 'stopped' | 'failed' | 'unfinished', why: string): Answer => ({
   status,
@@ -12,6 +14,7 @@ const none = (status: 'stopped' | 'failed' | 'unfinished', why: string): Answer 
 })
 
 let last: Promise<unknown> = Promise.resolve()
+let idle: { worker: Worker; timer: NodeJS.Timeout } | null = null
 
 /** Solves in a thread, one programme at a time: a solver fills a processor, and pages need the others. */
 export const solveInWorker: Solve = (programme, limits) => {
@@ -20,30 +23,56 @@ export const solveInWorker: Solve = (programme, limits) => {
   return answer
 }
 
+function takeWorker(): Worker {
+  if (idle) {
+    const { worker, timer } = idle
+    clearTimeout(timer)
+    worker.removeListener('error', leaveIdle)
+    worker.ref()
+    idle = null
+    return worker
+  }
+  return new Worker(
+    // Read from the tree, not from the bundle, which does not carry the WebAssembly beside it.
+    /* turbopackIgnore: true */ join(process.cwd(), 'lib', 'services', 'solver', 'highsWorker.mjs'),
+    { execArgv: [] },
+  )
+}
+
+function keepWorker(worker: Worker): void {
+  worker.once('error', leaveIdle)
+  worker.unref()
+  idle = { worker, timer: setTimeout(leaveIdle, IDLE_SECONDS * 1000).unref() }
+}
+
+function leaveIdle(): void {
+  void idle?.worker.terminate()
+  idle = null
+}
+
 function solveNow(programme: Programme, { seconds, relativeGap, signal }: SolveLimits): Promise<Answer> {
   if (signal?.aborted) return Promise.resolve(none('stopped', 'The solver was stopped.'))
   return new Promise((resolve) => {
-    const worker = new Worker(
-      // Read from the tree, not from the bundle, which does not carry the WebAssembly beside it.
-      /* turbopackIgnore: true */ join(process.cwd(), 'lib', 'services', 'solver', 'highsWorker.mjs'),
-      { workerData: { programme, seconds, relativeGap }, execArgv: [], stdout: true, stderr: true },
-    )
-    const stop = () => end(none('stopped', 'The solver was stopped.'))
-    const timer = setTimeout(
-      () => end(none('unfinished', `The solver did not answer in ${Math.round(seconds)} seconds.`)),
-      (seconds + GRACE_SECONDS) * 1000,
-    )
-    function end(answer: Answer) {
+    const worker = takeWorker()
+    const end = (answer: Answer, isWell: boolean) => {
       clearTimeout(timer)
       signal?.removeEventListener('abort', stop)
+      worker.off('message', answered).off('error', broken).off('exit', gone)
+      if (isWell) keepWorker(worker)
+      else void worker.terminate()
       resolve(answer)
-      void worker.terminate()
     }
-    signal?.addEventListener('abort', stop, { once: true })
-    worker.once('message', end)
-    worker.once('error', (error: Error) =>
-      end(none('failed', `The solver could not be run: ${error.message}`)),
+    const stop = () => end(none('stopped', 'The solver was stopped.'), false)
+    const answered = (answer: Answer) => end(answer, true)
+    const broken = (error: Error) =>
+      end(none('failed', `The solver could not be run: ${error.message}`), false)
+    const gone = () => end(none('failed', 'The solver ended without an answer.'), false)
+    const timer = setTimeout(
+      () => end(none('unfinished', `The solver did not answer in ${Math.round(seconds)} seconds.`), false),
+      (seconds + GRACE_SECONDS) * 1000,
     )
-    worker.once('exit', () => end(none('failed', 'The solver ended without an answer.')))
+    signal?.addEventListener('abort', stop, { once: true })
+    worker.on('message', answered).on('error', broken).on('exit', gone)
+    worker.postMessage({ programme, seconds, relativeGap })
   })
 }
