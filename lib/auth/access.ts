@@ -171,6 +171,7 @@ export const access = {
     releaseDecisions: chair,
     planCall: office,
     saveCallDates: office,
+    saveOffer: office,
     openCall: office,
     closeCall: office,
     saveSiteRecord: office,

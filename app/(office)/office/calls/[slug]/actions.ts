@@ -3,7 +3,9 @@
 import { defineAction } from '@/lib/actions/defineAction'
 import { closeCall } from '@/lib/domain/calls/closeCall'
 import { openCall } from '@/lib/domain/calls/openCall'
+import { saveOfferSchema } from '@/lib/domain/calls/offerSchema'
 import { saveDates } from '@/lib/domain/calls/saveDates'
+import { saveOffer } from '@/lib/domain/calls/saveOffer'
 import { callStepSchema, saveDatesSchema } from '@/lib/domain/calls/schema'
 import { paths } from '@/lib/paths'
 
@@ -26,4 +28,11 @@ export const saveDatesAction = defineAction({
   schema: saveDatesSchema,
   run: saveDates,
   revalidate: (_, { slug }) => paths.officeCall(slug),
+})
+
+export const saveOfferAction = defineAction({
+  name: 'saveOffer',
+  schema: saveOfferSchema,
+  run: saveOffer,
+  revalidate: (_, { slug }) => [paths.officeCall(slug), paths.call(slug), paths.office('facility')],
 })

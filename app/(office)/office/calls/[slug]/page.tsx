@@ -5,6 +5,7 @@ import { phaseWords } from '@/components/calls/phaseWords'
 import { seasonWords } from '@/components/calls/seasonWords'
 import { CallSteps } from '@/components/office/CallSteps'
 import { DatesForm } from '@/components/office/DatesForm'
+import { OfferForm } from '@/components/office/OfferForm'
 import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
@@ -15,9 +16,10 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
+import { readOffer } from '@/lib/domain/calls/readOffer'
 import { readOfficeProposals } from '@/lib/domain/calls/readOfficeProposals'
 import { paths } from '@/lib/paths'
-import { closeCallAction, openCallAction, saveDatesAction } from './actions'
+import { closeCallAction, openCallAction, saveDatesAction, saveOfferAction } from './actions'
 
 export const metadata: Metadata = { title: 'Call' }
 
@@ -26,6 +28,7 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
   const { slug } = await params
   const view = await orNotFound(readCall(ctx, slug))
   const proposals = await orNotFound(readOfficeProposals(ctx, slug))
+  const modes = await orNotFound(readOffer(ctx, slug))
   const { call, phase } = view
   return (
     <Main>
@@ -66,6 +69,14 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
           </div>
         </TwoColumns>
       </section>
+      {phase === 'planned' || phase === 'open' ? (
+        <section className="mt-12">
+          <SectionHeading title="Modes on offer" aside="A mode that proposals observe with stays on offer." />
+          <div className="mt-4">
+            <OfferForm slug={slug} modes={modes} action={saveOfferAction} />
+          </div>
+        </section>
+      ) : null}
     </Main>
   )
 }
