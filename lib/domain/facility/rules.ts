@@ -1,5 +1,4 @@
 /** What the forms of records work with in the browser: the pure part of this noun. */
-export { eveningProblem } from './evening'
 export { columnWords, readTable, type TableProblem, type TableRead } from './readTable'
 export { recordTableCsv } from './tableCsv'
 export type { TableKind } from './tableHeads'

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { readTable, recordTableCsv, type TableKind, type TableRead } from '@/lib/domain/facility/rules'
 
-// Seen to fail with the byte-order mark left in, with per cent not divided, and with equal wavelengths let through.
+// Seen to fail with per cent not divided, and with equal wavelengths let through.
 
 const read = (text: string, kind: TableKind = 'throughput') => readTable(text, kind)
 const rows = (answer: TableRead) => (answer.ok ? answer.rows.map(({ at, value }) => [at, value]) : answer)
