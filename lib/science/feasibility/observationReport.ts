@@ -2,6 +2,7 @@ import { seasonVisibility } from './seasonVisibility'
 import { checkClearOfBands, checkClearOfSkyLines, checkInRange } from './featureChecks'
 import { checkHoursAsked, checkNotOverAsked, checkUp, checkUpWithMoon } from './hoursChecks'
 import { worst } from './judge'
+import { checkLikelyInRange } from './likelyInRange'
 import { checkImage, checkSaturation, checkSignal } from './lightChecks'
 import { planExposure } from './plan'
 import { checkDistance, checkRedshiftExists } from './redshiftChecks'
@@ -31,6 +32,9 @@ export function observationReport(input: ReportInput): ObservationReport {
     const seen = { ...feature, observedA }
     const inRange = checkInRange(mode, seen)
     checks.push(inRange)
+    const { redshiftError: error, redshiftType: type } = target
+    if (z !== null && error && type && type !== 'spectroscopic')
+      checks.push(checkLikelyInRange(mode, feature, { z, error, type }))
     if (inRange.verdict !== 'not-feasible') {
       checks.push(checkClearOfBands(mode, seen))
       if (mode.kind === 'long-slit') checks.push(checkClearOfSkyLines(mode, seen))
