@@ -45,8 +45,8 @@ export function ImportPanel({ contents, importRows }: ImportPanelProps) {
           Paste rows, or drop a file
         </h2>
         <p className="text-table text-muted">
-          CSV or ECSV, any column order: name, ra, dec, z, mag, band. You see every row before anything is
-          kept.
+          CSV, ECSV or VOTable, columns in any order, told by name, UCD and unit: name, ra, dec, z, mag, band.
+          You see every column and row before anything is kept.
         </p>
         <div
           className={classNames(
@@ -70,7 +70,7 @@ export function ImportPanel({ contents, importRows }: ImportPanelProps) {
           <input
             ref={chooser}
             type="file"
-            accept=".csv,.tsv,.txt,.ecsv,.dat,text/*"
+            accept=".csv,.tsv,.txt,.ecsv,.dat,.xml,.vot,.votable,text/*,application/x-votable+xml"
             className="sr-only"
             aria-label="File of targets"
             tabIndex={-1}
@@ -123,6 +123,7 @@ export function ImportPanel({ contents, importRows }: ImportPanelProps) {
             file={incoming.file}
             incoming={incoming}
             reference={contents.reference}
+            others={contents.targets.length}
             importRows={importRows}
           />
         ) : (

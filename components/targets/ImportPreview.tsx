@@ -4,8 +4,10 @@ import { useState } from 'react'
 import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
-import { countInWords, formatList, formatUtcClock } from '@/lib/format'
+import { mostTargets } from '@/lib/domain/targets/rules'
+import { countInWords, formatList, formatNumber, formatUtcClock } from '@/lib/format'
 import { cellNames } from './cellNames'
+import { ImportColumns } from './ImportColumns'
 import { ImportRows } from './ImportRows'
 import type { TargetActions } from './targetActions'
 import type { Import, ReadFile } from './useImport'
@@ -14,11 +16,13 @@ export interface ImportPreviewProps {
   file: ReadFile
   incoming: Import
   reference: string
+  /** How many targets the proposal holds already. */
+  others: number
   importRows: TargetActions['importRows']
 }
 
 /** What a file holds: counts, the first thing wrong, and the rows to be looked at and mended. */
-export function ImportPreview({ file, incoming, reference, importRows }: ImportPreviewProps) {
+export function ImportPreview({ file, incoming, reference, others, importRows }: ImportPreviewProps) {
   const [showsRows, setShowsRows] = useState(false)
   const [busy, setBusy] = useState(false)
   const count = (standing: string) => incoming.standings.filter((one) => one === standing).length
@@ -26,6 +30,12 @@ export function ImportPreview({ file, incoming, reference, importRows }: ImportP
   const clashes = file.rows.filter((_, index) => incoming.standings[index] === 'clash')
   const bad = wrong.length + clashes.length
   const fresh = count('new')
+  const present = file.rows.length - bad - fresh
+  const isTooMany = fresh + others > mostTargets || file.rows.length > mostTargets
+  const taken = file.mapping.filter((column) => column !== null)
+  const leftOut = file.table.columns.flatMap(({ name }, index) =>
+    file.mapping[index] ? [] : name || `column ${index + 1}`,
+  )
 
   const keep = async () => {
     setBusy(true)
@@ -49,16 +59,16 @@ export function ImportPreview({ file, incoming, reference, importRows }: ImportP
           read {formatUtcClock(file.readAt)}, not kept yet
         </span>
       </h3>
-      <dl className="mt-3 grid grid-cols-[2rem_1fr] gap-x-4 gap-y-1.5 text-table">
-        <dt className="text-right font-semibold">{file.rows.length}</dt>
+      <dl className="mt-3 grid grid-cols-[minmax(2rem,auto)_1fr] gap-x-4 gap-y-1.5 text-table">
+        <dt className="text-right font-semibold">{formatNumber(file.rows.length, 0)}</dt>
         <dd className="m-0">
-          {file.rows.length === 1 ? 'row' : 'rows'} read; {formatList(file.recognised)} recognised
-          {file.ignored.length > 0 ? `; ${formatList(file.ignored)} left out` : ''}
+          {file.rows.length === 1 ? 'row' : 'rows'} read; {countInWords(taken.length, 'column')} taken
+          {leftOut.length > 0 ? `, left out: ${formatList(leftOut)}` : ', none left out'}
         </dd>
-        {count('same') > 0 ? (
+        {present > 0 ? (
           <>
-            <dt className="text-right font-semibold">{count('same')}</dt>
-            <dd className="m-0">already here, the same to the last digit</dd>
+            <dt className="text-right font-semibold">{present}</dt>
+            <dd className="m-0">here already, the same to the last digit</dd>
           </>
         ) : null}
         {[...wrong, ...clashes].slice(0, 4).map(({ number, row, errors }) => {
@@ -76,17 +86,23 @@ export function ImportPreview({ file, incoming, reference, importRows }: ImportP
         })}
         {bad > 4 ? (
           <>
-            <dt className="text-right font-semibold">{bad - 4}</dt>
+            <dt className="text-right font-semibold">{formatNumber(bad - 4, 0)}</dt>
             <dd className="m-0">more to mend</dd>
           </>
         ) : null}
       </dl>
+      {isTooMany ? (
+        <p className="mt-3 text-table font-semibold text-not-feasible">
+          {`A proposal holds at most ${mostTargets} targets; with these ${formatNumber(file.rows.length, 0)} rows it would hold ${formatNumber(fresh + bad + others, 0)}.`}
+        </p>
+      ) : null}
+      <ImportColumns file={file} incoming={incoming} />
       <div className="mt-4 flex flex-wrap items-center gap-4">
         {bad > 0 ? (
           <Button size="small" look="secondary" onClick={() => setShowsRows(true)}>
             {`Mend row ${[...wrong, ...clashes][0]?.number ?? ''}`}
           </Button>
-        ) : (
+        ) : isTooMany ? null : (
           <Button size="small" busy={busy} busyWord="Keeping" onClick={() => void keep()}>
             {fresh === 0 ? 'Nothing new to keep' : `Keep ${countInWords(fresh, 'target')}`}
           </Button>

@@ -4,14 +4,28 @@ import { TableFrame } from '@/components/tables/TableFrame'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { TargetRow } from '@/lib/domain/targets/schema'
 import { cellClasses } from '@/components/rows/cellClasses'
+import { formatNumber } from '@/lib/format'
 import { cellNames } from './cellNames'
+import type { Standing } from './standingsOf'
 import type { Import, ReadFile } from './useImport'
 
-const cells: readonly (keyof TargetRow)[] = ['name', 'ra', 'dec', 'redshift', 'magnitude', 'band']
+const firstCells: readonly (keyof TargetRow)[] = ['name', 'ra', 'dec', 'redshift', 'magnitude', 'band']
 const standingWords = { new: 'new', same: 'here already', clash: 'clashes', wrong: 'to mend' } as const
 
-/** Every row of a file, each cell open to be mended; a row can be left out. */
+/** As many as are shown at once. */
+const mostShown = 100
+
+const needsMending = (standing: Standing) => standing === 'wrong' || standing === 'clash'
+
+/** The rows of a file, those to mend first, each cell open to be mended; a row can be left out. */
 export function ImportRows({ file, incoming }: { file: ReadFile; incoming: Import }) {
+  const all = file.rows.map((row, index) => ({ ...row, standing: incoming.standings[index] ?? 'new' }))
+  const shown = [
+    ...all.filter(({ standing }) => needsMending(standing)),
+    ...all.filter(({ standing }) => !needsMending(standing)),
+  ].slice(0, mostShown)
+  const wrong = new Set(shown.flatMap(({ errors }) => Object.keys(errors) as (keyof TargetRow)[]))
+  const cells = [...firstCells, ...[...wrong].filter((cell) => !firstCells.includes(cell))]
   return (
     <div className="mt-4 max-h-96 overflow-y-auto">
       <TableFrame caption={`Rows of ${file.name}`} phone="cards">
@@ -25,14 +39,8 @@ export function ImportRows({ file, incoming }: { file: ReadFile; incoming: Impor
           </tr>
         </thead>
         <tbody role="rowgroup">
-          {file.rows.map(({ number, row, errors }, index) => (
-            <tr
-              key={number}
-              role="row"
-              className={
-                ['wrong', 'clash'].includes(incoming.standings[index] ?? '') ? 'is-attention' : undefined
-              }
-            >
+          {shown.map(({ number, row, errors, standing }) => (
+            <tr key={number} role="row" className={needsMending(standing) ? 'is-attention' : undefined}>
               <th role="rowheader" scope="row">
                 {number}
               </th>
@@ -51,7 +59,7 @@ export function ImportRows({ file, incoming }: { file: ReadFile; incoming: Impor
                 </td>
               ))}
               <td role="cell" data-head="Standing" className="text-muted">
-                {standingWords[incoming.standings[index] ?? 'new']}
+                {standingWords[standing]}
               </td>
               <td role="cell" data-head="">
                 <LinkLikeButton
@@ -65,6 +73,11 @@ export function ImportRows({ file, incoming }: { file: ReadFile; incoming: Impor
           ))}
         </tbody>
       </TableFrame>
+      {all.length > mostShown ? (
+        <p className="m-0 mt-3 text-caption text-muted">
+          {`${mostShown} of ${formatNumber(all.length, 0)} rows stand here, those to mend first.`}
+        </p>
+      ) : null}
     </div>
   )
 }

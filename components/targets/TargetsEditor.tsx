@@ -3,17 +3,15 @@
 import { parseAsArrayOf, parseAsStringLiteral, useQueryState } from 'nuqs'
 import { useEffect, useMemo, useRef } from 'react'
 import { useLiveComputation } from '@/components/observations/useLiveComputation'
-import { saveText } from '@/components/tables/saveText'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
-import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { formatCalendarDate } from '@/lib/format'
 import { comparisonOf } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
-import { targetsCsv } from '@/lib/domain/targets/rules'
 import { ColumnChooser } from './ColumnChooser'
+import { ExportLinks } from './ExportLinks'
 import { ImportPanel } from './ImportPanel'
 import { numberColumns, type NumberColumnId } from './numberColumns'
 import { rowViews } from './rowViews'
@@ -60,11 +58,13 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
     1,
     ...live.targets.flatMap(({ visibleHoursByMonth }) => visibleHoursByMonth.map(({ hours }) => hours)),
   )
-  const download = () =>
-    saveText(
-      `targets-${contents.reference}.csv`,
-      targetsCsv(typedContents.targets, live.targets, cosmologyName),
-    )
+  const exported = {
+    reference: contents.reference,
+    targets: typedContents.targets,
+    computed: live.targets,
+    cosmologyName,
+    engineVersion,
+  }
 
   return (
     <>
@@ -77,7 +77,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
         actions={
           <>
             <ColumnChooser shown={shown} onChange={(next) => void setShown(next)} />
-            {rows.length > 0 ? <LinkLikeButton onClick={download}>CSV</LinkLikeButton> : null}
+            {rows.length > 0 ? <ExportLinks exported={exported} /> : null}
             {readOnly ? null : <Button onClick={addRow}>Add a target</Button>}
           </>
         }

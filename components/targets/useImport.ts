@@ -1,92 +1,88 @@
 'use client'
 
-import { useState } from 'react'
-import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { useMemo, useState } from 'react'
+import type { ProposalContents } from '@/lib/domain/proposals/types'
 import {
-  nameKey,
+  longestText,
+  mendRow,
   readTargetFile,
-  rowErrors,
-  saysTheSame,
+  rowsOf,
+  takeColumn,
   type ImportedRow,
+  type Mapping,
+  type Table,
+  type TargetColumn,
   type TargetFile,
 } from '@/lib/domain/targets/rules'
-import { targetRowSchema, type TargetRow } from '@/lib/domain/targets/schema'
+import type { TargetRow } from '@/lib/domain/targets/schema'
+import { decodeText } from './decodeText'
+import { standingsOf } from './standingsOf'
 
-const largestBytes = 2_000_000
-
-export interface ReadFile {
+interface OpenFile {
   name: string
   readAt: Date
-  recognised: string[]
-  ignored: string[]
-  rows: ImportedRow[]
+  table: Table
+  mapping: Mapping
+  /** Cells typed anew, by row. */
+  mended: ReadonlyMap<number, Partial<TargetRow>>
+  leftOut: ReadonlySet<number>
 }
 
-/** Whether a row says what a target here says already, or clashes with one. */
-export function standingOf(row: ImportedRow, targets: readonly Target[]): 'new' | 'same' | 'clash' | 'wrong' {
-  const parsed = targetRowSchema.safeParse(row.row)
-  if (!parsed.success) return 'wrong'
-  const known = targets.find(({ name }) => nameKey(name) === nameKey(parsed.data.name))
-  if (!known) return 'new'
-  return saysTheSame(known, parsed.data) ? 'same' : 'clash'
+export interface ReadFile extends OpenFile {
+  rows: readonly ImportedRow[]
 }
 
-function decode(bytes: ArrayBuffer): string {
-  const start = new Uint8Array(bytes.slice(0, 2))
-  const isWide = (start[0] === 0xff && start[1] === 0xfe) || (start[0] === 0xfe && start[1] === 0xff)
-  if (isWide) return new TextDecoder(start[0] === 0xff ? 'utf-16le' : 'utf-16be').decode(bytes)
-  try {
-    return new TextDecoder('utf-8', { fatal: true }).decode(bytes)
-  } catch {
-    return new TextDecoder('windows-1252').decode(bytes)
-  }
-}
+const noRows: readonly ImportedRow[] = []
 
-/** A file or a pasted table on its way in: read, shown row by row, mended here, kept whole or left. */
+/** A file or a pasted table on its way in: its columns told, shown row by row, mended here, kept whole or left. */
 export function useImport(contents: ProposalContents) {
-  const [file, setFile] = useState<ReadFile | null>(null)
+  const [open, setOpen] = useState<OpenFile | null>(null)
   const [problem, setProblem] = useState<string | null>(null)
+  const change = (by: (before: OpenFile) => Partial<OpenFile>) =>
+    setOpen((before) => (before ? { ...before, ...by(before) } : before))
 
-  const take = (name: string, read: TargetFile) => {
-    if (!read.ok) {
-      setProblem(`${name}: ${read.message}`)
-      return
-    }
+  const { table, mapping, mended, leftOut } = open ?? {}
+  const read = useMemo(() => (table && mapping ? rowsOf(table, mapping) : noRows), [table, mapping])
+  const rows = useMemo(
+    () =>
+      read
+        .filter(({ number }) => !leftOut?.has(number))
+        .map((row) => {
+          const typed = mended?.get(row.number)
+          return typed ? mendRow(row, typed) : row
+        }),
+    [read, mended, leftOut],
+  )
+  const standings = useMemo(() => standingsOf(rows, contents.targets), [rows, contents.targets])
+
+  const take = (name: string, file: TargetFile) => {
+    if (!file.ok) return setProblem(`${name}: ${file.message}`)
     setProblem(null)
-    setFile({ name, readAt: new Date(), ...read, recognised: [...new Set(read.recognised)] })
+    setOpen({
+      ...{ name, readAt: new Date(), table: file.table, mapping: file.mapping },
+      ...{ mended: new Map(), leftOut: new Set() },
+    })
   }
-
-  const change = (number: number, cell: keyof TargetRow, text: string) =>
-    setFile((before) =>
-      before
-        ? {
-            ...before,
-            rows: before.rows.map((one) => {
-              if (one.number !== number) return one
-              const row = { ...one.row, [cell]: text }
-              return { ...one, row, errors: rowErrors(row) }
-            }),
-          }
-        : before,
-    )
 
   return {
-    file,
+    file: open ? { ...open, rows } : null,
     problem,
-    standings: (file?.rows ?? []).map((row) => standingOf(row, contents.targets)),
-    change,
+    standings,
+    takeAs: (index: number, column: TargetColumn | null) =>
+      change((before) => ({ mapping: takeColumn(before.mapping, index, column) })),
+    change: (number: number, cell: keyof TargetRow, text: string) =>
+      change((before) => ({
+        mended: new Map(before.mended).set(number, { ...before.mended.get(number), [cell]: text }),
+      })),
     readText: (name: string, text: string) => take(name, readTargetFile(text)),
     readUpload: async (upload: File) => {
       if (upload.size === 0) setProblem(`${upload.name} is empty.`)
-      else if (upload.size > largestBytes) setProblem(`${upload.name} is larger than 2 MB.`)
-      else take(upload.name, readTargetFile(decode(await upload.arrayBuffer())))
+      else if (upload.size > longestText) setProblem(`${upload.name} is larger than 5 MB.`)
+      else take(upload.name, readTargetFile(decodeText(await upload.arrayBuffer())))
     },
-    leaveOut: (number: number) =>
-      setFile((before) =>
-        before ? { ...before, rows: before.rows.filter((row) => row.number !== number) } : before,
-      ),
+    leaveOut: (number: number) => change((before) => ({ leftOut: new Set(before.leftOut).add(number) })),
     leave: () => {
-      setFile(null)
+      setOpen(null)
       setProblem(null)
     },
     setProblem,

@@ -66,7 +66,7 @@ describe('a file of targets', () => {
     ['name,ra,dec', 'There are heads, but no rows under them.'],
     ['12 29 06.70,+02 03 08.6', 'The first line must name the columns'],
     ['name\u0000,ra', 'This is not a text file.'],
-    [`name\n${'A\n'.repeat(501)}`, 'There are 501 rows; at most 500 can be kept.'],
+    [`name\n${'A\n'.repeat(5001)}`, 'There are 5001 rows; at most 5000 are read at once.'],
   ])('refuses “%s” in words', (text, sentence) => {
     const file = readTargetFile(text)
     expect(file.ok ? '' : file.message).toContain(sentence)
@@ -93,7 +93,15 @@ describe('what this product writes', () => {
     ['a uniform cloud', target({ geometry: 'uniform', effectiveRadiusArcsec: 4 })],
     ['a target of which nothing is known', target({ brightness: null, redshift: null, redshiftTyped: '' })],
   ])('reads back unchanged: %s', (_, one) => {
-    const file = readTargetFile(targetsCsv([one], [], 'Planck 2018'))
+    const file = readTargetFile(
+      targetsCsv({
+        reference: '2027A-001',
+        targets: [one],
+        computed: [],
+        cosmologyName: 'Planck 2018',
+        engineVersion: '1.0.0',
+      }),
+    )
     if (!file.ok) throw new Error(file.message)
     expect(file.rows.map(({ errors }) => errors)).toEqual([{}])
     expect(targetRowSchema.parse(file.rows[0]?.row)).toEqual(targetRowSchema.parse(targetRow(one)))

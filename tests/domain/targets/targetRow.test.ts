@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { rowErrors } from '@/lib/domain/targets/readTargetFile'
+import { rowErrors } from '@/lib/domain/targets/rowErrors'
 import { targetRowSchema, type TargetRow } from '@/lib/domain/targets/schema'
 import { emptyTargetRow, targetRow } from '@/lib/domain/targets/targetRow'
 
