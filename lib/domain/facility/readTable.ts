@@ -101,7 +101,7 @@ export function readTable(text: string, kind: TableKind): TableRead {
   if (rest.length > mostThroughputRows)
     return no(
       `There are ${formatNumber(rest.length)} rows; at most ${formatNumber(mostThroughputRows)} are kept. ` +
-        `Every ${formatNumber(Math.ceil(rest.length / mostThroughputRows))}th row would do.`,
+        `One row in ${formatNumber(Math.ceil(rest.length / mostThroughputRows))} would do.`,
     )
   const [headRow = [], ...records] = readRecords(lines.join('\n'), delimiter)
   const heads = readTableHeads(headRow, kind)

@@ -3,7 +3,7 @@ import { formatNumber } from '@/lib/format'
 import { quantity } from './quantity'
 
 /** Every computation walks through the table: more rows than this cost time and say nothing more. */
-export const mostThroughputRows = 500
+export const mostThroughputRows = 300
 
 const cell = {
   at: quantity({ what: 'A wavelength', low: 1000, high: 300_000, unit: '\u00a0Å' }),
