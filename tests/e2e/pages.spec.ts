@@ -21,7 +21,11 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
   ],
   ['an investigator', 'ilse@tarnhead.example', ['/proposals', '/proposals/new', '/account']],
   ['a reviewer', 'delphine@ostbury.example', ['/reviews']],
-  ['an instrument scientist', 'signe@quillonridge.example', ['/assessments']],
+  [
+    'an instrument scientist',
+    'signe@quillonridge.example',
+    ['/assessments', '/assessments/instruments', '/assessments/instruments/ember-short'],
+  ],
   [
     'the chair',
     'edda@velm.example',
@@ -32,9 +36,18 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
   [
     'the office',
     'maud@quillonridge.example',
-    ['calls', 'calls/call-14', 'facility', 'people', 'fees', 'mail', 'logbook'].map(
-      (page) => `/office/${page}`,
-    ),
+    [
+      'calls',
+      'calls/call-14',
+      'facility',
+      'facility/sites/quillon-ridge',
+      'facility/telescopes/aldous',
+      'facility/modes/lantern-r',
+      'people',
+      'fees',
+      'mail',
+      'logbook',
+    ].map((page) => `/office/${page}`),
   ],
 ]
 
