@@ -21,7 +21,7 @@ export interface RecordPageProps<Facts> {
 /** A page on one record: the form of its next version, and all versions beside it. */
 export function RecordPage<Facts>({ record, back, fields, typed, children }: RecordPageProps<Facts>) {
   const { name, newest, versions, today } = record
-  const stamp = stampInWords(newest)
+  const stamp = stampInWords(newest, today)
   return (
     <Main>
       <Breadcrumb steps={[back, { label: name }]} />

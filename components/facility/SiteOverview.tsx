@@ -22,7 +22,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
         title={site.name}
         aside={
           <>
-            <span>{stampInWords(site.now)}</span>
+            <span>{stampInWords(site.now, site.now.validFrom)}</span>
             {site.next ? <span>{nextInWords(site.next)}</span> : null}
             <TextLink href={paths.facilityRecord('sites', site.slug)} aria-label={`Change ${site.name}`}>
               Change

@@ -6,9 +6,10 @@ type Stamp = Pick<RecordVersion<unknown>, 'recordVersion' | 'validFrom' | 'saved
 /** Who wrote a version; nobody did what was there from the beginning. */
 export const writtenBy = ({ savedBy }: Stamp): string => savedBy ?? ABSENT
 
-/** `record 3, since 1 March 2027, by Maud Ferrisay` */
-export const stampInWords = (stamp: Stamp): string =>
-  `record ${stamp.recordVersion}, since ${formatCalendarDate(stamp.validFrom)}` +
+/** `record 3, since 1 March 2027, by Maud Ferrisay`; one still to come is `from` its first evening. */
+export const stampInWords = (stamp: Stamp, today: string): string =>
+  `record ${stamp.recordVersion}, ${stamp.validFrom > today ? 'from' : 'since'} ` +
+  formatCalendarDate(stamp.validFrom) +
   (stamp.savedBy ? `, by ${stamp.savedBy}` : '')
 
 /** `record 4 from 1 July 2027` */

@@ -91,23 +91,33 @@ function together(value: Fields, ctx: z.RefinementCtx): void {
     say('throughput', 'No light comes through: every efficiency is 0.')
 }
 
-/** A new version of a mode's record: text as typed in, facts out. What the other kind needs is let go. */
-export const modeRecordSchema = fields.superRefine(together).transform((value) => {
+const record = fields.superRefine(together).transform((value) => {
   const { slug, over, validFrom, acquisitionS, readoutS, ditherS, calibrationFraction, ...rest } = value
-  const isSlit = rest.kind === 'long-slit'
   return {
     slug,
     over,
     validFrom,
     facts: {
       ...rest,
-      band: isSlit ? null : rest.band,
-      dispersionAPerPixel: isSlit ? rest.dispersionAPerPixel : null,
-      slitWidthArcsec: isSlit ? rest.slitWidthArcsec : null,
-      resolvingPower: isSlit ? rest.resolvingPower : null,
+      band: rest.band === '' ? null : rest.band,
       overheads: { acquisitionS, readoutS, ditherS, calibrationFraction },
     },
   }
 })
 
-export type ModeForm = z.input<typeof modeRecordSchema>
+export type ModeForm = z.input<typeof fields>
+
+const slitOnly = { dispersionAPerPixel: '', slitWidthArcsec: '', resolvingPower: '' }
+
+/** What the other kind needs does not show in the form: whatever was typed there is let go. */
+function ownFields(given: unknown): unknown {
+  if (typeof given !== 'object' || given === null || !('kind' in given)) return given
+  if (given.kind === 'imaging') return { ...given, ...slitOnly }
+  return given.kind === 'long-slit' ? { ...given, band: '' } : given
+}
+
+/** A new version of a mode's record: text as typed in, facts out. */
+export const modeRecordSchema = z.preprocess(ownFields, record) as z.ZodType<
+  z.output<typeof record>,
+  ModeForm
+>

@@ -85,12 +85,16 @@ describe('a mode’s record', () => {
   })
 
   it('lets go what an image does not need', () => {
-    const { facts } = modeRecordSchema.parse(typed({ kind: 'imaging', band: 'r' }))
+    const { facts } = modeRecordSchema.parse(typed({ kind: 'imaging', band: 'r', resolvingPower: 'wide' }))
     expect(facts).toMatchObject({
       band: 'r',
       dispersionAPerPixel: null,
       slitWidthArcsec: null,
       resolvingPower: null,
+    })
+    expect(modeRecordSchema.parse(typed({ band: 'Q' })).facts).toMatchObject({
+      band: null,
+      resolvingPower: 1400,
     })
   })
 })
