@@ -13,11 +13,11 @@ const choices = (Object.entries(columnNames) as [TargetColumn, string][]).toSort
 /** Every column of a file and what it was taken for, open to be taken for something else. */
 export function ImportColumns({ file, incoming }: { file: ReadFile; incoming: Import }) {
   return (
-    <div className="mt-4 max-h-80 overflow-y-auto">
+    <div className="mt-4 max-h-96 overflow-y-auto">
       <TableFrame caption={`Columns of ${file.name}`} phone="cards">
         <thead role="rowgroup">
           <tr role="row">
-            {['Column', 'First cell', 'Taken for'].map((head) => (
+            {['Column', 'First cell', 'Read as'].map((head) => (
               <th key={head} role="columnheader" scope="col">
                 {head}
               </th>
@@ -33,10 +33,10 @@ export function ImportColumns({ file, incoming }: { file: ReadFile; incoming: Im
               <td role="cell" data-head="First cell">
                 <span className="block max-w-48 truncate">{sample || 'empty'}</span>
               </td>
-              <td role="cell" data-head="Taken for">
+              <td role="cell" data-head="Read as">
                 <div>
                   <select
-                    aria-label={`What ${name || `column ${index + 1}`} is taken for`}
+                    aria-label={`What ${name || `column ${index + 1}`} is read as`}
                     value={taken ?? ''}
                     onChange={(event) =>
                       incoming.takeAs(index, (event.target.value || null) as TargetColumn | null)

@@ -4,6 +4,7 @@ import { useId, useRef, useState } from 'react'
 import { Button } from '@/components/ui/Button'
 import { classNames } from '@/components/ui/classNames'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
+import { ImportColumns } from './ImportColumns'
 import { ImportPreview } from './ImportPreview'
 import type { TargetActions } from './targetActions'
 import { useImport } from './useImport'
@@ -116,6 +117,7 @@ export function ImportPanel({ contents, importRows }: ImportPanelProps) {
             {incoming.problem}
           </p>
         ) : null}
+        {incoming.file ? <ImportColumns file={incoming.file} incoming={incoming} /> : null}
       </div>
       <div className="p-6 max-lg:border-t max-lg:border-rule max-sm:p-4">
         {incoming.file ? (

@@ -7,7 +7,6 @@ import { showToast } from '@/components/ui/showToast'
 import { mostTargets } from '@/lib/domain/targets/rules'
 import { countInWords, formatList, formatNumber, formatUtcClock } from '@/lib/format'
 import { cellNames } from './cellNames'
-import { ImportColumns } from './ImportColumns'
 import { ImportRows } from './ImportRows'
 import type { TargetActions } from './targetActions'
 import type { Import, ReadFile } from './useImport'
@@ -68,7 +67,7 @@ export function ImportPreview({ file, incoming, reference, others, importRows }:
         {present > 0 ? (
           <>
             <dt className="text-right font-semibold">{present}</dt>
-            <dd className="m-0">here already, the same to the last digit</dd>
+            <dd className="m-0">here already, position, redshift and magnitude the same to the last digit</dd>
           </>
         ) : null}
         {[...wrong, ...clashes].slice(0, 4).map(({ number, row, errors }) => {
@@ -96,7 +95,6 @@ export function ImportPreview({ file, incoming, reference, others, importRows }:
           {`A proposal holds at most ${mostTargets} targets; with these ${formatNumber(file.rows.length, 0)} rows it would hold ${formatNumber(fresh + bad + others, 0)}.`}
         </p>
       ) : null}
-      <ImportColumns file={file} incoming={incoming} />
       <div className="mt-4 flex flex-wrap items-center gap-4">
         {bad > 0 ? (
           <Button size="small" look="secondary" onClick={() => setShowsRows(true)}>

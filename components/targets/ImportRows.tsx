@@ -46,16 +46,18 @@ export function ImportRows({ file, incoming }: { file: ReadFile; incoming: Impor
               </th>
               {cells.map((cell) => (
                 <td key={cell} role="cell" data-head={cellNames[cell]}>
-                  <input
-                    value={row[cell]}
-                    aria-label={`${cellNames[cell]} of row ${number}`}
-                    aria-invalid={errors[cell] ? true : undefined}
-                    onChange={(event) => incoming.change(number, cell, event.target.value)}
-                    className={cellClasses({ wrong: Boolean(errors[cell]) })}
-                  />
-                  {errors[cell] ? (
-                    <span className="block text-caption text-not-feasible">{errors[cell]}</span>
-                  ) : null}
+                  <div>
+                    <input
+                      value={row[cell]}
+                      aria-label={`${cellNames[cell]} of row ${number}`}
+                      aria-invalid={errors[cell] ? true : undefined}
+                      onChange={(event) => incoming.change(number, cell, event.target.value)}
+                      className={cellClasses({ wrong: Boolean(errors[cell]) })}
+                    />
+                    {errors[cell] ? (
+                      <span className="block text-caption text-not-feasible">{errors[cell]}</span>
+                    ) : null}
+                  </div>
                 </td>
               ))}
               <td role="cell" data-head="Standing" className="text-muted">

@@ -31,7 +31,7 @@ const sample = (name: string) => readFileSync(`tests/reference/targets/${name}`,
 it('shows what each column was taken for before anything is kept', async () => {
   const { user, importRows } = show()
   await choose(user, 'told.vot', sample('told-1.4.vot'))
-  expect(chosen(screen.getByLabelText('What c2 is taken for'))).toBe('Right ascension')
+  expect(chosen(screen.getByLabelText('What c2 is read as'))).toBe('Right ascension')
   expect(screen.getByText('rad, turned into deg')).toBeTruthy()
   expect(screen.getByText(/nine columns taken, none left out/)).toBeTruthy()
   expect(importRows).not.toHaveBeenCalled()
@@ -44,9 +44,9 @@ it('takes a column for something else, and leaves out the one that was it', asyn
   await choose(user, 'list.csv', 'Galaxy,z,zfit,colour\nA,0.1,0.2,red\nB,0.3,0.4,blue\n')
   expect(screen.getByText(/left out: Galaxy, zfit and colour/)).toBeTruthy()
   expect(screen.queryByRole('button', { name: /^Keep/ })).toBeNull()
-  await user.selectOptions(screen.getByLabelText('What Galaxy is taken for'), 'Name')
-  await user.selectOptions(screen.getByLabelText('What zfit is taken for'), 'Redshift')
-  expect(chosen(screen.getByLabelText('What z is taken for'))).toBe('left out')
+  await user.selectOptions(screen.getByLabelText('What Galaxy is read as'), 'Name')
+  await user.selectOptions(screen.getByLabelText('What zfit is read as'), 'Redshift')
+  expect(chosen(screen.getByLabelText('What z is read as'))).toBe('left out')
   await user.click(screen.getByRole('button', { name: 'Keep two targets' }))
   expect(importRows.mock.calls[0]?.[0].rows.map(({ name, redshift }) => [name, redshift])).toEqual([
     ['A', '0.2'],
