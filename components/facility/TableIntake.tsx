@@ -1,6 +1,7 @@
 'use client'
 
 import { useId, useRef, useState } from 'react'
+import { decodeText } from '@/components/targets/decodeText'
 import { Button } from '@/components/ui/Button'
 import { classNames } from '@/components/ui/classNames'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
@@ -36,7 +37,7 @@ export function TableIntake({ kind, before, onTake, onLeave }: TableIntakeProps)
     if (!file) return
     if (file.size === 0) refuse(file.name, 'It is empty.')
     else if (file.size > largestBytes) refuse(file.name, 'It is larger than 2 MB.')
-    else setIncoming({ name: file.name, read: readTable(await file.text(), kind) })
+    else setIncoming({ name: file.name, read: readTable(decodeText(await file.arrayBuffer()), kind) })
   }
   const readPasted = () => setIncoming({ name: 'Pasted rows', read: readTable(pasted, kind) })
 

@@ -44,11 +44,12 @@ async function readPasted(user: ReturnType<typeof userEvent.setup>, text: string
 it('shows what a file holds, row by row, and takes nothing that is wrong', async () => {
   const { save, user } = show()
   await user.click(screen.getByRole('button', { name: 'Take it from a file' }))
-  const text = 'wavelength (nm);efficiency\n560;0,2\n550;0,3\n980;1,4'
-  // jsdom's files have no text().
-  const file = Object.assign(new File([text], 'measured.csv', { type: 'text/csv' }), {
-    text: async () => text,
-  })
+  // As an old spreadsheet writes it: the µ is one byte of the Windows code page.
+  const bytes = Uint8Array.from('wavelength (\u00b5m);efficiency\n0,56;0,2\n0,55;0,3\n0,98;1,4', (c) =>
+    c.charCodeAt(0),
+  )
+  // jsdom's files have no arrayBuffer().
+  const file = Object.assign(new File([bytes], 'measured.csv'), { arrayBuffer: async () => bytes.buffer })
   await user.upload(screen.getByLabelText('File of the table'), file)
   const holds = await screen.findByRole('region', { name: 'What measured.csv holds' })
   expect(holds.textContent).toContain('three rows read, not taken yet; two rows to mend')
