@@ -4,8 +4,8 @@ import { useId, useState } from 'react'
 import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { Panel } from '@/components/ui/Panel'
-import type { SuggestedPairs } from '@/lib/domain/assignments/suggestForPanel'
-import { countInWords, formatList } from '@/lib/format'
+import { suggestionWords, type SuggestedPairs } from '@/lib/domain/assignments/suggestionWords'
+import { countInWords } from '@/lib/format'
 
 export interface SuggestBarProps {
   quorum: number
@@ -21,18 +21,16 @@ export function SuggestBar({ quorum, suggestion, busy, onSuggest, onAssign, onLe
   const id = useId()
   const [each, setEach] = useState(String(quorum))
   if (suggestion) {
-    const { pairs, short } = suggestion
+    const { pairs } = suggestion
     return (
       <div className="mt-6">
         <Panel bar="accent" title="Suggested, not assigned yet" aside="dashed in the table">
           <p className="m-0 max-w-prose text-table">
             {pairs.length > 0
-              ? `${countInWords(pairs.length, 'assignment', 'assignments', true)}, balanced by pages, none where there is an interest. Each reviewer gets one letter.`
+              ? `${countInWords(pairs.length, 'assignment', 'assignments', true)}, none where there is an interest. Each reviewer gets one letter.`
               : 'Nothing is missing: every proposal has the readers asked for, or nobody is left who may read it.'}
-            {short.length > 0
-              ? ` Too few may read ${formatList(short.map((one) => `${one.reviewNumber} (${one.lacking} short)`))}.`
-              : ''}
           </p>
+          <p className="mt-2 mb-0 max-w-prose text-table">{suggestionWords(suggestion)}</p>
           <div className="mt-4 flex flex-wrap items-center gap-5">
             {pairs.length > 0 ? (
               <Button busy={busy === 'assign'} busyWord="Assigning" onClick={() => onAssign(pairs)}>

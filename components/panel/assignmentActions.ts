@@ -1,5 +1,6 @@
 import type { ActionResult } from '@/lib/actions/result'
 import type { Seat } from '@/lib/domain/assignments/schema'
+import type { SuggestedPairs } from '@/lib/domain/assignments/suggestionWords'
 
 type Pair = { proposalId: number; personId: number; seat: Seat }
 
@@ -15,8 +16,5 @@ export interface AssignmentActions {
     personId: string
     reason: string
   }) => Promise<ActionResult<{ assignmentId: number }>>
-  suggest: (input: {
-    panelId: number
-    each: string
-  }) => Promise<ActionResult<{ pairs: Pair[]; short: { reviewNumber: string; lacking: number }[] }>>
+  suggest: (input: { panelId: number; each: string }) => Promise<ActionResult<SuggestedPairs>>
 }

@@ -85,7 +85,8 @@ export async function reviewCall(
   await startReview(chair, { callId: call.id })
   for (const member of panel.slice(1))
     await declareInterests(await story.as(member.name), { callSlug: slug, names: [], wentThrough: true })
-  const { pairs } = await suggestForPanel(chair, { panelId: call.panelId, each: options.readers })
+  // Dealt out without the solver: the marks below are drawn in the order of these pairs.
+  const { pairs } = await suggestForPanel(chair, { panelId: call.panelId, each: options.readers }, null)
   await assignReviewers(chair, { panelId: call.panelId, pairs })
   await story.at(later(call.dates.closes_at, 15))
   await assessCall(story, chance, call, options.finished < 1 ? 0.8 : 1)

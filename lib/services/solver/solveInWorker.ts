@@ -1,4 +1,5 @@
 import { join } from 'node:path'
+import { pathToFileURL } from 'node:url'
 import { Worker } from 'node:worker_threads'
 import type { Answer, Programme, Solve, SolveLimits } from '@/lib/panel/solver/types'
 
@@ -18,7 +19,9 @@ let idle: { worker: Worker; timer: NodeJS.Timeout } | null = null
 
 /** Solves in a thread, one programme at a time: a solver fills a processor, and pages need the others. */
 export const solveInWorker: Solve = (programme, limits) => {
-  const answer = last.then(() => solveNow(programme, limits))
+  const answer = last
+    .then(() => solveNow(programme, limits))
+    .catch((error: Error) => none('failed', `The solver could not be run: ${error.message}`))
   last = answer
   return answer
 }
@@ -32,11 +35,9 @@ function takeWorker(): Worker {
     idle = null
     return worker
   }
-  return new Worker(
-    // Read from the tree, not from the bundle, which does not carry the WebAssembly beside it.
-    /* turbopackIgnore: true */ join(process.cwd(), 'lib', 'services', 'solver', 'highsWorker.mjs'),
-    { execArgv: [] },
-  )
+  const file = join(process.cwd(), 'lib', 'services', 'solver', 'highsWorker.mjs')
+  // Imported from the tree by a line of its own: a bundler would take the file along without the WebAssembly beside it.
+  return new Worker(`import(${JSON.stringify(pathToFileURL(file).href)})`, { eval: true, execArgv: [] })
 }
 
 function keepWorker(worker: Worker): void {

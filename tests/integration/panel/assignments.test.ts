@@ -153,13 +153,27 @@ describe('taking off, seats, replacing', () => {
 
 it('a suggestion never pairs an interest, and writes nothing', async () => {
   await bar(call.reviewers[0], one)
-  const { pairs, short } = await suggestForPanel(call.as(call.chair), { panelId: call.panelId, each: 3 })
+  const { pairs, short, best } = await suggestForPanel(call.as(call.chair), {
+    panelId: call.panelId,
+    each: 3,
+  })
+  expect(best).toMatchObject({ worst: { value: 3, bound: 3 }, whyNotLinked: null })
   expect(pairs).toHaveLength(5)
   expect(pairs.filter((p) => p.proposalId === one.id && p.personId === call.reviewers[0].personId)).toEqual(
     [],
   )
   expect(short).toEqual([{ reviewNumber: one.reviewNumber, lacking: 1 }])
   expect(await db()('assignments').where({ panel_id: call.panelId })).toEqual([])
+})
+
+it('a suggestion is dealt out, and says so, when the solver has no answer', async () => {
+  const { pairs, best } = await suggestForPanel(
+    call.as(call.chair),
+    { panelId: call.panelId, each: 2 },
+    async () => ({ status: 'unfinished', values: null, why: 'No answer was found in 30 seconds.' }),
+  )
+  expect(pairs).toHaveLength(4)
+  expect(best).toEqual({ why: 'No answer was found in 30 seconds.' })
 })
 
 describe('the review', () => {

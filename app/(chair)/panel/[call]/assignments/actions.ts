@@ -41,6 +41,6 @@ export const replaceReviewerAction = defineAction({
 export const suggestAction = defineAction({
   name: 'suggestAssignments',
   schema: suggestSchema,
-  run: suggestForPanel,
+  run: (ctx, input) => suggestForPanel(ctx, input),
   limit: { points: 60, seconds: 60 },
 })
