@@ -22,22 +22,19 @@ function sectionsOf(lines: readonly string[]): Map<string, string[]> {
   return sections
 }
 
+const indent = (line: string) => line.length - line.trimStart().length
+
 /** Lines of each item of a list, without its dash and its indentation. */
 function itemsOf(lines: readonly string[]): string[][] {
   const items: string[][] = []
+  const outermost = indent(lines[0] ?? '')
   for (const line of lines) {
-    const begun = /^\s*- (.*)$/.exec(line)
-    if (
-      begun &&
-      (items.length === 0 || (/^- /.test(line.trimStart()) && indent(line) <= indent(lines[0] ?? '')))
-    )
-      items.push([begun[1] ?? ''])
-    else items.at(-1)?.push(line.slice(indent(lines[0] ?? '') + 2))
+    if (indent(line) === outermost && line.trimStart().startsWith('- '))
+      items.push([line.slice(outermost + 2)])
+    else items.at(-1)?.push(line.slice(outermost + 2))
   }
   return items
 }
-
-const indent = (line: string) => line.length - line.trimStart().length
 
 function columnOf(lines: readonly string[]): TableColumn {
   const entries = yamlEntries(lines)

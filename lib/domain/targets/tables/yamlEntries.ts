@@ -43,20 +43,25 @@ const folded = (lines: readonly string[]) =>
       whole.endsWith('\\') ? whole.slice(0, -1) + line.replace(/^\\ /, ' ') : `${whole} ${line}`,
     )
 
+/** Lines of each key of a mapping with one key a line. */
+function entryLines(lines: readonly string[]): string[][] {
+  const entries: string[][] = []
+  for (const line of lines) {
+    if (/^\w+:/.test(line)) entries.push([line])
+    else entries.at(-1)?.push(line)
+  }
+  return entries
+}
+
 /**
  * Keys and written values of one mapping, in braces or one key a line. It reads what writers of ECSV put in a column's
  * entry; a value that is a mapping or a list itself stays as it is written.
  */
 export function yamlEntries(lines: readonly string[]): Map<string, string> {
   const whole = folded(lines).trim()
-  if (whole.startsWith('{')) {
-    const inside = whole.slice(1, whole.lastIndexOf('}'))
-    return new Map(pieces(inside).flatMap((piece) => [pair(piece) ?? []].filter((one) => one.length === 2)))
-  }
-  const groups: string[][] = []
-  for (const line of lines) {
-    if (/^\w+:/.test(line)) groups.push([line])
-    else groups.at(-1)?.push(line)
-  }
-  return new Map(groups.flatMap((group) => [pair(folded(group)) ?? []].filter((one) => one.length === 2)))
+  const written = whole.startsWith('{')
+    ? pieces(whole.slice(1, whole.lastIndexOf('}')))
+    : entryLines(lines).map(folded)
+  const pairs = written.map(pair).filter((one) => one !== null)
+  return new Map(pairs)
 }
