@@ -9,6 +9,8 @@ export interface OpenedDesk extends AssignmentDesk {
   /** Whether the pairs are few enough for the worst-served proposal to be settled in whole readers. */
   isSmall: boolean
   relativeGap: number
+  /** Whether all candidates have one affinity. */
+  areAlike: boolean
   /** What no assignment can exceed, loads or not: each proposal with its best readers. */
   bestWorst: number
   bestSum: number
@@ -41,7 +43,7 @@ export function assignmentDesk(input: OptimalInput): OpenedDesk {
     const gained = own.slice(0, wanted).reduce((total, one) => total + one, 0)
     return { lacking, total: gained + (standingAffinity.get(proposal.id) ?? 0) }
   })
-  const areEqual = candidates.every((pair) => pair.affinity === candidates[0]?.affinity)
+  const areAlike = candidates.every((pair) => pair.affinity === candidates[0]?.affinity)
   const isSmall = candidates.length <= SMALL_PAIRS
   return {
     demands,
@@ -51,12 +53,13 @@ export function assignmentDesk(input: OptimalInput): OpenedDesk {
     standingPages,
     leastPages: Math.ceil(meanPages - tolerancePages),
     mostPages: Math.floor(meanPages + tolerancePages),
-    tieWeight: areEqual ? 1e-3 : isSmall ? 1e-6 : 1e-4,
+    tieWeight: areAlike ? 1e-3 : isSmall ? 1e-6 : 1e-4,
     // Ties alone are no reason to go on.
-    relativeGap: isSmall ? 0 : areEqual ? 1e-3 : 1e-4,
+    relativeGap: isSmall ? 0 : areAlike ? 1e-3 : 1e-4,
     meanPages,
     tolerancePages,
     isSmall,
+    areAlike,
     bestWorst: Math.min(...best.filter(({ lacking }) => lacking === 0).map(({ total }) => total)),
     bestSum: best.reduce((sum, { total }) => sum + total, 0),
   }

@@ -1,6 +1,7 @@
 import type { Solve } from '../solver/types'
 import type { OpenedDesk } from './assignmentDesk'
 import { assignmentProgramme } from './assignmentProgramme'
+import { dealtOut } from './dealtOut'
 import { describeOutcome, type Outcome } from './describeOutcome'
 import type { OptimalInput } from './optimalTypes'
 
@@ -25,6 +26,8 @@ export async function solveSum(
   question: { floor: number; mostOutside: number; cuts: readonly ReadonlySet<number>[]; seconds: number },
 ): Promise<{ outcome: Outcome; sumBound: number } | { why: string }> {
   const programme = assignmentProgramme(desk, { ask: 'sum', ...question })
+  // Where only loads matter, branch and bound finds them late and dealing out finds them at once.
+  if (desk.areAlike && question.cuts.length === 0) programme.start = dealtOut(desk)
   const answer = await solve(programme, {
     seconds: question.seconds,
     relativeGap: desk.relativeGap,

@@ -14,6 +14,8 @@ export interface Programme {
   starts: Int32Array
   indices: Int32Array
   values: Float64Array
+  /** A point to start from, one value a column; it need not meet every condition. */
+  start?: Float64Array
 }
 
 export interface SolveLimits {

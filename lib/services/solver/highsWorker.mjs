@@ -13,6 +13,7 @@ parentPort?.on('message', ({ programme, seconds, relativeGap }) => {
       mip_abs_gap: 1e-9,
       random_seed: 1,
     })
+    if (programme.start) model.setSolution({ colValue: programme.start })
     model.run()
     parentPort?.postMessage(answerOf(highs, model, programme, seconds))
   } finally {
