@@ -157,7 +157,7 @@ it('says why reviewers cannot be linked', async () => {
 it('names what lacks readers and who reads more than the range', async () => {
   const proposals = range(4).map((id) => ({ id, pages: 10, barred: new Set(id === 4 ? [1, 2, 3] : [2, 3]) }))
   const input = { proposals, reviewers: range(3), standing: [], each: 2, affinity: () => 1, seconds: 20 }
-  const answer = await solved(input)
+  const answer = await solved({ ...input, tolerancePages: 5 })
   expect(answer.short).toEqual([
     { proposal: 1, lacking: 1 },
     { proposal: 2, lacking: 1 },
@@ -170,6 +170,8 @@ it('names what lacks readers and who reads more than the range', async () => {
     { reviewer: 2, pages: 0, byPages: 5 },
     { reviewer: 3, pages: 0, byPages: 5 },
   ])
+  // Unless told, the range is as wide as the longest proposal: ten pages either way.
+  expect((await solved(input)).outside).toEqual([{ reviewer: 1, pages: 30, byPages: 10 }])
 })
 
 it('passes on why the solver has no answer', async () => {

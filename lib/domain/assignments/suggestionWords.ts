@@ -36,7 +36,8 @@ export function suggestionWords({ loads, best, short }: SuggestedPairs): string 
   else {
     const { meanPages, tolerancePages, worst, sum, readers, outside, whyNotLinked } = best
     if (loads) parts.push(`wanted ${formatNumber(meanPages, 1)} within ${tolerancePages}`)
-    if (worst.bound > 0)
+    // Where every pair is as good, nobody is served worse.
+    if (worst.bound > 0 && worst.value < readers)
       parts.push(`the proposal served worst has an affinity of ${formatNumber(worst.value, 2)} of ${readers}`)
     const gap = Math.max(gapOf(worst), gapOf(sum))
     parts.push(

@@ -37,7 +37,8 @@ export function assignmentDesk(input: OptimalInput): OpenedDesk {
   const added = demands.reduce((total, { wanted, proposal }) => total + wanted * proposal.pages, 0)
   const meanPages = (held + added) / Math.max(1, reviewers.length)
   const longest = Math.max(0, ...input.proposals.map(({ pages }) => pages))
-  const tolerancePages = input.tolerancePages ?? Math.ceil(longest / 2)
+  // Where all are as long, whole proposals cannot come nearer to the mean than one of them.
+  const tolerancePages = input.tolerancePages ?? longest
   const best = demands.map(({ proposal, free, wanted, lacking }) => {
     const own = free.map((reviewer) => affinity(proposal.id, reviewer)).sort((a, b) => b - a)
     const gained = own.slice(0, wanted).reduce((total, one) => total + one, 0)

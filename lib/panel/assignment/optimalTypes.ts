@@ -9,7 +9,7 @@ export interface OptimalInput {
   each: number
   /** How well a reviewer knows the subject of a proposal, 0 to 1. */
   affinity: (proposal: number, reviewer: number) => number
-  /** Whole pages by which a load may differ from the mean; half of the longest proposal unless told. */
+  /** Whole pages by which a load may differ from the mean; the longest proposal unless told. */
   tolerancePages?: number
   /** Time for all solving together. */
   seconds: number
