@@ -14,6 +14,8 @@ export interface ReportSeasonProps {
   site: SiteRecord
   view: SeasonView
   maxAirmass: number
+  /** Why it is never up, where it is not. */
+  never?: string | null
   fileName: string
 }
 
@@ -37,11 +39,12 @@ function notesOf(view: SeasonView): SeasonNote[] {
 
 /** When a target is up: every night of the season, its twilight, its Moon and the target's window. */
 export function ReportSeason(props: ReportSeasonProps) {
-  const { title, name, site, view, maxAirmass, fileName } = props
+  const { title, name, site, view, maxAirmass, never, fileName } = props
   const { grid, phases } = view
   const first = grid.nights[0]?.night.date ?? ''
   const up = view.byNight.filter((hours) => hours > 0).length
-  const label = `${name} is up in the dark above airmass ${maxAirmass} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
+  const counted = `${name} is up in the dark above airmass ${maxAirmass} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
+  const label = never ?? counted
   return (
     <section>
       <SectionHeading

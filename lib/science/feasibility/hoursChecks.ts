@@ -2,7 +2,9 @@ import type { MoonClass } from '../exposure'
 import type { TargetVisibility } from '../sky'
 import { judgeAtLeast, judgeAtMost } from './judge'
 import { sayHours, sayNumber, sayPercent } from './saying'
-import type { Check, ReportObservation } from './types'
+import { neverUp } from './neverUp'
+import type { SeasonVisibility } from './seasonVisibility'
+import type { Check, ReportInput, ReportObservation } from './types'
 
 const moonWords: Record<MoonClass, string> = {
   dark: 'with the Moon down or a quarter lit at most',
@@ -15,10 +17,16 @@ function nightsUp(visible: TargetVisibility): number {
 }
 
 /** Is the target up in the dark for at least twice the hours asked? */
-export function checkUp(visible: TargetVisibility, observation: ReportObservation, nights: number): Check {
+export function checkUp({ visible, nights, isEverDark }: SeasonVisibility, input: ReportInput): Check {
+  const { site, target, observation } = input
   const asked = observation.askedS / 3600
   const verdict = judgeAtLeast(visible.totalHours, 2 * asked, Math.max(asked, 1e-9))
   const up = nightsUp(visible)
+  const { raDeg, decDeg } = target
+  const never =
+    up === 0 && raDeg !== null && decDeg !== null
+      ? neverUp({ site, raDeg, decDeg, maxAirmass: observation.maxAirmass, isEverDark })
+      : null
   return {
     id: 'up-in-the-dark',
     name: 'Up in the dark',
@@ -27,10 +35,9 @@ export function checkUp(visible: TargetVisibility, observation: ReportObservatio
     failsAt: sayHours(observation.askedS),
     verdict,
     why:
-      up === 0
-        ? `Never above airmass ${observation.maxAirmass} in the dark in this season.`
-        : `Above airmass ${observation.maxAirmass} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
-    fix: verdict === 'feasible' ? null : 'Accept a larger airmass, or ask in another season.',
+      never?.why ??
+      `Above airmass ${observation.maxAirmass} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
+    fix: verdict === 'feasible' ? null : (never?.fix ?? 'Accept a larger airmass, or ask in another season.'),
   }
 }
 

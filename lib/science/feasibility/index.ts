@@ -15,5 +15,6 @@ export type {
   Season,
   Verdict,
 } from './types'
+export { neverUp, type NeverUpInput } from './neverUp'
 export { feasibilityEngineVersion } from './version'
 export { moonClassLimits } from './moonClass'

@@ -11,6 +11,7 @@ import { askedOf } from '@/lib/domain/tools/askedOf'
 import { positionOf } from '@/lib/domain/tools/positionOf'
 import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
 import { numberOf } from '@/lib/domain/tools/texts'
+import { whyNeverUp } from '@/lib/domain/tools/whyNeverUp'
 import { seasonView } from '@/lib/domain/observations/rules'
 import { moonClassLimits } from '@/lib/science/feasibility'
 
@@ -42,6 +43,14 @@ export default async function SeasonPage({
   }
   const { from, to } = asked
   const season = view && seasonView(view.site, { from, to, maxAirmass, moon }, positionOf(asked))
+  const never =
+    view && season?.totalHours === 0
+      ? whyNeverUp(view.site, asked, {
+          maxAirmass,
+          isEverDark: season.grid.nights.some(({ night }) => night.darkHours > 0),
+          isMoonLimited: asked.moon !== 'any' || moon.minSeparationDeg > 0,
+        })
+      : null
   const isOfCall = from === view?.call.seasonFrom && to === view.call.seasonTo
   return (
     <Main>
@@ -62,6 +71,7 @@ export default async function SeasonPage({
             site={view.site}
             view={season}
             maxAirmass={maxAirmass}
+            never={never}
             fileName="season"
           />
         ) : (
