@@ -44,7 +44,8 @@ export function observationReport(input: ReportInput): ObservationReport {
   const season = seasonVisibility(input)
   if (season) {
     checks.push(checkUp(season, input))
-    checks.push(checkUpWithMoon(season.usableHours, observation))
+    // The Moon does not matter to what is never up.
+    if (season.visible.totalHours > 0) checks.push(checkUpWithMoon(season.usableHours, observation))
   }
 
   const plan = planExposure(input, observedA)
