@@ -15,6 +15,7 @@ import { paths } from '@/lib/paths'
 import { FacingTable } from './FacingTable'
 import type { SaveAwardAction, TakePlanAction } from './nightsActions'
 import { OfferedHours } from './OfferedHours'
+import { SeasonCellsKey } from './SeasonCellsKey'
 
 export interface NightsBoardProps {
   initial: NightsView
@@ -38,16 +39,17 @@ export function NightsBoard({ initial, save, takePlan }: NightsBoardProps) {
     <>
       <PageTitle
         title="Nights"
-        lead="The ranking laid into the hours on offer, telescope by telescope."
+        lead="The ranking laid into the hours on offer, by half-month, sidereal time and Moon."
         actions={
           view.hasRanking ? <LinkButton href={panelPath('decisions')}>Go on to decisions</LinkButton> : null
         }
       />
       <div className="mt-6 grid gap-x-16 gap-y-8 md:grid-cols-2">
         {view.telescopes.map((telescope) => (
-          <OfferedHours key={telescope.id} telescope={telescope} />
+          <OfferedHours key={telescope.id} telescope={telescope} seasonFrom={view.seasonFrom} />
         ))}
       </div>
+      <SeasonCellsKey />
       {view.hasRanking ? (
         <>
           <section aria-labelledby="by-rank" className="mt-10">
@@ -57,8 +59,9 @@ export function NightsBoard({ initial, save, takePlan }: NightsBoardProps) {
                   By rank, then fill
                 </h2>
                 <p className="m-0 text-table text-muted">
-                  In turn, each takes what it asked, or what is left if that is not less than its least useful
-                  award: half of what it asked. Then those below the line fill what remains.
+                  In turn, each takes what it asked, or as much as its targets can use of what is left, if
+                  that is not less than its least useful award: half of what it asked. Those above keep their
+                  hours and make room where they can. Then those below the line fill what remains.
                 </p>
               </div>
               {canGive ? (

@@ -117,3 +117,12 @@ export async function insertVersionPeople(
     })),
   )
 }
+
+/** The contents of the standing versions of proposals, by proposal. */
+export async function standingContents(
+  db: Database,
+  proposalIds: readonly number[],
+): Promise<Map<number, Snapshot['contents']>> {
+  const rows = await db('proposal_versions').whereIn('proposal_id', proposalIds).whereNull('superseded_at')
+  return new Map(rows.map((row) => [row.proposal_id, thaw(row.snapshot).contents]))
+}

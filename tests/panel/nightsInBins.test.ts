@@ -78,6 +78,11 @@ describe('by rank, in bins', () => {
     expect(hours(plan)).toEqual([[3, 4]])
   })
 
+  it('lays what is given elsewhere first', () => {
+    const asked = [[line(1, [part(4, { 0: 4, 1: 1 })])]]
+    expect(hours(byRankInBins(asked, [bin(4), bin(4, 1)], [line(9, [part(2, { 0: 4 })])]))).toEqual([[1, 3]])
+  })
+
   it('gives two instruments together or not at all, and leaves the time to others', () => {
     const two = [line(1, [part(3, { 0: 3 })]), line(1, [part(3, { 1: 1 })], { instrument: 20 })]
     const plan = byRankInBins([two, [line(2, [part(4, { 0: 4 })])]], [bin(4), bin(4, 1)])
@@ -92,11 +97,11 @@ describe('why not', () => {
       [line(2, [part(4, { 1: 4 })])],
       [line(3, [part(3, { 0: 4 })])],
     ]
-    expect(whyNotInBins(asked, [bin(4), bin(4, 1)], 3)).toEqual({
+    expect(whyNotInBins(asked, [bin(4), bin(4, 1)], [], 3)).toEqual({
       seconds: 3 * h,
       displaced: [{ proposal: 1, instrument: 10, fromSeconds: 4 * h, toSeconds: 0 }],
     })
-    expect(whyNotInBins(asked, [bin(1), bin(4, 1)], 3)).toBeNull()
+    expect(whyNotInBins(asked, [bin(1), bin(4, 1)], [], 3)).toBeNull()
   })
 })
 

@@ -20,9 +20,13 @@ const nightsLine = z.object({
   service: z.enum(['queue', 'visitor']),
   conditions: z.string(),
   suggestedSeconds: z.number(),
-  /** Why the suggestion gives nothing, and the seconds that were left. */
+  /** Why the suggestion gives nothing: the seconds found when its turn came, and who would lose if it came first. */
   whyNot: z
-    .object({ reason: z.enum(['not-possible', 'too-little-left', 'set-aside']), left: z.number() })
+    .object({
+      reason: z.enum(['not-possible', 'not-usable', 'too-little-left', 'set-aside']),
+      left: z.number(),
+      displaces: z.array(z.object({ reviewNumber: z.string(), seconds: z.number() })),
+    })
     .nullable(),
 })
 export type NightsLine = z.output<typeof nightsLine>
@@ -39,10 +43,22 @@ const nightsRow = z.object({
 })
 export type NightsRow = z.output<typeof nightsRow>
 
+/** A piece of a season: half-months counted from its first, two hours of sidereal time, a class of moonlight. */
+const nightsBin = z.object({
+  half: z.number(),
+  siderealFromH: z.number(),
+  moon: z.enum(['dark', 'grey', 'bright']),
+  seconds: z.number(),
+  usedSeconds: z.number(),
+})
+export type NightsBin = z.output<typeof nightsBin>
+
 export const nightsView = z.object({
   panelId: z.number(),
   callNumber: z.number(),
   callSlug: z.string(),
+  /** First evening of the season. */
+  seasonFrom: z.string(),
   phase: z.enum(['planned', 'open', 'closed', 'review', 'ranking', 'decided', 'archived']),
   hasRanking: z.boolean(),
   line: z.number(),
@@ -54,10 +70,8 @@ export const nightsView = z.object({
       offeredSeconds: z.number(),
       givenSeconds: z.number(),
       suggestedSeconds: z.number(),
-      /** Dark time on offer by half-month; `month` is `YYYY-MM`. */
-      halves: z.array(
-        z.object({ month: z.string(), half: z.union([z.literal(1), z.literal(2)]), seconds: z.number() }),
-      ),
+      /** Dark time on offer by sidereal time and moonlight, with what the suggestion lays there. */
+      bins: z.array(nightsBin),
     }),
   ),
 })

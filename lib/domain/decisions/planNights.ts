@@ -1,12 +1,14 @@
-import { givenByTelescope, standingAwards } from '@/db/queries/decisions'
-import { offeredTime } from '@/db/queries/panel'
+import { awardsOutside } from '@/db/queries/awardsOutside'
 import { rankingEntries } from '@/db/queries/rankings'
+import { standingContents } from '@/db/queries/versions'
 import type { RankingsRow } from '@/db/tables'
-import { byRankThenFill } from '@/lib/panel/nights/byRankThenFill'
-import type { NightsPlan } from '@/lib/panel/nights/types'
+import type { BinnedLine, BinnedPlan } from '@/lib/panel/nights/binTypes'
+import { byRankInBins } from '@/lib/panel/nights/byRankInBins'
 import type { ActingContext } from '../context'
+import { binnedLine } from '../nights/binnedLine'
+import { callBins } from '../nights/callBins'
+import type { SeasonBins } from '../nights/seasonBins'
 import type { PanelDesk } from '../panels/openPanel'
-import { offeredByTelescope } from '../rankings/offered'
 import { visibleLine, visibleOrder } from '../rankings/order'
 import { wantedLines, type WantedLine } from './wantedLines'
 
@@ -15,12 +17,17 @@ export interface PlannedNights {
   line: number
   setAside: ReadonlySet<number>
   wanted: WantedLine[]
-  plan: NightsPlan
+  season: SeasonBins
+  /** In ranking order, without what is set aside. */
+  asked: BinnedLine[][]
+  /** Given by other panels, or to proposals that the asker may not see. */
+  standing: BinnedLine[]
+  plan: BinnedPlan
 }
 
 /**
- * The suggestion for the nights: by rank, then fill, over what the asker may see and what awards they do not see
- * leave free. Another policy can take its place here.
+ * The suggestion for the nights: by rank, then fill, in the bins each can use, over what the asker may see and
+ * what is given elsewhere.
  */
 export async function planNights(
   ctx: Pick<ActingContext, 'db'>,
@@ -34,37 +41,43 @@ export async function planNights(
   const setAside = new Set(
     entries.flatMap((entry) => (entry.set_aside_at === null ? [] : [entry.proposal_id])),
   )
-  const [wanted, blocks, given, own] = await Promise.all([
+  const elsewhere = await awardsOutside(ctx.db, desk.call.id, order)
+  const [wanted, season, contents] = await Promise.all([
     wantedLines(ctx.db, order),
-    offeredTime(ctx.db, desk.call.id),
-    givenByTelescope(ctx.db, desk.call.id),
-    standingAwards(ctx.db, order),
+    callBins(ctx.db, desk.call),
+    standingContents(ctx.db, [...order, ...elsewhere.map(({ proposalId }) => proposalId)]),
   ])
-  const free = offeredByTelescope(blocks)
-  for (const [id, seconds] of free) {
-    const mine = own
-      .filter((line) => line.telescopeId === id && !line.isReserve)
-      .reduce((sum, line) => sum + line.seconds, 0)
-    free.set(id, seconds - ((given.get(id) ?? 0) - mine))
+  const binned = (line: {
+    proposalId: number
+    instrumentId: number
+    telescopeId: number
+    seconds: number
+    least: number
+    possible: boolean
+  }): BinnedLine[] => {
+    const held = contents.get(line.proposalId)
+    const {
+      proposalId: proposal,
+      instrumentId: instrument,
+      telescopeId: telescope,
+      seconds,
+      least,
+      possible,
+    } = line
+    return held
+      ? [binnedLine({ proposal, instrument, telescope, seconds, least, possible }, held, season)]
+      : []
   }
-  const plan = byRankThenFill({
-    asked: order
-      .filter((id) => !setAside.has(id))
-      .map((id) =>
-        wanted
-          .filter((line) => line.proposalId === id)
-          .map((line) => ({
-            proposal: id,
-            instrument: line.instrumentId,
-            telescope: line.telescopeId,
-            seconds: line.wholeSeconds,
-            least: line.leastSeconds,
-            possible: line.possible,
-          })),
-      )
-      .filter((lines) => lines.length > 0),
-    line: visibleLine(full, desk.hidden, ranking.line_after ?? 0),
-    offered: free,
-  })
-  return { order, line: visibleLine(full, desk.hidden, ranking.line_after ?? 0), setAside, wanted, plan }
+  const asked = order
+    .filter((id) => !setAside.has(id))
+    .map((id) =>
+      wanted
+        .filter((line) => line.proposalId === id)
+        .flatMap((line) => binned({ ...line, seconds: line.wholeSeconds, least: line.leastSeconds })),
+    )
+    .filter((lines) => lines.length > 0)
+  const standing = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const line = visibleLine(full, desk.hidden, ranking.line_after ?? 0)
+  const plan = byRankInBins(asked, season.bins, standing)
+  return { order, line, setAside, wanted, season, asked, standing, plan }
 }

@@ -39,7 +39,10 @@ export function takePlan(ctx: ActingContext, input: PanelKeyInput): Promise<{ aw
       action: 'decision.take-plan',
       subject: { kind: 'panel', id: desk.panel.id },
       actingAs: 'chair',
-      after: { policy: 'by rank, then fill', given: plan.given },
+      after: {
+        policy: 'by rank, then fill',
+        given: plan.given.map(({ laid: _, ...line }) => line),
+      },
     })
     return { awarded: new Set(plan.given.map((line) => line.proposal)).size }
   })

@@ -37,14 +37,17 @@ function laidIn(flow: BinFlow, nodes: readonly number[]): Map<number, number> {
  * By rank, then fill, with time counted where it can be used. In turn each proposal takes what it asks, or
  * what its targets find in the bins, where that is not less than its least useful award; what stands higher keeps
  * its hours but not its bins. Exact for this rule: what is not given could not have been given, whatever the
- * bins of those above. A proposal on several instruments is given time on all of them or on none.
+ * bins of those above. A proposal on several instruments is given time on all of them or on none. What `standing`
+ * holds, given elsewhere, is laid first.
  */
 export function byRankInBins(
   asked: readonly (readonly BinnedLine[])[],
   bins: readonly NightBin[],
+  standing: readonly BinnedLine[] = [],
 ): BinnedPlan {
   const offered = bins.map(({ seconds }) => seconds)
   const flow = new BinFlow(offered)
+  for (const line of standing) layLine(flow, line)
   const kept: { line: BinnedLine; nodes: number[]; seconds: number }[] = []
   const notGiven: BinnedNotGiven[] = []
   for (const lines of asked) {

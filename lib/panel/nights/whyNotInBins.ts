@@ -16,12 +16,13 @@ export interface Displaced {
 export function whyNotInBins(
   asked: readonly (readonly BinnedLine[])[],
   bins: readonly NightBin[],
+  standing: readonly BinnedLine[],
   proposal: number,
 ): { seconds: number; displaced: Displaced[] } | null {
   const own = asked.find((lines) => lines[0]?.proposal === proposal)
   if (!own) return null
-  const before = byRankInBins(asked, bins).given
-  const after = byRankInBins([own, ...asked.filter((lines) => lines !== own)], bins).given
+  const before = byRankInBins(asked, bins, standing).given
+  const after = byRankInBins([own, ...asked.filter((lines) => lines !== own)], bins, standing).given
   const secondsIn = (plan: readonly BinnedGiven[], line: BinnedLine): number =>
     plan.find((one) => one.proposal === line.proposal && one.instrument === line.instrument)?.seconds ?? 0
   const seconds = own.reduce((sum, line) => sum + secondsIn(after, line), 0)

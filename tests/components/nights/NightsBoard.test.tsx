@@ -34,7 +34,7 @@ const line = (given: number, suggested: number): NightsLine => ({
   service: 'queue',
   conditions: '',
   suggestedSeconds: suggested * hour,
-  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour },
+  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [] },
 })
 const row = (rank: number, given: number, suggested: number): NightsRow => ({
   proposalId: rank,
@@ -50,6 +50,7 @@ const view = (...rows: NightsRow[]): NightsView => ({
   panelId: 7,
   callNumber: 13,
   callSlug: 'call-13',
+  seasonFrom: '2027-03-01',
   phase: 'ranking',
   hasRanking: true,
   line: 2,
@@ -61,7 +62,7 @@ const view = (...rows: NightsRow[]): NightsView => ({
       offeredSeconds: 34 * hour,
       givenSeconds: rows.reduce((sum, one) => sum + (one.lines[0]?.givenSeconds ?? 0), 0),
       suggestedSeconds: 30 * hour,
-      halves: [{ month: '2027-03', half: 2, seconds: 34 * hour }],
+      bins: [{ half: 1, siderealFromH: 12, moon: 'dark', seconds: 34 * hour, usedSeconds: 30 * hour }],
     },
   ],
 })
