@@ -1,4 +1,6 @@
 import { z } from 'zod'
+import { nightsPolicy } from './policies'
+import { policySummary } from './policySummary'
 
 /** One instrument of a request: what was asked, what stands given, what the suggestion gives. Times in seconds. */
 const nightsLine = z.object({
@@ -61,6 +63,9 @@ export const nightsView = z.object({
   seasonFrom: z.string(),
   phase: z.enum(['planned', 'open', 'closed', 'review', 'ranking', 'decided', 'archived']),
   hasRanking: z.boolean(),
+  /** The policy of the suggestion, and what each would come to. */
+  policy: nightsPolicy,
+  policies: z.array(policySummary),
   line: z.number(),
   rows: z.array(nightsRow),
   telescopes: z.array(

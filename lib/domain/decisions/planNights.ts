@@ -9,6 +9,10 @@ import { binnedLine } from '../nights/binnedLine'
 import { callBins } from '../nights/callBins'
 import type { SeasonBins } from '../nights/seasonBins'
 import type { PanelDesk } from '../panels/openPanel'
+import { meritOf } from './meritOf'
+import { planByMerit } from './planByMerit'
+import { nightsPolicy, type NightsPolicy } from './policies'
+import { summaryOf, type PolicySummary } from './policySummary'
 import { visibleLine, visibleOrder } from '../rankings/order'
 import { wantedLines, type WantedLine } from './wantedLines'
 
@@ -22,17 +26,21 @@ export interface PlannedNights {
   asked: BinnedLine[][]
   /** Given by other panels, or to proposals that the asker may not see. */
   standing: BinnedLine[]
+  policy: NightsPolicy
   plan: BinnedPlan
+  /** Every policy side by side, to choose between. */
+  policies: PolicySummary[]
 }
 
 /**
- * The suggestion for the nights: by rank, then fill, in the bins each can use, over what the asker may see and
- * what is given elsewhere.
+ * The suggestion for the nights by a policy, in the bins each proposal can use, over what the asker may see and
+ * what is given elsewhere. By rank where the other policy finds no answer.
  */
 export async function planNights(
   ctx: Pick<ActingContext, 'db'>,
   desk: PanelDesk,
   ranking: RankingsRow,
+  policy: NightsPolicy = 'rank',
 ): Promise<PlannedNights> {
   const entries = await rankingEntries(ctx.db, ranking.id)
   const full = entries.map((entry) => entry.proposal_id)
@@ -78,6 +86,30 @@ export async function planNights(
     .filter((lines) => lines.length > 0)
   const standing = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
   const line = visibleLine(full, desk.hidden, ranking.line_after ?? 0)
-  const plan = byRankInBins(asked, season.bins, standing)
-  return { order, line, setAside, wanted, season, asked, standing, plan }
+  const above = new Set(order.slice(0, line))
+  const merit = await meritOf(ctx.db, desk)
+  const byRank = byRankInBins(asked, season.bins, standing)
+  const byMerit = await planByMerit({
+    asked,
+    line: asked.filter(([first]) => first && above.has(first.proposal)).length,
+    bins: season.bins,
+    standing,
+    merit,
+  })
+  const hasMerit = !('why' in byMerit)
+  const summarised = { rank: byRank, merit: hasMerit ? byMerit : null }
+  return {
+    order,
+    line,
+    setAside,
+    wanted,
+    season,
+    asked,
+    standing,
+    policy: policy === 'merit' && hasMerit ? 'merit' : 'rank',
+    plan: policy === 'merit' && hasMerit ? byMerit : byRank,
+    policies: nightsPolicy.options.map((name) =>
+      summaryOf(name, summarised[name], { above, merit, why: hasMerit ? null : byMerit.why }),
+    ),
+  }
 }

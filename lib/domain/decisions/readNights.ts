@@ -7,6 +7,7 @@ import { openPanel } from '../panels/openPanel'
 import { callBins } from '../nights/callBins'
 import type { NightsBin, NightsRow, NightsView } from './nightsView'
 import { planNights, type PlannedNights } from './planNights'
+import type { NightsPolicy } from './policies'
 import { whyNotGiven } from './whyNotGiven'
 
 /** The bins of a telescope, with what the suggestion lays there. */
@@ -27,12 +28,12 @@ function binsOf(
 /** Hours on offer and hours given, as their reader may see them. */
 export async function readNights(
   ctx: ActingContext,
-  key: { callSlug: string; panelId?: number },
+  key: { callSlug: string; panelId?: number; policy?: NightsPolicy },
 ): Promise<NightsView> {
   const desk = await openPanel(ctx, key)
   const ranking = await currentRanking(ctx.db, desk.panel.id)
   const blocks = await offeredTime(ctx.db, desk.call.id)
-  const planned = ranking ? await planNights(ctx, desk, ranking) : null
+  const planned = ranking ? await planNights(ctx, desk, ranking, key.policy) : null
   const season = planned?.season ?? (await callBins(ctx.db, desk.call))
   const order = planned?.order ?? []
   const [heads, awards, decisions] = await Promise.all([
@@ -74,6 +75,8 @@ export async function readNights(
     seasonFrom: desk.call.seasonFrom,
     phase: desk.phase,
     hasRanking: ranking !== null,
+    policy: planned?.policy ?? 'rank',
+    policies: planned?.policies ?? [],
     line: planned?.line ?? 0,
     rows,
     telescopes: [...new Set(blocks.map((block) => block.telescopeId))].map((id) => {

@@ -53,6 +53,11 @@ const view = (...rows: NightsRow[]): NightsView => ({
   seasonFrom: '2027-03-01',
   phase: 'ranking',
   hasRanking: true,
+  policy: 'rank',
+  policies: [
+    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, why: null },
+    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, why: null },
+  ],
   line: 2,
   rows,
   telescopes: [
@@ -130,7 +135,9 @@ describe('the nights', () => {
     expect(screen.getByText('12.0 of 20.0')).toBeTruthy()
     await userEvent.click(screen.getByRole('button', { name: 'Take the suggestion over' }))
     await waitFor(() => expect(screen.queryByText('12.0 of 20.0')).toBeNull())
-    expect(fetched.mock.calls.map(([url]) => url)).toEqual(['/api/tables/panel-nights?call=call-13&panel=7'])
+    expect(fetched.mock.calls.map(([url]) => url)).toEqual([
+      '/api/tables/panel-nights?call=call-13&panel=7&policy=rank',
+    ])
     expect(screen.getByRole('link', { name: 'Go on to decisions' }).getAttribute('href')).toBe(
       '/panel/call-13/decisions?panel=7',
     )
@@ -150,6 +157,8 @@ describe('the nights', () => {
       }),
     )
     expect(screen.queryByRole('button', { name: 'Keep these hours' })).toBeNull()
-    expect(fetched.mock.calls.map(([url]) => url)).toEqual(['/api/tables/panel-nights?call=call-13&panel=7'])
+    expect(fetched.mock.calls.map(([url]) => url)).toEqual([
+      '/api/tables/panel-nights?call=call-13&panel=7&policy=rank',
+    ])
   })
 })

@@ -90,9 +90,11 @@ describe('hours', () => {
     })
     expect(whyNot?.left).toBeGreaterThan(0)
     expect(whyNot?.left).toBeLessThan(dark - 100 * h)
-    expect(await takePlan(call.as(call.chair), { panelId: call.panelId })).toEqual({ awarded: 2 })
+    expect(await takePlan(call.as(call.chair), { panelId: call.panelId, policy: 'rank' })).toEqual({
+      awarded: 2,
+    })
     expect((await nights()).telescopes[0]?.givenSeconds).toBe(100 * h)
-    await takePlan(call.as(call.chair), { panelId: call.panelId })
+    await takePlan(call.as(call.chair), { panelId: call.panelId, policy: 'rank' })
     expect((await nights()).telescopes[0]?.givenSeconds).toBe(100 * h)
   })
 
