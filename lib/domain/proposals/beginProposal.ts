@@ -70,6 +70,8 @@ export async function beginProposal(ctx: Context, input: BeginProposalInput): Pr
       role: 'pi',
       access: 'edit',
       isStudent: person.career_stage === 'student',
+      isSupervisor: false,
+      orcid: null,
       position: 1,
       confirmedAt: now,
     })
