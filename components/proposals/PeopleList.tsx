@@ -58,33 +58,33 @@ export function PeopleList({ reference, people, actions, offerLead }: PeopleList
         >
           <div className="min-w-0 [overflow-wrap:anywhere]">
             <Facts person={person} withRights={person.role !== 'pi' && !actions} />
-            {actions ? (
-              <PersonDetails
-                reference={reference}
-                person={person}
-                hasAgreed={person.confirmedAt !== null}
-                describe={actions.describe}
-              />
-            ) : null}
+            <div className="mt-1 flex flex-wrap items-center gap-x-5 gap-y-1 text-table empty:hidden">
+              {actions ? (
+                <PersonDetails
+                  reference={reference}
+                  person={person}
+                  hasAgreed={person.confirmedAt !== null}
+                  describe={actions.describe}
+                />
+              ) : null}
+              {offerLead && person.role !== 'pi' && person.confirmedAt ? (
+                <AskToLead
+                  reference={reference}
+                  person={{ id: person.id, name: person.name }}
+                  offer={offerLead}
+                />
+              ) : null}
+            </div>
           </div>
-          <div className="flex flex-wrap items-start gap-x-3 gap-y-2 text-table">
-            {actions && person.role !== 'pi' ? (
-              <PersonTools
-                reference={reference}
-                person={{ id: person.id, name: person.name, access: person.access }}
-                isFirst={people[index - 1]?.role === 'pi'}
-                isLast={index === last}
-                actions={actions}
-              />
-            ) : null}
-            {offerLead && person.role !== 'pi' && person.confirmedAt ? (
-              <AskToLead
-                reference={reference}
-                person={{ id: person.id, name: person.name }}
-                offer={offerLead}
-              />
-            ) : null}
-          </div>
+          {actions && person.role !== 'pi' ? (
+            <PersonTools
+              reference={reference}
+              person={{ id: person.id, name: person.name, access: person.access }}
+              isFirst={people[index - 1]?.role === 'pi'}
+              isLast={index === last}
+              actions={actions}
+            />
+          ) : null}
         </li>
       ))}
     </ol>

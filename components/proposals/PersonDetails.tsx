@@ -26,7 +26,7 @@ export interface PersonDetailsProps {
 export function PersonDetails(props: PersonDetailsProps) {
   const [isOpen, setIsOpen] = useState(false)
   return (
-    <div className="mt-1 text-table">
+    <>
       <LinkLikeButton
         aria-expanded={isOpen}
         aria-label={`Details of ${props.person.name}`}
@@ -35,7 +35,7 @@ export function PersonDetails(props: PersonDetailsProps) {
         {isOpen ? 'Close' : 'Details'}
       </LinkLikeButton>
       {isOpen ? <DetailsForm {...props} onDone={() => setIsOpen(false)} /> : null}
-    </div>
+    </>
   )
 }
 
@@ -61,7 +61,7 @@ function DetailsForm({
     },
   })
   return (
-    <div className="mt-3 max-w-md">
+    <div className="order-last mt-2 mb-2 w-full max-w-md text-body">
       <ActionForm form={form} label={`Details of ${person.name}`}>
         <TextField name="institute" label="Institute" optional />
         {hasAgreed ? null : (

@@ -45,6 +45,7 @@ export const access = {
     '/proposals/[reference]/sent': investigator,
     '/proposals/[reference]/history': investigator,
     '/proposals/[reference]/outcome': investigator,
+    '/proposals/[reference]/continue': investigator,
     '/assessments': scientist,
     '/assessments/[request]': scientist,
     '/assessments/instruments': scientist,
@@ -113,6 +114,7 @@ export const access = {
   },
   actions: {
     beginProposal: investigator,
+    continueProposal: investigator,
     saveQuestion: investigator,
     saveCosmology: investigator,
     markSectionDone: investigator,

@@ -64,6 +64,8 @@ function sectionWords({ before, after }: EntryValues): string {
 /** The acts an investigator may read about, each in a sentence; what is not listed is not shown. */
 export const entryWords: Readonly<Record<string, Words>> = {
   'proposal.begin': ({ after }) => `Began the proposal ${quoted(textAt(after, 'title') ?? '')}`,
+  'proposal.continue': ({ before }) =>
+    `Carried ${textAt(before, 'reference') ?? 'an earlier proposal'} of call ${numberAt(before, 'call') ?? ''} on`,
   'proposal.question': questionWords,
   'proposal.cosmology': ({ before, after }) => {
     const name = (value: unknown) => {

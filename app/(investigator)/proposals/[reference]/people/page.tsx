@@ -12,6 +12,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { mayLeave } from '@/lib/domain/proposals/policy'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import {
   acceptLeadAction,
@@ -51,6 +52,7 @@ export default async function PeoplePage({ params }: { params: Promise<{ referen
       />
       <div className="mt-6">
         <ReadOnlyNote reason={readOnly} />
+        <CarriedHere reference={reference} section="people" />
         {asked ? (
           <LeadOffer
             reference={reference}

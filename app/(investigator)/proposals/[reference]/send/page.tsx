@@ -17,6 +17,7 @@ import { leftOut, namedOnSending } from '@/lib/domain/proposals/namedOnSending'
 import { declarationFor, leadFor } from '@/lib/domain/submission/sendWords'
 import { readForSending, type ForSending } from '@/lib/domain/submission/readForSending'
 import { reopenProposal } from '@/app/(investigator)/(confirmation)/proposals/[reference]/sent/actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import { sendProposal } from './actions'
 
@@ -50,6 +51,7 @@ export default async function SendPage({ params }: Props) {
       >
         <PageTitle title="Read it through" lead={leadFor(read)} />
         <div className="mt-6">
+          <CarriedHere reference={contents.reference} section="send" />
           <ReadThrough
             reference={contents.reference}
             groups={read.groups}
