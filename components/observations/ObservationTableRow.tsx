@@ -50,6 +50,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
     kept,
     empty: observationRow(kept),
     rowOf: observationRow,
+    keepAs: readOnly === null ? `observation-${contents.reference}-${kept.id}` : null,
     save,
   })
   const { form, commit } = row
