@@ -10,7 +10,6 @@ export interface ClashNotesProps {
 }
 
 function Holder({ clash }: { clash: Clash }) {
-  if (clash.kind === 'here') return <>asked for twice in this proposal.</>
   if (clash.kind === 'awarded')
     return (
       <>
@@ -34,8 +33,7 @@ export function ClashNotes({ contents, clashes }: ClashNotesProps) {
     const mode = contents.modes.find(({ modeId }) => modeId === observation?.modeId)
     return [target?.name, mode?.name].filter(Boolean).join(', ')
   }
-  const keyOf = (clash: Clash) =>
-    `${clash.observationId} ${clash.kind} ${clash.kind === 'here' ? clash.otherId : clash.reference}`
+  const keyOf = ({ observationId, reference }: Clash) => `${observationId} ${reference}`
   return (
     <div className="mb-8 max-w-prose">
       <BarNote tone="marginal">

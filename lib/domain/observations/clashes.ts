@@ -1,7 +1,7 @@
 import { separationArcsec, type Place } from '@/lib/science/sky'
 
 /** Positions of one source in different catalogues agree to better than this, arcsec. */
-const samePlaceArcsec = 5
+export const samePlaceArcsec = 5
 
 /**
  * In one mode the signal-to-noise ratio of a faint source grows as the root of the time: half the time reaches 0.7 of

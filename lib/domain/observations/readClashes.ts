@@ -9,25 +9,10 @@ import { claimsOf, heldBy } from './heldBy'
 
 /** One observation that is held or asked for already. Of others it says the reference of the award and no more. */
 export type Clash = { observationId: number } & (
-  | { kind: 'here'; otherId: number }
-  | { kind: 'own'; reference: string; callNumber: number }
-  | { kind: 'awarded'; reference: string }
+  { kind: 'own'; reference: string; callNumber: number } | { kind: 'awarded'; reference: string }
 )
 
 type Asked = Claim & { observationId: number }
-
-function within(asked: readonly Asked[]): Clash[] {
-  return asked.flatMap((one, index) =>
-    asked
-      .slice(0, index)
-      .filter((other) => isSamePointing(one, other))
-      .map(({ observationId: otherId }): Clash => ({
-        observationId: one.observationId,
-        kind: 'here',
-        otherId,
-      })),
-  )
-}
 
 function withOwn(asked: readonly Asked[], own: readonly Candidate[]): Clash[] {
   return asked.flatMap(({ observationId, ...claim }) => {
@@ -67,8 +52,8 @@ async function withAwarded(ctx: ActingContext, asked: readonly Asked[], near: re
 const marginDeg = 0.002
 
 /**
- * Observations whose position, mode and depth are held or asked for already: in this proposal, in another that names
- * the reader, or in an awarded one. What others merely ask for is not looked at, so that nobody can learn by trying
+ * Observations whose position, mode and depth are held or asked for already: in another proposal that names the
+ * reader, or in an awarded one. (What one proposal asks for twice is a check of its own.) What others merely ask for is not looked at, so that nobody can learn by trying
  * positions what stands in a proposal that is not decided. The caller has checked the right to read.
  */
 export async function readClashes(ctx: ActingContext, contents: ProposalContents): Promise<Clash[]> {
@@ -87,5 +72,5 @@ export async function readClashes(ctx: ActingContext, contents: ProposalContents
   const [own, awarded] = await Promise.all([ownNear(ctx.db, sought, person), awardedNear(ctx.db, sought)])
   const ownIds = new Set(own.map(({ proposalId }) => proposalId))
   const others = awarded.filter(({ proposalId }) => !ownIds.has(proposalId))
-  return [...within(asked), ...withOwn(asked, own), ...(await withAwarded(ctx, asked, others))]
+  return [...withOwn(asked, own), ...(await withAwarded(ctx, asked, others))]
 }

@@ -130,18 +130,4 @@ describe('a clash with what is one’s own', () => {
     expect(await found()).toEqual([own])
     expect((await found(scenario.coInvestigator)).map(({ kind }) => kind)).toEqual(['awarded'])
   })
-
-  it('is two observations of one position in one mode', async () => {
-    const [otherId = 0] = await db()('observations').insert({
-      proposal_id: scenario.proposalId,
-      target_id: scenario.targetId,
-      mode_id: scenario.modeId,
-      constraint_set_id: scenario.constraintSetId,
-      position: 2,
-      wanted_snr: 10,
-      snr_per: 'resolution-element',
-      asked_seconds: 600,
-    })
-    expect(await found()).toEqual([{ observationId: otherId, kind: 'here', otherId: scenario.observationId }])
-  })
 })
