@@ -105,6 +105,7 @@ export interface CallKindsRow {
   max_seconds: number | null
   fee_minor: number
   panel_id: number
+  needs_student: 0 | 1
 }
 
 export interface CallModesRow {
@@ -224,7 +225,7 @@ export interface InvitationsRow {
   token_hash: string
   email: string
   name: string
-  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office'
+  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office' | 'investigator'
   call_id: number | null
   panel_id: number | null
   instrument_id: number | null
@@ -234,6 +235,7 @@ export interface InvitationsRow {
   accepted_by: number | null
   withdrawn_at: Date | null
   created_at: Date
+  proposal_id: number | null
 }
 
 export interface LogbookRow {
@@ -469,6 +471,9 @@ export interface ProposalsRow {
   version: number
   created_at: Date
   updated_at: Date
+  continues_id: number | null
+  lead_offered_to: number | null
+  lead_offered_at: Date | null
 }
 
 export interface ProposalPeopleRow {
@@ -484,6 +489,8 @@ export interface ProposalPeopleRow {
   position: number
   confirmed_at: Date | null
   created_at: Date
+  orcid: string | null
+  is_supervisor: 0 | 1
 }
 
 export interface ProposalVersionsRow {
@@ -791,7 +798,7 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor'>
+      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'needs_student'>
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -853,6 +860,7 @@ declare module 'knex/types/tables.js' {
         | 'accepted_by'
         | 'withdrawn_at'
         | 'created_at'
+        | 'proposal_id'
       >
     >
     logbook: Knex.CompositeTableType<
@@ -969,13 +977,24 @@ declare module 'knex/types/tables.js' {
         | 'withdrawn_reason'
         | 'version'
         | 'created_at'
+        | 'continues_id'
+        | 'lead_offered_to'
+        | 'lead_offered_at'
       >
     >
     proposal_people: Knex.CompositeTableType<
       ProposalPeopleRow,
       Insert<
         ProposalPeopleRow,
-        'id' | 'person_id' | 'institute' | 'access' | 'is_student' | 'confirmed_at' | 'created_at'
+        | 'id'
+        | 'person_id'
+        | 'institute'
+        | 'access'
+        | 'is_student'
+        | 'confirmed_at'
+        | 'created_at'
+        | 'orcid'
+        | 'is_supervisor'
       >
     >
     proposal_versions: Knex.CompositeTableType<

@@ -38,6 +38,7 @@ export const paths = {
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
   proposalHistory: (reference: string) => `/proposals/${part(reference)}/history`,
   proposalOutcome: (reference: string) => `/proposals/${part(reference)}/outcome`,
+  proposalContinue: (reference: string) => `/proposals/${part(reference)}/continue`,
   proposalPacket: (reference: string, variant?: 'anonymised') =>
     `/proposals/${part(reference)}/packet${variant ? `?variant=${variant}` : ''}`,
   proposalRecord: (reference: string) => `/proposals/${part(reference)}/record`,

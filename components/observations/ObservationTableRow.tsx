@@ -50,6 +50,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
     kept,
     empty: observationRow(kept),
     rowOf: observationRow,
+    keepAs: readOnly === null ? `observation-${contents.reference}-${kept.id}` : null,
     save,
   })
   const { form, commit } = row
@@ -106,10 +107,13 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
             <CellSelect
               name="modeId"
               label={`Mode of the ${label}`}
-              options={contents.modes.map(({ modeId, name: words }) => ({
-                value: String(modeId),
-                label: words,
-              }))}
+              options={[
+                ...(mode || !typed.modeId ? [] : [{ value: String(typed.modeId), label: 'Not on offer' }]),
+                ...contents.modes.map(({ modeId, name: words }) => ({
+                  value: String(modeId),
+                  label: words,
+                })),
+              ]}
               readOnly={isOff}
               large
               isNumber

@@ -46,6 +46,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
     kept: view.kept,
     empty: emptyTargetRow,
     rowOf: targetRow,
+    keepAs: readOnly === null ? `target-${reference}-${view.kept?.id ?? key}` : null,
     save: (values, version) => onSave(key, values, version),
   })
   const { form, commit } = row

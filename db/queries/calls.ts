@@ -51,6 +51,7 @@ function kindOf(row: CallKindsRow): CallKind {
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,
+    needsStudent: row.needs_student === 1,
   }
 }
 

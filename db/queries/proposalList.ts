@@ -16,6 +16,11 @@ export interface ListedProposal {
   lead: string
   isLead: boolean
   hasAgreed: boolean
+  /** May speak for it: leads it or is its deputy, and has agreed. */
+  maySpeak: boolean
+  callId: number
+  /** Calls in which its programme has a proposal. */
+  programmeCalls: number[]
 }
 
 interface Row {
@@ -38,6 +43,9 @@ interface Row {
   targets: string
   lead: string | null
   role: string
+  access: string
+  call_id: number
+  programme_calls: string | null
   confirmed_at: Date | null
 }
 
@@ -74,6 +82,11 @@ export async function proposalsNaming(
       'k.title as kind_title',
       'k.closes_at as kind_closes_at',
       'q.role',
+      'q.access',
+      'p.call_id',
+      db.raw(
+        "(SELECT GROUP_CONCAT(DISTINCT o.call_id) FROM proposals o WHERE o.programme_id = p.programme_id AND o.state <> 'withdrawn') AS programme_calls",
+      ),
       'q.confirmed_at',
       db.raw('(SELECT SUM(o.asked_seconds) FROM observations o WHERE o.proposal_id = p.id) AS asked'),
       db.raw('(SELECT COUNT(*) FROM targets t WHERE t.proposal_id = p.id) AS targets'),
@@ -103,5 +116,8 @@ export async function proposalsNaming(
     lead: row.lead ?? '',
     isLead: row.role === 'pi',
     hasAgreed: row.confirmed_at !== null,
+    maySpeak: row.confirmed_at !== null && (row.role === 'pi' || row.access === 'deputy'),
+    callId: row.call_id,
+    programmeCalls: (row.programme_calls ?? '').split(',').filter(Boolean).map(Number),
   }))
 }

@@ -34,6 +34,7 @@ const kinds = [
     abstract_limit: 1500,
     max_seconds: 80 * 3600,
     fee_minor: 0,
+    needs_student: 1,
   },
 ] as const
 

@@ -161,6 +161,7 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
     maxSeconds: null,
     feeMinor: 0,
     panelId: 1,
+    needsStudent: false,
   },
   site,
   modes: [slitMode],

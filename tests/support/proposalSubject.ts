@@ -27,6 +27,9 @@ export function investigator(id: number, more: Partial<Investigator> = {}): Inve
     role: 'co-investigator',
     access: 'edit',
     isStudent: false,
+    isSupervisor: false,
+    orcid: null,
+    isOrcidVerified: false,
     position: id,
     confirmedAt: new Date('2027-03-01T00:00:00Z'),
     ...more,
@@ -72,6 +75,7 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       maxSeconds: null,
       feeMinor: 12_000,
       panelId: 1,
+      needsStudent: false,
     },
     people: [
       investigator(1, { role: 'pi' }),

@@ -3,6 +3,7 @@ import { modes } from '../facilityData.ts'
 import { addInvestigator } from '../../../lib/domain/proposals/addInvestigator.ts'
 import { beginProposal } from '../../../lib/domain/proposals/beginProposal.ts'
 import { confirmMembership } from '../../../lib/domain/proposals/confirmMembership.ts'
+import { describeInvestigator } from '../../../lib/domain/proposals/describeInvestigator.ts'
 import { markSectionDone } from '../../../lib/domain/proposals/markSectionDone.ts'
 import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
 import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
@@ -103,10 +104,13 @@ export async function writeProposal(
       email: other.actor.email,
       institute: '',
       access: 'edit',
+      orcid: '',
       isStudent: false,
+      isSupervisor: seed.kind === 'thesis',
     })
     await confirmMembership(other, { reference })
   }
+  if (seed.kind === 'thesis') await nameStudent(lead, reference)
   for (let n = 0; n < seed.targets; n += 1)
     await addTarget(lead, { reference, row: targetRow(seed, chance, options.raHours) })
   await askForHours(lead, reference, seed, facility)
@@ -141,6 +145,21 @@ export async function writeProposal(
     })
   }
   return reference
+}
+
+/** Who leads a thesis is the student. */
+async function nameStudent(lead: Awaited<ReturnType<Teller['as']>>, reference: string): Promise<void> {
+  const [student] = (await readContents(lead.db, reference)).people
+  if (!student) return
+  const { id, institute } = student
+  await describeInvestigator(lead, {
+    reference,
+    id,
+    institute,
+    orcid: '',
+    isStudent: true,
+    isSupervisor: false,
+  })
 }
 
 /** One observation a target, deep enough to need the hours the proposal is about. */

@@ -23,6 +23,8 @@ export interface CallKind {
   maxSeconds: number | null
   feeMinor: number
   panelId: number
+  /** Must name a student and a supervisor, both of whom have agreed. */
+  needsStudent: boolean
 }
 
 export interface CallCriterion {

@@ -13,6 +13,12 @@ export interface Investigator {
   role: 'pi' | 'co-investigator'
   access: 'read' | 'edit' | 'deputy'
   isStudent: boolean
+  /** Supervises the student named. */
+  isSupervisor: boolean
+  /** With hyphens: '0000-0002-1825-0097'. The account's own, else as typed by whoever named them. */
+  orcid: string | null
+  /** The account has proved that the iD is its own. */
+  isOrcidVerified: boolean
   position: number
   confirmedAt: Date | null
 }

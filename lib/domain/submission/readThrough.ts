@@ -2,7 +2,9 @@ import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '
 import type { ProposalSection } from '@/lib/paths'
 import { findPreset } from '@/lib/science/cosmology'
 import type { ProposalComputation } from '../observations/types'
+import { leftOut, namedOnSending } from '../proposals/namedOnSending'
 import type { ProposalContents } from '../proposals/types'
+import { leftOutWords } from './leftOutWords'
 
 export interface ReadThroughRow {
   label: string
@@ -77,7 +79,10 @@ export function readThrough(
   papersDetail: string,
 ): ReadThroughGroup[] {
   const leads = contents.people.filter(({ role }) => role === 'pi').map(({ name }) => name)
-  const others = contents.people.filter(({ role }) => role !== 'pi').map(({ name }) => name)
+  const others = namedOnSending(contents.people)
+    .filter(({ role }) => role !== 'pi')
+    .map(({ name }) => name)
+  const without = leftOut(contents.people).map(({ name }) => name)
   const asked = formatHoursFromSeconds(computation.askedSeconds)
   const needed = formatHoursFromSeconds(computation.neededSeconds)
   const row = (label: string, section: ProposalSection, text: string): ReadThroughRow => ({
@@ -119,6 +124,7 @@ export function readThrough(
       rows: [
         row('Leads', 'people', leads.join(', ') || unsaid),
         row('With', 'people', others.join(', ') || 'nobody else'),
+        ...(without.length > 0 ? [row('Left out', 'people', leftOutWords(without))] : []),
       ],
     },
   ]

@@ -64,6 +64,8 @@ function sectionWords({ before, after }: EntryValues): string {
 /** The acts an investigator may read about, each in a sentence; what is not listed is not shown. */
 export const entryWords: Readonly<Record<string, Words>> = {
   'proposal.begin': ({ after }) => `Began the proposal ${quoted(textAt(after, 'title') ?? '')}`,
+  'proposal.continue': ({ before }) =>
+    `Carried ${textAt(before, 'reference') ?? 'an earlier proposal'} of call ${numberAt(before, 'call') ?? ''} on`,
   'proposal.question': questionWords,
   'proposal.cosmology': ({ before, after }) => {
     const name = (value: unknown) => {
@@ -89,6 +91,13 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'people.leave': () => 'Left the proposal',
   'people.access': ({ after }) =>
     `${textAt(after, 'name') ?? 'Somebody'} ${accessWords[textAt(after, 'access') ?? ''] ?? 'may read it'} now`,
+  'people.describe': ({ after }) => `Changed what is said of ${textAt(after, 'name') ?? 'somebody'}`,
+  'people.lead-offer': ({ after }) => `Asked ${textAt(after, 'asked') ?? 'somebody'} to lead the proposal`,
+  'people.lead-take-back': ({ before }) =>
+    `Took back the request to ${textAt(before, 'asked') ?? 'somebody'} to lead`,
+  'people.lead-decline': () => 'Declined to lead the proposal',
+  'people.lead-accept': ({ before }) =>
+    `Leads the proposal in place of ${textAt(before, 'lead') ?? 'somebody'}`,
   'people.order': () => 'Changed the order of names',
   'papers.add': paperWords,
   'papers.remove': ({ before }) => `Papers: took ${textAt(before, 'fileName') ?? 'a file'} off`,

@@ -5,6 +5,7 @@ import { SectionFoot } from '@/components/proposals/SectionFoot'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import {
   addObservationAction,
@@ -25,6 +26,7 @@ export default async function ObservingPage({ params }: { params: Promise<{ refe
         contents={{ ...contents, people: [], papers: [] }}
         computation={computation}
         readOnly={readOnly}
+        note={<CarriedHere reference={contents.reference} section="observing" />}
         actions={{
           add: addObservationAction,
           save: saveObservationAction,

@@ -9,6 +9,7 @@ import { orNotFound } from '@/lib/auth/orNotFound'
 import { maxExpertisePages } from '@/lib/domain/papers/limits'
 import { readPaperNames } from '@/lib/domain/papers/readPaperNames'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import { removePaperAction, uploadPaperAction } from './actions'
 
@@ -28,6 +29,7 @@ export default async function PapersPage({ params }: { params: Promise<{ referen
       />
       <div className="mt-6 max-w-3xl">
         <ReadOnlyNote reason={readOnly} />
+        <CarriedHere reference={reference} section="papers" />
         <PaperSlot
           reference={reference}
           kind="justification"
