@@ -16,4 +16,5 @@ export type {
   Verdict,
 } from './types'
 export { feasibilityEngineVersion } from './version'
+export { sayCarried, sayPlace } from './sayCarried'
 export { moonClassLimits } from './moonClass'
