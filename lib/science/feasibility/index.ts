@@ -1,4 +1,5 @@
 /** Can it be done: the checks of a request and the verdict of a proposal. */
+export { lineStrip, linesOnStrip, type StripAsked, type StripLine } from './lineStrip'
 export { observationReport } from './observationReport'
 export {
   proposalVerdict,
