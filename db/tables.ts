@@ -687,6 +687,11 @@ export interface TargetsRow {
   galactic_ebv: number | null
   magnification: number | null
   magnification_error: number | null
+  spectrum_kind: 'power-law' | 'black-body' | 'table' | null
+  spectral_index: number | null
+  spectral_index_error: number | null
+  temperature_k: number | null
+  spectrum_table: string | null
 }
 
 export interface TargetGroupsRow {
@@ -1080,6 +1085,11 @@ declare module 'knex/types/tables.js' {
         | 'galactic_ebv'
         | 'magnification'
         | 'magnification_error'
+        | 'spectrum_kind'
+        | 'spectral_index'
+        | 'spectral_index_error'
+        | 'temperature_k'
+        | 'spectrum_table'
       >
     >
     target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>

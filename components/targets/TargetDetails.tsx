@@ -7,6 +7,7 @@ import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { DetailGroup } from './DetailGroup'
+import { SpectrumFields } from './SpectrumFields'
 import { frames, lineKinds, lines, provenances, redshiftKinds, shapes } from './detailChoices'
 
 export interface TargetDetailsProps {
@@ -14,13 +15,15 @@ export interface TargetDetailsProps {
   onUp: (() => void) | null
   onDown: (() => void) | null
   onRemove: (() => void) | null
+  /** Saves the row as it stands. */
+  onSave: () => void
 }
 
 /**
- * What does not fit in a row, in groups: redshift, magnitude, a line, shape, what lies on the way, motion; and moving
+ * What does not fit in a row, in groups: redshift, magnitude, spectrum, a line, shape, what lies on the way, motion; and moving
  * or taking out the row.
  */
-export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetailsProps) {
+export function TargetDetails({ readOnly, onUp, onDown, onRemove, onSave }: TargetDetailsProps) {
   const id = useId()
   const shared = { offReason: readOnly ?? undefined }
   const number = { ...shared, width: 'full' } as const
@@ -37,6 +40,7 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
           <NumberField name="magnitudeError" label="Its error" unit="mag" {...number} />
           <TextField name="source" label="Its source" {...shared} />
         </DetailGroup>
+        <SpectrumFields readOnly={readOnly} onSave={onSave} />
         <DetailGroup title="The shape">
           <SelectField name="geometry" label="Shape" options={shapes} {...shared} />
           <NumberField name="effectiveRadius" label="Half-light radius" unit="″" {...number} />
@@ -51,7 +55,7 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
         </DetailGroup>
         <DetailGroup
           title="On the way"
-          note="Applied to what is predicted; what was observed has been through it."
+          note="Applied to what is predicted. Of what was observed only the colour changes, where a spectrum is stated."
         >
           <NumberField name="ebv" label="E(B−V) by SFD" unit="mag" {...number} />
           <NumberField name="magnification" label="Magnification" {...number} />

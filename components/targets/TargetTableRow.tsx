@@ -184,6 +184,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
                 onUp={view.kept && !props.isFirst ? () => onMove(key, -1) : null}
                 onDown={view.kept && !props.isLast ? () => onMove(key, 1) : null}
                 onRemove={() => onRemove(key)}
+                onSave={save}
               />
             ) : null}
           </td>

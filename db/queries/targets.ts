@@ -1,4 +1,6 @@
 import type { Brightness, LineLight, Observation, Target } from '@/lib/domain/proposals/types'
+import { spectrumOf } from '@/lib/domain/targets/spectrumOf'
+import { readSpectrumTable, spectrumText } from '@/lib/domain/targets/spectrumTable'
 import type { Database } from '../client.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
@@ -25,6 +27,11 @@ function lineOf(row: TargetQuantitiesRow | undefined): LineLight | null {
   }
 }
 
+function tableOf(text: string | null) {
+  const read = text === null ? null : readSpectrumTable(text)
+  return read?.ok ? read.value : null
+}
+
 function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = []): Target {
   return {
     id: row.id,
@@ -48,6 +55,12 @@ function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = 
     need: row.need,
     brightness: brightnessOf(quantities.find(({ quantity }) => quantity === 'magnitude')),
     line: lineOf(quantities.find(({ quantity }) => quantity === 'line-flux' || quantity === 'luminosity')),
+    spectrum: spectrumOf(row.spectrum_kind, {
+      index: row.spectral_index,
+      indexError: row.spectral_index_error,
+      temperatureK: row.temperature_k,
+      table: tableOf(row.spectrum_table),
+    }),
     galacticEbv: row.galactic_ebv,
     magnification: row.magnification,
     magnificationError: row.magnification_error,
@@ -82,6 +95,17 @@ export async function findTarget(db: Database, proposalId: number, id: number): 
 
 export type TargetValues = Omit<Target, 'id' | 'version'>
 
+function spectrumColumns(spectrum: TargetValues['spectrum'] | undefined) {
+  const isLaw = spectrum?.kind === 'power-law'
+  return {
+    spectrum_kind: spectrum?.kind ?? null,
+    spectral_index: isLaw ? spectrum.index : null,
+    spectral_index_error: isLaw ? spectrum.indexError : null,
+    temperature_k: spectrum?.kind === 'black-body' ? spectrum.temperatureK : null,
+    spectrum_table: spectrum?.kind === 'table' ? spectrumText(spectrum) : null,
+  }
+}
+
 function columnsOf(values: TargetValues) {
   return {
     position: values.position,
@@ -102,6 +126,7 @@ function columnsOf(values: TargetValues) {
     redshift_frame: values.redshiftFrame,
     redshift_type: values.redshiftType,
     need: values.need,
+    ...spectrumColumns(values.spectrum),
     galactic_ebv: values.galacticEbv,
     magnification: values.magnification,
     magnification_error: values.magnificationError,

@@ -95,6 +95,7 @@ export const access = {
     'GET /api/v1/cosmologies': 'anyone',
     'POST /api/v1/cosmology': 'anyone',
     'POST /api/v1/cosmology/inverse': 'anyone',
+    'POST /api/v1/cosmology/survey': 'anyone',
     'POST /api/v1/sky/positions': 'anyone',
     'POST /api/v1/sky/visibility': 'anyone',
     'POST /api/v1/exposure/ccd': 'anyone',

@@ -4,6 +4,7 @@ import type { FactRow } from '../parts/FactRows'
 import { cosmologyLine } from './cosmologyLine'
 import type { PacketData } from './packetTypes'
 import { magnitudeHead, targetRows } from './targetRows'
+import { spectrumChartData } from './spectrumChartData'
 import { upChartData } from './upChartData'
 
 const moons = { dark: 'dark', grey: 'grey or darker', any: 'any' } as const
@@ -61,6 +62,18 @@ function notesOf({ computation, targets }: AnonymousProposal): PacketData['notes
   )
 }
 
+/** The most magnitudes of which it is told one by one how they were carried. */
+const mostCarried = 6
+
+function carriedLines({ computation, targets }: AnonymousProposal): string[] {
+  const said = computation.observations.flatMap(({ targetId, carried }) =>
+    carried ? [`${targets.find(({ id }) => id === targetId)?.name ?? ''}: ${carried.sentence}`] : [],
+  )
+  const lines = [...new Set(said)]
+  const more = lines.length - mostCarried
+  return more > 0 ? [...lines.slice(0, mostCarried), `And ${more} more in the report.`] : lines
+}
+
 /** What a packet says, from a proposal without names; names are added by whoever may read them. */
 export function packetData(
   proposal: AnonymousProposal,
@@ -85,7 +98,9 @@ export function packetData(
       verdict: computation.verdict,
     },
     cosmology: cosmologyLine(proposal),
+    carried: carriedLines(proposal),
     up: upChartData(proposal),
+    spectra: spectrumChartData(proposal),
     notes: notesOf(proposal),
   }
 }

@@ -33,6 +33,24 @@ export interface UpChartData {
   moons: readonly { night: number; words: 'new' | 'full' }[]
 }
 
+/** Where the lines of the targets fall in the range of one mode; wavelengths observed, in vacuum, angstroms. */
+export interface SpectrumChartData {
+  modeName: string
+  fromA: number
+  toA: number
+  mode: { fromA: number; toA: number }
+  bands: readonly { name: string; fromA: number; toA: number; isHeavy: boolean }[]
+  skyLinesA: readonly number[]
+  rows: readonly SpectrumRow[]
+}
+
+/** One observation: the feature it asks for, and the other lines at its redshift. */
+export interface SpectrumRow {
+  name: string
+  tone: PrintedVerdict
+  lines: readonly { words: string; atA: number; isAsked: boolean }[]
+}
+
 /** A packet in words and numbers, ready to be set. */
 export interface PacketData {
   observatory: string
@@ -50,6 +68,10 @@ export interface PacketData {
   rows: readonly PacketRow[]
   total: { words: string; needed: string; asked: string; verdict: PrintedVerdict | null }
   cosmology: string
+  /** How magnitudes were carried from their bands to the instruments. */
+  carried: readonly string[]
   up: UpChartData | null
+  /** One for each mode with a slit that looks at a target with a redshift. */
+  spectra: readonly SpectrumChartData[]
   notes: readonly { verdict: PrintedVerdict; words: string; text: string }[]
 }

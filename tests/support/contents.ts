@@ -87,6 +87,7 @@ export const target = (over: Partial<Target> = {}): Target => ({
   redshiftType: 'spectroscopic',
   need: 'required',
   line: null,
+  spectrum: null,
   galacticEbv: null,
   magnification: null,
   magnificationError: null,

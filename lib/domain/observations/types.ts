@@ -72,6 +72,8 @@ export interface ObservationComputation {
   /** Dark hours within the Moon and date limits asked for; null without a position. */
   usableHours: number | null
   exposure: ExposureFacts | null
+  /** How the magnitude came from its band to the mode; what was computed before it was told has none. */
+  carried?: { sentence: string; isAssumed: boolean } | null
   checks: FeasibilityCheck[]
   verdict: Verdict
   refusal: string | null

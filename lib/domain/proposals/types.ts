@@ -43,6 +43,12 @@ export interface LineLight {
   widthKmS: number
 }
 
+/** Shape of a target's own continuum, before dust and gas on the way. */
+export type TargetSpectrum =
+  | { kind: 'power-law'; index: number; indexError: number | null }
+  | { kind: 'black-body'; temperatureK: number }
+  | { kind: 'table'; wavelengthsNm: number[]; fLambda: number[] }
+
 export interface Target {
   id: number
   position: number
@@ -65,6 +71,8 @@ export interface Target {
   need: 'required' | 'optional' | 'backup'
   brightness: Brightness | null
   line: LineLight | null
+  /** Null where none is stated: flat in f_nu. */
+  spectrum: TargetSpectrum | null
   /** Reddening of the Galaxy as read from the SFD map; what is predicted is dimmed by it. */
   galacticEbv: number | null
   /** What is predicted is made brighter by it. */

@@ -18,6 +18,8 @@ export function liveTarget(
     if (cell === 'band') emptied.magnitude = ''
     else if (cell === 'lineValue') Object.assign(emptied, { lineName: '', lineValue: '' })
     else if (cell === 'effectiveRadius') emptied.geometry = 'point'
+    else if (cell === 'spectralIndex' || cell === 'temperature' || cell === 'spectrumTable')
+      Object.assign(emptied, { spectrum: 'flat', [cell]: '' })
     else if (cell === 'ra' || cell === 'dec') Object.assign(emptied, { ra: '', dec: '' })
     else if (typeof cell === 'string' && cell in emptied && cell !== 'name')
       Object.assign(emptied, { [cell]: '' })

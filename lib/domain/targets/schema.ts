@@ -6,6 +6,8 @@ import { restLines } from '@/lib/science/light'
 import { parseRedshift, readNumber } from '@/lib/science/redshift'
 import type { TargetValues } from './types'
 import { readBandChoice } from './bands'
+import { longestSpectrum, readSpectrumTable } from './spectrumTable'
+import { spectrumOf } from './spectrumOf'
 import { typedNumber } from './typedNumber'
 import { typedText } from './typedText'
 
@@ -56,6 +58,11 @@ const cells = z.object({
   lineValue: typedText(positive),
   lineError: typedText(positive),
   lineWidth: typedNumber('A line width', 0, 20_000),
+  spectrum: z.enum(['flat', 'power-law', 'black-body', 'table']),
+  spectralIndex: typedNumber('A spectral index', -10, 10),
+  spectralIndexError: typedNumber('An error of the spectral index', 0, 10),
+  temperature: typedNumber('A temperature in kelvin', 100, 1_000_000),
+  spectrumTable: typedText(readSpectrumTable, longestSpectrum),
   pmRa: typedNumber('A proper motion', -20_000, 20_000),
   pmDec: typedNumber('A proper motion', -20_000, 20_000),
   epoch: typedNumber('An epoch', 1900, 2100),
@@ -74,6 +81,12 @@ function together(values: Cells, ctx: z.RefinementCtx): void {
     need('band', 'Say in which band and system the magnitude is.')
   if (values.geometry !== 'point' && values.effectiveRadius.value === null)
     need('effectiveRadius', 'An extended source needs its half-light radius.')
+  if (values.spectrum === 'power-law' && values.spectralIndex.value === null)
+    need('spectralIndex', 'A power law needs its index.')
+  if (values.spectrum === 'black-body' && values.temperature.value === null)
+    need('temperature', 'A black body needs its temperature.')
+  if (values.spectrum === 'table' && values.spectrumTable.value === null)
+    need('spectrumTable', 'Choose the file of the spectrum, or another shape.')
   const line = values.lineValue.value
   if (values.lineName !== '' && line === null) need('lineValue', `Give the ${values.lineKind} of the line.`)
   const [least, most] = lineRange[values.lineKind]
@@ -109,6 +122,12 @@ function toValues(c: Cells): TargetValues {
     galacticEbv: c.ebv.value,
     magnification: c.magnification.value,
     magnificationError: c.magnificationError.value,
+    spectrum: spectrumOf(c.spectrum, {
+      index: c.spectralIndex.value,
+      indexError: c.spectralIndexError.value,
+      temperatureK: c.temperature.value,
+      table: c.spectrumTable.value,
+    }),
     line:
       c.lineName === '' || c.lineValue.value === null
         ? null

@@ -2,6 +2,7 @@ import { TRUE_MINUS } from '@/lib/format'
 import type { Target } from '../proposals/types'
 import { bandChoice } from './bands'
 import type { TargetRow } from './schema'
+import { spectrumText } from './spectrumTable'
 
 const text = (value: number | null | undefined) =>
   value === null || value === undefined ? '' : String(value).replace('-', TRUE_MINUS)
@@ -32,9 +33,25 @@ export const emptyTargetRow: TargetRow = {
   lineValue: '',
   lineError: '',
   lineWidth: '',
+  spectrum: 'flat',
+  spectralIndex: '',
+  spectralIndexError: '',
+  temperature: '',
+  spectrumTable: '',
   pmRa: '',
   pmDec: '',
   epoch: '2016',
+}
+
+function spectrumCells(spectrum: Target['spectrum'] | undefined) {
+  const isLaw = spectrum?.kind === 'power-law'
+  return {
+    spectrum: spectrum?.kind ?? 'flat',
+    spectralIndex: isLaw ? text(spectrum.index) : '',
+    spectralIndexError: isLaw ? text(spectrum.indexError) : '',
+    temperature: spectrum?.kind === 'black-body' ? text(spectrum.temperatureK) : '',
+    spectrumTable: spectrum?.kind === 'table' ? spectrumText(spectrum) : '',
+  } satisfies Partial<TargetRow>
 }
 
 /** A kept target as the text of its row: what was typed where that is kept, else the value written out. */
@@ -65,6 +82,7 @@ export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): 
     lineValue: text(target.line?.value),
     lineError: text(target.line?.error),
     lineWidth: text(target.line?.widthKmS),
+    ...spectrumCells(target.spectrum),
     pmRa: text(target.pmRaMasYr),
     pmDec: text(target.pmDecMasYr),
     epoch: text(target.epochYr),

@@ -52,6 +52,14 @@ const targets: Target[] = [
     effectiveRadiusArcsec: 4,
   }),
   target({
+    ...{ id: 16, name: 'Lamp 31', spectrum: { kind: 'power-law', index: -0.5, indexError: 0.2 } },
+  }),
+  target({ id: 17, name: 'Lamp 32', spectrum: { kind: 'black-body', temperatureK: 5772 } }),
+  target({
+    ...{ id: 18, name: 'Lamp 33' },
+    spectrum: { kind: 'table', wavelengthsNm: [300, 550.5, 1100], fLambda: [0, 2.5e-17, 1.25e-17] },
+  }),
+  target({
     id: 14,
     name: '#5, a comment',
     line: { ...line, kind: 'flux', value: 2.5e-17, error: null, widthKmS: 0 },
