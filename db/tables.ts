@@ -105,6 +105,7 @@ export interface CallKindsRow {
   max_seconds: number | null
   fee_minor: number
   panel_id: number
+  word_limit: number
 }
 
 export interface CallModesRow {
@@ -185,6 +186,21 @@ export interface FeesRow {
   state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed'
   due_at: Date
   settled_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface FiguresRow {
+  id: number
+  proposal_id: number
+  object_id: number
+  label: string
+  caption: string
+  file_name: string
+  width_px: number
+  height_px: number
+  position: number
+  removed_at: Date | null
   version: number
   created_at: Date
 }
@@ -493,7 +509,7 @@ export interface ProposalVersionsRow {
   snapshot: string
   snapshot_sha256: string
   engine_version: string
-  paper_id: number
+  paper_id: number | null
   idempotency_key: string
   arrived_at: Date
   committed_at: Date
@@ -645,7 +661,7 @@ export interface StoredObjectsRow {
   sha256: string
   size_bytes: number
   content_type: string
-  purpose: 'paper' | 'packet' | 'receipt' | 'record'
+  purpose: 'paper' | 'packet' | 'receipt' | 'record' | 'figure'
   created_at: Date
 }
 
@@ -753,6 +769,16 @@ export interface WaiversRow {
   created_at: Date
 }
 
+export interface WritingsRow {
+  id: number
+  proposal_id: number
+  part: 'justification' | 'references' | 'team'
+  body: string
+  version: number
+  created_at: Date
+  updated_at: Date
+}
+
 declare module 'knex/types/tables.js' {
   interface Tables {
     assessments: Knex.CompositeTableType<
@@ -791,7 +817,7 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor'>
+      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit'>
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -828,6 +854,10 @@ declare module 'knex/types/tables.js' {
     fees: Knex.CompositeTableType<
       FeesRow,
       Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
+    >
+    figures: Knex.CompositeTableType<
+      FiguresRow,
+      Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
     >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
@@ -980,7 +1010,7 @@ declare module 'knex/types/tables.js' {
     >
     proposal_versions: Knex.CompositeTableType<
       ProposalVersionsRow,
-      Insert<ProposalVersionsRow, 'id' | 'superseded_at'>
+      Insert<ProposalVersionsRow, 'id' | 'paper_id' | 'superseded_at'>
     >
     proposal_version_people: Knex.CompositeTableType<
       ProposalVersionPeopleRow,
@@ -1094,5 +1124,6 @@ declare module 'knex/types/tables.js' {
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>
     >
+    writings: Knex.CompositeTableType<WritingsRow, Insert<WritingsRow, 'id' | 'version' | 'created_at'>>
   }
 }

@@ -35,6 +35,8 @@ export const paths = {
     `/proposals/${part(reference)}/${section}`,
   proposalPaper: (reference: string, paper: number | string) =>
     `/proposals/${part(reference)}/papers/${part(String(paper))}`,
+  proposalFigure: (reference: string, figure: number | string, sha256: string) =>
+    `/proposals/${part(reference)}/figures/${part(String(figure))}?v=${sha256.slice(0, 8)}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
   proposalHistory: (reference: string) => `/proposals/${part(reference)}/history`,
   proposalOutcome: (reference: string) => `/proposals/${part(reference)}/outcome`,

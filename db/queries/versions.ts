@@ -10,7 +10,8 @@ export interface SentVersion {
   versionNumber: number
   sha256: string
   engineVersion: string
-  paperId: number
+  /** Null where the justification was written here. */
+  paperId: number | null
   arrivedAt: Date
   committedAt: Date
   submittedBy: number
@@ -57,7 +58,7 @@ export interface NewVersion {
   snapshot: string
   sha256: string
   engineVersion: string
-  paperId: number
+  paperId: number | null
   idempotencyKey: string
   arrivedAt: Date
   committedAt: Date

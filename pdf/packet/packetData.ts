@@ -87,5 +87,6 @@ export function packetData(
     cosmology: cosmologyLine(proposal),
     up: upChartData(proposal),
     notes: notesOf(proposal),
+    written: proposal.written,
   }
 }

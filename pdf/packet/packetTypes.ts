@@ -1,3 +1,4 @@
+import type { WrittenData } from '../writing/writtenData'
 import type { FactRow } from '../parts/FactRows'
 import type { PrintedVerdict } from '../parts/Verdict'
 
@@ -52,4 +53,6 @@ export interface PacketData {
   cosmology: string
   up: UpChartData | null
   notes: readonly { verdict: PrintedVerdict; words: string; text: string }[]
+  /** The justification where it was written here; null where it is a document, or there is none. */
+  written: WrittenData | null
 }

@@ -5,6 +5,7 @@ import { SectionFoot } from '@/components/proposals/SectionFoot'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { markSectionDoneAction } from '../actions'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { proposalOf } from '../proposalOf'
 import {
   addObservationAction,
@@ -22,7 +23,7 @@ export default async function ObservingPage({ params }: { params: Promise<{ refe
   return (
     <Main>
       <ObservingEditor
-        contents={{ ...contents, people: [], papers: [] }}
+        contents={{ ...contents, people: [], papers: [], writings: unwritten, figures: [] }}
         computation={computation}
         readOnly={readOnly}
         actions={{
