@@ -6,6 +6,7 @@ import { paths } from '@/lib/paths'
 import { citationsOf } from '@/lib/writing/citations'
 import { parseText } from '@/lib/writing/parseText'
 import type { ReferenceList } from '@/lib/writing/references'
+import { unknownFigures } from '@/lib/writing/unknownFigures'
 import { FigureList } from './FigureList'
 import type { FigureActions } from './figureActions'
 import { ReferencesForm } from './ReferencesForm'
@@ -25,7 +26,12 @@ export function Justification({ contents, list, actions }: JustificationProps) {
   const { reference, kind, writings, figures, papers } = contents
   const isDocument = papers.some((paper) => paper.kind === 'justification')
   const text = writings.justification.text
-  const citations = citationsOf(parseText(text), list.references)
+  const tree = parseText(text)
+  const citations = citationsOf(tree, list.references)
+  const lost = unknownFigures(
+    tree,
+    figures.map(({ label }) => label),
+  )
   const shown = figures.map(({ id, label, caption, sha256, widthPx, heightPx }) => ({
     label,
     caption,
@@ -71,6 +77,17 @@ export function Justification({ contents, list, actions }: JustificationProps) {
       </section>
       <section className="mb-10">
         <SectionHeading dense title="Figures" aside="set after the paragraph that names them" />
+        {lost.length > 0 ? (
+          <div className="my-3 max-w-prose">
+            <BarNote tone="lamp">
+              {lost.map(({ label, line }) => (
+                <p key={label} className="m-0 [overflow-wrap:anywhere]">
+                  Line {formatNumber(line)} of the text points to {label}, which no figure is called.
+                </p>
+              ))}
+            </BarNote>
+          </div>
+        ) : null}
         <FigureList reference={reference} figures={figures} actions={actions?.figures ?? null} />
       </section>
       <section className="mb-10">

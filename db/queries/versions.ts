@@ -47,6 +47,18 @@ export async function findVersion(db: Database, id: number): Promise<SentVersion
   return row ? versionOf(row) : null
 }
 
+/** A version by its number within the proposal. */
+export async function versionNumbered(
+  db: Database,
+  proposalId: number,
+  versionNumber: number,
+): Promise<SentVersion | null> {
+  const row = await db('proposal_versions')
+    .where({ proposal_id: proposalId, version_number: versionNumber })
+    .first()
+  return row ? versionOf(row) : null
+}
+
 export async function findVersionByKey(db: Database, idempotencyKey: string): Promise<SentVersion | null> {
   const row = await db('proposal_versions').where({ idempotency_key: idempotencyKey }).first()
   return row ? versionOf(row) : null

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { citationMark, citationsOf } from '@/lib/writing/citations'
 import { countWords } from '@/lib/writing/countWords'
-import { figuresNamed } from '@/lib/writing/figuresNamed'
+import { unknownFigures } from '@/lib/writing/unknownFigures'
 import { formulasIn } from '@/lib/writing/formulasIn'
 import { mathMl } from '@/lib/writing/mathMl'
 import { parseText } from '@/lib/writing/parseText'
@@ -152,6 +152,7 @@ describe('citations', () => {
   })
 
   it('leaves figures apart', () => {
-    expect(figuresNamed(parseText('[@fig:map] and [@fig:map], [@fig:fit]'))).toEqual(['map', 'fit'])
+    const tree = parseText('[@fig:map] and [@fig:fit]\n\n[@fig:fit], [@map]')
+    expect(unknownFigures(tree, ['map'])).toEqual([{ label: 'fit', line: 1 }])
   })
 })

@@ -3,6 +3,7 @@ import type { Actor } from '@/lib/domain/actor'
 import { packetFor } from '@/lib/domain/packets/packetFor'
 import { readPacket } from '@/lib/domain/packets/readPacket'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
+import { readTextChanges } from '@/lib/domain/proposals/history/readTextChanges'
 import { readContents } from '@/lib/domain/proposals/readContents'
 import { removePaper } from '@/lib/domain/papers/removePaper'
 import { findVersion } from '@/db/queries/versions'
@@ -150,6 +151,11 @@ describe('a text sent in the place of a document', () => {
     expect((await writings()).justification.text).toBe(text)
     await save({ text: 'Another text altogether.', version: 1 })
     expect((await findVersion(db(), versionId))?.snapshot.contents.writings.justification.text).toBe(text)
+    const since = await readTextChanges(as(scenario.pi), await readContents(db(), reference), 1)
+    expect(since).toMatchObject({ from: 1, to: null, parts: [{ part: 'justification' }] })
+    const without = (kind: string) =>
+      since?.parts[0]?.differences.map((one) => (one.kind === kind ? '' : one.text)).join('')
+    expect([without('new'), without('gone')]).toEqual([text, 'Another text altogether.'])
     const preview = await readPacket(as(scenario.pi), { reference, variant: 'anonymised' })
     expect(pdfText(preview.bytes)).toContain('Another text altogether.')
     const standing = await packetFor(as(scenario.pi), versionId, 'anonymised')
