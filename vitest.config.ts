@@ -17,7 +17,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
-          include: ['tests/{science,panel,domain,format,app,services,scripts}/**/*.test.ts'],
+          include: ['tests/{science,panel,domain,format,writing,pdf,app,services,scripts}/**/*.test.ts'],
           environment: 'node',
         },
       },

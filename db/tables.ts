@@ -106,6 +106,7 @@ export interface CallKindsRow {
   fee_minor: number
   panel_id: number
   needs_student: 0 | 1
+  word_limit: number
 }
 
 export interface CallModesRow {
@@ -186,6 +187,21 @@ export interface FeesRow {
   state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed'
   due_at: Date
   settled_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface FiguresRow {
+  id: number
+  proposal_id: number
+  object_id: number
+  label: string
+  caption: string
+  file_name: string
+  width_px: number
+  height_px: number
+  position: number
+  removed_at: Date | null
   version: number
   created_at: Date
 }
@@ -500,7 +516,7 @@ export interface ProposalVersionsRow {
   snapshot: string
   snapshot_sha256: string
   engine_version: string
-  paper_id: number
+  paper_id: number | null
   idempotency_key: string
   arrived_at: Date
   committed_at: Date
@@ -652,7 +668,7 @@ export interface StoredObjectsRow {
   sha256: string
   size_bytes: number
   content_type: string
-  purpose: 'paper' | 'packet' | 'receipt' | 'record'
+  purpose: 'paper' | 'packet' | 'receipt' | 'record' | 'figure'
   created_at: Date
 }
 
@@ -765,6 +781,16 @@ export interface WaiversRow {
   created_at: Date
 }
 
+export interface WritingsRow {
+  id: number
+  proposal_id: number
+  part: 'justification' | 'references' | 'team'
+  body: string
+  version: number
+  created_at: Date
+  updated_at: Date
+}
+
 declare module 'knex/types/tables.js' {
   interface Tables {
     assessments: Knex.CompositeTableType<
@@ -803,7 +829,7 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'needs_student'>
+      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'needs_student' | 'word_limit'>
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -840,6 +866,10 @@ declare module 'knex/types/tables.js' {
     fees: Knex.CompositeTableType<
       FeesRow,
       Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
+    >
+    figures: Knex.CompositeTableType<
+      FiguresRow,
+      Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
     >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
@@ -1004,7 +1034,7 @@ declare module 'knex/types/tables.js' {
     >
     proposal_versions: Knex.CompositeTableType<
       ProposalVersionsRow,
-      Insert<ProposalVersionsRow, 'id' | 'superseded_at'>
+      Insert<ProposalVersionsRow, 'id' | 'paper_id' | 'superseded_at'>
     >
     proposal_version_people: Knex.CompositeTableType<
       ProposalVersionPeopleRow,
@@ -1123,5 +1153,6 @@ declare module 'knex/types/tables.js' {
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>
     >
+    writings: Knex.CompositeTableType<WritingsRow, Insert<WritingsRow, 'id' | 'version' | 'created_at'>>
   }
 }

@@ -18,6 +18,16 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE o.id IS NULL`,
   ],
   [
+    'I1 a version without a paper carries its text',
+    `SELECT v.id FROM proposal_versions v
+      WHERE v.paper_id IS NULL AND COALESCE(JSON_VALUE(v.snapshot, '$.contents.writings.justification.text'), '') = ''`,
+  ],
+  [
+    'I1 every figure that stands is stored as a picture',
+    `SELECT f.id FROM figures f LEFT JOIN stored_objects o ON o.id = f.object_id
+      WHERE f.removed_at IS NULL AND (o.id IS NULL OR o.purpose <> 'figure')`,
+  ],
+  [
     'I1 every version has its confirmation letter',
     `SELECT v.id FROM proposal_versions v
       WHERE NOT EXISTS (SELECT 1 FROM outbox b WHERE b.template = 'proposal-sent' AND b.dedupe_key LIKE CONCAT('sent:', v.proposal_id, ':', v.version_number, ':%'))`,

@@ -102,5 +102,6 @@ export function packetData(
     up: upChartData(proposal),
     spectra: spectrumChartData(proposal),
     notes: notesOf(proposal),
+    written: proposal.written,
   }
 }

@@ -1,3 +1,4 @@
+import type { WrittenData } from '../writing/writtenData'
 import type { FactRow } from '../parts/FactRows'
 import type { PrintedVerdict } from '../parts/Verdict'
 
@@ -74,4 +75,6 @@ export interface PacketData {
   /** One for each mode with a slit that looks at a target with a redshift. */
   spectra: readonly SpectrumChartData[]
   notes: readonly { verdict: PrintedVerdict; words: string; text: string }[]
+  /** The justification where it was written here; null where it is a document, or there is none. */
+  written: WrittenData | null
 }

@@ -135,7 +135,7 @@ test.describe.serial('a whole call', () => {
 
     await page.goto(`/proposals/${reference}/papers`)
     await page
-      .locator('input[type="file"]')
+      .locator('input[type="file"][accept=".pdf"]')
       .first()
       .setInputFiles({ name: 'ladder.pdf', mimeType: 'application/pdf', buffer: await pdfOf(3) })
     await expect(page.getByText('ladder.pdf is kept').first()).toBeVisible()

@@ -1,5 +1,6 @@
 import type { ModeRecord, SiteRecord } from '@/lib/domain/facility/types'
 import type { Observation, ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { defaultConstraints } from '@/lib/domain/observations/defaultConstraints'
 import { findPreset } from '@/lib/science/cosmology'
 
@@ -158,6 +159,7 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
     title: 'Regular',
     closesAt: null,
     pageLimit: 4,
+    wordLimit: 2000,
     abstractLimit: 1500,
     maxSeconds: null,
     feeMinor: 0,
@@ -171,5 +173,7 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
   constraintSets: [{ ...defaultConstraints, id: 31, version: 1 }],
   observations: [observation()],
   papers: [],
+  writings: unwritten,
+  figures: [],
   ...over,
 })

@@ -71,6 +71,7 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       title: 'Regular',
       closesAt: null,
       pageLimit: 4,
+      wordLimit: 2000,
       abstractLimit: 1200,
       maxSeconds: null,
       feeMinor: 12_000,

@@ -1,4 +1,4 @@
-import { createHash, randomUUID } from 'node:crypto'
+import { randomUUID } from 'node:crypto'
 import { modes } from '../facilityData.ts'
 import { addInvestigator } from '../../../lib/domain/proposals/addInvestigator.ts'
 import { beginProposal } from '../../../lib/domain/proposals/beginProposal.ts'
@@ -17,13 +17,12 @@ import { addObservation } from '../../../lib/domain/observations/addObservation.
 import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
 import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
 import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
-import { uploadPaper } from '../../../lib/domain/papers/uploadPaper.ts'
 import { restLines } from '../../../lib/science/light/index.ts'
 import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
 import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
 import type { SeededCall } from '../calls.ts'
 import type { Facility } from '../calls.ts'
-import { paperPdf } from './paperPdf.ts'
+import { justify } from './justify.ts'
 import type { SeedProposal } from './proposalData.ts'
 import type { Dice } from './random.ts'
 import type { Teller } from './teller.ts'
@@ -126,14 +125,7 @@ export async function writeProposal(
       category: seed.category,
     }),
   )
-  const bytes = await paperPdf(seed.title)
-  await uploadPaper(lead, {
-    reference,
-    kind: 'justification',
-    file: new File([Buffer.from(bytes)], 'justification.pdf', { type: 'application/pdf' }),
-    sha256: createHash('sha256').update(bytes).digest('hex'),
-    sizeBytes: bytes.byteLength,
-  })
+  await justify(lead, reference, seed)
   for (const section of sections) await markSectionDone(lead, { reference, section, done: true })
   if (options.sentAt) {
     await story.at(options.sentAt)

@@ -19,6 +19,8 @@ export interface CallKind {
   title: string
   closesAt: Date | null
   pageLimit: number
+  /** Words of a justification written here. */
+  wordLimit: number
   abstractLimit: number
   maxSeconds: number | null
   feeMinor: number

@@ -76,7 +76,7 @@ function observingWords({ observations, modes, constraintSets }: ProposalContent
 export function readThrough(
   contents: ProposalContents,
   computation: ProposalComputation,
-  papersDetail: string,
+  papers: { justification: string; recognised: string },
 ): ReadThroughGroup[] {
   const leads = contents.people.filter(({ role }) => role === 'pi').map(({ name }) => name)
   const others = namedOnSending(contents.people)
@@ -97,7 +97,8 @@ export function readThrough(
         row('Title', 'question', contents.title || unsaid),
         row('Abstract', 'question', abstractWords(contents)),
         row('Category', 'question', contents.category || unsaid),
-        row('Papers', 'papers', papersDetail),
+        row('Justification', 'papers', papers.justification),
+        row('Without names', 'papers', papers.recognised),
       ],
     },
     {

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto'
 import type { ProposalComputation } from '../observations/types.ts'
 import type { ProposalContents } from '../proposals/types.ts'
+import { unwritten } from '../proposals/unwritten.ts'
 
 /** A proposal as it was sent: what it said, what was computed from it, and by which engine. */
 export interface Snapshot {
@@ -40,9 +41,10 @@ const moments = new Set([
   'lettersAt',
 ])
 
-/** The snapshot back from its text, moments as `Date` again. */
+/** The snapshot back from its text, moments as `Date` again, and what proposals did not have yet when it was frozen. */
 export function thaw(text: string): Snapshot {
-  return JSON.parse(text, (key, value: unknown) =>
+  const snapshot = JSON.parse(text, (key, value: unknown) =>
     moments.has(key) && typeof value === 'string' ? new Date(value) : value,
   ) as Snapshot
+  return { ...snapshot, contents: { ...{ writings: unwritten, figures: [] }, ...snapshot.contents } }
 }

@@ -1,6 +1,7 @@
 import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
 import { questionWords } from './questionWords'
+import { writingWords } from './writingWords'
 
 /** What rows are called now, by their keys; null for those that are gone. */
 export interface RowNames {
@@ -99,6 +100,12 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'people.lead-accept': ({ before }) =>
     `Leads the proposal in place of ${textAt(before, 'lead') ?? 'somebody'}`,
   'people.order': () => 'Changed the order of names',
+  'writing.save': writingWords,
+  'figure.add': ({ after }) => `Added the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.replace': ({ after }) => `Put another picture in the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.save': ({ after }) => `Changed the words of the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.remove': ({ before }) => `Took the figure ${textAt(before, 'label') ?? ''} off`,
+  'figure.order': () => 'Changed the order of figures',
   'papers.add': paperWords,
   'papers.remove': ({ before }) => `Papers: took ${textAt(before, 'fileName') ?? 'a file'} off`,
   'target.add': ({ after }) => `Added ${target(after)}`,

@@ -6,6 +6,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { markSectionDoneAction } from '../actions'
 import { CarriedHere } from '../CarriedHere'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { proposalOf } from '../proposalOf'
 import {
   addObservationAction,
@@ -23,7 +24,7 @@ export default async function ObservingPage({ params }: { params: Promise<{ refe
   return (
     <Main>
       <ObservingEditor
-        contents={{ ...contents, people: [], papers: [] }}
+        contents={{ ...contents, people: [], papers: [], writings: unwritten, figures: [] }}
         computation={computation}
         readOnly={readOnly}
         note={<CarriedHere reference={contents.reference} section="observing" />}

@@ -14,6 +14,7 @@ import {
   saveTargetAction,
 } from './actions'
 import { markSectionDoneAction } from '../actions'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'Targets' }
@@ -25,7 +26,7 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
   return (
     <Main>
       <TargetsEditor
-        contents={{ ...contents, people: [], papers: [] }}
+        contents={{ ...contents, people: [], papers: [], writings: unwritten, figures: [] }}
         computation={computation}
         readOnly={readOnly}
         actions={{
