@@ -688,6 +688,8 @@ export interface TargetGroupsRow {
   name: string
   rule: 'all' | 'at-least' | 'backup'
   at_least: number | null
+  hours_for: 'all' | 'at-least'
+  version: number
 }
 
 export interface TargetQuantitiesRow {
@@ -1063,7 +1065,10 @@ declare module 'knex/types/tables.js' {
         | 'magnification_error'
       >
     >
-    target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>
+    target_groups: Knex.CompositeTableType<
+      TargetGroupsRow,
+      Insert<TargetGroupsRow, 'id' | 'at_least' | 'hours_for' | 'version'>
+    >
     target_quantities: Knex.CompositeTableType<
       TargetQuantitiesRow,
       Insert<

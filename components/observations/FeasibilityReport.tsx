@@ -4,6 +4,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { countInWords, formatHoursFromSeconds, formatNumber, formatPower } from '@/lib/format'
 import {
+  awaitedWords,
   conditionsOf,
   cosmologyOf,
   hoursHangOn,
@@ -13,6 +14,7 @@ import {
   type ReportContents,
 } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
+import { GroupsStanding } from './GroupsStanding'
 import { ObservationTabs } from './ObservationTabs'
 import { ReportChecks } from './ReportChecks'
 import { ReportHours } from './ReportHours'
@@ -32,6 +34,12 @@ export interface FeasibilityReportProps {
   assessments?: readonly AssessmentAbove[]
   /** Beside the title of the checks: other cosmologies, a note. */
   aside?: React.ReactNode
+}
+
+/** How the hours of an observation count where it is not once. */
+function countsWords(times: number): string {
+  if (times === 0) return ', not counted in the hours of the whole'
+  return times === 1 ? '' : ` for each of ${countInWords(times, 'trigger')}`
 }
 
 /** Can it be done: one observation at a time, with its season, its checks, its lines and its hours. Names nobody. */
@@ -67,6 +75,7 @@ export function FeasibilityReport({
     ({ verdict }) => verdict === computed.verdict && verdict !== 'feasible',
   )
   const { brightness } = target
+  const awaited = awaitedWords(target)
   const fileName = target.name.replace(/[^\w+-]+/g, '-').toLowerCase()
   const tabName = (one: typeof observation) => {
     const own = contents.observations.filter(({ targetId }) => targetId === one.targetId)
@@ -81,6 +90,7 @@ export function FeasibilityReport({
 
   return (
     <div className="flex flex-col gap-10">
+      <GroupsStanding computation={computation} />
       <ObservationTabs
         chosen={observation.id}
         tabs={contents.observations.map((one) => ({
@@ -110,8 +120,9 @@ export function FeasibilityReport({
             {mode?.name ?? 'A mode that is gone'}, S/N {formatNumber(observation.wantedSnr, 0)}{' '}
             {snrWords[observation.snrPer]}
             {observation.feature ? ` in ${observation.feature}` : ''},{' '}
-            {formatHoursFromSeconds(observation.askedSeconds)} asked.
+            {formatHoursFromSeconds(observation.askedSeconds)} asked{countsWords(computed.times)}.
           </p>
+          {awaited ? <p className="mt-1 max-w-prose text-table">{awaited}</p> : null}
         </div>
         <div className="max-w-prose">
           {assessed ? <StandsAbove assessment={assessed} /> : null}

@@ -1,6 +1,7 @@
 import { TableFrame } from '@/components/tables/TableFrame'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
+import { countedHours } from '@/lib/domain/observations/rules'
 import { formatNumber } from '@/lib/format'
 
 const hours = (seconds: number | null | undefined) =>
@@ -37,7 +38,7 @@ export function TimeTable({ proposal }: { proposal: AnonymousProposal }) {
               <td>{mode?.name}</td>
               <td className="is-right">{formatNumber(observation.wantedSnr, 0)}</td>
               <td className="is-right is-computed">{hours(row?.neededSeconds)}</td>
-              <td className="is-right">{hours(observation.askedSeconds)}</td>
+              <td className="is-right">{countedHours(observation.askedSeconds, row?.times ?? 1)}</td>
               <td className="whitespace-nowrap">{row ? <VerdictMark verdict={row.verdict} /> : null}</td>
             </tr>
           )

@@ -1,3 +1,4 @@
+import { awaitedWords, groupHoursSentence, groupSentence, needOf } from '@/lib/domain/observations/rules'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
 import type { FactRow } from '../parts/FactRows'
@@ -42,10 +43,30 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
   ].filter(({ value }) => value !== '')
 }
 
-function totalWords({ targets, computation }: AnonymousProposal): string {
-  const required = targets.filter(({ need }) => need === 'required').length
+function totalWords({ targets, groups, computation }: AnonymousProposal): string {
+  const required = targets.filter((target) => needOf(target, groups) === 'required').length
   const count = targets.length === 1 ? '1 target' : `${targets.length} targets`
-  return `${count}, ${required} required; ${formatNights(computation.askedNights)}`
+  const needed = required > 0 || groups.length === 0 ? `, ${required} required` : ''
+  return `${count}${needed}; ${formatNights(computation.askedNights)}`
+}
+
+/** What the rules of groups come to, what is awaited, and why some hours stand in brackets. */
+function rulesOf({ targets, computation }: AnonymousProposal): PacketData['rules'] {
+  const isBracketed = computation.observations.some(({ times }) => times === 0)
+  return [
+    ...computation.groups.map((group) => ({
+      name: group.name,
+      text: `${groupSentence(group)} ${groupHoursSentence(group)}`,
+      verdict: group.rule === 'backup' ? null : group.verdict,
+    })),
+    ...targets.flatMap((target) => {
+      const text = awaitedWords(target)
+      return text ? [{ name: target.name, text, verdict: null }] : []
+    }),
+    ...(isBracketed
+      ? [{ name: '', text: 'Hours in brackets are not counted in those asked.', verdict: null }]
+      : []),
+  ]
 }
 
 /** Each check that is not clear, with the target it belongs to. */
@@ -84,6 +105,7 @@ export function packetData(
       asked: formatNumber(computation.askedSeconds / 3600, 1),
       verdict: computation.verdict,
     },
+    rules: rulesOf(proposal),
     cosmology: cosmologyLine(proposal),
     up: upChartData(proposal),
     notes: notesOf(proposal),

@@ -1,3 +1,4 @@
+import { countedHours } from '@/lib/domain/observations/rules'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { ABSENT, formatNumber } from '@/lib/format'
 import { formatDeclination, formatRightAscension } from '@/lib/format/sexagesimal'
@@ -32,7 +33,9 @@ export function targetRows(proposal: AnonymousProposal): PacketRow[] {
       name: target.name,
       position:
         raDeg === null || decDeg === null
-          ? 'not fixed yet'
+          ? target.opportunity
+            ? 'awaited'
+            : 'not fixed yet'
           : `${formatRightAscension(raDeg)}  ${formatDeclination(decDeg)}`,
       redshift: target.redshift === null ? ABSENT : formatNumber(target.redshift, 3),
       magnitude: brightness
@@ -62,7 +65,7 @@ export function targetRows(proposal: AnonymousProposal): PacketRow[] {
           ? `${observation.feature.replace(/ λ.*$/, '')} ${seen ? formatNumber(seen) : ''}`.trim()
           : ABSENT,
         needed: hours(result?.neededSeconds),
-        asked: hours(observation.askedSeconds),
+        asked: countedHours(observation.askedSeconds, result?.times ?? 1),
         verdict: result?.verdict ?? null,
       }
     })

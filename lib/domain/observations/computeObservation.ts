@@ -31,6 +31,7 @@ const nothing = {
   observedFeatureA: null,
   usableHours: null,
   exposure: null,
+  times: 1,
 }
 
 function withoutExposure(input: ObservationInput, checks: FeasibilityCheck[]): ObservationComputation {
@@ -144,5 +145,6 @@ export function computeObservation(input: ObservationInput): ObservationComputat
     checks,
     verdict: worstVerdict(checks.map(({ verdict }) => verdict)) ?? 'feasible',
     refusal: report.refusal,
+    times: 1,
   }
 }

@@ -11,6 +11,11 @@ export { cosmologySentence } from './regimeSentence'
 
 export { conditionsOf } from './seasonOf'
 
+export { awaitedWords } from './awaitedWords'
+export { countedHours } from './countedHours'
+export { groupHoursSentence, groupSentence } from './groupWords'
+export { groupOf } from './groupOf'
+export { needOf } from './needOf'
 export { worstVerdict } from './worstVerdict'
 export { hoursHangOn, type HoursHangOn, type HoursSpan } from './hoursUnder'
 export type { ReportContents } from './reportContents'

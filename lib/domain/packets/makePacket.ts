@@ -11,7 +11,7 @@ import { anonymise } from './anonymise'
 export type PacketVariant = 'anonymised' | 'full'
 
 /** Raised when the drawing changes, so that kept packets are made anew. */
-const layout = 1
+const layout = 2
 
 export interface PacketInput {
   snapshot: Snapshot
