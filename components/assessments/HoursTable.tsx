@@ -64,7 +64,7 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
               <td className="is-right">{hours(row.overheadSeconds)}</td>
               <td className="is-right is-computed">{hours(row.neededSeconds)}</td>
               <td className="is-right font-semibold">
-                {trueSeconds === null ? ABSENT : hours(shares[index] ?? 0)}
+                {trueSeconds === null || row.times === 0 ? ABSENT : hours(shares[index] ?? 0)}
               </td>
               <td className="is-right">{hours(row.askedSeconds)}</td>
               <td>

@@ -2,7 +2,7 @@ import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { VerdictMark } from '@/components/ui/VerdictMark'
-import { countInWords, formatHoursFromSeconds, formatNumber, formatPower } from '@/lib/format'
+import { countInWords, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 import {
   awaitedWords,
   conditionsOf,
@@ -21,6 +21,7 @@ import { ReportHours } from './ReportHours'
 import { ReportSeason } from './ReportSeason'
 import { ReportSpectrum } from './ReportSpectrum'
 import { snrWords } from './snrWords'
+import { targetWords } from './targetWords'
 import { StandsAbove, type AssessmentAbove } from './StandsAbove'
 
 export interface FeasibilityReportProps {
@@ -74,7 +75,6 @@ export function FeasibilityReport({
   const firstOpen = computed.checks.find(
     ({ verdict }) => verdict === computed.verdict && verdict !== 'feasible',
   )
-  const { brightness } = target
   const awaited = awaitedWords(target)
   const fileName = target.name.replace(/[^\w+-]+/g, '-').toLowerCase()
   const tabName = (one: typeof observation) => {
@@ -106,16 +106,7 @@ export function FeasibilityReport({
         <div>
           <h2 className="text-display max-sm:text-figure">{target.name}</h2>
           <p className="mt-1 text-muted">
-            {target.raTyped} {target.decTyped}
-            {target.redshift !== null ? `, z = ${target.redshiftTyped}` : ''}
-            {brightness
-              ? `, ${brightness.band} = ${formatNumber(brightness.value, 1)} (${brightness.system})`
-              : ''}
-            {isForLine(input) && target.line
-              ? `, ${target.line.name} of ${formatPower(target.line.value)} ${target.line.kind === 'flux' ? 'erg/s/cm²' : 'erg/s'}`
-              : ''}
-            {target.magnification ? `, magnified ${formatNumber(target.magnification, 1)} times` : ''}
-            .
+            {targetWords(target, isForLine(input))}.
             <br />
             {mode?.name ?? 'A mode that is gone'}, S/N {formatNumber(observation.wantedSnr, 0)}{' '}
             {snrWords[observation.snrPer]}
@@ -133,6 +124,9 @@ export function FeasibilityReport({
               words={`Computed: ${computed.verdict.replace('-', ' ')}, ${clear} of ${computed.checks.length} checks clear.`}
             />
             {firstOpen ? <p className="mt-1">{firstOpen.why}</p> : null}
+            {awaited && target.raDeg === null ? (
+              <p className="mt-1">When it is up is not among them: it has no position yet.</p>
+            ) : null}
           </BarNote>
         </div>
       </div>

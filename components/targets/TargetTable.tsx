@@ -103,7 +103,9 @@ export function TargetTable({ shown, totals, maxAirmass, months, ...props }: Tar
           <td role="cell" colSpan={4 + columns.length + 1} data-head="All">
             {countInWords(rows.length, 'target', 'targets', true)}
             {required > 0 && required < rows.length ? `, ${required} required` : ''}
-            {grouped > 0 ? `, ${grouped} in ${countInWords(props.groups.length, 'group')}` : ''}
+            {grouped > 0
+              ? `, ${grouped === rows.length ? 'all' : countInWords(grouped, '', '').trim()} in ${countInWords(props.groups.length, 'group')}`
+              : ''}
           </td>
           <td role="cell" className="is-right is-computed" data-head="Needed, h">
             {formatNumber(totals.neededSeconds / 3600, 1)}

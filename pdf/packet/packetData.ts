@@ -1,4 +1,3 @@
-import { awaitedWords, groupHoursSentence, groupSentence, needOf } from '@/lib/domain/observations/rules'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
 import type { FactRow } from '../parts/FactRows'
@@ -43,30 +42,10 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
   ].filter(({ value }) => value !== '')
 }
 
-function totalWords({ targets, groups, computation }: AnonymousProposal): string {
-  const required = targets.filter((target) => needOf(target, groups) === 'required').length
+function totalWords({ targets, groups, computation }: AnonymousProposal, required: number): string {
   const count = targets.length === 1 ? '1 target' : `${targets.length} targets`
   const needed = required > 0 || groups.length === 0 ? `, ${required} required` : ''
   return `${count}${needed}; ${formatNights(computation.askedNights)}`
-}
-
-/** What the rules of groups come to, what is awaited, and why some hours stand in brackets. */
-function rulesOf({ targets, computation }: AnonymousProposal): PacketData['rules'] {
-  const isBracketed = computation.observations.some(({ times }) => times === 0)
-  return [
-    ...computation.groups.map((group) => ({
-      name: group.name,
-      text: `${groupSentence(group)} ${groupHoursSentence(group)}`,
-      verdict: group.rule === 'backup' ? null : group.verdict,
-    })),
-    ...targets.flatMap((target) => {
-      const text = awaitedWords(target)
-      return text ? [{ name: target.name, text, verdict: null }] : []
-    }),
-    ...(isBracketed
-      ? [{ name: '', text: 'Hours in brackets are not counted in those asked.', verdict: null }]
-      : []),
-  ]
 }
 
 /** Each check that is not clear, with the target it belongs to. */
@@ -85,7 +64,7 @@ function notesOf({ computation, targets }: AnonymousProposal): PacketData['notes
 /** What a packet says, from a proposal without names; names are added by whoever may read them. */
 export function packetData(
   proposal: AnonymousProposal,
-  given: { label: string; people: PacketData['people'] },
+  given: Pick<PacketData, 'label' | 'people' | 'rules'> & { required: number },
 ): PacketData {
   const { computation, call } = proposal
   return {
@@ -100,12 +79,12 @@ export function packetData(
     magnitudeHead: magnitudeHead(proposal),
     rows: targetRows(proposal),
     total: {
-      words: totalWords(proposal),
+      words: totalWords(proposal, given.required),
       needed: formatNumber(computation.neededSeconds / 3600, 1),
       asked: formatNumber(computation.askedSeconds / 3600, 1),
       verdict: computation.verdict,
     },
-    rules: rulesOf(proposal),
+    rules: given.rules,
     cosmology: cosmologyLine(proposal),
     up: upChartData(proposal),
     notes: notesOf(proposal),

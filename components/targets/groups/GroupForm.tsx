@@ -11,6 +11,7 @@ import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
+import { countInWords } from '@/lib/format'
 import type { Target, TargetGroup } from '@/lib/domain/proposals/types'
 import { groupRow, groupSchema } from '@/lib/domain/targetGroups/rules'
 import type { TargetActions } from '../targetActions'
@@ -76,26 +77,30 @@ export function GroupForm({ reference, group, targets, save, onDone }: GroupForm
                 whole
                 name="group.atLeast"
                 label="How many must be done"
-                help={count === 0 ? 'Choose its targets first.' : `Of the ${count} in it.`}
+                help={
+                  count === 0 ? 'Choose its targets first.' : `Of the ${countInWords(count, 'target')} in it.`
+                }
               />
               <RadioField name="group.hoursFor" label="Hours are asked for" options={hours} />
             </>
           ) : null}
         </div>
-        <CheckListField
-          name="group.targetIds"
-          label="Targets in it"
-          help="A target stands in one group at most."
-          options={targets.map((target) => ({
-            value: String(target.id),
-            label: target.name,
-            note: target.group && target.group !== group?.name ? `now in ${target.group}` : undefined,
-          }))}
-        />
+        <div>
+          <CheckListField
+            name="group.targetIds"
+            label="Targets in it"
+            help="A target stands in one group at most."
+            options={targets.map((target) => ({
+              value: String(target.id),
+              label: target.name,
+              note: target.group && target.group !== group?.name ? `now in ${target.group}` : undefined,
+            }))}
+          />
+        </div>
       </div>
       <div className="flex flex-wrap items-center gap-5">
         <SubmitButton busyWord="Saving">Save the group</SubmitButton>
-        <LinkLikeButton onClick={onDone}>Leave it as it was</LinkLikeButton>
+        <LinkLikeButton onClick={onDone}>{group ? 'Leave it as it was' : 'Leave it'}</LinkLikeButton>
       </div>
     </ActionForm>
   )

@@ -62,7 +62,8 @@ function awaitedCells({ awaited }: SeedProposal): Partial<TargetRow> {
     ...{ name: awaited.name, event: awaited.event, trigger: awaited.trigger, ra: '', dec: '' },
     reaction: String(awaited.reactionHours),
     triggers: String(awaited.triggers),
-    redshiftType: 'assumed',
+    // Of a kind, not of one: any of them may be nearer or brighter.
+    ...{ redshiftType: 'assumed', redshiftError: '0.01', magnitudeError: '0.4' },
   }
 }
 

@@ -30,7 +30,7 @@ function atLeastProblem(text: string, of: number): string | null {
   if (value <= of) return null
   return of === 1
     ? 'Only one target is in it, so no more than one can be wanted.'
-    : `Only ${countInWords(of, 'target')} are in it, so no more than ${of} can be wanted.`
+    : `Only ${countInWords(of, 'target')} are in it, so no more than ${countInWords(of, '', '').trim()} can be wanted.`
 }
 
 /** A group as its form gives it: text in, a group and the keys of its targets out. */

@@ -28,7 +28,7 @@ describe('a group as it is typed', () => {
     [{ atLeast: '5' }, {}],
     [{ atLeast: '0' }, { atLeast: 'At least one of them must be done.' }],
     [{ atLeast: '-2' }, { atLeast: 'At least one of them must be done.' }],
-    [{ atLeast: '6' }, { atLeast: 'Only five targets are in it, so no more than 5 can be wanted.' }],
+    [{ atLeast: '6' }, { atLeast: 'Only five targets are in it, so no more than five can be wanted.' }],
     [
       { atLeast: '2', targetIds: ['7', '7'] },
       { atLeast: 'Only one target is in it, so no more than one can be wanted.' },

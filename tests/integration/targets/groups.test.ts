@@ -90,8 +90,8 @@ describe('groups of targets', () => {
     const { changes } = await readHistory(ctx, contents)
     expect(changes.slice(0, 3).map(({ words }) => words)).toEqual([
       'Took the group “Two of us” out',
-      'Group Pair, now Two of us: 1 of two targets to two targets, a backup',
-      'Made the group Pair: 1 of two targets',
+      'Group Pair, now Two of us: one of two targets to two targets, a backup',
+      'Made the group Pair: one of two targets',
     ])
   })
 

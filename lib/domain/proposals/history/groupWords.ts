@@ -5,7 +5,8 @@ function ruleWords(value: unknown): string {
   const rule = textAt(value, 'group', 'rule')
   const count = countInWords(namesAt(value, 'names').length, 'target')
   if (rule === 'backup') return `${count}, a backup`
-  return rule === 'at-least' ? `${numberAt(value, 'group', 'atLeast') ?? 1} of ${count}` : `all of ${count}`
+  const wanted = countInWords(numberAt(value, 'group', 'atLeast') ?? 1, '', '').trim()
+  return rule === 'at-least' ? `${wanted} of ${count}` : `all of ${count}`
 }
 
 /** What became of a group: its name, its rule, how many are in it. */

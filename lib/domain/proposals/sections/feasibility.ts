@@ -1,6 +1,6 @@
 import { paths } from '@/lib/paths'
 import { groupInBrief } from '../../observations/groupWords'
-import { needOf } from '../../observations/needOf'
+import { isSpared } from '../../observations/isSpared'
 import type { GroupComputation, ProposalComputation } from '../../observations/types'
 import type { ProposalContents } from '../types'
 import type { Finding, Missing } from './finding'
@@ -17,7 +17,7 @@ function groupsInBrief(groups: readonly GroupComputation[]): string[] {
  * A target that its group can spare, and a backup, ask for no answer. The instrument scientists have the last word, so a verdict alone never bars a proposal.
  */
 export function feasibilityFinding(contents: ProposalContents, computation: ProposalComputation): Finding {
-  const { targets, groups, reference, sectionsDone } = contents
+  const { targets, reference, sectionsDone } = contents
   const href = paths.proposalSection(reference, 'feasibility')
   if (contents.observations.length === 0)
     return {
@@ -27,14 +27,8 @@ export function feasibilityFinding(contents: ProposalContents, computation: Prop
       waitsFor: 'observing',
     }
   const nameOf = (targetId: number) => targets.find(({ id }) => id === targetId)?.name ?? 'A target'
-  const isSpared = (targetId: number) => {
-    const target = targets.find(({ id }) => id === targetId)
-    if (!target) return false
-    const standing = computation.groups.find(({ name }) => name === target.group)
-    return needOf(target, groups) === 'backup' || (standing && standing.verdict !== 'not-feasible')
-  }
   const failing = computation.observations.filter(
-    ({ verdict, targetId }) => verdict === 'not-feasible' && !isSpared(targetId),
+    (one) => one.verdict === 'not-feasible' && !isSpared(one, contents, computation),
   )
   const found = failing.map(({ observationId, targetId, checks }): Missing => {
     const check = checks.find(({ verdict }) => verdict === 'not-feasible')
