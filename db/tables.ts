@@ -716,6 +716,8 @@ export interface TargetGroupsRow {
   name: string
   rule: 'all' | 'at-least' | 'backup'
   at_least: number | null
+  hours_for: 'all' | 'at-least'
+  version: number
 }
 
 export interface TargetQuantitiesRow {
@@ -1122,7 +1124,10 @@ declare module 'knex/types/tables.js' {
         | 'spectrum_table'
       >
     >
-    target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>
+    target_groups: Knex.CompositeTableType<
+      TargetGroupsRow,
+      Insert<TargetGroupsRow, 'id' | 'at_least' | 'hours_for' | 'version'>
+    >
     target_quantities: Knex.CompositeTableType<
       TargetQuantitiesRow,
       Insert<

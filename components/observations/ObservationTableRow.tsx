@@ -15,6 +15,7 @@ import { askFor, observationRow } from '@/lib/domain/observations/rules'
 import { observationRowSchema, type ObservationRow } from '@/lib/domain/observations/schema'
 import type { ObservationComputation } from '@/lib/domain/observations/types'
 import type { Observation, ProposalContents } from '@/lib/domain/proposals/types'
+import { CountsNote } from '@/components/targets/CountsNote'
 import { ABSENT, formatDuration, formatHoursFromSeconds } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { NeededCell } from '../targets/NeededCell'
@@ -168,6 +169,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
                 take {askFor(needed)}
               </button>
             ) : null}
+            <CountsNote times={computed?.times ?? null} />
           </span>
         </td>
         <td role="cell" data-head="Verdict" className="whitespace-nowrap">

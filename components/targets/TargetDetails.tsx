@@ -12,6 +12,8 @@ import { frames, lineKinds, lines, provenances, redshiftKinds, shapes } from './
 
 export interface TargetDetailsProps {
   readOnly: string | null
+  /** Whether what is awaited may be asked for. */
+  takesAwaited: boolean
   onUp: (() => void) | null
   onDown: (() => void) | null
   onRemove: (() => void) | null
@@ -23,13 +25,31 @@ export interface TargetDetailsProps {
  * What does not fit in a row, in groups: redshift, magnitude, spectrum, a line, shape, what lies on the way, motion; and moving
  * or taking out the row.
  */
-export function TargetDetails({ readOnly, onUp, onDown, onRemove, onSave }: TargetDetailsProps) {
+export function TargetDetails({
+  readOnly,
+  takesAwaited,
+  onUp,
+  onDown,
+  onRemove,
+  onSave,
+}: TargetDetailsProps) {
   const id = useId()
   const shared = { offReason: readOnly ?? undefined }
   const number = { ...shared, width: 'full' } as const
   return (
     <ActionFormContext value={{ id, busy: false }}>
       <div className="grid gap-x-10 gap-y-6 border-t border-rule py-4 md:grid-cols-2 xl:grid-cols-3">
+        {takesAwaited ? (
+          <DetailGroup
+            title="What is awaited"
+            note="For a target that has not happened yet: leave its position empty and fill in all four. Hours are asked for each trigger."
+          >
+            <TextField name="event" label="Class of event" {...shared} />
+            <TextField name="trigger" label="What triggers it" {...shared} />
+            <NumberField name="reaction" label="Observed within" unit="h" {...number} />
+            <NumberField whole name="triggers" label="Triggers asked for" {...number} />
+          </DetailGroup>
+        ) : null}
         <DetailGroup title="The redshift">
           <SelectField name="redshiftType" label="Redshift is" options={redshiftKinds} {...shared} />
           <NumberField name="redshiftError" label="Its error" {...number} />

@@ -39,6 +39,14 @@ const kinds = [
     fee_minor: 0,
     needs_student: 1,
   },
+  {
+    kind: 'opportunity',
+    title: 'Target of opportunity',
+    page_limit: 4,
+    abstract_limit: 1500,
+    max_seconds: 40 * 3600,
+    fee_minor: 12_000,
+  },
 ] as const
 
 export interface SeededCall {

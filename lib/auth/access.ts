@@ -142,6 +142,8 @@ export const access = {
     removePaper: investigator,
     addTarget: investigator,
     saveTarget: investigator,
+    saveGroup: investigator,
+    removeGroup: investigator,
     removeTarget: investigator,
     restoreTarget: investigator,
     reorderTargets: investigator,

@@ -8,6 +8,7 @@ import { Words } from '../parts/Words'
 import { colour, size } from '../theme'
 import type { PacketData } from './packetTypes'
 import { SpectrumChart } from './SpectrumChart'
+import { RuleLines } from './RuleLines'
 import { TargetsTable } from './TargetsTable'
 import { UpChart } from './UpChart'
 
@@ -47,6 +48,7 @@ export function PacketDocument({ data }: { data: PacketData }) {
         </View>
         <Heading>Targets and hours</Heading>
         <TargetsTable data={data} />
+        <RuleLines rules={data.rules} />
         <Words base={8.6} style={{ color: colour.muted, marginTop: 7, lineHeight: 1.4 }}>
           {data.cosmology}
         </Words>

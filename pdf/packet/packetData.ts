@@ -43,10 +43,10 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
   ].filter(({ value }) => value !== '')
 }
 
-function totalWords({ targets, computation }: AnonymousProposal): string {
-  const required = targets.filter(({ need }) => need === 'required').length
+function totalWords({ targets, groups, computation }: AnonymousProposal, required: number): string {
   const count = targets.length === 1 ? '1 target' : `${targets.length} targets`
-  return `${count}, ${required} required; ${formatNights(computation.askedNights)}`
+  const needed = required > 0 || groups.length === 0 ? `, ${required} required` : ''
+  return `${count}${needed}; ${formatNights(computation.askedNights)}`
 }
 
 /** Each check that is not clear, with the target it belongs to. */
@@ -77,7 +77,7 @@ function carriedLines({ computation, targets }: AnonymousProposal): string[] {
 /** What a packet says, from a proposal without names; names are added by whoever may read them. */
 export function packetData(
   proposal: AnonymousProposal,
-  given: { label: string; people: PacketData['people'] },
+  given: Pick<PacketData, 'label' | 'people' | 'rules'> & { required: number },
 ): PacketData {
   const { computation, call } = proposal
   return {
@@ -92,11 +92,12 @@ export function packetData(
     magnitudeHead: magnitudeHead(proposal),
     rows: targetRows(proposal),
     total: {
-      words: totalWords(proposal),
+      words: totalWords(proposal, given.required),
       needed: formatNumber(computation.neededSeconds / 3600, 1),
       asked: formatNumber(computation.askedSeconds / 3600, 1),
       verdict: computation.verdict,
     },
+    rules: given.rules,
     cosmology: cosmologyLine(proposal),
     carried: carriedLines(proposal),
     up: upChartData(proposal),

@@ -68,6 +68,8 @@ export interface PacketData {
   magnitudeHead: { head: string; unit: string }
   rows: readonly PacketRow[]
   total: { words: string; needed: string; asked: string; verdict: PrintedVerdict | null }
+  /** Under the table: how each group stands, what is awaited, what the brackets mean. */
+  rules: readonly { name: string; text: string; verdict: PrintedVerdict | null }[]
   cosmology: string
   /** How magnitudes were carried from their bands to the instruments. */
   carried: readonly string[]

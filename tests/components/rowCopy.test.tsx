@@ -30,6 +30,8 @@ function show(save: TargetActions['save'], readOnly: string | null = null) {
     restore: no,
     reorder: no,
     importRows: no,
+    saveGroup: no,
+    removeGroup: no,
     ask: no,
   }
   const given = contents()

@@ -8,6 +8,7 @@ import { markSectionDone } from '../../../lib/domain/proposals/markSectionDone.t
 import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
 import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
 import { readContents } from '../../../lib/domain/proposals/readContents.ts'
+import { saveGroup } from '../../../lib/domain/targetGroups/saveGroup.ts'
 import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
 import { targetRowSchema, type TargetRow } from '../../../lib/domain/targets/schema.ts'
 import { emptyTargetRow } from '../../../lib/domain/targets/targetRow.ts'
@@ -54,9 +55,25 @@ function lineOf(seed: SeedProposal, chance: Dice): Partial<TargetRow> {
   }
 }
 
-function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) {
+/** What is awaited has no position. */
+function awaitedCells({ awaited }: SeedProposal): Partial<TargetRow> {
+  if (!awaited) return {}
+  return {
+    ...{ name: awaited.name, event: awaited.event, trigger: awaited.trigger, ra: '', dec: '' },
+    reaction: String(awaited.reactionHours),
+    triggers: String(awaited.triggers),
+    // Of a kind, not of one: any of them may be nearer or brighter.
+    ...{ redshiftType: 'assumed', redshiftError: '0.01', magnitudeError: '0.4' },
+  }
+}
+
+/** A declination that never rises far enough over the site. */
+const neverUpDeg = 58
+
+function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number], isLast: boolean) {
   const raDeg = (chance.between(...raHours) * 15 + 360) % 360
-  const decDeg = chance.between(-62, 2)
+  const drawnDeg = chance.between(-62, 2)
+  const decDeg = seed.group && isLast ? neverUpDeg : drawnDeg
   const ra = formatRightAscension(raDeg, 2)
   const dec = formatDeclination(decDeg, 1)
   const digits = (text: string) => text.replace(/\s/g, '')
@@ -75,6 +92,7 @@ function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) 
     magnitudeError: '0.08',
     band: `${band} AB`,
     ...lineOf(seed, chance),
+    ...awaitedCells(seed),
   }
   return targetRowSchema.parse(row)
 }
@@ -111,10 +129,13 @@ export async function writeProposal(
   }
   if (seed.kind === 'thesis') await nameStudent(lead, reference)
   for (let n = 0; n < seed.targets; n += 1)
-    await addTarget(lead, { reference, row: targetRow(seed, chance, options.raHours) })
+    await addTarget(lead, {
+      reference,
+      row: targetRow(seed, chance, options.raHours, n === seed.targets - 1),
+    })
+  if (seed.group) await makeGroup(lead, reference, seed.group)
   await askForHours(lead, reference, seed, facility)
-  const { observations } = await readContents(lead.db, reference)
-  const hours = observations.reduce((sum, { askedSeconds }) => sum + askedSeconds, 0) / 3600
+  const hours = computeProposal(await readContents(lead.db, reference)).askedSeconds / 3600
   await saveQuestion(
     lead,
     saveQuestionSchema.parse({
@@ -151,6 +172,19 @@ async function nameStudent(lead: Awaited<ReturnType<Teller['as']>>, reference: s
     orcid: '',
     isStudent: true,
     isSupervisor: false,
+  })
+}
+
+async function makeGroup(
+  lead: Awaited<ReturnType<Teller['as']>>,
+  reference: string,
+  { name, atLeast }: { name: string; atLeast: number },
+): Promise<void> {
+  const { targets } = await readContents(lead.db, reference)
+  const group = { name, rule: 'at-least', atLeast, hoursFor: 'all' } as const
+  await saveGroup(lead, {
+    ...{ reference, id: null, version: 0 },
+    group: { ...group, targetIds: targets.map(({ id }) => id) },
   })
 }
 

@@ -32,6 +32,7 @@ const nothing = {
   usableHours: null,
   exposure: null,
   carried: null,
+  times: 1,
 }
 
 function withoutExposure(input: ObservationInput, checks: FeasibilityCheck[]): ObservationComputation {
@@ -147,5 +148,6 @@ export function computeObservation(input: ObservationInput): ObservationComputat
     checks,
     verdict: worstVerdict(checks.map(({ verdict }) => verdict)) ?? 'feasible',
     refusal: report.refusal,
+    times: 1,
   }
 }

@@ -16,7 +16,8 @@ const check = (
 /** A request that names something the engine cannot start from: each gap is a check that is not clear. */
 export function gapChecks(target: Target, isForLine: boolean): FeasibilityCheck[] {
   const gaps: FeasibilityCheck[] = []
-  if (target.raDeg === null)
+  // What is awaited has no position yet: when it is up cannot be judged, and nobody can mend that.
+  if (target.raDeg === null && !target.opportunity)
     gaps.push(
       check('position-given', 'Position given', {
         measured: 'none',

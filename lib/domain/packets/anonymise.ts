@@ -2,7 +2,7 @@ import type { Reference } from '@/lib/writing/references'
 import type { Call } from '../calls/types'
 import type { ModeRecord, SiteRecord } from '../facility/types'
 import type { ProposalComputation } from '../observations/types'
-import type { ChosenCosmology, ConstraintSet, Observation, Target } from '../proposals/types'
+import type { ChosenCosmology, ConstraintSet, Observation, Target, TargetGroup } from '../proposals/types'
 import type { Snapshot } from '../submission/snapshot'
 import { readBibtex } from '../writings/readBibtex'
 
@@ -23,6 +23,7 @@ export interface AnonymousProposal {
   site: SiteRecord
   /** The modes the observations use. */
   modes: ModeRecord[]
+  groups: TargetGroup[]
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]
@@ -77,6 +78,7 @@ export function anonymise({ contents, computation, engineVersion }: Snapshot): A
     cosmology: contents.cosmology,
     site: contents.site,
     modes: contents.modes.filter((mode) => used.has(mode.modeId)),
+    groups: contents.groups,
     targets: contents.targets,
     constraintSets: contents.constraintSets,
     observations: contents.observations,

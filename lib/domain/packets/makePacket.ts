@@ -8,7 +8,9 @@ import type { PacketData } from '@/pdf/packet/packetTypes'
 import { render } from '@/pdf/render'
 import { renderWritten } from '@/pdf/writing/renderWritten'
 import type { Snapshot } from '../submission/snapshot'
+import { needOf } from '../observations/needOf'
 import { anonymise } from './anonymise'
+import { packetRules } from './packetRules'
 
 export type PacketVariant = 'anonymised' | 'full'
 
@@ -33,7 +35,10 @@ function contentOf(input: PacketInput) {
   const { contents } = input.snapshot
   const people =
     input.variant === 'full' ? contents.people.map(({ name, institute }) => ({ name, institute })) : []
-  return packetData(anonymise(input.snapshot), { label: labelOf(input), people })
+  const proposal = anonymise(input.snapshot)
+  const { targets, groups } = proposal
+  const required = targets.filter((target) => needOf(target, groups) === 'required').length
+  return packetData(proposal, { label: labelOf(input), people, required, rules: packetRules(proposal) })
 }
 
 /** Hash of everything that goes into a packet: the same in gives the same packet, and its fingerprint. */

@@ -49,6 +49,32 @@ export type TargetSpectrum =
   | { kind: 'black-body'; temperatureK: number }
   | { kind: 'table'; wavelengthsNm: number[]; fLambda: number[] }
 
+/** What is asked of a target that is awaited, not known. */
+export interface Opportunity {
+  /** Class of event: 'tidal disruption'. */
+  event: string
+  /** What must be seen for it to be observed. */
+  trigger: string
+  /** From the trigger to the first exposure. */
+  reactionSeconds: number
+  /** How many such events are asked for; hours are asked for each. */
+  triggers: number
+}
+
+/** Targets that share one rule. */
+export interface TargetGroup {
+  id: number
+  /** No two of a proposal are called the same. */
+  name: string
+  /** All of them must be done, at least so many, or they are used only when the others cannot be. */
+  rule: 'all' | 'at-least' | 'backup'
+  /** How many; null but for 'at-least'. */
+  atLeast: number | null
+  /** Whose hours are asked of an 'at-least' group: of all it lists, or of as many as must be done. */
+  hoursFor: 'all' | 'at-least'
+  version: number
+}
+
 export interface Target {
   id: number
   position: number
@@ -68,7 +94,12 @@ export interface Target {
   redshiftError: number | null
   redshiftFrame: 'heliocentric' | 'cmb'
   redshiftType: 'spectroscopic' | 'photometric' | 'assumed'
+  /** How much it is needed by itself; in a group the group's rule counts instead. */
   need: 'required' | 'optional' | 'backup'
+  /** Name of its group. */
+  group: string | null
+  /** What it waits for; null for a target that is there already. */
+  opportunity: Opportunity | null
   brightness: Brightness | null
   line: LineLight | null
   /** Null where none is stated: flat in f_nu. */
@@ -187,6 +218,7 @@ export interface ProposalContents {
   /** Modes on offer in the call. */
   modes: ModeRecord[]
   people: Investigator[]
+  groups: TargetGroup[]
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]

@@ -1,6 +1,9 @@
 import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
 import type { ProposalSection } from '@/lib/paths'
 import { findPreset } from '@/lib/science/cosmology'
+import { awaitedWords } from '../observations/awaitedWords'
+import { groupHoursSentence, groupSentence } from '../observations/groupWords'
+import { needOf } from '../observations/needOf'
 import type { ProposalComputation } from '../observations/types'
 import { leftOut, namedOnSending } from '../proposals/namedOnSending'
 import type { ProposalContents } from '../proposals/types'
@@ -32,12 +35,13 @@ function abstractWords({ abstract }: ProposalContents): string {
   return `${formatNumber([...abstract].length)} characters. ${firstWords(abstract)}`
 }
 
-function targetWords({ targets }: ProposalContents): string {
+function targetWords({ targets, groups }: ProposalContents): string {
   if (targets.length === 0) return unsaid
-  const required = targets.filter(({ need }) => need === 'required').length
+  const required = targets.filter((target) => needOf(target, groups) === 'required').length
   const redshifts = targets.flatMap(({ redshift }) => (redshift === null ? [] : [redshift]))
   const span = [Math.min(...redshifts), Math.max(...redshifts)].map((z) => formatNumber(z, 3))
-  const parts = [targets.length === 1 ? '1 target' : `${targets.length} targets`, `${required} required`]
+  const parts = [targets.length === 1 ? '1 target' : `${targets.length} targets`]
+  if (required > 0) parts.push(`${required} required`)
   if (redshifts.length > 0) parts.push(`z = ${[...new Set(span)].join(' to ')}`)
   return parts.join(', ')
 }
@@ -105,6 +109,13 @@ export function readThrough(
       question: 'Where is it?',
       rows: [
         row('Targets', 'targets', targetWords(contents)),
+        ...computation.groups.map((group) =>
+          row(group.name, 'targets', `${groupSentence(group)} ${groupHoursSentence(group)}`),
+        ),
+        ...contents.targets.flatMap((target) => {
+          const awaited = awaitedWords(target)
+          return awaited ? [row(target.name, 'targets', awaited)] : []
+        }),
         row('Cosmology', 'cosmology', cosmologyWords(contents)),
       ],
     },

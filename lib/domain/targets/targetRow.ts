@@ -22,6 +22,11 @@ export const emptyTargetRow: TargetRow = {
   provenance: 'observed',
   source: '',
   need: 'required',
+  group: '',
+  event: '',
+  trigger: '',
+  reaction: '',
+  triggers: '',
   geometry: 'point',
   effectiveRadius: '',
   sersicIndex: '',
@@ -56,7 +61,7 @@ function spectrumCells(spectrum: Target['spectrum'] | undefined) {
 
 /** A kept target as the text of its row: what was typed where that is kept, else the value written out. */
 export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): TargetRow {
-  const { brightness } = target
+  const { brightness, opportunity } = target
   return {
     name: target.name,
     ra: target.raTyped,
@@ -71,6 +76,11 @@ export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): 
     provenance: brightness?.provenance ?? 'observed',
     source: brightness?.source ?? '',
     need: target.need,
+    group: target.group ?? '',
+    event: opportunity?.event ?? '',
+    trigger: opportunity?.trigger ?? '',
+    reaction: opportunity ? text(Number((opportunity.reactionSeconds / 3600).toFixed(4))) : '',
+    triggers: text(opportunity?.triggers),
     geometry: target.geometry,
     effectiveRadius: text(target.effectiveRadiusArcsec),
     sersicIndex: text(target.sersicIndex),

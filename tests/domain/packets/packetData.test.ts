@@ -2,6 +2,7 @@ import { createElement } from 'react'
 import { describe, expect, it } from 'vitest'
 import { computeProposal } from '@/lib/domain/observations/computeProposal'
 import { anonymise } from '@/lib/domain/packets/anonymise'
+import { packetRules } from '@/lib/domain/packets/packetRules'
 import type { Snapshot } from '@/lib/domain/submission/snapshot'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
 import { packetData } from '@/pdf/packet/packetData'
@@ -14,7 +15,9 @@ function dataOf(over: Partial<ProposalContents>) {
   const whole = contents(over)
   const computation = computeProposal(whole)
   const snapshot = { contents: whole, computation, engineVersion: computation.engineVersion } as Snapshot
-  return packetData(anonymise(snapshot), { label: '14-083', people: [] })
+  const proposal = anonymise(snapshot)
+  const given = { label: '14-083', people: [], required: whole.targets.length }
+  return packetData(proposal, { ...given, rules: packetRules(proposal) })
 }
 
 const law = { kind: 'power-law', index: -0.5, indexError: null } as const

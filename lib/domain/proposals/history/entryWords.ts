@@ -1,5 +1,6 @@
 import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
+import { groupWords } from './groupWords'
 import { questionWords } from './questionWords'
 import { writingWords } from './writingWords'
 
@@ -111,7 +112,10 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'target.add': ({ after }) => `Added ${target(after)}`,
   'target.save': ({ before, after }) => {
     const [was, is] = [target(before), target(after)]
-    return was === is ? `Changed ${is}` : `Renamed ${was} to ${is}`
+    if (was !== is) return `Renamed ${was} to ${is}`
+    const [from, to] = [textAt(before, 'target', 'group'), textAt(after, 'target', 'group')]
+    if (from === to) return `Changed ${is}`
+    return to === null ? `Took ${is} out of ${from}` : `Put ${is} into ${to}`
   },
   'target.remove': ({ before }) => `Took ${target(before)} off`,
   'target.restore': ({ after }) => `Brought ${target(after)} back`,
@@ -122,6 +126,8 @@ export const entryWords: Readonly<Record<string, Words>> = {
       ? `Added ${formatNumber(names.length)} targets from a list`
       : `Added ${formatList(names)}`
   },
+  'group.save': groupWords,
+  'group.remove': ({ before }) => `Took the group ${quoted(textAt(before, 'group', 'name') ?? '')} out`,
   'observation.add': ({ after }, names) => `Added ${observed(after, names)}`,
   'observation.save': ({ before, after }, names) => {
     const asked = (value: unknown) => numberAt(value, 'observation', 'askedSeconds')

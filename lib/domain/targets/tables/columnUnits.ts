@@ -24,4 +24,6 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['lineLuminosity', 'erg/s'],
   ['lineLuminosityError', 'erg/s'],
   ['lineWidth', 'km/s'],
+  ['reaction', 'h'],
+  ['triggers', ''],
 ])

@@ -71,6 +71,11 @@ function rowOf(cells: Cells, said: Said): TargetRow {
     band: bandOf(cells.get('band') || said.band, cells.get('system') ?? ''),
     provenance: choice(text('provenance'), ['observed', 'predicted'], 'observed'),
     source: text('source'),
+    group: text('group'),
+    event: text('event'),
+    trigger: text('trigger'),
+    reaction: text('reaction'),
+    triggers: text('triggers'),
     need: choice(text('need'), ['required', 'optional', 'backup'], 'required'),
     geometry:
       text('effectiveRadius') === '' ? 'point' : choice(text('geometry'), ['sersic', 'uniform'], 'sersic'),

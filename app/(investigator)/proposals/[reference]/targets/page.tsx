@@ -8,9 +8,11 @@ import {
   addTargetAction,
   askTimesAction,
   importTargetsAction,
+  removeGroupAction,
   removeTargetAction,
   reorderTargetsAction,
   restoreTargetAction,
+  saveGroupAction,
   saveTargetAction,
 } from './actions'
 import { markSectionDoneAction } from '../actions'
@@ -36,6 +38,8 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
           restore: restoreTargetAction,
           reorder: reorderTargetsAction,
           importRows: importTargetsAction,
+          saveGroup: saveGroupAction,
+          removeGroup: removeGroupAction,
           ask: askTimesAction,
         }}
       />
