@@ -105,8 +105,8 @@ export interface CallKindsRow {
   max_seconds: number | null
   fee_minor: number
   panel_id: number
-  needs_student: 0 | 1
   word_limit: number
+  needs_student: 0 | 1
 }
 
 export interface CallModesRow {
@@ -831,7 +831,7 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'needs_student' | 'word_limit'>
+      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student'>
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
