@@ -62,6 +62,19 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BulkLettersRow {
+  id: number
+  subject: string
+  text_body: string
+  audience: string
+  written_by: number | null
+  queued_at: Date | null
+  recipients: number | null
+  cancelled_at: Date | null
+  version: number
+  created_at: Date
+}
+
 export interface CallsRow {
   id: number
   number: number
@@ -252,6 +265,7 @@ export interface InvitationsRow {
   withdrawn_at: Date | null
   created_at: Date
   proposal_id: number | null
+  role_until_at: Date | null
 }
 
 export interface LogbookRow {
@@ -268,6 +282,14 @@ export interface LogbookRow {
   address: string
   previous_hash: string
   hash: string
+}
+
+export interface LogbookChecksRow {
+  id: number
+  checked_at: Date
+  checked_by: number | null
+  rows_checked: number
+  fault: string | null
 }
 
 export interface LogbookHeadRow {
@@ -360,13 +382,15 @@ export interface OutboxRow {
   subject: string
   text_body: string
   html_body: string
-  state: 'queued' | 'sending' | 'sent' | 'parked'
+  state: 'queued' | 'sending' | 'sent' | 'parked' | 'bounced' | 'cancelled'
   attempts: number
   next_attempt_at: Date
   claimed_until: Date | null
   last_error: string | null
   sent_at: Date | null
   created_at: Date
+  bulk_letter_id: number | null
+  again_of: number | null
 }
 
 export interface PacketsRow {
@@ -454,6 +478,11 @@ export interface PeopleRow {
   is_demo: 0 | 1
   version: number
   created_at: Date
+  address_failed_at: Date | null
+  address_failed_why: string | null
+  erasure_asked_at: Date | null
+  erased_at: Date | null
+  merged_into_id: number | null
 }
 
 export interface ProgrammesRow {
@@ -821,6 +850,13 @@ declare module 'knex/types/tables.js' {
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
     >
+    bulk_letters: Knex.CompositeTableType<
+      BulkLettersRow,
+      Insert<
+        BulkLettersRow,
+        'id' | 'written_by' | 'queued_at' | 'recipients' | 'cancelled_at' | 'version' | 'created_at'
+      >
+    >
     calls: Knex.CompositeTableType<
       CallsRow,
       Insert<CallsRow, 'id' | 'stage' | 'currency' | 'version' | 'created_at'>
@@ -898,11 +934,16 @@ declare module 'knex/types/tables.js' {
         | 'withdrawn_at'
         | 'created_at'
         | 'proposal_id'
+        | 'role_until_at'
       >
     >
     logbook: Knex.CompositeTableType<
       LogbookRow,
       Insert<LogbookRow, 'id' | 'person_id' | 'before_value' | 'after_value' | 'address'>
+    >
+    logbook_checks: Knex.CompositeTableType<
+      LogbookChecksRow,
+      Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
     mode_records: Knex.CompositeTableType<
@@ -947,6 +988,8 @@ declare module 'knex/types/tables.js' {
         | 'last_error'
         | 'sent_at'
         | 'created_at'
+        | 'bulk_letter_id'
+        | 'again_of'
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
@@ -993,6 +1036,11 @@ declare module 'knex/types/tables.js' {
         | 'is_demo'
         | 'version'
         | 'created_at'
+        | 'address_failed_at'
+        | 'address_failed_why'
+        | 'erasure_asked_at'
+        | 'erased_at'
+        | 'merged_into_id'
       >
     >
     programmes: Knex.CompositeTableType<ProgrammesRow, Insert<ProgrammesRow, 'id' | 'created_at'>>

@@ -27,6 +27,7 @@ export const paths = {
   resetPassword: (token: string) => `/reset-password/${part(token)}`,
   invitation: (token: string) => `/invitations/${part(token)}`,
   account: () => '/account',
+  accountData: () => '/account/data',
 
   proposals: () => '/proposals',
   newProposal: (callSlug?: string) => (callSlug ? `/proposals/new?call=${part(callSlug)}` : '/proposals/new'),
@@ -75,6 +76,10 @@ export const paths = {
     `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
+  officeLetter: (letter: number) => `/office/mail/${letter}`,
+  officeLetterHtml: (letter: number) => `/office/mail/${letter}/html`,
+  officePerson: (person: number) => `/office/people/${person}`,
+  officePersonData: (person: number) => `/office/people/${person}/data`,
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,

@@ -65,8 +65,15 @@ export function PeopleTable({ initial, ownId, disable, enable, takeBack }: Peopl
             matches: (row) => row.roles.some((r) => r.role === 'instrument-scientist'),
           },
           { id: 'shut', label: 'Shut', matches: (row) => row.isDisabled },
+          {
+            id: 'attention',
+            label: 'Wants attention',
+            matches: (row) => row.addressFails || row.asksToBeErased,
+          },
         ]}
         csv="people"
+        page={100}
+        tone={(row) => (row.addressFails || row.asksToBeErased ? 'attention' : null)}
       />
       {data.invitations.length > 0 ? (
         <section className="mt-10">

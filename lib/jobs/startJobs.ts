@@ -2,6 +2,7 @@ import 'server-only'
 import { env } from '@/lib/env'
 import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
+import { checkLogbookDaily } from './checkLogbookDaily'
 import { relayLetters } from './relayLetters'
 import { settleFees } from './settleFees'
 import { sweepObjects } from './sweepObjects'
@@ -30,7 +31,7 @@ function every(seconds: number, name: string, run: () => Promise<void>): NodeJS.
 async function relay(): Promise<void> {
   const { db, mail } = services()
   const report = await relayLetters(db, mail)
-  if (report.sent + report.delayed + report.parked > 0) log.info(report, 'letters relayed')
+  if (report.sent + report.delayed + report.parked + report.bounced > 0) log.info(report, 'letters relayed')
 }
 
 async function sweep(): Promise<void> {
@@ -45,5 +46,6 @@ export function startJobs(): void {
     every(env().LETTER_RELAY_SECONDS, 'letters', relay),
     every(60, 'fees', settleFees),
     every(3600, 'objects', sweep),
+    every(900, 'logbook', checkLogbookDaily),
   ]
 }

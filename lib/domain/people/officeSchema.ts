@@ -16,6 +16,9 @@ export const officePersonRow = z.object({
   institute: z.string(),
   isConfirmed: z.boolean(),
   isDisabled: z.boolean(),
+  /** A mail server refused the address for good. */
+  addressFails: z.boolean(),
+  asksToBeErased: z.boolean(),
   roles: z.array(role),
 })
 

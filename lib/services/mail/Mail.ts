@@ -7,7 +7,7 @@ export interface OutgoingLetter {
 }
 
 export interface Mail {
-  /** Resolves once the mail server has taken the letter; rejects with what it said. */
+  /** Resolves once the mail server has taken the letter; rejects with what it said, for good as `LetterRefused`. */
   send(letter: OutgoingLetter): Promise<void>
   isUp(): Promise<boolean>
 }
