@@ -637,6 +637,7 @@ export interface SiteRecordsRow {
   dark_sky_mag_arcsec2: string
   seeing_arcsec: string
   created_at: Date
+  weather: string | null
 }
 
 export interface StoredObjectsRow {
@@ -1028,7 +1029,10 @@ declare module 'knex/types/tables.js' {
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
-    site_records: Knex.CompositeTableType<SiteRecordsRow, Insert<SiteRecordsRow, 'id' | 'created_at'>>
+    site_records: Knex.CompositeTableType<
+      SiteRecordsRow,
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather'>
+    >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<
       TargetsRow,
