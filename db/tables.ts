@@ -189,6 +189,17 @@ export interface FeesRow {
   created_at: Date
 }
 
+export interface HeldHoursRow {
+  id: number
+  call_id: number
+  telescope_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
 export interface InstitutesRow {
   id: number
   name: string
@@ -313,6 +324,16 @@ export interface NightBlocksRow {
   fraction_from: string
   fraction_to: string
   dark_seconds: number
+}
+
+export interface NightChoicesRow {
+  id: number
+  proposal_id: number
+  choice: 'must' | 'never' | 'filler'
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
 }
 
 export interface ObservationsRow {
@@ -830,6 +851,10 @@ declare module 'knex/types/tables.js' {
       FeesRow,
       Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
     >
+    held_hours: Knex.CompositeTableType<
+      HeldHoursRow,
+      Insert<HeldHoursRow, 'id' | 'superseded_at' | 'created_at'>
+    >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -885,6 +910,10 @@ declare module 'knex/types/tables.js' {
     night_blocks: Knex.CompositeTableType<
       NightBlocksRow,
       Insert<NightBlocksRow, 'id' | 'instrument_id' | 'fraction_from' | 'fraction_to'>
+    >
+    night_choices: Knex.CompositeTableType<
+      NightChoicesRow,
+      Insert<NightChoicesRow, 'id' | 'superseded_at' | 'created_at'>
     >
     observations: Knex.CompositeTableType<
       ObservationsRow,
