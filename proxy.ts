@@ -19,6 +19,7 @@ export function proxy(request: NextRequest): NextResponse {
     "base-uri 'none'",
     "form-action 'self'",
     "frame-src 'self'",
+    "worker-src 'self'",
     "frame-ancestors 'self'",
   ].join('; ')
 

@@ -219,6 +219,17 @@ export interface FiguresRow {
   created_at: Date
 }
 
+export interface HeldHoursRow {
+  id: number
+  call_id: number
+  telescope_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
 export interface InstitutesRow {
   id: number
   name: string
@@ -353,6 +364,16 @@ export interface NightBlocksRow {
   fraction_from: string
   fraction_to: string
   dark_seconds: number
+}
+
+export interface NightChoicesRow {
+  id: number
+  proposal_id: number
+  choice: 'must' | 'never' | 'filler'
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
 }
 
 export interface ObservationsRow {
@@ -689,6 +710,7 @@ export interface SiteRecordsRow {
   dark_sky_mag_arcsec2: string
   seeing_arcsec: string
   created_at: Date
+  weather: string | null
 }
 
 export interface StoredObjectsRow {
@@ -909,6 +931,10 @@ declare module 'knex/types/tables.js' {
       FiguresRow,
       Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
     >
+    held_hours: Knex.CompositeTableType<
+      HeldHoursRow,
+      Insert<HeldHoursRow, 'id' | 'superseded_at' | 'created_at'>
+    >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -970,6 +996,10 @@ declare module 'knex/types/tables.js' {
     night_blocks: Knex.CompositeTableType<
       NightBlocksRow,
       Insert<NightBlocksRow, 'id' | 'instrument_id' | 'fraction_from' | 'fraction_to'>
+    >
+    night_choices: Knex.CompositeTableType<
+      NightChoicesRow,
+      Insert<NightChoicesRow, 'id' | 'superseded_at' | 'created_at'>
     >
     observations: Knex.CompositeTableType<
       ObservationsRow,
@@ -1132,7 +1162,10 @@ declare module 'knex/types/tables.js' {
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
-    site_records: Knex.CompositeTableType<SiteRecordsRow, Insert<SiteRecordsRow, 'id' | 'created_at'>>
+    site_records: Knex.CompositeTableType<
+      SiteRecordsRow,
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather'>
+    >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<
       TargetsRow,

@@ -2,10 +2,12 @@
 
 import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
-import { useState } from 'react'
+import { useMemo, useState } from 'react'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { sentenceOf, useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
+import { SeasonsNote } from '@/components/nights/SeasonsNote'
+import { useSeasons } from '@/components/nights/useSeasons'
 import { DataTable } from '@/components/tables/DataTable'
 import { useTableQuery } from '@/components/tables/useTableQuery'
 import { BarNote } from '@/components/ui/BarNote'
@@ -43,6 +45,12 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
   const router = useRouter()
   const [open, setOpen] = useState<number | null>(null)
   const { panelId, rows } = view
+  const seasons = useSeasons({
+    ...{ callSlug: view.callSlug, panelId, of: 'given' },
+    isOn: view.hasRanking && rows.some(({ lines }) => lines.length > 0),
+  })
+  const { outlookOf } = seasons
+  const columns = useMemo(() => decisionColumns(open, setOpen, outlookOf), [open, outlookOf])
   const count = (outcome: string) => rows.filter((row) => row.outcome === outcome).length
   const prepared = rows.filter((row) => row.isPrepared).length
   const canPrepare =
@@ -111,10 +119,11 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
           </BarNote>
         )}
       </div>
+      <SeasonsNote seasons={seasons} of="given" onOf={null} />
       <div className="mt-6">
         <DataTable
           caption={`Decisions of call ${view.callNumber}`}
-          columns={decisionColumns(open, setOpen)}
+          columns={columns}
           rows={rows}
           rowId={(row) => String(row.proposalId)}
           find="Number or title"

@@ -1,3 +1,5 @@
+import { OutlookMark } from '@/components/nights/OutlookMark'
+import type { Seasons } from '@/components/nights/useSeasons'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
@@ -9,7 +11,13 @@ const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.s
 export function decisionColumns(
   open: number | null,
   onOpen: (proposalId: number | null) => void,
+  outlookOf: Seasons['outlookOf'],
 ): TableColumn<DecisionRow>[] {
+  /** Of the line with the least chance: an award is finished when all of its lines are. */
+  const outlook = (row: DecisionRow) =>
+    row.lines
+      .map(({ instrumentId }) => outlookOf(row.proposalId, instrumentId))
+      .reduce((least, one) => (least && (!one || least.chance <= one.chance) ? least : one), null)
   return [
     {
       id: 'rank',
@@ -73,6 +81,13 @@ export function decisionColumns(
           rows.reduce((sum, row) => sum + row.askedSeconds / 3600, 0),
           1,
         ),
+    },
+    {
+      id: 'chance',
+      head: 'Observed in full',
+      unit: 'share of seasons',
+      value: (row) => outlook(row)?.chance ?? null,
+      cell: (row) => <OutlookMark outlook={outlook(row)} />,
     },
     {
       id: 'lines',

@@ -65,6 +65,23 @@ export function SiteForm(props: SiteFormProps) {
         <NumberField name="median" label="Median" unit="″" />
         <NumberField name="worst90" label="Poorest tenth of nights" unit="″" />
       </div>
+      <SectionHeading title="Weather" dense />
+      <div className="grid gap-x-8 gap-y-6 lg:grid-cols-[2fr_1fr]">
+        <TextField
+          name="lostByMonth"
+          label="Nights lost, January to December"
+          help="Twelve numbers with commas between. Left empty, no weather is allowed for."
+          unit="%"
+          optional
+          maxLength={200}
+        />
+        <NumberField
+          name="persistence"
+          label="Correlation of neighbouring nights"
+          help="0 where a night tells nothing of the next."
+          optional
+        />
+      </div>
       <SectionHeading title="The air and the sky, band by band" dense />
       <RecordTable
         name="extinction"

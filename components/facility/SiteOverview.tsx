@@ -3,7 +3,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { SiteFacts } from '@/lib/domain/facility/types'
-import { formatNumber, formatOffset, formatQuantity, formatSigned } from '@/lib/format'
+import { formatNumber, formatOffset, formatPercent, formatQuantity, formatSigned } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { nextInWords, stampInWords } from './recordWords'
 
@@ -45,6 +45,12 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
             {
               term: 'Image quality at zenith, best tenth, median, poorest tenth',
               value: [best10, median, worst90].map((value) => `${formatNumber(value, 1)}″`).join(', '),
+            },
+            {
+              term: 'Nights lost to weather, January to December',
+              value: facts.weather
+                ? facts.weather.lostByMonth.map((share) => formatPercent(share)).join(', ')
+                : 'not on record',
             },
             { term: 'Extinction, mag an airmass', value: byBand(facts.extinctionMagPerAirmass, 2) },
             { term: 'Dark sky, AB mag arcsec⁻²', value: byBand(facts.darkSkyMagArcsec2, 1) },

@@ -130,7 +130,7 @@ export interface NewAward {
 }
 
 /**
- * Gives time, unless the telescope's science hours of the call would then be exceeded: the same promise that the
+ * Gives time, unless the telescope's science hours of the call, less those held back, would then be exceeded: the same promise that the
  * invariants check, held by the statement itself. False when nothing was given.
  */
 export async function insertAward(db: Database, callId: number, award: NewAward): Promise<boolean> {
@@ -143,7 +143,9 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
                    WHERE p.call_id = ? AND j.telescope_id = i.telescope_id AND a.is_reserve = 0
                      AND a.superseded_at IS NULL AND d.superseded_at IS NULL), 0)
         <= COALESCE((SELECT SUM(b.dark_seconds) FROM night_blocks b
-                      WHERE b.call_id = ? AND b.telescope_id = i.telescope_id AND b.use_for = 'science'), 0))`,
+                      WHERE b.call_id = ? AND b.telescope_id = i.telescope_id AND b.use_for = 'science'), 0)
+         - COALESCE((SELECT SUM(k.seconds) FROM held_hours k
+                      WHERE k.call_id = ? AND k.telescope_id = i.telescope_id AND k.superseded_at IS NULL), 0))`,
     [
       award.decisionId,
       award.seconds,
@@ -153,6 +155,7 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
       award.instrumentId,
       award.isReserve ? 1 : 0,
       award.seconds,
+      callId,
       callId,
       callId,
     ],

@@ -23,6 +23,7 @@ export function siteFactsOf(row: SiteRecordsRow): SiteFacts {
     extinctionMagPerAirmass: parsed(row.extinction_mag_per_airmass),
     darkSkyMagArcsec2: parsed(row.dark_sky_mag_arcsec2),
     seeingArcsec: parsed(row.seeing_arcsec),
+    weather: row.weather === null ? null : parsed(row.weather),
   }
 }
 

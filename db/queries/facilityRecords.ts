@@ -85,6 +85,7 @@ export async function insertSiteRecord(
     extinction_mag_per_airmass: JSON.stringify(facts.extinctionMagPerAirmass),
     dark_sky_mag_arcsec2: JSON.stringify(facts.darkSkyMagArcsec2),
     seeing_arcsec: JSON.stringify(facts.seeingArcsec),
+    weather: facts.weather ? JSON.stringify(facts.weather) : null,
   })
 }
 

@@ -58,7 +58,7 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     'SELECT transfer_id FROM time_entries GROUP BY transfer_id HAVING SUM(seconds) <> 0',
   ],
   [
-    'I3 time awarded does not exceed the time on offer',
+    'I3 time awarded does not exceed the time on offer, less what is held back',
     `SELECT c.id, t.id AS telescope FROM calls c JOIN telescopes t
       JOIN (SELECT p.call_id, i.telescope_id, SUM(a.seconds) given FROM award_lines a JOIN decisions d ON d.id = a.decision_id
               JOIN proposals p ON p.id = d.proposal_id JOIN instruments i ON i.id = a.instrument_id
@@ -66,7 +66,19 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
              GROUP BY p.call_id, i.telescope_id) g ON g.call_id = c.id AND g.telescope_id = t.id
       LEFT JOIN (SELECT call_id, telescope_id, SUM(dark_seconds) offered FROM night_blocks WHERE use_for = 'science' GROUP BY call_id, telescope_id) o
              ON o.call_id = c.id AND o.telescope_id = t.id
-      WHERE g.given > COALESCE(o.offered, 0)`,
+      LEFT JOIN (SELECT call_id, telescope_id, SUM(seconds) held FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id) h
+             ON h.call_id = c.id AND h.telescope_id = t.id
+      WHERE g.given > COALESCE(o.offered, 0) - COALESCE(h.held, 0)`,
+  ],
+  [
+    'I3 what is never to be given time is given none',
+    `SELECT n.id FROM night_choices n JOIN decisions d ON d.proposal_id = n.proposal_id JOIN award_lines a ON a.decision_id = d.id
+      WHERE n.choice = 'never' AND n.superseded_at IS NULL AND d.superseded_at IS NULL AND a.superseded_at IS NULL AND a.seconds > 0`,
+  ],
+  [
+    'I3 one choice stands for a proposal, and one time held back on a telescope of a call',
+    `SELECT proposal_id FROM night_choices WHERE superseded_at IS NULL GROUP BY proposal_id HAVING COUNT(*) > 1
+      UNION ALL SELECT telescope_id FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id HAVING COUNT(*) > 1`,
   ],
   [
     'I4 nobody with an interest holds an assignment or a score',

@@ -74,6 +74,7 @@ export async function seedFacility(db: Database): Promise<{
     extinction_mag_per_airmass: JSON.stringify(site.extinction),
     dark_sky_mag_arcsec2: JSON.stringify(site.darkSky),
     seeing_arcsec: JSON.stringify(site.seeing),
+    weather: JSON.stringify(site.weather),
   })
 
   const telescopeIds = new Map<string, number>()

@@ -14,6 +14,10 @@ export const site = {
   extinction: { B: 0.22, g: 0.18, V: 0.13, r: 0.1, i: 0.06, z: 0.05, y: 0.05, J: 0.09, H: 0.05, K: 0.08 },
   darkSky: { B: 22.5, g: 22.1, V: 21.7, r: 21.2, i: 20.4, z: 19.3, y: 18.0, J: 16.7, H: 15.4, K: 15.0 },
   seeing: { best10: 0.6, median: 0.8, worst90: 1.3 },
+  weather: {
+    lostByMonth: [0.12, 0.13, 0.16, 0.22, 0.31, 0.36, 0.35, 0.31, 0.25, 0.2, 0.15, 0.12],
+    persistence: 0.35,
+  },
 } as const
 
 export const telescopes = [

@@ -9,6 +9,7 @@ const decisionRow = z.object({
   outcome: z.enum(['awarded', 'reserve', 'declined']),
   lines: z.array(
     z.object({
+      instrumentId: z.number(),
       instrument: z.string(),
       seconds: z.number(),
       isReserve: z.boolean(),

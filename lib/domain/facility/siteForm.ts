@@ -4,6 +4,9 @@ import type { SiteFacts } from './types'
 
 export type SiteTyped = Omit<SiteForm, 'slug' | 'over' | 'validFrom'>
 
+const typedShares = (shares: readonly number[]): string =>
+  shares.map((share) => typed(share * 100)).join(', ')
+
 /** A site's facts as the form holds them. */
 export function siteTyped(facts: SiteFacts): SiteTyped {
   return {
@@ -16,6 +19,8 @@ export function siteTyped(facts: SiteFacts): SiteTyped {
     best10: typed(facts.seeingArcsec.best10),
     median: typed(facts.seeingArcsec.median),
     worst90: typed(facts.seeingArcsec.worst90),
+    lostByMonth: typedShares(facts.weather?.lostByMonth ?? []),
+    persistence: typed(facts.weather?.persistence ?? null),
     extinction: typedBands(facts.extinctionMagPerAirmass),
     darkSky: typedBands(facts.darkSkyMagArcsec2),
   }
@@ -31,6 +36,8 @@ export const siteFields: Record<keyof SiteTyped, FieldWords> = {
   best10: { label: 'Image quality, best tenth', unit: '″' },
   median: { label: 'Image quality, median', unit: '″' },
   worst90: { label: 'Image quality, poorest tenth', unit: '″' },
+  lostByMonth: { label: 'Nights lost to weather, January to December', unit: '%' },
+  persistence: { label: 'Correlation of neighbouring nights' },
   extinction: { label: 'Extinction', unit: 'mag an airmass' },
   darkSky: { label: 'Dark sky', unit: 'AB mag arcsec⁻²' },
 }

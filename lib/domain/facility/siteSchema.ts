@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { bandTable, darkSkyQuantity, extinctionQuantity } from './bandTableSchema'
 import { quantity } from './quantity'
 import { versionFields } from './recordSchema'
+import { unfinishedWeather, weatherFields, weatherFrom } from './weatherSchema'
 
 const seeing = (what: string) => quantity({ what, low: 0.1, high: 10, unit: '″' })
 
@@ -31,6 +32,7 @@ export const siteRecordSchema = z
     best10: seeing('The best tenth'),
     median: seeing('The median'),
     worst90: seeing('The poorest tenth'),
+    ...weatherFields,
     extinction: bandTable(extinctionQuantity),
     darkSky: bandTable(darkSkyQuantity),
   })
@@ -38,17 +40,34 @@ export const siteRecordSchema = z
     const say = (path: string, message: string) => ctx.addIssue({ code: 'custom', path: [path], message })
     if (value.median < value.best10) say('median', 'The median is not sharper than the best tenth.')
     if (value.worst90 < value.median) say('worst90', 'The poorest tenth is not sharper than the median.')
+    const unfinished = unfinishedWeather(value)
+    if (unfinished) say(unfinished.path, unfinished.message)
   })
-  .transform(({ slug, over, validFrom, best10, median, worst90, extinction, darkSky, ...rest }) => ({
-    slug,
-    over,
-    validFrom,
-    facts: {
-      ...rest,
-      extinctionMagPerAirmass: extinction,
-      darkSkyMagArcsec2: darkSky,
-      seeingArcsec: { best10, median, worst90 },
-    },
-  }))
+  .transform(
+    ({
+      slug,
+      over,
+      validFrom,
+      best10,
+      median,
+      worst90,
+      extinction,
+      darkSky,
+      lostByMonth,
+      persistence,
+      ...rest
+    }) => ({
+      slug,
+      over,
+      validFrom,
+      facts: {
+        ...rest,
+        extinctionMagPerAirmass: extinction,
+        darkSkyMagArcsec2: darkSky,
+        seeingArcsec: { best10, median, worst90 },
+        weather: weatherFrom({ lostByMonth, persistence }),
+      },
+    }),
+  )
 
 export type SiteForm = z.input<typeof siteRecordSchema>

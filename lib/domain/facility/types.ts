@@ -20,6 +20,16 @@ export interface SiteFacts {
   darkSkyMagArcsec2: Record<string, number>
   /** At zenith and 500 nm. */
   seeingArcsec: { best10: number; median: number; worst90: number }
+  /** Null where none is on record. */
+  weather?: SiteWeather | null
+}
+
+/** How often nights are lost to weather. */
+export interface SiteWeather {
+  /** Share of the nights lost, for each month from January; 0 to 1. */
+  lostByMonth: number[]
+  /** Correlation of a night with the one before it; 0 to below 1. */
+  persistence: number
 }
 
 export interface ModeRecord extends ModeFacts {

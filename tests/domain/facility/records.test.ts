@@ -103,7 +103,14 @@ describe('a site’s record', () => {
   const typed = (over: Partial<SiteForm> = {}): SiteForm => ({ ...head, ...siteTyped(site), ...over })
 
   it('comes out of the form as it went in', () => {
-    expect(site).toMatchObject(siteRecordSchema.parse(typed()).facts)
+    expect({ weather: null, ...site }).toMatchObject(siteRecordSchema.parse(typed()).facts)
+    const weather = {
+      lostByMonth: [0.12, 0.13, 0.165, 0.22, 0.31, 0.36, 0.35, 0.31, 0.25, 0.2, 0, 1],
+      persistence: 0.35,
+    }
+    const windy = { ...head, ...siteTyped({ ...site, weather }) }
+    expect(windy.lostByMonth).toBe('12, 13, 16.5, 22, 31, 36, 35, 31, 25, 20, 0, 100')
+    expect(siteRecordSchema.parse(windy).facts.weather).toEqual(weather)
   })
 
   it.each<[Partial<SiteForm>, string, string]>([
@@ -113,6 +120,26 @@ describe('a site’s record', () => {
     [{ timeZone: 'Ridge' }, 'timeZone', 'This is not a time zone; one is called Etc/GMT+3, for instance.'],
     [{ median: '0.5' }, 'median', 'The median is not sharper than the best tenth.'],
     [{ worst90: '0.7' }, 'worst90', 'The poorest tenth is not sharper than the median.'],
+    [
+      { lostByMonth: '12, 13', persistence: '0' },
+      'lostByMonth',
+      'Give twelve numbers, January to December, with commas between, such as 12, 13, 16 …',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 120', persistence: '0' },
+      'lostByMonth',
+      'Number 12 of the twelve lies between 0 and 100 %.',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 12' },
+      'persistence',
+      'Give this too: 0 where a night tells nothing of the next.',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 12', persistence: '1' },
+      'persistence',
+      'A correlation of neighbouring nights lies between 0 and 0.95.',
+    ],
     [{ extinction: [] }, 'extinction', 'Give at least one band.'],
     [
       { darkSky: [{ at: 'V', value: '41' }] },
