@@ -160,6 +160,10 @@ export interface DecisionsRow {
   superseded_at: Date | null
   version: number
   created_at: Date
+  changed_by: number | null
+  approved_by: number | null
+  approved_version: number | null
+  approved_at: Date | null
 }
 
 export interface DemographicsRow {
@@ -602,6 +606,9 @@ export interface ReviewTextsRow {
   body: string
   version: number
   saved_at: Date
+  withheld_at: Date | null
+  withheld_by: number | null
+  withheld_reason: string | null
 }
 
 export interface RoleGrantsRow {
@@ -858,7 +865,19 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     decisions: Knex.CompositeTableType<
       DecisionsRow,
-      Insert<DecisionsRow, 'id' | 'decided_by' | 'released_at' | 'superseded_at' | 'version' | 'created_at'>
+      Insert<
+        DecisionsRow,
+        | 'id'
+        | 'decided_by'
+        | 'released_at'
+        | 'superseded_at'
+        | 'version'
+        | 'created_at'
+        | 'changed_by'
+        | 'approved_by'
+        | 'approved_version'
+        | 'approved_at'
+      >
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     email_tokens: Knex.CompositeTableType<
@@ -1060,7 +1079,10 @@ declare module 'knex/types/tables.js' {
       RefundsRow,
       Insert<RefundsRow, 'id' | 'provider_refund_id' | 'state' | 'made_by' | 'created_at'>
     >
-    review_texts: Knex.CompositeTableType<ReviewTextsRow, Insert<ReviewTextsRow, 'id' | 'version'>>
+    review_texts: Knex.CompositeTableType<
+      ReviewTextsRow,
+      Insert<ReviewTextsRow, 'id' | 'version' | 'withheld_at' | 'withheld_by' | 'withheld_reason'>
+    >
     role_grants: Knex.CompositeTableType<
       RoleGrantsRow,
       Insert<
