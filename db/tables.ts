@@ -389,6 +389,9 @@ export interface PanelsRow {
   call_id: number
   name: string
   quorum: number
+  formula: string | null
+  formula_by: number | null
+  formula_at: Date | null
 }
 
 export interface PanelMembersRow {
@@ -969,7 +972,10 @@ declare module 'knex/types/tables.js' {
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
-    panels: Knex.CompositeTableType<PanelsRow, Insert<PanelsRow, 'id' | 'quorum'>>
+    panels: Knex.CompositeTableType<
+      PanelsRow,
+      Insert<PanelsRow, 'id' | 'quorum' | 'formula' | 'formula_by' | 'formula_at'>
+    >
     panel_members: Knex.CompositeTableType<
       PanelMembersRow,
       Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at'>

@@ -176,6 +176,7 @@ export const access = {
     replaceReviewer: chair,
     suggestAssignments: chair,
     remindReviewer: chair,
+    saveFormula: chair,
     startRanking: chair,
     moveInRanking: chair,
     moveLine: chair,
