@@ -173,6 +173,10 @@ export interface DecisionsRow {
   superseded_at: Date | null
   version: number
   created_at: Date
+  changed_by: number | null
+  approved_by: number | null
+  approved_version: number | null
+  approved_at: Date | null
 }
 
 export interface DemographicsRow {
@@ -430,6 +434,9 @@ export interface PanelsRow {
   call_id: number
   name: string
   quorum: number
+  formula: string | null
+  formula_by: number | null
+  formula_at: Date | null
 }
 
 export interface PanelMembersRow {
@@ -652,6 +659,9 @@ export interface ReviewTextsRow {
   body: string
   version: number
   saved_at: Date
+  withheld_at: Date | null
+  withheld_by: number | null
+  withheld_reason: string | null
 }
 
 export interface RoleGrantsRow {
@@ -916,7 +926,19 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     decisions: Knex.CompositeTableType<
       DecisionsRow,
-      Insert<DecisionsRow, 'id' | 'decided_by' | 'released_at' | 'superseded_at' | 'version' | 'created_at'>
+      Insert<
+        DecisionsRow,
+        | 'id'
+        | 'decided_by'
+        | 'released_at'
+        | 'superseded_at'
+        | 'version'
+        | 'created_at'
+        | 'changed_by'
+        | 'approved_by'
+        | 'approved_version'
+        | 'approved_at'
+      >
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     email_tokens: Knex.CompositeTableType<
@@ -1023,7 +1045,10 @@ declare module 'knex/types/tables.js' {
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
-    panels: Knex.CompositeTableType<PanelsRow, Insert<PanelsRow, 'id' | 'quorum'>>
+    panels: Knex.CompositeTableType<
+      PanelsRow,
+      Insert<PanelsRow, 'id' | 'quorum' | 'formula' | 'formula_by' | 'formula_at'>
+    >
     panel_members: Knex.CompositeTableType<
       PanelMembersRow,
       Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at'>
@@ -1138,7 +1163,10 @@ declare module 'knex/types/tables.js' {
       RefundsRow,
       Insert<RefundsRow, 'id' | 'provider_refund_id' | 'state' | 'made_by' | 'created_at'>
     >
-    review_texts: Knex.CompositeTableType<ReviewTextsRow, Insert<ReviewTextsRow, 'id' | 'version'>>
+    review_texts: Knex.CompositeTableType<
+      ReviewTextsRow,
+      Insert<ReviewTextsRow, 'id' | 'version' | 'withheld_at' | 'withheld_by' | 'withheld_reason'>
+    >
     role_grants: Knex.CompositeTableType<
       RoleGrantsRow,
       Insert<

@@ -83,6 +83,7 @@ export const paths = {
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
+  officeDecisions: (slug: string) => `/office/calls/${part(slug)}/decisions`,
 
   api: {
     health: () => '/api/health',

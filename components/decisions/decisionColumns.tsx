@@ -4,6 +4,7 @@ import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { formatNumber } from '@/lib/format'
+import { flagsOf } from './flagsOf'
 import { OutcomeMark } from './OutcomeMark'
 
 const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.seconds, 0) / 3600
@@ -111,6 +112,27 @@ export function decisionColumns(
           <span className="font-semibold text-lamp">not written</span>
         ),
       csv: (row) => row.statement,
+    },
+    {
+      id: 'flags',
+      head: 'Look at',
+      unit: 'places',
+      align: 'right',
+      value: (row) => flagsOf(row),
+      cell: (row) => (flagsOf(row) > 0 ? flagsOf(row) : '–'),
+    },
+    {
+      id: 'approval',
+      head: 'Second person',
+      value: (row) => (row.approval === 'approved' ? row.approvedBy : row.approval),
+      cell: (row) =>
+        row.approval === 'approved' ? (
+          row.approvedBy
+        ) : (
+          <span className="font-semibold text-lamp">
+            {row.approval === 'changed' ? 'changed since' : 'not yet'}
+          </span>
+        ),
     },
   ]
 }

@@ -31,6 +31,7 @@ export async function insertDecision(
     outcome: given.outcome,
     statement: given.statement,
     decided_by: given.by,
+    changed_by: given.by,
   })
   return Number(id)
 }
@@ -40,12 +41,13 @@ export async function changeDecision(
   db: Database,
   decision: { id: number; version: number },
   change: Partial<Pick<DecisionsRow, 'outcome' | 'statement'>>,
+  by: number,
 ): Promise<boolean> {
   const count = await db('decisions')
     .where({ id: decision.id, version: decision.version })
     .whereNull('released_at')
     .whereNull('superseded_at')
-    .update({ ...change, version: decision.version + 1 })
+    .update({ ...change, changed_by: by, version: decision.version + 1 })
   return count === 1
 }
 
@@ -161,33 +163,6 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
     ],
   )) as [{ affectedRows: number }]
   return result.affectedRows === 1
-}
-
-export interface PanelText {
-  proposalId: number
-  personId: number
-  seat: 'first' | 'second' | 'reader'
-  audience: 'investigators' | 'panel'
-  body: string
-}
-
-/** Comments of finished reviews to the panel and to the investigators, first readers first. */
-export async function panelTexts(db: Database, proposalIds: readonly number[]): Promise<PanelText[]> {
-  const rows = await db('review_texts as x')
-    .join('assignments as a', 'a.id', 'x.assignment_id')
-    .whereIn('a.proposal_id', proposalIds)
-    .whereIn('x.audience', ['panel', 'investigators'])
-    .whereNull('a.withdrawn_at')
-    .whereNotNull('a.finished_at')
-    .orderByRaw("FIELD(a.seat, 'first', 'second', 'reader'), a.id")
-    .select<PanelText[]>({
-      proposalId: 'a.proposal_id',
-      personId: 'a.person_id',
-      seat: 'a.seat',
-      audience: 'x.audience',
-      body: 'x.body',
-    })
-  return rows.filter((row) => row.body.trim() !== '')
 }
 
 export interface ToDecide {

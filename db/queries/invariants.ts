@@ -90,6 +90,11 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     `SELECT a.id FROM assignments a JOIN proposal_people q ON q.proposal_id = a.proposal_id AND q.person_id = a.person_id
       WHERE a.withdrawn_at IS NULL`,
   ],
+  [
+    'I10 a decision made known was approved, as it stood, by someone who had not changed it last',
+    `SELECT id FROM decisions WHERE released_at IS NOT NULL
+        AND (approved_by IS NULL OR approved_by = changed_by OR approved_version <> version - 1)`,
+  ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
   [
     'I6 the logbook is an unbroken chain',

@@ -76,6 +76,28 @@ export const releaseSchema = panelKeySchema.extend({
 })
 export type ReleaseInput = z.output<typeof releaseSchema>
 
+/** What is approved, each at the version that was read. */
+export const approveSchema = panelKeySchema.extend({
+  decisions: z
+    .array(z.object({ proposalId: rowKey, version: z.number().int().positive() }))
+    .min(1)
+    .max(2000),
+})
+export type ApproveInput = z.output<typeof approveSchema>
+
+export const withholdSchema = panelKeySchema
+  .extend({
+    proposalId: rowKey,
+    assignmentId: rowKey,
+    withhold: z.boolean(),
+    reason: z.string().trim().max(200, 'At most 200 characters.'),
+  })
+  .refine(({ withhold, reason }) => !withhold || reason.length >= 3, {
+    path: ['reason'],
+    message: 'Say in a few words why.',
+  })
+export type WithholdInput = z.output<typeof withholdSchema>
+
 /** The table of nights, under a policy. */
 export const nightsQuery = panelQuery.extend({
   policy: nightsPolicy.default('rank'),

@@ -69,12 +69,13 @@ describe('stages', () => {
   })
 
   it.each([
-    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0 }, null],
-    [{ phase: 'ranking', isFrozen: false, undecided: 3, unready: 0 }, /Freeze/],
-    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 1 }, /not prepared/],
-    [{ phase: 'ranking', isFrozen: true, undecided: 0, unready: 0 }, /already/],
-    [{ phase: 'review', isFrozen: true, undecided: 3, unready: 0 }, /every panel/],
-    [{ phase: 'decided', isFrozen: true, undecided: 3, unready: 0 }, /already/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, null],
+    [{ phase: 'ranking', isFrozen: false, undecided: 3, unready: 0, unapproved: 0 }, /Freeze/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 1, unapproved: 0 }, /not prepared/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0, unapproved: 1 }, /second person/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 0, unready: 0, unapproved: 0 }, /already/],
+    [{ phase: 'review', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, /every panel/],
+    [{ phase: 'decided', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, /already/],
   ] as const)('release of %o', (facts, words) => {
     const why = whyNotReleased(facts)
     if (words === null) expect(why).toBeNull()

@@ -13,6 +13,7 @@ import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { DateLine } from '@/components/ui/DateLine'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
+import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
@@ -47,7 +48,14 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
         <DateLine entries={callDates(call)} now={view.now} label={`Dates of ${call.title}`} />
       </div>
       <section className="mt-10">
-        <SectionHeading title="Proposals" />
+        <SectionHeading
+          title="Proposals"
+          aside={
+            phase === 'ranking' || phase === 'decided' || phase === 'archived' ? (
+              <TextLink href={paths.officeDecisions(slug)}>Decisions, for the second person</TextLink>
+            ) : null
+          }
+        />
         <div className="mt-4">
           <ProposalsOfCall slug={slug} initial={proposals} />
         </div>
