@@ -147,6 +147,20 @@ export interface CountersRow {
   last_number: number
 }
 
+export interface CreditNotesRow {
+  id: number
+  number: string
+  fee_id: number
+  invoice_id: number | null
+  refund_id: number | null
+  credited_to: string
+  address: string
+  amount_minor: number
+  currency: string
+  reason: string
+  created_at: Date
+}
+
 export interface DecisionsRow {
   id: number
   proposal_id: number
@@ -167,6 +181,17 @@ export interface DemographicsRow {
   created_at: Date
 }
 
+export interface DisputesRow {
+  id: number
+  payment_id: number
+  provider_dispute_id: string
+  amount_minor: number
+  reason: string
+  state: 'open' | 'won' | 'lost'
+  closed_at: Date | null
+  created_at: Date
+}
+
 export interface EmailTokensRow {
   id: number
   person_id: number
@@ -182,11 +207,21 @@ export interface FeesRow {
   proposal_id: number
   amount_minor: number
   currency: string
-  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed'
+  affiliation_class: 'member' | 'partner' | 'other'
+  late_minor: number
+  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed' | 'cancelled'
   due_at: Date
   settled_at: Date | null
   version: number
   created_at: Date
+}
+
+export interface FeeRatesRow {
+  id: number
+  call_kind_id: number
+  affiliation_class: 'member' | 'partner' | 'other'
+  amount_minor: number
+  late_minor: number
 }
 
 export interface InstitutesRow {
@@ -233,6 +268,27 @@ export interface InvitationsRow {
   accepted_at: Date | null
   accepted_by: number | null
   withdrawn_at: Date | null
+  created_at: Date
+}
+
+export interface InvoicesRow {
+  id: number
+  number: string
+  fee_id: number
+  institute: string
+  address: string
+  purchase_order: string
+  send_to: string
+  amount_minor: number
+  currency: string
+  state: 'open' | 'settled' | 'cancelled'
+  due_at: Date
+  asked_by: number | null
+  settled_on: string | null
+  settled_reference: string
+  closed_by: number | null
+  closed_at: Date | null
+  version: number
   created_at: Date
 }
 
@@ -297,7 +353,18 @@ export interface MoneyEntriesRow {
   id: number
   movement: string
   fee_id: number
-  account: 'receivable' | 'income' | 'provider' | 'waived' | 'refunds'
+  account:
+    | 'receivable'
+    | 'income'
+    | 'provider'
+    | 'waived'
+    | 'refunds'
+    | 'invoiced'
+    | 'bank'
+    | 'owed-back'
+    | 'disputed'
+    | 'firm-fees'
+    | 'lost'
   amount_minor: number
   currency: string
   created_at: Date
@@ -349,6 +416,7 @@ export interface OutboxRow {
   last_error: string | null
   sent_at: Date | null
   created_at: Date
+  attachment: string | null
 }
 
 export interface PacketsRow {
@@ -562,13 +630,17 @@ export interface RecusalsRow {
 
 export interface RefundsRow {
   id: number
-  payment_id: number
+  payment_id: number | null
+  invoice_id: number | null
   idempotency_key: string
   provider_refund_id: string | null
   amount_minor: number
+  is_surplus: 0 | 1
   state: 'created' | 'succeeded' | 'failed'
+  failure: string
   reason: string
   made_by: number | null
+  closed_at: Date | null
   created_at: Date
 }
 
@@ -816,19 +888,31 @@ declare module 'knex/types/tables.js' {
       >
     >
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
+    credit_notes: Knex.CompositeTableType<
+      CreditNotesRow,
+      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+    >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
       Insert<DecisionsRow, 'id' | 'decided_by' | 'released_at' | 'superseded_at' | 'version' | 'created_at'>
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
+    disputes: Knex.CompositeTableType<
+      DisputesRow,
+      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+    >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
     fees: Knex.CompositeTableType<
       FeesRow,
-      Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
+      Insert<
+        FeesRow,
+        'id' | 'affiliation_class' | 'late_minor' | 'state' | 'settled_at' | 'version' | 'created_at'
+      >
     >
+    fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -852,6 +936,22 @@ declare module 'knex/types/tables.js' {
         | 'accepted_at'
         | 'accepted_by'
         | 'withdrawn_at'
+        | 'created_at'
+      >
+    >
+    invoices: Knex.CompositeTableType<
+      InvoicesRow,
+      Insert<
+        InvoicesRow,
+        | 'id'
+        | 'purchase_order'
+        | 'state'
+        | 'asked_by'
+        | 'settled_on'
+        | 'settled_reference'
+        | 'closed_by'
+        | 'closed_at'
+        | 'version'
         | 'created_at'
       >
     >
@@ -902,6 +1002,7 @@ declare module 'knex/types/tables.js' {
         | 'last_error'
         | 'sent_at'
         | 'created_at'
+        | 'attachment'
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
@@ -1002,7 +1103,19 @@ declare module 'knex/types/tables.js' {
     recusals: Knex.CompositeTableType<RecusalsRow, Insert<RecusalsRow, 'id' | 'created_at'>>
     refunds: Knex.CompositeTableType<
       RefundsRow,
-      Insert<RefundsRow, 'id' | 'provider_refund_id' | 'state' | 'made_by' | 'created_at'>
+      Insert<
+        RefundsRow,
+        | 'id'
+        | 'payment_id'
+        | 'invoice_id'
+        | 'provider_refund_id'
+        | 'is_surplus'
+        | 'state'
+        | 'failure'
+        | 'made_by'
+        | 'closed_at'
+        | 'created_at'
+      >
     >
     review_texts: Knex.CompositeTableType<ReviewTextsRow, Insert<ReviewTextsRow, 'id' | 'version'>>
     role_grants: Knex.CompositeTableType<

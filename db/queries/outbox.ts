@@ -12,6 +12,8 @@ export interface NewLetter {
   subject: string
   text: string
   html: string
+  /** Number of an invoice or credit note. */
+  attachment: string | null
 }
 
 /** Adds a letter; the same cause and person a second time is the same letter, and nothing happens. */
@@ -27,6 +29,7 @@ export async function insertLetter(db: Database, letter: NewLetter): Promise<voi
       subject: letter.subject,
       text_body: letter.text,
       html_body: letter.html,
+      attachment: letter.attachment,
       next_attempt_at: utcNow(db),
     })
     .onConflict('dedupe_key')

@@ -1,5 +1,6 @@
 import { claimLetters, markFailed, markSent } from '@/db/queries/outbox'
 import type { Database } from '@/db/client'
+import { renderPaper } from '@/lib/domain/fees/renderPaper'
 import type { Mail } from '@/lib/services/mail/Mail'
 
 const batch = 20
@@ -24,6 +25,7 @@ export async function relayLetters(db: Database, mail: Mail): Promise<RelayRepor
         subject: letter.subject,
         text: letter.text_body,
         html: letter.html_body,
+        attachments: letter.attachment === null ? [] : [await renderPaper(db, letter.attachment)],
       })
       await markSent(db, letter.id)
       report.sent += 1
