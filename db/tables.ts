@@ -162,6 +162,20 @@ export interface CountersRow {
   last_number: number
 }
 
+export interface CreditNotesRow {
+  id: number
+  number: string
+  fee_id: number
+  invoice_id: number | null
+  refund_id: number | null
+  credited_to: string
+  address: string
+  amount_minor: number
+  currency: string
+  reason: string
+  created_at: Date
+}
+
 export interface DecisionsRow {
   id: number
   proposal_id: number
@@ -186,6 +200,17 @@ export interface DemographicsRow {
   created_at: Date
 }
 
+export interface DisputesRow {
+  id: number
+  payment_id: number
+  provider_dispute_id: string
+  amount_minor: number
+  reason: string
+  state: 'open' | 'won' | 'lost'
+  closed_at: Date | null
+  created_at: Date
+}
+
 export interface EmailTokensRow {
   id: number
   person_id: number
@@ -201,7 +226,9 @@ export interface FeesRow {
   proposal_id: number
   amount_minor: number
   currency: string
-  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed'
+  affiliation_class: 'member' | 'partner' | 'other'
+  late_minor: number
+  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed' | 'cancelled'
   due_at: Date
   settled_at: Date | null
   version: number
@@ -232,6 +259,14 @@ export interface HeldHoursRow {
   made_by: number
   superseded_at: Date | null
   created_at: Date
+}
+
+export interface FeeRatesRow {
+  id: number
+  call_kind_id: number
+  affiliation_class: 'member' | 'partner' | 'other'
+  amount_minor: number
+  late_minor: number
 }
 
 export interface InstitutesRow {
@@ -281,6 +316,27 @@ export interface InvitationsRow {
   created_at: Date
   proposal_id: number | null
   role_until_at: Date | null
+}
+
+export interface InvoicesRow {
+  id: number
+  number: string
+  fee_id: number
+  institute: string
+  address: string
+  purchase_order: string
+  send_to: string
+  amount_minor: number
+  currency: string
+  state: 'open' | 'settled' | 'cancelled'
+  due_at: Date
+  asked_by: number | null
+  settled_on: string | null
+  settled_reference: string
+  closed_by: number | null
+  closed_at: Date | null
+  version: number
+  created_at: Date
 }
 
 export interface LogbookRow {
@@ -352,7 +408,18 @@ export interface MoneyEntriesRow {
   id: number
   movement: string
   fee_id: number
-  account: 'receivable' | 'income' | 'provider' | 'waived' | 'refunds'
+  account:
+    | 'receivable'
+    | 'income'
+    | 'provider'
+    | 'waived'
+    | 'refunds'
+    | 'invoiced'
+    | 'bank'
+    | 'owed-back'
+    | 'disputed'
+    | 'firm-fees'
+    | 'lost'
   amount_minor: number
   currency: string
   created_at: Date
@@ -416,6 +483,7 @@ export interface OutboxRow {
   created_at: Date
   bulk_letter_id: number | null
   again_of: number | null
+  attachment: string | null
 }
 
 export interface PacketsRow {
@@ -642,13 +710,17 @@ export interface RecusalsRow {
 
 export interface RefundsRow {
   id: number
-  payment_id: number
+  payment_id: number | null
+  invoice_id: number | null
   idempotency_key: string
   provider_refund_id: string | null
   amount_minor: number
+  is_surplus: 0 | 1
   state: 'created' | 'succeeded' | 'failed'
+  failure: string
   reason: string
   made_by: number | null
+  closed_at: Date | null
   created_at: Date
 }
 
@@ -924,6 +996,10 @@ declare module 'knex/types/tables.js' {
       >
     >
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
+    credit_notes: Knex.CompositeTableType<
+      CreditNotesRow,
+      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+    >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
       Insert<
@@ -941,13 +1017,20 @@ declare module 'knex/types/tables.js' {
       >
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
+    disputes: Knex.CompositeTableType<
+      DisputesRow,
+      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+    >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
     fees: Knex.CompositeTableType<
       FeesRow,
-      Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
+      Insert<
+        FeesRow,
+        'id' | 'affiliation_class' | 'late_minor' | 'state' | 'settled_at' | 'version' | 'created_at'
+      >
     >
     figures: Knex.CompositeTableType<
       FiguresRow,
@@ -957,6 +1040,7 @@ declare module 'knex/types/tables.js' {
       HeldHoursRow,
       Insert<HeldHoursRow, 'id' | 'superseded_at' | 'created_at'>
     >
+    fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -983,6 +1067,22 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'proposal_id'
         | 'role_until_at'
+      >
+    >
+    invoices: Knex.CompositeTableType<
+      InvoicesRow,
+      Insert<
+        InvoicesRow,
+        | 'id'
+        | 'purchase_order'
+        | 'state'
+        | 'asked_by'
+        | 'settled_on'
+        | 'settled_reference'
+        | 'closed_by'
+        | 'closed_at'
+        | 'version'
+        | 'created_at'
       >
     >
     logbook: Knex.CompositeTableType<
@@ -1042,6 +1142,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'bulk_letter_id'
         | 'again_of'
+        | 'attachment'
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
@@ -1161,7 +1262,19 @@ declare module 'knex/types/tables.js' {
     recusals: Knex.CompositeTableType<RecusalsRow, Insert<RecusalsRow, 'id' | 'created_at'>>
     refunds: Knex.CompositeTableType<
       RefundsRow,
-      Insert<RefundsRow, 'id' | 'provider_refund_id' | 'state' | 'made_by' | 'created_at'>
+      Insert<
+        RefundsRow,
+        | 'id'
+        | 'payment_id'
+        | 'invoice_id'
+        | 'provider_refund_id'
+        | 'is_surplus'
+        | 'state'
+        | 'failure'
+        | 'made_by'
+        | 'closed_at'
+        | 'created_at'
+      >
     >
     review_texts: Knex.CompositeTableType<
       ReviewTextsRow,

@@ -47,6 +47,8 @@ export const paths = {
     `/proposals/${part(reference)}/packet${variant ? `?variant=${variant}` : ''}`,
   proposalRecord: (reference: string) => `/proposals/${part(reference)}/record`,
   proposalReceipt: (reference: string) => `/proposals/${part(reference)}/receipt`,
+  /** An invoice or a credit note, by its number. */
+  proposalBill: (reference: string, number: string) => `/proposals/${part(reference)}/bills/${part(number)}`,
   proposalCalendar: (reference: string) => `/proposals/${part(reference)}/calendar.ics`,
   proposalPaid: (reference: string) => `/proposals/${part(reference)}/paid`,
 
@@ -80,6 +82,9 @@ export const paths = {
   officeLetterHtml: (letter: number) => `/office/mail/${letter}/html`,
   officePerson: (person: number) => `/office/people/${person}`,
   officePersonData: (person: number) => `/office/people/${person}/data`,
+  officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
+  officeLedger: () => '/office/fees/ledger',
+  officeReconciliation: () => '/office/fees/reconciliation',
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,

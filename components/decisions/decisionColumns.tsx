@@ -1,24 +1,20 @@
-import { OutlookMark } from '@/components/nights/OutlookMark'
 import type { Seasons } from '@/components/nights/useSeasons'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { formatNumber } from '@/lib/format'
+import { chanceColumn } from './chanceColumn'
 import { flagsOf } from './flagsOf'
 import { OutcomeMark } from './OutcomeMark'
 
 const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.seconds, 0) / 3600
 
+/** Columns of a panel's decisions; the chance of each only where seasons are drawn. */
 export function decisionColumns(
   open: number | null,
   onOpen: (proposalId: number | null) => void,
-  outlookOf: Seasons['outlookOf'],
+  outlookOf?: Seasons['outlookOf'],
 ): TableColumn<DecisionRow>[] {
-  /** Of the line with the least chance: an award is finished when all of its lines are. */
-  const outlook = (row: DecisionRow) =>
-    row.lines
-      .map(({ instrumentId }) => outlookOf(row.proposalId, instrumentId))
-      .reduce((least, one) => (least && (!one || least.chance <= one.chance) ? least : one), null)
   return [
     {
       id: 'rank',
@@ -83,13 +79,7 @@ export function decisionColumns(
           1,
         ),
     },
-    {
-      id: 'chance',
-      head: 'Observed in full',
-      unit: 'share of seasons',
-      value: (row) => outlook(row)?.chance ?? null,
-      cell: (row) => <OutlookMark outlook={outlook(row)} />,
-    },
+    ...(outlookOf ? [chanceColumn(outlookOf)] : []),
     {
       id: 'lines',
       head: 'On',

@@ -1,4 +1,5 @@
 import type { Database } from '../client.ts'
+import { promisesOfMoney } from './moneyInvariants.ts'
 
 export interface Breach {
   invariant: string
@@ -32,27 +33,7 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     `SELECT v.id FROM proposal_versions v
       WHERE NOT EXISTS (SELECT 1 FROM outbox b WHERE b.template = 'proposal-sent' AND b.dedupe_key LIKE CONCAT('sent:', v.proposal_id, ':', v.version_number, ':%'))`,
   ],
-  [
-    'I2 a paid fee has exactly its amount in succeeded payments less refunds, made or promised',
-    `SELECT f.id FROM fees f
-      LEFT JOIN (SELECT fee_id, SUM(amount_minor) paid FROM payments WHERE state = 'succeeded' GROUP BY fee_id) p ON p.fee_id = f.id
-      LEFT JOIN (SELECT q.fee_id, SUM(r.amount_minor) back FROM refunds r JOIN payments q ON q.id = r.payment_id WHERE r.state <> 'failed' GROUP BY q.fee_id) r ON r.fee_id = f.id
-      WHERE (f.state = 'paid' AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> f.amount_minor)
-         OR (f.state IN ('due', 'waived', 'lapsed') AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> 0)`,
-  ],
-  [
-    'I2 a succeeded payment has one receipt',
-    `SELECT p.id FROM payments p LEFT JOIN receipts r ON r.payment_id = p.id WHERE p.state = 'succeeded' GROUP BY p.id HAVING COUNT(r.id) <> 1`,
-  ],
-  [
-    'I2 every movement of money sums to zero',
-    'SELECT movement FROM money_entries GROUP BY movement, currency HAVING SUM(amount_minor) <> 0',
-  ],
-  [
-    'I2 receipt numbers have no gaps',
-    `SELECT 1 AS gap FROM receipts GROUP BY SUBSTRING(number, 4, 4)
-      HAVING MAX(CAST(SUBSTRING_INDEX(number, '-', -1) AS UNSIGNED)) <> COUNT(*)`,
-  ],
+  ...promisesOfMoney,
   [
     'I3 movements of time sum to zero',
     'SELECT transfer_id FROM time_entries GROUP BY transfer_id HAVING SUM(seconds) <> 0',

@@ -16,6 +16,8 @@ export interface NewLetter {
   bulkLetterId?: number
   /** The letter it repeats. */
   againOf?: number
+  /** Number of an invoice or credit note. */
+  attachment: string | null
 }
 
 /** Adds a letter; the same cause and person a second time is the same letter, and nothing happens. */
@@ -33,6 +35,7 @@ export async function insertLetter(db: Database, letter: NewLetter): Promise<voi
       html_body: letter.html,
       bulk_letter_id: letter.bulkLetterId ?? null,
       again_of: letter.againOf ?? null,
+      attachment: letter.attachment,
       next_attempt_at: utcNow(db),
     })
     .onConflict('dedupe_key')

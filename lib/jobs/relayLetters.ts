@@ -2,6 +2,7 @@ import { addressFailed, addressWorks } from '@/db/queries/addresses'
 import { claimLetters, markFailed, markSent } from '@/db/queries/outbox'
 import type { Database } from '@/db/client'
 import { LetterRefused } from '@/lib/services/mail/LetterRefused'
+import { renderPaper } from '@/lib/domain/fees/renderPaper'
 import type { Mail } from '@/lib/services/mail/Mail'
 
 const batch = 20
@@ -34,6 +35,7 @@ export async function relayLetters(db: Database, mail: Mail): Promise<RelayRepor
         subject: letter.subject,
         text: letter.text_body,
         html: letter.html_body,
+        attachments: letter.attachment === null ? [] : [await renderPaper(db, letter.attachment)],
       })
       await markSent(db, letter.id)
       await addressWorks(db, letter.to_email)

@@ -7,4 +7,6 @@ export interface Letter {
   facts?: readonly (readonly [label: string, value: string])[]
   action?: { label: string; url: string }
   closing?: string
+  /** Number of the invoice or credit note that goes with it as PDF. */
+  attachment?: string
 }

@@ -30,5 +30,6 @@ export async function queueLetter(
     subject: letter.subject.replace(/[\r\n]+/g, ' '),
     text,
     html,
+    attachment: letter.attachment ?? null,
   })
 }

@@ -31,6 +31,7 @@ export async function resendLetter(ctx: ActingContext, input: { letterId: number
       subject: letter.subject,
       text: letter.text_body,
       html: letter.html_body,
+      attachment: letter.attachment,
       againOf: letter.id,
     })
     await writeLogbook(tx, {

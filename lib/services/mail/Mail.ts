@@ -4,6 +4,7 @@ export interface OutgoingLetter {
   subject: string
   text: string
   html: string
+  attachments?: readonly { fileName: string; bytes: Uint8Array }[]
 }
 
 export interface Mail {

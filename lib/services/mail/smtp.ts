@@ -23,6 +23,11 @@ export function smtpMail(settings: { url: string; from: string }): Mail {
           subject: letter.subject,
           text: letter.text,
           html: letter.html,
+          attachments: (letter.attachments ?? []).map(({ fileName, bytes }) => ({
+            filename: fileName,
+            content: Buffer.from(bytes),
+            contentType: 'application/pdf',
+          })),
           headers: { 'Auto-Submitted': 'auto-generated' },
           disableFileAccess: true,
           disableUrlAccess: true,
