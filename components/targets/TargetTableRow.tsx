@@ -18,6 +18,7 @@ import { NumberCell } from './NumberCell'
 import { PositionCell } from './PositionCell'
 import { hasMessages, RowMessages } from '@/components/rows/RowMessages'
 import { cellNames } from './cellNames'
+import { cellWords } from './cellWords'
 import { StandingSelect } from './StandingSelect'
 import { TargetDetails } from './TargetDetails'
 import { TypedCell } from '@/components/rows/TypedCell'
@@ -179,7 +180,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
           <td role="cell" colSpan={span} className="sm:!pl-7">
             {computed?.refusal ? <p className="m-0 pb-1 text-not-feasible">{computed.refusal}</p> : null}
             {awaited ? <p className="m-0 max-w-prose pb-1 text-muted">{awaited}</p> : null}
-            <RowMessages id={messageId} row={row} cellNames={cellNames} extra={asking} />
+            <RowMessages id={messageId} row={row} cellNames={cellNames} say={cellWords} extra={asking} />
             {isOpen ? (
               <TargetDetails
                 readOnly={readOnly}
