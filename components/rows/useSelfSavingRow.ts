@@ -21,6 +21,10 @@ export interface SelfSavingRow<Row extends FieldValues, Values> {
   stale: (StaleRow & { base: Row }) | null
   /** Ends a comparison with the row as chosen. */
   choose: (chosen: Row) => Promise<void>
+  /** Types a whole row at once, and saves it. */
+  fill: (row: Row) => void
+  /** Takes over what was saved for this row elsewhere on the page. */
+  adopt: (kept: { row: Row; version: number }) => void
 }
 
 export interface SelfSavingRowOptions<Row extends FieldValues, Values, Kept extends { version: number }> {
@@ -143,6 +147,16 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     commit,
     message,
     stale,
+    fill: (row) => {
+      for (const [name, value] of Object.entries(row)) form.setValue(name as Path<Row>, value as never)
+      void commit()
+    },
+    adopt: (kept) => {
+      known.current = kept.row
+      version.current = kept.version
+      form.reset(kept.row)
+      copy.drop()
+    },
     choose: async (chosen) => {
       if (!stale) return
       known.current = { ...empty, ...(stale.theirs as Partial<Row>) }

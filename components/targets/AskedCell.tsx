@@ -7,7 +7,7 @@ import { askFor, hoursText } from '@/lib/domain/observations/rules'
 import type { Observation } from '@/lib/domain/proposals/types'
 import { paths } from '@/lib/paths'
 import { cellClasses } from '@/components/rows/cellClasses'
-import { nextCellOnEnter } from '@/components/rows/nextCellOnEnter'
+import { moveBetweenCells } from '@/components/rows/moveBetweenCells'
 import { StaleHours } from './StaleHours'
 import type { TargetActions } from './targetActions'
 
@@ -83,7 +83,7 @@ export function AskedCell(props: AskedCellProps) {
         onBlur={() => (stale ? undefined : void commit(text))}
         onKeyDown={(event) => {
           if (event.key === 'Escape') setText(kept)
-          nextCellOnEnter(event)
+          moveBetweenCells(event)
         }}
         data-row={row}
         data-cell="asked"

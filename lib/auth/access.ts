@@ -142,6 +142,7 @@ export const access = {
     removePaper: investigator,
     addTarget: investigator,
     saveTarget: investigator,
+    changeTargets: investigator,
     saveGroup: investigator,
     removeGroup: investigator,
     removeTarget: investigator,

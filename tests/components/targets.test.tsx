@@ -27,6 +27,7 @@ function show(over: Partial<TargetActions> = {}, readOnly: string | null = null)
     add: no,
     save,
     remove: no,
+    change: no,
     restore: no,
     reorder: no,
     importRows: no,
