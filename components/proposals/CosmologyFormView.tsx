@@ -9,6 +9,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { ActionResult } from '@/lib/actions/result'
 import { cosmologyFormSchema, type CosmologyForm } from '@/lib/domain/proposals/cosmologyForm'
 import type { Saved } from '@/lib/domain/proposals/writeProposal'
+import { comparisonChoices, cosmologyChoices } from './cosmologyOptions'
 import { OwnParameters } from './OwnParameters'
 import { StaleChoice } from './StaleChoice'
 import { UniverseNote } from './UniverseNote'
@@ -38,11 +39,17 @@ const labels = {
   mNuEv: 'Masses',
 }
 
+function said(field: string, value: unknown): string {
+  const option = [...cosmologyChoices, ...comparisonChoices].find((one) => one.value === value)
+  if ((field === 'choice' || field === 'comparison') && option) return option.label
+  return value === '' || value === undefined ? 'nothing' : String(value)
+}
+
 /** The cosmology every distance follows from: a published one, or one's own; saved as it is chosen. */
 export function CosmologyFormView(props: CosmologyFormViewProps) {
   const { reference, version, kept, choices, comparisons, save } = props
   const keepAs = `cosmology-${reference}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema: cosmologyFormSchema,
     kept,
     version,
@@ -65,7 +72,7 @@ export function CosmologyFormView(props: CosmologyFormViewProps) {
           keepAs={keepAs}
           onBringBack={(copy) => handle.form.reset({ ...kept, ...(copy as CosmologyForm) })}
         />
-        <StaleChoice state={state} values={values} labels={labels} onChoose={choose} />
+        <StaleChoice state={state} values={values} base={base} labels={labels} say={said} onChoose={choose} />
         <RadioField name="choice" label="Compute everything under" options={choices} />
         {values.choice === 'custom' ? <OwnParameters /> : null}
         <SelectField

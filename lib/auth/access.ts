@@ -151,6 +151,7 @@ export const access = {
     removePaper: investigator,
     addTarget: investigator,
     saveTarget: investigator,
+    changeTargets: investigator,
     saveGroup: investigator,
     removeGroup: investigator,
     removeTarget: investigator,
