@@ -18,6 +18,7 @@ import type { SiteRecord } from '@/lib/domain/facility/types'
 import type { ConstraintSet } from '@/lib/domain/proposals/types'
 import { formatNumber } from '@/lib/format'
 import type { ObservationActions } from './observationActions'
+import { conditionLabels } from './conditionLabels'
 
 export interface ConstraintFormProps {
   reference: string
@@ -40,17 +41,6 @@ const skies = [
   { value: 'clear', label: 'clear', help: 'nine tenths of the light comes through' },
   { value: 'thin-cloud', label: 'thin cloud', help: 'seven tenths come through' },
 ]
-
-const labels = {
-  name: 'Name',
-  maxAirmass: 'Highest airmass',
-  imageQuality: 'Poorest image',
-  moon: 'Brightest Moon',
-  minMoonSeparation: 'Nearest Moon',
-  transparency: 'Poorest sky',
-  dateFrom: 'Not before the evening of',
-  dateTo: 'Not after the evening of',
-}
 
 const formSchema = z.object({ set: constraintSchema })
 
@@ -80,7 +70,7 @@ export function ConstraintForm(props: ConstraintFormProps) {
         <ChooseByField
           stale={opened.stale}
           versions={opened.versions(form.form.getValues('set'))}
-          labels={labels}
+          labels={conditionLabels}
           onChoose={(chosen) => {
             opened.settle()
             form.form.reset({ set: chosen })

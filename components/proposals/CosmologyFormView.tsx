@@ -14,6 +14,7 @@ import { OwnParameters } from './OwnParameters'
 import { StaleChoice } from './StaleChoice'
 import { UniverseNote } from './UniverseNote'
 import { useAutosavedForm } from './useAutosavedForm'
+import { cosmologyLabels } from './cosmologyLabels'
 
 export interface CosmologyFormViewProps {
   reference: string
@@ -22,21 +23,6 @@ export interface CosmologyFormViewProps {
   choices: readonly RadioOption[]
   comparisons: readonly SelectOption[]
   save: (input: { reference: string; version: number; form: CosmologyForm }) => Promise<ActionResult<Saved>>
-}
-
-const labels = {
-  choice: 'Cosmology',
-  comparison: 'Beside it',
-  name: 'Name',
-  H0: 'H₀',
-  Om0: 'Ωm',
-  omCounts: 'Ωm counts',
-  Ode0: 'ΩΛ',
-  w0: 'w₀',
-  wa: 'wₐ',
-  Tcmb0: 'Temperature',
-  Neff: 'Species',
-  mNuEv: 'Masses',
 }
 
 function said(field: string, value: unknown): string {
@@ -72,7 +58,14 @@ export function CosmologyFormView(props: CosmologyFormViewProps) {
           keepAs={keepAs}
           onBringBack={(copy) => handle.form.reset({ ...kept, ...(copy as CosmologyForm) })}
         />
-        <StaleChoice state={state} values={values} base={base} labels={labels} say={said} onChoose={choose} />
+        <StaleChoice
+          state={state}
+          values={values}
+          base={base}
+          labels={cosmologyLabels}
+          say={said}
+          onChoose={choose}
+        />
         <RadioField name="choice" label="Compute everything under" options={choices} />
         {values.choice === 'custom' ? <OwnParameters /> : null}
         <SelectField

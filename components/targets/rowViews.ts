@@ -12,11 +12,14 @@ export interface RowPlace {
 
 const drawn = new WeakMap<Target, RowView>()
 
+const isPlain = (value: unknown) => typeof value !== 'object' || value === null
+
+/** Alike in their plain values, which are all that a row shows; the checks stand on a page of their own. */
 function flatSame(a: object, b: object): boolean {
   if (a === b) return true
   const [x, y] = [a as Record<string, unknown>, b as Record<string, unknown>]
-  return (
-    Object.keys(x).length === Object.keys(y).length && Object.keys(x).every((name) => x[name] === y[name])
+  return Object.keys(x).every(
+    (name) => Object.is(x[name], y[name]) || !(isPlain(x[name]) && isPlain(y[name])),
   )
 }
 

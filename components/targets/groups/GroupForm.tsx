@@ -17,6 +17,7 @@ import { countInWords, formatList } from '@/lib/format'
 import type { Target, TargetGroup } from '@/lib/domain/proposals/types'
 import { groupRow, groupSchema } from '@/lib/domain/targetGroups/rules'
 import type { TargetActions } from '../targetActions'
+import { groupLabels } from './groupLabels'
 
 export interface GroupFormProps {
   reference: string
@@ -49,14 +50,6 @@ const hours = [
     help: 'The others stand in for them. Counted are those that take longest, so that any will fit.',
   },
 ]
-
-const labels = {
-  name: 'Name',
-  rule: 'What is wanted of it',
-  atLeast: 'How many must be done',
-  hoursFor: 'Hours are asked for',
-  targetIds: 'Targets in it',
-}
 
 const formSchema = z.object({ group: groupSchema })
 
@@ -92,7 +85,7 @@ export function GroupForm({ reference, group, targets, save, onDone }: GroupForm
         <ChooseByField
           stale={opened.stale}
           versions={opened.versions(form.form.getValues('group'))}
-          labels={labels}
+          labels={groupLabels}
           say={say}
           onChoose={(next) => {
             opened.settle()

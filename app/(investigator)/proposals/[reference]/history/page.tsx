@@ -3,13 +3,13 @@ import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { ChangeList } from '@/components/proposals/ChangeList'
 import { SentVersions } from '@/components/proposals/SentVersions'
-import { TextChanges } from '@/components/proposals/TextChanges'
+import { VersionChangesView } from '@/components/proposals/VersionChangesView'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
-import { readTextChanges } from '@/lib/domain/proposals/history/readTextChanges'
+import { readVersionChanges } from '@/lib/domain/proposals/history/readVersionChanges'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'History' }
@@ -21,11 +21,11 @@ interface Props {
 
 export default async function HistoryPage({ params, searchParams }: Props) {
   const ctx = await openPage('/proposals/[reference]/history')
-  const { contents, now } = await orNotFound(proposalOf((await params).reference))
+  const { contents, computation, now } = await orNotFound(proposalOf((await params).reference))
   const { versions, changes } = await readHistory(ctx, contents)
   const { since } = await searchParams
   const asked = /^\d{1,4}$/.test(since ?? '') ? Number(since) : versions[0]?.number
-  const texts = asked === undefined ? null : await readTextChanges(ctx, contents, asked)
+  const went = asked === undefined ? null : await readVersionChanges(ctx, { contents, computation }, asked)
   return (
     <Main>
       <PageTitle title="History" lead="Who changed what, and what was sent. Times are UTC." />
@@ -42,7 +42,7 @@ export default async function HistoryPage({ params, searchParams }: Props) {
           <div className="mt-2">
             <ChangeList changes={changes} now={now} />
           </div>
-          {texts && (texts.parts.length > 0 || since) ? <TextChanges {...texts} /> : null}
+          {went ? <VersionChangesView {...went} /> : null}
         </TwoColumns>
       </div>
     </Main>
