@@ -76,6 +76,9 @@ export const paths = {
     `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
+  letterSamples: () => '/office/mail/templates',
+  letterSample: (template: string, reference: string) =>
+    `/office/mail/templates/html?template=${part(template)}&reference=${part(reference)}`,
   bulkLetters: () => '/office/mail/letters',
   newBulkLetter: () => '/office/mail/letters/new',
   bulkLetter: (letter: number, reader?: number) =>

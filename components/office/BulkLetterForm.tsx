@@ -64,7 +64,9 @@ export function BulkLetterForm({ letter, calls, action }: BulkLetterFormProps) {
       <TextField name="subject" label="Subject" spellCheck />
       <TextAreaField name="text" label="Text" help={help} rows={12} limit={20_000} />
       <div>
-        <SubmitButton busyWord="Saving">Save and look at it</SubmitButton>
+        <SubmitButton look={letter.id === 0 ? 'primary' : 'secondary'} busyWord="Saving">
+          Save and look at it
+        </SubmitButton>
       </div>
     </ActionForm>
   )

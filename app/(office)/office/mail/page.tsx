@@ -24,6 +24,7 @@ export default async function OfficeMailPage() {
         actions={
           <>
             {inbox ? <TextLink href={inbox}>Open the local inbox</TextLink> : null}
+            <TextLink href={paths.letterSamples()}>How letters look</TextLink>
             <TextLink href={paths.bulkLetters()}>Letters to many</TextLink>
             <LinkButton href={paths.newBulkLetter()} look="secondary">
               Write to many
