@@ -1,11 +1,20 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import { countInWords } from '@/lib/format'
+import type { LetterRow } from '@/lib/domain/outbox/schema'
 import { paths } from '@/lib/paths'
+
+import { letterStands } from './letterStands'
 
 interface BulkReadersProps {
   letterId: number
-  readers: readonly { personId: number; name: string; email: string; addressFails: boolean }[]
+  readers: readonly {
+    personId: number
+    name: string
+    email: string
+    addressFails: boolean
+    state: LetterRow['state'] | null
+  }[]
   shownId: number
 }
 
@@ -32,7 +41,7 @@ export function BulkReaders({ letterId, readers, shownId }: BulkReadersProps) {
             )}
             <span className="block text-muted">
               {one.email}
-              {one.addressFails ? ', left out' : ''}
+              {one.addressFails ? ', left out' : one.state ? `, ${letterStands[one.state]}` : ''}
             </span>
           </li>
         ))}

@@ -68,7 +68,10 @@ async function decisionOf(db: Database, proposalId: number): Promise<LetterCase[
   }
 }
 
-async function moneyOf(db: Database, proposalId: number): Promise<Pick<LetterCase, 'fee' | 'receipt' | 'waiver'>> {
+async function moneyOf(
+  db: Database,
+  proposalId: number,
+): Promise<Pick<LetterCase, 'fee' | 'receipt' | 'waiver'>> {
   const fee = await db('fees').where({ proposal_id: proposalId }).first()
   if (!fee) return { fee: null, receipt: null, waiver: null }
   const [receipt, waiver] = await Promise.all([

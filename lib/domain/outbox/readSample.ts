@@ -30,8 +30,7 @@ export async function readSample(
   const reference = asked.reference ?? cases.find(({ state }) => state !== 'draft')?.reference ?? ''
   const sample = letterSamples.find((one) => one.template === template)
   const of = await findLetterCase(ctx.db, reference)
-  const built =
-    of && sample ? sample.build({ of, clerk: ctx.actor.name, origin: ctx.request.origin }) : null
+  const built = of && sample ? sample.build({ of, clerk: ctx.actor.name, origin: ctx.request.origin }) : null
   return {
     templates: letterSamples.map(({ template: name, title }) => ({ template: name, title })),
     others: sent.filter(({ template: name }) => !letterSamples.some((one) => one.template === name)),

@@ -81,6 +81,10 @@ describe('a letter to many', () => {
     expect(rows[0]?.html_body).toMatch(/The deadline is <strong>\d+ \w+ \d{4}, \d\d:\d\d UTC<\/strong>/)
     expect(rows[0]?.text_body).toContain('us (https://quillonridge.example)')
     expect((await refused(send(id, readers.length))).message).toContain('sent already')
+    await db()('people').where({ id: scenario.reviewers[0].personId }).update({ disabled_at: new Date() })
+    const sent = await readBulkLetter(office(), id, scenario.reviewers[0].personId)
+    expect(sent.shown?.text).toBe(rows.find((row) => row.to_name === 'Ansa Brightmoor')?.text_body)
+    expect(sent.readers.map(({ email }) => email).sort()).toEqual(rows.map((row) => row.to_email).sort())
     expect(await letters(id)).toHaveLength(count)
   })
 

@@ -14,7 +14,7 @@ beforeEach(async () => {
   billed = await makeBilled(db())
 })
 
-// Seen to fail: with a fee read from another proposal, and with letters of nothing built all the same.
+// Seen to fail: with letters of nothing built all the same.
 describe('a letter tried on a real proposal', () => {
   it('tells its facts, in text and HTML, and sends nothing', async () => {
     const before = await db()('outbox').count({ n: '*' })

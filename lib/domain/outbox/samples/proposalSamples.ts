@@ -62,7 +62,11 @@ export const proposalSamples: readonly LetterSample[] = [
     template: 'deadline-moved',
     title: 'The deadline moves; to everyone with a draft',
     build: ({ of, origin }) =>
-      deadlineMoved({ name: of.lead, reference: of.reference }, of.call, origin + paths.proposal(of.reference)),
+      deadlineMoved(
+        { name: of.lead, reference: of.reference },
+        of.call,
+        origin + paths.proposal(of.reference),
+      ),
   },
   {
     template: 'proposal-sent',

@@ -12,7 +12,8 @@ import { paths } from '@/lib/paths'
 
 export const metadata: Metadata = { title: 'How letters look' }
 
-const text = (value: string | string[] | undefined) => (typeof value === 'string' && value ? value : undefined)
+const text = (value: string | string[] | undefined) =>
+  typeof value === 'string' && value ? value : undefined
 
 export default async function TemplatesPage({
   searchParams,
