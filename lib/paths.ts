@@ -78,9 +78,19 @@ export const paths = {
     `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
+  letterSamples: () => '/office/mail/templates',
+  letterSample: (template: string, reference: string) =>
+    `/office/mail/templates/html?template=${part(template)}&reference=${part(reference)}`,
+  bulkLetters: () => '/office/mail/letters',
+  newBulkLetter: () => '/office/mail/letters/new',
+  bulkLetter: (letter: number, reader?: number) =>
+    `/office/mail/letters/${letter}${reader === undefined ? '' : `?reader=${reader}`}`,
+  bulkLetterHtml: (letter: number, reader: number, version: number) =>
+    `/office/mail/letters/${letter}/html?reader=${reader}&v=${version}`,
   officeLetter: (letter: number) => `/office/mail/${letter}`,
   officeLetterHtml: (letter: number) => `/office/mail/${letter}/html`,
   officePerson: (person: number) => `/office/people/${person}`,
+  officeMerge: (person: number) => `/office/people/${person}/merge`,
   officePersonData: (person: number) => `/office/people/${person}/data`,
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',

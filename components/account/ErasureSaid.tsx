@@ -6,7 +6,7 @@ export function ErasureSaid({ erasure }: { erasure: ErasureView }) {
     <>
       {erasure.inTheWay.length > 0 ? (
         <div className="mb-4 border-l-4 border-not-feasible pl-4 text-table">
-          <p className="m-0 font-semibold">First</p>
+          <p className="m-0 font-semibold">What comes first</p>
           {erasure.inTheWay.map((sentence) => (
             <p key={sentence} className="m-0">
               {sentence}

@@ -1,5 +1,6 @@
 'use client'
 
+import { useQueryClient } from '@tanstack/react-query'
 import type { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
@@ -8,6 +9,7 @@ import { useActionForm } from '@/components/forms/useActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { showToast } from '@/components/ui/showToast'
 import { inviteSchema } from '@/lib/domain/invitations/schema'
+import { officePeopleKey } from './officePeopleKey'
 import { RoleScopeFields, type RoleChoices } from './RoleScopeFields'
 
 type Input = z.input<typeof inviteSchema>
@@ -18,6 +20,7 @@ interface InviteFormProps extends RoleChoices {
 
 /** Name, address and role; what the role is for is asked once the role is known. */
 export function InviteForm({ action, panels, instruments }: InviteFormProps) {
+  const client = useQueryClient()
   const form = useActionForm({
     schema: inviteSchema,
     action,
@@ -32,6 +35,7 @@ export function InviteForm({ action, panels, instruments }: InviteFormProps) {
     onDone: ({ sentence }) => {
       showToast(sentence)
       form.form.reset()
+      void client.invalidateQueries({ queryKey: officePeopleKey })
     },
   })
   return (

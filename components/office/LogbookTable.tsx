@@ -95,7 +95,7 @@ export function LogbookTable({ initial, filter }: LogbookTableProps) {
           >
             Read further back
           </Button>
-          <span className="text-muted">{`The newest ${formatNumber(rows.length)} rows are read; the file holds all of them.`}</span>
+          <span className="text-muted">{`The newest ${formatNumber(rows.length)} rows are read so far.`}</span>
         </div>
       ) : null}
     </>

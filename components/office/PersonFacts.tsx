@@ -33,6 +33,9 @@ export function PersonFacts({ person }: { person: PersonView }) {
         ]}
       />
       <p className="m-0 flex flex-wrap gap-x-5 gap-y-2 text-table">
+        {person.mergedInto || person.erasedAt ? null : (
+          <TextLink href={paths.officeMerge(person.id)}>The same person twice? Merge</TextLink>
+        )}
         <TextLink href={`${paths.office('logbook')}?person=${person.id}`}>What they did</TextLink>
         <TextLink href={`${paths.office('logbook')}?kind=person&id=${person.id}`}>
           What was done to it

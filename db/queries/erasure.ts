@@ -170,3 +170,18 @@ export async function setErasureAsked(db: Database, id: number, isAsked: boolean
     .update({ erasure_asked_at: isAsked ? utcNow(db) : null })
   return changed === 1
 }
+
+/** Accounts that were merged into one, those merged into them included. */
+export async function mergedInto(db: Database, id: number): Promise<{ id: number; email: string }[]> {
+  const found: { id: number; email: string }[] = []
+  let from = [id]
+  while (from.length > 0) {
+    const next = await db('people')
+      .whereIn('merged_into_id', from)
+      .whereNull('erased_at')
+      .select('id', 'email')
+    found.push(...next)
+    from = next.map((row) => row.id)
+  }
+  return found
+}

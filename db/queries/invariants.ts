@@ -78,6 +78,10 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
   ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
   [
+    'I5 no letter to many goes twice to one address',
+    'SELECT bulk_letter_id FROM outbox WHERE bulk_letter_id IS NOT NULL GROUP BY bulk_letter_id, to_email HAVING COUNT(*) > 1',
+  ],
+  [
     'I6 the logbook is an unbroken chain',
     `SELECT b.id FROM logbook b LEFT JOIN logbook a ON a.id = (SELECT MAX(id) FROM logbook WHERE id < b.id)
       WHERE b.previous_hash <> COALESCE(a.hash, REPEAT('0', 64))`,

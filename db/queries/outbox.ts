@@ -145,3 +145,9 @@ export async function requeueLetter(db: Database, id: number): Promise<boolean> 
     .update({ state: 'queued', attempts: 0, next_attempt_at: utcNow(db), claimed_until: null })
   return changed === 1
 }
+
+/** The newest letter of each template that was ever written. */
+export async function newestByTemplate(db: Database): Promise<{ template: string; id: number }[]> {
+  const rows = await db('outbox').groupBy('template').orderBy('template').select('template').max({ id: 'id' })
+  return rows.map((row) => ({ template: row.template, id: Number(row.id) }))
+}

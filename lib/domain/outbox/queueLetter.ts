@@ -17,6 +17,7 @@ export async function queueLetter(
   letter: Letter,
   /** What caused it, e.g. 'submitted:412:1'; the same cause never writes twice to one address. */
   cause: string,
+  bulkLetterId?: number,
 ): Promise<void> {
   const { text, html } = renderLetter(letter)
   const domain = new URL(tx.request.origin).hostname
@@ -31,5 +32,6 @@ export async function queueLetter(
     text,
     html,
     attachment: letter.attachment ?? null,
+    ...(bulkLetterId === undefined ? {} : { bulkLetterId }),
   })
 }

@@ -1,4 +1,4 @@
-import { erasePersonRows, inTheWayOfErasure, keptAfterErasure } from '@/db/queries/erasure'
+import { erasePersonRows, inTheWayOfErasure, keptAfterErasure, mergedInto } from '@/db/queries/erasure'
 import { findPerson, lockPerson } from '@/db/queries/people'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
@@ -19,7 +19,9 @@ export async function erasePerson(ctx: ActingContext, input: { personId: number 
     const [first] = wayWords(await inTheWayOfErasure(tx.db, person.id))
     if (first) throw refuse.closed(first)
     const kept = await keptAfterErasure(tx.db, person.id)
-    await erasePersonRows(tx.db, person.id, person.email)
+    // Accounts that were merged into this one still hold a name and an address.
+    for (const one of [person, ...(await mergedInto(tx.db, person.id))])
+      await erasePersonRows(tx.db, one.id, one.email)
     await writeLogbook(tx, {
       action: 'person.erase',
       subject: { kind: 'person', id: person.id },

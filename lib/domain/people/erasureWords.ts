@@ -14,9 +14,9 @@ export function wayWords(way: { leads: readonly string[]; reviews: number; roles
     way.leads.length > 0 &&
       `Leads ${formatList(way.leads)}, on which nobody has decided: another has to lead it, or it has to be withdrawn.`,
     way.reviews > 0 &&
-      `Has ${countInWords(way.reviews, 'review', 'reviews')} in hand: the chair has to give them to others.`,
+      `Has ${countInWords(way.reviews, 'review', 'reviews')} in hand: the chair has to find somebody else.`,
     way.roles > 0 &&
-      `Holds ${countInWords(way.roles, 'role', 'roles')} besides the investigator’s: end them first.`,
+      `Holds ${countInWords(way.roles, 'role')} besides the investigator’s: to be ended first.`,
   ].filter((sentence) => sentence !== false)
 }
 
@@ -29,7 +29,7 @@ export const whatGoes: readonly string[] = [
   'Private notes beside reviews',
 ]
 
-/** What stays, with its numbers and the reason. */
+/** What stays, with its numbers and the reason; what there is none of is left out. */
 export function whatStays(kept: {
   sentProposals: number
   reviews: number
@@ -37,26 +37,32 @@ export function whatStays(kept: {
   fees: number
   deeds: number
 }): ErasureView['stays'] {
-  return [
+  const lines = [
     {
-      what: `The name on ${countInWords(kept.sentProposals, 'sent proposal', 'sent proposals')}, without the address`,
+      n: kept.sentProposals,
+      what: `The name on ${countInWords(kept.sentProposals, 'sent proposal')}, without the address`,
       why: 'A sent version stays as it was sent: time was asked for, and perhaps given, by these names.',
     },
     {
-      what: `${countInWords(kept.reviews, 'review', 'reviews')} with scores and comments, without a name`,
+      n: kept.reviews,
+      what: `${countInWords(kept.reviews, 'review', 'reviews', true)} with scores and comments, without a name`,
       why: 'Decisions on others’ proposals rest on them.',
     },
     {
-      what: `${countInWords(kept.assessments, 'assessment', 'assessments')}, without a name`,
+      n: kept.assessments,
+      what: `${countInWords(kept.assessments, 'assessment', 'assessments', true)}, without a name`,
       why: 'The time a proposal was given rests on them.',
     },
     {
-      what: `${countInWords(kept.fees, 'fee', 'fees')} with payments, receipts and waivers`,
+      n: kept.fees,
+      what: `${countInWords(kept.fees, 'fee', 'fees', true)} with payments, receipts and waivers`,
       why: 'The law wants accounts kept.',
     },
     {
-      what: `${countInWords(kept.deeds, 'row', 'rows')} of the logbook, without a name, with the address of the connection`,
+      n: kept.deeds,
+      what: `${countInWords(kept.deeds, 'row', 'rows', true)} of the logbook, without a name, with the address of the connection`,
       why: 'It proves what happened; to change one row would break its seal.',
     },
   ]
+  return lines.filter(({ n }) => n > 0).map(({ what, why }) => ({ what, why }))
 }

@@ -142,10 +142,10 @@ describe('erasing a person', () => {
     })
     const { inTheWay, stays } = await readErasure(as(scenario.office), reviewer.personId)
     expect(inTheWay).toEqual([
-      'Has one review in hand: the chair has to give them to others.',
-      'Holds one role besides the investigator’s: end them first.',
+      'Has one review in hand: the chair has to find somebody else.',
+      'Holds one role besides the investigator’s: to be ended first.',
     ])
-    expect(stays.some(({ what }) => what.startsWith('one review with scores'))).toBe(true)
+    expect(stays.some(({ what }) => what.startsWith('One review with scores'))).toBe(true)
     expect((await refused(erase(reviewer))).kind).toBe('closed')
     expect((await findPerson(db(), reviewer.personId))?.erased_at).toBeNull()
   })
