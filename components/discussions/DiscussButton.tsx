@@ -20,7 +20,7 @@ export function DiscussButton({
       look="secondary"
       size="small"
       busy={busy === 'discuss'}
-      busyWord="Putting it on the table"
+      busyWord="Putting"
       onClick={() => deed('discuss', () => discuss({ panelId, proposalId }))}
     >
       Put it on the table

@@ -12,7 +12,7 @@ export function OnTable({ view, scoreAgain }: { view: TableView; scoreAgain: Sco
   return (
     <article aria-labelledby="on-table" className="min-w-0">
       <p className="m-0 text-table font-semibold text-lamp">
-        Now discussing{since ? ` since ${formatUtcClock(new Date(since))} UTC` : ''}
+        Now discussing{since ? ` since ${formatUtcClock(new Date(since))}` : ''}
       </p>
       <h2 id="on-table" className="mt-1 text-h2">
         {proposal.reviewNumber} {proposal.title}

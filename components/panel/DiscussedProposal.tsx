@@ -18,12 +18,21 @@ export interface DiscussedProposalProps {
   save: SaveStatementAction
   setAside: SetAsideAction
   discuss: DiscussAction
+  /** It is what the panel discusses now. */
+  isOnTable: boolean
 }
 
 const seatWords = { first: 'first reader', second: 'second voice', reader: 'reader' } as const
 
 /** One proposal in discussion: who speaks, how scores spread, what was written, what the panel agrees on. */
-export function DiscussedProposal({ proposal, view, save, setAside, discuss }: DiscussedProposalProps) {
+export function DiscussedProposal({
+  proposal,
+  view,
+  save,
+  setAside,
+  discuss,
+  isOnTable,
+}: DiscussedProposalProps) {
   const { ranking } = view
   const canWrite = ranking.list !== null && ranking.phase !== 'decided' && ranking.phase !== 'archived'
   const speakers = proposal.readers.filter((reader) => reader.seat !== 'reader')
@@ -60,7 +69,7 @@ export function DiscussedProposal({ proposal, view, save, setAside, discuss }: D
         </p>
         {canWrite ? (
           <span className="flex flex-wrap items-baseline gap-x-5 gap-y-2 text-table">
-            {proposal.setAside ? null : (
+            {proposal.setAside || isOnTable ? null : (
               <DiscussButton panelId={ranking.panelId} proposalId={proposal.proposalId} discuss={discuss} />
             )}
             <SetAsideButton proposal={proposal} ranking={ranking} action={setAside} />

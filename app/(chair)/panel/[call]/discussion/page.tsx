@@ -67,6 +67,7 @@ export default async function DiscussionPage(props: PanelPageProps) {
               save={saveConsensusAction}
               setAside={setAsideAction}
               discuss={discussNowAction}
+              isOnTable={table.proposal?.proposalId === open.proposalId}
             />
             <NextInOrder proposals={view.proposals} openId={open.proposalId} addressOf={addressOf} />
           </div>
