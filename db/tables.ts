@@ -505,6 +505,8 @@ export interface PanelsRow {
   formula: string | null
   formula_by: number | null
   formula_at: Date | null
+  discussing_id: number | null
+  discussing_since: Date | null
 }
 
 export interface PanelMembersRow {
@@ -515,6 +517,7 @@ export interface PanelMembersRow {
   number: number
   left_at: Date | null
   created_at: Date
+  present_at: Date | null
 }
 
 export interface PapersRow {
@@ -1148,11 +1151,14 @@ declare module 'knex/types/tables.js' {
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
     panels: Knex.CompositeTableType<
       PanelsRow,
-      Insert<PanelsRow, 'id' | 'quorum' | 'formula' | 'formula_by' | 'formula_at'>
+      Insert<
+        PanelsRow,
+        'id' | 'quorum' | 'formula' | 'formula_by' | 'formula_at' | 'discussing_id' | 'discussing_since'
+      >
     >
     panel_members: Knex.CompositeTableType<
       PanelMembersRow,
-      Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at'>
+      Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at' | 'present_at'>
     >
     papers: Knex.CompositeTableType<PapersRow, Insert<PapersRow, 'id' | 'superseded_at' | 'created_at'>>
     payments: Knex.CompositeTableType<

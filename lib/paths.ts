@@ -62,6 +62,7 @@ export const paths = {
 
   reviews: () => '/reviews',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
+  meeting: (callSlug: string) => `/reviews/meeting/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
   reviewReport: (assignment: number | string) => `/reviews/${part(String(assignment))}/report`,
   reviewPacket: (assignment: number | string) => `/reviews/${part(String(assignment))}/packet`,

@@ -14,6 +14,8 @@ export interface TableQueryOptions<Reply> {
   initialData?: Reply
   /** False while there is nothing to ask for. */
   enabled?: boolean
+  /** Asks anew every so many milliseconds, for what others change meanwhile. */
+  everyMs?: number
 }
 
 /** The data of a client table, from a route handler, checked by the same schema the handler answers with. */
@@ -23,11 +25,13 @@ export function useTableQuery<Reply>({
   schema,
   initialData,
   enabled,
+  everyMs,
 }: TableQueryOptions<Reply>): UseQueryResult<Reply> {
   return useQuery<Reply>({
     queryKey: key,
     queryFn: ({ signal }) => fetchJson(url, schema, signal),
     initialData,
     enabled,
+    refetchInterval: everyMs ?? false,
   })
 }

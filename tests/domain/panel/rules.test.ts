@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Actor } from '@/lib/domain/actor'
-import { interestInWords, whyNotAssigned, whyNotReminded } from '@/lib/domain/assignments/rules'
+import { interestInWords, whyNotAssigned, whyNotReminded, reminderDue } from '@/lib/domain/assignments/rules'
 import { outcomeOf, overAwards, whyNotReleased } from '@/lib/domain/decisions/rules'
 import { awardSchema } from '@/lib/domain/decisions/schema'
 import { statementFrom } from '@/lib/domain/decisions/statementFrom'
@@ -247,5 +247,23 @@ describe('awards', () => {
 
   it('a statement is the comments, each once', () => {
     expect(statementFrom([' One. ', 'Two.\n\n\n\nMore.', 'One.', ''])).toBe('One.\n\nTwo.\n\nMore.')
+  })
+})
+
+describe('reminderDue', () => {
+  const due = new Date('2027-03-10T12:00:00Z')
+  const meets = new Date('2027-03-20T12:00:00Z')
+  it.each([
+    ['2027-03-03T11:59:59Z', null],
+    ['2027-03-03T12:00:00Z', 'week'],
+    ['2027-03-09T11:59:59Z', 'week'],
+    ['2027-03-09T12:00:00Z', 'day'],
+    ['2027-03-10T11:59:59Z', 'day'],
+    ['2027-03-10T12:00:00Z', null],
+    ['2027-03-11T12:00:00Z', 'late'],
+    ['2027-03-20T11:59:59Z', 'late'],
+    ['2027-03-20T12:00:00Z', null],
+  ] as const)('at %s: %s', (now, kind) => {
+    expect(reminderDue(due, meets, new Date(now))).toBe(kind)
   })
 })
