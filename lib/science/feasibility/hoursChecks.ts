@@ -1,8 +1,9 @@
 import type { MoonClass } from '../exposure'
 import type { TargetVisibility } from '../sky'
 import { judgeAtLeast, judgeAtMost } from './judge'
+import { limitWords } from './limitWords'
 import { sayHours, sayNumber, sayPercent } from './saying'
-import type { Check, ReportObservation } from './types'
+import type { Check, ReportInput, ReportObservation } from './types'
 
 const moonWords: Record<MoonClass, string> = {
   dark: 'with the Moon down or a quarter lit at most',
@@ -15,7 +16,10 @@ function nightsUp(visible: TargetVisibility): number {
 }
 
 /** Is the target up in the dark for at least twice the hours asked? */
-export function checkUp(visible: TargetVisibility, observation: ReportObservation, nights: number): Check {
+export function checkUp(visible: TargetVisibility, input: ReportInput, nights: number): Check {
+  const { observation } = input
+  const words = limitWords(input.pointing)
+  const limits = words && `${words},`
   const asked = observation.askedS / 3600
   const verdict = judgeAtLeast(visible.totalHours, 2 * asked, Math.max(asked, 1e-9))
   const up = nightsUp(visible)
@@ -28,8 +32,8 @@ export function checkUp(visible: TargetVisibility, observation: ReportObservatio
     verdict,
     why:
       up === 0
-        ? `Never above airmass ${observation.maxAirmass} in the dark in this season.`
-        : `Above airmass ${observation.maxAirmass} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
+        ? `Never above airmass ${observation.maxAirmass}${limits} in the dark in this season.`
+        : `Above airmass ${observation.maxAirmass}${limits} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
     fix: verdict === 'feasible' ? null : 'Accept a larger airmass, or ask in another season.',
   }
 }

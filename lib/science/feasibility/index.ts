@@ -16,4 +16,5 @@ export type {
   Verdict,
 } from './types'
 export { feasibilityEngineVersion } from './version'
+export { limitWords } from './limitWords'
 export { moonClassLimits } from './moonClass'

@@ -43,7 +43,7 @@ export function observationReport(input: ReportInput): ObservationReport {
 
   const season = seasonVisibility(input)
   if (season) {
-    checks.push(checkUp(season.visible, observation, season.nights))
+    checks.push(checkUp(season.visible, input, season.nights))
     checks.push(checkUpWithMoon(season.usableHours, observation))
   }
 

@@ -9,10 +9,13 @@ export {
   moonSeparationDeg,
   sunAltitudeDeg,
 } from './instants'
+export { horizonAltitudeDeg, type HorizonProfile, type HorizonRow } from './horizonProfile'
 export { dateOfMjd, mjdOf } from './mjd'
 export { moonlitSkyV, type MoonlitSky } from './moonlight'
 export { moonPhases, type MoonPhase } from './moonPhases'
 export { eveningDateAt, nightAt } from './nightAt'
+export { openHourAngles } from './openHourAngles'
+export type { PointingLimits } from './pointing'
 export { positionsAt, type InstantPositions, type PositionsInput, type TargetPosition } from './positionsAt'
 export { seasonGrid, type SeasonGrid, type SeasonNight } from './seasonGrid'
 export type { MoonLimits, Night, Site, SkyTarget, Twilight } from './types'
