@@ -637,6 +637,7 @@ export interface SiteRecordsRow {
   dark_sky_mag_arcsec2: string
   seeing_arcsec: string
   created_at: Date
+  horizon: string
 }
 
 export interface StoredObjectsRow {
@@ -722,6 +723,8 @@ export interface TelescopeRecordsRow {
   aperture_m: number
   collecting_area_m2: number
   created_at: Date
+  horizon: string
+  highest_altitude_deg: number | null
 }
 
 export interface TimeEntriesRow {
@@ -1028,7 +1031,10 @@ declare module 'knex/types/tables.js' {
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
-    site_records: Knex.CompositeTableType<SiteRecordsRow, Insert<SiteRecordsRow, 'id' | 'created_at'>>
+    site_records: Knex.CompositeTableType<
+      SiteRecordsRow,
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'horizon'>
+    >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<
       TargetsRow,
@@ -1083,7 +1089,7 @@ declare module 'knex/types/tables.js' {
     telescopes: Knex.CompositeTableType<TelescopesRow, Insert<TelescopesRow, 'id'>>
     telescope_records: Knex.CompositeTableType<
       TelescopeRecordsRow,
-      Insert<TelescopeRecordsRow, 'id' | 'created_at'>
+      Insert<TelescopeRecordsRow, 'id' | 'created_at' | 'horizon' | 'highest_altitude_deg'>
     >
     time_entries: Knex.CompositeTableType<TimeEntriesRow, Insert<TimeEntriesRow, 'id'>>
     time_transfers: Knex.CompositeTableType<

@@ -21,6 +21,7 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
   const { id: formId } = useActionFormState()
   const { register, getFieldState, formState, trigger } = useFormContext()
   const words = columnWords[kind]
+  const isBand = kind === 'extinction' || kind === 'dark-sky'
   const cell = (index: number, column: 'at' | 'value') => {
     const path = `${name}.${index}.${column}`
     const { error } = getFieldState(path, formState)
@@ -40,7 +41,7 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           size={8}
           autoComplete="off"
           spellCheck={false}
-          inputMode={kind !== 'throughput' && column === 'at' ? 'text' : 'decimal'}
+          inputMode={isBand && column === 'at' ? 'text' : 'decimal'}
           className={cellClasses({ wrong: Boolean(error) })}
         />
         {error?.message ? (
@@ -58,10 +59,11 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           <tr role="row">
             <th role="columnheader" scope="col">
               {words.at}
-              {kind === 'throughput' ? <span className="unit">Å</span> : null}
+              {isBand ? null : <span className="unit">{kind === 'throughput' ? 'Å' : 'degrees'}</span>}
             </th>
             <th role="columnheader" scope="col">
               {words.value}
+              {kind === 'horizon' ? <span className="unit">degrees</span> : null}
             </th>
             <th role="columnheader" scope="col">
               <span className="sr-only">Take out</span>

@@ -48,7 +48,7 @@ export function SiteForm(props: SiteFormProps) {
         <NumberField
           name="lowestAltitudeDeg"
           label="Lowest altitude"
-          help="Telescopes point no lower."
+          help="Telescopes point no lower. True altitude, without refraction."
           unit="°"
         />
         <TextField name="timeZone" label="Time zone" help="By its IANA name." width="medium" />
@@ -59,6 +59,15 @@ export function SiteForm(props: SiteFormProps) {
           unit="h"
         />
       </div>
+      <SectionHeading title="Horizon" dense />
+      <RecordTable
+        name="horizon"
+        kind="horizon"
+        label="Lowest altitude by azimuth"
+        help="From north through east, straight between the rows and on from the last to the first. No rows: level at the lowest altitude. True altitudes; at 20° refraction lifts a source by 0.05°."
+        before={typed.horizon}
+        fileName={`${slug}-horizon`}
+      />
       <SectionHeading title="Image quality at the zenith and 500 nm" dense />
       <div className={three}>
         <NumberField name="best10" label="Best tenth of nights" unit="″" />

@@ -5,6 +5,7 @@ import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { SiteFacts } from '@/lib/domain/facility/types'
 import { formatNumber, formatOffset, formatQuantity, formatSigned } from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { horizonInWords } from './horizonWords'
 import { nextInWords, stampInWords } from './recordWords'
 
 const byBand = (values: Record<string, number>, decimals: number) =>
@@ -38,6 +39,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
             { term: 'Height', value: formatQuantity(facts.elevationM, 0, 'm') },
             { term: 'Clock at the site', value: formatOffset(facts.utcOffsetHours) },
             { term: 'Lowest altitude', value: `${formatNumber(facts.lowestAltitudeDeg, 0)}°` },
+            { term: 'Horizon', value: horizonInWords(facts.horizon) },
           ]}
         />
         <Facts

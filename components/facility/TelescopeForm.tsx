@@ -6,6 +6,7 @@ import type { RecordUse } from '@/lib/domain/facility/types'
 import { telescopeFields, type TelescopeTyped } from '@/lib/domain/facility/telescopeForm'
 import { telescopeRecordSchema, type TelescopeForm as Input } from '@/lib/domain/facility/telescopeSchema'
 import { RecordForm } from './RecordForm'
+import { RecordTable } from './RecordTable'
 import { useRecordForm } from './useRecordForm'
 
 export interface TelescopeFormProps {
@@ -43,7 +44,22 @@ export function TelescopeForm(props: TelescopeFormProps) {
           help="Without what stands in the light’s way."
           unit="m²"
         />
+        <NumberField
+          name="highestAltitudeDeg"
+          label="Highest altitude"
+          help="An altazimuth mount cannot follow through its zenith. Leave it empty where there is no blind spot."
+          unit="°"
+          optional
+        />
       </div>
+      <RecordTable
+        name="horizon"
+        kind="horizon"
+        label="Horizon of its own"
+        help="Lowest altitude by azimuth from north through east, where dome or neighbours stand in its way; the horizon of the site counts besides. No rows: nothing does."
+        before={typed.horizon}
+        fileName={`${slug}-horizon`}
+      />
     </RecordForm>
   )
 }

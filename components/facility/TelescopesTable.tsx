@@ -2,13 +2,16 @@ import { TableFrame } from '@/components/tables/TableFrame'
 import { TextLink } from '@/components/ui/TextLink'
 import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { TelescopeFacts } from '@/lib/domain/facility/types'
-import { formatCalendarDate, formatNumber } from '@/lib/format'
+import { ABSENT, formatCalendarDate, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { horizonInWords } from './horizonWords'
 import { nextInWords, writtenBy } from './recordWords'
 
 const heads: readonly (readonly [head: string, unit?: string])[] = [
   ['Aperture', 'm'],
   ['Collecting area', 'm²'],
+  ['Highest altitude', 'degrees'],
+  ['Horizon of its own'],
   ['Record'],
   ['Since'],
   ['By'],
@@ -42,6 +45,12 @@ export function TelescopesTable({ telescopes }: { telescopes: readonly HeldRecor
             </td>
             <td role="cell" data-head="Collecting area" className="is-right">
               {formatNumber(now.facts.collectingAreaM2, 2)}
+            </td>
+            <td role="cell" data-head="Highest altitude" className="is-right">
+              {now.facts.highestAltitudeDeg === null ? ABSENT : formatNumber(now.facts.highestAltitudeDeg, 1)}
+            </td>
+            <td role="cell" data-head="Horizon of its own">
+              {now.facts.horizon.length === 0 ? ABSENT : horizonInWords(now.facts.horizon)}
             </td>
             <td role="cell" data-head="Record">
               {now.recordVersion}

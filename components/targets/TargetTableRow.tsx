@@ -135,6 +135,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
               name={name}
               computed={computed}
               maxAirmass={view.maxAirmass}
+              limits={view.limits}
             />
           ) : (
             ABSENT

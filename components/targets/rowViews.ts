@@ -1,6 +1,8 @@
+import { pointingOf } from '@/lib/domain/facility/rules'
 import { conditionsOf, worstVerdict } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { limitWords } from '@/lib/science/feasibility'
 import type { RowView } from './targetTableTypes'
 
 /** A row's place among the rows: its key, the kept target and the one being typed. */
@@ -19,6 +21,7 @@ export function rowViews(
   return places.map(({ key, kept, target }) => {
     const observations = contents.observations.filter(({ targetId }) => targetId === target.id)
     const numbers = computation.observations.filter(({ targetId }) => targetId === target.id)
+    const telescope = contents.modes.find(({ modeId }) => modeId === observations[0]?.modeId)?.telescope
     const isKnown = numbers.length > 0 && numbers.every(({ neededSeconds }) => neededSeconds !== null)
     return {
       key,
@@ -30,6 +33,7 @@ export function rowViews(
       neededSeconds: isKnown ? numbers.reduce((sum, one) => sum + (one.neededSeconds ?? 0), 0) : null,
       verdict: worstVerdict(numbers.map((one) => one.verdict)),
       maxAirmass: conditionsOf(contents, observations[0]).maxAirmass,
+      limits: limitWords(pointingOf(contents.site, telescope)),
     }
   })
 }

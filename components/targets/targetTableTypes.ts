@@ -18,6 +18,8 @@ export interface RowView {
   neededSeconds: number | null
   verdict: Verdict | null
   maxAirmass: number
+  /** What else keeps the telescope off it, as `, clear of the horizon`; empty for nothing. */
+  limits: string
 }
 
 export interface TargetTableProps {

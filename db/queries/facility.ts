@@ -1,4 +1,10 @@
-import type { ModeFacts, ModeRecord, SiteFacts, SiteRecord } from '@/lib/domain/facility/types'
+import type {
+  ModeFacts,
+  ModeRecord,
+  SiteFacts,
+  SiteRecord,
+  TelescopeFacts,
+} from '@/lib/domain/facility/types'
 import type { Database } from '../client.ts'
 import type {
   InstrumentModesRow,
@@ -20,6 +26,7 @@ export function siteFactsOf(row: SiteRecordsRow): SiteFacts {
     timeZone: row.time_zone,
     utcOffsetHours: row.utc_offset_hours,
     lowestAltitudeDeg: row.lowest_altitude_deg,
+    horizon: parsed(row.horizon),
     extinctionMagPerAirmass: parsed(row.extinction_mag_per_airmass),
     darkSkyMagArcsec2: parsed(row.dark_sky_mag_arcsec2),
     seeingArcsec: parsed(row.seeing_arcsec),
@@ -92,6 +99,16 @@ export function modeFactsOf(row: ModeRecordsRow): ModeFacts {
   }
 }
 
+/** What a row of a telescope's record says. */
+export function telescopeFactsOf(row: TelescopeRecordsRow): TelescopeFacts {
+  return {
+    apertureM: row.aperture_m,
+    collectingAreaM2: row.collecting_area_m2,
+    horizon: parsed(row.horizon),
+    highestAltitudeDeg: row.highest_altitude_deg,
+  }
+}
+
 function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
   return {
     modeId: row.mode_id,
@@ -104,8 +121,7 @@ function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
       slug: row.telescope_slug,
       name: row.telescope_name,
       recordVersion: telescope.record_version,
-      apertureM: telescope.aperture_m,
-      collectingAreaM2: telescope.collecting_area_m2,
+      ...telescopeFactsOf(telescope),
     },
     ...modeFactsOf(row),
   }
@@ -146,13 +162,7 @@ export async function modeRecordsAt(
       telescope_name: 't.name',
     })
   const latest = [...latestBy(rows, (row) => row.mode_id).values()]
-  const telescopes = latestBy(
-    await db('telescope_records')
-      .whereIn('telescope_id', [...new Set(latest.map((row) => row.telescope_id))])
-      .andWhere('valid_from', '<=', onDate)
-      .orderBy('record_version'),
-    (row) => row.telescope_id,
-  )
+  const telescopes = await telescopeRecordsAt(db, onDate, [...new Set(latest.map((row) => row.telescope_id))])
   return latest.map((row) => {
     const telescope = telescopes.get(row.telescope_id)
     if (!telescope) throw new Error(`telescope ${row.telescope_id} has no record for ${onDate}`)
@@ -166,10 +176,28 @@ export async function siteRecordsAt(db: Database, onDate: string): Promise<SiteR
   return Promise.all(sites.map(({ id }) => siteRecordAt(db, id, onDate)))
 }
 
-/** Every telescope with the site it stands on. */
+/** The record of each telescope in force on a date, by telescope. */
+async function telescopeRecordsAt(db: Database, onDate: string, ids: readonly number[]) {
+  const rows = await db('telescope_records')
+    .whereIn('telescope_id', ids)
+    .andWhere('valid_from', '<=', onDate)
+    .orderBy('record_version')
+  return latestBy(rows, (row) => row.telescope_id)
+}
+
+/** Every telescope with the site it stands on and its record in force on a date. */
 export async function telescopesAtSites(
   db: Database,
-): Promise<{ id: number; siteId: number; slug: string; name: string }[]> {
+  onDate: string,
+): Promise<{ id: number; siteId: number; slug: string; name: string; facts: TelescopeFacts }[]> {
   const rows = await db('telescopes').orderBy('id').select<TelescopesRow[]>('*')
-  return rows.map((row) => ({ id: row.id, siteId: row.site_id, slug: row.slug, name: row.name }))
+  const records = await telescopeRecordsAt(
+    db,
+    onDate,
+    rows.map(({ id }) => id),
+  )
+  return rows.flatMap(({ id, site_id: siteId, slug, name }) => {
+    const record = records.get(id)
+    return record ? [{ id, siteId, slug, name, facts: telescopeFactsOf(record) }] : []
+  })
 }

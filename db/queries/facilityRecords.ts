@@ -1,7 +1,7 @@
 import type { ModeFacts, RecordVersion, SiteFacts, TelescopeFacts } from '../../lib/domain/facility/types.ts'
 import type { Database } from '../client.ts'
 import type { ModeRecordsRow, SiteRecordsRow, TelescopeRecordsRow } from '../tables.ts'
-import { modeFactsOf, siteFactsOf } from './facility.ts'
+import { modeFactsOf, siteFactsOf, telescopeFactsOf } from './facility.ts'
 
 /** What a record is of; the logbook knows a version as `<kind> record`, `<key>.<version>`. */
 export type RecordKind = 'site' | 'telescope' | 'mode'
@@ -56,7 +56,7 @@ export async function telescopeVersions(
     db,
     rows,
     { kind: 'telescope', id: telescopeId },
-    (row) => ({ apertureM: row.aperture_m, collectingAreaM2: row.collecting_area_m2 }),
+    telescopeFactsOf,
   )
 }
 
@@ -82,6 +82,7 @@ export async function insertSiteRecord(
     time_zone: facts.timeZone,
     utc_offset_hours: facts.utcOffsetHours,
     lowest_altitude_deg: facts.lowestAltitudeDeg,
+    horizon: JSON.stringify(facts.horizon),
     extinction_mag_per_airmass: JSON.stringify(facts.extinctionMagPerAirmass),
     dark_sky_mag_arcsec2: JSON.stringify(facts.darkSkyMagArcsec2),
     seeing_arcsec: JSON.stringify(facts.seeingArcsec),
@@ -99,6 +100,8 @@ export async function insertTelescopeRecord(
     valid_from: version.validFrom,
     aperture_m: version.facts.apertureM,
     collecting_area_m2: version.facts.collectingAreaM2,
+    horizon: JSON.stringify(version.facts.horizon),
+    highest_altitude_deg: version.facts.highestAltitudeDeg,
   })
 }
 

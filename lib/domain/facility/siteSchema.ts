@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { bandTable, darkSkyQuantity, extinctionQuantity } from './bandTableSchema'
+import { horizonTable } from './horizonSchema'
 import { quantity } from './quantity'
 import { versionFields } from './recordSchema'
 
@@ -28,6 +29,7 @@ export const siteRecordSchema = z
       .refine(isTimeZone, 'This is not a time zone; one is called Etc/GMT+3, for instance.'),
     utcOffsetHours: quantity({ what: 'An offset from UTC', low: -12, high: 14, unit: '\u00a0h' }),
     lowestAltitudeDeg: quantity({ what: 'A lowest altitude', low: 0, high: 85, unit: '°' }),
+    horizon: horizonTable,
     best10: seeing('The best tenth'),
     median: seeing('The median'),
     worst90: seeing('The poorest tenth'),

@@ -247,6 +247,36 @@ describe('records of site and telescope', () => {
     expect(site?.now).toMatchObject({ recordVersion: 2, validFrom: today, savedBy: scenario.office.name })
   })
 
+  // Seen to fail with the telescope's horizon left out of the hours, and with the site's.
+  it('say where a telescope can point: a horizon and a blind spot take hours of a draft at once', async () => {
+    const up = async () =>
+      computationOf(await readContents(db(), scenario.reference)).targets[0]?.visibleHours ?? 0
+    const usable = async () =>
+      computationOf(await readContents(db(), scenario.reference)).observations[0]?.usableHours ?? 0
+    const [first, firstUsable] = [await up(), await usable()]
+    const wall = [
+      { at: '0', value: '10' },
+      { at: '40', value: '80' },
+      { at: '140', value: '80' },
+      { at: '180', value: '10' },
+    ]
+    await saveTelescopeRecord(office, await telescopeInput({ horizon: wall }))
+    const second = await up()
+    // Up in the west alone.
+    expect(second / first).toBeGreaterThan(0.3)
+    expect(second / first).toBeLessThan(0.7)
+    expect(await usable()).toBeLessThan(0.7 * firstUsable)
+    await saveSiteRecord(office, await siteInput({ horizon: [{ at: '0', value: '80' }] }))
+    expect(await up()).toBeLessThan(second / 2)
+    await saveSiteRecord(office, await siteInput({ horizon: [] }))
+    await saveTelescopeRecord(office, await telescopeInput({ horizon: [], highestAltitudeDeg: '60' }))
+    const beside = await up()
+    expect(beside).toBeGreaterThan(0)
+    expect(beside).toBeLessThan(first)
+    const { newest } = await readTelescopeRecord(office, slugOf('telescope'))
+    expect(newest.facts).toMatchObject({ horizon: [], highestAltitudeDeg: 60 })
+  })
+
   it('are the office’s alone', async () => {
     const [site, telescope] = [await siteInput({ elevationM: '1' }), await telescopeInput({ apertureM: '4' })]
     for (const actor of [scenario.pi, scenario.scientist]) {

@@ -7,6 +7,7 @@ import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
+import { readTelescopes } from '@/lib/domain/facility/readTelescopes'
 import { askedOf } from '@/lib/domain/tools/askedOf'
 import { positionOf } from '@/lib/domain/tools/positionOf'
 import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
@@ -25,6 +26,7 @@ const usual = (call: { seasonFrom: string; seasonTo: string } | undefined): Seas
   to: call?.seasonTo ?? '2027-12-31',
   moon: 'any',
   separation: '0',
+  telescope: '',
 })
 
 export default async function SeasonPage({
@@ -41,7 +43,10 @@ export default async function SeasonPage({
     minSeparationDeg: numberOf(asked.separation) ?? 0,
   }
   const { from, to } = asked
-  const season = view && seasonView(view.site, { from, to, maxAirmass, moon }, positionOf(asked))
+  const { telescopes } = await readTelescopes(ctx)
+  const here = telescopes.filter(({ site }) => site.siteId === view?.site.siteId)
+  const telescope = here.find(({ slug }) => slug === asked.telescope)?.facts
+  const season = view && seasonView(view.site, { from, to, maxAirmass, moon, telescope }, positionOf(asked))
   const isOfCall = from === view?.call.seasonFrom && to === view.call.seasonTo
   return (
     <Main>
@@ -52,7 +57,7 @@ export default async function SeasonPage({
         </div>
       ) : null}
       <div className="mt-6">
-        <SeasonForm key={JSON.stringify(asked)} asked={asked} />
+        <SeasonForm key={JSON.stringify(asked)} asked={asked} telescopes={here} />
       </div>
       <div className="mt-10">
         {view && season ? (
@@ -62,6 +67,7 @@ export default async function SeasonPage({
             site={view.site}
             view={season}
             maxAirmass={maxAirmass}
+            telescope={telescope}
             fileName="season"
           />
         ) : (
