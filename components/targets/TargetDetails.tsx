@@ -40,6 +40,7 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
         <DetailGroup title="The shape">
           <SelectField name="geometry" label="Shape" options={shapes} {...shared} />
           <NumberField name="effectiveRadius" label="Half-light radius" unit="″" {...number} />
+          <NumberField name="effectiveRadiusError" label="Its error" unit="″" {...number} />
           <NumberField name="sersicIndex" label="Sérsic index" {...number} />
         </DetailGroup>
         <DetailGroup title="An emission line" note="Counts where an observation asks for just this line.">

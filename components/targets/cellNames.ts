@@ -17,6 +17,7 @@ export const cellNames: Record<keyof TargetRow, string> = {
   need: 'Need',
   geometry: 'Shape',
   effectiveRadius: 'Half-light radius',
+  effectiveRadiusError: 'Error of the half-light radius',
   sersicIndex: 'Sérsic index',
   ebv: 'Galactic E(B−V)',
   magnification: 'Magnification',

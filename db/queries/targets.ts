@@ -39,6 +39,7 @@ function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = 
     pmDecMasYr: row.pm_dec_mas_yr,
     geometry: row.geometry,
     effectiveRadiusArcsec: row.effective_radius_arcsec,
+    effectiveRadiusErrorArcsec: quantities.find(({ quantity }) => quantity === 'size')?.error ?? null,
     sersicIndex: row.sersic_index,
     redshiftTyped: row.redshift_typed,
     redshift: row.redshift,
@@ -55,7 +56,7 @@ function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = 
   }
 }
 
-/** What is known of the light of targets, by target. */
+/** What is known of the light and size of targets, by target. */
 async function quantitiesOf(db: Database, targetIds: number[]): Promise<Map<number, TargetQuantitiesRow[]>> {
   const rows = await db('target_quantities').whereIn('target_id', targetIds).orderBy('id')
   const byTarget = new Map<number, TargetQuantitiesRow[]>()
@@ -121,12 +122,27 @@ async function writeLine(db: Database, targetId: number, line: LineLight): Promi
   })
 }
 
-async function writeLight(
+/** A size with its error: without one, the size stands with the target alone. */
+async function writeSize(
   db: Database,
   targetId: number,
-  { brightness, line }: Pick<TargetValues, 'brightness' | 'line'>,
+  { effectiveRadiusArcsec: value, effectiveRadiusErrorArcsec: error }: TargetValues,
 ): Promise<void> {
+  // A target kept in the logbook from before sizes had errors knows of none.
+  if (value === null || (error ?? null) === null) return
+  await db('target_quantities').insert({
+    target_id: targetId,
+    quantity: 'size',
+    value,
+    error,
+    unit: 'arcsec',
+  })
+}
+
+async function writeQuantities(db: Database, targetId: number, values: TargetValues): Promise<void> {
+  const { brightness, line } = values
   await db('target_quantities').where({ target_id: targetId }).del()
+  await writeSize(db, targetId, values)
   if (line) await writeLine(db, targetId, line)
   if (!brightness) return
   await db('target_quantities').insert({
@@ -144,7 +160,7 @@ async function writeLight(
 
 export async function insertTarget(db: Database, proposalId: number, values: TargetValues): Promise<number> {
   const [id = 0] = await db('targets').insert({ proposal_id: proposalId, ...columnsOf(values) })
-  await writeLight(db, id, values)
+  await writeQuantities(db, id, values)
   return id
 }
 
@@ -158,7 +174,7 @@ export async function updateTarget(
     .where({ id: target.id, version: target.version })
     .update({ ...columnsOf(values), version: target.version + 1 })
   if (changed === 0) return false
-  await writeLight(db, target.id, values)
+  await writeQuantities(db, target.id, values)
   return true
 }
 

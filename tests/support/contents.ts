@@ -82,6 +82,7 @@ export const target = (over: Partial<Target> = {}): Target => ({
   pmDecMasYr: null,
   geometry: 'point',
   effectiveRadiusArcsec: null,
+  effectiveRadiusErrorArcsec: null,
   sersicIndex: null,
   redshiftTyped: '0.15834',
   redshift: 0.15834,

@@ -47,6 +47,7 @@ const cells = z.object({
   need: z.enum(['required', 'optional', 'backup']),
   geometry: z.enum(['point', 'sersic', 'uniform']),
   effectiveRadius: typedNumber('A half-light radius', 0.01, 600),
+  effectiveRadiusError: typedNumber('An error of the half-light radius', 0, 600),
   sersicIndex: typedNumber('A Sérsic index', SERSIC_LEAST, SERSIC_MOST),
   ebv: typedNumber('A reddening E(B−V)', 0, 5),
   magnification: typedNumber('A magnification', 0.01, 1000),
@@ -74,6 +75,14 @@ function together(values: Cells, ctx: z.RefinementCtx): void {
     need('band', 'Say in which band and system the magnitude is.')
   if (values.geometry !== 'point' && values.effectiveRadius.value === null)
     need('effectiveRadius', 'An extended source needs its half-light radius.')
+  const [radius, error] = [values.effectiveRadius.value, values.effectiveRadiusError.value]
+  if (error !== null && radius === null)
+    need('effectiveRadiusError', 'An error needs the half-light radius it is of.')
+  if (error !== null && radius !== null && error > radius)
+    need(
+      'effectiveRadiusError',
+      'An error larger than the size itself leaves no size: call it a point source.',
+    )
   const line = values.lineValue.value
   if (values.lineName !== '' && line === null) need('lineValue', `Give the ${values.lineKind} of the line.`)
   const [least, most] = lineRange[values.lineKind]
@@ -99,6 +108,7 @@ function toValues(c: Cells): TargetValues {
     pmDecMasYr: c.pmDec.value,
     geometry: c.geometry,
     effectiveRadiusArcsec: c.effectiveRadius.value,
+    effectiveRadiusErrorArcsec: c.effectiveRadiusError.value,
     sersicIndex: c.geometry === 'sersic' ? (c.sersicIndex.value ?? 1) : null,
     redshiftTyped: c.redshift.typed,
     redshift: c.redshift.value,
