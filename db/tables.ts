@@ -177,6 +177,16 @@ export interface EmailTokensRow {
   created_at: Date
 }
 
+export interface FacilityRetirementsRow {
+  id: number
+  site_id: number | null
+  telescope_id: number | null
+  instrument_id: number | null
+  mode_id: number | null
+  retired_from: string
+  created_at: Date
+}
+
 export interface FeesRow {
   id: number
   proposal_id: number
@@ -827,6 +837,13 @@ declare module 'knex/types/tables.js' {
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
+    >
+    facility_retirements: Knex.CompositeTableType<
+      FacilityRetirementsRow,
+      Insert<
+        FacilityRetirementsRow,
+        'id' | 'site_id' | 'telescope_id' | 'instrument_id' | 'mode_id' | 'created_at'
+      >
     >
     fees: Knex.CompositeTableType<
       FeesRow,

@@ -73,7 +73,13 @@ export function RecordTablePlot({ kind, before, after }: RecordTablePlotProps) {
     if (before.length > 1)
       lines.push({ id: 'old', name: isSame ? 'as saved' : 'old', tone: 's1', points: before })
     if (!isSame && after.length > 1)
-      lines.push({ id: 'new', name: 'new', tone: 's2', points: after, chosen: true })
+      lines.push({
+        id: 'new',
+        name: before.length > 0 ? 'new' : 'as typed',
+        tone: 's2',
+        points: after,
+        chosen: true,
+      })
     return lines
   }, [old, next, isSame, kind])
   if (series.length === 0) return null
@@ -86,28 +92,30 @@ export function RecordTablePlot({ kind, before, after }: RecordTablePlotProps) {
       : ([0, Math.max(...ys) * 1.15 || 1] as const)
   const values = (points: readonly (readonly [number, number])[]) => new Map(points)
   const [oldAt, nextAt] = [values(old), values(next)]
+  const hasOld = old.length > 0
+  const which = isSame ? 'as saved' : hasOld ? 'old and new' : 'as typed'
   return (
     <ChartFrame
       title={title}
-      fileName={`${file}-old-and-new`}
+      fileName={hasOld ? `${file}-old-and-new` : file}
       brief
       numbers={{
-        caption: `${title}, old and new`,
+        caption: `${title}, ${hasOld ? 'old and new' : 'as typed'}`,
         columns: [
           { head: kind === 'horizon' ? 'Azimuth' : 'Wavelength', unit: x.unit, decimals: x.decimals },
-          { head: 'Old', decimals: yDecimals },
-          { head: 'New', decimals: yDecimals },
+          ...(hasOld ? [{ head: 'Old', decimals: yDecimals }] : []),
+          { head: hasOld ? 'New' : 'Value', decimals: yDecimals },
         ],
         rows: [...new Set([...oldAt.keys(), ...nextAt.keys()])]
           .sort((a, b) => a - b)
-          .map((at) => [at, oldAt.get(at) ?? null, nextAt.get(at) ?? null]),
+          .map((at) => [at, ...(hasOld ? [oldAt.get(at) ?? null] : []), nextAt.get(at) ?? null]),
       }}
     >
       <LineChart
         fluid
         height={240}
         labels="inside"
-        label={`${title} against ${kind === 'horizon' ? 'azimuth' : 'wavelength'}, ${isSame ? 'as saved' : 'old and new'}.`}
+        label={`${title} against ${kind === 'horizon' ? 'azimuth' : 'wavelength'}, ${which}.`}
         series={series}
         xLabel={`${x.name}, ${x.unit}`}
         xName={x.letter}

@@ -3,7 +3,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { SiteFacts } from '@/lib/domain/facility/types'
-import { formatNumber, formatOffset, formatQuantity, formatSigned } from '@/lib/format'
+import { formatCalendarDate, formatNumber, formatOffset, formatQuantity, formatSigned } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { horizonInWords } from './horizonWords'
 import { nextInWords, stampInWords } from './recordWords'
@@ -25,6 +25,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
           <>
             <span>{stampInWords(site.now, site.now.validFrom)}</span>
             {site.next ? <span>{nextInWords(site.next)}</span> : null}
+            {site.retiredFrom ? <span>retires on {formatCalendarDate(site.retiredFrom)}</span> : null}
             <TextLink href={paths.facilityRecord('sites', site.slug)} aria-label={`Change ${site.name}`}>
               Change
             </TextLink>

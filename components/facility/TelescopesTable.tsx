@@ -35,10 +35,15 @@ export function TelescopesTable({ telescopes }: { telescopes: readonly HeldRecor
         </tr>
       </thead>
       <tbody role="rowgroup">
-        {telescopes.map(({ slug, name, now, next }) => (
+        {telescopes.map(({ slug, name, now, next, retiredFrom }) => (
           <tr key={slug} role="row">
             <th role="rowheader" scope="row">
               <TextLink href={paths.facilityRecord('telescopes', slug)}>{name}</TextLink>
+              {retiredFrom ? (
+                <span className="block text-caption font-normal text-muted">
+                  retires on {formatCalendarDate(retiredFrom)}
+                </span>
+              ) : null}
             </th>
             <td role="cell" data-head="Aperture" className="is-right">
               {formatNumber(now.facts.apertureM, 2)}

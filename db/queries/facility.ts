@@ -6,6 +6,7 @@ import type {
   TelescopeFacts,
 } from '@/lib/domain/facility/types'
 import type { Database } from '../client.ts'
+import { retiredIds } from './retirements.ts'
 import type {
   InstrumentModesRow,
   InstrumentsRow,
@@ -136,7 +137,7 @@ export function modeRecordsOnOffer(db: Database, callId: number, onDate: string)
   return modeRecordsAt(db, onDate, callId)
 }
 
-/** Every mode of the observatory as its record stood on a date; with a call, only those on offer in it. */
+/** Every mode of the observatory not retired, as its record stood on a date; with a call, those on offer in it. */
 export async function modeRecordsAt(
   db: Database,
   onDate: string,
@@ -148,7 +149,8 @@ export async function modeRecordsAt(
     .join('mode_records as r', 'r.mode_id', 'm.id')
     .where('r.valid_from', '<=', onDate)
     .modify((q) => {
-      if (callId !== null) q.whereIn('m.id', db('call_modes').where({ call_id: callId }).select('mode_id'))
+      if (callId === null) void q.whereNotIn('m.id', retiredIds(db, 'mode', onDate))
+      else void q.whereIn('m.id', db('call_modes').where({ call_id: callId }).select('mode_id'))
     })
     .orderBy(['t.id', 'i.id', 'm.id', 'r.record_version'])
     .select<ModeRow[]>('r.*', {
@@ -163,16 +165,20 @@ export async function modeRecordsAt(
     })
   const latest = [...latestBy(rows, (row) => row.mode_id).values()]
   const telescopes = await telescopeRecordsAt(db, onDate, [...new Set(latest.map((row) => row.telescope_id))])
-  return latest.map((row) => {
+  return latest.flatMap((row) => {
     const telescope = telescopes.get(row.telescope_id)
-    if (!telescope) throw new Error(`telescope ${row.telescope_id} has no record for ${onDate}`)
-    return modeOf(row, telescope)
+    return telescope ? [modeOf(row, telescope)] : []
   })
 }
 
-/** Every site with its record in force on a date. */
+/** Every site not retired that has a record in force on a date, with it. */
 export async function siteRecordsAt(db: Database, onDate: string): Promise<SiteRecord[]> {
-  const sites = await db('sites').orderBy('id').select('id')
+  const begun = db('site_records').where('valid_from', '<=', onDate).select('site_id')
+  const sites = await db('sites')
+    .whereIn('id', begun)
+    .whereNotIn('id', retiredIds(db, 'site', onDate))
+    .orderBy('id')
+    .select('id')
   return Promise.all(sites.map(({ id }) => siteRecordAt(db, id, onDate)))
 }
 
@@ -185,12 +191,15 @@ async function telescopeRecordsAt(db: Database, onDate: string, ids: readonly nu
   return latestBy(rows, (row) => row.telescope_id)
 }
 
-/** Every telescope with the site it stands on and its record in force on a date. */
+/** Every telescope not retired with the site it stands on and its record in force on a date. */
 export async function telescopesAtSites(
   db: Database,
   onDate: string,
 ): Promise<{ id: number; siteId: number; slug: string; name: string; facts: TelescopeFacts }[]> {
-  const rows = await db('telescopes').orderBy('id').select<TelescopesRow[]>('*')
+  const rows = await db('telescopes')
+    .whereNotIn('id', retiredIds(db, 'telescope', onDate))
+    .orderBy('id')
+    .select<TelescopesRow[]>('*')
   const records = await telescopeRecordsAt(
     db,
     onDate,

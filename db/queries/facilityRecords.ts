@@ -38,6 +38,16 @@ async function versionsOf<Row extends RecordRow, Facts>(
   }))
 }
 
+/** The earliest evening any version of a record begins on, of every site, telescope or mode, by key. */
+export async function firstEvenings(db: Database, kind: RecordKind): Promise<Map<number, string>> {
+  const key = `${kind}_id`
+  const rows = (await db(`${kind}_records`)
+    .groupBy(key)
+    .select({ id: key })
+    .min({ begins_on: 'valid_from' })) as { id: number; begins_on: string }[]
+  return new Map(rows.map((row) => [row.id, row.begins_on]))
+}
+
 /** Every version of a site's record, the newest first. */
 export async function siteVersions(db: Database, siteId: number): Promise<RecordVersion<SiteFacts>[]> {
   const rows = await db('site_records').where({ site_id: siteId }).orderBy('record_version', 'desc')

@@ -22,6 +22,22 @@ export function siteTyped(facts: SiteFacts): SiteTyped {
   }
 }
 
+/** A site nobody has described yet. */
+export const emptySite: SiteTyped = {
+  latitudeDeg: '',
+  longitudeDeg: '',
+  elevationM: '',
+  timeZone: '',
+  utcOffsetHours: '',
+  lowestAltitudeDeg: '',
+  horizon: [],
+  best10: '',
+  median: '',
+  worst90: '',
+  extinction: [],
+  darkSky: [],
+}
+
 export const siteFields: Record<keyof SiteTyped, FieldWords> = {
   latitudeDeg: { label: 'Latitude', unit: '°' },
   longitudeDeg: { label: 'Longitude', unit: '°' },

@@ -12,6 +12,14 @@ export const telescopeTyped = (facts: TelescopeFacts): TelescopeTyped => ({
   horizon: typedHorizon(facts.horizon),
 })
 
+/** A telescope nobody has described yet. */
+export const emptyTelescope: TelescopeTyped = {
+  apertureM: '',
+  collectingAreaM2: '',
+  highestAltitudeDeg: '',
+  horizon: [],
+}
+
 export const telescopeFields: Record<keyof TelescopeTyped, FieldWords> = {
   apertureM: { label: 'Aperture', unit: 'm' },
   collectingAreaM2: { label: 'Collecting area', unit: 'm²' },

@@ -87,6 +87,9 @@ export interface ModeFacts {
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
 }
 
+/** What the facility is made of, each carried by the one before. */
+export type FacilityKind = 'site' | 'telescope' | 'instrument' | 'mode'
+
 /** Every site and instrument mode with the record in force. */
 export interface FacilityView {
   sites: SiteRecord[]

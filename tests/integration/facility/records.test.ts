@@ -8,7 +8,7 @@ import { modeTyped } from '@/lib/domain/facility/modeForm'
 import { modeRecordSchema } from '@/lib/domain/facility/modeSchema'
 import { readModeRecord } from '@/lib/domain/facility/readModeRecord'
 import { readOverview } from '@/lib/domain/facility/readOverview'
-import { readOwnModes } from '@/lib/domain/facility/readOwnModes'
+import { readOwnInstruments } from '@/lib/domain/facility/readOwnInstruments'
 import { readSiteRecord } from '@/lib/domain/facility/readSiteRecord'
 import { readTelescopeRecord } from '@/lib/domain/facility/readTelescopeRecord'
 import { saveModeRecord } from '@/lib/domain/facility/saveModeRecord'
@@ -163,8 +163,13 @@ describe('a mode’s record', () => {
       expect((await refused(saveModeRecord(as(actor), input))).kind).toBe('forbidden')
       expect((await refused(readModeRecord(as(actor), slugOf('mode')))).kind).toBe('forbidden')
     }
-    expect(await readOwnModes(as(stranger))).toEqual([])
-    expect((await readOwnModes(as(scenario.scientist))).map(({ slug }) => slug)).toEqual([slugOf('mode')])
+    const ownOf = async (actor: Actor) =>
+      (await readOwnInstruments(as(actor))).instruments.map(({ slug, modes }) => [
+        slug,
+        modes.map((mode) => mode.slug),
+      ])
+    expect(await ownOf(stranger)).toEqual([[`other-${scenario.tag}`, []]])
+    expect(await ownOf(scenario.scientist)).toEqual([[slugOf('instrument'), [slugOf('mode')]]])
     expect(await modeVersions(db(), scenario.modeId)).toHaveLength(1)
     expect(await saveModeRecord(as(scenario.scientist), input)).toEqual({ recordVersion: 2 })
     const entry = await db()('logbook').orderBy('id', 'desc').first()
