@@ -11,13 +11,15 @@ import { columnWords, type TableKind } from '@/lib/domain/facility/rules'
 export interface RecordTableRowsProps {
   name: string
   kind: TableKind
-  /** Keys of the rows, in order. */
+  /** Keys of the rows shown, in order. */
   keys: readonly string[]
+  /** Which row of the table the first of them is, from 0. */
+  first: number
   onRemove: (index: number) => void
 }
 
 /** The rows of a table, each cell open; its message stands under it. */
-export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsProps) {
+export function RecordTableRows({ name, kind, keys, first, onRemove }: RecordTableRowsProps) {
   const { id: formId } = useActionFormState()
   const { register, getFieldState, formState, trigger } = useFormContext()
   const words = columnWords[kind]
@@ -71,17 +73,20 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           </tr>
         </thead>
         <tbody role="rowgroup">
-          {keys.map((key, index) => (
-            <tr key={key} role="row">
-              <td role="cell">{cell(index, 'at')}</td>
-              <td role="cell">{cell(index, 'value')}</td>
-              <td role="cell" className="is-right whitespace-nowrap">
-                <LinkLikeButton aria-label={`Take out row ${index + 1}`} onClick={() => onRemove(index)}>
-                  Take out
-                </LinkLikeButton>
-              </td>
-            </tr>
-          ))}
+          {keys.map((key, position) => {
+            const index = first + position
+            return (
+              <tr key={key} role="row">
+                <td role="cell">{cell(index, 'at')}</td>
+                <td role="cell">{cell(index, 'value')}</td>
+                <td role="cell" className="is-right whitespace-nowrap">
+                  <LinkLikeButton aria-label={`Take out row ${index + 1}`} onClick={() => onRemove(index)}>
+                    Take out
+                  </LinkLikeButton>
+                </td>
+              </tr>
+            )
+          })}
         </tbody>
       </TableFrame>
     </div>

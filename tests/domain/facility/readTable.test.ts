@@ -133,14 +133,14 @@ describe('a table of efficiencies', () => {
     ])
   })
 
-  it('takes 300 rows, and refuses 10,000 with a way out', () => {
+  it('takes 2,000 rows, and refuses 10,000 with a way out', () => {
     const long = (count: number) =>
       ['wavelength (Å),efficiency', ...Array.from({ length: count }, (_, i) => `${3000 + i},0.2`)].join('\n')
-    const most = read(long(300))
-    expect(most.ok && [most.rows.length, most.problems.length]).toEqual([300, 0])
+    const most = read(long(2000))
+    expect(most.ok && [most.rows.length, most.problems.length]).toEqual([2000, 0])
     expect(read(long(10_000))).toEqual({
       ok: false,
-      message: 'There are 10,000 rows; at most 300 are kept. One row in 34 would do.',
+      message: 'There are 10,000 rows; at most 2,000 are kept. One row in 5 would do.',
     })
   })
 })
