@@ -46,7 +46,9 @@ export function ChartFrame({ title, note, numbers, fileName, brief, children }: 
           >
             {brief ? (open ? 'Hide' : 'Table') : words}
           </LinkLikeButton>
-          <LinkLikeButton onClick={save}>CSV</LinkLikeButton>
+          <LinkLikeButton aria-label={brief ? `CSV: ${title ?? numbers.caption}` : undefined} onClick={save}>
+            CSV
+          </LinkLikeButton>
         </span>
       </div>
       {children}

@@ -1,10 +1,16 @@
 import type { NightsView } from '@/lib/domain/decisions/nightsView'
 import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
-import { HalfMonths } from './HalfMonths'
+import { SeasonCells } from './SeasonCells'
 
-/** Hours on offer on one telescope by half-month, and what is given of them. */
-export function OfferedHours({ telescope }: { telescope: NightsView['telescopes'][number] }) {
-  const { name, halves, offeredSeconds, givenSeconds } = telescope
+/** Hours on offer on one telescope, what is given of them, and where the suggestion lays them. */
+export function OfferedHours({
+  telescope,
+  seasonFrom,
+}: {
+  telescope: NightsView['telescopes'][number]
+  seasonFrom: string
+}) {
+  const { name, offeredSeconds, givenSeconds } = telescope
   const left = offeredSeconds - givenSeconds
   return (
     <section aria-label={`Hours on offer on ${name}`} className="min-w-0">
@@ -24,9 +30,8 @@ export function OfferedHours({ telescope }: { telescope: NightsView['telescopes'
         />
       </div>
       <div className="mt-3">
-        <HalfMonths halves={halves} />
+        <SeasonCells telescope={telescope} seasonFrom={seasonFrom} />
       </div>
-      <p className="m-0 text-caption text-muted">Dark hours for science, by half-month.</p>
     </section>
   )
 }

@@ -1,3 +1,4 @@
+import type { NightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
 import type { ActionResult } from '@/lib/actions/result'
 
 export type SaveAwardAction = (input: {
@@ -13,4 +14,7 @@ export type SaveAwardAction = (input: {
   }[]
 }) => Promise<ActionResult<void>>
 
-export type TakePlanAction = (input: { panelId: number }) => Promise<ActionResult<{ awarded: number }>>
+export type TakePlanAction = (input: {
+  panelId: number
+  policy: NightsPolicy
+}) => Promise<ActionResult<{ awarded: number }>>

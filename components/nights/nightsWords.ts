@@ -7,6 +7,17 @@ export function hoursOf(line: Pick<NightsLine, 'wholeSeconds'>, seconds: number)
   return seconds < line.wholeSeconds ? `${given} of ${formatNumber(line.wholeSeconds / 3600, 1)}` : given
 }
 
+/** Who would lose most, and how many others: `; displaces 7.5 h of 14-071 and 2.0 h of 14-083`. */
+function displacedInWords(displaces: NonNullable<NightsLine['whyNot']>['displaces']): string {
+  const worst = [...displaces].sort((a, b) => b.seconds - a.seconds)
+  const [first, second] = worst.map(
+    ({ reviewNumber, seconds }) => `${formatHoursFromSeconds(seconds)} of ${reviewNumber}`,
+  )
+  if (!first) return ''
+  if (worst.length > 2) return `; displaces ${first} and time of ${worst.length - 1} others`
+  return `; displaces ${first}${second ? ` and ${second}` : ''}`
+}
+
 /** Why the suggestion gives a line nothing. */
 export function whyNotInWords(line: Pick<NightsLine, 'whyNot' | 'leastSeconds' | 'assessment'>): string {
   if (!line.whyNot) return 'only together with its other instrument'
@@ -14,7 +25,9 @@ export function whyNotInWords(line: Pick<NightsLine, 'whyNot' | 'leastSeconds' |
   if (line.whyNot.reason === 'not-possible')
     return `assessed as not possible${line.assessment ? `: ${line.assessment.reason}` : ''}`
   const left = line.whyNot.left < 180 ? 'nothing' : formatHoursFromSeconds(line.whyNot.left)
-  return `${left} left, ${formatHoursFromSeconds(line.leastSeconds)} is the least`
+  const least = `${formatHoursFromSeconds(line.leastSeconds)} is the least`
+  if (line.whyNot.reason === 'not-usable') return `${left} that its targets can use, ${least}`
+  return `${left} left, ${least}${displacedInWords(line.whyNot.displaces)}`
 }
 
 /** What stands beside given hours: `, in reserve, visitor, dark time`. */

@@ -18,6 +18,8 @@ export interface ReportSeasonProps {
   maxAirmass: number
   /** Whose horizon and blind spot count besides the site's. */
   telescope?: TelescopePointing | undefined
+  /** Why it is never up, where it is not. */
+  never?: string | null
   fileName: string
 }
 
@@ -41,12 +43,13 @@ function notesOf(view: SeasonView): SeasonNote[] {
 
 /** When a target is up: every night of the season, its twilight, its Moon and the target's window. */
 export function ReportSeason(props: ReportSeasonProps) {
-  const { title, name, site, view, maxAirmass, telescope, fileName } = props
+  const { title, name, site, view, maxAirmass, telescope, never, fileName } = props
   const { grid, phases } = view
   const first = grid.nights[0]?.night.date ?? ''
   const up = view.byNight.filter((hours) => hours > 0).length
   const limits = limitWords(pointingOf(site, telescope))
-  const label = `${name} is up in the dark above airmass ${maxAirmass}${limits && `${limits},`} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
+  const counted = `${name} is up in the dark above airmass ${maxAirmass}${limits && `${limits},`} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
+  const label = never ?? counted
   return (
     <section>
       <SectionHeading

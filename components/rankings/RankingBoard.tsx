@@ -94,8 +94,7 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
         {view.corrected
           ? 'Merit is fitted with every reviewer’s leniency taken out (REML).'
           : 'Merit is fitted without taking leniency out.'}{' '}
-        The formula was fixed before the first score. A rank moved by hand is kept in the logbook with who,
-        when and why.
+        The formula was fixed before the first score.
       </p>
     </>
   )

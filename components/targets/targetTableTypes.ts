@@ -20,6 +20,8 @@ export interface RowView {
   maxAirmass: number
   /** What else keeps the telescope off it, as `, clear of the horizon`; empty for nothing. */
   limits: string
+  /** How often its hours count in those asked; null while nothing observes it. */
+  times: number | null
 }
 
 export interface TargetTableProps {
@@ -30,6 +32,10 @@ export interface TargetTableProps {
   readOnly: string | null
   numbers: { cosmologyName: string; comparisonName: string | null; engineVersion: string }
   season: { seasonFrom: string; seasonTo: string; fullBar: number }
+  /** Names of the groups of the proposal. */
+  groups: readonly string[]
+  /** Whether what is awaited may be asked for. */
+  takesAwaited: boolean
   actions: TargetActions
   onTyped: (key: string, row: TargetRow) => void
   onSave: (key: string, row: TargetRow, version: number | null) => Promise<ActionResult<Target>>

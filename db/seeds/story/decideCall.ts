@@ -19,7 +19,7 @@ export async function decideCall(story: Teller, call: SeededCall): Promise<void>
     .first()
   if (!ranking) throw new Error('the ranking was not started')
   await freezeRanking(chair, { ...key, rankingId: ranking.id, version: ranking.version })
-  await takePlan(chair, key)
+  await takePlan(chair, { ...key, policy: 'rank' })
   await prepareDecisions(chair, key)
   await story.at(call.dates.letters_at)
   await releaseDecisions(chair, { ...key, typed: String(call.number) })

@@ -1,4 +1,6 @@
 import { z } from 'zod'
+import { nightsPolicy } from './nightsPolicySchema'
+import { policySummary } from './policySummary'
 
 /** One instrument of a request: what was asked, what stands given, what the suggestion gives. Times in seconds. */
 const nightsLine = z.object({
@@ -20,9 +22,13 @@ const nightsLine = z.object({
   service: z.enum(['queue', 'visitor']),
   conditions: z.string(),
   suggestedSeconds: z.number(),
-  /** Why the suggestion gives nothing, and the seconds that were left. */
+  /** Why the suggestion gives nothing: the seconds found when its turn came, and who would lose if it came first. */
   whyNot: z
-    .object({ reason: z.enum(['not-possible', 'too-little-left', 'set-aside']), left: z.number() })
+    .object({
+      reason: z.enum(['not-possible', 'not-usable', 'too-little-left', 'set-aside']),
+      left: z.number(),
+      displaces: z.array(z.object({ reviewNumber: z.string(), seconds: z.number() })),
+    })
     .nullable(),
 })
 export type NightsLine = z.output<typeof nightsLine>
@@ -39,12 +45,27 @@ const nightsRow = z.object({
 })
 export type NightsRow = z.output<typeof nightsRow>
 
+/** A piece of a season: half-months counted from its first, two hours of sidereal time, a class of moonlight. */
+const nightsBin = z.object({
+  half: z.number(),
+  siderealFromH: z.number(),
+  moon: z.enum(['dark', 'grey', 'bright']),
+  seconds: z.number(),
+  usedSeconds: z.number(),
+})
+export type NightsBin = z.output<typeof nightsBin>
+
 export const nightsView = z.object({
   panelId: z.number(),
   callNumber: z.number(),
   callSlug: z.string(),
+  /** First evening of the season. */
+  seasonFrom: z.string(),
   phase: z.enum(['planned', 'open', 'closed', 'review', 'ranking', 'decided', 'archived']),
   hasRanking: z.boolean(),
+  /** The policy of the suggestion, and what each would come to. */
+  policy: nightsPolicy,
+  policies: z.array(policySummary),
   line: z.number(),
   rows: z.array(nightsRow),
   telescopes: z.array(
@@ -54,10 +75,8 @@ export const nightsView = z.object({
       offeredSeconds: z.number(),
       givenSeconds: z.number(),
       suggestedSeconds: z.number(),
-      /** Dark time on offer by half-month; `month` is `YYYY-MM`. */
-      halves: z.array(
-        z.object({ month: z.string(), half: z.union([z.literal(1), z.literal(2)]), seconds: z.number() }),
-      ),
+      /** Dark time on offer by sidereal time and moonlight, with what the suggestion lays there. */
+      bins: z.array(nightsBin),
     }),
   ),
 })

@@ -4,27 +4,47 @@ import { currentRanking } from '@/db/queries/rankings'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
-import type { NightsRow, NightsView } from './nightsView'
-import { planNights } from './planNights'
+import { callBins } from '../nights/callBins'
+import type { NightsBin, NightsRow, NightsView } from './nightsView'
+import { planNights, type PlannedNights } from './planNights'
+import type { NightsPolicy } from './nightsPolicySchema'
+import { whyNotGiven } from './whyNotGiven'
+
+/** The bins of a telescope, with what the suggestion lays there. */
+function binsOf(
+  season: PlannedNights['season'],
+  planned: PlannedNights | null,
+  telescope: number,
+): NightsBin[] {
+  return season.bins.flatMap(({ instrument: _, ...bin }, index) => {
+    if (bin.telescope !== telescope) return []
+    const given = planned?.plan.given ?? []
+    const usedSeconds = given.reduce((sum, { laid }) => sum + (laid.get(index) ?? 0), 0)
+    const { half, siderealFromH, moon, seconds } = bin
+    return [{ half, siderealFromH, moon, seconds, usedSeconds }]
+  })
+}
 
 /** Hours on offer and hours given, as their reader may see them. */
 export async function readNights(
   ctx: ActingContext,
-  key: { callSlug: string; panelId?: number },
+  key: { callSlug: string; panelId?: number; policy?: NightsPolicy },
 ): Promise<NightsView> {
   const desk = await openPanel(ctx, key)
   const ranking = await currentRanking(ctx.db, desk.panel.id)
   const blocks = await offeredTime(ctx.db, desk.call.id)
-  const planned = ranking ? await planNights(ctx, desk, ranking) : null
+  const planned = ranking ? await planNights(ctx, desk, ranking, key.policy) : null
+  const season = planned?.season ?? (await callBins(ctx.db, desk.call))
   const order = planned?.order ?? []
   const [heads, awards, decisions] = await Promise.all([
     snapshotHeads(ctx.db, order),
     standingAwards(ctx.db, order),
     standingDecisions(ctx.db, order),
   ])
+  const numberOf = (id: number) => desk.proposals.find((proposal) => proposal.id === id)?.reviewNumber ?? ''
   const rows = order.map((id, index): NightsRow => ({
     proposalId: id,
-    reviewNumber: desk.proposals.find((proposal) => proposal.id === id)?.reviewNumber ?? '',
+    reviewNumber: numberOf(id),
     title: heads.get(id)?.title ?? '',
     rank: index + 1,
     isAbove: index < (planned?.line ?? 0),
@@ -36,7 +56,6 @@ export async function readNights(
         const is = (one: { proposal: number; instrument: number }) =>
           one.proposal === id && one.instrument === line.instrumentId
         const given = awards.find((a) => a.proposalId === id && a.instrumentId === line.instrumentId)
-        const not = planned?.plan.notGiven.find(is)
         return {
           ...line,
           givenSeconds: given?.seconds ?? 0,
@@ -44,11 +63,7 @@ export async function readNights(
           service: given?.service ?? 'queue',
           conditions: given?.conditions ?? '',
           suggestedSeconds: planned?.plan.given.find(is)?.seconds ?? 0,
-          whyNot: planned?.setAside.has(id)
-            ? { reason: 'set-aside' as const, left: 0 }
-            : not
-              ? { reason: not.reason, left: not.left }
-              : null,
+          whyNot: planned ? whyNotGiven(planned, id, line.instrumentId, numberOf) : null,
         }
       }),
   }))
@@ -57,8 +72,11 @@ export async function readNights(
     panelId: desk.panel.id,
     callNumber: desk.call.number,
     callSlug: desk.call.slug,
+    seasonFrom: desk.call.seasonFrom,
     phase: desk.phase,
     hasRanking: ranking !== null,
+    policy: planned?.policy ?? 'rank',
+    policies: planned?.policies ?? [],
     line: planned?.line ?? 0,
     rows,
     telescopes: [...new Set(blocks.map((block) => block.telescopeId))].map((id) => {
@@ -70,7 +88,7 @@ export async function readNights(
         offeredSeconds: own.reduce((sum, block) => sum + block.seconds, 0),
         givenSeconds: lines.reduce((sum, line) => sum + (line.isReserve ? 0 : line.givenSeconds), 0),
         suggestedSeconds: lines.reduce((sum, line) => sum + line.suggestedSeconds, 0),
-        halves: own.map(({ month, half, seconds }) => ({ month, half, seconds })),
+        bins: binsOf(season, planned, id),
       }
     }),
   }

@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { panelKeySchema, rowKey } from '../panels/schema'
+import { panelKeySchema, panelQuery, rowKey } from '../panels/schema'
+import { nightsPolicy } from './nightsPolicySchema'
 
 /** Hours as typed, with a point or a comma; kept as whole seconds. */
 const hoursAsSeconds = z
@@ -28,7 +29,8 @@ export const awardSchema = panelKeySchema.extend({
 })
 export type AwardInput = z.output<typeof awardSchema>
 
-export const planSchema = panelKeySchema
+export const planSchema = panelKeySchema.extend({ policy: nightsPolicy })
+export type PlanInput = z.output<typeof planSchema>
 export const prepareSchema = panelKeySchema
 
 export const statementSchema = panelKeySchema.extend({
@@ -46,3 +48,6 @@ export const releaseSchema = panelKeySchema.extend({
   typed: z.string().trim().min(1, 'Type the number of the call.'),
 })
 export type ReleaseInput = z.output<typeof releaseSchema>
+
+/** The table of nights, under a policy. */
+export const nightsQuery = panelQuery.extend({ policy: nightsPolicy.default('rank') })

@@ -2,16 +2,17 @@ import { standingAwards, standingDecisions, supersedeAwards } from '@/db/queries
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
-import type { PanelKeyInput } from '../panels/schema'
 import { giveLines } from './giveLines'
 import { openDecisions } from './openDecisions'
 import { planNights } from './planNights'
+import { policyNames } from './nightsPolicySchema'
+import type { PlanInput } from './schema'
 
 /** Takes the suggestion over as the awards of every proposal of the list; what was given by hand before is superseded. */
-export function takePlan(ctx: ActingContext, input: PanelKeyInput): Promise<{ awarded: number }> {
+export function takePlan(ctx: ActingContext, input: PlanInput): Promise<{ awarded: number }> {
   return inTransaction(ctx, async (tx) => {
     const { desk, ranking } = await openDecisions(tx, input.panelId)
-    const { order, wanted, plan } = await planNights(tx, desk, ranking)
+    const { order, wanted, plan, policy } = await planNights(tx, desk, ranking, input.policy)
     const before = await standingDecisions(tx.db, order)
     const kept = await standingAwards(tx.db, order)
     // First free everything, so that one proposal's old award does not stand in another's way.
@@ -39,7 +40,10 @@ export function takePlan(ctx: ActingContext, input: PanelKeyInput): Promise<{ aw
       action: 'decision.take-plan',
       subject: { kind: 'panel', id: desk.panel.id },
       actingAs: 'chair',
-      after: { policy: 'by rank, then fill', given: plan.given },
+      after: {
+        policy: policyNames[policy],
+        given: plan.given.map(({ laid: _, ...line }) => line),
+      },
     })
     return { awarded: new Set(plan.given.map((line) => line.proposal)).size }
   })

@@ -88,3 +88,10 @@ export function magnifiedBy(input: ObservationInput, by: number): Change {
   if (!magnification || !isPredicted(input)) return {}
   return { target: { ...input.target, magnification: Math.max(0.01, magnification + by) } }
 }
+
+/** The same target with a spectral index larger by some; nothing where its spectrum is no power law. */
+export function bluerBy(input: ObservationInput, by: number): Change {
+  const spectrum = input.target.spectrum ?? null
+  if (spectrum?.kind !== 'power-law') return {}
+  return { target: { ...input.target, spectrum: { ...spectrum, index: spectrum.index + by } } }
+}

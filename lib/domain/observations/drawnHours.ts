@@ -1,5 +1,5 @@
 import { seededNormal } from '@/lib/science/numeric/seededNormal'
-import { brighterBy, furtherBy, largerBy, magnifiedBy, neededWith, type Needed } from './change'
+import { bluerBy, brighterBy, furtherBy, largerBy, magnifiedBy, neededWith, type Needed } from './change'
 import type { ObservationInput } from './computeObservation'
 
 const DRAWS = 100
@@ -14,6 +14,8 @@ export interface TargetErrors {
   /** Of what is asked for, magnitudes. */
   magnitude: number
   magnification: number
+  /** Of a power law. */
+  index: number
   /** Half-light radius, arcseconds. */
   size: number
 }
@@ -27,12 +29,14 @@ export interface DrawnHours {
 }
 
 /**
- * Hours needed, seconds, between which 68 of 100 draws fall when redshift, brightness, magnification and size vary by
- * their errors together. The same draws for every request, so that the same request gives the same; lens and size
- * have draws of their own, so that stating their errors leaves those of redshift and brightness as they were.
+ * Hours needed, seconds, between which 68 of 100 draws fall when redshift, brightness, magnification, size and colour vary
+ * by their errors together. The same draws for every request, so that the same request gives the same; lens and size
+ * have draws of their own, and so has colour, so that stating their errors leaves the other draws as they were.
  */
 export function drawnHours(input: ObservationInput, own: Needed, errors: TargetErrors): DrawnHours {
-  const [ofLight, ofShape] = [seededNormal(SEED), seededNormal(SEED + 1)]
+  const ofLight = seededNormal(SEED)
+  const ofShape = seededNormal(SEED + 1)
+  const ofColour = seededNormal(SEED + 2)
   const draws = Array.from({ length: DRAWS }, () => {
     const fainter = ofLight() * errors.magnitude
     const further = furtherBy(input, ofLight() * errors.redshift)
@@ -40,6 +44,7 @@ export function drawnHours(input: ObservationInput, own: Needed, errors: TargetE
     let moved: ObservationInput = { ...input, ...further }
     moved = { ...moved, ...magnifiedBy(moved, lens) }
     moved = { ...moved, ...largerBy(moved, size) }
+    moved = { ...moved, ...bluerBy(moved, ofColour() * errors.index) }
     return neededWith(moved, brighterBy(moved, -fainter))
   })
   const hours = draws.map(({ seconds }) => seconds ?? Infinity).sort((a, b) => a - b)

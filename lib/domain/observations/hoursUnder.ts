@@ -1,6 +1,7 @@
 import { cosmologyPresets, presetCosmology } from '@/lib/science/cosmology'
 import { formatNumber, formatPercent } from '@/lib/format'
 import {
+  bluerBy,
   brighterBy,
   furtherBy,
   isPredicted,
@@ -94,6 +95,13 @@ function sizeSpan(input: ObservationInput, own: Needed): HoursSpan | null {
   }
 }
 
+/** The error of the spectral index, where its colour counts; 0 where none is stated. */
+function indexError(input: ObservationInput): number {
+  // A version that was frozen before spectra were asked for holds none.
+  const spectrum = input.target.spectrum ?? null
+  return spectrum?.kind === 'power-law' && !isForLine(input) ? (spectrum.indexError ?? 0) : 0
+}
+
 /** What is drawn of a target's errors: only what the hours of this request hang on. */
 function errorsOf(input: ObservationInput): TargetErrors {
   const { target } = input
@@ -104,13 +112,14 @@ function errorsOf(input: ObservationInput): TargetErrors {
     redshift: isSmall ? error : 0,
     magnitude: lightError(input)?.magnitudes ?? 0,
     magnification: target.magnification && isPredicted(input) ? (target.magnificationError ?? 0) : 0,
+    index: indexError(input),
     size: target.geometry === 'point' ? 0 : (target.effectiveRadiusErrorArcsec ?? 0),
   }
 }
 
 function withinErrors(input: ObservationInput, own: Needed): HoursSpan[] {
   const errors = errorsOf(input)
-  const { redshift, magnitude, magnification } = errors
+  const { redshift, magnitude, magnification, index } = errors
   const ends = (name: string, ...changes: (Change | null)[]) =>
     spanOf(
       name,
@@ -140,6 +149,12 @@ function withinErrors(input: ObservationInput, own: Needed): HoursSpan[] {
     )
   const size = sizeSpan(input, own)
   if (size) spans.push(size)
+  if (index > 0) {
+    const spectrum = input.target.spectrum
+    const value = spectrum?.kind === 'power-law' ? spectrum.index : 0
+    const name = `α = ${formatNumber(value, 1)} ± ${formatNumber(index, 1)}`
+    spans.push(ends(name, bluerBy(input, -index), bluerBy(input, index)))
+  }
   if (spans.length > 1) {
     const words = spans.length === 2 ? 'both together' : 'all together'
     const drawn = drawnHours(input, own, errors)

@@ -1,3 +1,4 @@
+import { checkMode } from './checkMode'
 import { ScienceError } from '../ScienceError'
 import { airAt, airDispersionArcsec } from './airDispersion'
 import { sourceImage } from './image/sourceImage'
@@ -54,6 +55,7 @@ function offSlit(mode: ModeRecord, conditions: Conditions, wavelengthA: number):
 /** Rates of a source through a mode under conditions. */
 export function computeRates(mode: ModeRecord, source: Source, conditions: Conditions, per: SnrPer): Rates {
   const wavelengthA = source.wavelengthA ?? 0.5 * (mode.wavelengthMinA + mode.wavelengthMaxA)
+  checkMode(mode)
   check(mode, source, wavelengthA)
   const { site, airmass } = conditions
   const pointArcsec = deliveredImageArcsec({

@@ -3,6 +3,8 @@ import type { TargetVisibility } from '../sky'
 import { judgeAtLeast, judgeAtMost } from './judge'
 import { limitWords } from './limitWords'
 import { sayHours, sayNumber, sayPercent } from './saying'
+import { neverUp } from './neverUp'
+import type { SeasonVisibility } from './seasonVisibility'
 import type { Check, ReportInput, ReportObservation } from './types'
 
 const moonWords: Record<MoonClass, string> = {
@@ -16,13 +18,18 @@ function nightsUp(visible: TargetVisibility): number {
 }
 
 /** Is the target up in the dark for at least twice the hours asked? */
-export function checkUp(visible: TargetVisibility, input: ReportInput, nights: number): Check {
-  const { observation } = input
-  const words = limitWords(input.pointing)
+export function checkUp({ visible, nights, isEverDark }: SeasonVisibility, input: ReportInput): Check {
+  const { site, pointing, target, observation } = input
+  const words = limitWords(pointing)
   const limits = words && `${words},`
   const asked = observation.askedS / 3600
   const verdict = judgeAtLeast(visible.totalHours, 2 * asked, Math.max(asked, 1e-9))
   const up = nightsUp(visible)
+  const { raDeg, decDeg } = target
+  const never =
+    up === 0 && raDeg !== null && decDeg !== null
+      ? neverUp({ site, pointing, raDeg, decDeg, maxAirmass: observation.maxAirmass, isEverDark })
+      : null
   return {
     id: 'up-in-the-dark',
     name: 'Up in the dark',
@@ -31,10 +38,9 @@ export function checkUp(visible: TargetVisibility, input: ReportInput, nights: n
     failsAt: sayHours(observation.askedS),
     verdict,
     why:
-      up === 0
-        ? `Never above airmass ${observation.maxAirmass}${limits} in the dark in this season.`
-        : `Above airmass ${observation.maxAirmass}${limits} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
-    fix: verdict === 'feasible' ? null : 'Accept a larger airmass, or ask in another season.',
+      never?.why ??
+      `Above airmass ${observation.maxAirmass}${limits} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
+    fix: verdict === 'feasible' ? null : (never?.fix ?? 'Accept a larger airmass, or ask in another season.'),
   }
 }
 

@@ -3,10 +3,22 @@ import { judgeAtLeast, judgeAtMost } from './judge'
 import { sayNumber, sayPercent } from './saying'
 import type { Check, ReportObservation } from './types'
 
+/** What would help: hours where they do, and not where no time reaches what is wanted. */
+function fixOfSignal(reached: ExposureReport | null, refusal: string | null): string {
+  if (refusal === null) return 'Ask for more hours, better conditions, or a lower signal-to-noise.'
+  return reached
+    ? 'Ask for a lower signal-to-noise: no time reaches this one.'
+    : 'Put that right at the target or the mode.'
+}
+
 /** Is the wanted signal-to-noise reached in the hours asked, overheads taken off? */
 export function checkSignal(reached: ExposureReport | null, wanted: number, refusal: string | null): Check {
   const snr = reached?.snr ?? 0
-  const verdict = judgeAtLeast(snr, wanted * (1 - 1e-9), 0.9 * wanted)
+  const isAsked = wanted > 0
+  const verdict = isAsked ? judgeAtLeast(snr, wanted * (1 - 1e-9), 0.9 * wanted) : 'not-feasible'
+  const frames = reached
+    ? `In ${reached.subExposures} sub-exposures of ${sayNumber(reached.subExposureS, 0)}\u00a0s, at the poorest conditions you accept.`
+    : 'The hours asked do not cover the overheads.'
   return {
     id: 'signal-to-noise',
     name: 'Signal-to-noise',
@@ -14,10 +26,13 @@ export function checkSignal(reached: ExposureReport | null, wanted: number, refu
     feasibleTo: sayNumber(wanted, 1),
     failsAt: sayNumber(0.9 * wanted, 1),
     verdict,
-    why: reached
-      ? `In ${reached.subExposures} sub-exposures of ${sayNumber(reached.subExposureS, 0)}\u00a0s, at the poorest conditions you accept.`
-      : (refusal ?? 'The hours asked do not cover the overheads.'),
-    fix: verdict === 'feasible' ? null : 'Ask for more hours, better conditions, or a lower signal-to-noise.',
+    why: refusal !== null && !(reached && isAsked) ? refusal : frames,
+    fix:
+      verdict === 'feasible'
+        ? null
+        : isAsked
+          ? fixOfSignal(reached, refusal)
+          : 'Give the signal-to-noise you need.',
   }
 }
 

@@ -43,8 +43,9 @@ export function observationReport(input: ReportInput): ObservationReport {
 
   const season = seasonVisibility(input)
   if (season) {
-    checks.push(checkUp(season.visible, input, season.nights))
-    checks.push(checkUpWithMoon(season.usableHours, observation))
+    checks.push(checkUp(season, input))
+    // The Moon does not matter to what is never up.
+    if (season.visible.totalHours > 0) checks.push(checkUpWithMoon(season.usableHours, observation))
   }
 
   const plan = planExposure(input, observedA)
@@ -65,6 +66,9 @@ export function observationReport(input: ReportInput): ObservationReport {
     verdict: worst(checks.map((check) => check.verdict)),
     exposure: plan.needed,
     refusal: plan.refusal,
+    carried: plan.carried?.sentence
+      ? { sentence: plan.carried.sentence, isAssumed: plan.carried.isAssumed }
+      : null,
     totalAtMedianS: plan.totalAtMedianS,
     totalAtBestS: plan.totalAtBestS,
     observedFeatureA: observedA,

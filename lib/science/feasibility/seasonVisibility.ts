@@ -6,6 +6,8 @@ export interface SeasonVisibility {
   readonly visible: TargetVisibility
   readonly usableHours: number
   readonly nights: number
+  /** Whether any night is dark enough at all. */
+  readonly isEverDark: boolean
 }
 
 /** Hours of a target through the season, the Moon left aside and within its limits; null without a position. */
@@ -24,8 +26,10 @@ export function seasonVisibility(input: ReportInput): SeasonVisibility | null {
     lowestAltitudeDeg: site.lowestAltitudeDeg,
   }
   const limits = { ...moonClassLimits[observation.moon], minSeparationDeg: observation.minMoonSeparationDeg }
-  const [visible] = visibility(asked).targets
+  const { targets, nights } = visibility(asked)
+  const [visible] = targets
   const [usable] = visibility({ ...asked, moon: limits }).targets
   if (!visible || !usable) return null
-  return { visible, usableHours: usable.totalHours, nights: visible.byNight.length }
+  const isEverDark = nights.some(({ darkHours }) => darkHours > 0)
+  return { visible, usableHours: usable.totalHours, nights: nights.length, isEverDark }
 }

@@ -34,7 +34,7 @@ const line = (given: number, suggested: number): NightsLine => ({
   service: 'queue',
   conditions: '',
   suggestedSeconds: suggested * hour,
-  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour },
+  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [] },
 })
 const row = (rank: number, given: number, suggested: number): NightsRow => ({
   proposalId: rank,
@@ -50,8 +50,14 @@ const view = (...rows: NightsRow[]): NightsView => ({
   panelId: 7,
   callNumber: 13,
   callSlug: 'call-13',
+  seasonFrom: '2027-03-01',
   phase: 'ranking',
   hasRanking: true,
+  policy: 'rank',
+  policies: [
+    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, why: null },
+    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, why: null },
+  ],
   line: 2,
   rows,
   telescopes: [
@@ -61,7 +67,7 @@ const view = (...rows: NightsRow[]): NightsView => ({
       offeredSeconds: 34 * hour,
       givenSeconds: rows.reduce((sum, one) => sum + (one.lines[0]?.givenSeconds ?? 0), 0),
       suggestedSeconds: 30 * hour,
-      halves: [{ month: '2027-03', half: 2, seconds: 34 * hour }],
+      bins: [{ half: 1, siderealFromH: 12, moon: 'dark', seconds: 34 * hour, usedSeconds: 30 * hour }],
     },
   ],
 })
@@ -129,7 +135,9 @@ describe('the nights', () => {
     expect(screen.getByText('12.0 of 20.0')).toBeTruthy()
     await userEvent.click(screen.getByRole('button', { name: 'Take the suggestion over' }))
     await waitFor(() => expect(screen.queryByText('12.0 of 20.0')).toBeNull())
-    expect(fetched.mock.calls.map(([url]) => url)).toEqual(['/api/tables/panel-nights?call=call-13&panel=7'])
+    expect(fetched.mock.calls.map(([url]) => url)).toEqual([
+      '/api/tables/panel-nights?call=call-13&panel=7&policy=rank',
+    ])
     expect(screen.getByRole('link', { name: 'Go on to decisions' }).getAttribute('href')).toBe(
       '/panel/call-13/decisions?panel=7',
     )
@@ -149,6 +157,8 @@ describe('the nights', () => {
       }),
     )
     expect(screen.queryByRole('button', { name: 'Keep these hours' })).toBeNull()
-    expect(fetched.mock.calls.map(([url]) => url)).toEqual(['/api/tables/panel-nights?call=call-13&panel=7'])
+    expect(fetched.mock.calls.map(([url]) => url)).toEqual([
+      '/api/tables/panel-nights?call=call-13&panel=7&policy=rank',
+    ])
   })
 })

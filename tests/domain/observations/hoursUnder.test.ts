@@ -54,6 +54,39 @@ describe('what the hours hang on', () => {
     expect(hoursHangOn(observed).cosmologies).toEqual([])
   })
 
+  it('spans the error of a spectral index where the magnitude is carried far', () => {
+    const spectrum = { kind: 'power-law', index: -1, indexError: 0.5 } as const
+    const names = (over: Partial<Target>) =>
+      hoursHangOn(inputOf({ target: { brightness: bright, ...over } })).errors.map(({ name }) => name)
+    expect(names({ spectrum })).toContain('α = −1.0 ± 0.5')
+    expect(names({ spectrum: { ...spectrum, indexError: null } })).not.toContain('α = −1.0 ± 0.5')
+    const span = hoursHangOn(inputOf({ target: { spectrum } })).errors.find(({ name }) =>
+      name.startsWith('α'),
+    )
+    // From V to the feature at 7604 A, half a unit of the index is 0.18 mag.
+    expect((span?.high ?? 0) / (span?.low ?? 1)).toBeGreaterThan(1.3)
+  })
+
+  // Seen to fail with the index left out of the draws, and with one drawn from the stream of redshift and brightness.
+  it('draws the spectral index with the other errors, and changes none of their draws', () => {
+    const last = (indexError: number | null) =>
+      hoursHangOn(
+        inputOf({
+          target: {
+            brightness: { ...bright, error: 0.05 },
+            redshiftError: 0.0001,
+            spectrum: { kind: 'power-law', index: -1, indexError },
+          },
+        }),
+      ).errors.at(-1)
+    const [none, next, wide] = [last(null), last(1e-9), last(0.5)]
+    expect([none?.name, next?.name]).toEqual(['both together, 68 of 100', 'all together, 68 of 100'])
+    expect(next?.low).toBeCloseTo(none?.low ?? 0, 3)
+    expect(next?.high).toBeCloseTo(none?.high ?? 0, 3)
+    const ratio = (span: typeof none) => (span?.high ?? 0) / (span?.low ?? 1)
+    expect(ratio(wide)).toBeGreaterThan(1.1 * ratio(none))
+  })
+
   it('needs less time in a smaller universe, by the power of distance it states', () => {
     const input = inputOf()
     const { own, cosmologies } = hoursHangOn(input)

@@ -27,7 +27,7 @@ beforeEach(async () => {
     for (const reviewer of call.reviewers) await call.review(proposal, reviewer, 14)
   await startReview(call.as(call.chair), { callId: call.callId })
   await startRanking(call.as(call.chair), { panelId: call.panelId })
-  await takePlan(call.as(call.chair), { panelId: call.panelId })
+  await takePlan(call.as(call.chair), { panelId: call.panelId, policy: 'rank' })
   await prepareDecisions(call.as(call.chair), { panelId: call.panelId })
 })
 

@@ -178,7 +178,11 @@ describe('refusals and warnings are sentences', () => {
       { mode: imager, source: faint, per: 'pixel' as const },
       'counts the whole image',
     ],
-    ['no light', { mode: { ...imager, throughput: [] }, source: faint }, 'This mode passes no light'],
+    [
+      'no light',
+      { mode: { ...imager, throughput: [] }, source: faint },
+      'The throughput table of this mode is empty.',
+    ],
     ['the floor', { source: { ...continuum, ab: 26 }, snr: 20 }, 'No exposure reaches S/N 20'],
   ])('%s', (_, change, sentence) => {
     const input = {

@@ -7,11 +7,13 @@ import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
+import { pointingOf } from '@/lib/domain/facility/rules'
 import { readTelescopes } from '@/lib/domain/facility/readTelescopes'
 import { askedOf } from '@/lib/domain/tools/askedOf'
 import { positionOf } from '@/lib/domain/tools/positionOf'
 import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
 import { numberOf } from '@/lib/domain/tools/texts'
+import { whyNeverUp } from '@/lib/domain/tools/whyNeverUp'
 import { seasonView } from '@/lib/domain/observations/rules'
 import { moonClassLimits } from '@/lib/science/feasibility'
 
@@ -47,6 +49,15 @@ export default async function SeasonPage({
   const here = telescopes.filter(({ site }) => site.siteId === view?.site.siteId)
   const telescope = here.find(({ slug }) => slug === asked.telescope)?.facts
   const season = view && seasonView(view.site, { from, to, maxAirmass, moon, telescope }, positionOf(asked))
+  const never =
+    view && season?.totalHours === 0
+      ? whyNeverUp(view.site, asked, {
+          pointing: pointingOf(view.site, telescope),
+          maxAirmass,
+          isEverDark: season.grid.nights.some(({ night }) => night.darkHours > 0),
+          isMoonLimited: asked.moon !== 'any' || moon.minSeparationDeg > 0,
+        })
+      : null
   const isOfCall = from === view?.call.seasonFrom && to === view.call.seasonTo
   return (
     <Main>
@@ -68,6 +79,7 @@ export default async function SeasonPage({
             view={season}
             maxAirmass={maxAirmass}
             telescope={telescope}
+            never={never}
             fileName="season"
           />
         ) : (

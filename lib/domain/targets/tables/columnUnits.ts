@@ -14,6 +14,9 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['effectiveRadius', 'arcsec'],
   ['effectiveRadiusError', 'arcsec'],
   ['sersicIndex', ''],
+  ['spectralIndex', ''],
+  ['spectralIndexError', ''],
+  ['temperature', 'K'],
   ['ebv', 'mag'],
   ['magnification', ''],
   ['magnificationError', ''],
@@ -22,4 +25,6 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['lineLuminosity', 'erg/s'],
   ['lineLuminosityError', 'erg/s'],
   ['lineWidth', 'km/s'],
+  ['reaction', 'h'],
+  ['triggers', ''],
 ])

@@ -1,0 +1,31 @@
+import { z } from 'zod'
+import type { BinnedPlan } from '@/lib/panel/nights/binTypes'
+import { nightsPolicy, type NightsPolicy } from './nightsPolicySchema'
+
+/** What a policy comes to: proposals given time, seconds given, and merit times hours above the line. */
+export const policySummary = z.object({
+  policy: nightsPolicy,
+  awarded: z.number(),
+  seconds: z.number(),
+  meritHours: z.number(),
+  /** Why there is no plan, where there is none. */
+  why: z.string().nullable(),
+})
+export type PolicySummary = z.output<typeof policySummary>
+
+export function summaryOf(
+  policy: NightsPolicy,
+  plan: BinnedPlan | null,
+  found: { above: ReadonlySet<number>; merit: ReadonlyMap<number, number>; why: string | null },
+): PolicySummary {
+  const given = plan?.given ?? []
+  return {
+    policy,
+    awarded: new Set(given.map(({ proposal }) => proposal)).size,
+    seconds: given.reduce((sum, { seconds }) => sum + seconds, 0),
+    meritHours: given
+      .filter(({ proposal }) => found.above.has(proposal))
+      .reduce((sum, { proposal, seconds }) => sum + ((found.merit.get(proposal) ?? 0) * seconds) / 3600, 0),
+    why: plan ? null : found.why,
+  }
+}
