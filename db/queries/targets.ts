@@ -2,6 +2,7 @@ import type { Brightness, LineLight, Observation, Opportunity, Target } from '@/
 import { spectrumOf } from '@/lib/domain/targets/spectrumOf'
 import { readSpectrumTable, spectrumText } from '@/lib/domain/targets/spectrumTable'
 import type { Database } from '../client.ts'
+import { writeQuantities } from './targetQuantities.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
 function brightnessOf(row: TargetQuantitiesRow | undefined): Brightness | null {
@@ -155,55 +156,6 @@ function columnsOf(values: TargetValues) {
     magnification: values.magnification,
     magnification_error: values.magnificationError,
   }
-}
-
-async function writeLine(db: Database, targetId: number, line: LineLight): Promise<void> {
-  await db('target_quantities').insert({
-    target_id: targetId,
-    quantity: line.kind === 'flux' ? 'line-flux' : 'luminosity',
-    value: line.value,
-    error: line.error,
-    unit: line.kind === 'flux' ? 'erg.s-1.cm-2' : 'erg.s-1',
-    band: line.name,
-    provenance: line.kind === 'flux' ? 'observed' : 'predicted',
-    width_km_s: line.widthKmS,
-  })
-}
-
-/** A size with its error: without one, the size stands with the target alone. */
-async function writeSize(
-  db: Database,
-  targetId: number,
-  { effectiveRadiusArcsec: value, effectiveRadiusErrorArcsec: error }: TargetValues,
-): Promise<void> {
-  // A target kept in the logbook from before sizes had errors knows of none.
-  if (value === null || (error ?? null) === null) return
-  await db('target_quantities').insert({
-    target_id: targetId,
-    quantity: 'size',
-    value,
-    error,
-    unit: 'arcsec',
-  })
-}
-
-async function writeQuantities(db: Database, targetId: number, values: TargetValues): Promise<void> {
-  const { brightness, line } = values
-  await db('target_quantities').where({ target_id: targetId }).del()
-  await writeSize(db, targetId, values)
-  if (line) await writeLine(db, targetId, line)
-  if (!brightness) return
-  await db('target_quantities').insert({
-    target_id: targetId,
-    quantity: 'magnitude',
-    value: brightness.value,
-    error: brightness.error,
-    unit: 'mag',
-    magnitude_system: brightness.system,
-    band: brightness.band,
-    provenance: brightness.provenance,
-    source: brightness.source,
-  })
 }
 
 /** The key of a group by its name; null for no name, and for one that no group of the proposal has. */
