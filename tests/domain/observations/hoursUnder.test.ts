@@ -67,7 +67,7 @@ describe('what the hours hang on', () => {
     expect((span?.high ?? 0) / (span?.low ?? 1)).toBeGreaterThan(1.3)
   })
 
-  // Seen to fail with the index left out of the draws, and with one drawn from the stream of redshift and brightness.
+  // Seen to fail with the index left out of the draws.
   it('draws the spectral index with the other errors, and changes none of their draws', () => {
     const last = (indexError: number | null) =>
       hoursHangOn(
