@@ -221,6 +221,16 @@ export interface EmailTokensRow {
   created_at: Date
 }
 
+export interface FacilityRetirementsRow {
+  id: number
+  site_id: number | null
+  telescope_id: number | null
+  instrument_id: number | null
+  mode_id: number | null
+  retired_from: string
+  created_at: Date
+}
+
 export interface FeesRow {
   id: number
   proposal_id: number
@@ -796,6 +806,7 @@ export interface SiteRecordsRow {
   seeing_arcsec: string
   created_at: Date
   weather: string | null
+  horizon: string
 }
 
 export interface StoredObjectsRow {
@@ -888,6 +899,8 @@ export interface TelescopeRecordsRow {
   aperture_m: number
   collecting_area_m2: number
   created_at: Date
+  horizon: string
+  highest_altitude_deg: number | null
 }
 
 export interface TimeEntriesRow {
@@ -1027,6 +1040,13 @@ declare module 'knex/types/tables.js' {
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
+    >
+    facility_retirements: Knex.CompositeTableType<
+      FacilityRetirementsRow,
+      Insert<
+        FacilityRetirementsRow,
+        'id' | 'site_id' | 'telescope_id' | 'instrument_id' | 'mode_id' | 'created_at'
+      >
     >
     fees: Knex.CompositeTableType<
       FeesRow,
@@ -1311,7 +1331,7 @@ declare module 'knex/types/tables.js' {
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<
       SiteRecordsRow,
-      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather'>
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather' | 'horizon'>
     >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<
@@ -1375,7 +1395,7 @@ declare module 'knex/types/tables.js' {
     telescopes: Knex.CompositeTableType<TelescopesRow, Insert<TelescopesRow, 'id'>>
     telescope_records: Knex.CompositeTableType<
       TelescopeRecordsRow,
-      Insert<TelescopeRecordsRow, 'id' | 'created_at'>
+      Insert<TelescopeRecordsRow, 'id' | 'created_at' | 'horizon' | 'highest_altitude_deg'>
     >
     time_entries: Knex.CompositeTableType<TimeEntriesRow, Insert<TimeEntriesRow, 'id'>>
     time_transfers: Knex.CompositeTableType<

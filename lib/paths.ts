@@ -55,6 +55,7 @@ export const paths = {
   assessments: () => '/assessments',
   assessment: (request: number | string) => `/assessments/${part(String(request))}`,
   ownInstruments: () => '/assessments/instruments',
+  newOwnMode: () => '/assessments/instruments/new',
   ownMode: (slug: string) => `/assessments/instruments/${part(slug)}`,
   assessmentPacket: (request: number | string) => `/assessments/${part(String(request))}/packet`,
 
@@ -96,6 +97,9 @@ export const paths = {
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',
   officeReconciliation: () => '/office/fees/reconciliation',
+  newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
+  retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>
+    `/office/facility/retire/${kind}/${part(slug)}`,
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,

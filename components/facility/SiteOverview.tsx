@@ -3,8 +3,16 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { SiteFacts } from '@/lib/domain/facility/types'
-import { formatNumber, formatOffset, formatPercent, formatQuantity, formatSigned } from '@/lib/format'
+import {
+  formatCalendarDate,
+  formatNumber,
+  formatOffset,
+  formatPercent,
+  formatQuantity,
+  formatSigned,
+} from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { horizonInWords } from './horizonWords'
 import { nextInWords, stampInWords } from './recordWords'
 
 const byBand = (values: Record<string, number>, decimals: number) =>
@@ -24,6 +32,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
           <>
             <span>{stampInWords(site.now, site.now.validFrom)}</span>
             {site.next ? <span>{nextInWords(site.next)}</span> : null}
+            {site.retiredFrom ? <span>retires on {formatCalendarDate(site.retiredFrom)}</span> : null}
             <TextLink href={paths.facilityRecord('sites', site.slug)} aria-label={`Change ${site.name}`}>
               Change
             </TextLink>
@@ -38,6 +47,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
             { term: 'Height', value: formatQuantity(facts.elevationM, 0, 'm') },
             { term: 'Clock at the site', value: formatOffset(facts.utcOffsetHours) },
             { term: 'Lowest altitude', value: `${formatNumber(facts.lowestAltitudeDeg, 0)}°` },
+            { term: 'Horizon', value: horizonInWords(facts.horizon) },
           ]}
         />
         <Facts

@@ -82,7 +82,7 @@ export function ConstraintForm(props: ConstraintFormProps) {
         <NumberField
           name="set.maxAirmass"
           label="Highest airmass"
-          help={`1 is the zenith; the telescopes reach ${formatNumber(site.lowestAltitudeDeg)}° of altitude.`}
+          help={`1 is the zenith; the telescopes reach ${formatNumber(site.lowestAltitudeDeg)}° of altitude${site.horizon.length > 0 ? ', or the horizon of the site' : ''}.`}
         />
         <NumberField
           name="set.imageQuality"

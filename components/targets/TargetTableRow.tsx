@@ -171,6 +171,7 @@ function Row(props: TargetTableRowProps) {
               name={name}
               computed={computed}
               maxAirmass={view.maxAirmass}
+              limits={view.limits}
             />
           ) : (
             ABSENT

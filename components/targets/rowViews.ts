@@ -1,6 +1,8 @@
+import { pointingOf } from '@/lib/domain/facility/rules'
 import { conditionsOf, worstVerdict } from '@/lib/domain/observations/rules'
 import type { ProposalComputation, TargetComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { limitWords } from '@/lib/science/feasibility'
 import type { RowView } from './targetTableTypes'
 
 /** A row's place among the rows: its key, the kept target and the one being typed. */
@@ -72,6 +74,7 @@ export function rowViews(
   return places.map(({ key, kept, target }) => {
     const observations = asked.get(target.id) ?? []
     const numbers = computed.get(target.id) ?? []
+    const telescope = contents.modes.find(({ modeId }) => modeId === observations[0]?.modeId)?.telescope
     const isKnown = numbers.length > 0 && numbers.every(({ neededSeconds }) => neededSeconds !== null)
     return steady({
       key,
@@ -84,6 +87,7 @@ export function rowViews(
       verdict: worstVerdict(numbers.map((one) => one.verdict)),
       times: numbers[0]?.times ?? null,
       maxAirmass: conditionsOf(contents, observations[0]).maxAirmass,
+      limits: limitWords(pointingOf(contents.site, telescope)),
     })
   })
 }

@@ -20,6 +20,8 @@ export interface RowView {
   neededSeconds: number | null
   verdict: Verdict | null
   maxAirmass: number
+  /** What else keeps the telescope off it, as `, clear of the horizon`; empty for nothing. */
+  limits: string
   /** How often its hours count in those asked; null while nothing observes it. */
   times: number | null
 }

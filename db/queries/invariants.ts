@@ -95,6 +95,13 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     `SELECT proposal_id FROM proposal_versions GROUP BY proposal_id HAVING MAX(version_number) <> COUNT(*) OR MIN(version_number) <> 1`,
   ],
   [
+    'a call that has not closed offers nothing that retires before its season is over',
+    `SELECT c.id FROM call_modes c JOIN calls k ON k.id = c.call_id JOIN instrument_modes m ON m.id = c.mode_id
+      JOIN instruments i ON i.id = m.instrument_id JOIN telescopes t ON t.id = i.telescope_id
+      JOIN facility_retirements r ON r.mode_id = m.id OR r.instrument_id = i.id OR r.telescope_id = t.id OR r.site_id = t.site_id
+      WHERE (k.stage = 'planned' OR (k.stage = 'published' AND k.closes_at > UTC_TIMESTAMP(3))) AND r.retired_from <= k.season_to`,
+  ],
+  [
     'I9 a target stands in a group of its own proposal',
     'SELECT t.id FROM targets t JOIN target_groups g ON g.id = t.group_id WHERE g.proposal_id <> t.proposal_id',
   ],

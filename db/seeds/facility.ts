@@ -90,6 +90,8 @@ export async function seedFacility(db: Database): Promise<{
       valid_from: validFrom,
       aperture_m: telescope.aperture_m,
       collecting_area_m2: telescope.collecting_area_m2,
+      horizon: JSON.stringify(telescope.horizon),
+      highest_altitude_deg: telescope.highest_altitude_deg,
     })
     telescopeIds.set(telescope.slug, id)
   }

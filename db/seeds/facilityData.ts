@@ -20,10 +20,48 @@ export const site = {
   },
 } as const
 
-export const telescopes = [
-  { slug: 'aldous', name: 'Aldous', aperture_m: 3.8, collecting_area_m2: 10.2 },
-  { slug: 'fennel', name: 'Fennel', aperture_m: 1.5, collecting_area_m2: 1.57 },
-] as const
+export interface SeedTelescope {
+  slug: string
+  name: string
+  aperture_m: number
+  collecting_area_m2: number
+  horizon: { azimuthDeg: number; altitudeDeg: number }[]
+  highest_altitude_deg: number | null
+}
+
+export const telescopes: readonly SeedTelescope[] = [
+  {
+    slug: 'aldous',
+    name: 'Aldous',
+    aperture_m: 3.8,
+    collecting_area_m2: 10.2,
+    horizon: [],
+    highest_altitude_deg: null,
+  },
+  {
+    slug: 'fennel',
+    name: 'Fennel',
+    aperture_m: 1.5,
+    collecting_area_m2: 1.57,
+    // It stands under the crest: the ridge in the east, and the dome of Aldous in the south-west.
+    horizon: (
+      [
+        [0, 12],
+        [45, 13],
+        [70, 18],
+        [95, 24],
+        [115, 22],
+        [140, 14],
+        [200, 12],
+        [222, 12],
+        [226, 29],
+        [236, 29],
+        [240, 12],
+      ] as const
+    ).map(([azimuthDeg, altitudeDeg]) => ({ azimuthDeg, altitudeDeg })),
+    highest_altitude_deg: 87.5,
+  },
+]
 
 export const instruments = [
   { slug: 'lantern', name: 'LANTERN', telescope: 'aldous', summary: 'optical imager' },

@@ -24,7 +24,12 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
   [
     'an instrument scientist',
     'signe@quillonridge.example',
-    ['/assessments', '/assessments/instruments', '/assessments/instruments/ember-short'],
+    [
+      '/assessments',
+      '/assessments/instruments',
+      '/assessments/instruments/ember-short',
+      '/assessments/instruments/new',
+    ],
   ],
   [
     'the chair',
@@ -43,6 +48,11 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
       'facility/sites/quillon-ridge',
       'facility/telescopes/aldous',
       'facility/modes/lantern-r',
+      'facility/sites/new',
+      'facility/telescopes/new',
+      'facility/instruments/new',
+      'facility/modes/new',
+      'facility/retire/telescope/aldous',
       'people',
       'people/2',
       'people/2/merge?from=sten@harrowgate.example',

@@ -1,4 +1,4 @@
-import { typed, typedBands, type FieldWords } from './recordForm'
+import { typed, typedBands, typedHorizon, type FieldWords } from './recordForm'
 import type { SiteForm } from './siteSchema'
 import type { SiteFacts } from './types'
 
@@ -16,6 +16,7 @@ export function siteTyped(facts: SiteFacts): SiteTyped {
     timeZone: facts.timeZone,
     utcOffsetHours: typed(facts.utcOffsetHours),
     lowestAltitudeDeg: typed(facts.lowestAltitudeDeg),
+    horizon: typedHorizon(facts.horizon),
     best10: typed(facts.seeingArcsec.best10),
     median: typed(facts.seeingArcsec.median),
     worst90: typed(facts.seeingArcsec.worst90),
@@ -26,6 +27,24 @@ export function siteTyped(facts: SiteFacts): SiteTyped {
   }
 }
 
+/** A site nobody has described yet. */
+export const emptySite: SiteTyped = {
+  latitudeDeg: '',
+  longitudeDeg: '',
+  elevationM: '',
+  timeZone: '',
+  utcOffsetHours: '',
+  lowestAltitudeDeg: '',
+  horizon: [],
+  best10: '',
+  median: '',
+  worst90: '',
+  lostByMonth: '',
+  persistence: '',
+  extinction: [],
+  darkSky: [],
+}
+
 export const siteFields: Record<keyof SiteTyped, FieldWords> = {
   latitudeDeg: { label: 'Latitude', unit: '°' },
   longitudeDeg: { label: 'Longitude', unit: '°' },
@@ -33,6 +52,7 @@ export const siteFields: Record<keyof SiteTyped, FieldWords> = {
   timeZone: { label: 'Time zone' },
   utcOffsetHours: { label: 'Offset from UTC', unit: 'h' },
   lowestAltitudeDeg: { label: 'Lowest altitude', unit: '°' },
+  horizon: { label: 'Horizon, lowest altitude by azimuth', unit: '°' },
   best10: { label: 'Image quality, best tenth', unit: '″' },
   median: { label: 'Image quality, median', unit: '″' },
   worst90: { label: 'Image quality, poorest tenth', unit: '″' },

@@ -9,11 +9,14 @@ export {
   moonSeparationDeg,
   sunAltitudeDeg,
 } from './instants'
+export { horizonAltitudeDeg, type HorizonProfile, type HorizonRow } from './horizonProfile'
 export { dateOfMjd, mjdOf } from './mjd'
 export { moonlitSkyV, type MoonlitSky } from './moonlight'
 export { moonPhases, type MoonPhase } from './moonPhases'
 export { eveningDateAt, nightAt } from './nightAt'
 export { nightPieces, type NightPiece } from './nightPieces'
+export { openHourAngles } from './openHourAngles'
+export type { PointingLimits } from './pointing'
 export { positionsAt, type InstantPositions, type PositionsInput, type TargetPosition } from './positionsAt'
 export { separationArcsec, type Place } from './separationArcsec'
 export { seasonGrid, type SeasonGrid, type SeasonNight } from './seasonGrid'

@@ -9,7 +9,8 @@ import { modeRecordSchema, type ModeForm } from '@/lib/domain/facility/modeSchem
 import { mayEditFacility, mayEditMode } from '@/lib/domain/facility/policy'
 import { siteTyped } from '@/lib/domain/facility/siteForm'
 import { siteRecordSchema, type SiteForm } from '@/lib/domain/facility/siteSchema'
-import { telescopeRecordSchema } from '@/lib/domain/facility/telescopeSchema'
+import { telescopeTyped } from '@/lib/domain/facility/telescopeForm'
+import { telescopeRecordSchema, type TelescopeForm } from '@/lib/domain/facility/telescopeSchema'
 import { site, slitMode } from '../../support/contents'
 
 // Seen to fail with the slit's fields left unasked, with the median unchecked, and with every scientist let in.
@@ -17,6 +18,15 @@ import { site, slitMode } from '../../support/contents'
 const errors = <I, O>(schema: z.ZodType<O, I>, value: I) => {
   const result = schema.safeParse(value)
   return result.success ? {} : fieldErrorsOf(result.error)
+}
+const telescope = {
+  apertureM: 1.5,
+  collectingAreaM2: 1.57,
+  highestAltitudeDeg: 87.5,
+  horizon: [
+    { azimuthDeg: 0, altitudeDeg: 12 },
+    { azimuthDeg: 95.5, altitudeDeg: 24 },
+  ],
 }
 const head = { slug: 'x', over: 1, validFrom: '2027-03-01' }
 
@@ -169,7 +179,43 @@ describe('a telescope’s record', () => {
       collectingAreaM2: 'A collecting area lies between 0.005 and 8,000\u00a0m².',
     }], // prettier-ignore
   ])('of %s m and %s m²', (apertureM, collectingAreaM2, expected) => {
-    expect(errors(telescopeRecordSchema, { ...head, apertureM, collectingAreaM2 })).toEqual(expected)
+    const typed = { ...head, apertureM, collectingAreaM2, highestAltitudeDeg: '', horizon: [] }
+    expect(errors(telescopeRecordSchema, typed)).toEqual(expected)
+  })
+
+  const typed = (over: Partial<TelescopeForm> = {}): TelescopeForm => ({
+    ...head,
+    ...telescopeTyped(telescope),
+    ...over,
+  })
+  const rows = (...given: [string, string][]) => given.map(([at, value]) => ({ at, value }))
+
+  it('comes out of the form as it went in, with its horizon and without', () => {
+    expect(telescopeRecordSchema.parse(typed()).facts).toEqual(telescope)
+    const bare = typed({ highestAltitudeDeg: '', horizon: [] })
+    expect(telescopeRecordSchema.parse(bare).facts).toMatchObject({ highestAltitudeDeg: null, horizon: [] })
+  })
+
+  it.each<[Partial<TelescopeForm>, string, string]>([
+    [{ highestAltitudeDeg: '90' }, 'highestAltitudeDeg', 'A highest altitude lies between 60 and 89.99°.'],
+    [{ highestAltitudeDeg: '45' }, 'highestAltitudeDeg', 'A highest altitude lies between 60 and 89.99°.'],
+    [{ horizon: rows(['0', '86']) }, 'horizon.0.value', 'A lowest altitude lies between 0 and 85°.'],
+    [{ horizon: rows(['-10', '12']) }, 'horizon.0.at', 'An azimuth lies between 0 and 360°.'],
+    [
+      { horizon: rows(['0', '12'], ['360', '12']) },
+      'horizon.1.at',
+      'North is an azimuth of 0°: the table goes on from its last row to its first.',
+    ],
+    [{ horizon: rows(['90', '12'], ['90', '14']) }, 'horizon.1.at', 'This azimuth stands in the row before.'],
+    [{ horizon: rows(['90', '12'], ['80', '14']) }, 'horizon.1.at', 'Azimuths grow from row to row.'],
+    [{ horizon: rows(['east', '12']) }, 'horizon.0.at', 'An azimuth is a number.'],
+    [
+      { horizon: rows(...Array.from({ length: 361 }, (_, i): [string, string] => [String(i / 2), '12'])) },
+      'horizon',
+      'At most 360 rows are kept.',
+    ],
+  ])('%o is refused at its field', (over, field, message) => {
+    expect(errors(telescopeRecordSchema, typed(over))).toEqual({ [field]: message })
   })
 })
 
