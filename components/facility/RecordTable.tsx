@@ -59,6 +59,7 @@ export function RecordTable({ name, kind, label, help, before, fileName }: Recor
           <RowPages pages={pages} count={fields.length} />
           <OtherPageMarks name={name} pages={pages} />
           <RecordTableRows
+            key={pages.from}
             name={name}
             kind={kind}
             keys={fields.slice(pages.from, pages.to).map((row) => row.id)}

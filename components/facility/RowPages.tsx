@@ -23,7 +23,7 @@ export function RowPages({ pages, count }: { pages: Pages; count: number }) {
         {to < count ? <LinkLikeButton onClick={() => show(count - 1)}>Last</LinkLikeButton> : null}
       </div>
       {elsewhere.length > 0 ? (
-        <p className="m-0 flex flex-wrap gap-x-3 font-semibold text-not-feasible">
+        <p className="m-0 flex flex-wrap items-baseline gap-x-3 font-semibold text-not-feasible">
           <span>Also to mend: row</span>
           {elsewhere.slice(0, mostNamed).map((index) => (
             <LinkLikeButton key={index} aria-label={`Show row ${index + 1}`} onClick={() => show(index)}>

@@ -167,7 +167,7 @@ it('compares with a retirement somebody said meanwhile, and moves it when told t
   await user.click(screen.getByRole('button', { name: 'Retire ALDOUS' }))
   const comparison = await screen.findByRole('alert', { name: 'Maud Ferrisay changed this' })
   expect(comparison.textContent).toMatch(/2028-01-01.*2028-02-01/)
-  await user.click(within(comparison).getByRole('button', { name: 'Keep mine' }))
+  await user.click(await within(comparison).findByRole('button', { name: 'Keep mine' }))
   await waitFor(() => expect(save).toHaveBeenCalledTimes(2))
   expect(save.mock.calls.map(([{ before }]) => before)).toEqual([null, '2028-01-01'])
 })
