@@ -87,6 +87,8 @@ export const access = {
     'GET /assessments/[request]/packet': scientist,
     'GET /reviews/[assignment]/packet': reviewer,
     'GET /panel/[call]/packets/[number]': chair,
+    'GET /panel/[call]/plan/[file]': chair,
+    'GET /office/calls/[slug]/plan/[file]': office,
     'GET /api/tables/panel-assignments': chair,
     'GET /api/tables/panel-ranking': chair,
     'GET /api/tables/panel-nights': chair,
