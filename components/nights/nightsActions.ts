@@ -1,6 +1,6 @@
 import type { ActionResult } from '@/lib/actions/result'
 import type { ChoiceOrRank } from '@/lib/domain/decisions/choiceWords'
-import type { NightsPolicy } from '@/lib/domain/decisions/policyWords'
+import type { NightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
 import type { Trial } from '@/lib/domain/decisions/trialSchema'
 
 export type SaveAwardAction = (input: {

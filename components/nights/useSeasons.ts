@@ -3,7 +3,7 @@
 import { useCallback, useEffect, useRef, useState } from 'react'
 import { useTableQuery } from '@/components/tables/useTableQuery'
 import { seasonPlanOf, seasonsView, type SeasonsView } from '@/lib/domain/decisions/seasonsView'
-import type { NightsPolicy } from '@/lib/domain/decisions/policyWords'
+import type { NightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
 import type { AwardOutlook } from '@/lib/panel/nights/seasonTypes'
 import { paths } from '@/lib/paths'
 import { startSeasons } from './startSeasons'

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { nightsPolicy } from './policyWords'
+import { nightsPolicy } from './nightsPolicySchema'
 import { choiceOrRank, nightChoice } from './choiceWords'
 import { policySummary } from './policySummary'
 

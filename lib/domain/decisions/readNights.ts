@@ -9,7 +9,7 @@ import { openPanel } from '../panels/openPanel'
 import { nightsTelescope } from './nightsTelescope'
 import type { NightsRow, NightsView } from './nightsView'
 import { planNights, type PlannedNights } from './planNights'
-import type { NightsPolicy } from './policyWords'
+import type { NightsPolicy } from './nightsPolicySchema'
 import { isTried, type Trial } from './trialSchema'
 import { whyNotGiven } from './whyNotGiven'
 

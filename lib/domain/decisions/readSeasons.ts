@@ -5,7 +5,7 @@ import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
 import { givenRuns, suggestedLines } from './linesToRun'
 import { planNights } from './planNights'
-import type { NightsPolicy } from './policyWords'
+import type { NightsPolicy } from './nightsPolicySchema'
 import type { SeasonsView } from './seasonsView'
 import { isTried, type Trial } from './trialSchema'
 

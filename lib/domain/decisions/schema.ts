@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { panelKeySchema, panelQuery, rowKey } from '../panels/schema'
 import { choiceOrRank } from './choiceWords'
-import { nightsPolicy } from './policyWords'
+import { nightsPolicy } from './nightsPolicySchema'
 import { trialSchema, trialText } from './trialSchema'
 
 /** Hours as typed, with a point or a comma; kept as whole seconds. */

@@ -10,7 +10,7 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { giveLines, type GivenLine } from './giveLines'
 import { openDecisions } from './openDecisions'
 import { planNights, type PlannedNights } from './planNights'
-import { policyNames } from './policyWords'
+import { policyNames } from './nightsPolicySchema'
 import type { PlanInput } from './schema'
 import { takeTrial } from './takeTrial'
 
