@@ -7,6 +7,9 @@ export type ProposalSection =
 export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
+/** A form in which a night plan is handed out. */
+export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
+
 export const paths = {
   home: () => '/',
   calls: () => '/calls',
@@ -74,6 +77,8 @@ export const paths = {
   panelPacket: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
 
+  panelPlan: (callSlug: string, file: PlanFileName, panelId: number) =>
+    `/panel/${part(callSlug)}/plan/${file}?panel=${panelId}`,
   panelTeam: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
@@ -102,6 +107,7 @@ export const paths = {
     `/office/facility/retire/${kind}/${part(slug)}`,
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
+  officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
   officeDecisions: (slug: string) => `/office/calls/${part(slug)}/decisions`,
 

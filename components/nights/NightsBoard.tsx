@@ -16,6 +16,7 @@ import { paths } from '@/lib/paths'
 import { FacingTable } from './FacingTable'
 import type { NightsActions } from './nightsActions'
 import { OfferedHours } from './OfferedHours'
+import { PlanFiles } from './PlanFiles'
 import { PolicyChoice } from './PolicyChoice'
 import { SeasonCellsKey } from './SeasonCellsKey'
 import { SeasonsNote } from './SeasonsNote'
@@ -138,6 +139,11 @@ export function NightsBoard({ initial, initialTrial = '', actions }: NightsBoard
               onTry({ ...trial, choices: { ...trial?.choices, [proposalId]: choice } })
             }}
           />
+          {isGiven ? (
+            <div className="mt-6">
+              <PlanFiles hrefOf={(file) => paths.panelPlan(view.callSlug, file, view.panelId)} />
+            </div>
+          ) : null}
         </>
       ) : (
         <div className="mt-10">

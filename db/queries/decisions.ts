@@ -72,6 +72,7 @@ export interface StandingAward {
   service: AwardLinesRow['service']
   conditions: string
   isReserve: boolean
+  givenAt: Date
 }
 
 /** Standing award lines of the standing decisions of some proposals. */
@@ -95,6 +96,7 @@ export async function standingAwards(db: Database, proposalIds: readonly number[
       service: 'a.service',
       conditions: 'a.conditions',
       isReserve: 'a.is_reserve',
+      givenAt: 'a.created_at',
     })
   return rows.map((row) => ({ ...row, isReserve: Boolean(row.isReserve) }))
 }

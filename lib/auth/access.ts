@@ -111,6 +111,8 @@ export const access = {
     'GET /assessments/[request]/packet': scientist,
     'GET /reviews/[assignment]/packet': reviewer,
     'GET /panel/[call]/packets/[number]': chair,
+    'GET /panel/[call]/plan/[file]': chair,
+    'GET /office/calls/[slug]/plan/[file]': office,
     'GET /panel/[call]/teams/[number]': chair,
     'GET /api/tables/panel-assignments': chair,
     'GET /api/tables/panel-ranking': chair,

@@ -3,7 +3,7 @@ import { refuse } from '@/lib/errors'
 import { laidAwards } from '@/lib/panel/nights/laidAwards'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
-import { givenLines, suggestedLines } from './linesToRun'
+import { givenRuns, suggestedLines } from './linesToRun'
 import { planNights } from './planNights'
 import type { NightsPolicy } from './policyWords'
 import type { SeasonsView } from './seasonsView'
@@ -33,7 +33,8 @@ export async function readSeasons(
   const trial = isTried(key.trial) ? key.trial : undefined
   const planned = await planNights(ctx, desk, ranking, { policy: key.policy, trial })
   const { season, terms, bins, standing } = planned
-  const lines = key.of === 'given' ? await givenLines(ctx.db, planned) : suggestedLines(planned)
+  const lines =
+    key.of === 'given' ? (await givenRuns(ctx.db, planned)).map(({ line }) => line) : suggestedLines(planned)
   const { awards, standingSeconds } = laidAwards(lines, bins, standing)
   const first = Date.parse(desk.call.seasonFrom)
   const pieces = [...season.pieces]

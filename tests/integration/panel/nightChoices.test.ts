@@ -13,8 +13,8 @@ import { useRolledBackDatabase } from '../../support/database'
 import { makePanelCall, type PanelCall, type PanelProposalMade } from '../../support/panelCall'
 import { refused } from '../../support/refused'
 
-// Seen to fail with the trial written, with the reason not asked for, with what is held back given, and with the weather
-// of the record not counted.
+// Seen to fail with the reason not asked for, with what is held back given by hand, and with the weather of the record not
+// counted.
 
 const db = useRolledBackDatabase()
 const h = 3600

@@ -7,6 +7,7 @@ import { CallSteps } from '@/components/office/CallSteps'
 import { DatesForm } from '@/components/office/DatesForm'
 import { OfferForm } from '@/components/office/OfferForm'
 import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
+import { PlanFiles } from '@/components/nights/PlanFiles'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
@@ -59,6 +60,11 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
         <div className="mt-4">
           <ProposalsOfCall slug={slug} initial={proposals} />
         </div>
+        {phase === 'decided' || phase === 'archived' ? (
+          <div className="mt-4">
+            <PlanFiles hrefOf={(file) => paths.officePlan(slug, file)} />
+          </div>
+        ) : null}
       </section>
       <section className="mt-12">
         <TwoColumns
