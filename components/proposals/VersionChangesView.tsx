@@ -26,12 +26,16 @@ function Piece({ kind, text }: Difference) {
 export function VersionChangesView({ parts, ...fields }: VersionChanges) {
   const { from, to } = fields
   return (
-    <section className="mt-10">
+    <section>
       <SectionHeading
         dense
         title={`From version ${from} to ${to === null ? 'what stands now' : `version ${to}`}`}
       />
-      <ThingChanges {...fields} />
+      {parts.length > 0 || fields.things.length > 0 ? (
+        <ThingChanges {...fields} />
+      ) : (
+        <p className="mt-3 text-table text-muted">Nothing differs.</p>
+      )}
       {parts.length > 0 ? (
         <p className="m-0 mt-6 text-caption text-muted">
           In texts, <del className="bg-tint">struck out</del> is gone and{' '}

@@ -1,5 +1,5 @@
 import { countInWords } from '@/lib/format'
-import { readBandChoice } from '@/lib/domain/targets/bands'
+import { readBandChoice } from '@/lib/domain/targets/rules'
 import type { TargetRow } from '@/lib/domain/targets/schema'
 
 /** The cells a pasted block runs through, from left to right as they stand in the table. */

@@ -9,7 +9,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
-import { readVersionChanges } from '@/lib/domain/proposals/history/readVersionChanges'
+import { readVersionChanges, type VersionChanges } from '@/lib/domain/proposals/history/readVersionChanges'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'History' }
@@ -18,6 +18,9 @@ interface Props {
   params: Promise<{ reference: string }>
   searchParams: Promise<{ since?: string }>
 }
+
+const differs = ({ things, parts }: Pick<VersionChanges, 'things' | 'parts'>) =>
+  things.length > 0 || parts.length > 0
 
 export default async function HistoryPage({ params, searchParams }: Props) {
   const ctx = await openPage('/proposals/[reference]/history')
@@ -38,11 +41,20 @@ export default async function HistoryPage({ params, searchParams }: Props) {
             </section>
           }
         >
+          {went && since ? (
+            <div className="mb-10">
+              <VersionChangesView {...went} />
+            </div>
+          ) : null}
           <SectionHeading dense title="Changes" />
           <div className="mt-2">
             <ChangeList changes={changes} now={now} />
           </div>
-          {went ? <VersionChangesView {...went} /> : null}
+          {went && !since && differs(went) ? (
+            <div className="mt-10">
+              <VersionChangesView {...went} />
+            </div>
+          ) : null}
         </TwoColumns>
       </div>
     </Main>
