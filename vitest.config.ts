@@ -27,6 +27,7 @@ export default defineConfig({
           name: 'components',
           include: ['tests/components/**/*.test.tsx'],
           environment: 'jsdom',
+          testTimeout: 30_000,
           setupFiles: ['tests/support/components.ts'],
         },
       },

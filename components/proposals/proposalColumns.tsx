@@ -34,7 +34,7 @@ export const proposalColumns: readonly TableColumn<ListedRow>[] = [
           {row.title || 'Without a title'}
         </TextLink>
         {row.continueIn === null ? null : (
-          <span className="block font-normal">
+          <span className="mt-1 block leading-6 font-normal">
             <TextLink plain href={paths.proposalContinue(row.reference)}>
               Carry on in call {row.continueIn}
             </TextLink>
