@@ -53,24 +53,28 @@ export function OutcomeStatistics({ statistics, slug }: { statistics: CallStatis
     <section>
       <SectionHeading title="How it came out" />
       <div className="mt-4 grid gap-x-16 gap-y-8 lg:grid-cols-2">
-        <DataTable
-          caption="Proposals by kind and outcome"
-          columns={countColumns}
-          rows={statistics.counts}
-          rowId={(row) => row.kind}
-          csv={`outcomes-${slug}`}
-          urlPrefix="outcomes-"
-          phone="scroll"
-        />
-        <DataTable
-          caption="Hours by telescope"
-          columns={hourColumns}
-          rows={statistics.hours}
-          rowId={(row) => row.telescope}
-          csv={`hours-${slug}`}
-          urlPrefix="hours-"
-          phone="scroll"
-        />
+        <div className="min-w-0">
+          <DataTable
+            caption="Proposals by kind and outcome"
+            columns={countColumns}
+            rows={statistics.counts}
+            rowId={(row) => row.kind}
+            csv={`outcomes-${slug}`}
+            urlPrefix="outcomes-"
+            phone="scroll"
+          />
+        </div>
+        <div className="min-w-0">
+          <DataTable
+            caption="Hours by telescope"
+            columns={hourColumns}
+            rows={statistics.hours}
+            rowId={(row) => row.telescope}
+            csv={`hours-${slug}`}
+            urlPrefix="hours-"
+            phone="scroll"
+          />
+        </div>
       </div>
       {statistics.isPublic ? (
         <p className="mt-3 text-caption text-muted">
