@@ -7,6 +7,7 @@ import { OpenCallPanel } from '@/components/calls/OpenCallPanel'
 import { seasonWords } from '@/components/calls/seasonWords'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
+import { OutcomeStatistics } from '@/components/statistics/OutcomeStatistics'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { DateLine } from '@/components/ui/DateLine'
 import { PageTitle } from '@/components/ui/PageTitle'
@@ -15,6 +16,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
 import { readSeason } from '@/lib/domain/calls/readSeason'
+import { readCallStatistics } from '@/lib/domain/statistics/readCallStatistics'
 import { paths } from '@/lib/paths'
 
 export const metadata: Metadata = { title: 'Call' }
@@ -24,6 +26,7 @@ export default async function CallPage({ params }: { params: Promise<{ slug: str
   const { slug } = await params
   const view = await orNotFound(readCall(ctx, slug))
   const { call, site } = view
+  const statistics = await readCallStatistics(ctx, slug)
   return (
     <Main>
       <Breadcrumb
@@ -54,6 +57,11 @@ export default async function CallPage({ params }: { params: Promise<{ slug: str
           />
         </div>
       </TwoColumns>
+      {statistics ? (
+        <div className="mt-12">
+          <OutcomeStatistics statistics={statistics} slug={slug} />
+        </div>
+      ) : null}
       <section className="mt-12">
         <SectionHeading title="Dates" />
         <div className="mt-4">

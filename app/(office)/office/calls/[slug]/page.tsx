@@ -10,6 +10,7 @@ import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
 import { PlanFiles } from '@/components/nights/PlanFiles'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
+import { OutcomeStatistics } from '@/components/statistics/OutcomeStatistics'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { DateLine } from '@/components/ui/DateLine'
 import { PageTitle } from '@/components/ui/PageTitle'
@@ -20,6 +21,7 @@ import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
 import { readOffer } from '@/lib/domain/calls/readOffer'
 import { readOfficeProposals } from '@/lib/domain/calls/readOfficeProposals'
+import { readCallStatistics } from '@/lib/domain/statistics/readCallStatistics'
 import { paths } from '@/lib/paths'
 import { closeCallAction, openCallAction, saveDatesAction, saveOfferAction } from './actions'
 
@@ -31,6 +33,7 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
   const view = await orNotFound(readCall(ctx, slug))
   const proposals = await orNotFound(readOfficeProposals(ctx, slug))
   const modes = await orNotFound(readOffer(ctx, slug))
+  const statistics = await readCallStatistics(ctx, slug)
   const { call, phase } = view
   return (
     <Main>
@@ -66,6 +69,11 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
           </div>
         ) : null}
       </section>
+      {statistics ? (
+        <div className="mt-12">
+          <OutcomeStatistics statistics={statistics} slug={slug} />
+        </div>
+      ) : null}
       <section className="mt-12">
         <TwoColumns
           side={
