@@ -36,7 +36,7 @@ export function PersonStanding({ person }: { person: PersonView }) {
       {person.disabledAt && !person.mergedInto && !person.erasedAt ? (
         <BarNote tone="marginal">Shut since {when(person.disabledAt)}: nobody signs in with it.</BarNote>
       ) : null}
-      {person.confirmedAt ? null : (
+      {person.confirmedAt || person.erasedAt ? null : (
         <BarNote tone="marginal">The address has not been proved yet: nobody signs in with it.</BarNote>
       )}
     </div>

@@ -58,8 +58,6 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
       'people/2/merge?from=sten@harrowgate.example',
       'fees',
       'mail',
-      'mail/1',
-      'mail/templates',
       'mail/letters',
       'mail/letters/new',
       'logbook',
