@@ -33,7 +33,7 @@ export interface PlannedNights {
   standing: BinnedLine[]
   policy: NightsPolicy
   plan: BinnedPlan
-  /** Every policy side by side, to choose between. */
+  /** Every policy side by side, to choose between; none where that was not asked for. */
   policies: PolicySummary[]
 }
 
@@ -47,6 +47,13 @@ interface LineFacts {
   possible: boolean
 }
 
+export interface PlanOptions {
+  policy?: NightsPolicy
+  trial?: Trial
+  /** Whether every policy is wanted: the solver takes its time, and verbs hold locks. */
+  sideBySide?: boolean
+}
+
 /**
  * The suggestion for the nights by a policy, in the bins each proposal can use, over what the asker may see and
  * what is given elsewhere. By rank where the other policy finds no answer. A trial is put over the terms that stand.
@@ -55,7 +62,7 @@ export async function planNights(
   ctx: Pick<ActingContext, 'db'>,
   desk: PanelDesk,
   ranking: RankingsRow,
-  { policy = 'rank', trial }: { policy?: NightsPolicy; trial?: Trial } = {},
+  { policy = 'rank', trial, sideBySide = false }: PlanOptions = {},
 ): Promise<PlannedNights> {
   const entries = await rankingEntries(ctx.db, ranking.id)
   const full = entries.map((entry) => entry.proposal_id)
@@ -96,7 +103,10 @@ export async function planNights(
   const line = visibleLine(full, desk.hidden, ranking.line_after ?? 0)
   return {
     ...{ order, line, setAside, wanted, season, terms, bins, asked, standing },
-    ...(await planned(ctx, desk, { policy, asked, bins, standing, above: new Set(order.slice(0, line)) })),
+    ...(await planned(ctx, desk, {
+      ...{ policy, sideBySide, asked, bins, standing },
+      above: new Set(order.slice(0, line)),
+    })),
   }
 }
 
@@ -104,11 +114,15 @@ export async function planNights(
 async function planned(
   ctx: Pick<ActingContext, 'db'>,
   desk: PanelDesk,
-  given: Pick<PlannedNights, 'policy' | 'asked' | 'bins' | 'standing'> & { above: ReadonlySet<number> },
+  given: Pick<PlannedNights, 'policy' | 'asked' | 'bins' | 'standing'> & {
+    sideBySide: boolean
+    above: ReadonlySet<number>
+  },
 ): Promise<Pick<PlannedNights, 'policy' | 'plan' | 'policies'>> {
-  const { policy, asked, bins, standing, above } = given
-  const merit = await meritOf(ctx.db, desk)
+  const { policy, sideBySide, asked, bins, standing, above } = given
   const byRank = byRankInBins(asked.inTurn, bins, standing)
+  if (policy === 'rank' && !sideBySide) return { policy, plan: byRank, policies: [] }
+  const merit = await meritOf(ctx.db, desk)
   const byMerit = await planByMerit({
     asked: [...asked.byRank, ...asked.fillers],
     line: asked.byRank.filter(([first]) => first && above.has(first.proposal)).length,

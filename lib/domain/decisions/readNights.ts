@@ -37,7 +37,7 @@ export async function readNights(
   const trial = isTried(key.trial) ? key.trial : undefined
   const { policy } = key
   const blocks = await offeredTime(ctx.db, desk.call.id)
-  const planned = ranking ? await planNights(ctx, desk, ranking, { policy, trial }) : null
+  const planned = ranking ? await planNights(ctx, desk, ranking, { policy, trial, sideBySide: true }) : null
   const stands = ranking && trial ? await planNights(ctx, desk, ranking, { policy }) : null
   const season = planned?.season ?? (await callBins(ctx.db, desk.call))
   const order = planned?.order ?? []
