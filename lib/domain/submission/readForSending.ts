@@ -1,6 +1,5 @@
 import { feeOf } from '@/db/queries/fees'
 import type { ActingContext } from '../context'
-import { feeFor } from '../fees/feeFor'
 import { everythingMissing } from '../proposals/completeness'
 import { maySendProposal } from '../proposals/policy'
 import type { ReadProposal } from '../proposals/readProposal'
@@ -27,7 +26,7 @@ export async function readForSending(ctx: ActingContext, read: ReadProposal): Pr
   const standing = await feeOf(ctx.db, contents.id)
   const owed = standing
     ? standing.state === 'due' && { amountMinor: standing.amount_minor, currency: standing.currency }
-    : await feeFor(ctx, contents, now)
+    : read.feeToCome
   return {
     ...read,
     groups: readThrough(contents, computation, await papersWords(ctx, contents)),
