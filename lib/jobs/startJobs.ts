@@ -2,6 +2,7 @@ import 'server-only'
 import { env } from '@/lib/env'
 import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
+import { holdBooks } from './holdBooks'
 import { relayLetters } from './relayLetters'
 import { settleFees } from './settleFees'
 import { sweepObjects } from './sweepObjects'
@@ -44,6 +45,7 @@ export function startJobs(): void {
   kept.noctuaryJobs ??= [
     every(env().LETTER_RELAY_SECONDS, 'letters', relay),
     every(60, 'fees', settleFees),
+    every(3600, 'books and firm', holdBooks),
     every(3600, 'objects', sweep),
   ]
 }
