@@ -105,6 +105,8 @@ export interface CallKindsRow {
   max_seconds: number | null
   fee_minor: number
   panel_id: number
+  word_limit: number
+  needs_student: 0 | 1
 }
 
 export interface CallModesRow {
@@ -224,6 +226,21 @@ export interface FeeRatesRow {
   late_minor: number
 }
 
+export interface FiguresRow {
+  id: number
+  proposal_id: number
+  object_id: number
+  label: string
+  caption: string
+  file_name: string
+  width_px: number
+  height_px: number
+  position: number
+  removed_at: Date | null
+  version: number
+  created_at: Date
+}
+
 export interface InstitutesRow {
   id: number
   name: string
@@ -259,7 +276,7 @@ export interface InvitationsRow {
   token_hash: string
   email: string
   name: string
-  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office'
+  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office' | 'investigator'
   call_id: number | null
   panel_id: number | null
   instrument_id: number | null
@@ -269,6 +286,7 @@ export interface InvitationsRow {
   accepted_by: number | null
   withdrawn_at: Date | null
   created_at: Date
+  proposal_id: number | null
 }
 
 export interface InvoicesRow {
@@ -537,6 +555,9 @@ export interface ProposalsRow {
   version: number
   created_at: Date
   updated_at: Date
+  continues_id: number | null
+  lead_offered_to: number | null
+  lead_offered_at: Date | null
 }
 
 export interface ProposalPeopleRow {
@@ -552,6 +573,8 @@ export interface ProposalPeopleRow {
   position: number
   confirmed_at: Date | null
   created_at: Date
+  orcid: string | null
+  is_supervisor: 0 | 1
 }
 
 export interface ProposalVersionsRow {
@@ -561,7 +584,7 @@ export interface ProposalVersionsRow {
   snapshot: string
   snapshot_sha256: string
   engine_version: string
-  paper_id: number
+  paper_id: number | null
   idempotency_key: string
   arrived_at: Date
   committed_at: Date
@@ -717,7 +740,7 @@ export interface StoredObjectsRow {
   sha256: string
   size_bytes: number
   content_type: string
-  purpose: 'paper' | 'packet' | 'receipt' | 'record'
+  purpose: 'paper' | 'packet' | 'receipt' | 'record' | 'figure'
   created_at: Date
 }
 
@@ -752,6 +775,11 @@ export interface TargetsRow {
   galactic_ebv: number | null
   magnification: number | null
   magnification_error: number | null
+  spectrum_kind: 'power-law' | 'black-body' | 'table' | null
+  spectral_index: number | null
+  spectral_index_error: number | null
+  temperature_k: number | null
+  spectrum_table: string | null
 }
 
 export interface TargetGroupsRow {
@@ -760,6 +788,8 @@ export interface TargetGroupsRow {
   name: string
   rule: 'all' | 'at-least' | 'backup'
   at_least: number | null
+  hours_for: 'all' | 'at-least'
+  version: number
 }
 
 export interface TargetQuantitiesRow {
@@ -825,6 +855,16 @@ export interface WaiversRow {
   created_at: Date
 }
 
+export interface WritingsRow {
+  id: number
+  proposal_id: number
+  part: 'justification' | 'references' | 'team'
+  body: string
+  version: number
+  created_at: Date
+  updated_at: Date
+}
+
 declare module 'knex/types/tables.js' {
   interface Tables {
     assessments: Knex.CompositeTableType<
@@ -863,7 +903,7 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor'>
+      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student'>
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -913,6 +953,10 @@ declare module 'knex/types/tables.js' {
       >
     >
     fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
+    figures: Knex.CompositeTableType<
+      FiguresRow,
+      Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
+    >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -937,6 +981,7 @@ declare module 'knex/types/tables.js' {
         | 'accepted_by'
         | 'withdrawn_at'
         | 'created_at'
+        | 'proposal_id'
       >
     >
     invoices: Knex.CompositeTableType<
@@ -1070,18 +1115,29 @@ declare module 'knex/types/tables.js' {
         | 'withdrawn_reason'
         | 'version'
         | 'created_at'
+        | 'continues_id'
+        | 'lead_offered_to'
+        | 'lead_offered_at'
       >
     >
     proposal_people: Knex.CompositeTableType<
       ProposalPeopleRow,
       Insert<
         ProposalPeopleRow,
-        'id' | 'person_id' | 'institute' | 'access' | 'is_student' | 'confirmed_at' | 'created_at'
+        | 'id'
+        | 'person_id'
+        | 'institute'
+        | 'access'
+        | 'is_student'
+        | 'confirmed_at'
+        | 'created_at'
+        | 'orcid'
+        | 'is_supervisor'
       >
     >
     proposal_versions: Knex.CompositeTableType<
       ProposalVersionsRow,
-      Insert<ProposalVersionsRow, 'id' | 'superseded_at'>
+      Insert<ProposalVersionsRow, 'id' | 'paper_id' | 'superseded_at'>
     >
     proposal_version_people: Knex.CompositeTableType<
       ProposalVersionPeopleRow,
@@ -1174,9 +1230,17 @@ declare module 'knex/types/tables.js' {
         | 'galactic_ebv'
         | 'magnification'
         | 'magnification_error'
+        | 'spectrum_kind'
+        | 'spectral_index'
+        | 'spectral_index_error'
+        | 'temperature_k'
+        | 'spectrum_table'
       >
     >
-    target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>
+    target_groups: Knex.CompositeTableType<
+      TargetGroupsRow,
+      Insert<TargetGroupsRow, 'id' | 'at_least' | 'hours_for' | 'version'>
+    >
     target_quantities: Knex.CompositeTableType<
       TargetQuantitiesRow,
       Insert<
@@ -1207,5 +1271,6 @@ declare module 'knex/types/tables.js' {
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>
     >
+    writings: Knex.CompositeTableType<WritingsRow, Insert<WritingsRow, 'id' | 'version' | 'created_at'>>
   }
 }

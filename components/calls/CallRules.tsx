@@ -1,7 +1,7 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { priceWords } from '@/components/fees/priceWords'
 import type { CallCriterion, CallKind, FeeRate } from '@/lib/domain/calls/types'
-import { formatHoursFromSeconds, formatUtc } from '@/lib/format'
+import { formatHoursFromSeconds, formatNumber, formatUtc } from '@/lib/format'
 
 interface CallRulesProps {
   kinds: readonly CallKind[]
@@ -23,7 +23,7 @@ export function CallRules({ kinds, criteria, rates, currency, graceUntil }: Call
           <li key={kind.id} className="border-t border-rule py-3">
             <span className="font-semibold">{kind.title}</span>
             <span className="block text-table text-muted">
-              {kind.pageLimit} pages of justification
+              {formatNumber(kind.wordLimit)} words of justification, or {kind.pageLimit} pages as a PDF
               {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
               {currency ? `, ${priceWords(kind, rates, currency)}` : ''}
               {kind.closesAt ? `, closes ${formatUtc(kind.closesAt)}` : ''}

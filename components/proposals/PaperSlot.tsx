@@ -1,12 +1,10 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ActionResult } from '@/lib/actions/result'
-import type { NameFound } from '@/lib/domain/papers/namesIn'
 import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 import type { Paper } from '@/lib/domain/proposals/types'
 import { countInWords, formatBytes, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
-import { NamesFound } from './NamesFound'
 import { PaperUpload } from './PaperUpload'
 import { RemovePaper } from './RemovePaper'
 
@@ -17,8 +15,6 @@ export interface PaperSlotProps {
   help: string
   pageLimit: number
   paper: Paper | null
-  /** Undefined where names are meant to stand. */
-  names?: readonly NameFound[] | null
   /** Null for those who only look. */
   actions: {
     upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
@@ -27,16 +23,7 @@ export interface PaperSlotProps {
 }
 
 /** One document of a proposal: what stands, what was found in it, and how to put another in its place. */
-export function PaperSlot({
-  reference,
-  kind,
-  title,
-  help,
-  pageLimit,
-  paper,
-  names,
-  actions,
-}: PaperSlotProps) {
+export function PaperSlot({ reference, kind, title, help, pageLimit, paper, actions }: PaperSlotProps) {
   return (
     <section className="mb-10">
       <SectionHeading dense title={title} aside={`at most ${countInWords(pageLimit, 'page')}`} />
@@ -61,11 +48,6 @@ export function PaperSlot({
               </span>
             ) : null}
           </p>
-          {names === undefined ? null : (
-            <div className="mt-3">
-              <NamesFound found={names} />
-            </div>
-          )}
         </div>
       ) : null}
       {actions ? (

@@ -47,10 +47,12 @@ function kindOf(row: CallKindsRow): CallKind {
     title: row.title,
     closesAt: row.closes_at,
     pageLimit: row.page_limit,
+    wordLimit: row.word_limit,
     abstractLimit: row.abstract_limit,
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,
+    needsStudent: row.needs_student === 1,
   }
 }
 

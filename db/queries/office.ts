@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { FeesRow, ProposalsRow } from '../tables.ts'
+import { askedTime } from './askedTime.ts'
 
 export interface OfficeProposal {
   reference: string
@@ -27,6 +28,7 @@ export interface OfficeProposal {
 }
 
 interface Row {
+  id: number
   reference: string
   review_number: string | null
   title: string
@@ -36,7 +38,6 @@ interface Row {
   lead: string | null
   arrived_at: Date | null
   version_number: number | null
-  asked: string | null
   fee_state: FeesRow['state'] | null
   fee_minor: number | null
   paid: string | null
@@ -58,7 +59,7 @@ const moneyByFee = (db: Database) =>
       SUM(IF(account = 'disputed', amount_minor, 0)) AS disputed, SUM(IF(account = 'lost', amount_minor, 0)) AS lost
     FROM money_entries GROUP BY fee_id) AS e`)
 
-/** Proposals of a call as the office sees them: who sent what and when, and what was paid. One query. */
+/** Proposals of a call as the office sees them: who sent what and when, and what was paid. Two queries. */
 export async function proposalsOfCall(db: Database, callId: number): Promise<OfficeProposal[]> {
   const rows = await db('proposals as p')
     .join('call_kinds as k', 'k.id', 'p.call_kind_id')
@@ -73,6 +74,7 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     .where('p.call_id', callId)
     .orderBy('p.id')
     .select<Row[]>(
+      'p.id',
       'p.reference',
       'p.review_number',
       'p.title',
@@ -86,12 +88,15 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
       'f.amount_minor as fee_minor',
       'w.id as waiver_id',
       'w.reason as waiver_reason',
-      db.raw('(SELECT SUM(o.asked_seconds) FROM observations o WHERE o.proposal_id = p.id) AS asked'),
       'f.affiliation_class',
       'i.number as invoice',
       db.raw('i.due_at <= UTC_TIMESTAMP(3) AS is_overdue'),
       db.raw('e.paid, e.refunded, e.disputed, e.lost'),
     )
+  const asked = await askedTime(
+    db,
+    rows.map(({ id }) => id),
+  )
   return rows.map((row) => ({
     reference: row.reference,
     reviewNumber: row.review_number,
@@ -102,7 +107,7 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     lead: row.lead ?? '',
     arrivedAt: row.arrived_at,
     versionNumber: row.version_number,
-    askedSeconds: Number(row.asked ?? 0),
+    askedSeconds: asked.get(row.id) ?? 0,
     feeState: row.fee_state,
     feeMinor: row.fee_minor,
     paidMinor: Number(row.paid ?? 0),

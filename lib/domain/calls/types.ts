@@ -22,10 +22,14 @@ export interface CallKind {
   title: string
   closesAt: Date | null
   pageLimit: number
+  /** Words of a justification written here. */
+  wordLimit: number
   abstractLimit: number
   maxSeconds: number | null
   feeMinor: number
   panelId: number
+  /** Must name a student and a supervisor, both of whom have agreed. */
+  needsStudent: boolean
 }
 
 export interface CallCriterion {

@@ -52,7 +52,10 @@ export async function inspectPdf(bytes: Uint8Array, fileName: string, pageLimit:
   if (bytes.length > maxPaperBytes)
     throw no(`${fileName} has ${formatBytes(bytes.length)}; at most ${formatBytes(maxPaperBytes)} are taken.`)
   const kind = fileKind(bytes)
-  if (kind !== 'pdf') throw no(`${fileName} is not a PDF: by its contents it is ${kind.instead}.`)
+  if (kind !== 'pdf') {
+    const instead = typeof kind === 'string' ? `a ${kind.toUpperCase()} picture` : kind.instead
+    throw no(`${fileName} is not a PDF: by its contents it is ${instead}.`)
+  }
   checkEnd(bytes)
   const { document, pages } = await opened(bytes)
   const active = activeContent(document)

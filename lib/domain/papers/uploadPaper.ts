@@ -1,4 +1,3 @@
-import { createHash } from 'node:crypto'
 import type { z } from 'zod'
 import { databaseNow } from '@/db/queries/clock'
 import { insertPaper, papersOf, supersedePapers } from '@/db/queries/papers'
@@ -9,11 +8,12 @@ import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { newObjectKey } from '../objects/objectKey'
-import { cleanText } from '../proposals/cleanText'
 import { openForEditing } from '../proposals/openProposal'
+import { arrivedFile } from './arrivedFile'
 import { inspectPdf } from './inspectPdf'
 import { maxExpertisePages, maxPaperBytes } from './limits'
 import type { uploadPaperSchema } from './schema'
+import { shownName } from './shownName'
 
 export type UploadPaperInput = z.output<typeof uploadPaperSchema>
 
@@ -23,19 +23,6 @@ export interface UploadedPaper {
   pages: number
   /** Name of the document it took the place of. */
   replaced: string | null
-}
-
-/** The last part of a file's name, one line, short enough to keep. It is shown, never used as a path. */
-const shownName = (name: string) =>
-  (cleanText(name).split(/[\\/]/).at(-1) ?? '').replace(/\s+/g, ' ').trim().slice(-200) || 'document.pdf'
-
-async function arrived(input: UploadPaperInput): Promise<{ bytes: Uint8Array; sha256: string }> {
-  if (input.file.size > maxPaperBytes) throw refuse.field('file', 'The file is larger than 20 MB.')
-  const bytes = new Uint8Array(await input.file.arrayBuffer())
-  const sha256 = createHash('sha256').update(bytes).digest('hex')
-  if (bytes.length !== input.sizeBytes || sha256 !== input.sha256)
-    throw refuse.field('file', 'The file was damaged on its way here. Nothing was changed; send it again.')
-  return { bytes, sha256 }
 }
 
 /** Who may, and the most pages, asked before the slow looking through; asked again when it is written. */
@@ -52,8 +39,10 @@ async function pageLimit(ctx: Context, input: UploadPaperInput): Promise<number>
  */
 export async function uploadPaper(ctx: Context, input: UploadPaperInput): Promise<UploadedPaper> {
   const limit = await pageLimit(ctx, input)
-  const { bytes, sha256 } = await arrived(input)
-  const fileName = shownName(input.file.name)
+  if (input.file.size > maxPaperBytes) throw refuse.field('file', 'The file is larger than 20 MB.')
+  const bytes = await arrivedFile(input)
+  const { sha256 } = input
+  const fileName = shownName(input.file.name, 'document.pdf')
   const { pages } = await inspectPdf(bytes, fileName, limit)
   const key = newObjectKey(ctx.random, await databaseNow(ctx.db))
   await ctx.storage.put(key, bytes, 'application/pdf')
