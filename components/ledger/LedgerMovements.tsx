@@ -33,7 +33,7 @@ export function LedgerMovements({ movements }: { movements: readonly LedgerMovem
       find="Reference, account or movement"
       chips={chips}
       csv="ledger-of-fees"
-      page={50}
+      page={25}
       empty={<EmptyState title="Nothing has moved yet">A fee is billed when a proposal is sent.</EmptyState>}
     />
   )

@@ -1,9 +1,9 @@
 import type { Metadata } from 'next'
+import { FeeBeside } from '@/components/fees/FeeBeside'
 import { FeeDesk } from '@/components/fees/FeeDesk'
 import { RemindButton } from '@/components/fees/RemindButton'
 import { FeesOfCall } from '@/components/office/FeesOfCall'
 import { Main } from '@/components/layout/Main'
-import { TwoColumns } from '@/components/layout/TwoColumns'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { TextLink } from '@/components/ui/TextLink'
@@ -82,7 +82,7 @@ export default async function OfficeFeesPage({
         }
       />
       <div className="mt-6">
-        {fee ? <TwoColumns side={<FeeDesk fee={fee} deeds={deeds} />}>{table}</TwoColumns> : table}
+        {fee ? <FeeBeside fee={<FeeDesk fee={fee} deeds={deeds} />}>{table}</FeeBeside> : table}
       </div>
     </Main>
   )
