@@ -32,7 +32,7 @@ const found = (ours: OurPayment[], theirs: ListedPayment[], isExpected: () => bo
     isMendable,
   ])
 
-// Seen to fail with payments found by their number at the firm alone, and with the missing ones not looked for.
+// Seen to fail with payments that are missing there not looked for.
 describe('our books against the firm’s list', () => {
   it('agree where both say the same', () => {
     expect(found([own], [listed])).toEqual([])

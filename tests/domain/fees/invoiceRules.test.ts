@@ -10,7 +10,7 @@ import { paperNumber } from '@/lib/domain/fees/paperNumber'
 
 const at = (text: string) => new Date(text)
 
-// Seen to fail with the week left out, and with the day compared as a moment.
+// Seen to fail with the week left out.
 describe('an invoice', () => {
   it('is due after thirty days, and overdue from that moment while it is open', () => {
     const dueAt = invoiceDueAt(at('2027-03-01T10:00:00Z'))

@@ -4,7 +4,7 @@ import { moneyAmount } from '@/lib/domain/fees/moneyAmount'
 import { priceOf } from '@/lib/domain/fees/priceOf'
 import { formatAmount } from '@/lib/format'
 
-// Seen to fail with the decimals multiplied as a float (1.15 became 114), and with three decimals cut off.
+// Seen to fail with the decimals multiplied as a float, which made 114 of 1.15.
 describe('an amount as typed', () => {
   it.each([
     ['120', 'EUR', 12_000],

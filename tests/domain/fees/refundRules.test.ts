@@ -13,7 +13,7 @@ const refund = (state: 'created' | 'succeeded' | 'failed', amount: number) => ({
 })
 const dispute = (state: 'open' | 'won' | 'lost') => ({ payment_id: 1, state, amount_minor: 12_000 })
 
-// Seen to fail with failed refunds counted, and with won disputes still held.
+// Seen to fail with failed refunds counted.
 describe('what is left of a payment', () => {
   it.each([
     ['untouched', {}, 12_000],

@@ -8,7 +8,7 @@ const owed = {
 }
 const at = (text: string) => new Date(text)
 
-// Seen to fail with the moments before the billing not passed over, and with the grace's end left out.
+// Seen to fail with the moments before the billing not passed over.
 describe('the reminder of a fee', () => {
   it.each([
     ['2027-03-28T21:59:59Z', null],

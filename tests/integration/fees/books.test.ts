@@ -22,7 +22,7 @@ beforeEach(async () => {
   session = await billed.open()
 })
 
-// Seen to fail with the difference put on record at every run, and with the state of the payment not asked for.
+// Seen to fail with the difference put on record at every run.
 describe('the books against the firm’s list', () => {
   it('shows what differs, mends it and keeps what was mended on record', async () => {
     billed.payments.pay(session)

@@ -131,7 +131,7 @@ async function play(trx: Database, told: Story): Promise<boolean> {
   return billed.payments.sessions.get(session)?.isPaid === true
 }
 
-// Seen to fail with the dispute's end applied without its beginning, and with a refund made by hand left out of the books.
+// Seen to fail with a refund made by hand left out of the books.
 describe('notices in any order, each several times', () => {
   it('come to one end in 200 orders: the books balance and say what the firm says', async () => {
     let settled = 0

@@ -95,7 +95,7 @@ async function disturbed({ ready, press }: Press, number: number, mode: FaultMod
   return traces(billed)
 }
 
-// Seen to fail with the receipt written outside the transaction, and with a refund asked for without its key.
+// Seen to fail with a step of settling that fails passed over.
 describe.each(Object.entries(presses))('%s, with each step made to fail in turn', (_, one) => {
   it.each<FaultMode>(['once', 'for good', 'answer lost'])(
     'keeps every promise, and the next press makes it whole, once: %s',

@@ -30,7 +30,7 @@ beforeEach(async () => {
   await billedAgo(24 * 20)
 })
 
-// Seen to fail with the cause left out of the letter, and with fees asked to be waived not left out.
+// Seen to fail with fees that are asked to be waived not left out.
 describe('reminding whoever owes', () => {
   it('writes once at each moment, to those who lead alone', async () => {
     await closesIn(73)

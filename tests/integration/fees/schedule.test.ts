@@ -48,8 +48,7 @@ beforeEach(async () => {
   scenario = await makeScenario(db(), { storage })
 })
 
-// Seen to fail with the fee of the kind billed whatever the class, and with the late fee added at the deadline of the
-// proposal instead of the call's.
+// Seen to fail with everybody billed as other institutes are.
 describe('the fees of a call', () => {
   it.each([
     ['member', 6_000],
