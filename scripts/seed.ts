@@ -1,5 +1,6 @@
 import { connect } from '../db/client.ts'
 import { seedDemo } from '../db/seeds/demo.ts'
+import { recordPast } from './fakes/payments/recordPast.ts'
 import { s3Store } from '../lib/services/storage/s3.ts'
 
 const url = process.env.DATABASE_URL
@@ -27,7 +28,11 @@ const storage = s3Store({
 
 const db = connect(url)
 try {
-  const isNew = await seedDemo(db, new Date(), { storage, origin: setting('NEXTAUTH_URL') })
+  const isNew = await seedDemo(db, new Date(), {
+    storage,
+    origin: setting('NEXTAUTH_URL'),
+    recordPast: (payments) => recordPast(setting('PAYMENT_MOCK_URL'), payments),
+  })
   console.log(isNew ? 'Demonstration seeded.' : 'Demonstration already there.')
 } finally {
   await db.destroy()

@@ -1,17 +1,19 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import type { CallCriterion, CallKind } from '@/lib/domain/calls/types'
-import { formatHoursFromSeconds, formatMoneyShort, formatNumber, formatUtc } from '@/lib/format'
+import { priceWords } from '@/components/fees/priceWords'
+import type { CallCriterion, CallKind, FeeRate } from '@/lib/domain/calls/types'
+import { formatHoursFromSeconds, formatNumber, formatUtc } from '@/lib/format'
 
 interface CallRulesProps {
   kinds: readonly CallKind[]
   criteria: readonly CallCriterion[]
+  rates: readonly FeeRate[]
   /** Null when the call has no fee: then nothing here speaks of one. */
   currency: string | null
   graceUntil: Date
 }
 
 /** Kinds of proposal with their limits, and what proposals are judged by. */
-export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesProps) {
+export function CallRules({ kinds, criteria, rates, currency, graceUntil }: CallRulesProps) {
   const parts = criteria.reduce((sum, criterion) => sum + criterion.weight, 0)
   return (
     <>
@@ -23,9 +25,7 @@ export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesPr
             <span className="block text-table text-muted">
               {formatNumber(kind.wordLimit)} words of justification, or {kind.pageLimit} pages as a PDF
               {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
-              {currency
-                ? `, ${kind.feeMinor > 0 ? formatMoneyShort(kind.feeMinor, currency) : 'no fee'}`
-                : ''}
+              {currency ? `, ${priceWords(kind, rates, currency)}` : ''}
               {kind.closesAt ? `, closes ${formatUtc(kind.closesAt)}` : ''}
             </span>
           </li>
@@ -33,8 +33,8 @@ export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesPr
       </ul>
       {currency ? (
         <p className="mt-3 text-table text-muted">
-          A proposal is in as soon as it is sent; its fee is settled by {formatUtc(graceUntil)}, by card or by
-          a waiver.
+          A proposal is in as soon as it is sent; its fee is settled by {formatUtc(graceUntil)}, by card, by
+          an invoice to an institute, or by a waiver.
         </p>
       ) : null}
       <div className="mt-10">

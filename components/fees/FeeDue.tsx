@@ -1,8 +1,9 @@
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { Panel } from '@/components/ui/Panel'
-import type { AskForWaiverInput } from '@/lib/domain/fees/schema'
+import type { AskForInvoiceForm, AskForWaiverInput } from '@/lib/domain/fees/schema'
 import type { SentProposal } from '@/lib/domain/submission/readSent'
 import { formatMoney, formatUtc } from '@/lib/format'
+import { InvoiceOpen } from './InvoiceOpen'
 import { SettleFee } from './SettleFee'
 
 interface FeeDueProps {
@@ -12,11 +13,13 @@ interface FeeDueProps {
   isTestMode: boolean
   pay: FormAction<{ reference: string }, unknown>
   ask: FormAction<AskForWaiverInput, unknown>
+  invoice: FormAction<AskForInvoiceForm, { number: string }>
 }
 
 /** What is still to be settled, by when, and the way to do it; nothing once it is. */
-export function FeeDue({ sent, isUnanswered, isTestMode, pay, ask }: FeeDueProps) {
+export function FeeDue({ sent, isUnanswered, isTestMode, pay, ask, invoice }: FeeDueProps) {
   const { fee, contents, may } = sent
+  if (fee?.invoice) return <InvoiceOpen fee={fee} invoice={fee.invoice} reference={contents.reference} />
   if (fee?.state !== 'due') return null
   const { waiver } = fee
   return (
@@ -40,9 +43,11 @@ export function FeeDue({ sent, isUnanswered, isTestMode, pay, ask }: FeeDueProps
           reference={contents.reference}
           amountMinor={fee.amountMinor}
           currency={fee.currency}
-          mayAskForWaiver={may.askForWaiver}
+          may={may}
+          institute={contents.people.find(({ role }) => role === 'pi')?.institute ?? ''}
           pay={pay}
           ask={ask}
+          invoice={invoice}
         />
       ) : null}
     </Panel>

@@ -26,11 +26,18 @@ export function ReceiptFacts({ sent }: { sent: SentProposal }) {
   return (
     <div>
       <Facts title={receipt ? 'Receipt' : 'Received'} facts={facts} />
-      {receipt ? (
-        <p className="mt-4 mb-0 text-table">
-          <TextLink href={paths.proposalReceipt(contents.reference)} download>
-            Receipt as PDF
-          </TextLink>
+      {receipt || fee?.papers.length ? (
+        <p className="mt-4 mb-0 flex flex-wrap gap-x-5 gap-y-2 text-table">
+          {receipt ? (
+            <TextLink href={paths.proposalReceipt(contents.reference)} download>
+              Receipt as PDF
+            </TextLink>
+          ) : null}
+          {fee?.papers.map((number) => (
+            <TextLink key={number} href={paths.proposalBill(contents.reference, number)} download>
+              {number}
+            </TextLink>
+          ))}
         </p>
       ) : null}
     </div>

@@ -1,5 +1,6 @@
 'use client'
 
+import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import { ActionForm } from '@/components/forms/ActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
@@ -7,31 +8,56 @@ import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
-import { askForWaiverSchema, startPaymentSchema, type AskForWaiverInput } from '@/lib/domain/fees/schema'
+import { showToast } from '@/components/ui/showToast'
+import {
+  askForWaiverSchema,
+  startPaymentSchema,
+  type AskForInvoiceForm,
+  type AskForWaiverInput,
+} from '@/lib/domain/fees/schema'
 import { formatMoneyShort } from '@/lib/format'
+import { InvoiceForm } from './InvoiceForm'
 
 interface SettleFeeProps {
   reference: string
   amountMinor: number
   currency: string
-  mayAskForWaiver: boolean
+  may: { askForWaiver: boolean; askForInvoice: boolean }
+  /** Of whoever leads: the invoice begins with it. */
+  institute: string
   pay: FormAction<{ reference: string }, unknown>
   ask: FormAction<AskForWaiverInput, unknown>
+  invoice: FormAction<AskForInvoiceForm, { number: string }>
 }
 
-/** Pays a fee that is still due, or asks for it to be waived. */
-export function SettleFee({ reference, amountMinor, currency, mayAskForWaiver, pay, ask }: SettleFeeProps) {
-  const [asks, setAsks] = useState(false)
+type Way = 'card' | 'waiver' | 'invoice'
+
+const ways: Record<Way, string> = {
+  card: 'Pay by card',
+  invoice: 'Have it invoiced to an institute',
+  waiver: 'Ask for a waiver',
+}
+
+/** Pays a fee that is still due, has it invoiced to an institute, or asks for it to be waived. */
+export function SettleFee(props: SettleFeeProps) {
+  const { reference, amountMinor, currency, may, institute, pay, ask, invoice } = props
+  const router = useRouter()
+  const [way, setWay] = useState<Way>('card')
   const payment = useActionForm({ schema: startPaymentSchema, action: pay, defaultValues: { reference } })
   const waiver = useActionForm({
     schema: askForWaiverSchema,
     action: ask,
     defaultValues: { reference, reason: '' },
-    onDone: () => setAsks(false),
+    onDone: () => setWay('card'),
   })
+  const open: Way[] = [
+    'card',
+    ...(may.askForInvoice ? (['invoice'] as const) : []),
+    ...(may.askForWaiver ? (['waiver'] as const) : []),
+  ]
   return (
     <div className="flex flex-col gap-4">
-      {asks ? (
+      {way === 'waiver' ? (
         <ActionForm form={waiver} label="Ask for a waiver">
           <TextAreaField
             name="reason"
@@ -44,18 +70,34 @@ export function SettleFee({ reference, amountMinor, currency, mayAskForWaiver, p
             Ask for a waiver
           </SubmitButton>
         </ActionForm>
-      ) : (
+      ) : null}
+      {way === 'invoice' ? (
+        <InvoiceForm
+          reference={reference}
+          institute={institute}
+          action={invoice}
+          onDone={(number) => {
+            showToast(`Invoice ${number} is on its way`)
+            router.refresh()
+          }}
+        />
+      ) : null}
+      {way === 'card' ? (
         <ActionForm form={payment} label="Pay the fee">
           <SubmitButton full busyWord="Opening">
             Pay {formatMoneyShort(amountMinor, currency)}
           </SubmitButton>
         </ActionForm>
-      )}
-      {mayAskForWaiver ? (
-        <p className="m-0 text-table">
-          <LinkLikeButton onClick={() => setAsks(!asks)} aria-expanded={asks}>
-            {asks ? 'Pay by card instead' : 'Ask for a waiver'}
-          </LinkLikeButton>
+      ) : null}
+      {open.length > 1 ? (
+        <p className="m-0 flex flex-wrap gap-x-5 gap-y-2 text-table">
+          {open
+            .filter((one) => one !== way)
+            .map((one) => (
+              <LinkLikeButton key={one} onClick={() => setWay(one)}>
+                {ways[one]}
+              </LinkLikeButton>
+            ))}
         </p>
       ) : null}
     </div>

@@ -10,6 +10,7 @@ import { showToast } from '@/components/ui/showToast'
 import { saveDatesSchema } from '@/lib/domain/calls/schema'
 import type { Call } from '@/lib/domain/calls/types'
 import { CallDateFields } from './CallDateFields'
+import { useFollowedVersion } from './useFollowedVersion'
 
 type Input = z.input<typeof saveDatesSchema>
 
@@ -44,6 +45,10 @@ export function DatesForm({ call, utcOffsetHours, action }: DatesFormProps) {
       showToast('Dates saved')
       router.refresh()
     },
+  })
+  useFollowedVersion(call.version, {
+    getValues: (name) => form.form.getValues(name),
+    setValue: (name, value) => form.form.setValue(name, value),
   })
   return (
     <ActionForm form={form}>

@@ -10,17 +10,20 @@ import type { DecideWaiverInput } from '@/lib/domain/fees/schema'
 import { formatAmount } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { feeColumns } from './feeColumns'
+import { wantsOffice } from './feeState'
 import { feeSums } from './feeSums'
 import { WaiverForm } from './WaiverForm'
 
 interface FeesOfCallProps {
   slug: string
   initial: OfficeProposalsReply
+  /** The fee that is open beside the table. */
+  selected: string | null
   decide: FormAction<DecideWaiverInput, unknown>
 }
 
 /** Fees of a call: the sum in a bar, the table, and a decision under each waiver that is asked for. */
-export function FeesOfCall({ slug, initial, decide }: FeesOfCallProps) {
+export function FeesOfCall({ slug, initial, selected, decide }: FeesOfCallProps) {
   const { data = initial } = useTableQuery({
     key: ['office-proposals', slug],
     url: `${paths.api.table('office-proposals')}?call=${encodeURIComponent(slug)}`,
@@ -48,6 +51,12 @@ export function FeesOfCall({ slug, initial, decide }: FeesOfCallProps) {
               value: formatAmount(sums.waived, currency),
               colour: 'accent',
             },
+            {
+              label: 'in disputes',
+              amount: sums.disputed,
+              value: formatAmount(sums.disputed, currency),
+              colour: 'edge',
+            },
             { label: 'owed', amount: sums.owed, value: formatAmount(sums.owed, currency), colour: 'lamp' },
           ]}
         />
@@ -58,14 +67,17 @@ export function FeesOfCall({ slug, initial, decide }: FeesOfCallProps) {
           columns={feeColumns(currency)}
           rows={rows}
           rowId={(row) => row.reference}
+          selectedId={selected}
           find="Reference or name"
           chips={[
             { id: 'owed', label: 'Owed', matches: (row) => row.feeState === 'due' },
             { id: 'waiver', label: 'Waiver asked', matches: (row) => row.waiverId !== null },
+            { id: 'invoice', label: 'By invoice', matches: (row) => row.invoice !== null },
+            { id: 'disputed', label: 'Disputed', matches: (row) => row.disputedMinor + row.lostMinor > 0 },
             { id: 'refunded', label: 'Refunded', matches: (row) => row.refundedMinor > 0 },
           ]}
           csv={`fees-${slug}`}
-          tone={(row) => (row.waiverId === null ? null : 'attention')}
+          tone={(row) => (wantsOffice(row) ? 'attention' : null)}
           detail={(row) =>
             row.waiverId === null ? null : (
               <WaiverForm

@@ -13,14 +13,14 @@ const words = {
 
 /** The fee in the strip: what it is and how it stands; null where there is none. */
 export function feeWords(
-  read: Pick<ReadProposal, 'contents' | 'fee'>,
+  read: Pick<ReadProposal, 'feeToCome' | 'fee'>,
 ): { amount: string; standing: string } | null {
   if (read.fee)
     return {
       amount: formatMoneyShort(read.fee.amountMinor, read.fee.currency),
       standing: words[read.fee.state],
     }
-  const { call, kind } = read.contents
-  if (!call.currency || kind.feeMinor === 0) return null
-  return { amount: formatMoneyShort(kind.feeMinor, call.currency), standing: 'due on sending' }
+  if (!read.feeToCome) return null
+  const { amountMinor, currency } = read.feeToCome
+  return { amount: formatMoneyShort(amountMinor, currency), standing: 'due on sending' }
 }

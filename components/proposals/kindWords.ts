@@ -4,6 +4,9 @@ import { countInWords, formatHoursFromSeconds, formatMoneyShort, formatUtc } fro
 /** What a kind of proposal allows and asks, in a line under its name. */
 export function kindWords({ call, kind, deadline }: OpenKind): string {
   const most = kind.maxSeconds === null ? '' : `at most ${formatHoursFromSeconds(kind.maxSeconds)}, `
-  const fee = call.currency && kind.feeMinor > 0 ? `, ${formatMoneyShort(kind.feeMinor, call.currency)}` : ''
+  const fee =
+    call.currency && kind.feeMinor > 0
+      ? `, a fee of up to ${formatMoneyShort(kind.feeMinor, call.currency)}`
+      : ''
   return `${most}${countInWords(kind.pageLimit, 'page')} of justification${fee}, closes ${formatUtc(deadline)}`
 }

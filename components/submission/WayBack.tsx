@@ -22,7 +22,7 @@ function feeSentence(fee: string | null, isEarly: boolean): string {
   if (fee === null) return ''
   if (!isEarly) return ' The deadline has passed, so the fee stands as it is.'
   if (fee === 'paid') return ' What was paid goes back in full.'
-  return fee === 'due' ? ' Nothing is owed then.' : ''
+  return fee === 'due' || fee === 'invoiced' ? ' Nothing is owed then.' : ''
 }
 
 /** Two ways back: writing it again, and withdrawing it for good. */

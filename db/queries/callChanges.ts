@@ -18,6 +18,7 @@ export type CallChange = Partial<
     | 'reviews_due_at'
     | 'panel_meets_at'
     | 'letters_at'
+    | 'currency'
   >
 >
 
@@ -60,12 +61,17 @@ export async function copyCallRules(
     for (const { person_id, seat, number } of members)
       await db('panel_members').insert({ panel_id: id as number, person_id, seat, number })
   }
-  for (const { id: _id, call_id: _call, panel_id, closes_at: _closes, ...kind } of await db(
-    'call_kinds',
-  ).where({
+  for (const { id, call_id: _call, panel_id, closes_at: _closes, ...kind } of await db('call_kinds').where({
     call_id: fromCallId,
-  }))
-    await db('call_kinds').insert({ ...kind, call_id: toCallId, panel_id: panels.get(panel_id) ?? panel_id })
+  })) {
+    const [kindId] = await db('call_kinds').insert({
+      ...kind,
+      call_id: toCallId,
+      panel_id: panels.get(panel_id) ?? panel_id,
+    })
+    for (const { id: _rate, ...rate } of await db('fee_rates').where({ call_kind_id: id }))
+      await db('fee_rates').insert({ ...rate, call_kind_id: kindId as number })
+  }
   for (const { id: _id, call_id: _call, ...criterion } of await db('call_criteria').where({
     call_id: fromCallId,
   }))

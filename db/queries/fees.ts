@@ -51,6 +51,15 @@ export async function lockFeeOf(db: Database, reference: string): Promise<FeesRo
   return (row as FeesRow | undefined) ?? null
 }
 
+/** Whether a fee of this call has been billed. */
+export async function isBilled(db: Database, callId: number): Promise<boolean> {
+  const row = await db('fees as f')
+    .join('proposals as p', 'p.id', 'f.proposal_id')
+    .where('p.call_id', callId)
+    .first('f.id')
+  return row !== undefined
+}
+
 export async function insertFee(
   db: Database,
   fee: {

@@ -17,6 +17,11 @@ export interface OfficeProposal {
   feeMinor: number | null
   paidMinor: number
   refundedMinor: number
+  affiliationClass: FeesRow['affiliation_class'] | null
+  disputedMinor: number
+  lostMinor: number
+  /** The invoice that is open. */
+  invoice: { number: string; isOverdue: boolean } | null
   waiverAsked: boolean
   waiverId: number | null
   waiverReason: string | null
@@ -37,9 +42,22 @@ interface Row {
   fee_minor: number | null
   paid: string | null
   refunded: string | null
+  affiliation_class: FeesRow['affiliation_class'] | null
+  disputed: string | null
+  lost: string | null
+  invoice: string | null
+  is_overdue: 0 | 1 | null
   waiver_id: number | null
   waiver_reason: string | null
 }
+
+/** Money that came and went by fee, as the books have it. */
+const moneyByFee = (db: Database) =>
+  db.raw(`(SELECT fee_id,
+      SUM(IF(movement LIKE 'paid:%' AND account = 'provider' OR movement LIKE 'settled:%' AND account = 'bank', amount_minor, 0)) AS paid,
+      -SUM(IF(movement LIKE 'refunded:%' AND account IN ('provider', 'bank'), amount_minor, 0)) AS refunded,
+      SUM(IF(account = 'disputed', amount_minor, 0)) AS disputed, SUM(IF(account = 'lost', amount_minor, 0)) AS lost
+    FROM money_entries GROUP BY fee_id) AS e`)
 
 /** Proposals of a call as the office sees them: who sent what and when, and what was paid. Two queries. */
 export async function proposalsOfCall(db: Database, callId: number): Promise<OfficeProposal[]> {
@@ -51,6 +69,8 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     .leftJoin('proposal_versions as v', (on) => on.on('v.proposal_id', 'p.id').andOnNull('v.superseded_at'))
     .leftJoin('fees as f', 'f.proposal_id', 'p.id')
     .leftJoin('waivers as w', (on) => on.on('w.fee_id', 'f.id').andOn('w.state', db.raw('?', ['asked'])))
+    .leftJoin('invoices as i', (on) => on.on('i.fee_id', 'f.id').andOn('i.state', db.raw('?', ['open'])))
+    .leftJoin(moneyByFee(db), 'e.fee_id', 'f.id')
     .where('p.call_id', callId)
     .orderBy('p.id')
     .select<Row[]>(
@@ -68,12 +88,10 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
       'f.amount_minor as fee_minor',
       'w.id as waiver_id',
       'w.reason as waiver_reason',
-      db.raw(
-        "(SELECT SUM(m.amount_minor) FROM payments m WHERE m.fee_id = f.id AND m.state = 'succeeded') AS paid",
-      ),
-      db.raw(
-        "(SELECT SUM(r.amount_minor) FROM refunds r JOIN payments m ON m.id = r.payment_id WHERE m.fee_id = f.id AND r.state = 'succeeded') AS refunded",
-      ),
+      'f.affiliation_class',
+      'i.number as invoice',
+      db.raw('i.due_at <= UTC_TIMESTAMP(3) AS is_overdue'),
+      db.raw('e.paid, e.refunded, e.disputed, e.lost'),
     )
   const asked = await askedTime(
     db,
@@ -94,6 +112,10 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     feeMinor: row.fee_minor,
     paidMinor: Number(row.paid ?? 0),
     refundedMinor: Number(row.refunded ?? 0),
+    affiliationClass: row.affiliation_class,
+    disputedMinor: Number(row.disputed ?? 0),
+    lostMinor: Number(row.lost ?? 0),
+    invoice: row.invoice === null ? null : { number: row.invoice, isOverdue: row.is_overdue === 1 },
     waiverAsked: row.waiver_id !== null,
     waiverId: row.waiver_id,
     waiverReason: row.waiver_reason,

@@ -42,6 +42,11 @@ export async function insertLetter(db: Database, letter: NewLetter): Promise<voi
     .ignore()
 }
 
+/** Whether a letter of this cause has been written to anybody. */
+export async function isCausePosted(db: Database, cause: string): Promise<boolean> {
+  return (await db('outbox').where('dedupe_key', 'like', `${cause}:%`).first('id')) !== undefined
+}
+
 /** Takes up to `limit` letters that are due, so that no second relay sends them; a dead relay's come back. */
 export async function claimLetters(db: Database, limit: number, holdSeconds: number): Promise<OutboxRow[]> {
   return db.transaction(async (trx) => {

@@ -18,7 +18,7 @@ const kinds = [
     word_limit: 2000,
     abstract_limit: 1500,
     max_seconds: 120 * 3600,
-    fee_minor: 12_000,
+    fee_minor: 18_000,
   },
   {
     kind: 'large',
@@ -27,7 +27,7 @@ const kinds = [
     word_limit: 4000,
     abstract_limit: 2000,
     max_seconds: 250 * 3600,
-    fee_minor: 24_000,
+    fee_minor: 36_000,
   },
   {
     kind: 'thesis',
@@ -102,6 +102,18 @@ async function seedNights(
   await db.batchInsert('night_blocks', rows as never, 200)
 }
 
+/** Members pay two thirds, partners five sixths; who sends late under an extension pays a sixth more of the full fee. */
+async function seedRates(db: Database, callKindId: number, fullMinor: number): Promise<void> {
+  const shares = { member: 4, partner: 5, other: 6 } as const
+  for (const [name, sixths] of Object.entries(shares))
+    await db('fee_rates').insert({
+      call_kind_id: callKindId,
+      affiliation_class: name as keyof typeof shares,
+      amount_minor: (fullMinor * sixths) / 6,
+      late_minor: fullMinor / 6,
+    })
+}
+
 async function seedCall(
   db: Database,
   facility: Facility,
@@ -124,6 +136,7 @@ async function seedCall(
   for (const kind of kinds) {
     const [id] = (await db('call_kinds').insert({ ...kind, call_id: callId, panel_id: panelId })) as [number]
     kindIds.set(kind.kind, id)
+    await seedRates(db, id, kind.fee_minor)
   }
   for (const [index, [title, prompt, weight]] of criteria.entries())
     await db('call_criteria').insert({ call_id: callId, position: index + 1, title, prompt, weight })

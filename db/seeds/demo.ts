@@ -4,12 +4,14 @@ import { seedCalls } from './calls.ts'
 import { seedFacility } from './facility.ts'
 import { seedPeople } from './people.ts'
 import { seedRoles } from './roles.ts'
-import { pastPayments } from './story/pastPayments.ts'
+import { pastPayments, type PastPayment } from './story/pastPayments.ts'
 import { tellStory } from './story/tellStory.ts'
 
 export interface SeedServices {
   storage: ObjectStore
   origin: string
+  /** Tells the payment mock of the demonstration's past, so that its list and ours agree. */
+  recordPast: (payments: readonly PastPayment[]) => Promise<void>
 }
 
 /** Seeds the demonstration once, all of it or nothing; true when it did, false when it was there already. */
@@ -20,7 +22,9 @@ export async function seedDemo(db: Database, anchor: Date, services: SeedService
     const people = await seedPeople(trx)
     const calls = await seedCalls(trx, facility, anchor)
     await seedRoles(trx, people, facility.instrumentIds, Object.values(calls))
-    await tellStory(trx, { people, facility, calls, anchor }, { ...services, payments: pastPayments() })
+    const payments = pastPayments()
+    await tellStory(trx, { people, facility, calls, anchor }, { ...services, payments })
+    await services.recordPast(payments.made())
   })
   return true
 }

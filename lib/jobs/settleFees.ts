@@ -1,6 +1,7 @@
 import 'server-only'
 import { lapseFees } from '@/lib/domain/fees/lapseFees'
 import { reconcilePayments } from '@/lib/domain/fees/reconcilePayments'
+import { remindByClock } from '@/lib/domain/fees/remindOwing'
 import { log } from '@/lib/log'
 import { jobContext } from './jobContext'
 
@@ -8,7 +9,8 @@ import { jobContext } from './jobContext'
 export async function settleFees(): Promise<void> {
   const ctx = jobContext()
   const report = await reconcilePayments(ctx)
+  const reminded = await remindByClock(ctx)
   const lapsed = report.unanswered === 0 ? await lapseFees(ctx) : 0
-  if (report.settled + report.refunded + report.unanswered + lapsed > 0)
-    log.info({ ...report, lapsed, requestId: ctx.request.id }, 'fees looked through')
+  if (report.settled + report.refunded + report.unanswered + reminded + lapsed > 0)
+    log.info({ ...report, reminded, lapsed, requestId: ctx.request.id }, 'fees looked through')
 }

@@ -5,6 +5,7 @@ import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
 import { checkLogbookDaily } from './checkLogbookDaily'
 import { jobContext } from './jobContext'
+import { holdBooks } from './holdBooks'
 import { relayLetters } from './relayLetters'
 import { settleFees } from './settleFees'
 import { sweepObjects } from './sweepObjects'
@@ -54,6 +55,7 @@ export function startJobs(): void {
     every(env().LETTER_RELAY_SECONDS, 'letters', relay),
     every(60, 'fees', settleFees),
     every(900, 'reminders', remind),
+    every(3600, 'books and firm', holdBooks),
     every(3600, 'objects', sweep),
     every(900, 'logbook', checkLogbookDaily),
   ]

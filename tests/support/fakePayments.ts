@@ -35,6 +35,7 @@ export const firmFeeOf = (amountMinor: number): number => Math.round(amountMinor
 export function fakePayments(): FakePayments {
   const sessions = new Map<string, CheckoutState>()
   const byKey = new Map<string, string>()
+  const references = new Map<string, string>()
   const refunds: FakePayments['refunds'] = new Map()
   const disputes: FakePayments['disputes'] = new Map()
   const tag = Math.random().toString(36).slice(2, 10)
@@ -100,6 +101,7 @@ export function fakePayments(): FakePayments {
           firmFeeMinor: null,
         }
         sessions.set(sessionId, session)
+        references.set(sessionId, request.reference)
         return session
       }),
     readCheckout: (sessionId) => reach('payments:read-checkout', () => find(sessionId)),
@@ -133,7 +135,7 @@ export function fakePayments(): FakePayments {
             ? [
                 {
                   paymentId: session.paymentId,
-                  reference: null,
+                  reference: references.get(session.sessionId) ?? null,
                   amountMinor: session.amountMinor,
                   currency: session.currency,
                   refundedMinor: refundsOf(session.paymentId)

@@ -1,12 +1,42 @@
-import type { CheckoutState, Payments } from '../../../lib/services/payments/Payments.ts'
+import type {
+  CheckoutRequest,
+  CheckoutState,
+  DisputeState,
+  Payments,
+  RefundState,
+} from '../../../lib/services/payments/Payments.ts'
+
+/** One payment of the past with what came after it, to be taken into the books of the payment mock. */
+export interface PastPayment {
+  request: CheckoutRequest
+  paid: CheckoutState
+  refunds: RefundState[]
+  disputes: DisputeState[]
+}
+
+export interface PastPayments extends Payments {
+  made(): PastPayment[]
+  /** The holder of the card asks the bank for the money back, and perhaps the bank decides. */
+  dispute(sessionId: string, status: DisputeState['status']): void
+}
 
 /** A payment firm of the past: whoever opens its page has paid. The demonstration's earlier calls used it. */
-export function pastPayments(): Payments {
-  const sessions = new Map<string, CheckoutState>()
+export function pastPayments(): PastPayments {
+  const payments = new Map<string, PastPayment>()
+  const of = (paymentId: string) =>
+    [...payments.values()].find(({ paid }) => paid.paymentId === paymentId) ?? null
   let count = 0
   return {
     isTestMode: true,
     isUp: async () => true,
+    made: () => [...payments.values()],
+    dispute: (sessionId, status) => {
+      const payment = payments.get(sessionId)
+      if (!payment) throw new Error('no such payment')
+      const disputeId = `du_past_${payment.paid.paymentId}`
+      const { amountMinor } = payment.paid
+      payment.disputes = [{ disputeId, amountMinor, reason: 'fraudulent', status, firmFeeMinor: 2000 }]
+    },
     createCheckout: async (request) => {
       count += 1
       const sessionId = `cs_past_${count}`
@@ -21,7 +51,7 @@ export function pastPayments(): Payments {
         cardLast4: null,
         firmFeeMinor: null,
       }
-      sessions.set(sessionId, {
+      const paid: CheckoutState = {
         ...open,
         status: 'complete',
         isPaid: true,
@@ -29,23 +59,28 @@ export function pastPayments(): Payments {
         paymentId: `pi_past_${count}`,
         cardLast4: '4242',
         firmFeeMinor: Math.round(request.amountMinor * 0.015) + 25,
-      })
+      }
+      payments.set(sessionId, { request, paid, refunds: [], disputes: [] })
       return open
     },
     readCheckout: async (sessionId) => {
-      const session = sessions.get(sessionId)
-      if (!session) throw new Error('no such page')
-      return session
+      const payment = payments.get(sessionId)
+      if (!payment) throw new Error('no such page')
+      return payment.paid
     },
-    refund: async ({ idempotencyKey, amountMinor }) => ({
-      refundId: `re_past_${idempotencyKey}`,
-      key: idempotencyKey,
-      amountMinor,
-      status: 'succeeded',
-      failure: null,
-    }),
-    readRefunds: async () => [],
-    readDisputes: async () => [],
+    refund: async ({ idempotencyKey, paymentId, amountMinor }) => {
+      const refund: RefundState = {
+        refundId: `re_past_${idempotencyKey}`,
+        key: idempotencyKey,
+        amountMinor,
+        status: 'succeeded',
+        failure: null,
+      }
+      of(paymentId)?.refunds.push(refund)
+      return refund
+    },
+    readRefunds: async (paymentId) => of(paymentId)?.refunds ?? [],
+    readDisputes: async (paymentId) => of(paymentId)?.disputes ?? [],
     listPayments: async () => [],
     readNotice: () => {
       throw new Error('the past sends no notices')

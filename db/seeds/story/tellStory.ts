@@ -1,9 +1,10 @@
-import type { Payments } from '../../../lib/services/payments/Payments.ts'
 import type { ObjectStore } from '../../../lib/services/storage/ObjectStore.ts'
 import type { Database } from '../../client.ts'
 import type { Facility, SeededCall } from '../calls.ts'
+import { afterPayments } from './afterPayments.ts'
 import { decideCall } from './decideCall.ts'
 import { byRule, decided, inReview, open, type SeedProposal } from './proposalData.ts'
+import type { PastPayments } from './pastPayments.ts'
 import { dice, type Dice } from './random.ts'
 import { reviewCall } from './reviewCall.ts'
 import { settleFees } from './settleFees.ts'
@@ -52,7 +53,7 @@ const byTitle = (seeds: readonly SeedProposal[]) => new Map(seeds.map((seed) => 
 export async function tellStory(
   db: Database,
   world: { people: Map<string, number>; facility: Facility; calls: Calls; anchor: Date },
-  services: { storage: ObjectStore; payments: Payments; origin: string },
+  services: { storage: ObjectStore; payments: PastPayments; origin: string },
 ): Promise<void> {
   const chance = dice(20270318)
   const story = teller(db, world.people, services, chance)
@@ -67,8 +68,9 @@ export async function tellStory(
       begunAt: before(call, chance.between(8, 40)),
       sentAt: before(call, index === 0 ? 0.002 : chance.between(0.02, 6)),
     }))
-    await settleFees(story, sent, false)
+    await settleFees(story, sent, { waits: false, leavesOneOverdue: call === calls.inReview })
   }
+  await afterPayments(story, services.payments, calls)
   await reviewCall(story, chance, calls.decided, { readers: 3, finished: 1, proposals: byTitle(decided) })
   await decideCall(story, calls.decided)
   await reviewCall(story, chance, calls.inReview, { readers: 5, finished: 0.9, proposals: byTitle(inReview) })
@@ -78,7 +80,7 @@ export async function tellStory(
     begunAt: ago(12 - index),
     sentAt: index < 3 ? ago(3 - index * 0.7) : null,
   }))
-  await settleFees(story, sent, true)
+  await settleFees(story, sent, { waits: true, leavesOneOverdue: false })
   // Dice of their own: the rest of the story stays as it is.
   await writeAll(story, dice(20270319), facility, calls.open, byRule, (index) => ({
     begunAt: ago(4 - index),

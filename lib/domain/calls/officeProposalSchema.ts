@@ -17,6 +17,11 @@ export const officeProposalRow = z.object({
   currency: z.string(),
   paidMinor: z.number(),
   refundedMinor: z.number(),
+  affiliationClass: z.enum(['member', 'partner', 'other']).nullable(),
+  /** Held by a card holder's bank, or taken by it. */
+  disputedMinor: z.number(),
+  lostMinor: z.number(),
+  invoice: z.object({ number: z.string(), isOverdue: z.boolean() }).nullable(),
   waiverId: z.number().nullable(),
   waiverReason: z.string().nullable(),
 })

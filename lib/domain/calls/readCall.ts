@@ -1,5 +1,6 @@
 import { callCriteria, callKinds, findCallBySlug, listCalls } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
+import { ratesOfCall } from '@/db/queries/feeRates'
 import { modeRecordsOnOffer, siteRecordAt } from '@/db/queries/facility'
 import { offerOfCall, type TelescopeOffer } from '@/db/queries/nights'
 import { refuse } from '@/lib/errors'
@@ -8,7 +9,7 @@ import type { Context } from '../context'
 import type { ModeRecord, SiteRecord } from '../facility/types'
 import { mayReadCall } from './policy'
 import { callPhase } from './rules'
-import type { Call, CallCriterion, CallKind, CallPhase } from './types'
+import type { Call, CallCriterion, CallKind, CallPhase, FeeRate } from './types'
 
 export interface CallView {
   call: Call
@@ -17,20 +18,23 @@ export interface CallView {
   site: SiteRecord
   kinds: CallKind[]
   criteria: CallCriterion[]
+  /** What a kind costs by where it is led from; none where it costs everyone the same. */
+  rates: FeeRate[]
   modes: ModeRecord[]
   offer: TelescopeOffer[]
 }
 
 async function viewOf(ctx: Context, call: Call): Promise<CallView> {
-  const [now, site, kinds, criteria, modes, offer] = await Promise.all([
+  const [now, site, kinds, criteria, rates, modes, offer] = await Promise.all([
     databaseNow(ctx.db),
     siteRecordAt(ctx.db, call.siteId, call.seasonFrom),
     callKinds(ctx.db, call.id),
     callCriteria(ctx.db, call.id),
+    ratesOfCall(ctx.db, call.id),
     modeRecordsOnOffer(ctx.db, call.id, call.seasonFrom),
     offerOfCall(ctx.db, call.id),
   ])
-  return { call, phase: callPhase(call, now), now, site, kinds, criteria, modes, offer }
+  return { call, phase: callPhase(call, now), now, site, kinds, criteria, rates, modes, offer }
 }
 
 /** A call as everyone may read it; one still being planned is the office's alone. */

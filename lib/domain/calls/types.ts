@@ -1,4 +1,7 @@
+import type { FeeRate } from '@/db/queries/feeRates'
 import type { SeasonGrid } from '@/lib/science/sky'
+
+export type { FeeRate }
 
 /** Where a call stands: planned, open and closed by the clock, the rest by acts of the office and the chair. */
 export type CallPhase = 'planned' | 'open' | 'closed' | 'review' | 'ranking' | 'decided' | 'archived'

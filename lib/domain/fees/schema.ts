@@ -29,3 +29,75 @@ export const decideWaiverSchema = z
   })
 
 export type DecideWaiverInput = z.input<typeof decideWaiverSchema>
+
+const oneLine = (limit: number, missing: string, long: string) =>
+  z.string().trim().min(1, missing).max(limit, long)
+
+const reason = oneLine(300, 'Say why, in a sentence.', 'Keep the reason below 300 characters.')
+
+const day = z
+  .string()
+  .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give a date as year-month-day.')
+  .refine((text) => {
+    const at = new Date(`${text}T00:00:00Z`)
+    return !Number.isNaN(at.getTime()) && at.toISOString().startsWith(text)
+  }, 'There is no such day.')
+
+const amount = oneLine(20, 'Give the amount.', 'This is not an amount.')
+
+const billNumber = z.string().regex(/^Q[IC]-\d{4}-\d{4,}$/, 'There is no such number.')
+
+/** In the address of a PDF. */
+export const billParams = z.object({ reference, number: billNumber })
+
+export const refundFeeSchema = z
+  .object({
+    reference,
+    amount,
+    reason,
+    givenBackMinor: z.number().int().nonnegative(),
+    /** The reference once more, by hand. */
+    typed: z.string().trim().toUpperCase(),
+  })
+  .refine(({ typed, reference: expected }) => typed === expected, {
+    path: ['typed'],
+    message: 'Type the reference of this proposal.',
+  })
+
+export type RefundFeeForm = z.input<typeof refundFeeSchema>
+
+export const askForInvoiceSchema = z.object({
+  reference,
+  institute: oneLine(200, 'Name the institute that pays.', 'Keep the name below 200 characters.'),
+  address: oneLine(500, 'Give its postal address.', 'Keep the address below 500 characters.'),
+  purchaseOrder: z.string().trim().max(60, 'Keep the purchase order below 60 characters.'),
+  sendTo: z.email('Give the address the invoice is mailed to.').max(254, 'This address is too long.'),
+})
+
+export type AskForInvoiceForm = z.input<typeof askForInvoiceSchema>
+
+export const settleInvoiceSchema = z.object({
+  number: billNumber,
+  amount,
+  paidOn: day,
+  bankReference: oneLine(140, 'Give the reference on the statement.', 'Keep it below 140 characters.'),
+})
+
+export type SettleInvoiceForm = z.input<typeof settleInvoiceSchema>
+
+export const cancelInvoiceSchema = z.object({
+  number: billNumber,
+  reason,
+  then: z.enum(['due', 'nothing'], 'Say what becomes of the fee.'),
+})
+
+export type CancelInvoiceForm = z.input<typeof cancelInvoiceSchema>
+
+export const remindOwingSchema = z.object({ slug: z.string().min(1).max(60) })
+
+export const recordTransferSchema = z.object({
+  refundId: z.number().int().positive(),
+  bankReference: oneLine(140, 'Give the reference of the transfer.', 'Keep it below 140 characters.'),
+})
+
+export type RecordTransferForm = z.input<typeof recordTransferSchema>

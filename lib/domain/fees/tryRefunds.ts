@@ -1,12 +1,10 @@
-import { log } from '@/lib/log'
 import type { Context } from '../context'
 import { carryOutRefunds } from './carryOutRefunds'
 
-/** What was decided stands and is on record: what fails now is done by the job. */
+/**
+ * What was decided stands and is on record, so nothing that fails here may fail the request. The job tries again
+ * within a minute, and writes to the log what it meets.
+ */
 export async function tryRefunds(ctx: Context): Promise<void> {
-  try {
-    await carryOutRefunds(ctx)
-  } catch (error) {
-    log.warn({ requestId: ctx.request.id, error }, 'a refund waits for the job')
-  }
+  await carryOutRefunds(ctx).catch(() => undefined)
 }

@@ -8,6 +8,7 @@ import { deadlineOf } from '../calls/rules'
 import type { Actor } from '../actor'
 import type { Context } from '../context'
 import type { ProposalComputation } from '../observations/types'
+import { feeFor } from '../fees/feeFor'
 import { completeness, type SectionReport } from './completeness'
 import { computationOf } from './computationOf'
 import { mayOfferLead } from './leadPolicy'
@@ -24,6 +25,8 @@ export interface ReadProposal {
   deadline: Date
   /** What is owed since it was sent; null before that, and where there is no fee. */
   fee: { amountMinor: number; currency: string; state: FeeState } | null
+  /** What sending it now would make due; null once it was billed, and where nothing is. */
+  feeToCome: { amountMinor: number; currency: string } | null
   /** The reader's own row; null for the office. */
   own: Investigator | null
   /** Why it cannot be changed now, in a sentence; null when it can. */
@@ -58,6 +61,7 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
     now,
     deadline: deadlineOf(contents.call, contents.kind, contents),
     fee: fee ? { amountMinor: fee.amount_minor, currency: fee.currency, state: fee.state } : null,
+    feeToCome: fee ? null : await feeFor(ctx, contents, now),
     own: investigatorRow(ctx.actor, contents),
     readOnly: mayEdit.allowed ? null : mayEdit.sentence,
     mayManage: mayManagePeople(ctx.actor, contents, now).allowed,

@@ -29,7 +29,7 @@ export async function readForSending(ctx: ActingContext, read: ReadProposal): Pr
   const standing = await feeOf(ctx.db, contents.id)
   const owed = standing
     ? standing.state === 'due' && { amountMinor: standing.amount_minor, currency: standing.currency }
-    : await feeFor(ctx, contents, now)
+    : read.feeToCome
   return {
     ...read,
     groups: readThrough(contents, computation, {

@@ -1,6 +1,8 @@
 import type { PaymentStore } from './store'
 import { makeCharge, makeIntent } from './attempts'
 import { createSession } from './checkout'
+import { disputeCharge, type DisputeDeed } from './disputes'
+import { createRefund } from './refunds'
 
 /** A payment that was made before this mock was started: the demonstration's earlier calls. */
 export interface PastPayment {
@@ -14,6 +16,8 @@ export interface PastPayment {
   /** Unix seconds. */
   created: number
   successUrl: string
+  refunds?: { id: string; key: string; amountMinor: number }[]
+  dispute?: { id: string; status: DisputeDeed } | null
 }
 
 /** Takes past payments into the books, without any event; those known already are left. */
@@ -69,4 +73,18 @@ function takeOne(store: PaymentStore, past: PastPayment, pageBase: string): void
     latest_charge: charge.id,
     payment_method: 'pm_past',
   })
+  for (const { id, key, amountMinor } of past.refunds ?? []) {
+    const form = { payment_intent: intent.id, amount: String(amountMinor), metadata: { refund_key: key } }
+    rename(store.state.refunds, createRefund(store, form).refund, id)
+  }
+  if (!past.dispute) return
+  disputeCharge(store, charge, past.dispute.status)
+  const dispute = Object.values(store.state.disputes).find((each) => each.charge === charge.id)
+  if (dispute) rename(store.state.disputes, dispute, past.dispute.id)
+}
+
+function rename<Item extends { id: string }>(items: Record<string, Item>, item: Item, id: string): void {
+  delete items[item.id]
+  item.id = id
+  items[id] = item
 }

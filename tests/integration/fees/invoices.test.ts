@@ -47,8 +47,7 @@ beforeEach(async () => {
   billed = await makeBilled(db())
 })
 
-// Seen to fail with the number drawn before the guard, with the fee left due while an invoice is open, and with the
-// credit note left out of a withdrawal.
+// Seen to fail with any amount taken for that of the invoice.
 describe('an invoice to an institute', () => {
   it('is written with the next number, stands in the books and is mailed as PDF', async () => {
     const { number } = await ask()

@@ -29,8 +29,7 @@ beforeEach(async () => {
   await confirmPayment(billed.ctx, { reference: billed.scenario.reference })
 })
 
-// Seen to fail with the sum of refunds left out of what is left, with the guard by what was given back left out, and with
-// the credit note written at the decision.
+// Seen to fail with the guard by what was given back left out, and with a refund made by hand left out of the books.
 describe('giving back a fee', () => {
   it('in part keeps it paid, with a credit note over the part', async () => {
     await refund('50.00')

@@ -1,25 +1,48 @@
 import type { Metadata } from 'next'
+import { FeeBeside } from '@/components/fees/FeeBeside'
+import { FeeDesk } from '@/components/fees/FeeDesk'
+import { RemindButton } from '@/components/fees/RemindButton'
 import { FeesOfCall } from '@/components/office/FeesOfCall'
 import { Main } from '@/components/layout/Main'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
+import { orNotFound } from '@/lib/auth/orNotFound'
+import { readFee } from '@/lib/domain/fees/readFee'
 import { readFeesOfCall } from '@/lib/domain/fees/readFeesOfCall'
 import { formatMoney, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
-import { decideWaiverAction } from './actions'
+import {
+  cancelInvoiceAction,
+  decideWaiverAction,
+  recordTransferAction,
+  refundFeeAction,
+  remindOwingAction,
+  settleInvoiceAction,
+  writeInvoiceAction,
+} from './actions'
+
+const deeds = {
+  refund: refundFeeAction,
+  invoice: writeInvoiceAction,
+  settle: settleInvoiceAction,
+  cancel: cancelInvoiceAction,
+  transfer: recordTransferAction,
+}
 
 export const metadata: Metadata = { title: 'Fees' }
 
 export default async function OfficeFeesPage({
   searchParams,
 }: {
-  searchParams: Promise<{ call?: string | string[] }>
+  searchParams: Promise<{ call?: string | string[]; fee?: string | string[] }>
 }) {
   const ctx = await openPage('/office/fees')
-  const wanted = [(await searchParams).call].flat()[0] ?? null
-  const view = await readFeesOfCall(ctx, wanted)
+  const asked = await searchParams
+  const opened = [asked.fee].flat()[0] ?? null
+  const fee = opened === null ? null : await orNotFound(readFee(ctx, opened))
+  const view = await readFeesOfCall(ctx, [asked.call].flat()[0] ?? fee?.callSlug ?? null)
   if (!view)
     return (
       <Main>
@@ -31,6 +54,15 @@ export default async function OfficeFeesPage({
     )
   const { call, others, rows, billedMinor } = view
   const currency = call.currency ?? 'EUR'
+  const owing = rows.filter((row) => row.feeState === 'due' && row.waiverId === null).length
+  const table = (
+    <FeesOfCall
+      slug={call.slug}
+      initial={{ rows }}
+      selected={fee?.reference ?? null}
+      decide={decideWaiverAction}
+    />
+  )
   return (
     <Main>
       <PageTitle
@@ -43,11 +75,14 @@ export default async function OfficeFeesPage({
                 {other.title}
               </TextLink>
             ))}
+            <TextLink href={paths.officeLedger()}>Ledger</TextLink>
+            <TextLink href={paths.officeReconciliation()}>Books and firm</TextLink>
+            <RemindButton slug={call.slug} count={owing} action={remindOwingAction} />
           </>
         }
       />
       <div className="mt-6">
-        <FeesOfCall slug={call.slug} initial={{ rows }} decide={decideWaiverAction} />
+        {fee ? <FeeBeside fee={<FeeDesk fee={fee} deeds={deeds} />}>{table}</FeeBeside> : table}
       </div>
     </Main>
   )

@@ -52,6 +52,7 @@ export default async function CallPage({ params }: { params: Promise<{ slug: str
           <CallRules
             kinds={view.kinds}
             criteria={view.criteria}
+            rates={view.rates}
             currency={call.currency}
             graceUntil={call.graceUntil}
           />

@@ -2,9 +2,11 @@
 
 import { defineAction } from '@/lib/actions/defineAction'
 import { closeCall } from '@/lib/domain/calls/closeCall'
+import { feeScheduleSchema } from '@/lib/domain/calls/feeScheduleSchema'
 import { openCall } from '@/lib/domain/calls/openCall'
 import { saveOfferSchema } from '@/lib/domain/calls/offerSchema'
 import { saveDates } from '@/lib/domain/calls/saveDates'
+import { saveFeeSchedule } from '@/lib/domain/calls/saveFeeSchedule'
 import { saveOffer } from '@/lib/domain/calls/saveOffer'
 import { callStepSchema, saveDatesSchema } from '@/lib/domain/calls/schema'
 import { paths } from '@/lib/paths'
@@ -35,4 +37,11 @@ export const saveOfferAction = defineAction({
   schema: saveOfferSchema,
   run: saveOffer,
   revalidate: (_, { slug }) => [paths.officeCall(slug), paths.call(slug), paths.office('facility')],
+})
+
+export const saveFeeScheduleAction = defineAction({
+  name: 'saveFeeSchedule',
+  schema: feeScheduleSchema,
+  run: saveFeeSchedule,
+  revalidate: (_, { slug }) => [paths.officeCall(slug), paths.call(slug)],
 })

@@ -5,6 +5,7 @@ import { phaseWords } from '@/components/calls/phaseWords'
 import { seasonWords } from '@/components/calls/seasonWords'
 import { CallSteps } from '@/components/office/CallSteps'
 import { DatesForm } from '@/components/office/DatesForm'
+import { FeeScheduleForm } from '@/components/office/FeeScheduleForm'
 import { OfferForm } from '@/components/office/OfferForm'
 import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
 import { PlanFiles } from '@/components/nights/PlanFiles'
@@ -23,7 +24,13 @@ import { readOffer } from '@/lib/domain/calls/readOffer'
 import { readOfficeProposals } from '@/lib/domain/calls/readOfficeProposals'
 import { readCallStatistics } from '@/lib/domain/statistics/readCallStatistics'
 import { paths } from '@/lib/paths'
-import { closeCallAction, openCallAction, saveDatesAction, saveOfferAction } from './actions'
+import {
+  closeCallAction,
+  openCallAction,
+  saveDatesAction,
+  saveFeeScheduleAction,
+  saveOfferAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Call' }
 
@@ -91,6 +98,19 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
           </div>
         </TwoColumns>
       </section>
+      {phase === 'planned' || phase === 'open' ? (
+        <section className="mt-12">
+          <SectionHeading title="Fees" aside="What has been billed keeps its price." />
+          <div className="mt-4">
+            <FeeScheduleForm
+              call={call}
+              kinds={view.kinds}
+              rates={view.rates}
+              action={saveFeeScheduleAction}
+            />
+          </div>
+        </section>
+      ) : null}
       {phase === 'planned' || phase === 'open' ? (
         <section className="mt-12">
           <SectionHeading title="Modes on offer" aside="A mode that proposals observe with stays on offer." />

@@ -1,8 +1,9 @@
 'use server'
 
 import { defineAction } from '@/lib/actions/defineAction'
+import { askForInvoice as askForInvoiceVerb } from '@/lib/domain/fees/askForInvoice'
 import { askForWaiver as askForWaiverVerb } from '@/lib/domain/fees/askForWaiver'
-import { askForWaiverSchema, startPaymentSchema } from '@/lib/domain/fees/schema'
+import { askForInvoiceSchema, askForWaiverSchema, startPaymentSchema } from '@/lib/domain/fees/schema'
 import { startPayment as startPaymentVerb } from '@/lib/domain/fees/startPayment'
 import { reopenProposal as reopenVerb } from '@/lib/domain/submission/reopenProposal'
 import { reopenSchema, withdrawSchema } from '@/lib/domain/submission/schema'
@@ -28,6 +29,14 @@ export const askForWaiver = defineAction({
   schema: askForWaiverSchema,
   run: (ctx, input) => askForWaiverVerb(ctx, input),
   revalidate: (_, { reference }) => pagesOf(reference),
+})
+
+export const askForInvoice = defineAction({
+  name: 'askForInvoice',
+  schema: askForInvoiceSchema,
+  run: (ctx, input) => askForInvoiceVerb(ctx, input),
+  revalidate: (_, { reference }) => pagesOf(reference),
+  limit: { points: 10, seconds: 600 },
 })
 
 export const reopenProposal = defineAction({

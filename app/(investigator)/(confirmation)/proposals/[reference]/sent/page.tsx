@@ -13,7 +13,7 @@ import { orNotFound } from '@/lib/auth/orNotFound'
 import { readSent } from '@/lib/domain/submission/readSent'
 import { weeksAhead } from '@/lib/domain/submission/weeksAhead'
 import { officeAddress } from '@/lib/office'
-import { askForWaiver, reopenProposal, startPayment, withdrawProposal } from './actions'
+import { askForInvoice, askForWaiver, reopenProposal, startPayment, withdrawProposal } from './actions'
 
 interface Props {
   params: Promise<{ reference: string }>
@@ -42,6 +42,7 @@ export default async function SentPage({ params, searchParams }: Props) {
               isTestMode={ctx.payments.isTestMode}
               pay={startPayment}
               ask={askForWaiver}
+              invoice={askForInvoice}
             />
             <ReceiptFacts sent={sent} />
           </>

@@ -1,0 +1,1 @@
+export type { AccountBalance, BookedMovement, FeeBook } from '@/db/queries/ledgerBook'
