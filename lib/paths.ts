@@ -7,6 +7,8 @@ export type ProposalSection =
 export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
+export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+
 export const paths = {
   home: () => '/',
   calls: () => '/calls',
@@ -72,6 +74,9 @@ export const paths = {
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
+  officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
+  officeProposal: (slug: string, reference: string) =>
+    `/office/calls/${part(slug)}/proposals/${part(reference)}`,
 
   api: {
     health: () => '/api/health',

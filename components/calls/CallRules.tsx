@@ -1,5 +1,6 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { CallCriterion, CallKind } from '@/lib/domain/calls/types'
+import { limitWords } from './limitWords'
 import { formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
 
 interface CallRulesProps {
@@ -21,7 +22,7 @@ export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesPr
           <li key={kind.id} className="border-t border-rule py-3">
             <span className="font-semibold">{kind.title}</span>
             <span className="block text-table text-muted">
-              {kind.pageLimit} pages of justification
+              {limitWords(kind)}
               {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
               {currency
                 ? `, ${kind.feeMinor > 0 ? formatMoneyShort(kind.feeMinor, currency) : 'no fee'}`

@@ -48,6 +48,8 @@ function kindOf(row: CallKindsRow): CallKind {
     closesAt: row.closes_at,
     pageLimit: row.page_limit,
     abstractLimit: row.abstract_limit,
+    wordLimit: row.word_limit,
+    figureLimit: row.figure_limit,
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,

@@ -158,6 +158,8 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
     closesAt: null,
     pageLimit: 4,
     abstractLimit: 1500,
+    wordLimit: null,
+    figureLimit: null,
     maxSeconds: null,
     feeMinor: 0,
     panelId: 1,

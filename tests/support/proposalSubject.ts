@@ -69,6 +69,8 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       closesAt: null,
       pageLimit: 4,
       abstractLimit: 1200,
+      wordLimit: null,
+      figureLimit: null,
       maxSeconds: null,
       feeMinor: 12_000,
       panelId: 1,

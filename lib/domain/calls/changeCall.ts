@@ -9,14 +9,19 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { mayManageCalls } from './policy'
 import { staleCall } from './staleCall'
 
+interface Logged {
+  before?: Record<string, unknown>
+  after?: Record<string, unknown>
+}
+
 interface Change {
   action: string
   slug: string
   version: number
   /** Pure: the call as it stands and the database's now; throws a refusal or gives what changes. */
   decide: (row: CallsRow, now: Date) => CallChange
-  /** Letters and the like, in the same transaction. */
-  then?: (tx: ActingContext, before: CallsRow, change: CallChange) => Promise<void>
+  /** What else changes, letters and the like, in the same transaction; what it gives is logged as well. */
+  then?: (tx: ActingContext, before: CallsRow, change: CallChange) => Promise<Logged | void>
 }
 
 /** The one way the office changes a call: lock, decide, guard by version, tell, log. */
@@ -31,14 +36,14 @@ export async function changeCall(
     if (row.version !== version) throw staleCall(row)
     const change = decide(row, await databaseNow(tx.db))
     if (!(await updateCall(tx.db, row.id, version, change))) throw staleCall(row)
-    await then?.(tx, row, change)
+    const more = (await then?.(tx, row, change)) ?? {}
     const before = Object.fromEntries(Object.keys(change).map((key) => [key, row[key as keyof CallsRow]]))
     await writeLogbook(tx, {
       action,
       subject: { kind: 'call', id: row.number },
       actingAs: 'office',
-      before,
-      after: change,
+      before: { ...before, ...more.before },
+      after: { ...change, ...more.after },
     })
   })
 }

@@ -20,6 +20,9 @@ export interface CallKind {
   closesAt: Date | null
   pageLimit: number
   abstractLimit: number
+  /** Words and figures of the justification; null where they are not limited. */
+  wordLimit: number | null
+  figureLimit: number | null
   maxSeconds: number | null
   feeMinor: number
   panelId: number
@@ -56,6 +59,15 @@ export interface Season {
   phases: { phase: string; at: Date }[]
   /** Astronomical night in all, hours. */
   darkHours: number
+}
+
+/** A dated correction of a published call. */
+export interface Correction {
+  id: number
+  /** What it corrects, in a few words. */
+  concerns: string
+  body: string
+  at: Date
 }
 
 /** What a call offers on one telescope. */

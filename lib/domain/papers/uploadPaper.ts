@@ -1,18 +1,13 @@
-import { createHash } from 'node:crypto'
 import type { z } from 'zod'
-import { databaseNow } from '@/db/queries/clock'
-import { insertPaper, papersOf, supersedePapers } from '@/db/queries/papers'
+import { papersOf } from '@/db/queries/papers'
 import { touchProposal } from '@/db/queries/proposals'
-import { insertStoredObject } from '@/db/queries/storedObjects'
-import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
-import { newObjectKey } from '../objects/objectKey'
-import { cleanText } from '../proposals/cleanText'
 import { openForEditing } from '../proposals/openProposal'
-import { inspectPdf } from './inspectPdf'
-import { maxExpertisePages, maxPaperBytes } from './limits'
+import { limitsOf } from './limits'
+import { putPaper } from './putPaper'
+import { receiveFile } from './receiveFile'
 import type { uploadPaperSchema } from './schema'
 
 export type UploadPaperInput = z.output<typeof uploadPaperSchema>
@@ -25,65 +20,30 @@ export interface UploadedPaper {
   replaced: string | null
 }
 
-/** The last part of a file's name, one line, short enough to keep. It is shown, never used as a path. */
-const shownName = (name: string) =>
-  (cleanText(name).split(/[\\/]/).at(-1) ?? '').replace(/\s+/g, ' ').trim().slice(-200) || 'document.pdf'
-
-async function arrived(input: UploadPaperInput): Promise<{ bytes: Uint8Array; sha256: string }> {
-  if (input.file.size > maxPaperBytes) throw refuse.field('file', 'The file is larger than 20 MB.')
-  const bytes = new Uint8Array(await input.file.arrayBuffer())
-  const sha256 = createHash('sha256').update(bytes).digest('hex')
-  if (bytes.length !== input.sizeBytes || sha256 !== input.sha256)
-    throw refuse.field('file', 'The file was damaged on its way here. Nothing was changed; send it again.')
-  return { bytes, sha256 }
+/** Who may, and how long it may be, asked before the slow looking through; asked again when it is written. */
+async function limitsFor(ctx: Context, input: UploadPaperInput) {
+  return inTransaction(ctx, async (tx) =>
+    limitsOf(input.kind, (await openForEditing(tx, input.reference)).subject.kind),
+  )
 }
 
-/** Who may, and the most pages, asked before the slow looking through; asked again when it is written. */
-async function pageLimit(ctx: Context, input: UploadPaperInput): Promise<number> {
-  return inTransaction(ctx, async (tx) => {
-    const { subject } = await openForEditing(tx, input.reference)
-    return input.kind === 'justification' ? subject.kind.pageLimit : maxExpertisePages
-  })
-}
-
-/**
- * Keeps a document of a proposal. The object is put before its row is written: should the transaction be lost,
- * an object without a row is swept later, and no row ever points at nothing.
- */
+/** Keeps a document of a proposal in the place of the one that stood. */
 export async function uploadPaper(ctx: Context, input: UploadPaperInput): Promise<UploadedPaper> {
-  const limit = await pageLimit(ctx, input)
-  const { bytes, sha256 } = await arrived(input)
-  const fileName = shownName(input.file.name)
-  const { pages } = await inspectPdf(bytes, fileName, limit)
-  const key = newObjectKey(ctx.random, await databaseNow(ctx.db))
-  await ctx.storage.put(key, bytes, 'application/pdf')
+  const file = await receiveFile(ctx, input, await limitsFor(ctx, input))
 
   return inTransaction(ctx, async (tx) => {
     const { row, actor } = await openForEditing(tx, input.reference)
     const before = (await papersOf(tx.db, row.id)).find(({ kind }) => kind === input.kind)
-    const objectId = await insertStoredObject(tx.db, {
-      key,
-      sha256,
-      sizeBytes: bytes.length,
-      contentType: 'application/pdf',
-      purpose: 'paper',
-    })
-    await supersedePapers(tx.db, row.id, input.kind)
-    const paperId = await insertPaper(tx.db, {
-      proposalId: row.id,
-      objectId,
-      kind: input.kind,
-      fileName,
-      pages,
-      uploadedBy: actor.personId,
-    })
+    const { fileName, pages, words, sha256 } = file
+    const paper = { proposalId: row.id, kind: input.kind, uploadedBy: actor.personId }
+    const paperId = await putPaper(tx, paper, file)
     await touchProposal(tx.db, row.id)
     await writeLogbook(tx, {
       action: 'papers.add',
       subject: { kind: 'proposal', id: row.reference },
       actingAs: 'investigator',
       before: before ? { kind: before.kind, fileName: before.fileName } : undefined,
-      after: { kind: input.kind, fileName, pages, sha256 },
+      after: { kind: input.kind, fileName, pages, words, sha256 },
     })
     return { paperId, fileName, pages, replaced: before?.fileName ?? null }
   })

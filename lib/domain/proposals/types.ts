@@ -99,6 +99,8 @@ export interface Paper {
   kind: 'justification' | 'team-expertise'
   fileName: string
   pages: number
+  /** Words that can be read in it; null where they were not counted. */
+  words: number | null
   sizeBytes: number
   sha256: string
   objectKey: string

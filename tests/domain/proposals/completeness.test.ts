@@ -13,6 +13,7 @@ const paper = {
   sizeBytes: 1000,
   sha256: 'a',
   objectKey: 'aa/b',
+  words: 1200,
   uploadedAt: new Date(0),
 }
 

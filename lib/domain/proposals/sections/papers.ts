@@ -1,4 +1,4 @@
-import { countInWords } from '@/lib/format'
+import { countInWords, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import type { ProposalContents } from '../types'
 import type { Finding, Missing } from './finding'
@@ -18,10 +18,14 @@ export function papersFinding({ papers, kind, reference }: ProposalContents): Fi
     }
   }
   const isLong = justification.pages > kind.pageLimit
+  const isWordy = kind.wordLimit !== null && (justification.words ?? 0) > kind.wordLimit
   return {
     begun: true,
     detail: `${justification.fileName}, ${justification.pages} of ${countInWords(kind.pageLimit, 'page')}${expertise ? '; the team’s expertise' : ''}`,
-    missing: isLong ? [lacks(`Shorten the justification to ${countInWords(kind.pageLimit, 'page')}.`)] : [],
-    wrong: isLong,
+    missing: [
+      ...(isLong ? [lacks(`Shorten the justification to ${countInWords(kind.pageLimit, 'page')}.`)] : []),
+      ...(isWordy ? [lacks(`Shorten the justification to ${formatNumber(kind.wordLimit ?? 0, 0)} words.`)] : []),
+    ],
+    wrong: isLong || isWordy,
   }
 }
