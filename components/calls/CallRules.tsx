@@ -1,5 +1,6 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { CallCriterion, CallKind } from '@/lib/domain/calls/types'
+import { CriteriaList } from './CriteriaList'
 import { limitWords } from './limitWords'
 import { formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
 
@@ -13,7 +14,6 @@ interface CallRulesProps {
 
 /** Kinds of proposal with their limits, and what proposals are judged by. */
 export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesProps) {
-  const parts = criteria.reduce((sum, criterion) => sum + criterion.weight, 0)
   return (
     <>
       <SectionHeading title="Kinds of proposal" />
@@ -41,22 +41,9 @@ export function CallRules({ kinds, criteria, currency, graceUntil }: CallRulesPr
       <div className="mt-10">
         <SectionHeading title="What proposals are judged by" />
       </div>
-      <ol className="plain-list mt-3">
-        {criteria.map((criterion) => (
-          <li
-            key={criterion.id}
-            className="flex items-baseline justify-between gap-6 border-t border-rule py-3"
-          >
-            <span>
-              <span className="font-semibold">{criterion.title}</span>
-              <span className="block text-table text-muted">{criterion.prompt}</span>
-            </span>
-            <span className="shrink-0 text-table">
-              counts {criterion.weight} of {parts}
-            </span>
-          </li>
-        ))}
-      </ol>
+      <div className="mt-3">
+        <CriteriaList criteria={criteria} />
+      </div>
       <p className="mt-3 text-table text-muted">
         Scores run from 0 to 10 in halves, 10 best. Reviewers see no names, and nobody reviews where they have
         an interest.

@@ -4,7 +4,7 @@ import type { ActionResult } from '@/lib/actions/result'
 import type { NameFound } from '@/lib/domain/papers/namesIn'
 import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 import type { Paper } from '@/lib/domain/proposals/types'
-import { countInWords, formatBytes, formatUtc } from '@/lib/format'
+import { countInWords, formatBytes, formatList, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { NamesFound } from './NamesFound'
 import { PaperUpload } from './PaperUpload'
@@ -16,6 +16,8 @@ export interface PaperSlotProps {
   title: string
   help: string
   pageLimit: number
+  /** Words and figures, where they are limited too. */
+  alsoLimited?: readonly string[]
   paper: Paper | null
   /** Undefined where names are meant to stand. */
   names?: readonly NameFound[] | null
@@ -33,13 +35,18 @@ export function PaperSlot({
   title,
   help,
   pageLimit,
+  alsoLimited = [],
   paper,
   names,
   actions,
 }: PaperSlotProps) {
   return (
     <section className="mb-10">
-      <SectionHeading dense title={title} aside={`at most ${countInWords(pageLimit, 'page')}`} />
+      <SectionHeading
+        dense
+        title={title}
+        aside={`at most ${formatList([countInWords(pageLimit, 'page'), ...alsoLimited])}`}
+      />
       {paper ? (
         <div className="mt-3 mb-4">
           <p className="m-0 flex flex-wrap items-baseline gap-x-4 gap-y-1 [overflow-wrap:anywhere]">

@@ -21,7 +21,7 @@ interface Change {
   /** Pure: the call as it stands and the database's now; throws a refusal or gives what changes. */
   decide: (row: CallsRow, now: Date) => CallChange
   /** What else changes, letters and the like, in the same transaction; what it gives is logged as well. */
-  then?: (tx: ActingContext, before: CallsRow, change: CallChange) => Promise<Logged | void>
+  then?: (tx: ActingContext, before: CallsRow, change: CallChange, now: Date) => Promise<Logged | void>
 }
 
 /** The one way the office changes a call: lock, decide, guard by version, tell, log. */
@@ -34,9 +34,10 @@ export async function changeCall(
     const row = await lockCall(tx.db, slug)
     if (!row) throw refuse.notFound('call')
     if (row.version !== version) throw staleCall(row)
-    const change = decide(row, await databaseNow(tx.db))
+    const now = await databaseNow(tx.db)
+    const change = decide(row, now)
     if (!(await updateCall(tx.db, row.id, version, change))) throw staleCall(row)
-    const more = (await then?.(tx, row, change)) ?? {}
+    const more = (await then?.(tx, row, change, now)) ?? {}
     const before = Object.fromEntries(Object.keys(change).map((key) => [key, row[key as keyof CallsRow]]))
     await writeLogbook(tx, {
       action,

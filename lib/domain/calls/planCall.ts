@@ -1,7 +1,9 @@
 import type { z } from 'zod'
-import { copyCallRules, insertCall, insertNightBlocks, nightBlocksOf } from '@/db/queries/callChanges'
+import { copyCallRules, insertCall } from '@/db/queries/callChanges'
 import { findCallBySlug, listCalls } from '@/db/queries/calls'
+import { databaseNow } from '@/db/queries/clock'
 import { siteRecordAt } from '@/db/queries/facility'
+import { insertNightBlocks, nightBlocksOf } from '@/db/queries/nightBlocks'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
@@ -23,6 +25,8 @@ export async function planCall(
   return inTransaction(ctx, async (tx) => {
     const [pattern, calls] = await Promise.all([findCallBySlug(tx.db, input.from), listCalls(tx.db)])
     if (!pattern) throw refuse.field('from', 'There is no such call.')
+    if (input.closesAt <= (await databaseNow(tx.db)))
+      throw refuse.field('closesAt', 'The deadline lies in the past. Give one that lies ahead.')
     const number = Math.max(...calls.map((call) => call.number)) + 1
     const slug = `call-${number}`
     const id = await insertCall(tx.db, {

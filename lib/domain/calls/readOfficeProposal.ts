@@ -7,6 +7,8 @@ import type { ActingContext } from '../context'
 import type { PaperRepair } from '../papers/repairTypes'
 import { readContents } from '../proposals/readContents'
 import type { ProposalContents } from '../proposals/types'
+import { whyNoRepair } from '../papers/repairRules'
+import { whyNoExtension } from './extensionRules'
 import { mayManageCalls } from './policy'
 import { deadlineOf } from './rules'
 
@@ -16,6 +18,9 @@ export interface OfficeProposalView {
   now: Date
   versions: VersionHead[]
   repairs: PaperRepair[]
+  /** Why it cannot have a deadline of its own, and why no paper can be opened, whatever the date; null where they can. */
+  noExtension: string | null
+  noRepair: string | null
 }
 
 /** One proposal of a call with what the office may do about it: its deadline, its papers, its versions. */
@@ -30,5 +35,24 @@ export async function readOfficeProposal(
     versionsOf(ctx.db, contents.id),
     repairsOf(ctx.db, contents.id),
   ])
-  return { contents, now, deadline: deadlineOf(contents.call, contents.kind, contents), versions, repairs }
+  const { call, papers } = contents
+  const [paper] = papers
+  const extension = whyNoExtension(contents, new Date(call.reviewsDueAt.getTime() - 1), now)
+  const repair = whyNoRepair(
+    contents,
+    { kind: paper?.kind ?? 'justification', openUntil: call.panelMeetsAt },
+    repairs,
+    now,
+  )
+  const whole = (why: { field: string | null; sentence: string } | null) =>
+    why?.field === null ? why.sentence : null
+  return {
+    contents,
+    now,
+    deadline: deadlineOf(call, contents.kind, contents),
+    versions,
+    repairs,
+    noExtension: whole(extension),
+    noRepair: whole(repair),
+  }
 }

@@ -28,6 +28,15 @@ export interface CallKind {
   panelId: number
 }
 
+export interface CallPanel {
+  id: number
+  name: string
+  /** Members needed to decide. */
+  quorum: number
+  /** Members who sit on it now. */
+  members: number
+}
+
 export interface CallCriterion {
   id: number
   position: number

@@ -9,6 +9,7 @@ export {
   moonSeparationDeg,
   sunAltitudeDeg,
 } from './instants'
+export { darkSeconds, type DarkSecondsInput } from './darkSeconds'
 export { dateOfMjd, mjdOf } from './mjd'
 export { moonlitSkyV, type MoonlitSky } from './moonlight'
 export { moonPhases, type MoonPhase } from './moonPhases'

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
+import { alsoLimited } from '@/components/calls/limitWords'
 import { PaperSlot } from '@/components/proposals/PaperSlot'
 import { ReadOnlyNote } from '@/components/proposals/ReadOnlyNote'
 import { ReplacePaper } from '@/components/proposals/ReplacePaper'
@@ -44,6 +45,7 @@ export default async function PapersPage({ params }: { params: Promise<{ referen
           title="Justification"
           help="A PDF of at most 20 MB, without names, scripts or passwords. It goes into the packet reviewers read."
           pageLimit={kind.pageLimit}
+          alsoLimited={alsoLimited(kind)}
           paper={justification}
           names={justification ? await readPaperNames(ctx, justification, people) : undefined}
           actions={actions}

@@ -19,6 +19,7 @@ export default async function OfficeCallLayout({
         label="Sections of the call"
         links={[
           { href: paths.officeCall(slug), label: 'Call' },
+          { href: paths.officeCallPage(slug, 'rules'), label: 'Rules' },
           { href: paths.officeCallPage(slug, 'preview'), label: 'Preview' },
         ]}
         all={{ href: paths.office('calls'), label: 'All calls' }}

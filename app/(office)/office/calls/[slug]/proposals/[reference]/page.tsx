@@ -63,12 +63,16 @@ export default async function OfficeProposalPage({
         >
           <SectionHeading title="A deadline of its own" aside="Everyone named on it is told." />
           <div className="mt-4">
-            <ExtensionForm
-              reference={contents.reference}
-              closesAt={deadline}
-              utcOffsetHours={offset}
-              action={extendProposalAction}
-            />
+            {view.noExtension ? (
+              <p className="m-0 text-muted">{view.noExtension}</p>
+            ) : (
+              <ExtensionForm
+                reference={contents.reference}
+                closesAt={deadline}
+                utcOffsetHours={offset}
+                action={extendProposalAction}
+              />
+            )}
           </div>
           <section className="mt-12">
             <SectionHeading title="A wrong file" aside="Both files are kept; the panel reads the new one." />
@@ -79,12 +83,16 @@ export default async function OfficeProposalPage({
                 now={now}
                 close={closeRepairAction}
               />
-              <RepairForm
-                reference={contents.reference}
-                papers={contents.papers}
-                utcOffsetHours={offset}
-                action={openRepairAction}
-              />
+              {view.noRepair ? (
+                <p className="m-0 text-muted">{view.noRepair}</p>
+              ) : (
+                <RepairForm
+                  reference={contents.reference}
+                  papers={contents.papers}
+                  utcOffsetHours={offset}
+                  action={openRepairAction}
+                />
+              )}
             </div>
           </section>
         </TwoColumns>
