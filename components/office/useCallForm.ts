@@ -1,6 +1,7 @@
 'use client'
 
 import { useRouter } from 'next/navigation'
+import { useEffect } from 'react'
 import type { FieldValues, Path, PathValue } from 'react-hook-form'
 import type { ActionFormHandle } from '@/components/forms/actionFormTypes'
 import { useActionForm, type ActionFormOptions } from '@/components/forms/useActionForm'
@@ -47,5 +48,11 @@ export function useCallForm<Input extends Versioned, Output, Data>({
       router.refresh()
     },
   })
+  const given = options.defaultValues.version as number | undefined
+  const { setValue } = handle.form
+  useEffect(() => {
+    // Another form on the page has saved: this one is about the call as it is shown now.
+    if (given !== undefined) setValue(version, given as PathValue<Input, Path<Input>>)
+  }, [given, setValue, version])
   return handle
 }
