@@ -65,6 +65,7 @@ export const access = {
     '/office/calls/[slug]': office,
     '/office/calls/[slug]/rules': office,
     '/office/calls/[slug]/nights': office,
+    '/office/calls/[slug]/figures': office,
     '/office/calls/[slug]/preview': office,
     '/office/calls/[slug]/proposals/[reference]': office,
     '/office/facility': office,

@@ -21,6 +21,7 @@ export default async function OfficeCallLayout({
           { href: paths.officeCall(slug), label: 'Call' },
           { href: paths.officeCallPage(slug, 'rules'), label: 'Rules' },
           { href: paths.officeCallPage(slug, 'nights'), label: 'Night calendar' },
+          { href: paths.officeCallPage(slug, 'figures'), label: 'Figures' },
           { href: paths.officeCallPage(slug, 'preview'), label: 'Preview' },
         ]}
         all={{ href: paths.office('calls'), label: 'All calls' }}
