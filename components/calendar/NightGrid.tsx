@@ -20,6 +20,7 @@ interface NightGridProps {
 
 const days = Array.from({ length: 31 }, (_, index) => index + 1)
 const monthName = new Intl.DateTimeFormat('en-GB', { month: 'long', year: 'numeric', timeZone: 'UTC' })
+const shortName = new Intl.DateTimeFormat('en-GB', { month: 'short', year: '2-digit', timeZone: 'UTC' })
 
 /**
  * A season of one telescope, a row a month and a column a day. Arrow keys move night by night and month by month; with
@@ -46,7 +47,7 @@ export function NightGrid({ telescope, chosen, onChoose }: NightGridProps) {
       <table className="w-full min-w-[1080px] table-fixed border-collapse" aria-label={`Nights of ${name}`}>
         <thead>
           <tr>
-            <th scope="col" className="sticky left-0 w-32 bg-ground">
+            <th scope="col" className="sticky left-0 w-32 bg-ground max-sm:w-16">
               <span className="sr-only">Month</span>
             </th>
             {days.map((day) => (
@@ -60,7 +61,8 @@ export function NightGrid({ telescope, chosen, onChoose }: NightGridProps) {
           {months.map((month) => (
             <tr key={month} className="border-t border-rule">
               <th scope="row" className="sticky left-0 z-10 bg-ground text-left text-table font-normal">
-                {monthName.format(new Date(`${month}-01T00:00:00Z`))}
+                <span className="max-sm:hidden">{monthName.format(new Date(`${month}-01T00:00:00Z`))}</span>
+                <span className="sm:hidden">{shortName.format(new Date(`${month}-01T00:00:00Z`))}</span>
               </th>
               {days.map((day) => {
                 const night = nights.find(({ date }) => date === `${month}-${String(day).padStart(2, '0')}`)

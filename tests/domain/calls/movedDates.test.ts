@@ -20,8 +20,10 @@ const call = {
 
 it('moves a call by whole weeks to the season that follows', () => {
   const moved = movedDates(call)
-  expect(moved).toMatchObject({ seasonFrom: '2028-02-01', seasonTo: '2028-08-02' })
-  expect(eveningsBetween(moved.seasonFrom, moved.seasonTo)).toHaveLength(184)
+  expect(moved).toMatchObject({ seasonFrom: '2028-02-01', seasonTo: '2028-07-31' })
+  const odd = movedDates({ ...call, seasonTo: '2028-01-30' })
+  expect(odd).toMatchObject({ seasonFrom: '2028-01-31', seasonTo: '2028-07-31' })
+  expect(eveningsBetween(odd.seasonFrom, odd.seasonTo)).toHaveLength(183)
   expect(moved.closesAt).toBe('2027-06-15T22:00:00.000Z')
   expect(new Date(moved.closesAt).getUTCDay()).toBe(call.closesAt.getUTCDay())
   expect(planCallSchema.safeParse({ from: 'call-14', ...moved }).success).toBe(true)

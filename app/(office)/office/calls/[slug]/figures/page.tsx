@@ -42,7 +42,7 @@ export default async function FiguresPage({ params }: { params: Promise<{ slug: 
       <section className="mt-12">
         <SectionHeading
           title="Where the pressure is"
-          aside="Bar: hours asked. Tick: hours on offer. In amber where more is asked than there is."
+          aside="Bar: hours asked, hollow beyond the hours on offer, which are the tick."
         />
         <div className="mt-5 grid gap-x-16 gap-y-10 lg:grid-cols-2">
           <PressureChart
