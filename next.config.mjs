@@ -28,6 +28,9 @@ const config = {
     'thread-stream',
     '@node-rs/argon2',
     '@react-pdf/renderer',
+    '@retorquere/bibtex-parser',
+    'mathjax',
+    'sharp',
     'astronomy-engine',
   ],
   experimental: {

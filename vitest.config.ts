@@ -17,7 +17,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
-          include: ['tests/{science,panel,domain,format,app,services,scripts}/**/*.test.ts'],
+          include: ['tests/{science,panel,domain,format,writing,pdf,app,services,scripts}/**/*.test.ts'],
           environment: 'node',
         },
       },
@@ -27,6 +27,7 @@ export default defineConfig({
           name: 'components',
           include: ['tests/components/**/*.test.tsx'],
           environment: 'jsdom',
+          testTimeout: 30_000,
           setupFiles: ['tests/support/components.ts'],
         },
       },

@@ -114,7 +114,8 @@ export interface CallKindsRow {
   max_seconds: number | null
   fee_minor: number
   panel_id: number
-  word_limit: number | null
+  word_limit: number
+  needs_student: 0 | 1
   figure_limit: number | null
 }
 
@@ -200,6 +201,21 @@ export interface FeesRow {
   created_at: Date
 }
 
+export interface FiguresRow {
+  id: number
+  proposal_id: number
+  object_id: number
+  label: string
+  caption: string
+  file_name: string
+  width_px: number
+  height_px: number
+  position: number
+  removed_at: Date | null
+  version: number
+  created_at: Date
+}
+
 export interface InstitutesRow {
   id: number
   name: string
@@ -235,7 +251,7 @@ export interface InvitationsRow {
   token_hash: string
   email: string
   name: string
-  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office'
+  role: 'reviewer' | 'chair' | 'instrument-scientist' | 'office' | 'investigator'
   call_id: number | null
   panel_id: number | null
   instrument_id: number | null
@@ -245,6 +261,7 @@ export interface InvitationsRow {
   accepted_by: number | null
   withdrawn_at: Date | null
   created_at: Date
+  proposal_id: number | null
 }
 
 export interface LogbookRow {
@@ -401,7 +418,6 @@ export interface PapersRow {
   uploaded_by: number
   superseded_at: Date | null
   created_at: Date
-  words: number | null
 }
 
 export interface PaperRepairsRow {
@@ -494,6 +510,9 @@ export interface ProposalsRow {
   version: number
   created_at: Date
   updated_at: Date
+  continues_id: number | null
+  lead_offered_to: number | null
+  lead_offered_at: Date | null
 }
 
 export interface ProposalPeopleRow {
@@ -509,6 +528,8 @@ export interface ProposalPeopleRow {
   position: number
   confirmed_at: Date | null
   created_at: Date
+  orcid: string | null
+  is_supervisor: 0 | 1
 }
 
 export interface ProposalVersionsRow {
@@ -518,7 +539,7 @@ export interface ProposalVersionsRow {
   snapshot: string
   snapshot_sha256: string
   engine_version: string
-  paper_id: number
+  paper_id: number | null
   idempotency_key: string
   arrived_at: Date
   committed_at: Date
@@ -670,7 +691,7 @@ export interface StoredObjectsRow {
   sha256: string
   size_bytes: number
   content_type: string
-  purpose: 'paper' | 'packet' | 'receipt' | 'record'
+  purpose: 'paper' | 'packet' | 'receipt' | 'record' | 'figure'
   created_at: Date
 }
 
@@ -705,6 +726,11 @@ export interface TargetsRow {
   galactic_ebv: number | null
   magnification: number | null
   magnification_error: number | null
+  spectrum_kind: 'power-law' | 'black-body' | 'table' | null
+  spectral_index: number | null
+  spectral_index_error: number | null
+  temperature_k: number | null
+  spectrum_table: string | null
 }
 
 export interface TargetGroupsRow {
@@ -713,6 +739,8 @@ export interface TargetGroupsRow {
   name: string
   rule: 'all' | 'at-least' | 'backup'
   at_least: number | null
+  hours_for: 'all' | 'at-least'
+  version: number
 }
 
 export interface TargetQuantitiesRow {
@@ -778,6 +806,16 @@ export interface WaiversRow {
   created_at: Date
 }
 
+export interface WritingsRow {
+  id: number
+  proposal_id: number
+  part: 'justification' | 'references' | 'team'
+  body: string
+  version: number
+  created_at: Date
+  updated_at: Date
+}
+
 declare module 'knex/types/tables.js' {
   interface Tables {
     assessments: Knex.CompositeTableType<
@@ -820,7 +858,10 @@ declare module 'knex/types/tables.js' {
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'figure_limit'>
+      Insert<
+        CallKindsRow,
+        'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student' | 'figure_limit'
+      >
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -858,6 +899,10 @@ declare module 'knex/types/tables.js' {
       FeesRow,
       Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
     >
+    figures: Knex.CompositeTableType<
+      FiguresRow,
+      Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
+    >
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -882,6 +927,7 @@ declare module 'knex/types/tables.js' {
         | 'accepted_by'
         | 'withdrawn_at'
         | 'created_at'
+        | 'proposal_id'
       >
     >
     logbook: Knex.CompositeTableType<
@@ -939,10 +985,7 @@ declare module 'knex/types/tables.js' {
       PanelMembersRow,
       Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at'>
     >
-    papers: Knex.CompositeTableType<
-      PapersRow,
-      Insert<PapersRow, 'id' | 'superseded_at' | 'created_at' | 'words'>
-    >
+    papers: Knex.CompositeTableType<PapersRow, Insert<PapersRow, 'id' | 'superseded_at' | 'created_at'>>
     paper_repairs: Knex.CompositeTableType<
       PaperRepairsRow,
       Insert<PaperRepairsRow, 'id' | 'taken_back_at' | 'version_id' | 'created_at'>
@@ -1005,18 +1048,29 @@ declare module 'knex/types/tables.js' {
         | 'withdrawn_reason'
         | 'version'
         | 'created_at'
+        | 'continues_id'
+        | 'lead_offered_to'
+        | 'lead_offered_at'
       >
     >
     proposal_people: Knex.CompositeTableType<
       ProposalPeopleRow,
       Insert<
         ProposalPeopleRow,
-        'id' | 'person_id' | 'institute' | 'access' | 'is_student' | 'confirmed_at' | 'created_at'
+        | 'id'
+        | 'person_id'
+        | 'institute'
+        | 'access'
+        | 'is_student'
+        | 'confirmed_at'
+        | 'created_at'
+        | 'orcid'
+        | 'is_supervisor'
       >
     >
     proposal_versions: Knex.CompositeTableType<
       ProposalVersionsRow,
-      Insert<ProposalVersionsRow, 'id' | 'superseded_at'>
+      Insert<ProposalVersionsRow, 'id' | 'paper_id' | 'superseded_at'>
     >
     proposal_version_people: Knex.CompositeTableType<
       ProposalVersionPeopleRow,
@@ -1097,9 +1151,17 @@ declare module 'knex/types/tables.js' {
         | 'galactic_ebv'
         | 'magnification'
         | 'magnification_error'
+        | 'spectrum_kind'
+        | 'spectral_index'
+        | 'spectral_index_error'
+        | 'temperature_k'
+        | 'spectrum_table'
       >
     >
-    target_groups: Knex.CompositeTableType<TargetGroupsRow, Insert<TargetGroupsRow, 'id' | 'at_least'>>
+    target_groups: Knex.CompositeTableType<
+      TargetGroupsRow,
+      Insert<TargetGroupsRow, 'id' | 'at_least' | 'hours_for' | 'version'>
+    >
     target_quantities: Knex.CompositeTableType<
       TargetQuantitiesRow,
       Insert<
@@ -1130,5 +1192,6 @@ declare module 'knex/types/tables.js' {
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>
     >
+    writings: Knex.CompositeTableType<WritingsRow, Insert<WritingsRow, 'id' | 'version' | 'created_at'>>
   }
 }

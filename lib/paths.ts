@@ -37,9 +37,13 @@ export const paths = {
     `/proposals/${part(reference)}/${section}`,
   proposalPaper: (reference: string, paper: number | string) =>
     `/proposals/${part(reference)}/papers/${part(String(paper))}`,
+  proposalFigure: (reference: string, figure: number | string, sha256: string) =>
+    `/proposals/${part(reference)}/figures/${part(String(figure))}?v=${sha256.slice(0, 8)}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
-  proposalHistory: (reference: string) => `/proposals/${part(reference)}/history`,
+  proposalHistory: (reference: string, since?: number) =>
+    `/proposals/${part(reference)}/history${since === undefined ? '' : `?since=${since}`}`,
   proposalOutcome: (reference: string) => `/proposals/${part(reference)}/outcome`,
+  proposalContinue: (reference: string) => `/proposals/${part(reference)}/continue`,
   proposalPacket: (reference: string, variant?: 'anonymised') =>
     `/proposals/${part(reference)}/packet${variant ? `?variant=${variant}` : ''}`,
   proposalRecord: (reference: string) => `/proposals/${part(reference)}/record`,
@@ -67,6 +71,8 @@ export const paths = {
   panelPacket: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
 
+  panelTeam: (callSlug: string, reviewNumber: string) =>
+    `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 

@@ -3,8 +3,8 @@ import { Font } from '@react-pdf/renderer'
 
 // woff2 is refused by the renderer. A glyph that no font has would print as another one without an error.
 const folder = join(process.cwd(), 'node_modules', '@fontsource')
-const file = (font: string, subset: string, weight: number) =>
-  join(folder, font, 'files', `${font}-${subset}-${weight}-normal.woff`)
+const file = (font: string, subset: string, weight: number, slope = 'normal') =>
+  join(folder, font, 'files', `${font}-${subset}-${weight}-${slope}.woff`)
 
 const families = [
   ['Work Sans', 'work-sans', 'latin', 600],
@@ -16,6 +16,13 @@ const families = [
   ['Noto Sans Math', 'noto-sans-math', 'latin', 400],
 ] as const
 
+const weights = [400, 600] as const
+const slopes = ['normal', 'italic'] as const
+
+/** Only letters have an italic; signs stand upright in it, as they would in print. */
+const slopeOf = (family: string, slope: 'normal' | 'italic') =>
+  family === 'Work Sans' || family === 'Work Sans Ext' ? slope : 'normal'
+
 /** Families in the order a glyph is looked for. */
 export const fontFamily: string[] = families.map(([name]) => name)
 
@@ -23,9 +30,10 @@ export const fontFamily: string[] = families.map(([name]) => name)
  * Reads a font and looks every character up once. A glyph met first as a part of another (the prime in a double
  * prime) would be remembered without its character, and could not be copied or searched in any later document.
  */
-async function readFont(family: string, weight: number): Promise<void> {
-  await Font.load({ fontFamily: family, fontWeight: weight })
-  const { data } = Font.getFont({ fontFamily: family, fontWeight: weight })
+async function readFont(family: string, fontWeight: number, fontStyle: 'normal' | 'italic'): Promise<void> {
+  const which = { fontFamily: family, fontWeight, fontStyle }
+  await Font.load(which)
+  const { data } = Font.getFont(which)
   if (!data || !('characterSet' in data)) throw new Error(`the font ${family} could not be read`)
   for (const codePoint of data.characterSet) data.glyphForCodePoint(codePoint)
 }
@@ -38,14 +46,18 @@ export function loadFonts(): Promise<void> {
     for (const [family, font, subset, bold] of families)
       Font.register({
         family,
-        fonts: [
-          { src: file(font, subset, 400), fontWeight: 400 },
-          { src: file(font, subset, bold), fontWeight: 600 },
-        ],
+        fonts: slopes.flatMap((fontStyle) =>
+          weights.map((fontWeight) => ({
+            src: file(font, subset, fontWeight === 600 ? bold : 400, slopeOf(family, fontStyle)),
+            fontWeight,
+            fontStyle,
+          })),
+        ),
       })
     // Words are not broken: names of objects must stay readable.
     Font.registerHyphenationCallback((word) => [word])
-    for (const family of fontFamily) for (const weight of [400, 600]) await readFont(family, weight)
+    for (const family of fontFamily)
+      for (const weight of weights) for (const slope of slopes) await readFont(family, weight, slope)
   })()
   return ready
 }
@@ -62,4 +74,14 @@ export function canPrint(codePoint: number): boolean {
   })
   known.set(codePoint, found)
   return found
+}
+
+/** How far a character rises above the baseline in the font it is printed with, em; only after `loadFonts`. */
+export function ascentEm(codePoint: number): number {
+  for (const family of fontFamily) {
+    const data = Font.getFont({ fontFamily: family, fontWeight: 400 })?.data
+    if (data && 'hasGlyphForCodePoint' in data && data.hasGlyphForCodePoint(codePoint))
+      return data.ascent / data.unitsPerEm
+  }
+  return 1
 }

@@ -13,11 +13,13 @@ type Input = z.input<typeof acceptInvitationSchema>
 interface AcceptInvitationFormProps {
   token: string
   name: string
-  action: FormAction<Input, { email: string }>
+  /** Words on the button. */
+  send: string
+  action: FormAction<Input, unknown>
 }
 
 /** Accepts with a new account; the mailed link has proved the address already. */
-export function AcceptInvitationForm({ token, name, action }: AcceptInvitationFormProps) {
+export function AcceptInvitationForm({ token, name, send, action }: AcceptInvitationFormProps) {
   const form = useActionForm({
     schema: acceptInvitationSchema,
     action,
@@ -40,7 +42,7 @@ export function AcceptInvitationForm({ token, name, action }: AcceptInvitationFo
         type="password"
         autoComplete="new-password"
       />
-      <SubmitButton busyWord="Accepting">Accept and open an account</SubmitButton>
+      <SubmitButton busyWord="Accepting">{send}</SubmitButton>
     </ActionForm>
   )
 }

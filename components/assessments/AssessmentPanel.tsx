@@ -1,4 +1,5 @@
 import { Panel } from '@/components/ui/Panel'
+import { countedSeconds } from '@/lib/domain/assessments/rules'
 import type { RequestView } from '@/lib/domain/assessments/readRequest'
 import { formatDay } from '@/lib/format'
 import { AssessmentForm, type AssessmentFormProps } from './AssessmentForm'
@@ -11,8 +12,6 @@ export interface AssessmentPanelProps {
 /** The one panel that wants action: the assessment, or why it is settled. */
 export function AssessmentPanel({ view, action }: AssessmentPanelProps) {
   const standing = view.history[0] ?? null
-  const sum = (of: 'askedSeconds' | 'neededSeconds') =>
-    view.targets.reduce((total, row) => total + row[of], 0)
   return (
     <Panel
       bar="accent"
@@ -26,8 +25,8 @@ export function AssessmentPanel({ view, action }: AssessmentPanelProps) {
           key={standing?.id ?? 0}
           requestId={view.requestId}
           standing={standing}
-          askedSeconds={sum('askedSeconds')}
-          computedSeconds={sum('neededSeconds')}
+          askedSeconds={countedSeconds(view.targets, 'askedSeconds')}
+          computedSeconds={countedSeconds(view.targets, 'neededSeconds')}
           action={action}
         />
       )}

@@ -1,7 +1,7 @@
 import { AskedBar } from '@/components/charts/AskedBar'
 import { TableFrame } from '@/components/tables/TableFrame'
 import { VerdictMark } from '@/components/ui/VerdictMark'
-import { trueSecondsByTarget, type TargetHours } from '@/lib/domain/assessments/rules'
+import { countedSeconds, trueSecondsByTarget, type TargetHours } from '@/lib/domain/assessments/rules'
 import { ABSENT, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 
 const hours = (seconds: number, decimals = 2) => formatNumber(seconds / 3600, decimals)
@@ -13,6 +13,13 @@ const heads = [
   ['Asked', 'h'],
 ] as const
 
+/** What is not plain about how a target counts: ', backup, not counted', ', 3 triggers'. */
+function standingWords({ need, times }: TargetHours): string {
+  if (times === 0) return need === 'backup' ? ', backup, not counted' : ', not counted'
+  const needed = need === 'optional' ? ', optional' : ''
+  return times === 1 ? needed : `${needed}, ${times} triggers together`
+}
+
 export interface HoursTableProps {
   targets: readonly TargetHours[]
   /** The hours the standing assessment calls true; null before there is one. */
@@ -21,9 +28,8 @@ export interface HoursTableProps {
 
 /** Hours of each target against the hours asked: the bar, and the asked hours as its limit. */
 export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
-  const total = (of: (row: TargetHours) => number) => targets.reduce((sum, row) => sum + of(row), 0)
-  const needed = total((row) => row.neededSeconds)
-  const asked = total((row) => row.askedSeconds)
+  const needed = countedSeconds(targets, 'neededSeconds')
+  const asked = countedSeconds(targets, 'askedSeconds')
   const said = trueSeconds ?? needed
   const shares = trueSecondsByTarget(targets, said)
   const longest = Math.max(360, ...shares, ...targets.map((row) => row.askedSeconds))
@@ -51,14 +57,14 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
                 {row.name}
                 <span className="block text-caption font-normal text-muted">
                   {row.modes.join(', ')}
-                  {row.need === 'required' ? '' : `, ${row.need}`}
+                  {standingWords(row)}
                 </span>
               </th>
               <td className="is-right">{hours(row.openSeconds)}</td>
               <td className="is-right">{hours(row.overheadSeconds)}</td>
               <td className="is-right is-computed">{hours(row.neededSeconds)}</td>
               <td className="is-right font-semibold">
-                {trueSeconds === null ? ABSENT : hours(shares[index] ?? 0)}
+                {trueSeconds === null || row.times === 0 ? ABSENT : hours(shares[index] ?? 0)}
               </td>
               <td className="is-right">{hours(row.askedSeconds)}</td>
               <td>
@@ -75,8 +81,8 @@ export function HoursTable({ targets, trueSeconds }: HoursTableProps) {
         <tfoot>
           <tr>
             <td>{targets.length === 1 ? '1 target' : `${targets.length} targets`}</td>
-            <td className="is-right">{hours(total((row) => row.openSeconds))}</td>
-            <td className="is-right">{hours(total((row) => row.overheadSeconds))}</td>
+            <td className="is-right">{hours(countedSeconds(targets, 'openSeconds'))}</td>
+            <td className="is-right">{hours(countedSeconds(targets, 'overheadSeconds'))}</td>
             <td className="is-right is-computed">{hours(needed)}</td>
             <td className="is-right">{trueSeconds === null ? ABSENT : hours(trueSeconds)}</td>
             <td className="is-right">{hours(asked)}</td>

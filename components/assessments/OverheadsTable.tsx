@@ -1,5 +1,5 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import type { TargetHours } from '@/lib/domain/assessments/rules'
+import { countedSeconds, type TargetHours } from '@/lib/domain/assessments/rules'
 import type { ModeRecord } from '@/lib/domain/facility/types'
 import { formatDuration, formatNumber, formatPercent } from '@/lib/format'
 
@@ -10,8 +10,8 @@ export interface OverheadsTableProps {
 
 /** What the engine adds to the open shutter, as the instrument's record says, and what it comes to. */
 export function OverheadsTable({ modes, targets }: OverheadsTableProps) {
-  const open = targets.reduce((sum, row) => sum + row.openSeconds, 0)
-  const over = targets.reduce((sum, row) => sum + row.overheadSeconds, 0)
+  const open = countedSeconds(targets, 'openSeconds')
+  const over = countedSeconds(targets, 'overheadSeconds')
   return (
     <section>
       <SectionHeading title="Overheads" dense />

@@ -1,5 +1,5 @@
 import type { SelectOption } from '@/components/forms/SelectField'
-import { nightUses, type NightUse } from '@/lib/domain/calls/nightBlock'
+import { nightUses, type NightUse } from '@/lib/domain/calls/nightUseList'
 
 /** What a part of a night is for, in words. */
 export const useWords: Readonly<Record<NightUse, string>> = {

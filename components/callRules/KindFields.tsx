@@ -1,7 +1,10 @@
+import { CheckboxField } from '@/components/forms/CheckboxField'
 import { DateTimeField } from '@/components/forms/DateTimeField'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField, type SelectOption } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
+import { maxFigures } from '@/lib/domain/writings/limits'
+import { countInWords } from '@/lib/format'
 import { kindOptions } from './kindNames'
 
 /** What a kind of proposal is, how much it may ask and say, who judges it, and until when. */
@@ -21,26 +24,25 @@ export function KindFields({ panels, utcOffsetHours }: { panels: SelectOption[];
         />
         <NumberField
           name="pageLimit"
-          label="Justification, pages"
+          label="Justification as a PDF, pages"
           whole
-          help="Checked when the PDF is uploaded."
+          help="Checked when it is uploaded."
         />
-        <NumberField
-          name="wordLimit"
-          label="Justification, words"
-          whole
-          optional
-          help="Counted in the PDF, captions and references with them. Empty for no limit."
-        />
+        <NumberField name="wordLimit" label="Justification written here, words" whole />
         <NumberField
           name="figureLimit"
-          label="Justification, figures"
+          label="Figures with it"
           whole
           optional
-          help="Told to investigators, and for the panel to look after. Empty for no limit."
+          help={`Empty for ${countInWords(maxFigures, 'figure')}, the most there can be.`}
         />
         <NumberField name="abstractLimit" label="Abstract, characters" whole />
       </div>
+      <CheckboxField
+        name="needsStudent"
+        label="Must name a student and a supervisor"
+        help="Both have agreed before it can be sent."
+      />
       <DateTimeField
         name="closesAt"
         label="A deadline of its own"

@@ -33,10 +33,11 @@ function valuesOf(kind: CallKind | null, panels: SelectOption[]) {
     title: kind?.title ?? '',
     closesAt: kind?.closesAt?.toISOString() ?? '',
     pageLimit: typed(kind?.pageLimit ?? 4),
-    wordLimit: typed(kind?.wordLimit),
+    wordLimit: typed(kind?.wordLimit ?? 2000),
     figureLimit: typed(kind?.figureLimit),
     abstractLimit: typed(kind?.abstractLimit ?? 1500),
     maxHours: typed(kind?.maxSeconds ? Math.round(kind.maxSeconds / 360) / 10 : null),
+    needsStudent: kind?.needsStudent ?? false,
     panelId: typed(kind?.panelId) || (panels[0]?.value ?? ''),
   }
 }

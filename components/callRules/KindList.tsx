@@ -60,7 +60,9 @@ export function KindList({ view, mayChange, save, remove }: KindListProps) {
             facts={factsOf(kind, panels.find(({ id }) => id === kind.panelId)?.name ?? '')}
             form={open === kind.id ? form(kind) : null}
             onEdit={mayChange ? () => setOpen(kind.id) : undefined}
-            onRemove={mayChange && kind.proposals === 0 && kinds.length > 1 && !busy ? () => take(kind) : undefined}
+            onRemove={
+              mayChange && kind.proposals === 0 && kinds.length > 1 && !busy ? () => take(kind) : undefined
+            }
           />
         ))}
       </ul>

@@ -1,5 +1,5 @@
 import type { SelectOption } from '@/components/forms/SelectField'
-import { kindKeys } from '@/lib/domain/calls/kindKeys'
+import { kindKeys } from '@/lib/domain/calls/kindKeyList'
 
 const names: Readonly<Record<(typeof kindKeys)[number], string>> = {
   regular: 'Regular proposal',

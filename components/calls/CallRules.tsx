@@ -1,8 +1,8 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { CallCriterion, CallKind } from '@/lib/domain/calls/types'
+import { formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
 import { CriteriaList } from './CriteriaList'
 import { limitWords } from './limitWords'
-import { formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
 
 interface CallRulesProps {
   kinds: readonly CallKind[]

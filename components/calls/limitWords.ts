@@ -1,16 +1,8 @@
 import type { CallKind } from '@/lib/domain/calls/types'
-import { countInWords, formatList, formatNumber } from '@/lib/format'
+import { countInWords, formatNumber } from '@/lib/format'
 
-/** Words and figures of a justification, where a kind limits them. */
-export function alsoLimited(kind: Pick<CallKind, 'wordLimit' | 'figureLimit'>): string[] {
-  return [
-    ...(kind.wordLimit === null ? [] : [`${formatNumber(kind.wordLimit, 0)} words`]),
-    ...(kind.figureLimit === null ? [] : [countInWords(kind.figureLimit, 'figure')]),
-  ]
-}
-
-/** How long a justification may be: `Four pages, 2,400 words and six figures of justification`. */
+/** How long a justification may be: `2,000 words of justification with six figures, or 4 pages as a PDF`. */
 export function limitWords(kind: Pick<CallKind, 'pageLimit' | 'wordLimit' | 'figureLimit'>): string {
-  const pages = countInWords(kind.pageLimit, 'page', 'pages', true)
-  return `${formatList([pages, ...alsoLimited(kind)])} of justification`
+  const figures = kind.figureLimit === null ? '' : ` with ${countInWords(kind.figureLimit, 'figure')}`
+  return `${formatNumber(kind.wordLimit)} words of justification${figures}, or ${kind.pageLimit} pages as a PDF`
 }

@@ -4,6 +4,7 @@ import { useState } from 'react'
 import { ActionForm } from '@/components/forms/ActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { CheckboxField } from '@/components/forms/CheckboxField'
+import { LeftOutNote } from '@/components/submission/LeftOutNote'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { useActionForm } from '@/components/forms/useActionForm'
@@ -16,12 +17,14 @@ interface SendFormProps {
   /** Made with the page: pressing twice sends once. */
   idempotencyKey: string
   declaration: string
+  /** Names of those who have yet to agree. */
+  leftOut: readonly string[]
   fee: { amountMinor: number; currency: string; dueAt: Date } | null
   action: FormAction<SendInput, unknown>
 }
 
 /** The declaration and the one button; beside it the two ways of settling the fee later. */
-export function SendForm({ reference, idempotencyKey, declaration, fee, action }: SendFormProps) {
+export function SendForm({ reference, idempotencyKey, declaration, leftOut, fee, action }: SendFormProps) {
   const [asksWaiver, setAsksWaiver] = useState(false)
   const form = useActionForm({
     schema: sendSchema,
@@ -46,6 +49,7 @@ export function SendForm({ reference, idempotencyKey, declaration, fee, action }
   const label = fee ? `Send it in for ${formatMoneyShort(fee.amountMinor, fee.currency)}` : 'Send it in'
   return (
     <ActionForm form={form}>
+      <LeftOutNote reference={reference} names={leftOut} />
       <CheckboxField name="declaration" label={<span className="text-table">{declaration}</span>} />
       {asksWaiver ? (
         <TextAreaField

@@ -3,6 +3,7 @@
 import { useEffect, useRef } from 'react'
 import { useFormState } from 'react-hook-form'
 import { countInWords } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { useActionFormState } from './ActionFormContext'
 import type { FormFailure } from './actionFormTypes'
 import { fieldId } from './fieldId'
@@ -75,6 +76,18 @@ export function ErrorSummary({ failure, attempt }: ErrorSummaryProps) {
       ) : (
         <p className="mt-1">{failure?.message}</p>
       )}
+      {failure?.signIn && messages.length === 0 ? (
+        <p className="mt-2">
+          <a
+            href={paths.signIn()}
+            target="_blank"
+            rel="noopener"
+            className="font-semibold text-accent underline underline-offset-4"
+          >
+            Sign in on a new page
+          </a>
+        </p>
+      ) : null}
       {failure?.reference ? (
         <p className="mt-1 text-table text-muted">
           If you write to the office, give the number{' '}

@@ -1,6 +1,8 @@
 'use client'
 
+import { usePathname } from 'next/navigation'
 import { formatUtcClock } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import type { AutosaveState } from './autosaveState'
 
 export interface SaveWordsProps {
@@ -13,9 +15,18 @@ export interface SaveWordsProps {
 
 /** What became of the last change, for the right of the request strip. */
 export function SaveWords({ state, savedBefore, kept = false }: SaveWordsProps) {
+  const here = usePathname()
   return (
     <span role="status" className="text-caption text-muted">
       {words(state, savedBefore, kept)}
+      {state.name === 'signed-out' ? (
+        <>
+          {' '}
+          <a href={paths.signIn(here ?? undefined)} className="text-accent underline underline-offset-4">
+            Sign in again
+          </a>
+        </>
+      ) : null}
     </span>
   )
 }
@@ -32,6 +43,12 @@ function words(state: AutosaveState, savedBefore: Date | undefined, kept: boolea
       return (
         <strong className="text-lamp">
           {kept ? 'Offline: kept in this browser' : 'Offline: not saved yet'}
+        </strong>
+      )
+    case 'signed-out':
+      return (
+        <strong className="text-lamp">
+          {kept ? 'Signed out: kept in this browser.' : 'Signed out: not saved yet.'}
         </strong>
       )
     case 'failed':

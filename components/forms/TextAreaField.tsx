@@ -21,6 +21,8 @@ export interface TextAreaFieldProps {
   limit?: number
   /** Lines like a ledger's, one value each. */
   ruled?: boolean
+  /** Grows with what is typed, for long texts. */
+  grows?: boolean
   spellCheck?: boolean
   offReason?: string
 }
@@ -55,6 +57,7 @@ export function TextAreaField(props: TextAreaFieldProps) {
           controlClasses(Boolean(field.error), Boolean(offReason)),
           'block py-2',
           ruled && 'ruled-lines',
+          props.grows && 'grows',
         )}
       />
       {limit ? (

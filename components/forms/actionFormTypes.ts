@@ -7,6 +7,8 @@ export interface FormFailure {
   message: string
   /** Found in the log; shown for what nobody expected. */
   reference?: string
+  /** The session ended: signing in elsewhere, then sending again, does it. */
+  signIn?: true
 }
 
 export type FormAction<Input, Data> = (values: Input) => Promise<ActionResult<Data>>

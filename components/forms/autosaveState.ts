@@ -6,6 +6,8 @@ export type AutosaveState =
   | { name: 'saved'; at: Date }
   /** No network: tries again when it comes back. */
   | { name: 'offline' }
+  /** The session ended: tries again when one comes back to the page, having signed in. */
+  | { name: 'signed-out' }
   /** The server did not take it; tries again after so many seconds. */
   | { name: 'failed'; retrySeconds: number }
   /** A value is not right: waits for the next change. */
@@ -16,6 +18,7 @@ export type AutosaveState =
 /** What a refused save means for the saving: try again, wait for a change, or wait for a choice. */
 export function stateAfterRefusal(result: RefusedResult, retrySeconds: number): AutosaveState {
   if (result.stale) return { name: 'stale', stale: result.stale }
+  if (result.kind === 'not-signed-in') return { name: 'signed-out' }
   const passing = ['unavailable', 'unexpected', 'too-many'].includes(result.kind)
   if (passing) return { name: 'failed', retrySeconds }
   return { name: 'refused', message: result.message, fieldErrors: result.fieldErrors }

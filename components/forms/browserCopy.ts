@@ -17,6 +17,16 @@ export const browserCopy = {
       return null
     }
   },
+  /** Keys under which something is kept, by how they begin. */
+  keysFrom(start: string): string[] {
+    try {
+      const prefix = `noctuary:${start}`
+      const keys = Array.from({ length: localStorage.length }, (_, index) => localStorage.key(index) ?? '')
+      return keys.filter((key) => key.startsWith(prefix)).map((key) => key.slice('noctuary:'.length))
+    } catch {
+      return []
+    }
+  },
   drop(key: string): void {
     try {
       localStorage.removeItem(`noctuary:${key}`)

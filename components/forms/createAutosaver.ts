@@ -34,6 +34,10 @@ export function createAutosaver<Values, Data>(
 
   const text = () => JSON.stringify(options.values)
 
+  function keepCopy(): boolean {
+    return options.keepAs !== undefined && browserCopy.keep(options.keepAs, options.values)
+  }
+
   function later(milliseconds: number): void {
     clearTimeout(timer)
     timer = setTimeout(() => void run(), milliseconds)
@@ -54,8 +58,9 @@ export function createAutosaver<Values, Data>(
       if (options.keepAs) browserCopy.drop(options.keepAs)
       if (data !== undefined) options.onSaved?.(data)
     }
+    if (state.name === 'signed-out') keepCopy()
     if (state.name === 'failed' || state.name === 'offline') {
-      if (options.keepAs) browserCopy.keep(options.keepAs, options.values)
+      keepCopy()
       later(retrySeconds * 1000)
       retrySeconds = Math.min(longestRetrySeconds, retrySeconds * 2)
     } else if (!waitingForChoice && text() !== sending) {
@@ -77,6 +82,8 @@ export function createAutosaver<Values, Data>(
       later(options.delayMs ?? usualDelayMs)
     },
     unsaved: (): boolean => text() !== saved,
+    /** Keeps what is not saved in this browser; true when it could be kept. For a page about to be closed. */
+    keepUnsaved: (): boolean => text() !== saved && keepCopy(),
     /** After a choice between two versions: what counts as saved now. The next change saves on top of it. */
     settle(values: Values): void {
       saved = JSON.stringify(values)

@@ -15,5 +15,11 @@ export function failureOf(result: RefusedResult): FormFailure {
       reference: result.reference,
     }
   }
+  if (result.kind === 'not-signed-in')
+    return {
+      heading: 'You have been signed out',
+      message: 'Nothing you typed is lost. Sign in on another page, come back to this one and send it again.',
+      signIn: true,
+    }
   return { heading: 'That could not be done', message: result.message, reference: result.reference }
 }

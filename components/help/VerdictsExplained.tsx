@@ -15,6 +15,11 @@ export function VerdictsExplained() {
       <SignEntry sign={<VerdictMark verdict="not-feasible" />}>
         Well past it. The check says what would fix it.
       </SignEntry>
+      <p className="my-3 max-w-prose text-table text-muted">
+        A whole proposal is as good as the worst of its required targets, and of its groups by their rules: of
+        five targets of which three are wanted, the third best counts. Backups and optional targets do not
+        sink it.
+      </p>
       <SignEntry
         sign={
           <span className="flex flex-col gap-1">

@@ -1,4 +1,4 @@
-import type { NightsPolicy } from '@/lib/domain/decisions/policies'
+import type { NightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
 import type { ActionResult } from '@/lib/actions/result'
 
 export type SaveAwardAction = (input: {

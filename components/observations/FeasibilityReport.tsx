@@ -2,8 +2,9 @@ import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { VerdictMark } from '@/components/ui/VerdictMark'
-import { countInWords, formatHoursFromSeconds, formatNumber, formatPower } from '@/lib/format'
+import { countInWords, formatHoursFromSeconds, formatNumber } from '@/lib/format'
 import {
+  awaitedWords,
   conditionsOf,
   cosmologyOf,
   hoursHangOn,
@@ -13,12 +14,14 @@ import {
   type ReportContents,
 } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
+import { GroupsStanding } from './GroupsStanding'
 import { ObservationTabs } from './ObservationTabs'
 import { ReportChecks } from './ReportChecks'
 import { ReportHours } from './ReportHours'
 import { ReportSeason } from './ReportSeason'
 import { ReportSpectrum } from './ReportSpectrum'
 import { snrWords } from './snrWords'
+import { targetWords } from './targetWords'
 import { StandsAbove, type AssessmentAbove } from './StandsAbove'
 
 export interface FeasibilityReportProps {
@@ -32,6 +35,12 @@ export interface FeasibilityReportProps {
   assessments?: readonly AssessmentAbove[]
   /** Beside the title of the checks: other cosmologies, a note. */
   aside?: React.ReactNode
+}
+
+/** How the hours of an observation count where it is not once. */
+function countsWords(times: number): string {
+  if (times === 0) return ', not counted in the hours of the whole'
+  return times === 1 ? '' : ` for each of ${countInWords(times, 'trigger')}`
 }
 
 /** Can it be done: one observation at a time, with its season, its checks, its lines and its hours. Names nobody. */
@@ -66,7 +75,7 @@ export function FeasibilityReport({
   const firstOpen = computed.checks.find(
     ({ verdict }) => verdict === computed.verdict && verdict !== 'feasible',
   )
-  const { brightness } = target
+  const awaited = awaitedWords(target)
   const fileName = target.name.replace(/[^\w+-]+/g, '-').toLowerCase()
   const tabName = (one: typeof observation) => {
     const own = contents.observations.filter(({ targetId }) => targetId === one.targetId)
@@ -81,6 +90,7 @@ export function FeasibilityReport({
 
   return (
     <div className="flex flex-col gap-10">
+      <GroupsStanding computation={computation} />
       <ObservationTabs
         chosen={observation.id}
         tabs={contents.observations.map((one) => ({
@@ -96,22 +106,14 @@ export function FeasibilityReport({
         <div>
           <h2 className="text-display max-sm:text-figure">{target.name}</h2>
           <p className="mt-1 text-muted">
-            {target.raTyped} {target.decTyped}
-            {target.redshift !== null ? `, z = ${target.redshiftTyped}` : ''}
-            {brightness
-              ? `, ${brightness.band} = ${formatNumber(brightness.value, 1)} (${brightness.system})`
-              : ''}
-            {isForLine(input) && target.line
-              ? `, ${target.line.name} of ${formatPower(target.line.value)} ${target.line.kind === 'flux' ? 'erg/s/cm²' : 'erg/s'}`
-              : ''}
-            {target.magnification ? `, magnified ${formatNumber(target.magnification, 1)} times` : ''}
-            .
+            {targetWords(target, isForLine(input))}.
             <br />
             {mode?.name ?? 'A mode that is gone'}, S/N {formatNumber(observation.wantedSnr, 0)}{' '}
             {snrWords[observation.snrPer]}
             {observation.feature ? ` in ${observation.feature}` : ''},{' '}
-            {formatHoursFromSeconds(observation.askedSeconds)} asked.
+            {formatHoursFromSeconds(observation.askedSeconds)} asked{countsWords(computed.times)}.
           </p>
+          {awaited ? <p className="mt-1 max-w-prose text-table">{awaited}</p> : null}
         </div>
         <div className="max-w-prose">
           {assessed ? <StandsAbove assessment={assessed} /> : null}
@@ -122,6 +124,9 @@ export function FeasibilityReport({
               words={`Computed: ${computed.verdict.replace('-', ' ')}, ${clear} of ${computed.checks.length} checks clear.`}
             />
             {firstOpen ? <p className="mt-1">{firstOpen.why}</p> : null}
+            {awaited && target.raDeg === null ? (
+              <p className="mt-1">When it is up is not among them: it has no position yet.</p>
+            ) : null}
           </BarNote>
         </div>
       </div>

@@ -15,6 +15,7 @@ import { askFor, observationRow } from '@/lib/domain/observations/rules'
 import { observationRowSchema, type ObservationRow } from '@/lib/domain/observations/schema'
 import type { ObservationComputation } from '@/lib/domain/observations/types'
 import type { Observation, ProposalContents } from '@/lib/domain/proposals/types'
+import { CountsNote } from '@/components/targets/CountsNote'
 import { ABSENT, formatDuration, formatHoursFromSeconds } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { NeededCell } from '../targets/NeededCell'
@@ -50,6 +51,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
     kept,
     empty: observationRow(kept),
     rowOf: observationRow,
+    keepAs: readOnly === null ? `observation-${contents.reference}-${kept.id}` : null,
     save,
   })
   const { form, commit } = row
@@ -106,10 +108,13 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
             <CellSelect
               name="modeId"
               label={`Mode of the ${label}`}
-              options={contents.modes.map(({ modeId, name: words }) => ({
-                value: String(modeId),
-                label: words,
-              }))}
+              options={[
+                ...(mode || !typed.modeId ? [] : [{ value: String(typed.modeId), label: 'Not on offer' }]),
+                ...contents.modes.map(({ modeId, name: words }) => ({
+                  value: String(modeId),
+                  label: words,
+                })),
+              ]}
               readOnly={isOff}
               large
               isNumber
@@ -164,6 +169,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
                 take {askFor(needed)}
               </button>
             ) : null}
+            <CountsNote times={computed?.times ?? null} />
           </span>
         </td>
         <td role="cell" data-head="Verdict" className="whitespace-nowrap">

@@ -1,6 +1,6 @@
 'use client'
 
-import { useCallback, useMemo, useState } from 'react'
+import { useCallback, useMemo, useState, type ReactNode } from 'react'
 import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkButton } from '@/components/ui/LinkButton'
@@ -22,6 +22,8 @@ export interface ObservingEditorProps {
   contents: ProposalContents
   computation: ProposalComputation
   readOnly: string | null
+  /** Stands between the title and the tables. */
+  note?: ReactNode
   actions: ObservationActions
 }
 
@@ -44,7 +46,7 @@ function typedContents(
 }
 
 /** The observing page: conditions in plain fields, then a row for each target with a mode. */
-export function ObservingEditor({ contents, computation, readOnly, actions }: ObservingEditorProps) {
+export function ObservingEditor({ contents, computation, readOnly, note, actions }: ObservingEditorProps) {
   const { reference } = contents
   const [typed, setTyped] = useState<Readonly<Record<number, ObservationRow>>>({})
   const [busy, setBusy] = useState(false)
@@ -106,6 +108,7 @@ export function ObservingEditor({ contents, computation, readOnly, actions }: Ob
         }
       />
       <div className="mt-6 flex flex-col gap-10">
+        {note}
         <ConstraintSets contents={contents} readOnly={readOnly !== null} save={actions.saveConstraints} />
         <section>
           <SectionHeading title="Observations" />

@@ -45,6 +45,11 @@ export function ReportHours(props: ReportHoursProps) {
         <p className="m-0">
           {cosmologySentence(exposure.cosmologyMatters, lightOf(target, props.isForLine))}
         </p>
+        {computed.carried ? (
+          <p className={computed.carried.isAssumed ? 'm-0 text-marginal' : 'm-0'}>
+            {computed.carried.sentence}
+          </p>
+        ) : null}
         {exposure.warnings.map((warning) => (
           <p key={warning} className="m-0 text-marginal">
             {warning}

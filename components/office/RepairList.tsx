@@ -4,7 +4,7 @@ import { useRouter } from 'next/navigation'
 import { useState, useTransition } from 'react'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { ActionResult } from '@/lib/actions/result'
-import { isWaiting } from '@/lib/domain/papers/repairRules'
+import { isWaiting } from '@/lib/domain/papers/rules'
 import type { PaperRepair } from '@/lib/domain/papers/repairTypes'
 import { formatUtcWithYear } from '@/lib/format'
 

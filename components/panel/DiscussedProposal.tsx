@@ -35,6 +35,9 @@ export function DiscussedProposal({ proposal, view, save, setAside }: DiscussedP
             {`Packet ${proposal.reviewNumber}`}
           </TextLink>
           <TextLink href={paths.panelReport(ranking.callSlug, proposal.reviewNumber)}>Report</TextLink>
+          {ranking.teamsOpen ? (
+            <TextLink href={paths.panelTeam(ranking.callSlug, proposal.reviewNumber)}>Who asks</TextLink>
+          ) : null}
         </span>
       </div>
       <p className="mt-1 text-table text-muted">

@@ -20,7 +20,15 @@ export interface AddPersonFormProps {
   add: (input: Values & { reference: string }) => Promise<ActionResult<{ id: number }>>
 }
 
-const empty: Values = { name: '', email: '', institute: '', access: 'edit', isStudent: false }
+const empty: Values = {
+  name: '',
+  email: '',
+  institute: '',
+  access: 'edit',
+  orcid: '',
+  isStudent: false,
+  isSupervisor: false,
+}
 
 /** Names a co-investigator; the invitation is written to them at once. */
 export function AddPersonForm({ reference, add }: AddPersonFormProps) {
@@ -43,8 +51,10 @@ export function AddPersonForm({ reference, add }: AddPersonFormProps) {
         <TextField name="name" label="Name" help="As it is to be printed." autoComplete="off" />
         <TextField name="email" label="E-mail" type="email" inputMode="email" />
         <TextField name="institute" label="Institute" optional />
+        <TextField name="orcid" label="ORCID iD" help="Shown as not verified" optional width="medium" />
         <SelectField name="access" label="What they may do" options={accessOptions} />
         <CheckboxField name="isStudent" label="A student" />
+        <CheckboxField name="isSupervisor" label="Supervises the student" />
         <div>
           <SubmitButton look="secondary" busyWord="Writing">
             Name and invite

@@ -1,12 +1,10 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ActionResult } from '@/lib/actions/result'
-import type { NameFound } from '@/lib/domain/papers/namesIn'
 import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 import type { Paper } from '@/lib/domain/proposals/types'
-import { countInWords, formatBytes, formatList, formatUtc } from '@/lib/format'
+import { countInWords, formatBytes, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
-import { NamesFound } from './NamesFound'
 import { PaperUpload } from './PaperUpload'
 import { RemovePaper } from './RemovePaper'
 
@@ -16,11 +14,7 @@ export interface PaperSlotProps {
   title: string
   help: string
   pageLimit: number
-  /** Words and figures, where they are limited too. */
-  alsoLimited?: readonly string[]
   paper: Paper | null
-  /** Undefined where names are meant to stand. */
-  names?: readonly NameFound[] | null
   /** Null for those who only look. */
   actions: {
     upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
@@ -29,24 +23,10 @@ export interface PaperSlotProps {
 }
 
 /** One document of a proposal: what stands, what was found in it, and how to put another in its place. */
-export function PaperSlot({
-  reference,
-  kind,
-  title,
-  help,
-  pageLimit,
-  alsoLimited = [],
-  paper,
-  names,
-  actions,
-}: PaperSlotProps) {
+export function PaperSlot({ reference, kind, title, help, pageLimit, paper, actions }: PaperSlotProps) {
   return (
     <section className="mb-10">
-      <SectionHeading
-        dense
-        title={title}
-        aside={`at most ${formatList([countInWords(pageLimit, 'page'), ...alsoLimited])}`}
-      />
+      <SectionHeading dense title={title} aside={`at most ${countInWords(pageLimit, 'page')}`} />
       {paper ? (
         <div className="mt-3 mb-4">
           <p className="m-0 flex flex-wrap items-baseline gap-x-4 gap-y-1 [overflow-wrap:anywhere]">
@@ -68,11 +48,6 @@ export function PaperSlot({
               </span>
             ) : null}
           </p>
-          {names === undefined ? null : (
-            <div className="mt-3">
-              <NamesFound found={names} />
-            </div>
-          )}
         </div>
       ) : null}
       {actions ? (

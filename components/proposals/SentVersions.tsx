@@ -1,8 +1,10 @@
+import { TextLink } from '@/components/ui/TextLink'
 import type { History } from '@/lib/domain/proposals/history/readHistory'
 import { formatUtcInstant } from '@/lib/format'
+import { paths } from '@/lib/paths'
 
 /** Versions that were sent, newest first; the one that stands is named so. */
-export function SentVersions({ versions }: Pick<History, 'versions'>) {
+export function SentVersions({ versions, reference }: Pick<History, 'versions'> & { reference: string }) {
   if (versions.length === 0)
     return (
       <p className="mt-3 text-muted">
@@ -19,6 +21,11 @@ export function SentVersions({ versions }: Pick<History, 'versions'>) {
           </strong>
           <div>
             Arrived {formatUtcInstant(version.arrivedAt)}, sent by {version.sentBy}
+          </div>
+          <div>
+            <TextLink href={paths.proposalHistory(reference, version.number)}>
+              How the text went on<span className="sr-only"> after version {version.number}</span>
+            </TextLink>
           </div>
           <div className="[overflow-wrap:anywhere] text-muted">
             Fingerprint {version.sha256.slice(0, 16)}, computed with {version.engineVersion}

@@ -7,5 +7,13 @@ type Access = 'read' | 'edit' | 'deputy'
 export interface PeopleActions {
   remove: Act<{ reference: string; id: number }>
   setAccess: Act<{ reference: string; id: number; access: Access }>
+  describe: Act<{
+    reference: string
+    id: number
+    institute: string
+    orcid: string
+    isStudent: boolean
+    isSupervisor: boolean
+  }>
   move: Act<{ reference: string; id: number; by: -1 | 1 }>
 }

@@ -29,9 +29,18 @@ export const proposalColumns: readonly TableColumn<ListedRow>[] = [
     head: 'Proposal',
     value: (row) => row.title,
     cell: (row) => (
-      <TextLink strong href={paths.proposal(row.reference)}>
-        {row.title || 'Without a title'}
-      </TextLink>
+      <>
+        <TextLink strong href={paths.proposal(row.reference)}>
+          {row.title || 'Without a title'}
+        </TextLink>
+        {row.continueIn === null ? null : (
+          <span className="mt-1 block leading-6 font-normal">
+            <TextLink plain href={paths.proposalContinue(row.reference)}>
+              Carry on in call {row.continueIn}
+            </TextLink>
+          </span>
+        )}
+      </>
     ),
   },
   { id: 'reference', head: 'Reference', value: (row) => row.reference },

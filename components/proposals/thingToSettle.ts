@@ -1,3 +1,4 @@
+import { isSpared, needOf } from '@/lib/domain/observations/rules'
 import type { FeasibilityCheck } from '@/lib/domain/observations/types'
 import type { ReadProposal } from '@/lib/domain/proposals/readProposal'
 import type { Missing } from '@/lib/domain/proposals/sections/finding'
@@ -13,9 +14,11 @@ export type ThingToSettle =
   | { kind: 'missing'; missing: Missing; others: number }
   | { kind: 'nothing' }
 
-/** The one thing worth doing next: a verdict against a required target first, then what is missing, then a doubt. */
+/** The one thing worth doing next: a verdict that harms the whole, against a required target first, then what is missing, then a doubt. */
 export function thingToSettle({ contents, computation, sections }: ReadProposal): ThingToSettle {
-  const needs = { required: 0, optional: 1, backup: 2 }
+  const needs = { required: 0, shared: 1, optional: 2, backup: 3 }
+  const isHarmless = (targetId: number, { verdict }: FeasibilityCheck) =>
+    isSpared({ targetId, verdict }, contents, computation)
   const found = computation.observations
     .flatMap((observation) => {
       const target = contents.targets.find(({ id }) => id === observation.targetId)
@@ -23,9 +26,11 @@ export function thingToSettle({ contents, computation, sections }: ReadProposal)
         ? observation.checks.map((check) => ({ check, target, observationId: observation.observationId }))
         : []
     })
-    .sort((a, b) => needs[a.target.need] - needs[b.target.need])
+    .sort((a, b) => needs[needOf(a.target, contents.groups)] - needs[needOf(b.target, contents.groups)])
   const asThing = (verdict: 'not-feasible' | 'marginal'): ThingToSettle | null => {
-    const first = found.find(({ check }) => check.verdict === verdict)
+    const first = found.find(
+      ({ check, target }) => check.verdict === verdict && !isHarmless(target.id, check),
+    )
     return first
       ? {
           kind: 'check',

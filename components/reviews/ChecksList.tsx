@@ -1,3 +1,4 @@
+import { GroupLine } from '@/components/observations/GroupLine'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import type { FeasibilityCheck } from '@/lib/domain/observations/types'
@@ -27,7 +28,7 @@ export function ChecksList({ proposal }: { proposal: AnonymousProposal }) {
     .sort((a, b) => rank[a.verdict] - rank[b.verdict])
   const open = rows.filter(({ verdict }) => verdict !== 'feasible')
   const clear = rows.filter(({ verdict }) => verdict === 'feasible')
-  const { checksClear, checksTotal, verdict } = proposal.computation
+  const { checksClear, checksTotal, groups, verdict } = proposal.computation
   return (
     <div>
       <p className="m-0 mb-3 text-table">
@@ -37,6 +38,11 @@ export function ChecksList({ proposal }: { proposal: AnonymousProposal }) {
           {proposal.computation.cosmologyName}.
         </span>
       </p>
+      {groups.map((group) => (
+        <div key={group.name} className="mb-3">
+          <GroupLine group={group} />
+        </div>
+      ))}
       {open.length > 0 ? <CheckTable caption="Checks that are not clear" rows={open} /> : null}
       {clear.length > 0 ? (
         <details className="mt-3">

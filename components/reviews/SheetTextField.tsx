@@ -3,6 +3,7 @@
 import { useEffect, useRef, useState, type ReactNode } from 'react'
 import { controlClasses } from '@/components/forms/controlClasses'
 import { FieldFrame } from '@/components/forms/FieldFrame'
+import { KeptCopyNotice } from '@/components/forms/KeptCopyNotice'
 import { StaleComparison } from '@/components/forms/StaleComparison'
 import { useAutosave } from '@/components/forms/useAutosave'
 import { classNames } from '@/components/ui/classNames'
@@ -33,8 +34,10 @@ export function SheetTextField(props: SheetTextFieldProps) {
   const [body, setBody] = useState(text.body)
   const version = useRef(text.version)
   const id = `text-${audience}`
+  const keepAs = `review-${assignmentId}-${audience}`
   const { state, saveNow, settle } = useAutosave({
     values: body,
+    keepAs,
     save: (values) => saving.during(save({ assignmentId, audience, body: values, version: version.current })),
     onSaved: (data) => {
       version.current = data.version
@@ -55,6 +58,16 @@ export function SheetTextField(props: SheetTextFieldProps) {
   const length = [...body].length
   return (
     <div>
+      {off ? null : (
+        <KeptCopyNotice
+          keepAs={keepAs}
+          onBringBack={(kept) => {
+            if (typeof kept !== 'string') return
+            setBody(kept)
+            onChange()
+          }}
+        />
+      )}
       <FieldFrame
         htmlFor={id}
         label={label}

@@ -1,4 +1,5 @@
 import { TableFrame } from '@/components/tables/TableFrame'
+import { awaitedWords } from '@/lib/domain/observations/rules'
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { ABSENT, formatNumber } from '@/lib/format'
 import { formatDeclination, formatRightAscension } from '@/lib/format/sexagesimal'
@@ -34,7 +35,14 @@ export function TargetsTable({ proposal }: { proposal: AnonymousProposal }) {
           const magnitude = target.brightness
           return (
             <tr key={target.id}>
-              <th scope="row">{target.name}</th>
+              <th scope="row">
+                {target.name}
+                {target.group || awaitedWords(target) ? (
+                  <span className="block max-w-72 text-caption font-normal text-muted">
+                    {[target.group, awaitedWords(target)].filter(Boolean).join('. ')}
+                  </span>
+                ) : null}
+              </th>
               <td className="whitespace-nowrap">
                 {target.raDeg === null ? ABSENT : formatRightAscension(target.raDeg)}
               </td>

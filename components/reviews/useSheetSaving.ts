@@ -3,7 +3,14 @@
 import { useCallback, useMemo, useRef, useState } from 'react'
 import type { AutosaveState } from '@/components/forms/autosaveState'
 
-const urgency: readonly AutosaveState['name'][] = ['stale', 'refused', 'failed', 'offline', 'saving']
+const urgency: readonly AutosaveState['name'][] = [
+  'stale',
+  'refused',
+  'signed-out',
+  'failed',
+  'offline',
+  'saving',
+]
 
 /** One line for all the parts of a sheet: the worst of what became of them, else the last that was saved. */
 function together(states: readonly AutosaveState[]): AutosaveState {

@@ -4,8 +4,10 @@ import { zodResolver } from '@hookform/resolvers/zod'
 import { useEffect, useRef, useState } from 'react'
 import { useForm, type DefaultValues, type FieldValues, type Path, type UseFormReturn } from 'react-hook-form'
 import type { z } from 'zod'
+import { stateAfterRefusal, type AutosaveState } from '@/components/forms/autosaveState'
 import { savingStore } from '@/components/proposals/savingStore'
 import type { ActionResult } from '@/lib/actions/result'
+import { useRowCopy } from './useRowCopy'
 
 type Failure = Extract<ActionResult<unknown>, { ok: false }>
 export type StaleRow = NonNullable<Failure['stale']>
@@ -28,8 +30,18 @@ export interface SelfSavingRowOptions<Row extends FieldValues, Values, Kept exte
   kept: Kept | null
   empty: Row
   rowOf: (kept: Kept) => Row
+  /** Name of the copy kept in this browser of what is not saved; null for a row that cannot be typed into. */
+  keepAs: string | null
   /** Saves against the version it was read with; null makes a new one. */
   save: (row: Row, version: number | null) => Promise<ActionResult<Kept>>
+}
+
+/** What a refusal means for the words in the strip; a lost session is told apart, as its cure is another. */
+function stateOf(failure: Failure): AutosaveState {
+  const state = stateAfterRefusal(failure, 0)
+  return state.name === 'failed'
+    ? { name: 'refused', message: failure.message, fieldErrors: failure.fieldErrors }
+    : state
 }
 
 const text = (row: object) =>
@@ -39,7 +51,7 @@ const text = (row: object) =>
 export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends { version: number }>(
   options: SelfSavingRowOptions<Row, Values, Kept>,
 ): SelfSavingRow<Row, Values> {
-  const { schema, kept, empty, rowOf, save } = options
+  const { schema, kept, empty, rowOf, keepAs, save } = options
   const [first] = useState<Row>(() => (kept ? rowOf(kept) : empty))
   const known = useRef<Row>(first)
   const version = useRef<number | null>(kept?.version ?? null)
@@ -65,22 +77,35 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     form.reset(known.current)
   }, [kept, form, rowOf])
 
+  const copy = useRowCopy<Row>({
+    keepAs,
+    unsaved: () => {
+      const row = form.getValues()
+      return text(row) === text(known.current) ? null : { row, version: version.current }
+    },
+    bringBack: (kept) => {
+      const row = { ...empty, ...kept.row }
+      if (text(row) === text(known.current)) return copy.drop()
+      version.current = kept.version
+      for (const [name, value] of Object.entries(row)) form.setValue(name as Path<Row>, value as never)
+      void commit()
+    },
+  })
+
   const refused = (failure: Failure) => {
     const { fieldErrors, message: sentence } = failure
     for (const [field, words] of Object.entries(fieldErrors))
       form.setError(field.replace(/^row\./, '') as Path<Row>, { type: 'server', message: words })
     setStale(failure.stale ?? null)
+    copy.keep()
     setMessage(Object.keys(fieldErrors).length > 0 || failure.stale ? null : sentence)
-    savingStore.report(
-      failure.stale
-        ? { name: 'stale', stale: failure.stale }
-        : { name: 'refused', message: sentence, fieldErrors },
-    )
+    savingStore.report(stateOf(failure))
   }
 
   const send = async (row: Row) => {
     const result = await save(row, version.current)
     if (!result.ok) return refused(result)
+    copy.drop()
     known.current = row
     version.current = result.data.version
     savingStore.report({ name: 'saved', at: new Date() })
@@ -101,6 +126,7 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     try {
       await send({ ...form.getValues() })
     } catch {
+      copy.keep()
       savingStore.report({ name: 'offline' })
       setMessage(
         'The observatory did not answer. What you typed is still here; it is saved with the next change.',
@@ -125,6 +151,7 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     },
     takeTheirs: () => {
       if (!stale) return
+      copy.drop()
       known.current = { ...empty, ...(stale.theirs as Partial<Row>) }
       version.current = stale.version
       form.reset(known.current)

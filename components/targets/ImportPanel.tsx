@@ -126,6 +126,7 @@ export function ImportPanel({ contents, importRows }: ImportPanelProps) {
             incoming={incoming}
             reference={contents.reference}
             others={contents.targets.length}
+            groups={contents.groups}
             importRows={importRows}
           />
         ) : (

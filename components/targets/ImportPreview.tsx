@@ -4,6 +4,8 @@ import { useState } from 'react'
 import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
+import type { TargetGroup } from '@/lib/domain/proposals/types'
+import { unknownGroups } from '@/lib/domain/targetGroups/rules'
 import { mostTargets } from '@/lib/domain/targets/rules'
 import { countInWords, formatList, formatNumber, formatUtcClock } from '@/lib/format'
 import { cellNames } from './cellNames'
@@ -17,11 +19,13 @@ export interface ImportPreviewProps {
   reference: string
   /** How many targets the proposal holds already. */
   others: number
+  /** The groups it has. */
+  groups: readonly TargetGroup[]
   importRows: TargetActions['importRows']
 }
 
 /** What a file holds: counts, the first thing wrong, and the rows to be looked at and mended. */
-export function ImportPreview({ file, incoming, reference, others, importRows }: ImportPreviewProps) {
+export function ImportPreview({ file, incoming, reference, others, groups, importRows }: ImportPreviewProps) {
   const [showsRows, setShowsRows] = useState(false)
   const [busy, setBusy] = useState(false)
   const count = (standing: string) => incoming.standings.filter((one) => one === standing).length
@@ -31,6 +35,10 @@ export function ImportPreview({ file, incoming, reference, others, importRows }:
   const fresh = count('new')
   const present = file.rows.length - bad - fresh
   const isTooMany = fresh + others > mostTargets || file.rows.length > mostTargets
+  const made = unknownGroups(
+    groups,
+    file.rows.map(({ row }) => ({ group: row.group.trim() || null })),
+  )
   const taken = file.mapping.filter((column) => column !== null)
   const leftOut = file.table.columns.flatMap(({ name }, index) =>
     file.mapping[index] ? [] : name || `column ${index + 1}`,
@@ -90,6 +98,13 @@ export function ImportPreview({ file, incoming, reference, others, importRows }:
           </>
         ) : null}
       </dl>
+      {made.length > 0 ? (
+        <p className="mt-3 text-table">
+          {made.length === 1
+            ? `The group ${made[0]} is not here yet: it is made, all of its targets wanted.`
+            : `${countInWords(made.length, 'group', 'groups', true)} not here yet are made, all of their targets wanted: ${formatList(made)}.`}
+        </p>
+      ) : null}
       {isTooMany ? (
         <p className="mt-3 text-table font-semibold text-not-feasible">
           {`A proposal holds at most ${mostTargets} targets; with these ${formatNumber(file.rows.length, 0)} rows it would hold ${formatNumber(fresh + bad + others, 0)}.`}

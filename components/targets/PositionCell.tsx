@@ -18,7 +18,8 @@ export interface PositionCellProps {
 /** Right ascension and declination as typed, and the degrees they were understood as. */
 export function PositionCell({ name, row, readOnly, messageId }: PositionCellProps) {
   const { control, setValue } = useFormContext<TargetRow>()
-  const [ra = '', dec = ''] = useWatch({ control, name: ['ra', 'dec'] })
+  const [ra = '', dec = '', event = ''] = useWatch({ control, name: ['ra', 'dec', 'event'] })
+  const isAwaited = event !== ''
   const read = { ra: parseRightAscension(ra), dec: parseDeclination(dec) }
 
   // A whole position pasted into either half fills both.
@@ -37,9 +38,14 @@ export function PositionCell({ name, row, readOnly, messageId }: PositionCellPro
           {...shared}
           name="ra"
           label={`Right ascension of ${name}`}
-          placeholder="h m s or degrees"
+          placeholder={isAwaited ? 'none yet' : 'h m s or degrees'}
         />
-        <TypedCell {...shared} name="dec" label={`Declination of ${name}`} placeholder="± d m s" />
+        <TypedCell
+          {...shared}
+          name="dec"
+          label={`Declination of ${name}`}
+          placeholder={isAwaited ? 'none yet' : '± d m s'}
+        />
       </span>
       {read.ra.ok && read.dec.ok ? (
         <ReadBack>

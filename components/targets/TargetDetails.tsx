@@ -7,26 +7,49 @@ import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { DetailGroup } from './DetailGroup'
+import { SpectrumFields } from './SpectrumFields'
 import { frames, lineKinds, lines, provenances, redshiftKinds, shapes } from './detailChoices'
 
 export interface TargetDetailsProps {
   readOnly: string | null
+  /** Whether what is awaited may be asked for. */
+  takesAwaited: boolean
   onUp: (() => void) | null
   onDown: (() => void) | null
   onRemove: (() => void) | null
+  /** Saves the row as it stands. */
+  onSave: () => void
 }
 
 /**
- * What does not fit in a row, in groups: redshift, magnitude, a line, shape, what lies on the way, motion; and moving
+ * What does not fit in a row, in groups: redshift, magnitude, spectrum, a line, shape, what lies on the way, motion; and moving
  * or taking out the row.
  */
-export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetailsProps) {
+export function TargetDetails({
+  readOnly,
+  takesAwaited,
+  onUp,
+  onDown,
+  onRemove,
+  onSave,
+}: TargetDetailsProps) {
   const id = useId()
   const shared = { offReason: readOnly ?? undefined }
   const number = { ...shared, width: 'full' } as const
   return (
     <ActionFormContext value={{ id, busy: false }}>
       <div className="grid gap-x-10 gap-y-6 border-t border-rule py-4 md:grid-cols-2 xl:grid-cols-3">
+        {takesAwaited ? (
+          <DetailGroup
+            title="What is awaited"
+            note="For a target that has not happened yet: leave its position empty and fill in all four. Hours are asked for each trigger."
+          >
+            <TextField name="event" label="Class of event" {...shared} />
+            <TextField name="trigger" label="What triggers it" {...shared} />
+            <NumberField name="reaction" label="Observed within" unit="h" {...number} />
+            <NumberField whole name="triggers" label="Triggers asked for" {...number} />
+          </DetailGroup>
+        ) : null}
         <DetailGroup title="The redshift">
           <SelectField name="redshiftType" label="Redshift is" options={redshiftKinds} {...shared} />
           <NumberField name="redshiftError" label="Its error" {...number} />
@@ -37,6 +60,7 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
           <NumberField name="magnitudeError" label="Its error" unit="mag" {...number} />
           <TextField name="source" label="Its source" {...shared} />
         </DetailGroup>
+        <SpectrumFields readOnly={readOnly} onSave={onSave} />
         <DetailGroup title="The shape">
           <SelectField name="geometry" label="Shape" options={shapes} {...shared} />
           <NumberField name="effectiveRadius" label="Half-light radius" unit="″" {...number} />
@@ -51,7 +75,7 @@ export function TargetDetails({ readOnly, onUp, onDown, onRemove }: TargetDetail
         </DetailGroup>
         <DetailGroup
           title="On the way"
-          note="Applied to what is predicted; what was observed has been through it."
+          note="Applied to what is predicted. Of what was observed only the colour changes, where a spectrum is stated."
         >
           <NumberField name="ebv" label="E(B−V) by SFD" unit="mag" {...number} />
           <NumberField name="magnification" label="Magnification" {...number} />

@@ -41,7 +41,8 @@ export function TargetTable({ shown, totals, maxAirmass, months, ...props }: Tar
   const visible = new Set(table.getVisibleLeafColumns().map((column) => column.id))
   const columns = numberColumns.filter(({ id }) => visible.has(id))
   const rows = table.getRowModel().rows.map((row) => row.original)
-  const required = rows.filter(({ target }) => target.need === 'required').length
+  const required = rows.filter(({ target }) => target.group === null && target.need === 'required').length
+  const grouped = rows.filter(({ target }) => target.group !== null).length
 
   return (
     <TableFrame caption="Targets" phone="cards">
@@ -101,7 +102,10 @@ export function TargetTable({ shown, totals, maxAirmass, months, ...props }: Tar
           <td role="cell" className="is-blank" />
           <td role="cell" colSpan={4 + columns.length + 1} data-head="All">
             {countInWords(rows.length, 'target', 'targets', true)}
-            {required < rows.length ? `, ${required} required` : ''}
+            {required > 0 && required < rows.length ? `, ${required} required` : ''}
+            {grouped > 0
+              ? `, ${grouped === rows.length ? 'all' : countInWords(grouped, '', '').trim()} in ${countInWords(props.groups.length, 'group')}`
+              : ''}
           </td>
           <td role="cell" className="is-right is-computed" data-head="Needed, h">
             {formatNumber(totals.neededSeconds / 3600, 1)}

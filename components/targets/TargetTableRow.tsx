@@ -6,22 +6,24 @@ import { FormProvider, useWatch } from 'react-hook-form'
 import { classNames } from '@/components/ui/classNames'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { ABSENT } from '@/lib/format'
+import { awaitedWords } from '@/lib/domain/observations/rules'
 import { bandChoice, emptyTargetRow, magnitudeBands, targetRow } from '@/lib/domain/targets/rules'
 import { targetRowSchema, type TargetRow } from '@/lib/domain/targets/schema'
 import { AskedCell } from './AskedCell'
 import { CellSelect } from '@/components/rows/CellSelect'
+import { CountsNote } from './CountsNote'
 import { DarkHoursCell } from './DarkHoursCell'
 import { NeededCell } from './NeededCell'
 import { NumberCell } from './NumberCell'
 import { PositionCell } from './PositionCell'
 import { hasMessages, RowMessages } from '@/components/rows/RowMessages'
 import { cellNames } from './cellNames'
+import { StandingSelect } from './StandingSelect'
 import { TargetDetails } from './TargetDetails'
 import { TypedCell } from '@/components/rows/TypedCell'
 import type { RowView, TargetTableProps } from './targetTableTypes'
 import { useSelfSavingRow } from '@/components/rows/useSelfSavingRow'
 
-const needs = ['required', 'optional', 'backup'].map((value) => ({ value, label: value }))
 const bandOptions = magnitudeBands.map(({ band, system }) => {
   const value = bandChoice(band, system)
   return { value, label: value }
@@ -46,6 +48,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
     kept: view.kept,
     empty: emptyTargetRow,
     rowOf: targetRow,
+    keepAs: readOnly === null ? `target-${reference}-${view.kept?.id ?? key}` : null,
     save: (values, version) => onSave(key, values, version),
   })
   const { form, commit } = row
@@ -53,6 +56,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
   const isWrong = hasMessages(form.formState.errors, row, asking)
   const name = typed.name.trim() || `target ${number}`
   const isOff = readOnly !== null
+  const awaited = awaitedWords(target)
 
   useEffect(() => onTyped(key, typed), [key, typed, onTyped])
 
@@ -75,20 +79,17 @@ export function TargetTableRow(props: TargetTableRowProps) {
         role="row"
         id={view.kept ? `target-${view.kept.id}` : undefined}
         onBlur={leave}
-        className={classNames((isWrong || isOpen) && 'has-detail', isWrong && 'is-attention')}
+        className={classNames(
+          (isWrong || isOpen || awaited !== null) && 'has-detail',
+          isWrong && 'is-attention',
+        )}
       >
         <td role="cell" className="w-7 text-muted max-sm:!hidden">
           {number}
         </td>
         <th role="rowheader" scope="row" className="min-w-36">
           <TypedCell {...cell} name="name" label={`Name of target ${number}`} strong placeholder="Name" />
-          <CellSelect
-            name="need"
-            label={`How much ${name} is needed`}
-            options={needs}
-            readOnly={isOff}
-            onChosen={save}
-          />
+          <StandingSelect name={name} groups={props.groups} readOnly={isOff} onChosen={save} />
         </th>
         <td role="cell" data-head="Position" className="min-w-56">
           <span className="block max-sm:w-60">
@@ -155,6 +156,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
               readOnly={isOff}
               onMessage={setAsking}
             />
+            {observations.length > 0 ? <CountsNote times={view.times} /> : null}
           </span>
         </td>
         <td role="cell" data-head="Verdict" className="whitespace-nowrap">
@@ -172,17 +174,20 @@ export function TargetTableRow(props: TargetTableRowProps) {
           </span>
         </td>
       </tr>
-      {isWrong || isOpen || computed?.refusal ? (
+      {isWrong || isOpen || computed?.refusal || awaited ? (
         <tr role="row" className={classNames('is-detail', isWrong && 'is-attention')} onBlur={save}>
           <td role="cell" colSpan={span} className="sm:!pl-7">
             {computed?.refusal ? <p className="m-0 pb-1 text-not-feasible">{computed.refusal}</p> : null}
+            {awaited ? <p className="m-0 max-w-prose pb-1 text-muted">{awaited}</p> : null}
             <RowMessages id={messageId} row={row} cellNames={cellNames} extra={asking} />
             {isOpen ? (
               <TargetDetails
                 readOnly={readOnly}
+                takesAwaited={props.takesAwaited || target.opportunity !== null}
                 onUp={view.kept && !props.isFirst ? () => onMove(key, -1) : null}
                 onDown={view.kept && !props.isLast ? () => onMove(key, 1) : null}
                 onRemove={() => onRemove(key)}
+                onSave={save}
               />
             ) : null}
           </td>

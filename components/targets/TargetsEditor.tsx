@@ -7,11 +7,13 @@ import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { formatCalendarDate } from '@/lib/format'
+import { takesOpportunities } from '@/lib/domain/calls/rules'
 import { comparisonOf } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
 import { ColumnChooser } from './ColumnChooser'
 import { ExportLinks } from './ExportLinks'
+import { TargetGroups } from './groups/TargetGroups'
 import { ImportPanel } from './ImportPanel'
 import { numberColumns, type NumberColumnId } from './numberColumns'
 import { rowViews } from './rowViews'
@@ -53,6 +55,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
   }, [rows.length])
 
   const { cosmologyName, engineVersion } = live
+  const takesAwaited = takesOpportunities(contents.kind)
   const { seasonFrom, seasonTo } = contents.call
   const fullBar = Math.max(
     1,
@@ -72,7 +75,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
         title="Targets"
         lead={
           readOnly ??
-          `Dotted cells are yours to type in; tinted columns are computed under ${cosmologyName}. Every row saves itself.`
+          `Dotted cells are yours to type in; tinted columns are computed under ${cosmologyName}. Every row saves itself.${takesAwaited ? ' What has not happened yet has no position: open its row and say what triggers it.' : ''}`
         }
         actions={
           <>
@@ -104,6 +107,8 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
               engineVersion,
             }}
             season={{ seasonFrom, seasonTo, fullBar }}
+            groups={contents.groups.map(({ name }) => name)}
+            takesAwaited={takesAwaited}
             actions={actions}
             onTyped={onTyped}
             onSave={onSave}
@@ -112,8 +117,14 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
           />
         )}
       </div>
+      <TargetGroups
+        contents={contents}
+        computed={live.groups}
+        readOnly={readOnly !== null}
+        actions={actions}
+      />
       {readOnly ? null : (
-        <div className="mt-6">
+        <div className="mt-10">
           <ImportPanel contents={contents} importRows={actions.importRows} />
         </div>
       )}

@@ -6,6 +6,13 @@ export const shapes = [
   { value: 'uniform', label: 'uniform disc' },
 ]
 
+export const spectra = [
+  { value: 'flat', label: 'flat in f_ν' },
+  { value: 'power-law', label: 'power law' },
+  { value: 'black-body', label: 'black body' },
+  { value: 'table', label: 'from a table' },
+]
+
 export const redshiftKinds = [
   { value: 'spectroscopic', label: 'spectroscopic' },
   { value: 'photometric', label: 'photometric' },

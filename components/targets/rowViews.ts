@@ -29,6 +29,7 @@ export function rowViews(
       observationNumbers: numbers,
       neededSeconds: isKnown ? numbers.reduce((sum, one) => sum + (one.neededSeconds ?? 0), 0) : null,
       verdict: worstVerdict(numbers.map((one) => one.verdict)),
+      times: numbers[0]?.times ?? null,
       maxAirmass: conditionsOf(contents, observations[0]).maxAirmass,
     }
   })

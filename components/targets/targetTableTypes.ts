@@ -18,6 +18,8 @@ export interface RowView {
   neededSeconds: number | null
   verdict: Verdict | null
   maxAirmass: number
+  /** How often its hours count in those asked; null while nothing observes it. */
+  times: number | null
 }
 
 export interface TargetTableProps {
@@ -28,6 +30,10 @@ export interface TargetTableProps {
   readOnly: string | null
   numbers: { cosmologyName: string; comparisonName: string | null; engineVersion: string }
   season: { seasonFrom: string; seasonTo: string; fullBar: number }
+  /** Names of the groups of the proposal. */
+  groups: readonly string[]
+  /** Whether what is awaited may be asked for. */
+  takesAwaited: boolean
   actions: TargetActions
   onTyped: (key: string, row: TargetRow) => void
   onSave: (key: string, row: TargetRow, version: number | null) => Promise<ActionResult<Target>>

@@ -1,6 +1,7 @@
 'use client'
 
-import { useCallback, useMemo, useRef, useState } from 'react'
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react'
+import { browserCopy } from '@/components/forms/browserCopy'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
@@ -22,6 +23,16 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
   const [typed, setTyped] = useState<Readonly<Record<string, TargetRow>>>({})
   // Known at once, before the page comes back with the new row: a second save must not add it again.
   const ids = useRef(new Map<string, number>())
+
+  // Rows begun in this browser and never saved, as the page was closed: each brings back what it held.
+  useEffect(() => {
+    const start = `target-${reference}-`
+    const left = browserCopy.keysFrom(`${start}begun-`).map((key) => key.slice(start.length))
+    if (left.length === 0) return
+    // After the page stands as the server made it.
+    const timer = setTimeout(() => setBegun((before) => [...new Set([...before, ...left])]), 0)
+    return () => clearTimeout(timer)
+  }, [reference])
 
   const places = useMemo((): RowPlace[] => {
     const live = (key: string, seat: Pick<Target, 'id' | 'position' | 'version'>, kept: Target | null) => {
@@ -70,7 +81,10 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
   const onRemove = useCallback(
     async (key: string) => {
       const kept = places.find((place) => place.key === key)?.kept
-      const forget = () => setBegun((before) => before.filter((one) => one !== key))
+      const forget = () => {
+        browserCopy.drop(`target-${reference}-${key}`)
+        setBegun((before) => before.filter((one) => one !== key))
+      }
       if (!kept) return forget()
       const result = await actions.remove({ reference, id: kept.id })
       if (!result.ok) return showToast(result.message)

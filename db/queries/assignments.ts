@@ -87,17 +87,22 @@ export async function setSeat(db: Database, id: number, seat: AssignmentsRow['se
     .update({ seat, version: db.raw('version + 1') as unknown as number })
 }
 
-/** Pages of the justification sent, by proposal: what a reviewer has to read. */
+/** Pages of the justification sent, by proposal: what a reviewer has to read. A page set by us holds some 3,600 characters. */
 export async function pagesToRead(
   db: Database,
   proposalIds: readonly number[],
 ): Promise<Map<number, number>> {
   const rows = await db('proposal_versions as v')
-    .join('papers as a', 'a.id', 'v.paper_id')
+    .leftJoin('papers as a', 'a.id', 'v.paper_id')
     .whereIn('v.proposal_id', proposalIds)
     .whereNull('v.superseded_at')
-    .select('v.proposal_id as proposalId', 'a.pages')
-  return new Map(rows.map((row) => [row.proposalId as number, row.pages]))
+    .select<{ proposalId: number; pages: number }[]>(
+      'v.proposal_id as proposalId',
+      db.raw(
+        `COALESCE(a.pages, CEIL(CHAR_LENGTH(JSON_VALUE(v.snapshot, '$.contents.writings.justification.text')) / 3600), 1) AS pages`,
+      ),
+    )
+  return new Map(rows.map((row) => [row.proposalId, Number(row.pages)]))
 }
 
 /** When each reviewer of a panel went through the list of names, for those who have. */

@@ -1,26 +1,46 @@
 import type { SentSize } from '../../lib/domain/calls/sentSize.ts'
+import { countWords } from '../../lib/writing/countWords.ts'
+import { parseText } from '../../lib/writing/parseText.ts'
 import type { Database } from '../client.ts'
 import type { CallKindsRow } from '../tables.ts'
 
+interface SentRow {
+  kindId: number
+  panelId: number | null
+  /** Null where the justification was written here. */
+  pages: number | null
+  abstract: string | null
+  text: string | null
+  figures: number | null
+  askedSeconds: string | null
+}
+
 /** How long and how large what was sent in a call is, by kind; what was withdrawn or lapsed does not count. */
 export async function sentSizes(db: Database, callId: number): Promise<SentSize[]> {
+  const value = (path: string) => db.raw('JSON_VALUE(v.snapshot, ?)', [path])
   const rows = (await db('proposals as p')
     .join('proposal_versions as v', (on) => on.on('v.proposal_id', 'p.id').andOnNull('v.superseded_at'))
-    .join('papers as a', 'a.id', 'v.paper_id')
+    .leftJoin('papers as a', 'a.id', 'v.paper_id')
     .where('p.call_id', callId)
     .whereNotIn('p.state', ['withdrawn', 'lapsed'])
-    .select('p.call_kind_id as kindId', 'p.panel_id as panelId', 'a.pages', 'a.words', {
-      abstract: db.raw("JSON_VALUE(v.snapshot, '$.contents.abstract')"),
-      askedSeconds: db.raw("JSON_VALUE(v.snapshot, '$.computation.askedSeconds')"),
-    })) as (Omit<SentSize, 'abstractLength' | 'askedSeconds'> & {
-    abstract: string | null
-    askedSeconds: string | null
-  })[]
-  return rows.map(({ abstract, askedSeconds, ...row }) => ({
-    ...row,
-    abstractLength: [...(abstract ?? '')].length,
-    askedSeconds: Number(askedSeconds ?? 0),
-  }))
+    .select('p.call_kind_id as kindId', 'p.panel_id as panelId', 'a.pages', {
+      abstract: value('$.contents.abstract'),
+      text: value('$.contents.writings.justification.text'),
+      figures: db.raw("JSON_LENGTH(v.snapshot, '$.contents.figures')"),
+      askedSeconds: value('$.computation.askedSeconds'),
+    })) as SentRow[]
+  return rows.map(({ kindId, panelId, pages, abstract, text, figures, askedSeconds }) => {
+    const isWritten = pages === null
+    return {
+      kindId,
+      panelId,
+      pages: pages ?? 0,
+      words: isWritten ? countWords(parseText(text ?? '')) : 0,
+      figures: isWritten ? (figures ?? 0) : 0,
+      abstractLength: [...(abstract ?? '')].length,
+      askedSeconds: Number(askedSeconds ?? 0),
+    }
+  })
 }
 
 /** Proposals of each kind of a call, drafts and put-away ones with them. */
@@ -44,6 +64,7 @@ export type KindChange = Pick<
   | 'abstract_limit'
   | 'max_seconds'
   | 'panel_id'
+  | 'needs_student'
 >
 
 export async function insertKind(db: Database, callId: number, kind: KindChange): Promise<number> {

@@ -47,12 +47,13 @@ function kindOf(row: CallKindsRow): CallKind {
     title: row.title,
     closesAt: row.closes_at,
     pageLimit: row.page_limit,
-    abstractLimit: row.abstract_limit,
     wordLimit: row.word_limit,
+    abstractLimit: row.abstract_limit,
     figureLimit: row.figure_limit,
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,
+    needsStudent: row.needs_student === 1,
   }
 }
 

@@ -233,10 +233,11 @@ export interface Correspondent {
   name: string
 }
 
-/** Everyone named on a proposal, in order. */
+/** Everyone who has agreed to be named on a proposal, in order. */
 export function correspondents(db: Database, proposalId: number): Promise<Correspondent[]> {
   return db('proposal_people')
     .where({ proposal_id: proposalId })
+    .whereNotNull('confirmed_at')
     .orderBy('position')
     .select<Correspondent[]>({ personId: 'person_id', email: 'email', name: 'name' })
 }

@@ -18,6 +18,16 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE o.id IS NULL`,
   ],
   [
+    'I1 a version without a paper carries its text',
+    `SELECT v.id FROM proposal_versions v
+      WHERE v.paper_id IS NULL AND COALESCE(JSON_VALUE(v.snapshot, '$.contents.writings.justification.text'), '') = ''`,
+  ],
+  [
+    'I1 every figure that stands is stored as a picture',
+    `SELECT f.id FROM figures f LEFT JOIN stored_objects o ON o.id = f.object_id
+      WHERE f.removed_at IS NULL AND (o.id IS NULL OR o.purpose <> 'figure')`,
+  ],
+  [
     'I1 every version has its confirmation letter',
     `SELECT v.id FROM proposal_versions v
       WHERE NOT EXISTS (SELECT 1 FROM outbox b WHERE b.template = 'proposal-sent' AND b.dedupe_key LIKE CONCAT('sent:', v.proposal_id, ':', v.version_number, ':%'))`,
@@ -81,6 +91,20 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
   [
     'I8 version numbers run from one without a gap',
     `SELECT proposal_id FROM proposal_versions GROUP BY proposal_id HAVING MAX(version_number) <> COUNT(*) OR MIN(version_number) <> 1`,
+  ],
+  [
+    'I9 a target stands in a group of its own proposal',
+    'SELECT t.id FROM targets t JOIN target_groups g ON g.id = t.group_id WHERE g.proposal_id <> t.proposal_id',
+  ],
+  [
+    'I9 a group says how many it wants where its rule asks for it, and only there',
+    "SELECT id FROM target_groups WHERE (rule = 'at-least') <> (at_least IS NOT NULL AND at_least > 0)",
+  ],
+  [
+    'I9 only a kind of proposal that takes it waits for a target, and then says all of it',
+    `SELECT t.id FROM targets t JOIN proposals p ON p.id = t.proposal_id JOIN call_kinds k ON k.id = p.call_kind_id
+      WHERE t.opportunity_class IS NOT NULL
+        AND (k.kind <> 'opportunity' OR t.opportunity_trigger IS NULL OR t.opportunity_reaction_s IS NULL OR t.opportunity_count IS NULL)`,
   ],
 ]
 

@@ -10,6 +10,8 @@ export interface NewInvitation {
   callId: number | null
   panelId: number | null
   instrumentId: number | null
+  /** For an investigator named on a proposal. */
+  proposalId?: number
   invitedBy: number
   lifeDays: number
 }
@@ -23,6 +25,7 @@ export async function insertInvitation(db: Database, invitation: NewInvitation):
     call_id: invitation.callId,
     panel_id: invitation.panelId,
     instrument_id: invitation.instrumentId,
+    proposal_id: invitation.proposalId ?? null,
     invited_by: invitation.invitedBy,
     expires_at: utcIn(db, 86_400 * invitation.lifeDays),
   })
@@ -33,6 +36,8 @@ export interface OpenInvitation extends InvitationsRow {
   call_number: number | null
   panel_name: string | null
   instrument_name: string | null
+  proposal_reference: string | null
+  proposal_title: string | null
   inviter: string | null
 }
 
@@ -42,6 +47,7 @@ export async function findOpenInvitation(db: Database, tokenHash: string): Promi
     .leftJoin('calls as c', 'c.id', 'i.call_id')
     .leftJoin('panels as p', 'p.id', 'i.panel_id')
     .leftJoin('instruments as n', 'n.id', 'i.instrument_id')
+    .leftJoin('proposals as r', 'r.id', 'i.proposal_id')
     .leftJoin('people as b', 'b.id', 'i.invited_by')
     .where('i.token_hash', tokenHash)
     .whereNull('i.accepted_at')
@@ -52,6 +58,8 @@ export async function findOpenInvitation(db: Database, tokenHash: string): Promi
       'c.number as call_number',
       'p.name as panel_name',
       'n.name as instrument_name',
+      'r.reference as proposal_reference',
+      'r.title as proposal_title',
       'b.name as inviter',
     )
   return row ?? null
@@ -74,6 +82,25 @@ export async function withdrawInvitation(db: Database, id: number): Promise<bool
     .whereNull('withdrawn_at')
     .update({ withdrawn_at: utcNow(db) })
   return changed === 1
+}
+
+/** Stops the links of someone who is named on a proposal no longer. */
+export async function withdrawNaming(db: Database, proposalId: number, email: string): Promise<void> {
+  await db('invitations')
+    .where({ proposal_id: proposalId, email })
+    .whereNull('accepted_at')
+    .whereNull('withdrawn_at')
+    .update({ withdrawn_at: utcNow(db) })
+}
+
+/** Ties the name on a proposal to the account that accepted its invitation. */
+export async function tieInvestigator(
+  db: Database,
+  given: { proposalId: number; email: string; personId: number },
+): Promise<void> {
+  await db('proposal_people')
+    .where({ proposal_id: given.proposalId, email: given.email })
+    .update({ person_id: given.personId })
 }
 
 /** The next free number on a panel, under a lock, so that two members never share one. */

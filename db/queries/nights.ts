@@ -41,3 +41,27 @@ export async function offerOfCall(db: Database, callId: number): Promise<Telesco
     darkSeconds: Number(row.dark_seconds),
   }))
 }
+
+export interface ScienceBlock {
+  telescopeId: number
+  /** Mounted that night, where that is set. */
+  instrumentId: number | null
+  eveningDate: string
+  /** Part of the dark time, as fractions of it. */
+  from: number
+  to: number
+}
+
+/** Parts of nights that a call gives to science, in the order of their evenings. */
+export async function scienceBlocks(db: Database, callId: number): Promise<ScienceBlock[]> {
+  const rows = await db('night_blocks')
+    .where({ call_id: callId, use_for: 'science' })
+    .orderBy(['evening_date', 'telescope_id', 'fraction_from'])
+  return rows.map((row) => ({
+    telescopeId: row.telescope_id,
+    instrumentId: row.instrument_id,
+    eveningDate: row.evening_date,
+    from: Number(row.fraction_from),
+    to: Number(row.fraction_to),
+  }))
+}

@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { FeesRow, ProposalsRow } from '../tables.ts'
+import { askedTime } from './askedTime.ts'
 
 export interface OfficeProposal {
   reference: string
@@ -22,6 +23,7 @@ export interface OfficeProposal {
 }
 
 interface Row {
+  id: number
   reference: string
   review_number: string | null
   title: string
@@ -31,7 +33,6 @@ interface Row {
   lead: string | null
   arrived_at: Date | null
   version_number: number | null
-  asked: string | null
   fee_state: FeesRow['state'] | null
   fee_minor: number | null
   paid: string | null
@@ -40,7 +41,7 @@ interface Row {
   waiver_reason: string | null
 }
 
-/** Proposals of a call as the office sees them: who sent what and when, and what was paid. One query. */
+/** Proposals of a call as the office sees them: who sent what and when, and what was paid. Two queries. */
 export async function proposalsOfCall(db: Database, callId: number): Promise<OfficeProposal[]> {
   const rows = await db('proposals as p')
     .join('call_kinds as k', 'k.id', 'p.call_kind_id')
@@ -53,6 +54,7 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     .where('p.call_id', callId)
     .orderBy('p.id')
     .select<Row[]>(
+      'p.id',
       'p.reference',
       'p.review_number',
       'p.title',
@@ -66,7 +68,6 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
       'f.amount_minor as fee_minor',
       'w.id as waiver_id',
       'w.reason as waiver_reason',
-      db.raw('(SELECT SUM(o.asked_seconds) FROM observations o WHERE o.proposal_id = p.id) AS asked'),
       db.raw(
         "(SELECT SUM(m.amount_minor) FROM payments m WHERE m.fee_id = f.id AND m.state = 'succeeded') AS paid",
       ),
@@ -74,6 +75,10 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
         "(SELECT SUM(r.amount_minor) FROM refunds r JOIN payments m ON m.id = r.payment_id WHERE m.fee_id = f.id AND r.state = 'succeeded') AS refunded",
       ),
     )
+  const asked = await askedTime(
+    db,
+    rows.map(({ id }) => id),
+  )
   return rows.map((row) => ({
     reference: row.reference,
     reviewNumber: row.review_number,
@@ -84,7 +89,7 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     lead: row.lead ?? '',
     arrivedAt: row.arrived_at,
     versionNumber: row.version_number,
-    askedSeconds: Number(row.asked ?? 0),
+    askedSeconds: asked.get(row.id) ?? 0,
     feeState: row.fee_state,
     feeMinor: row.fee_minor,
     paidMinor: Number(row.paid ?? 0),

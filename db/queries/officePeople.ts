@@ -62,24 +62,28 @@ export interface OpenInvitationLine {
 
 /** Invitations not yet accepted or taken back. */
 export async function listOpenInvitations(db: Database): Promise<OpenInvitationLine[]> {
-  return db('invitations as i')
-    .leftJoin('calls as c', 'c.id', 'i.call_id')
-    .leftJoin('panels as p', 'p.id', 'i.panel_id')
-    .leftJoin('instruments as n', 'n.id', 'i.instrument_id')
-    .whereNull('i.accepted_at')
-    .whereNull('i.withdrawn_at')
-    .andWhere('i.expires_at', '>', utcNow(db))
-    .orderBy('i.id', 'desc')
-    .select<OpenInvitationLine[]>(
-      'i.id',
-      'i.name',
-      'i.email',
-      'i.role',
-      'p.name as panel',
-      'c.number as call',
-      'n.name as instrument',
-      'i.expires_at as expiresAt',
-    )
+  return (
+    db('invitations as i')
+      .leftJoin('calls as c', 'c.id', 'i.call_id')
+      .leftJoin('panels as p', 'p.id', 'i.panel_id')
+      .leftJoin('instruments as n', 'n.id', 'i.instrument_id')
+      .whereNull('i.accepted_at')
+      .whereNull('i.withdrawn_at')
+      // Names on a proposal are its investigators' affair.
+      .whereNull('i.proposal_id')
+      .andWhere('i.expires_at', '>', utcNow(db))
+      .orderBy('i.id', 'desc')
+      .select<OpenInvitationLine[]>(
+        'i.id',
+        'i.name',
+        'i.email',
+        'i.role',
+        'p.name as panel',
+        'c.number as call',
+        'n.name as instrument',
+        'i.expires_at as expiresAt',
+      )
+  )
 }
 
 /** Shuts or reopens an account; false when it was so already. */

@@ -57,15 +57,20 @@ export interface RequestLine {
   askedSeconds: number
 }
 
-/** Time asked of each instrument, as the standing versions of the proposals say. */
+/**
+ * Time asked of each instrument, as the standing versions of the proposals say. A version that was frozen before
+ * targets could be backups does not say how often an observation counts: once.
+ */
 export async function requestLines(db: Database, proposalIds: readonly number[]): Promise<RequestLine[]> {
   if (proposalIds.length === 0) return []
   const [rows] = (await db.raw(
     `SELECT v.proposal_id AS proposalId, i.id AS instrumentId, i.name AS instrument, t.id AS telescopeId,
-            t.name AS telescope, SUM(o.asked) AS askedSeconds
+            t.name AS telescope, SUM(o.asked * COALESCE(c.times, 1)) AS askedSeconds
        FROM proposal_versions v
        JOIN JSON_TABLE(v.snapshot, '$.contents.observations[*]'
-              COLUMNS (mode INT PATH '$.modeId', asked INT PATH '$.askedSeconds')) o
+              COLUMNS (id INT PATH '$.id', mode INT PATH '$.modeId', asked INT PATH '$.askedSeconds')) o
+       LEFT JOIN JSON_TABLE(v.snapshot, '$.computation.observations[*]'
+              COLUMNS (id INT PATH '$.observationId', times INT PATH '$.times')) c ON c.id = o.id
        JOIN instrument_modes m ON m.id = o.mode
        JOIN instruments i ON i.id = m.instrument_id
        JOIN telescopes t ON t.id = i.telescope_id

@@ -7,7 +7,6 @@ const columns = [
   'p.kind',
   'p.file_name',
   'p.pages',
-  'p.words',
   'p.created_at',
   'o.size_bytes',
   'o.sha256',
@@ -27,7 +26,6 @@ export async function papersOf(db: Database, proposalId: number): Promise<Paper[
     kind: row.kind,
     fileName: row.file_name,
     pages: row.pages,
-    words: row.words,
     sizeBytes: row.size_bytes,
     sha256: row.sha256,
     objectKey: row.object_key,
@@ -53,7 +51,6 @@ export interface NewPaper {
   kind: Paper['kind']
   fileName: string
   pages: number
-  words: number
   uploadedBy: number
 }
 
@@ -64,7 +61,6 @@ export async function insertPaper(db: Database, given: NewPaper): Promise<number
     kind: given.kind,
     file_name: given.fileName,
     pages: given.pages,
-    words: given.words,
     uploaded_by: given.uploadedBy,
   })
   return Number(id)

@@ -106,6 +106,10 @@ export async function updateProfile(
       sort_name: profile.sortName,
       institute_id: known?.id ?? null,
       institute_text: profile.institute,
+      // Set before the iD itself: assignments are carried out in order.
+      orcid_verified_at: db.raw('IF(orcid <=> ?, orcid_verified_at, NULL)', [
+        profile.orcid,
+      ]) as unknown as Date | null,
       orcid: profile.orcid,
       career_stage: profile.careerStage,
       time_zone: profile.timeZone,

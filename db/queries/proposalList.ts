@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { CallsRow, ProposalsRow } from '../tables.ts'
+import { askedTime } from './askedTime.ts'
 
 export interface ListedProposal {
   reference: string
@@ -16,9 +17,15 @@ export interface ListedProposal {
   lead: string
   isLead: boolean
   hasAgreed: boolean
+  /** May speak for it: leads it or is its deputy, and has agreed. */
+  maySpeak: boolean
+  callId: number
+  /** Calls in which its programme has a proposal. */
+  programmeCalls: number[]
 }
 
 interface Row {
+  id: number
   reference: string
   title: string
   state: ProposalsRow['state']
@@ -34,10 +41,12 @@ interface Row {
   call_closes_at: Date
   kind_title: string
   kind_closes_at: Date | null
-  asked: string | null
   targets: string
   lead: string | null
   role: string
+  access: string
+  call_id: number
+  programme_calls: string | null
   confirmed_at: Date | null
 }
 
@@ -58,6 +67,7 @@ export async function proposalsNaming(
     .orderBy('p.updated_at', 'desc')
     .limit(500)
     .select<Row[]>(
+      'p.id',
       'p.reference',
       'p.title',
       'p.state',
@@ -74,13 +84,21 @@ export async function proposalsNaming(
       'k.title as kind_title',
       'k.closes_at as kind_closes_at',
       'q.role',
+      'q.access',
+      'p.call_id',
+      db.raw(
+        "(SELECT GROUP_CONCAT(DISTINCT o.call_id) FROM proposals o WHERE o.programme_id = p.programme_id AND o.state <> 'withdrawn') AS programme_calls",
+      ),
       'q.confirmed_at',
-      db.raw('(SELECT SUM(o.asked_seconds) FROM observations o WHERE o.proposal_id = p.id) AS asked'),
       db.raw('(SELECT COUNT(*) FROM targets t WHERE t.proposal_id = p.id) AS targets'),
       db.raw(
         "(SELECT l.name FROM proposal_people l WHERE l.proposal_id = p.id AND l.role = 'pi' LIMIT 1) AS lead",
       ),
     )
+  const asked = await askedTime(
+    db,
+    rows.map(({ id }) => id),
+  )
   return rows.map((row) => ({
     reference: row.reference,
     title: row.title,
@@ -98,10 +116,13 @@ export async function proposalsNaming(
       closes_at: row.call_closes_at,
     },
     kind: { title: row.kind_title, closesAt: row.kind_closes_at },
-    askedSeconds: Number(row.asked ?? 0),
+    askedSeconds: asked.get(row.id) ?? 0,
     targets: Number(row.targets),
     lead: row.lead ?? '',
     isLead: row.role === 'pi',
     hasAgreed: row.confirmed_at !== null,
+    maySpeak: row.confirmed_at !== null && (row.role === 'pi' || row.access === 'deputy'),
+    callId: row.call_id,
+    programmeCalls: (row.programme_calls ?? '').split(',').filter(Boolean).map(Number),
   }))
 }

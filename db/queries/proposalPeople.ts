@@ -1,17 +1,28 @@
 import type { Investigator } from '../../lib/domain/proposals/types.ts'
 import type { Database } from '../client.ts'
-import type { ProposalPeopleRow } from '../tables.ts'
+import type { PeopleRow, ProposalPeopleRow } from '../tables.ts'
 
-function investigatorOf(row: ProposalPeopleRow): Investigator {
+type AccountPart = Pick<PeopleRow, 'orcid' | 'orcid_verified_at'>
+
+interface NamedRow extends ProposalPeopleRow {
+  owner_id: number | null
+  account_orcid: AccountPart['orcid']
+  account_orcid_verified_at: AccountPart['orcid_verified_at']
+}
+
+function investigatorOf(row: NamedRow): Investigator {
   return {
     id: row.id,
-    personId: row.person_id,
+    personId: row.person_id ?? row.owner_id,
     name: row.name,
     email: row.email,
     institute: row.institute,
     role: row.role,
     access: row.access,
     isStudent: row.is_student === 1,
+    isSupervisor: row.is_supervisor === 1,
+    orcid: row.account_orcid ?? row.orcid,
+    isOrcidVerified: row.account_orcid !== null && row.account_orcid_verified_at !== null,
     position: row.position,
     confirmedAt: row.confirmed_at,
   }
@@ -24,10 +35,16 @@ function investigatorOf(row: ProposalPeopleRow): Investigator {
 export async function investigatorsOf(db: Database, proposalId: number): Promise<Investigator[]> {
   const rows = await db('proposal_people as q')
     .leftJoin('people as a', (on) => on.on('a.email', 'q.email').onNotNull('a.email_confirmed_at'))
+    .leftJoin('people as o', 'o.id', db.raw('COALESCE(q.person_id, a.id)'))
     .where('q.proposal_id', proposalId)
     .orderBy(['q.position', 'q.id'])
-    .select<(ProposalPeopleRow & { owner_id: number | null })[]>('q.*', 'a.id as owner_id')
-  return rows.map((row) => ({ ...investigatorOf(row), personId: row.person_id ?? row.owner_id }))
+    .select<NamedRow[]>(
+      'q.*',
+      'a.id as owner_id',
+      'o.orcid as account_orcid',
+      'o.orcid_verified_at as account_orcid_verified_at',
+    )
+  return rows.map(investigatorOf)
 }
 
 export interface NewInvestigator {
@@ -39,6 +56,8 @@ export interface NewInvestigator {
   role: Investigator['role']
   access: Investigator['access']
   isStudent: boolean
+  isSupervisor: boolean
+  orcid: string | null
   position: number
   confirmedAt: Date | null
 }
@@ -53,6 +72,8 @@ export async function insertInvestigator(db: Database, given: NewInvestigator): 
     role: given.role,
     access: given.access,
     is_student: given.isStudent ? 1 : 0,
+    is_supervisor: given.isSupervisor ? 1 : 0,
+    orcid: given.orcid,
     position: given.position,
     confirmed_at: given.confirmedAt,
   })
@@ -60,8 +81,11 @@ export async function insertInvestigator(db: Database, given: NewInvestigator): 
 }
 
 export interface InvestigatorChanges {
+  role?: Investigator['role']
   access?: Investigator['access']
   isStudent?: boolean
+  isSupervisor?: boolean
+  orcid?: string | null
   position?: number
   personId?: number
   name?: string
@@ -72,13 +96,18 @@ export interface InvestigatorChanges {
 export async function updateInvestigator(
   db: Database,
   id: number,
-  { access, isStudent, position, personId, name, institute, confirmedAt }: InvestigatorChanges,
+  changes: InvestigatorChanges,
 ): Promise<void> {
+  const { role, access, isStudent, isSupervisor, orcid, position, personId, name, institute, confirmedAt } =
+    changes
   await db('proposal_people')
     .where({ id })
     .update({
+      ...(role ? { role } : {}),
       ...(access ? { access } : {}),
       ...(isStudent === undefined ? {} : { is_student: isStudent ? 1 : 0 }),
+      ...(isSupervisor === undefined ? {} : { is_supervisor: isSupervisor ? 1 : 0 }),
+      ...(orcid === undefined ? {} : { orcid }),
       ...(position === undefined ? {} : { position }),
       ...(personId ? { person_id: personId } : {}),
       ...(name ? { name } : {}),

@@ -38,6 +38,11 @@ export interface NewProposal {
   cosmologyId: string
   cosmologyParameters: unknown
   createdBy: number
+  /** Carried over from an earlier proposal. */
+  abstract?: string
+  category?: string
+  comparisonCosmologyId?: string | null
+  continuesId?: number
 }
 
 export async function insertProposal(db: Database, given: NewProposal): Promise<number> {
@@ -47,9 +52,12 @@ export async function insertProposal(db: Database, given: NewProposal): Promise<
     call_id: given.callId,
     call_kind_id: given.callKindId,
     title: given.title,
-    abstract: '',
+    abstract: given.abstract ?? '',
+    category: given.category ?? '',
     cosmology_id: given.cosmologyId,
     cosmology_parameters: JSON.stringify(given.cosmologyParameters),
+    comparison_cosmology_id: given.comparisonCosmologyId ?? null,
+    continues_id: given.continuesId ?? null,
     sections_done: '[]',
     created_by: given.createdBy,
     updated_at: utcNow(db),
@@ -96,10 +104,13 @@ export async function touchProposal(db: Database, id: number): Promise<void> {
 /** Reference of a draft the same person began a moment ago with the same words; null when there is none. */
 export async function findTwin(
   db: Database,
-  given: { personId: number; kindId: number; title: string },
+  given: { personId: number; kindId: number; title: string; continuesId?: number },
 ): Promise<string | null> {
   const row = await db('proposals')
     .where({ created_by: given.personId, call_kind_id: given.kindId, title: given.title, state: 'draft' })
+    .modify((q) => {
+      if (given.continuesId !== undefined) q.where({ continues_id: given.continuesId })
+    })
     .andWhere('created_at', '>', db.raw('UTC_TIMESTAMP(3) - INTERVAL 10 SECOND'))
     .orderBy('id', 'desc')
     .first('reference')

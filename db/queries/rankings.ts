@@ -22,6 +22,12 @@ export async function lastFrozenBefore(db: Database, ranking: RankingsRow): Prom
   return row ?? null
 }
 
+/** Whether any list of a panel was frozen: a later change is made beside it, never in it. */
+export async function hasFrozenRanking(db: Database, panelId: number): Promise<boolean> {
+  const row = await db('rankings').where({ panel_id: panelId }).whereNotNull('frozen_at').first('id')
+  return row !== undefined
+}
+
 /** Entries of a list, first place first. */
 export function rankingEntries(db: Database, rankingId: number): Promise<RankingEntriesRow[]> {
   return db('ranking_entries').where({ ranking_id: rankingId }).orderBy(['place', 'id'])

@@ -1,7 +1,7 @@
 import type { Verdict } from '../../lib/domain/observations/types.ts'
 import type { Database } from '../client.ts'
 
-/** Observations of a frozen proposal with what was computed for each. */
+/** Observations of a frozen proposal with what was computed for each, hours as they count in the whole. */
 export interface RequestPart {
   targetId: number
   modeId: number
@@ -22,6 +22,7 @@ interface Row {
   observations: string | null
   ids: string | null
   needed: string | null
+  times: string | null
   verdicts: string | null
 }
 
@@ -30,17 +31,23 @@ const list = <T>(text: string | null): T[] => (text === null ? [] : (JSON.parse(
 function partsOf(row: Row): RequestPart[] {
   const needed = list<number | null>(row.needed)
   const verdicts = list<Verdict>(row.verdicts)
+  // A version frozen before targets could be backups says nothing of it: each observation counts once.
+  const times = list<number>(row.times)
   const computed = new Map(
     list<number>(row.ids).map((id, index) => [
       id,
-      { neededSeconds: needed[index] ?? 0, verdict: verdicts[index] ?? ('not-feasible' as const) },
+      {
+        neededSeconds: needed[index] ?? 0,
+        times: times[index] ?? 1,
+        verdict: verdicts[index] ?? ('not-feasible' as const),
+      },
     ]),
   )
   return list<Asked>(row.observations).map(({ id, targetId, modeId, askedSeconds }) => ({
     targetId,
     modeId,
-    askedSeconds,
-    neededSeconds: computed.get(id)?.neededSeconds ?? 0,
+    askedSeconds: askedSeconds * (computed.get(id)?.times ?? 1),
+    neededSeconds: (computed.get(id)?.neededSeconds ?? 0) * (computed.get(id)?.times ?? 1),
     verdict: computed.get(id)?.verdict ?? 'not-feasible',
   }))
 }
@@ -60,6 +67,7 @@ export async function requestParts(
       extract('$.computation.observations[*].observationId', 'ids'),
       extract('$.computation.observations[*].neededSeconds', 'needed'),
       extract('$.computation.observations[*].verdict', 'verdicts'),
+      extract('$.computation.observations[*].times', 'times'),
     )
   return new Map(rows.map((row) => [row.proposalId, partsOf(row)]))
 }

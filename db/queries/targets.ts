@@ -1,4 +1,6 @@
-import type { Brightness, LineLight, Observation, Target } from '@/lib/domain/proposals/types'
+import type { Brightness, LineLight, Observation, Opportunity, Target } from '@/lib/domain/proposals/types'
+import { spectrumOf } from '@/lib/domain/targets/spectrumOf'
+import { readSpectrumTable, spectrumText } from '@/lib/domain/targets/spectrumTable'
 import type { Database } from '../client.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
@@ -25,7 +27,29 @@ function lineOf(row: TargetQuantitiesRow | undefined): LineLight | null {
   }
 }
 
-function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = []): Target {
+function tableOf(text: string | null) {
+  const read = text === null ? null : readSpectrumTable(text)
+  return read?.ok ? read.value : null
+}
+
+function opportunityOf(row: TargetsRow): Opportunity | null {
+  if (row.opportunity_class === null) return null
+  return {
+    event: row.opportunity_class,
+    trigger: row.opportunity_trigger ?? '',
+    reactionSeconds: row.opportunity_reaction_s ?? 0,
+    triggers: row.opportunity_count ?? 1,
+  }
+}
+
+type GroupedRow = TargetsRow & { group_name: string | null }
+
+const grouped = (db: Database) =>
+  db('targets as t')
+    .leftJoin('target_groups as g', 'g.id', 't.group_id')
+    .select<GroupedRow[]>('t.*', 'g.name as group_name')
+
+function targetOf(row: GroupedRow, quantities: readonly TargetQuantitiesRow[] = []): Target {
   return {
     id: row.id,
     position: row.position,
@@ -46,8 +70,16 @@ function targetOf(row: TargetsRow, quantities: readonly TargetQuantitiesRow[] = 
     redshiftFrame: row.redshift_frame,
     redshiftType: row.redshift_type,
     need: row.need,
+    group: row.group_name,
+    opportunity: opportunityOf(row),
     brightness: brightnessOf(quantities.find(({ quantity }) => quantity === 'magnitude')),
     line: lineOf(quantities.find(({ quantity }) => quantity === 'line-flux' || quantity === 'luminosity')),
+    spectrum: spectrumOf(row.spectrum_kind, {
+      index: row.spectral_index,
+      indexError: row.spectral_index_error,
+      temperatureK: row.temperature_k,
+      table: tableOf(row.spectrum_table),
+    }),
     galacticEbv: row.galactic_ebv,
     magnification: row.magnification,
     magnificationError: row.magnification_error,
@@ -65,7 +97,7 @@ async function quantitiesOf(db: Database, targetIds: number[]): Promise<Map<numb
 
 /** A proposal's targets in their order. */
 export async function targetsOf(db: Database, proposalId: number): Promise<Target[]> {
-  const rows = await db('targets').where({ proposal_id: proposalId }).orderBy(['position', 'id'])
+  const rows = await grouped(db).where('t.proposal_id', proposalId).orderBy(['t.position', 't.id'])
   const quantities = await quantitiesOf(
     db,
     rows.map((row) => row.id),
@@ -75,12 +107,23 @@ export async function targetsOf(db: Database, proposalId: number): Promise<Targe
 
 /** One target of a proposal; null when it is not there. */
 export async function findTarget(db: Database, proposalId: number, id: number): Promise<Target | null> {
-  const row = await db('targets').where({ id, proposal_id: proposalId }).first()
+  const [row] = await grouped(db).where({ 't.id': id, 't.proposal_id': proposalId })
   if (!row) return null
   return targetOf(row, (await quantitiesOf(db, [id])).get(id))
 }
 
 export type TargetValues = Omit<Target, 'id' | 'version'>
+
+function spectrumColumns(spectrum: TargetValues['spectrum'] | undefined) {
+  const isLaw = spectrum?.kind === 'power-law'
+  return {
+    spectrum_kind: spectrum?.kind ?? null,
+    spectral_index: isLaw ? spectrum.index : null,
+    spectral_index_error: isLaw ? spectrum.indexError : null,
+    temperature_k: spectrum?.kind === 'black-body' ? spectrum.temperatureK : null,
+    spectrum_table: spectrum?.kind === 'table' ? spectrumText(spectrum) : null,
+  }
+}
 
 function columnsOf(values: TargetValues) {
   return {
@@ -102,6 +145,11 @@ function columnsOf(values: TargetValues) {
     redshift_frame: values.redshiftFrame,
     redshift_type: values.redshiftType,
     need: values.need,
+    ...spectrumColumns(values.spectrum),
+    opportunity_class: values.opportunity?.event ?? null,
+    opportunity_trigger: values.opportunity?.trigger ?? null,
+    opportunity_reaction_s: values.opportunity?.reactionSeconds ?? null,
+    opportunity_count: values.opportunity?.triggers ?? null,
     galactic_ebv: values.galacticEbv,
     magnification: values.magnification,
     magnification_error: values.magnificationError,
@@ -142,8 +190,15 @@ async function writeLight(
   })
 }
 
+/** The key of a group by its name; null for no name, and for one that no group of the proposal has. */
+async function groupIdOf(db: Database, proposalId: number, name: string | null): Promise<number | null> {
+  if (name === null) return null
+  return (await db('target_groups').where({ proposal_id: proposalId, name }).first('id'))?.id ?? null
+}
+
 export async function insertTarget(db: Database, proposalId: number, values: TargetValues): Promise<number> {
-  const [id = 0] = await db('targets').insert({ proposal_id: proposalId, ...columnsOf(values) })
+  const group_id = await groupIdOf(db, proposalId, values.group ?? null)
+  const [id = 0] = await db('targets').insert({ proposal_id: proposalId, group_id, ...columnsOf(values) })
   await writeLight(db, id, values)
   return id
 }
@@ -151,12 +206,14 @@ export async function insertTarget(db: Database, proposalId: number, values: Tar
 /** Writes a row that still has the version it was read with; false when someone was first. */
 export async function updateTarget(
   db: Database,
+  proposalId: number,
   target: { id: number; version: number },
   values: TargetValues,
 ): Promise<boolean> {
+  const group_id = await groupIdOf(db, proposalId, values.group)
   const changed = await db('targets')
     .where({ id: target.id, version: target.version })
-    .update({ ...columnsOf(values), version: target.version + 1 })
+    .update({ group_id, ...columnsOf(values), version: target.version + 1 })
   if (changed === 0) return false
   await writeLight(db, target.id, values)
   return true

@@ -10,7 +10,8 @@ export interface SentVersion {
   versionNumber: number
   sha256: string
   engineVersion: string
-  paperId: number
+  /** Null where the justification was written here. */
+  paperId: number | null
   arrivedAt: Date
   committedAt: Date
   submittedBy: number
@@ -46,6 +47,18 @@ export async function findVersion(db: Database, id: number): Promise<SentVersion
   return row ? versionOf(row) : null
 }
 
+/** A version by its number within the proposal. */
+export async function versionNumbered(
+  db: Database,
+  proposalId: number,
+  versionNumber: number,
+): Promise<SentVersion | null> {
+  const row = await db('proposal_versions')
+    .where({ proposal_id: proposalId, version_number: versionNumber })
+    .first()
+  return row ? versionOf(row) : null
+}
+
 export async function findVersionByKey(db: Database, idempotencyKey: string): Promise<SentVersion | null> {
   const row = await db('proposal_versions').where({ idempotency_key: idempotencyKey }).first()
   return row ? versionOf(row) : null
@@ -57,7 +70,7 @@ export interface NewVersion {
   snapshot: string
   sha256: string
   engineVersion: string
-  paperId: number
+  paperId: number | null
   idempotencyKey: string
   arrivedAt: Date
   committedAt: Date

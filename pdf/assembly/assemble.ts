@@ -3,6 +3,7 @@ import { PDFDocument, type PDFEmbeddedPage } from 'pdf-lib'
 import { render } from '../render'
 import { Footers, type FooterWords } from './Footers'
 import { addOutline, type Bookmark } from './outline'
+import { stripNotes } from './stripNotes'
 
 export interface Part {
   bytes: Uint8Array
@@ -55,6 +56,9 @@ export async function assemble({
   addOutline(document, bookmarks)
   document.setTitle(title, { showInWindowTitleBar: true })
   document.setLanguage('en-GB')
+  // Pages are copied when they are written; what hangs on their parts is known only then.
+  await document.flush()
+  stripNotes(document)
   const bytes = await document.save({ addDefaultPage: false, updateFieldAppearances: false })
   return { bytes, pages: sheets.length }
 }

@@ -1,21 +1,16 @@
 import { Document, View } from '@react-pdf/renderer'
 import { Brand } from '../parts/Brand'
 import { FactRows } from '../parts/FactRows'
+import { Heading } from '../parts/Heading'
 import { Sheet } from '../parts/Sheet'
 import { Verdict } from '../parts/Verdict'
 import { Words } from '../parts/Words'
 import { colour, size } from '../theme'
 import type { PacketData } from './packetTypes'
+import { SpectrumChart } from './SpectrumChart'
+import { RuleLines } from './RuleLines'
 import { TargetsTable } from './TargetsTable'
 import { UpChart } from './UpChart'
-
-function Heading({ children }: { children: string }) {
-  return (
-    <Words base={size.section} style={{ fontWeight: 600, marginTop: 17, marginBottom: 5 }}>
-      {children}
-    </Words>
-  )
-}
 
 /** The pages of a packet made by us: what is asked, of what, when it is up, and what is not clear. */
 export function PacketDocument({ data }: { data: PacketData }) {
@@ -53,9 +48,15 @@ export function PacketDocument({ data }: { data: PacketData }) {
         </View>
         <Heading>Targets and hours</Heading>
         <TargetsTable data={data} />
+        <RuleLines rules={data.rules} />
         <Words base={8.6} style={{ color: colour.muted, marginTop: 7, lineHeight: 1.4 }}>
           {data.cosmology}
         </Words>
+        {data.carried.map((line) => (
+          <Words key={line} base={8.6} style={{ color: colour.muted, marginTop: 3, lineHeight: 1.4 }}>
+            {line}
+          </Words>
+        ))}
         {data.up ? (
           <View>
             <Heading>When the targets are up</Heading>
@@ -65,6 +66,9 @@ export function PacketDocument({ data }: { data: PacketData }) {
             <UpChart up={data.up} />
           </View>
         ) : null}
+        {data.spectra.map((spectrum) => (
+          <SpectrumChart key={spectrum.modeName} spectrum={spectrum} />
+        ))}
         {data.notes.map((note, index) => (
           <View
             key={index}

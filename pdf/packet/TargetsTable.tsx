@@ -16,14 +16,14 @@ interface Column {
 function columnsOf({ magnitudeHead }: PacketData): Column[] {
   return [
     { key: 'number', head: '', unit: '', width: 11, align: 'left' },
-    { key: 'name', head: 'Name', unit: '', width: 80, align: 'left', bold: true },
+    { key: 'name', head: 'Name', unit: '', width: 76, align: 'left', bold: true },
     { key: 'position', head: 'Position', unit: 'ICRS', width: 101, align: 'left' },
     { key: 'redshift', head: 'z', unit: '', width: 28, align: 'right' },
     { key: 'magnitude', head: magnitudeHead.head, unit: magnitudeHead.unit, width: 27, align: 'right' },
     { key: 'luminosityMpc', head: 'D(L)', unit: 'Mpc', width: 44, align: 'right' },
     { key: 'kpcPerArcsec', head: 'scale', unit: 'kpc/″', width: 31, align: 'right' },
     { key: 'feature', head: 'feature', unit: 'Å, observed', width: 60, align: 'right' },
-    { key: 'needed', head: 'needed', unit: 'h', width: 32, align: 'right' },
+    { key: 'needed', head: 'needed', unit: 'h', width: 36, align: 'right' },
     { key: 'asked', head: 'asked', unit: 'h', width: 28, align: 'right' },
   ]
 }
@@ -80,7 +80,12 @@ export function TargetsTable({ data }: { data: PacketData }) {
             <Words
               key={key}
               base={cell}
-              style={{ width, flexShrink: 0, textAlign: align, fontWeight: bold ? 600 : 400 }}
+              style={{
+                width,
+                flexShrink: 0,
+                textAlign: align,
+                fontWeight: bold ? 600 : 400,
+              }}
             >
               {row[key]}
             </Words>
@@ -99,10 +104,10 @@ export function TargetsTable({ data }: { data: PacketData }) {
           borderBottom: `1 solid ${colour.ink}`,
         }}
       >
-        <Words base={cell} style={{ width: 382, paddingLeft: 11, fontWeight: 600 }}>
+        <Words base={cell} style={{ width: 378, paddingLeft: 11, fontWeight: 600 }}>
           {total.words}
         </Words>
-        <Words base={cell} style={{ width: 32, textAlign: 'right', fontWeight: 600 }}>
+        <Words base={cell} style={{ width: 36, textAlign: 'right', fontWeight: 600 }}>
           {total.needed}
         </Words>
         <Words base={cell} style={{ width: 28, textAlign: 'right', fontWeight: 600 }}>

@@ -4,6 +4,7 @@ import type { FactRow } from '../parts/FactRows'
 import { cosmologyLine } from './cosmologyLine'
 import type { PacketData } from './packetTypes'
 import { magnitudeHead, targetRows } from './targetRows'
+import { spectrumChartData } from './spectrumChartData'
 import { upChartData } from './upChartData'
 
 const moons = { dark: 'dark', grey: 'grey or darker', any: 'any' } as const
@@ -42,10 +43,10 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
   ].filter(({ value }) => value !== '')
 }
 
-function totalWords({ targets, computation }: AnonymousProposal): string {
-  const required = targets.filter(({ need }) => need === 'required').length
+function totalWords({ targets, groups, computation }: AnonymousProposal, required: number): string {
   const count = targets.length === 1 ? '1 target' : `${targets.length} targets`
-  return `${count}, ${required} required; ${formatNights(computation.askedNights)}`
+  const needed = required > 0 || groups.length === 0 ? `, ${required} required` : ''
+  return `${count}${needed}; ${formatNights(computation.askedNights)}`
 }
 
 /** Each check that is not clear, with the target it belongs to. */
@@ -61,10 +62,22 @@ function notesOf({ computation, targets }: AnonymousProposal): PacketData['notes
   )
 }
 
+/** The most magnitudes of which it is told one by one how they were carried. */
+const mostCarried = 6
+
+function carriedLines({ computation, targets }: AnonymousProposal): string[] {
+  const said = computation.observations.flatMap(({ targetId, carried }) =>
+    carried ? [`${targets.find(({ id }) => id === targetId)?.name ?? ''}: ${carried.sentence}`] : [],
+  )
+  const lines = [...new Set(said)]
+  const more = lines.length - mostCarried
+  return more > 0 ? [...lines.slice(0, mostCarried), `And ${more} more in the report.`] : lines
+}
+
 /** What a packet says, from a proposal without names; names are added by whoever may read them. */
 export function packetData(
   proposal: AnonymousProposal,
-  given: { label: string; people: PacketData['people'] },
+  given: Pick<PacketData, 'label' | 'people' | 'rules'> & { required: number },
 ): PacketData {
   const { computation, call } = proposal
   return {
@@ -79,13 +92,17 @@ export function packetData(
     magnitudeHead: magnitudeHead(proposal),
     rows: targetRows(proposal),
     total: {
-      words: totalWords(proposal),
+      words: totalWords(proposal, given.required),
       needed: formatNumber(computation.neededSeconds / 3600, 1),
       asked: formatNumber(computation.askedSeconds / 3600, 1),
       verdict: computation.verdict,
     },
+    rules: given.rules,
     cosmology: cosmologyLine(proposal),
+    carried: carriedLines(proposal),
     up: upChartData(proposal),
+    spectra: spectrumChartData(proposal),
     notes: notesOf(proposal),
+    written: proposal.written,
   }
 }

@@ -1,3 +1,4 @@
+import type { WrittenData } from '../writing/writtenData'
 import type { FactRow } from '../parts/FactRows'
 import type { PrintedVerdict } from '../parts/Verdict'
 
@@ -33,6 +34,24 @@ export interface UpChartData {
   moons: readonly { night: number; words: 'new' | 'full' }[]
 }
 
+/** Where the lines of the targets fall in the range of one mode; wavelengths observed, in vacuum, angstroms. */
+export interface SpectrumChartData {
+  modeName: string
+  fromA: number
+  toA: number
+  mode: { fromA: number; toA: number }
+  bands: readonly { name: string; fromA: number; toA: number; isHeavy: boolean }[]
+  skyLinesA: readonly number[]
+  rows: readonly SpectrumRow[]
+}
+
+/** One observation: the feature it asks for, and the other lines at its redshift. */
+export interface SpectrumRow {
+  name: string
+  tone: PrintedVerdict
+  lines: readonly { words: string; atA: number; isAsked: boolean }[]
+}
+
 /** A packet in words and numbers, ready to be set. */
 export interface PacketData {
   observatory: string
@@ -49,7 +68,15 @@ export interface PacketData {
   magnitudeHead: { head: string; unit: string }
   rows: readonly PacketRow[]
   total: { words: string; needed: string; asked: string; verdict: PrintedVerdict | null }
+  /** Under the table: how each group stands, what is awaited, what the brackets mean. */
+  rules: readonly { name: string; text: string; verdict: PrintedVerdict | null }[]
   cosmology: string
+  /** How magnitudes were carried from their bands to the instruments. */
+  carried: readonly string[]
   up: UpChartData | null
+  /** One for each mode with a slit that looks at a target with a redshift. */
+  spectra: readonly SpectrumChartData[]
   notes: readonly { verdict: PrintedVerdict; words: string; text: string }[]
+  /** The justification where it was written here; null where it is a document, or there is none. */
+  written: WrittenData | null
 }

@@ -1,10 +1,7 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
-import { ABSENT, formatNumber } from '@/lib/format'
+import { ABSENT, formatCountedHours, formatNumber } from '@/lib/format'
 import { formatDeclination, formatRightAscension } from '@/lib/format/sexagesimal'
 import type { PacketRow } from './packetTypes'
-
-const hours = (seconds: number | null | undefined) =>
-  seconds === null || seconds === undefined ? ABSENT : formatNumber(seconds / 3600, 1)
 
 /** Band and system where all magnitudes share them; otherwise each cell names its own. */
 export function magnitudeHead({ targets }: Pick<AnonymousProposal, 'targets'>): {
@@ -32,7 +29,9 @@ export function targetRows(proposal: AnonymousProposal): PacketRow[] {
       name: target.name,
       position:
         raDeg === null || decDeg === null
-          ? 'not fixed yet'
+          ? target.opportunity
+            ? 'awaited'
+            : 'not fixed yet'
           : `${formatRightAscension(raDeg)}  ${formatDeclination(decDeg)}`,
       redshift: target.redshift === null ? ABSENT : formatNumber(target.redshift, 3),
       magnitude: brightness
@@ -61,8 +60,11 @@ export function targetRows(proposal: AnonymousProposal): PacketRow[] {
         feature: observation.feature
           ? `${observation.feature.replace(/ λ.*$/, '')} ${seen ? formatNumber(seen) : ''}`.trim()
           : ABSENT,
-        needed: hours(result?.neededSeconds),
-        asked: hours(observation.askedSeconds),
+        needed:
+          result && result.neededSeconds !== null
+            ? formatCountedHours(result.neededSeconds, result.times)
+            : ABSENT,
+        asked: formatCountedHours(observation.askedSeconds, result?.times ?? 1),
         verdict: result?.verdict ?? null,
       }
     })

@@ -129,6 +129,18 @@ describe('a form that sends an action', () => {
     expect(title().value).toBe('Lenses')
   })
 
+  it('keeps everything typed when the session has ended, and opens the sign-in beside it', async () => {
+    action.mockResolvedValue({ ok: false, kind: 'not-signed-in', message: 'Sign in first.', fieldErrors: {} })
+    const user = userEvent.setup()
+    render(<Sheet />)
+    await user.type(title(), 'Lenses')
+    await user.click(save())
+    const summary = await screen.findByRole('group', { name: 'You have been signed out' })
+    const link = within(summary).getByRole('link', { name: 'Sign in on a new page' })
+    expect([link.getAttribute('href'), link.getAttribute('target')]).toEqual(['/sign-in', '_blank'])
+    expect(title().value).toBe('Lenses')
+  })
+
   it('keeps everything typed when the network fails, and says so', async () => {
     const user = userEvent.setup()
     action.mockRejectedValueOnce(new TypeError('fetch failed'))

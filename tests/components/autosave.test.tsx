@@ -152,6 +152,63 @@ describe('saving by itself', () => {
   })
 })
 
+describe('a session that ended while one typed', () => {
+  const signedOut = {
+    ok: false as const,
+    kind: 'not-signed-in' as const,
+    message: 'Sign in first.',
+    fieldErrors: {},
+  }
+
+  // Seen to fail: with the refusal taken for a value that is not right, which keeps nothing.
+  it('keeps what was typed in the browser and offers the way to sign in', async () => {
+    save.mockResolvedValue(signedOut)
+    render(<Sheet keepAs="question-7" />)
+    type('2.5')
+    await pass(500)
+    expect(says()).toContain('Signed out: kept in this browser.')
+    expect(screen.getByRole('link', { name: 'Sign in again' }).getAttribute('href')).toMatch(/^\/sign-in/)
+    expect(localStorage.getItem('noctuary:question-7')).toBe('{"hours":"2.5"}')
+  })
+
+  it('saves as soon as one comes back, signed in on another page', async () => {
+    save.mockResolvedValueOnce(signedOut).mockResolvedValue(yes)
+    render(<Sheet keepAs="question-7" />)
+    type('2.5')
+    await pass(500)
+    fireEvent(window, new Event('focus'))
+    await pass(1)
+    expect(says()).toMatch(/^Saved/)
+    expect(localStorage.getItem('noctuary:question-7')).toBeNull()
+  })
+
+  it('lets the page be left without a question once what was typed is kept', async () => {
+    save.mockResolvedValue(signedOut)
+    render(<Sheet keepAs="question-7" />)
+    type('2.5')
+    await pass(500)
+    expect(fireEvent(window, new Event('beforeunload', { cancelable: true }))).toBe(true)
+  })
+})
+
+// Seen to fail: without the listener of the page being hidden.
+describe('a page closed before the quiet time is over', () => {
+  it('keeps what was typed, and asks before it goes', () => {
+    render(<Sheet keepAs="question-7" />)
+    type('2.5')
+    fireEvent(window, new Event('pagehide'))
+    expect(localStorage.getItem('noctuary:question-7')).toBe('{"hours":"2.5"}')
+    expect(fireEvent(window, new Event('beforeunload', { cancelable: true }))).toBe(false)
+    expect(save).not.toHaveBeenCalled()
+  })
+
+  it('keeps nothing where nothing was typed', () => {
+    render(<Sheet keepAs="question-7" />)
+    fireEvent(window, new Event('pagehide'))
+    expect(localStorage.getItem('noctuary:question-7')).toBeNull()
+  })
+})
+
 describe('someone else was first', () => {
   it.each([
     ['Keep mine', '2.5', 0],

@@ -31,6 +31,8 @@ function show(over: Partial<TargetActions> = {}, readOnly: string | null = null)
     reorder: no,
     importRows: no,
     ask: no,
+    saveGroup: no,
+    removeGroup: no,
     ...over,
   }
   const given = contents()

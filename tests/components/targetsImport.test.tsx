@@ -76,3 +76,13 @@ it('keeps none of more targets than a proposal holds', async () => {
   )
   expect(screen.getByText('100 of 501 rows stand here, those to mend first.')).toBeTruthy()
 })
+
+it('tells which groups a file makes, before anything is kept', async () => {
+  const { user, importRows } = show()
+  await choose(user, 'list.csv', 'name,ra,dec,z,group\nA,10,-20,0.1,Near\nB,11,-21,0.3,near\nC,12,-22,0.3,\n')
+  expect(
+    screen.getByText('The group Near is not here yet: it is made, all of its targets wanted.'),
+  ).toBeTruthy()
+  await user.click(screen.getByRole('button', { name: 'Keep three targets' }))
+  expect(importRows.mock.calls[0]?.[0].rows.map(({ group }) => group)).toEqual(['Near', 'near', ''])
+})

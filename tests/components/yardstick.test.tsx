@@ -21,7 +21,9 @@ function show(query: Query = {}) {
 }
 
 const numbers = () =>
-  screen.getByRole('table', { name: /Distances, times and sizes|Against|Redshifts from|Near by/ })
+  screen.getByRole('table', {
+    name: /Distances, times and sizes|Against|Redshifts from|Near by|Count in a survey/,
+  })
 const rowsOf = (table: HTMLElement) =>
   within(table)
     .getAllByRole('row')
@@ -118,6 +120,33 @@ describe('Yardstick', () => {
     show({ mode: 'near', z: '0.003 0.1', c: 'planck-2018' })
     expect(screen.getByText(/One redshift is no distance: 0\.003\./)).toBeTruthy()
     expect(rowsOf(numbers()).map((row) => row.endsWith('no: measure it'))).toEqual([true, false])
+  })
+
+  it('counts in the shells of a survey, and says what cannot be read or is not known', async () => {
+    const user = userEvent.setup()
+    show({ mode: 'survey', z: '1.75 2.25', c: 'planck-2018', area: '160 arcmin²', mass: 'above-11.0' })
+    const [row] = rowsOf(numbers())
+    // Moster et al. 2011: 38 % for this field, depth and mass.
+    expect(row).toMatch(/^1\.75.*2\.25.*38\.\d/)
+    const area = screen.getByLabelText('Area')
+    await user.clear(area)
+    await user.type(area, '20 deg²')
+    await waitFor(() =>
+      expect(
+        screen.getByText(
+          'Cosmic variance is known for areas from 11 square arcminutes to 1.96 square degrees.',
+        ),
+      ).toBeTruthy(),
+    )
+    await user.clear(area)
+    await user.type(area, '3 Mpc')
+    expect(
+      screen.getByText('An area is given in square degrees or alike, such as 1.5 deg² or 160 arcmin².'),
+    ).toBeTruthy()
+    const list = screen.getByLabelText('Redshifts')
+    await user.clear(list)
+    await user.type(list, '1')
+    expect(screen.getByText('Give two redshifts at least: the edges of a shell.')).toBeTruthy()
   })
 
   it('copies the table with its cosmology and says so', async () => {

@@ -59,7 +59,7 @@ test.describe.serial('a draft', () => {
   test('takes no picture called a PDF and no paper of 60 pages', async ({ page, signIn }) => {
     await signIn('ilse@tarnhead.example')
     await page.goto(`/proposals/${reference}/papers`)
-    const upload = page.locator('input[type="file"]').first()
+    const upload = page.locator('input[type="file"][accept=".pdf"]').first()
     const jpeg = Buffer.concat([Buffer.from([0xff, 0xd8, 0xff, 0xe0]), Buffer.alloc(2000, 1)])
     // The page may be on screen a moment before it listens.
     await expect(async () => {

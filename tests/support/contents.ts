@@ -1,5 +1,6 @@
 import type { ModeRecord, SiteRecord } from '@/lib/domain/facility/types'
 import type { Observation, ProposalContents, Target } from '@/lib/domain/proposals/types'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { defaultConstraints } from '@/lib/domain/observations/defaultConstraints'
 import { findPreset } from '@/lib/science/cosmology'
 
@@ -86,7 +87,10 @@ export const target = (over: Partial<Target> = {}): Target => ({
   redshiftFrame: 'heliocentric',
   redshiftType: 'spectroscopic',
   need: 'required',
+  group: null,
+  opportunity: null,
   line: null,
+  spectrum: null,
   galacticEbv: null,
   magnification: null,
   magnificationError: null,
@@ -157,19 +161,23 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
     title: 'Regular',
     closesAt: null,
     pageLimit: 4,
+    wordLimit: 2000,
     abstractLimit: 1500,
-    wordLimit: null,
     figureLimit: null,
     maxSeconds: null,
     feeMinor: 0,
     panelId: 1,
+    needsStudent: false,
   },
   site,
   modes: [slitMode],
   people: [],
+  groups: [],
   targets: [target()],
   constraintSets: [{ ...defaultConstraints, id: 31, version: 1 }],
   observations: [observation()],
   papers: [],
+  writings: unwritten,
+  figures: [],
   ...over,
 })

@@ -20,3 +20,7 @@ export const pdfText = (bytes: Uint8Array): string =>
 
 /** The properties of a PDF as poppler reads them. */
 export const pdfInfo = (bytes: Uint8Array): string => withFile(bytes, 'pdfinfo', (file) => [file])
+
+/** The pictures of a PDF as poppler reads them, a line each. */
+export const pdfPictures = (bytes: Uint8Array): string =>
+  withFile(bytes, 'pdfimages', (file) => ['-list', file])

@@ -25,7 +25,7 @@ const skyWords = {
 } as const
 
 const farWords =
-  'The mode works far from the band of the magnitude: the source is taken as flat in f_ν between them.'
+  'The mode works far from the band of the magnitude: the source is taken as flat in f_ν between them. Say what its spectrum is.'
 
 /** The answer in one sentence, then what it is made of. */
 export function ExposureAnswer({ mode, asked, exposed, isFar }: ExposureAnswerProps) {
@@ -40,6 +40,7 @@ export function ExposureAnswer({ mode, asked, exposed, isFar }: ExposureAnswerPr
         <strong className="font-semibold">{figure}</strong>
         {after}
       </p>
+      {exposed.carried ? <p className="mt-2 max-w-4xl text-table text-muted">{exposed.carried}</p> : null}
       {[...report.warnings, ...(isFar ? [farWords] : [])].map((warning) => (
         <div key={warning} className="mt-3">
           <BarNote tone="marginal">{warning}</BarNote>

@@ -4,7 +4,8 @@ import { useWatch, type Control } from 'react-hook-form'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField, type SelectOption } from '@/components/forms/SelectField'
 import type { ExposureInput } from '@/lib/domain/tools/exposureSchema'
-import { shapes, sources } from './choices'
+import { PowerLawWords } from '@/components/targets/PowerLawWords'
+import { shapes, sources, spectra } from './choices'
 
 /** What is measured and how it lies on the sky; the brightness is left out where it is the answer. */
 export function SourceFields({
@@ -14,7 +15,10 @@ export function SourceFields({
   control: Control<ExposureInput>
   bands: readonly SelectOption[]
 }) {
-  const [solve, source, shape] = useWatch({ control, name: ['solve', 'source', 'shape'] })
+  const [solve, source, shape, spectrum] = useWatch({
+    control,
+    name: ['solve', 'source', 'shape', 'spectrum'],
+  })
   const isAnswer = solve === 'limit'
   return (
     <>
@@ -31,6 +35,14 @@ export function SourceFields({
             <NumberField name="magnitude" label={shape === 'uniform' ? 'mag arcsec⁻²' : 'Magnitude'} />
           )}
           <SelectField name="band" label="In the band" options={bands} />
+          <SelectField name="spectrum" label="Its spectrum" options={spectra} />
+          {spectrum === 'power-law' ? <NumberField name="index" label={<PowerLawWords />} /> : null}
+          {spectrum === 'black-body' ? (
+            <>
+              <NumberField name="temperature" label="Temperature" unit="K" />
+              <NumberField name="redshift" label="At redshift" />
+            </>
+          ) : null}
         </div>
       )}
       <SelectField name="shape" label="It looks like" options={shapes} />

@@ -12,6 +12,12 @@ export const sources: readonly SelectOption[] = [
   { value: 'line', label: 'an emission line' },
 ]
 
+export const spectra: readonly SelectOption[] = [
+  { value: 'flat', label: 'flat in f_ν' },
+  { value: 'power-law', label: 'a power law' },
+  { value: 'black-body', label: 'a black body' },
+]
+
 export const shapes: readonly SelectOption[] = [
   { value: 'point', label: 'a point' },
   { value: 'galaxy', label: 'a galaxy' },

@@ -27,8 +27,8 @@ const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1
 export function ModePlots({ view, reference, onChange, onPoint }: ModePlotsProps) {
   const { state, ready: universes, redshifts } = view
   const { mode } = state
-  // The way back draws what is known, with the values given.
-  const draw = mode === 'inverse' ? state.from : state.draw
+  // The way back draws what is known, with the values given; a survey the volume its shells are made of.
+  const draw = mode === 'inverse' ? state.from : mode === 'survey' ? 'differentialVolumeMpc3Sr' : state.draw
   const compare = mode === 'compare'
   const quantity = quantityOf(draw)
   const plot = useMemo(
@@ -45,7 +45,7 @@ export function ModePlots({ view, reference, onChange, onPoint }: ModePlotsProps
     draw === 'distanceModulusMag' ? `minus that of ${reference.name}, mag` : `over that of ${reference.name}`
   return (
     <>
-      {mode === 'inverse' ? null : (
+      {mode === 'inverse' || mode === 'survey' ? null : (
         <div className="mt-7">
           <UnderlineChoice
             label="Draw"

@@ -7,6 +7,7 @@ import { CompareNotes } from './CompareNotes'
 import { ModePlots } from './ModePlots'
 import { NearNotes } from './NearNotes'
 import { NearPlots } from './NearPlots'
+import { SurveyNotes } from './SurveyNotes'
 import { UniverseLedger } from './UniverseLedger'
 
 export interface RightColumnProps {
@@ -20,7 +21,7 @@ export interface RightColumnProps {
 /** What kind of universes they are, then what a mode has to say, then the plots. Memoised: typing must not wait for it. */
 export const RightColumn = memo(function RightColumn(props: RightColumnProps) {
   const { view, pointed, onChange, onPoint } = props
-  const { state, ready, reference, redshifts, near, around, sheet } = view
+  const { state, ready, reference, redshifts, near, around, sheet, survey } = view
   const { mode } = state
   const furthest = redshifts.reduce((most, z) => Math.max(most, z), 0)
   return (
@@ -44,6 +45,9 @@ export const RightColumn = memo(function RightColumn(props: RightColumnProps) {
           redshifts={redshifts}
           onPoint={onPoint}
         />
+      ) : null}
+      {mode === 'survey' && survey?.survey ? (
+        <SurveyNotes survey={survey.survey} redshifts={redshifts} />
       ) : null}
       {mode !== 'near' && reference ? (
         <ModePlots view={view} reference={reference} onChange={onChange} onPoint={onPoint} />

@@ -12,6 +12,7 @@ import { InverseFields } from './InverseFields'
 import { LedgerArea } from './LedgerArea'
 import { NearFields } from './NearFields'
 import { PlainSelect } from './PlainSelect'
+import { SurveyFields } from './SurveyFields'
 
 export interface SideColumnProps {
   /** As typed, to the last keystroke. */
@@ -35,7 +36,11 @@ export function SideColumn({ state, view, editing, onEdit, onChange }: SideColum
         ) : (
           <LedgerArea
             label="Redshifts"
-            help="One a line, a pasted column, or a range: 0.1..2 step 0.1"
+            help={
+              state.mode === 'survey'
+                ? 'The edges of the shells: one a line, or a range: 0.5..2 step 0.5'
+                : 'One a line, a pasted column, or a range: 0.1..2 step 0.1'
+            }
             value={state.z}
             onChange={(z) => onChange({ z })}
             troubles={view.troubles}
@@ -45,6 +50,9 @@ export function SideColumn({ state, view, editing, onEdit, onChange }: SideColum
         )}
         {state.mode === 'near' && view.near ? (
           <NearFields state={state} read={view.near} onChange={onChange} />
+        ) : null}
+        {state.mode === 'survey' && view.survey ? (
+          <SurveyFields state={state} read={view.survey} onChange={onChange} />
         ) : null}
       </div>
       <CosmologyList

@@ -26,6 +26,7 @@ const modes = [
   { value: 'distances', label: 'Distances and times' },
   { value: 'compare', label: 'One against another' },
   { value: 'near', label: 'Near by' },
+  { value: 'survey', label: 'Count in a survey' },
   { value: 'inverse', label: 'Find the redshift' },
 ] as const
 

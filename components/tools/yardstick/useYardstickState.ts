@@ -39,9 +39,12 @@ export function useYardstickState(initial: YardstickState) {
   return { state, change }
 }
 
-/** Redshifts that suit a mode: those near by where nothing of one's own was typed yet. */
+/** Redshifts that suit a mode: edges of shells and those near by where nothing of one's own was typed yet. */
 export function redshiftsFor(mode: YardstickState['mode'], z: string): string {
-  const nearBy = '0.0035\n0.009\n0.023\n0.1'
-  if (mode === 'near' && z === usualState.z) return nearBy
-  return mode !== 'near' && z === nearBy ? usualState.z : z
+  const own: Partial<Record<YardstickState['mode'], string>> = {
+    near: '0.0035\n0.009\n0.023\n0.1',
+    survey: '0.5\n1.0\n1.5\n2.0',
+  }
+  const isUntouched = z === usualState.z || Object.values(own).includes(z)
+  return isUntouched ? (own[mode] ?? usualState.z) : z
 }

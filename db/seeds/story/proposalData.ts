@@ -14,7 +14,11 @@ export interface SeedProposal {
   hours: number
   /** Worth on the scale of scores, before reviewers differ. */
   merit: number
-  kind?: 'large' | 'thesis'
+  kind?: 'large' | 'thesis' | 'opportunity'
+  /** All targets in a group of which at least so many are wanted; the last of them never rises. */
+  group?: { name: string; atLeast: number }
+  /** What is awaited in place of targets with positions. */
+  awaited?: { name: string; event: string; trigger: string; reactionHours: number; triggers: number }
 }
 
 const p = (
@@ -563,4 +567,47 @@ export const open: readonly SeedProposal[] = [
     30,
     7,
   ),
+]
+
+/** Of the open call: a draft whose targets share a rule, and a proposal that waits for what it will observe. */
+export const byRule: readonly SeedProposal[] = [
+  {
+    ...p(
+      'Hosts of five lensed quasars',
+      lenses,
+      'Ilse Marrowby',
+      ['Sefa Lindqvane'],
+      'lantern-i',
+      null,
+      [0.5, 0.8],
+      [21.0, 21.6],
+      5,
+      12,
+      7,
+    ),
+    group: { name: 'Five hosts', atLeast: 3 },
+  },
+  {
+    ...p(
+      'Torn stars in their first week',
+      passing,
+      'Hugo Rastwick',
+      ['Finn Odderby'],
+      'spindle-blue',
+      'hbeta',
+      [0.04, 0.06],
+      [18.4, 18.8],
+      1,
+      2,
+      7,
+    ),
+    kind: 'opportunity',
+    awaited: {
+      name: 'The next torn star',
+      event: 'Star torn apart by a black hole',
+      trigger: 'A blue source at the centre of a galaxy within z = 0.06 that has risen for two nights',
+      reactionHours: 48,
+      triggers: 3,
+    },
+  },
 ]

@@ -3,7 +3,7 @@ import type { ObjectStore } from '../../../lib/services/storage/ObjectStore.ts'
 import type { Database } from '../../client.ts'
 import type { Facility, SeededCall } from '../calls.ts'
 import { decideCall } from './decideCall.ts'
-import { decided, inReview, open, type SeedProposal } from './proposalData.ts'
+import { byRule, decided, inReview, open, type SeedProposal } from './proposalData.ts'
 import { dice, type Dice } from './random.ts'
 import { reviewCall } from './reviewCall.ts'
 import { settleFees } from './settleFees.ts'
@@ -79,6 +79,11 @@ export async function tellStory(
     sentAt: index < 3 ? ago(3 - index * 0.7) : null,
   }))
   await settleFees(story, sent, true)
+  // Dice of their own: the rest of the story stays as it is.
+  await writeAll(story, dice(20270319), facility, calls.open, byRule, (index) => ({
+    begunAt: ago(4 - index),
+    sentAt: index === 0 ? null : ago(1),
+  }))
 
   await db.raw('SET SESSION timestamp = DEFAULT')
   // Letters of the past were sent in the past: the inbox of the demonstration begins empty.

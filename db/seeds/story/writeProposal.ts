@@ -1,12 +1,14 @@
-import { createHash, randomUUID } from 'node:crypto'
+import { randomUUID } from 'node:crypto'
 import { modes } from '../facilityData.ts'
 import { addInvestigator } from '../../../lib/domain/proposals/addInvestigator.ts'
 import { beginProposal } from '../../../lib/domain/proposals/beginProposal.ts'
 import { confirmMembership } from '../../../lib/domain/proposals/confirmMembership.ts'
+import { describeInvestigator } from '../../../lib/domain/proposals/describeInvestigator.ts'
 import { markSectionDone } from '../../../lib/domain/proposals/markSectionDone.ts'
 import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
 import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
 import { readContents } from '../../../lib/domain/proposals/readContents.ts'
+import { saveGroup } from '../../../lib/domain/targetGroups/saveGroup.ts'
 import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
 import { targetRowSchema, type TargetRow } from '../../../lib/domain/targets/schema.ts'
 import { emptyTargetRow } from '../../../lib/domain/targets/targetRow.ts'
@@ -16,13 +18,12 @@ import { addObservation } from '../../../lib/domain/observations/addObservation.
 import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
 import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
 import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
-import { uploadPaper } from '../../../lib/domain/papers/uploadPaper.ts'
 import { restLines } from '../../../lib/science/light/index.ts'
 import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
 import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
 import type { SeededCall } from '../calls.ts'
 import type { Facility } from '../calls.ts'
-import { paperPdf } from './paperPdf.ts'
+import { justify } from './justify.ts'
 import type { SeedProposal } from './proposalData.ts'
 import type { Dice } from './random.ts'
 import type { Teller } from './teller.ts'
@@ -54,9 +55,25 @@ function lineOf(seed: SeedProposal, chance: Dice): Partial<TargetRow> {
   }
 }
 
-function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) {
+/** What is awaited has no position. */
+function awaitedCells({ awaited }: SeedProposal): Partial<TargetRow> {
+  if (!awaited) return {}
+  return {
+    ...{ name: awaited.name, event: awaited.event, trigger: awaited.trigger, ra: '', dec: '' },
+    reaction: String(awaited.reactionHours),
+    triggers: String(awaited.triggers),
+    // Of a kind, not of one: any of them may be nearer or brighter.
+    ...{ redshiftType: 'assumed', redshiftError: '0.01', magnitudeError: '0.4' },
+  }
+}
+
+/** A declination that never rises far enough over the site. */
+const neverUpDeg = 58
+
+function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number], isLast: boolean) {
   const raDeg = (chance.between(...raHours) * 15 + 360) % 360
-  const decDeg = chance.between(-62, 2)
+  const drawnDeg = chance.between(-62, 2)
+  const decDeg = seed.group && isLast ? neverUpDeg : drawnDeg
   const ra = formatRightAscension(raDeg, 2)
   const dec = formatDeclination(decDeg, 1)
   const digits = (text: string) => text.replace(/\s/g, '')
@@ -75,6 +92,7 @@ function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number]) 
     magnitudeError: '0.08',
     band: `${band} AB`,
     ...lineOf(seed, chance),
+    ...awaitedCells(seed),
   }
   return targetRowSchema.parse(row)
 }
@@ -103,15 +121,21 @@ export async function writeProposal(
       email: other.actor.email,
       institute: '',
       access: 'edit',
+      orcid: '',
       isStudent: false,
+      isSupervisor: seed.kind === 'thesis',
     })
     await confirmMembership(other, { reference })
   }
+  if (seed.kind === 'thesis') await nameStudent(lead, reference)
   for (let n = 0; n < seed.targets; n += 1)
-    await addTarget(lead, { reference, row: targetRow(seed, chance, options.raHours) })
+    await addTarget(lead, {
+      reference,
+      row: targetRow(seed, chance, options.raHours, n === seed.targets - 1),
+    })
+  if (seed.group) await makeGroup(lead, reference, seed.group)
   await askForHours(lead, reference, seed, facility)
-  const { observations } = await readContents(lead.db, reference)
-  const hours = observations.reduce((sum, { askedSeconds }) => sum + askedSeconds, 0) / 3600
+  const hours = computeProposal(await readContents(lead.db, reference)).askedSeconds / 3600
   await saveQuestion(
     lead,
     saveQuestionSchema.parse({
@@ -122,14 +146,7 @@ export async function writeProposal(
       category: seed.category,
     }),
   )
-  const bytes = await paperPdf(seed.title)
-  await uploadPaper(lead, {
-    reference,
-    kind: 'justification',
-    file: new File([Buffer.from(bytes)], 'justification.pdf', { type: 'application/pdf' }),
-    sha256: createHash('sha256').update(bytes).digest('hex'),
-    sizeBytes: bytes.byteLength,
-  })
+  await justify(lead, reference, seed)
   for (const section of sections) await markSectionDone(lead, { reference, section, done: true })
   if (options.sentAt) {
     await story.at(options.sentAt)
@@ -141,6 +158,34 @@ export async function writeProposal(
     })
   }
   return reference
+}
+
+/** Who leads a thesis is the student. */
+async function nameStudent(lead: Awaited<ReturnType<Teller['as']>>, reference: string): Promise<void> {
+  const [student] = (await readContents(lead.db, reference)).people
+  if (!student) return
+  const { id, institute } = student
+  await describeInvestigator(lead, {
+    reference,
+    id,
+    institute,
+    orcid: '',
+    isStudent: true,
+    isSupervisor: false,
+  })
+}
+
+async function makeGroup(
+  lead: Awaited<ReturnType<Teller['as']>>,
+  reference: string,
+  { name, atLeast }: { name: string; atLeast: number },
+): Promise<void> {
+  const { targets } = await readContents(lead.db, reference)
+  const group = { name, rule: 'at-least', atLeast, hoursFor: 'all' } as const
+  await saveGroup(lead, {
+    ...{ reference, id: null, version: 0 },
+    group: { ...group, targetIds: targets.map(({ id }) => id) },
+  })
 }
 
 /** One observation a target, deep enough to need the hours the proposal is about. */

@@ -7,7 +7,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { canAssess } from './policy'
 import { requestFacts } from './requestFacts'
-import { hoursProblem, observationsOn } from './rules'
+import { countedSeconds, hoursProblem, targetHours } from './rules'
 import type { AssessRequestInput } from './schema'
 
 /** Says accept, change or not possible over the computed verdict; an earlier assessment is superseded and kept. */
@@ -20,11 +20,9 @@ export function assessRequest(
     authorize(canAssess(tx.actor, facts))
     const version = await readSnapshot(tx.db, facts.request.proposalId)
     if (!version) throw refuse.notFound('request')
-    const { observations, modes } = version.snapshot.contents
-    const asked = observationsOn(observations, modes, facts.instrumentId).reduce(
-      (sum, { askedSeconds }) => sum + askedSeconds,
-      0,
-    )
+    const { contents, computation } = version.snapshot
+    const parts = { ...contents, computed: computation.observations }
+    const asked = countedSeconds(targetHours(parts, facts.instrumentId), 'askedSeconds')
     const problem = hoursProblem(input.verdict, input.trueHours, asked)
     if (problem) throw refuse.field('trueHours', problem)
 

@@ -39,6 +39,7 @@ export interface AnswerFacts {
     personId: number | null
     role: 'pi' | 'co-investigator'
     access: 'read' | 'edit' | 'deputy'
+    confirmedAt: Date | null
   }[]
   call: RequestFacts['call']
   proposalState: ProposalState
@@ -49,6 +50,7 @@ export interface AnswerFacts {
 export function canAnswerQuestion(actor: Actor, facts: AnswerFacts): Decision {
   const self = facts.people.find(({ personId }) => personId === actor.personId)
   if (!self) return unseen('question')
+  if (self.confirmedAt === null) return no('role', 'Agree to be named on this proposal first.')
   if (self.role !== 'pi' && self.access === 'read')
     return no('role', 'You may read this proposal, not answer for it.')
   const phase = callPhase(facts.call, facts.now)

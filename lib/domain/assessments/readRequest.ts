@@ -39,7 +39,7 @@ export async function readRequest(ctx: ActingContext, requestId: number): Promis
   ])
   if (!version) throw refuse.notFound('request')
   const proposal = anonymise(version.snapshot)
-  const { targets, observations, modes, computation } = proposal
+  const { groups, targets, observations, modes, computation } = proposal
   return {
     requestId,
     instrumentId: facts.instrumentId,
@@ -51,7 +51,7 @@ export async function readRequest(ctx: ActingContext, requestId: number): Promis
     shut: writing.allowed ? null : writing.sentence,
     proposal: { ...proposal, reviewNumber: facts.request.reviewNumber },
     targets: targetHours(
-      { targets, observations, modes, computed: computation.observations },
+      { groups, targets, observations, modes, computed: computation.observations },
       facts.instrumentId,
     ),
     history,

@@ -2,7 +2,8 @@ import { formatHoursFromSeconds } from '@/lib/format'
 import type { ModeRecord } from '../facility/types'
 import type { ObservationComputation, Verdict } from '../observations/types'
 import { worstVerdict } from '../observations/worstVerdict'
-import type { Observation, Target } from '../proposals/types'
+import { needOf, type Need } from '../observations/needOf'
+import type { Observation, Target, TargetGroup } from '../proposals/types'
 import type { AssessmentVerdict } from './types'
 
 export const longestReason = 160
@@ -11,7 +12,9 @@ export const longestReason = 160
 export interface TargetHours {
   targetId: number
   name: string
-  need: Target['need']
+  need: Need
+  /** How often its hours count; those of a backup do not. */
+  times: number
   modes: string[]
   openSeconds: number
   overheadSeconds: number
@@ -21,12 +24,13 @@ export interface TargetHours {
 }
 
 interface RequestParts {
-  targets: readonly Pick<Target, 'id' | 'name' | 'need'>[]
+  groups: readonly TargetGroup[]
+  targets: readonly Pick<Target, 'id' | 'name' | 'need' | 'group'>[]
   observations: readonly Pick<Observation, 'id' | 'targetId' | 'modeId' | 'askedSeconds'>[]
   modes: readonly Pick<ModeRecord, 'modeId' | 'name' | 'instrument'>[]
   computed: readonly Pick<
     ObservationComputation,
-    'observationId' | 'openShutterSeconds' | 'overheadSeconds' | 'neededSeconds' | 'verdict'
+    'observationId' | 'openShutterSeconds' | 'overheadSeconds' | 'neededSeconds' | 'verdict' | 'times'
   >[]
 }
 
@@ -42,7 +46,10 @@ export function observationsOn<O extends { modeId: number }>(
   return observations.filter(({ modeId }) => on.has(modeId))
 }
 
-/** Hours of each target on one instrument, in the order of the target table. */
+/**
+ * Hours of each target on one instrument, in the order of the target table: of a target of opportunity those of all its
+ * triggers, of a backup its own, though they do not count.
+ */
 export function targetHours(parts: RequestParts, instrumentId: number): TargetHours[] {
   const computed = new Map(parts.computed.map((row) => [row.observationId, row]))
   const names = new Map(parts.modes.map(({ modeId, name }) => [modeId, name]))
@@ -50,14 +57,16 @@ export function targetHours(parts: RequestParts, instrumentId: number): TargetHo
   return parts.targets.flatMap((target) => {
     const rows = own.filter(({ targetId }) => targetId === target.id)
     if (rows.length === 0) return []
+    const times = Math.max(0, ...rows.map(({ id }) => computed.get(id)?.times ?? 1))
     const sum = (of: (row: (typeof rows)[number]) => number | null | undefined) =>
-      rows.reduce((total, row) => total + (of(row) ?? 0), 0)
+      rows.reduce((total, row) => total + (of(row) ?? 0), 0) * Math.max(1, times)
     const verdicts = rows.flatMap(({ id }) => computed.get(id)?.verdict ?? [])
     return [
       {
         targetId: target.id,
         name: target.name,
-        need: target.need,
+        need: needOf(target, parts.groups),
+        times,
         modes: [...new Set(rows.map(({ modeId }) => names.get(modeId) ?? ''))],
         openSeconds: sum(({ id }) => computed.get(id)?.openShutterSeconds),
         overheadSeconds: sum(({ id }) => computed.get(id)?.overheadSeconds),
@@ -69,17 +78,25 @@ export function targetHours(parts: RequestParts, instrumentId: number): TargetHo
   })
 }
 
+/** The seconds that count, of the rows of one instrument. */
+export const countedSeconds = (
+  rows: readonly TargetHours[],
+  of: 'openSeconds' | 'overheadSeconds' | 'neededSeconds' | 'askedSeconds',
+): number => rows.reduce((sum, row) => sum + (row.times > 0 ? row[of] : 0), 0)
+
 /**
  * True seconds of each target when only their sum was said: the open shutter stays, what is more or less than computed
- * is shared over the overheads.
+ * is shared over the overheads. What does not count has no share in it.
  */
 export function trueSecondsByTarget(rows: readonly TargetHours[], trueSeconds: number): number[] {
-  const total = (of: 'neededSeconds' | 'overheadSeconds') => rows.reduce((sum, row) => sum + row[of], 0)
-  const more = trueSeconds - total('neededSeconds')
-  const overheads = total('overheadSeconds')
-  return rows.map(({ neededSeconds, overheadSeconds }) =>
-    Math.max(0, neededSeconds + (overheads > 0 ? (more * overheadSeconds) / overheads : more / rows.length)),
-  )
+  const more = trueSeconds - countedSeconds(rows, 'neededSeconds')
+  const overheads = countedSeconds(rows, 'overheadSeconds')
+  const counting = rows.filter(({ times }) => times > 0).length
+  return rows.map(({ neededSeconds, overheadSeconds, times }) => {
+    if (times === 0) return neededSeconds
+    const share = overheads > 0 ? (more * overheadSeconds) / overheads : more / counting
+    return Math.max(0, neededSeconds + share)
+  })
 }
 
 /** Why a verdict and true hours do not go together, as a message at the true hours; null when they do. */

@@ -159,6 +159,7 @@ export const lightAnswer = z.object({
         throughDust: through,
         throughIgm: through,
         through,
+        ab: maybe.describe('Of what was measured in a band, carried here'),
       }),
     )
     .describe('Rest wavelengths first, then observed ones, each in the order given'),
@@ -200,6 +201,9 @@ export const exposureAnswer = z.object({
     .object({ ab: maybe, fluxErgSCm2: maybe })
     .nullable()
     .describe('Faintest magnitude, or flux of a line, that reaches the S/N in the time'),
+  colourMag: maybe.describe(
+    'Magnitudes from the band named to where the mode works, by the spectrum; null where no band is named',
+  ),
   openS: z.number().describe('Open shutter over all sub-exposures'),
   subExposures: z.number(),
   subExposureS: z.number(),

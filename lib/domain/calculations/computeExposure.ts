@@ -9,7 +9,7 @@ import { solveExposure } from './solveExposure'
 
 /** The answer to a request, with the mode and the site it names. */
 export function answerExposure(asked: ExposureRequest, mode: ModeRecord, site: SiteRecord) {
-  const { report, limit } = solveExposure(asked, scienceMode(mode), scienceSite(site))
+  const { report, limit, colourMag } = solveExposure(asked, scienceMode(mode), scienceSite(site))
   return {
     engine: report.engineVersion,
     mode: { id: mode.modeId, slug: mode.slug, name: mode.name },
@@ -25,6 +25,7 @@ export function answerExposure(asked: ExposureRequest, mode: ModeRecord, site: S
       ab: limit.kind === 'magnitude' ? limit.ab : null,
       fluxErgSCm2: limit.kind === 'line' ? limit.fluxErgSCm2 : null,
     },
+    colourMag,
     openS: report.openS,
     subExposures: report.subExposures,
     subExposureS: report.subExposureS,

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { SERSIC_LEAST, SERSIC_MOST } from '@/lib/science/exposure'
 import { exactly } from './exactly'
+import { bandName, spectrum } from './spectrumSchema'
 
 const number = z.number('This is a number.')
 const wavelengthA = z
@@ -43,6 +44,10 @@ const source = z.discriminatedUnion(
     exactly({
       kind: z.literal('magnitude'),
       ab: magnitude.optional().meta({ description: 'Not wanted where the limit is solved for' }),
+      band: bandName.optional().meta({
+        description: 'Band the magnitude is given in; where the mode works when not given',
+      }),
+      spectrum: spectrum.optional(),
       wavelengthA: wavelengthA.optional(),
       geometry,
     }),

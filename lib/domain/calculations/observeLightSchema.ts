@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { cosmologyInput } from './cosmologySchema'
 import { exactly } from './exactly'
 import { listOf, mostWavelengths } from './limits'
+import { bandName, restSpectrum } from './spectrumSchema'
 
 const number = z.number('This is a number.')
 const wavelength = z
@@ -26,6 +27,18 @@ export const observeLightRequest = exactly({
   magnitudeWavelengthA: wavelength
     .optional()
     .meta({ description: 'Observed wavelength of the magnitude, wanted where dust is to be taken from it' }),
+  measured: exactly({
+    ab: number
+      .min(-50, 'A magnitude lies between −50 and 50.')
+      .max(50, 'A magnitude lies between −50 and 50.'),
+    band: bandName,
+    spectrum: restSpectrum,
+  })
+    .optional()
+    .meta({
+      description:
+        'An observed magnitude in a band, carried to each wavelength by the shape of the spectrum at the redshift, dust and gas counted once',
+    }),
   lineLuminosityErgS: number
     .gt(0, 'A luminosity lies above 0 and below 1e60 erg/s.')
     .lt(1e60, 'A luminosity lies above 0 and below 1e60 erg/s.')

@@ -7,6 +7,8 @@ import { visibilityRequest } from './computeVisibility'
 import { exposureRequest } from './exposureSchema'
 import { inverseRequest } from './invertCosmology'
 import { observeLightRequest } from './observeLightSchema'
+import { surveyRequest } from './countInSurvey'
+import { surveyAnswer } from './surveyAnswer'
 
 export interface Operation {
   /** What it is about, for a heading. */
@@ -46,6 +48,20 @@ export const operations: readonly Operation[] = [
     request: inverseRequest,
     example: { cosmology: 'planck-2018', quantity: 'angularDiameterMpc', values: [1500] },
     answer: answers.inverseAnswer,
+  },
+  {
+    group: 'Cosmology',
+    path: '/api/v1/cosmology/survey',
+    summary: 'Volumes of the shells of a survey, and what is expected to be counted in them',
+    request: surveyRequest,
+    example: {
+      cosmology: 'planck-2018',
+      areaDeg2: 1.5,
+      edges: [0.5, 1, 1.5],
+      densityMpc3: 1e-3,
+      stellarMass: '10.0-10.5',
+    },
+    answer: surveyAnswer,
   },
   {
     group: 'Light',

@@ -1,4 +1,4 @@
-import type { NightUse } from '../calls/nightBlock'
+import type { NightUse } from '../calls/nightUseList'
 import type { NightPart } from './types'
 
 const useWords: Readonly<Record<NightUse, string>> = {

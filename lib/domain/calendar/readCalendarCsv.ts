@@ -1,8 +1,8 @@
 import type { CallTelescope } from '@/db/queries/callTelescopes'
 import { formatList } from '@/lib/format'
-import { nightUses, type NightUse } from '../calls/nightBlock'
+import { nightUses, type NightUse } from '../calls/nightUseList'
 import { delimiterOf, readRecords } from '../targets/csv'
-import { calendarHeads } from './calendarCsv'
+import { calendarHeads } from './calendarFileView'
 import { partsProblem } from './partsProblem'
 import type { NightPart } from './types'
 

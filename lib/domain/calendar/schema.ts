@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { nightUses } from '../calls/nightBlock'
+import { nightUses } from '../calls/nightUseList'
 
 const onCall = { slug: z.string().min(1).max(60), version: z.number().int().positive() }
 

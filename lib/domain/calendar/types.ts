@@ -1,4 +1,4 @@
-import type { NightUse } from '../calls/nightBlock'
+import type { NightUse } from '../calls/nightUseList'
 import type { Call } from '../calls/types'
 
 /** A part of a night as it is set: fractions of the dark time, what it is for, and the instrument mounted. */

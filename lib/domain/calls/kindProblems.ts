@@ -7,7 +7,7 @@ import type { CallKind, CallPanel } from './types'
 
 type Wanted = Pick<
   z.output<typeof saveKindSchema>,
-  'kind' | 'closesAt' | 'pageLimit' | 'wordLimit' | 'abstractLimit' | 'maxHours' | 'panelId'
+  'kind' | 'closesAt' | 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxHours' | 'panelId'
 >
 
 interface Known {

@@ -1,6 +1,4 @@
-/** What a part of a night is for: science in the call, engineering, or time promised to others before. */
-export const nightUses = ['science', 'engineering', 'promised'] as const
-export type NightUse = (typeof nightUses)[number]
+import type { NightUse } from './nightUseList'
 
 /** A part of a night of one telescope, and what it is for. */
 export interface NightBlock {

@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { kindKeys } from './kindKeys'
+import { maxFigures } from '../writings/limits'
+import { kindKeys } from './kindKeyList'
 import { moment } from './moment'
 import { typedWhole, typedWholeOrNone } from './typedWhole'
 
@@ -24,8 +25,8 @@ export const saveKindSchema = z.object({
   title: line('Give it a title.', 120),
   closesAt: z.union([z.literal('').transform(() => null), moment]),
   pageLimit: typedWhole('Pages', 1, 60),
-  wordLimit: typedWholeOrNone('Words', 100, 60_000),
-  figureLimit: typedWholeOrNone('Figures', 0, 100),
+  wordLimit: typedWhole('Words', 100, 60_000),
+  figureLimit: typedWholeOrNone('Figures', 0, maxFigures),
   abstractLimit: typedWhole('Characters', 100, 10_000),
   maxHours: z
     .string()
@@ -36,6 +37,8 @@ export const saveKindSchema = z.object({
     )
     .transform((text) => (text === '' ? null : Number(text))),
   panelId: key,
+  /** Must name a student and a supervisor who have agreed. */
+  needsStudent: z.boolean(),
 })
 
 export const removeKindSchema = z.object({ ...onCall, kindId: z.number().int().positive() })

@@ -23,6 +23,7 @@ const rowOf = (input: Input): KindChange => ({
   abstract_limit: input.abstractLimit,
   max_seconds: input.maxHours === null ? null : Math.round(input.maxHours * 3600),
   panel_id: input.panelId,
+  needs_student: input.needsStudent ? 1 : 0,
 })
 
 const logged = (kind: CallKind) => ({
@@ -35,6 +36,7 @@ const logged = (kind: CallKind) => ({
   abstractLimit: kind.abstractLimit,
   maxSeconds: kind.maxSeconds,
   panelId: kind.panelId,
+  needsStudent: kind.needsStudent,
 })
 
 /**

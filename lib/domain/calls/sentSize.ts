@@ -6,24 +6,27 @@ export interface SentSize {
   kindId: number
   /** Panel it went to. */
   panelId: number | null
+  /** Of a justification sent as a document; else 0. */
   pages: number
-  /** Null where they were not counted. */
-  words: number | null
+  /** Of one written here, and its figures; else 0. */
+  words: number
+  figures: number
   /** Characters. */
   abstractLength: number
   askedSeconds: number
 }
 
-type Limits = Pick<CallKind, 'pageLimit' | 'wordLimit' | 'abstractLimit' | 'maxSeconds'>
+type Limits = Pick<CallKind, 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxSeconds'>
 
 const measures: readonly [
-  field: 'pageLimit' | 'wordLimit' | 'abstractLimit' | 'maxHours',
+  field: 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxHours',
   limit: (limits: Limits) => number | null,
   size: (sent: SentSize) => number,
   words: (size: number) => string,
 ][] = [
   ['pageLimit', (k) => k.pageLimit, (s) => s.pages, (n) => countInWords(n, 'page')],
-  ['wordLimit', (k) => k.wordLimit, (s) => s.words ?? 0, (n) => `${formatNumber(n, 0)} words`],
+  ['wordLimit', (k) => k.wordLimit, (s) => s.words, (n) => `${formatNumber(n, 0)} words`],
+  ['figureLimit', (k) => k.figureLimit, (s) => s.figures, (n) => countInWords(n, 'figure')],
   [
     'abstractLimit',
     (k) => k.abstractLimit,

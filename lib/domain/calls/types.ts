@@ -19,13 +19,16 @@ export interface CallKind {
   title: string
   closesAt: Date | null
   pageLimit: number
+  /** Words of a justification written here. */
+  wordLimit: number
   abstractLimit: number
-  /** Words and figures of the justification; null where they are not limited. */
-  wordLimit: number | null
+  /** Figures of a justification written here; null for as many as there can be. */
   figureLimit: number | null
   maxSeconds: number | null
   feeMinor: number
   panelId: number
+  /** Must name a student and a supervisor, both of whom have agreed. */
+  needsStudent: boolean
 }
 
 export interface CallPanel {

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { nightsPolicy } from './policies'
+import { nightsPolicy } from './nightsPolicySchema'
 import { policySummary } from './policySummary'
 
 /** One instrument of a request: what was asked, what stands given, what the suggestion gives. Times in seconds. */

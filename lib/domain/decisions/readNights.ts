@@ -7,7 +7,7 @@ import { openPanel } from '../panels/openPanel'
 import { callBins } from '../nights/callBins'
 import type { NightsBin, NightsRow, NightsView } from './nightsView'
 import { planNights, type PlannedNights } from './planNights'
-import type { NightsPolicy } from './policies'
+import type { NightsPolicy } from './nightsPolicySchema'
 import { whyNotGiven } from './whyNotGiven'
 
 /** The bins of a telescope, with what the suggestion lays there. */

@@ -4,14 +4,16 @@ import { authorize } from '@/lib/auth/authorize'
 import type { ActingContext } from '../context'
 import { mayReadProposal } from '../proposals/policy'
 import { readContents } from '../proposals/readContents'
+import type { ProposalState } from '../proposals/types'
 import type { Outcome } from './rules'
 
 export interface OutcomeView {
+  id: number
   reference: string
   title: string
   callNumber: number
   callSlug: string
-  state: string
+  state: ProposalState
   /** When letters go out, while nothing is made known. */
   lettersAt: Date
   decision: {
@@ -38,6 +40,7 @@ export async function readOutcome(ctx: ActingContext, reference: string): Promis
   const { id, call } = contents
   const decision = (await standingDecisions(ctx.db, [id])).get(id)
   const base = {
+    id,
     reference: contents.reference,
     title: contents.title,
     callNumber: call.number,

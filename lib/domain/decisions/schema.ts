@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { panelKeySchema, panelQuery, rowKey } from '../panels/schema'
-import { nightsPolicy } from './policies'
+import { nightsPolicy } from './nightsPolicySchema'
 
 /** Hours as typed, with a point or a comma; kept as whole seconds. */
 const hoursAsSeconds = z

@@ -5,7 +5,7 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { giveLines } from './giveLines'
 import { openDecisions } from './openDecisions'
 import { planNights } from './planNights'
-import { policyNames } from './policies'
+import { policyNames } from './nightsPolicySchema'
 import type { PlanInput } from './schema'
 
 /** Takes the suggestion over as the awards of every proposal of the list; what was given by hand before is superseded. */

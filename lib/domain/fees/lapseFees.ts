@@ -6,6 +6,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { proposalLapsed } from '../outbox/letters/proposalLapsed'
 import { queueLetter } from '../outbox/queueLetter'
+import { namedOnSending } from '../proposals/namedOnSending'
 import { lockContents } from '../submission/lockContents'
 import { takeOut } from '../submission/takeOut'
 import { cancelFee } from './cancelFee'
@@ -27,7 +28,7 @@ function lapse(ctx: Context, feeId: number, proposalId: number): Promise<boolean
     await takeOut(tx, row, { state: 'lapsed' })
     await cancelFee(tx, proposalId, 'lapsed')
     const url = `${tx.request.origin}${paths.proposal(contents.reference)}`
-    for (const person of contents.people) {
+    for (const person of namedOnSending(contents.people)) {
       const facts = { title: contents.title, reference: contents.reference, dueAt: fee.due_at, url }
       await queueLetter(tx, person, proposalLapsed({ name: person.name, ...facts }), `lapsed:${proposalId}`)
     }

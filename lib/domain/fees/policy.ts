@@ -1,6 +1,6 @@
 import { no, unseen, yes, type Decision } from '@/lib/auth/decision'
 import { holds, type Actor } from '../actor'
-import { investigatorRow } from '../proposals/policy'
+import { investigatorRow, lacksRight, mayLead } from '../proposals/policy'
 import type { ProposalContents } from '../proposals/types'
 
 type Subject = Pick<ProposalContents, 'people'>
@@ -18,9 +18,7 @@ export function mayAskForWaiver(actor: Actor, subject: Subject): Decision {
     return holds(actor, 'office')
       ? no('role', 'The office decides waivers; it asks for none.')
       : unseen('proposal')
-  return row.role === 'pi' || row.access === 'deputy'
-    ? yes
-    : no('role', 'The principal investigator or a deputy asks for a waiver.')
+  return mayLead(row) ? yes : lacksRight(row, 'The principal investigator or a deputy asks for a waiver.')
 }
 
 export function mayDecideWaiver(actor: Actor): Decision {

@@ -1,4 +1,9 @@
-import { addPanelMember, takeInvitation, type OpenInvitation } from '@/db/queries/invitations'
+import {
+  addPanelMember,
+  takeInvitation,
+  tieInvestigator,
+  type OpenInvitation,
+} from '@/db/queries/invitations'
 import { insertGrant } from '@/db/queries/people'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
@@ -8,6 +13,16 @@ import { writeLogbook } from '../logbook/writeLogbook'
 export async function grantInvited(tx: Context, invitation: OpenInvitation, personId: number): Promise<void> {
   if (!(await takeInvitation(tx.db, invitation.id, personId)))
     throw refuse.closed('This invitation has been accepted already.')
+  // Named on a proposal: every account is an investigator's, and agreeing to be named is a step of its own.
+  if (invitation.proposal_id !== null) {
+    await tieInvestigator(tx.db, { proposalId: invitation.proposal_id, email: invitation.email, personId })
+    return writeLogbook(tx, {
+      action: 'accept-invitation',
+      subject: { kind: 'invitation', id: invitation.id },
+      actingAs: 'visitor',
+      after: { personId, proposal: invitation.proposal_reference },
+    })
+  }
   const grant = {
     personId,
     callId: invitation.call_id,

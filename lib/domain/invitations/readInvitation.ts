@@ -1,5 +1,6 @@
 import { findOpenInvitation } from '@/db/queries/invitations'
 import { findPersonByEmail } from '@/db/queries/people'
+import { paths } from '@/lib/paths'
 import type { Context } from '../context'
 import { secretHash } from '../sessions/secretHash'
 import { roleWords } from './roleWords'
@@ -11,6 +12,8 @@ export interface InvitationView {
   where: string | null
   inviter: string | null
   expiresAt: Date
+  /** The proposal that names them, and where they answer; null for an office of the observatory. */
+  proposal: { title: string; answerAt: string } | null
   /** The address has an account: sign in with it instead of making one. */
   hasAccount: boolean
 }
@@ -27,6 +30,12 @@ export async function readInvitation(ctx: Context, token: string): Promise<Invit
     role: roleWords[row.role],
     where: panel ?? row.instrument_name,
     inviter: row.inviter,
+    proposal: row.proposal_reference
+      ? {
+          title: row.proposal_title || 'a proposal without a title yet',
+          answerAt: paths.proposalSection(row.proposal_reference, 'people'),
+        }
+      : null,
     expiresAt: row.expires_at,
     hasAccount: Boolean(account?.email_confirmed_at),
   }

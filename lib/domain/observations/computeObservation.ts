@@ -31,6 +31,8 @@ const nothing = {
   observedFeatureA: null,
   usableHours: null,
   exposure: null,
+  carried: null,
+  times: 1,
 }
 
 function withoutExposure(input: ObservationInput, checks: FeasibilityCheck[]): ObservationComputation {
@@ -72,6 +74,7 @@ export function reportOf(
       brightness: target.brightness,
       // A version that was frozen before these were asked for holds none of them.
       line: target.line ?? null,
+      spectrum: target.spectrum ?? null,
       galacticEbv: target.galacticEbv ?? null,
       magnification: target.magnification ?? null,
     },
@@ -141,8 +144,10 @@ export function computeObservation(input: ObservationInput): ObservationComputat
     observedFeatureA: report.observedFeatureA,
     usableHours: report.usableHours,
     exposure: exposure ? factsOf(exposure) : null,
+    carried: report.carried,
     checks,
     verdict: worstVerdict(checks.map(({ verdict }) => verdict)) ?? 'feasible',
     refusal: report.refusal,
+    times: 1,
   }
 }

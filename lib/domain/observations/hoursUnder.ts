@@ -66,6 +66,18 @@ function magnificationSpan(input: ObservationInput): HoursSpan | null {
   return spanOf(`magnification ${formatNumber(magnification, 1)} ± ${formatNumber(error, 1)}`, ends)
 }
 
+/** Within the error of the spectral index, where its colour counts; null where none is stated. */
+function indexSpan(input: ObservationInput): HoursSpan | null {
+  // A version that was frozen before spectra were asked for holds none.
+  const spectrum = input.target.spectrum ?? null
+  if (spectrum?.kind !== 'power-law' || !spectrum.indexError || isForLine(input)) return null
+  const { index, indexError } = spectrum
+  const ends = [index - indexError, index + indexError].map((value) =>
+    neededWith(input, { target: { ...input.target, spectrum: { ...spectrum, index: value } } }),
+  )
+  return spanOf(`α = ${formatNumber(index, 1)} ± ${formatNumber(indexError, 1)}`, ends)
+}
+
 function withinErrors(input: ObservationInput): HoursSpan[] {
   const redshift = input.target.redshiftError ?? 0
   const light = lightError(input)
@@ -88,6 +100,8 @@ function withinErrors(input: ObservationInput): HoursSpan[] {
     )
   const magnification = magnificationSpan(input)
   if (magnification) spans.push(magnification)
+  const index = indexSpan(input)
+  if (index) spans.push(index)
   if (redshift > 0 && magnitude > 0 && moved.length === 2)
     spans.push({ name: 'both together, 68 of 100', ...drawnHours(input, { redshift, magnitude }) })
   return spans

@@ -14,7 +14,17 @@ function keyOf({ contents, target, observation, mode, cosmology }: ObservationIn
     contents.call.seasonTo,
     cosmology.parameters,
     conditionsOf(contents, observation),
-    { ...target, version: 0, position: 0, name: '', raTyped: '', decTyped: '', redshiftTyped: '' },
+    {
+      ...target,
+      version: 0,
+      position: 0,
+      name: '',
+      group: null,
+      need: null,
+      raTyped: '',
+      decTyped: '',
+      redshiftTyped: '',
+    },
     mode ?? null,
     { ...observation, id: 0, version: 0, position: 0 },
   ])

@@ -4,5 +4,5 @@ import type { ProposalContents } from '../proposals/types'
 /** What numbers are computed from: no people, no papers, so that an anonymous proposal serves as well. */
 export type ReportContents = Pick<
   ProposalContents,
-  'site' | 'modes' | 'targets' | 'constraintSets' | 'observations' | 'cosmology'
+  'site' | 'modes' | 'groups' | 'targets' | 'constraintSets' | 'observations' | 'cosmology'
 > & { call: Pick<Call, 'seasonFrom' | 'seasonTo'> }

@@ -1,6 +1,8 @@
 import { formatCalendarDate } from '@/lib/format'
+import { separationArcsec } from '@/lib/science/sky'
 import type { ModeRecord } from '../facility/types'
 import type { Observation, Target } from '../proposals/types'
+import { samePlaceArcsec } from './clashes'
 import type { FeasibilityCheck } from './types'
 
 type Limits = Partial<Pick<FeasibilityCheck, 'feasibleTo' | 'failsAt'>>
@@ -14,7 +16,8 @@ const check = (
 /** A request that names something the engine cannot start from: each gap is a check that is not clear. */
 export function gapChecks(target: Target, isForLine: boolean): FeasibilityCheck[] {
   const gaps: FeasibilityCheck[] = []
-  if (target.raDeg === null)
+  // What is awaited has no position yet: when it is up cannot be judged, and nobody can mend that.
+  if (target.raDeg === null && !target.opportunity)
     gaps.push(
       check('position-given', 'Position given', {
         measured: 'none',
@@ -61,14 +64,10 @@ export const outsideSeason = (from: string, to: string): FeasibilityCheck =>
     fix: 'Ask for evenings of the season, or leave the dates open.',
   })
 
-const sameArcsec = 5
-
-function separationArcsec(a: Target, b: Target): number {
+function apartArcsec(a: Target, b: Target): number {
   if (a.id === b.id) return 0
   if (a.raDeg === null || b.raDeg === null || a.decDeg === null || b.decDeg === null) return Infinity
-  const turn = ((((a.raDeg - b.raDeg + 180) % 360) + 360) % 360) - 180
-  const dRa = turn * Math.cos((((a.decDeg + b.decDeg) / 2) * Math.PI) / 180)
-  return Math.hypot(dRa, a.decDeg - b.decDeg) * 3600
+  return separationArcsec({ raDeg: a.raDeg, decDeg: a.decDeg }, { raDeg: b.raDeg, decDeg: b.decDeg })
 }
 
 /** The same position, mode and feature must not be asked for twice in one request. */
@@ -87,13 +86,13 @@ export function notAskedTwice(
       other.modeId === observation.modeId &&
       other.featureRestA === observation.featureRestA &&
       target !== undefined &&
-      separationArcsec(own, target) < sameArcsec
+      apartArcsec(own, target) <= samePlaceArcsec
     )
   })
   const name = twin ? targets.get(twin.targetId)?.name : null
   return check('not-asked-twice', 'Not asked twice', {
     measured: twin ? 'one' : 'none',
-    feasibleTo: `none in ${sameArcsec}″`,
+    feasibleTo: `none in ${samePlaceArcsec}″`,
     failsAt: 'same mode',
     verdict: twin ? 'not-feasible' : 'feasible',
     why: twin

@@ -11,6 +11,10 @@ export { cosmologySentence } from './regimeSentence'
 
 export { conditionsOf } from './seasonOf'
 
+export { awaitedWords } from './awaitedWords'
+export { groupHoursSentence, groupSentence } from './groupWords'
+export { isSpared } from './isSpared'
+export { needOf } from './needOf'
 export { worstVerdict } from './worstVerdict'
 export { hoursHangOn, type HoursHangOn, type HoursSpan } from './hoursUnder'
 export type { ReportContents } from './reportContents'

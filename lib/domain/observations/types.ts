@@ -1,3 +1,5 @@
+import type { TargetGroup } from '../proposals/types'
+
 export type Verdict = 'feasible' | 'marginal' | 'not-feasible'
 
 export interface FeasibilityCheck {
@@ -72,9 +74,31 @@ export interface ObservationComputation {
   /** Dark hours within the Moon and date limits asked for; null without a position. */
   usableHours: number | null
   exposure: ExposureFacts | null
+  /** How the magnitude came from its band to the mode; what was computed before it was told has none. */
+  carried?: { sentence: string; isAssumed: boolean } | null
   checks: FeasibilityCheck[]
   verdict: Verdict
   refusal: string | null
+  /** How often its hours count in those of the proposal: 0 for a backup, a target of opportunity once a trigger. */
+  times: number
+}
+
+/** How a group of targets stands against its rule. */
+export interface GroupComputation {
+  name: string
+  rule: TargetGroup['rule']
+  atLeast: number | null
+  hoursFor: TargetGroup['hoursFor']
+  /** How many targets it lists, and how they stand; `unasked` are those nothing observes yet. */
+  size: number
+  feasible: number
+  marginal: number
+  notFeasible: number
+  unasked: number
+  /** What its hours add to those asked, seconds. */
+  askedSeconds: number
+  /** Null while nothing is in it. */
+  verdict: Verdict | null
 }
 
 /** Everything computed for a proposal: same contents and engine, same bytes. */
@@ -84,6 +108,7 @@ export interface ProposalComputation {
   recordVersions: Record<string, number>
   targets: TargetComputation[]
   observations: ObservationComputation[]
+  groups: GroupComputation[]
   askedSeconds: number
   neededSeconds: number
   /** Asked hours over the mean dark hours of a night. */

@@ -2,6 +2,7 @@ import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
 import type { ModeRecord } from '../facility/types'
 import { neededWith } from './change'
 import type { ObservationInput } from './computeObservation'
+import { needOf } from './needOf'
 import { conditionsOf } from './seasonOf'
 import type { ObservationComputation } from './types'
 
@@ -41,14 +42,18 @@ function darker(input: ObservationInput, than: number): string[] {
 function givenUp({ contents, observation }: ObservationInput, missing: number): string[] {
   const optional = contents.observations.flatMap((one) => {
     const target = contents.targets.find(({ id }) => id === one.targetId)
-    return one.id !== observation.id && target && target.need !== 'required' && one.askedSeconds >= missing
-      ? [{ name: target.name, asked: one.askedSeconds, need: target.need }]
+    // A backup adds no hours that could be given up.
+    return one.id !== observation.id &&
+      target &&
+      needOf(target, contents.groups) === 'optional' &&
+      one.askedSeconds >= missing
+      ? [{ name: target.name, asked: one.askedSeconds }]
       : []
   })
   const [least] = optional.sort((a, b) => a.asked - b.asked)
   return least
     ? [
-        `Leave out ${least.name}, ${least.need}: ${formatHoursFromSeconds(missing)} of its ${formatHoursFromSeconds(least.asked)} would cover it.`,
+        `Leave out ${least.name}, optional: ${formatHoursFromSeconds(missing)} of its ${formatHoursFromSeconds(least.asked)} would cover it.`,
       ]
     : []
 }

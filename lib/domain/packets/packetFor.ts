@@ -8,6 +8,7 @@ import { inTransaction } from '../inTransaction'
 import { newObjectKey } from '../objects/objectKey'
 import { storedBytes } from '../papers/storedBytes'
 import { makePacket, packetHash, type PacketInput, type PacketVariant } from './makePacket'
+import { packetParts } from './packetParts'
 
 export interface PacketFile {
   bytes: Uint8Array
@@ -27,11 +28,11 @@ export async function packetFor(
 ): Promise<PacketFile> {
   const version = await findVersion(ctx.db, proposalVersionId)
   if (!version) throw refuse.notFound('packet')
-  const paper = await paperObject(ctx.db, version.paperId)
-  if (!paper)
+  const { snapshot, versionNumber, paperId } = version
+  const paper = paperId === null ? null : await paperObject(ctx.db, paperId)
+  if (!paper && !snapshot.contents.writings.justification.text)
     throw refuse.integrity('The justification of this proposal is missing. The office has to be told.')
-  const { snapshot, versionNumber } = version
-  const input: PacketInput = { snapshot, variant, versionNumber, paperSha256: paper.sha256 }
+  const input: PacketInput = { snapshot, variant, versionNumber, paperSha256: paper?.sha256 ?? null }
   const contentHash = packetHash(input)
   const { reference, reviewNumber } = snapshot.contents
   const fileName = `${variant === 'full' ? reference : (reviewNumber ?? 'packet')}.pdf`
@@ -39,7 +40,7 @@ export async function packetFor(
   const kept = await findPacket(ctx.db, version.id, variant, contentHash)
   const keptBytes = kept && (await readKept(ctx, kept))
   if (keptBytes) return { bytes: keptBytes, fileName }
-  const { bytes, pages } = await makePacket(input, await storedBytes(ctx, paper))
+  const { bytes, pages } = await makePacket(input, await packetParts(ctx, paper, snapshot.contents.figures))
   await keep(ctx, { versionId: version.id, variant, contentHash, pages }, bytes)
   return { bytes, fileName }
 }

@@ -1,12 +1,12 @@
 import { readSnapshot } from '@/db/queries/versions'
 import { authorize } from '@/lib/auth/authorize'
 import type { ActingContext } from '../context'
-import { storedBytes } from '../papers/storedBytes'
 import { computationOf } from '../proposals/computationOf'
 import { isOpenForWriting, mayReadProposal } from '../proposals/policy'
 import { readContents } from '../proposals/readContents'
 import { makePacket, type PacketVariant } from './makePacket'
 import { packetFor, type PacketFile } from './packetFor'
+import { packetParts } from './packetParts'
 
 /**
  * The packet of a proposal for its investigators and the office: what was sent, or a preview of what stands now
@@ -30,7 +30,7 @@ export async function readPacket(
       versionNumber: null,
       paperSha256: paper?.sha256 ?? null,
     },
-    paper && (await storedBytes(ctx, paper)),
+    await packetParts(ctx, paper, contents.figures),
   )
   return { bytes, fileName: `${contents.reference}-preview.pdf` }
 }

@@ -6,13 +6,13 @@ import { openPanel } from './openPanel'
 export async function ledProposal(
   ctx: ActingContext,
   key: { callSlug: string; reviewNumber: string },
-): Promise<{ id: number }> {
+): Promise<{ id: number; panelId: number }> {
   const first = await openPanel(ctx, { callSlug: key.callSlug })
   const led = [first]
   for (const { id } of first.others) led.push(await openPanel(ctx, { callSlug: key.callSlug, panelId: id }))
-  const proposal = led
-    .flatMap((desk) => desk.proposals)
-    .find(({ reviewNumber }) => reviewNumber === key.reviewNumber)
-  if (!proposal) throw refuse.notFound('proposal')
-  return { id: proposal.id }
+  for (const desk of led) {
+    const proposal = desk.proposals.find(({ reviewNumber }) => reviewNumber === key.reviewNumber)
+    if (proposal) return { id: proposal.id, panelId: desk.panel.id }
+  }
+  throw refuse.notFound('proposal')
 }

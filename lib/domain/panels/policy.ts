@@ -1,4 +1,4 @@
-import { unseen, yes, type Decision } from '@/lib/auth/decision'
+import { no, unseen, yes, type Decision } from '@/lib/auth/decision'
 import { holdsForPanel, type Actor } from '../actor'
 
 /**
@@ -11,4 +11,14 @@ export function canLeadPanel(
 ): Decision {
   if (panel.seat !== 'chair' && panel.seat !== 'deputy') return unseen('panel')
   return holdsForPanel(actor, 'chair', panel.callId, panel.id) ? yes : unseen('panel')
+}
+
+/** Who asks is opened once a ranking of the panel was frozen: what changes after that is a new version beside it. */
+export function mayReadTeams(hasFrozenRanking: boolean): Decision {
+  return hasFrozenRanking
+    ? yes
+    : no(
+        'window',
+        'Who asks is opened once the ranking is frozen. Until then proposals are read without names.',
+      )
 }

@@ -1,16 +1,13 @@
 import { PDFDocument } from 'pdf-lib'
 import { refuse } from '@/lib/errors'
-import { countInWords, formatBytes, formatNumber } from '@/lib/format'
+import { countInWords, formatBytes } from '@/lib/format'
 import { activeContent } from './activeContent'
 import { fileKind } from './fileKind'
 import { maxPaperBytes } from './limits'
 import { pdfText } from './pdfText'
-import { wordsIn } from './wordsIn'
 
 export interface Inspected {
   pages: number
-  /** Words that can be read in it. */
-  words: number
 }
 
 const no = (sentence: string) => refuse.field('file', sentence)
@@ -50,31 +47,24 @@ async function opened(bytes: Uint8Array): Promise<{ document: PDFDocument; pages
  * Looks a document through before it is kept: what it is, whole, unlocked, passive, not too long.
  * Each cause has one sentence, at the field `file`.
  */
-export async function inspectPdf(
-  bytes: Uint8Array,
-  fileName: string,
-  limits: { pages: number; words: number | null },
-): Promise<Inspected> {
+export async function inspectPdf(bytes: Uint8Array, fileName: string, pageLimit: number): Promise<Inspected> {
   if (bytes.length === 0) throw no(`${fileName} is empty.`)
   if (bytes.length > maxPaperBytes)
     throw no(`${fileName} has ${formatBytes(bytes.length)}; at most ${formatBytes(maxPaperBytes)} are taken.`)
   const kind = fileKind(bytes)
-  if (kind !== 'pdf') throw no(`${fileName} is not a PDF: by its contents it is ${kind.instead}.`)
+  if (kind !== 'pdf') {
+    const instead = typeof kind === 'string' ? `a ${kind.toUpperCase()} picture` : kind.instead
+    throw no(`${fileName} is not a PDF: by its contents it is ${instead}.`)
+  }
   checkEnd(bytes)
   const { document, pages } = await opened(bytes)
   const active = activeContent(document)
   if (active)
     throw no(`The PDF carries ${active}. Print it to a new PDF, which leaves that out, and send that.`)
   if (pages === 0) throw no('The PDF has no pages.')
-  if (pages > limits.pages)
-    throw no(`The PDF has ${pages} pages; this document may have ${countInWords(limits.pages, 'page')}.`)
-  const text = await pdfText(bytes)
-  if (text.pages.length !== pages)
+  if (pages > pageLimit)
+    throw no(`The PDF has ${pages} pages; this document may have ${countInWords(pageLimit, 'page')}.`)
+  if ((await pdfText(bytes)).pages.length !== pages)
     throw no('The PDF counts its pages in two ways. Print it to a new PDF and send that.')
-  const words = wordsIn(text)
-  if (limits.words !== null && words > limits.words)
-    throw no(
-      `The PDF has ${formatNumber(words, 0)} words; this document may have ${formatNumber(limits.words, 0)}.`,
-    )
-  return { pages, words }
+  return { pages }
 }

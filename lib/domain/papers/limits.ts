@@ -6,12 +6,6 @@ export const maxPaperBytes = 20_000_000
 /** A document about the team, which has no limit of its own in the call. */
 export const maxExpertisePages = 2
 
-/** How long a document may be; the call limits the justification alone. */
-export function limitsOf(
-  paperKind: Paper['kind'],
-  kind: Pick<CallKind, 'pageLimit' | 'wordLimit'>,
-): { pages: number; words: number | null } {
-  return paperKind === 'justification'
-    ? { pages: kind.pageLimit, words: kind.wordLimit }
-    : { pages: maxExpertisePages, words: null }
-}
+/** The most pages of a document; the call limits the justification alone. */
+export const pageLimitOf = (paperKind: Paper['kind'], kind: Pick<CallKind, 'pageLimit'>): number =>
+  paperKind === 'justification' ? kind.pageLimit : maxExpertisePages

@@ -11,9 +11,9 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { repairOpened } from '../outbox/letters/repairOpened'
 import { queueLetter } from '../outbox/queueLetter'
+import { mayLead } from '../proposals/policy'
 import { lockContents } from '../submission/lockContents'
-import { leadsProposal } from './leadsProposal'
-import { whyNoRepair } from './repairRules'
+import { whyNoRepair } from './rules'
 import type { openRepairSchema } from './repairSchema'
 
 /** Opens one paper of a sent proposal for one replacement by those who lead it, until a moment, on record. */
@@ -38,7 +38,7 @@ export async function openRepair(
       openedBy: tx.actor.personId,
     })
     const url = tx.request.origin + paths.proposalSection(contents.reference, 'papers')
-    for (const person of contents.people.filter(leadsProposal))
+    for (const person of contents.people.filter(mayLead))
       await queueLetter(
         tx,
         person,

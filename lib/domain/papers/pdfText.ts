@@ -4,9 +4,11 @@ import { refuse } from '@/lib/errors'
 export interface PdfText {
   /** The words of each page. */
   pages: string[]
-  /** Title, author and the like that programs write into a PDF. */
-  properties: string[]
+  /** Title, author and the like that programs write into a PDF, those that say something. */
+  properties: { name: string; value: string }[]
 }
+
+const named = ['Title', 'Author', 'Subject', 'Keywords', 'Creator', 'Producer'] as const
 
 /** What can be read in a PDF without looking at it: the words of its pages and its properties. */
 export async function pdfText(bytes: Uint8Array): Promise<PdfText> {
@@ -16,7 +18,10 @@ export async function pdfText(bytes: Uint8Array): Promise<PdfText> {
     const { text } = await extractText(document, { mergePages: false })
     const { info } = await getMeta(document)
     await document.destroy()
-    const properties = Object.values(info).filter((value): value is string => typeof value === 'string')
+    const properties = named.flatMap((name) => {
+      const value: unknown = info[name]
+      return typeof value === 'string' && value.trim() !== '' ? [{ name, value: value.trim() }] : []
+    })
     return { pages: text, properties }
   } catch (cause) {
     throw Object.assign(

@@ -18,6 +18,6 @@ export async function putPaper(
     purpose: 'paper',
   })
   await supersedePapers(tx.db, paper.proposalId, paper.kind)
-  const { fileName, pages, words } = file
-  return insertPaper(tx.db, { ...paper, objectId, fileName, pages, words })
+  const { fileName, pages } = file
+  return insertPaper(tx.db, { ...paper, objectId, fileName, pages })
 }

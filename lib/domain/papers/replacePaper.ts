@@ -9,11 +9,11 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { freezeVersion } from '../submission/freezeVersion'
 import { lockContents } from '../submission/lockContents'
-import { limitsOf } from './limits'
+import { pageLimitOf } from './limits'
 import { mayReplacePaper } from './policy'
 import { putPaper } from './putPaper'
 import { receiveFile } from './receiveFile'
-import { isWaiting } from './repairRules'
+import { isWaiting } from './rules'
 import { tellOfReplacement } from './tellOfReplacement'
 import type { UploadPaperInput, UploadedPaper } from './uploadPaper'
 
@@ -39,10 +39,10 @@ export async function replacePaper(
   input: UploadPaperInput,
   arrivedAt: Date,
 ): Promise<UploadedPaper> {
-  const limits = await inTransaction(ctx, async (tx) =>
-    limitsOf(input.kind, (await opened(tx, input, arrivedAt)).contents.kind),
+  const pageLimit = await inTransaction(ctx, async (tx) =>
+    pageLimitOf(input.kind, (await opened(tx, input, arrivedAt)).contents.kind),
   )
-  const file = await receiveFile(ctx, input, limits)
+  const file = await receiveFile(ctx, input, pageLimit)
 
   return inTransaction(ctx, async (tx) => {
     const { row, contents, repair, standing } = await opened(tx, input, arrivedAt)
@@ -77,7 +77,6 @@ export async function replacePaper(
         kind: input.kind,
         fileName: file.fileName,
         pages: file.pages,
-        words: file.words,
         sha256: file.sha256,
         version: submission.versionNumber,
         reason: repair.reason,

@@ -3,13 +3,13 @@ import { findPersonByEmail } from '@/db/queries/people'
 import { insertInvestigator } from '@/db/queries/proposalPeople'
 import { touchProposal } from '@/db/queries/proposals'
 import { refuse } from '@/lib/errors'
-import { paths } from '@/lib/paths'
 import { deadlineOf } from '../calls/rules'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { namedOnProposal } from '../outbox/letters/namedOnProposal'
 import { queueLetter } from '../outbox/queueLetter'
+import { answerLink } from './answerLink'
 import { openForManaging } from './openProposal'
 import type { addInvestigatorSchema } from './peopleSchema'
 
@@ -35,6 +35,8 @@ export async function addInvestigator(ctx: Context, input: AddInvestigatorInput)
       role: 'co-investigator',
       access: input.access,
       isStudent: input.isStudent,
+      isSupervisor: input.isSupervisor,
+      orcid: input.orcid || null,
       position: Math.max(0, ...subject.people.map(({ position }) => position)) + 1,
       confirmedAt: null,
     })
@@ -50,7 +52,8 @@ export async function addInvestigator(ctx: Context, input: AddInvestigatorInput)
         callTitle: subject.call.title,
         deadline: deadlineOf(subject.call, subject.kind, subject),
         mayEdit: input.access !== 'read',
-        url: tx.request.origin + paths.proposalSection(row.reference, 'people'),
+        hasAccount: person !== null,
+        url: tx.request.origin + (await answerLink(tx, row, { ...input, hasAccount: person !== null })),
       }),
       `named:${row.id}:${id}`,
     )
@@ -58,7 +61,14 @@ export async function addInvestigator(ctx: Context, input: AddInvestigatorInput)
       action: 'people.add',
       subject: { kind: 'proposal', id: row.reference },
       actingAs: 'investigator',
-      after: { name: input.name, access: input.access },
+      after: {
+        name: input.name,
+        access: input.access,
+        institute: input.institute,
+        orcid: input.orcid || null,
+        isStudent: input.isStudent,
+        isSupervisor: input.isSupervisor,
+      },
     })
     return { id }
   })

@@ -4,7 +4,7 @@ import { databaseNow } from '@/db/queries/clock'
 import { insertConstraintSet } from '@/db/queries/observations'
 import { findPerson } from '@/db/queries/people'
 import { insertInvestigator } from '@/db/queries/proposalPeople'
-import { findProposal, findTwin, insertProgramme, insertProposal } from '@/db/queries/proposals'
+import { findTwin, insertProgramme, insertProposal } from '@/db/queries/proposals'
 import { refuse } from '@/lib/errors'
 import { formatUtcInstant } from '@/lib/format'
 import { findPreset } from '@/lib/science/cosmology'
@@ -13,18 +13,10 @@ import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { defaultConstraints } from '../observations/defaultConstraints'
-import { referenceFrom } from './reference'
+import { freeReference } from './freeReference'
 import type { beginSchema } from './schema'
 
 export type BeginProposalInput = z.output<typeof beginSchema>
-
-/** A reference nobody has. A million drafts leave it free at the first try 29 times in 30. */
-async function freeReference(tx: Context): Promise<string> {
-  for (;;) {
-    const reference = referenceFrom(tx.random.bytes(5))
-    if (!(await findProposal(tx.db, reference))) return reference
-  }
-}
 
 /** Begins a draft in an open call: programme, proposal, its principal investigator and usual conditions. */
 export async function beginProposal(ctx: Context, input: BeginProposalInput): Promise<{ reference: string }> {
@@ -70,6 +62,8 @@ export async function beginProposal(ctx: Context, input: BeginProposalInput): Pr
       role: 'pi',
       access: 'edit',
       isStudent: person.career_stage === 'student',
+      isSupervisor: false,
+      orcid: null,
       position: 1,
       confirmedAt: now,
     })

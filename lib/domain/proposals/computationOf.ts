@@ -14,6 +14,7 @@ function keyOf(c: ProposalContents): string {
     season,
     c.site,
     c.modes,
+    c.groups,
     c.targets,
     c.constraintSets,
     c.observations,

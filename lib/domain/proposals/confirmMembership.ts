@@ -27,7 +27,8 @@ export async function confirmMembership(ctx: Context, input: { reference: string
       action: 'people.agree',
       subject: { kind: 'proposal', id: row.reference },
       actingAs: 'investigator',
-      after: { name: actor.name },
+      before: { name: own.name, agreed: false },
+      after: { name: actor.name, agreed: true },
     })
   })
 }

@@ -1,3 +1,4 @@
+import { endLeadOffer } from '@/db/queries/leadOffers'
 import { deleteInvestigator } from '@/db/queries/proposalPeople'
 import { touchProposal } from '@/db/queries/proposals'
 import { authorize } from '@/lib/auth/authorize'
@@ -15,12 +16,13 @@ export async function leaveProposal(ctx: Context, input: { reference: string }):
     const own = investigatorRow(actor, subject)
     if (!own) return
     await deleteInvestigator(tx.db, own.id)
+    if (row.lead_offered_to === actor.personId) await endLeadOffer(tx.db, row.id)
     await touchProposal(tx.db, row.id)
     await writeLogbook(tx, {
       action: 'people.leave',
       subject: { kind: 'proposal', id: row.reference },
       actingAs: 'investigator',
-      before: { name: own.name, access: own.access },
+      before: { name: own.name, access: own.access, agreed: own.confirmedAt !== null },
     })
   })
 }

@@ -23,6 +23,7 @@ export async function moveInvestigator(ctx: Context, input: z.output<typeof move
       action: 'people.order',
       subject: { kind: 'proposal', id: row.reference },
       actingAs: 'investigator',
+      before: { names: subject.people.map(({ name }) => name) },
       after: { names: order.map(({ name }) => name) },
     })
   })

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { orcid } from '../people/orcid'
 import { cleanText } from './cleanText'
 import { reference } from './schema'
 
@@ -9,6 +10,7 @@ const oneLine = (longest: number, sentence: string) =>
     .refine((text) => text.length <= longest, sentence)
 
 const access = z.enum(['read', 'edit', 'deputy'], 'Choose what this person may do.')
+const institute = oneLine(200, 'An institute has at most 200 characters.')
 const id = z.number().int().positive()
 
 /** Someone to be named. Text stays text in the form; a box is a box. */
@@ -26,12 +28,23 @@ export const newInvestigatorSchema = z.object({
       (text) => text === '' || z.email().safeParse(text).success,
       'This does not read as an e-mail address: name@institute.org.',
     ),
-  institute: oneLine(200, 'An institute has at most 200 characters.'),
+  institute,
   access,
+  orcid,
   isStudent: z.boolean(),
+  isSupervisor: z.boolean(),
+})
+
+/** What can be said of someone named already. */
+export const investigatorDetailsSchema = z.object({
+  institute,
+  orcid,
+  isStudent: z.boolean(),
+  isSupervisor: z.boolean(),
 })
 
 export const addInvestigatorSchema = newInvestigatorSchema.extend({ reference })
+export const describeInvestigatorSchema = investigatorDetailsSchema.extend({ reference, id })
 export const investigatorSchema = z.object({ reference, id })
 export const accessSchema = z.object({ reference, id, access })
 export const moveSchema = z.object({ reference, id, by: z.union([z.literal(-1), z.literal(1)]) })

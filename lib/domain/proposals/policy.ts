@@ -15,8 +15,17 @@ export function investigatorRow(actor: Actor, subject: Pick<ProposalSubject, 'pe
   return subject.people.find((person) => person.personId === actor.personId) ?? null
 }
 
-const mayAct = (row: Investigator) => row.role === 'pi' || row.access !== 'read'
-const mayLead = (row: Investigator) => row.role === 'pi' || row.access === 'deputy'
+/** Whether someone named may change the text, and whether they may send it and speak for it: once they agreed. */
+const mayAct = (row: Investigator) => row.confirmedAt !== null && (row.role === 'pi' || row.access !== 'read')
+export const mayLead = (row: Investigator) =>
+  row.confirmedAt !== null && (row.role === 'pi' || row.access === 'deputy')
+
+/** The no for someone named whose right is too small, or who has the right and has yet to agree. */
+export const lacksRight = (row: Investigator, sentence: string): Decision =>
+  no(
+    'role',
+    row.confirmedAt === null && row.access !== 'read' ? 'Agree to be named first, under People.' : sentence,
+  )
 
 /** Investigators and the office. To anyone else the proposal does not exist. */
 export function mayReadProposal(actor: Actor, subject: Pick<ProposalSubject, 'people'>): Decision {
@@ -49,8 +58,8 @@ export function mayEditProposal(actor: Actor, subject: ProposalSubject, now: Dat
       ? no('role', 'The office reads proposals; it does not change them.')
       : unseen('proposal')
   if (!mayAct(row))
-    return no(
-      'role',
+    return lacksRight(
+      row,
       'You may read this proposal. Ask its principal investigator for the right to change it.',
     )
   return inTime(subject, now)
@@ -61,7 +70,7 @@ export function maySendProposal(actor: Actor, subject: ProposalSubject, arrivedA
   const row = investigatorRow(actor, subject)
   if (!row)
     return holds(actor, 'office') ? no('role', 'The office does not send proposals.') : unseen('proposal')
-  if (!mayLead(row)) return no('role', 'The principal investigator or a deputy sends the proposal.')
+  if (!mayLead(row)) return lacksRight(row, 'The principal investigator or a deputy sends the proposal.')
   return inTime(subject, arrivedAt)
 }
 
@@ -72,7 +81,7 @@ export function mayManagePeople(actor: Actor, subject: ProposalSubject, now: Dat
     return holds(actor, 'office')
       ? no('role', 'The office reads proposals; it does not change them.')
       : unseen('proposal')
-  if (!mayLead(row)) return no('role', 'The principal investigator or a deputy says who is named.')
+  if (!mayLead(row)) return lacksRight(row, 'The principal investigator or a deputy says who is named.')
   return inTime(subject, now)
 }
 
@@ -81,7 +90,7 @@ export function mayPutAway(actor: Actor, subject: Pick<ProposalSubject, 'people'
   const row = investigatorRow(actor, subject)
   if (!row)
     return holds(actor, 'office') ? no('role', 'The office does not put drafts away.') : unseen('proposal')
-  if (!mayLead(row)) return no('role', 'The principal investigator or a deputy puts a draft away.')
+  if (!mayLead(row)) return lacksRight(row, 'The principal investigator or a deputy puts a draft away.')
   return subject.state === 'draft'
     ? yes
     : no('window', 'Only a draft can be put away. A sent proposal is withdrawn.')
@@ -92,7 +101,10 @@ export function mayLeave(actor: Actor, subject: ProposalSubject): Decision {
   const row = investigatorRow(actor, subject)
   if (!row) return unseen('proposal')
   if (row.role === 'pi')
-    return no('role', 'The principal investigator cannot leave. Put the draft away instead.')
+    return no(
+      'role',
+      'The principal investigator cannot leave. Ask someone to lead it first, or put the draft away.',
+    )
   return isOpenForWriting(subject)
     ? yes
     : no('window', 'The proposal has been sent with your name. Write to the office to take it off.')

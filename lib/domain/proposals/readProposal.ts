@@ -1,6 +1,7 @@
 import { databaseNow } from '@/db/queries/clock'
 import { feeOf, type FeeState } from '@/db/queries/fees'
 import { findProposal } from '@/db/queries/proposals'
+import type { ProposalsRow } from '@/db/tables'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { deadlineOf } from '../calls/rules'
@@ -9,6 +10,7 @@ import type { Context } from '../context'
 import type { ProposalComputation } from '../observations/types'
 import { completeness, type SectionReport } from './completeness'
 import { computationOf } from './computationOf'
+import { mayOfferLead } from './leadPolicy'
 import { investigatorRow, mayEditProposal, mayManagePeople, mayReadProposal } from './policy'
 import { putAwayReason } from './putAwayDraft'
 import { readContents } from './readContents'
@@ -27,19 +29,16 @@ export interface ReadProposal {
   /** Why it cannot be changed now, in a sentence; null when it can. */
   readOnly: string | null
   mayManage: boolean
+  /** Who has been asked to lead it, by their account; null when nobody has. */
+  leadOfferedTo: number | null
+  mayOfferLead: boolean
   /** A draft put away that may be taken back. */
   mayTakeBack: boolean
 }
 
 /** Whether it is a draft the investigators put away, and could still be written on. */
-async function mayTakeBack(
-  ctx: Context,
-  actor: Actor,
-  contents: ProposalContents,
-  now: Date,
-): Promise<boolean> {
+function mayTakeBack(row: ProposalsRow | null, actor: Actor, contents: ProposalContents, now: Date): boolean {
   if (contents.state !== 'withdrawn') return false
-  const row = await findProposal(ctx.db, contents.id)
   const asDraft = { ...contents, state: 'draft' as const }
   return row?.withdrawn_reason === putAwayReason && mayManagePeople(actor, asDraft, now).allowed
 }
@@ -50,7 +49,7 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
   const [contents, now] = await Promise.all([readContents(ctx.db, reference), databaseNow(ctx.db)])
   authorize(mayReadProposal(ctx.actor, contents))
   const computation = computationOf(contents)
-  const fee = await feeOf(ctx.db, contents.id)
+  const [fee, row] = await Promise.all([feeOf(ctx.db, contents.id), findProposal(ctx.db, contents.id)])
   const mayEdit = mayEditProposal(ctx.actor, contents, now)
   return {
     contents,
@@ -62,6 +61,8 @@ export async function readProposal(ctx: Context, reference: string): Promise<Rea
     own: investigatorRow(ctx.actor, contents),
     readOnly: mayEdit.allowed ? null : mayEdit.sentence,
     mayManage: mayManagePeople(ctx.actor, contents, now).allowed,
-    mayTakeBack: await mayTakeBack(ctx, ctx.actor, contents, now),
+    leadOfferedTo: row?.lead_offered_to ?? null,
+    mayOfferLead: mayOfferLead(ctx.actor, contents).allowed,
+    mayTakeBack: mayTakeBack(row, ctx.actor, contents, now),
   }
 }

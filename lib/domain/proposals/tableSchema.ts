@@ -31,6 +31,8 @@ export const proposalRow = z.object({
   /** Something can still be done before the deadline. */
   isOpen: z.boolean(),
   updatedAt: instant,
+  /** Number of the open call it can be carried on in; null for none. */
+  continueIn: z.number().nullable(),
 })
 
 export const proposalsReply = z.object({ now: instant, rows: z.array(proposalRow) })

@@ -1,3 +1,4 @@
+import { programmeInCall } from '@/db/queries/programmes'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
@@ -15,6 +16,8 @@ export async function takeBackDraft(ctx: Context, input: { reference: string }):
     authorize(mayManagePeople(opened.actor, asDraft, opened.now))
     if (opened.row.state !== 'withdrawn' || opened.row.withdrawn_reason !== putAwayReason)
       throw refuse.closed('Only a draft that was put away can be taken back.')
+    const standing = await programmeInCall(tx.db, opened.row.programme_id, opened.row.call_id)
+    if (standing) throw refuse.closed('Another proposal of this programme stands in this call.')
     return writeProposal(tx, opened, 'proposal.take-back', {
       state: 'draft',
       withdrawn_at: null,

@@ -13,6 +13,12 @@ export interface Investigator {
   role: 'pi' | 'co-investigator'
   access: 'read' | 'edit' | 'deputy'
   isStudent: boolean
+  /** Supervises the student named. */
+  isSupervisor: boolean
+  /** With hyphens: '0000-0002-1825-0097'. The account's own, else as typed by whoever named them. */
+  orcid: string | null
+  /** The account has proved that the iD is its own. */
+  isOrcidVerified: boolean
   position: number
   confirmedAt: Date | null
 }
@@ -37,6 +43,38 @@ export interface LineLight {
   widthKmS: number
 }
 
+/** Shape of a target's own continuum, before dust and gas on the way. */
+export type TargetSpectrum =
+  | { kind: 'power-law'; index: number; indexError: number | null }
+  | { kind: 'black-body'; temperatureK: number }
+  | { kind: 'table'; wavelengthsNm: number[]; fLambda: number[] }
+
+/** What is asked of a target that is awaited, not known. */
+export interface Opportunity {
+  /** Class of event: 'tidal disruption'. */
+  event: string
+  /** What must be seen for it to be observed. */
+  trigger: string
+  /** From the trigger to the first exposure. */
+  reactionSeconds: number
+  /** How many such events are asked for; hours are asked for each. */
+  triggers: number
+}
+
+/** Targets that share one rule. */
+export interface TargetGroup {
+  id: number
+  /** No two of a proposal are called the same. */
+  name: string
+  /** All of them must be done, at least so many, or they are used only when the others cannot be. */
+  rule: 'all' | 'at-least' | 'backup'
+  /** How many; null but for 'at-least'. */
+  atLeast: number | null
+  /** Whose hours are asked of an 'at-least' group: of all it lists, or of as many as must be done. */
+  hoursFor: 'all' | 'at-least'
+  version: number
+}
+
 export interface Target {
   id: number
   position: number
@@ -56,9 +94,16 @@ export interface Target {
   redshiftError: number | null
   redshiftFrame: 'heliocentric' | 'cmb'
   redshiftType: 'spectroscopic' | 'photometric' | 'assumed'
+  /** How much it is needed by itself; in a group the group's rule counts instead. */
   need: 'required' | 'optional' | 'backup'
+  /** Name of its group. */
+  group: string | null
+  /** What it waits for; null for a target that is there already. */
+  opportunity: Opportunity | null
   brightness: Brightness | null
   line: LineLight | null
+  /** Null where none is stated: flat in f_nu. */
+  spectrum: TargetSpectrum | null
   /** Reddening of the Galaxy as read from the SFD map; what is predicted is dimmed by it. */
   galacticEbv: number | null
   /** What is predicted is made brighter by it. */
@@ -99,12 +144,38 @@ export interface Paper {
   kind: 'justification' | 'team-expertise'
   fileName: string
   pages: number
-  /** Words that can be read in it; null where they were not counted. */
-  words: number | null
   sizeBytes: number
   sha256: string
   objectKey: string
   uploadedAt: Date
+}
+
+export type WritingPart = 'justification' | 'references' | 'team'
+
+/** A text written here; version 0 when nothing was ever written. */
+export interface Writing {
+  text: string
+  version: number
+}
+
+/** The justification (Markdown with TeX), its references (BibTeX), and the words on the team. */
+export type Writings = Record<WritingPart, Writing>
+
+export interface Figure {
+  id: number
+  /** What the text calls it: `[@fig:label]`. */
+  label: string
+  caption: string
+  fileName: string
+  widthPx: number
+  heightPx: number
+  /** From 1. */
+  position: number
+  version: number
+  sizeBytes: number
+  sha256: string
+  objectKey: string
+  contentType: 'image/png' | 'image/jpeg'
 }
 
 export interface ChosenCosmology {
@@ -147,8 +218,11 @@ export interface ProposalContents {
   /** Modes on offer in the call. */
   modes: ModeRecord[]
   people: Investigator[]
+  groups: TargetGroup[]
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]
   papers: Paper[]
+  writings: Writings
+  figures: Figure[]
 }

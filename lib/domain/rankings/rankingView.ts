@@ -48,6 +48,8 @@ export const rankingView = z.object({
   list: z
     .object({ id: z.number(), version: z.number(), number: z.number(), frozenAt: z.string().nullable() })
     .nullable(),
+  /** Who asks may be read: a list of this panel was frozen. */
+  teamsOpen: z.boolean(),
   line: z.number(),
   rows: z.array(rankingRow),
   scores: z.number(),

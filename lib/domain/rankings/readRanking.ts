@@ -1,6 +1,12 @@
 import { panelAssignments } from '@/db/queries/assignments'
 import { offeredTime, panelMembers, requestLines } from '@/db/queries/panel'
-import { currentRanking, lastFrozenBefore, movesByHand, rankingEntries } from '@/db/queries/rankings'
+import {
+  currentRanking,
+  hasFrozenRanking,
+  lastFrozenBefore,
+  movesByHand,
+  rankingEntries,
+} from '@/db/queries/rankings'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import { lineByHours } from '@/lib/panel/nights/lineByHours'
 import { rawScores } from '@/lib/panel/statistics'
@@ -78,6 +84,7 @@ export async function readRanking(
       number: ranking.ranking_version,
       frozenAt: ranking.frozen_at?.toISOString() ?? null,
     },
+    teamsOpen: await hasFrozenRanking(ctx.db, panel.id),
     line,
     rows: order.map((id, index) => ({
       ...none,

@@ -23,7 +23,7 @@ export interface Submission {
 export async function freezeVersion(
   tx: ActingContext,
   snapshot: Snapshot,
-  given: { paperId: number; idempotencyKey: string; arrivedAt: Date },
+  given: { paperId: number | null; idempotencyKey: string; arrivedAt: Date },
 ): Promise<Submission> {
   const { contents, computation, engineVersion } = snapshot
   const { text, sha256 } = freeze(snapshot)

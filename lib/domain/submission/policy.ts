@@ -2,14 +2,13 @@ import { no, unseen, yes, type Decision } from '@/lib/auth/decision'
 import { formatUtcInstant } from '@/lib/format'
 import { holds, type Actor } from '../actor'
 import { deadlineOf, takesProposals } from '../calls/rules'
-import { investigatorRow, type ProposalSubject } from '../proposals/policy'
+import { investigatorRow, lacksRight, mayLead as leads, type ProposalSubject } from '../proposals/policy'
 
 function mayLead(actor: Actor, subject: ProposalSubject, act: string): Decision {
   const row = investigatorRow(actor, subject)
   if (!row)
     return holds(actor, 'office') ? no('role', `The office does not ${act} proposals.`) : unseen('proposal')
-  const leads = row.role === 'pi' || row.access === 'deputy'
-  return leads ? yes : no('role', `The principal investigator or a deputy may ${act} the proposal.`)
+  return leads(row) ? yes : lacksRight(row, `The principal investigator or a deputy may ${act} the proposal.`)
 }
 
 /** A sent proposal may be written again until its deadline, judged by the stamp of arrival. */

@@ -1,5 +1,6 @@
 import { feeOf } from '@/db/queries/fees'
 import type { ActingContext } from '../context'
+import { readGiveaways } from '../anonymity/readGiveaways'
 import { everythingMissing } from '../proposals/completeness'
 import { maySendProposal } from '../proposals/policy'
 import type { ReadProposal } from '../proposals/readProposal'
@@ -7,6 +8,7 @@ import type { Missing } from '../proposals/sections/finding'
 import { papersWords } from './papersWords'
 import { mayReopenProposal } from './policy'
 import { readThrough, type ReadThroughGroup } from './readThrough'
+import { recognisedWords } from './recognisedWords'
 
 export interface ForSending extends ReadProposal {
   groups: ReadThroughGroup[]
@@ -29,7 +31,10 @@ export async function readForSending(ctx: ActingContext, read: ReadProposal): Pr
   const owes = standing ? standing.state === 'due' : amountMinor > 0
   return {
     ...read,
-    groups: readThrough(contents, computation, await papersWords(ctx, contents)),
+    groups: readThrough(contents, computation, {
+      justification: papersWords(contents),
+      recognised: recognisedWords(await readGiveaways(ctx, contents)),
+    }),
     missing: everythingMissing(read.sections),
     whyNot: may.allowed ? null : may.sentence,
     isIn: contents.state !== 'draft' && !contents.isReopened,

@@ -1,8 +1,13 @@
 import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
 import type { ProposalSection } from '@/lib/paths'
 import { findPreset } from '@/lib/science/cosmology'
+import { awaitedWords } from '../observations/awaitedWords'
+import { groupHoursSentence, groupSentence } from '../observations/groupWords'
+import { needOf } from '../observations/needOf'
 import type { ProposalComputation } from '../observations/types'
+import { leftOut, namedOnSending } from '../proposals/namedOnSending'
 import type { ProposalContents } from '../proposals/types'
+import { leftOutWords } from './leftOutWords'
 
 export interface ReadThroughRow {
   label: string
@@ -30,12 +35,13 @@ function abstractWords({ abstract }: ProposalContents): string {
   return `${formatNumber([...abstract].length)} characters. ${firstWords(abstract)}`
 }
 
-function targetWords({ targets }: ProposalContents): string {
+function targetWords({ targets, groups }: ProposalContents): string {
   if (targets.length === 0) return unsaid
-  const required = targets.filter(({ need }) => need === 'required').length
+  const required = targets.filter((target) => needOf(target, groups) === 'required').length
   const redshifts = targets.flatMap(({ redshift }) => (redshift === null ? [] : [redshift]))
   const span = [Math.min(...redshifts), Math.max(...redshifts)].map((z) => formatNumber(z, 3))
-  const parts = [targets.length === 1 ? '1 target' : `${targets.length} targets`, `${required} required`]
+  const parts = [targets.length === 1 ? '1 target' : `${targets.length} targets`]
+  if (required > 0) parts.push(`${required} required`)
   if (redshifts.length > 0) parts.push(`z = ${[...new Set(span)].join(' to ')}`)
   return parts.join(', ')
 }
@@ -74,10 +80,13 @@ function observingWords({ observations, modes, constraintSets }: ProposalContent
 export function readThrough(
   contents: ProposalContents,
   computation: ProposalComputation,
-  papersDetail: string,
+  papers: { justification: string; recognised: string },
 ): ReadThroughGroup[] {
   const leads = contents.people.filter(({ role }) => role === 'pi').map(({ name }) => name)
-  const others = contents.people.filter(({ role }) => role !== 'pi').map(({ name }) => name)
+  const others = namedOnSending(contents.people)
+    .filter(({ role }) => role !== 'pi')
+    .map(({ name }) => name)
+  const without = leftOut(contents.people).map(({ name }) => name)
   const asked = formatHoursFromSeconds(computation.askedSeconds)
   const needed = formatHoursFromSeconds(computation.neededSeconds)
   const row = (label: string, section: ProposalSection, text: string): ReadThroughRow => ({
@@ -92,13 +101,21 @@ export function readThrough(
         row('Title', 'question', contents.title || unsaid),
         row('Abstract', 'question', abstractWords(contents)),
         row('Category', 'question', contents.category || unsaid),
-        row('Papers', 'papers', papersDetail),
+        row('Justification', 'papers', papers.justification),
+        row('Without names', 'papers', papers.recognised),
       ],
     },
     {
       question: 'Where is it?',
       rows: [
         row('Targets', 'targets', targetWords(contents)),
+        ...computation.groups.map((group) =>
+          row(group.name, 'targets', `${groupSentence(group)} ${groupHoursSentence(group)}`),
+        ),
+        ...contents.targets.flatMap((target) => {
+          const awaited = awaitedWords(target)
+          return awaited ? [row(target.name, 'targets', awaited)] : []
+        }),
         row('Cosmology', 'cosmology', cosmologyWords(contents)),
       ],
     },
@@ -119,6 +136,7 @@ export function readThrough(
       rows: [
         row('Leads', 'people', leads.join(', ') || unsaid),
         row('With', 'people', others.join(', ') || 'nobody else'),
+        ...(without.length > 0 ? [row('Left out', 'people', leftOutWords(without))] : []),
       ],
     },
   ]

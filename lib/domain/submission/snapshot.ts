@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto'
-import type { ProposalComputation } from '../observations/types.ts'
-import type { ProposalContents } from '../proposals/types.ts'
+import type { ObservationComputation, ProposalComputation } from '../observations/types.ts'
+import type { ProposalContents, Target } from '../proposals/types.ts'
+import { unwritten } from '../proposals/unwritten.ts'
 
 /** A proposal as it was sent: what it said, what was computed from it, and by which engine. */
 export interface Snapshot {
@@ -40,9 +41,37 @@ const moments = new Set([
   'lettersAt',
 ])
 
+type May<T, K extends keyof T> = Omit<T, K> & Partial<Pick<T, K>>
+
+/** A snapshot that may have been frozen before proposals had all they have now. */
+interface Thawed {
+  contents: Omit<May<ProposalContents, 'groups' | 'writings' | 'figures'>, 'targets'> & {
+    targets: May<Target, 'group' | 'opportunity' | 'spectrum'>[]
+  }
+  computation: Omit<May<ProposalComputation, 'groups'>, 'observations'> & {
+    observations: May<ObservationComputation, 'times' | 'carried'>[]
+  }
+  engineVersion: string
+}
+
+function whole({ contents, computation, engineVersion }: Thawed): Snapshot {
+  const targets = contents.targets.map((target) => ({
+    ...{ group: null, opportunity: null, spectrum: null },
+    ...target,
+  }))
+  const observations = computation.observations.map((one) => ({ times: 1, carried: null, ...one }))
+  return {
+    contents: { groups: [], writings: unwritten, figures: [], ...contents, targets },
+    computation: { groups: [], ...computation, observations },
+    engineVersion,
+  }
+}
+
 /** The snapshot back from its text, moments as `Date` again. */
 export function thaw(text: string): Snapshot {
-  return JSON.parse(text, (key, value: unknown) =>
-    moments.has(key) && typeof value === 'string' ? new Date(value) : value,
-  ) as Snapshot
+  return whole(
+    JSON.parse(text, (key, value: unknown) =>
+      moments.has(key) && typeof value === 'string' ? new Date(value) : value,
+    ) as Thawed,
+  )
 }

@@ -9,6 +9,7 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { computationOf } from '../proposals/computationOf'
 import { mayReadProposal, maySendProposal } from '../proposals/policy'
 import { readContents } from '../proposals/readContents'
+import { leftOut, namedOnSending } from '../proposals/namedOnSending'
 import type { ProposalContents } from '../proposals/types'
 import { checkPaper } from './checkPaper'
 import { demandComplete } from './demandComplete'
@@ -45,7 +46,8 @@ export async function submitProposal(ctx: ActingContext, input: SubmitInput): Pr
     const computation = computationOf(found)
     const paperId = demandComplete(found, computation)
     const reviewNumber = await markSent(tx, row, found, input.arrivedAt)
-    const contents = { ...found, reviewNumber, state: 'submitted' as const, isReopened: false }
+    const people = namedOnSending(found.people)
+    const contents = { ...found, people, reviewNumber, state: 'submitted' as const, isReopened: false }
     const submission = await freezeVersion(
       tx,
       { contents, computation, engineVersion: computation.engineVersion },
@@ -59,7 +61,7 @@ export async function submitProposal(ctx: ActingContext, input: SubmitInput): Pr
       subject: { kind: 'proposal', id: contents.reference },
       actingAs: 'investigator',
       before: { state: found.state, isReopened: found.isReopened },
-      after: { state: 'submitted', ...submission },
+      after: { state: 'submitted', ...submission, leftOut: leftOut(found.people).map(({ name }) => name) },
     })
     return submission
   })

@@ -9,6 +9,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { proposalWithdrawn } from '../outbox/letters/proposalWithdrawn'
 import { queueLetter } from '../outbox/queueLetter'
+import { namedOnSending } from '../proposals/namedOnSending'
 import { lockContents } from './lockContents'
 import { mayWithdrawProposal } from './policy'
 import { takeOut } from './takeOut'
@@ -27,7 +28,7 @@ export async function withdrawProposal(
       ? await cancelFee(tx, contents.id, 'withdrawn before the deadline')
       : ('kept' as const)
     const url = `${tx.request.origin}${paths.proposal(contents.reference)}`
-    for (const person of contents.people) {
+    for (const person of namedOnSending(contents.people)) {
       const letter = proposalWithdrawn({
         name: person.name,
         ...contents,

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { touchProposal } from '@/db/queries/proposals'
+import { groupsOf } from '@/db/queries/targetGroups'
 import { findTarget, insertTarget, targetsOf } from '@/db/queries/targets'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
@@ -7,6 +8,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
 import type { Target } from '../proposals/types'
+import { keptValues } from './keptValues'
 import { nextPosition, requireFreeName, requireRoom } from './targetRules'
 import { targetRowSchema } from './schema'
 
@@ -17,11 +19,13 @@ export type AddTargetInput = z.output<typeof addTargetSchema>
 /** Adds a target at the end of the table. */
 export async function addTarget(ctx: Context, input: AddTargetInput): Promise<Target> {
   return inTransaction(ctx, async (tx) => {
-    const { row } = await openForEditing(tx, input.reference)
+    const { row, subject } = await openForEditing(tx, input.reference)
     const present = await targetsOf(tx.db, row.id)
     requireRoom(present.length, 1)
     requireFreeName(present, input.row.name, null, 'row.name')
-    const id = await insertTarget(tx.db, row.id, { ...input.row, position: nextPosition(present) })
+    const standing = { kind: subject.kind, groups: await groupsOf(tx.db, row.id) }
+    const values = keptValues(input.row, standing, 'row')
+    const id = await insertTarget(tx.db, row.id, { ...values, position: nextPosition(present) })
     const target = await findTarget(tx.db, row.id, id)
     if (!target) throw refuse.integrity('The target could not be read back.')
     await touchProposal(tx.db, row.id)

@@ -44,6 +44,11 @@ const lineOf =
   ({ target }) =>
     target.line?.kind === kind ? target.line[what] : null
 
+const powerLaw =
+  (what: 'index' | 'indexError'): Value =>
+  ({ target }) =>
+    target.spectrum?.kind === 'power-law' ? target.spectrum[what] : null
+
 /** What was typed; this product reads these names back. */
 const typed: readonly ExportColumn[] = [
   text('name', 'meta.id;meta.main', 'Name of the target', ({ row }) => row.name),
@@ -94,7 +99,37 @@ const typed: readonly ExportColumn[] = [
     target.brightness ? row.provenance : '',
   ),
   text('mag_source', 'meta.ref', 'Where the magnitude is from', ({ row }) => row.source),
+  text(
+    'spectrum',
+    '',
+    'Shape of the spectrum before dust and gas: power-law, black-body or table',
+    ({ target }) => target.spectrum?.kind,
+  ),
+  number('spectral_index', '', 'spect.index', 'Index alpha of f_nu ~ nu^alpha', powerLaw('index')),
+  number('spectral_index_error', '', 'stat.error;spect.index', 'Error of the index', powerLaw('indexError')),
+  number('black_body_temperature', 'K', 'phys.temperature', 'Temperature of a black body', ({ target }) =>
+    target.spectrum?.kind === 'black-body' ? target.spectrum.temperatureK : null,
+  ),
+  text(
+    'spectrum_table',
+    '',
+    'Wavelength at rest in nm and f_lambda in any unit, a row between semicolons',
+    ({ row }) => row.spectrumTable,
+  ),
   text('need', '', 'required, optional or backup', ({ row }) => row.need),
+  text('group', '', 'Name of the group of targets it stands in', ({ row }) => row.group),
+  text('event', '', 'Class of event, of a target of opportunity', ({ row }) => row.event),
+  text('trigger', '', 'What triggers its observation', ({ row }) => row.trigger),
+  number('reaction', 'h', 'time.duration', 'Time from the trigger to the first exposure', ({ target }) =>
+    target.opportunity ? target.opportunity.reactionSeconds / 3600 : null,
+  ),
+  number(
+    'triggers',
+    '',
+    'meta.number',
+    'Number of triggers asked for',
+    ({ target }) => target.opportunity?.triggers,
+  ),
   text('shape', '', 'point, sersic or uniform', ({ row }) => row.geometry),
   number('re', 'arcsec', 'phys.angSize', 'Half-light radius', ({ target }) => target.effectiveRadiusArcsec),
   number('sersic', '', 'src.morph.param', 'Index of the Sersic profile', ({ target }) => target.sersicIndex),

@@ -1,11 +1,15 @@
 import { z } from 'zod'
 import { touchProposal } from '@/db/queries/proposals'
+import { groupsOf, insertGroup } from '@/db/queries/targetGroups'
 import { insertTarget, targetsOf } from '@/db/queries/targets'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
+import { keptValues } from './keptValues'
+import { unknownGroups } from '../targetGroups/unknownGroups'
+import { requireGroupRoom } from '../targetGroups/groupRules'
 import { mostTargets, nameKey, nextPosition, requireRoom, saysTheSame } from './targetRules'
 import { targetRowSchema } from './schema'
 import type { TargetValues } from './types'
@@ -37,26 +41,34 @@ function newRows(rows: readonly TargetValues[], present: readonly TargetValues[]
   return added
 }
 
-/** Keeps all rows of a file or none of them. */
+/** Keeps all rows of a file or none of them. Groups it names that are not here are made, all of their targets wanted. */
 export async function importTargets(
   ctx: Context,
   input: ImportTargetsInput,
 ): Promise<{ added: number; present: number }> {
   return inTransaction(ctx, async (tx) => {
-    const { row } = await openForEditing(tx, input.reference)
+    const { row, subject } = await openForEditing(tx, input.reference)
     const present = await targetsOf(tx.db, row.id)
     const added = newRows(input.rows, present)
     requireRoom(present.length, added.length)
     const first = nextPosition(present)
-    for (const [index, values] of added.entries())
-      await insertTarget(tx.db, row.id, { ...values, position: first + index })
+    const here = await groupsOf(tx.db, row.id)
+    const made = unknownGroups(here, added)
+    requireGroupRoom(here.length, made.length)
+    for (const name of made)
+      await insertGroup(tx.db, row.id, { name, rule: 'all', atLeast: null, hoursFor: 'all' })
+    const standing = { kind: subject.kind, groups: await groupsOf(tx.db, row.id) }
+    for (const [index, values] of added.entries()) {
+      const kept = keptValues(values, standing, `rows.${input.rows.indexOf(values)}`)
+      await insertTarget(tx.db, row.id, { ...kept, position: first + index })
+    }
     if (added.length > 0) {
       await touchProposal(tx.db, row.id)
       await writeLogbook(tx, {
         action: 'target.import',
         subject: { kind: 'proposal', id: input.reference },
         actingAs: 'investigator',
-        after: { names: added.map(({ name }) => name) },
+        after: { names: added.map(({ name }) => name), groups: made },
       })
     }
     return { added: added.length, present: input.rows.length - added.length }

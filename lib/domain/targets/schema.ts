@@ -6,6 +6,8 @@ import { restLines } from '@/lib/science/light'
 import { parseRedshift, readNumber } from '@/lib/science/redshift'
 import type { TargetValues } from './types'
 import { readBandChoice } from './bands'
+import { longestSpectrum, readSpectrumTable } from './spectrumTable'
+import { spectrumOf } from './spectrumOf'
 import { typedNumber } from './typedNumber'
 import { typedText } from './typedText'
 
@@ -45,6 +47,12 @@ const cells = z.object({
   provenance: z.enum(['observed', 'predicted']),
   source: z.string().trim().max(240, 'A source has at most 240 characters.'),
   need: z.enum(['required', 'optional', 'backup']),
+  /** Name of its group; empty for none. */
+  group: z.string().trim().max(120, 'A group’s name has at most 120 characters.'),
+  event: z.string().trim().max(120, 'A class of event has at most 120 characters.'),
+  trigger: z.string().trim().max(240, 'A trigger has at most 240 characters.'),
+  reaction: typedNumber('A reaction time', 0.1, 8760),
+  triggers: typedNumber('A number of triggers', 1, 100),
   geometry: z.enum(['point', 'sersic', 'uniform']),
   effectiveRadius: typedNumber('A half-light radius', 0.01, 600),
   sersicIndex: typedNumber('A Sérsic index', SERSIC_LEAST, SERSIC_MOST),
@@ -56,12 +64,34 @@ const cells = z.object({
   lineValue: typedText(positive),
   lineError: typedText(positive),
   lineWidth: typedNumber('A line width', 0, 20_000),
+  spectrum: z.enum(['flat', 'power-law', 'black-body', 'table']),
+  spectralIndex: typedNumber('A spectral index', -10, 10),
+  spectralIndexError: typedNumber('An error of the spectral index', 0, 10),
+  temperature: typedNumber('A temperature in kelvin', 100, 1_000_000),
+  spectrumTable: typedText(readSpectrumTable, longestSpectrum),
   pmRa: typedNumber('A proper motion', -20_000, 20_000),
   pmDec: typedNumber('A proper motion', -20_000, 20_000),
   epoch: typedNumber('An epoch', 1900, 2100),
 })
 
 type Cells = z.output<typeof cells>
+
+/** What is awaited says all four: what, on which sign, how soon and how often. */
+function awaitedProblems({ event, trigger, reaction, triggers }: Cells): [keyof Cells, string][] {
+  if (event === '' && trigger === '' && reaction.typed === '' && triggers.typed === '') return []
+  const problems: [keyof Cells, string | false][] = [
+    ['event', event === '' && 'Say what class of event is awaited.'],
+    ['trigger', trigger === '' && 'Say what must be seen before it is observed.'],
+    ['reaction', reaction.value === null && 'Say within how many hours of the trigger it must be observed.'],
+    [
+      'triggers',
+      triggers.value === null
+        ? 'Say how many triggers you ask for.'
+        : !Number.isInteger(triggers.value) && 'Triggers are counted in whole numbers.',
+    ],
+  ]
+  return problems.flatMap(([cell, words]): [keyof Cells, string][] => (words ? [[cell, words]] : []))
+}
 
 /** Cells that only make sense together. */
 function together(values: Cells, ctx: z.RefinementCtx): void {
@@ -74,6 +104,13 @@ function together(values: Cells, ctx: z.RefinementCtx): void {
     need('band', 'Say in which band and system the magnitude is.')
   if (values.geometry !== 'point' && values.effectiveRadius.value === null)
     need('effectiveRadius', 'An extended source needs its half-light radius.')
+  if (values.spectrum === 'power-law' && values.spectralIndex.value === null)
+    need('spectralIndex', 'A power law needs its index.')
+  if (values.spectrum === 'black-body' && values.temperature.value === null)
+    need('temperature', 'A black body needs its temperature.')
+  if (values.spectrum === 'table' && values.spectrumTable.value === null)
+    need('spectrumTable', 'Choose the file of the spectrum, or another shape.')
+  for (const [path, message] of awaitedProblems(values)) need(path, message)
   const line = values.lineValue.value
   if (values.lineName !== '' && line === null) need('lineValue', `Give the ${values.lineKind} of the line.`)
   const [least, most] = lineRange[values.lineKind]
@@ -106,9 +143,25 @@ function toValues(c: Cells): TargetValues {
     redshiftFrame: c.redshiftFrame,
     redshiftType: c.redshiftType,
     need: c.need,
+    group: c.group === '' ? null : c.group,
+    opportunity:
+      c.reaction.value === null || c.triggers.value === null
+        ? null
+        : {
+            event: c.event,
+            trigger: c.trigger,
+            reactionSeconds: Math.round(c.reaction.value * 3600),
+            triggers: c.triggers.value,
+          },
     galacticEbv: c.ebv.value,
     magnification: c.magnification.value,
     magnificationError: c.magnificationError.value,
+    spectrum: spectrumOf(c.spectrum, {
+      index: c.spectralIndex.value,
+      indexError: c.spectralIndexError.value,
+      temperatureK: c.temperature.value,
+      table: c.spectrumTable.value,
+    }),
     line:
       c.lineName === '' || c.lineValue.value === null
         ? null

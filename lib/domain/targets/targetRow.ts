@@ -2,6 +2,7 @@ import { TRUE_MINUS } from '@/lib/format'
 import type { Target } from '../proposals/types'
 import { bandChoice } from './bands'
 import type { TargetRow } from './schema'
+import { spectrumText } from './spectrumTable'
 
 const text = (value: number | null | undefined) =>
   value === null || value === undefined ? '' : String(value).replace('-', TRUE_MINUS)
@@ -21,6 +22,11 @@ export const emptyTargetRow: TargetRow = {
   provenance: 'observed',
   source: '',
   need: 'required',
+  group: '',
+  event: '',
+  trigger: '',
+  reaction: '',
+  triggers: '',
   geometry: 'point',
   effectiveRadius: '',
   sersicIndex: '',
@@ -32,14 +38,30 @@ export const emptyTargetRow: TargetRow = {
   lineValue: '',
   lineError: '',
   lineWidth: '',
+  spectrum: 'flat',
+  spectralIndex: '',
+  spectralIndexError: '',
+  temperature: '',
+  spectrumTable: '',
   pmRa: '',
   pmDec: '',
   epoch: '2016',
 }
 
+function spectrumCells(spectrum: Target['spectrum'] | undefined) {
+  const isLaw = spectrum?.kind === 'power-law'
+  return {
+    spectrum: spectrum?.kind ?? 'flat',
+    spectralIndex: isLaw ? text(spectrum.index) : '',
+    spectralIndexError: isLaw ? text(spectrum.indexError) : '',
+    temperature: spectrum?.kind === 'black-body' ? text(spectrum.temperatureK) : '',
+    spectrumTable: spectrum?.kind === 'table' ? spectrumText(spectrum) : '',
+  } satisfies Partial<TargetRow>
+}
+
 /** A kept target as the text of its row: what was typed where that is kept, else the value written out. */
 export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): TargetRow {
-  const { brightness } = target
+  const { brightness, opportunity } = target
   return {
     name: target.name,
     ra: target.raTyped,
@@ -54,6 +76,11 @@ export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): 
     provenance: brightness?.provenance ?? 'observed',
     source: brightness?.source ?? '',
     need: target.need,
+    group: target.group ?? '',
+    event: opportunity?.event ?? '',
+    trigger: opportunity?.trigger ?? '',
+    reaction: opportunity ? text(Number((opportunity.reactionSeconds / 3600).toFixed(4))) : '',
+    triggers: text(opportunity?.triggers),
     geometry: target.geometry,
     effectiveRadius: text(target.effectiveRadiusArcsec),
     sersicIndex: text(target.sersicIndex),
@@ -65,6 +92,7 @@ export function targetRow(target: Omit<Target, 'id' | 'version' | 'position'>): 
     lineValue: text(target.line?.value),
     lineError: text(target.line?.error),
     lineWidth: text(target.line?.widthKmS),
+    ...spectrumCells(target.spectrum),
     pmRa: text(target.pmRaMasYr),
     pmDec: text(target.pmDecMasYr),
     epoch: text(target.epochYr),

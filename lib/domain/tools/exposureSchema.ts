@@ -25,6 +25,12 @@ const fields = z.object({
   radius: text,
   sersic: text,
   area: text,
+  /** The shape of the continuum, which carries the magnitude to the mode. */
+  spectrum: z.enum(['flat', 'power-law', 'black-body']),
+  index: text,
+  /** Kelvin, at rest with the source. */
+  temperature: text,
+  redshift: text,
   moon: z.enum(['dark', 'grey', 'bright']),
   airmass: numberBetween('An airmass', 1, 3),
   seeing: numberBetween('An image quality', 0.3, 4),
@@ -43,6 +49,16 @@ function fluxTrouble(typed: string): string | null {
 function magnitudeTrouble(typed: string): string | null {
   const answer = parseMagnitude(typed)
   return answer.ok ? null : answer.message
+}
+
+function spectrumTroubles({ spectrum, index, temperature, redshift }: ExposureInput) {
+  if (spectrum === 'power-law') return [['index', notBetween('A spectral index', -10, 10, index)] as const]
+  if (spectrum === 'flat') return []
+  const temperatureTrouble = notBetween('A temperature in kelvin', 100, 1_000_000, temperature)
+  return [
+    ['temperature', temperatureTrouble] as const,
+    ['redshift', notBetween('A redshift', 0, 20, redshift)] as const,
+  ]
 }
 
 /** What only counts for the question, the source or the shape chosen. */
@@ -64,6 +80,7 @@ function troubles(asked: ExposureInput): [keyof ExposureInput, string | null][] 
           ['width', notBetween('A line width in km/s', 0, 20_000, asked.width)] as const,
         ]
       : []),
+    ...(source === 'line' ? [] : spectrumTroubles(asked)),
     ...(shape === 'galaxy'
       ? [
           ['radius', notBetween('A half-light radius', 0.01, 60, asked.radius)] as const,

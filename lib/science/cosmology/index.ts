@@ -17,4 +17,6 @@ export { cosmologyQuantities, type Cosmology, type CosmologyQuantity, type Inver
 export type { Universe } from './universe'
 export { cosmologyEngineVersion } from './version'
 export { disturbStatic, staticUniverse, type StaticUniverse } from './staticUniverse'
+export { cosmicVariance, stellarMasses, type StellarMass } from './cosmicVariance'
+export { expectedCount } from './expectedCount'
 export { surveyVolumeMpc3, type Survey } from './surveyVolume'

@@ -13,7 +13,9 @@ interface Feature {
 }
 
 /** Ends of a mode's range in vacuum wavelengths. */
-export function vacuumRange(mode: ModeRecord): [number, number] {
+export function vacuumRange(
+  mode: Pick<ModeRecord, 'wavelengthMinA' | 'wavelengthMaxA' | 'medium'>,
+): [number, number] {
   if (mode.medium === 'vacuum') return [mode.wavelengthMinA, mode.wavelengthMaxA]
   return [airToVacuumA(mode.wavelengthMinA), airToVacuumA(mode.wavelengthMaxA)]
 }

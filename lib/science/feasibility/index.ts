@@ -1,4 +1,5 @@
 /** Can it be done: the checks of a request and the verdict of a proposal. */
+export { lineStrip, linesOnStrip, type StripAsked, type StripLine } from './lineStrip'
 export { observationReport } from './observationReport'
 export {
   proposalVerdict,
@@ -17,4 +18,5 @@ export type {
 } from './types'
 export { neverUp, type NeverUpInput } from './neverUp'
 export { feasibilityEngineVersion } from './version'
+export { sayCarried, sayPlace } from './sayCarried'
 export { moonClassLimits } from './moonClass'

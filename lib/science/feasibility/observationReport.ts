@@ -66,6 +66,9 @@ export function observationReport(input: ReportInput): ObservationReport {
     verdict: worst(checks.map((check) => check.verdict)),
     exposure: plan.needed,
     refusal: plan.refusal,
+    carried: plan.carried?.sentence
+      ? { sentence: plan.carried.sentence, isAssumed: plan.carried.isAssumed }
+      : null,
     totalAtMedianS: plan.totalAtMedianS,
     totalAtBestS: plan.totalAtBestS,
     observedFeatureA: observedA,

@@ -2,28 +2,29 @@ import { exposure, type Conditions, type ExposureReport, type ModeRecord } from 
 import { ScienceError } from '../ScienceError'
 import { planningAirmass } from './planningAirmass'
 import { sourceOf } from './sourceOf'
-import type { ReportInput } from './types'
+import type { CarriedLight, ReportInput } from './types'
 
 /** What a request needs, and what it reaches in the hours asked. */
 export interface Plan {
   readonly needed: ExposureReport | null
   readonly reached: ExposureReport | null
   readonly refusal: string | null
+  readonly carried: CarriedLight | null
   readonly totalAtMedianS: number | null
   readonly totalAtBestS: number | null
 }
 
-interface Attempt {
-  readonly report: ExposureReport | null
+interface Attempt<T> {
+  readonly made: T | null
   readonly refusal: string | null
 }
 
 /** A value, or the sentence of the ScienceError that stood in its way. */
-function attempt(make: () => ExposureReport): Attempt {
+function attempt<T>(make: () => T): Attempt<T> {
   try {
-    return { report: make(), refusal: null }
+    return { made: make(), refusal: null }
   } catch (error) {
-    if (error instanceof ScienceError) return { report: null, refusal: error.message }
+    if (error instanceof ScienceError) return { made: null, refusal: error.message }
     throw error
   }
 }
@@ -44,8 +45,10 @@ function openWithin(mode: ModeRecord, askedS: number, subExposureS: number): num
 export function planExposure(input: ReportInput, observedA: number | null): Plan {
   const { mode, observation, site } = input
   const per = mode.kind === 'imaging' ? 'image' : observation.snrPer
-  const under = (seeingArcsec: number, solve: { solve: 'time' } | { solve: 'snr'; timeS: number }): Attempt =>
-    attempt(() => {
+  const light = attempt(() => sourceOf(input, observedA))
+  const under = (seeingArcsec: number, solve: { solve: 'time' } | { solve: 'snr'; timeS: number }) =>
+    attempt((): ExposureReport | null => {
+      if (!light.made) return null
       const conditions: Conditions = {
         site,
         airmass: planningAirmass(input),
@@ -53,25 +56,19 @@ export function planExposure(input: ReportInput, observedA: number | null): Plan
         moon: observation.moon,
         transparency: observation.transparency,
       }
-      return exposure({
-        mode,
-        source: sourceOf(input, observedA),
-        conditions,
-        per,
-        snr: observation.snr,
-        ...solve,
-      })
+      return exposure({ mode, source: light.made.source, conditions, per, snr: observation.snr, ...solve })
     })
-  const { report: needed, refusal } = under(observation.seeingArcsec, { solve: 'time' })
+  const { made: needed, refusal } = under(observation.seeingArcsec, { solve: 'time' })
   const timeS = openWithin(mode, observation.askedS, needed?.subExposureS ?? mode.maxSubExposureS)
   const reached =
-    timeS >= mode.minSubExposureS ? under(observation.seeingArcsec, { solve: 'snr', timeS }).report : null
+    timeS >= mode.minSubExposureS ? under(observation.seeingArcsec, { solve: 'snr', timeS }).made : null
   const { best10, median } = site.seeingQuantilesArcsec
   return {
     needed,
     reached,
-    refusal,
-    totalAtMedianS: under(median, { solve: 'time' }).report?.totalS ?? null,
-    totalAtBestS: under(best10, { solve: 'time' }).report?.totalS ?? null,
+    refusal: light.refusal ?? refusal,
+    carried: light.made?.carried ?? null,
+    totalAtMedianS: under(median, { solve: 'time' }).made?.totalS ?? null,
+    totalAtBestS: under(best10, { solve: 'time' }).made?.totalS ?? null,
   }
 }

@@ -1,9 +1,10 @@
 import type { Source } from '../exposure'
-import { airToVacuumA, lineFlux, toAb, vacuumToAirA } from '../light'
+import { airToVacuumA, lineFlux, vacuumToAirA } from '../light'
 import { ScienceError } from '../ScienceError'
+import { carriedLight, type Place } from './carriedLight'
 import { vacuumRange } from './featureChecks'
 import { lostOnTheWayMag } from './onTheWay'
-import type { ReportInput } from './types'
+import type { CarriedLight, ReportInput } from './types'
 
 /** Whether the signal asked for is that of the target's own line, and not of its continuum. */
 export function asksForLine({
@@ -15,7 +16,7 @@ export function asksForLine({
 }
 
 /** Where the light is looked at, in the mode's own kind of wavelength: the feature, or the middle of the range. */
-function placeOf({ mode }: ReportInput, observedA: number | null): { inModeA: number; vacuumA: number } {
+function placeOf({ mode }: ReportInput, observedA: number | null): Place {
   const toVacuum = (wavelengthA: number) =>
     mode.medium === 'vacuum' ? wavelengthA : airToVacuumA(wavelengthA)
   if (observedA === null) {
@@ -33,20 +34,19 @@ function placeOf({ mode }: ReportInput, observedA: number | null): { inModeA: nu
   }
 }
 
-/** AB magnitude of the continuum as it arrives; null when none is given. */
-function continuumAb({ target }: ReportInput, vacuumA: number): number | null {
-  const { brightness } = target
-  if (!brightness) return null
-  const ab = toAb(brightness.value, brightness.system, brightness.band)
-  return brightness.provenance === 'predicted' ? ab + lostOnTheWayMag(target, vacuumA) : ab
+/** What is looked at, and how its continuum came there. */
+export interface CarriedSource {
+  readonly source: Source
+  readonly carried: CarriedLight | null
 }
 
 /** The source as the exposure engine takes it. Throws a ScienceError when there is no light or no such wavelength. */
-export function sourceOf(input: ReportInput, observedA: number | null): Source {
+export function sourceOf(input: ReportInput, observedA: number | null): CarriedSource {
   const { target, cosmology } = input
-  const { inModeA, vacuumA } = placeOf(input, observedA)
+  const place = placeOf(input, observedA)
+  const { inModeA, vacuumA } = place
   const geometry = target.geometry ?? { kind: 'point' as const }
-  const ab = continuumAb(input, vacuumA)
+  const carried = carriedLight(input, place)
   if (asksForLine(input) && target.line) {
     const { kind, value, widthKmS } = target.line
     if (kind === 'luminosity' && !((target.redshift ?? 0) > 0))
@@ -54,17 +54,19 @@ export function sourceOf(input: ReportInput, observedA: number | null): Source {
     const arriving = 10 ** (-0.4 * lostOnTheWayMag(target, vacuumA))
     const fluxErgSCm2 =
       kind === 'flux' ? value : lineFlux(value, cosmology.luminosityMpc(target.redshift ?? 0)) * arriving
-    return {
+    const source: Source = {
       kind: 'line',
       fluxErgSCm2,
       wavelengthA: inModeA,
       widthKmS,
-      continuumAb: ab ?? undefined,
+      continuumAb: carried?.ab,
       geometry,
       provenance: kind === 'flux' ? 'observed' : 'predicted',
     }
+    return { source, carried }
   }
-  if (ab === null || !target.brightness) throw new ScienceError('bad-source', 'No brightness is given.')
+  if (!carried || !target.brightness) throw new ScienceError('bad-source', 'No brightness is given.')
   const wavelengthA = observedA === null ? undefined : inModeA
-  return { kind: 'magnitude', ab, wavelengthA, geometry, provenance: target.brightness.provenance }
+  const { provenance } = target.brightness
+  return { source: { kind: 'magnitude', ab: carried.ab, wavelengthA, geometry, provenance }, carried }
 }

@@ -8,6 +8,7 @@ import type {
   SiteRecord,
   SnrPer,
 } from '../exposure'
+import type { SpectralShape } from '../light'
 import type { TargetVisibility } from '../sky'
 
 export type Verdict = 'feasible' | 'marginal' | 'not-feasible'
@@ -43,6 +44,8 @@ export interface ReportTarget {
     /** Intrinsic full width at half maximum. */
     readonly widthKmS: number
   } | null
+  /** Shape of its continuum before dust and gas; flat in f_nu, and said so, when not given. */
+  readonly spectrum?: SpectralShape | null
   /** Of the Galaxy, from the SFD map; dims what is predicted. */
   readonly galacticEbv?: number | null
   /** By a lens; brightens what is predicted. */
@@ -71,6 +74,16 @@ export interface ReportObservation {
   readonly transparency?: number
 }
 
+/** The continuum where a mode sees it, and how its magnitude came there. */
+export interface CarriedLight {
+  readonly ab: number
+  /** Magnitudes added between the band and the mode; 0 where no shape is stated. */
+  readonly colourMag: number
+  /** The mode works far from the band and no shape is stated. */
+  readonly isAssumed: boolean
+  readonly sentence: string | null
+}
+
 export interface Season {
   /** First and last evening date, both included. */
   readonly from: string
@@ -94,6 +107,8 @@ export interface ObservationReport {
   /** Null when it could not be computed; `refusal` says why. */
   readonly exposure: ExposureReport | null
   readonly refusal: string | null
+  /** How the magnitude of the continuum was carried to the mode; null where there is nothing to say. */
+  readonly carried: { readonly sentence: string; readonly isAssumed: boolean } | null
   /** Open shutter and overheads at the site's median seeing, and on its best tenth of nights. */
   readonly totalAtMedianS: number | null
   readonly totalAtBestS: number | null

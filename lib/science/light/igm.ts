@@ -78,3 +78,9 @@ export function igmInBand(z: number, fromA: number, toA: number): number {
   for (let i = 0; i < steps; i += 1) sum += igmTransmission(z, fromA * (toA / fromA) ** ((i + 0.5) / steps))
   return sum / steps
 }
+
+/** Observed wavelengths, angstroms, growing, at which the mean transmission to redshift z steps most: limit and lines. */
+export function lymanKnotsA(z: number): number[] {
+  const levels = [8, 7, 6, 5, 4, 3, 2].map((level) => (level * level) / (level * level - 1))
+  return [1, ...levels].map((over) => LYMAN_LIMIT_A * over * (1 + z))
+}

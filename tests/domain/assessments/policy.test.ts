@@ -51,7 +51,12 @@ describe('policies of a request', () => {
 })
 
 describe('canAnswerQuestion', () => {
-  const person = { personId: 7, role: 'co-investigator' as const, access: 'edit' as const }
+  const person = {
+    personId: 7,
+    role: 'co-investigator' as const,
+    access: 'edit' as const,
+    confirmedAt: at(1),
+  }
   const facts: AnswerFacts = { people: [person], call: base.call, proposalState: 'submitted', now: at(8) }
   it.each([
     ['who may edit', {}, 'yes'],
@@ -61,6 +66,7 @@ describe('canAnswerQuestion', () => {
       { people: [{ ...person, role: 'pi' as const, access: 'read' as const }] },
       'yes',
     ],
+    ['who has yet to agree', { people: [{ ...person, confirmedAt: null }] }, 'role'],
     ['a stranger', { people: [{ ...person, personId: 8 }] }, 'unseen'],
     ['someone without an account', { people: [{ ...person, personId: null }] }, 'unseen'],
     ['withdrawn', { proposalState: 'withdrawn' as const }, 'window'],

@@ -1,6 +1,11 @@
 import { describe, expect, it } from 'vitest'
 import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
-import { hoursProblem, targetHours, trueSecondsByTarget } from '@/lib/domain/assessments/rules'
+import {
+  hoursProblem,
+  targetHours,
+  countedSeconds,
+  trueSecondsByTarget,
+} from '@/lib/domain/assessments/rules'
 import { assessRequestSchema } from '@/lib/domain/assessments/schema'
 
 describe('hoursProblem', () => {
@@ -53,7 +58,12 @@ describe('assessRequestSchema', () => {
   })
 })
 
-const target = (id: number, need: 'required' | 'backup' = 'required') => ({ id, name: `T${id}`, need })
+const target = (id: number, need: 'required' | 'backup' = 'required') => ({
+  id,
+  name: `T${id}`,
+  need,
+  group: null,
+})
 const mode = (modeId: number, instrumentId: number) => ({
   modeId,
   name: `mode ${modeId}`,
@@ -65,17 +75,25 @@ const asked = (id: number, targetId: number, modeId: number) => ({
   modeId,
   askedSeconds: 100 * id,
 })
-const computed = (observationId: number, open: number, over: number, verdict: 'feasible' | 'marginal') => ({
+const computed = (
+  observationId: number,
+  open: number,
+  over: number,
+  verdict: 'feasible' | 'marginal',
+  times = 1,
+) => ({
   observationId,
   neededSeconds: open + over,
   openShutterSeconds: open,
   overheadSeconds: over,
   verdict,
+  times,
 })
 
 describe('targetHours', () => {
   const rows = targetHours(
     {
+      groups: [],
       targets: [target(1), target(2, 'backup'), target(3)],
       observations: [asked(1, 1, 10), asked(2, 1, 11), asked(3, 2, 10), asked(4, 3, 20)],
       modes: [mode(10, 5), mode(11, 5), mode(20, 6)],
@@ -107,5 +125,24 @@ describe('targetHours', () => {
     expect(trueSecondsByTarget(rows, 400)).toEqual([200, 200])
     expect(trueSecondsByTarget(rows, 360)).toEqual([160, 200])
     expect(trueSecondsByTarget(rows, 0)).toEqual([0, 200])
+  })
+
+  it('leaves what is not counted out of sums and shares, and takes all triggers together', () => {
+    const counted = targetHours(
+      {
+        groups: [],
+        targets: [target(1), target(2, 'backup')],
+        observations: [asked(1, 1, 10), asked(2, 2, 10)],
+        modes: [mode(10, 5)],
+        computed: [computed(1, 40, 10, 'feasible', 3), computed(2, 80, 30, 'feasible', 0)],
+      },
+      5,
+    )
+    expect(counted.map(({ askedSeconds, neededSeconds }) => [askedSeconds, neededSeconds])).toEqual([
+      [300, 150],
+      [200, 110],
+    ])
+    expect(countedSeconds(counted, 'askedSeconds')).toBe(300)
+    expect(trueSecondsByTarget(counted, 180)).toEqual([180, 110])
   })
 })

@@ -58,6 +58,25 @@ describe('the exposure calculation', () => {
     expect(expose({ source }).limit).toBeNull()
   })
 
+  it('carries a magnitude from its band by the shape of its spectrum', () => {
+    const near = { ...body.source, ab: 21, band: 'r', spectrum: { kind: 'power-law', index: -1 } }
+    const found = expose({ source: near })
+    // From the middle of r, 6261 A, to 7000 A of air, but for the width of the band.
+    expect(found.colourMag).toBeCloseTo(-2.5 * Math.log10(7000 / 6261), 1)
+    const same = expose({ source: { ...body.source, ab: 21 + (found.colourMag ?? NaN) } })
+    expect(found.snr).toBeCloseTo(same.snr, 9)
+    expect([expose().colourMag, expose({ source: { ...body.source, band: 'r' } }).colourMag]).toEqual([
+      null,
+      0,
+    ])
+    const limit = expose({ source: { ...near, ab: undefined }, solve: 'limit', snr: found.snr }).limit
+    expect(limit?.ab).toBeCloseTo(21, 4)
+    const body5000 = { kind: 'black-body', temperatureK: 5000, z: 0.5 }
+    const table = { kind: 'table', wavelengthsNm: [300, 1200], fLambda: [1, 2] }
+    for (const spectrum of [body5000, table])
+      expect(expose({ source: { ...near, spectrum } }).colourMag).toBeLessThan(0)
+  })
+
   it('takes points, extended and uniform sources, and slits that lose light', () => {
     const snr = (geometry: object, conditions: object = body.conditions) =>
       expose({ source: { ...body.source, geometry }, conditions }).snr
@@ -85,6 +104,21 @@ describe('the exposure calculation', () => {
     ['no S/N', { solve: 'time' }, 'snr'],
     ['no S/N of a limit', { solve: 'limit' }, 'snr'],
     ['no magnitude', { source: { kind: 'magnitude' } }, 'source.ab'],
+    [
+      'a spectrum from no band',
+      { source: { ...body.source, spectrum: { kind: 'power-law', index: 0 } } },
+      'source.band',
+    ],
+    [
+      'a spectrum that does not reach',
+      {
+        source: {
+          ...body.source,
+          ...{ band: 'r', spectrum: { kind: 'table', wavelengthsNm: [600, 650], fLambda: [1, 1] } },
+        },
+      },
+      'source.spectrum',
+    ],
     ['no flux', { source: { ...line, fluxErgSCm2: undefined } }, 'source.fluxErgSCm2'],
     ['a wavelength outside the mode', { source: { ...line, wavelengthA: 3000 } }, 'source.wavelengthA'],
     ['an S/N beyond the floor', { solve: 'time', snr: 1e6 }, 'snr'],
@@ -115,6 +149,17 @@ describe('the exposure calculation', () => {
       'a transparency of 0',
       { conditions: { ...body.conditions, transparency: 0 } },
       'conditions.transparency',
+    ],
+    ['an unknown band', { source: { ...body.source, band: 'q' } }, 'source.band'],
+    [
+      'a spectrum of no kind',
+      { source: { ...body.source, band: 'r', spectrum: { kind: 'dust' } } },
+      'source.spectrum.kind',
+    ],
+    [
+      'a cold black body',
+      { source: { ...body.source, band: 'r', spectrum: { kind: 'black-body', temperatureK: 1 } } },
+      'source.spectrum.temperatureK',
     ],
     ['a misspelt condition', { conditions: { ...body.conditions, seeing: 1 } }, 'conditions'],
     ['half a mode', { mode: 1.5 }, 'mode'],

@@ -89,6 +89,25 @@ describe('light from a redshift', () => {
     for (const row of rows) expect(row.through).toBeCloseTo(row.throughDust * row.throughIgm, 12)
   })
 
+  it('carries what was measured in a band to each wavelength, dust and gas counted once', () => {
+    const at = (over: object) =>
+      observe({
+        measured: { ab: 22, band: 'i', spectrum: { kind: 'power-law', index: -0.5 } },
+        observedWavelengthsA: [16_620, 4500],
+        ...over,
+      }).rows.map(({ ab }) => ab ?? NaN)
+    const [red = NaN, blue = NaN] = at({})
+    expect(red).toBeCloseTo(22 - 1.25 * Math.log10(16_620 / 7672), 2)
+    // Lyman alpha stands at 4863 A: the gas dims what lies bluewards of it, and nothing in i.
+    const through = observe({ observedWavelengthsA: [4500] }).rows[0]?.throughIgm ?? NaN
+    expect(blue).toBeCloseTo(22 - 1.25 * Math.log10(4500 / 7672) - 2.5 * Math.log10(through), 2)
+    const [dusty = NaN] = at({ ebv: 0.5 })
+    // Fitzpatrick 1999: A/E(B-V) near 1.9 in i and 0.5 in H.
+    expect(dusty - red).toBeLessThan(-0.6)
+    expect(dusty - red).toBeGreaterThan(-0.8)
+    expect(observe({ observedWavelengthsA: [5000] }).rows[0]?.ab).toBeNull()
+  })
+
   it('has the Einstein radius of a lens before the source', () => {
     // 4 pi (sigma/c)^2 D_LS/D_S; between comoving distances of a flat universe D_LS/D_S = 1 - D_L/D_S.
     const share = 1 - (1 - 1 / Math.sqrt(1.5)) / 0.5
@@ -100,6 +119,10 @@ describe('light from a redshift', () => {
     for (const over of [
       {},
       { absoluteMagnitudeAb: -20, lineLuminosityErgS: 1e40, sizeKpc: 3, restWavelengthsA: [1200] },
+      {
+        measured: { ab: 22, band: 'i', spectrum: { kind: 'black-body', temperatureK: 9000 } },
+        observedWavelengthsA: [9000],
+      },
     ]) {
       const found = JSON.parse(JSON.stringify(observe(over))) as unknown
       expect(lightAnswer.parse(found)).toEqual(found)
@@ -119,6 +142,11 @@ describe('light from a redshift', () => {
       'dust where its law does not reach',
       { ebv: 0.1, restWavelengthsA: [1200, 9000], observedWavelengthsA: [900] },
       ['restWavelengthsA.1', 'observedWavelengthsA.0'],
+    ],
+    [
+      'a spectrum without light in its band',
+      { measured: { ab: 20, band: 'u', spectrum: { kind: 'black-body', temperatureK: 100 } } },
+      ['measured'],
     ],
     ['a lens behind the source', { lens: { z: 4, dispersionKmS: 200 } }, ['lens']],
     ['a magnification of 0', { magnification: 0 }, ['magnification']],

@@ -43,6 +43,10 @@ describe('a request', () => {
     ['/api/v1/sky/visibility', { site: { latitudeDeg: 1, longitudeDeg: 2 } }, 'site.elevationM'],
     ['/api/v1/exposure/ccd', { solve: 'all' }, 'solve'],
     ['/api/v1/cosmology/inverse', { quantity: '__proto__' }, 'quantity'],
+    ['/api/v1/cosmology/survey', { areaDeg2: 0 }, 'areaDeg2'],
+    ['/api/v1/cosmology/survey', { edges: ['1', 2] }, 'edges.0'],
+    ['/api/v1/cosmology/survey', { densityMpc3: -1 }, 'densityMpc3'],
+    ['/api/v1/cosmology/survey', { stellarMass: '12' }, 'stellarMass'],
   ])('to %s with %j is told in our own words at %s', (path, over, field) => {
     const errors = errorsOf(path, over) ?? {}
     expect(Object.keys(errors)).toEqual([field])

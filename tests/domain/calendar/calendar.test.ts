@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { nightMove } from '@/components/calendar/nightMove'
-import { calendarCsv } from '@/lib/domain/calendar/calendarCsv'
+import { calendarCsv } from '@/lib/domain/calendar/calendarFileView'
 import { halfMonths } from '@/lib/domain/calendar/halfMonths'
 import { partsProblem } from '@/lib/domain/calendar/partsProblem'
 import { readCalendarCsv } from '@/lib/domain/calendar/readCalendarCsv'

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { computeProposal } from '@/lib/domain/observations/computeProposal'
-import { proposalVerdict } from '@/lib/domain/observations/proposalVerdict'
+import { groupsVerdict } from '@/lib/domain/observations/groupsVerdict'
 import type { Verdict } from '@/lib/domain/observations/types'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
 import { findPreset, presetCosmology } from '@/lib/science/cosmology'
@@ -90,8 +90,11 @@ describe('the computation of a proposal', () => {
 })
 
 describe('the verdict of a proposal', () => {
-  const need = (id: number, how: Target['need']) => ({ id, need: how })
-  const got = (targetId: number, verdict: Verdict) => ({ targetId, verdict })
+  const need = (id: number, how: Target['need']) => ({ id, need: how, group: null })
+  const got = (targetId: number, verdict: Verdict) => ({
+    ...{ id: targetId, observationId: targetId, targetId, verdict },
+    ...{ times: 1, askedSeconds: 3600 },
+  })
   it.each<[string, ReturnType<typeof need>[], ReturnType<typeof got>[], Verdict | null]>([
     ['nothing asked', [need(1, 'required')], [], null],
     [
@@ -120,6 +123,6 @@ describe('the verdict of a proposal', () => {
       'marginal',
     ],
   ])('%s', (_, targets, computed, verdict) => {
-    expect(proposalVerdict(targets, computed, computed)).toBe(verdict)
+    expect(groupsVerdict({ groups: [], targets, observations: computed }, computed).verdict).toBe(verdict)
   })
 })

@@ -54,6 +54,19 @@ describe('what the hours hang on', () => {
     expect(hoursHangOn(observed).cosmologies).toEqual([])
   })
 
+  it('spans the error of a spectral index where the magnitude is carried far', () => {
+    const spectrum = { kind: 'power-law', index: -1, indexError: 0.5 } as const
+    const names = (over: Partial<Target>) =>
+      hoursHangOn(inputOf({ target: { brightness: bright, ...over } })).errors.map(({ name }) => name)
+    expect(names({ spectrum })).toContain('α = −1.0 ± 0.5')
+    expect(names({ spectrum: { ...spectrum, indexError: null } })).not.toContain('α = −1.0 ± 0.5')
+    const span = hoursHangOn(inputOf({ target: { spectrum } })).errors.find(({ name }) =>
+      name.startsWith('α'),
+    )
+    // From V to the feature at 7604 A, half a unit of the index is 0.18 mag.
+    expect((span?.high ?? 0) / (span?.low ?? 1)).toBeGreaterThan(1.3)
+  })
+
   it('needs less time in a smaller universe, by the power of distance it states', () => {
     const input = inputOf()
     const { own, cosmologies } = hoursHangOn(input)

@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest'
 import type { ProposalComputation, Verdict } from '@/lib/domain/observations/types'
 import { completeness, everythingMissing } from '@/lib/domain/proposals/completeness'
-import type { ProposalContents } from '@/lib/domain/proposals/types'
+import type { ProposalContents, WritingPart } from '@/lib/domain/proposals/types'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
+import { maxTeamWords } from '@/lib/domain/writings/limits'
 import { contents, observation, target } from '../../support/contents'
 import { investigator } from '../../support/proposalSubject'
 
@@ -13,9 +15,10 @@ const paper = {
   sizeBytes: 1000,
   sha256: 'a',
   objectKey: 'aa/b',
-  words: 1200,
   uploadedAt: new Date(0),
 }
+
+const written = (part: WritingPart, text: string) => ({ ...unwritten, [part]: { text, version: 1 } })
 
 const full = (over: Partial<ProposalContents> = {}): ProposalContents =>
   contents({
@@ -81,8 +84,10 @@ const computed = (
       ],
       verdict,
       refusal: over.refusal ?? null,
+      times: 1,
     },
   ],
+  groups: [],
   askedSeconds: over.askedSeconds ?? 3600,
   neededSeconds: 3600,
   askedNights: 0.1,
@@ -110,12 +115,37 @@ describe('what bars a proposal from being sent', () => {
       computed(),
       ['Shorten the abstract by two characters.'],
     ],
-    ['no paper', { papers: [] }, computed(), ['Add the justification.']],
+    [
+      'a text of too many words',
+      { papers: [], writings: written('justification', 'word '.repeat(base.kind.wordLimit + 2)) },
+      computed(),
+      ['Shorten the justification by two words.'],
+    ],
+    [
+      'a text of too many words under a document',
+      { writings: written('justification', 'word '.repeat(base.kind.wordLimit + 2)) },
+      computed(),
+      [],
+    ],
+    [
+      'a text without a word',
+      { papers: [], writings: written('justification', '\n\n---\n') },
+      computed(),
+      ['Write the justification, or add it as a PDF.'],
+    ],
+    ['a text', { papers: [], writings: written('justification', 'It is $x$.') }, computed(), []],
+    [
+      'too many words on the team',
+      { writings: written('team', 'word '.repeat(maxTeamWords + 1)) },
+      computed(),
+      ['Shorten the words on the team by one word.'],
+    ],
+    ['no paper', { papers: [] }, computed(), ['Write the justification, or add it as a PDF.']],
     [
       'only the page on the team',
       { papers: [{ ...paper, kind: 'team-expertise' }] },
       computed(),
-      ['Add the justification.'],
+      ['Write the justification, or add it as a PDF.'],
     ],
     [
       'a paper too long for its kind',

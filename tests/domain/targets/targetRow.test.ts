@@ -45,6 +45,30 @@ describe('a row of the targets table', () => {
     expect(targetRowSchema.parse(targetRow(lensed))).toEqual(lensed)
   })
 
+  it.each([
+    [
+      { spectrum: 'power-law', spectralIndex: '-0.5' },
+      { kind: 'power-law', index: -0.5, indexError: null },
+    ],
+    [
+      { spectrum: 'power-law', spectralIndex: '−1.25', spectralIndexError: '0.1' },
+      { kind: 'power-law', index: -1.25, indexError: 0.1 },
+    ],
+    [
+      { spectrum: 'black-body', temperature: '5772' },
+      { kind: 'black-body', temperatureK: 5772 },
+    ],
+    [
+      { spectrum: 'table', spectrumTable: 'nm,f\n300,1\n900,2.5e-17\n' },
+      { kind: 'table', wavelengthsNm: [300, 900], fLambda: [1, 2.5e-17] },
+    ],
+    [{ spectralIndex: '2', temperature: '300' }, null],
+  ] as const)('keeps the spectrum of %o', (cells, spectrum) => {
+    const values = targetRowSchema.parse({ ...right, ...cells })
+    expect(values.spectrum).toEqual(spectrum)
+    expect(targetRowSchema.parse(targetRow(values))).toEqual(values)
+  })
+
   it('may stay without redshift, magnitude and position', () => {
     const values = targetRowSchema.parse({ ...emptyTargetRow, name: 'A burst to come' })
     expect(values).toMatchObject({ raDeg: null, decDeg: null, redshift: null, brightness: null })
@@ -83,6 +107,14 @@ describe('a row of the targets table', () => {
     [{ lineName: 'Hω' }, { lineName: 'This line is not on the list.' }],
     [{ magnification: '0' }, { magnification: 'A magnification lies between 0.01 and 1,000.' }],
     [{ ebv: '9' }, { ebv: 'A reddening E(B−V) lies between 0 and 5.' }],
+    [{ spectrum: 'power-law' }, { spectralIndex: 'A power law needs its index.' }],
+    [{ spectrum: 'black-body' }, { temperature: 'A black body needs its temperature.' }],
+    [{ spectrum: 'table' }, { spectrumTable: 'Choose the file of the spectrum, or another shape.' }],
+    [
+      { spectrum: 'black-body', temperature: '50' },
+      { temperature: 'A temperature in kelvin lies between 100 and 1,000,000.' },
+    ],
+    [{ spectralIndex: 'steep' }, { spectralIndex: 'A spectral index is a number.' }],
     [{ sersicIndex: '0.3' }, { sersicIndex: 'A Sérsic index lies between 0.50 and 8.' }],
   ])('says of %o what is wrong', (change, sentences) => {
     expect(rowErrors({ ...right, ...change })).toEqual(sentences)

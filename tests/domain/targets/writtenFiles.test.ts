@@ -28,6 +28,8 @@ const line = { name: 'Hβ', kind: 'luminosity', value: 2.5e42, error: 3e41, widt
 /** A target as it is kept: its numbers are those of the text typed. */
 const kept = (one: Target): Target => ({ ...one, ...targetRowSchema.parse(targetRow(one)) })
 
+const opportunity = { event: 'Kilonova', trigger: 'A burst, r < 20', reactionSeconds: 5400, triggers: 3 }
+
 const targets: Target[] = [
   target(),
   target({
@@ -50,6 +52,18 @@ const targets: Target[] = [
     decDeg: -0.208333333333,
     geometry: 'uniform',
     effectiveRadiusArcsec: 4,
+  }),
+  target({
+    ...{ id: 16, name: 'Lamp 31', spectrum: { kind: 'power-law', index: -0.5, indexError: 0.2 } },
+  }),
+  target({ id: 17, name: 'Lamp 32', spectrum: { kind: 'black-body', temperatureK: 5772 } }),
+  target({
+    ...{ id: 18, name: 'Lamp 33' },
+    spectrum: { kind: 'table', wavelengthsNm: [300, 550.5, 1100], fLambda: [0, 2.5e-17, 1.25e-17] },
+  }),
+  target({
+    ...{ id: 19, name: 'The next one', group: 'Bright, "near" ones', opportunity },
+    ...{ raTyped: '', decTyped: '', raDeg: null, decDeg: null },
   }),
   target({
     id: 14,

@@ -18,6 +18,10 @@ const asked = (change: Partial<ExposureInput> = {}): ExposureInput => ({
   radius: '0.5',
   sersic: '1',
   area: '1',
+  spectrum: 'flat',
+  index: '-0.5',
+  temperature: '5000',
+  redshift: '0',
   moon: 'dark',
   clouds: 'photometric',
   airmass: '1.2',
@@ -83,6 +87,22 @@ describe('an exposure asked in the three ways', () => {
     expect(isFarFromBand(asked({ band: 'J AB' }), 7500)).toBe(true)
     expect(isFarFromBand(asked({ band: 'i AB' }), 7500)).toBe(false)
     expect(isFarFromBand(asked({ source: 'line', band: 'J AB' }), 7500)).toBe(false)
+    expect(isFarFromBand(asked({ spectrum: 'power-law', band: 'J AB' }), 7500)).toBe(false)
+  })
+
+  it('carries the magnitude by its spectrum, and the limit back to its band', () => {
+    const carried = { spectrum: 'power-law', index: '-1', band: 'J AB' } as const
+    // From 12,350 A to the middle of the mode, 7700 A: fainter by 2.5 log10 of that.
+    const { report, carried: sentence } = of(carried)
+    const { report: same } = of({ band: 'J AB', magnitude: String(20 + 2.5 * Math.log10(12_350 / 7702.1)) })
+    expect(report.openS / same.openS).toBeCloseTo(1, 1)
+    expect(sentence).toBe('Carried from J to 7,700\u00a0Å with α = −1: +0.51\u00a0mag.')
+    const { limit } = of({ ...carried, solve: 'limit', hours: String(report.openS / 3600) })
+    expect(limit).toMatchObject({ kind: 'magnitude', value: expect.closeTo(20, 1) })
+    expect(of({ spectrum: 'black-body', temperature: '4000', redshift: '0.5' }).carried).toMatch(
+      /^Carried from i to 7,700\u00a0Å with a black body of 4,000\u00a0K at z = 0\.50: /,
+    )
+    expect(of({ spectrum: 'black-body', source: 'line' }).carried).toBeNull()
   })
 })
 
@@ -99,6 +119,14 @@ describe('what is typed', () => {
     [{ source: 'line', flux: 'x' }, { flux: 'A flux is a number, such as 2.5e-17.' }],
     [{ shape: 'galaxy', sersic: '12' }, { sersic: 'A Sérsic index lies between 0.5 and 8.' }],
     [{ shape: 'uniform', area: '' }, { area: 'An area is a number.' }],
+    [{ spectrum: 'power-law', index: 'x' }, { index: 'A spectral index is a number.' }],
+    [
+      { spectrum: 'black-body', temperature: '5', redshift: '-1' },
+      {
+        temperature: 'A temperature in kelvin lies between 100 and 1,000,000.',
+        redshift: 'A redshift lies between 0 and 20.',
+      },
+    ],
     [{ airmass: '0.5' }, { airmass: 'An airmass lies between 1 and 3.' }],
     [{ band: 'q AB' }, { band: 'Choose a band.' }],
   ])('%o is answered at its field', (change, expected) => {

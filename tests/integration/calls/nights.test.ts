@@ -1,7 +1,7 @@
 import { beforeEach, describe, expect, it } from 'vitest'
 import { importNights } from '@/lib/domain/calendar/importNights'
 import { readCalendar } from '@/lib/domain/calendar/readCalendar'
-import { calendarCsv } from '@/lib/domain/calendar/calendarCsv'
+import { calendarCsv } from '@/lib/domain/calendar/calendarFileView'
 import { setNights } from '@/lib/domain/calendar/setNights'
 import type { NightPart } from '@/lib/domain/calendar/types'
 import type { ActingContext } from '@/lib/domain/context'

@@ -46,7 +46,8 @@ async function save(over: Partial<Kind> = {}, ctx = office) {
     title: 'Regular',
     closesAt: null,
     pageLimit: 4,
-    wordLimit: null,
+    wordLimit: 2000,
+    needsStudent: false,
     figureLimit: null,
     abstractLimit: 1500,
     maxHours: 60,
@@ -65,7 +66,7 @@ describe('kinds', () => {
       { title: 'Thesis', maxSeconds: null, feeMinor: 0, proposals: 0 },
     ])
     const entry = await db()('logbook').where({ action: 'call.kind' }).first()
-    expect(JSON.parse(entry?.before_value ?? '')).toMatchObject({ wordLimit: null, maxSeconds: 216_000 })
+    expect(JSON.parse(entry?.before_value ?? '')).toMatchObject({ wordLimit: 2000, maxSeconds: 216_000 })
     expect(JSON.parse(entry?.after_value ?? '')).toMatchObject({ wordLimit: 2400, maxSeconds: 45_000 })
   })
 

@@ -2,9 +2,9 @@ import { createHash } from 'node:crypto'
 import { beforeEach, describe, expect, it } from 'vitest'
 import { papersOf } from '@/db/queries/papers'
 import type { Actor } from '@/lib/domain/actor'
+import { readGiveaways } from '@/lib/domain/anonymity/readGiveaways'
 import { newObjectKey } from '@/lib/domain/objects/objectKey'
 import { readPaper } from '@/lib/domain/papers/readPaper'
-import { readPaperNames } from '@/lib/domain/papers/readPaperNames'
 import { removePaper } from '@/lib/domain/papers/removePaper'
 import { uploadPaper } from '@/lib/domain/papers/uploadPaper'
 import { readContents } from '@/lib/domain/proposals/readContents'
@@ -119,15 +119,15 @@ describe('reading a paper', () => {
 
   it('finds the names of the investigators, and says when it cannot look', async () => {
     await upload(await pdfWith(['See Sollvik 2026', 'nothing']))
-    const { papers: kept, people } = await readContents(db(), scenario.reference)
-    const paper = kept[0]
-    if (!paper) return expect.fail('no paper')
-    expect(
-      await readPaperNames({ storage: memoryStore() }, { ...paper, sha256: 'b'.repeat(64) }, people),
-    ).toBeNull()
-    expect(await readPaperNames({ storage }, paper, people)).toMatchObject([
-      { name: 'Maren Sollvik', pages: [1] },
-    ])
+    const contents = await readContents(db(), scenario.reference)
+    const other = contents.papers.map((paper) => ({ ...paper, sha256: 'b'.repeat(64) }))
+    expect(await readGiveaways({ storage: memoryStore() }, { ...contents, papers: other })).toMatchObject({
+      isDocumentUnread: true,
+    })
+    expect(await readGiveaways({ storage }, contents)).toMatchObject({
+      found: [{ kind: 'name', what: 'Maren Sollvik', places: [{ source: 'document', at: 1 }] }],
+      isDocumentUnread: false,
+    })
   })
 })
 

@@ -31,7 +31,9 @@ const add = (
     email,
     institute: '',
     access,
+    orcid: '',
     isStudent: false,
+    isSupervisor: false,
   })
 
 beforeEach(async () => {

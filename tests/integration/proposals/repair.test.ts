@@ -35,8 +35,10 @@ const open = (
     reason: 'The file of another proposal was sent.',
   })
 
-async function replace(words: string, actor: Actor = closed.pi, arrivedAt = new Date()) {
-  const bytes = await pdfWith([words])
+const replace = async (words: string, actor?: Actor, arrivedAt?: Date) =>
+  replaceBy(await pdfWith([words]), actor, arrivedAt)
+
+async function replaceBy(bytes: Uint8Array, actor: Actor = closed.pi, arrivedAt = new Date()) {
   return replacePaper(
     closed.as(actor),
     {
@@ -69,7 +71,7 @@ describe('a wrong file', () => {
     expect(after.versionNumber).toBe(2)
     expect({ ...after.snapshot.contents, papers: [] }).toEqual({ ...before.snapshot.contents, papers: [] })
     expect(after.snapshot.computation).toEqual(before.snapshot.computation)
-    expect(after.snapshot.contents.papers).toMatchObject([{ fileName: 'quads-v5.pdf', words: 3 }])
+    expect(after.snapshot.contents.papers).toMatchObject([{ fileName: 'quads-v5.pdf', pages: 1 }])
     const versions = await db()('proposal_versions').where({ proposal_id: closed.proposalId })
     expect(versions.map((row) => row.superseded_at === null)).toEqual([false, true])
     expect(await db()('papers').where({ proposal_id: closed.proposalId })).toHaveLength(2)
@@ -118,9 +120,10 @@ describe('a wrong file', () => {
 
   it('is looked through like any other', async () => {
     await open()
-    await db()('call_kinds').where({ id: closed.kindId }).update({ word_limit: 3 })
-    expect((await refused(replace('One two three four'))).fieldErrors.file).toBe(
-      'The PDF has 4 words; this document may have 3.',
+    const longer = await pdfWith(['1', '2', '3', '4', '5'])
+    const sent = replaceBy(longer)
+    expect((await refused(sent)).fieldErrors.file).toBe(
+      'The PDF has 5 pages; this document may have four pages.',
     )
     expect((await standing()).versionNumber).toBe(1)
   })

@@ -152,7 +152,7 @@ describe('what stops a sending', () => {
     await db()('proposals').where({ id: scenario.proposalId }).update({ abstract: '' })
     await expect(sendIn(ctx, scenario.reference)).rejects.toMatchObject({
       kind: 'invalid',
-      fieldErrors: { papers: 'Add the justification.', question: expect.any(String) },
+      fieldErrors: { papers: 'Write the justification, or add it as a PDF.', question: expect.any(String) },
     })
     expect(await state()).toMatchObject({ state: 'draft', review_number: null })
   })

@@ -63,6 +63,28 @@ describe('targets of a draft', () => {
     expect(await kept()).toMatchObject({ line: null, magnification: null, brightness: { value: 20 } })
   })
 
+  it.each([
+    [
+      { spectrum: 'power-law', spectralIndex: '-0.5', spectralIndexError: '0.1' },
+      { kind: 'power-law', index: -0.5, indexError: 0.1 },
+    ],
+    [
+      { spectrum: 'black-body', temperature: '5772' },
+      { kind: 'black-body', temperatureK: 5772 },
+    ],
+    [
+      { spectrum: 'table', spectrumTable: '300 1; 900 2.5e-17' },
+      { kind: 'table', wavelengthsNm: [300, 900], fLambda: [1, 2.5e-17] },
+    ],
+  ] as const)('keep the spectrum %o, and lose it when it is taken out', async (cells, spectrum) => {
+    const added = await add(cells)
+    const kept = async () => (await targets()).find(({ id }) => id === added.id)?.spectrum
+    expect(await kept()).toEqual(spectrum)
+    const { id, version } = added
+    await saveTarget(ctx, { reference: scenario.reference, id, version, row: row({ magnitude: '20' }) })
+    expect(await kept()).toBeNull()
+  })
+
   it('keep names apart', async () => {
     await add()
     const refusal = await refused(add({ name: ' he 0047−1756' }))

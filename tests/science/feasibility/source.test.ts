@@ -13,16 +13,16 @@ const observedA = 4862.68 * 1.2
 // Seen to fail with the lens taken off and the dust given, and with both applied to what was observed.
 describe('analytic limit or identity: light on its way', () => {
   it('dims what is predicted by dust and gas, and brightens it by a lens', () => {
-    const { ab } = sourceOf(
+    const { source } = sourceOf(
       request({ target: { ...predicted, galacticEbv: 0.1, magnification: 10 } }),
       observedA,
-    ) as { ab: number }
+    )
     const dust = extinctionMag({ ebv: 0.1, isSfd: true, law: 'F99' }, observedA)
-    expect(ab).toBeCloseTo(19.5 + dust - 2.5, 9)
+    expect((source as { ab: number }).ab).toBeCloseTo(19.5 + dust - 2.5, 9)
   })
 
   it('leaves what was observed as it is', () => {
-    const source = sourceOf(request({ target: { galacticEbv: 0.5, magnification: 10 } }), observedA)
+    const { source } = sourceOf(request({ target: { galacticEbv: 0.5, magnification: 10 } }), observedA)
     expect(source).toMatchObject({ kind: 'magnitude', ab: 19.5, provenance: 'observed' })
   })
 
@@ -37,7 +37,7 @@ describe('analytic limit or identity: light on its way', () => {
 describe('analytic limit or identity: a line of the target', () => {
   it('is L / 4 pi D_L^2, magnified, and follows the cosmology', () => {
     const input = request({ target: { line, magnification: 2 } })
-    const source = sourceOf(input, observedA) as { fluxErgSCm2: number; provenance: string }
+    const source = sourceOf(input, observedA).source as { fluxErgSCm2: number; provenance: string }
     const expected = 2 * lineFlux(1e41, input.cosmology.luminosityMpc(0.2))
     expect(relativeError(source.fluxErgSCm2, expected)).toBeLessThan(1e-12)
     expect(source).toMatchObject({ kind: 'line', provenance: 'predicted', widthKmS: 300, continuumAb: 19.5 })
@@ -48,8 +48,8 @@ describe('analytic limit or identity: a line of the target', () => {
       target: { line },
       observation: { feature: { name: '[O III] 5008', restA: 5008.24 } },
     })
-    expect(sourceOf(other, 5008.24 * 1.2)).toMatchObject({ kind: 'magnitude' })
-    expect(sourceOf(request({ target: { line } }), observedA)).toMatchObject({ kind: 'line' })
+    expect(sourceOf(other, 5008.24 * 1.2).source).toMatchObject({ kind: 'magnitude' })
+    expect(sourceOf(request({ target: { line } }), observedA).source).toMatchObject({ kind: 'line' })
   })
 
   it('needs no magnitude, and its signal is checked', () => {

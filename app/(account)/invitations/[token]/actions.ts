@@ -11,7 +11,7 @@ export const acceptInvitationAction = defineAction({
   name: 'acceptInvitation',
   schema: acceptInvitationSchema,
   run: acceptInvitation,
-  redirectTo: () => `${paths.signIn()}?confirmed=1`,
+  redirectTo: ({ next }) => `${paths.signIn(next ?? paths.proposals())}&confirmed=1`,
   limit: { points: 30, seconds: 900 },
 })
 

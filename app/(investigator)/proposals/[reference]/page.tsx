@@ -1,8 +1,10 @@
 import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
+import { CarriedNotes } from '@/components/proposals/CarriedNotes'
 import { ChangeList } from '@/components/proposals/ChangeList'
 import { homeLead } from '@/components/proposals/homeLead'
+import { ProgrammeList } from '@/components/proposals/ProgrammeList'
 import { PutAwayButton } from '@/components/proposals/PutAwayButton'
 import { SettlePanel } from '@/components/proposals/SettlePanel'
 import { TargetsUp } from '@/components/proposals/TargetsUp'
@@ -15,11 +17,13 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
+import { whereToContinue } from '@/lib/domain/continuation/whereToContinue'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
 import { mayPutAway } from '@/lib/domain/proposals/policy'
 import { paths } from '@/lib/paths'
 import { ProposalQuestions } from './answers/ProposalQuestions'
 import { putAwayDraftAction, takeBackDraftAction } from './actions'
+import { programmeOf } from './programmeOf'
 import { proposalOf } from './proposalOf'
 
 export const metadata: Metadata = { title: 'Proposal' }
@@ -30,7 +34,11 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
   const ctx = await openPage('/proposals/[reference]')
   const read = await orNotFound(proposalOf((await params).reference))
   const { contents, now, sections } = read
-  const { changes } = await readHistory(ctx, contents)
+  const [{ changes }, programme] = await Promise.all([
+    readHistory(ctx, contents),
+    programmeOf((await params).reference),
+  ])
+  const carryOn = await whereToContinue(ctx, contents)
   const isSent = contents.state !== 'draft' && contents.state !== 'withdrawn'
   const hasPaper = contents.papers.some(({ kind }) => kind === 'justification')
   return (
@@ -47,6 +55,7 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
                 <ChangeList changes={changes.slice(0, 5)} now={now} />
               </div>
             </section>
+            <ProgrammeList others={programme.others} />
           </>
         }
       >
@@ -57,6 +66,15 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
         <div className="mt-6 empty:hidden">
           <ProposalQuestions ctx={ctx} reference={contents.reference} />
         </div>
+        {programme.continues && programme.notes.length > 0 ? (
+          <div className="mt-6 max-w-prose">
+            <CarriedNotes
+              notes={programme.notes}
+              callNumber={programme.continues.callNumber}
+              reference={contents.reference}
+            />
+          </div>
+        ) : null}
         <div className="mt-6 lg:hidden">
           <SettlePanel read={read} />
         </div>
@@ -73,6 +91,11 @@ export default async function ProposalPage({ params }: { params: Promise<{ refer
               Read the packet as reviewers will
             </LinkButton>
           ) : null}
+          {carryOn === null ? null : (
+            <LinkButton look="secondary" href={paths.proposalContinue(contents.reference)}>
+              Carry it on in call {carryOn}
+            </LinkButton>
+          )}
           {isSent ? (
             <TextLink href={paths.proposalSent(contents.reference)}>What was sent, and its fee</TextLink>
           ) : null}

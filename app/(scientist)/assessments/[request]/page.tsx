@@ -7,6 +7,7 @@ import { HoursTable } from '@/components/assessments/HoursTable'
 import { OverheadsTable } from '@/components/assessments/OverheadsTable'
 import { QuestionToInvestigators } from '@/components/assessments/QuestionToInvestigators'
 import { Main } from '@/components/layout/Main'
+import { GroupsStanding } from '@/components/observations/GroupsStanding'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { PageTitle } from '@/components/ui/PageTitle'
@@ -59,6 +60,9 @@ export default async function AssessmentPage({ params }: { params: Promise<{ req
           }
         >
           <HoursTable targets={view.targets} trueSeconds={view.history[0]?.trueSeconds ?? null} />
+          <div className="mt-10 empty:hidden">
+            <GroupsStanding computation={proposal.computation} />
+          </div>
           <div className="mt-10 grid gap-10 md:grid-cols-2">
             <OverheadsTable modes={modes} targets={view.targets} />
             <FoundByEngine view={view} />

@@ -9,6 +9,7 @@ export interface NamedOnProposal {
   callTitle: string
   deadline: Date
   mayEdit: boolean
+  hasAccount: boolean
   url: string
 }
 
@@ -21,9 +22,11 @@ export function namedOnProposal(given: NamedOnProposal): Letter {
     paragraphs: [
       `${given.byName} is writing a proposal for telescope time and names you as a co-investigator. Open the link to agree, or to take your name off again.`,
       given.mayEdit
-        ? 'You may read the proposal and change it until it is sent.'
+        ? 'You may read the proposal, and change it once you have agreed, until it is sent.'
         : 'You may read the proposal at any time.',
-      'Sign in with this address. If you have no account yet, register with this address first; it takes a minute.',
+      given.hasAccount
+        ? 'Sign in with this address.'
+        : 'You have no account with this address yet: the link opens one, and holds for 60 days. It takes a minute.',
     ],
     facts: [
       ['Proposal', given.title || 'without a title yet'],
@@ -32,6 +35,7 @@ export function namedOnProposal(given: NamedOnProposal): Letter {
       ['Deadline', formatUtcWithYear(given.deadline)],
     ],
     action: { label: 'Read the proposal and answer', url: given.url },
-    closing: 'If you do not know what this is about, do nothing: you are not counted in before you agree.',
+    closing:
+      'If you do not know what this is about, do nothing: the proposal is sent without your name unless you agree.',
   }
 }

@@ -22,6 +22,7 @@ const goesOn = new Set([
   'target.save',
   'observation.save',
   'constraints.save',
+  'writing.save',
 ])
 
 function whoActed(entry: SubjectEntry, readerId: number): string | null {
@@ -43,8 +44,8 @@ function merged(later: SubjectEntry, earlier: SubjectEntry): SubjectEntry {
 }
 
 function subjectOf(entry: SubjectEntry): string {
-  const target = (entry.after as { target?: { id?: number } } | null)?.target?.id
-  return `${entry.action}:${target ?? ''}:${entry.personId ?? ''}`
+  const after = entry.after as { target?: { id?: number }; part?: string } | null
+  return `${entry.action}:${after?.target?.id ?? after?.part ?? ''}:${entry.personId ?? ''}`
 }
 
 /**

@@ -1,6 +1,8 @@
 import { formatHoursFromSeconds, formatList, formatNumber, formatUtcInstant } from '@/lib/format'
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
+import { groupWords } from './groupWords'
 import { questionWords } from './questionWords'
+import { writingWords } from './writingWords'
 
 /** What rows are called now, by their keys; null for those that are gone. */
 export interface RowNames {
@@ -64,6 +66,8 @@ function sectionWords({ before, after }: EntryValues): string {
 /** The acts an investigator may read about, each in a sentence; what is not listed is not shown. */
 export const entryWords: Readonly<Record<string, Words>> = {
   'proposal.begin': ({ after }) => `Began the proposal ${quoted(textAt(after, 'title') ?? '')}`,
+  'proposal.continue': ({ before }) =>
+    `Carried ${textAt(before, 'reference') ?? 'an earlier proposal'} of call ${numberAt(before, 'call') ?? ''} on`,
   'proposal.question': questionWords,
   'proposal.cosmology': ({ before, after }) => {
     const name = (value: unknown) => {
@@ -89,7 +93,20 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'people.leave': () => 'Left the proposal',
   'people.access': ({ after }) =>
     `${textAt(after, 'name') ?? 'Somebody'} ${accessWords[textAt(after, 'access') ?? ''] ?? 'may read it'} now`,
+  'people.describe': ({ after }) => `Changed what is said of ${textAt(after, 'name') ?? 'somebody'}`,
+  'people.lead-offer': ({ after }) => `Asked ${textAt(after, 'asked') ?? 'somebody'} to lead the proposal`,
+  'people.lead-take-back': ({ before }) =>
+    `Took back the request to ${textAt(before, 'asked') ?? 'somebody'} to lead`,
+  'people.lead-decline': () => 'Declined to lead the proposal',
+  'people.lead-accept': ({ before }) =>
+    `Leads the proposal in place of ${textAt(before, 'lead') ?? 'somebody'}`,
   'people.order': () => 'Changed the order of names',
+  'writing.save': writingWords,
+  'figure.add': ({ after }) => `Added the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.replace': ({ after }) => `Put another picture in the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.save': ({ after }) => `Changed the words of the figure ${textAt(after, 'label') ?? ''}`,
+  'figure.remove': ({ before }) => `Took the figure ${textAt(before, 'label') ?? ''} off`,
+  'figure.order': () => 'Changed the order of figures',
   'papers.add': paperWords,
   'papers.repair': paperWords,
   'papers.open-repair': ({ after }) =>
@@ -102,7 +119,10 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'target.add': ({ after }) => `Added ${target(after)}`,
   'target.save': ({ before, after }) => {
     const [was, is] = [target(before), target(after)]
-    return was === is ? `Changed ${is}` : `Renamed ${was} to ${is}`
+    if (was !== is) return `Renamed ${was} to ${is}`
+    const [from, to] = [textAt(before, 'target', 'group'), textAt(after, 'target', 'group')]
+    if (from === to) return `Changed ${is}`
+    return to === null ? `Took ${is} out of ${from}` : `Put ${is} into ${to}`
   },
   'target.remove': ({ before }) => `Took ${target(before)} off`,
   'target.restore': ({ after }) => `Brought ${target(after)} back`,
@@ -113,6 +133,8 @@ export const entryWords: Readonly<Record<string, Words>> = {
       ? `Added ${formatNumber(names.length)} targets from a list`
       : `Added ${formatList(names)}`
   },
+  'group.save': groupWords,
+  'group.remove': ({ before }) => `Took the group ${quoted(textAt(before, 'group', 'name') ?? '')} out`,
   'observation.add': ({ after }, names) => `Added ${observed(after, names)}`,
   'observation.save': ({ before, after }, names) => {
     const asked = (value: unknown) => numberAt(value, 'observation', 'askedSeconds')

@@ -1,7 +1,9 @@
 import { countInWords, formatHoursFromSeconds, formatList } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import type { ProposalComputation } from '../../observations/types'
-import type { ProposalContents } from '../types'
+import { groupOf } from '../../observations/groupOf'
+import { needOf } from '../../observations/needOf'
+import type { ProposalContents, TargetGroup } from '../types'
 import type { Finding, Missing } from './finding'
 
 function words({ observations, modes }: ProposalContents): string {
@@ -14,9 +16,12 @@ function words({ observations, modes }: ProposalContents): string {
   return `${formatList([...instruments])}, ${countInWords(observations.length, 'observation')}${of}`
 }
 
-/** Every required target is observed, each observation can be computed, and the whole stays within the kind's time. */
+const shortOf = ({ name, atLeast }: TargetGroup, asked: number) =>
+  `${name} wants ${countInWords(atLeast ?? 1, 'target')} observed; ${asked === 0 ? 'none is' : `only ${countInWords(asked, 'is', 'are')}`}.`
+
+/** Every required target is observed, as many of each group as it wants, each observation can be computed, and the whole stays within the kind's time. */
 export function observingFinding(contents: ProposalContents, computation: ProposalComputation): Finding {
-  const { targets, observations, kind, reference } = contents
+  const { groups, targets, observations, kind, reference } = contents
   const href = paths.proposalSection(reference, 'observing')
   const lacks = (sentence: string, id?: number): Missing => ({
     section: 'observing',
@@ -32,8 +37,16 @@ export function observingFinding(contents: ProposalContents, computation: Propos
     }
   const nameOf = (targetId: number) => targets.find(({ id }) => id === targetId)?.name ?? 'A target'
   const observed = new Set(observations.map(({ targetId }) => targetId))
-  const bare = targets.filter(({ id, need }) => need === 'required' && !observed.has(id))
-  const missing = bare.map(({ name }) => lacks(`${name} is required, but nothing observes it.`))
+  const bare = targets.filter((target) => needOf(target, groups) === 'required' && !observed.has(target.id))
+  const absent = [
+    ...bare.map(({ name }) => lacks(`${name} is required, but nothing observes it.`)),
+    ...groups.flatMap((group) => {
+      const asked = targets.filter((one) => groupOf(one, groups) === group && observed.has(one.id)).length
+      const isShort = group.rule === 'at-least' && asked < (group.atLeast ?? 1)
+      return isShort ? [lacks(shortOf(group, asked))] : []
+    }),
+  ]
+  const missing = [...absent]
   for (const { id, targetId, askedSeconds } of observations) {
     if (askedSeconds <= 0) missing.push(lacks(`Ask for time on ${nameOf(targetId)}.`, id))
     const computed = computation.observations.find(({ observationId }) => observationId === id)
@@ -46,5 +59,5 @@ export function observingFinding(contents: ProposalContents, computation: Propos
         `${formatHoursFromSeconds(computation.askedSeconds)} are asked; this kind of proposal may ask for ${formatHoursFromSeconds(kind.maxSeconds)}.`,
       ),
     )
-  return { begun: true, detail: words(contents), missing, wrong: missing.length > bare.length }
+  return { begun: true, detail: words(contents), missing, wrong: missing.length > absent.length }
 }

@@ -13,6 +13,9 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['magnitudeError', 'mag'],
   ['effectiveRadius', 'arcsec'],
   ['sersicIndex', ''],
+  ['spectralIndex', ''],
+  ['spectralIndexError', ''],
+  ['temperature', 'K'],
   ['ebv', 'mag'],
   ['magnification', ''],
   ['magnificationError', ''],
@@ -21,4 +24,6 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['lineLuminosity', 'erg/s'],
   ['lineLuminosityError', 'erg/s'],
   ['lineWidth', 'km/s'],
+  ['reaction', 'h'],
+  ['triggers', ''],
 ])

@@ -1,4 +1,4 @@
-/** A unit as a factor to radian, metre, gram, second and magnitude, and its power of each. */
+/** A unit as a factor to radian, metre, gram, second, kelvin and magnitude, and its power of each. */
 export interface Unit {
   factor: number
   powers: Readonly<Record<string, number>>
@@ -38,6 +38,8 @@ const atoms = new Map<string, Unit>([
   ['W', atom(1e3, { ...energy, s: -3 })],
   ['mW', atom(1, { ...energy, s: -3 })],
   ['kW', atom(1e6, { ...energy, s: -3 })],
+  ['K', atom(1, { K: 1 })],
+  ['kK', atom(1e3, { K: 1 })],
   ['Jy', atom(1e-23, { g: 1, s: -2 })],
   ['mJy', atom(1e-26, { g: 1, s: -2 })],
   ['uJy', atom(1e-29, { g: 1, s: -2 })],

@@ -32,6 +32,24 @@ interface Said {
   redshiftType: TargetRow['redshiftType']
 }
 
+/** The shape of a spectrum: the one named, else the one that something is said of. */
+function spectrumCells(text: (column: TargetColumn) => string) {
+  const [spectralIndex, temperature] = [text('spectralIndex'), text('temperature')]
+  const spectrumTable = text('spectrumTable')
+  const stated =
+    spectrumTable !== ''
+      ? 'table'
+      : spectralIndex !== ''
+        ? 'power-law'
+        : temperature !== ''
+          ? 'black-body'
+          : 'flat'
+  return {
+    spectrum: choice(text('spectrum'), ['flat', 'power-law', 'black-body', 'table'], stated),
+    ...{ spectralIndex, spectralIndexError: text('spectralIndexError'), temperature, spectrumTable },
+  }
+}
+
 function rowOf(cells: Cells, said: Said): TargetRow {
   const position = splitPosition(cells.get('position') ?? '')
   const text = (column: TargetColumn, otherwise = '') => cells.get(column) ?? otherwise
@@ -53,6 +71,11 @@ function rowOf(cells: Cells, said: Said): TargetRow {
     band: bandOf(cells.get('band') || said.band, cells.get('system') ?? ''),
     provenance: choice(text('provenance'), ['observed', 'predicted'], 'observed'),
     source: text('source'),
+    group: text('group'),
+    event: text('event'),
+    trigger: text('trigger'),
+    reaction: text('reaction'),
+    triggers: text('triggers'),
     need: choice(text('need'), ['required', 'optional', 'backup'], 'required'),
     geometry:
       text('effectiveRadius') === '' ? 'point' : choice(text('geometry'), ['sersic', 'uniform'], 'sersic'),
@@ -66,6 +89,7 @@ function rowOf(cells: Cells, said: Said): TargetRow {
     lineValue: text('lineLuminosity') || text('lineFlux') || text('lineValue'),
     lineError: (isLuminosity ? text('lineLuminosityError') : text('lineFluxError')) || text('lineError'),
     lineWidth: text('lineWidth'),
+    ...spectrumCells(text),
     pmRa: text('pmRa'),
     pmDec: text('pmDec'),
     epoch: text('epoch') || emptyTargetRow.epoch,

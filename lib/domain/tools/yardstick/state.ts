@@ -1,6 +1,6 @@
-import type { CosmologyQuantity, InvertibleQuantity } from '@/lib/science/cosmology'
+import type { CosmologyQuantity, InvertibleQuantity, StellarMass } from '@/lib/science/cosmology'
 
-export const modes = ['distances', 'compare', 'near', 'inverse'] as const
+export const modes = ['distances', 'compare', 'near', 'survey', 'inverse'] as const
 export type Mode = (typeof modes)[number]
 
 /** Own parameters exactly as typed; an empty dark energy makes the universe flat. */
@@ -38,6 +38,12 @@ export interface YardstickState {
   dec: string
   /** A galaxy's own motion, one standard deviation. */
   motion: string
+  /** Of a survey, with a unit of solid angle. */
+  area: string
+  /** Objects in a comoving volume; empty where only the volume is asked. */
+  density: string
+  /** The galaxies whose clustering counts; none where it is left out. */
+  mass: StellarMass | 'none'
   from: InvertibleQuantity
   /** The values to find redshifts for. */
   values: string
@@ -75,6 +81,9 @@ export const usualState: YardstickState = {
   ra: '12 26 27',
   dec: '+31 13 20',
   motion: '300 km/s',
+  area: '1.5 deg²',
+  density: '1e-3 Mpc⁻³',
+  mass: '10.0-10.5',
   from: 'ageGyr',
   values: '1 Gyr\n3.3 Gyr\n8 Gyr',
 }

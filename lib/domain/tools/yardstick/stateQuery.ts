@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { cosmologyPresets, type CosmologyQuantity } from '@/lib/science/cosmology'
+import { cosmologyPresets, stellarMasses, type CosmologyQuantity } from '@/lib/science/cosmology'
 import { readOwnQuery, writeOwn } from './ownQuery'
 import { quantities, quantityOf } from './quantities'
 import { MOST_COLUMNS, MOST_COSMOLOGIES, modes, usualState, type Chosen, type YardstickState } from './state'
@@ -21,6 +21,9 @@ export const stateKeys = [
   'ra',
   'dec',
   'motion',
+  'area',
+  'density',
+  'mass',
   'from',
   'values',
 ]
@@ -102,6 +105,9 @@ export function readState(query: Query): { state: YardstickState; troubles: stri
       ra: text(40, usualState.ra).parse(one('ra')),
       dec: text(40, usualState.dec).parse(one('dec')),
       motion: text(60, usualState.motion).parse(one('motion')),
+      area: text(60, usualState.area).parse(one('area')),
+      density: text(60, usualState.density).parse(one('density')),
+      mass: pick(z.enum(['none', ...stellarMasses]), 'mass', usualState.mass),
       from: pick(z.enum(invertible), 'from', usualState.from),
       values: (one('values') ?? usualState.values).replace(/\s*;\s*/g, '\n'),
     },
@@ -136,6 +142,9 @@ export function writeState(state: YardstickState): URLSearchParams | null {
   put('ra', state.ra, usualState.ra)
   put('dec', state.dec, usualState.dec)
   put('motion', state.motion, usualState.motion)
+  put('area', state.area, usualState.area)
+  put('density', state.density, usualState.density)
+  put('mass', state.mass, usualState.mass)
   put('from', state.from, usualState.from)
   const values = (list: string) =>
     list

@@ -35,7 +35,13 @@ const UNIT_WORDS = /^[A-Za-z][A-Za-z0-9^*/ ()+-]*$/
  * different things. Never runs an expression.
  */
 export function convertUnit(value: number, words: string, wanted: string): number | null {
-  const spelled = words.trim().replace(/[⁻−]/g, '-').replaceAll('²', '^2').replaceAll('³', '^3')
+  const spelled = words
+    .trim()
+    .replace(
+      /⁻?[¹²³]/g,
+      (power) => `^${power.replace('⁻', '-').replace(/[¹²³]/, (digit) => String('¹²³'.indexOf(digit) + 1))}`,
+    )
+    .replace(/[⁻−]/g, '-')
   if (spelled.length > MOST_CHARACTERS || !UNIT_WORDS.test(spelled)) return null
   let typed: Unit
   try {

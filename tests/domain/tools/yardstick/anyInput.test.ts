@@ -4,7 +4,13 @@ import { plotQuantity, plotRatio } from '@/lib/domain/tools/yardstick/curves'
 import { sheetEcsv } from '@/lib/domain/tools/yardstick/exports/ecsv'
 import { historiesOf } from '@/lib/domain/tools/yardstick/histories'
 import { quantities } from '@/lib/domain/tools/yardstick/quantities'
-import { emptyOwn, modes, usualState, type Chosen } from '@/lib/domain/tools/yardstick/state'
+import {
+  emptyOwn,
+  modes,
+  usualState,
+  type Chosen,
+  type YardstickState,
+} from '@/lib/domain/tools/yardstick/state'
 import { invertible, readState, writeState } from '@/lib/domain/tools/yardstick/stateQuery'
 import { chosenUniverses } from '@/lib/domain/tools/yardstick/universes'
 import { viewOf } from '@/lib/domain/tools/yardstick/viewOf'
@@ -55,6 +61,9 @@ const state = fc.record({
   ra: text,
   dec: text,
   motion: text,
+  area: fc.oneof(text, fc.constantFrom('1.5 deg²', '160 arcmin²', '3 Mpc', '41253')),
+  density: fc.oneof(text, fc.constantFrom('', '1e-3 Mpc⁻³', '2 kpc^-3')),
+  mass: fc.constantFrom<YardstickState['mass']>('none', '8.5-9.0', 'above-11.0'),
   draw: fc.constantFrom(...quantities.map(({ id }) => id)),
 })
 

@@ -19,6 +19,9 @@ describe('the state in the address', () => {
   it('comes back as it was', () => {
     const state: YardstickState = {
       mode: 'compare',
+      area: '160 arcmin²',
+      density: '',
+      mass: 'above-11.0',
       z: '0.1..2 step 0.1\n5\nabout',
       cosmologies: [
         { own: null, id: 'wmap-9' },

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
+import { ClashNotes } from '@/components/observations/ClashNotes'
 import { FeasibilityReport } from '@/components/observations/FeasibilityReport'
 import { OtherCosmologies } from '@/components/observations/OtherCosmologies'
 import { SectionFoot } from '@/components/proposals/SectionFoot'
@@ -9,6 +10,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readOutcome } from '@/lib/domain/decisions/readOutcome'
 import { isOutcome } from '@/lib/domain/decisions/rules'
+import { readClashes } from '@/lib/domain/observations/readClashes'
 import { standingComputation } from '@/lib/domain/observations/standingComputation'
 import { underCosmology } from '@/lib/domain/observations/underCosmology'
 import { paths } from '@/lib/paths'
@@ -47,6 +49,7 @@ export default async function FeasibilityPage({ params, searchParams }: Props) {
         }
       />
       <div className="mt-6">
+        <ClashNotes contents={contents} clashes={await readClashes(ctx, contents)} />
         <FeasibilityReport
           contents={other?.contents ?? contents}
           computation={other?.computation ?? computation}

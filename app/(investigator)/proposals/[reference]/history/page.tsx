@@ -3,19 +3,29 @@ import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { ChangeList } from '@/components/proposals/ChangeList'
 import { SentVersions } from '@/components/proposals/SentVersions'
+import { TextChanges } from '@/components/proposals/TextChanges'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
+import { readTextChanges } from '@/lib/domain/proposals/history/readTextChanges'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'History' }
 
-export default async function HistoryPage({ params }: { params: Promise<{ reference: string }> }) {
+interface Props {
+  params: Promise<{ reference: string }>
+  searchParams: Promise<{ since?: string }>
+}
+
+export default async function HistoryPage({ params, searchParams }: Props) {
   const ctx = await openPage('/proposals/[reference]/history')
   const { contents, now } = await orNotFound(proposalOf((await params).reference))
   const { versions, changes } = await readHistory(ctx, contents)
+  const { since } = await searchParams
+  const asked = /^\d{1,4}$/.test(since ?? '') ? Number(since) : versions[0]?.number
+  const texts = asked === undefined ? null : await readTextChanges(ctx, contents, asked)
   return (
     <Main>
       <PageTitle title="History" lead="Who changed what, and what was sent. Times are UTC." />
@@ -24,7 +34,7 @@ export default async function HistoryPage({ params }: { params: Promise<{ refere
           side={
             <section>
               <SectionHeading dense title="Sent" />
-              <SentVersions versions={versions} />
+              <SentVersions versions={versions} reference={contents.reference} />
             </section>
           }
         >
@@ -32,6 +42,7 @@ export default async function HistoryPage({ params }: { params: Promise<{ refere
           <div className="mt-2">
             <ChangeList changes={changes} now={now} />
           </div>
+          {texts && (texts.parts.length > 0 || since) ? <TextChanges {...texts} /> : null}
         </TwoColumns>
       </div>
     </Main>

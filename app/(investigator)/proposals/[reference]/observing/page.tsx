@@ -5,6 +5,8 @@ import { SectionFoot } from '@/components/proposals/SectionFoot'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { proposalOf } from '../proposalOf'
 import {
   addObservationAction,
@@ -22,9 +24,10 @@ export default async function ObservingPage({ params }: { params: Promise<{ refe
   return (
     <Main>
       <ObservingEditor
-        contents={{ ...contents, people: [], papers: [] }}
+        contents={{ ...contents, people: [], papers: [], writings: unwritten, figures: [] }}
         computation={computation}
         readOnly={readOnly}
+        note={<CarriedHere reference={contents.reference} section="observing" />}
         actions={{
           add: addObservationAction,
           save: saveObservationAction,

@@ -1,13 +1,18 @@
 'use server'
 
 import { defineAction } from '@/lib/actions/defineAction'
+import { acceptLead } from '@/lib/domain/proposals/acceptLead'
 import { addInvestigator } from '@/lib/domain/proposals/addInvestigator'
 import { confirmMembership } from '@/lib/domain/proposals/confirmMembership'
+import { describeInvestigator } from '@/lib/domain/proposals/describeInvestigator'
+import { endLeadOffer } from '@/lib/domain/proposals/endLeadOffer'
 import { leaveProposal } from '@/lib/domain/proposals/leaveProposal'
 import { moveInvestigator } from '@/lib/domain/proposals/moveInvestigator'
+import { offerLead } from '@/lib/domain/proposals/offerLead'
 import {
   accessSchema,
   addInvestigatorSchema,
+  describeInvestigatorSchema,
   investigatorSchema,
   moveSchema,
 } from '@/lib/domain/proposals/peopleSchema'
@@ -45,6 +50,36 @@ export const moveInvestigatorAction = defineAction({
   name: 'moveInvestigator',
   schema: moveSchema,
   run: moveInvestigator,
+  revalidate: page,
+})
+
+export const describeInvestigatorAction = defineAction({
+  name: 'describeInvestigator',
+  schema: describeInvestigatorSchema,
+  run: describeInvestigator,
+  revalidate: page,
+})
+
+export const offerLeadAction = defineAction({
+  name: 'offerLead',
+  schema: investigatorSchema,
+  run: offerLead,
+  revalidate: page,
+  // Each writes a letter to someone.
+  limit: { points: 20, seconds: 3600 },
+})
+
+export const acceptLeadAction = defineAction({
+  name: 'acceptLead',
+  schema: referenceSchema,
+  run: acceptLead,
+  revalidate: page,
+})
+
+export const endLeadOfferAction = defineAction({
+  name: 'endLeadOffer',
+  schema: referenceSchema,
+  run: endLeadOffer,
   revalidate: page,
 })
 

@@ -2,6 +2,7 @@ import type { Metadata } from 'next'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { AddPersonForm } from '@/components/proposals/AddPersonForm'
+import { LeadOffer } from '@/components/proposals/LeadOffer'
 import { OwnMembership } from '@/components/proposals/OwnMembership'
 import { PeopleList } from '@/components/proposals/PeopleList'
 import { ReadOnlyNote } from '@/components/proposals/ReadOnlyNote'
@@ -11,25 +12,38 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { mayLeave } from '@/lib/domain/proposals/policy'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import {
+  acceptLeadAction,
   addInvestigatorAction,
   confirmMembershipAction,
+  describeInvestigatorAction,
+  endLeadOfferAction,
   leaveProposalAction,
   moveInvestigatorAction,
+  offerLeadAction,
   removeInvestigatorAction,
   setAccessAction,
 } from './actions'
 
 export const metadata: Metadata = { title: 'People' }
 
-const manage = { remove: removeInvestigatorAction, setAccess: setAccessAction, move: moveInvestigatorAction }
+const manage = {
+  remove: removeInvestigatorAction,
+  setAccess: setAccessAction,
+  describe: describeInvestigatorAction,
+  move: moveInvestigatorAction,
+}
 
 export default async function PeoplePage({ params }: { params: Promise<{ reference: string }> }) {
   const ctx = await openPage('/proposals/[reference]/people')
-  const { contents, own, readOnly, mayManage } = await orNotFound(proposalOf((await params).reference))
+  const { contents, own, readOnly, mayManage, mayOfferLead, leadOfferedTo } = await orNotFound(
+    proposalOf((await params).reference),
+  )
   const { reference, people } = contents
   const lead = people.find(({ role }) => role === 'pi')?.name ?? 'The principal investigator'
+  const asked = people.find(({ personId }) => personId !== null && personId === leadOfferedTo)
   return (
     <Main>
       <PageTitle
@@ -38,6 +52,17 @@ export default async function PeoplePage({ params }: { params: Promise<{ referen
       />
       <div className="mt-6">
         <ReadOnlyNote reason={readOnly} />
+        <CarriedHere reference={reference} section="people" />
+        {asked ? (
+          <LeadOffer
+            reference={reference}
+            lead={lead}
+            asked={asked.name}
+            reader={asked === own ? 'asked' : mayOfferLead ? 'lead' : 'other'}
+            accept={acceptLeadAction}
+            end={endLeadOfferAction}
+          />
+        ) : null}
         {own && own.role !== 'pi' && !own.confirmedAt ? (
           <OwnMembership
             reference={reference}
@@ -51,7 +76,12 @@ export default async function PeoplePage({ params }: { params: Promise<{ referen
         <TwoColumns
           side={mayManage ? <AddPersonForm reference={reference} add={addInvestigatorAction} /> : null}
         >
-          <PeopleList reference={reference} people={people} actions={mayManage ? manage : null} />
+          <PeopleList
+            reference={reference}
+            people={people}
+            actions={mayManage ? manage : null}
+            offerLead={mayOfferLead && !asked ? offerLeadAction : null}
+          />
           {own?.confirmedAt && own.role !== 'pi' ? (
             <OwnMembership
               reference={reference}

@@ -7,6 +7,7 @@ import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { markSectionDoneAction } from '../actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import { saveQuestionAction } from './actions'
 
@@ -21,6 +22,7 @@ export default async function QuestionPage({ params }: { params: Promise<{ refer
       <PageTitle title="Question" lead="What is to be found out, in the words reviewers read first." />
       <div className="mt-6 max-w-prose">
         <ReadOnlyNote reason={readOnly} />
+        <CarriedHere reference={reference} section="question" />
         {readOnly ? (
           <>
             <h2 className="text-h2">{title || 'Without a title'}</h2>

@@ -13,9 +13,11 @@ import { Panel } from '@/components/ui/Panel'
 import { formatEngine } from '@/lib/format'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
+import { leftOut, namedOnSending } from '@/lib/domain/proposals/namedOnSending'
 import { declarationFor, leadFor } from '@/lib/domain/submission/sendWords'
 import { readForSending, type ForSending } from '@/lib/domain/submission/readForSending'
 import { reopenProposal } from '@/app/(investigator)/(confirmation)/proposals/[reference]/sent/actions'
+import { CarriedHere } from '../CarriedHere'
 import { proposalOf } from '../proposalOf'
 import { sendProposal } from './actions'
 
@@ -49,6 +51,7 @@ export default async function SendPage({ params }: Props) {
       >
         <PageTitle title="Read it through" lead={leadFor(read)} />
         <div className="mt-6">
+          <CarriedHere reference={contents.reference} section="send" />
           <ReadThrough
             reference={contents.reference}
             groups={read.groups}
@@ -79,7 +82,8 @@ function Sending({ read, isTestMode }: { read: ForSending; isTestMode: boolean }
     <SendForm
       reference={reference}
       idempotencyKey={randomUUID()}
-      declaration={declarationFor(contents.people.length)}
+      declaration={declarationFor(namedOnSending(contents.people).length)}
+      leftOut={leftOut(contents.people).map(({ name }) => name)}
       fee={fee}
       action={sendProposal}
     />

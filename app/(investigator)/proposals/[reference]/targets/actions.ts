@@ -2,6 +2,8 @@
 
 import { defineAction } from '@/lib/actions/defineAction'
 import { saveAskedTimes, saveAskedTimesSchema } from '@/lib/domain/observations/saveAskedTimes'
+import { removeGroup, removeGroupSchema } from '@/lib/domain/targetGroups/removeGroup'
+import { saveGroup, saveGroupSchema } from '@/lib/domain/targetGroups/saveGroup'
 import { addTarget, addTargetSchema } from '@/lib/domain/targets/addTarget'
 import { importTargets, importTargetsSchema } from '@/lib/domain/targets/importTargets'
 import { removeTarget, removeTargetSchema } from '@/lib/domain/targets/removeTarget'
@@ -59,5 +61,19 @@ export const askTimesAction = defineAction({
   name: 'saveAskedTimes',
   schema: saveAskedTimesSchema,
   run: saveAskedTimes,
+  revalidate: page,
+})
+
+export const saveGroupAction = defineAction({
+  name: 'saveGroup',
+  schema: saveGroupSchema,
+  run: saveGroup,
+  revalidate: page,
+})
+
+export const removeGroupAction = defineAction({
+  name: 'removeGroup',
+  schema: removeGroupSchema,
+  run: removeGroup,
   revalidate: page,
 })

@@ -8,12 +8,15 @@ import {
   addTargetAction,
   askTimesAction,
   importTargetsAction,
+  removeGroupAction,
   removeTargetAction,
   reorderTargetsAction,
   restoreTargetAction,
+  saveGroupAction,
   saveTargetAction,
 } from './actions'
 import { markSectionDoneAction } from '../actions'
+import { unwritten } from '@/lib/domain/proposals/unwritten'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'Targets' }
@@ -25,7 +28,7 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
   return (
     <Main>
       <TargetsEditor
-        contents={{ ...contents, people: [], papers: [] }}
+        contents={{ ...contents, people: [], papers: [], writings: unwritten, figures: [] }}
         computation={computation}
         readOnly={readOnly}
         actions={{
@@ -35,6 +38,8 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
           restore: restoreTargetAction,
           reorder: reorderTargetsAction,
           importRows: importTargetsAction,
+          saveGroup: saveGroupAction,
+          removeGroup: removeGroupAction,
           ask: askTimesAction,
         }}
       />

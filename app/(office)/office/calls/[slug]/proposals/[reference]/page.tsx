@@ -56,7 +56,7 @@ export default async function OfficeProposalPage({
               <Facts title={contents.reference} facts={officeProposalFacts(view)} />
               <section className="mt-10">
                 <SectionHeading dense title="Versions sent" />
-                <SentVersions versions={versions} />
+                <SentVersions reference={contents.reference} versions={versions} />
               </section>
             </>
           }

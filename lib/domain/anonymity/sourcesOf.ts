@@ -1,0 +1,25 @@
+import type { ProposalContents } from '../proposals/types'
+import type { Source, SourceName } from './types'
+
+const lines = (name: SourceName, text: string): Source => ({
+  name,
+  parts: text.split('\n').map((line, index) => ({ at: index + 1, text: line })),
+})
+
+/** What reviewers read of a proposal, but for its document: the written parts only where no document stands. */
+export function sourcesOf(
+  contents: Pick<ProposalContents, 'title' | 'abstract' | 'writings' | 'figures' | 'papers'>,
+): Source[] {
+  const { title, abstract, writings, figures, papers } = contents
+  const head: Source[] = [{ name: 'title', parts: [{ at: null, text: title }] }, lines('abstract', abstract)]
+  if (papers.some(({ kind }) => kind === 'justification')) return head
+  return [
+    ...head,
+    lines('text', writings.justification.text),
+    {
+      name: 'captions',
+      parts: figures.map(({ label, caption }, index) => ({ at: index + 1, text: `${label} ${caption}` })),
+    },
+    lines('references', writings.references.text),
+  ]
+}
