@@ -16,6 +16,9 @@ export interface SentSize {
   askedSeconds: number
 }
 
+/** Limits are typed in tenths of an hour: the least that is not below. */
+const tenthUp = (seconds: number) => Math.ceil(seconds / 360) * 360
+
 type Limits = Pick<CallKind, 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxSeconds'>
 
 const measures: readonly [
@@ -33,7 +36,7 @@ const measures: readonly [
     (s) => s.abstractLength,
     (n) => `${formatNumber(n, 0)} characters of abstract`,
   ],
-  ['maxHours', (k) => k.maxSeconds, (s) => s.askedSeconds, (n) => formatHoursFromSeconds(n)],
+  ['maxHours', (k) => k.maxSeconds, (s) => s.askedSeconds, (n) => formatHoursFromSeconds(tenthUp(n))],
 ]
 
 /** Limits that proposals already sent go beyond, each with how many and how far; by the field of the limit. */

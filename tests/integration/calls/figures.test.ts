@@ -12,6 +12,7 @@ it('gives a call in figures, of what stands, with small counts of people held ba
   const call = await makePanelCall(db(), [40, 30, 20])
   const office = call.as(call.office)
   await db()('proposals').where({ id: call.proposals[2]?.id }).update({ state: 'withdrawn' })
+  await db()('proposal_version_people').where({ role: 'co-investigator' }).update({ career_stage: 'student' })
   const figures = await readFigures(office, call.callSlug)
 
   expect(figures.calls[0]).toMatchObject({

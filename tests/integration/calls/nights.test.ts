@@ -12,7 +12,7 @@ import { refused } from '../../support/refused'
 import { makeScenario, type Scenario } from '../../support/scenario'
 import { sendIn } from '../../support/sendIn'
 
-// Seen to fail: with awarded time left out of the guard, and with nights outside the stretch written too.
+// Seen to fail: with awarded time left out of the guard, and with nights outside the stretch cleared.
 
 const db = useRolledBackDatabase()
 let scenario: Scenario

@@ -15,8 +15,7 @@ import { refused } from '../../support/refused'
 import { makeScenario, type Scenario } from '../../support/scenario'
 import { sendIn } from '../../support/sendIn'
 
-// Seen to fail: with limits of other kinds compared, with drafts counted as sent, and with the criteria changed under
-// a proposal that was sent.
+// Seen to fail: with limits of other kinds compared, and with the criteria changed under a proposal that was sent.
 
 const db = useRolledBackDatabase()
 let scenario: Scenario

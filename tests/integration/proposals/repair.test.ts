@@ -13,8 +13,8 @@ import { pdfText } from '../../support/pdfText'
 import { asFile, pdfWith } from '../../support/pdfs'
 import { refused } from '../../support/refused'
 
-// Seen to fail: a repair used twice, the stamp of arrival left out of the update, the computation made anew, and the
-// files of a reopened draft taken into the version.
+// Seen to fail: a repair used twice, the stamp of arrival left out, and what a reopened draft says taken into the
+// version.
 
 const db = useRolledBackDatabase()
 const hour = 3600_000
