@@ -1,5 +1,10 @@
 import { NextResponse, type NextRequest } from 'next/server'
 
+/** Letters looked at in a frame of ours: nothing in them runs or loads, and they are no pages of ours. */
+const lockedIn = /^\/office\/mail\/.+\/html$/
+const letterPolicy =
+  "sandbox; default-src 'none'; style-src 'unsafe-inline'; base-uri 'none'; form-action 'none'; frame-ancestors 'self'"
+
 /**
  * Headers for every page: a fresh nonce for the content policy, a request id, the address of the connection
  * and the path asked for. It guards nothing: pages, actions and handlers check the session themselves.
@@ -7,7 +12,7 @@ import { NextResponse, type NextRequest } from 'next/server'
 export function proxy(request: NextRequest): NextResponse {
   const nonce = Buffer.from(crypto.getRandomValues(new Uint8Array(16))).toString('base64')
   const isDevelopment = process.env.NODE_ENV === 'development'
-  const policy = [
+  const page = [
     "default-src 'self'",
     `script-src 'self' 'nonce-${nonce}' 'strict-dynamic'${isDevelopment ? " 'unsafe-eval'" : ''}`,
     `style-src 'self' ${isDevelopment ? "'unsafe-inline'" : `'nonce-${nonce}'`}`,
@@ -19,8 +24,10 @@ export function proxy(request: NextRequest): NextResponse {
     "base-uri 'none'",
     "form-action 'self'",
     "frame-src 'self'",
+    "worker-src 'self'",
     "frame-ancestors 'self'",
   ].join('; ')
+  const policy = lockedIn.test(request.nextUrl.pathname) ? letterPolicy : page
 
   const forwarded = new Headers(request.headers)
   forwarded.set('x-nonce', nonce)

@@ -62,6 +62,19 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BulkLettersRow {
+  id: number
+  subject: string
+  text_body: string
+  audience: string
+  written_by: number | null
+  queued_at: Date | null
+  recipients: number | null
+  cancelled_at: Date | null
+  version: number
+  created_at: Date
+}
+
 export interface CallsRow {
   id: number
   number: number
@@ -159,6 +172,20 @@ export interface CountersRow {
   last_number: number
 }
 
+export interface CreditNotesRow {
+  id: number
+  number: string
+  fee_id: number
+  invoice_id: number | null
+  refund_id: number | null
+  credited_to: string
+  address: string
+  amount_minor: number
+  currency: string
+  reason: string
+  created_at: Date
+}
+
 export interface DecisionsRow {
   id: number
   proposal_id: number
@@ -170,12 +197,27 @@ export interface DecisionsRow {
   superseded_at: Date | null
   version: number
   created_at: Date
+  changed_by: number | null
+  approved_by: number | null
+  approved_version: number | null
+  approved_at: Date | null
 }
 
 export interface DemographicsRow {
   person_id: number
   purpose: string
   answers: string
+  created_at: Date
+}
+
+export interface DisputesRow {
+  id: number
+  payment_id: number
+  provider_dispute_id: string
+  amount_minor: number
+  reason: string
+  state: 'open' | 'won' | 'lost'
+  closed_at: Date | null
   created_at: Date
 }
 
@@ -189,12 +231,24 @@ export interface EmailTokensRow {
   created_at: Date
 }
 
+export interface FacilityRetirementsRow {
+  id: number
+  site_id: number | null
+  telescope_id: number | null
+  instrument_id: number | null
+  mode_id: number | null
+  retired_from: string
+  created_at: Date
+}
+
 export interface FeesRow {
   id: number
   proposal_id: number
   amount_minor: number
   currency: string
-  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed'
+  affiliation_class: 'member' | 'partner' | 'other'
+  late_minor: number
+  state: 'due' | 'paid' | 'waived' | 'invoiced' | 'refunded' | 'lapsed' | 'cancelled'
   due_at: Date
   settled_at: Date | null
   version: number
@@ -214,6 +268,25 @@ export interface FiguresRow {
   removed_at: Date | null
   version: number
   created_at: Date
+}
+
+export interface HeldHoursRow {
+  id: number
+  call_id: number
+  telescope_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
+export interface FeeRatesRow {
+  id: number
+  call_kind_id: number
+  affiliation_class: 'member' | 'partner' | 'other'
+  amount_minor: number
+  late_minor: number
 }
 
 export interface InstitutesRow {
@@ -262,6 +335,28 @@ export interface InvitationsRow {
   withdrawn_at: Date | null
   created_at: Date
   proposal_id: number | null
+  role_until_at: Date | null
+}
+
+export interface InvoicesRow {
+  id: number
+  number: string
+  fee_id: number
+  institute: string
+  address: string
+  purchase_order: string
+  send_to: string
+  amount_minor: number
+  currency: string
+  state: 'open' | 'settled' | 'cancelled'
+  due_at: Date
+  asked_by: number | null
+  settled_on: string | null
+  settled_reference: string
+  closed_by: number | null
+  closed_at: Date | null
+  version: number
+  created_at: Date
 }
 
 export interface LogbookRow {
@@ -278,6 +373,14 @@ export interface LogbookRow {
   address: string
   previous_hash: string
   hash: string
+}
+
+export interface LogbookChecksRow {
+  id: number
+  checked_at: Date
+  checked_by: number | null
+  rows_checked: number
+  fault: string | null
 }
 
 export interface LogbookHeadRow {
@@ -325,7 +428,18 @@ export interface MoneyEntriesRow {
   id: number
   movement: string
   fee_id: number
-  account: 'receivable' | 'income' | 'provider' | 'waived' | 'refunds'
+  account:
+    | 'receivable'
+    | 'income'
+    | 'provider'
+    | 'waived'
+    | 'refunds'
+    | 'invoiced'
+    | 'bank'
+    | 'owed-back'
+    | 'disputed'
+    | 'firm-fees'
+    | 'lost'
   amount_minor: number
   currency: string
   created_at: Date
@@ -342,6 +456,16 @@ export interface NightBlocksRow {
   fraction_to: string
   dark_seconds: number
   note: string
+}
+
+export interface NightChoicesRow {
+  id: number
+  proposal_id: number
+  choice: 'must' | 'never' | 'filler'
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
 }
 
 export interface ObservationsRow {
@@ -371,13 +495,16 @@ export interface OutboxRow {
   subject: string
   text_body: string
   html_body: string
-  state: 'queued' | 'sending' | 'sent' | 'parked'
+  state: 'queued' | 'sending' | 'sent' | 'parked' | 'bounced' | 'cancelled'
   attempts: number
   next_attempt_at: Date
   claimed_until: Date | null
   last_error: string | null
   sent_at: Date | null
   created_at: Date
+  bulk_letter_id: number | null
+  again_of: number | null
+  attachment: string | null
 }
 
 export interface PacketsRow {
@@ -396,6 +523,11 @@ export interface PanelsRow {
   call_id: number
   name: string
   quorum: number
+  formula: string | null
+  formula_by: number | null
+  formula_at: Date | null
+  discussing_id: number | null
+  discussing_since: Date | null
 }
 
 export interface PanelMembersRow {
@@ -406,6 +538,7 @@ export interface PanelMembersRow {
   number: number
   left_at: Date | null
   created_at: Date
+  present_at: Date | null
 }
 
 export interface PapersRow {
@@ -477,6 +610,11 @@ export interface PeopleRow {
   is_demo: 0 | 1
   version: number
   created_at: Date
+  address_failed_at: Date | null
+  address_failed_why: string | null
+  erasure_asked_at: Date | null
+  erased_at: Date | null
+  merged_into_id: number | null
 }
 
 export interface ProgrammesRow {
@@ -608,13 +746,17 @@ export interface RecusalsRow {
 
 export interface RefundsRow {
   id: number
-  payment_id: number
+  payment_id: number | null
+  invoice_id: number | null
   idempotency_key: string
   provider_refund_id: string | null
   amount_minor: number
+  is_surplus: 0 | 1
   state: 'created' | 'succeeded' | 'failed'
+  failure: string
   reason: string
   made_by: number | null
+  closed_at: Date | null
   created_at: Date
 }
 
@@ -625,6 +767,9 @@ export interface ReviewTextsRow {
   body: string
   version: number
   saved_at: Date
+  withheld_at: Date | null
+  withheld_by: number | null
+  withheld_reason: string | null
 }
 
 export interface RoleGrantsRow {
@@ -683,6 +828,8 @@ export interface SiteRecordsRow {
   dark_sky_mag_arcsec2: string
   seeing_arcsec: string
   created_at: Date
+  weather: string | null
+  horizon: string
 }
 
 export interface StoredObjectsRow {
@@ -775,6 +922,8 @@ export interface TelescopeRecordsRow {
   aperture_m: number
   collecting_area_m2: number
   created_at: Date
+  horizon: string
+  highest_altitude_deg: number | null
 }
 
 export interface TimeEntriesRow {
@@ -844,6 +993,13 @@ declare module 'knex/types/tables.js' {
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
     >
+    bulk_letters: Knex.CompositeTableType<
+      BulkLettersRow,
+      Insert<
+        BulkLettersRow,
+        'id' | 'written_by' | 'queued_at' | 'recipients' | 'cancelled_at' | 'version' | 'created_at'
+      >
+    >
     calls: Knex.CompositeTableType<
       CallsRow,
       Insert<CallsRow, 'id' | 'stage' | 'currency' | 'version' | 'created_at'>
@@ -886,23 +1042,58 @@ declare module 'knex/types/tables.js' {
       >
     >
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
+    credit_notes: Knex.CompositeTableType<
+      CreditNotesRow,
+      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+    >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
-      Insert<DecisionsRow, 'id' | 'decided_by' | 'released_at' | 'superseded_at' | 'version' | 'created_at'>
+      Insert<
+        DecisionsRow,
+        | 'id'
+        | 'decided_by'
+        | 'released_at'
+        | 'superseded_at'
+        | 'version'
+        | 'created_at'
+        | 'changed_by'
+        | 'approved_by'
+        | 'approved_version'
+        | 'approved_at'
+      >
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
+    disputes: Knex.CompositeTableType<
+      DisputesRow,
+      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+    >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
+    facility_retirements: Knex.CompositeTableType<
+      FacilityRetirementsRow,
+      Insert<
+        FacilityRetirementsRow,
+        'id' | 'site_id' | 'telescope_id' | 'instrument_id' | 'mode_id' | 'created_at'
+      >
+    >
     fees: Knex.CompositeTableType<
       FeesRow,
-      Insert<FeesRow, 'id' | 'state' | 'settled_at' | 'version' | 'created_at'>
+      Insert<
+        FeesRow,
+        'id' | 'affiliation_class' | 'late_minor' | 'state' | 'settled_at' | 'version' | 'created_at'
+      >
     >
     figures: Knex.CompositeTableType<
       FiguresRow,
       Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
     >
+    held_hours: Knex.CompositeTableType<
+      HeldHoursRow,
+      Insert<HeldHoursRow, 'id' | 'superseded_at' | 'created_at'>
+    >
+    fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -928,11 +1119,32 @@ declare module 'knex/types/tables.js' {
         | 'withdrawn_at'
         | 'created_at'
         | 'proposal_id'
+        | 'role_until_at'
+      >
+    >
+    invoices: Knex.CompositeTableType<
+      InvoicesRow,
+      Insert<
+        InvoicesRow,
+        | 'id'
+        | 'purchase_order'
+        | 'state'
+        | 'asked_by'
+        | 'settled_on'
+        | 'settled_reference'
+        | 'closed_by'
+        | 'closed_at'
+        | 'version'
+        | 'created_at'
       >
     >
     logbook: Knex.CompositeTableType<
       LogbookRow,
       Insert<LogbookRow, 'id' | 'person_id' | 'before_value' | 'after_value' | 'address'>
+    >
+    logbook_checks: Knex.CompositeTableType<
+      LogbookChecksRow,
+      Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
     mode_records: Knex.CompositeTableType<
@@ -960,6 +1172,10 @@ declare module 'knex/types/tables.js' {
       NightBlocksRow,
       Insert<NightBlocksRow, 'id' | 'instrument_id' | 'fraction_from' | 'fraction_to' | 'note'>
     >
+    night_choices: Knex.CompositeTableType<
+      NightChoicesRow,
+      Insert<NightChoicesRow, 'id' | 'superseded_at' | 'created_at'>
+    >
     observations: Knex.CompositeTableType<
       ObservationsRow,
       Insert<ObservationsRow, 'id' | 'feature' | 'feature_rest_a' | 'version' | 'created_at'>
@@ -977,13 +1193,22 @@ declare module 'knex/types/tables.js' {
         | 'last_error'
         | 'sent_at'
         | 'created_at'
+        | 'bulk_letter_id'
+        | 'again_of'
+        | 'attachment'
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
-    panels: Knex.CompositeTableType<PanelsRow, Insert<PanelsRow, 'id' | 'quorum'>>
+    panels: Knex.CompositeTableType<
+      PanelsRow,
+      Insert<
+        PanelsRow,
+        'id' | 'quorum' | 'formula' | 'formula_by' | 'formula_at' | 'discussing_id' | 'discussing_since'
+      >
+    >
     panel_members: Knex.CompositeTableType<
       PanelMembersRow,
-      Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at'>
+      Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at' | 'present_at'>
     >
     papers: Knex.CompositeTableType<PapersRow, Insert<PapersRow, 'id' | 'superseded_at' | 'created_at'>>
     paper_repairs: Knex.CompositeTableType<
@@ -1027,6 +1252,11 @@ declare module 'knex/types/tables.js' {
         | 'is_demo'
         | 'version'
         | 'created_at'
+        | 'address_failed_at'
+        | 'address_failed_why'
+        | 'erasure_asked_at'
+        | 'erased_at'
+        | 'merged_into_id'
       >
     >
     programmes: Knex.CompositeTableType<ProgrammesRow, Insert<ProgrammesRow, 'id' | 'created_at'>>
@@ -1092,9 +1322,24 @@ declare module 'knex/types/tables.js' {
     recusals: Knex.CompositeTableType<RecusalsRow, Insert<RecusalsRow, 'id' | 'created_at'>>
     refunds: Knex.CompositeTableType<
       RefundsRow,
-      Insert<RefundsRow, 'id' | 'provider_refund_id' | 'state' | 'made_by' | 'created_at'>
+      Insert<
+        RefundsRow,
+        | 'id'
+        | 'payment_id'
+        | 'invoice_id'
+        | 'provider_refund_id'
+        | 'is_surplus'
+        | 'state'
+        | 'failure'
+        | 'made_by'
+        | 'closed_at'
+        | 'created_at'
+      >
     >
-    review_texts: Knex.CompositeTableType<ReviewTextsRow, Insert<ReviewTextsRow, 'id' | 'version'>>
+    review_texts: Knex.CompositeTableType<
+      ReviewTextsRow,
+      Insert<ReviewTextsRow, 'id' | 'version' | 'withheld_at' | 'withheld_by' | 'withheld_reason'>
+    >
     role_grants: Knex.CompositeTableType<
       RoleGrantsRow,
       Insert<
@@ -1118,7 +1363,10 @@ declare module 'knex/types/tables.js' {
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
-    site_records: Knex.CompositeTableType<SiteRecordsRow, Insert<SiteRecordsRow, 'id' | 'created_at'>>
+    site_records: Knex.CompositeTableType<
+      SiteRecordsRow,
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather' | 'horizon'>
+    >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<
       TargetsRow,
@@ -1181,7 +1429,7 @@ declare module 'knex/types/tables.js' {
     telescopes: Knex.CompositeTableType<TelescopesRow, Insert<TelescopesRow, 'id'>>
     telescope_records: Knex.CompositeTableType<
       TelescopeRecordsRow,
-      Insert<TelescopeRecordsRow, 'id' | 'created_at'>
+      Insert<TelescopeRecordsRow, 'id' | 'created_at' | 'horizon' | 'highest_altitude_deg'>
     >
     time_entries: Knex.CompositeTableType<TimeEntriesRow, Insert<TimeEntriesRow, 'id'>>
     time_transfers: Knex.CompositeTableType<

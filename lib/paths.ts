@@ -8,6 +8,8 @@ export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
 export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+/** A form in which a night plan is handed out. */
+export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
 export const paths = {
   home: () => '/',
@@ -29,6 +31,7 @@ export const paths = {
   resetPassword: (token: string) => `/reset-password/${part(token)}`,
   invitation: (token: string) => `/invitations/${part(token)}`,
   account: () => '/account',
+  accountData: () => '/account/data',
 
   proposals: () => '/proposals',
   newProposal: (callSlug?: string) => (callSlug ? `/proposals/new?call=${part(callSlug)}` : '/proposals/new'),
@@ -48,12 +51,15 @@ export const paths = {
     `/proposals/${part(reference)}/packet${variant ? `?variant=${variant}` : ''}`,
   proposalRecord: (reference: string) => `/proposals/${part(reference)}/record`,
   proposalReceipt: (reference: string) => `/proposals/${part(reference)}/receipt`,
+  /** An invoice or a credit note, by its number. */
+  proposalBill: (reference: string, number: string) => `/proposals/${part(reference)}/bills/${part(number)}`,
   proposalCalendar: (reference: string) => `/proposals/${part(reference)}/calendar.ics`,
   proposalPaid: (reference: string) => `/proposals/${part(reference)}/paid`,
 
   assessments: () => '/assessments',
   assessment: (request: number | string) => `/assessments/${part(String(request))}`,
   ownInstruments: () => '/assessments/instruments',
+  newOwnMode: () => '/assessments/instruments/new',
   ownMode: (slug: string) => `/assessments/instruments/${part(slug)}`,
   assessmentPacket: (request: number | string) => `/assessments/${part(String(request))}/packet`,
 
@@ -61,6 +67,7 @@ export const paths = {
 
   reviews: () => '/reviews',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
+  meeting: (callSlug: string) => `/reviews/meeting/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
   reviewReport: (assignment: number | string) => `/reviews/${part(String(assignment))}/report`,
   reviewPacket: (assignment: number | string) => `/reviews/${part(String(assignment))}/packet`,
@@ -71,18 +78,42 @@ export const paths = {
   panelPacket: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/packets/${part(reviewNumber)}`,
 
+  panelPlan: (callSlug: string, file: PlanFileName, panelId: number) =>
+    `/panel/${part(callSlug)}/plan/${file}?panel=${panelId}`,
   panelTeam: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/reports/${part(reviewNumber)}`,
 
   office: (page: OfficePage) => `/office/${page}`,
+  letterSamples: () => '/office/mail/templates',
+  letterSample: (template: string, reference: string) =>
+    `/office/mail/templates/html?template=${part(template)}&reference=${part(reference)}`,
+  bulkLetters: () => '/office/mail/letters',
+  newBulkLetter: () => '/office/mail/letters/new',
+  bulkLetter: (letter: number, reader?: number) =>
+    `/office/mail/letters/${letter}${reader === undefined ? '' : `?reader=${reader}`}`,
+  bulkLetterHtml: (letter: number, reader: number, version: number) =>
+    `/office/mail/letters/${letter}/html?reader=${reader}&v=${version}`,
+  officeLetter: (letter: number) => `/office/mail/${letter}`,
+  officeLetterHtml: (letter: number) => `/office/mail/${letter}/html`,
+  officePerson: (person: number) => `/office/people/${person}`,
+  officeMerge: (person: number) => `/office/people/${person}/merge`,
+  officePersonData: (person: number) => `/office/people/${person}/data`,
+  officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
+  officeLedger: () => '/office/fees/ledger',
+  officeReconciliation: () => '/office/fees/reconciliation',
+  newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
+  retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>
+    `/office/facility/retire/${kind}/${part(slug)}`,
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
+  officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
   officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
   officeProposal: (slug: string, reference: string) =>
     `/office/calls/${part(slug)}/proposals/${part(reference)}`,
+  officeDecisions: (slug: string) => `/office/calls/${part(slug)}/decisions`,
 
   api: {
     health: () => '/api/health',

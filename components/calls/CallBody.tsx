@@ -18,10 +18,12 @@ interface CallBodyProps {
   season: Season
   /** Over the title: where one is, or that this is a preview. */
   head: ReactNode
+  /** What came of it, once that is public. */
+  statistics?: ReactNode
 }
 
 /** A call as everyone reads it. */
-export function CallBody({ view, season, head }: CallBodyProps) {
+export function CallBody({ view, season, head, statistics }: CallBodyProps) {
   const { call, site, corrections } = view
   return (
     <Main>
@@ -56,6 +58,7 @@ export function CallBody({ view, season, head }: CallBodyProps) {
           />
         </div>
       </TwoColumns>
+      {statistics ? <div className="mt-12">{statistics}</div> : null}
       <section className="mt-12">
         <SectionHeading title="Dates" />
         <div className="mt-4">

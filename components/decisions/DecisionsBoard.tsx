@@ -2,10 +2,12 @@
 
 import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
-import { useState } from 'react'
+import { useMemo, useState } from 'react'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { sentenceOf, useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
+import { SeasonsNote } from '@/components/nights/SeasonsNote'
+import { useSeasons } from '@/components/nights/useSeasons'
 import { DataTable } from '@/components/tables/DataTable'
 import { useTableQuery } from '@/components/tables/useTableQuery'
 import { BarNote } from '@/components/ui/BarNote'
@@ -19,6 +21,11 @@ import type { ActionResult } from '@/lib/actions/result'
 import { decisionsView, type DecisionsView } from '@/lib/domain/decisions/decisionsView'
 import { countInWords, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
+import type { ApproveAction } from './ApprovalNote'
+import { ApproveOthers } from './ApproveOthers'
+import type { WithholdAction } from './CommentRow'
+import { DecisionDetail } from './DecisionDetail'
+import { flagsOf } from './flagsOf'
 import { decisionColumns } from './decisionColumns'
 import { StatementForm } from './StatementForm'
 
@@ -26,11 +33,13 @@ export interface DecisionsBoardProps {
   initial: DecisionsView
   prepare: (input: { panelId: number }) => Promise<ActionResult<{ prepared: number }>>
   save: SaveStatementAction
+  approve: ApproveAction
+  withhold: WithholdAction
   release: (input: { panelId: number; typed: string }) => Promise<ActionResult<{ released: number }>>
 }
 
-/** Two steps: prepare each decision, then make all of them known at once. */
-export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoardProps) {
+/** Three steps: prepare each decision, have a second person approve it, then make all of them known at once. */
+export function DecisionsBoard({ initial, prepare, save, approve, withhold, release }: DecisionsBoardProps) {
   const { data: view = initial } = useTableQuery({
     key: ['panel', 'decisions', initial.panelId],
     url: `${paths.api.table('panel-decisions')}?call=${initial.callSlug}&panel=${initial.panelId}`,
@@ -43,6 +52,12 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
   const router = useRouter()
   const [open, setOpen] = useState<number | null>(null)
   const { panelId, rows } = view
+  const seasons = useSeasons({
+    ...{ callSlug: view.callSlug, panelId, of: 'given' },
+    isOn: view.hasRanking && rows.some(({ lines }) => lines.length > 0),
+  })
+  const { outlookOf } = seasons
+  const columns = useMemo(() => decisionColumns(open, setOpen, outlookOf), [open, outlookOf])
   const count = (outcome: string) => rows.filter((row) => row.outcome === outcome).length
   const prepared = rows.filter((row) => row.isPrepared).length
   const canPrepare =
@@ -63,7 +78,7 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
     <>
       <PageTitle
         title="Decisions"
-        lead={`${count('awarded')} awarded, ${count('reserve')} in reserve, ${count('declined')} declined. ${prepared} of ${rows.length} prepared.`}
+        lead={`${count('awarded')} awarded, ${count('reserve')} in reserve, ${count('declined')} declined. ${prepared} of ${rows.length} prepared, ${rows.filter((row) => row.approval === 'approved').length} approved.`}
         actions={
           canPrepare ? (
             <>
@@ -84,6 +99,7 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
               >
                 {prepared > 0 ? 'Prepare them again' : 'Prepare decisions'}
               </Button>
+              <ApproveOthers rows={rows} panelId={panelId} approve={approve} />
               <ConfirmTyped
                 trigger="Make them known …"
                 triggerProps={{ look: 'primary', size: 'regular', offReason: view.whyNot }}
@@ -107,14 +123,16 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
         ) : (
           <BarNote tone="lamp">
             Letters are announced for {formatUtc(new Date(view.lettersAt))}. Outcomes follow from the hours
-            given under Nights; statements begin with the comments to the investigators, unsigned.
+            given under Nights; statements begin with the comments to the investigators, unsigned. Whoever did
+            not prepare a decision approves it: chair, deputy or office.
           </BarNote>
         )}
       </div>
+      <SeasonsNote seasons={seasons} of="given" onOf={null} />
       <div className="mt-6">
         <DataTable
           caption={`Decisions of call ${view.callNumber}`}
-          columns={decisionColumns(open, setOpen)}
+          columns={columns}
           rows={rows}
           rowId={(row) => String(row.proposalId)}
           find="Number or title"
@@ -123,19 +141,28 @@ export function DecisionsBoard({ initial, prepare, save, release }: DecisionsBoa
             { id: 'reserve', label: 'Reserve', matches: (row) => row.outcome === 'reserve' },
             { id: 'declined', label: 'Declined', matches: (row) => row.outcome === 'declined' },
             { id: 'open', label: 'Not prepared', matches: (row) => !row.isPrepared },
+            { id: 'waits', label: 'Not approved', matches: (row) => row.approval !== 'approved' },
+            { id: 'flags', label: 'To look at again', matches: (row) => flagsOf(row) > 0 },
           ]}
           csv={`decisions-call-${view.callNumber}`}
           selectedId={open === null ? null : String(open)}
           detail={(row) =>
             row.proposalId === open ? (
-              <StatementForm
-                key={row.version}
+              <DecisionDetail
                 row={row}
                 panelId={panelId}
-                canEdit={canPrepare}
-                action={save}
-                onLeave={() => setOpen(null)}
-              />
+                approve={approve}
+                withhold={canPrepare ? withhold : null}
+              >
+                <StatementForm
+                  key={row.version}
+                  row={row}
+                  panelId={panelId}
+                  canEdit={canPrepare}
+                  action={save}
+                  onLeave={() => setOpen(null)}
+                />
+              </DecisionDetail>
             ) : null
           }
           phone="cards"

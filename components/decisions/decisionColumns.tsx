@@ -1,14 +1,19 @@
+import type { Seasons } from '@/components/nights/useSeasons'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { linkClasses } from '@/components/ui/linkClasses'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { formatNumber } from '@/lib/format'
+import { chanceColumn } from './chanceColumn'
+import { flagsOf } from './flagsOf'
 import { OutcomeMark } from './OutcomeMark'
 
 const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.seconds, 0) / 3600
 
+/** Columns of a panel's decisions; the chance of each only where seasons are drawn. */
 export function decisionColumns(
   open: number | null,
   onOpen: (proposalId: number | null) => void,
+  outlookOf?: Seasons['outlookOf'],
 ): TableColumn<DecisionRow>[] {
   return [
     {
@@ -74,6 +79,7 @@ export function decisionColumns(
           1,
         ),
     },
+    ...(outlookOf ? [chanceColumn(outlookOf)] : []),
     {
       id: 'lines',
       head: 'On',
@@ -96,6 +102,27 @@ export function decisionColumns(
           <span className="font-semibold text-lamp">not written</span>
         ),
       csv: (row) => row.statement,
+    },
+    {
+      id: 'flags',
+      head: 'Look at',
+      unit: 'places',
+      align: 'right',
+      value: (row) => flagsOf(row),
+      cell: (row) => (flagsOf(row) > 0 ? flagsOf(row) : '–'),
+    },
+    {
+      id: 'approval',
+      head: 'Second person',
+      value: (row) => (row.approval === 'approved' ? row.approvedBy : row.approval),
+      cell: (row) =>
+        row.approval === 'approved' ? (
+          row.approvedBy
+        ) : (
+          <span className="font-semibold text-lamp">
+            {row.approval === 'changed' ? 'changed since' : 'not yet'}
+          </span>
+        ),
     },
   ]
 }

@@ -1,7 +1,7 @@
 import { TableFrame } from '@/components/tables/TableFrame'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
-import type { HeldMode } from '@/lib/domain/facility/heldModes'
+import type { HeldInstrument, HeldMode } from '@/lib/domain/facility/heldModes'
 import { ABSENT, formatCalendarDate, formatList, formatNumber, formatPercent } from '@/lib/format'
 import { nextInWords, writtenBy } from './recordWords'
 
@@ -38,52 +38,86 @@ function cellsOf({ now, next, offeredIn }: HeldMode): string[] {
 }
 
 export interface InstrumentModesProps {
-  modes: readonly HeldMode[]
+  instruments: readonly HeldInstrument[]
+  today: string
   /** Where the record of a mode is changed. */
   pathOf: (slug: string) => string
+  /** Where the retirement of an instrument is said, for those who may. */
+  retirementOf?: (slug: string) => string
+}
+
+const retirementNote = (retiredFrom: string | null, today: string) =>
+  retiredFrom === null
+    ? null
+    : `${retiredFrom > today ? 'retires on' : 'retired since'} ${formatCalendarDate(retiredFrom)}`
+
+const serviceNote = ({ now, retiredFrom }: HeldMode, today: string) =>
+  retirementNote(retiredFrom, today) ??
+  (now.validFrom > today ? `begins on ${formatCalendarDate(now.validFrom)}` : null)
+
+function ModeRow({ mode, href, today }: { mode: HeldMode; href: string; today: string }) {
+  const note = serviceNote(mode, today)
+  return (
+    <tr role="row">
+      <th role="rowheader" scope="row">
+        <TextLink href={href}>{mode.name}</TextLink>
+        {note ? <span className="block text-caption font-normal text-muted">{note}</span> : null}
+      </th>
+      {cellsOf(mode).map((text, index) => {
+        const head = heads[index]?.[0] ?? ''
+        return (
+          <td key={head} role="cell" data-head={head} className={align(head)}>
+            {text}
+          </td>
+        )
+      })}
+    </tr>
+  )
 }
 
 /** Modes instrument by instrument: what one chooses by, and which record says so since when. */
-export function InstrumentModes({ modes, pathOf }: InstrumentModesProps) {
-  const instruments = [...new Map(modes.map((mode) => [mode.instrument.id, mode])).values()]
-  return instruments.map(({ instrument, telescope }) => (
-    <section key={instrument.id} className="mt-10">
-      <SectionHeading title={instrument.name} aside={`on ${telescope}`} />
+export function InstrumentModes({ instruments, today, pathOf, retirementOf }: InstrumentModesProps) {
+  return instruments.map(({ slug, name, telescope, retiredFrom, modes }) => (
+    <section key={slug} className="mt-10">
+      <SectionHeading
+        title={name}
+        aside={
+          <>
+            <span>on {telescope}</span>
+            {retiredFrom ? <span>{retirementNote(retiredFrom, today)}</span> : null}
+            {retirementOf ? (
+              <TextLink href={retirementOf(slug)} aria-label={`Retire ${name}`}>
+                {retiredFrom ? 'Change' : 'Retire'}
+              </TextLink>
+            ) : null}
+          </>
+        }
+      />
       <div className="mt-3">
-        <TableFrame caption={`Modes of ${instrument.name}`} phone="cards">
-          <thead role="rowgroup">
-            <tr role="row">
-              <th role="columnheader" scope="col">
-                Mode
-              </th>
-              {heads.map(([head, unit]) => (
-                <th key={head} role="columnheader" scope="col" className={align(head)}>
-                  {head}
-                  {unit ? <span className="unit">{unit}</span> : null}
+        {modes.length === 0 ? (
+          <p className="m-0 text-table text-muted">None of its modes is in service.</p>
+        ) : (
+          <TableFrame caption={`Modes of ${name}`} phone="cards">
+            <thead role="rowgroup">
+              <tr role="row">
+                <th role="columnheader" scope="col">
+                  Mode
                 </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody role="rowgroup">
-            {modes
-              .filter((mode) => mode.instrument.id === instrument.id)
-              .map((mode) => (
-                <tr key={mode.slug} role="row">
-                  <th role="rowheader" scope="row">
-                    <TextLink href={pathOf(mode.slug)}>{mode.name}</TextLink>
+                {heads.map(([head, unit]) => (
+                  <th key={head} role="columnheader" scope="col" className={align(head)}>
+                    {head}
+                    {unit ? <span className="unit">{unit}</span> : null}
                   </th>
-                  {cellsOf(mode).map((text, index) => {
-                    const head = heads[index]?.[0] ?? ''
-                    return (
-                      <td key={head} role="cell" data-head={head} className={align(head)}>
-                        {text}
-                      </td>
-                    )
-                  })}
-                </tr>
+                ))}
+              </tr>
+            </thead>
+            <tbody role="rowgroup">
+              {modes.map((mode) => (
+                <ModeRow key={mode.slug} mode={mode} href={pathOf(mode.slug)} today={today} />
               ))}
-          </tbody>
-        </TableFrame>
+            </tbody>
+          </TableFrame>
+        )}
       </div>
     </section>
   ))

@@ -7,10 +7,14 @@ import { useActionFormState } from '@/components/forms/ActionFormContext'
 import { saveText } from '@/components/tables/saveText'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { TypedRow } from '@/lib/domain/facility/recordForm'
+import { formatNumber } from '@/lib/format'
 import { recordTableCsv, type TableKind } from '@/lib/domain/facility/rules'
+import { OtherPageMarks } from './OtherPageMarks'
 import { RecordTablePlot } from './RecordTablePlot'
 import { RecordTableRows } from './RecordTableRows'
+import { RowPages } from './RowPages'
 import { TableIntake } from './TableIntake'
+import { rowsAPage, useRowPages } from './useRowPages'
 
 export interface RecordTableProps {
   /** Field of the form: an array of rows. */
@@ -29,6 +33,7 @@ export function RecordTable({ name, kind, label, help, before, fileName }: Recor
   const { id: formId } = useActionFormState()
   const { control, getFieldState, formState, clearErrors } = useFormContext()
   const { fields, append, remove, replace } = useFieldArray({ control, name })
+  const pages = useRowPages(name, fields.length)
   const [isTaking, setTaking] = useState(false)
   const rows = (useWatch({ control, name }) ?? []) as TypedRow[]
   const { error } = getFieldState(name, formState)
@@ -51,14 +56,32 @@ export function RecordTable({ name, kind, label, help, before, fileName }: Recor
       ) : null}
       <div className="mt-3 grid gap-x-10 gap-y-6 xl:grid-cols-2">
         <div className="min-w-0">
-          <RecordTableRows name={name} kind={kind} keys={fields.map((row) => row.id)} onRemove={remove} />
+          <RowPages pages={pages} count={fields.length} />
+          <OtherPageMarks name={name} pages={pages} />
+          <RecordTableRows
+            key={pages.from}
+            name={name}
+            kind={kind}
+            keys={fields.slice(pages.from, pages.to).map((row) => row.id)}
+            first={pages.from}
+            onRemove={remove}
+          />
           <div className="mt-3 flex flex-wrap gap-x-5 gap-y-2 text-table">
-            <LinkLikeButton onClick={() => append({ at: '', value: '' })}>Add a row</LinkLikeButton>
+            <LinkLikeButton
+              onClick={() => {
+                append({ at: '', value: '' })
+                pages.show(fields.length)
+              }}
+            >
+              Add a row
+            </LinkLikeButton>
             <LinkLikeButton aria-expanded={isTaking} onClick={() => setTaking(!isTaking)}>
               Take it from a file
             </LinkLikeButton>
             <LinkLikeButton onClick={() => saveText(`${fileName}.csv`, recordTableCsv(kind, rows))}>
-              Keep it as CSV
+              {fields.length > rowsAPage
+                ? `Keep all ${formatNumber(fields.length)} rows as CSV`
+                : 'Keep it as CSV'}
             </LinkLikeButton>
           </div>
         </div>

@@ -11,16 +11,19 @@ import { columnWords, type TableKind } from '@/lib/domain/facility/rules'
 export interface RecordTableRowsProps {
   name: string
   kind: TableKind
-  /** Keys of the rows, in order. */
+  /** Keys of the rows shown, in order. */
   keys: readonly string[]
+  /** Which row of the table the first of them is, from 0. */
+  first: number
   onRemove: (index: number) => void
 }
 
 /** The rows of a table, each cell open; its message stands under it. */
-export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsProps) {
+export function RecordTableRows({ name, kind, keys, first, onRemove }: RecordTableRowsProps) {
   const { id: formId } = useActionFormState()
   const { register, getFieldState, formState, trigger } = useFormContext()
   const words = columnWords[kind]
+  const isBand = kind === 'extinction' || kind === 'dark-sky'
   const cell = (index: number, column: 'at' | 'value') => {
     const path = `${name}.${index}.${column}`
     const { error } = getFieldState(path, formState)
@@ -40,7 +43,7 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           size={8}
           autoComplete="off"
           spellCheck={false}
-          inputMode={kind !== 'throughput' && column === 'at' ? 'text' : 'decimal'}
+          inputMode={isBand && column === 'at' ? 'text' : 'decimal'}
           className={cellClasses({ wrong: Boolean(error) })}
         />
         {error?.message ? (
@@ -58,10 +61,11 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           <tr role="row">
             <th role="columnheader" scope="col">
               {words.at}
-              {kind === 'throughput' ? <span className="unit">Å</span> : null}
+              {isBand ? null : <span className="unit">{kind === 'throughput' ? 'Å' : 'degrees'}</span>}
             </th>
             <th role="columnheader" scope="col">
               {words.value}
+              {kind === 'horizon' ? <span className="unit">degrees</span> : null}
             </th>
             <th role="columnheader" scope="col">
               <span className="sr-only">Take out</span>
@@ -69,17 +73,20 @@ export function RecordTableRows({ name, kind, keys, onRemove }: RecordTableRowsP
           </tr>
         </thead>
         <tbody role="rowgroup">
-          {keys.map((key, index) => (
-            <tr key={key} role="row">
-              <td role="cell">{cell(index, 'at')}</td>
-              <td role="cell">{cell(index, 'value')}</td>
-              <td role="cell" className="is-right whitespace-nowrap">
-                <LinkLikeButton aria-label={`Take out row ${index + 1}`} onClick={() => onRemove(index)}>
-                  Take out
-                </LinkLikeButton>
-              </td>
-            </tr>
-          ))}
+          {keys.map((key, position) => {
+            const index = first + position
+            return (
+              <tr key={key} role="row">
+                <td role="cell">{cell(index, 'at')}</td>
+                <td role="cell">{cell(index, 'value')}</td>
+                <td role="cell" className="is-right whitespace-nowrap">
+                  <LinkLikeButton aria-label={`Take out row ${index + 1}`} onClick={() => onRemove(index)}>
+                    Take out
+                  </LinkLikeButton>
+                </td>
+              </tr>
+            )
+          })}
         </tbody>
       </TableFrame>
     </div>

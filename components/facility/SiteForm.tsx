@@ -1,14 +1,11 @@
 'use client'
 
 import type { FormAction } from '@/components/forms/actionFormTypes'
-import { NumberField } from '@/components/forms/NumberField'
-import { TextField } from '@/components/forms/TextField'
-import { SectionHeading } from '@/components/ui/SectionHeading'
 import { siteFields, type SiteTyped } from '@/lib/domain/facility/siteForm'
 import { siteRecordSchema, type SiteForm as Input } from '@/lib/domain/facility/siteSchema'
 import type { RecordUse } from '@/lib/domain/facility/types'
 import { RecordForm } from './RecordForm'
-import { RecordTable } from './RecordTable'
+import { SiteFields } from './SiteFields'
 import { useRecordForm } from './useRecordForm'
 
 export interface SiteFormProps {
@@ -20,8 +17,6 @@ export interface SiteFormProps {
   today: string
   action: FormAction<Input, { recordVersion: number }>
 }
-
-const three = 'grid gap-x-8 gap-y-6 sm:grid-cols-2 lg:grid-cols-3'
 
 /** A new version of a site's record. */
 export function SiteForm(props: SiteFormProps) {
@@ -40,48 +35,7 @@ export function SiteForm(props: SiteFormProps) {
       newestFrom={newestFrom}
       today={today}
     >
-      <SectionHeading title="Where it stands" dense />
-      <div className={three}>
-        <NumberField name="latitudeDeg" label="Latitude" help="North positive." unit="°" />
-        <NumberField name="longitudeDeg" label="Longitude" help="East positive." unit="°" />
-        <NumberField name="elevationM" label="Height" help="Above the sea." unit="m" />
-        <NumberField
-          name="lowestAltitudeDeg"
-          label="Lowest altitude"
-          help="Telescopes point no lower."
-          unit="°"
-        />
-        <TextField name="timeZone" label="Time zone" help="By its IANA name." width="medium" />
-        <NumberField
-          name="utcOffsetHours"
-          label="Offset from UTC"
-          help="The clock at the site, all year."
-          unit="h"
-        />
-      </div>
-      <SectionHeading title="Image quality at the zenith and 500 nm" dense />
-      <div className={three}>
-        <NumberField name="best10" label="Best tenth of nights" unit="″" />
-        <NumberField name="median" label="Median" unit="″" />
-        <NumberField name="worst90" label="Poorest tenth of nights" unit="″" />
-      </div>
-      <SectionHeading title="The air and the sky, band by band" dense />
-      <RecordTable
-        name="extinction"
-        kind="extinction"
-        label="Extinction"
-        help="Magnitudes an airmass; between bands the nearest counts."
-        before={typed.extinction}
-        fileName={`${slug}-extinction`}
-      />
-      <RecordTable
-        name="darkSky"
-        kind="dark-sky"
-        label="Dark sky"
-        help="At the zenith without a Moon, AB magnitudes a square arcsecond."
-        before={typed.darkSky}
-        fileName={`${slug}-dark-sky`}
-      />
+      <SiteFields before={typed} fileName={slug} />
     </RecordForm>
   )
 }

@@ -3,8 +3,16 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { HeldRecord } from '@/lib/domain/facility/heldRecord'
 import type { SiteFacts } from '@/lib/domain/facility/types'
-import { formatNumber, formatOffset, formatQuantity, formatSigned } from '@/lib/format'
+import {
+  formatCalendarDate,
+  formatNumber,
+  formatOffset,
+  formatPercent,
+  formatQuantity,
+  formatSigned,
+} from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { horizonInWords } from './horizonWords'
 import { nextInWords, stampInWords } from './recordWords'
 
 const byBand = (values: Record<string, number>, decimals: number) =>
@@ -24,6 +32,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
           <>
             <span>{stampInWords(site.now, site.now.validFrom)}</span>
             {site.next ? <span>{nextInWords(site.next)}</span> : null}
+            {site.retiredFrom ? <span>retires on {formatCalendarDate(site.retiredFrom)}</span> : null}
             <TextLink href={paths.facilityRecord('sites', site.slug)} aria-label={`Change ${site.name}`}>
               Change
             </TextLink>
@@ -38,6 +47,7 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
             { term: 'Height', value: formatQuantity(facts.elevationM, 0, 'm') },
             { term: 'Clock at the site', value: formatOffset(facts.utcOffsetHours) },
             { term: 'Lowest altitude', value: `${formatNumber(facts.lowestAltitudeDeg, 0)}°` },
+            { term: 'Horizon', value: horizonInWords(facts.horizon) },
           ]}
         />
         <Facts
@@ -45,6 +55,12 @@ export function SiteOverview({ site }: { site: HeldRecord<SiteFacts> }) {
             {
               term: 'Image quality at zenith, best tenth, median, poorest tenth',
               value: [best10, median, worst90].map((value) => `${formatNumber(value, 1)}″`).join(', '),
+            },
+            {
+              term: 'Nights lost to weather, January to December',
+              value: facts.weather
+                ? facts.weather.lostByMonth.map((share) => formatPercent(share)).join(', ')
+                : 'not on record',
             },
             { term: 'Extinction, mag an airmass', value: byBand(facts.extinctionMagPerAirmass, 2) },
             { term: 'Dark sky, AB mag arcsec⁻²', value: byBand(facts.darkSkyMagArcsec2, 1) },

@@ -15,6 +15,7 @@ const expected: Record<TableKind, string> = {
   throughput: 'wavelength, with its unit (Å, nm or µm), and efficiency',
   extinction: 'band and extinction',
   'dark-sky': 'band and sky',
+  horizon: 'azimuth, from north through east, and lowest altitude, both in degrees',
 }
 
 export interface TableIntakeProps {

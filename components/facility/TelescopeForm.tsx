@@ -1,11 +1,11 @@
 'use client'
 
 import type { FormAction } from '@/components/forms/actionFormTypes'
-import { NumberField } from '@/components/forms/NumberField'
 import type { RecordUse } from '@/lib/domain/facility/types'
 import { telescopeFields, type TelescopeTyped } from '@/lib/domain/facility/telescopeForm'
 import { telescopeRecordSchema, type TelescopeForm as Input } from '@/lib/domain/facility/telescopeSchema'
 import { RecordForm } from './RecordForm'
+import { TelescopeFields } from './TelescopeFields'
 import { useRecordForm } from './useRecordForm'
 
 export interface TelescopeFormProps {
@@ -35,15 +35,7 @@ export function TelescopeForm(props: TelescopeFormProps) {
       newestFrom={newestFrom}
       today={today}
     >
-      <div className="grid gap-x-8 gap-y-6 sm:grid-cols-2">
-        <NumberField name="apertureM" label="Aperture" help="Diameter of the primary." unit="m" />
-        <NumberField
-          name="collectingAreaM2"
-          label="Collecting area"
-          help="Without what stands in the light’s way."
-          unit="m²"
-        />
-      </div>
+      <TelescopeFields before={typed} fileName={slug} />
     </RecordForm>
   )
 }

@@ -58,7 +58,11 @@ export function useActionForm<Input extends FieldValues, Output, Data>({
       }
       const fields = Object.entries(result.fieldErrors)
       for (const [name, message] of fields) form.setError(name as Path<Input>, { type: 'server', message })
-      if (result.stale && onStale) onStale(result.stale)
+      if (result.stale && onStale) {
+        // The comparison says it all.
+        setFailure(null)
+        return onStale(result.stale)
+      }
       refused(fields.length > 0 ? null : failureOf(result))
     } catch (error) {
       // A redirect travels as a throw and belongs to the router.

@@ -1,6 +1,7 @@
 'use client'
 
 import { useQueryClient } from '@tanstack/react-query'
+import type { ReactNode } from 'react'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { useActionForm } from '@/components/forms/useActionForm'
@@ -17,12 +18,14 @@ export interface AwardFormProps {
   save: SaveAwardAction
   onSaved: () => void
   onLeave: () => void
+  /** What else can be done about it. */
+  children?: ReactNode
 }
 
 const typed = (seconds: number) => (seconds === 0 ? '' : String(Math.round((seconds / 3600) * 1000) / 1000))
 
 /** Gives one proposal its hours, line by line: whole, part or none, with conditions, in reserve or not. */
-export function AwardForm({ row, view, save, onSaved, onLeave }: AwardFormProps) {
+export function AwardForm({ row, view, save, onSaved, onLeave, children }: AwardFormProps) {
   const client = useQueryClient()
   const form = useActionForm({
     schema: awardSchema,
@@ -69,6 +72,7 @@ export function AwardForm({ row, view, save, onSaved, onLeave }: AwardFormProps)
           <LinkLikeButton onClick={onLeave}>Leave it</LinkLikeButton>
         </div>
       </ActionForm>
+      {children}
     </div>
   )
 }

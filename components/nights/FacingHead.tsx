@@ -11,6 +11,7 @@ const heads = [
   { id: 'suggested', words: 'Suggested, or why not', unit: 'h', side: 'text-right' },
   { id: 'rank', words: 'Rank, review number', unit: 'and title', side: '' },
   { id: 'given', words: 'Given', unit: 'h', side: '' },
+  { id: 'chance', words: 'Observed in full', unit: 'share of seasons', side: '' },
 ] as const
 
 /** The heads of the facing hours; on phones the order is chosen above instead. */

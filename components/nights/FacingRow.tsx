@@ -1,10 +1,14 @@
 import { HoursBar } from '@/components/charts/HoursBar'
 import { linkClasses } from '@/components/ui/linkClasses'
-import type { NightsLine, NightsRow } from '@/lib/domain/decisions/nightsView'
-import { hoursOf, termsInWords, whyNotInWords } from './nightsWords'
+import { Tag } from '@/components/ui/Tag'
+import { choiceMarks } from '@/lib/domain/decisions/choiceWords'
+import type { NightsLine } from '@/lib/domain/decisions/nightsView'
+import type { ShownRow } from './nightsColumns'
+import { hoursOf, standsInWords, termsInWords, whyNotInWords } from './nightsWords'
+import { OutlookMark } from './OutlookMark'
 
 export interface FacingRowProps {
-  row: NightsRow
+  row: ShownRow
   mostHours: number
   firstTelescope: number | undefined
   isOpen: boolean
@@ -13,7 +17,7 @@ export interface FacingRowProps {
 
 const barPx = 150
 const lineClasses =
-  'flex flex-wrap items-center gap-x-3 max-sm:justify-between max-sm:text-right max-sm:[&_svg]:hidden'
+  'flex flex-wrap items-center gap-x-3 max-sm:justify-between max-sm:text-right max-sm:[&>svg]:hidden'
 
 /** On phones the sides lie under each other and say which they are. */
 const Side = ({ children }: { children: string }) => <span className="text-muted sm:hidden">{children}</span>
@@ -43,9 +47,15 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
           <div key={line.instrumentId} className={`${lineClasses} justify-end`}>
             <Side>{`Suggested, ${line.instrument}`}</Side>
             {line.suggestedSeconds > 0 ? (
-              <Hours line={line} seconds={line.suggestedSeconds} />
+              <span>
+                <Hours line={line} seconds={line.suggestedSeconds} />
+                {standsInWords(line) ? <span className="text-lamp">{standsInWords(line)}</span> : null}
+              </span>
             ) : (
-              <span className="text-muted max-sm:ml-auto">{whyNotInWords(line)}</span>
+              <span className="text-muted max-sm:ml-auto">
+                {whyNotInWords(line)}
+                {standsInWords(line) ? <span className="text-lamp">{standsInWords(line)}</span> : null}
+              </span>
             )}
             {bar(line, line.suggestedSeconds, 'left')}
           </div>
@@ -65,7 +75,18 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
         ) : (
           <span className="shrink-0 font-semibold">{row.reviewNumber}</span>
         )}
-        <span className="text-muted">{row.title}</span>
+        <span className="text-muted">
+          {row.title}
+          {row.tried || row.choice ? (
+            <>
+              {' '}
+              <Tag>
+                {row.tried ? `tried: ${row.tried === 'rank' ? 'by rank' : choiceMarks[row.tried]}` : null}
+                {!row.tried && row.choice ? choiceMarks[row.choice.choice] : null}
+              </Tag>
+            </>
+          ) : null}
+        </span>
       </div>
       <div role="cell">
         {row.lines.map((line) => (
@@ -85,6 +106,14 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
                 none<span className="max-sm:hidden">, {line.instrument}</span>
               </span>
             )}
+          </div>
+        ))}
+      </div>
+      <div role="cell">
+        {row.lines.map((line, at) => (
+          <div key={line.instrumentId} className={lineClasses}>
+            <Side>{`Observed in full, ${line.instrument}`}</Side>
+            <OutlookMark outlook={row.outlooks[at] ?? null} />
           </div>
         ))}
       </div>

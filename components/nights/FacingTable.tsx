@@ -1,31 +1,46 @@
 'use client'
 
+import { useMemo } from 'react'
 import { TableTools } from '@/components/tables/TableTools'
 import { useRows } from '@/components/tables/useRows'
 import { useTableState } from '@/components/tables/useTableState'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import type { ChoiceOrRank } from '@/lib/domain/decisions/choiceWords'
 import type { NightsView } from '@/lib/domain/decisions/nightsView'
 import { AwardForm } from './AwardForm'
+import { ChoiceForm } from './ChoiceForm'
 import { FacingHead } from './FacingHead'
 import { FacingKey } from './FacingKey'
 import { FacingRow } from './FacingRow'
 import { NightsCsv } from './NightsCsv'
-import type { SaveAwardAction } from './nightsActions'
+import type { NightsActions } from './nightsActions'
 import { nightsChips, nightsColumns } from './nightsColumns'
+import type { Seasons } from './useSeasons'
 
 export interface FacingTableProps {
   view: NightsView
   openId: number | null
   /** Null where nothing can be given any more. */
   onOpen: ((proposalId: number | null) => void) | null
-  save: SaveAwardAction
+  actions: Pick<NightsActions, 'save' | 'choose'>
+  outlookOf: Seasons['outlookOf']
   onSaved: () => void
+  onTry: (proposalId: number, choice: ChoiceOrRank) => void
 }
 
 /** Hours suggested and hours given, facing each other; in the order of the ranking, the line among them. */
-export function FacingTable({ view, openId, onOpen, save, onSaved }: FacingTableProps) {
+export function FacingTable(props: FacingTableProps) {
+  const { view, openId, onOpen, actions, outlookOf, onSaved, onTry } = props
   const [state, setState] = useTableState('')
-  const shown = useRows(view.rows, nightsColumns, nightsChips, state)
+  const rows = useMemo(
+    () =>
+      view.rows.map((row) => ({
+        ...row,
+        outlooks: row.lines.map((line) => outlookOf(row.proposalId, line.instrumentId)),
+      })),
+    [view.rows, outlookOf],
+  )
+  const shown = useRows(rows, nightsColumns, nightsChips, state)
   const change = (next: Partial<typeof state>) => void setState(next)
   const most = Math.max(
     1,
@@ -39,7 +54,7 @@ export function FacingTable({ view, openId, onOpen, save, onSaved }: FacingTable
         find="Number, title or instrument"
         chips={nightsChips}
         columns={nightsColumns}
-        rows={view.rows}
+        rows={rows}
         shown={shown}
         state={state}
         onChange={change}
@@ -63,15 +78,22 @@ export function FacingTable({ view, openId, onOpen, save, onSaved }: FacingTable
               />
               {openId === row.proposalId ? (
                 <div role="row">
-                  <div role="cell" aria-colspan={3}>
+                  <div role="cell" aria-colspan={4}>
                     <AwardForm
                       key={row.decisionVersion}
                       row={row}
                       view={view}
-                      save={save}
+                      save={actions.save}
                       onSaved={onSaved}
                       onLeave={() => onOpen?.(null)}
-                    />
+                    >
+                      <ChoiceForm
+                        row={row}
+                        panelId={view.panelId}
+                        choose={actions.choose}
+                        onTry={(choice) => onTry(row.proposalId, choice)}
+                      />
+                    </AwardForm>
                   </div>
                 </div>
               ) : null}

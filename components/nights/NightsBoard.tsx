@@ -2,47 +2,64 @@
 
 import { parseAsStringLiteral, useQueryState } from 'nuqs'
 import { useState } from 'react'
-import { useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
 import { useTableQuery } from '@/components/tables/useTableQuery'
-import { Button } from '@/components/ui/Button'
+import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkButton } from '@/components/ui/LinkButton'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { PageTitle } from '@/components/ui/PageTitle'
-import { showToast } from '@/components/ui/showToast'
+import { conflictInWords } from '@/lib/domain/decisions/mustWords'
 import { nightsView, type NightsView } from '@/lib/domain/decisions/nightsView'
-import { nightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
-import { countInWords } from '@/lib/format'
+import { nightsPolicy } from '@/lib/domain/decisions/policyWords'
 import { paths } from '@/lib/paths'
 import { FacingTable } from './FacingTable'
-import type { SaveAwardAction, TakePlanAction } from './nightsActions'
+import type { NightsActions } from './nightsActions'
 import { OfferedHours } from './OfferedHours'
-import { PolicyCard } from './PolicyCard'
+import { PlanFiles } from './PlanFiles'
+import { PolicyChoice } from './PolicyChoice'
 import { SeasonCellsKey } from './SeasonCellsKey'
+import { SeasonsNote } from './SeasonsNote'
+import { TrialForm } from './TrialForm'
+import { TrialNote } from './TrialNote'
+import { useSeasons } from './useSeasons'
+import { useTrial } from './useTrial'
 
 export interface NightsBoardProps {
   initial: NightsView
-  save: SaveAwardAction
-  takePlan: TakePlanAction
+  /** What the page was rendered with, as it stands in the address. */
+  initialTrial?: string
+  actions: NightsActions
 }
 
 /** The ranking laid into the hours on offer: a suggestion, what is given, and the running total against the offer. */
-export function NightsBoard({ initial, save, takePlan }: NightsBoardProps) {
+export function NightsBoard({ initial, initialTrial = '', actions }: NightsBoardProps) {
   const [policy, setPolicy] = useQueryState(
     'policy',
     parseAsStringLiteral(nightsPolicy.options).withDefault('rank'),
   )
-  const { data } = useTableQuery({
-    key: ['panel', 'nights', initial.panelId, policy],
-    url: `${paths.api.table('panel-nights')}?call=${initial.callSlug}&panel=${initial.panelId}&policy=${policy}`,
+  const { text, trial, onTry } = useTrial()
+  const query = new URLSearchParams({
+    ...{ call: initial.callSlug, panel: String(initial.panelId), policy },
+    ...(text ? { trial: text } : {}),
+  })
+  const { data, isFetching } = useTableQuery({
+    key: ['panel', 'nights', initial.panelId, policy, text],
+    url: `${paths.api.table('panel-nights')}?${query}`,
     schema: nightsView,
-    initialData: policy === initial.policy ? initial : undefined,
+    initialData: policy === initial.policy && text === initialTrial ? initial : undefined,
   })
   const view = data ?? initial
-  const { busy, deed } = useDeed()
   const panelPath = usePanelPath(view.callSlug)
   const [open, setOpen] = useState<number | null>(null)
-  const offered = view.telescopes.reduce((sum, { offeredSeconds }) => sum + offeredSeconds, 0)
+  const [isTrying, setTrying] = useState(false)
+  const isGiven = view.rows.some(({ lines }) => lines.some(({ givenSeconds }) => givenSeconds > 0))
+  const [chosenOf, setOf] = useState<'suggested' | 'given' | null>(null)
+  const of = isGiven ? (chosenOf ?? (trial ? 'suggested' : 'given')) : 'suggested'
+  const seasons = useSeasons({
+    ...{ callSlug: view.callSlug, panelId: view.panelId, of, policy, trial: text },
+    isOn: view.hasRanking && view.rows.length > 0 && view.telescopes.length > 0,
+  })
   const canGive = view.hasRanking && view.phase !== 'decided' && view.phase !== 'archived'
   return (
     <>
@@ -53,52 +70,80 @@ export function NightsBoard({ initial, save, takePlan }: NightsBoardProps) {
           view.hasRanking ? <LinkButton href={panelPath('decisions')}>Go on to decisions</LinkButton> : null
         }
       />
-      <div className="mt-6 grid gap-x-16 gap-y-8 md:grid-cols-2">
-        {view.telescopes.map((telescope) => (
-          <OfferedHours key={telescope.id} telescope={telescope} seasonFrom={view.seasonFrom} />
-        ))}
-      </div>
-      <SeasonCellsKey />
-      {view.hasRanking ? (
+      {view.telescopes.length === 0 ? (
+        <div className="mt-6">
+          <BarNote tone="lamp">
+            The call has no nights for science yet, so there is nothing to give. The office enters them in the
+            night calendar of the call.
+          </BarNote>
+        </div>
+      ) : (
         <>
-          <div className="mt-10 grid gap-x-16 gap-y-8 md:grid-cols-2">
-            {view.policies.map((summary) => (
-              <PolicyCard
-                key={summary.policy}
-                summary={summary}
-                offeredSeconds={offered}
-                isShown={summary.policy === view.policy}
-                onShow={() => void setPolicy(summary.policy)}
-              >
-                {canGive && summary.policy === view.policy ? (
-                  <Button
-                    look="secondary"
-                    busy={busy === 'plan'}
-                    busyWord="Taking over"
-                    onClick={() =>
-                      deed(
-                        'plan',
-                        () => takePlan({ panelId: view.panelId, policy: view.policy }),
-                        ({ awarded }) =>
-                          showToast(
-                            `${countInWords(awarded, 'proposal is', 'proposals are', true)} given the hours suggested`,
-                          ),
-                      )
-                    }
-                  >
-                    Take the suggestion over
-                  </Button>
-                ) : null}
-              </PolicyCard>
+          <div className="mt-6 grid gap-x-16 gap-y-8 md:grid-cols-2">
+            {view.telescopes.map((telescope) => (
+              <OfferedHours
+                key={telescope.id}
+                telescope={telescope}
+                view={view}
+                hold={canGive && !trial ? actions.hold : null}
+              />
             ))}
           </div>
+          <SeasonCellsKey />
+        </>
+      )}
+      {view.hasRanking ? (
+        <>
+          <section aria-label="Try it otherwise" className="mt-8" aria-busy={isFetching || undefined}>
+            {view.conflict.length > 0 ? (
+              <div className="mb-6">
+                <BarNote tone="not-feasible">{conflictInWords(view.conflict)}</BarNote>
+              </div>
+            ) : null}
+            {view.isTrial && trial ? (
+              <TrialNote
+                key={`${text} ${view.policy}`}
+                {...{ view, trial }}
+                canTake={canGive}
+                takePlan={actions.takePlan}
+                onLeave={() => onTry(undefined)}
+              />
+            ) : null}
+            {isTrying ? (
+              <div className="mt-6">
+                <TrialForm key={text} {...{ view, trial, onTry }} onLeave={() => setTrying(false)} />
+              </div>
+            ) : (
+              <p className="mt-4 mb-0 text-table">
+                <LinkLikeButton onClick={() => setTrying(true)}>
+                  Try other weather, other nights or other hours held back
+                </LinkLikeButton>
+              </p>
+            )}
+          </section>
+          <PolicyChoice
+            view={view}
+            takePlan={canGive && !view.isTrial ? actions.takePlan : null}
+            onShow={(next) => void setPolicy(next)}
+          />
+          <SeasonsNote seasons={seasons} of={of} onOf={isGiven ? setOf : null} />
           <FacingTable
             view={view}
             openId={open}
             onOpen={canGive ? setOpen : null}
-            save={save}
+            actions={actions}
+            outlookOf={seasons.outlookOf}
             onSaved={() => setOpen(null)}
+            onTry={(proposalId, choice) => {
+              setOpen(null)
+              onTry({ ...trial, choices: { ...trial?.choices, [proposalId]: choice } })
+            }}
           />
+          {isGiven ? (
+            <div className="mt-6">
+              <PlanFiles hrefOf={(file) => paths.panelPlan(view.callSlug, file, view.panelId)} />
+            </div>
+          ) : null}
         </>
       ) : (
         <div className="mt-10">

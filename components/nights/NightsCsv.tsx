@@ -2,8 +2,10 @@
 
 import { saveText } from '@/components/tables/saveText'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
-import type { NightsRow } from '@/lib/domain/decisions/nightsView'
-import { csvText } from '@/lib/format'
+import { choiceMarks } from '@/lib/domain/decisions/choiceWords'
+import type { AwardOutlook } from '@/lib/panel/nights/seasonTypes'
+import { csvText, type CsvValue } from '@/lib/format'
+import type { ShownRow } from './nightsColumns'
 
 const head = [
   'Rank',
@@ -18,13 +20,31 @@ const head = [
   'Reserve',
   'Service',
   'Conditions',
+  'Laid down',
+  'Why',
+  'Observed in full (share of seasons)',
+  'At least',
+  'At most',
+  'Poorest tenth of seasons (h)',
+  'Middle season (h)',
+  'Best tenth of seasons (h)',
 ]
 
 export interface NightsCsvProps {
   callNumber: number
   /** The proposals shown, in their order. */
-  rows: readonly NightsRow[]
+  rows: readonly ShownRow[]
 }
+
+const outlookCells = (outlook: AwardOutlook | null): CsvValue[] =>
+  outlook
+    ? [
+        ...[outlook.chance, outlook.low, outlook.high].map((share) => Number(share.toFixed(4))),
+        ...[outlook.seconds10, outlook.seconds50, outlook.seconds90].map((seconds) =>
+          Number((seconds / 3600).toFixed(2)),
+        ),
+      ]
+    : ['', '', '', '', '', '']
 
 /** The hours as a file, a line for each instrument. */
 export function NightsCsv({ callNumber, rows }: NightsCsvProps) {
@@ -34,7 +54,7 @@ export function NightsCsv({ callNumber, rows }: NightsCsvProps) {
       csvText(
         head,
         rows.flatMap((row) =>
-          row.lines.map((line) => [
+          row.lines.map((line, at) => [
             row.rank,
             row.reviewNumber,
             row.title,
@@ -47,6 +67,9 @@ export function NightsCsv({ callNumber, rows }: NightsCsvProps) {
             line.isReserve ? 'yes' : 'no',
             line.service,
             line.conditions,
+            row.choice ? choiceMarks[row.choice.choice] : '',
+            row.choice?.reason ?? '',
+            ...outlookCells(row.outlooks[at] ?? null),
           ]),
         ),
       ),

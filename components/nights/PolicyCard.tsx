@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react'
 import { KeyFigure } from '@/components/ui/KeyFigure'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
-import { policyNames, type NightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
+import { policyNames, type NightsPolicy } from '@/lib/domain/decisions/policyWords'
 import type { PolicySummary } from '@/lib/domain/decisions/policySummary'
 import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
 

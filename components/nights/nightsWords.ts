@@ -1,5 +1,5 @@
-import type { NightsLine } from '@/lib/domain/decisions/nightsView'
-import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
+import type { NightsLine, NightsView } from '@/lib/domain/decisions/nightsView'
+import { formatHoursFromSeconds, formatNumber, formatPercent } from '@/lib/format'
 
 /** `92.0`, or `13.5 of 27.0` in part. */
 export function hoursOf(line: Pick<NightsLine, 'wholeSeconds'>, seconds: number): string {
@@ -22,6 +22,7 @@ function displacedInWords(displaces: NonNullable<NightsLine['whyNot']>['displace
 export function whyNotInWords(line: Pick<NightsLine, 'whyNot' | 'leastSeconds' | 'assessment'>): string {
   if (!line.whyNot) return 'only together with its other instrument'
   if (line.whyNot.reason === 'set-aside') return 'set aside'
+  if (line.whyNot.reason === 'never') return 'never, as laid down'
   if (line.whyNot.reason === 'not-possible')
     return `assessed as not possible${line.assessment ? `: ${line.assessment.reason}` : ''}`
   const left = line.whyNot.left < 180 ? 'nothing' : formatHoursFromSeconds(line.whyNot.left)
@@ -36,4 +37,29 @@ export function termsInWords(line: Pick<NightsLine, 'isReserve' | 'service' | 'c
     .filter(Boolean)
     .map((term) => `, ${term}`)
     .join('')
+}
+
+/** While something is tried, what the line has as things stand, where that differs: `, was 12.0`. */
+export function standsInWords(line: Pick<NightsLine, 'standsSeconds' | 'suggestedSeconds'>): string {
+  if (line.standsSeconds === null || line.standsSeconds === line.suggestedSeconds) return ''
+  return `, was ${line.standsSeconds === 0 ? 'none' : formatNumber(line.standsSeconds / 3600, 1)}`
+}
+
+/** `65.3 h to plan with: 22 % lost to weather, 10.0 h held back for the director.` */
+export function plannedInWords(
+  telescope: Pick<NightsView['telescopes'][number], 'plannedSeconds' | 'heldSeconds' | 'heldReason'>,
+  weather: NightsView['weather'],
+): string {
+  const { plannedSeconds, heldSeconds, heldReason } = telescope
+  const lost =
+    weather.lostShare > 0
+      ? `${formatPercent(weather.lostShare)} of the dark time lost to weather`
+      : weather.isRecorded
+        ? 'no weather counted'
+        : 'no weather on record'
+  const held =
+    heldSeconds > 0
+      ? `, ${formatHoursFromSeconds(heldSeconds)} held back${heldReason ? `: ${heldReason}` : '.'}`
+      : '.'
+  return `${formatHoursFromSeconds(plannedSeconds)} to plan with: ${lost}${held}`
 }

@@ -5,6 +5,8 @@ import { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { NumberField } from '@/components/forms/NumberField'
 import { RadioField } from '@/components/forms/RadioField'
+import { ChooseByField } from '@/components/forms/stale/ChooseByField'
+import { useOpenedOver } from '@/components/forms/stale/useOpenedOver'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
@@ -16,6 +18,7 @@ import type { SiteRecord } from '@/lib/domain/facility/types'
 import type { ConstraintSet } from '@/lib/domain/proposals/types'
 import { formatNumber } from '@/lib/format'
 import type { ObservationActions } from './observationActions'
+import { conditionLabels } from './conditionLabels'
 
 export interface ConstraintFormProps {
   reference: string
@@ -44,12 +47,15 @@ const formSchema = z.object({ set: constraintSchema })
 /** The poorest conditions one accepts, in plain fields: what is computed is planned for just these. */
 export function ConstraintForm(props: ConstraintFormProps) {
   const { reference, site, seasonFrom, seasonTo, set, save, onDone } = props
+  const opened = useOpenedOver({
+    version: set?.version ?? 0,
+    values: constraintRow(set ?? { ...defaultConstraints, name: 'Other conditions' }),
+  })
   const form = useActionForm({
     schema: formSchema,
-    action: (values) => save({ reference, id: set?.id ?? null, version: set?.version ?? 0, set: values.set }),
-    defaultValues: {
-      set: constraintRow(set ?? { ...defaultConstraints, name: 'Other conditions' }),
-    },
+    action: (values) => save({ reference, id: set?.id ?? null, version: opened.version, set: values.set }),
+    defaultValues: { set: constraintRow(set ?? { ...defaultConstraints, name: 'Other conditions' }) },
+    onStale: opened.onStale,
     onDone: () => {
       showToast('Conditions saved')
       onDone()
@@ -60,12 +66,23 @@ export function ConstraintForm(props: ConstraintFormProps) {
   const seeing = (value: number) => `${formatNumber(value, 1)}″`
   return (
     <ActionForm form={form} label={`Conditions: ${name}`}>
+      {opened.stale ? (
+        <ChooseByField
+          stale={opened.stale}
+          versions={opened.versions(form.form.getValues('set'))}
+          labels={conditionLabels}
+          onChoose={(chosen) => {
+            opened.settle()
+            form.form.reset({ set: chosen })
+          }}
+        />
+      ) : null}
       <div className="grid gap-x-8 gap-y-6 md:grid-cols-2 lg:grid-cols-3">
         <TextField name="set.name" label="Name" maxLength={120} />
         <NumberField
           name="set.maxAirmass"
           label="Highest airmass"
-          help={`1 is the zenith; the telescopes reach ${formatNumber(site.lowestAltitudeDeg)}° of altitude.`}
+          help={`1 is the zenith; the telescopes reach ${formatNumber(site.lowestAltitudeDeg)}° of altitude${site.horizon.length > 0 ? ', or the horizon of the site' : ''}.`}
         />
         <NumberField
           name="set.imageQuality"

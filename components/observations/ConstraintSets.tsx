@@ -44,7 +44,7 @@ export function ConstraintSets({ contents, readOnly, save }: ConstraintSetsProps
           return (
             <li key={set.id} className="border-b border-rule py-4">
               {open === set.id ? (
-                <ConstraintForm {...shared} key={set.version} set={set} />
+                <ConstraintForm {...shared} set={set} />
               ) : (
                 <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 text-table">
                   <span>

@@ -69,6 +69,7 @@ export function FeasibilityReport({
     to: seasonTo,
     maxAirmass,
     twilightLimitDeg: mode?.twilightLimitDeg ?? -18,
+    telescope: mode?.telescope,
   }
   const view = seasonView(contents.site, season, target)
   const clear = computed.checks.filter(({ verdict }) => verdict === 'feasible').length
@@ -137,6 +138,7 @@ export function FeasibilityReport({
           site={contents.site}
           view={view}
           maxAirmass={maxAirmass}
+          telescope={mode?.telescope}
           fileName={`season-${fileName}`}
         />
       ) : null}

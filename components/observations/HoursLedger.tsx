@@ -11,11 +11,14 @@ function flipSentence({ own, cosmologies, errors }: HoursHangOn, askedSeconds: n
         ? 'Not by cosmology: the verdict is the same under every current one.'
         : `By cosmology: another verdict under ${formatList(flipped)}.`
   if (errors.length === 0) return `${byCosmology} The target states no errors to try.`
+  const drawn = errors.find(({ tried, flips }) => tried > 2 && flips > 0)
+  const share = drawn ? ` The verdict is another one in ${drawn.flips} of ${drawn.tried} draws.` : ''
   const over = errors.filter(({ high }) => high === null || high > askedSeconds)
   const worst = over.at(-1)
-  if (!worst) return `${byCosmology} Nor by the errors of the target: all of them fit in the hours asked.`
+  if (!worst)
+    return `${byCosmology} Nor by the errors of the target: all of them fit in the hours asked.${share}`
   const reach = worst.high === null ? 'is not reached at all' : `needs ${formatHoursFromSeconds(worst.high)}`
-  return `${byCosmology} By the target: at the far end of ${worst.name} it ${reach}.`
+  return `${byCosmology} By the target: at the far end of ${worst.name} it ${reach}.${share}`
 }
 
 export interface HoursLedgerProps {

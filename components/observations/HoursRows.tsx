@@ -8,6 +8,7 @@ interface Row {
   low: number | null
   high: number | null
   isSpan: boolean
+  exponentOfSize?: number | null
 }
 
 function rowsOf(
@@ -61,7 +62,14 @@ export function HoursRows({ hangOn, cosmologyName, askedSeconds }: HoursRowsProp
           <p className="m-0 mb-1 text-tick text-muted">{title}</p>
           {rows.map((row) => (
             <div key={row.name} className="flex items-center gap-x-4 text-caption">
-              <span className="w-40 shrink-0 max-sm:w-28">{row.name}</span>
+              <span className="w-40 shrink-0 max-sm:w-28">
+                {row.name}
+                {row.exponentOfSize ? (
+                  <span className="block text-tick text-muted">
+                    open time as size<sup>{formatNumber(row.exponentOfSize, 1)}</sup>
+                  </span>
+                ) : null}
+              </span>
               <HoursMark
                 low={row.low === null ? null : share(row.low)}
                 high={row.high === null ? null : share(row.high)}

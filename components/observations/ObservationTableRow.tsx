@@ -65,6 +65,15 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
 
   useEffect(() => onTyped(kept.id, typed), [kept.id, typed, onTyped])
 
+  // Keys of rows say nothing to a reader.
+  const say = (cell: keyof ObservationRow, value: unknown): string => {
+    const named = {
+      targetId: contents.targets.find(({ id }) => id === Number(value))?.name,
+      modeId: contents.modes.find(({ modeId }) => modeId === Number(value))?.name,
+      constraintSetId: contents.constraintSets.find(({ id }) => id === Number(value))?.name,
+    }
+    return (cell in named ? named[cell as keyof typeof named] : null) ?? (String(value ?? '') || 'nothing')
+  }
   const chosen = () => {
     const next = contents.modes.find(({ modeId }) => modeId === Number(form.getValues('modeId')))
     const per = form.getValues('snrPer')
@@ -196,7 +205,7 @@ export function ObservationTableRow(props: ObservationTableRowProps) {
         <tr role="row" className={classNames('is-detail', isWrong && 'is-attention')}>
           <td role="cell" colSpan={columns}>
             {computed?.refusal ? <p className="m-0 text-not-feasible">{computed.refusal}</p> : null}
-            <RowMessages id={messageId} row={row} cellNames={observationCellNames} />
+            <RowMessages id={messageId} row={row} cellNames={observationCellNames} say={say} />
           </td>
         </tr>
       ) : null}

@@ -5,8 +5,10 @@ import { seasonMoons } from '@/components/charts/seasonMoons'
 import type { SeasonNote } from '@/components/charts/seasonTypes'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { SeasonView } from '@/lib/domain/observations/rules'
-import type { SiteRecord } from '@/lib/domain/facility/types'
+import { pointingOf } from '@/lib/domain/facility/rules'
+import type { SiteRecord, TelescopePointing } from '@/lib/domain/facility/types'
 import { formatCalendarDate, formatHours, formatOffset } from '@/lib/format'
+import { limitWords } from '@/lib/science/feasibility'
 
 export interface ReportSeasonProps {
   title: string
@@ -14,6 +16,8 @@ export interface ReportSeasonProps {
   site: SiteRecord
   view: SeasonView
   maxAirmass: number
+  /** Whose horizon and blind spot count besides the site's. */
+  telescope?: TelescopePointing | undefined
   /** Why it is never up, where it is not. */
   never?: string | null
   fileName: string
@@ -39,11 +43,12 @@ function notesOf(view: SeasonView): SeasonNote[] {
 
 /** When a target is up: every night of the season, its twilight, its Moon and the target's window. */
 export function ReportSeason(props: ReportSeasonProps) {
-  const { title, name, site, view, maxAirmass, never, fileName } = props
+  const { title, name, site, view, maxAirmass, telescope, never, fileName } = props
   const { grid, phases } = view
   const first = grid.nights[0]?.night.date ?? ''
   const up = view.byNight.filter((hours) => hours > 0).length
-  const counted = `${name} is up in the dark above airmass ${maxAirmass} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
+  const limits = limitWords(pointingOf(site, telescope))
+  const counted = `${name} is up in the dark above airmass ${maxAirmass}${limits && `${limits},`} for ${formatHours(view.totalHours)} on ${up} of ${grid.nights.length} nights.`
   const label = never ?? counted
   return (
     <section>

@@ -1,43 +1,26 @@
 'use client'
 
-import { useWatch } from 'react-hook-form'
+import { useQueryClient } from '@tanstack/react-query'
 import type { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
-import { RadioField } from '@/components/forms/RadioField'
-import { SelectField } from '@/components/forms/SelectField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { showToast } from '@/components/ui/showToast'
 import { inviteSchema } from '@/lib/domain/invitations/schema'
+import { officePeopleKey } from './officePeopleKey'
+import { RoleScopeFields, type RoleChoices } from './RoleScopeFields'
 
 type Input = z.input<typeof inviteSchema>
 
-interface Choice {
-  value: string
-  label: string
+interface InviteFormProps extends RoleChoices {
+  action: FormAction<Input, { sentence: string }>
 }
-
-interface InviteFormProps {
-  action: FormAction<Input, unknown>
-  panels: Choice[]
-  instruments: Choice[]
-}
-
-const roles = [
-  { value: 'reviewer', label: 'Reviewer', help: 'reads and scores for a panel' },
-  { value: 'chair', label: 'Chair', help: 'assigns, ranks and decides for a panel' },
-  {
-    value: 'instrument-scientist',
-    label: 'Instrument scientist',
-    help: 'assesses requests on an instrument',
-  },
-  { value: 'office', label: 'Office', help: 'runs the calls' },
-]
 
 /** Name, address and role; what the role is for is asked once the role is known. */
 export function InviteForm({ action, panels, instruments }: InviteFormProps) {
+  const client = useQueryClient()
   const form = useActionForm({
     schema: inviteSchema,
     action,
@@ -47,29 +30,19 @@ export function InviteForm({ action, panels, instruments }: InviteFormProps) {
       role: 'reviewer',
       panelId: panels[0]?.value ?? '',
       instrumentId: instruments[0]?.value ?? '',
+      untilAt: '',
     },
-    onDone: () => {
-      showToast(`Invitation on its way to ${form.form.getValues('email')}`)
+    onDone: ({ sentence }) => {
+      showToast(sentence)
       form.form.reset()
+      void client.invalidateQueries({ queryKey: officePeopleKey })
     },
   })
-  const role = useWatch({ control: form.form.control, name: 'role' })
   return (
-    <ActionForm form={form}>
+    <ActionForm form={form} label="Invite somebody">
       <TextField name="name" label="Name" help="As the letter greets them" />
       <TextField name="email" label="E-mail" type="email" inputMode="email" />
-      <RadioField name="role" label="Role" options={roles} />
-      {role === 'reviewer' || role === 'chair' ? (
-        <SelectField name="panelId" label="Panel" options={panels} placeholder="Choose a panel" />
-      ) : null}
-      {role === 'instrument-scientist' ? (
-        <SelectField
-          name="instrumentId"
-          label="Instrument"
-          options={instruments}
-          placeholder="Choose an instrument"
-        />
-      ) : null}
+      <RoleScopeFields panels={panels} instruments={instruments} />
       <div>
         <SubmitButton busyWord="Inviting">Send the invitation</SubmitButton>
       </div>

@@ -7,25 +7,21 @@ import type { TableColumn } from '@/components/tables/tableColumn'
 import { useTableQuery } from '@/components/tables/useTableQuery'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { TextLink } from '@/components/ui/TextLink'
 import { showToast } from '@/components/ui/showToast'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { lettersReply, type LetterRow, type LettersReply } from '@/lib/domain/outbox/schema'
+import { mayBeTriedNow } from '@/lib/domain/outbox/rules'
 import { ABSENT, formatUtcInstant } from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { letterStands } from './letterStands'
 
 const Retry = createContext<((letter: LetterRow) => void) | null>(null)
 const key = ['office-letters'] as const
 
-const stands: Record<LetterRow['state'], string> = {
-  queued: 'waiting',
-  sending: 'being sent',
-  sent: 'sent',
-  parked: 'set aside',
-}
-
 function RetryButton({ letter }: { letter: LetterRow }) {
   const retry = useContext(Retry)
-  if (letter.state === 'sent' || letter.state === 'sending') return null
+  if (!mayBeTriedNow(letter)) return null
   return (
     <LinkLikeButton onClick={() => retry?.(letter)} aria-label={`Send the letter to ${letter.toName} now`}>
       Send now
@@ -34,7 +30,12 @@ function RetryButton({ letter }: { letter: LetterRow }) {
 }
 
 const columns: TableColumn<LetterRow>[] = [
-  { id: 'subject', head: 'Letter', value: (row) => row.subject },
+  {
+    id: 'subject',
+    head: 'Letter',
+    value: (row) => row.subject,
+    cell: (row) => <TextLink href={paths.officeLetter(row.id)}>{row.subject}</TextLink>,
+  },
   { id: 'to', head: 'To', value: (row) => row.toName || row.toEmail },
   { id: 'email', head: 'Address', value: (row) => row.toEmail },
   {
@@ -43,7 +44,7 @@ const columns: TableColumn<LetterRow>[] = [
     value: (row) => row.createdAt,
     cell: (row) => formatUtcInstant(new Date(row.createdAt)),
   },
-  { id: 'state', head: 'Stands', value: (row) => stands[row.state] },
+  { id: 'state', head: 'Stands', value: (row) => letterStands[row.state] },
   { id: 'tries', head: 'Tries', align: 'right', value: (row) => row.attempts },
   {
     id: 'error',
@@ -86,11 +87,12 @@ export function LettersTable({
         chips={[
           { id: 'waiting', label: 'Waiting', matches: (row) => row.state === 'queued' },
           { id: 'aside', label: 'Set aside', matches: (row) => row.state === 'parked' },
+          { id: 'refused', label: 'Address refused', matches: (row) => row.state === 'bounced' },
           { id: 'sent', label: 'Sent', matches: (row) => row.state === 'sent' },
         ]}
         csv="letters"
         page={50}
-        tone={(row) => (row.state === 'parked' ? 'not-feasible' : null)}
+        tone={(row) => (row.state === 'parked' || row.state === 'bounced' ? 'not-feasible' : null)}
         empty={
           <EmptyState title="No letter yet">Letters appear here as soon as they are written.</EmptyState>
         }

@@ -6,6 +6,8 @@ import { fetchJson } from '@/components/tables/fetchJson'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { Button } from '@/components/ui/Button'
 import { logbookReply, type LogbookReply, type LogbookTableRow } from '@/lib/domain/logbook/schema'
+import { EmptyState } from '@/components/ui/EmptyState'
+import { TextLink } from '@/components/ui/TextLink'
 import { formatNumber, formatUtcInstant } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { LoggedValue } from './LoggedValue'
@@ -43,17 +45,22 @@ const columns: TableColumn<LogbookTableRow>[] = [
   { id: 'address', head: 'From', value: (row) => row.address },
 ]
 
+interface LogbookTableProps {
+  initial: LogbookReply
+  /** The filter as it stands in the address, `who=maud&action=invite`. */
+  filter: string
+}
+
 /** The logbook, five hundred rows at a time. */
-export function LogbookTable({ initial }: { initial: LogbookReply }) {
+export function LogbookTable({ initial, filter }: LogbookTableProps) {
   const query = useInfiniteQuery({
-    queryKey: ['office-logbook'],
+    queryKey: ['office-logbook', filter],
     initialPageParam: '',
-    queryFn: ({ pageParam, signal }) =>
-      fetchJson(
-        `${paths.api.table('office-logbook')}${pageParam ? `?before=${pageParam}` : ''}`,
-        logbookReply,
-        signal,
-      ),
+    queryFn: ({ pageParam, signal }) => {
+      const asked = new URLSearchParams(filter)
+      if (pageParam) asked.set('before', pageParam)
+      return fetchJson(`${paths.api.table('office-logbook')}?${asked}`, logbookReply, signal)
+    },
     getNextPageParam: (last) => (last.hasMore ? String(last.rows.at(-1)?.id ?? '') : undefined),
     initialData: { pages: [initial], pageParams: [''] },
   })
@@ -65,10 +72,17 @@ export function LogbookTable({ initial }: { initial: LogbookReply }) {
         columns={columns}
         rows={rows}
         rowId={(row) => String(row.id)}
-        find="Who, what or of what"
-        chips={[{ id: 'deeds', label: 'Without signing in', matches: (row) => row.action !== 'sign-in' }]}
-        csv="logbook"
         page={50}
+        empty={
+          <EmptyState title="No row like this">
+            Nothing in the logbook fits. Take something out of what you ask for.
+          </EmptyState>
+        }
+        actions={
+          <TextLink href={`${paths.api.table('office-logbook')}/file?${filter}`} download>
+            All these rows as CSV
+          </TextLink>
+        }
         phone="cards"
       />
       {query.hasNextPage ? (
@@ -81,7 +95,7 @@ export function LogbookTable({ initial }: { initial: LogbookReply }) {
           >
             Read further back
           </Button>
-          <span className="text-muted">{`The newest ${formatNumber(rows.length)} rows are read; search and file hold these.`}</span>
+          <span className="text-muted">{`The newest ${formatNumber(rows.length)} rows are read so far.`}</span>
         </div>
       ) : null}
     </>

@@ -9,6 +9,7 @@ import type { FormAction } from '@/components/forms/actionFormTypes'
 import { officePeopleReply, type OfficePeopleReply } from '@/lib/domain/people/officeSchema'
 import { paths } from '@/lib/paths'
 import { OfficeSteps, type OfficeStep } from './OfficeStep'
+import { officePeopleKey } from './officePeopleKey'
 import { invitationColumns, peopleColumns } from './peopleColumns'
 
 interface PeopleTableProps {
@@ -19,13 +20,11 @@ interface PeopleTableProps {
   takeBack: FormAction<{ invitationId: number }, unknown>
 }
 
-const key = ['office-people'] as const
-
 /** Accounts and open invitations, with what the office can do to each. */
 export function PeopleTable({ initial, ownId, disable, enable, takeBack }: PeopleTableProps) {
   const client = useQueryClient()
   const { data = initial } = useTableQuery({
-    key,
+    key: officePeopleKey,
     url: paths.api.table('office-people'),
     schema: officePeopleReply,
     initialData: initial,
@@ -33,7 +32,7 @@ export function PeopleTable({ initial, ownId, disable, enable, takeBack }: Peopl
   const step: OfficeStep = async (deed, done) => {
     const answer = await deed()
     showToast(answer.ok ? done : answer.message)
-    await client.invalidateQueries({ queryKey: key })
+    await client.invalidateQueries({ queryKey: officePeopleKey })
   }
   return (
     <OfficeSteps.Provider
@@ -65,8 +64,15 @@ export function PeopleTable({ initial, ownId, disable, enable, takeBack }: Peopl
             matches: (row) => row.roles.some((r) => r.role === 'instrument-scientist'),
           },
           { id: 'shut', label: 'Shut', matches: (row) => row.isDisabled },
+          {
+            id: 'attention',
+            label: 'Wants attention',
+            matches: (row) => row.addressFails || row.asksToBeErased,
+          },
         ]}
         csv="people"
+        page={100}
+        tone={(row) => (row.addressFails || row.asksToBeErased ? 'attention' : null)}
       />
       {data.invitations.length > 0 ? (
         <section className="mt-10">

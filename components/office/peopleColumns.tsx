@@ -3,8 +3,10 @@
 import { useContext } from 'react'
 import type { TableColumn } from '@/components/tables/tableColumn'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
+import { TextLink } from '@/components/ui/TextLink'
 import type { OfficePersonRow, OpenInvitationRow } from '@/lib/domain/people/officeSchema'
 import { formatList, formatUtcWithYear } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { OfficeSteps } from './OfficeStep'
 import { roleInWords } from './roleInWords'
 import { rolesInWords } from './rolesInWords'
@@ -38,7 +40,14 @@ function TakeBack({ line }: { line: OpenInvitationRow }) {
 const rolesOf = (row: OfficePersonRow) =>
   rolesInWords(row.roles.filter((role) => role.role !== 'investigator'))
 
-const stands = (row: OfficePersonRow) => (row.isDisabled ? 'shut' : row.isConfirmed ? '' : 'not confirmed')
+const stands = (row: OfficePersonRow) =>
+  [
+    row.isDisabled ? 'shut' : row.isConfirmed ? '' : 'not confirmed',
+    row.addressFails ? 'letters do not reach it' : '',
+    row.asksToBeErased ? 'asks to be erased' : '',
+  ]
+    .filter(Boolean)
+    .join(', ')
 
 /** Columns of the accounts. */
 export const peopleColumns: TableColumn<OfficePersonRow>[] = [
@@ -46,7 +55,11 @@ export const peopleColumns: TableColumn<OfficePersonRow>[] = [
     id: 'name',
     head: 'Name',
     value: (row) => row.name,
-    cell: (row) => <span className="sm:whitespace-nowrap">{row.name}</span>,
+    cell: (row) => (
+      <span className="sm:whitespace-nowrap">
+        <TextLink href={paths.officePerson(row.id)}>{row.name}</TextLink>
+      </span>
+    ),
   },
   { id: 'email', head: 'E-mail', value: (row) => row.email },
   { id: 'institute', head: 'Institute', value: (row) => row.institute },

@@ -1,6 +1,8 @@
 const words: Readonly<Record<string, string>> = {
   'under-review': 'under review',
   due: 'owed',
+  invoiced: 'by invoice',
+  refunded: 'given back',
 }
 
 /** States of proposals and fees as they are called on screen. */

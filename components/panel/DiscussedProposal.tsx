@@ -1,3 +1,5 @@
+import { DiscussButton } from '@/components/discussions/DiscussButton'
+import type { DiscussAction } from '@/components/discussions/meetingActions'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import { VerdictMark } from '@/components/ui/VerdictMark'
@@ -15,12 +17,22 @@ export interface DiscussedProposalProps {
   view: DiscussionView
   save: SaveStatementAction
   setAside: SetAsideAction
+  discuss: DiscussAction
+  /** It is what the panel discusses now. */
+  isOnTable: boolean
 }
 
 const seatWords = { first: 'first reader', second: 'second voice', reader: 'reader' } as const
 
 /** One proposal in discussion: who speaks, how scores spread, what was written, what the panel agrees on. */
-export function DiscussedProposal({ proposal, view, save, setAside }: DiscussedProposalProps) {
+export function DiscussedProposal({
+  proposal,
+  view,
+  save,
+  setAside,
+  discuss,
+  isOnTable,
+}: DiscussedProposalProps) {
   const { ranking } = view
   const canWrite = ranking.list !== null && ranking.phase !== 'decided' && ranking.phase !== 'archived'
   const speakers = proposal.readers.filter((reader) => reader.seat !== 'reader')
@@ -56,7 +68,10 @@ export function DiscussedProposal({ proposal, view, save, setAside }: DiscussedP
           ; merit {formatNumber(proposal.merit, 2)}.
         </p>
         {canWrite ? (
-          <span className="text-table">
+          <span className="flex flex-wrap items-baseline gap-x-5 gap-y-2 text-table">
+            {proposal.setAside || isOnTable ? null : (
+              <DiscussButton panelId={ranking.panelId} proposalId={proposal.proposalId} discuss={discuss} />
+            )}
             <SetAsideButton proposal={proposal} ranking={ranking} action={setAside} />
           </span>
         ) : null}

@@ -9,10 +9,12 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { ActionResult } from '@/lib/actions/result'
 import { cosmologyFormSchema, type CosmologyForm } from '@/lib/domain/proposals/cosmologyForm'
 import type { Saved } from '@/lib/domain/proposals/writeProposal'
+import { comparisonChoices, cosmologyChoices } from './cosmologyOptions'
 import { OwnParameters } from './OwnParameters'
 import { StaleChoice } from './StaleChoice'
 import { UniverseNote } from './UniverseNote'
 import { useAutosavedForm } from './useAutosavedForm'
+import { cosmologyLabels } from './cosmologyLabels'
 
 export interface CosmologyFormViewProps {
   reference: string
@@ -23,26 +25,17 @@ export interface CosmologyFormViewProps {
   save: (input: { reference: string; version: number; form: CosmologyForm }) => Promise<ActionResult<Saved>>
 }
 
-const labels = {
-  choice: 'Cosmology',
-  comparison: 'Beside it',
-  name: 'Name',
-  H0: 'H₀',
-  Om0: 'Ωm',
-  omCounts: 'Ωm counts',
-  Ode0: 'ΩΛ',
-  w0: 'w₀',
-  wa: 'wₐ',
-  Tcmb0: 'Temperature',
-  Neff: 'Species',
-  mNuEv: 'Masses',
+function said(field: string, value: unknown): string {
+  const option = [...cosmologyChoices, ...comparisonChoices].find((one) => one.value === value)
+  if ((field === 'choice' || field === 'comparison') && option) return option.label
+  return value === '' || value === undefined ? 'nothing' : String(value)
 }
 
 /** The cosmology every distance follows from: a published one, or one's own; saved as it is chosen. */
 export function CosmologyFormView(props: CosmologyFormViewProps) {
   const { reference, version, kept, choices, comparisons, save } = props
   const keepAs = `cosmology-${reference}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema: cosmologyFormSchema,
     kept,
     version,
@@ -65,7 +58,14 @@ export function CosmologyFormView(props: CosmologyFormViewProps) {
           keepAs={keepAs}
           onBringBack={(copy) => handle.form.reset({ ...kept, ...(copy as CosmologyForm) })}
         />
-        <StaleChoice state={state} values={values} labels={labels} onChoose={choose} />
+        <StaleChoice
+          state={state}
+          values={values}
+          base={base}
+          labels={cosmologyLabels}
+          say={said}
+          onChoose={choose}
+        />
         <RadioField name="choice" label="Compute everything under" options={choices} />
         {values.choice === 'custom' ? <OwnParameters /> : null}
         <SelectField

@@ -1,10 +1,11 @@
 'use client'
 
 import { useState, useTransition } from 'react'
-import { useForm, FormProvider } from 'react-hook-form'
+import { FormProvider, useForm } from 'react-hook-form'
 import { ActionFormContext } from '@/components/forms/ActionFormContext'
 import { FileField } from '@/components/forms/FileField'
 import type { FileSending } from '@/components/forms/FileRow'
+import { Button } from '@/components/ui/Button'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import { maxPaperBytes } from '@/lib/domain/papers/limits'
@@ -20,13 +21,19 @@ export interface PaperUploadProps {
   upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
 }
 
-/** Takes a PDF, chosen or dropped, and sends it at once; what is wrong with it stands at the field. */
+/**
+ * Takes a PDF, chosen or dropped, and sends it at once; what is wrong with it stands at the field, and one that did not
+ * get through can be sent again.
+ */
 export function PaperUpload({ reference, kind, label, help, upload }: PaperUploadProps) {
   const form = useForm<{ file: File | null }>({ defaultValues: { file: null } })
   const [sending, setSending] = useState<FileSending | null>(null)
+  const [lost, setLost] = useState<File | null>(null)
   const [, startTransition] = useTransition()
 
   const send = async (file: File) => {
+    setLost(null)
+    form.clearErrors('file')
     try {
       setSending({ share: 0.1, words: 'Taking its fingerprint' })
       const sha256 = await fingerprint(file)
@@ -39,12 +46,16 @@ export function PaperUpload({ reference, kind, label, help, upload }: PaperUploa
       if (result.ok) {
         form.reset({ file: null })
         showToast(`${result.data.fileName} is kept`)
-      } else form.setError('file', { type: 'server', message: result.fieldErrors.file ?? result.message })
+        return
+      }
+      form.setError('file', { type: 'server', message: result.fieldErrors.file ?? result.message })
+      if (result.kind === 'unavailable' || result.kind === 'unexpected') setLost(file)
     } catch {
       form.setError('file', {
         type: 'server',
-        message: 'The file did not get through. Nothing was changed; choose it again.',
+        message: 'The file did not get through. Nothing was changed.',
       })
+      setLost(file)
     } finally {
       setSending(null)
     }
@@ -62,6 +73,13 @@ export function PaperUpload({ reference, kind, label, help, upload }: PaperUploa
           sending={sending}
           onFile={(file) => startTransition(() => send(file))}
         />
+        {lost ? (
+          <p className="m-0 mt-2">
+            <Button look="secondary" size="small" onClick={() => startTransition(() => send(lost))}>
+              Send it again
+            </Button>
+          </p>
+        ) : null}
       </ActionFormContext>
     </FormProvider>
   )

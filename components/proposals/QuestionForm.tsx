@@ -31,7 +31,7 @@ const options = categories.map((category) => ({ value: category, label: category
 export function QuestionForm({ reference, version, abstractLimit, kept, save }: QuestionFormProps) {
   const schema = useMemo(() => questionSchema(abstractLimit), [abstractLimit])
   const keepAs = `question-${reference}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema,
     kept,
     version,
@@ -45,7 +45,14 @@ export function QuestionForm({ reference, version, abstractLimit, kept, save }: 
   return (
     <ActionForm form={handle} label="The question">
       <KeptCopyNotice keepAs={keepAs} onBringBack={bringBack} />
-      <StaleChoice state={state} values={values} labels={labels} onChoose={choose} />
+      <StaleChoice
+        state={state}
+        values={values}
+        base={base}
+        prose={['abstract']}
+        labels={labels}
+        onChoose={choose}
+      />
       <TextField name="title" label="Title" help="What a reviewer remembers of it." spellCheck />
       <TextAreaField
         name="abstract"

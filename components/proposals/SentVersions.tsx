@@ -24,7 +24,7 @@ export function SentVersions({ versions, reference }: Pick<History, 'versions'> 
           </div>
           <div>
             <TextLink href={paths.proposalHistory(reference, version.number)}>
-              How the text went on<span className="sr-only"> after version {version.number}</span>
+              How it went on<span className="sr-only"> after version {version.number}</span>
             </TextLink>
           </div>
           <div className="[overflow-wrap:anywhere] text-muted">

@@ -1,8 +1,10 @@
 import { ChartFrame } from '@/components/charts/ChartFrame'
 import { UpBars } from '@/components/charts/UpBars'
 import { SectionHeading } from '@/components/ui/SectionHeading'
+import { pointingOf } from '@/lib/domain/facility/rules'
 import type { ReadProposal } from '@/lib/domain/proposals/readProposal'
 import { formatHours } from '@/lib/format'
+import { limitWords } from '@/lib/science/feasibility'
 import { monthName, seasonMonths } from './seasonMonths'
 
 /** The worst word said about a target's observations, for the colour of its row. */
@@ -31,12 +33,17 @@ export function TargetsUp({ read }: { read: ReadProposal }) {
   const months = seasonMonths(seasonFrom, seasonTo)
   const most = Math.max(1, ...shown.flatMap(({ computed }) => computed.visibleHoursByNight))
   const airmass = contents.constraintSets[0]?.maxAirmass ?? 1.8
+  const used = contents.modes.filter(({ modeId }) =>
+    contents.observations.some((one) => one.modeId === modeId),
+  )
+  const limits =
+    used.map(({ telescope }) => limitWords(pointingOf(contents.site, telescope))).find(Boolean) ?? ''
   return (
     <section className="mt-12">
       <SectionHeading dense title="When your targets are up" />
       <div className="mt-3">
         <ChartFrame
-          note={`Dark hours a night above airmass ${airmass}; a row is 0 to ${formatHours(most)}`}
+          note={`Dark hours a night above airmass ${airmass}${limits}; a row is 0 to ${formatHours(most)}`}
           fileName={`hours-${contents.reference}`}
           numbers={{
             caption: 'Dark hours by month',

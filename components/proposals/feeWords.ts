@@ -8,6 +8,7 @@ const words = {
   invoiced: 'by invoice',
   refunded: 'given back',
   lapsed: 'not settled in time',
+  cancelled: 'not owed',
 } as const
 
 /** The fee in the strip: what it is and how it stands; null where there is none. */

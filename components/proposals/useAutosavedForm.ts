@@ -1,7 +1,7 @@
 'use client'
 
 import { zodResolver } from '@hookform/resolvers/zod'
-import { useId, useRef } from 'react'
+import { useId, useRef, useState } from 'react'
 import { useForm, useWatch, type DefaultValues, type FieldValues, type Path } from 'react-hook-form'
 import type { z } from 'zod'
 import type { ActionFormHandle } from '@/components/forms/actionFormTypes'
@@ -25,7 +25,7 @@ const same = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b)
 
 /**
  * A form that saves by itself. A save that came second is tried again on top when the other changed none of these
- * fields; otherwise both versions are shown and nothing is overwritten before one is chosen.
+ * fields; otherwise both versions are shown, and nothing is overwritten before one is chosen for each field.
  */
 export function useAutosavedForm<Input extends FieldValues, Output>(
   options: AutosavedFormOptions<Input, Output>,
@@ -42,6 +42,8 @@ export function useAutosavedForm<Input extends FieldValues, Output>(
   const values = useWatch({ control: form.control }) as Input
   const version = useRef(options.version)
   const base = useRef(kept)
+  // The same for drawing a comparison: what both of us found.
+  const [compared, setCompared] = useState(kept)
 
   const send = async (typed: Input): Promise<ActionResult<Saved>> => {
     const read = schema.safeParse(typed)
@@ -54,6 +56,7 @@ export function useAutosavedForm<Input extends FieldValues, Output>(
     let result = await save(typed, version.current)
     if (!result.ok && result.stale && same(result.stale.theirs, base.current))
       result = await save(typed, result.stale.version)
+    if (!result.ok && result.stale) setCompared(base.current)
     if (result.ok) {
       version.current = result.data.version
       base.current = typed
@@ -68,13 +71,14 @@ export function useAutosavedForm<Input extends FieldValues, Output>(
   const { state, saveNow, settle } = useAutosave<Input, Saved>({ values, save: send, keepAs })
   useReportSaving(state)
 
-  /** Ends a comparison: theirs stands under the next save; the form shows theirs, or keeps what was typed. */
-  const choose = (theirs: Input, staleVersion: number, whose: 'theirs' | 'mine') => {
+  /** Ends a comparison: theirs stands under the next save, and the form shows what was chosen. */
+  const choose = (chosen: Input, theirs: Input, staleVersion: number) => {
     version.current = staleVersion
     base.current = theirs
-    if (whose === 'theirs') form.reset(theirs)
     settle(theirs)
-    if (whose === 'mine') void saveNow()
+    // What differs from what was typed is saved as any change is, once the form holds it.
+    if (same(chosen, values)) void saveNow()
+    else form.reset(chosen)
   }
 
   const handle: ActionFormHandle<Input, Output> = {
@@ -88,5 +92,5 @@ export function useAutosavedForm<Input extends FieldValues, Output>(
       void saveNow()
     },
   }
-  return { handle, values, state, choose }
+  return { handle, values, state, base: compared, choose }
 }

@@ -29,6 +29,8 @@ export function LinePanel({ view, busy, onMove }: LinePanelProps) {
             </strong>{' '}
             The scores do not decide between them: discuss.
           </>
+        ) : view.scores === 0 ? (
+          'There is no score yet: where it falls follows from the hours alone.'
         ) : (
           'No proposal is in doubt: the scores decide who stands above the line.'
         )}

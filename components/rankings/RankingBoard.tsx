@@ -9,6 +9,7 @@ import { rankingView, type RankingView } from '@/lib/domain/rankings/rankingView
 import { countInWords } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { Agreement } from './Agreement'
+import { FormulaPanel } from './FormulaPanel'
 import { LeniencyChart } from './LeniencyChart'
 import { LinePanel } from './LinePanel'
 import { MovePanel } from './MovePanel'
@@ -85,6 +86,7 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
               action={actions.move}
             />
           ) : null}
+          <FormulaPanel view={view} action={actions.formula} />
           <RankingChanges view={view} />
           <LeniencyChart view={view} />
           <Agreement view={view} />
@@ -93,8 +95,7 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
       <p className="mt-10 border-t border-rule pt-4 text-caption text-muted">
         {view.corrected
           ? 'Merit is fitted with every reviewer’s leniency taken out (REML).'
-          : 'Merit is fitted without taking leniency out.'}{' '}
-        The formula was fixed before the first score.
+          : 'Merit is fitted without taking leniency out.'}
       </p>
     </>
   )

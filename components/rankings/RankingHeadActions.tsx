@@ -10,6 +10,7 @@ import type { RankingView } from '@/lib/domain/rankings/rankingView'
 const orders = [
   { sort: '', words: 'raw mean' },
   { sort: '-merit', words: 'merit' },
+  { sort: '-measure', words: 'own measure' },
   { sort: '-chance', words: 'P above the line' },
 ] as const
 
@@ -29,22 +30,24 @@ export function RankingHeadActions({ view, busy, canChange, onStart, onFreeze }:
     <>
       <span className="flex flex-wrap items-baseline gap-4" role="group" aria-label="Order by">
         <span className="text-muted">Order by</span>
-        {orders.map((order) => (
-          <button
-            key={order.sort}
-            type="button"
-            aria-pressed={sort === order.sort}
-            onClick={() => void setState({ sort: order.sort })}
-            className={classNames(
-              'max-sm:min-h-11',
-              sort === order.sort
-                ? 'border-b-2 border-ink font-semibold'
-                : 'text-accent underline decoration-1 underline-offset-4 hover:decoration-2',
-            )}
-          >
-            {order.words}
-          </button>
-        ))}
+        {orders
+          .filter((order) => order.sort !== '-measure' || view.formula.text !== null)
+          .map((order) => (
+            <button
+              key={order.sort}
+              type="button"
+              aria-pressed={sort === order.sort}
+              onClick={() => void setState({ sort: order.sort })}
+              className={classNames(
+                'max-sm:min-h-11',
+                sort === order.sort
+                  ? 'border-b-2 border-ink font-semibold'
+                  : 'text-accent underline decoration-1 underline-offset-4 hover:decoration-2',
+              )}
+            >
+              {order.words}
+            </button>
+          ))}
       </span>
       {view.list === null ? (
         <Button

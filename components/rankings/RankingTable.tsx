@@ -27,6 +27,7 @@ export function RankingTable({ view, selected, onSelect }: RankingTableProps) {
         zone: greyZone(view.rows.map((row) => row.chance)),
         selected,
         onSelect,
+        hasMeasure: view.formula.text !== null,
       }),
     [view, selected, onSelect],
   )

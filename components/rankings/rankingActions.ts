@@ -13,5 +13,6 @@ export interface RankingActions {
     input: ListKey & { proposalId: number; place: string; reason: string },
   ) => Promise<ActionResult<void>>
   line: (input: ListKey & { direction: 'up' | 'down' }) => Promise<ActionResult<void>>
+  formula: (input: { panelId: number; formula: string }) => Promise<ActionResult<void>>
   freeze: (input: ListKey) => Promise<ActionResult<void>>
 }

@@ -13,6 +13,8 @@ export interface RankingColumnsInput {
   zone: { first: number; last: number } | null
   selected: number | null
   onSelect: (proposalId: number | null) => void
+  /** The panel has a measure of its own. */
+  hasMeasure: boolean
 }
 
 /** The interval, or a dash where nothing could be drawn. */
@@ -38,6 +40,20 @@ function Interval({
       upperHalf={upperHalf ?? high}
     />
   )
+}
+
+const measureColumn: TableColumn<RankingRow> = {
+  id: 'measure',
+  head: 'Own',
+  unit: 'and rank',
+  align: 'right',
+  value: (row) => row.measure,
+  cell: (row) => (
+    <span className="whitespace-nowrap">
+      {formatNumber(row.measure, 2)}{' '}
+      <span className="text-tick text-muted">{row.measureRank === null ? '' : row.measureRank}</span>
+    </span>
+  ),
 }
 
 export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingRow>[] {
@@ -118,6 +134,7 @@ export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingR
         </span>
       ),
     },
+    ...(input.hasMeasure ? [measureColumn] : []),
     {
       id: 'chance',
       head: 'P above the line',

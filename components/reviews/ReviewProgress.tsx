@@ -38,6 +38,9 @@ export function ReviewProgress({ group }: { group: ReviewsOfCall }) {
       <div className="mt-2">
         <ProgressBar share={lines.length ? finished / lines.length : 0} label={words} />
       </div>
+      <p className="mt-2 text-table">
+        <TextLink href={paths.meeting(call.slug)}>The meeting of the panel</TextLink>
+      </p>
       {declaredAt && now < call.panelMeetsAt ? (
         <p className="mt-2 text-caption text-muted">
           You declared your interests on {formatDay(declaredAt)}, from the list of all names.{' '}

@@ -2,7 +2,7 @@
 
 import { useFormContext } from 'react-hook-form'
 import { cellClasses } from './cellClasses'
-import { nextCellOnEnter } from './nextCellOnEnter'
+import { moveBetweenCells } from './moveBetweenCells'
 
 export interface TypedCellProps {
   name: string
@@ -38,9 +38,13 @@ export function TypedCell(props: TypedCellProps) {
       autoComplete="off"
       spellCheck={false}
       placeholder={placeholder}
+      // Nothing typed since: an undo then means the table, not the text.
+      onFocus={(event) => {
+        event.currentTarget.dataset.entered = event.currentTarget.value
+      }}
       onKeyDown={(event) => {
         if (event.key === 'Escape') resetField(name)
-        nextCellOnEnter(event)
+        moveBetweenCells(event)
       }}
       onPaste={(event) => {
         if (onPasteText?.(event.clipboardData.getData('text'))) event.preventDefault()

@@ -17,11 +17,14 @@ export interface SelfSavingRow<Row extends FieldValues, Values> {
   /** Saves what differs from what is kept; does nothing while a cell cannot be read. */
   commit: () => Promise<void>
   message: string | null
-  stale: StaleRow | null
-  /** Keeps one's own row over theirs. */
-  keepMine: () => Promise<void>
-  /** Takes theirs over one's own. */
-  takeTheirs: () => void
+  /** Someone else saved first: theirs, and the row as both of us found it. */
+  stale: (StaleRow & { base: Row }) | null
+  /** Ends a comparison with the row as chosen. */
+  choose: (chosen: Row) => Promise<void>
+  /** Types a whole row at once, and saves it. */
+  fill: (row: Row) => void
+  /** Takes over what was saved for this row elsewhere on the page. */
+  adopt: (kept: { row: Row; version: number }) => void
 }
 
 export interface SelfSavingRowOptions<Row extends FieldValues, Values, Kept extends { version: number }> {
@@ -58,7 +61,7 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
   const running = useRef(false)
   const again = useRef(false)
   const [message, setMessage] = useState<string | null>(null)
-  const [stale, setStale] = useState<StaleRow | null>(null)
+  const [stale, setStale] = useState<(StaleRow & { base: Row }) | null>(null)
   const form = useForm<Row, unknown, Values>({
     resolver: zodResolver(schema),
     defaultValues: first as DefaultValues<Row>,
@@ -96,7 +99,7 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     const { fieldErrors, message: sentence } = failure
     for (const [field, words] of Object.entries(fieldErrors))
       form.setError(field.replace(/^row\./, '') as Path<Row>, { type: 'server', message: words })
-    setStale(failure.stale ?? null)
+    setStale(failure.stale ? { ...failure.stale, base: known.current } : null)
     copy.keep()
     setMessage(Object.keys(fieldErrors).length > 0 || failure.stale ? null : sentence)
     savingStore.report(stateOf(failure))
@@ -144,19 +147,26 @@ export function useSelfSavingRow<Row extends FieldValues, Values, Kept extends {
     commit,
     message,
     stale,
-    keepMine: async () => {
-      version.current = stale?.version ?? version.current
-      setStale(null)
-      await commit()
+    fill: (row) => {
+      for (const [name, value] of Object.entries(row)) form.setValue(name as Path<Row>, value as never)
+      void commit()
     },
-    takeTheirs: () => {
-      if (!stale) return
+    adopt: (kept) => {
+      known.current = kept.row
+      version.current = kept.version
+      form.reset(kept.row)
       copy.drop()
+    },
+    choose: async (chosen) => {
+      if (!stale) return
       known.current = { ...empty, ...(stale.theirs as Partial<Row>) }
       version.current = stale.version
-      form.reset(known.current)
+      form.reset(chosen)
       setStale(null)
-      savingStore.report({ name: 'idle' })
+      if (text(chosen) === text(known.current)) {
+        copy.drop()
+        savingStore.report({ name: 'idle' })
+      } else await commit()
     },
   }
 }

@@ -12,6 +12,10 @@ export interface TableQueryOptions<Reply> {
   schema: z.ZodType<Reply>
   /** What the page was rendered with, so that nothing flickers. */
   initialData?: Reply
+  /** False while there is nothing to ask for. */
+  enabled?: boolean
+  /** Asks anew every so many milliseconds, for what others change meanwhile. */
+  everyMs?: number
 }
 
 /** The data of a client table, from a route handler, checked by the same schema the handler answers with. */
@@ -20,10 +24,14 @@ export function useTableQuery<Reply>({
   url,
   schema,
   initialData,
+  enabled,
+  everyMs,
 }: TableQueryOptions<Reply>): UseQueryResult<Reply> {
   return useQuery<Reply>({
     queryKey: key,
     queryFn: ({ signal }) => fetchJson(url, schema, signal),
     initialData,
+    enabled,
+    refetchInterval: everyMs ?? false,
   })
 }

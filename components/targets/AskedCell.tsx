@@ -7,7 +7,8 @@ import { askFor, hoursText } from '@/lib/domain/observations/rules'
 import type { Observation } from '@/lib/domain/proposals/types'
 import { paths } from '@/lib/paths'
 import { cellClasses } from '@/components/rows/cellClasses'
-import { nextCellOnEnter } from '@/components/rows/nextCellOnEnter'
+import { moveBetweenCells } from '@/components/rows/moveBetweenCells'
+import { StaleHours } from './StaleHours'
 import type { TargetActions } from './targetActions'
 
 export interface AskedCellProps {
@@ -30,13 +31,17 @@ export function AskedCell(props: AskedCellProps) {
   const kept = only ? hoursText(only.askedSeconds) : ''
   const [text, setText] = useState(kept)
   const [wrong, setWrong] = useState(false)
+  const [stale, setStale] = useState<{ version: number; hours: string } | null>(null)
   const busy = useRef(false)
+  // The version of a save by someone else that was seen here and answered.
+  const [answered, setAnswered] = useState(0)
 
   // A save elsewhere is shown at once; while rendering, so that the old hours are never painted.
   const [shown, setShown] = useState(kept)
   if (shown !== kept) {
     setShown(kept)
     setText(kept)
+    setStale(null)
   }
 
   if (!only)
@@ -44,16 +49,30 @@ export function AskedCell(props: AskedCellProps) {
   const sum = observations.reduce((total, { askedSeconds }) => total + askedSeconds, 0)
   if (others.length > 0 || readOnly) return <span>{formatNumber(sum / 3600, 1)}</span>
 
-  const commit = async (hours: string) => {
+  const commit = async (hours: string, over = answered) => {
     if (busy.current || hours.trim() === kept) return
+    const version = Math.max(only.version, over)
     busy.current = true
-    const result = await ask({
-      reference,
-      asked: [{ id: only.id, version: only.version, askedHours: hours }],
-    })
+    const asked = [{ id: only.id, version, askedHours: hours }]
+    const result = await ask({ reference, asked }).catch(() => null)
     busy.current = false
+    if (!result)
+      return onMessage('The observatory did not answer. The hours are still here; leave the cell again.')
+    const theirs = result.ok ? undefined : result.stale
+    setStale(theirs ? { version: theirs.version, hours: String(theirs.theirs.askedHours ?? '') } : null)
     setWrong(!result.ok)
-    onMessage(result.ok ? null : (Object.values(result.fieldErrors)[0] ?? result.message))
+    if (result.ok) onMessage(null)
+    else if (theirs)
+      onMessage(`${theirs.changedBy} changed this observation first. Choose which hours are asked for.`)
+    else onMessage(Object.values(result.fieldErrors)[0] ?? result.message)
+  }
+  const take = (hours: string) => {
+    setAnswered(stale?.version ?? 0)
+    setText(hours)
+    setStale(null)
+    setWrong(false)
+    onMessage(null)
+    void commit(hours, stale?.version)
   }
   const isShort = neededSeconds !== null && only.askedSeconds < neededSeconds
   return (
@@ -61,10 +80,10 @@ export function AskedCell(props: AskedCellProps) {
       <input
         value={text}
         onChange={(event) => setText(event.target.value)}
-        onBlur={() => void commit(text)}
+        onBlur={() => (stale ? undefined : void commit(text))}
         onKeyDown={(event) => {
           if (event.key === 'Escape') setText(kept)
-          nextCellOnEnter(event)
+          moveBetweenCells(event)
         }}
         data-row={row}
         data-cell="asked"
@@ -74,7 +93,8 @@ export function AskedCell(props: AskedCellProps) {
         aria-invalid={wrong || undefined}
         className={cellClasses({ align: 'right', wrong })}
       />
-      {isShort && neededSeconds !== null ? (
+      {stale ? <StaleHours theirs={stale.hours} yours={text} onTake={take} /> : null}
+      {!stale && isShort && neededSeconds !== null ? (
         <button
           type="button"
           className="text-tick text-accent underline underline-offset-2 max-sm:min-h-9"

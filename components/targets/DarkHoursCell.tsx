@@ -9,6 +9,7 @@ export interface DarkHoursCellProps {
   name: string
   computed: TargetComputation
   maxAirmass: number
+  limits: string
   /** Evening dates. */
   seasonFrom: string
   seasonTo: string
@@ -19,7 +20,7 @@ export interface DarkHoursCellProps {
 
 /** Dark hours above the airmass limit, with a bar a month; opens to the months and how it was counted. */
 export function DarkHoursCell(props: DarkHoursCellProps) {
-  const { name, computed, maxAirmass, seasonFrom, seasonTo, fullBar, engineVersion } = props
+  const { name, computed, maxAirmass, limits, seasonFrom, seasonTo, fullBar, engineVersion } = props
   if (computed.visibleHours === null) return <span className="text-muted">{ABSENT}</span>
   const months = computed.visibleHoursByMonth.map(({ month, hours }) => ({
     month: formatCalendarDate(`${month}-01`).replace(/^\d+ /, ''),
@@ -31,7 +32,7 @@ export function DarkHoursCell(props: DarkHoursCellProps) {
         shown={formatNumber(computed.visibleHours, 0)}
         value={formatHours(computed.visibleHours)}
         what={`dark hours, ${name}`}
-        formula={`Sun below −18°, airmass ≤ ${maxAirmass}`}
+        formula={`Sun below −18°, airmass ≤ ${maxAirmass}${limits}`}
         inputs={months.map(({ month, sum }) => ({ term: month, value: formatQuantity(sum, 1, 'h') }))}
         source={`Every night from ${formatCalendarDate(seasonFrom)} to ${formatCalendarDate(seasonTo)}, whatever the Moon does; airmass after Young 1994, edges within 60 s. Engine ${engineVersion}.`}
       />

@@ -13,36 +13,41 @@ export interface PositionCellProps {
   row: number
   readOnly: boolean
   messageId: string
+  /** Takes a block of cells pasted into one half; false when it is none. */
+  onPasteBlock: (at: 'ra' | 'dec', text: string) => boolean
 }
 
 /** Right ascension and declination as typed, and the degrees they were understood as. */
-export function PositionCell({ name, row, readOnly, messageId }: PositionCellProps) {
+export function PositionCell({ name, row, readOnly, messageId, onPasteBlock }: PositionCellProps) {
   const { control, setValue } = useFormContext<TargetRow>()
   const [ra = '', dec = '', event = ''] = useWatch({ control, name: ['ra', 'dec', 'event'] })
   const isAwaited = event !== ''
   const read = { ra: parseRightAscension(ra), dec: parseDeclination(dec) }
 
   // A whole position pasted into either half fills both.
-  const paste = (text: string) => {
+  const paste = (at: 'ra' | 'dec') => (text: string) => {
+    if (onPasteBlock(at, text)) return true
     const halves = splitPosition(text)
     if (!halves || readOnly) return false
     setValue('ra', halves.ra, { shouldDirty: true })
     setValue('dec', halves.dec, { shouldDirty: true, shouldValidate: true })
     return true
   }
-  const shared = { row, readOnly, messageId, onPasteText: paste }
+  const shared = { row, readOnly, messageId }
   return (
     <>
       <span className="flex gap-2">
         <TypedCell
           {...shared}
           name="ra"
+          onPasteText={paste('ra')}
           label={`Right ascension of ${name}`}
           placeholder={isAwaited ? 'none yet' : 'h m s or degrees'}
         />
         <TypedCell
           {...shared}
           name="dec"
+          onPasteText={paste('dec')}
           label={`Declination of ${name}`}
           placeholder={isAwaited ? 'none yet' : '± d m s'}
         />

@@ -64,6 +64,7 @@ export function TargetDetails({
         <DetailGroup title="The shape">
           <SelectField name="geometry" label="Shape" options={shapes} {...shared} />
           <NumberField name="effectiveRadius" label="Half-light radius" unit="″" {...number} />
+          <NumberField name="effectiveRadiusError" label="Its error" unit="″" {...number} />
           <NumberField name="sersicIndex" label="Sérsic index" {...number} />
         </DetailGroup>
         <DetailGroup title="An emission line" note="Counts where an observation asks for just this line.">

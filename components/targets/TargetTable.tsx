@@ -7,7 +7,7 @@ import {
   useTable,
   type ColumnDef,
 } from '@tanstack/react-table'
-import { useMemo } from 'react'
+import { useMemo, type KeyboardEvent } from 'react'
 import { TableFrame } from '@/components/tables/TableFrame'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { countInWords, formatNumber } from '@/lib/format'
@@ -23,23 +23,38 @@ const definitions: ColumnDef<typeof features, RowView, unknown>[] = numberColumn
   helper.accessor((view): unknown => (view.computed ? column.value(view.computed) : null), { id: column.id }),
 )
 
+/** The usual keys take back what was done to the table, once nothing is typed in the cell that its own undo could. */
+function undoKey(event: KeyboardEvent<HTMLElement>, undo: () => void): void {
+  const isUndo = (event.ctrlKey || event.metaKey) && !event.shiftKey && event.key.toLowerCase() === 'z'
+  const cell = event.target
+  if (!isUndo || !(cell instanceof HTMLInputElement) || cell.dataset.entered !== cell.value) return
+  event.preventDefault()
+  undo()
+}
+
 export interface TargetTableWholeProps extends Omit<TargetTableProps, 'columns'> {
   shown: readonly NumberColumnId[]
   totals: Pick<ProposalComputation, 'askedSeconds' | 'neededSeconds' | 'verdict'>
   maxAirmass: number
   months: string
+  /** Takes the last change to the table back. */
+  onUndo: () => void
 }
 
 /** The table of targets: typed cells at the left, computed ones tinted, hours and verdict at the right. */
-export function TargetTable({ shown, totals, maxAirmass, months, ...props }: TargetTableWholeProps) {
+export function TargetTable(whole: TargetTableWholeProps) {
+  const { shown, totals, maxAirmass, months, onUndo, ...props } = whole
   const columnVisibility = useMemo(
     () => Object.fromEntries(numberColumns.map(({ id }) => [id, shown.includes(id)])),
     [shown],
   )
   const data = useMemo(() => [...props.rows], [props.rows])
   const table = useTable({ features, columns: definitions, data, state: { columnVisibility } })
-  const visible = new Set(table.getVisibleLeafColumns().map((column) => column.id))
-  const columns = numberColumns.filter(({ id }) => visible.has(id))
+  const visible = table
+    .getVisibleLeafColumns()
+    .map((column) => column.id)
+    .join()
+  const columns = useMemo(() => numberColumns.filter(({ id }) => visible.split(',').includes(id)), [visible])
   const rows = table.getRowModel().rows.map((row) => row.original)
   const required = rows.filter(({ target }) => target.group === null && target.need === 'required').length
   const grouped = rows.filter(({ target }) => target.group !== null).length
@@ -84,10 +99,16 @@ export function TargetTable({ shown, totals, maxAirmass, months, ...props }: Tar
           </th>
         </tr>
       </thead>
-      <tbody role="rowgroup">
+      <tbody role="rowgroup" onKeyDown={(event) => undoKey(event, onUndo)}>
         {rows.map((view, index) => (
           <TargetTableRow
-            {...props}
+            reference={props.reference}
+            readOnly={props.readOnly}
+            numbers={props.numbers}
+            season={props.season}
+            groups={props.groups}
+            takesAwaited={props.takesAwaited}
+            deeds={props.deeds}
             key={view.key}
             view={view}
             number={index + 1}

@@ -1,7 +1,7 @@
 'use client'
 
 import { ChevronDown } from 'lucide-react'
-import { useEffect, useId, useState, type FocusEvent } from 'react'
+import { memo, useEffect, useId, useState, type FocusEvent } from 'react'
 import { FormProvider, useWatch } from 'react-hook-form'
 import { classNames } from '@/components/ui/classNames'
 import { VerdictMark } from '@/components/ui/VerdictMark'
@@ -18,10 +18,13 @@ import { NumberCell } from './NumberCell'
 import { PositionCell } from './PositionCell'
 import { hasMessages, RowMessages } from '@/components/rows/RowMessages'
 import { cellNames } from './cellNames'
+import { cellWords } from './cellWords'
+import { isBlock, type PastedCell } from './spreadCells'
 import { StandingSelect } from './StandingSelect'
 import { TargetDetails } from './TargetDetails'
 import { TypedCell } from '@/components/rows/TypedCell'
 import type { RowView, TargetTableProps } from './targetTableTypes'
+import { useLatest } from './useLatest'
 import { useSelfSavingRow } from '@/components/rows/useSelfSavingRow'
 
 const bandOptions = magnitudeBands.map(({ band, system }) => {
@@ -36,9 +39,9 @@ export interface TargetTableRowProps extends Omit<TargetTableProps, 'rows'> {
   isLast: boolean
 }
 
-/** One target: typed cells that save themselves, computed cells that open, and what is wrong beneath. */
-export function TargetTableRow(props: TargetTableRowProps) {
-  const { view, number, columns, readOnly, reference, actions, onTyped, onSave, onMove, onRemove } = props
+function Row(props: TargetTableRowProps) {
+  const { view, number, columns, readOnly, reference, deeds } = props
+  const { onTyped, onSave, onMove, onRemove, onPaste, onReady } = deeds
   const { key, target, computed, observations, verdict } = view
   const messageId = useId()
   const [isOpen, setOpen] = useState(false)
@@ -52,6 +55,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
     save: (values, version) => onSave(key, values, version),
   })
   const { form, commit } = row
+  const handle = useLatest({ fill: row.fill, adopt: row.adopt })
   const typed = useWatch({ control: form.control }) as TargetRow
   const isWrong = hasMessages(form.formState.errors, row, asking)
   const name = typed.name.trim() || `target ${number}`
@@ -59,8 +63,20 @@ export function TargetTableRow(props: TargetTableRowProps) {
   const awaited = awaitedWords(target)
 
   useEffect(() => onTyped(key, typed), [key, typed, onTyped])
+  useEffect(() => {
+    onReady(key, {
+      fill: (whole) => handle.current.fill(whole),
+      adopt: (saved) => handle.current.adopt(saved),
+    })
+    return () => onReady(key, null)
+  }, [key, onReady, handle])
 
   const cell = { row: number, readOnly: isOff, messageId }
+  const paste = (at: PastedCell) => (text: string) => {
+    if (isOff || !isBlock(text)) return false
+    void onPaste(key, at, text)
+    return true
+  }
   const save = () => void commit()
   // From one half of a position to the other nothing is judged yet.
   const leave = (event: FocusEvent) => {
@@ -88,22 +104,41 @@ export function TargetTableRow(props: TargetTableRowProps) {
           {number}
         </td>
         <th role="rowheader" scope="row" className="min-w-36">
-          <TypedCell {...cell} name="name" label={`Name of target ${number}`} strong placeholder="Name" />
+          <TypedCell
+            {...cell}
+            name="name"
+            label={`Name of target ${number}`}
+            strong
+            placeholder="Name"
+            onPasteText={paste('name')}
+          />
           <StandingSelect name={name} groups={props.groups} readOnly={isOff} onChosen={save} />
         </th>
         <td role="cell" data-head="Position" className="min-w-56">
           <span className="block max-sm:w-60">
-            <PositionCell {...cell} name={name} />
+            <PositionCell {...cell} name={name} onPasteBlock={(at, text) => paste(at)(text)} />
           </span>
         </td>
         <td role="cell" data-head="z" className="is-right max-sm:!pl-0 sm:w-16">
           <span className="block max-sm:w-32">
-            <TypedCell {...cell} name="redshift" label={`Redshift of ${name}`} align="right" />
+            <TypedCell
+              {...cell}
+              name="redshift"
+              label={`Redshift of ${name}`}
+              align="right"
+              onPasteText={paste('redshift')}
+            />
           </span>
         </td>
         <td role="cell" data-head="Magnitude" className="is-right max-sm:!pl-0 sm:w-18">
           <span className="block max-sm:w-32">
-            <TypedCell {...cell} name="magnitude" label={`Magnitude of ${name}`} align="right" />
+            <TypedCell
+              {...cell}
+              name="magnitude"
+              label={`Magnitude of ${name}`}
+              align="right"
+              onPasteText={paste('magnitude')}
+            />
             <CellSelect
               name="band"
               label={`Band and system of the magnitude of ${name}`}
@@ -136,6 +171,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
               name={name}
               computed={computed}
               maxAirmass={view.maxAirmass}
+              limits={view.limits}
             />
           ) : (
             ABSENT
@@ -152,7 +188,7 @@ export function TargetTableRow(props: TargetTableRowProps) {
               row={number}
               observations={observations}
               neededSeconds={view.neededSeconds}
-              ask={actions.ask}
+              ask={deeds.ask}
               readOnly={isOff}
               onMessage={setAsking}
             />
@@ -179,14 +215,14 @@ export function TargetTableRow(props: TargetTableRowProps) {
           <td role="cell" colSpan={span} className="sm:!pl-7">
             {computed?.refusal ? <p className="m-0 pb-1 text-not-feasible">{computed.refusal}</p> : null}
             {awaited ? <p className="m-0 max-w-prose pb-1 text-muted">{awaited}</p> : null}
-            <RowMessages id={messageId} row={row} cellNames={cellNames} extra={asking} />
+            <RowMessages id={messageId} row={row} cellNames={cellNames} say={cellWords} extra={asking} />
             {isOpen ? (
               <TargetDetails
                 readOnly={readOnly}
                 takesAwaited={props.takesAwaited || target.opportunity !== null}
-                onUp={view.kept && !props.isFirst ? () => onMove(key, -1) : null}
-                onDown={view.kept && !props.isLast ? () => onMove(key, 1) : null}
-                onRemove={() => onRemove(key)}
+                onUp={view.kept && !props.isFirst ? () => void onMove(key, -1) : null}
+                onDown={view.kept && !props.isLast ? () => void onMove(key, 1) : null}
+                onRemove={() => void onRemove(key)}
                 onSave={save}
               />
             ) : null}
@@ -196,3 +232,9 @@ export function TargetTableRow(props: TargetTableRowProps) {
     </FormProvider>
   )
 }
+
+/**
+ * One target: typed cells that save themselves, computed cells that open, and what is wrong beneath. Drawn again only
+ * when something it shows changed: a table may hold five hundred.
+ */
+export const TargetTableRow = memo(Row)

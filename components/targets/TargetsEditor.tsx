@@ -35,10 +35,7 @@ const monthName = (date: string) => formatCalendarDate(date, false).replace(/^\d
 
 /** The targets page: the table one types into, the file one drops, and what both come to. */
 export function TargetsEditor({ contents, computation, readOnly, actions }: TargetsEditorProps) {
-  const { places, typedContents, onTyped, onSave, onRemove, onMove, addRow } = useTargetRows(
-    contents,
-    actions,
-  )
+  const { places, typedContents, rowDeeds, begin, last, undo } = useTargetRows(contents, actions)
   const live = useLiveComputation(contents, computation, typedContents)
   const [shown, setShown] = useQueryState(
     'columns',
@@ -61,6 +58,14 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
     1,
     ...live.targets.flatMap(({ visibleHoursByMonth }) => visibleHoursByMonth.map(({ hours }) => hours)),
   )
+  const comparisonName = comparisonOf(contents.cosmology)?.parameters.name ?? null
+  const numbers = useMemo(
+    () => ({ cosmologyName, comparisonName, engineVersion }),
+    [cosmologyName, comparisonName, engineVersion],
+  )
+  const season = useMemo(() => ({ seasonFrom, seasonTo, fullBar }), [seasonFrom, seasonTo, fullBar])
+  const named = contents.groups.map(({ name }) => name).join('\n')
+  const groups = useMemo(() => (named === '' ? [] : named.split('\n')), [named])
   const exported = {
     reference: contents.reference,
     targets: typedContents.targets,
@@ -81,7 +86,12 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
           <>
             <ColumnChooser shown={shown} onChange={(next) => void setShown(next)} />
             {rows.length > 0 ? <ExportLinks exported={exported} /> : null}
-            {readOnly ? null : <Button onClick={addRow}>Add a target</Button>}
+            {readOnly || last === null ? null : (
+              <Button look="secondary" onClick={() => void undo()} title={`Takes back: ${last}`}>
+                Undo
+              </Button>
+            )}
+            {readOnly ? null : <Button onClick={() => begin(1)}>Add a target</Button>}
           </>
         }
       />
@@ -101,21 +111,20 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
             maxAirmass={rows[0]?.maxAirmass ?? 1.8}
             months={`${monthName(seasonFrom)}–${monthName(seasonTo)}`}
             readOnly={readOnly}
-            numbers={{
-              cosmologyName,
-              comparisonName: comparisonOf(contents.cosmology)?.parameters.name ?? null,
-              engineVersion,
-            }}
-            season={{ seasonFrom, seasonTo, fullBar }}
-            groups={contents.groups.map(({ name }) => name)}
+            numbers={numbers}
+            season={season}
+            groups={groups}
             takesAwaited={takesAwaited}
-            actions={actions}
-            onTyped={onTyped}
-            onSave={onSave}
-            onMove={(key, by) => void onMove(key, by)}
-            onRemove={(key) => void onRemove(key)}
+            deeds={rowDeeds}
+            onUndo={() => void undo()}
           />
         )}
+        {rows.length > 0 && readOnly === null ? (
+          <p className="m-0 mt-2 text-caption text-muted max-sm:hidden">
+            Arrows and Enter move through the cells. A block copied from a spreadsheet fills the cells from
+            the one it is pasted into; Ctrl Z, or ⌘ Z, takes the last change back.
+          </p>
+        ) : null}
       </div>
       <TargetGroups
         contents={contents}

@@ -22,6 +22,7 @@ export const cellNames: Record<keyof TargetRow, string> = {
   triggers: 'Triggers asked for',
   geometry: 'Shape',
   effectiveRadius: 'Half-light radius',
+  effectiveRadiusError: 'Error of the half-light radius',
   sersicIndex: 'Sérsic index',
   ebv: 'Galactic E(B−V)',
   magnification: 'Magnification',

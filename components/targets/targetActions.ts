@@ -2,6 +2,7 @@ import type { z } from 'zod'
 import type { ActionResult } from '@/lib/actions/result'
 import type { addTargetSchema } from '@/lib/domain/targets/addTarget'
 import type { saveAskedTimesSchema } from '@/lib/domain/observations/saveAskedTimes'
+import type { ChangedTargets, changeTargetsSchema } from '@/lib/domain/targets/changeTargets'
 import type { importTargetsSchema } from '@/lib/domain/targets/importTargets'
 import type { removeTargetSchema } from '@/lib/domain/targets/removeTarget'
 import type { reorderTargetsSchema } from '@/lib/domain/targets/reorderTargets'
@@ -16,6 +17,7 @@ type Action<S extends z.ZodType, R> = (input: z.input<S>) => Promise<ActionResul
 export interface TargetActions {
   add: Action<typeof addTargetSchema, Target>
   save: Action<typeof saveTargetSchema, Target>
+  change: Action<typeof changeTargetsSchema, ChangedTargets>
   remove: Action<typeof removeTargetSchema, { id: number; name: string }>
   restore: Action<typeof removeTargetSchema, { id: number }>
   reorder: Action<typeof reorderTargetsSchema, void>

@@ -15,8 +15,17 @@ const moons = [
   { value: 'dark', label: 'a quarter lit at most, or down' },
 ]
 
+export interface SeasonFormProps {
+  asked: SeasonInput
+  telescopes: readonly { slug: string; name: string }[]
+}
+
 /** A position, the evenings, and how low, how bright and how near the Moon it may be. */
-export function SeasonForm({ asked }: { asked: SeasonInput }) {
+export function SeasonForm({ asked, telescopes }: SeasonFormProps) {
+  const choices = [
+    { value: '', label: 'any telescope' },
+    ...telescopes.map(({ slug, name }) => ({ value: slug, label: name })),
+  ]
   const form = useToolForm(paths.season(), seasonSchema, asked)
   return (
     <ActionForm form={form}>
@@ -28,6 +37,7 @@ export function SeasonForm({ asked }: { asked: SeasonInput }) {
         <SelectField name="moon" label="Under" options={moons} />
         <NumberField name="separation" label="No nearer the Moon than" unit="°" />
         <NumberField name="airmass" label="Highest airmass" />
+        <SelectField name="telescope" label="From" options={choices} />
         <SubmitButton look="secondary" busyWord="Computing">
           Show the season
         </SubmitButton>

@@ -21,7 +21,7 @@ export interface FigureFormProps {
 export function FigureForm({ reference, figure, number, save }: FigureFormProps) {
   const { id, version, label, caption } = figure
   const keepAs = `figure-${id}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema: figureWordsSchema,
     kept: { label, caption },
     version,
@@ -38,6 +38,8 @@ export function FigureForm({ reference, figure, number, save }: FigureFormProps)
       <StaleChoice
         state={state}
         values={values}
+        base={base}
+        prose={['caption']}
         labels={{ label: 'Label', caption: 'Caption' }}
         onChoose={choose}
       />

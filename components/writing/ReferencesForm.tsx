@@ -19,7 +19,7 @@ export interface ReferencesFormProps {
 /** References as BibTeX, pasted or taken in from a file; saved as they are typed. */
 export function ReferencesForm({ reference, kept, save }: ReferencesFormProps) {
   const keepAs = `references-${reference}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema: writingSchema,
     kept: { text: kept.text },
     version: kept.version,
@@ -37,7 +37,14 @@ export function ReferencesForm({ reference, kept, save }: ReferencesFormProps) {
   return (
     <ActionForm form={handle} label="References">
       <KeptCopyNotice keepAs={keepAs} onBringBack={bringBack} />
-      <StaleChoice state={state} values={values} labels={{ text: 'References' }} onChoose={choose} />
+      <StaleChoice
+        state={state}
+        values={values}
+        base={base}
+        prose={['text']}
+        labels={{ text: 'References' }}
+        onChoose={choose}
+      />
       <div>
         <TextAreaField
           name="text"

@@ -40,7 +40,7 @@ export interface TextFormProps {
 export function TextForm(props: TextFormProps) {
   const { reference, part, kept, wordLimit, label, help, references, figures, save } = props
   const keepAs = `${part}-${reference}`
-  const { handle, values, state, choose } = useAutosavedForm({
+  const { handle, values, state, base, choose } = useAutosavedForm({
     schema: writingSchema,
     kept: { text: kept.text },
     version: kept.version,
@@ -57,7 +57,14 @@ export function TextForm(props: TextFormProps) {
   return (
     <ActionForm form={handle} label={label}>
       <KeptCopyNotice keepAs={keepAs} onBringBack={bringBack} />
-      <StaleChoice state={state} values={values} labels={{ text: label }} onChoose={choose} />
+      <StaleChoice
+        state={state}
+        values={values}
+        base={base}
+        prose={['text']}
+        labels={{ text: label }}
+        onChoose={choose}
+      />
       <div className="grid gap-x-10 gap-y-6 lg:grid-cols-2">
         <div className="min-w-0">
           <TextAreaField name="text" label={label} help={help} rows={16} grows />

@@ -1,4 +1,5 @@
 import type { Database } from '../client.ts'
+import { retiredIds } from './retirements.ts'
 import type { CallsRow } from '../tables.ts'
 
 /** Locks a call's row until the transaction ends. */
@@ -41,8 +42,16 @@ export async function insertCall(
   return id as number
 }
 
-/** Kinds, criteria, panels with their members, and modes on offer, taken over from an earlier call. */
-export async function copyCallRules(db: Database, fromCallId: number, toCallId: number): Promise<void> {
+/**
+ * Kinds, criteria, panels with their members, and modes on offer, taken over from an earlier call; modes that retire
+ * before the last evening of the new one are left out.
+ */
+export async function copyCallRules(
+  db: Database,
+  fromCallId: number,
+  toCallId: number,
+  seasonTo: string,
+): Promise<void> {
   const panels = new Map<number, number>()
   for (const panel of await db('panels').where({ call_id: fromCallId })) {
     const [id] = await db('panels').insert({ call_id: toCallId, name: panel.name, quorum: panel.quorum })
@@ -61,7 +70,9 @@ export async function copyCallRules(db: Database, fromCallId: number, toCallId: 
     call_id: fromCallId,
   }))
     await db('call_criteria').insert({ ...criterion, call_id: toCallId })
-  for (const { mode_id } of await db('call_modes').where({ call_id: fromCallId }))
+  for (const { mode_id } of await db('call_modes')
+    .where({ call_id: fromCallId })
+    .whereNotIn('mode_id', retiredIds(db, 'mode', seasonTo)))
     await db('call_modes').insert({ call_id: toCallId, mode_id })
   const grants = await db('role_grants').where({ call_id: fromCallId }).whereNull('revoked_at')
   for (const { id: _id, call_id: _call, created_at: _made, panel_id, ...grant } of grants)

@@ -31,6 +31,7 @@ export async function insertDecision(
     outcome: given.outcome,
     statement: given.statement,
     decided_by: given.by,
+    changed_by: given.by,
   })
   return Number(id)
 }
@@ -40,12 +41,13 @@ export async function changeDecision(
   db: Database,
   decision: { id: number; version: number },
   change: Partial<Pick<DecisionsRow, 'outcome' | 'statement'>>,
+  by: number,
 ): Promise<boolean> {
   const count = await db('decisions')
     .where({ id: decision.id, version: decision.version })
     .whereNull('released_at')
     .whereNull('superseded_at')
-    .update({ ...change, version: decision.version + 1 })
+    .update({ ...change, changed_by: by, version: decision.version + 1 })
   return count === 1
 }
 
@@ -70,6 +72,7 @@ export interface StandingAward {
   service: AwardLinesRow['service']
   conditions: string
   isReserve: boolean
+  givenAt: Date
 }
 
 /** Standing award lines of the standing decisions of some proposals. */
@@ -93,6 +96,7 @@ export async function standingAwards(db: Database, proposalIds: readonly number[
       service: 'a.service',
       conditions: 'a.conditions',
       isReserve: 'a.is_reserve',
+      givenAt: 'a.created_at',
     })
   return rows.map((row) => ({ ...row, isReserve: Boolean(row.isReserve) }))
 }
@@ -130,7 +134,7 @@ export interface NewAward {
 }
 
 /**
- * Gives time, unless the telescope's science hours of the call would then be exceeded: the same promise that the
+ * Gives time, unless the telescope's science hours of the call, less those held back, would then be exceeded: the same promise that the
  * invariants check, held by the statement itself. False when nothing was given.
  */
 export async function insertAward(db: Database, callId: number, award: NewAward): Promise<boolean> {
@@ -143,7 +147,9 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
                    WHERE p.call_id = ? AND j.telescope_id = i.telescope_id AND a.is_reserve = 0
                      AND a.superseded_at IS NULL AND d.superseded_at IS NULL), 0)
         <= COALESCE((SELECT SUM(b.dark_seconds) FROM night_blocks b
-                      WHERE b.call_id = ? AND b.telescope_id = i.telescope_id AND b.use_for = 'science'), 0))`,
+                      WHERE b.call_id = ? AND b.telescope_id = i.telescope_id AND b.use_for = 'science'), 0)
+         - COALESCE((SELECT SUM(k.seconds) FROM held_hours k
+                      WHERE k.call_id = ? AND k.telescope_id = i.telescope_id AND k.superseded_at IS NULL), 0))`,
     [
       award.decisionId,
       award.seconds,
@@ -155,36 +161,10 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
       award.seconds,
       callId,
       callId,
+      callId,
     ],
   )) as [{ affectedRows: number }]
   return result.affectedRows === 1
-}
-
-export interface PanelText {
-  proposalId: number
-  personId: number
-  seat: 'first' | 'second' | 'reader'
-  audience: 'investigators' | 'panel'
-  body: string
-}
-
-/** Comments of finished reviews to the panel and to the investigators, first readers first. */
-export async function panelTexts(db: Database, proposalIds: readonly number[]): Promise<PanelText[]> {
-  const rows = await db('review_texts as x')
-    .join('assignments as a', 'a.id', 'x.assignment_id')
-    .whereIn('a.proposal_id', proposalIds)
-    .whereIn('x.audience', ['panel', 'investigators'])
-    .whereNull('a.withdrawn_at')
-    .whereNotNull('a.finished_at')
-    .orderByRaw("FIELD(a.seat, 'first', 'second', 'reader'), a.id")
-    .select<PanelText[]>({
-      proposalId: 'a.proposal_id',
-      personId: 'a.person_id',
-      seat: 'a.seat',
-      audience: 'x.audience',
-      body: 'x.body',
-    })
-  return rows.filter((row) => row.body.trim() !== '')
 }
 
 export interface ToDecide {

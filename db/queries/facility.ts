@@ -1,5 +1,12 @@
-import type { ModeFacts, ModeRecord, SiteFacts, SiteRecord } from '@/lib/domain/facility/types'
+import type {
+  ModeFacts,
+  ModeRecord,
+  SiteFacts,
+  SiteRecord,
+  TelescopeFacts,
+} from '@/lib/domain/facility/types'
 import type { Database } from '../client.ts'
+import { retiredIds } from './retirements.ts'
 import type {
   InstrumentModesRow,
   InstrumentsRow,
@@ -20,9 +27,11 @@ export function siteFactsOf(row: SiteRecordsRow): SiteFacts {
     timeZone: row.time_zone,
     utcOffsetHours: row.utc_offset_hours,
     lowestAltitudeDeg: row.lowest_altitude_deg,
+    horizon: parsed(row.horizon),
     extinctionMagPerAirmass: parsed(row.extinction_mag_per_airmass),
     darkSkyMagArcsec2: parsed(row.dark_sky_mag_arcsec2),
     seeingArcsec: parsed(row.seeing_arcsec),
+    weather: row.weather === null ? null : parsed(row.weather),
   }
 }
 
@@ -92,6 +101,16 @@ export function modeFactsOf(row: ModeRecordsRow): ModeFacts {
   }
 }
 
+/** What a row of a telescope's record says. */
+export function telescopeFactsOf(row: TelescopeRecordsRow): TelescopeFacts {
+  return {
+    apertureM: row.aperture_m,
+    collectingAreaM2: row.collecting_area_m2,
+    horizon: parsed(row.horizon),
+    highestAltitudeDeg: row.highest_altitude_deg,
+  }
+}
+
 function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
   return {
     modeId: row.mode_id,
@@ -104,8 +123,7 @@ function modeOf(row: ModeRow, telescope: TelescopeRecordsRow): ModeRecord {
       slug: row.telescope_slug,
       name: row.telescope_name,
       recordVersion: telescope.record_version,
-      apertureM: telescope.aperture_m,
-      collectingAreaM2: telescope.collecting_area_m2,
+      ...telescopeFactsOf(telescope),
     },
     ...modeFactsOf(row),
   }
@@ -120,7 +138,7 @@ export function modeRecordsOnOffer(db: Database, callId: number, onDate: string)
   return modeRecordsAt(db, onDate, callId)
 }
 
-/** Every mode of the observatory as its record stood on a date; with a call, only those on offer in it. */
+/** Every mode of the observatory not retired, as its record stood on a date; with a call, those on offer in it. */
 export async function modeRecordsAt(
   db: Database,
   onDate: string,
@@ -132,7 +150,8 @@ export async function modeRecordsAt(
     .join('mode_records as r', 'r.mode_id', 'm.id')
     .where('r.valid_from', '<=', onDate)
     .modify((q) => {
-      if (callId !== null) q.whereIn('m.id', db('call_modes').where({ call_id: callId }).select('mode_id'))
+      if (callId === null) void q.whereNotIn('m.id', retiredIds(db, 'mode', onDate))
+      else void q.whereIn('m.id', db('call_modes').where({ call_id: callId }).select('mode_id'))
     })
     .orderBy(['t.id', 'i.id', 'm.id', 'r.record_version'])
     .select<ModeRow[]>('r.*', {
@@ -146,30 +165,49 @@ export async function modeRecordsAt(
       telescope_name: 't.name',
     })
   const latest = [...latestBy(rows, (row) => row.mode_id).values()]
-  const telescopes = latestBy(
-    await db('telescope_records')
-      .whereIn('telescope_id', [...new Set(latest.map((row) => row.telescope_id))])
-      .andWhere('valid_from', '<=', onDate)
-      .orderBy('record_version'),
-    (row) => row.telescope_id,
-  )
-  return latest.map((row) => {
+  const telescopes = await telescopeRecordsAt(db, onDate, [...new Set(latest.map((row) => row.telescope_id))])
+  return latest.flatMap((row) => {
     const telescope = telescopes.get(row.telescope_id)
-    if (!telescope) throw new Error(`telescope ${row.telescope_id} has no record for ${onDate}`)
-    return modeOf(row, telescope)
+    return telescope ? [modeOf(row, telescope)] : []
   })
 }
 
-/** Every site with its record in force on a date. */
+/** Every site not retired that has a record in force on a date, with it. */
 export async function siteRecordsAt(db: Database, onDate: string): Promise<SiteRecord[]> {
-  const sites = await db('sites').orderBy('id').select('id')
+  const begun = db('site_records').where('valid_from', '<=', onDate).select('site_id')
+  const sites = await db('sites')
+    .whereIn('id', begun)
+    .whereNotIn('id', retiredIds(db, 'site', onDate))
+    .orderBy('id')
+    .select('id')
   return Promise.all(sites.map(({ id }) => siteRecordAt(db, id, onDate)))
 }
 
-/** Every telescope with the site it stands on. */
+/** The record of each telescope in force on a date, by telescope. */
+async function telescopeRecordsAt(db: Database, onDate: string, ids: readonly number[]) {
+  const rows = await db('telescope_records')
+    .whereIn('telescope_id', ids)
+    .andWhere('valid_from', '<=', onDate)
+    .orderBy('record_version')
+  return latestBy(rows, (row) => row.telescope_id)
+}
+
+/** Every telescope not retired with the site it stands on and its record in force on a date. */
 export async function telescopesAtSites(
   db: Database,
-): Promise<{ id: number; siteId: number; slug: string; name: string }[]> {
-  const rows = await db('telescopes').orderBy('id').select<TelescopesRow[]>('*')
-  return rows.map((row) => ({ id: row.id, siteId: row.site_id, slug: row.slug, name: row.name }))
+  onDate: string,
+): Promise<{ id: number; siteId: number; slug: string; name: string; facts: TelescopeFacts }[]> {
+  const rows = await db('telescopes')
+    .whereNotIn('id', retiredIds(db, 'telescope', onDate))
+    .orderBy('id')
+    .select<TelescopesRow[]>('*')
+  const records = await telescopeRecordsAt(
+    db,
+    onDate,
+    rows.map(({ id }) => id),
+  )
+  return rows.flatMap(({ id, site_id: siteId, slug, name }) => {
+    const record = records.get(id)
+    return record ? [{ id, siteId, slug, name, facts: telescopeFactsOf(record) }] : []
+  })
 }

@@ -1,4 +1,4 @@
-import type { RecordUse } from '../../lib/domain/facility/types.ts'
+import type { FacilityKind, RecordUse } from '../../lib/domain/facility/types.ts'
 import type { Database } from '../client.ts'
 import type { RecordKind } from './facilityRecords.ts'
 
@@ -15,36 +15,75 @@ export interface ModeOwner extends Owner {
   offeredIn: number[]
 }
 
-const tables = { site: 'sites', telescope: 'telescopes', mode: 'instrument_modes' } as const
+const tables = {
+  site: 'sites',
+  telescope: 'telescopes',
+  instrument: 'instruments',
+  mode: 'instrument_modes',
+} as const satisfies Record<FacilityKind, string>
 
-/** A site, telescope or mode by its short name; null when there is none. */
-export async function findOwner(db: Database, kind: RecordKind, slug: string): Promise<Owner | null> {
+/** A site, telescope, instrument or mode by its short name; null when there is none. */
+export async function findOwner(db: Database, kind: FacilityKind, slug: string): Promise<Owner | null> {
   const row = await db(tables[kind]).where({ slug }).first<Owner | undefined>('id', 'slug', 'name')
   return row ?? null
 }
 
-/** Every site, telescope or mode. */
-export function allOwners(db: Database, kind: RecordKind): Promise<Owner[]> {
+/** Every site, telescope, instrument or mode. */
+export function allOwners(db: Database, kind: FacilityKind): Promise<Owner[]> {
   return db(tables[kind]).orderBy('id').select<Owner[]>('id', 'slug', 'name')
 }
 
+/** Every instrument with the telescope that carries it. */
+export function allInstruments(db: Database): Promise<(Owner & { telescope: string })[]> {
+  return db('instruments as i')
+    .join('telescopes as t', 't.id', 'i.telescope_id')
+    .orderBy(['t.id', 'i.id'])
+    .select<(Owner & { telescope: string })[]>('i.id', 'i.slug', 'i.name', { telescope: 't.name' })
+}
+
+const carrierColumns = {
+  site: null,
+  telescope: 'site_id',
+  instrument: 'telescope_id',
+  mode: 'instrument_id',
+} as const satisfies Record<FacilityKind, string | null>
+
+/** Whether something on the same carrier, or another site, goes by this name; capitals make no difference. */
+export async function isNameTaken(
+  db: Database,
+  kind: FacilityKind,
+  name: string,
+  carrierId: number,
+): Promise<boolean> {
+  const column = carrierColumns[kind]
+  const row = await db(tables[kind])
+    .where({ name, ...(column ? { [column]: carrierId } : {}) })
+    .first<{ id: number } | undefined>('id')
+  return row !== undefined
+}
+
 /** Takes the lock under which one version of its record is written at a time. */
-export async function lockOwner(db: Database, kind: RecordKind, id: number): Promise<boolean> {
+export async function lockOwner(db: Database, kind: FacilityKind, id: number): Promise<boolean> {
   const row = await db(tables[kind]).where({ id }).forUpdate().first<{ id: number } | undefined>('id')
   return row !== undefined
 }
 
-/** Modes of instruments, or of all of them, with where they belong and the calls that offer them. */
+/** Modes of instruments, under one of the facility, or all, with where they belong and the calls that offer them. */
 export async function modeOwners(
   db: Database,
-  which: { instrumentIds: readonly number[] } | { slug: string } | 'all',
+  which: { instrumentIds: readonly number[] } | { slug: string } | { kind: FacilityKind; id: number } | 'all',
 ): Promise<ModeOwner[]> {
   const rows = await db('instrument_modes as m')
     .join('instruments as i', 'i.id', 'm.instrument_id')
     .join('telescopes as t', 't.id', 'i.telescope_id')
     .modify((q) => {
       if (which === 'all') return
-      if ('slug' in which) void q.where('m.slug', which.slug)
+      if ('kind' in which)
+        void q.where(
+          { site: 't.site_id', telescope: 't.id', instrument: 'i.id', mode: 'm.id' }[which.kind],
+          which.id,
+        )
+      else if ('slug' in which) void q.where('m.slug', which.slug)
       else void q.whereIn('i.id', which.instrumentIds)
     })
     .orderBy(['t.id', 'i.id', 'm.id'])

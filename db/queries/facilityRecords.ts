@@ -1,7 +1,7 @@
 import type { ModeFacts, RecordVersion, SiteFacts, TelescopeFacts } from '../../lib/domain/facility/types.ts'
 import type { Database } from '../client.ts'
 import type { ModeRecordsRow, SiteRecordsRow, TelescopeRecordsRow } from '../tables.ts'
-import { modeFactsOf, siteFactsOf } from './facility.ts'
+import { modeFactsOf, siteFactsOf, telescopeFactsOf } from './facility.ts'
 
 /** What a record is of; the logbook knows a version as `<kind> record`, `<key>.<version>`. */
 export type RecordKind = 'site' | 'telescope' | 'mode'
@@ -38,6 +38,16 @@ async function versionsOf<Row extends RecordRow, Facts>(
   }))
 }
 
+/** The earliest evening any version of a record begins on, of every site, telescope or mode, by key. */
+export async function firstEvenings(db: Database, kind: RecordKind): Promise<Map<number, string>> {
+  const key = `${kind}_id`
+  const rows = (await db(`${kind}_records`)
+    .groupBy(key)
+    .select({ id: key })
+    .min({ begins_on: 'valid_from' })) as { id: number; begins_on: string }[]
+  return new Map(rows.map((row) => [row.id, row.begins_on]))
+}
+
 /** Every version of a site's record, the newest first. */
 export async function siteVersions(db: Database, siteId: number): Promise<RecordVersion<SiteFacts>[]> {
   const rows = await db('site_records').where({ site_id: siteId }).orderBy('record_version', 'desc')
@@ -56,7 +66,7 @@ export async function telescopeVersions(
     db,
     rows,
     { kind: 'telescope', id: telescopeId },
-    (row) => ({ apertureM: row.aperture_m, collectingAreaM2: row.collecting_area_m2 }),
+    telescopeFactsOf,
   )
 }
 
@@ -82,9 +92,11 @@ export async function insertSiteRecord(
     time_zone: facts.timeZone,
     utc_offset_hours: facts.utcOffsetHours,
     lowest_altitude_deg: facts.lowestAltitudeDeg,
+    horizon: JSON.stringify(facts.horizon),
     extinction_mag_per_airmass: JSON.stringify(facts.extinctionMagPerAirmass),
     dark_sky_mag_arcsec2: JSON.stringify(facts.darkSkyMagArcsec2),
     seeing_arcsec: JSON.stringify(facts.seeingArcsec),
+    weather: facts.weather ? JSON.stringify(facts.weather) : null,
   })
 }
 
@@ -99,6 +111,8 @@ export async function insertTelescopeRecord(
     valid_from: version.validFrom,
     aperture_m: version.facts.apertureM,
     collecting_area_m2: version.facts.collectingAreaM2,
+    horizon: JSON.stringify(version.facts.horizon),
+    highest_altitude_deg: version.facts.highestAltitudeDeg,
   })
 }
 

@@ -1,6 +1,6 @@
 import type { Database } from '../client.ts'
 import { atNow } from './clock.ts'
-import type { FeesRow, MoneyEntriesRow, WaiversRow } from '../tables.ts'
+import type { FeesRow, WaiversRow } from '../tables.ts'
 
 export type FeeState = FeesRow['state']
 
@@ -9,7 +9,31 @@ export async function feeOf(db: Database, proposalId: number): Promise<FeesRow |
   return (await db('fees').where({ proposal_id: proposalId }).first()) ?? null
 }
 
-/** The same, locked until the transaction ends: whatever settles or cancels it begins here. */
+export async function findFee(db: Database, id: number): Promise<FeesRow | null> {
+  return (await db('fees').where({ id }).first()) ?? null
+}
+
+/** The fee of a proposal by its reference, unlocked; null where there is none. */
+export async function feeByReference(db: Database, reference: string): Promise<FeesRow | null> {
+  const row = await db('fees as f')
+    .join('proposals as p', 'p.id', 'f.proposal_id')
+    .where('p.reference', reference)
+    .first('f.*')
+  return (row as FeesRow | undefined) ?? null
+}
+
+/** Moves the day a fee that is owed is to be settled by. */
+export async function setDueAt(
+  db: Database,
+  fee: Pick<FeesRow, 'id' | 'version'>,
+  dueAt: Date,
+): Promise<void> {
+  await db('fees')
+    .where({ id: fee.id, version: fee.version, state: 'due' })
+    .update({ due_at: dueAt, version: fee.version + 1, settled_at: null })
+}
+
+/** A fee locked until the transaction ends: whatever settles or cancels it begins here. */
 export async function lockFee(db: Database, id: number): Promise<FeesRow | null> {
   return (await db('fees').where({ id }).forUpdate().first()) ?? null
 }
@@ -29,13 +53,22 @@ export async function lockFeeOf(db: Database, reference: string): Promise<FeesRo
 
 export async function insertFee(
   db: Database,
-  fee: { proposalId: number; amountMinor: number; currency: string; dueAt: Date },
+  fee: {
+    proposalId: number
+    amountMinor: number
+    currency: string
+    dueAt: Date
+    affiliationClass: FeesRow['affiliation_class']
+    lateMinor: number
+  },
 ): Promise<number> {
   const [id] = await db('fees').insert({
     proposal_id: fee.proposalId,
     amount_minor: fee.amountMinor,
     currency: fee.currency,
     due_at: fee.dueAt,
+    affiliation_class: fee.affiliationClass,
+    late_minor: fee.lateMinor,
   })
   return Number(id)
 }
@@ -65,25 +98,6 @@ export async function feesPastGrace(
     .whereNotExists(db('waivers').select('id').whereRaw("fee_id = f.id AND state = 'asked'"))
     .orderBy('f.id')
     .select({ feeId: 'f.id', proposalId: 'p.id', reference: 'p.reference' })
-}
-
-export interface MoneyMovement {
-  /** Unique name of the movement, e.g. 'billed:12': written twice, it fails. */
-  movement: string
-  feeId: number
-  from: MoneyEntriesRow['account']
-  to: MoneyEntriesRow['account']
-  amountMinor: number
-  currency: string
-}
-
-/** Two entries of the money ledger that sum to zero. */
-export async function moveMoney(db: Database, move: MoneyMovement): Promise<void> {
-  const common = { movement: move.movement, fee_id: move.feeId, currency: move.currency }
-  await db('money_entries').insert([
-    { ...common, account: move.to, amount_minor: move.amountMinor },
-    { ...common, account: move.from, amount_minor: -move.amountMinor },
-  ])
 }
 
 export async function insertWaiver(

@@ -1,4 +1,5 @@
 import type { Database } from '../client.ts'
+import { promisesOfMoney } from './moneyInvariants.ts'
 
 export interface Breach {
   invariant: string
@@ -32,33 +33,13 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     `SELECT v.id FROM proposal_versions v
       WHERE NOT EXISTS (SELECT 1 FROM outbox b WHERE b.template = 'proposal-sent' AND b.dedupe_key LIKE CONCAT('sent:', v.proposal_id, ':', v.version_number, ':%'))`,
   ],
-  [
-    'I2 a paid fee has exactly its amount in succeeded payments less refunds, made or promised',
-    `SELECT f.id FROM fees f
-      LEFT JOIN (SELECT fee_id, SUM(amount_minor) paid FROM payments WHERE state = 'succeeded' GROUP BY fee_id) p ON p.fee_id = f.id
-      LEFT JOIN (SELECT q.fee_id, SUM(r.amount_minor) back FROM refunds r JOIN payments q ON q.id = r.payment_id WHERE r.state <> 'failed' GROUP BY q.fee_id) r ON r.fee_id = f.id
-      WHERE (f.state = 'paid' AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> f.amount_minor)
-         OR (f.state IN ('due', 'waived', 'lapsed') AND COALESCE(p.paid, 0) - COALESCE(r.back, 0) <> 0)`,
-  ],
-  [
-    'I2 a succeeded payment has one receipt',
-    `SELECT p.id FROM payments p LEFT JOIN receipts r ON r.payment_id = p.id WHERE p.state = 'succeeded' GROUP BY p.id HAVING COUNT(r.id) <> 1`,
-  ],
-  [
-    'I2 every movement of money sums to zero',
-    'SELECT movement FROM money_entries GROUP BY movement, currency HAVING SUM(amount_minor) <> 0',
-  ],
-  [
-    'I2 receipt numbers have no gaps',
-    `SELECT 1 AS gap FROM receipts GROUP BY SUBSTRING(number, 4, 4)
-      HAVING MAX(CAST(SUBSTRING_INDEX(number, '-', -1) AS UNSIGNED)) <> COUNT(*)`,
-  ],
+  ...promisesOfMoney,
   [
     'I3 movements of time sum to zero',
     'SELECT transfer_id FROM time_entries GROUP BY transfer_id HAVING SUM(seconds) <> 0',
   ],
   [
-    'I3 time awarded does not exceed the time on offer',
+    'I3 time awarded does not exceed the time on offer, less what is held back',
     `SELECT c.id, t.id AS telescope FROM calls c JOIN telescopes t
       JOIN (SELECT p.call_id, i.telescope_id, SUM(a.seconds) given FROM award_lines a JOIN decisions d ON d.id = a.decision_id
               JOIN proposals p ON p.id = d.proposal_id JOIN instruments i ON i.id = a.instrument_id
@@ -66,7 +47,19 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
              GROUP BY p.call_id, i.telescope_id) g ON g.call_id = c.id AND g.telescope_id = t.id
       LEFT JOIN (SELECT call_id, telescope_id, SUM(dark_seconds) offered FROM night_blocks WHERE use_for = 'science' GROUP BY call_id, telescope_id) o
              ON o.call_id = c.id AND o.telescope_id = t.id
-      WHERE g.given > COALESCE(o.offered, 0)`,
+      LEFT JOIN (SELECT call_id, telescope_id, SUM(seconds) held FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id) h
+             ON h.call_id = c.id AND h.telescope_id = t.id
+      WHERE g.given > COALESCE(o.offered, 0) - COALESCE(h.held, 0)`,
+  ],
+  [
+    'I3 what is never to be given time is given none',
+    `SELECT n.id FROM night_choices n JOIN decisions d ON d.proposal_id = n.proposal_id JOIN award_lines a ON a.decision_id = d.id
+      WHERE n.choice = 'never' AND n.superseded_at IS NULL AND d.superseded_at IS NULL AND a.superseded_at IS NULL AND a.seconds > 0`,
+  ],
+  [
+    'I3 one choice stands for a proposal, and one time held back on a telescope of a call',
+    `SELECT proposal_id FROM night_choices WHERE superseded_at IS NULL GROUP BY proposal_id HAVING COUNT(*) > 1
+      UNION ALL SELECT telescope_id FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id HAVING COUNT(*) > 1`,
   ],
   [
     'I4 nobody with an interest holds an assignment or a score',
@@ -78,7 +71,16 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     `SELECT a.id FROM assignments a JOIN proposal_people q ON q.proposal_id = a.proposal_id AND q.person_id = a.person_id
       WHERE a.withdrawn_at IS NULL`,
   ],
+  [
+    'I10 a decision made known was approved, as it stood, by someone who had not changed it last',
+    `SELECT id FROM decisions WHERE released_at IS NOT NULL
+        AND (approved_by IS NULL OR approved_by = changed_by OR approved_version <> version - 1)`,
+  ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
+  [
+    'I5 no letter to many goes twice to one address',
+    'SELECT bulk_letter_id FROM outbox WHERE bulk_letter_id IS NOT NULL GROUP BY bulk_letter_id, to_email HAVING COUNT(*) > 1',
+  ],
   [
     'I6 the logbook is an unbroken chain',
     `SELECT b.id FROM logbook b LEFT JOIN logbook a ON a.id = (SELECT MAX(id) FROM logbook WHERE id < b.id)
@@ -91,6 +93,13 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
   [
     'I8 version numbers run from one without a gap',
     `SELECT proposal_id FROM proposal_versions GROUP BY proposal_id HAVING MAX(version_number) <> COUNT(*) OR MIN(version_number) <> 1`,
+  ],
+  [
+    'a call that has not closed offers nothing that retires before its season is over',
+    `SELECT c.id FROM call_modes c JOIN calls k ON k.id = c.call_id JOIN instrument_modes m ON m.id = c.mode_id
+      JOIN instruments i ON i.id = m.instrument_id JOIN telescopes t ON t.id = i.telescope_id
+      JOIN facility_retirements r ON r.mode_id = m.id OR r.instrument_id = i.id OR r.telescope_id = t.id OR r.site_id = t.site_id
+      WHERE (k.stage = 'planned' OR (k.stage = 'published' AND k.closes_at > UTC_TIMESTAMP(3))) AND r.retired_from <= k.season_to`,
   ],
   [
     'I9 a target stands in a group of its own proposal',

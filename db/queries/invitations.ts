@@ -14,6 +14,8 @@ export interface NewInvitation {
   proposalId?: number
   invitedBy: number
   lifeDays: number
+  /** Until when the role will hold; without it, no end. */
+  roleUntilAt?: Date | null
 }
 
 export async function insertInvitation(db: Database, invitation: NewInvitation): Promise<number> {
@@ -27,6 +29,7 @@ export async function insertInvitation(db: Database, invitation: NewInvitation):
     instrument_id: invitation.instrumentId,
     proposal_id: invitation.proposalId ?? null,
     invited_by: invitation.invitedBy,
+    role_until_at: invitation.roleUntilAt ?? null,
     expires_at: utcIn(db, 86_400 * invitation.lifeDays),
   })
   return id as number
@@ -103,18 +106,22 @@ export async function tieInvestigator(
     .update({ person_id: given.personId })
 }
 
-/** The next free number on a panel, under a lock, so that two members never share one. */
-export async function addPanelMember(
+/** Whether the same role is offered to an address by an invitation that is still open. */
+export async function isInvitedAlready(
   db: Database,
-  member: { panelId: number; personId: number; seat: 'chair' | 'deputy' | 'member' },
-): Promise<void> {
-  const taken = await db('panel_members').where({ panel_id: member.panelId }).forUpdate()
-  if (taken.some((row) => row.person_id === member.personId)) return
-  const number = Math.max(0, ...taken.map((row) => row.number)) + 1
-  await db('panel_members').insert({
-    panel_id: member.panelId,
-    person_id: member.personId,
-    seat: member.seat,
-    number,
-  })
+  wanted: Pick<NewInvitation, 'email' | 'role' | 'panelId' | 'instrumentId'>,
+): Promise<boolean> {
+  const row = await db('invitations')
+    .where({
+      email: wanted.email,
+      role: wanted.role,
+      panel_id: wanted.panelId,
+      instrument_id: wanted.instrumentId,
+      proposal_id: null,
+    })
+    .whereNull('accepted_at')
+    .whereNull('withdrawn_at')
+    .andWhere('expires_at', '>', utcNow(db))
+    .first('id')
+  return row !== undefined
 }

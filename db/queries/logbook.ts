@@ -77,15 +77,47 @@ export interface LogbookLine {
   subject_id: string
   before_value: string | null
   after_value: string | null
+  request_id: string
   address: string
+  hash: string
 }
 
+/** What of the logbook is asked for; what is left out narrows nothing. */
+export interface LogbookFilter {
+  /** Part of the name of whoever acted, or of their address. */
+  who?: string | undefined
+  personId?: number | undefined
+  /** A deed; with a minus in front, every other. */
+  action?: string | undefined
+  subjectKind?: string | undefined
+  subjectId?: string | undefined
+  address?: string | undefined
+  since?: Date | undefined
+  until?: Date | undefined
+}
+
+const like = (text: string) => `%${text.replace(/[\\%_]/g, (mark) => `\\${mark}`)}%`
+
 /** The newest rows with the names of who acted; older ones by the id of the last one seen. */
-export function listLogbook(db: Database, limit: number, beforeId: number | null): Promise<LogbookLine[]> {
+export function listLogbook(
+  db: Database,
+  limit: number,
+  beforeId: number | null,
+  filter: LogbookFilter = {},
+): Promise<LogbookLine[]> {
+  const { who, personId, action, subjectKind, subjectId, address, since, until } = filter
   return db('logbook as l')
     .leftJoin('people as p', 'p.id', 'l.person_id')
     .modify((q) => {
       if (beforeId !== null) q.where('l.id', '<', beforeId)
+      if (who) q.where((w) => w.where('p.name', 'like', like(who)).orWhere('p.email', 'like', like(who)))
+      if (personId !== undefined) q.where('l.person_id', personId)
+      if (action) q.where('l.action', action.startsWith('-') ? '<>' : '=', action.replace(/^-/, ''))
+      if (subjectKind) q.where('l.subject_kind', subjectKind)
+      if (subjectId) q.where('l.subject_id', subjectId)
+      if (address) q.where('l.address', address)
+      if (since) q.where('l.at', '>=', since)
+      if (until) q.where('l.at', '<', until)
     })
     .orderBy('l.id', 'desc')
     .limit(limit)
@@ -99,6 +131,22 @@ export function listLogbook(db: Database, limit: number, beforeId: number | null
       'l.subject_id',
       'l.before_value',
       'l.after_value',
+      'l.request_id',
       'l.address',
+      'l.hash',
     )
+}
+
+/** The deeds and the things they were done to, as they occur. */
+export async function loggedKinds(db: Database): Promise<{ actions: string[]; subjects: string[] }> {
+  const [actions, subjects] = await Promise.all([
+    db('logbook').distinct('action').orderBy('action'),
+    db('logbook').distinct('subject_kind').orderBy('subject_kind'),
+  ])
+  return { actions: actions.map((row) => row.action), subjects: subjects.map((row) => row.subject_kind) }
+}
+
+/** The hash the chain should end with. */
+export async function logbookHead(db: Database): Promise<string | null> {
+  return (await db('logbook_head').where({ id: 1 }).first('last_hash'))?.last_hash ?? null
 }

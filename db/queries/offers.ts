@@ -1,4 +1,10 @@
 import type { Database } from '../client.ts'
+import { retiredIds } from './retirements.ts'
+
+/** Whether a call offers a mode at all. */
+export async function offersAnyMode(db: Database, callId: number): Promise<boolean> {
+  return (await db('call_modes').where({ call_id: callId }).first('id')) !== undefined
+}
 
 export interface OfferedMode {
   id: number
@@ -10,16 +16,29 @@ export interface OfferedMode {
   proposals: number
 }
 
-/** Every mode of the call's site, whether the call offers it, and how many of its proposals observe with it. */
+/**
+ * Every mode of the call's site that has a record as the season begins and does not retire before it ends, and
+ * whatever is on offer: whether the call offers it, and how many of its proposals observe with it.
+ */
 export async function modesForOffer(
   db: Database,
-  call: { id: number; siteId: number },
+  call: { id: number; siteId: number; seasonFrom: string; seasonTo: string },
 ): Promise<OfferedMode[]> {
   const rows = (await db('instrument_modes as m')
     .join('instruments as i', 'i.id', 'm.instrument_id')
     .join('telescopes as t', 't.id', 'i.telescope_id')
     .leftJoin('call_modes as c', (on) => void on.on('c.mode_id', 'm.id').andOnVal('c.call_id', call.id))
     .where('t.site_id', call.siteId)
+    .andWhere((q) => {
+      const isThere = (table: 'mode_records' | 'telescope_records') =>
+        db(table).where('valid_from', '<=', call.seasonFrom)
+      void q.whereNotNull('c.id').orWhere((free) => {
+        void free
+          .whereNotIn('m.id', retiredIds(db, 'mode', call.seasonTo))
+          .whereIn('m.id', isThere('mode_records').select('mode_id'))
+          .whereIn('t.id', isThere('telescope_records').select('telescope_id'))
+      })
+    })
     .orderBy(['t.id', 'i.id', 'm.id'])
     .select('m.id', 'm.slug', 'm.name', {
       instrument: 'i.name',

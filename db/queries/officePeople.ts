@@ -8,13 +8,16 @@ export interface OfficePerson {
   institute: string
   confirmedAt: Date | null
   disabledAt: Date | null
+  addressFailedAt: Date | null
+  erasureAskedAt: Date | null
   roles: { role: string; call: number | null; panel: string | null; instrument: string | null }[]
 }
 
 /** Everyone with an account and the roles in force, by name; two queries whatever the number. */
 export async function listPeople(db: Database): Promise<OfficePerson[]> {
   const [people, grants] = await Promise.all([
-    db('people').orderBy('sort_name').limit(2000),
+    // Who was merged into another or erased is nobody to look for.
+    db('people').whereNull('merged_into_id').whereNull('erased_at').orderBy('sort_name').limit(5000),
     db('role_grants as g')
       .leftJoin('calls as c', 'c.id', 'g.call_id')
       .leftJoin('panels as p', 'p.id', 'g.panel_id')
@@ -40,6 +43,8 @@ export async function listPeople(db: Database): Promise<OfficePerson[]> {
     institute: row.institute_text,
     confirmedAt: row.email_confirmed_at,
     disabledAt: row.disabled_at,
+    addressFailedAt: row.address_failed_at,
+    erasureAskedAt: row.erasure_asked_at,
     roles: (byPerson.get(row.id) ?? []).map(({ role, call, panel, instrument }) => ({
       role,
       call,
@@ -101,6 +106,8 @@ export async function countOffice(db: Database): Promise<number> {
     .join('people as p', 'p.id', 'g.person_id')
     .where('g.role', 'office')
     .whereNull('g.revoked_at')
+    .andWhere('g.from_at', '<=', utcNow(db))
+    .andWhere((q) => q.whereNull('g.until_at').orWhere('g.until_at', '>', utcNow(db)))
     .whereNull('p.disabled_at')
     .countDistinct<{ n: string }[]>('p.id as n')
   return Number(row?.n ?? 0)

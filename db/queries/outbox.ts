@@ -12,6 +12,12 @@ export interface NewLetter {
   subject: string
   text: string
   html: string
+  /** The letter to many it belongs to. */
+  bulkLetterId?: number
+  /** The letter it repeats. */
+  againOf?: number
+  /** Number of an invoice or credit note. */
+  attachment: string | null
 }
 
 /** Adds a letter; the same cause and person a second time is the same letter, and nothing happens. */
@@ -27,6 +33,9 @@ export async function insertLetter(db: Database, letter: NewLetter): Promise<voi
       subject: letter.subject,
       text_body: letter.text,
       html_body: letter.html,
+      bulk_letter_id: letter.bulkLetterId ?? null,
+      again_of: letter.againOf ?? null,
+      attachment: letter.attachment,
       next_attempt_at: utcNow(db),
     })
     .onConflict('dedupe_key')
@@ -72,16 +81,16 @@ export async function markSent(db: Database, id: number): Promise<void> {
     })
 }
 
-/** Puts a letter back for a later try, or parks it. */
+/** Puts a letter back for a later try, parks it, or keeps that its address was refused. */
 export async function markFailed(
   db: Database,
   id: number,
-  outcome: { error: string; waitSeconds: number; park: boolean },
+  outcome: { error: string; waitSeconds: number; state: 'queued' | 'parked' | 'bounced' },
 ): Promise<void> {
   await db('outbox')
     .where({ id })
     .update({
-      state: outcome.park ? 'parked' : 'queued',
+      state: outcome.state,
       attempts: db.raw('attempts + 1') as unknown as number,
       claimed_until: null,
       last_error: outcome.error.slice(0, 300),
@@ -111,16 +120,34 @@ export function listLetters(
       'next_attempt_at',
       'claimed_until',
       'last_error',
+      'bulk_letter_id',
+      'again_of',
       'sent_at',
       'created_at',
     )
 }
 
-/** Puts a parked or waiting letter at the head of the queue; false when it has been sent or is being sent. */
+export async function findLetter(db: Database, id: number): Promise<OutboxRow | null> {
+  return (await db('outbox').where({ id }).first()) ?? null
+}
+
+/** How often a letter was sent once more. */
+export async function timesRepeated(db: Database, id: number): Promise<number> {
+  const [row] = await db('outbox').where({ again_of: id }).count<{ n: string }[]>({ n: '*' })
+  return Number(row?.n ?? 0)
+}
+
+/** Puts a letter that was not taken at the head of the queue; false when it was, is being sent, or was stopped. */
 export async function requeueLetter(db: Database, id: number): Promise<boolean> {
   const changed = await db('outbox')
     .where({ id })
-    .whereIn('state', ['queued', 'parked'])
+    .whereIn('state', ['queued', 'parked', 'bounced'])
     .update({ state: 'queued', attempts: 0, next_attempt_at: utcNow(db), claimed_until: null })
   return changed === 1
+}
+
+/** The newest letter of each template that was ever written. */
+export async function newestByTemplate(db: Database): Promise<{ template: string; id: number }[]> {
+  const rows = await db('outbox').groupBy('template').orderBy('template').select('template').max({ id: 'id' })
+  return rows.map((row) => ({ template: row.template, id: Number(row.id) }))
 }

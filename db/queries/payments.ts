@@ -1,5 +1,5 @@
 import type { Database } from '../client.ts'
-import type { PaymentsRow, RefundsRow } from '../tables.ts'
+import type { PaymentsRow } from '../tables.ts'
 
 export interface NewPayment {
   feeId: number
@@ -100,43 +100,4 @@ export async function insertPaymentEvent(db: Database, event: NewPaymentEvent): 
     effect: event.effect,
     provider_created_at: event.providerCreatedAt,
   })
-}
-
-export async function insertRefund(
-  db: Database,
-  refund: {
-    paymentId: number
-    idempotencyKey: string
-    amountMinor: number
-    reason: string
-    madeBy: number | null
-  },
-): Promise<number> {
-  const [id] = await db('refunds').insert({
-    payment_id: refund.paymentId,
-    idempotency_key: refund.idempotencyKey,
-    amount_minor: refund.amountMinor,
-    reason: refund.reason,
-    made_by: refund.madeBy,
-  })
-  return Number(id)
-}
-
-/** Refunds decided and not yet carried out by the payment firm. */
-export function openRefunds(db: Database, limit: number): Promise<RefundsRow[]> {
-  return db('refunds').where({ state: 'created' }).orderBy('id').limit(limit)
-}
-
-export async function lockRefund(db: Database, id: number): Promise<RefundsRow | null> {
-  return (await db('refunds').where({ id }).forUpdate().first()) ?? null
-}
-
-export async function closeRefund(
-  db: Database,
-  id: number,
-  outcome: { state: 'succeeded' | 'failed'; providerRefundId: string },
-): Promise<void> {
-  await db('refunds')
-    .where({ id })
-    .update({ state: outcome.state, provider_refund_id: outcome.providerRefundId })
 }

@@ -6,6 +6,11 @@ export async function findPerson(db: Database, id: number): Promise<PeopleRow | 
   return (await db('people').where({ id }).first()) ?? null
 }
 
+/** Holds an account's row, so that nothing is decided about it meanwhile. */
+export async function lockPerson(db: Database, id: number): Promise<void> {
+  await db('people').where({ id }).forUpdate().first('id')
+}
+
 /** By address, compared without case as mail servers do. */
 export async function findPersonByEmail(db: Database, email: string): Promise<PeopleRow | null> {
   return (await db('people').where({ email: email.trim() }).first()) ?? null

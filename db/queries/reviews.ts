@@ -2,14 +2,18 @@ import type { Audience, SheetText } from '../../lib/domain/reviews/types.ts'
 import type { Database } from '../client.ts'
 import { utcNow } from '../utcNow.ts'
 
-/** The scores that stand, by assignment and criterion: the last event of each counts. */
+/** Scores given before the panel met, or while it discussed: never mixed. */
+export type ScoreRound = 'before-discussion' | 'after-discussion'
+
+/** The scores of a round that stand, by assignment and criterion: the last event of each counts. */
 export async function standingScores(
   db: Database,
   assignmentIds: readonly number[],
+  round: ScoreRound = 'before-discussion',
 ): Promise<Map<number, Map<number, number | null>>> {
   const newest = db('score_events')
     .whereIn('assignment_id', assignmentIds)
-    .where('round', 'before-discussion')
+    .where({ round })
     .groupBy('assignment_id', 'criterion_id')
     .max('id')
   const rows = await db('score_events')
@@ -25,13 +29,19 @@ export async function standingScores(
 
 export async function insertScoreEvent(
   db: Database,
-  event: { assignmentId: number; criterionId: number; criterionVersion: number; halfPoints: number | null },
+  event: {
+    assignmentId: number
+    criterionId: number
+    criterionVersion: number
+    halfPoints: number | null
+    round?: ScoreRound
+  },
 ): Promise<void> {
   await db('score_events').insert({
     assignment_id: event.assignmentId,
     criterion_id: event.criterionId,
     criterion_version: event.criterionVersion,
-    round: 'before-discussion',
+    round: event.round ?? 'before-discussion',
     half_points: event.halfPoints,
   })
 }

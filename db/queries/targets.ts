@@ -2,6 +2,7 @@ import type { Brightness, LineLight, Observation, Opportunity, Target } from '@/
 import { spectrumOf } from '@/lib/domain/targets/spectrumOf'
 import { readSpectrumTable, spectrumText } from '@/lib/domain/targets/spectrumTable'
 import type { Database } from '../client.ts'
+import { writeQuantities } from './targetQuantities.ts'
 import type { TargetQuantitiesRow, TargetsRow } from '../tables.ts'
 
 function brightnessOf(row: TargetQuantitiesRow | undefined): Brightness | null {
@@ -63,6 +64,7 @@ function targetOf(row: GroupedRow, quantities: readonly TargetQuantitiesRow[] = 
     pmDecMasYr: row.pm_dec_mas_yr,
     geometry: row.geometry,
     effectiveRadiusArcsec: row.effective_radius_arcsec,
+    effectiveRadiusErrorArcsec: quantities.find(({ quantity }) => quantity === 'size')?.error ?? null,
     sersicIndex: row.sersic_index,
     redshiftTyped: row.redshift_typed,
     redshift: row.redshift,
@@ -87,7 +89,7 @@ function targetOf(row: GroupedRow, quantities: readonly TargetQuantitiesRow[] = 
   }
 }
 
-/** What is known of the light of targets, by target. */
+/** What is known of the light and size of targets, by target. */
 async function quantitiesOf(db: Database, targetIds: number[]): Promise<Map<number, TargetQuantitiesRow[]>> {
   const rows = await db('target_quantities').whereIn('target_id', targetIds).orderBy('id')
   const byTarget = new Map<number, TargetQuantitiesRow[]>()
@@ -156,40 +158,6 @@ function columnsOf(values: TargetValues) {
   }
 }
 
-async function writeLine(db: Database, targetId: number, line: LineLight): Promise<void> {
-  await db('target_quantities').insert({
-    target_id: targetId,
-    quantity: line.kind === 'flux' ? 'line-flux' : 'luminosity',
-    value: line.value,
-    error: line.error,
-    unit: line.kind === 'flux' ? 'erg.s-1.cm-2' : 'erg.s-1',
-    band: line.name,
-    provenance: line.kind === 'flux' ? 'observed' : 'predicted',
-    width_km_s: line.widthKmS,
-  })
-}
-
-async function writeLight(
-  db: Database,
-  targetId: number,
-  { brightness, line }: Pick<TargetValues, 'brightness' | 'line'>,
-): Promise<void> {
-  await db('target_quantities').where({ target_id: targetId }).del()
-  if (line) await writeLine(db, targetId, line)
-  if (!brightness) return
-  await db('target_quantities').insert({
-    target_id: targetId,
-    quantity: 'magnitude',
-    value: brightness.value,
-    error: brightness.error,
-    unit: 'mag',
-    magnitude_system: brightness.system,
-    band: brightness.band,
-    provenance: brightness.provenance,
-    source: brightness.source,
-  })
-}
-
 /** The key of a group by its name; null for no name, and for one that no group of the proposal has. */
 async function groupIdOf(db: Database, proposalId: number, name: string | null): Promise<number | null> {
   if (name === null) return null
@@ -199,7 +167,7 @@ async function groupIdOf(db: Database, proposalId: number, name: string | null):
 export async function insertTarget(db: Database, proposalId: number, values: TargetValues): Promise<number> {
   const group_id = await groupIdOf(db, proposalId, values.group ?? null)
   const [id = 0] = await db('targets').insert({ proposal_id: proposalId, group_id, ...columnsOf(values) })
-  await writeLight(db, id, values)
+  await writeQuantities(db, id, values)
   return id
 }
 
@@ -215,7 +183,7 @@ export async function updateTarget(
     .where({ id: target.id, version: target.version })
     .update({ group_id, ...columnsOf(values), version: target.version + 1 })
   if (changed === 0) return false
-  await writeLight(db, target.id, values)
+  await writeQuantities(db, target.id, values)
   return true
 }
 

@@ -74,6 +74,7 @@ export async function seedFacility(db: Database): Promise<{
     extinction_mag_per_airmass: JSON.stringify(site.extinction),
     dark_sky_mag_arcsec2: JSON.stringify(site.darkSky),
     seeing_arcsec: JSON.stringify(site.seeing),
+    weather: JSON.stringify(site.weather),
   })
 
   const telescopeIds = new Map<string, number>()
@@ -89,6 +90,8 @@ export async function seedFacility(db: Database): Promise<{
       valid_from: validFrom,
       aperture_m: telescope.aperture_m,
       collecting_area_m2: telescope.collecting_area_m2,
+      horizon: JSON.stringify(telescope.horizon),
+      highest_altitude_deg: telescope.highest_altitude_deg,
     })
     telescopeIds.set(telescope.slug, id)
   }

@@ -14,12 +14,54 @@ export const site = {
   extinction: { B: 0.22, g: 0.18, V: 0.13, r: 0.1, i: 0.06, z: 0.05, y: 0.05, J: 0.09, H: 0.05, K: 0.08 },
   darkSky: { B: 22.5, g: 22.1, V: 21.7, r: 21.2, i: 20.4, z: 19.3, y: 18.0, J: 16.7, H: 15.4, K: 15.0 },
   seeing: { best10: 0.6, median: 0.8, worst90: 1.3 },
+  weather: {
+    lostByMonth: [0.12, 0.13, 0.16, 0.22, 0.31, 0.36, 0.35, 0.31, 0.25, 0.2, 0.15, 0.12],
+    persistence: 0.35,
+  },
 } as const
 
-export const telescopes = [
-  { slug: 'aldous', name: 'Aldous', aperture_m: 3.8, collecting_area_m2: 10.2 },
-  { slug: 'fennel', name: 'Fennel', aperture_m: 1.5, collecting_area_m2: 1.57 },
-] as const
+export interface SeedTelescope {
+  slug: string
+  name: string
+  aperture_m: number
+  collecting_area_m2: number
+  horizon: { azimuthDeg: number; altitudeDeg: number }[]
+  highest_altitude_deg: number | null
+}
+
+export const telescopes: readonly SeedTelescope[] = [
+  {
+    slug: 'aldous',
+    name: 'Aldous',
+    aperture_m: 3.8,
+    collecting_area_m2: 10.2,
+    horizon: [],
+    highest_altitude_deg: null,
+  },
+  {
+    slug: 'fennel',
+    name: 'Fennel',
+    aperture_m: 1.5,
+    collecting_area_m2: 1.57,
+    // It stands under the crest: the ridge in the east, and the dome of Aldous in the south-west.
+    horizon: (
+      [
+        [0, 12],
+        [45, 13],
+        [70, 18],
+        [95, 24],
+        [115, 22],
+        [140, 14],
+        [200, 12],
+        [222, 12],
+        [226, 29],
+        [236, 29],
+        [240, 12],
+      ] as const
+    ).map(([azimuthDeg, altitudeDeg]) => ({ azimuthDeg, altitudeDeg })),
+    highest_altitude_deg: 87.5,
+  },
+]
 
 export const instruments = [
   { slug: 'lantern', name: 'LANTERN', telescope: 'aldous', summary: 'optical imager' },

@@ -1,6 +1,6 @@
 export { countInWords } from './countInWords'
 export { csvCell } from './csvCell'
-export { csvText, type CsvValue } from './csvText'
+export { csvRows, csvText, type CsvValue } from './csvText'
 export { formatAmount } from './formatAmount'
 export { formatAtSite } from './formatAtSite'
 export { formatBytes } from './formatBytes'

@@ -1,5 +1,8 @@
+import { addressFailed, addressWorks } from '@/db/queries/addresses'
 import { claimLetters, markFailed, markSent } from '@/db/queries/outbox'
 import type { Database } from '@/db/client'
+import { LetterRefused } from '@/lib/services/mail/LetterRefused'
+import { renderPaper } from '@/lib/domain/fees/renderPaper'
 import type { Mail } from '@/lib/services/mail/Mail'
 
 const batch = 20
@@ -11,11 +14,19 @@ export interface RelayReport {
   sent: number
   delayed: number
   parked: number
+  /** The address was refused for good. */
+  bounced: number
+}
+
+/** Refused for good is not tried again; anything else may pass, up to a point. */
+function stateAfter(error: unknown, tries: number): 'queued' | 'parked' | 'bounced' {
+  if (error instanceof LetterRefused) return error.because === 'address' ? 'bounced' : 'parked'
+  return tries >= triesBeforeParking ? 'parked' : 'queued'
 }
 
 /** Sends what is due in the outbox. At least once: the Message-ID stays the same at every try. */
 export async function relayLetters(db: Database, mail: Mail): Promise<RelayReport> {
-  const report: RelayReport = { sent: 0, delayed: 0, parked: 0 }
+  const report: RelayReport = { sent: 0, delayed: 0, parked: 0, bounced: 0 }
   for (const letter of await claimLetters(db, batch, holdSeconds)) {
     try {
       await mail.send({
@@ -24,17 +35,21 @@ export async function relayLetters(db: Database, mail: Mail): Promise<RelayRepor
         subject: letter.subject,
         text: letter.text_body,
         html: letter.html_body,
+        attachments: letter.attachment === null ? [] : [await renderPaper(db, letter.attachment)],
       })
       await markSent(db, letter.id)
+      await addressWorks(db, letter.to_email)
       report.sent += 1
     } catch (error) {
-      const park = letter.attempts + 1 >= triesBeforeParking
+      const said = error instanceof Error ? error.message : String(error)
+      const next = stateAfter(error, letter.attempts + 1)
       await markFailed(db, letter.id, {
-        error: error instanceof Error ? error.message : String(error),
+        error: said,
         waitSeconds: Math.min(longestWaitSeconds, 5 * 2 ** letter.attempts),
-        park,
+        state: next,
       })
-      report[park ? 'parked' : 'delayed'] += 1
+      if (next === 'bounced') await addressFailed(db, letter.to_email, said)
+      report[next === 'queued' ? 'delayed' : next] += 1
     }
   }
   return report

@@ -1,7 +1,10 @@
 import 'server-only'
+import { remindOwed } from '@/lib/domain/assignments/remindOwed'
 import { env } from '@/lib/env'
 import { log } from '@/lib/log'
 import { services } from '@/lib/services/services'
+import { checkLogbookDaily } from './checkLogbookDaily'
+import { jobContext } from './jobContext'
 import { relayLetters } from './relayLetters'
 import { settleFees } from './settleFees'
 import { sweepObjects } from './sweepObjects'
@@ -30,7 +33,7 @@ function every(seconds: number, name: string, run: () => Promise<void>): NodeJS.
 async function relay(): Promise<void> {
   const { db, mail } = services()
   const report = await relayLetters(db, mail)
-  if (report.sent + report.delayed + report.parked > 0) log.info(report, 'letters relayed')
+  if (report.sent + report.delayed + report.parked + report.bounced > 0) log.info(report, 'letters relayed')
 }
 
 async function sweep(): Promise<void> {
@@ -39,11 +42,19 @@ async function sweep(): Promise<void> {
   if (removed > 0) log.info({ removed }, 'objects without a row swept')
 }
 
+async function remind(): Promise<void> {
+  const ctx = jobContext()
+  const reminded = await remindOwed(ctx)
+  if (reminded > 0) log.info({ reminded, requestId: ctx.request.id }, 'reviewers reminded')
+}
+
 /** Starts the scheduled work of this process, once. */
 export function startJobs(): void {
   kept.noctuaryJobs ??= [
     every(env().LETTER_RELAY_SECONDS, 'letters', relay),
     every(60, 'fees', settleFees),
+    every(900, 'reminders', remind),
     every(3600, 'objects', sweep),
+    every(900, 'logbook', checkLogbookDaily),
   ]
 }

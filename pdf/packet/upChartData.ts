@@ -1,5 +1,6 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
 import { formatHours, formatNumber } from '@/lib/format'
+import { limitWords } from '@/lib/science/feasibility'
 import { moonPhases } from '@/lib/science/sky'
 import type { UpChartData, UpRow } from './packetTypes'
 
@@ -50,8 +51,15 @@ export function upChartData(proposal: AnonymousProposal): UpChartData | null {
         .map((set) => formatNumber(set.maxAirmass, 1)),
     ),
   ]
+  // A proposal that was frozen before horizons were recorded holds none.
+  const limits = proposal.modes.map(({ telescope }) =>
+    limitWords({
+      horizons: [proposal.site.horizon ?? [], telescope.horizon ?? []],
+      highestAltitudeDeg: telescope.highestAltitudeDeg ?? 90,
+    }),
+  )
   return {
-    note: `Hours a night between astronomical twilights above airmass ${airmass.join(' or ') || '1.8'}, and their sum; each row is 0 to ${formatNumber(maxHours, 1)} h.`,
+    note: `Hours a night between astronomical twilights above airmass ${airmass.join(' or ') || '1.8'}${limits.find(Boolean) ?? ''}, and their sum; each row is 0 to ${formatNumber(maxHours, 1)} h.`,
     rows,
     maxHours,
     nights,

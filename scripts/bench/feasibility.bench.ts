@@ -84,3 +84,17 @@ report(
   measure(() => visibility({ ...season, moon, almanac }), 3),
   independent,
 )
+
+// A wall all around that reaches far above the airmass limit: no star gets by without being held against it.
+const wall = Array.from({ length: 36 }, (_, i) => ({ azimuthDeg: 10 * i, altitudeDeg: 36 + ((i * 7) % 20) }))
+const limited = { ...season, moon, highestAltitudeDeg: 87 }
+report(
+  'the same under a horizon of 36 rows, nothing known',
+  measure(() => visibility({ ...limited, horizons: [[...wall]], almanac: createAlmanac() }), 3),
+  independent,
+)
+report(
+  'under it once the nights of the site are known',
+  measure(() => visibility({ ...limited, horizons: [wall], almanac }), 3),
+  independent,
+)

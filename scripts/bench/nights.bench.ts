@@ -1,6 +1,8 @@
 import type { BinnedLine, NightBin } from '../../lib/panel/nights/binTypes'
 import { byRankInBins } from '../../lib/panel/nights/byRankInBins'
+import { laidAwards } from '../../lib/panel/nights/laidAwards'
 import { mostMeritInBins } from '../../lib/panel/nights/mostMeritInBins'
+import { simulateSeasons } from '../../lib/panel/nights/simulateSeasons'
 import { seededUniform } from '../../lib/panel/random'
 import { solveInWorker } from '../../lib/services/solver/solveInWorker'
 import { sayTime } from './measure'
@@ -61,4 +63,25 @@ reportText(
   'why' in byMerit
     ? byMerit.why
     : `${byMerit.given.length} given, ${(100 * (1 - byMerit.meritHours / byMerit.boundMeritHours)).toFixed(2)} % from the bound`,
+)
+
+/** Every half-month's fifteen evenings hold an even part of each of its bins, telescope by telescope. */
+const pieces = Array.from({ length: 12 * 15 }, (_, night) =>
+  bins.flatMap(({ half, seconds }, bin) =>
+    half === Math.floor(night / 15) ? [{ night, bin, seconds: seconds / 15 }] : [],
+  ),
+).flat()
+const { awards } = laidAwards(
+  asked.flatMap((lines) => lines.map((line) => ({ ...line, least: 0 }))),
+  bins,
+  [],
+)
+const start = performance.now()
+const seasons = 1000
+const plan = { lost: Array.from({ length: 180 }, () => 0.25), persistence: 0.35, pieces, awards }
+const outlook = simulateSeasons(plan, { seed: 7, seasons })
+reportText(
+  `${awards.length} awards through ${seasons} seasons of weather, ${pieces.length} pieces of dark time each`,
+  sayTime((performance.now() - start) / 1000),
+  `${outlook.filter(({ chance }) => chance > 0.5).length} more likely finished than not`,
 )

@@ -95,6 +95,14 @@ describe('a target in a season', () => {
   it('breaks where a window jumps by hours', () => {
     expect(targetShape({ windows: [[[20, 22]], [[26, 28]]] }, place).areas).toHaveLength(2)
   })
+  it('goes on from the piece it lies nearest to where a blind spot begins or ends', () => {
+    const windows = [[[19, 22] as const, [23, 28] as const], [[22.9, 27.9] as const], [[22.8, 27.8] as const]]
+    const { areas } = targetShape({ windows }, place)
+    expect(areas).toHaveLength(2)
+    expect(areas[0]).toBe('M0.0 19.0L10.0 19.0L10.0 22.0L0.0 22.0Z')
+    expect(areas[1]).toContain('M0.0 23.0L15.0 22.9L25.0 22.8L30.0 22.8L30.0 27.8')
+    expect(targetShape({ windows: windows.toReversed() }, place).areas).toHaveLength(2)
+  })
   it('has no shape when it never rises', () => {
     expect(targetShape({ windows: [[], []] }, place)).toEqual({ areas: [], edges: [], transit: '' })
   })

@@ -27,6 +27,7 @@ function show(save: TargetActions['save'], readOnly: string | null = null) {
     add,
     save,
     remove: no,
+    change: no,
     restore: no,
     reorder: no,
     importRows: no,

@@ -33,7 +33,16 @@ function show(
     data: { ...group, version: 3 },
   }))
   const save = vi.fn<TargetActions['save']>(async () => ({ ok: true, data: target({ version: 2 }) }))
-  const others = { add: no, remove: no, restore: no, reorder: no, importRows: no, ask: no, removeGroup: no }
+  const others = {
+    add: no,
+    change: no,
+    remove: no,
+    restore: no,
+    reorder: no,
+    importRows: no,
+    ask: no,
+    removeGroup: no,
+  }
   render(
     <NuqsTestingAdapter>
       <TargetsEditor

@@ -27,6 +27,7 @@ function show(over: Partial<TargetActions> = {}, readOnly: string | null = null)
     add: no,
     save,
     remove: no,
+    change: no,
     restore: no,
     reorder: no,
     importRows: no,
@@ -84,9 +85,9 @@ it('shows both versions when someone else saved first', async () => {
   }
   show({ save: async () => ({ ok: false, kind: 'stale', message: '', fieldErrors: {}, stale }) })
   await retype('Redshift of 3C 273', '0.16')
-  expect(await screen.findByText(/Odo Pellering changed this row first/)).toBeTruthy()
+  expect(await screen.findByText(/Odo Pellering changed this first/)).toBeTruthy()
   expect(cell('Redshift of 3C 273').value).toBe('0.16')
-  await userEvent.click(screen.getByRole('button', { name: 'Take theirs' }))
+  await userEvent.click(screen.getByRole('button', { name: 'Take all of theirs' }))
   expect(cell('Redshift of 3C 273').value).toBe('0.2')
 })
 

@@ -18,6 +18,9 @@ const strangers: Record<string, string> = {
   '[reference]': '000-000',
   '[request]': '999999',
   '[assignment]': '999999',
+  '[person]': '999999',
+  '[letter]': '999999',
+  '[bulk]': '999999',
   '[token]': 'x'.repeat(43),
   '[slug]': 'call-14',
   '[call]': 'call-13',
@@ -40,7 +43,7 @@ for (const [name, person] of Object.entries(people)) {
       if (person.email) await signIn(person.email, password)
       for (const [path, who] of Object.entries(access.pages) as [string, Who][]) {
         const reply = await page.request.get(concrete(path), { maxRedirects: 0 })
-        const isAboutAStranger = /\[(reference|request|assignment|number)\]/.test(path)
+        const isAboutAStranger = /\[(reference|request|assignment|number|person|letter|bulk)\]/.test(path)
         const status = passes(who, person.roles, person.email !== null)
           ? isAboutAStranger
             ? [404]

@@ -104,13 +104,38 @@ def alpha(rows):
     return float(1 - do / de)
 
 
+def with_single():
+    """One reviewer more, with a single score."""
+    rows = made_scores(12, 6, 3, 0.7)
+    return rows + [{"proposal": 5, "reviewer": 7, "score": 9.5}]
+
+
+def with_alike():
+    """A reviewer who gives everything the same score."""
+    rows = made_scores(12, 6, 4, 0.7)
+    return [{**r, "score": 7.0} if r["reviewer"] == 3 else r for r in rows]
+
+
+def unlinked():
+    """Two halves of a panel that share no proposal: leniency cannot be told from merit, so it stays in."""
+    rows = made_scores(8, 4, 3, 0.5)
+    return rows + [{**r, "proposal": r["proposal"] + 8, "reviewer": r["reviewer"] + 4}
+                   for r in made_scores(8, 4, 3, 0.5)]
+
+
 cases = {}
 for name, args in {"lenient": (24, 14, 5, 0.6), "even": (10, 6, 3, 0.0), "small": (6, 4, 3, 0.9)}.items():
     rows = made_scores(*args)
     cases[name] = {"scores": rows, "withLeniency": mixed(rows, True), "without": mixed(rows, False),
                    "test": f_test(rows), "alpha": alpha(rows)}
 
+for name, rows in {"single": with_single(), "alike": with_alike()}.items():
+    cases[name] = {"scores": rows, "withLeniency": mixed(rows, True), "without": mixed(rows, False),
+                   "test": f_test(rows), "alpha": alpha(rows)}
+rows = unlinked()
+apart = {"scores": rows, "without": mixed(rows, False), "alpha": alpha(rows)}
+
 tails = [[f, a, b, float(stats.f.sf(f, a, b))]
          for f, a, b in [(0.2, 1, 1), (1, 3, 7), (3.3, 13, 83), (4.75, 1, 12), (10, 2, 30), (40, 5, 200)]]
-json.dump({"made by": f"numpy {np.__version__}, scipy {scipy.__version__}", "cases": cases, "fTails": tails},
+json.dump({"made by": f"numpy {np.__version__}, scipy {scipy.__version__}", "cases": cases, "unlinked": apart, "fTails": tails},
           sys.stdout, indent=1)

@@ -12,6 +12,9 @@ export async function award(
     outcome: 'awarded',
     statement: 'A clear case.',
     released_at: releasedAt,
+    ...(releasedAt
+      ? { version: 2, approved_version: 1, approved_by: (await db('people').first('id'))?.id }
+      : {}),
   })
   await db('award_lines').insert({
     decision_id: decisionId,

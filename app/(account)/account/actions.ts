@@ -3,9 +3,10 @@
 import { z } from 'zod'
 import { defineAction } from '@/lib/actions/defineAction'
 import { readSessionId } from '@/lib/auth/readActor'
+import { askForErasure } from '@/lib/domain/people/askForErasure'
 import { changePassword } from '@/lib/domain/people/changePassword'
 import { saveProfile } from '@/lib/domain/people/saveProfile'
-import { changePasswordSchema, profileSchema } from '@/lib/domain/people/schema'
+import { changePasswordSchema, erasureRequestSchema, profileSchema } from '@/lib/domain/people/schema'
 import { endOtherSessions } from '@/lib/domain/sessions/endOtherSessions'
 import { paths } from '@/lib/paths'
 
@@ -22,6 +23,14 @@ export const changePasswordAction = defineAction({
   run: async (ctx, input) => changePassword(ctx, { ...input, sessionId: await readSessionId() }),
   revalidate: () => paths.account(),
   limit: { points: 10, seconds: 900 },
+})
+
+export const askForErasureAction = defineAction({
+  name: 'askForErasure',
+  schema: erasureRequestSchema,
+  run: askForErasure,
+  revalidate: () => paths.account(),
+  limit: { points: 10, seconds: 3600 },
 })
 
 export const endOtherSessionsAction = defineAction({

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 import { ChangePasswordForm } from '@/components/account/ChangePasswordForm'
+import { OwnData } from '@/components/account/OwnData'
 import { ProfileForm } from '@/components/account/ProfileForm'
 import { SessionList } from '@/components/account/SessionList'
 import { Main } from '@/components/layout/Main'
@@ -11,16 +12,26 @@ import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { readSessionId } from '@/lib/auth/readActor'
 import { readFrame } from '@/lib/domain/calls/readFrame'
+import { readErasure } from '@/lib/domain/people/readErasure'
 import { readAccount } from '@/lib/domain/people/readAccount'
-import { changePasswordAction, endOtherSessionsAction, saveProfileAction } from './actions'
+import {
+  askForErasureAction,
+  changePasswordAction,
+  endOtherSessionsAction,
+  saveProfileAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Your account' }
 
 export default async function AccountPage() {
   const ctx = await openPage('/account')
-  const [account, frame] = await Promise.all([readAccount(ctx, await readSessionId()), readFrame(ctx, null)])
+  const [account, frame, erasure] = await Promise.all([
+    readAccount(ctx, await readSessionId()),
+    readFrame(ctx, null),
+    readErasure(ctx, ctx.actor.personId),
+  ])
   const zones = ['UTC', ...Intl.supportedValuesOf('timeZone').filter((zone) => zone !== 'UTC')]
-  const { sessions, ...profile } = account
+  const { sessions, erasureAskedAt, ...profile } = account
   return (
     <Main>
       <PageTitle title="Your account" lead={account.email} />
@@ -56,6 +67,15 @@ export default async function AccountPage() {
           <section className="mt-10 max-w-lg">
             <SectionHeading title="Password" />
             <ChangePasswordForm action={changePasswordAction} />
+          </section>
+          <section className="mt-10 max-w-prose" id="personal-data">
+            <SectionHeading title="What is held about you" />
+            <OwnData
+              email={account.email}
+              askedAt={erasureAskedAt?.toISOString() ?? null}
+              erasure={erasure}
+              action={askForErasureAction}
+            />
           </section>
         </TwoColumns>
       </div>

@@ -23,48 +23,53 @@ const text = (points: readonly (readonly [number, number])[]) =>
  * chart with nights across and the one with nights down.
  */
 export function targetShape(target: SeasonTarget, place: Place): TargetShape {
-  const depth = Math.max(0, ...target.windows.map((pieces) => pieces.length))
   const areas: string[] = []
   const edges: string[] = []
-  for (let piece = 0; piece < depth; piece++) {
-    for (const run of runs(target.windows.map((pieces) => pieces[piece] ?? null))) {
-      const starts = run.map(({ night, window }) => place(night, window[0]))
-      const ends = run.map(({ night, window }) => place(night, window[1]))
-      areas.push(`M${text([...starts, ...ends.reverse()])}Z`)
-      edges.push(`M${text(starts)}`, `M${text([...ends].reverse())}`)
-    }
+  for (const run of runs(target.windows)) {
+    const starts = run.map(({ night, window }) => place(night, window[0]))
+    const ends = run.map(({ night, window }) => place(night, window[1]))
+    areas.push(`M${text([...starts, ...ends.reverse()])}Z`)
+    edges.push(`M${text(starts)}`, `M${text([...ends].reverse())}`)
   }
-  const transit = runs(
-    (target.transits ?? []).map((hour) => (hour === null ? null : ([hour, hour] as const))),
-  )
+  const transit = runs((target.transits ?? []).map((hour) => (hour === null ? [] : [[hour, hour] as const])))
     .map((run) => `M${text(run.map(({ night, window }) => place(night, window[0])))}`)
     .join('')
   return { areas, edges, transit }
 }
 
-/** Unbroken runs of nights that have a window; each night counts from its left edge to its right. */
-function runs(windows: readonly (readonly [number, number] | null)[]) {
-  const found: { night: number; window: readonly [number, number] }[][] = []
-  let open = false
-  windows.forEach((window, night) => {
-    const last = found[found.length - 1]
-    // A jump of hours between two nights is another piece, not a steep edge.
-    const before = open ? last?.[last.length - 1]?.window[0] : undefined
-    if (!window) {
-      open = false
-      return
-    }
-    const entry = [
-      { night, window },
-      { night: night + 1, window },
-    ]
-    if (open && last && before !== undefined && Math.abs(before - window[0]) < 2) {
-      last[last.length - 1] = { night: night + 0.5, window }
-      last.push({ night: night + 1, window })
-    } else {
-      found.push(entry)
-    }
-    open = true
+type Window = readonly [number, number]
+type Run = { night: number; window: Window }[]
+
+/** A jump of hours between two nights is another piece, not a steep edge. */
+const JUMP_HOURS = 2
+
+const apart = (a: Window, b: Window) => Math.max(Math.abs(a[0] - b[0]), Math.abs(a[1] - b[1]))
+
+/**
+ * Unbroken runs of windows; each night counts from its left edge to its right. Where a night has several pieces, as
+ * beside a blind spot or over a ridge, each goes on from the one of the night before that it lies nearest to.
+ */
+function runs(windows: readonly (readonly Window[])[]): Run[] {
+  const found: Run[] = []
+  let open: Run[] = []
+  windows.forEach((pieces, night) => {
+    const left = [...open]
+    open = pieces.map((window) => {
+      const distance = (run: Run) => apart(run.at(-1)?.window ?? [Infinity, Infinity], window)
+      const [nearest] = left.sort((a, b) => distance(a) - distance(b))
+      if (nearest && distance(nearest) < JUMP_HOURS) {
+        left.shift()
+        nearest[nearest.length - 1] = { night: night + 0.5, window }
+        nearest.push({ night: night + 1, window })
+        return nearest
+      }
+      const begun: Run = [
+        { night, window },
+        { night: night + 1, window },
+      ]
+      found.push(begun)
+      return begun
+    })
   })
   return found
 }

@@ -6,15 +6,18 @@ import { ActionForm } from '@/components/forms/ActionForm'
 import { CheckListField } from '@/components/forms/CheckListField'
 import { NumberField } from '@/components/forms/NumberField'
 import { RadioField } from '@/components/forms/RadioField'
+import { ChooseByField } from '@/components/forms/stale/ChooseByField'
+import { useOpenedOver } from '@/components/forms/stale/useOpenedOver'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
-import { countInWords } from '@/lib/format'
+import { countInWords, formatList } from '@/lib/format'
 import type { Target, TargetGroup } from '@/lib/domain/proposals/types'
 import { groupRow, groupSchema } from '@/lib/domain/targetGroups/rules'
 import type { TargetActions } from '../targetActions'
+import { groupLabels } from './groupLabels'
 
 export interface GroupFormProps {
   reference: string
@@ -52,11 +55,13 @@ const formSchema = z.object({ group: groupSchema })
 
 /** A group: what it is called, its rule, and the targets in it. */
 export function GroupForm({ reference, group, targets, save, onDone }: GroupFormProps) {
+  const opened = useOpenedOver({ version: group?.version ?? 0, values: groupRow(group, targets) })
   const form = useActionForm({
     schema: formSchema,
     action: (values) =>
-      save({ reference, id: group?.id ?? null, version: group?.version ?? 0, group: values.group }),
+      save({ reference, id: group?.id ?? null, version: opened.version, group: values.group }),
     defaultValues: { group: groupRow(group, targets) },
+    onStale: opened.onStale,
     onDone: ({ name }) => {
       showToast(`${name} saved`)
       onDone()
@@ -64,9 +69,30 @@ export function GroupForm({ reference, group, targets, save, onDone }: GroupForm
   })
   const { control } = form.form
   const [name, rule, chosen] = useWatch({ control, name: ['group.name', 'group.rule', 'group.targetIds'] })
+  const say = (field: string, value: unknown): string => {
+    const option = [...rules, ...hours].find((one) => one.value === value)
+    if ((field === 'rule' || field === 'hoursFor') && option) return option.label
+    if (Array.isArray(value)) {
+      const names = targets.filter(({ id }) => value.map(Number).includes(id)).map((target) => target.name)
+      return names.length > 0 ? formatList(names) : 'none'
+    }
+    return String(value ?? '') || 'nothing'
+  }
   const count = Array.isArray(chosen) ? chosen.length : 0
   return (
     <ActionForm form={form} label={name ? `Group ${name}` : 'A group of targets'}>
+      {opened.stale ? (
+        <ChooseByField
+          stale={opened.stale}
+          versions={opened.versions(form.form.getValues('group'))}
+          labels={groupLabels}
+          say={say}
+          onChoose={(next) => {
+            opened.settle()
+            form.form.reset({ group: next })
+          }}
+        />
+      ) : null}
       <div className="grid gap-x-10 gap-y-6 md:grid-cols-2">
         <div className="flex flex-col gap-6">
           <TextField name="group.name" label="Name" maxLength={120} />

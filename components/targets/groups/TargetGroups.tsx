@@ -63,7 +63,7 @@ export function TargetGroups({ contents, computed, readOnly, actions }: TargetGr
             return (
               <li key={group.id} id={groupAnchor(group)} className="border-b border-rule py-4">
                 {open === group.id ? (
-                  <GroupForm {...shared} key={group.version} group={group} />
+                  <GroupForm {...shared} group={group} />
                 ) : (
                   <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
                     {standing ? <GroupLine group={standing} /> : <strong>{group.name}</strong>}

@@ -1,3 +1,4 @@
+import { approveDecisions } from '../../../lib/domain/decisions/approveDecisions.ts'
 import { prepareDecisions } from '../../../lib/domain/decisions/prepareDecisions.ts'
 import { releaseDecisions } from '../../../lib/domain/decisions/releaseDecisions.ts'
 import { takePlan } from '../../../lib/domain/decisions/takePlan.ts'
@@ -21,6 +22,13 @@ export async function decideCall(story: Teller, call: SeededCall): Promise<void>
   await freezeRanking(chair, { ...key, rankingId: ranking.id, version: ranking.version })
   await takePlan(chair, { ...key, policy: 'rank' })
   await prepareDecisions(chair, key)
+  const decided = await story
+    .db('decisions as d')
+    .join('proposals as p', 'p.id', 'd.proposal_id')
+    .where({ 'p.panel_id': call.panelId })
+    .whereNull('d.superseded_at')
+    .select('d.proposal_id as proposalId', 'd.version')
+  await approveDecisions(await story.as('Maud Ferrisay'), { ...key, decisions: decided })
   await story.at(call.dates.letters_at)
   await releaseDecisions(chair, { ...key, typed: String(call.number) })
 }

@@ -19,6 +19,7 @@ export function pastPayments(): Payments {
         currency: request.currency,
         paymentId: null,
         cardLast4: null,
+        firmFeeMinor: null,
       }
       sessions.set(sessionId, {
         ...open,
@@ -27,6 +28,7 @@ export function pastPayments(): Payments {
         url: null,
         paymentId: `pi_past_${count}`,
         cardLast4: '4242',
+        firmFeeMinor: Math.round(request.amountMinor * 0.015) + 25,
       })
       return open
     },
@@ -35,7 +37,16 @@ export function pastPayments(): Payments {
       if (!session) throw new Error('no such page')
       return session
     },
-    refund: async ({ idempotencyKey }) => ({ refundId: `re_past_${idempotencyKey}`, status: 'succeeded' }),
+    refund: async ({ idempotencyKey, amountMinor }) => ({
+      refundId: `re_past_${idempotencyKey}`,
+      key: idempotencyKey,
+      amountMinor,
+      status: 'succeeded',
+      failure: null,
+    }),
+    readRefunds: async () => [],
+    readDisputes: async () => [],
+    listPayments: async () => [],
     readNotice: () => {
       throw new Error('the past sends no notices')
     },

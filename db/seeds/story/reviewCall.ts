@@ -3,6 +3,7 @@ import { assignReviewers } from '../../../lib/domain/assignments/assignReviewers
 import { startReview } from '../../../lib/domain/assignments/startReview.ts'
 import { suggestForPanel } from '../../../lib/domain/assignments/suggestForPanel.ts'
 import { declareInterests } from '../../../lib/domain/conflicts/declareInterests.ts'
+import { saveFormula } from '../../../lib/domain/rankings/saveFormula.ts'
 import { finishReview } from '../../../lib/domain/reviews/finishReview.ts'
 import { saveReviewText } from '../../../lib/domain/reviews/saveReviewText.ts'
 import { saveScore } from '../../../lib/domain/reviews/saveScore.ts'
@@ -82,6 +83,7 @@ export async function reviewCall(
     .where({ id: call.id })
     .first('slug')
     .then((row) => row ?? { slug: '' })
+  await saveFormula(chair, { panelId: call.panelId, formula: 'mean - 0.2 * spread' })
   await startReview(chair, { callId: call.id })
   for (const member of panel.slice(1))
     await declareInterests(await story.as(member.name), { callSlug: slug, names: [], wentThrough: true })

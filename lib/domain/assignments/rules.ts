@@ -47,3 +47,18 @@ export function whyNotReminded(owed: number, last: Date | null, now: Date): stri
   const day = (date: Date) => date.toISOString().slice(0, 10)
   return last && day(last) === day(now) ? 'Reminded today; once a day is enough.' : null
 }
+
+const dayMs = 86_400_000
+
+/**
+ * Which reminder is due by itself: a week and a day before reviews are due, and a day after, until the panel meets;
+ * null between them. Each is written once, and one whose time passed unnoticed is not made up for.
+ */
+export function reminderDue(dueAt: Date, meetsAt: Date, now: Date): 'week' | 'day' | 'late' | null {
+  if (now >= meetsAt) return null
+  const left = dueAt.getTime() - now.getTime()
+  if (left <= -dayMs) return 'late'
+  if (left <= 0) return null
+  if (left <= dayMs) return 'day'
+  return left <= 7 * dayMs ? 'week' : null
+}

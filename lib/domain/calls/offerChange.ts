@@ -18,7 +18,8 @@ export interface OfferChange {
 function problemOf(modes: readonly OfferMode[], remove: readonly OfferMode[], wanted: readonly number[]) {
   if (wanted.length === 0) return 'A call offers one mode at least.'
   const known = new Set(modes.map(({ id }) => id))
-  if (!wanted.every((id) => known.has(id))) return 'One of these modes is not at the site of the call.'
+  if (!wanted.every((id) => known.has(id)))
+    return 'One of these modes is not at the site of the call, or is retired.'
   const needed = remove.find(({ proposals }) => proposals > 0)
   if (!needed) return null
   const verb = needed.proposals === 1 ? 'observes' : 'observe'

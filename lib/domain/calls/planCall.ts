@@ -4,6 +4,7 @@ import { findCallBySlug, listCalls } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
 import { siteRecordAt } from '@/db/queries/facility'
 import { insertNightBlocks, nightBlocksOf } from '@/db/queries/nightBlocks'
+import { lockOpenCalls } from '@/db/queries/retirements'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
@@ -23,6 +24,8 @@ export async function planCall(
 ): Promise<{ slug: string }> {
   authorize(mayManageCalls(ctx.actor))
   return inTransaction(ctx, async (tx) => {
+    // Before anything is read: what is retiring at this moment is not taken over.
+    await lockOpenCalls(tx.db, await databaseNow(tx.db))
     const [pattern, calls] = await Promise.all([findCallBySlug(tx.db, input.from), listCalls(tx.db)])
     if (!pattern) throw refuse.field('from', 'There is no such call.')
     if (input.closesAt <= (await databaseNow(tx.db)))
@@ -46,7 +49,7 @@ export async function planCall(
       panel_meets_at: input.panelMeetsAt,
       letters_at: input.lettersAt,
     })
-    await copyCallRules(tx.db, pattern.id, id)
+    await copyCallRules(tx.db, pattern.id, id, input.seasonTo)
     const site = await siteRecordAt(tx.db, pattern.siteId, input.seasonFrom)
     const blocks = nightsLike(await nightBlocksOf(tx.db, pattern.id), site, input.seasonFrom, input.seasonTo)
     await insertNightBlocks(tx.db, id, blocks)

@@ -1,5 +1,6 @@
 import { presetCosmology } from '@/lib/science/cosmology'
 import { visibility } from '@/lib/science/sky'
+import { pointingOf } from '../facility/pointingOf'
 import type { CallView } from './readCall'
 
 export interface Teasers {
@@ -25,6 +26,7 @@ export function readTeasers(view: CallView): Teasers {
     from: view.call.seasonFrom,
     to: view.call.seasonTo,
     maxAirmass: 1.8,
+    ...pointingOf(view.site),
   })
   const teasers = {
     luminosityMpc: presetCosmology('planck-2018').luminosityMpc(exampleTarget.redshift),

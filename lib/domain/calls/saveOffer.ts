@@ -27,7 +27,12 @@ export async function saveOffer(
     const now = await databaseNow(tx.db)
     const isBefore = row.stage === 'planned' || (row.stage === 'published' && now < row.closes_at)
     if (!isBefore) throw refuse.closed('The call has closed: what it offered stays as it was.')
-    const modes = await modesForOffer(tx.db, { id: row.id, siteId: row.site_id })
+    const modes = await modesForOffer(tx.db, {
+      id: row.id,
+      siteId: row.site_id,
+      seasonFrom: row.season_from,
+      seasonTo: row.season_to,
+    })
     const offered = modes.filter(({ isOffered }) => isOffered).map(({ id }) => id)
     if (!sameSet(offered, input.before)) {
       const last = await lastChangeOf(tx.db, 'call', String(row.number))

@@ -1,6 +1,12 @@
 import { z } from 'zod'
 
-const decisionRow = z.object({
+const flag = z.object({
+  kind: z.enum(['gives-away', 'names', 'tone', 'person', 'scores', 'contradicts']),
+  at: z.number(),
+  words: z.string(),
+})
+
+export const decisionRow = z.object({
   proposalId: z.number(),
   reviewNumber: z.string(),
   title: z.string(),
@@ -9,6 +15,7 @@ const decisionRow = z.object({
   outcome: z.enum(['awarded', 'reserve', 'declined']),
   lines: z.array(
     z.object({
+      instrumentId: z.number(),
       instrument: z.string(),
       seconds: z.number(),
       isReserve: z.boolean(),
@@ -20,6 +27,23 @@ const decisionRow = z.object({
   version: z.number(),
   isPrepared: z.boolean(),
   releasedAt: z.string().nullable(),
+  /** What in the statement deserves a second look. */
+  flags: z.array(flag),
+  /** Comments of the reviewers to the investigators, by number, with why one is kept from them. */
+  comments: z.array(
+    z.object({
+      assignmentId: z.number(),
+      reviewer: z.number(),
+      body: z.string(),
+      withheldReason: z.string().nullable(),
+      flags: z.array(flag),
+    }),
+  ),
+  /** Whether a second person stands behind it as it is. */
+  approval: z.enum(['waits', 'changed', 'approved']),
+  approvedBy: z.string().nullable(),
+  /** Why its reader cannot approve it; null when they can. */
+  whyNotApproved: z.string().nullable(),
 })
 export type DecisionRow = z.output<typeof decisionRow>
 

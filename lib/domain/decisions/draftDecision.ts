@@ -32,6 +32,6 @@ export async function draftDecision(
       statement: change.statement ?? '',
       by: tx.actor.personId,
     })
-  if (!(await changeDecision(tx.db, standing, change))) throw stale()
+  if (!(await changeDecision(tx.db, standing, change, tx.actor.personId))) throw stale()
   return standing.id
 }

@@ -1,4 +1,5 @@
 import { givenByTelescope, insertAward, standingAwards, supersedeAwards } from '@/db/queries/decisions'
+import { heldTime, standingChoices } from '@/db/queries/nightTerms'
 import { offeredTime } from '@/db/queries/panel'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
@@ -16,13 +17,16 @@ export interface GivenLine {
   conditions: string
 }
 
-/** What is free on each telescope of the call, the proposal's own lines not counted. */
+/** What is free on each telescope of the call, less what is held back, the proposal's own lines not counted. */
 async function leftOnOffer(tx: ActingContext, desk: PanelDesk, proposalId: number) {
   const offered = offeredByTelescope(await offeredTime(tx.db, desk.call.id))
   const given = await givenByTelescope(tx.db, desk.call.id)
   for (const own of await standingAwards(tx.db, [proposalId]))
     if (!own.isReserve) given.set(own.telescopeId, (given.get(own.telescopeId) ?? 0) - own.seconds)
-  return new Map([...offered].map(([id, seconds]) => [id, seconds - (given.get(id) ?? 0)]))
+  const held = await heldTime(tx.db, desk.call.id)
+  return new Map(
+    [...offered].map(([id, seconds]) => [id, seconds - (given.get(id) ?? 0) - (held.get(id)?.seconds ?? 0)]),
+  )
 }
 
 /** Puts new award lines in the place of a proposal's old ones; refuses, at the line, what was not asked or is not there. */
@@ -38,6 +42,9 @@ export async function giveLines(
     if (!ask) throw refuse.field(`lines.${index}.hours`, 'This instrument was not asked for.')
     return { ...ask, ...line, most: Math.max(ask.askedSeconds, ask.wholeSeconds) }
   })
+  const choice = (await standingChoices(tx.db, [given.proposalId])).get(given.proposalId)
+  if (choice?.choice === 'never' && lines.some((line) => line.seconds > 0))
+    throw refuse.closed(`It is never to be given time: ${choice.reason} Give it back to its rank first.`)
   const wrong = overAwards(lines, await leftOnOffer(tx, desk, given.proposalId))
   if (wrong.size > 0)
     throw refuse.invalid(

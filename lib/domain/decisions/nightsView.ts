@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { nightsPolicy } from './nightsPolicySchema'
+import { nightsPolicy } from './policyWords'
+import { choiceOrRank, nightChoice } from './choiceWords'
 import { policySummary } from './policySummary'
 
 /** One instrument of a request: what was asked, what stands given, what the suggestion gives. Times in seconds. */
@@ -22,10 +23,12 @@ const nightsLine = z.object({
   service: z.enum(['queue', 'visitor']),
   conditions: z.string(),
   suggestedSeconds: z.number(),
+  /** What it gives as things stand, while something else is tried. */
+  standsSeconds: z.number().nullable(),
   /** Why the suggestion gives nothing: the seconds found when its turn came, and who would lose if it came first. */
   whyNot: z
     .object({
-      reason: z.enum(['not-possible', 'not-usable', 'too-little-left', 'set-aside']),
+      reason: z.enum(['not-possible', 'not-usable', 'too-little-left', 'set-aside', 'never']),
       left: z.number(),
       displaces: z.array(z.object({ reviewNumber: z.string(), seconds: z.number() })),
     })
@@ -40,6 +43,9 @@ const nightsRow = z.object({
   rank: z.number(),
   isAbove: z.boolean(),
   setAside: z.boolean(),
+  /** What the chair has laid down, and why; what a trial would lay down instead. */
+  choice: z.object({ choice: nightChoice, reason: z.string() }).nullable(),
+  tried: choiceOrRank.nullable(),
   decisionVersion: z.number(),
   lines: z.array(nightsLine),
 })
@@ -67,6 +73,11 @@ export const nightsView = z.object({
   policy: nightsPolicy,
   policies: z.array(policySummary),
   line: z.number(),
+  /** Whether the nights lost are on record, and their share of the dark time on offer as counted here. */
+  weather: z.object({ isRecorded: z.boolean(), lostShare: z.number() }),
+  /** Review numbers that must be given time and cannot all be. */
+  conflict: z.array(z.string()),
+  isTrial: z.boolean(),
   rows: z.array(nightsRow),
   telescopes: z.array(
     z.object({
@@ -75,6 +86,11 @@ export const nightsView = z.object({
       offeredSeconds: z.number(),
       givenSeconds: z.number(),
       suggestedSeconds: z.number(),
+      /** Held back for the director and targets of opportunity, and what for. */
+      heldSeconds: z.number(),
+      heldReason: z.string(),
+      /** What may be planned with: on offer, less weather and what is held back. */
+      plannedSeconds: z.number(),
       /** Dark time on offer by sidereal time and moonlight, with what the suggestion lays there. */
       bins: z.array(nightsBin),
     }),

@@ -10,8 +10,8 @@ const limits = { seconds: 20, relativeGap: 0.005 }
 const kept = boundedMap<Promise<MeritPlan | { why: string }>>(16)
 
 /** What the answer depends on, as one word. */
-function fingerprint({ asked, line, bins, standing, merit }: MeritInput): string {
-  const text = JSON.stringify([asked, line, bins, standing, [...merit]], (_, value: unknown) =>
+function fingerprint({ asked, line, bins, standing, merit, must }: MeritInput): string {
+  const text = JSON.stringify([asked, line, bins, standing, [...merit], must], (_, value: unknown) =>
     value instanceof Map ? [...value] : value,
   )
   return createHash('sha256').update(text).digest('hex')

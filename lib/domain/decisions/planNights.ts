@@ -2,18 +2,21 @@ import { awardsOutside } from '@/db/queries/awardsOutside'
 import { rankingEntries } from '@/db/queries/rankings'
 import { standingContents } from '@/db/queries/versions'
 import type { RankingsRow } from '@/db/tables'
-import type { BinnedLine, BinnedPlan } from '@/lib/panel/nights/binTypes'
+import { keptBins, keptLine } from '@/lib/panel/nights/allowFor'
+import type { BinnedLine, BinnedPlan, NightBin } from '@/lib/panel/nights/binTypes'
 import { byRankInBins } from '@/lib/panel/nights/byRankInBins'
 import type { ActingContext } from '../context'
 import { binnedLine } from '../nights/binnedLine'
-import { callBins } from '../nights/callBins'
-import type { SeasonBins } from '../nights/seasonBins'
+import { callBins, type CallBins } from '../nights/callBins'
 import type { PanelDesk } from '../panels/openPanel'
+import { visibleLine, visibleOrder } from '../rankings/order'
+import { arrangeAsked, type ArrangedAsked } from './arrangeAsked'
 import { meritOf } from './meritOf'
 import { planByMerit } from './planByMerit'
-import { nightsPolicy, type NightsPolicy } from './nightsPolicySchema'
+import { planTerms, type PlanTerms } from './planTerms'
+import { nightsPolicy, type NightsPolicy } from './policyWords'
 import { summaryOf, type PolicySummary } from './policySummary'
-import { visibleLine, visibleOrder } from '../rankings/order'
+import type { Trial } from './trialSchema'
 import { wantedLines, type WantedLine } from './wantedLines'
 
 export interface PlannedNights {
@@ -21,9 +24,11 @@ export interface PlannedNights {
   line: number
   setAside: ReadonlySet<number>
   wanted: WantedLine[]
-  season: SeasonBins
-  /** In ranking order, without what is set aside. */
-  asked: BinnedLine[][]
+  season: CallBins
+  terms: PlanTerms
+  /** What may be planned with: the season's bins less weather and what is held back. */
+  bins: NightBin[]
+  asked: ArrangedAsked
   /** Given by other panels, or to proposals that the asker may not see. */
   standing: BinnedLine[]
   policy: NightsPolicy
@@ -32,15 +37,25 @@ export interface PlannedNights {
   policies: PolicySummary[]
 }
 
+/** A line to lay, as it was asked or given. */
+interface LineFacts {
+  proposalId: number
+  instrumentId: number
+  telescopeId: number
+  seconds: number
+  least: number
+  possible: boolean
+}
+
 /**
  * The suggestion for the nights by a policy, in the bins each proposal can use, over what the asker may see and
- * what is given elsewhere. By rank where the other policy finds no answer.
+ * what is given elsewhere. By rank where the other policy finds no answer. A trial is put over the terms that stand.
  */
 export async function planNights(
   ctx: Pick<ActingContext, 'db'>,
   desk: PanelDesk,
   ranking: RankingsRow,
-  policy: NightsPolicy = 'rank',
+  { policy = 'rank', trial }: { policy?: NightsPolicy; trial?: Trial } = {},
 ): Promise<PlannedNights> {
   const entries = await rankingEntries(ctx.db, ranking.id)
   const full = entries.map((entry) => entry.proposal_id)
@@ -55,57 +70,56 @@ export async function planNights(
     callBins(ctx.db, desk.call),
     standingContents(ctx.db, [...order, ...elsewhere.map(({ proposalId }) => proposalId)]),
   ])
-  const binned = (line: {
-    proposalId: number
-    instrumentId: number
-    telescopeId: number
-    seconds: number
-    least: number
-    possible: boolean
-  }): BinnedLine[] => {
-    const held = contents.get(line.proposalId)
-    const {
-      proposalId: proposal,
-      instrumentId: instrument,
-      telescopeId: telescope,
-      seconds,
-      least,
-      possible,
-    } = line
-    return held
-      ? [binnedLine({ proposal, instrument, telescope, seconds, least, possible }, held, season)]
-      : []
+  const terms = await planTerms(ctx.db, desk.call, season, { proposalIds: order, trial })
+  const bins = keptBins(season.bins, terms.kept)
+  const binned = (facts: LineFacts): BinnedLine[] => {
+    const held = contents.get(facts.proposalId)
+    if (!held) return []
+    const { proposalId: proposal, instrumentId: instrument, telescopeId: telescope, ...rest } = facts
+    const { seconds, least, possible } = rest
+    const line = { proposal, instrument, telescope, seconds, least, possible }
+    return [keptLine(binnedLine(line, held, season), terms.kept)]
   }
-  const asked = order
-    .filter((id) => !setAside.has(id))
-    .map((id) =>
-      wanted
-        .filter((line) => line.proposalId === id)
-        .flatMap((line) => binned({ ...line, seconds: line.wholeSeconds, least: line.leastSeconds })),
-    )
-    .filter((lines) => lines.length > 0)
   const standing = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const asked = await arrangeAsked(
+    order
+      .filter((id) => !setAside.has(id))
+      .map((id) =>
+        wanted
+          .filter((line) => line.proposalId === id)
+          .flatMap((line) => binned({ ...line, seconds: line.wholeSeconds, least: line.leastSeconds })),
+      )
+      .filter((lines) => lines.length > 0),
+    terms.choices,
+    { bins, standing },
+  )
   const line = visibleLine(full, desk.hidden, ranking.line_after ?? 0)
-  const above = new Set(order.slice(0, line))
+  return {
+    ...{ order, line, setAside, wanted, season, terms, bins, asked, standing },
+    ...(await planned(ctx, desk, { policy, asked, bins, standing, above: new Set(order.slice(0, line)) })),
+  }
+}
+
+/** The plan of a policy, and what each would come to. */
+async function planned(
+  ctx: Pick<ActingContext, 'db'>,
+  desk: PanelDesk,
+  given: Pick<PlannedNights, 'policy' | 'asked' | 'bins' | 'standing'> & { above: ReadonlySet<number> },
+): Promise<Pick<PlannedNights, 'policy' | 'plan' | 'policies'>> {
+  const { policy, asked, bins, standing, above } = given
   const merit = await meritOf(ctx.db, desk)
-  const byRank = byRankInBins(asked, season.bins, standing)
+  const byRank = byRankInBins(asked.inTurn, bins, standing)
   const byMerit = await planByMerit({
-    asked,
-    line: asked.filter(([first]) => first && above.has(first.proposal)).length,
-    bins: season.bins,
+    asked: [...asked.byRank, ...asked.fillers],
+    line: asked.byRank.filter(([first]) => first && above.has(first.proposal)).length,
+    bins,
     standing,
     merit,
+    must: asked.must,
   })
   const hasMerit = !('why' in byMerit)
   const summarised = { rank: byRank, merit: hasMerit ? byMerit : null }
   return {
-    order,
-    line,
-    setAside,
-    wanted,
-    season,
-    asked,
-    standing,
     policy: policy === 'merit' && hasMerit ? 'merit' : 'rank',
     plan: policy === 'merit' && hasMerit ? byMerit : byRank,
     policies: nightsPolicy.options.map((name) =>

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import type { BinnedPlan } from '@/lib/panel/nights/binTypes'
-import { nightsPolicy, type NightsPolicy } from './nightsPolicySchema'
+import { nightsPolicy, type NightsPolicy } from './policyWords'
 
 /** What a policy comes to: proposals given time, seconds given, and merit times hours above the line. */
 export const policySummary = z.object({

@@ -1,4 +1,5 @@
-import { panelTexts, standingAwards, standingDecisions } from '@/db/queries/decisions'
+import { panelTexts } from '@/db/queries/panelTexts'
+import { standingAwards, standingDecisions } from '@/db/queries/decisions'
 import { rankingEntries } from '@/db/queries/rankings'
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
@@ -28,7 +29,8 @@ export function prepareDecisions(ctx: ActingContext, input: PanelKeyInput): Prom
     for (const proposalId of order) {
       const standing = before.get(proposalId)
       const comments = texts.filter(
-        (text) => text.proposalId === proposalId && text.audience === 'investigators',
+        (text) =>
+          text.proposalId === proposalId && text.audience === 'investigators' && text.withheldReason === null,
       )
       await draftDecision(tx, desk, proposalId, standing?.version ?? 0, {
         outcome: outcomeOf(awards.filter((line) => line.proposalId === proposalId)),

@@ -1,45 +1,51 @@
 import { standingAwards, standingDecisions } from '@/db/queries/decisions'
+import { standingChoices } from '@/db/queries/nightTerms'
 import { offeredTime } from '@/db/queries/panel'
 import { currentRanking } from '@/db/queries/rankings'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import type { ActingContext } from '../context'
-import { openPanel } from '../panels/openPanel'
 import { callBins } from '../nights/callBins'
-import type { NightsBin, NightsRow, NightsView } from './nightsView'
+import { openPanel } from '../panels/openPanel'
+import { nightsTelescope } from './nightsTelescope'
+import type { NightsRow, NightsView } from './nightsView'
 import { planNights, type PlannedNights } from './planNights'
-import type { NightsPolicy } from './nightsPolicySchema'
+import type { NightsPolicy } from './policyWords'
+import { isTried, type Trial } from './trialSchema'
 import { whyNotGiven } from './whyNotGiven'
 
-/** The bins of a telescope, with what the suggestion lays there. */
-function binsOf(
-  season: PlannedNights['season'],
-  planned: PlannedNights | null,
-  telescope: number,
-): NightsBin[] {
-  return season.bins.flatMap(({ instrument: _, ...bin }, index) => {
-    if (bin.telescope !== telescope) return []
-    const given = planned?.plan.given ?? []
-    const usedSeconds = given.reduce((sum, { laid }) => sum + (laid.get(index) ?? 0), 0)
-    const { half, siderealFromH, moon, seconds } = bin
-    return [{ half, siderealFromH, moon, seconds, usedSeconds }]
-  })
+const secondsIn = (planned: PlannedNights | null, proposalId: number, instrumentId: number): number =>
+  planned?.plan.given.find((one) => one.proposal === proposalId && one.instrument === instrumentId)
+    ?.seconds ?? 0
+
+/** Share of the dark time in the bins that the weather is counted to take. */
+function lostShare({ season, terms }: PlannedNights): number {
+  const dark = season.bins.reduce((sum, { seconds }) => sum + seconds, 0)
+  const lost = season.bins.reduce(
+    (sum, { half, seconds }) => sum + seconds * (terms.weather.lostByHalf[half] ?? 0),
+    0,
+  )
+  return dark > 0 ? lost / dark : 0
 }
 
-/** Hours on offer and hours given, as their reader may see them. */
+/** Hours on offer and hours given, as their reader may see them. With a trial, what it would change. */
 export async function readNights(
   ctx: ActingContext,
-  key: { callSlug: string; panelId?: number; policy?: NightsPolicy },
+  key: { callSlug: string; panelId?: number; policy?: NightsPolicy; trial?: Trial },
 ): Promise<NightsView> {
   const desk = await openPanel(ctx, key)
   const ranking = await currentRanking(ctx.db, desk.panel.id)
+  const trial = isTried(key.trial) ? key.trial : undefined
+  const { policy } = key
   const blocks = await offeredTime(ctx.db, desk.call.id)
-  const planned = ranking ? await planNights(ctx, desk, ranking, key.policy) : null
+  const planned = ranking ? await planNights(ctx, desk, ranking, { policy, trial }) : null
+  const stands = ranking && trial ? await planNights(ctx, desk, ranking, { policy }) : null
   const season = planned?.season ?? (await callBins(ctx.db, desk.call))
   const order = planned?.order ?? []
-  const [heads, awards, decisions] = await Promise.all([
+  const [heads, awards, decisions, choices] = await Promise.all([
     snapshotHeads(ctx.db, order),
     standingAwards(ctx.db, order),
     standingDecisions(ctx.db, order),
+    standingChoices(ctx.db, order),
   ])
   const numberOf = (id: number) => desk.proposals.find((proposal) => proposal.id === id)?.reviewNumber ?? ''
   const rows = order.map((id, index): NightsRow => ({
@@ -49,12 +55,12 @@ export async function readNights(
     rank: index + 1,
     isAbove: index < (planned?.line ?? 0),
     setAside: planned?.setAside.has(id) ?? false,
+    choice: choices.get(id) ?? null,
+    tried: trial?.choices?.[id] ?? null,
     decisionVersion: decisions.get(id)?.version ?? 0,
     lines: (planned?.wanted ?? [])
       .filter((line) => line.proposalId === id)
       .map((line) => {
-        const is = (one: { proposal: number; instrument: number }) =>
-          one.proposal === id && one.instrument === line.instrumentId
         const given = awards.find((a) => a.proposalId === id && a.instrumentId === line.instrumentId)
         return {
           ...line,
@@ -62,12 +68,13 @@ export async function readNights(
           isReserve: given?.isReserve ?? false,
           service: given?.service ?? 'queue',
           conditions: given?.conditions ?? '',
-          suggestedSeconds: planned?.plan.given.find(is)?.seconds ?? 0,
+          suggestedSeconds: secondsIn(planned, id, line.instrumentId),
+          standsSeconds: stands ? secondsIn(stands, id, line.instrumentId) : null,
           whyNot: planned ? whyNotGiven(planned, id, line.instrumentId, numberOf) : null,
         }
       }),
   }))
-  const all = rows.flatMap((row) => row.lines)
+  const lines = rows.flatMap((row) => row.lines)
   return {
     panelId: desk.panel.id,
     callNumber: desk.call.number,
@@ -78,18 +85,12 @@ export async function readNights(
     policy: planned?.policy ?? 'rank',
     policies: planned?.policies ?? [],
     line: planned?.line ?? 0,
+    weather: { isRecorded: season.weather !== null, lostShare: planned ? lostShare(planned) : 0 },
+    conflict: (planned?.asked.conflict ?? []).map(numberOf),
+    isTrial: trial !== undefined,
     rows,
-    telescopes: [...new Set(blocks.map((block) => block.telescopeId))].map((id) => {
-      const own = blocks.filter((block) => block.telescopeId === id)
-      const lines = all.filter((line) => line.telescopeId === id)
-      return {
-        id,
-        name: own[0]?.telescope ?? '',
-        offeredSeconds: own.reduce((sum, block) => sum + block.seconds, 0),
-        givenSeconds: lines.reduce((sum, line) => sum + (line.isReserve ? 0 : line.givenSeconds), 0),
-        suggestedSeconds: lines.reduce((sum, line) => sum + line.suggestedSeconds, 0),
-        bins: binsOf(season, planned, id),
-      }
-    }),
+    telescopes: [...new Set(blocks.map((block) => block.telescopeId))].map((id) =>
+      nightsTelescope(id, { blocks, season, planned, lines }),
+    ),
   }
 }

@@ -1,4 +1,5 @@
-import { panelTexts, standingAwards, standingDecisions, type StandingAward } from '@/db/queries/decisions'
+import { panelTexts } from '@/db/queries/panelTexts'
+import { standingAwards, standingDecisions, type StandingAward } from '@/db/queries/decisions'
 import { assessedLines, requestLines } from '@/db/queries/panel'
 import { authorize } from '@/lib/auth/authorize'
 import type { ActingContext } from '../context'
@@ -22,7 +23,10 @@ export interface OutcomeView {
     statement: string
     lines: StandingAward[]
     askedSeconds: number
-    /** Comments of the reviewers, unsigned and in no order that tells who wrote them. */
+    /**
+     * Comments of the reviewers, unsigned and in no order that tells who wrote them; without those that were withheld,
+     * and those the statement holds word for word.
+     */
     comments: string[]
     assessments: {
       instrument: string
@@ -64,8 +68,9 @@ export async function readOutcome(ctx: ActingContext, reference: string): Promis
       lines,
       askedSeconds: asked.reduce((sum, line) => sum + line.askedSeconds, 0),
       comments: texts
-        .filter((text) => text.audience === 'investigators')
+        .filter((text) => text.audience === 'investigators' && text.withheldReason === null)
         .map((text) => text.body)
+        .filter((body) => !decision.statement.includes(body.trim()))
         .sort((a, b) => a.localeCompare(b, 'en-GB')),
       assessments: assessed.map((one) => ({
         instrument: asked.find((line) => line.instrumentId === one.instrumentId)?.instrument ?? '',

@@ -16,6 +16,8 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { decisionLetter } from '../outbox/letters/decision'
 import { queueLetter } from '../outbox/queueLetter'
+import { approvableOf } from './approvableOf'
+import { isApproved } from './approval'
 import { moveTimeFor } from './moveTimeFor'
 import { openDecisions } from './openDecisions'
 import { outcomeOf, whyNotReleased } from './rules'
@@ -23,7 +25,8 @@ import type { ReleaseInput } from './schema'
 
 /**
  * Makes the decisions of a panel known, all at once and once only: states, ledger and one letter to each investigator
- * in one transaction. Decisions prepared by the deputy go with the chair's, unseen.
+ * in one transaction. Each was approved, as it stands, by someone who did not change it last. Decisions prepared by
+ * the deputy go with the chair's, unseen.
  */
 export function releaseDecisions(ctx: ActingContext, input: ReleaseInput): Promise<{ released: number }> {
   return inTransaction(ctx, async (tx) => {
@@ -38,6 +41,10 @@ export function releaseDecisions(ctx: ActingContext, input: ReleaseInput): Promi
       isFrozen: ranking.frozen_at !== null,
       undecided: waiting.length,
       unready: ids.filter((id) => !decisions.get(id)?.statement.trim()).length,
+      unapproved: ids.filter((id) => {
+        const decision = decisions.get(id)
+        return !decision || !isApproved(approvableOf(decision))
+      }).length,
     })
     if (why) throw refuse.closed(why)
     const awards = await standingAwards(tx.db, ids)

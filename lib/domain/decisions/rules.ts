@@ -61,14 +61,25 @@ export interface ReadyFacts {
   undecided: number
   /** Proposals without a prepared decision, or with an empty statement. */
   unready: number
+  /** Proposals whose decision no second person has approved as it stands. */
+  unapproved: number
 }
 
 /** Why the decisions of a panel cannot be made known yet; null when they can. Counts are of what the asker may see. */
-export function whyNotReleased({ phase, isFrozen, undecided, unready }: ReadyFacts): string | null {
+export function whyNotReleased({
+  phase,
+  isFrozen,
+  undecided,
+  unready,
+  unapproved,
+}: ReadyFacts): string | null {
   if (phase === 'decided' || phase === 'archived') return 'The decisions of this call are made known already.'
   if (phase !== 'ranking')
     return 'Decisions are made known once every panel of the call has begun its ranking.'
   if (undecided === 0) return 'The decisions of this panel are made known already.'
   if (!isFrozen) return 'Freeze the ranking first: decisions rest on it.'
-  return unready === 0 ? null : 'Some decisions are not prepared yet: each needs an outcome and a statement.'
+  if (unready > 0) return 'Some decisions are not prepared yet: each needs an outcome and a statement.'
+  return unapproved === 0
+    ? null
+    : 'Some decisions wait for a second person: whoever did not prepare them, chair, deputy or office, approves them.'
 }

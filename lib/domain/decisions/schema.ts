@@ -1,6 +1,8 @@
 import { z } from 'zod'
 import { panelKeySchema, panelQuery, rowKey } from '../panels/schema'
-import { nightsPolicy } from './nightsPolicySchema'
+import { choiceOrRank } from './choiceWords'
+import { nightsPolicy } from './policyWords'
+import { trialSchema, trialText } from './trialSchema'
 
 /** Hours as typed, with a point or a comma; kept as whole seconds. */
 const hoursAsSeconds = z
@@ -29,8 +31,33 @@ export const awardSchema = panelKeySchema.extend({
 })
 export type AwardInput = z.output<typeof awardSchema>
 
-export const planSchema = panelKeySchema.extend({ policy: nightsPolicy })
+const reason = z.string().trim().max(500, 'At most 500 characters.')
+const given = reason.min(10, 'Say why, in a few words: it is kept in the logbook.')
+
+export const planSchema = panelKeySchema.extend({
+  policy: nightsPolicy,
+  /** Tried on the page, and taken with the plan. */
+  trial: trialSchema.optional(),
+  /** Why, where the trial lays something down. */
+  reason: reason.optional(),
+})
 export type PlanInput = z.output<typeof planSchema>
+/** Time, never, or fillers: whatever its rank. */
+export const choiceSchema = panelKeySchema.extend({
+  proposalId: rowKey,
+  choice: choiceOrRank,
+  reason: given,
+})
+export type ChoiceInput = z.output<typeof choiceSchema>
+
+/** Hours of a telescope held back. */
+export const heldSchema = panelKeySchema.extend({
+  telescopeId: rowKey,
+  hours: hoursAsSeconds,
+  reason: given,
+})
+export type HeldInput = z.output<typeof heldSchema>
+
 export const prepareSchema = panelKeySchema
 
 export const statementSchema = panelKeySchema.extend({
@@ -49,5 +76,33 @@ export const releaseSchema = panelKeySchema.extend({
 })
 export type ReleaseInput = z.output<typeof releaseSchema>
 
+/** What is approved, each at the version that was read. */
+export const approveSchema = panelKeySchema.extend({
+  decisions: z
+    .array(z.object({ proposalId: rowKey, version: z.number().int().positive() }))
+    .min(1)
+    .max(2000),
+})
+export type ApproveInput = z.output<typeof approveSchema>
+
+export const withholdSchema = panelKeySchema
+  .extend({
+    proposalId: rowKey,
+    assignmentId: rowKey,
+    withhold: z.boolean(),
+    reason: z.string().trim().max(200, 'At most 200 characters.'),
+  })
+  .refine(({ withhold, reason }) => !withhold || reason.length >= 3, {
+    path: ['reason'],
+    message: 'Say in a few words why.',
+  })
+export type WithholdInput = z.output<typeof withholdSchema>
+
 /** The table of nights, under a policy. */
-export const nightsQuery = panelQuery.extend({ policy: nightsPolicy.default('rank') })
+export const nightsQuery = panelQuery.extend({
+  policy: nightsPolicy.default('rank'),
+  trial: trialText.optional(),
+})
+
+/** The same, run through seasons of weather: what is suggested, or what is given. */
+export const seasonsQuery = nightsQuery.extend({ of: z.enum(['suggested', 'given']) })

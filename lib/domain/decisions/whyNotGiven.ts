@@ -10,15 +10,17 @@ export function whyNotGiven(
   numberOf: (proposalId: number) => string,
 ): NightsLine['whyNot'] {
   if (planned.setAside.has(proposalId)) return { reason: 'set-aside', left: 0, displaces: [] }
+  if (planned.terms.choices.get(proposalId)?.choice === 'never')
+    return { reason: 'never', left: 0, displaces: [] }
   const not = planned.plan.notGiven.find(
     (one) => one.proposal === proposalId && one.instrument === instrumentId,
   )
   if (!not) return null
   const { reason, found: left } = not
   if (reason !== 'too-little-left') return { reason, left, displaces: [] }
-  const { asked, season, standing } = planned
+  const { asked, bins, standing } = planned
   const lost = new Map<number, number>()
-  for (const one of whyNotInBins(asked, season.bins, standing, proposalId)?.displaced ?? [])
+  for (const one of whyNotInBins(asked.inTurn, bins, standing, proposalId)?.displaced ?? [])
     lost.set(one.proposal, (lost.get(one.proposal) ?? 0) + one.fromSeconds - one.toSeconds)
   const displaces = [...lost].flatMap(([id, seconds]) =>
     seconds > 0 ? [{ reviewNumber: numberOf(id), seconds }] : [],

@@ -6,6 +6,8 @@ export interface HeldRecord<Facts> {
   name: string
   now: RecordVersion<Facts>
   next: RecordVersion<Facts> | null
+  /** First evening it is no longer there; null while it stays. */
+  retiredFrom: string | null
 }
 
 /**
@@ -16,10 +18,11 @@ export function heldRecord<Facts>(
   owner: { slug: string; name: string },
   versions: readonly RecordVersion<Facts>[],
   onDate: string,
+  retiredFrom: string | null = null,
 ): HeldRecord<Facts> | null {
   const now = versions.find(({ validFrom }) => validFrom <= onDate)
   if (!now) return null
   const newest = versions[0]
   const next = newest && newest.recordVersion > now.recordVersion ? newest : null
-  return { slug: owner.slug, name: owner.name, now, next }
+  return { slug: owner.slug, name: owner.name, now, next, retiredFrom }
 }

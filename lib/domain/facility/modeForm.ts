@@ -41,6 +41,37 @@ export function modeTyped(facts: ModeFacts): ModeTyped {
   }
 }
 
+/** A mode nobody has described yet: what is chosen of a few is left open. */
+export const emptyMode: Omit<ModeTyped, 'kind' | 'medium' | 'readNoisePer' | 'skySubtraction'> = {
+  wavelengthMinA: '',
+  wavelengthMaxA: '',
+  band: '',
+  pixelScaleArcsec: '',
+  dispersionAPerPixel: '',
+  slitWidthArcsec: '',
+  resolvingPower: '',
+  readNoiseE: '',
+  darkEPerS: '',
+  fullWellE: '',
+  gainEPerAdu: '',
+  minSubExposureS: '',
+  maxSubExposureS: '',
+  systematicFloor: '',
+  twilightLimitDeg: '',
+  backgroundPixels: '',
+  thermalEPerS: '',
+  opticsArcsec: '',
+  dispersionCorrected: false,
+  filters: '',
+  calibrationPolicy: '',
+  throughput: [],
+  throughputIncludes: [],
+  acquisitionS: '',
+  readoutS: '',
+  ditherS: '',
+  calibrationFraction: '',
+}
+
 export const modeFields: Record<keyof ModeTyped, FieldWords> = {
   kind: { label: 'Kind' },
   wavelengthMinA: { label: 'Blue end', unit: 'Å' },

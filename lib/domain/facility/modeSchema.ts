@@ -1,8 +1,10 @@
 import { z } from 'zod'
 import { bands } from '@/lib/science/light'
 import { optionalQuantity, quantity } from './quantity'
+import { carrier, newRecordFields } from './newRecordSchema'
 import { versionFields } from './recordSchema'
 import { throughputTable } from './throughputSchema'
+import type { ModeFacts } from './types'
 
 /** What a throughput table may count already. */
 export const throughputParts = [
@@ -20,8 +22,7 @@ const seconds = '\u00a0s'
 const duration = (what: string) => quantity({ what, low: 0, high: 36_000, unit: seconds })
 const wavelength = (what: string) => quantity({ what, low: 1000, high: 300_000, unit: '\u00a0Å' })
 
-const fields = z.object({
-  ...versionFields,
+const fields = {
   kind: z.enum(['imaging', 'long-slit'], 'Say whether it takes images or spectra.'),
   wavelengthMinA: wavelength('The blue end'),
   wavelengthMaxA: wavelength('The red end'),
@@ -66,9 +67,9 @@ const fields = z.object({
   readoutS: duration('A read-out'),
   ditherS: duration('A dither'),
   calibrationFraction: quantity({ what: 'A share for calibration', low: 0, high: 2 }),
-})
+}
 
-type Fields = z.output<typeof fields>
+type Fields = z.output<z.ZodObject<typeof fields>>
 
 /** Fields that only make sense together. */
 function together(value: Fields, ctx: z.RefinementCtx): void {
@@ -91,21 +92,31 @@ function together(value: Fields, ctx: z.RefinementCtx): void {
     say('throughput', 'No light comes through: every efficiency is 0.')
 }
 
-const record = fields.superRefine(together).transform((value) => {
-  const { slug, over, validFrom, acquisitionS, readoutS, ditherS, calibrationFraction, ...rest } = value
+function factsOf({ acquisitionS, readoutS, ditherS, calibrationFraction, ...rest }: Fields): ModeFacts {
   return {
-    slug,
-    over,
-    validFrom,
-    facts: {
-      ...rest,
-      band: rest.band === '' ? null : rest.band,
-      overheads: { acquisitionS, readoutS, ditherS, calibrationFraction },
-    },
+    ...rest,
+    band: rest.band === '' ? null : rest.band,
+    overheads: { acquisitionS, readoutS, ditherS, calibrationFraction },
   }
-})
+}
 
-export type ModeForm = z.input<typeof fields>
+const version = z.object({ ...versionFields, ...fields })
+const record = version
+  .superRefine(together)
+  .transform(({ slug, over, validFrom, ...rest }) => ({ slug, over, validFrom, facts: factsOf(rest) }))
+
+export type ModeForm = z.input<typeof version>
+
+const beginning = z.object({ ...newRecordFields, of: carrier('instrument'), ...fields })
+const begun = beginning.superRefine(together).transform(({ slug, name, of, validFrom, ...rest }) => ({
+  slug,
+  name,
+  of,
+  validFrom,
+  facts: factsOf(rest),
+}))
+
+export type NewModeForm = z.input<typeof beginning>
 
 const slitOnly = { dispersionAPerPixel: '', slitWidthArcsec: '', resolvingPower: '' }
 
@@ -121,3 +132,6 @@ export const modeRecordSchema = z.preprocess(ownFields, record) as z.ZodType<
   z.output<typeof record>,
   ModeForm
 >
+
+/** A new mode of an instrument with its first record. */
+export const newModeSchema = z.preprocess(ownFields, begun) as z.ZodType<z.output<typeof begun>, NewModeForm>

@@ -1,7 +1,10 @@
 import { no, yes, type Decision } from '@/lib/auth/decision'
 import { holds, holdsForInstrument, type Actor } from '../actor'
 
-/** Records of sites and telescopes are the office's. */
+/**
+ * Records of sites and telescopes are the office's, and so is what there is at all: what retires is no longer offered,
+ * and offers are the office's.
+ */
 export function mayEditFacility(actor: Actor | null): Decision {
   return holds(actor, 'office') ? yes : no('role', 'Only the office changes the records of the facility.')
 }

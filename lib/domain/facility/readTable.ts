@@ -4,6 +4,7 @@ import { readNumber } from '@/lib/science/redshift'
 import { delimiterOf, readRecords } from '../targets/csv'
 import { bandTable, darkSkyQuantity, extinctionQuantity } from './bandTableSchema'
 import { typed, type TypedRow } from './recordForm'
+import { horizonTable, mostHorizonRows } from './horizonSchema'
 import { readTableHeads, type TableHeads, type TableKind } from './tableHeads'
 import { mostThroughputRows, throughputTable } from './throughputSchema'
 
@@ -24,12 +25,16 @@ const schemas: Record<TableKind, z.ZodType<unknown, TypedRow[]>> = {
   throughput: throughputTable,
   extinction: bandTable(extinctionQuantity),
   'dark-sky': bandTable(darkSkyQuantity),
+  horizon: horizonTable,
 }
+
+const mostRows = (kind: TableKind) => (kind === 'horizon' ? mostHorizonRows : mostThroughputRows)
 
 export const columnWords: Record<TableKind, { at: string; value: string }> = {
   throughput: { at: 'Wavelength', value: 'Efficiency' },
   extinction: { at: 'Band', value: 'Extinction' },
   'dark-sky': { at: 'Band', value: 'Dark sky' },
+  horizon: { at: 'Azimuth', value: 'Lowest altitude' },
 }
 
 /** A spreadsheet's guard against formulas is taken off again. */
@@ -45,6 +50,7 @@ function scaled(text: string, factor: number, hasDecimalComma: boolean): string 
 function rowOf(record: readonly string[], heads: TableHeads, kind: TableKind, comma: boolean): TypedRow {
   const at = cellText(record[heads.at])
   const value = cellText(record[heads.value])
+  if (kind === 'horizon') return { at: scaled(at, 1, comma), value: scaled(value, 1, comma) }
   if (kind !== 'throughput') return { at, value: scaled(value, 1, comma) }
   const share = /^(.*\d)\s*%$/.exec(value)?.[1]
   const perCent = heads.isPercent || share !== undefined
@@ -84,6 +90,12 @@ function notesOf(heads: TableHeads, rows: TypedRow[], kind: TableKind): string[]
   return notes
 }
 
+/** Whether a horizon ends with its first row once more. */
+function saysNorthTwice(rows: readonly TypedRow[]): boolean {
+  const [first, last] = [rows[0], rows.at(-1)]
+  return first?.at === '0' && last?.at === '360' && first.value === last.value
+}
+
 /**
  * Reads a table out of a file or what was pasted: comma, semicolon or tab between cells, a decimal comma only beside
  * semicolons, columns by their heads, wavelengths in the unit the head names. Says what is wrong row by row.
@@ -98,16 +110,22 @@ export function readTable(text: string, kind: TableKind): TableRead {
   const delimiter = delimiterOf(first)
   if (delimiter === ' ') return no('Part the columns by commas, semicolons or tabs, and name them first.')
   if (rest.length === 0) return no('There are heads, but no rows under them.')
-  if (rest.length > mostThroughputRows)
+  const most = mostRows(kind)
+  // A horizon may say north twice.
+  if (rest.length > most + (kind === 'horizon' ? 1 : 0))
     return no(
-      `There are ${formatNumber(rest.length)} rows; at most ${formatNumber(mostThroughputRows)} are kept. ` +
-        `One row in ${formatNumber(Math.ceil(rest.length / mostThroughputRows))} would do.`,
+      `There are ${formatNumber(rest.length)} rows; at most ${formatNumber(most)} are kept. ` +
+        `One row in ${formatNumber(Math.ceil(rest.length / most))} would do.`,
     )
   const [headRow = [], ...records] = readRecords(lines.join('\n'), delimiter)
   const heads = readTableHeads(headRow, kind)
   if (typeof heads === 'string') return no(heads)
-  const rows = records.map((record) => rowOf(record, heads, kind, delimiter === ';'))
+  const all = records.map((record) => rowOf(record, heads, kind, delimiter === ';'))
+  const isNorthTwice = kind === 'horizon' && saysNorthTwice(all)
+  const rows = isNorthTwice ? all.slice(0, -1) : all
   const problems = problemsOf(rows, kind)
   if (typeof problems === 'string') return no(problems)
-  return { ok: true, rows, problems, notes: notesOf(heads, rows, kind) }
+  const notes = notesOf(heads, rows, kind)
+  if (isNorthTwice) notes.push('The last row, at 360°, says what the first one says at 0°: it was left out.')
+  return { ok: true, rows, problems, notes }
 }

@@ -1,22 +1,24 @@
 import { databaseNow } from '@/db/queries/clock'
 import { siteRecordsAt, telescopesAtSites } from '@/db/queries/facility'
 import type { Context } from '../context'
-import type { SiteRecord } from './types'
+import type { SiteRecord, TelescopeFacts } from './types'
 
 export interface TelescopeAtSite {
   id: number
   slug: string
   name: string
-  /** The record in force today. */
+  /** The records in force today. */
   site: SiteRecord
+  facts: TelescopeFacts
 }
 
-/** Every telescope with the record of its site in force today, and the moment they were read. */
+/** Every telescope with its record and its site's in force today, and the moment they were read. */
 export async function readTelescopes(ctx: Context): Promise<{ now: Date; telescopes: TelescopeAtSite[] }> {
   const now = await databaseNow(ctx.db)
+  const today = now.toISOString().slice(0, 10)
   const [sites, telescopes] = await Promise.all([
-    siteRecordsAt(ctx.db, now.toISOString().slice(0, 10)),
-    telescopesAtSites(ctx.db),
+    siteRecordsAt(ctx.db, today),
+    telescopesAtSites(ctx.db, today),
   ])
   return {
     now,

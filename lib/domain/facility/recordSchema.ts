@@ -1,7 +1,7 @@
 import { z } from 'zod'
 
 /** First evening a version holds for, `2027-03-01`. */
-const validFrom = z
+export const firstEvening = z
   .string()
   .trim()
   .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give the first evening as year-month-day.')
@@ -16,5 +16,5 @@ export const versionFields = {
   slug: z.string().min(1).max(60),
   /** The newest version when the page was read: somebody else's newer one is not written over unseen. */
   over: z.number().int().positive(),
-  validFrom,
+  validFrom: firstEvening,
 }

@@ -6,6 +6,7 @@ const heads: Record<TableKind, readonly [string, string]> = {
   throughput: ['Wavelength (Å)', 'Efficiency'],
   extinction: ['Band', 'Extinction (mag an airmass)'],
   'dark-sky': ['Band', 'Dark sky (AB mag arcsec-2)'],
+  horizon: ['Azimuth (deg)', 'Lowest altitude (deg)'],
 }
 
 /** A table of a record as a file that can be read back in; cells that a spreadsheet would run are guarded. */

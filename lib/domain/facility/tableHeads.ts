@@ -1,5 +1,5 @@
-/** The tables of a record: efficiency by wavelength, or a value by band. */
-export type TableKind = 'throughput' | 'extinction' | 'dark-sky'
+/** The tables of a record: efficiency by wavelength, a value by band, or the lowest altitude by azimuth. */
+export type TableKind = 'throughput' | 'extinction' | 'dark-sky' | 'horizon'
 
 /** Words a column goes by, in lower case; of two words, both joined. */
 const words: Record<TableKind, { at: readonly string[]; value: readonly string[] }> = {
@@ -15,7 +15,20 @@ const words: Record<TableKind, { at: readonly string[]; value: readonly string[]
     at: ['band', 'filter', 'name'],
     value: ['darksky', 'sky', 'brightness', 'surfacebrightness', 'mag', 'value'],
   },
+  horizon: {
+    at: ['azimuth', 'az', 'bearing'],
+    value: ['lowestaltitude', 'altitude', 'alt', 'horizon', 'elevation', 'el', 'lowest'],
+  },
 }
+
+const expected: Record<TableKind, string> = {
+  throughput: 'wavelength, with its unit, and efficiency',
+  extinction: 'band and extinction',
+  'dark-sky': 'band and sky',
+  horizon: 'azimuth and lowest altitude, in degrees',
+}
+
+const degrees = ['deg', 'degree', 'degrees', '°', 'd']
 
 /** Ångströms in each unit. */
 const units: readonly [angstroms: number, shown: string, names: readonly string[]][] = [
@@ -57,13 +70,15 @@ const unitOf = (head: string) => {
 export function readTableHeads(heads: readonly string[], kind: TableKind): TableHeads | string {
   const at = heads.findIndex((head) => goesBy(head, words[kind].at))
   const value = heads.findIndex((head, index) => index !== at && goesBy(head, words[kind].value))
-  if (at < 0 || value < 0)
-    return kind === 'throughput'
-      ? 'The first line must name the columns: wavelength, with its unit, and efficiency.'
-      : `The first line must name the columns: band and ${kind === 'extinction' ? 'extinction' : 'sky'}.`
+  if (at < 0 || value < 0) return `The first line must name the columns: ${expected[kind]}.`
   const atHead = heads[at] ?? ''
   const unit = kind === 'throughput' ? unitOf(atHead) : undefined
-  const inBrackets = /[([]\s*([^)\]]+?)\s*[)\]]/.exec(atHead)?.[1]
+  const bracketsOf = (head: string) => /[([]\s*([^)\]]+?)\s*[)\]]/.exec(head)?.[1]
+  const inBrackets = bracketsOf(atHead)
+  const strange = [atHead, heads[value] ?? '']
+    .map(bracketsOf)
+    .find((unit) => unit && !degrees.includes(unit.toLowerCase()))
+  if (kind === 'horizon' && strange) return `Angles in ${strange} cannot be read; give them in degrees.`
   if (kind === 'throughput' && !unit && inBrackets)
     return `Wavelengths in ${inBrackets} cannot be read; give them in Å, nm or µm.`
   const valueParts = parts(heads[value] ?? '')

@@ -2,8 +2,8 @@ import { z } from 'zod'
 import { formatNumber } from '@/lib/format'
 import { quantity } from './quantity'
 
-/** Every computation walks through the table: more rows than this cost time and say nothing more. */
-export const mostThroughputRows = 300
+/** Every proposal that observes with a mode keeps its table: more rows than this take room and say nothing more. */
+export const mostThroughputRows = 2000
 
 const cell = {
   at: quantity({ what: 'A wavelength', low: 1000, high: 300_000, unit: '\u00a0Å' }),

@@ -5,6 +5,12 @@ export interface SiteRecord extends SiteFacts {
   recordVersion: number
 }
 
+/** A row of a horizon, straight to the next one and all around; azimuth from north through east. */
+export interface HorizonPoint {
+  azimuthDeg: number
+  altitudeDeg: number
+}
+
 /** What a version of a site's record says. */
 export interface SiteFacts {
   latitudeDeg: number
@@ -14,12 +20,24 @@ export interface SiteFacts {
   timeZone: string
   utcOffsetHours: number
   lowestAltitudeDeg: number
+  /** What stands around the site: the lowest airless altitude by azimuth; empty for none. */
+  horizon: HorizonPoint[]
   /** Band to magnitude an airmass. */
   extinctionMagPerAirmass: Record<string, number>
   /** Band to moonless zenith sky, AB mag per square arcsec. */
   darkSkyMagArcsec2: Record<string, number>
   /** At zenith and 500 nm. */
   seeingArcsec: { best10: number; median: number; worst90: number }
+  /** Null where none is on record. */
+  weather?: SiteWeather | null
+}
+
+/** How often nights are lost to weather. */
+export interface SiteWeather {
+  /** Share of the nights lost, for each month from January; 0 to 1. */
+  lostByMonth: number[]
+  /** Correlation of a night with the one before it; 0 to below 1. */
+  persistence: number
 }
 
 export interface ModeRecord extends ModeFacts {
@@ -35,6 +53,8 @@ export interface ModeRecord extends ModeFacts {
     recordVersion: number
     apertureM: number
     collectingAreaM2: number
+    horizon: HorizonPoint[]
+    highestAltitudeDeg: number | null
   }
 }
 
@@ -77,6 +97,9 @@ export interface ModeFacts {
   overheads: { acquisitionS: number; readoutS: number; ditherS: number; calibrationFraction: number }
 }
 
+/** What the facility is made of, each carried by the one before. */
+export type FacilityKind = 'site' | 'telescope' | 'instrument' | 'mode'
+
 /** Every site and instrument mode with the record in force. */
 export interface FacilityView {
   sites: SiteRecord[]
@@ -87,7 +110,14 @@ export interface FacilityView {
 export interface TelescopeFacts {
   apertureM: number
   collectingAreaM2: number
+  /** What stands in its own way, besides the horizon of the site; empty for nothing. */
+  horizon: HorizonPoint[]
+  /** Above it lies the blind spot of an altazimuth mount; null where there is none. */
+  highestAltitudeDeg: number | null
 }
+
+/** What of a telescope's record says where it can point. */
+export type TelescopePointing = Pick<TelescopeFacts, 'horizon' | 'highestAltitudeDeg'>
 
 /** One version of a record: what it says, since when it holds, who wrote it. Versions are never changed. */
 export interface RecordVersion<Facts> {

@@ -1,10 +1,11 @@
-import { moveMoney } from '@/db/queries/fees'
-import { closeRefund, findPayment, lockRefund, openRefunds } from '@/db/queries/payments'
+import { findPayment } from '@/db/queries/payments'
+import { lockRefund, noteRefundNumber, openRefunds } from '@/db/queries/refunds'
 import type { RefundsRow } from '@/db/tables'
 import { Refusal } from '@/lib/errors'
+import type { RefundState } from '@/lib/services/payments/Payments'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
-import { writeLogbook } from '../logbook/writeLogbook'
+import { closeRefundWith } from './closeRefundWith'
 
 const batch = 20
 
@@ -26,34 +27,36 @@ export async function carryOutRefunds(ctx: Context): Promise<{ made: number; wai
 }
 
 async function carryOut(ctx: Context, refund: RefundsRow): Promise<boolean> {
-  const payment = await findPayment(ctx.db, refund.payment_id)
+  const payment = refund.payment_id === null ? null : await findPayment(ctx.db, refund.payment_id)
   if (!payment?.provider_payment_id) return false
-  const answer = await ctx.payments.refund({
-    idempotencyKey: refund.idempotency_key,
-    paymentId: payment.provider_payment_id,
-    amountMinor: refund.amount_minor,
-  })
-  if (answer.status === 'pending') return false
-  await inTransaction(ctx, async (tx) => {
+  const answer = await ask(ctx, refund, payment.provider_payment_id)
+  if (!answer) return false
+  return inTransaction(ctx, async (tx) => {
     const row = await lockRefund(tx.db, refund.id)
-    if (row?.state !== 'created') return
-    const state = answer.status === 'succeeded' ? 'succeeded' : 'failed'
-    await closeRefund(tx.db, row.id, { state, providerRefundId: answer.refundId })
-    if (state === 'succeeded')
-      await moveMoney(tx.db, {
-        movement: `refunded:${row.id}`,
-        feeId: payment.fee_id,
-        from: 'provider',
-        to: 'refunds',
-        amountMinor: row.amount_minor,
-        currency: payment.currency,
-      })
-    await writeLogbook(tx, {
-      action: 'fee.refund',
-      subject: { kind: 'fee', id: payment.fee_id },
+    // A notice may have told of it meanwhile.
+    if (row?.state !== 'created') return true
+    if (answer.status === 'pending') {
+      await noteRefundNumber(tx.db, row.id, answer.refundId)
+      return false
+    }
+    await closeRefundWith(tx, row, {
+      state: answer.status,
+      providerRefundId: answer.refundId,
+      failure: answer.failure ?? '',
       actingAs: 'payment firm',
-      after: { state, amountMinor: row.amount_minor, refund: answer.refundId },
     })
+    return true
   })
-  return true
+}
+
+/** A refund under way is looked up: asked for again by its key, the firm would repeat its first answer. */
+async function ask(ctx: Context, refund: RefundsRow, paymentId: string): Promise<RefundState | null> {
+  if (!refund.provider_refund_id)
+    return ctx.payments.refund({
+      idempotencyKey: refund.idempotency_key,
+      paymentId,
+      amountMinor: refund.amount_minor,
+    })
+  const made = await ctx.payments.readRefunds(paymentId)
+  return made.find(({ refundId }) => refundId === refund.provider_refund_id) ?? null
 }

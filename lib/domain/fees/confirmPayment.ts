@@ -4,7 +4,8 @@ import { authorize } from '@/lib/auth/authorize'
 import { Refusal } from '@/lib/errors'
 import type { ActingContext } from '../context'
 import { readContents } from '../proposals/readContents'
-import { applyCheckout } from './applyCheckout'
+import { applyFirmState } from './applyFirmState'
+import { justCheckout } from './readFirmState'
 import { mayPayFee } from './policy'
 
 /**
@@ -19,7 +20,8 @@ export async function confirmPayment(ctx: ActingContext, input: { reference: str
   for (const payment of await paymentsOf(ctx.db, fee.id)) {
     if (payment.state !== 'open' || !payment.provider_session_id) continue
     try {
-      await applyCheckout(ctx, payment.id, await ctx.payments.readCheckout(payment.provider_session_id))
+      const checkout = await ctx.payments.readCheckout(payment.provider_session_id)
+      await applyFirmState(ctx, payment.id, justCheckout(checkout))
     } catch (error) {
       if (!(error instanceof Refusal && error.kind === 'unavailable')) throw error
     }

@@ -1,4 +1,5 @@
-import { closeWaiver, findWaiver, lockFee, moveMoney, updateFee } from '@/db/queries/fees'
+import { closeWaiver, findWaiver, lockFee, updateFee } from '@/db/queries/fees'
+import { moveMoney } from '@/db/queries/moneyLedger'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { paths } from '@/lib/paths'

@@ -26,7 +26,7 @@ function lapse(ctx: Context, feeId: number, proposalId: number): Promise<boolean
     // A payment may have come since the list was made.
     if (fee?.state !== 'due' || !['submitted', 'under-review'].includes(row.state)) return false
     await takeOut(tx, row, { state: 'lapsed' })
-    await cancelFee(tx, proposalId, 'lapsed')
+    await cancelFee(tx, proposalId, { state: 'lapsed', reason: 'not settled in time' })
     const url = `${tx.request.origin}${paths.proposal(contents.reference)}`
     for (const person of namedOnSending(contents.people)) {
       const facts = { title: contents.title, reference: contents.reference, dueAt: fee.due_at, url }

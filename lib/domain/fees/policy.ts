@@ -24,3 +24,18 @@ export function mayAskForWaiver(actor: Actor, subject: Subject): Decision {
 export function mayDecideWaiver(actor: Actor): Decision {
   return holds(actor, 'office') ? yes : unseen('request')
 }
+
+/** The books of fees: refunds, invoices, the ledger and what the payment firm says. */
+export function mayHandleFees(actor: Actor): Decision {
+  return holds(actor, 'office') ? yes : unseen('fee')
+}
+
+/** Those who lead the proposal ask for an invoice to their institute, and the office may for them. */
+export function mayAskForInvoice(actor: Actor, subject: Subject): Decision {
+  if (holds(actor, 'office')) return yes
+  const row = investigatorRow(actor, subject)
+  if (!row) return unseen('proposal')
+  return row.role === 'pi' || row.access === 'deputy'
+    ? yes
+    : no('role', 'The principal investigator or a deputy asks for an invoice.')
+}

@@ -1,7 +1,8 @@
 import { unfinishedPayments } from '@/db/queries/payments'
 import { Refusal } from '@/lib/errors'
 import type { Context } from '../context'
-import { applyCheckout } from './applyCheckout'
+import { applyFirmState } from './applyFirmState'
+import { justCheckout } from './readFirmState'
 import { carryOutRefunds } from './carryOutRefunds'
 
 const batch = 50
@@ -19,7 +20,7 @@ export async function reconcilePayments(ctx: Context): Promise<ReconcileReport> 
     if (!payment.provider_session_id) continue
     try {
       const checkout = await ctx.payments.readCheckout(payment.provider_session_id)
-      await applyCheckout(ctx, payment.id, checkout)
+      await applyFirmState(ctx, payment.id, justCheckout(checkout))
       if (checkout.isPaid) report.settled += 1
     } catch (error) {
       if (!(error instanceof Refusal)) throw error

@@ -14,6 +14,7 @@ export function whyNotPayable(state: FeesRow['state']): string | null {
     case 'refunded':
       return 'The fee was paid back: nothing is owed.'
     case 'lapsed':
+    case 'cancelled':
       return 'The fee is no longer owed.'
   }
 }
@@ -40,7 +41,3 @@ export function whatMoneyMeans(state: FeesRow['state']): MoneyArrived {
   if (state === 'due' || state === 'invoiced') return 'settles the fee'
   return state === 'paid' ? 'came twice' : 'came too late'
 }
-
-/** `QR-2027-0187`. */
-export const receiptNumber = (year: number, count: number): string =>
-  `QR-${year}-${String(count).padStart(4, '0')}`

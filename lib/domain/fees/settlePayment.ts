@@ -1,16 +1,20 @@
 import { databaseNow } from '@/db/queries/clock'
-import { lockFee, moveMoney, updateFee } from '@/db/queries/fees'
-import { insertRefund, updatePayment } from '@/db/queries/payments'
+import { lockFee, updateFee } from '@/db/queries/fees'
+import { moveMoney } from '@/db/queries/moneyLedger'
+import { updatePayment } from '@/db/queries/payments'
 import { findPerson } from '@/db/queries/people'
-import { drawNumber, insertReceipt } from '@/db/queries/receipts'
+import { insertReceipt } from '@/db/queries/receipts'
 import type { PaymentsRow } from '@/db/tables'
 import { refuse } from '@/lib/errors'
 import type { CheckoutState } from '@/lib/services/payments/Payments'
 import type { Context } from '../context'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { readContents } from '../proposals/readContents'
-import { receiptNumber, whatMoneyMeans } from './rules'
+import { decideRefund } from './decideRefund'
+import { drawPaperNumber } from './drawPaperNumber'
+import { whatMoneyMeans } from './rules'
 import { sendReceipt } from './sendReceipt'
+import { takeBackInvoice } from './takeBackInvoice'
 
 /** Money has come: the payment, its receipt, both sides of the ledger and the fee, all in the caller's transaction. */
 export async function settlePayment(
@@ -32,35 +36,32 @@ export async function settlePayment(
   })
   const payer = payment.started_by === null ? null : await findPerson(tx.db, payment.started_by)
   const lead = contents.people.find(({ role }) => role === 'pi') ?? contents.people[0]
-  const year = now.getUTCFullYear()
-  const number = receiptNumber(year, await drawNumber(tx.db, `receipts-${year}`))
+  const number = await drawPaperNumber(tx, 'receipts')
   await insertReceipt(tx.db, {
     number,
     feeId: fee.id,
     paymentId: payment.id,
     payer: payer?.name ?? lead?.name ?? contents.reference,
   })
+  const meaning = whatMoneyMeans(fee.state)
+  const settles = meaning === 'settles the fee'
+  if (fee.state === 'invoiced') await takeBackInvoice(tx, fee, contents, 'the fee was paid by card')
   await moveMoney(tx.db, {
     movement: `paid:${payment.id}`,
     feeId: fee.id,
-    from: 'receivable',
+    from: settles ? 'receivable' : 'owed-back',
     to: 'provider',
     amountMinor: payment.amount_minor,
     currency: payment.currency,
   })
-
-  const meaning = whatMoneyMeans(fee.state)
-  if (meaning === 'settles the fee') await updateFee(tx.db, fee, 'paid')
-  else {
-    if (meaning === 'came too late') await updateFee(tx.db, fee, 'refunded')
-    await insertRefund(tx.db, {
-      paymentId: payment.id,
-      idempotencyKey: `refund-${payment.id}`,
+  if (settles) await updateFee(tx.db, fee, 'paid')
+  else
+    await decideRefund(tx, fee, {
+      of: { paymentId: payment.id },
       amountMinor: payment.amount_minor,
+      isSurplus: true,
       reason: meaning,
-      madeBy: null,
     })
-  }
   await sendReceipt(tx, { contents, payment, meaning, number, cardLast4: checkout.cardLast4, paidAt: now })
   await writeLogbook(tx, {
     action: 'fee.pay',
@@ -69,5 +70,5 @@ export async function settlePayment(
     before: { fee: fee.state },
     after: { receipt: number, amountMinor: payment.amount_minor, currency: payment.currency, meaning },
   })
-  return meaning === 'settles the fee' ? `fee paid, receipt ${number}` : `money ${meaning}: it goes back`
+  return settles ? `fee paid, receipt ${number}` : `money ${meaning}: it goes back`
 }

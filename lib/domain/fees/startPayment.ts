@@ -3,7 +3,8 @@ import { paths } from '@/lib/paths'
 import type { CheckoutState } from '@/lib/services/payments/Payments'
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
-import { applyCheckout } from './applyCheckout'
+import { applyFirmState } from './applyFirmState'
+import { justCheckout } from './readFirmState'
 import { beginPayment, type BegunPayment } from './beginPayment'
 import { checkoutEndsAt } from './rules'
 
@@ -23,7 +24,7 @@ export async function startPayment(
       ? await ctx.payments.readCheckout(sessionId)
       : await createCheckout(ctx, input.reference, begun)
     if (checkout.status === 'open' && checkout.url) return { url: checkout.url }
-    await applyCheckout(ctx, begun.payment.id, checkout)
+    await applyFirmState(ctx, begun.payment.id, justCheckout(checkout))
     if (checkout.status === 'complete') break
   }
   return { url: sentUrl }

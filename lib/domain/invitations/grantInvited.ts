@@ -1,13 +1,8 @@
-import {
-  addPanelMember,
-  takeInvitation,
-  tieInvestigator,
-  type OpenInvitation,
-} from '@/db/queries/invitations'
-import { insertGrant } from '@/db/queries/people'
+import { takeInvitation, tieInvestigator, type OpenInvitation } from '@/db/queries/invitations'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
 import { writeLogbook } from '../logbook/writeLogbook'
+import { giveRole } from '../roles/giveRole'
 
 /** Takes the invitation and gives the role it promised; within the caller's transaction. */
 export async function grantInvited(tx: Context, invitation: OpenInvitation, personId: number): Promise<void> {
@@ -23,22 +18,16 @@ export async function grantInvited(tx: Context, invitation: OpenInvitation, pers
       after: { personId, proposal: invitation.proposal_reference },
     })
   }
-  const grant = {
+  await giveRole(tx, {
     personId,
+    role: invitation.role,
     callId: invitation.call_id,
     panelId: invitation.panel_id,
+    instrumentId: invitation.instrument_id,
+    fromAt: null,
+    untilAt: invitation.role_until_at,
     grantedBy: invitation.invited_by,
-  }
-  await insertGrant(tx.db, { ...grant, role: invitation.role, instrumentId: invitation.instrument_id })
-  if (invitation.panel_id !== null) {
-    // A chair also reads and scores.
-    if (invitation.role === 'chair') await insertGrant(tx.db, { ...grant, role: 'reviewer' })
-    await addPanelMember(tx.db, {
-      panelId: invitation.panel_id,
-      personId,
-      seat: invitation.role === 'chair' ? 'chair' : 'member',
-    })
-  }
+  })
   await writeLogbook(tx, {
     action: 'accept-invitation',
     subject: { kind: 'invitation', id: invitation.id },

@@ -1,7 +1,6 @@
 import { z } from 'zod'
 import { newPassword } from '../people/schema'
-
-export const invitationRoles = ['reviewer', 'chair', 'instrument-scientist', 'office'] as const
+import { requireScope, roleScope } from '../roles/schema'
 
 export const inviteSchema = z
   .object({
@@ -17,21 +16,9 @@ export const inviteSchema = z
         (text) => z.email().safeParse(text).success,
         'This does not read as an e-mail address: name@institute.org.',
       ),
-    role: z.enum(invitationRoles, 'Choose a role.'),
-    /** Panel for a reviewer or chair, instrument for an instrument scientist; '' for none. */
-    panelId: z.string().regex(/^\d*$/, 'Choose a panel.'),
-    instrumentId: z.string().regex(/^\d*$/, 'Choose an instrument.'),
+    ...roleScope,
   })
-  .superRefine((input, context) => {
-    if ((input.role === 'reviewer' || input.role === 'chair') && !input.panelId)
-      context.addIssue({ code: 'custom', path: ['panelId'], message: 'Choose the panel this person joins.' })
-    if (input.role === 'instrument-scientist' && !input.instrumentId)
-      context.addIssue({
-        code: 'custom',
-        path: ['instrumentId'],
-        message: 'Choose the instrument this person assesses.',
-      })
-  })
+  .superRefine(requireScope)
 
 export const acceptInvitationSchema = z.object({
   token: z.string().min(20).max(200),

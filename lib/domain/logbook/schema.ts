@@ -14,12 +14,36 @@ export const logbookRow = z.object({
 })
 
 export const logbookReply = z.object({ rows: z.array(logbookRow), hasMore: z.boolean() })
-export const logbookQuery = z.object({
+
+const short = z.string().trim().max(80, 'At most 80 characters can be looked for.').optional()
+const day = z
+  .string()
+  .trim()
+  .refine((text) => text === '' || z.iso.date().safeParse(text).success, 'A day is written as 2027-03-31.')
+  .optional()
+
+/** What narrows the logbook: everything optional, an empty text is nothing. */
+export const logbookFilter = z.object({
+  who: short,
+  person: z
+    .string()
+    .regex(/^\d{0,10}$/, 'A person is given by a number.')
+    .optional(),
+  action: short,
+  kind: short,
+  id: short,
+  from: short,
+  since: day,
+  until: day,
+})
+
+export const logbookQuery = logbookFilter.extend({
   before: z
     .string()
     .regex(/^\d{1,10}$/)
     .optional(),
 })
 
+export type LogbookFilterInput = z.output<typeof logbookFilter>
 export type LogbookTableRow = z.output<typeof logbookRow>
 export type LogbookReply = z.output<typeof logbookReply>

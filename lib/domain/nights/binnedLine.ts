@@ -6,6 +6,7 @@ import { conditionsOf } from '../observations/seasonOf'
 import { seasonVisibility } from '../observations/seasonVisibility'
 import { skyTargetOf } from '../observations/skyTargetOf'
 import type { ReportContents } from '../observations/reportContents'
+import { observationsOn } from './observationsOn'
 import type { SeasonBins } from './seasonBins'
 
 type Asked = ReportContents['observations'][number]
@@ -64,9 +65,7 @@ function usableOf(
  * they were asked, so that an assessed time lengthens or shortens each alike.
  */
 export function binnedLine(line: AskedLine, contents: ReportContents, season: SeasonBins): BinnedLine {
-  const own = contents.observations.filter(
-    ({ modeId }) => contents.modes.find((mode) => mode.modeId === modeId)?.instrument.id === line.instrument,
-  )
+  const own = observationsOn(contents, line.instrument)
   const asked = own.reduce((sum, { askedSeconds }) => sum + askedSeconds, 0)
   let shared = 0
   let counted = 0

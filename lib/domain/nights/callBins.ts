@@ -2,13 +2,20 @@ import type { Database } from '@/db/client'
 import { siteRecordAt } from '@/db/queries/facility'
 import { scienceNights } from '@/db/queries/scienceNights'
 import type { Call } from '../calls/types'
+import type { SiteWeather } from '../facility/types'
 import { seasonBins, type SeasonBins } from './seasonBins'
 
+export interface CallBins extends SeasonBins {
+  /** As the site's record says; null where it says nothing. */
+  weather: SiteWeather | null
+}
+
 /** The dark time on offer in a call, in bins. */
-export async function callBins(db: Database, call: Call): Promise<SeasonBins> {
+export async function callBins(db: Database, call: Call): Promise<CallBins> {
   const [site, nights] = await Promise.all([
     siteRecordAt(db, call.siteId, call.seasonFrom),
     scienceNights(db, call.id),
   ])
-  return seasonBins(site, { from: call.seasonFrom, to: call.seasonTo }, nights)
+  const season = seasonBins(site, { from: call.seasonFrom, to: call.seasonTo }, nights)
+  return { ...season, weather: site.weather ?? null }
 }

@@ -4,6 +4,7 @@ import { moonClassLimits } from '@/lib/science/feasibility'
 import { nightPieces } from '@/lib/science/sky'
 import type { SiteRecord } from '../facility/types'
 import { seasonAlmanac } from '../observations/seasonVisibility'
+import { halfOf } from './halfOf'
 
 const classes = ['dark', 'grey', 'bright'] as const
 
@@ -19,10 +20,6 @@ export interface SeasonBins {
   bins: (NightBin & { instrument: number | null })[]
   pieces: BinPiece[]
 }
-
-/** Half-months since the year 0: two a month, the second from the 16th on. */
-const halfOf = (date: string): number =>
-  2 * (12 * Number(date.slice(0, 4)) + Number(date.slice(5, 7)) - 1) + (Number(date.slice(8)) < 16 ? 0 : 1)
 
 /** The dark time on offer, cut into bins: telescope, half-month, two hours of sidereal time, class of moonlight. */
 export function seasonBins(

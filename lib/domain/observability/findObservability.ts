@@ -46,14 +46,16 @@ export async function findObservability(ctx: Context, asked: ObservabilityAsked)
   const range = rangeOf(asked, now)
   const most = Math.min(asked.MAXREC ?? mostRows, mostRows)
   const named = telescopesNamed(telescopes, asked.FACILITY)
-  const bySite = new Map<number, ObservableWindow[]>()
-  const rows = named.flatMap(({ name, site }) => {
+  // Telescopes of a site that can point alike are computed once.
+  const alike = new Map<string, ObservableWindow[]>()
+  const rows = named.flatMap(({ name, site, facts }) => {
+    const key = JSON.stringify([site.siteId, facts.horizon, facts.highestAltitudeDeg])
     const windows =
-      bySite.get(site.siteId) ??
-      (most === 0 ? [] : windowsOf(site, asked.POS, range.fromMjd, range.toMjd)).filter(
+      alike.get(key) ??
+      (most === 0 ? [] : windowsOf({ site, telescope: facts }, asked.POS, range.fromMjd, range.toMjd)).filter(
         ({ startMjd, stopMjd }) => (stopMjd - startMjd) * 86_400 >= asked.MIN_OBS,
       )
-    bySite.set(site.siteId, windows)
+    alike.set(key, windows)
     return windows.map((window) => ({ ...window, facility: name }))
   })
   rows.sort((a, b) => a.startMjd - b.startMjd)

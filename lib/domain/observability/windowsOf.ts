@@ -1,5 +1,6 @@
 import { dateOfMjd, mjdOf, visibility } from '@/lib/science/sky'
-import type { SiteRecord } from '../facility/types'
+import { pointingOf } from '../facility/pointingOf'
+import type { SiteRecord, TelescopePointing } from '../facility/types'
 
 /** A stretch in which a position can be observed, modified Julian dates. */
 export interface ObservableWindow {
@@ -25,11 +26,12 @@ function joined(windows: readonly ObservableWindow[]): ObservableWindow[] {
 }
 
 /**
- * When a position (ICRS, degrees) can be observed from a site between two modified Julian dates: the Sun 18 degrees
- * under the horizon and the position above the lowest altitude the site's telescopes reach. Edges within 60 s.
+ * When a position (ICRS, degrees) can be observed with a telescope between two modified Julian dates: the Sun 18
+ * degrees under the horizon and the position where the telescope can point, above the lowest altitude of its site and
+ * what stands around it, and outside its blind spot. Edges within 60 s.
  */
 export function windowsOf(
-  site: SiteRecord,
+  { site, telescope }: { site: SiteRecord; telescope?: TelescopePointing },
   position: { readonly raDeg: number; readonly decDeg: number },
   fromMjd: number,
   toMjd: number,
@@ -41,7 +43,7 @@ export function windowsOf(
     from: dateBeside(fromMjd, -1),
     to: dateBeside(toMjd, 1),
     maxAirmass: 30,
-    lowestAltitudeDeg: site.lowestAltitudeDeg,
+    ...pointingOf(site, telescope),
   })
   const windows = (targets[0]?.windows ?? []).flat().map(([start, stop]) => ({
     startMjd: Math.max(mjdOf(start), fromMjd),

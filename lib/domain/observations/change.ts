@@ -11,6 +11,8 @@ export type Change = Partial<
 export interface Needed {
   /** Hours needed in seconds, overheads included; null when it cannot be reached at all. */
   seconds: number | null
+  /** Of them with the shutter open. */
+  openSeconds: number | null
   verdict: Verdict
 }
 
@@ -18,10 +20,11 @@ export interface Needed {
 export function neededWith(input: ObservationInput, change: Change): Needed {
   const changed = { ...input, ...change }
   const { mode } = changed
-  if (!mode) return { seconds: null, verdict: 'not-feasible' }
+  if (!mode) return { seconds: null, openSeconds: null, verdict: 'not-feasible' }
   const { seasonFrom, seasonTo } = changed.contents.call
   const report = reportOf({ ...changed, mode }, seasonFrom, seasonTo, { searchNights: false })
-  return { seconds: report.exposure ? report.exposure.totalS : null, verdict: report.verdict }
+  const { exposure, verdict } = report
+  return { seconds: exposure?.totalS ?? null, openSeconds: exposure?.openS ?? null, verdict }
 }
 
 /** The same target brighter by some magnitudes: its continuum alone. */
@@ -66,4 +69,29 @@ export function furtherBy(input: ObservationInput, by: number): Change | null {
     : 0
   const { target } = { target: input.target, ...continuumBrighterBy(input, -dimmer) }
   return { target: { ...target, redshift: redshift + by } }
+}
+
+/** The least half-light radius that is told from a point, arcseconds. */
+const LEAST_RADIUS = 0.01
+
+/** The same target larger by some arcseconds of half-light radius; a point source has none. */
+export function largerBy(input: ObservationInput, arcsec: number): Change {
+  const { target } = input
+  const radius = target.effectiveRadiusArcsec
+  if (target.geometry === 'point' || radius === null) return {}
+  return { target: { ...target, effectiveRadiusArcsec: Math.max(LEAST_RADIUS, radius + arcsec) } }
+}
+
+/** The same target magnified more by some; nothing where it is not by a lens that its brightness is predicted. */
+export function magnifiedBy(input: ObservationInput, by: number): Change {
+  const { magnification } = input.target
+  if (!magnification || !isPredicted(input)) return {}
+  return { target: { ...input.target, magnification: Math.max(0.01, magnification + by) } }
+}
+
+/** The same target with a spectral index larger by some; nothing where its spectrum is no power law. */
+export function bluerBy(input: ObservationInput, by: number): Change {
+  const spectrum = input.target.spectrum ?? null
+  if (spectrum?.kind !== 'power-law') return {}
+  return { target: { ...input.target, spectrum: { ...spectrum, index: spectrum.index + by } } }
 }

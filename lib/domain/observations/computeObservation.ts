@@ -1,5 +1,6 @@
 import type { Cosmology } from '@/lib/science/cosmology'
 import { observationReport, type ObservationReport } from '@/lib/science/feasibility'
+import { pointingOf } from '../facility/pointingOf'
 import type { ModeRecord } from '../facility/types'
 import type { Observation, Target } from '../proposals/types'
 import { regimeSentence } from './regimeSentence'
@@ -60,6 +61,7 @@ export function reportOf(
   return observationReport({
     cosmology,
     site: scienceSite(contents.site),
+    pointing: pointingOf(contents.site, input.mode.telescope),
     target: {
       id: target.id,
       name: target.name,

@@ -67,6 +67,8 @@ export const outsideSeason = (from: string, to: string): FeasibilityCheck =>
 function apartArcsec(a: Target, b: Target): number {
   if (a.id === b.id) return 0
   if (a.raDeg === null || b.raDeg === null || a.decDeg === null || b.decDeg === null) return Infinity
+  // No two places are nearer than their declinations; spares a long list all but a few angles.
+  if (Math.abs(a.decDeg - b.decDeg) * 3600 > samePlaceArcsec) return Infinity
   return separationArcsec({ raDeg: a.raDeg, decDeg: a.decDeg }, { raDeg: b.raDeg, decDeg: b.decDeg })
 }
 

@@ -1,3 +1,4 @@
+import type { ModeRecord } from '../facility/types'
 import type { ConstraintSet, Observation, ProposalContents, Target } from '../proposals/types'
 import { defaultConstraints } from './defaultConstraints'
 import type { ReportContents } from './reportContents'
@@ -15,23 +16,32 @@ export function conditionsOf(
   return named ?? contents.constraintSets[0] ?? defaultConstraints
 }
 
+interface Limits {
+  maxAirmass: number
+  telescope: ModeRecord['telescope'] | undefined
+}
+
 /**
- * Hours of each target through the whole season of the call, dark and above the airmass its first observation
- * asks for, whatever the Moon does. Targets that share an airmass are computed together.
+ * Hours of each target through the whole season of the call, dark, above the airmass its first observation asks for
+ * and where that one's telescope can point, whatever the Moon does. Targets that share them are computed together.
  */
 export function darkHours(contents: ReportContents): SeasonVisibility {
-  const byAirmass = new Map<number, Target[]>()
+  const groups = new Map<string, { limits: Limits; targets: Target[] }>()
   for (const target of contents.targets) {
     const first = contents.observations.find(({ targetId }) => targetId === target.id)
     const { maxAirmass } = conditionsOf(contents, first)
-    byAirmass.set(maxAirmass, [...(byAirmass.get(maxAirmass) ?? []), target])
+    const telescope = contents.modes.find(({ modeId }) => modeId === first?.modeId)?.telescope
+    const key = `${maxAirmass} ${telescope?.id ?? ''}`
+    const group = groups.get(key) ?? { limits: { maxAirmass, telescope }, targets: [] }
+    group.targets.push(target)
+    groups.set(key, group)
   }
   const season = { from: contents.call.seasonFrom, to: contents.call.seasonTo }
   const whole = seasonVisibility(contents.site, { ...season, maxAirmass: defaultConstraints.maxAirmass }, [])
   const byTarget: SeasonVisibility['byTarget'] = new Map()
-  for (const [maxAirmass, targets] of byAirmass) {
+  for (const { limits, targets } of groups.values()) {
     const sky = targets.flatMap((target) => skyTargetOf(target) ?? [])
-    for (const [id, one] of seasonVisibility(contents.site, { ...season, maxAirmass }, sky).byTarget)
+    for (const [id, one] of seasonVisibility(contents.site, { ...season, ...limits }, sky).byTarget)
       byTarget.set(id, one)
   }
   return { nights: whole.nights, byTarget }

@@ -7,7 +7,8 @@ import {
   type SkyTarget,
   type TargetVisibility,
 } from '@/lib/science/sky'
-import type { SiteRecord } from '../facility/types'
+import { pointingOf } from '../facility/pointingOf'
+import type { SiteRecord, TelescopePointing } from '../facility/types'
 import { boundedMap } from './boundedMap'
 
 export interface SeasonConditions {
@@ -17,6 +18,8 @@ export interface SeasonConditions {
   maxAirmass: number
   twilightLimitDeg?: number
   moon?: MoonLimits
+  /** Whose horizon and blind spot count besides the site's; none when not known. */
+  telescope?: TelescopePointing | undefined
 }
 
 export interface SeasonVisibility {
@@ -28,6 +31,15 @@ export interface SeasonVisibility {
 const almanacs = boundedMap<Almanac>(4)
 const nightsKept = boundedMap<Night[]>(8)
 const targetsKept = boundedMap<TargetVisibility>(3000)
+const limitKeys = boundedMap<string>(100)
+let limits = 0
+
+/** A short name for limits, so that the rows of a horizon do not stand in thousands of keys. */
+const limitKey = (pointing: object): string =>
+  limitKeys.getOr(JSON.stringify(pointing), () => {
+    limits += 1
+    return `limits ${limits}`
+  })
 
 /** Sun and Moon through a season, computed once and shared by everything that asks. */
 export const seasonAlmanac = (from: string, to: string): Almanac =>
@@ -39,12 +51,13 @@ export const seasonAlmanac = (from: string, to: string): Almanac =>
  */
 export function seasonVisibility(
   site: SiteRecord,
-  conditions: SeasonConditions,
+  { telescope, ...conditions }: SeasonConditions,
   targets: readonly SkyTarget[],
 ): SeasonVisibility {
   const place = [site.latitudeDeg, site.longitudeDeg, site.elevationM]
   const season = JSON.stringify([place, conditions.from, conditions.to, conditions.twilightLimitDeg ?? -18])
-  const under = JSON.stringify([season, site.lowestAltitudeDeg, conditions.maxAirmass, conditions.moon ?? {}])
+  const pointing = pointingOf(site, telescope)
+  const under = JSON.stringify([season, limitKey(pointing), conditions.maxAirmass, conditions.moon ?? {}])
   const keyOf = (t: SkyTarget) => `${under} ${t.raDeg} ${t.decDeg} ${t.pmRaMasYr ?? 0} ${t.pmDecMasYr ?? 0}`
 
   const missing = new Map(
@@ -56,7 +69,7 @@ export function seasonVisibility(
       site,
       ...conditions,
       targets: [...missing].map(([key, target]) => ({ ...target, id: key })),
-      lowestAltitudeDeg: site.lowestAltitudeDeg,
+      ...pointing,
       almanac: seasonAlmanac(conditions.from, conditions.to),
     })
     nights = computed.nights

@@ -17,6 +17,7 @@ export async function queueLetter(
   letter: Letter,
   /** What caused it, e.g. 'submitted:412:1'; the same cause never writes twice to one address. */
   cause: string,
+  bulkLetterId?: number,
 ): Promise<void> {
   const { text, html } = renderLetter(letter)
   const domain = new URL(tx.request.origin).hostname
@@ -30,5 +31,7 @@ export async function queueLetter(
     subject: letter.subject.replace(/[\r\n]+/g, ' '),
     text,
     html,
+    attachment: letter.attachment ?? null,
+    ...(bulkLetterId === undefined ? {} : { bulkLetterId }),
   })
 }

@@ -1,13 +1,7 @@
+import { blocksHtml } from './blocksHtml'
+import { blocksText } from './blocksText'
+import { escapeHtml as escape } from './escapeHtml'
 import type { Letter } from './letter'
-
-const escapes: Record<string, string> = {
-  '&': '&amp;',
-  '<': '&lt;',
-  '>': '&gt;',
-  '"': '&quot;',
-  "'": '&#39;',
-}
-const escape = (text: string) => text.replace(/[&<>"']/g, (character) => escapes[character] ?? character)
 
 const signature = 'Time-allocation office, Quillon Ridge Observatory'
 const font = "'Work Sans', 'Helvetica Neue', Arial, sans-serif"
@@ -17,6 +11,7 @@ function textOf(letter: Letter): string {
   return [
     letter.greeting,
     ...letter.paragraphs,
+    letter.blocks && blocksText(letter.blocks),
     facts,
     letter.action && `${letter.action.label}:\n${letter.action.url}`,
     letter.closing,
@@ -39,7 +34,7 @@ function htmlOf(letter: Letter): string {
   const action = letter.action
     ? `<p style="margin:0 0 20px"><a href="${escape(letter.action.url)}" style="display:inline-block;background:#3B2F6B;color:#FFFFFF;text-decoration:none;font-weight:600;padding:11px 20px;border-radius:4px">${escape(letter.action.label)}</a></p><p style="margin:0 0 16px;font-size:13px;color:#565D70">Or open ${escape(letter.action.url)}</p>`
     : ''
-  return `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>${escape(letter.subject)}</title></head><body style="margin:0;background:#FAF8F3;color:#171C2B;font:16px/24px ${font}"><div style="max-width:600px;margin:0 auto;padding:36px 16px"><p style="margin:0 0 24px;padding:0 0 12px;border-bottom:1.5px solid #171C2B;font-size:19px;font-weight:600">Noctuary</p>${paragraph(letter.greeting)}${letter.paragraphs.map(paragraph).join('')}${facts}${action}${letter.closing ? paragraph(letter.closing) : ''}<p style="margin:24px 0 0;color:#565D70;font-size:14px">${signature}</p></div></body></html>`
+  return `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>${escape(letter.subject)}</title></head><body style="margin:0;background:#FAF8F3;color:#171C2B;font:16px/24px ${font}"><div style="max-width:600px;margin:0 auto;padding:36px 16px"><p style="margin:0 0 24px;padding:0 0 12px;border-bottom:1.5px solid #171C2B;font-size:19px;font-weight:600">Noctuary</p>${paragraph(letter.greeting)}${letter.paragraphs.map(paragraph).join('')}${blocksHtml(letter.blocks ?? [])}${facts}${action}${letter.closing ? paragraph(letter.closing) : ''}<p style="margin:24px 0 0;color:#565D70;font-size:14px">${signature}</p></div></body></html>`
 }
 
 /** The letter as plain text and as HTML; everything that came from people is escaped. */

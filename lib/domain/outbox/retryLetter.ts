@@ -6,12 +6,12 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { mayReadOutbox } from './policy'
 
-/** Sends a letter that waits or was parked at the next turn of the relay. */
+/** Sends a letter that waits, was set aside or came back at the next turn of the relay. */
 export async function retryLetter(ctx: ActingContext, input: { letterId: number }): Promise<void> {
   authorize(mayReadOutbox(ctx.actor))
   await inTransaction(ctx, async (tx) => {
     if (!(await requeueLetter(tx.db, input.letterId)))
-      throw refuse.closed('This letter has been sent already.')
+      throw refuse.closed('This letter has been sent or stopped already.')
     await writeLogbook(tx, {
       action: 'letter.retry',
       subject: { kind: 'letter', id: input.letterId },

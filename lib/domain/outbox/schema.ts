@@ -9,7 +9,7 @@ export const letterRow = z.object({
   toName: z.string(),
   toEmail: z.string(),
   subject: z.string(),
-  state: z.enum(['queued', 'sending', 'sent', 'parked']),
+  state: z.enum(['queued', 'sending', 'sent', 'parked', 'bounced', 'cancelled']),
   attempts: z.number(),
   lastError: z.string().nullable(),
   createdAt: instant,

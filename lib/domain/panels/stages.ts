@@ -7,6 +7,13 @@ export function whyNotStartReview(phase: CallPhase): string | null {
   return 'The review of this call has started already.'
 }
 
+/** Why a panel's own measure can no longer be changed; null until its review opens. */
+export function whyFormulaIsFixed(phase: CallPhase): string | null {
+  return phase === 'planned' || phase === 'open' || phase === 'closed'
+    ? null
+    : 'The formula was fixed when the review opened.'
+}
+
 /** Why a panel cannot begin its ranking; null when it can. */
 export function whyNotStartRanking(
   phase: CallPhase,

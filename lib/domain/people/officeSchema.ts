@@ -16,6 +16,9 @@ export const officePersonRow = z.object({
   institute: z.string(),
   isConfirmed: z.boolean(),
   isDisabled: z.boolean(),
+  /** A mail server refused the address for good. */
+  addressFails: z.boolean(),
+  asksToBeErased: z.boolean(),
   roles: z.array(role),
 })
 
@@ -36,6 +39,10 @@ export const officePeopleReply = z.object({
 })
 
 export const personStepSchema = z.object({ personId: z.number().int().positive() })
+export const mergeSchema = z.object({
+  keepId: z.number().int().positive(),
+  goneId: z.number().int().positive(),
+})
 export const invitationStepSchema = z.object({ invitationId: z.number().int().positive() })
 
 export type OfficePersonRow = z.output<typeof officePersonRow>

@@ -12,3 +12,15 @@ export function mayDisable(actor: Actor, personId: number): Decision {
   if (!office.allowed) return office
   return actor.personId === personId ? no('role', 'You cannot shut your own account.') : yes
 }
+
+/** Everybody takes out what is held about them; the office does so for others when asked. */
+export function mayExportPerson(actor: Actor, personId: number): Decision {
+  return actor.personId === personId ? yes : mayManagePeopleOfOffice(actor)
+}
+
+/** The office erases others on their request; nobody erases the account they are using. */
+export function mayErase(actor: Actor, personId: number): Decision {
+  const office = mayManagePeopleOfOffice(actor)
+  if (!office.allowed) return office
+  return actor.personId === personId ? no('role', 'You cannot erase the account you are using.') : yes
+}

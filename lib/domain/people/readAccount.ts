@@ -12,6 +12,8 @@ export interface AccountView {
   careerStage: '' | 'student' | 'postdoc' | 'staff' | 'emeritus' | 'other'
   timeZone: string
   version: number
+  /** When they asked to be erased; null when they did not. */
+  erasureAskedAt: Date | null
   sessions: (Omit<SessionLine, 'idHash'> & { isThis: boolean })[]
 }
 
@@ -29,6 +31,7 @@ export async function readAccount(ctx: ActingContext, sessionId: string | null):
     careerStage: person.career_stage ?? '',
     timeZone: person.time_zone,
     version: person.version,
+    erasureAskedAt: person.erasure_asked_at,
     sessions: sessions.map(({ idHash, ...line }) => ({ ...line, isThis: idHash === own })),
   }
 }

@@ -9,10 +9,12 @@ export async function readOfficePeople(ctx: ActingContext): Promise<OfficePeople
   authorize(mayManagePeopleOfOffice(ctx.actor))
   const [people, invitations] = await Promise.all([listPeople(ctx.db), listOpenInvitations(ctx.db)])
   return {
-    people: people.map(({ confirmedAt, disabledAt, ...person }) => ({
+    people: people.map(({ confirmedAt, disabledAt, addressFailedAt, erasureAskedAt, ...person }) => ({
       ...person,
       isConfirmed: confirmedAt !== null,
       isDisabled: disabledAt !== null,
+      addressFails: addressFailedAt !== null,
+      asksToBeErased: erasureAskedAt !== null,
     })),
     invitations: invitations.map((line) => ({ ...line, expiresAt: line.expiresAt.toISOString() })),
   }

@@ -62,3 +62,5 @@ export const changePasswordSchema = z.object({
   current: z.string().min(1, 'Give your present password.'),
   password: newPassword,
 })
+
+export const erasureRequestSchema = z.object({ isAsked: z.boolean() })

@@ -22,6 +22,7 @@ export const saveCosmologySchema = z.object({
     name: text,
     H0: text,
     Om0: text,
+    omCounts: z.enum(['matter', 'all']).optional(),
     Ode0: text,
     w0: text,
     wa: text,

@@ -88,6 +88,8 @@ export interface Target {
   pmDecMasYr: number | null
   geometry: 'point' | 'sersic' | 'uniform'
   effectiveRadiusArcsec: number | null
+  /** One sigma; null where none is stated. */
+  effectiveRadiusErrorArcsec: number | null
   sersicIndex: number | null
   redshiftTyped: string
   redshift: number | null

@@ -29,6 +29,9 @@ export const rankingRow = z.object({
   high: z.number().nullable(),
   lowerHalf: z.number().nullable(),
   upperHalf: z.number().nullable(),
+  /** The panel's own measure, and the place by it. */
+  measure: z.number().nullable(),
+  measureRank: z.number().nullable(),
   setAside: z.boolean(),
   why: z.string().nullable(),
   scores: z.array(z.object({ reviewer: z.number(), score: z.number() })),
@@ -77,6 +80,17 @@ export const rankingView = z.object({
       alpha: z.number().nullable(),
     })
     .nullable(),
+  /** The panel's own measure: its words, who wrote them, what may stand in it, and why it stays as it is (null: it may change). */
+  formula: z.object({
+    text: z.string().nullable(),
+    by: z.string().nullable(),
+    at: z.string().nullable(),
+    fixed: z.string().nullable(),
+    /** Names with what they are. */
+    quantities: z.array(z.object({ name: z.string(), words: z.string() })),
+    /** Review numbers for which it has no value. */
+    without: z.array(z.string()),
+  }),
   draws: z.number(),
   seed: z.number(),
   /** Against the last frozen version before this one. */

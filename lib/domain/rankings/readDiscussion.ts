@@ -1,5 +1,6 @@
 import { panelAssignments } from '@/db/queries/assignments'
-import { panelTexts, standingDecisions } from '@/db/queries/decisions'
+import { panelTexts } from '@/db/queries/panelTexts'
+import { standingDecisions } from '@/db/queries/decisions'
 import { assessedLines, panelMembers } from '@/db/queries/panel'
 import type { ActingContext } from '../context'
 import { readRanking } from './readRanking'

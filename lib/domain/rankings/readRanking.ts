@@ -16,6 +16,7 @@ import { certainty, draws } from './certainty'
 import { changesBetween } from './changesBetween'
 import { offeredByTelescope } from './offered'
 import { visibleLine, visibleOrder } from './order'
+import { readMeasure } from './readMeasure'
 import { panelScores } from './panelScores'
 import type { RankingView } from './rankingView'
 
@@ -64,6 +65,7 @@ export async function readRanking(
   )
   const line = ranking ? visibleLine(full, hidden, ranking.line_after ?? 0) : lineByHours(asks, offered)
   const sure = certainty(scores, numberOf, line, seed)
+  const measure = await readMeasure(ctx, desk, own, sure.byProposal)
   const before = ranking ? await lastFrozenBefore(ctx.db, ranking) : null
   const frozen = before
     ? visibleOrder(
@@ -101,6 +103,8 @@ export async function readRanking(
         seconds: one.askedSeconds,
       })),
       askedSeconds: linesOf(id).reduce((sum, one) => sum + one.askedSeconds, 0),
+      measure: measure.values.get(id) ?? null,
+      measureRank: measure.ranks.get(id) ?? null,
       setAside: Boolean(entries.find((entry) => entry.proposal_id === id)?.set_aside_at),
       scores: scores
         .filter((one) => one.proposal === id)
@@ -128,6 +132,7 @@ export async function readRanking(
     corrected: sure.corrected,
     whyNot: sure.whyNot,
     agreement: sure.agreement,
+    formula: measure.formula,
     draws,
     seed,
     changes: changesBetween(frozen, order, numbers),

@@ -30,6 +30,12 @@ export const freezeSchema = listKey
 export const setAsideSchema = listKey.extend({ proposalIds: z.array(rowKey).min(1), aside: z.boolean() })
 export type SetAsideInput = z.output<typeof setAsideSchema>
 
+export const formulaSchema = panelKeySchema.extend({
+  /** Empty: the panel has no measure of its own. */
+  formula: z.string().trim().max(300, 'At most 300 characters.'),
+})
+export type FormulaInput = z.output<typeof formulaSchema>
+
 export const consensusSchema = panelKeySchema.extend({
   proposalId: rowKey,
   /** Version of the draft decision; 0 while there is none. */

@@ -1,6 +1,7 @@
 import { feeOf } from '@/db/queries/fees'
 import type { ActingContext } from '../context'
 import { readGiveaways } from '../anonymity/readGiveaways'
+import { feeFor } from '../fees/feeFor'
 import { everythingMissing } from '../proposals/completeness'
 import { maySendProposal } from '../proposals/policy'
 import type { ReadProposal } from '../proposals/readProposal'
@@ -26,9 +27,9 @@ export async function readForSending(ctx: ActingContext, read: ReadProposal): Pr
   const { contents, computation, now } = read
   const may = maySendProposal(ctx.actor, contents, now)
   const standing = await feeOf(ctx.db, contents.id)
-  const { currency, graceUntil } = contents.call
-  const amountMinor = standing?.amount_minor ?? contents.kind.feeMinor
-  const owes = standing ? standing.state === 'due' : amountMinor > 0
+  const owed = standing
+    ? standing.state === 'due' && { amountMinor: standing.amount_minor, currency: standing.currency }
+    : await feeFor(ctx, contents, now)
   return {
     ...read,
     groups: readThrough(contents, computation, {
@@ -39,6 +40,6 @@ export async function readForSending(ctx: ActingContext, read: ReadProposal): Pr
     whyNot: may.allowed ? null : may.sentence,
     isIn: contents.state !== 'draft' && !contents.isReopened,
     mayReopen: mayReopenProposal(ctx.actor, contents, now).allowed,
-    due: currency && owes ? { amountMinor, currency, dueAt: standing?.due_at ?? graceUntil } : null,
+    due: owed ? { ...owed, dueAt: standing?.due_at ?? contents.call.graceUntil } : null,
   }
 }

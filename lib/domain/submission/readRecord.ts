@@ -57,4 +57,5 @@ const feeStates = {
   invoiced: 'by invoice',
   refunded: 'given back',
   lapsed: 'not owed',
+  cancelled: 'not owed',
 } as const

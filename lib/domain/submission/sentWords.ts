@@ -17,6 +17,8 @@ export function sentHeading({ contents, fee }: Pick<SentProposal, 'contents' | '
       return 'It is in; the fee goes by invoice'
     case 'refunded':
       return 'It is in; the fee was given back'
+    case 'cancelled':
+      return 'It is in; nothing is owed'
     case 'due':
     case 'lapsed':
       return 'It is in; the fee is still to be settled'

@@ -53,7 +53,7 @@ export async function submitProposal(ctx: ActingContext, input: SubmitInput): Pr
       { contents, computation, engineVersion: computation.engineVersion },
       { paperId, idempotencyKey: input.idempotencyKey, arrivedAt: input.arrivedAt },
     )
-    const fee = await billProposal(tx, contents)
+    const fee = await billProposal(tx, contents, input.arrivedAt)
     await setAssessmentRequests(tx.db, contents.id, instrumentsUsed(contents))
     await sendConfirmations(tx, { contents, submission, fee })
     await writeLogbook(tx, {

@@ -1,10 +1,9 @@
 import { authorize } from '@/lib/auth/authorize'
-import { log } from '@/lib/log'
 import { paths } from '@/lib/paths'
 import { deadlineOf } from '../calls/rules'
 import type { ActingContext } from '../context'
 import { cancelFee } from '../fees/cancelFee'
-import { carryOutRefunds } from '../fees/carryOutRefunds'
+import { tryRefunds } from '../fees/tryRefunds'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { proposalWithdrawn } from '../outbox/letters/proposalWithdrawn'
@@ -25,7 +24,7 @@ export async function withdrawProposal(
     await takeOut(tx, row, { state: 'withdrawn', reason: input.reason })
     const isEarly = input.arrivedAt < deadlineOf(contents.call, contents.kind, contents)
     const outcome = isEarly
-      ? await cancelFee(tx, contents.id, 'withdrawn before the deadline')
+      ? await cancelFee(tx, contents.id, { state: 'cancelled', reason: 'withdrawn before the deadline' })
       : ('kept' as const)
     const url = `${tx.request.origin}${paths.proposal(contents.reference)}`
     for (const person of namedOnSending(contents.people)) {
@@ -49,13 +48,4 @@ export async function withdrawProposal(
   })
   if (fee === 'refunded') await tryRefunds(ctx)
   return { fee }
-}
-
-/** The withdrawal stands and its refund is on record: what fails now is done by the job. */
-async function tryRefunds(ctx: ActingContext): Promise<void> {
-  try {
-    await carryOutRefunds(ctx)
-  } catch (error) {
-    log.warn({ requestId: ctx.request.id, error }, 'a refund waits for the job')
-  }
 }

@@ -132,6 +132,13 @@ const typed: readonly ExportColumn[] = [
   ),
   text('shape', '', 'point, sersic or uniform', ({ row }) => row.geometry),
   number('re', 'arcsec', 'phys.angSize', 'Half-light radius', ({ target }) => target.effectiveRadiusArcsec),
+  number(
+    're_err',
+    'arcsec',
+    'stat.error;phys.angSize',
+    'Error of the half-light radius',
+    ({ target }) => target.effectiveRadiusErrorArcsec,
+  ),
   number('sersic', '', 'src.morph.param', 'Index of the Sersic profile', ({ target }) => target.sersicIndex),
   number(
     'ebv',

@@ -1,5 +1,5 @@
 /** What the table of targets works with in the browser: the pure part of this noun. */
-export { bandChoice, magnitudeBands } from './bands'
+export { bandChoice, magnitudeBands, readBandChoice } from './bands'
 export { liveTarget } from './liveTarget'
 export { readTargetFile, type TargetFile } from './readTargetFile'
 export { rowsOf, type ImportedRow } from './tables/rowsOf'

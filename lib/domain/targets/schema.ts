@@ -55,6 +55,7 @@ const cells = z.object({
   triggers: typedNumber('A number of triggers', 1, 100),
   geometry: z.enum(['point', 'sersic', 'uniform']),
   effectiveRadius: typedNumber('A half-light radius', 0.01, 600),
+  effectiveRadiusError: typedNumber('An error of the half-light radius', 0, 600),
   sersicIndex: typedNumber('A Sérsic index', SERSIC_LEAST, SERSIC_MOST),
   ebv: typedNumber('A reddening E(B−V)', 0, 5),
   magnification: typedNumber('A magnification', 0.01, 1000),
@@ -104,6 +105,14 @@ function together(values: Cells, ctx: z.RefinementCtx): void {
     need('band', 'Say in which band and system the magnitude is.')
   if (values.geometry !== 'point' && values.effectiveRadius.value === null)
     need('effectiveRadius', 'An extended source needs its half-light radius.')
+  const [radius, error] = [values.effectiveRadius.value, values.effectiveRadiusError.value]
+  if (error !== null && radius === null)
+    need('effectiveRadiusError', 'An error needs the half-light radius it is of.')
+  if (error !== null && radius !== null && error > radius)
+    need(
+      'effectiveRadiusError',
+      'An error larger than the size itself leaves no size: call it a point source.',
+    )
   if (values.spectrum === 'power-law' && values.spectralIndex.value === null)
     need('spectralIndex', 'A power law needs its index.')
   if (values.spectrum === 'black-body' && values.temperature.value === null)
@@ -136,6 +145,7 @@ function toValues(c: Cells): TargetValues {
     pmDecMasYr: c.pmDec.value,
     geometry: c.geometry,
     effectiveRadiusArcsec: c.effectiveRadius.value,
+    effectiveRadiusErrorArcsec: c.effectiveRadiusError.value,
     sersicIndex: c.geometry === 'sersic' ? (c.sersicIndex.value ?? 1) : null,
     redshiftTyped: c.redshift.typed,
     redshift: c.redshift.value,

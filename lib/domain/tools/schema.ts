@@ -27,6 +27,8 @@ export const seasonSchema = z
     to: evening,
     moon: z.enum(['any', 'grey', 'dark']),
     separation: numberBetween('A distance from the Moon', 0, 180),
+    /** Short name of a telescope; empty for the site alone. */
+    telescope: z.string().max(40, 'There is no such telescope.'),
   })
   .superRefine(({ from, to }, context) => {
     // Said at its own field already.

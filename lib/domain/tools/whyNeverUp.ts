@@ -5,7 +5,7 @@ import { positionOf } from './positionOf'
 export function whyNeverUp(
   site: NeverUpInput['site'],
   asked: { ra: string; dec: string },
-  through: Pick<NeverUpInput, 'maxAirmass' | 'isEverDark' | 'isMoonLimited'>,
+  through: Pick<NeverUpInput, 'pointing' | 'maxAirmass' | 'isEverDark' | 'isMoonLimited'>,
 ): string | null {
   const { raDeg, decDeg } = positionOf(asked)
   if (raDeg === null || decDeg === null) return null

@@ -31,6 +31,8 @@ export interface BinnedGiven {
   seconds: number
   /** Index of a bin to the seconds laid there. */
   laid: ReadonlyMap<number, number>
+  /** Seconds kept of each part, in the order of the line's parts. */
+  parts: readonly number[]
 }
 
 export interface BinnedNotGiven {

@@ -75,7 +75,8 @@ export function byRankInBins(
   }
   const given = kept.map(({ line, nodes, seconds }): BinnedGiven => {
     const { proposal, instrument, telescope } = line
-    return { proposal, instrument, telescope, seconds, laid: laidIn(flow, nodes) }
+    const parts = nodes.map((node) => flow.secondsOf(node))
+    return { proposal, instrument, telescope, seconds, laid: laidIn(flow, nodes), parts }
   })
   return { given, notGiven }
 }

@@ -1,6 +1,7 @@
 import type { MoonClass } from '../exposure'
 import type { TargetVisibility } from '../sky'
 import { judgeAtLeast, judgeAtMost } from './judge'
+import { limitWords } from './limitWords'
 import { sayHours, sayNumber, sayPercent } from './saying'
 import { neverUp } from './neverUp'
 import type { SeasonVisibility } from './seasonVisibility'
@@ -18,14 +19,16 @@ function nightsUp(visible: TargetVisibility): number {
 
 /** Is the target up in the dark for at least twice the hours asked? */
 export function checkUp({ visible, nights, isEverDark }: SeasonVisibility, input: ReportInput): Check {
-  const { site, target, observation } = input
+  const { site, pointing, target, observation } = input
+  const words = limitWords(pointing)
+  const limits = words && `${words},`
   const asked = observation.askedS / 3600
   const verdict = judgeAtLeast(visible.totalHours, 2 * asked, Math.max(asked, 1e-9))
   const up = nightsUp(visible)
   const { raDeg, decDeg } = target
   const never =
     up === 0 && raDeg !== null && decDeg !== null
-      ? neverUp({ site, raDeg, decDeg, maxAirmass: observation.maxAirmass, isEverDark })
+      ? neverUp({ site, pointing, raDeg, decDeg, maxAirmass: observation.maxAirmass, isEverDark })
       : null
   return {
     id: 'up-in-the-dark',
@@ -36,7 +39,7 @@ export function checkUp({ visible, nights, isEverDark }: SeasonVisibility, input
     verdict,
     why:
       never?.why ??
-      `Above airmass ${observation.maxAirmass} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
+      `Above airmass ${observation.maxAirmass}${limits} on ${up === nights ? `all ${nights}` : `${up} of ${nights}`} nights.`,
     fix: verdict === 'feasible' ? null : (never?.fix ?? 'Accept a larger airmass, or ask in another season.'),
   }
 }

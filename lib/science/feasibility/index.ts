@@ -18,5 +18,6 @@ export type {
 } from './types'
 export { neverUp, type NeverUpInput } from './neverUp'
 export { feasibilityEngineVersion } from './version'
+export { limitWords } from './limitWords'
 export { sayCarried, sayPlace } from './sayCarried'
 export { moonClassLimits } from './moonClass'

@@ -1,8 +1,12 @@
-import { airmassYoung1994, altitudeOfAirmassDeg } from '../sky'
+import { DEG_RAD } from '../constants'
+import { airmassYoung1994, altitudeOfAirmassDeg, openHourAngles, type PointingLimits } from '../sky'
+import { limitWords } from './limitWords'
 import { sayNumber } from './saying'
 
 export interface NeverUpInput {
   readonly site: { readonly latitudeDeg: number; readonly lowestAltitudeDeg: number }
+  /** What stands around the telescope, and its blind spot. */
+  readonly pointing?: Omit<PointingLimits, 'lowestAltitudeDeg'>
   readonly raDeg: number
   readonly decDeg: number
   readonly maxAirmass: number
@@ -42,7 +46,7 @@ function midnightMonth(raDeg: number): string {
  * place of J2000, so altitudes to some 0.2 degrees.
  */
 export function neverUp(input: NeverUpInput): { why: string; fix: string } {
-  const { site, raDeg, decDeg, maxAirmass } = input
+  const { site, pointing, raDeg, decDeg, maxAirmass } = input
   const topDeg = 90 - Math.abs(site.latitudeDeg - decDeg)
   const never = 'Take another target: no season brings this one up here.'
   if (topDeg <= 0)
@@ -63,6 +67,16 @@ export function neverUp(input: NeverUpInput): { why: string; fix: string } {
       fix: `Accept an airmass of ${sayNumber(Math.floor(airmass * 10 + 1) / 10, 1)} or more.`,
     }
   }
+  const limits = limitWords(pointing)
+  const open = openHourAngles(site.latitudeDeg * DEG_RAD, decDeg * DEG_RAD, {
+    ...pointing,
+    lowestAltitudeDeg: Math.max(site.lowestAltitudeDeg, altitudeOfAirmassDeg(maxAirmass)),
+  })
+  if (open.length === 0)
+    return {
+      why: `${top}, but never above airmass ${maxAirmass}${limits}.`,
+      fix: 'Accept a larger airmass, or ask for another telescope.',
+    }
   if (!input.isEverDark)
     return {
       why: 'No night of this season is dark enough at this site.',
@@ -70,7 +84,7 @@ export function neverUp(input: NeverUpInput): { why: string; fix: string } {
     }
   const dark = input.isMoonLimited ? 'in the dark and within the Moon limits' : 'in the dark'
   return {
-    why: `Never above airmass ${maxAirmass} ${dark} in this season.`,
+    why: `Never above airmass ${maxAirmass}${limits && `${limits},`} ${dark} in this season.`,
     fix: `Ask for the months around ${midnightMonth(raDeg)}, when it is highest at midnight.`,
   }
 }

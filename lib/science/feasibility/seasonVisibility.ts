@@ -12,10 +12,11 @@ export interface SeasonVisibility {
 
 /** Hours of a target through the season, the Moon left aside and within its limits; null without a position. */
 export function seasonVisibility(input: ReportInput): SeasonVisibility | null {
-  const { target, site, mode, observation, season } = input
+  const { target, site, pointing, mode, observation, season } = input
   if (target.raDeg === null || target.decDeg === null) return null
   const { raDeg, decDeg, pmRaMasYr, pmDecMasYr } = target
   const asked = {
+    ...pointing,
     site,
     targets: [{ id: String(target.id), raDeg, decDeg, pmRaMasYr, pmDecMasYr }],
     from: season.from,

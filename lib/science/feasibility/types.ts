@@ -9,7 +9,7 @@ import type {
   SnrPer,
 } from '../exposure'
 import type { SpectralShape } from '../light'
-import type { TargetVisibility } from '../sky'
+import type { PointingLimits, TargetVisibility } from '../sky'
 
 export type Verdict = 'feasible' | 'marginal' | 'not-feasible'
 
@@ -93,6 +93,8 @@ export interface Season {
 export interface ReportInput {
   readonly cosmology: Cosmology
   readonly site: SiteRecord
+  /** Horizons and blind spot, besides the lowest altitude of the site. */
+  readonly pointing?: Omit<PointingLimits, 'lowestAltitudeDeg'>
   readonly target: ReportTarget
   readonly mode: ModeRecord
   readonly observation: ReportObservation

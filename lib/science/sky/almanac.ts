@@ -13,6 +13,8 @@ import { subtract, type Vector3 } from './vector'
 
 /** Degrees the Earth turns against the mean equinox in one day of universal time (Capitaine et al. 2003). */
 export const TURN_DEG_PER_DAY = 360.985_647_366_29
+/** A sidereal day in days of universal time. */
+export const SIDEREAL_DAY = 360 / TURN_DEG_PER_DAY
 /** Speed of light, astronomical units a day. */
 const LIGHT_AU_PER_DAY = 173.144_632_674
 

@@ -1,11 +1,8 @@
 import { DEG_RAD } from '../constants'
-import { TURN_DEG_PER_DAY } from './almanac'
+import { SIDEREAL_DAY, TURN_DEG_PER_DAY } from './almanac'
 import type { Interval } from './intervals'
 import type { Observer } from './observer'
 import type { Vector3 } from './vector'
-
-/** A sidereal day in days of universal time. */
-const SIDEREAL_DAY = 360 / TURN_DEG_PER_DAY
 
 /**
  * Half the time a direction spends above an altitude in one turn of the sky, degrees of hour angle: cos H =

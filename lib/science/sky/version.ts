@@ -1,2 +1,2 @@
 /** Changes whenever any number of the engine can change. */
-export const skyEngineVersion = '1.0.0'
+export const skyEngineVersion = '1.1.0'

@@ -7,10 +7,12 @@ import { intersect, totalDays, without, type Interval } from './intervals'
 import { awayFromMoon, moonTooBright } from './moonLimits'
 import { createNightSky, describeNight } from './nightSky'
 import { createObserver } from './observer'
+import { horizonsAbove, type PointingLimits } from './pointing'
 import { dateOf, datesBetween } from './time'
+import { timesAboveHorizon } from './timesAboveHorizon'
 import type { MoonLimits, Night, Site, SkyTarget } from './types'
 
-export interface VisibilityInput {
+export interface VisibilityInput extends PointingLimits {
   readonly site: Site
   readonly targets: readonly SkyTarget[]
   /** First and last evening date at the site, both included. */
@@ -21,10 +23,6 @@ export interface VisibilityInput {
   /** Altitude of the Sun under which it counts as dark, degrees, -18 when not given. */
   readonly twilightLimitDeg?: number
   readonly moon?: MoonLimits
-  /** Lowest altitude the telescope reaches, degrees. */
-  readonly lowestAltitudeDeg?: number
-  /** Highest altitude the telescope can follow, degrees: an altazimuth mount has a blind spot overhead. */
-  readonly highestAltitudeDeg?: number
   /** Where Sun and Moon are kept; the process-wide one when not given. */
   readonly almanac?: Almanac
 }
@@ -60,9 +58,10 @@ function check(input: VisibilityInput): void {
 }
 
 /**
- * When targets can be observed: dark, above the airmass limit, within the Moon limits, night by night.
- * Sun and Moon are computed once a night; a target's hour-angle window comes in closed form, so a target
- * costs about a microsecond a night. Window edges within 60 s.
+ * When targets can be observed: dark, above the airmass limit, within what the telescope reaches and within the Moon
+ * limits, night by night. Sun and Moon are computed once a night; a target's hour-angle window comes in closed form,
+ * so a target costs about a microsecond a night, and two more under a horizon that reaches above the airmass limit.
+ * Window edges within 60 s.
  */
 export function visibility(input: VisibilityInput): Visibility {
   check(input)
@@ -71,6 +70,7 @@ export function visibility(input: VisibilityInput): Visibility {
   const limitDeg = input.twilightLimitDeg ?? -18
   const lowest = Math.max(altitudeOfAirmassDeg(input.maxAirmass), input.lowestAltitudeDeg ?? -90)
   const highest = input.highestAltitudeDeg ?? 90
+  const horizons = horizonsAbove(lowest, observer.latitude, input.horizons)
   const minSeparationDeg = input.moon?.minSeparationDeg ?? 0
   const skies = datesBetween(input.from, input.to).map((date) => createNightSky(observer, almanac, date))
   const usable = skies.map((sky) =>
@@ -84,6 +84,9 @@ export function visibility(input: VisibilityInput): Visibility {
     for (const [i, sky] of skies.entries()) {
       const vector = apparentVector(almanac, target, sky.middle)
       let open: Interval[] = intersect(timesAbove(observer, vector, lowest, sky.noons), usable[i] ?? [])
+      for (const curve of horizons) {
+        if (open.length > 0) open = intersect(open, timesAboveHorizon(observer, vector, curve, sky.noons))
+      }
       if (highest < 90) open = without(open, timesAbove(observer, vector, highest, sky.noons))
       if (minSeparationDeg > 0 && open.length > 0) {
         open = awayFromMoon(observer, almanac, sky, vector, open, minSeparationDeg)

@@ -1,6 +1,7 @@
 import nodemailer from 'nodemailer'
 import { step } from '../step'
 import type { Mail } from './Mail'
+import { refusalOf } from './refusalOf'
 
 /** Mail by SMTP; the local inbox and a real server differ by address alone. */
 export function smtpMail(settings: { url: string; from: string }): Mail {
@@ -15,16 +16,24 @@ export function smtpMail(settings: { url: string; from: string }): Mail {
   return {
     send: (letter) =>
       step('mail:send', async () => {
-        await transport.sendMail({
+        const sending = transport.sendMail({
           messageId: letter.messageId,
           from: settings.from,
           to: { address: letter.to.email, name: letter.to.name },
           subject: letter.subject,
           text: letter.text,
           html: letter.html,
+          attachments: (letter.attachments ?? []).map(({ fileName, bytes }) => ({
+            filename: fileName,
+            content: Buffer.from(bytes),
+            contentType: 'application/pdf',
+          })),
           headers: { 'Auto-Submitted': 'auto-generated' },
           disableFileAccess: true,
           disableUrlAccess: true,
+        })
+        await sending.catch((error: unknown) => {
+          throw refusalOf(error) ?? error
         })
       }),
     isUp: async () => {

@@ -21,6 +21,8 @@ export interface CheckoutState {
   currency: string
   paymentId: string | null
   cardLast4: string | null
+  /** What the firm keeps of it, in the same currency; null while that is not known. */
+  firmFeeMinor: number | null
 }
 
 /** A signed notice; `object` is the provider's own object, read only by the verb that applies it. */
@@ -39,13 +41,42 @@ export interface PaymentNotice {
 
 export interface RefundState {
   refundId: string
+  /** The key it was asked for with; null when it was made by hand at the firm. */
+  key: string | null
+  amountMinor: number
   status: 'succeeded' | 'pending' | 'failed'
+  failure: string | null
+}
+
+/** A card holder asks the bank for the money back; the firm holds the amount until the bank has decided. */
+export interface DisputeState {
+  disputeId: string
+  amountMinor: number
+  reason: string
+  status: 'open' | 'won' | 'lost'
+  /** What the firm asks for handling it; null where it says nothing. */
+  firmFeeMinor: number | null
+}
+
+/** One payment in the firm's own list, to hold our books against. */
+export interface ListedPayment {
+  paymentId: string
+  reference: string | null
+  amountMinor: number
+  currency: string
+  refundedMinor: number
+  isDisputed: boolean
+  createdAt: Date
 }
 
 export interface Payments {
   createCheckout(request: CheckoutRequest): Promise<CheckoutState>
   readCheckout(sessionId: string): Promise<CheckoutState>
   refund(request: { idempotencyKey: string; paymentId: string; amountMinor: number }): Promise<RefundState>
+  readRefunds(paymentId: string): Promise<RefundState[]>
+  readDisputes(paymentId: string): Promise<DisputeState[]>
+  /** Every payment that succeeded since a moment, the newest first. */
+  listPayments(since: Date): Promise<ListedPayment[]>
   /** Throws a Refusal 'invalid' when the signature, the date or the version is wrong. */
   readNotice(body: string, signature: string, now: Date): PaymentNotice
   isUp(): Promise<boolean>

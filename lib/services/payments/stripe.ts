@@ -1,35 +1,15 @@
 import Stripe from 'stripe'
 import { refuse } from '@/lib/errors'
 import { step } from '../step'
-import type { CheckoutState, PaymentNotice, Payments } from './Payments'
+import type { Payments } from './Payments'
+import { stripeNotice } from './stripeNotice'
+import { checkoutState, disputeState, listedPayment, refundKeyName, refundState } from './stripeStates'
 
 export interface StripeSettings {
   secretKey: string
   webhookSecret: string
   /** Address of the local mock; null speaks to the real service. */
   apiBase: string | null
-}
-
-const allowedClockSkewMs = 60_000
-
-function idOf(value: string | { id: string } | null | undefined): string | null {
-  if (!value) return null
-  return typeof value === 'string' ? value : value.id
-}
-
-function checkoutState(session: Stripe.Checkout.Session): CheckoutState {
-  const intent = typeof session.payment_intent === 'object' ? session.payment_intent : null
-  const charge = intent && typeof intent.latest_charge === 'object' ? intent.latest_charge : null
-  return {
-    sessionId: session.id,
-    url: session.url,
-    status: session.status === 'complete' ? 'complete' : session.status === 'expired' ? 'expired' : 'open',
-    isPaid: session.payment_status === 'paid',
-    amountMinor: session.amount_total ?? 0,
-    currency: (session.currency ?? '').toUpperCase(),
-    paymentId: idOf(session.payment_intent),
-    cardLast4: charge?.payment_method_details?.card?.last4 ?? null,
-  }
 }
 
 /** Payments by Stripe Checkout; test and live differ by keys alone. */
@@ -83,19 +63,42 @@ export function stripePayments(settings: StripeSettings): Payments {
     readCheckout: (sessionId) =>
       reach('payments:read-checkout', async () =>
         checkoutState(
-          await stripe.checkout.sessions.retrieve(sessionId, { expand: ['payment_intent.latest_charge'] }),
+          await stripe.checkout.sessions.retrieve(sessionId, {
+            expand: ['payment_intent.latest_charge.balance_transaction'],
+          }),
         ),
       ),
     refund: ({ idempotencyKey, paymentId, amountMinor }) =>
       reach('payments:refund', async () => {
         const refund = await stripe.refunds.create(
-          { payment_intent: paymentId, amount: amountMinor },
+          {
+            payment_intent: paymentId,
+            amount: amountMinor,
+            metadata: { [refundKeyName]: idempotencyKey },
+          },
           { idempotencyKey },
         )
-        const status = refund.status === 'succeeded' || refund.status === 'pending' ? refund.status : 'failed'
-        return { refundId: refund.id, status }
+        return refundState(refund)
       }),
-    readNotice: (body, signature, now) => readNotice(stripe, settings.webhookSecret, body, signature, now),
+    readRefunds: (paymentId) =>
+      reach('payments:read-refunds', async () => {
+        const { data } = await stripe.refunds.list({ payment_intent: paymentId, limit: 100 })
+        return data.map(refundState)
+      }),
+    readDisputes: (paymentId) =>
+      reach('payments:read-disputes', async () => {
+        const { data } = await stripe.disputes.list({ payment_intent: paymentId, limit: 100 })
+        return data.map(disputeState).filter((dispute) => dispute !== null)
+      }),
+    listPayments: (since) =>
+      reach('payments:list', async () => {
+        const created = { gte: Math.floor(since.getTime() / 1000) }
+        const charges = await stripe.charges
+          .list({ created, limit: 100 })
+          .autoPagingToArray({ limit: 10_000 })
+        return charges.map(listedPayment).filter((payment) => payment !== null)
+      }),
+    readNotice: (body, signature, now) => stripeNotice(stripe, settings.webhookSecret, body, signature, now),
     isUp: async () => {
       try {
         await step('payments:ping', () => stripe.events.list({ limit: 1 }))
@@ -104,43 +107,5 @@ export function stripePayments(settings: StripeSettings): Payments {
         return false
       }
     },
-  }
-}
-
-function readNotice(
-  stripe: Stripe,
-  webhookSecret: string,
-  body: string,
-  signature: string,
-  now: Date,
-): PaymentNotice {
-  let event: Stripe.Event
-  try {
-    event = stripe.webhooks.constructEvent(body, signature, webhookSecret)
-  } catch (cause) {
-    throw refuse.invalid('The signature of this notice is wrong or too old.', {
-      signature: cause instanceof Error ? cause.message : 'unreadable',
-    })
-  }
-  const signedAt = Number(/(?:^|,)t=(\d+)/.exec(signature)?.[1] ?? 0) * 1000
-  // The SDK refuses old signatures but accepts one dated in the future.
-  if (signedAt > now.getTime() + allowedClockSkewMs)
-    throw refuse.invalid('This notice is dated in the future.', { signature: 'dated in the future' })
-  if (event.api_version !== Stripe.API_VERSION)
-    throw refuse.invalid(`This notice speaks another version of the interface (${event.api_version}).`)
-
-  const object = event.data.object
-  const isSession = object.object === 'checkout.session'
-  const isIntent = object.object === 'payment_intent'
-  return {
-    id: event.id,
-    type: event.type,
-    apiVersion: event.api_version,
-    createdAt: new Date(event.created * 1000),
-    sessionId: isSession ? object.id : null,
-    paymentId: isSession ? idOf(object.payment_intent) : isIntent ? object.id : null,
-    reference: isSession || isIntent ? (object.metadata?.reference ?? null) : null,
-    failure: isIntent ? (object.last_payment_error?.message ?? null) : null,
-    body,
   }
 }

@@ -1,4 +1,4 @@
-export const mailFaultModes = ['ok', 'down', '4xx', '5xx', 'cut-after-data'] as const
+export const mailFaultModes = ['ok', 'down', '4xx', '5xx', 'no-mailbox', 'cut-after-data'] as const
 export type MailFaultMode = (typeof mailFaultModes)[number]
 
 /** The fault the mail fake shows, for ever or for a number of deliveries. */

@@ -25,6 +25,12 @@ export function startSmtp(port: number, letterbox: Letterbox, fault: MailFault):
       else if (fault.strikes('5xx')) callback(new SmtpRefusal(554, 'Refused for good (fault switched on)'))
       else callback()
     },
+    onRcptTo({ address }, _session, callback) {
+      // Besides the switch, so that one bad address among good ones can be tried.
+      if (fault.strikes('no-mailbox') || address.startsWith('no-such-mailbox'))
+        callback(new SmtpRefusal(550, 'No such mailbox here'))
+      else callback()
+    },
     onData(stream, session, callback) {
       const chunks: Buffer[] = []
       stream.on('data', (chunk: Buffer) => chunks.push(chunk))

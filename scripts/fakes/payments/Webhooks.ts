@@ -1,3 +1,4 @@
+import { randomInt } from 'node:crypto'
 import { signatureHeader } from './signature'
 import { unixNow, type Delivery, type PaymentStore } from './store'
 import type { ApiEvent } from './objects'
@@ -51,6 +52,29 @@ export class Webhooks {
   /** Sends what is due now; resolves when those attempts are over. */
   async deliverNow(): Promise<void> {
     await this.#deliverDue()
+  }
+
+  /**
+   * Sends everything that waits, also while switched off: in another order, each several times, or dated ahead. What
+   * is acknowledged waits no longer. Tells the status of each sending.
+   */
+  async flush(order: 'reversed' | 'shuffled' | null, copies: number, shift: number): Promise<number[]> {
+    const { state } = this.#store
+    const waiting = state.deliveries.flatMap((delivery) =>
+      Array.from({ length: copies }, () => ({ delivery, lot: randomInt(2 ** 32) })),
+    )
+    if (order === 'reversed') waiting.reverse()
+    if (order === 'shuffled') waiting.sort((a, b) => a.lot - b.lot)
+    const statuses: number[] = []
+    for (const { delivery } of waiting) {
+      const event = state.events.find(({ id }) => id === delivery.eventId)
+      const status = event ? await this.send(event, { shift }) : 0
+      statuses.push(status)
+      if (status >= 200 && status < 300)
+        state.deliveries = state.deliveries.filter((each) => each !== delivery)
+    }
+    this.#store.changed()
+    return statuses
   }
 
   /** One POST of one event; the status received, or 0 when nobody answered. */

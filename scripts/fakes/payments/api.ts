@@ -5,7 +5,6 @@ import { createSession, findSession } from './checkout'
 import { expanded } from './expand'
 import { listOf, parseForm, textOf, type FormTree } from './form'
 import { listPage, typeFilter } from './lists'
-import type { Refund } from './objects'
 import { createRefund } from './refunds'
 import type { PaymentStore } from './store'
 
@@ -13,10 +12,7 @@ export interface Api {
   store: PaymentStore
   pageBase: string
   /** Makes events of what happened and has them delivered. */
-  announce: (
-    happenings: readonly (Happening | { type: string; object: Refund })[],
-    idempotencyKey: string | null,
-  ) => void
+  announce: (happenings: readonly Happening[], idempotencyKey: string | null) => void
 }
 
 type Endpoint = (api: Api, form: FormTree, id: string, request: FakeRequest) => unknown
@@ -32,6 +28,8 @@ const endpoints: readonly [method: string, path: RegExp, endpoint: Endpoint][] =
     /^\/v1\/payment_intents\/([^/]+)$/,
     (api, _f, id) => found(api.store.state.intents[id], 'payment_intent', id),
   ],
+  ['GET', /^\/v1\/charges$/, listCharges],
+  ['GET', /^\/v1\/disputes$/, listDisputes],
   ['GET', /^\/v1\/charges\/([^/]+)$/, (api, _form, id) => found(api.store.state.charges[id], 'charge', id)],
   ['POST', /^\/v1\/refunds$/, refund],
   ['GET', /^\/v1\/refunds$/, listRefunds],
@@ -118,6 +116,22 @@ function listRefunds({ store }: Api, query: FormTree): unknown {
     (each) => !intent || each.payment_intent === intent,
   )
   return listPage(refunds, query, '/v1/refunds')
+}
+
+function listCharges({ store }: Api, query: FormTree): unknown {
+  const intent = textOf(query, 'payment_intent')
+  const charges = Object.values(store.state.charges)
+    .filter((each) => !intent || each.payment_intent === intent)
+    .sort((a, b) => a.created - b.created)
+  return listPage(charges, query, '/v1/charges')
+}
+
+function listDisputes({ store }: Api, query: FormTree): unknown {
+  const intent = textOf(query, 'payment_intent')
+  const disputes = Object.values(store.state.disputes).filter(
+    (each) => !intent || each.payment_intent === intent,
+  )
+  return listPage(disputes, query, '/v1/disputes')
 }
 
 function listEvents({ store }: Api, query: FormTree): unknown {

@@ -1,4 +1,4 @@
-import type { Charge, PaymentError, PaymentIntent, StoredSession } from './objects'
+import type { Charge, Dispute, PaymentError, PaymentIntent, Refund, StoredSession } from './objects'
 import { newId, unixNow, type PaymentStore } from './store'
 
 /** What the person at the hosted page may choose to happen. */
@@ -14,7 +14,7 @@ export type Outcome = (typeof outcomes)[number]
 
 export interface Happening {
   type: string
-  object: PaymentIntent | Charge | StoredSession['session']
+  object: PaymentIntent | Charge | Refund | Dispute | StoredSession['session']
 }
 
 const failures: Record<'declined' | 'insufficient-funds' | 'refuse', PaymentError> = {
@@ -58,8 +58,13 @@ export function attempt(store: PaymentStore, stored: StoredSession, outcome: Out
 function intentOf(store: PaymentStore, stored: StoredSession, happenings: Happening[]): PaymentIntent {
   const known = stored.intentId === null ? undefined : store.state.intents[stored.intentId]
   if (known) return known
+  const intent = makeIntent(store, stored, newId('pi'))
+  happenings.push({ type: 'payment_intent.created', object: intent })
+  return intent
+}
+
+export function makeIntent(store: PaymentStore, stored: StoredSession, id: string): PaymentIntent {
   const { session } = stored
-  const id = newId('pi')
   const intent: PaymentIntent = {
     id,
     object: 'payment_intent',
@@ -87,7 +92,6 @@ function intentOf(store: PaymentStore, stored: StoredSession, happenings: Happen
   }
   store.state.intents[id] = intent
   stored.intentId = id
-  happenings.push({ type: 'payment_intent.created', object: intent })
   return intent
 }
 
@@ -141,7 +145,7 @@ function fail(
   happenings.push({ type: 'payment_intent.payment_failed', object: intent })
 }
 
-function makeCharge(
+export function makeCharge(
   store: PaymentStore,
   intent: PaymentIntent,
   method: string,

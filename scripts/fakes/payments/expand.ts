@@ -1,3 +1,4 @@
+import { balanceLine } from './balance'
 import type { PaymentStore } from './store'
 
 type Json = null | boolean | number | string | Json[] | { [key: string]: Json }
@@ -25,8 +26,15 @@ function grow(store: PaymentStore, place: Json, path: readonly string[]): void {
 function lookUp(store: PaymentStore, value: Json | undefined): Json | undefined {
   if (typeof value !== 'string') return value
   const { sessions, intents, charges, refunds } = store.state
-  const found = sessions[value]?.session ?? intents[value] ?? charges[value] ?? refunds[value]
+  const found =
+    sessions[value]?.session ?? intents[value] ?? charges[value] ?? refunds[value] ?? lineOf(store, value)
   return found ? JSON.parse(JSON.stringify(found)) : value
+}
+
+function lineOf(store: PaymentStore, id: string): Json | undefined {
+  if (!id.startsWith('txn_')) return undefined
+  const charge = Object.values(store.state.charges).find((each) => each.balance_transaction === id)
+  return charge && balanceLine(charge)
 }
 
 function lineItems(store: PaymentStore, session: { [key: string]: Json }): Json | undefined {

@@ -4,6 +4,7 @@ import Stripe from 'stripe'
 import { json, listenOnLoopback, redirect, type FakeRequest, type FakeResponse } from '../web/httpServer'
 import { fontFile, fontPath } from '../web/page'
 import { callApi, type Api } from './api'
+import { afterwards } from './afterwards'
 import { ApiError } from './ApiError'
 import { attempt, outcomes } from './attempts'
 import { findSession } from './checkout'
@@ -67,9 +68,10 @@ export class PaymentMock {
       if (request.path.startsWith('/v1/')) return await this.#callApi(request)
       if (request.path.startsWith('/pay/')) return await this.#pay(request)
       if (request.path.startsWith('/mock/')) {
-        return await controlMock(request, this.#store, this.#webhooks, this.#faults)
+        return await controlMock(request, this.#api, this.#webhooks, this.#faults)
       }
       if (request.path === '/') return homePage(this.#store)
+      if (request.path.startsWith('/after/') && request.method === 'POST') return this.#after(request)
       if (request.path === fontPath) return fontFile()
       return json(404, { error: 'There is nothing here.' })
     } catch (error) {
@@ -90,6 +92,11 @@ export class PaymentMock {
     const stored = findSession(this.#store, request.path.slice('/pay/'.length))
     const wish = new URLSearchParams(request.body).get('outcome')
     if (request.method !== 'POST' || stored.session.status !== 'open') return payPage(stored, null, false)
+    if (wish === 'run-out') {
+      stored.session.expires_at = unixNow()
+      this.#expireOverdue()
+      return payPage(stored, null, false)
+    }
     if (wish === 'leave') return redirect(stored.session.cancel_url ?? successUrl(stored.session))
     const outcome = outcomes.find((known) => known === wish)
     if (!outcome) return payPage(stored, 'Choose one of the answers.', false)
@@ -99,6 +106,13 @@ export class PaymentMock {
     if (stored.session.status !== 'open') return redirect(successUrl(stored.session))
     const intent = stored.intentId === null ? undefined : this.#store.state.intents[stored.intentId]
     return payPage(stored, intent?.last_payment_error?.message ?? null, outcome === 'authentication')
+  }
+
+  /** A button of the list of payments: what the card holder's bank or the firm's own people do. */
+  #after(request: FakeRequest): FakeResponse {
+    const deed = new URLSearchParams(request.body).get('deed') ?? ''
+    afterwards(this.#api, request.path.slice('/after/'.length), deed)
+    return redirect('/')
   }
 
   #record(type: string, object: ApiEvent['data']['object'], idempotencyKey: string | null): void {

@@ -101,7 +101,7 @@ export interface Charge {
   created: number
   currency: string
   customer: null
-  disputed: false
+  disputed: boolean
   failure_code: string | null
   failure_message: string | null
   livemode: false
@@ -130,10 +130,27 @@ export interface Refund {
   payment_intent: string
   reason: string | null
   receipt_number: null
-  status: 'succeeded'
+  failure_reason?: string
+  status: 'succeeded' | 'pending' | 'failed'
 }
 
-export type ApiObject = CheckoutSession | PaymentIntent | Charge | Refund
+export interface Dispute {
+  id: string
+  object: 'dispute'
+  amount: number
+  balance_transactions: { id: string; object: 'balance_transaction'; currency: string; fee: number }[]
+  charge: string
+  created: number
+  currency: string
+  is_charge_refundable: false
+  livemode: false
+  metadata: Metadata
+  payment_intent: string
+  reason: 'fraudulent'
+  status: 'needs_response' | 'won' | 'lost'
+}
+
+export type ApiObject = CheckoutSession | PaymentIntent | Charge | Refund | Dispute
 
 export interface ApiEvent {
   id: string

@@ -40,6 +40,7 @@ function payButtons(): string {
     button('insufficient-funds', 'The card has too little money'),
     button('authentication', 'The bank asks for confirmation first'),
     button('leave', 'Leave without paying'),
+    button('run-out', 'Let this page expire'),
   ].join('\n')
 }
 

@@ -6,7 +6,7 @@ import { newId, unixNow, type PaymentStore } from './store'
 
 export interface RefundHappening {
   refund: Refund
-  happenings: (Happening | { type: string; object: Refund })[]
+  happenings: Happening[]
 }
 
 const reasons = ['duplicate', 'fraudulent', 'requested_by_customer']
@@ -18,6 +18,8 @@ export function createRefund(store: PaymentStore, form: FormTree): RefundHappeni
   if (charge.refunded) {
     throw invalid(`Charge ${charge.id} has already been refunded.`, undefined, 'charge_already_refunded')
   }
+  if (charge.disputed && !isWon(store, charge))
+    throw invalid(`Charge ${charge.id} has been charged back.`, undefined, 'charge_disputed')
   const amount = integerOf(form, 'amount') ?? left
   if (amount < 1) throw invalid('Invalid positive integer', 'amount', 'parameter_invalid_integer')
   if (amount > left) {
@@ -38,19 +40,42 @@ export function createRefund(store: PaymentStore, form: FormTree): RefundHappeni
     payment_intent: charge.payment_intent,
     reason,
     receipt_number: null,
-    status: 'succeeded',
+    status: store.state.refundsTurn,
   }
   store.state.refunds[refund.id] = refund
+  const happenings: Happening[] = [{ type: 'refund.created', object: refund }]
+  if (refund.status === 'failed') refund.failure_reason = 'expired_or_canceled_card'
+  else happenings.push(...count(charge, amount))
+  store.changed()
+  return { refund, happenings }
+}
+
+/** A refund under way counts from the beginning; one that fails in the end is taken off again. */
+function count(charge: Charge, amount: number): Happening[] {
   charge.amount_refunded += amount
   charge.refunded = charge.amount_refunded === charge.amount_captured
+  return amount > 0 ? [{ type: 'charge.refunded', object: charge }] : []
+}
+
+/** Ends a refund that is under way. */
+export function finishRefund(
+  store: PaymentStore,
+  refund: Refund,
+  status: 'succeeded' | 'failed',
+): Happening[] {
+  refund.status = status
+  const charge = store.state.charges[refund.charge]
+  const isFailed = status === 'failed'
+  if (isFailed) refund.failure_reason = 'expired_or_canceled_card'
+  if (isFailed && charge) count(charge, -refund.amount)
   store.changed()
-  return {
-    refund,
-    happenings: [
-      { type: 'refund.created', object: refund },
-      { type: 'charge.refunded', object: charge },
-    ],
-  }
+  return [{ type: isFailed ? 'refund.failed' : 'refund.updated', object: refund }]
+}
+
+function isWon(store: PaymentStore, charge: Charge): boolean {
+  return Object.values(store.state.disputes).some(
+    (dispute) => dispute.charge === charge.id && dispute.status === 'won',
+  )
 }
 
 function chargeOf(store: PaymentStore, form: FormTree): Charge {

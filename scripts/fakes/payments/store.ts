@@ -1,7 +1,7 @@
 import { randomBytes } from 'node:crypto'
 import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
-import type { ApiEvent, Charge, PaymentIntent, Refund, StoredSession } from './objects'
+import type { ApiEvent, Charge, Dispute, PaymentIntent, Refund, StoredSession } from './objects'
 
 export interface RememberedAnswer {
   fingerprint: string
@@ -20,6 +20,9 @@ interface State {
   intents: Record<string, PaymentIntent>
   charges: Record<string, Charge>
   refunds: Record<string, Refund>
+  /** What the next refunds come to. */
+  refundsTurn: Refund['status']
+  disputes: Record<string, Dispute>
   /** Oldest first. */
   events: ApiEvent[]
   answers: Record<string, RememberedAnswer>
@@ -40,6 +43,8 @@ export class PaymentStore {
       intents: {},
       charges: {},
       refunds: {},
+      refundsTurn: 'succeeded',
+      disputes: {},
       events: [],
       answers: {},
       deliveries: [],

@@ -95,6 +95,56 @@ it('takes rows into the form when told to, and saves them only with the record',
   expect(await screen.findByRole('button', { name: 'Save as record 4' })).toBeTruthy()
 })
 
+// Seen to fail with every row on the page, and with the page left where it was when a later row is wrong.
+it(
+  'shows a long table a page at a time, and turns to the row that is wrong',
+  { timeout: 60_000 },
+  async () => {
+    const { save, user } = show()
+    const press = (label: string) => user.click(screen.getByText(label))
+    const give = async (row: number, text: string) => {
+      await user.clear(screen.getByLabelText(`Efficiency, row ${row}`))
+      await user.type(screen.getByLabelText(`Efficiency, row ${row}`), text)
+    }
+    await press('Take it from a file')
+    const rows = Array.from({ length: 60 }, (_, i) => `${5500 + 80 * i},0.2`)
+    await readPasted(user, ['wavelength (Å),efficiency', ...rows].join('\n'))
+    await press('Take these 60 rows')
+    expect(screen.getByText('Rows 1 to 50 of 60')).toBeTruthy()
+    expect(screen.getAllByLabelText(/^Efficiency, row/)).toHaveLength(50)
+    expect(screen.getByText('Keep all 60 rows as CSV')).toBeTruthy()
+    await press('Last')
+    expect(screen.getByText('Rows 51 to 60 of 60')).toBeTruthy()
+    expect(value('Wavelength, row 55')).toBe('9820')
+    await give(55, '2')
+
+    await press('First')
+    await press('Save as record 3')
+    expect(await screen.findByText('Rows 51 to 60 of 60')).toBeTruthy()
+    expect(value('Efficiency, row 55')).toBe('2')
+
+    await press('First')
+    await give(20, '3')
+    await press('Save as record 3')
+    expect(await screen.findByLabelText('Show row 55')).toBeTruthy()
+    expect(value('Efficiency, row 20')).toBe('3')
+    const links = screen.getAllByText('An efficiency lies between 0 and 1.', { selector: 'a' })
+    expect(links).toHaveLength(2)
+    const away = links.find((link) => link.getAttribute('href')?.includes('54'))
+    if (!away) return expect.fail('the summary does not lead to row 55')
+    await user.click(away)
+    await waitFor(() => expect(document.activeElement).toBe(screen.getByLabelText('Efficiency, row 55')))
+
+    await give(55, '0.3')
+    await user.click(screen.getByLabelText('Show row 20'))
+    await give(20, '0.3')
+    await press('Save as record 3')
+    await waitFor(() => expect(save).toHaveBeenCalledTimes(1))
+    expect(save.mock.calls[0]?.[0].throughput).toHaveLength(60)
+    expect(save.mock.calls[0]?.[0].throughput[54]).toEqual({ at: '9820', value: '0.3' })
+  },
+)
+
 it('refuses a file without heads in a sentence', async () => {
   const { user } = show()
   await user.click(screen.getByRole('button', { name: 'Take it from a file' }))

@@ -1,6 +1,7 @@
 import { render, screen, waitFor } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { describe, expect, it, vi } from 'vitest'
+import { PaperUpload, type PaperUploadProps } from '@/components/proposals/PaperUpload'
 import { Recognisable } from '@/components/proposals/Recognisable'
 import { FigureUpload } from '@/components/writing/FigureUpload'
 import type { FigureActions } from '@/components/writing/figureActions'
@@ -115,5 +116,27 @@ describe('a picture on its way', () => {
     await userEvent.upload(input, new File(['abc'], 'map.tiff'), { applyAccept: false })
     expect(await screen.findByText(/is not a PNG, JPG and JPEG file/)).toBeDefined()
     expect(upload).not.toHaveBeenCalled()
+  })
+})
+
+// Seen to fail with the file forgotten once it was lost.
+describe('a document', () => {
+  it('can be sent again after the network failed', async () => {
+    const upload = vi
+      .fn<PaperUploadProps['upload']>()
+      .mockRejectedValueOnce(new Error('no network'))
+      .mockResolvedValue({ ok: false, kind: 'invalid', message: 'No.', fieldErrors: { file: 'Too long.' } })
+    const { container } = render(
+      <PaperUpload reference="4F7-K2M" kind="justification" label="The file" help="A PDF" upload={upload} />,
+    )
+    const input = container.querySelector('input[type="file"]')
+    if (!(input instanceof HTMLInputElement)) return expect.fail('no input')
+    await userEvent.upload(input, new File(['abc'], 'why.pdf', { type: 'application/pdf' }))
+    await userEvent.click(await screen.findByRole('button', { name: 'Send it again' }))
+    await waitFor(() => expect(upload).toHaveBeenCalledTimes(2))
+    expect((upload.mock.calls[1]?.[0].get('file') as File | null)?.name).toBe('why.pdf')
+    // What is wrong with the file itself is not mended by sending it again.
+    expect(await screen.findByText('Too long.')).toBeDefined()
+    expect(screen.queryByRole('button', { name: 'Send it again' })).toBeNull()
   })
 })

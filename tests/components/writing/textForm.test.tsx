@@ -99,7 +99,7 @@ describe('a text and its preview', () => {
     const both = await screen.findByRole('alert', {}, { timeout: 4000 })
     expect(within(both).getByText('Theirs.')).toBeDefined()
     expect(within(both).getByText('Mine.')).toBeDefined()
-    await userEvent.click(within(both).getByRole('button', { name: 'Keep mine' }))
+    await userEvent.click(within(both).getByRole('button', { name: 'Keep all of mine' }))
     await waitFor(() =>
       expect(save).toHaveBeenLastCalledWith(expect.objectContaining({ text: 'Mine.', version: 9 })),
     )

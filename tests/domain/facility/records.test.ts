@@ -9,7 +9,8 @@ import { modeRecordSchema, type ModeForm } from '@/lib/domain/facility/modeSchem
 import { mayEditFacility, mayEditMode } from '@/lib/domain/facility/policy'
 import { siteTyped } from '@/lib/domain/facility/siteForm'
 import { siteRecordSchema, type SiteForm } from '@/lib/domain/facility/siteSchema'
-import { telescopeRecordSchema } from '@/lib/domain/facility/telescopeSchema'
+import { telescopeTyped } from '@/lib/domain/facility/telescopeForm'
+import { telescopeRecordSchema, type TelescopeForm } from '@/lib/domain/facility/telescopeSchema'
 import { site, slitMode } from '../../support/contents'
 
 // Seen to fail with the slit's fields left unasked, with the median unchecked, and with every scientist let in.
@@ -17,6 +18,15 @@ import { site, slitMode } from '../../support/contents'
 const errors = <I, O>(schema: z.ZodType<O, I>, value: I) => {
   const result = schema.safeParse(value)
   return result.success ? {} : fieldErrorsOf(result.error)
+}
+const telescope = {
+  apertureM: 1.5,
+  collectingAreaM2: 1.57,
+  highestAltitudeDeg: 87.5,
+  horizon: [
+    { azimuthDeg: 0, altitudeDeg: 12 },
+    { azimuthDeg: 95.5, altitudeDeg: 24 },
+  ],
 }
 const head = { slug: 'x', over: 1, validFrom: '2027-03-01' }
 
@@ -103,7 +113,14 @@ describe('a site’s record', () => {
   const typed = (over: Partial<SiteForm> = {}): SiteForm => ({ ...head, ...siteTyped(site), ...over })
 
   it('comes out of the form as it went in', () => {
-    expect(site).toMatchObject(siteRecordSchema.parse(typed()).facts)
+    expect({ weather: null, ...site }).toMatchObject(siteRecordSchema.parse(typed()).facts)
+    const weather = {
+      lostByMonth: [0.12, 0.13, 0.165, 0.22, 0.31, 0.36, 0.35, 0.31, 0.25, 0.2, 0, 1],
+      persistence: 0.35,
+    }
+    const windy = { ...head, ...siteTyped({ ...site, weather }) }
+    expect(windy.lostByMonth).toBe('12, 13, 16.5, 22, 31, 36, 35, 31, 25, 20, 0, 100')
+    expect(siteRecordSchema.parse(windy).facts.weather).toEqual(weather)
   })
 
   it.each<[Partial<SiteForm>, string, string]>([
@@ -113,6 +130,26 @@ describe('a site’s record', () => {
     [{ timeZone: 'Ridge' }, 'timeZone', 'This is not a time zone; one is called Etc/GMT+3, for instance.'],
     [{ median: '0.5' }, 'median', 'The median is not sharper than the best tenth.'],
     [{ worst90: '0.7' }, 'worst90', 'The poorest tenth is not sharper than the median.'],
+    [
+      { lostByMonth: '12, 13', persistence: '0' },
+      'lostByMonth',
+      'Give twelve numbers, January to December, with commas between, such as 12, 13, 16 …',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 120', persistence: '0' },
+      'lostByMonth',
+      'Number 12 of the twelve lies between 0 and 100 %.',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 12' },
+      'persistence',
+      'Give this too: 0 where a night tells nothing of the next.',
+    ],
+    [
+      { lostByMonth: '1 2 3 4 5 6 7 8 9 10 11 12', persistence: '1' },
+      'persistence',
+      'A correlation of neighbouring nights lies between 0 and 0.95.',
+    ],
     [{ extinction: [] }, 'extinction', 'Give at least one band.'],
     [
       { darkSky: [{ at: 'V', value: '41' }] },
@@ -142,7 +179,43 @@ describe('a telescope’s record', () => {
       collectingAreaM2: 'A collecting area lies between 0.005 and 8,000\u00a0m².',
     }], // prettier-ignore
   ])('of %s m and %s m²', (apertureM, collectingAreaM2, expected) => {
-    expect(errors(telescopeRecordSchema, { ...head, apertureM, collectingAreaM2 })).toEqual(expected)
+    const typed = { ...head, apertureM, collectingAreaM2, highestAltitudeDeg: '', horizon: [] }
+    expect(errors(telescopeRecordSchema, typed)).toEqual(expected)
+  })
+
+  const typed = (over: Partial<TelescopeForm> = {}): TelescopeForm => ({
+    ...head,
+    ...telescopeTyped(telescope),
+    ...over,
+  })
+  const rows = (...given: [string, string][]) => given.map(([at, value]) => ({ at, value }))
+
+  it('comes out of the form as it went in, with its horizon and without', () => {
+    expect(telescopeRecordSchema.parse(typed()).facts).toEqual(telescope)
+    const bare = typed({ highestAltitudeDeg: '', horizon: [] })
+    expect(telescopeRecordSchema.parse(bare).facts).toMatchObject({ highestAltitudeDeg: null, horizon: [] })
+  })
+
+  it.each<[Partial<TelescopeForm>, string, string]>([
+    [{ highestAltitudeDeg: '90' }, 'highestAltitudeDeg', 'A highest altitude lies between 60 and 89.99°.'],
+    [{ highestAltitudeDeg: '45' }, 'highestAltitudeDeg', 'A highest altitude lies between 60 and 89.99°.'],
+    [{ horizon: rows(['0', '86']) }, 'horizon.0.value', 'A lowest altitude lies between 0 and 85°.'],
+    [{ horizon: rows(['-10', '12']) }, 'horizon.0.at', 'An azimuth lies between 0 and 360°.'],
+    [
+      { horizon: rows(['0', '12'], ['360', '12']) },
+      'horizon.1.at',
+      'North is an azimuth of 0°: the table goes on from its last row to its first.',
+    ],
+    [{ horizon: rows(['90', '12'], ['90', '14']) }, 'horizon.1.at', 'This azimuth stands in the row before.'],
+    [{ horizon: rows(['90', '12'], ['80', '14']) }, 'horizon.1.at', 'Azimuths grow from row to row.'],
+    [{ horizon: rows(['east', '12']) }, 'horizon.0.at', 'An azimuth is a number.'],
+    [
+      { horizon: rows(...Array.from({ length: 361 }, (_, i): [string, string] => [String(i / 2), '12'])) },
+      'horizon',
+      'At most 360 rows are kept.',
+    ],
+  ])('%o is refused at its field', (over, field, message) => {
+    expect(errors(telescopeRecordSchema, typed(over))).toEqual({ [field]: message })
   })
 })
 

@@ -1,11 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import {
-  canBeTakenUp,
-  checkoutEndsAt,
-  receiptNumber,
-  whatMoneyMeans,
-  whyNotPayable,
-} from '@/lib/domain/fees/rules'
+import { paperNumber } from '@/lib/domain/fees/paperNumber'
+import { canBeTakenUp, checkoutEndsAt, whatMoneyMeans, whyNotPayable } from '@/lib/domain/fees/rules'
 
 const begunAt = new Date('2027-03-01T10:00:00Z')
 const after = (hours: number) => new Date(begunAt.getTime() + hours * 3600_000)
@@ -54,6 +49,6 @@ describe('the number of a receipt', () => {
     [187, 'QR-2027-0187'],
     [12_345, 'QR-2027-12345'],
   ])('of the %s-th of a year', (count, number) => {
-    expect(receiptNumber(2027, count)).toBe(number)
+    expect(paperNumber('receipts', 2027, count)).toBe(number)
   })
 })

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Actor } from '@/lib/domain/actor'
-import { interestInWords, whyNotAssigned, whyNotReminded } from '@/lib/domain/assignments/rules'
+import { interestInWords, whyNotAssigned, whyNotReminded, reminderDue } from '@/lib/domain/assignments/rules'
 import { outcomeOf, overAwards, whyNotReleased } from '@/lib/domain/decisions/rules'
 import { awardSchema } from '@/lib/domain/decisions/schema'
 import { statementFrom } from '@/lib/domain/decisions/statementFrom'
@@ -69,12 +69,13 @@ describe('stages', () => {
   })
 
   it.each([
-    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0 }, null],
-    [{ phase: 'ranking', isFrozen: false, undecided: 3, unready: 0 }, /Freeze/],
-    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 1 }, /not prepared/],
-    [{ phase: 'ranking', isFrozen: true, undecided: 0, unready: 0 }, /already/],
-    [{ phase: 'review', isFrozen: true, undecided: 3, unready: 0 }, /every panel/],
-    [{ phase: 'decided', isFrozen: true, undecided: 3, unready: 0 }, /already/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, null],
+    [{ phase: 'ranking', isFrozen: false, undecided: 3, unready: 0, unapproved: 0 }, /Freeze/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 1, unapproved: 0 }, /not prepared/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 3, unready: 0, unapproved: 1 }, /second person/],
+    [{ phase: 'ranking', isFrozen: true, undecided: 0, unready: 0, unapproved: 0 }, /already/],
+    [{ phase: 'review', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, /every panel/],
+    [{ phase: 'decided', isFrozen: true, undecided: 3, unready: 0, unapproved: 0 }, /already/],
   ] as const)('release of %o', (facts, words) => {
     const why = whyNotReleased(facts)
     if (words === null) expect(why).toBeNull()
@@ -246,5 +247,23 @@ describe('awards', () => {
 
   it('a statement is the comments, each once', () => {
     expect(statementFrom([' One. ', 'Two.\n\n\n\nMore.', 'One.', ''])).toBe('One.\n\nTwo.\n\nMore.')
+  })
+})
+
+describe('reminderDue', () => {
+  const due = new Date('2027-03-10T12:00:00Z')
+  const meets = new Date('2027-03-20T12:00:00Z')
+  it.each([
+    ['2027-03-03T11:59:59Z', null],
+    ['2027-03-03T12:00:00Z', 'week'],
+    ['2027-03-09T11:59:59Z', 'week'],
+    ['2027-03-09T12:00:00Z', 'day'],
+    ['2027-03-10T11:59:59Z', 'day'],
+    ['2027-03-10T12:00:00Z', null],
+    ['2027-03-11T12:00:00Z', 'late'],
+    ['2027-03-20T11:59:59Z', 'late'],
+    ['2027-03-20T12:00:00Z', null],
+  ] as const)('at %s: %s', (now, kind) => {
+    expect(reminderDue(due, meets, new Date(now))).toBe(kind)
   })
 })

@@ -78,6 +78,7 @@ describe('what this product writes', () => {
   const galaxy = {
     geometry: 'sersic',
     effectiveRadiusArcsec: 0.8,
+    effectiveRadiusErrorArcsec: 0.15,
     sersicIndex: 2.5,
     redshiftError: 0.0004,
     pmRaMasYr: -1.25,

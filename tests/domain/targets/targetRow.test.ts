@@ -34,13 +34,15 @@ describe('a row of the targets table', () => {
       ...right,
       ...{ lineName: 'Hβ', lineKind: 'luminosity', lineValue: '2.5e42', lineError: '3e41', lineWidth: '300' },
       ...{ ebv: '0.02', magnification: '6', magnificationError: '0.9' },
-      ...{ geometry: 'sersic', effectiveRadius: '0.8', sersicIndex: '2' },
+      ...{ geometry: 'sersic', effectiveRadius: '0.8', effectiveRadiusError: '0.15', sersicIndex: '2' },
     })
     expect(lensed).toMatchObject({
       line: { name: 'Hβ', kind: 'luminosity', value: 2.5e42, error: 3e41, widthKmS: 300 },
       galacticEbv: 0.02,
       magnification: 6,
       magnificationError: 0.9,
+      effectiveRadiusArcsec: 0.8,
+      effectiveRadiusErrorArcsec: 0.15,
     })
     expect(targetRowSchema.parse(targetRow(lensed))).toEqual(lensed)
   })
@@ -107,6 +109,24 @@ describe('a row of the targets table', () => {
     [{ lineName: 'Hω' }, { lineName: 'This line is not on the list.' }],
     [{ magnification: '0' }, { magnification: 'A magnification lies between 0.01 and 1,000.' }],
     [{ ebv: '9' }, { ebv: 'A reddening E(B−V) lies between 0 and 5.' }],
+    [
+      { geometry: 'sersic', effectiveRadius: '0' },
+      { effectiveRadius: 'A half-light radius lies between 0.01 and 600.' },
+    ],
+    [
+      { geometry: 'sersic', effectiveRadius: '0.8', effectiveRadiusError: '-0.1' },
+      { effectiveRadiusError: 'An error of the half-light radius lies between 0 and 600.' },
+    ],
+    [
+      { geometry: 'sersic', effectiveRadius: '0.8', effectiveRadiusError: '0.9' },
+      {
+        effectiveRadiusError: 'An error larger than the size itself leaves no size: call it a point source.',
+      },
+    ],
+    [
+      { effectiveRadiusError: '0.1' },
+      { effectiveRadiusError: 'An error needs the half-light radius it is of.' },
+    ],
     [{ spectrum: 'power-law' }, { spectralIndex: 'A power law needs its index.' }],
     [{ spectrum: 'black-body' }, { temperature: 'A black body needs its temperature.' }],
     [{ spectrum: 'table' }, { spectrumTable: 'Choose the file of the spectrum, or another shape.' }],

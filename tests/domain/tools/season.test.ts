@@ -9,6 +9,7 @@ const asked: SeasonInput = {
   to: '2027-12-31',
   moon: 'any',
   separation: '30',
+  telescope: 'fennel',
 }
 const sentences = (change: Partial<Record<keyof SeasonInput, string>>): Record<string, string> => {
   const result = seasonSchema.safeParse({ ...asked, ...change })
@@ -26,6 +27,7 @@ describe('a season as asked', () => {
 
   it.each<[Partial<Record<keyof SeasonInput, string>>, Record<string, string>]>([
     [{ from: '2027-02-31' }, { from: 'Write a date as 2027-08-01.' }],
+    [{ telescope: 'x'.repeat(41) }, { telescope: 'There is no such telescope.' }],
     [{ from: '1 July' }, { from: 'Write a date as 2027-08-01.' }],
     [
       { from: '1750-01-01', to: '1750-02-01' },

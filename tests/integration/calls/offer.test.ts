@@ -7,6 +7,7 @@ import { testContext } from '../../support/context'
 import { useRolledBackDatabase } from '../../support/database'
 import { refused } from '../../support/refused'
 import { makeScenario, type Scenario } from '../../support/scenario'
+import { makeSecondMode } from '../../support/scenario/secondMode'
 
 // Seen to fail with modes taken off that proposals observe with, and with the read list not compared.
 
@@ -24,12 +25,7 @@ const save = (before: number[], modeIds: number[], ctx = office) =>
 beforeEach(async () => {
   scenario = await makeScenario(db())
   office = testContext(db(), scenario.office)
-  const [id = 0] = await db()('instrument_modes').insert({
-    instrument_id: scenario.instrumentId,
-    slug: `second-${scenario.tag}`,
-    name: 'Blue, 1.0″ slit',
-  })
-  other = id
+  other = await makeSecondMode(db(), scenario)
 })
 
 it('puts a mode on offer and takes it off again, on record', async () => {
@@ -66,7 +62,7 @@ it('leaves on offer what proposals observe with, and one mode at least', async (
 it('offers no mode of another site', async () => {
   const elsewhere = await makeScenario(db())
   expect((await refused(save([scenario.modeId], [scenario.modeId, elsewhere.modeId]))).message).toBe(
-    'One of these modes is not at the site of the call.',
+    'One of these modes is not at the site of the call, or is retired.',
   )
 })
 

@@ -21,7 +21,7 @@ it('writes one version of six saved at the same moment, and shows it to the othe
         slug: `telescope-${scenario.tag}`,
         over: 1,
         validFrom,
-        facts: { apertureM: 3.8, collectingAreaM2 },
+        facts: { apertureM: 3.8, collectingAreaM2, horizon: [], highestAltitudeDeg: null },
       }),
     ),
   )

@@ -1,4 +1,6 @@
 import { describe, expect, it } from 'vitest'
+import { confirmPayment } from '@/lib/domain/fees/confirmPayment'
+import { refundFee } from '@/lib/domain/fees/refundFee'
 import { startPayment } from '@/lib/domain/fees/startPayment'
 import { makeBilled } from '../../support/billed'
 import { deliver, noticeOf } from '../../support/notices'
@@ -29,6 +31,26 @@ describe('at the same moment', () => {
     const effects = await Promise.all(Array.from({ length: 8 }, () => deliver(billed.ctx, notice)))
     expect(effects.filter((effect) => effect.startsWith('fee paid'))).toHaveLength(1)
     expect(await billed.rows()).toMatchObject({ fee: 'paid', receipts: 1 })
+  })
+
+  it('two of the office who give back at once give back once', async () => {
+    const { ctx, as, scenario, payments, open, rows } = await makeBilled(db())
+    payments.pay(await open())
+    await confirmPayment(ctx, { reference: scenario.reference })
+    const give = () =>
+      refundFee(as(scenario.office), {
+        reference: scenario.reference,
+        amount: '50',
+        reason: 'Nothing was observed.',
+        givenBackMinor: 0,
+      })
+    const answers = await Promise.allSettled([give(), give(), give()])
+    expect(answers.filter(({ status }) => status === 'fulfilled')).toHaveLength(1)
+    for (const answer of answers)
+      if (answer.status === 'rejected')
+        expect(String(answer.reason)).toContain('EUR\u00A050.00 stands as given back')
+    expect([...payments.refunds.values()].map(({ amountMinor }) => amountMinor)).toEqual([5_000])
+    expect(await rows()).toMatchObject({ fee: 'paid', refunds: ['succeeded'] })
   })
 
   it('six fees that are paid draw six receipts without a gap', async () => {

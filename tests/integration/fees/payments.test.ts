@@ -122,6 +122,6 @@ describe('withdrawing a paid proposal', () => {
     await withdraw()
     billed.payments.pay(id)
     await reconcilePayments({ ...billed.ctx, actor: null })
-    expect(await billed.rows()).toMatchObject({ fee: 'refunded', receipts: 1, refunds: ['succeeded'] })
+    expect(await billed.rows()).toMatchObject({ fee: 'cancelled', receipts: 1, refunds: ['succeeded'] })
   })
 })

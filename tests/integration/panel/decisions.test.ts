@@ -3,6 +3,7 @@ import { insertAward } from '@/db/queries/decisions'
 import { timeBalance } from '@/db/queries/timeLedger'
 import type { Actor } from '@/lib/domain/actor'
 import { startReview } from '@/lib/domain/assignments/startReview'
+import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { readNights } from '@/lib/domain/decisions/readNights'
@@ -57,6 +58,15 @@ const freeze = async () => {
 const prepare = (who: Actor = call.chair) => prepareDecisions(call.as(who), { panelId: call.panelId })
 const release = (typed = String(call.callNumber), who: Actor = call.chair) =>
   releaseDecisions(call.as(who), { panelId: call.panelId, typed })
+const approve = async (who: Actor = call.deputy) => {
+  const { rows } = await readDecisions(call.as(call.deputy), key())
+  return approveDecisions(call.as(who), {
+    panelId: call.panelId,
+    decisions: rows
+      .filter((row) => row.isPrepared)
+      .map(({ proposalId, version }) => ({ proposalId, version })),
+  })
+}
 const lines = () =>
   db()('award_lines').whereNull('superseded_at').orderBy('id').select('seconds', 'is_reserve')
 
@@ -189,6 +199,8 @@ describe('decisions', () => {
     await freeze()
     await expect(release()).rejects.toMatchObject({ message: /not prepared yet/ })
     await prepare()
+    await expect(release()).rejects.toMatchObject({ message: /second person/ })
+    await approve()
     await expect(release('7')).rejects.toMatchObject({ fieldErrors: { typed: expect.any(String) } })
     expect(await db()('outbox').where({ template: 'decision' })).toEqual([])
   })
@@ -205,6 +217,7 @@ describe('decisions', () => {
       version: rows[0]?.version ?? 0,
       statement: 'Thirty hours suffice for the brighter half of the sample.',
     })
+    await approve()
     expect(await release()).toEqual({ released: 3 })
     const states = await db()('proposals')
       .where({ call_id: call.callId, panel_id: call.panelId })
@@ -233,13 +246,16 @@ describe('decisions', () => {
     await freeze()
     await prepare()
     expect((await readOutcome(call.as(p[0].pi), p[0].reference)).decision).toBeNull()
+    await approve()
     await release()
     const { decision } = await readOutcome(call.as(p[0].pi), p[0].reference)
     expect(decision).toMatchObject({
       outcome: 'awarded',
       lines: [{ seconds: 30 * h, conditions: 'dark time' }],
     })
-    expect(decision?.comments).toHaveLength(3)
+    // The statement holds what all three wrote, word for word: it is not said twice.
+    expect(decision?.statement).toMatch(/^Words for investigators on .* from a careful reading\.$/)
+    expect(decision?.comments).toEqual([])
     const text = JSON.stringify(decision)
     for (const reviewer of call.reviewers) expect(text).not.toContain(reviewer.name)
     expect(text).not.toMatch(/Words for panel|Words for private/)
@@ -273,6 +289,10 @@ it('a chair with an interest meets the proposal in neither nights nor decisions;
   await db()('decisions').where({ proposal_id: p[0].id }).update({ statement: '' })
   await expect(release()).rejects.toMatchObject({ kind: 'closed' })
   await prepare(call.deputy)
+  await expect(release()).rejects.toMatchObject({ message: /second person/ })
+  // The deputy changed all of them last; the office has no interest in any.
+  await expect(approve()).rejects.toMatchObject({ message: /You prepared this decision/ })
+  await approve(call.office)
   expect(await release()).toEqual({ released: 2 })
   expect(await db()('proposals').where({ id: p[0].id }).first('state')).toEqual({ state: 'awarded' })
 })

@@ -11,7 +11,7 @@ import { putAwayDraft } from '@/lib/domain/proposals/putAwayDraft'
 import { readContents } from '@/lib/domain/proposals/readContents'
 import { readProposal } from '@/lib/domain/proposals/readProposal'
 import { parseReference } from '@/lib/domain/proposals/reference'
-import { saveCosmology } from '@/lib/domain/proposals/saveCosmology'
+import { saveCosmology, saveCosmologySchema } from '@/lib/domain/proposals/saveCosmology'
 import { saveQuestion } from '@/lib/domain/proposals/saveQuestion'
 import { takeBackDraft } from '@/lib/domain/proposals/takeBackDraft'
 import { testContext } from '../../support/context'
@@ -157,6 +157,16 @@ describe('the cosmology', () => {
       comparisonId: 'local-ladder',
       parameters: { H0: 69.32, Om0: 0.2865 },
     })
+  })
+
+  // Seen to fail with the choice left out of what the action takes.
+  it('takes massive neutrinos off a matter density said to count them', async () => {
+    const form = { ...(await kept()), choice: 'custom', name: 'Ours', Om0: '0.3', omCounts: 'all' as const }
+    const asSent = saveCosmologySchema.parse({ reference: scenario.reference, version: 1, form })
+    await saveCosmology(as(scenario.pi), asSent)
+    const { parameters } = (await readContents(db(), scenario.reference)).cosmology
+    expect(parameters.Om0).toBeLessThan(0.2999)
+    expect(parameters.Om0).toBeGreaterThan(0.29)
   })
 
   it('may be one’s own, curved and with a true minus', async () => {

@@ -5,6 +5,7 @@ import type { Actor } from '@/lib/domain/actor'
 import type { ActingContext } from '@/lib/domain/context'
 import { addTarget } from '@/lib/domain/targets/addTarget'
 import { importTargets, importTargetsSchema } from '@/lib/domain/targets/importTargets'
+import { readContents } from '@/lib/domain/proposals/readContents'
 import { readTargetFile } from '@/lib/domain/targets/readTargetFile'
 import { removeTarget } from '@/lib/domain/targets/removeTarget'
 import { reorderTargets } from '@/lib/domain/targets/reorderTargets'
@@ -61,6 +62,31 @@ describe('targets of a draft', () => {
     const { id, version } = added
     await saveTarget(ctx, { reference: scenario.reference, id, version, row: row({ magnitude: '20' }) })
     expect(await kept()).toMatchObject({ line: null, magnification: null, brightness: { value: 20 } })
+  })
+
+  it('keep the error of a size with it, and lose it with the size', async () => {
+    const size = { geometry: 'sersic', effectiveRadius: '0.8', effectiveRadiusError: '0.15' } as const
+    const added = await add({ ...size, redshift: '1.678', magnitude: '20' })
+    const kept = async () => (await targets()).find(({ id }) => id === added.id)
+    expect(await kept()).toMatchObject({
+      effectiveRadiusArcsec: 0.8,
+      effectiveRadiusErrorArcsec: 0.15,
+      brightness: { value: 20 },
+    })
+    expect(await db()('target_quantities').where({ target_id: added.id, quantity: 'size' })).toMatchObject([
+      { value: 0.8, error: 0.15, unit: 'arcsec' },
+    ])
+    const save = (over: Partial<TargetRow>, version: number) =>
+      saveTarget(ctx, { reference: scenario.reference, id: added.id, version, row: row(over) })
+    await save({ ...size, effectiveRadius: '0.9' }, added.version)
+    expect(await kept()).toMatchObject({ effectiveRadiusArcsec: 0.9, effectiveRadiusErrorArcsec: 0.15 })
+    const contents = await readContents(db(), scenario.reference)
+    expect(contents.targets.find(({ id }) => id === added.id)).toMatchObject({
+      effectiveRadiusErrorArcsec: 0.15,
+    })
+    await save({}, added.version + 1)
+    expect(await kept()).toMatchObject({ effectiveRadiusArcsec: null, effectiveRadiusErrorArcsec: null })
+    expect(await db()('target_quantities').where({ target_id: added.id, quantity: 'size' })).toEqual([])
   })
 
   it.each([

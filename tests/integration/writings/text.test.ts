@@ -1,9 +1,10 @@
 import { beforeEach, describe, expect, it } from 'vitest'
 import type { Actor } from '@/lib/domain/actor'
 import { packetFor } from '@/lib/domain/packets/packetFor'
+import { computeProposal } from '@/lib/domain/observations/computeProposal'
 import { readPacket } from '@/lib/domain/packets/readPacket'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
-import { readTextChanges } from '@/lib/domain/proposals/history/readTextChanges'
+import { readVersionChanges } from '@/lib/domain/proposals/history/readVersionChanges'
 import { readContents } from '@/lib/domain/proposals/readContents'
 import { removePaper } from '@/lib/domain/papers/removePaper'
 import { findVersion } from '@/db/queries/versions'
@@ -151,7 +152,12 @@ describe('a text sent in the place of a document', () => {
     expect((await writings()).justification.text).toBe(text)
     await save({ text: 'Another text altogether.', version: 1 })
     expect((await findVersion(db(), versionId))?.snapshot.contents.writings.justification.text).toBe(text)
-    const since = await readTextChanges(as(scenario.pi), await readContents(db(), reference), 1)
+    const now = await readContents(db(), reference)
+    const since = await readVersionChanges(
+      as(scenario.pi),
+      { contents: now, computation: computeProposal(now) },
+      1,
+    )
     expect(since).toMatchObject({ from: 1, to: null, parts: [{ part: 'justification' }] })
     const without = (kind: string) =>
       since?.parts[0]?.differences.map((one) => (one.kind === kind ? '' : one.text)).join('')

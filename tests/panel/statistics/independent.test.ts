@@ -69,3 +69,16 @@ it('the chance of standing above the line agrees with 200,000 draws of another g
 it.each(reference.fTails)('P(F > %d) on %d and %d', (f, between, within, expected) => {
   expect(fTail(f ?? NaN, between ?? NaN, within ?? NaN) / (expected ?? NaN)).toBeCloseTo(1, 10)
 })
+
+it('two halves that share no proposal: leniency left in, merits as SciPy has them, and said why', () => {
+  const given = reference.unlinked
+  const model = fitMerit(given.scores)
+  if (!model) throw new Error('nothing was fitted')
+  expect(model.summary.corrected).toBe(false)
+  expect(model.summary.whyNot).toMatch(/share no proposal/)
+  model.summary.merits.forEach((merit, index) => {
+    expect(merit.merit).toBeCloseTo(given.without.merits[index]?.merit ?? NaN, 5)
+    expect(merit.error).toBeCloseTo(given.without.merits[index]?.error ?? NaN, 5)
+  })
+  expect(krippendorffAlpha(given.scores)).toBeCloseTo(given.alpha, 12)
+})

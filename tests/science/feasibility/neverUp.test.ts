@@ -30,6 +30,21 @@ describe('analytic: a target culminates at 90 degrees less the distance of its d
   })
 })
 
+describe('behind what stands around the telescope', () => {
+  const wall = (altitudeDeg: number) => ({ horizons: [[{ azimuthDeg: 0, altitudeDeg }]] })
+
+  // At declination 2 degrees it culminates at 50.6 degrees; airmass 1.8 is reached at 33.6.
+  it('a level wall higher than its culmination hides it in every season, a lower one does not', () => {
+    expect(asked({ pointing: wall(52) })).toEqual({
+      why: 'Climbs to 51° at most, but never above airmass 1.8, clear of the horizon.',
+      fix: 'Accept a larger airmass, or ask for another telescope.',
+    })
+    expect(asked({ pointing: wall(49) }).why).toBe(
+      'Never above airmass 1.8, clear of the horizon, in the dark in this season.',
+    )
+  })
+})
+
 describe('in daylight only', () => {
   // M 87 at 12 h 31 m stands opposite the Sun in late March; Fomalhaut, 22 h 58 m, in early September.
   it.each([

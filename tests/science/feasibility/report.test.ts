@@ -31,7 +31,7 @@ describe('a request that can be done', () => {
       ].map((id) => [id, 'feasible']),
     )
     expect([report.verdict, report.clear, report.refusal]).toEqual(['feasible', 12, null])
-    expect(report.engineVersion).toMatch(/^1\.2\.0 \(cosmology 1\.1\.0, sky 1\.0\.0, exposure 1\.1\.0\)$/)
+    expect(report.engineVersion).toMatch(/^1\.3\.0 \(cosmology 1\.1\.0, sky 1\.1\.0, exposure 1\.1\.0\)$/)
     expect(report.observedFeatureA).toBeCloseTo(5835.2, 1)
   })
 

@@ -55,6 +55,7 @@ export async function makeFacility(db: Database, tag: string): Promise<ScenarioF
     valid_from: '2020-01-01',
     aperture_m: 3.8,
     collecting_area_m2: 10.2,
+    highest_altitude_deg: null,
   })
   const [instrumentId = 0] = await db('instruments').insert({
     telescope_id: telescopeId,

@@ -30,7 +30,7 @@ export default async function OfficePeoplePage() {
         <SectionHeading title="Invite somebody" />
         <p className="mt-2 mb-6 text-muted">
           A letter with a link goes out; the role begins when it is accepted. An address that has an account
-          keeps it.
+          gets the role at once, and a letter that says so.
         </p>
         <InviteForm action={inviteAction} {...choices} />
       </section>

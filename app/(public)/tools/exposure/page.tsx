@@ -6,7 +6,7 @@ import { BarNote } from '@/components/ui/BarNote'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
-import { readCurrentCall } from '@/lib/domain/calls/readCall'
+import { readToolModes } from '@/lib/domain/tools/readToolModes'
 import { bandChoice, magnitudeBands } from '@/lib/domain/targets/bands'
 import { askedOf } from '@/lib/domain/tools/askedOf'
 import { expose, isFarFromBand } from '@/lib/domain/tools/expose'
@@ -47,7 +47,7 @@ export default async function ExposurePage({
 }) {
   const ctx = await openPage('/tools/exposure')
   const { asked, trouble } = askedOf(exposureSchema, usual, await searchParams)
-  const view = await readCurrentCall(ctx)
+  const view = await readToolModes(ctx)
   const mode = view?.modes.find((one) => one.slug === asked.mode) ?? view?.modes[0]
   const answer = view && mode ? expose(asked, mode, view.site) : null
   return (

@@ -7,6 +7,8 @@ import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { readCurrentCall } from '@/lib/domain/calls/readCall'
+import { pointingOf } from '@/lib/domain/facility/rules'
+import { readTelescopes } from '@/lib/domain/facility/readTelescopes'
 import { askedOf } from '@/lib/domain/tools/askedOf'
 import { positionOf } from '@/lib/domain/tools/positionOf'
 import { seasonSchema, type SeasonInput } from '@/lib/domain/tools/schema'
@@ -26,6 +28,7 @@ const usual = (call: { seasonFrom: string; seasonTo: string } | undefined): Seas
   to: call?.seasonTo ?? '2027-12-31',
   moon: 'any',
   separation: '0',
+  telescope: '',
 })
 
 export default async function SeasonPage({
@@ -42,10 +45,14 @@ export default async function SeasonPage({
     minSeparationDeg: numberOf(asked.separation) ?? 0,
   }
   const { from, to } = asked
-  const season = view && seasonView(view.site, { from, to, maxAirmass, moon }, positionOf(asked))
+  const { telescopes } = await readTelescopes(ctx)
+  const here = telescopes.filter(({ site }) => site.siteId === view?.site.siteId)
+  const telescope = here.find(({ slug }) => slug === asked.telescope)?.facts
+  const season = view && seasonView(view.site, { from, to, maxAirmass, moon, telescope }, positionOf(asked))
   const never =
     view && season?.totalHours === 0
       ? whyNeverUp(view.site, asked, {
+          pointing: pointingOf(view.site, telescope),
           maxAirmass,
           isEverDark: season.grid.nights.some(({ night }) => night.darkHours > 0),
           isMoonLimited: asked.moon !== 'any' || moon.minSeparationDeg > 0,
@@ -61,7 +68,7 @@ export default async function SeasonPage({
         </div>
       ) : null}
       <div className="mt-6">
-        <SeasonForm key={JSON.stringify(asked)} asked={asked} />
+        <SeasonForm key={JSON.stringify(asked)} asked={asked} telescopes={here} />
       </div>
       <div className="mt-10">
         {view && season ? (
@@ -71,6 +78,7 @@ export default async function SeasonPage({
             site={view.site}
             view={season}
             maxAirmass={maxAirmass}
+            telescope={telescope}
             never={never}
             fileName="season"
           />

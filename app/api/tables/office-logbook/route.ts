@@ -5,6 +5,6 @@ import { defineRoute } from '@/lib/http/defineRoute'
 export const GET = defineRoute({
   name: 'GET /api/tables/office-logbook',
   query: logbookQuery,
-  run: async (ctx, { query }) =>
-    logbookReply.parse(await readLogbook(ctx, query.before ? Number(query.before) : null)),
+  run: async (ctx, { query: { before, ...filter } }) =>
+    logbookReply.parse(await readLogbook(ctx, before ? Number(before) : null, filter)),
 })

@@ -9,6 +9,11 @@ export const GET = defineRoute({
   limit: { points: 120, seconds: 60 },
   run: async (ctx, { query }) =>
     nightsView.parse(
-      await readNights(ctx, { callSlug: query.call, panelId: query.panel, policy: query.policy }),
+      await readNights(ctx, {
+        callSlug: query.call,
+        panelId: query.panel,
+        policy: query.policy,
+        trial: query.trial,
+      }),
     ),
 })

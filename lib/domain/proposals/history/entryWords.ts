@@ -2,6 +2,7 @@ import { formatHoursFromSeconds, formatList, formatNumber, formatUtcInstant } fr
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
 import { groupWords } from './groupWords'
 import { questionWords } from './questionWords'
+import { targetsWords } from './targetsWords'
 import { writingWords } from './writingWords'
 
 /** What rows are called now, by their keys; null for those that are gone. */
@@ -124,6 +125,7 @@ export const entryWords: Readonly<Record<string, Words>> = {
     if (from === to) return `Changed ${is}`
     return to === null ? `Took ${is} out of ${from}` : `Put ${is} into ${to}`
   },
+  'target.change': targetsWords,
   'target.remove': ({ before }) => `Took ${target(before)} off`,
   'target.restore': ({ after }) => `Brought ${target(after)} back`,
   'target.reorder': () => 'Changed the order of targets',

@@ -12,6 +12,7 @@ export const columnUnits: ReadonlyMap<TargetColumn, string> = new Map<TargetColu
   ['magnitude', 'mag'],
   ['magnitudeError', 'mag'],
   ['effectiveRadius', 'arcsec'],
+  ['effectiveRadiusError', 'arcsec'],
   ['sersicIndex', ''],
   ['spectralIndex', ''],
   ['spectralIndexError', ''],

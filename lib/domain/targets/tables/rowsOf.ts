@@ -80,6 +80,7 @@ function rowOf(cells: Cells, said: Said): TargetRow {
     geometry:
       text('effectiveRadius') === '' ? 'point' : choice(text('geometry'), ['sersic', 'uniform'], 'sersic'),
     effectiveRadius: text('effectiveRadius'),
+    effectiveRadiusError: text('effectiveRadiusError'),
     sersicIndex: text('sersicIndex'),
     ebv: text('ebv'),
     magnification: text('magnification'),

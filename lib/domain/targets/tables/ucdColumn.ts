@@ -11,6 +11,7 @@ const meanings: readonly (readonly [RegExp, TargetColumn])[] = [
   [/^stat\.error;src\.redshift/, 'redshiftError'],
   [/^phot\.mag;em\.(opt\.[ubvri]|ir\.[jhk])\b|^phot_(jhn|sdss)_[ubvrijhkg]$/, 'magnitude'],
   [/^stat\.error;phot\.mag/, 'magnitudeError'],
+  [/^stat\.error;phys\.angsize/, 'effectiveRadiusError'],
   [/^phot\.color\.excess$/, 'ebv'],
   [/^phot\.flux;spect\.line|^spect\.line\.intensity$/, 'lineFlux'],
   [/^stat\.error;(phot\.flux;spect\.line|spect\.line\.intensity)/, 'lineFluxError'],

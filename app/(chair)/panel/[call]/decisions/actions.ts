@@ -1,10 +1,18 @@
 'use server'
 
 import { defineAction } from '@/lib/actions/defineAction'
+import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { releaseDecisions } from '@/lib/domain/decisions/releaseDecisions'
 import { saveStatement } from '@/lib/domain/decisions/saveStatement'
-import { prepareSchema, releaseSchema, statementSchema } from '@/lib/domain/decisions/schema'
+import {
+  approveSchema,
+  prepareSchema,
+  releaseSchema,
+  statementSchema,
+  withholdSchema,
+} from '@/lib/domain/decisions/schema'
+import { withholdComment } from '@/lib/domain/decisions/withholdComment'
 
 export const prepareDecisionsAction = defineAction({
   name: 'prepareDecisions',
@@ -23,4 +31,16 @@ export const releaseDecisionsAction = defineAction({
   schema: releaseSchema,
   run: releaseDecisions,
   limit: { points: 20, seconds: 600 },
+})
+
+export const approveDecisionsAction = defineAction({
+  name: 'approveDecisions',
+  schema: approveSchema,
+  run: approveDecisions,
+})
+
+export const withholdCommentAction = defineAction({
+  name: 'withholdComment',
+  schema: withholdSchema,
+  run: withholdComment,
 })

@@ -5,7 +5,13 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { prepareDecisionsAction, releaseDecisionsAction, saveStatementAction } from './actions'
+import {
+  approveDecisionsAction,
+  prepareDecisionsAction,
+  releaseDecisionsAction,
+  saveStatementAction,
+  withholdCommentAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Decisions' }
 
@@ -19,6 +25,8 @@ export default async function DecisionsPage(props: PanelPageProps) {
         initial={view}
         prepare={prepareDecisionsAction}
         save={saveStatementAction}
+        approve={approveDecisionsAction}
+        withhold={withholdCommentAction}
         release={releaseDecisionsAction}
       />
     </Main>

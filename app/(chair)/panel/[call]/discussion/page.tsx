@@ -1,4 +1,5 @@
 import type { Metadata } from 'next'
+import { TableBar } from '@/components/discussions/TableBar'
 import { Main } from '@/components/layout/Main'
 import { DiscussedProposal } from '@/components/panel/DiscussedProposal'
 import { DiscussionList } from '@/components/panel/DiscussionList'
@@ -9,11 +10,18 @@ import { LinkButton } from '@/components/ui/LinkButton'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
+import { readTable } from '@/lib/domain/discussions/readTable'
 import { readDiscussion } from '@/lib/domain/rankings/readDiscussion'
 import { countInWords } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { saveConsensusAction, setAsideAction } from './actions'
+import {
+  discussNowAction,
+  notePresenceAction,
+  saveConsensusAction,
+  scoreAgainAction,
+  setAsideAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Discussion' }
 
@@ -21,6 +29,7 @@ export default async function DiscussionPage(props: PanelPageProps) {
   const ctx = await openPage('/panel/[call]/discussion')
   const key = await panelKey(props)
   const view = await orNotFound(readDiscussion(ctx, key))
+  const table = await orNotFound(readTable(ctx, key))
   const { proposal: wanted } = await props.searchParams
   const page = paths.panel(key.callSlug, 'discussion', key.panelId)
   const addressOf = (reviewNumber: string) =>
@@ -38,6 +47,15 @@ export default async function DiscussionPage(props: PanelPageProps) {
         lead={`${toDiscuss} to discuss, in the order of the ranking${aside > 0 ? `; ${aside} set aside` : ''}. Reviewers by number.`}
       />
       <SetAsideTail view={view} action={setAsideAction} />
+      {view.ranking.list ? (
+        <TableBar
+          key={table.panelId}
+          initial={table}
+          discuss={discussNowAction}
+          presence={notePresenceAction}
+          scoreAgain={scoreAgainAction}
+        />
+      ) : null}
       {open ? (
         <div className="mt-6 grid gap-x-16 gap-y-10 lg:grid-cols-[20rem_minmax(0,1fr)]">
           <DiscussionList view={view} openId={open.proposalId} addressOf={addressOf} />
@@ -48,6 +66,8 @@ export default async function DiscussionPage(props: PanelPageProps) {
               view={view}
               save={saveConsensusAction}
               setAside={setAsideAction}
+              discuss={discussNowAction}
+              isOnTable={table.proposal?.proposalId === open.proposalId}
             />
             <NextInOrder proposals={view.proposals} openId={open.proposalId} addressOf={addressOf} />
           </div>

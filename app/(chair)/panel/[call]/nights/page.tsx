@@ -3,23 +3,38 @@ import { Main } from '@/components/layout/Main'
 import { NightsBoard } from '@/components/nights/NightsBoard'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
-import { nightsPolicy } from '@/lib/domain/decisions/nightsPolicySchema'
+import { nightsPolicy } from '@/lib/domain/decisions/policyWords'
 import { readNights } from '@/lib/domain/decisions/readNights'
+import { isTried, trialText } from '@/lib/domain/decisions/trialSchema'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { saveAwardAction, takePlanAction } from './actions'
+import { chooseNightsAction, holdHoursAction, saveAwardAction, takePlanAction } from './actions'
 
 export const metadata: Metadata = { title: 'Nights' }
 
+const actions = {
+  save: saveAwardAction,
+  takePlan: takePlanAction,
+  choose: chooseNightsAction,
+  hold: holdHoursAction,
+}
+
 export default async function NightsPage(props: PanelPageProps) {
   const ctx = await openPage('/panel/[call]/nights')
-  const { policy } = await props.searchParams
-  const asked = nightsPolicy.safeParse(policy)
+  const asked = await props.searchParams
+  const policy = nightsPolicy.safeParse(asked.policy)
+  const text = typeof asked.trial === 'string' ? asked.trial : ''
+  const read = trialText.safeParse(text)
+  const trial = read.success && isTried(read.data) ? read.data : undefined
   const view = await orNotFound(
-    readNights(ctx, { ...(await panelKey(props)), policy: asked.success ? asked.data : 'rank' }),
+    readNights(ctx, {
+      ...(await panelKey(props)),
+      policy: policy.success ? policy.data : 'rank',
+      trial,
+    }),
   )
   return (
     <Main>
-      <NightsBoard key={view.panelId} initial={view} save={saveAwardAction} takePlan={takePlanAction} />
+      <NightsBoard key={view.panelId} initial={view} initialTrial={trial ? text : ''} actions={actions} />
     </Main>
   )
 }

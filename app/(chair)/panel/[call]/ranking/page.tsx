@@ -5,7 +5,13 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readRanking } from '@/lib/domain/rankings/readRanking'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { freezeRankingAction, moveInRankingAction, moveLineAction, startRankingAction } from './actions'
+import {
+  freezeRankingAction,
+  moveInRankingAction,
+  moveLineAction,
+  saveFormulaAction,
+  startRankingAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Ranking' }
 
@@ -21,6 +27,7 @@ export default async function RankingPage(props: PanelPageProps) {
           start: startRankingAction,
           move: moveInRankingAction,
           line: moveLineAction,
+          formula: saveFormulaAction,
           freeze: freezeRankingAction,
         }}
       />

@@ -3,13 +3,13 @@ import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
 import { ChangeList } from '@/components/proposals/ChangeList'
 import { SentVersions } from '@/components/proposals/SentVersions'
-import { TextChanges } from '@/components/proposals/TextChanges'
+import { VersionChangesView } from '@/components/proposals/VersionChangesView'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readHistory } from '@/lib/domain/proposals/history/readHistory'
-import { readTextChanges } from '@/lib/domain/proposals/history/readTextChanges'
+import { readVersionChanges, type VersionChanges } from '@/lib/domain/proposals/history/readVersionChanges'
 import { proposalOf } from '../proposalOf'
 
 export const metadata: Metadata = { title: 'History' }
@@ -19,13 +19,16 @@ interface Props {
   searchParams: Promise<{ since?: string }>
 }
 
+const differs = ({ things, parts }: Pick<VersionChanges, 'things' | 'parts'>) =>
+  things.length > 0 || parts.length > 0
+
 export default async function HistoryPage({ params, searchParams }: Props) {
   const ctx = await openPage('/proposals/[reference]/history')
-  const { contents, now } = await orNotFound(proposalOf((await params).reference))
+  const { contents, computation, now } = await orNotFound(proposalOf((await params).reference))
   const { versions, changes } = await readHistory(ctx, contents)
   const { since } = await searchParams
   const asked = /^\d{1,4}$/.test(since ?? '') ? Number(since) : versions[0]?.number
-  const texts = asked === undefined ? null : await readTextChanges(ctx, contents, asked)
+  const went = asked === undefined ? null : await readVersionChanges(ctx, { contents, computation }, asked)
   return (
     <Main>
       <PageTitle title="History" lead="Who changed what, and what was sent. Times are UTC." />
@@ -38,11 +41,20 @@ export default async function HistoryPage({ params, searchParams }: Props) {
             </section>
           }
         >
+          {went && since ? (
+            <div className="mb-10">
+              <VersionChangesView {...went} />
+            </div>
+          ) : null}
           <SectionHeading dense title="Changes" />
           <div className="mt-2">
             <ChangeList changes={changes} now={now} />
           </div>
-          {texts && (texts.parts.length > 0 || since) ? <TextChanges {...texts} /> : null}
+          {went && !since && differs(went) ? (
+            <div className="mt-10">
+              <VersionChangesView {...went} />
+            </div>
+          ) : null}
         </TwoColumns>
       </div>
     </Main>

@@ -5,6 +5,7 @@ import { saveAskedTimes, saveAskedTimesSchema } from '@/lib/domain/observations/
 import { removeGroup, removeGroupSchema } from '@/lib/domain/targetGroups/removeGroup'
 import { saveGroup, saveGroupSchema } from '@/lib/domain/targetGroups/saveGroup'
 import { addTarget, addTargetSchema } from '@/lib/domain/targets/addTarget'
+import { changeTargets, changeTargetsSchema } from '@/lib/domain/targets/changeTargets'
 import { importTargets, importTargetsSchema } from '@/lib/domain/targets/importTargets'
 import { removeTarget, removeTargetSchema } from '@/lib/domain/targets/removeTarget'
 import { reorderTargets, reorderTargetsSchema } from '@/lib/domain/targets/reorderTargets'
@@ -25,6 +26,13 @@ export const saveTargetAction = defineAction({
   name: 'saveTarget',
   schema: saveTargetSchema,
   run: saveTarget,
+  revalidate: page,
+})
+
+export const changeTargetsAction = defineAction({
+  name: 'changeTargets',
+  schema: changeTargetsSchema,
+  run: changeTargets,
   revalidate: page,
 })
 

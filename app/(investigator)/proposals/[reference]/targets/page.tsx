@@ -7,6 +7,7 @@ import { orNotFound } from '@/lib/auth/orNotFound'
 import {
   addTargetAction,
   askTimesAction,
+  changeTargetsAction,
   importTargetsAction,
   removeGroupAction,
   removeTargetAction,
@@ -34,6 +35,7 @@ export default async function TargetsPage({ params }: { params: Promise<{ refere
         actions={{
           add: addTargetAction,
           save: saveTargetAction,
+          change: changeTargetsAction,
           remove: removeTargetAction,
           restore: restoreTargetAction,
           reorder: reorderTargetsAction,

@@ -9,17 +9,21 @@ import { CorrectionForm } from '@/components/office/CorrectionForm'
 import { DatesForm } from '@/components/office/DatesForm'
 import { OfferForm } from '@/components/office/OfferForm'
 import { ProposalsOfCall } from '@/components/office/ProposalsOfCall'
+import { PlanFiles } from '@/components/nights/PlanFiles'
 import { Main } from '@/components/layout/Main'
 import { TwoColumns } from '@/components/layout/TwoColumns'
+import { OutcomeStatistics } from '@/components/statistics/OutcomeStatistics'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
 import { DateLine } from '@/components/ui/DateLine'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
+import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
 import { readOffer } from '@/lib/domain/calls/readOffer'
 import { readOfficeProposals } from '@/lib/domain/calls/readOfficeProposals'
+import { readCallStatistics } from '@/lib/domain/statistics/readCallStatistics'
 import { paths } from '@/lib/paths'
 import {
   closeCallAction,
@@ -37,6 +41,7 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
   const view = await orNotFound(readCall(ctx, slug))
   const proposals = await orNotFound(readOfficeProposals(ctx, slug))
   const modes = await orNotFound(readOffer(ctx, slug))
+  const statistics = await readCallStatistics(ctx, slug)
   const { call, phase } = view
   return (
     <Main>
@@ -55,11 +60,28 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
         <DateLine entries={callDates(call)} now={view.now} label={`Dates of ${call.title}`} />
       </div>
       <section className="mt-10">
-        <SectionHeading title="Proposals" />
+        <SectionHeading
+          title="Proposals"
+          aside={
+            phase === 'ranking' || phase === 'decided' || phase === 'archived' ? (
+              <TextLink href={paths.officeDecisions(slug)}>Decisions, for the second person</TextLink>
+            ) : null
+          }
+        />
         <div className="mt-4">
           <ProposalsOfCall slug={slug} initial={proposals} />
         </div>
+        {phase === 'decided' || phase === 'archived' ? (
+          <div className="mt-4">
+            <PlanFiles hrefOf={(file) => paths.officePlan(slug, file)} />
+          </div>
+        ) : null}
       </section>
+      {statistics ? (
+        <div className="mt-12">
+          <OutcomeStatistics statistics={statistics} slug={slug} />
+        </div>
+      ) : null}
       <section className="mt-12">
         <TwoColumns
           side={

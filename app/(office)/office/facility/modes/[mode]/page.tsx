@@ -18,6 +18,7 @@ export default async function ModeRecordPage({ params }: PageProps<'/office/faci
     <RecordPage
       record={record}
       back={{ label: 'Facility', href: paths.office('facility') }}
+      retirement={paths.retirement('mode', slug)}
       fields={modeFields}
       typed={modeTyped}
     >

@@ -18,6 +18,7 @@ export default async function SiteRecordPage({ params }: PageProps<'/office/faci
     <RecordPage
       record={record}
       back={{ label: 'Facility', href: paths.office('facility') }}
+      retirement={paths.retirement('site', slug)}
       fields={siteFields}
       typed={siteTyped}
     >

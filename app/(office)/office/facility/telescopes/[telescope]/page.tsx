@@ -20,6 +20,7 @@ export default async function TelescopeRecordPage({
     <RecordPage
       record={record}
       back={{ label: 'Facility', href: paths.office('facility') }}
+      retirement={paths.retirement('telescope', slug)}
       fields={telescopeFields}
       typed={telescopeTyped}
     >

@@ -1,0 +1,36 @@
+import { SectionHeading } from '@/components/ui/SectionHeading'
+import type { TableView } from '@/lib/domain/discussions/tableView'
+import { formatHoursFromSeconds, formatUtcClock } from '@/lib/format'
+import type { ScoreAgainAction } from './meetingActions'
+import { ScoreAgain } from './ScoreAgain'
+import { ScoresAtTable } from './ScoresAtTable'
+
+/** The proposal that is discussed now, with the scores as they move. */
+export function OnTable({ view, scoreAgain }: { view: TableView; scoreAgain: ScoreAgainAction }) {
+  const { proposal, own, since } = view
+  if (!proposal) return null
+  return (
+    <article aria-labelledby="on-table" className="min-w-0">
+      <p className="m-0 text-table font-semibold text-lamp">
+        Now discussing{since ? ` since ${formatUtcClock(new Date(since))}` : ''}
+      </p>
+      <h2 id="on-table" className="mt-1 text-h2">
+        {proposal.reviewNumber} {proposal.title}
+      </h2>
+      <p className="mt-1 text-table text-muted">
+        {proposal.lines
+          .map((line) => `${line.instrument} ${formatHoursFromSeconds(line.seconds)}`)
+          .join(', ')}
+      </p>
+      <div className="mt-6 grid gap-x-16 gap-y-8 lg:grid-cols-2">
+        <section>
+          <SectionHeading dense title="Scores" />
+          <div className="mt-3">
+            <ScoresAtTable view={view} />
+          </div>
+        </section>
+        {own ? <ScoreAgain key={own.assignmentId} own={own} save={scoreAgain} /> : null}
+      </div>
+    </article>
+  )
+}

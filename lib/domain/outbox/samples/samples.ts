@@ -1,0 +1,13 @@
+import { accountSamples } from './accountSamples'
+import { feeSamples } from './feeSamples'
+import type { LetterSample } from './letterSample'
+import { panelSamples } from './panelSamples'
+import { proposalSamples } from './proposalSamples'
+
+/** Every letter that can be tried, in the order of a proposal's life. */
+export const letterSamples: readonly LetterSample[] = [
+  ...accountSamples,
+  ...proposalSamples,
+  ...feeSamples,
+  ...panelSamples,
+]

@@ -1,0 +1,37 @@
+import { describe, expect, it } from 'vitest'
+import type { LetterCase } from '@/db/queries/letterCases'
+import { renderLetter } from '@/lib/domain/outbox/renderLetter'
+import { letterSamples } from '@/lib/domain/outbox/samples/samples'
+
+const at = new Date('2027-03-31T22:00:00Z')
+const of: LetterCase = {
+  reference: '4F7-K2M',
+  title: 'Quasars & <lenses>',
+  reviewNumber: '14-083',
+  lead: 'Maren Sollvik',
+  second: 'Odo Pellering',
+  call: { number: 14, title: 'Call 14', slug: 'call-14', closesAt: at, reviewsDueAt: at },
+  chair: 'Gwil Harrowgate',
+  version: { number: 1, arrivedAt: at, sha256: 'a'.repeat(64) },
+  fee: { amountMinor: 12_000, currency: 'EUR', dueAt: at, state: 'due' },
+  receipt: { number: 'QR-2027-0001', amountMinor: 12_000, currency: 'EUR', cardLast4: '4242', paidAt: at },
+  waiver: { reason: 'No funds.', state: 'granted', note: 'As the rules allow.', askedBy: 'Maren Sollvik' },
+  decision: { outcome: 'awarded', lines: [] },
+  question: { instrument: 'EMBER', question: 'Which slit?', answer: 'The wide one.', dueAt: at },
+}
+const facts = { of, clerk: 'Kit Larkmoor', origin: 'https://noctuary.example' }
+
+// Seen to fail: with a sample under another letter's name.
+describe('letters to be tried', () => {
+  it.each(letterSamples)('$template is built under its own name, and its words are escaped', (sample) => {
+    const letter = sample.build(facts)
+    expect(letter?.template).toBe(sample.template)
+    const { html } = renderLetter(letter ?? expect.fail('not built'))
+    expect(html).not.toContain('<lenses>')
+  })
+
+  it('stand once each', () => {
+    const names = letterSamples.map(({ template }) => template)
+    expect(new Set(names).size).toBe(names.length)
+  })
+})
