@@ -97,6 +97,15 @@ export interface CallsRow {
   created_at: Date
 }
 
+export interface CallCorrectionsRow {
+  id: number
+  call_id: number
+  concerns: string
+  body: string
+  made_by: number
+  created_at: Date
+}
+
 export interface CallCriteriaRow {
   id: number
   call_id: number
@@ -120,6 +129,7 @@ export interface CallKindsRow {
   panel_id: number
   word_limit: number
   needs_student: 0 | 1
+  figure_limit: number | null
 }
 
 export interface CallModesRow {
@@ -445,6 +455,7 @@ export interface NightBlocksRow {
   fraction_from: string
   fraction_to: string
   dark_seconds: number
+  note: string
 }
 
 export interface NightChoicesRow {
@@ -539,6 +550,18 @@ export interface PapersRow {
   pages: number
   uploaded_by: number
   superseded_at: Date | null
+  created_at: Date
+}
+
+export interface PaperRepairsRow {
+  id: number
+  proposal_id: number
+  paper_kind: 'justification' | 'team-expertise'
+  reason: string
+  opened_by: number
+  open_until: Date
+  taken_back_at: Date | null
+  version_id: number | null
   created_at: Date
 }
 
@@ -981,13 +1004,20 @@ declare module 'knex/types/tables.js' {
       CallsRow,
       Insert<CallsRow, 'id' | 'stage' | 'currency' | 'version' | 'created_at'>
     >
+    call_corrections: Knex.CompositeTableType<
+      CallCorrectionsRow,
+      Insert<CallCorrectionsRow, 'id' | 'created_at'>
+    >
     call_criteria: Knex.CompositeTableType<
       CallCriteriaRow,
       Insert<CallCriteriaRow, 'id' | 'criterion_version'>
     >
     call_kinds: Knex.CompositeTableType<
       CallKindsRow,
-      Insert<CallKindsRow, 'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student'>
+      Insert<
+        CallKindsRow,
+        'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student' | 'figure_limit'
+      >
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
     conflicts: Knex.CompositeTableType<
@@ -1140,7 +1170,7 @@ declare module 'knex/types/tables.js' {
     money_entries: Knex.CompositeTableType<MoneyEntriesRow, Insert<MoneyEntriesRow, 'id' | 'created_at'>>
     night_blocks: Knex.CompositeTableType<
       NightBlocksRow,
-      Insert<NightBlocksRow, 'id' | 'instrument_id' | 'fraction_from' | 'fraction_to'>
+      Insert<NightBlocksRow, 'id' | 'instrument_id' | 'fraction_from' | 'fraction_to' | 'note'>
     >
     night_choices: Knex.CompositeTableType<
       NightChoicesRow,
@@ -1181,6 +1211,10 @@ declare module 'knex/types/tables.js' {
       Insert<PanelMembersRow, 'id' | 'left_at' | 'created_at' | 'present_at'>
     >
     papers: Knex.CompositeTableType<PapersRow, Insert<PapersRow, 'id' | 'superseded_at' | 'created_at'>>
+    paper_repairs: Knex.CompositeTableType<
+      PaperRepairsRow,
+      Insert<PaperRepairsRow, 'id' | 'taken_back_at' | 'version_id' | 'created_at'>
+    >
     payments: Knex.CompositeTableType<
       PaymentsRow,
       Insert<

@@ -7,6 +7,7 @@ export type ProposalSection =
 export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
+export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
@@ -109,6 +110,9 @@ export const paths = {
     `/office/facility/${kind}/${part(slug)}`,
   officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
+  officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
+  officeProposal: (slug: string, reference: string) =>
+    `/office/calls/${part(slug)}/proposals/${part(reference)}`,
   officeDecisions: (slug: string) => `/office/calls/${part(slug)}/decisions`,
 
   api: {

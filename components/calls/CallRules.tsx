@@ -1,7 +1,9 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { priceWords } from '@/components/fees/priceWords'
 import type { CallCriterion, CallKind, FeeRate } from '@/lib/domain/calls/types'
-import { formatHoursFromSeconds, formatNumber, formatUtc } from '@/lib/format'
+import { formatHoursFromSeconds, formatUtc } from '@/lib/format'
+import { CriteriaList } from './CriteriaList'
+import { limitWords } from './limitWords'
 
 interface CallRulesProps {
   kinds: readonly CallKind[]
@@ -14,7 +16,6 @@ interface CallRulesProps {
 
 /** Kinds of proposal with their limits, and what proposals are judged by. */
 export function CallRules({ kinds, criteria, rates, currency, graceUntil }: CallRulesProps) {
-  const parts = criteria.reduce((sum, criterion) => sum + criterion.weight, 0)
   return (
     <>
       <SectionHeading title="Kinds of proposal" />
@@ -23,7 +24,7 @@ export function CallRules({ kinds, criteria, rates, currency, graceUntil }: Call
           <li key={kind.id} className="border-t border-rule py-3">
             <span className="font-semibold">{kind.title}</span>
             <span className="block text-table text-muted">
-              {formatNumber(kind.wordLimit)} words of justification, or {kind.pageLimit} pages as a PDF
+              {limitWords(kind)}
               {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
               {currency ? `, ${priceWords(kind, rates, currency)}` : ''}
               {kind.closesAt ? `, closes ${formatUtc(kind.closesAt)}` : ''}
@@ -40,22 +41,9 @@ export function CallRules({ kinds, criteria, rates, currency, graceUntil }: Call
       <div className="mt-10">
         <SectionHeading title="What proposals are judged by" />
       </div>
-      <ol className="plain-list mt-3">
-        {criteria.map((criterion) => (
-          <li
-            key={criterion.id}
-            className="flex items-baseline justify-between gap-6 border-t border-rule py-3"
-          >
-            <span>
-              <span className="font-semibold">{criterion.title}</span>
-              <span className="block text-table text-muted">{criterion.prompt}</span>
-            </span>
-            <span className="shrink-0 text-table">
-              counts {criterion.weight} of {parts}
-            </span>
-          </li>
-        ))}
-      </ol>
+      <div className="mt-3">
+        <CriteriaList criteria={criteria} />
+      </div>
       <p className="mt-3 text-table text-muted">
         Scores run from 0 to 10 in halves, 10 best. Reviewers see no names, and nobody reviews where they have
         an interest.

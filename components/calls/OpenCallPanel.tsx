@@ -49,7 +49,11 @@ export function OpenCallPanel({
           </p>
         </>
       ) : (
-        <p className="mt-2 mb-4 text-table text-muted">It closed at {formatUtcInstant(call.closesAt)}.</p>
+        <p className="mt-2 mb-4 text-table text-muted">
+          {phase === 'planned'
+            ? `It opens at ${formatUtcInstant(call.opensAt)}.`
+            : `It closed at ${formatUtcInstant(call.closesAt)}.`}
+        </p>
       )}
       <OfferRows offer={offer} />
       <div className="mt-4 flex flex-wrap gap-3 border-t border-rule pt-4">

@@ -12,7 +12,7 @@ export function joinUtc(date: string, time: string): string {
 
 /** The instant a whole text stands for, or null. */
 export function parseUtc(text: string): Date | null {
-  if (!/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}:\d{2}Z$/.test(text)) return null
+  if (!/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}:\d{2}(\.\d{1,3})?Z$/.test(text)) return null
   const at = new Date(text)
   return Number.isNaN(at.getTime()) || at.toISOString().slice(0, 10) !== text.slice(0, 10) ? null : at
 }

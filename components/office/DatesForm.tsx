@@ -1,22 +1,22 @@
 'use client'
 
-import { useRouter } from 'next/navigation'
 import type { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SubmitButton } from '@/components/forms/SubmitButton'
-import { useActionForm } from '@/components/forms/useActionForm'
+import { TextAreaField } from '@/components/forms/TextAreaField'
 import type { FormAction } from '@/components/forms/actionFormTypes'
-import { showToast } from '@/components/ui/showToast'
 import { saveDatesSchema } from '@/lib/domain/calls/schema'
 import type { Call } from '@/lib/domain/calls/types'
 import { CallDateFields } from './CallDateFields'
-import { useFollowedVersion } from './useFollowedVersion'
+import { useCallForm } from './useCallForm'
 
 type Input = z.input<typeof saveDatesSchema>
 
 interface DatesFormProps {
   call: Call
   utcOffsetHours: number
+  /** Whether a moved deadline is told to those with drafts, and so wants a reason. */
+  isOpen: boolean
   action: FormAction<Input, unknown>
 }
 
@@ -24,14 +24,14 @@ interface DatesFormProps {
 const typed = (at: Date) => at.toISOString()
 
 /** The dates of a call; a deadline that has passed cannot be moved. */
-export function DatesForm({ call, utcOffsetHours, action }: DatesFormProps) {
-  const router = useRouter()
-  const form = useActionForm({
+export function DatesForm({ call, utcOffsetHours, isOpen, action }: DatesFormProps) {
+  const form = useCallForm({
     schema: saveDatesSchema,
     action,
     defaultValues: {
       slug: call.slug,
       version: call.version,
+      why: '',
       opensAt: typed(call.opensAt),
       closesAt: typed(call.closesAt),
       graceUntil: typed(call.graceUntil),
@@ -40,19 +40,22 @@ export function DatesForm({ call, utcOffsetHours, action }: DatesFormProps) {
       panelMeetsAt: typed(call.panelMeetsAt),
       lettersAt: typed(call.lettersAt),
     },
-    onDone: () => {
-      form.form.setValue('version', form.form.getValues('version') + 1)
-      showToast('Dates saved')
-      router.refresh()
-    },
-  })
-  useFollowedVersion(call.version, {
-    getValues: (name) => form.form.getValues(name),
-    setValue: (name, value) => form.form.setValue(name, value),
+    done: 'Dates saved',
+    cleared: { why: '' },
   })
   return (
     <ActionForm form={form}>
       <CallDateFields utcOffsetHours={utcOffsetHours} />
+      {isOpen ? (
+        <TextAreaField
+          name="why"
+          label="Why the deadline moves"
+          help="Only where it does. Everyone with a draft gets one letter, with this in it."
+          optional
+          rows={2}
+          limit={500}
+        />
+      ) : null}
       <div>
         <SubmitButton look="secondary" busyWord="Saving">
           Save the dates

@@ -1,5 +1,7 @@
 'use client'
 
+import { useEffect } from 'react'
+import { useWatch } from 'react-hook-form'
 import type { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
 import { SelectField } from '@/components/forms/SelectField'
@@ -7,6 +9,7 @@ import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
+import type { MovedDates } from '@/lib/domain/calls/movedDates'
 import { planCallSchema } from '@/lib/domain/calls/schema'
 import { CallDateFields } from './CallDateFields'
 
@@ -14,29 +17,38 @@ type Input = z.input<typeof planCallSchema>
 
 interface PlanCallFormProps {
   action: FormAction<Input, { slug: string }>
-  patterns: { value: string; label: string }[]
+  /** Calls to take after, each with its season and dates moved to the season that follows. */
+  patterns: { value: string; label: string; dates: MovedDates }[]
+  utcOffsetHours: number
 }
 
-const empty = {
-  opensAt: '',
-  closesAt: '',
-  graceUntil: '',
-  assessmentsDueAt: '',
-  reviewsDueAt: '',
-  panelMeetsAt: '',
-  lettersAt: '',
-}
-
-/** Season, dates, and the call whose rules are taken over. */
-export function PlanCallForm({ action, patterns }: PlanCallFormProps) {
-  const form = useActionForm({
+/** Season, dates, and the call whose rules are taken over; its dates stand there, moved, until one types others. */
+export function PlanCallForm({ action, patterns, utcOffsetHours }: PlanCallFormProps) {
+  const [first] = patterns
+  const handle = useActionForm({
     schema: planCallSchema,
     action,
-    defaultValues: { from: patterns[0]?.value ?? '', seasonFrom: '', seasonTo: '', ...empty },
+    defaultValues: { from: first?.value ?? '', ...first?.dates },
   })
+  const { control, setValue, formState } = handle.form
+  const { dirtyFields } = formState
+  const from = useWatch({ control, name: 'from' })
+  useEffect(() => {
+    const dates = patterns.find(({ value }) => value === from)?.dates
+    for (const [name, value] of Object.entries(dates ?? {}) as [keyof MovedDates, string][])
+      if (!dirtyFields[name]) setValue(name, value)
+    // Only when another call is chosen: what was typed stays.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [from])
   return (
-    <ActionForm form={form}>
-      <SelectField name="from" label="After the pattern of" options={patterns} width="medium" />
+    <ActionForm form={handle} label="Plan the next call">
+      <SelectField
+        name="from"
+        label="After the pattern of"
+        help="Its dates stand below, moved by whole weeks to the season that follows."
+        options={patterns}
+        width="medium"
+      />
       <div className="grid gap-x-8 gap-y-6 sm:grid-cols-2">
         <TextField
           name="seasonFrom"
@@ -53,7 +65,7 @@ export function PlanCallForm({ action, patterns }: PlanCallFormProps) {
           inputMode="numeric"
         />
       </div>
-      <CallDateFields />
+      <CallDateFields utcOffsetHours={utcOffsetHours} />
       <div>
         <SubmitButton look="secondary" busyWord="Planning">
           Plan this call

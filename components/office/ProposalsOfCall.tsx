@@ -24,7 +24,7 @@ export function ProposalsOfCall({ slug, initial }: ProposalsOfCallProps) {
   return (
     <DataTable
       caption="Proposals of this call"
-      columns={proposalColumns(currency)}
+      columns={proposalColumns(slug, currency)}
       rows={data.rows}
       rowId={(row) => row.reference}
       find="Reference, title or name"

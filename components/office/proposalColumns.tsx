@@ -7,19 +7,16 @@ import { money } from './moneyColumn'
 import { stateWords } from './stateWords'
 
 /** Columns of the office's list of proposals. */
-export const proposalColumns = (currency: string): TableColumn<OfficeProposalRow>[] => [
+export const proposalColumns = (slug: string, currency: string): TableColumn<OfficeProposalRow>[] => [
   {
     id: 'reference',
     head: 'Reference',
     value: (row) => row.reference,
-    cell: (row) =>
-      row.arrivedAt ? (
-        <TextLink href={paths.proposalPacket(row.reference)} plain strong>
-          {row.reference}
-        </TextLink>
-      ) : (
-        <span className="font-semibold">{row.reference}</span>
-      ),
+    cell: (row) => (
+      <TextLink href={paths.officeProposal(slug, row.reference)} plain strong>
+        {row.reference}
+      </TextLink>
+    ),
   },
   { id: 'title', head: 'Title', value: (row) => row.title || 'Untitled' },
   { id: 'lead', head: 'Led by', value: (row) => row.lead },

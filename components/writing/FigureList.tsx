@@ -1,5 +1,5 @@
 import type { Figure } from '@/lib/domain/proposals/types'
-import { maxFigureBytes, maxFigures } from '@/lib/domain/writings/limits'
+import { maxFigureBytes } from '@/lib/domain/writings/limits'
 import { countInWords, formatBytes, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { FigureForm } from './FigureForm'
@@ -8,6 +8,8 @@ import { FigureUpload } from './FigureUpload'
 import type { FigureActions } from './figureActions'
 
 export interface FigureListProps {
+  /** The most figures there may be. */
+  most: number
   reference: string
   figures: readonly Figure[]
   /** Null for those who only look. */
@@ -15,7 +17,7 @@ export interface FigureListProps {
 }
 
 /** Figures in their order, each with its words and the way to put another picture in its place. */
-export function FigureList({ reference, figures, actions }: FigureListProps) {
+export function FigureList({ most, reference, figures, actions }: FigureListProps) {
   return (
     <>
       {figures.length > 0 ? (
@@ -78,13 +80,13 @@ export function FigureList({ reference, figures, actions }: FigureListProps) {
           ))}
         </ol>
       ) : null}
-      {actions && figures.length < maxFigures ? (
+      {actions && figures.length < most ? (
         <div className="max-w-3xl border-t border-rule pt-5">
           <FigureUpload
             reference={reference}
             figureId={null}
             label={figures.length === 0 ? 'A picture' : 'One more picture'}
-            help={`PNG or JPEG of at most ${formatBytes(maxFigureBytes)}; ${countInWords(maxFigures, 'figure')} at most. It is drawn anew: place, camera and other notes in the file are left behind.`}
+            help={`PNG or JPEG of at most ${formatBytes(maxFigureBytes)}; ${countInWords(most, 'figure')} at most. It is drawn anew: place, camera and other notes in the file are left behind.`}
             upload={actions.upload}
           />
         </div>

@@ -7,6 +7,7 @@ import { citationsOf } from '@/lib/writing/citations'
 import { parseText } from '@/lib/writing/parseText'
 import type { ReferenceList } from '@/lib/writing/references'
 import { unknownFigures } from '@/lib/writing/unknownFigures'
+import { figuresAllowed } from '@/lib/domain/writings/limits'
 import { FigureList } from './FigureList'
 import type { FigureActions } from './figureActions'
 import { ReferencesForm } from './ReferencesForm'
@@ -88,7 +89,12 @@ export function Justification({ contents, list, actions }: JustificationProps) {
             </BarNote>
           </div>
         ) : null}
-        <FigureList reference={reference} figures={figures} actions={actions?.figures ?? null} />
+        <FigureList
+          most={figuresAllowed(kind)}
+          reference={reference}
+          figures={figures}
+          actions={actions?.figures ?? null}
+        />
       </section>
       <section className="mb-10">
         <SectionHeading dense title="References" aside="numbered as they are cited" />

@@ -49,6 +49,7 @@ function kindOf(row: CallKindsRow): CallKind {
     pageLimit: row.page_limit,
     wordLimit: row.word_limit,
     abstractLimit: row.abstract_limit,
+    figureLimit: row.figure_limit,
     maxSeconds: row.max_seconds,
     feeMinor: row.fee_minor,
     panelId: row.panel_id,

@@ -121,14 +121,3 @@ export async function proposalsOfCall(db: Database, callId: number): Promise<Off
     waiverReason: row.waiver_reason,
   }))
 }
-
-/** Everybody on a draft of a call that has not been sent, for notices: address and name of those who lead. */
-export function leadsOfDrafts(
-  db: Database,
-  callId: number,
-): Promise<{ person_id: number | null; email: string; name: string; reference: string }[]> {
-  return db('proposals as p')
-    .join('proposal_people as q', 'q.proposal_id', 'p.id')
-    .where({ 'p.call_id': callId, 'p.state': 'draft', 'q.role': 'pi' })
-    .select('q.person_id', 'q.email', 'q.name', 'p.reference')
-}

@@ -44,6 +44,10 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
     [
       'calls',
       'calls/call-14',
+      'calls/call-14/rules',
+      'calls/call-14/nights',
+      'calls/call-13/figures',
+      'calls/call-14/preview',
       'facility',
       'facility/sites/quillon-ridge',
       'facility/telescopes/aldous',

@@ -167,6 +167,7 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
     pageLimit: 4,
     wordLimit: 2000,
     abstractLimit: 1500,
+    figureLimit: null,
     maxSeconds: null,
     feeMinor: 0,
     panelId: 1,

@@ -73,6 +73,7 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       pageLimit: 4,
       wordLimit: 2000,
       abstractLimit: 1200,
+      figureLimit: null,
       maxSeconds: null,
       feeMinor: 12_000,
       panelId: 1,

@@ -1,8 +1,10 @@
 import { moveStage, putUnderReview } from '@/db/queries/assignments'
 import { findCall } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
+import { lastOwnDeadline } from '@/db/queries/ownDeadline'
 import { seatsHeld } from '@/db/queries/panel'
 import { refuse } from '@/lib/errors'
+import { formatUtcInstant } from '@/lib/format'
 import { holds } from '../actor'
 import { callPhase } from '../calls/rules'
 import type { ActingContext } from '../context'
@@ -23,6 +25,11 @@ export function startReview(ctx: ActingContext, input: { callId: number }): Prom
     if (!isOffice && !leads) throw refuse.notFound('call')
     const why = whyNotStartReview(callPhase(call, await databaseNow(tx.db)))
     if (why) throw refuse.closed(why)
+    const until = await lastOwnDeadline(tx.db, call.id)
+    if (until)
+      throw refuse.closed(
+        `A proposal may still be sent until ${formatUtcInstant(until)}. The review starts after that.`,
+      )
     if (!(await moveStage(tx.db, call.id, 'published', 'review')))
       throw refuse.closed('The review of this call has started already.')
     const proposals = await putUnderReview(tx.db, call.id)

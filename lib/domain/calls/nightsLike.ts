@@ -1,9 +1,10 @@
-import type { NightBlock } from '@/db/queries/callChanges'
-import { nightAt, type Site } from '@/lib/science/sky'
+import { darkSeconds, type Site } from '@/lib/science/sky'
+import { eveningsBetween } from './evenings'
+import type { NightBlock } from './nightBlock'
 
 /**
  * The night calendar of a new season after the pattern of an earlier one: the n-th night of a telescope is for what
- * the n-th was then, and its dark time is computed from the real sky.
+ * the n-th was then, part for part, and its dark time is computed from the real sky.
  */
 export function nightsLike(
   pattern: readonly NightBlock[],
@@ -11,17 +12,20 @@ export function nightsLike(
   from: string,
   to: string,
 ): NightBlock[] {
-  const dark = new Map<string, number>()
-  for (let t = Date.parse(from); t <= Date.parse(to); t += 86_400_000) {
-    const date = new Date(t).toISOString().slice(0, 10)
-    dark.set(date, Math.round(nightAt(site, date).darkHours * 3600))
-  }
+  const evenings = eveningsBetween(from, to)
   const telescopes = [...new Set(pattern.map((block) => block.telescopeId))]
   return telescopes.flatMap((telescopeId) => {
     const own = pattern.filter((block) => block.telescopeId === telescopeId)
-    return [...dark].flatMap(([eveningDate, darkSeconds], index) => {
-      const model = own[index % own.length]
-      return model ? [{ ...model, eveningDate, darkSeconds }] : []
+    const nights = [...new Set(own.map((block) => block.eveningDate))].sort()
+    return evenings.flatMap((eveningDate, index) => {
+      const like = nights[index % nights.length]
+      return own
+        .filter((block) => block.eveningDate === like)
+        .map((block) => ({
+          ...block,
+          eveningDate,
+          darkSeconds: darkSeconds({ site, date: eveningDate, from: block.from, to: block.to }),
+        }))
     })
   })
 }

@@ -1,8 +1,9 @@
 import type { z } from 'zod'
-import { copyCallRules, insertCall, insertNightBlocks, nightBlocksOf } from '@/db/queries/callChanges'
+import { copyCallRules, insertCall } from '@/db/queries/callChanges'
 import { findCallBySlug, listCalls } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
 import { siteRecordAt } from '@/db/queries/facility'
+import { insertNightBlocks, nightBlocksOf } from '@/db/queries/nightBlocks'
 import { lockOpenCalls } from '@/db/queries/retirements'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
@@ -27,6 +28,8 @@ export async function planCall(
     await lockOpenCalls(tx.db, await databaseNow(tx.db))
     const [pattern, calls] = await Promise.all([findCallBySlug(tx.db, input.from), listCalls(tx.db)])
     if (!pattern) throw refuse.field('from', 'There is no such call.')
+    if (input.closesAt <= (await databaseNow(tx.db)))
+      throw refuse.field('closesAt', 'The deadline lies in the past. Give one that lies ahead.')
     const number = Math.max(...calls.map((call) => call.number)) + 1
     const slug = `call-${number}`
     const id = await insertCall(tx.db, {

@@ -1,4 +1,5 @@
 import { callCriteria, callKinds, findCallBySlug, listCalls } from '@/db/queries/calls'
+import { correctionsOf } from '@/db/queries/corrections'
 import { databaseNow } from '@/db/queries/clock'
 import { ratesOfCall } from '@/db/queries/feeRates'
 import { modeRecordsOnOffer, siteRecordAt } from '@/db/queries/facility'
@@ -9,7 +10,7 @@ import type { Context } from '../context'
 import type { ModeRecord, SiteRecord } from '../facility/types'
 import { mayReadCall } from './policy'
 import { callPhase } from './rules'
-import type { Call, CallCriterion, CallKind, CallPhase, FeeRate } from './types'
+import type { Call, CallCriterion, CallKind, CallPhase, Correction, FeeRate } from './types'
 
 export interface CallView {
   call: Call
@@ -22,10 +23,11 @@ export interface CallView {
   rates: FeeRate[]
   modes: ModeRecord[]
   offer: TelescopeOffer[]
+  corrections: Correction[]
 }
 
 async function viewOf(ctx: Context, call: Call): Promise<CallView> {
-  const [now, site, kinds, criteria, rates, modes, offer] = await Promise.all([
+  const [now, site, kinds, criteria, rates, modes, offer, corrections] = await Promise.all([
     databaseNow(ctx.db),
     siteRecordAt(ctx.db, call.siteId, call.seasonFrom),
     callKinds(ctx.db, call.id),
@@ -33,8 +35,9 @@ async function viewOf(ctx: Context, call: Call): Promise<CallView> {
     ratesOfCall(ctx.db, call.id),
     modeRecordsOnOffer(ctx.db, call.id, call.seasonFrom),
     offerOfCall(ctx.db, call.id),
+    correctionsOf(ctx.db, call.id),
   ])
-  return { call, phase: callPhase(call, now), now, site, kinds, criteria, rates, modes, offer }
+  return { call, phase: callPhase(call, now), now, site, kinds, criteria, rates, modes, offer, corrections }
 }
 
 /** A call as everyone may read it; one still being planned is the office's alone. */

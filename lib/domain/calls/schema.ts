@@ -1,11 +1,5 @@
 import { z } from 'zod'
-
-/** A moment as the date field gives it: '2027-03-31T22:00:00Z'. */
-const moment = z
-  .string()
-  .refine((text) => text.length > 0, 'Give a date and a time, in UTC.')
-  .refine((text) => text.length === 0 || !Number.isNaN(Date.parse(text)), 'This is not a date we can read.')
-  .transform((text) => new Date(text))
+import { moment } from './moment'
 
 const dateNames = {
   opensAt: 'opening',
@@ -49,7 +43,13 @@ function inOrder(value: Dates, context: z.RefinementCtx): void {
 }
 
 export const saveDatesSchema = z
-  .object({ slug: z.string().min(1).max(60), version: z.number().int().positive(), ...dates })
+  .object({
+    slug: z.string().min(1).max(60),
+    version: z.number().int().positive(),
+    /** Why the deadline moves; wanted where an open call's does. */
+    why: z.string().trim().max(500, 'At most 500 characters.'),
+    ...dates,
+  })
   .superRefine(inOrder)
 
 const evening = z

@@ -25,11 +25,22 @@ export interface CallKind {
   /** Words of a justification written here. */
   wordLimit: number
   abstractLimit: number
+  /** Figures of a justification written here; null for as many as there can be. */
+  figureLimit: number | null
   maxSeconds: number | null
   feeMinor: number
   panelId: number
   /** Must name a student and a supervisor, both of whom have agreed. */
   needsStudent: boolean
+}
+
+export interface CallPanel {
+  id: number
+  name: string
+  /** Members needed to decide. */
+  quorum: number
+  /** Members who sit on it now. */
+  members: number
 }
 
 export interface CallCriterion {
@@ -63,6 +74,15 @@ export interface Season {
   phases: { phase: string; at: Date }[]
   /** Astronomical night in all, hours. */
   darkHours: number
+}
+
+/** A dated correction of a published call. */
+export interface Correction {
+  id: number
+  /** What it corrects, in a few words. */
+  concerns: string
+  body: string
+  at: Date
 }
 
 /** What a call offers on one telescope. */

@@ -15,7 +15,7 @@ import { shownName } from '../papers/shownName'
 import { openForEditing } from '../proposals/openProposal'
 import { figureLabel } from './figureLabel'
 import { inspectPicture } from './inspectPicture'
-import { maxFigures } from './limits'
+import { figuresAllowed } from './limits'
 import type { uploadFigureSchema } from './schema'
 
 export type UploadFigureInput = z.output<typeof uploadFigureSchema>
@@ -32,8 +32,9 @@ async function demandRoom(tx: Context, input: UploadFigureInput) {
   const figures = await figuresOf(tx.db, opened.row.id)
   const standing = figures.find(({ id }) => id === input.figureId) ?? null
   if (input.figureId !== null && !standing) throw refuse.notFound('figure')
-  if (!standing && figures.length >= maxFigures)
-    throw refuse.field('file', `A justification has at most ${countInWords(maxFigures, 'figure')}.`)
+  const most = figuresAllowed(opened.subject.kind)
+  if (!standing && figures.length >= most)
+    throw refuse.field('file', `A justification has at most ${countInWords(most, 'figure')}.`)
   return { ...opened, figures, standing }
 }
 

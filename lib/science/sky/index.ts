@@ -9,6 +9,7 @@ export {
   moonSeparationDeg,
   sunAltitudeDeg,
 } from './instants'
+export { darkSeconds, type DarkSecondsInput } from './darkSeconds'
 export { horizonAltitudeDeg, type HorizonProfile, type HorizonRow } from './horizonProfile'
 export { dateOfMjd, mjdOf } from './mjd'
 export { moonlitSkyV, type MoonlitSky } from './moonlight'

@@ -1,4 +1,5 @@
 import { sharedAlmanac, TURN_DEG_PER_DAY, type Almanac } from './almanac'
+import { darkPart } from './darkPart'
 import { intersect, without, type Interval } from './intervals'
 import { moonTooBright } from './moonLimits'
 import { createNightSky, type NightSky } from './nightSky'
@@ -45,14 +46,6 @@ function cutBySidereal(
   }
 }
 
-/** The part of a night's dark time between two fractions of it. */
-function partOf(dark: readonly Interval[], from: number, to: number): Interval[] {
-  const start = dark[0]?.[0]
-  const end = dark.at(-1)?.[1]
-  if (start === undefined || end === undefined) return []
-  return intersect(dark, [[start + from * (end - start), start + to * (end - start)]])
-}
-
 /** Dark times by class of moonlight: each class is what the ones before it leave. */
 function byMoon(
   almanac: Almanac,
@@ -77,7 +70,7 @@ export function nightPieces(input: NightPiecesInput): NightPiece[] {
   const observer = createObserver(site, almanac)
   return nights.flatMap(({ date, from, to }, night) => {
     const sky = createNightSky(observer, almanac, date)
-    const dark = partOf(sky.darkness(twilightLimitDeg), from, to)
+    const dark = darkPart(sky.darkness(twilightLimitDeg), from, to)
     return byMoon(almanac, sky, dark, moonClasses).flatMap((intervals, moonClass) =>
       intervals.flatMap((interval) =>
         cutBySidereal(observer, interval).map(({ piece: [low, high], siderealFromH }): NightPiece => ({

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import {
+  darkSeconds,
   localSiderealHours,
   moonAltitudeDeg,
   moonIlluminationAt,
@@ -60,5 +61,25 @@ describe('analytic limit or identity: the pieces of a night', () => {
     expect(
       nightPieces({ site: north, nights: [{ date: '2027-06-21', from: 0, to: 1 }], moonClasses }),
     ).toEqual([])
+  })
+})
+
+describe('analytic limit or identity: the dark time of a part of a night', () => {
+  it('is that of the whole night, to the second, and its parts add up to it', () => {
+    for (const date of ['2027-08-20', '2027-12-21']) {
+      const whole = nightAt(ridge, date).darkHours * 3600
+      expect(Math.abs(darkSeconds({ site: ridge, date }) - whole)).toBeLessThanOrEqual(0.5)
+      const parts = [
+        [0, 0.25],
+        [0.25, 0.5],
+        [0.5, 1],
+      ].map(([from, to]) => darkSeconds({ site: ridge, date, from, to }))
+      expect(Math.abs(parts.reduce((sum, part) => sum + part, 0) - whole)).toBeLessThanOrEqual(2)
+      expect(Math.abs((parts[2] ?? 0) - whole / 2)).toBeLessThanOrEqual(1)
+    }
+  })
+
+  it('is none where the Sun does not sink so far', () => {
+    expect(darkSeconds({ site: { ...ridge, latitudeDeg: 60 }, date: '2027-06-21' })).toBe(0)
   })
 })

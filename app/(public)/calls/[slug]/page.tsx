@@ -1,17 +1,8 @@
 import type { Metadata } from 'next'
-import { CallRules } from '@/components/calls/CallRules'
-import { CallSeason } from '@/components/calls/CallSeason'
-import { callDates } from '@/components/calls/callDates'
-import { ModesTable } from '@/components/calls/ModesTable'
-import { OpenCallPanel } from '@/components/calls/OpenCallPanel'
+import { CallBody } from '@/components/calls/CallBody'
 import { seasonWords } from '@/components/calls/seasonWords'
-import { Main } from '@/components/layout/Main'
-import { TwoColumns } from '@/components/layout/TwoColumns'
 import { OutcomeStatistics } from '@/components/statistics/OutcomeStatistics'
 import { Breadcrumb } from '@/components/ui/Breadcrumb'
-import { DateLine } from '@/components/ui/DateLine'
-import { PageTitle } from '@/components/ui/PageTitle'
-import { SectionHeading } from '@/components/ui/SectionHeading'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readCall } from '@/lib/domain/calls/readCall'
@@ -28,61 +19,18 @@ export default async function CallPage({ params }: { params: Promise<{ slug: str
   const { call, site } = view
   const statistics = await readCallStatistics(ctx, slug)
   return (
-    <Main>
-      <Breadcrumb
-        steps={[
-          { label: 'Calls', href: paths.calls() },
-          { label: seasonWords(call.seasonFrom, call.seasonTo) },
-        ]}
-      />
-      <TwoColumns
-        side={
-          <OpenCallPanel
-            call={call}
-            phase={view.phase}
-            offer={view.offer}
-            now={view.now}
-            utcOffsetHours={site.utcOffsetHours}
-            isOwnPage
-          />
-        }
-      >
-        <PageTitle title={call.title} lead={call.summary} display />
-        <div className="mt-10">
-          <CallRules
-            kinds={view.kinds}
-            criteria={view.criteria}
-            rates={view.rates}
-            currency={call.currency}
-            graceUntil={call.graceUntil}
-          />
-        </div>
-      </TwoColumns>
-      {statistics ? (
-        <div className="mt-12">
-          <OutcomeStatistics statistics={statistics} slug={slug} />
-        </div>
-      ) : null}
-      <section className="mt-12">
-        <SectionHeading title="Dates" />
-        <div className="mt-4">
-          <DateLine entries={callDates(call)} now={view.now} label={`Dates of ${call.title}`} />
-        </div>
-      </section>
-      <div className="mt-12">
-        <CallSeason
-          site={site}
-          season={readSeason(site, call.seasonFrom, call.seasonTo)}
-          from={call.seasonFrom}
-          fileName={`nights-${call.slug}`}
+    <CallBody
+      view={view}
+      season={readSeason(site, call.seasonFrom, call.seasonTo)}
+      statistics={statistics ? <OutcomeStatistics statistics={statistics} slug={slug} /> : null}
+      head={
+        <Breadcrumb
+          steps={[
+            { label: 'Calls', href: paths.calls() },
+            { label: seasonWords(call.seasonFrom, call.seasonTo) },
+          ]}
         />
-      </div>
-      <section className="mt-12">
-        <SectionHeading title="Instruments on offer" />
-        <div className="mt-4">
-          <ModesTable modes={view.modes} />
-        </div>
-      </section>
-    </Main>
+      }
+    />
   )
 }

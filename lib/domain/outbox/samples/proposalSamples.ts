@@ -1,9 +1,12 @@
 import { paths } from '@/lib/paths'
+import { callCorrected } from '../letters/callCorrected'
+import { deadlineExtended } from '../letters/deadlineExtended'
 import { deadlineMoved } from '../letters/deadlineMoved'
 import { decisionLetter } from '../letters/decision'
 import { leadOffered } from '../letters/leadOffered'
 import { leadTaken } from '../letters/leadTaken'
 import { namedOnProposal } from '../letters/namedOnProposal'
+import { repairOpened } from '../letters/repairOpened'
 import { proposalSent } from '../letters/proposalSent'
 import { proposalWithdrawn } from '../letters/proposalWithdrawn'
 import { staffQuestion } from '../letters/staffQuestion'
@@ -63,9 +66,53 @@ export const proposalSamples: readonly LetterSample[] = [
     title: 'The deadline moves; to everyone with a draft',
     build: ({ of, origin }) =>
       deadlineMoved(
-        { name: of.lead, reference: of.reference },
-        of.call,
+        { name: of.lead, references: [of.reference] },
+        { ...of.call, why: 'The network of the observatory was down for a day.' },
         origin + paths.proposal(of.reference),
+      ),
+  },
+  {
+    template: 'deadline-extended',
+    title: 'One proposal has a deadline of its own; to everyone named',
+    build: ({ of, origin }) =>
+      deadlineExtended(
+        {
+          name: of.lead,
+          reference: of.reference,
+          call: of.call,
+          closesAt: of.call.closesAt,
+          why: 'The file did not get through.',
+        },
+        origin + paths.proposal(of.reference),
+      ),
+  },
+  {
+    template: 'call-corrected',
+    title: 'The call is corrected; to everyone on a proposal',
+    build: ({ of, origin }) =>
+      callCorrected(
+        {
+          name: of.lead,
+          callNumber: of.call.number,
+          concerns: 'the width of a slit',
+          body: 'It is 1.2 arcsec wide, not 1.0.',
+        },
+        origin + paths.proposal(of.reference),
+      ),
+  },
+  {
+    template: 'repair-opened',
+    title: 'A paper may be replaced; to those who lead',
+    build: ({ of, origin }) =>
+      repairOpened(
+        {
+          name: of.lead,
+          reference: of.reference,
+          kind: 'justification',
+          reason: 'The file of another proposal was sent.',
+          openUntil: of.call.closesAt,
+        },
+        origin + paths.proposalSection(of.reference, 'papers'),
       ),
   },
   {

@@ -1,4 +1,4 @@
-import { formatHoursFromSeconds, formatList, formatNumber } from '@/lib/format'
+import { formatHoursFromSeconds, formatList, formatNumber, formatUtcInstant } from '@/lib/format'
 import { field, namesAt, numberAt, textAt, type EntryValues } from './entryValues'
 import { groupWords } from './groupWords'
 import { questionWords } from './questionWords'
@@ -109,6 +109,13 @@ export const entryWords: Readonly<Record<string, Words>> = {
   'figure.remove': ({ before }) => `Took the figure ${textAt(before, 'label') ?? ''} off`,
   'figure.order': () => 'Changed the order of figures',
   'papers.add': paperWords,
+  'papers.repair': paperWords,
+  'papers.open-repair': ({ after }) =>
+    `Opened ${paperNames[textAt(after, 'kind') ?? ''] ?? 'a document'} for one replacement: ${textAt(after, 'reason') ?? ''}`,
+  'papers.close-repair': ({ before }) =>
+    `Closed ${paperNames[textAt(before, 'kind') ?? ''] ?? 'a document'} again`,
+  'proposal.extend': ({ after }) =>
+    `Gave it a deadline of its own, ${formatUtcInstant(new Date(textAt(after, 'closesAt') ?? 0))}: ${textAt(after, 'why') ?? ''}`,
   'papers.remove': ({ before }) => `Papers: took ${textAt(before, 'fileName') ?? 'a file'} off`,
   'target.add': ({ after }) => `Added ${target(after)}`,
   'target.save': ({ before, after }) => {

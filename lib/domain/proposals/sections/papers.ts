@@ -2,7 +2,7 @@ import { countInWords, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { countWords } from '@/lib/writing/countWords'
 import { parseText } from '@/lib/writing/parseText'
-import { maxTeamWords } from '../../writings/limits'
+import { figuresAllowed, maxTeamWords } from '../../writings/limits'
 import type { ProposalContents } from '../types'
 import type { Finding, Missing } from './finding'
 
@@ -29,6 +29,9 @@ export function papersFinding(contents: ProposalContents): Finding {
         `Shorten the justification by ${countInWords(written - kind.wordLimit, 'word')}.`,
       ),
     )
+  const tooMany = contents.figures.length - figuresAllowed(kind)
+  if (!justification && tooMany > 0)
+    missing.push(lacks('justification', `Take ${countInWords(tooMany, 'figure')} out of the justification.`))
   if (onTeam > maxTeamWords)
     missing.push(
       lacks('team', `Shorten the words on the team by ${countInWords(onTeam - maxTeamWords, 'word')}.`),

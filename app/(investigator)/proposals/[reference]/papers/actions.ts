@@ -2,6 +2,7 @@
 
 import { defineAction } from '@/lib/actions/defineAction'
 import { removePaper } from '@/lib/domain/papers/removePaper'
+import { replacePaper } from '@/lib/domain/papers/replacePaper'
 import { removePaperSchema, uploadPaperSchema } from '@/lib/domain/papers/schema'
 import { uploadPaper } from '@/lib/domain/papers/uploadPaper'
 import { moveFigure } from '@/lib/domain/writings/moveFigure'
@@ -24,6 +25,14 @@ export const uploadPaperAction = defineAction({
   name: 'uploadPaper',
   schema: uploadPaperSchema,
   run: uploadPaper,
+  revalidate: page,
+  limit: { points: 20, seconds: 3600 },
+})
+
+export const replacePaperAction = defineAction({
+  name: 'replacePaper',
+  schema: uploadPaperSchema,
+  run: replacePaper,
   revalidate: page,
   limit: { points: 20, seconds: 3600 },
 })

@@ -3,6 +3,7 @@ import { Main } from '@/components/layout/Main'
 import { PaperSlot } from '@/components/proposals/PaperSlot'
 import { ReadOnlyNote } from '@/components/proposals/ReadOnlyNote'
 import { Recognisable } from '@/components/proposals/Recognisable'
+import { ReplacePaper } from '@/components/proposals/ReplacePaper'
 import { SectionFoot } from '@/components/proposals/SectionFoot'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
@@ -12,6 +13,9 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readGiveaways } from '@/lib/domain/anonymity/readGiveaways'
 import { maxExpertisePages } from '@/lib/domain/papers/limits'
+import { mayReplacePaper } from '@/lib/domain/papers/policy'
+import { isWaiting } from '@/lib/domain/papers/rules'
+import { readRepairs } from '@/lib/domain/papers/readRepairs'
 import { readBibtex } from '@/lib/domain/writings/readBibtex'
 import { markSectionDoneAction } from '../actions'
 import { CarriedHere } from '../CarriedHere'
@@ -20,6 +24,7 @@ import {
   moveFigureAction,
   removeFigureAction,
   removePaperAction,
+  replacePaperAction,
   saveFigureAction,
   saveWritingAction,
   uploadFigureAction,
@@ -37,8 +42,11 @@ const figures = {
 
 export default async function PapersPage({ params }: { params: Promise<{ reference: string }> }) {
   const ctx = await openPage('/proposals/[reference]/papers')
-  const { contents, readOnly } = await orNotFound(proposalOf((await params).reference))
+  const { contents, readOnly, now } = await orNotFound(proposalOf((await params).reference))
   const { reference, papers, kind, writings } = contents
+  const repairs = mayReplacePaper(ctx.actor, contents).allowed
+    ? (await readRepairs(ctx, reference)).filter((repair) => isWaiting(repair, now))
+    : []
   const recognised = await readGiveaways(ctx, contents)
   const paperOf = (which: 'justification' | 'team-expertise') =>
     papers.find((paper) => paper.kind === which) ?? null
@@ -48,6 +56,9 @@ export default async function PapersPage({ params }: { params: Promise<{ referen
       <PageTitle title="Papers" lead="The justification, written here or as a PDF, and who you are." />
       <div className="mt-6">
         <ReadOnlyNote reason={readOnly} />
+        {repairs.map((repair) => (
+          <ReplacePaper key={repair.id} reference={reference} repair={repair} replace={replacePaperAction} />
+        ))}
         <CarriedHere reference={reference} section="papers" />
         <Justification
           contents={contents}

@@ -3,6 +3,8 @@
 import { defineAction } from '@/lib/actions/defineAction'
 import { closeCall } from '@/lib/domain/calls/closeCall'
 import { feeScheduleSchema } from '@/lib/domain/calls/feeScheduleSchema'
+import { correctCall } from '@/lib/domain/calls/correctCall'
+import { correctCallSchema } from '@/lib/domain/calls/correctionSchema'
 import { openCall } from '@/lib/domain/calls/openCall'
 import { saveOfferSchema } from '@/lib/domain/calls/offerSchema'
 import { saveDates } from '@/lib/domain/calls/saveDates'
@@ -30,6 +32,13 @@ export const saveDatesAction = defineAction({
   schema: saveDatesSchema,
   run: saveDates,
   revalidate: (_, { slug }) => paths.officeCall(slug),
+})
+
+export const correctCallAction = defineAction({
+  name: 'correctCall',
+  schema: correctCallSchema,
+  run: correctCall,
+  revalidate: (_, { slug }) => [paths.officeCall(slug), paths.call(slug)],
 })
 
 export const saveOfferAction = defineAction({

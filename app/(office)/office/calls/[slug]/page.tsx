@@ -1,9 +1,11 @@
 import type { Metadata } from 'next'
 import { callDates } from '@/components/calls/callDates'
+import { Corrections } from '@/components/calls/Corrections'
 import { OfferRows } from '@/components/calls/OfferRows'
 import { phaseWords } from '@/components/calls/phaseWords'
 import { seasonWords } from '@/components/calls/seasonWords'
 import { CallSteps } from '@/components/office/CallSteps'
+import { CorrectionForm } from '@/components/office/CorrectionForm'
 import { DatesForm } from '@/components/office/DatesForm'
 import { FeeScheduleForm } from '@/components/office/FeeScheduleForm'
 import { OfferForm } from '@/components/office/OfferForm'
@@ -26,6 +28,7 @@ import { readCallStatistics } from '@/lib/domain/statistics/readCallStatistics'
 import { paths } from '@/lib/paths'
 import {
   closeCallAction,
+  correctCallAction,
   openCallAction,
   saveDatesAction,
   saveFeeScheduleAction,
@@ -94,7 +97,12 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
         >
           <SectionHeading title="Dates" aside="Whoever has a draft is told when the deadline moves." />
           <div className="mt-4">
-            <DatesForm call={call} utcOffsetHours={view.site.utcOffsetHours} action={saveDatesAction} />
+            <DatesForm
+              call={call}
+              utcOffsetHours={view.site.utcOffsetHours}
+              isOpen={phase === 'open'}
+              action={saveDatesAction}
+            />
           </div>
         </TwoColumns>
       </section>
@@ -119,6 +127,30 @@ export default async function OfficeCallPage({ params }: { params: Promise<{ slu
           </div>
         </section>
       ) : null}
+      {call.stage === 'planned' ? null : (
+        <section className="mt-12" id="corrections">
+          <TwoColumns
+            side={
+              <section>
+                <SectionHeading title="Published" dense />
+                {view.corrections.length > 0 ? (
+                  <Corrections corrections={view.corrections} />
+                ) : (
+                  <p className="mt-3 text-table text-muted">Nothing has been corrected.</p>
+                )}
+              </section>
+            }
+          >
+            <SectionHeading
+              title="Correct the call"
+              aside="It is dated, stands on the call’s page and over every draft, and cannot be taken back."
+            />
+            <div className="mt-4">
+              <CorrectionForm call={{ slug, version: call.version }} action={correctCallAction} />
+            </div>
+          </TwoColumns>
+        </section>
+      )}
     </Main>
   )
 }
