@@ -255,6 +255,14 @@ export interface FeesRow {
   created_at: Date
 }
 
+export interface FeeRatesRow {
+  id: number
+  call_kind_id: number
+  affiliation_class: 'member' | 'partner' | 'other'
+  amount_minor: number
+  late_minor: number
+}
+
 export interface FiguresRow {
   id: number
   proposal_id: number
@@ -279,14 +287,6 @@ export interface HeldHoursRow {
   made_by: number
   superseded_at: Date | null
   created_at: Date
-}
-
-export interface FeeRatesRow {
-  id: number
-  call_kind_id: number
-  affiliation_class: 'member' | 'partner' | 'other'
-  amount_minor: number
-  late_minor: number
 }
 
 export interface InstitutesRow {
@@ -502,9 +502,9 @@ export interface OutboxRow {
   last_error: string | null
   sent_at: Date | null
   created_at: Date
+  attachment: string | null
   bulk_letter_id: number | null
   again_of: number | null
-  attachment: string | null
 }
 
 export interface PacketsRow {
@@ -828,8 +828,8 @@ export interface SiteRecordsRow {
   dark_sky_mag_arcsec2: string
   seeing_arcsec: string
   created_at: Date
-  weather: string | null
   horizon: string
+  weather: string | null
 }
 
 export interface StoredObjectsRow {
@@ -1085,6 +1085,7 @@ declare module 'knex/types/tables.js' {
         'id' | 'affiliation_class' | 'late_minor' | 'state' | 'settled_at' | 'version' | 'created_at'
       >
     >
+    fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
     figures: Knex.CompositeTableType<
       FiguresRow,
       Insert<FiguresRow, 'id' | 'removed_at' | 'version' | 'created_at'>
@@ -1093,7 +1094,6 @@ declare module 'knex/types/tables.js' {
       HeldHoursRow,
       Insert<HeldHoursRow, 'id' | 'superseded_at' | 'created_at'>
     >
-    fee_rates: Knex.CompositeTableType<FeeRatesRow, Insert<FeeRatesRow, 'id' | 'late_minor'>>
     institutes: Knex.CompositeTableType<
       InstitutesRow,
       Insert<InstitutesRow, 'id' | 'country' | 'affiliation_class' | 'created_at'>
@@ -1193,9 +1193,9 @@ declare module 'knex/types/tables.js' {
         | 'last_error'
         | 'sent_at'
         | 'created_at'
+        | 'attachment'
         | 'bulk_letter_id'
         | 'again_of'
-        | 'attachment'
       >
     >
     packets: Knex.CompositeTableType<PacketsRow, Insert<PacketsRow, 'id' | 'superseded_at' | 'created_at'>>
@@ -1365,7 +1365,7 @@ declare module 'knex/types/tables.js' {
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<
       SiteRecordsRow,
-      Insert<SiteRecordsRow, 'id' | 'created_at' | 'weather' | 'horizon'>
+      Insert<SiteRecordsRow, 'id' | 'created_at' | 'horizon' | 'weather'>
     >
     stored_objects: Knex.CompositeTableType<StoredObjectsRow, Insert<StoredObjectsRow, 'id' | 'created_at'>>
     targets: Knex.CompositeTableType<

@@ -1,5 +1,5 @@
 import type { Actor, Role } from '../domain/actor'
-import type { Who } from './access'
+import type { Who } from './who'
 
 /** Whether a person passes a row of the access matrix. */
 export function mayKnock(who: Who, actor: Actor | null): boolean {

@@ -1,4 +1,5 @@
-import { access, type Who } from '../../lib/auth/access'
+import { access } from '../../lib/auth/access'
+import type { Who } from '../../lib/auth/who'
 import { expect, test, password } from './support/test'
 
 // Over HTTP: every page, for every role, allowed or refused as the access matrix says.

@@ -1,7 +1,6 @@
 import { feeOf } from '@/db/queries/fees'
 import type { ActingContext } from '../context'
 import { readGiveaways } from '../anonymity/readGiveaways'
-import { feeFor } from '../fees/feeFor'
 import { everythingMissing } from '../proposals/completeness'
 import { maySendProposal } from '../proposals/policy'
 import type { ReadProposal } from '../proposals/readProposal'
