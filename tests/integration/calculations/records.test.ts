@@ -91,10 +91,14 @@ describe('observability', () => {
     expect(new Set(found.rows.map(({ facility }) => facility))).toEqual(
       new Set([`Telescope ${scenario.tag}`]),
     )
-    await db()('telescopes').insert({
+    const [second = 0] = await db()('telescopes').insert({
       site_id: scenario.siteId,
       slug: `b-${scenario.tag}`,
       name: `B ${scenario.tag}`,
+    })
+    await db()('telescope_records').insert({
+      ...{ telescope_id: second, record_version: 1, valid_from: '2020-01-01' },
+      ...{ aperture_m: 3.8, collecting_area_m2: 10.2, highest_altitude_deg: null },
     })
     const both = await findObservability(
       ctx,

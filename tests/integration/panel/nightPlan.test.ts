@@ -61,7 +61,8 @@ describe('the plan of what is given', () => {
     const rows = csvRows(planCsv(await plan()))
     expect(rows.reduce((sum, row) => sum + Number(row['Hours']), 0)).toBeCloseTo(70, 2)
     expect((await office()).parts).toEqual([])
-    await db()('decisions').update({ released_at: new Date() })
+    await db()('decisions').update({ approved_by: call.office.personId, approved_at: new Date() })
+    await db().raw('UPDATE decisions SET approved_version = version - 1, released_at = NOW(3)')
     const known = (await office()).parts
     expect(known.map(({ number }) => number)).toEqual(call.proposals.map(({ reference }) => reference))
     const text = planCsv(await office())
