@@ -1,11 +1,11 @@
 'use client'
 
-import { useState } from 'react'
 import type { z } from 'zod'
 import { ActionForm } from '@/components/forms/ActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { CheckboxField } from '@/components/forms/CheckboxField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
+import { TakeInFile } from '@/components/forms/TakeInFile'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { useCallForm } from '@/components/office/useCallForm'
 import { saveText } from '@/components/tables/saveText'
@@ -22,11 +22,8 @@ interface CalendarFileProps {
   action: FormAction<z.input<typeof importNightsSchema>, { nights: number }>
 }
 
-const largestBytes = 2_000_000
-
 /** The whole calendar as a file, and nights taken from one: chosen, or pasted. */
 export function CalendarFile({ calendar: { call, telescopes }, action }: CalendarFileProps) {
-  const [trouble, setTrouble] = useState<string | null>(null)
   const handle = useCallForm({
     schema: importNightsSchema,
     action,
@@ -35,11 +32,6 @@ export function CalendarFile({ calendar: { call, telescopes }, action }: Calenda
     cleared: { text: '', mayTakePromised: false },
     onDone: ({ nights }) => showToast(`${countInWords(nights, 'night is', 'nights are', true)} set`),
   })
-  const take = async (file: File | undefined) => {
-    if (!file) return
-    setTrouble(file.size > largestBytes ? `${file.name} is larger than 2 MB.` : null)
-    if (file.size <= largestBytes) handle.form.setValue('text', decodeText(await file.arrayBuffer()))
-  }
   return (
     <ActionForm form={handle} label="The calendar as a file">
       <p className="m-0 max-w-prose text-table">
@@ -49,21 +41,17 @@ export function CalendarFile({ calendar: { call, telescopes }, action }: Calenda
         has a line for each part of each night: telescope, evening, from, to, use, instrument, note. Change it
         and give it back. Nights it names become what it says; others stay.
       </p>
-      <label className="block max-w-md text-table">
-        <span className="block text-body font-semibold">A file</span>
-        <input
-          type="file"
-          accept=".csv,.txt,text/csv"
-          className="mt-1 block w-full"
-          onChange={(event) => void take(event.target.files?.[0])}
+      <div>
+        <TextAreaField name="text" label="Its lines" help="Paste them, or take them from a file." rows={6} />
+        <TakeInFile
+          words="Take in a CSV file"
+          label="Take lines in from a file"
+          note="Nothing is set before you have seen it above."
+          endings={['.csv', '.txt']}
+          largestBytes={2_000_000}
+          onFile={async (file) => handle.form.setValue('text', decodeText(await file.arrayBuffer()))}
         />
-        {trouble ? (
-          <span role="alert" className="mt-1 block font-semibold text-not-feasible">
-            {trouble}
-          </span>
-        ) : null}
-      </label>
-      <TextAreaField name="text" label="Its lines" help="Or paste them here." rows={6} />
+      </div>
       <CheckboxField
         name="mayTakePromised"
         label="Promised time may be taken"

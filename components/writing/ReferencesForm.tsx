@@ -2,12 +2,12 @@
 
 import { ActionForm } from '@/components/forms/ActionForm'
 import { KeptCopyNotice } from '@/components/forms/KeptCopyNotice'
+import { TakeInFile } from '@/components/forms/TakeInFile'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { StaleChoice } from '@/components/proposals/StaleChoice'
 import { useAutosavedForm } from '@/components/proposals/useAutosavedForm'
 import type { Writing } from '@/lib/domain/proposals/types'
 import { writingSchema } from '@/lib/domain/writings/schema'
-import { TakeInFile } from './TakeInFile'
 import type { SaveWriting } from './TextForm'
 
 export interface ReferencesFormProps {
@@ -53,7 +53,14 @@ export function ReferencesForm({ reference, kept, save }: ReferencesFormProps) {
           rows={8}
           spellCheck={false}
         />
-        <TakeInFile endings={['.bib', '.txt']} onText={takeIn} />
+        <TakeInFile
+          words="Take in a .bib file"
+          label="Take entries in from a file"
+          note="It is put below what stands there."
+          endings={['.bib', '.txt']}
+          largestBytes={90_000}
+          onFile={async (file) => takeIn((await file.text()).replace(/^\ufeff/, ''))}
+        />
       </div>
     </ActionForm>
   )

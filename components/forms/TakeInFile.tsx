@@ -1,26 +1,31 @@
 'use client'
 
 import { useRef, useState } from 'react'
-import { fileProblem } from '@/components/forms/fileProblem'
 import { Button } from '@/components/ui/Button'
+import { fileProblem } from './fileProblem'
 
 export interface TakeInFileProps {
+  /** What the button says. */
+  words: string
+  /** What is chosen, for those who hear the page. */
+  label: string
+  /** What becomes of it, beside the button. */
+  note: string
   /** Endings with their dot, lower case. */
   endings: readonly string[]
-  onText: (text: string) => void
+  largestBytes: number
+  onFile: (file: File) => Promise<void>
 }
 
-const largestBytes = 90_000
-
-/** Reads a text file in the browser and puts what it says below what is typed. */
-export function TakeInFile({ endings, onText }: TakeInFileProps) {
+/** A text file read in the browser, its contents put where they can be looked at. */
+export function TakeInFile({ words, label, note, endings, largestBytes, onFile }: TakeInFileProps) {
   const input = useRef<HTMLInputElement>(null)
   const [problem, setProblem] = useState<string | null>(null)
   const take = async (file: File | undefined) => {
     if (!file) return
     const wrong = fileProblem(file, { endings, maxBytes: largestBytes })
     setProblem(wrong)
-    if (!wrong) onText((await file.text()).replace(/^\ufeff/, ''))
+    if (!wrong) await onFile(file)
   }
   return (
     <div className="mt-2 flex flex-wrap items-center gap-3 text-table">
@@ -28,7 +33,7 @@ export function TakeInFile({ endings, onText }: TakeInFileProps) {
         ref={input}
         type="file"
         accept={endings.join(',')}
-        aria-label="Take entries in from a file"
+        aria-label={label}
         className="sr-only"
         tabIndex={-1}
         onChange={(event) => {
@@ -37,14 +42,14 @@ export function TakeInFile({ endings, onText }: TakeInFileProps) {
         }}
       />
       <Button look="secondary" size="small" onClick={() => input.current?.click()}>
-        Take in a .bib file
+        {words}
       </Button>
       {problem ? (
         <p role="alert" className="m-0 font-semibold text-not-feasible">
           {problem}
         </p>
       ) : (
-        <span className="text-muted">It is put below what stands there.</span>
+        <span className="text-muted">{note}</span>
       )}
     </div>
   )
