@@ -4,6 +4,7 @@ import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import { limitWords } from '@/components/calls/limitWords'
 import type { FormAction } from '@/components/forms/actionFormTypes'
+import { noteOwnSave } from '@/components/office/ownSaves'
 import { useDeed } from '@/components/proposals/useDeed'
 import { Button } from '@/components/ui/Button'
 import type { ActionResult } from '@/lib/actions/result'
@@ -47,6 +48,7 @@ export function KindList({ view, mayChange, save, remove }: KindListProps) {
   const take = (kind: Kind) =>
     run(async () => {
       const answer = await remove({ slug: call.slug, version: call.version, kindId: kind.id })
+      if (answer.ok) noteOwnSave(call.slug, call.version + 1)
       router.refresh()
       return answer
     }, `${kind.title} is off this call`)

@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import type { FormAction } from '@/components/forms/actionFormTypes'
+import { noteOwnSave } from '@/components/office/ownSaves'
 import { useDeed } from '@/components/proposals/useDeed'
 import { Button } from '@/components/ui/Button'
 import type { ActionResult } from '@/lib/actions/result'
@@ -35,6 +36,7 @@ export function PanelList({ view: { call, panels }, mayChange, save, remove }: P
   const take = (panel: CallPanel) =>
     run(async () => {
       const answer = await remove({ slug: call.slug, version: call.version, panelId: panel.id })
+      if (answer.ok) noteOwnSave(call.slug, call.version + 1)
       router.refresh()
       return answer
     }, `${panel.name} is off this call`)

@@ -7,6 +7,7 @@ import { showToast } from '@/components/ui/showToast'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import type { Call, CallPhase } from '@/lib/domain/calls/types'
 import { paths } from '@/lib/paths'
+import { noteOwnSave } from './ownSaves'
 
 type Step = FormAction<{ slug: string; version: number }, unknown>
 
@@ -23,6 +24,7 @@ export function CallSteps({ call, phase, open, close }: CallStepsProps) {
   const take = async (step: Step, done: string): Promise<string | null> => {
     const answer = await step({ slug: call.slug, version: call.version })
     if (!answer.ok) return Object.values(answer.fieldErrors)[0] ?? answer.message
+    noteOwnSave(call.slug, call.version + 1)
     showToast(done)
     router.refresh()
     return null

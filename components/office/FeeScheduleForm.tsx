@@ -1,16 +1,13 @@
 'use client'
 
-import { useRouter } from 'next/navigation'
 import { ActionForm } from '@/components/forms/ActionForm'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
-import { useActionForm } from '@/components/forms/useActionForm'
-import { showToast } from '@/components/ui/showToast'
 import { feeScheduleSchema, type FeeScheduleForm as Form } from '@/lib/domain/calls/feeScheduleSchema'
 import type { Call, CallKind, FeeRate } from '@/lib/domain/calls/types'
 import { typedFees } from './typedFees'
-import { useFollowedVersion } from './useFollowedVersion'
+import { useCallForm } from './useCallForm'
 
 interface FeeScheduleFormProps {
   call: Pick<Call, 'slug' | 'version' | 'currency'>
@@ -28,8 +25,7 @@ const columns = [
 
 /** What a call costs: a row a kind of proposal, a column a class of institute, and what sending late adds. */
 export function FeeScheduleForm({ call, kinds, rates, action }: FeeScheduleFormProps) {
-  const router = useRouter()
-  const handle = useActionForm({
+  const handle = useCallForm({
     schema: feeScheduleSchema,
     action,
     defaultValues: {
@@ -38,15 +34,7 @@ export function FeeScheduleForm({ call, kinds, rates, action }: FeeScheduleFormP
       currency: call.currency ?? '',
       kinds: kinds.map((kind) => typedFees(kind, rates, call.currency)),
     },
-    onDone: () => {
-      handle.form.setValue('version', handle.form.getValues('version') + 1)
-      showToast('Fees saved')
-      router.refresh()
-    },
-  })
-  useFollowedVersion(call.version, {
-    getValues: (name) => handle.form.getValues(name),
-    setValue: (name, value) => handle.form.setValue(name, value),
+    done: 'Fees saved',
   })
   return (
     <ActionForm form={handle} label="Fees of the call">

@@ -6,8 +6,9 @@ import type { FieldValues, Path, PathValue } from 'react-hook-form'
 import type { ActionFormHandle } from '@/components/forms/actionFormTypes'
 import { useActionForm, type ActionFormOptions } from '@/components/forms/useActionForm'
 import { showToast } from '@/components/ui/showToast'
+import { followOwnSaves, noteOwnSave } from './ownSaves'
 
-type Versioned = FieldValues & { version: number }
+type Versioned = FieldValues & { slug: string; version: number }
 
 interface CallFormOptions<Input extends Versioned, Output, Data> extends Omit<
   ActionFormOptions<Input, Output, Data>,
@@ -20,8 +21,9 @@ interface CallFormOptions<Input extends Versioned, Output, Data> extends Omit<
 }
 
 /**
- * A form about a call. When a colleague saved first, the page is shown as it is now, what was typed stays, and the
- * next press saves over what is seen.
+ * A form about a call, one of several on a page. It goes along with what another form of this window saved; a version
+ * that a colleague made is met when one saves: the page is shown as it is now, what was typed stays, and the next press
+ * of this form saves over what is seen.
  */
 export function useCallForm<Input extends Versioned, Output, Data>({
   done,
@@ -30,29 +32,35 @@ export function useCallForm<Input extends Versioned, Output, Data>({
   ...options
 }: CallFormOptions<Input, Output, Data>): ActionFormHandle<Input, Output> {
   const router = useRouter()
-  const version = 'version' as Path<Input>
   const handle = useActionForm<Input, Output, Data>({
     ...options,
     onDone: (data) => {
-      const { form } = handle
-      for (const [name, value] of Object.entries(cleared))
-        form.setValue(name as Path<Input>, value as PathValue<Input, Path<Input>>)
-      form.setValue(version, (form.getValues('version' as Path<Input>) + 1) as PathValue<Input, Path<Input>>)
+      const next = versionOf() + 1
+      for (const [name, value] of Object.entries(cleared)) set(name as Path<Input>, value)
+      set('version' as Path<Input>, next)
+      noteOwnSave(slugOf(), next)
       showToast(done)
       onDone?.(data)
       router.refresh()
     },
     onStale: (stale) => {
-      handle.form.setValue(version, stale.version as PathValue<Input, Path<Input>>)
+      set('version' as Path<Input>, stale.version)
       showToast('The page shows what your colleague saved. Save again to keep yours.')
       router.refresh()
     },
   })
-  const given = options.defaultValues.version as number | undefined
-  const { setValue } = handle.form
+  const { form } = handle
+  const set = (name: Path<Input>, value: unknown) =>
+    form.setValue(name, value as PathValue<Input, Path<Input>>)
+  const versionOf = () => Number(form.getValues('version' as Path<Input>))
+  const slugOf = () => String(form.getValues('slug' as Path<Input>))
+  const shown = options.defaultValues.version as number | undefined
   useEffect(() => {
-    // Another form on the page has saved: this one is about the call as it is shown now.
-    if (given !== undefined) setValue(version, given as PathValue<Input, Path<Input>>)
-  }, [given, setValue, version])
+    const followed = followOwnSaves(
+      String(form.getValues('slug' as Path<Input>)),
+      Number(form.getValues('version' as Path<Input>)),
+    )
+    form.setValue('version' as Path<Input>, followed as PathValue<Input, Path<Input>>)
+  }, [shown, form])
   return handle
 }
