@@ -1,9 +1,5 @@
 import { NextResponse, type NextRequest } from 'next/server'
-
-/** Letters looked at in a frame of ours: nothing in them runs or loads, and they are no pages of ours. */
-const lockedIn = /^\/office\/mail\/.+\/html$/
-const letterPolicy =
-  "sandbox; default-src 'none'; style-src 'unsafe-inline'; base-uri 'none'; form-action 'none'; frame-ancestors 'self'"
+import { filePolicy } from '@/lib/http/filePolicy'
 
 /**
  * Headers for every page: a fresh nonce for the content policy, a request id, the address of the connection
@@ -27,7 +23,7 @@ export function proxy(request: NextRequest): NextResponse {
     "worker-src 'self'",
     "frame-ancestors 'self'",
   ].join('; ')
-  const policy = lockedIn.test(request.nextUrl.pathname) ? letterPolicy : page
+  const policy = filePolicy(request.nextUrl.pathname) ?? page
 
   const forwarded = new Headers(request.headers)
   forwarded.set('x-nonce', nonce)

@@ -5,7 +5,6 @@ export function pdfResponse({ bytes, fileName }: { bytes: Uint8Array; fileName: 
       'content-type': 'application/pdf',
       'content-length': String(bytes.byteLength),
       'content-disposition': `attachment; filename="${fileName.replace(/[^A-Za-z0-9._-]/g, '-')}"`,
-      'content-security-policy': "sandbox; default-src 'none'",
       'cache-control': 'private, no-store',
     },
   })

@@ -10,7 +10,6 @@ export function pictureResponse({
     headers: {
       'content-type': contentType,
       'content-length': String(bytes.byteLength),
-      'content-security-policy': "sandbox; default-src 'none'",
       'cache-control': 'private, no-cache',
     },
   })

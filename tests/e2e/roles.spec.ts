@@ -119,3 +119,13 @@ test('answers carry the headers that keep a browser safe', async ({ request }) =
   expect(headers['strict-transport-security']).toContain('max-age=31536000')
   expect(headers['x-powered-by']).toBeUndefined()
 })
+
+test('a file carries a policy under which nothing in it runs', async ({ page, signIn }) => {
+  await signIn('ilse@tarnhead.example')
+  const own = (await (await page.request.get('/api/tables/proposals')).json()) as {
+    rows: { reference: string }[]
+  }
+  const reply = await page.request.get(`/proposals/${own.rows[0]?.reference}/packet`)
+  expect(reply.headers()['content-type']).toBe('application/pdf')
+  expect(reply.headers()['content-security-policy']).toContain("default-src 'none'")
+})
