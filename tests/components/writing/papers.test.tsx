@@ -10,7 +10,7 @@ import { ReferencesRead } from '@/components/writing/ReferencesRead'
 import type { SaveWriting } from '@/components/writing/TextForm'
 
 // jsdom's files cannot be read, and its buffers are none to Node's digest.
-vi.mock('@/components/proposals/fingerprint', () => ({ fingerprint: async () => 'a'.repeat(64) }))
+vi.mock('@/components/forms/fingerprint', () => ({ fingerprint: async () => 'a'.repeat(64) }))
 
 const saved = { ok: true as const, data: { version: 1, savedAt: '2026-12-01T00:00:00.000Z' } }
 
