@@ -42,6 +42,8 @@ export function convertUnit(value: number, words: string, wanted: string): numbe
       (power) => `^${power.replace('⁻', '-').replace(/[¹²³]/, (digit) => String('¹²³'.indexOf(digit) + 1))}`,
     )
     .replace(/[⁻−]/g, '-')
+    // Powers as FITS and VOUnits allow them: arcmin2, Mpc-3.
+    .replace(/([A-Za-z])(-?[1-9])(?=$|[ */)])/g, '$1^$2')
   if (spelled.length > MOST_CHARACTERS || !UNIT_WORDS.test(spelled)) return null
   let typed: Unit
   try {

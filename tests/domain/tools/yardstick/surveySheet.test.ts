@@ -21,6 +21,8 @@ describe('what is asked of a survey', () => {
     ['1.5', 1.5],
     ['5400 arcmin^2', 1.5],
     ['5400 arcmin²', 1.5],
+    ['5400 arcmin2', 1.5],
+    ['1.5 deg2', 1.5],
   ])('%s is %s square degrees', (area, deg2) => {
     expect(asked({ area }).areaDeg2).toBeCloseTo(deg2, 12)
   })
