@@ -1,17 +1,4 @@
-const months = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-]
+import { monthNames } from './monthNames'
 
 export interface UtcParts {
   year: number
@@ -29,7 +16,7 @@ export function utcParts(at: Date, offsetHours = 0): UtcParts {
   const shifted = new Date(at.getTime() + offsetHours * 3_600_000)
   return {
     year: shifted.getUTCFullYear(),
-    month: months[shifted.getUTCMonth()] ?? '',
+    month: monthNames[shifted.getUTCMonth()] ?? '',
     day: shifted.getUTCDate(),
     hour: two(shifted.getUTCHours()),
     minute: two(shifted.getUTCMinutes()),

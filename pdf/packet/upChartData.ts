@@ -1,24 +1,10 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
-import { formatHours, formatNumber } from '@/lib/format'
+import { formatHours, formatNumber, monthNames } from '@/lib/format'
 import { limitWords } from '@/lib/science/feasibility'
 import { moonPhases } from '@/lib/science/sky'
 import type { UpChartData, UpRow } from './packetTypes'
 
 const day = 24 * 3600_000
-const monthNames = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-]
 
 /** Hours a night of each target that has a position; null when none has. */
 export function upChartData(proposal: AnonymousProposal): UpChartData | null {

@@ -1,36 +1,13 @@
 import { describe, expect, it } from 'vitest'
-import type { BinnedLine, BinnedPart, NightBin } from '@/lib/panel/nights/binTypes'
+import type { BinnedLine } from '@/lib/panel/nights/binTypes'
 import { byRankInBins } from '@/lib/panel/nights/byRankInBins'
 import { mostMeritInBins, type MeritInput } from '@/lib/panel/nights/mostMeritInBins'
 import { seededUniform } from '@/lib/panel/random'
 import { solveInWorker } from '@/lib/services/solver/solveInWorker'
+import { bin, line, part } from '../support/binnedLines'
 
 const h = 3600
 const limits = { seconds: 20, relativeGap: 1e-6 }
-const bin = (hours: number): NightBin => ({
-  telescope: 1,
-  half: 0,
-  siderealFromH: 0,
-  moon: 'dark',
-  seconds: hours * h,
-})
-const part = (hours: number, usable: Record<number, number>): BinnedPart => ({
-  seconds: hours * h,
-  usable: new Map(Object.entries(usable).map(([at, can]) => [Number(at), can * h])),
-})
-const line = (proposal: number, parts: BinnedPart[], more: Partial<BinnedLine> = {}): BinnedLine => {
-  const seconds = parts.reduce((sum, one) => sum + one.seconds, 0)
-  return {
-    proposal,
-    instrument: 10,
-    telescope: 1,
-    seconds,
-    least: seconds / 2,
-    possible: true,
-    parts,
-    ...more,
-  }
-}
 async function solved(input: Omit<MeritInput, 'standing'> & { standing?: BinnedLine[] }) {
   const plan = await mostMeritInBins({ standing: [], ...input }, solveInWorker, limits)
   if ('why' in plan) throw new Error(plan.why)

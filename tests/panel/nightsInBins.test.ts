@@ -1,37 +1,14 @@
 import { describe, expect, it } from 'vitest'
 import { BinFlow } from '@/lib/panel/nights/binFlow'
-import type { BinnedLine, BinnedPart, NightBin } from '@/lib/panel/nights/binTypes'
+import type { BinnedPart } from '@/lib/panel/nights/binTypes'
 import { byRankInBins } from '@/lib/panel/nights/byRankInBins'
 import { whyNotInBins } from '@/lib/panel/nights/whyNotInBins'
 import { seededUniform } from '@/lib/panel/random'
 import { ProgrammeBuilder } from '@/lib/panel/solver/programmeBuilder'
 import { solveInWorker } from '@/lib/services/solver/solveInWorker'
+import { bin, line, part } from '../support/binnedLines'
 
 const h = 3600
-const bin = (hours: number, half = 0): NightBin => ({
-  telescope: 1,
-  half,
-  siderealFromH: 0,
-  moon: 'dark',
-  seconds: hours * h,
-})
-const part = (hours: number, usable: Record<number, number>): BinnedPart => ({
-  seconds: hours * h,
-  usable: new Map(Object.entries(usable).map(([at, can]) => [Number(at), can * h])),
-})
-const line = (proposal: number, parts: BinnedPart[], more: Partial<BinnedLine> = {}): BinnedLine => {
-  const seconds = parts.reduce((sum, one) => sum + one.seconds, 0)
-  return {
-    proposal,
-    instrument: 10,
-    telescope: 1,
-    seconds,
-    least: seconds / 2,
-    possible: true,
-    parts,
-    ...more,
-  }
-}
 const hours = (plan: { given: { proposal: number; seconds: number }[] }) =>
   plan.given.map(({ proposal, seconds }) => [proposal, seconds / h])
 
