@@ -1,5 +1,7 @@
+import type { BillingFacts } from '../../lib/domain/billing/types.ts'
 import type { Database } from '../client.ts'
 import type { DisputesRow, FeesRow, WaiversRow } from '../tables.ts'
+import { billingRecordOf } from './billing.ts'
 import { creditNotesOfFee, findInvoiceById, invoicesOfFee } from './invoices.ts'
 import { disputesOfFee } from './disputes.ts'
 import { refundsOfFee } from './refunds.ts'
@@ -23,6 +25,7 @@ export interface LetterMoney {
     currency: string
     dueAt: Date
     isSettled: boolean
+    billing: BillingFacts | null
   } | null
   creditNote: {
     number: string
@@ -105,6 +108,7 @@ async function papersOf(db: Database, fee: FeesRow): Promise<Pick<LetterMoney, '
           currency: invoice.currency,
           dueAt: invoice.due_at,
           isSettled: invoice.state === 'settled',
+          billing: (await billingRecordOf(db, invoice.billing_record_id))?.facts ?? null,
         }
       : null,
     creditNote: note

@@ -79,6 +79,7 @@ export const access = {
     '/office/fees': office,
     '/office/fees/ledger': office,
     '/office/fees/reconciliation': office,
+    '/office/fees/invoicing': office,
     '/office/mail': office,
     '/office/mail/[letter]': office,
     '/office/mail/templates': office,

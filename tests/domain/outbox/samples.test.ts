@@ -25,6 +25,16 @@ const of: LetterCase = {
     currency: 'EUR',
     dueAt: at,
     isSettled: true,
+    billing: {
+      name: 'Office',
+      address: 'Ridge',
+      taxNumber: '',
+      contact: 'office@noctuary.example',
+      accountHolder: 'Observatory',
+      iban: 'QZ69447011820093000012',
+      bic: 'QRBKQZ2X',
+      bank: 'Bank',
+    },
   },
   creditNote: {
     number: 'QC-2027-0001',

@@ -1,4 +1,5 @@
 import type { Database } from '@/db/client'
+import { makeBilling } from './billing'
 import type { ScenarioFacility } from './facility'
 
 export interface ScenarioCallOptions {
@@ -64,6 +65,7 @@ export async function makeCall(
     letters_at: inDays(67),
     currency: options.currency === undefined ? 'EUR' : options.currency,
   })
+  await makeBilling(db)
   const [panelId = 0] = await db('panels').insert({
     call_id: callId,
     name: 'Galaxies and cosmology',

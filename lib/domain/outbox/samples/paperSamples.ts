@@ -1,4 +1,5 @@
 import { paths } from '@/lib/paths'
+import { payTo } from '../../billing/payTo'
 import { creditNoteIssued } from '../letters/creditNoteIssued'
 import { disputeTold } from '../letters/disputeTold'
 import { invoiceIssued } from '../letters/invoiceIssued'
@@ -12,13 +13,14 @@ export const paperSamples: readonly LetterSample[] = [
     template: 'fee-invoice',
     title: 'An invoice; to the institute and to whoever leads',
     build: ({ of, origin }) =>
-      of.invoice === null
+      !of.invoice?.billing
         ? null
         : invoiceIssued({
             name: of.lead,
             reference: of.reference,
             title: of.title,
             ...of.invoice,
+            payTo: payTo(of.invoice.billing),
             url: origin + paths.proposalSent(of.reference),
           }),
   },
