@@ -3,7 +3,7 @@
 import { useWatch } from 'react-hook-form'
 import type { z } from 'zod'
 import { BarNote } from '@/components/ui/BarNote'
-import { offeredTwice } from '@/lib/domain/calendar/offeredTwice'
+import { offeredTwiceWords } from '@/lib/domain/calendar/offeredTwiceWords'
 import type { setNightsSchema } from '@/lib/domain/calendar/schema'
 import type { TelescopeCalendar } from '@/lib/domain/calendar/types'
 
@@ -19,7 +19,7 @@ export function OfferedElsewhere({ telescope }: { telescope: TelescopeCalendar }
       useFor: part.useFor ?? 'science',
     })),
   )
-  const sentence = offeredTwice(telescope.name, wanted, telescope.elsewhere)
+  const sentence = offeredTwiceWords(telescope.name, wanted, telescope.elsewhere)
   return sentence ? (
     <BarNote tone="lamp">
       <p className="m-0">{sentence}</p>

@@ -103,6 +103,7 @@ export const access = {
     'GET /office/people/[person]/data': office,
     'GET /account/data': 'signed-in',
     'POST /api/webhooks/stripe': 'anyone',
+    'POST /api/mail/bounces': 'anyone',
     'GET /proposals/[reference]/packet': ['investigator', 'office'],
     'GET /proposals/[reference]/record': ['investigator', 'office'],
     'GET /proposals/[reference]/receipt': ['investigator', 'office'],

@@ -2,7 +2,7 @@ import { lockTelescopes, nightsElsewhere } from '@/db/queries/nightsElsewhere'
 import { refuse } from '@/lib/errors'
 import type { NightBlock } from '../calls/nightBlock'
 import type { Context } from '../context'
-import { offeredTwice } from './offeredTwice'
+import { offeredTwiceWords } from './offeredTwiceWords'
 
 /** Locks the telescopes of these nights and refuses, at a field, when another call offers one of them. */
 export async function refuseOfferedTwice(
@@ -27,7 +27,7 @@ export async function refuseOfferedTwice(
     const [from, to] = [nights[0], nights.at(-1)]
     if (from === undefined || to === undefined) continue
     const elsewhere = await nightsElsewhere(tx.db, { telescopeId: id, from, to, exceptCallId: asked.callId })
-    const sentence = offeredTwice(name, own, elsewhere)
+    const sentence = offeredTwiceWords(name, own, elsewhere)
     if (sentence) throw refuse.field(asked.field, `${asked.before ?? ''}${sentence}`)
   }
 }

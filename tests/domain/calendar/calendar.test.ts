@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { nightMove } from '@/components/calendar/nightMove'
 import { calendarCsv } from '@/lib/domain/calendar/calendarFileView'
-import { offeredTwice } from '@/lib/domain/calendar/offeredTwice'
+import { offeredTwiceWords } from '@/lib/domain/calendar/offeredTwiceWords'
 import { halfMonths } from '@/lib/domain/calendar/halfMonths'
 import { partsProblem } from '@/lib/domain/calendar/partsProblem'
 import { readCalendarCsv } from '@/lib/domain/calendar/readCalendarCsv'
@@ -188,7 +188,7 @@ describe('a night of another call', () => {
     ...part(from, to, over),
     eveningDate,
   })
-  const said = (...parts: ReturnType<typeof on>[]) => offeredTwice('Fennel 1.5 m', parts, elsewhere)
+  const said = (...parts: ReturnType<typeof on>[]) => offeredTwiceWords('Fennel 1.5 m', parts, elsewhere)
 
   it.each([
     ['the other half', on('2027-07-10', 0.5, 1), null],

@@ -5,7 +5,7 @@ import type { NightElsewhere } from './nightElsewhere'
 type Part = Pick<NightBlock, 'eveningDate' | 'from' | 'to' | 'useFor'>
 
 /** Which of these parts of nights another call offers already, in a sentence that names it; null when none. */
-export function offeredTwice(
+export function offeredTwiceWords(
   telescope: string,
   parts: readonly Part[],
   elsewhere: readonly NightElsewhere[],
