@@ -21,7 +21,7 @@ export function FileRow({ file, sending }: { file: File; sending: FileSending | 
       {sending ? (
         <div className="mt-1.5">
           <ProgressBar share={sending.share} label={`Sending ${file.name}`} valueText={sending.words} />
-          <p className="m-0 mt-1.5 flex gap-3">
+          <p className="m-0 mt-1.5 flex items-center gap-3">
             <span>{sending.words}</span>
             {sending.onStop ? (
               <LinkLikeButton onClick={sending.onStop} aria-label={`Stop sending ${file.name}`}>

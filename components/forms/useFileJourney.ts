@@ -80,8 +80,11 @@ export function useFileJourney<Data>(options: FileJourneyOptions<Data>) {
         // The fields around the file are some hundred bytes: its share of what has gone is the file's.
         onSent: (bytes, all) => show(Math.round((file.size * bytes) / all)),
       })
-      if (reply.kind === 'kept') options.onKept(options.reply.parse(reply.data))
-      else if (reply.kind === 'lost') wait(wordsOfLost(file, sent), navigator.onLine ? 'failed' : 'offline')
+      if (reply.kind === 'kept') {
+        options.onKept(options.reply.parse(reply.data))
+        // Never after a loss: a refresh that fails loads the page anew, and the chosen file with it is gone.
+        router.refresh()
+      } else if (reply.kind === 'lost') wait(wordsOfLost(file, sent), navigator.onLine ? 'failed' : 'offline')
       else if (reply.again) wait(reply.message)
       else options.onRefused(reply.message)
     } catch {
@@ -90,8 +93,6 @@ export function useFileJourney<Data>(options: FileJourneyOptions<Data>) {
       else wait('The file could not be read or sent.')
     } finally {
       if (journey.current === own) setSending(null)
-      // Also after a loss: it may have arrived with only the answer lost.
-      router.refresh()
     }
   }
 

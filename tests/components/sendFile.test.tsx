@@ -98,6 +98,8 @@ describe('a file on its way', () => {
     expect(alert.textContent?.replaceAll('\u00a0', ' ')).toBe(
       'The connection was lost after 3.0 MB of 4.0 MB. Nothing was changed.',
     )
+    // A refresh without a connection would load the page anew, and forget the file.
+    expect(refresh).not.toHaveBeenCalled()
     await user.click(screen.getByRole('button', { name: 'Send it again' }))
     await waitFor(() => expect(FakeRequest.made).toHaveLength(2))
     expect(FakeRequest.newest().form.get('again')).toBe('yes')
