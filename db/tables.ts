@@ -668,6 +668,7 @@ export interface ProposalPeopleRow {
   created_at: Date
   orcid: string | null
   is_supervisor: 0 | 1
+  version: number
 }
 
 export interface ProposalVersionsRow {
@@ -1296,6 +1297,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'orcid'
         | 'is_supervisor'
+        | 'version'
       >
     >
     proposal_versions: Knex.CompositeTableType<

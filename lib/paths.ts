@@ -40,6 +40,10 @@ export const paths = {
     `/proposals/${part(reference)}/${section}`,
   proposalPaper: (reference: string, paper: number | string) =>
     `/proposals/${part(reference)}/papers/${part(String(paper))}`,
+  /** Where a document is sent to, and the one that replaces it after the proposal was sent. */
+  newPaper: (reference: string) => `/proposals/${part(reference)}/papers/new`,
+  paperReplacement: (reference: string) => `/proposals/${part(reference)}/papers/replacement`,
+  newFigure: (reference: string) => `/proposals/${part(reference)}/figures`,
   proposalFigure: (reference: string, figure: number | string, sha256: string) =>
     `/proposals/${part(reference)}/figures/${part(String(figure))}?v=${sha256.slice(0, 8)}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
