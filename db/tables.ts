@@ -62,6 +62,21 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BillingRecordsRow {
+  id: number
+  record_version: number
+  name: string
+  address: string
+  tax_number: string
+  contact: string
+  account_holder: string
+  iban: string
+  bic: string
+  bank: string
+  saved_by: number | null
+  created_at: Date
+}
+
 export interface BulkLettersRow {
   id: number
   subject: string
@@ -180,6 +195,7 @@ export interface CreditNotesRow {
   refund_id: number | null
   credited_to: string
   address: string
+  billing_record_id: number | null
   amount_minor: number
   currency: string
   reason: string
@@ -344,6 +360,7 @@ export interface InvoicesRow {
   fee_id: number
   institute: string
   address: string
+  billing_record_id: number | null
   purchase_order: string
   send_to: string
   amount_minor: number
@@ -994,6 +1011,10 @@ declare module 'knex/types/tables.js' {
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
     >
+    billing_records: Knex.CompositeTableType<
+      BillingRecordsRow,
+      Insert<BillingRecordsRow, 'id' | 'tax_number' | 'saved_by' | 'created_at'>
+    >
     bulk_letters: Knex.CompositeTableType<
       BulkLettersRow,
       Insert<
@@ -1045,7 +1066,10 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     credit_notes: Knex.CompositeTableType<
       CreditNotesRow,
-      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+      Insert<
+        CreditNotesRow,
+        'id' | 'invoice_id' | 'refund_id' | 'address' | 'billing_record_id' | 'created_at'
+      >
     >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
@@ -1128,6 +1152,7 @@ declare module 'knex/types/tables.js' {
       Insert<
         InvoicesRow,
         | 'id'
+        | 'billing_record_id'
         | 'purchase_order'
         | 'state'
         | 'asked_by'

@@ -106,6 +106,7 @@ export const paths = {
   officePersonData: (person: number) => `/office/people/${person}/data`,
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',
+  officeInvoicing: () => '/office/fees/invoicing',
   officeReconciliation: () => '/office/fees/reconciliation',
   newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
   retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>

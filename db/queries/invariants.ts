@@ -52,6 +52,12 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE g.given > COALESCE(o.offered, 0) - COALESCE(h.held, 0)`,
   ],
   [
+    'I3 two calls do not offer the same part of a night of a telescope, and none divides a night in parts that overlap',
+    `SELECT a.id FROM night_blocks a JOIN night_blocks b ON b.evening_date = a.evening_date AND b.telescope_id = a.telescope_id
+        AND b.id > a.id AND a.fraction_from < b.fraction_to AND b.fraction_from < a.fraction_to
+      WHERE a.call_id = b.call_id OR (a.use_for = 'science' AND b.use_for = 'science')`,
+  ],
+  [
     'I3 what is never to be given time is given none',
     `SELECT n.id FROM night_choices n JOIN decisions d ON d.proposal_id = n.proposal_id JOIN award_lines a ON a.decision_id = d.id
       WHERE n.choice = 'never' AND n.superseded_at IS NULL AND d.superseded_at IS NULL AND a.superseded_at IS NULL AND a.seconds > 0`,

@@ -103,6 +103,26 @@ export async function markFailed(
     })
 }
 
+/** The letter that was sent under one of these Message-IDs, locked. */
+export async function lockLetterOf(db: Database, messageIds: readonly string[]): Promise<OutboxRow | null> {
+  if (messageIds.length === 0) return null
+  return (
+    (await db('outbox')
+      .whereIn('message_id', [...messageIds])
+      .forUpdate()
+      .first()) ?? null
+  )
+}
+
+/** Keeps what a mail server said of a letter after it had taken it, and what becomes of the letter. */
+export async function markReported(
+  db: Database,
+  id: number,
+  outcome: { said: string; state: 'sent' | 'parked' | 'bounced' },
+): Promise<void> {
+  await db('outbox').where({ id }).update({ state: outcome.state, last_error: outcome.said })
+}
+
 /** Letters, the newest first, without their texts. */
 export function listLetters(
   db: Database,

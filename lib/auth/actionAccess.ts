@@ -114,6 +114,7 @@ export const actionAccess = {
   mergePeople: office,
   decideWaiver: office,
   refundFee: office,
+  saveBilling: office,
   writeInvoice: office,
   settleInvoice: office,
   cancelInvoice: office,

@@ -77,6 +77,7 @@ export default async function OfficeFeesPage({
             ))}
             <TextLink href={paths.officeLedger()}>Ledger</TextLink>
             <TextLink href={paths.officeReconciliation()}>Books and firm</TextLink>
+            <TextLink href={paths.officeInvoicing()}>What invoices say</TextLink>
             <RemindButton slug={call.slug} count={owing} action={remindOwingAction} />
           </>
         }
