@@ -405,6 +405,38 @@ export interface LogbookHeadRow {
   last_hash: string
 }
 
+export interface MergedEntriesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  ranking_id: number
+  place: number
+  used_share: number | null
+  is_near: 0 | 1
+}
+
+export interface MergedListsRow {
+  id: number
+  call_id: number
+  list_version: number
+  frozen_at: Date | null
+  made_by: number | null
+  superseded_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface MergeMovesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  from_place: number
+  to_place: number
+  reason: string
+  moved_by: number | null
+  created_at: Date
+}
+
 export interface ModeRecordsRow {
   id: number
   mode_id: number
@@ -825,6 +857,17 @@ export interface SessionsRow {
   created_at: Date
 }
 
+export interface ShareRulesRow {
+  id: number
+  call_id: number
+  rule: 'hours' | 'proposals' | 'fixed'
+  percents: string | null
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
 export interface SitesRow {
   id: number
   slug: string
@@ -1173,6 +1216,15 @@ declare module 'knex/types/tables.js' {
       Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
+    merged_entries: Knex.CompositeTableType<MergedEntriesRow, Insert<MergedEntriesRow, 'id' | 'used_share'>>
+    merged_lists: Knex.CompositeTableType<
+      MergedListsRow,
+      Insert<MergedListsRow, 'id' | 'frozen_at' | 'made_by' | 'superseded_at' | 'version' | 'created_at'>
+    >
+    merge_moves: Knex.CompositeTableType<
+      MergeMovesRow,
+      Insert<MergeMovesRow, 'id' | 'moved_by' | 'created_at'>
+    >
     mode_records: Knex.CompositeTableType<
       ModeRecordsRow,
       Insert<
@@ -1388,6 +1440,10 @@ declare module 'knex/types/tables.js' {
     sessions: Knex.CompositeTableType<
       SessionsRow,
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
+    >
+    share_rules: Knex.CompositeTableType<
+      ShareRulesRow,
+      Insert<ShareRulesRow, 'id' | 'percents' | 'superseded_at' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<

@@ -4,10 +4,11 @@ const part = encodeURIComponent
 export type ProposalSection =
   'question' | 'targets' | 'cosmology' | 'observing' | 'feasibility' | 'people' | 'papers' | 'send'
 
-export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
+export type PanelPage =
+  'assignments' | 'progress' | 'discussion' | 'ranking' | 'between' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
-export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+export type OfficeCallPage = 'rules' | 'nights' | 'between' | 'figures' | 'preview'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 

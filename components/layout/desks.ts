@@ -40,7 +40,7 @@ const officeLinks: readonly HeaderLink[] = [
   { href: paths.office('logbook'), label: 'Logbook' },
 ]
 
-function panelLinks(call: string): HeaderLink[] {
+function panelLinks(call: string, hasSeveral: boolean): HeaderLink[] {
   const link = (page: PanelPage, label: string): HeaderLink => ({
     href: paths.panel(call, page),
     label,
@@ -51,6 +51,7 @@ function panelLinks(call: string): HeaderLink[] {
     link('progress', 'Progress'),
     link('ranking', 'Ranking'),
     link('discussion', 'Discussion'),
+    ...(hasSeveral ? [link('between', 'Between panels')] : []),
     link('nights', 'Nights'),
     link('decisions', 'Decisions'),
   ]
@@ -58,15 +59,19 @@ function panelLinks(call: string): HeaderLink[] {
 
 const help: HeaderLink = { href: paths.help(), label: 'Help' }
 
-/** What the head of a page offers: the links of the area, and the other desks beside Help. */
+/**
+ * What the head of a page offers: the links of the area, and the other desks beside Help. Where the panel's call has
+ * several panels, also what stands between them.
+ */
 export function headerLinks(
   area: Area,
   actor: Actor | null,
   panelCall: string | null,
+  hasSeveralPanels = false,
 ): { links: HeaderLink[]; asideLinks: HeaderLink[] } {
   const desks = desksOf(actor, panelCall)
   if (area === 'office' || area === 'chair') {
-    const links = area === 'office' ? [...officeLinks] : panelLinks(panelCall ?? '')
+    const links = area === 'office' ? [...officeLinks] : panelLinks(panelCall ?? '', hasSeveralPanels)
     return { links, asideLinks: [...desks.filter((desk) => desk.area !== area), help] }
   }
   return { links: [...desks, ...tools], asideLinks: [help] }

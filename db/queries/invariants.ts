@@ -68,6 +68,15 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       UNION ALL SELECT telescope_id FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id HAVING COUNT(*) > 1`,
   ],
   [
+    'I3 a list of all panels keeps the order of each, and one stands for a call',
+    `SELECT a.id FROM merged_entries a JOIN merged_entries b ON b.list_id = a.list_id AND b.ranking_id = a.ranking_id AND b.place > a.place
+      JOIN ranking_entries x ON x.ranking_id = a.ranking_id AND x.proposal_id = a.proposal_id
+      JOIN ranking_entries y ON y.ranking_id = b.ranking_id AND y.proposal_id = b.proposal_id
+      WHERE x.place > y.place
+      UNION ALL SELECT call_id FROM merged_lists WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1
+      UNION ALL SELECT call_id FROM share_rules WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1`,
+  ],
+  [
     'I4 nobody with an interest holds an assignment or a score',
     `SELECT a.id FROM assignments a JOIN conflicts c ON c.person_id = a.person_id AND c.proposal_id = a.proposal_id
       WHERE c.severity = 'barred' AND c.until_at IS NULL AND a.withdrawn_at IS NULL`,

@@ -11,6 +11,7 @@ import { callBins, type CallBins } from '../nights/callBins'
 import type { PanelDesk } from '../panels/openPanel'
 import { visibleLine, visibleOrder } from '../rankings/order'
 import { arrangeAsked, type ArrangedAsked } from './arrangeAsked'
+import { keptForOthers } from './keptForOthers'
 import { meritOf } from './meritOf'
 import { planByMerit } from './planByMerit'
 import { planTerms, type PlanTerms } from './planTerms'
@@ -29,7 +30,7 @@ export interface PlannedNights {
   /** What may be planned with: the season's bins less weather and what is held back. */
   bins: NightBin[]
   asked: ArrangedAsked
-  /** Given by other panels, or to proposals that the asker may not see. */
+  /** Given by other panels, kept for them by the order of all panels, or given to proposals the asker may not see. */
   standing: BinnedLine[]
   policy: NightsPolicy
   plan: BinnedPlan
@@ -87,7 +88,9 @@ export async function planNights(
     const line = { proposal, instrument, telescope, seconds, least, possible }
     return [keptLine(binnedLine(line, held, season), terms.kept)]
   }
-  const standing = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const given = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const kept = await keptForOthers(ctx.db, desk, { season, terms, bins, standing: given })
+  const standing = [...given, ...kept]
   const asked = await arrangeAsked(
     order
       .filter((id) => !setAside.has(id))
