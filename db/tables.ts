@@ -234,6 +234,10 @@ export interface DisputesRow {
   reason: string
   state: 'open' | 'won' | 'lost'
   closed_at: Date | null
+  decision: 'ask-again' | 'waive' | 'withdraw' | 'accept' | null
+  decision_note: string
+  decided_by: number | null
+  decided_at: Date | null
   created_at: Date
 }
 
@@ -1133,7 +1137,17 @@ declare module 'knex/types/tables.js' {
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<
       DisputesRow,
-      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+      Insert<
+        DisputesRow,
+        | 'id'
+        | 'state'
+        | 'closed_at'
+        | 'decision'
+        | 'decision_note'
+        | 'decided_by'
+        | 'decided_at'
+        | 'created_at'
+      >
     >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,

@@ -93,6 +93,10 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
   ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
   [
+    'I5 a letter to somebody erased keeps the address only until it goes',
+    "SELECT id FROM outbox WHERE template = 'person-erased' AND state NOT IN ('queued', 'sending') AND to_email <> 'erased@erased.invalid'",
+  ],
+  [
     'I5 no letter to many goes twice to one address',
     'SELECT bulk_letter_id FROM outbox WHERE bulk_letter_id IS NOT NULL GROUP BY bulk_letter_id, to_email HAVING COUNT(*) > 1',
   ],

@@ -35,7 +35,13 @@ export interface LetterMoney {
     isMoney: boolean
   } | null
   failedRefund: { amountMinor: number; currency: string; failure: string } | null
-  dispute: { amountMinor: number; currency: string; status: DisputesRow['state'] } | null
+  dispute: {
+    amountMinor: number
+    currency: string
+    status: DisputesRow['state']
+    decision: DisputesRow['decision']
+    note: string
+  } | null
 }
 
 const none: LetterMoney = {
@@ -130,6 +136,14 @@ async function troubleOf(db: Database, fee: FeesRow): Promise<Pick<LetterMoney, 
   const { currency } = fee
   return {
     failedRefund: failed ? { amountMinor: failed.amount_minor, currency, failure: failed.failure } : null,
-    dispute: dispute ? { amountMinor: dispute.amount_minor, currency, status: dispute.state } : null,
+    dispute: dispute
+      ? {
+          amountMinor: dispute.amount_minor,
+          currency,
+          status: dispute.state,
+          decision: dispute.decision,
+          note: dispute.decision_note,
+        }
+      : null,
   }
 }

@@ -74,7 +74,17 @@ export async function claimLetters(db: Database, limit: number, holdSeconds: num
   })
 }
 
-export async function markSent(db: Database, id: number): Promise<void> {
+/** What is left of a letter whose reader is forgotten. */
+const forgotten = {
+  to_email: 'erased@erased.invalid',
+  to_name: 'Erased person',
+  subject: 'To an erased person',
+  text_body: '',
+  html_body: '',
+}
+
+/** `forget`: blots out at once whom it went to and what it said. */
+export async function markSent(db: Database, id: number, forget = false): Promise<void> {
   await db('outbox')
     .where({ id })
     .update({
@@ -83,6 +93,20 @@ export async function markSent(db: Database, id: number): Promise<void> {
       attempts: db.raw('attempts + 1') as unknown as number,
       claimed_until: null,
       last_error: null,
+      ...(forget ? forgotten : {}),
+    })
+}
+
+/** Gives a letter up that cannot go, and blots out whom it was for and what it said. */
+export async function giveUpAndForget(db: Database, id: number): Promise<void> {
+  await db('outbox')
+    .where({ id })
+    .update({
+      state: 'cancelled',
+      attempts: db.raw('attempts + 1') as unknown as number,
+      claimed_until: null,
+      last_error: null,
+      ...forgotten,
     })
 }
 

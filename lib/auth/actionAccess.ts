@@ -117,6 +117,7 @@ export const actionAccess = {
   erasePerson: office,
   mergePeople: office,
   decideWaiver: office,
+  decideDispute: office,
   refundFee: office,
   saveBilling: office,
   writeInvoice: office,

@@ -44,7 +44,13 @@ const of: LetterCase = {
     isMoney: true,
   },
   failedRefund: { amountMinor: 5000, currency: 'EUR', failure: 'The card was closed.' },
-  dispute: { amountMinor: 12_000, currency: 'EUR', status: 'lost' },
+  dispute: {
+    amountMinor: 12_000,
+    currency: 'EUR',
+    status: 'lost',
+    decision: 'waive',
+    note: 'It was <no> fault of theirs.',
+  },
   decision: { outcome: 'awarded', lines: [] },
   question: { instrument: 'EMBER', question: 'Which slit?', answer: 'The wide one.', dueAt: at },
 }

@@ -1,6 +1,7 @@
 import { paths } from '@/lib/paths'
 import { payTo } from '../../billing/payTo'
 import { creditNoteIssued } from '../letters/creditNoteIssued'
+import { disputeDecided } from '../letters/disputeDecided'
 import { disputeTold } from '../letters/disputeTold'
 import { invoiceIssued } from '../letters/invoiceIssued'
 import { invoiceSettled } from '../letters/invoiceSettled'
@@ -67,5 +68,22 @@ export const paperSamples: readonly LetterSample[] = [
       of.dispute === null
         ? null
         : disputeTold({ name: clerk, reference: of.reference, ...of.dispute, origin }),
+  },
+  {
+    template: 'dispute-decided',
+    title: 'A lost dispute is decided; to whoever leads',
+    build: ({ of, origin }) => {
+      if (of.fee === null || !of.dispute?.decision || of.dispute.decision === 'accept') return null
+      const { decision, note } = of.dispute
+      return disputeDecided({
+        name: of.lead,
+        reference: of.reference,
+        title: of.title,
+        ...of.fee,
+        decision,
+        note,
+        url: origin + paths.proposalSent(of.reference),
+      })
+    },
   },
 ]
