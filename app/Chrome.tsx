@@ -29,19 +29,17 @@ interface ChromeProps {
   area: Area
   /** Slug of the call the page is about, where the links depend on it. */
   panelCall?: string
-  /** That call has several panels. */
-  hasSeveralPanels?: boolean
   caution?: string
   children: ReactNode
 }
 
 /** Night band, head and foot around the pages of a group; pages bring their own `Main`. */
-export async function Chrome({ area, panelCall, hasSeveralPanels, caution, children }: ChromeProps) {
+export async function Chrome({ area, panelCall, caution, children }: ChromeProps) {
   const actor = await readActor()
   const ctx = contextFor(actor, await requestFacts())
   const frame = await readFrame(ctx, roleOf[area])
   const theme = themeFrom((await cookies()).get(themeCookie)?.value)
-  const { links, asideLinks } = headerLinks(area, actor, panelCall ?? frame.panelCall, hasSeveralPanels)
+  const { links, asideLinks } = headerLinks(area, actor, panelCall ?? frame.panelCall)
   const word = roleWord[area]
   const showsMoney = area === 'office' && ctx.payments.isTestMode
   return (

@@ -40,7 +40,7 @@ const officeLinks: readonly HeaderLink[] = [
   { href: paths.office('logbook'), label: 'Logbook' },
 ]
 
-function panelLinks(call: string, hasSeveral: boolean): HeaderLink[] {
+function panelLinks(call: string): HeaderLink[] {
   const link = (page: PanelPage, label: string): HeaderLink => ({
     href: paths.panel(call, page),
     label,
@@ -51,7 +51,6 @@ function panelLinks(call: string, hasSeveral: boolean): HeaderLink[] {
     link('progress', 'Progress'),
     link('ranking', 'Ranking'),
     link('discussion', 'Discussion'),
-    ...(hasSeveral ? [link('between', 'Between panels')] : []),
     link('nights', 'Nights'),
     link('decisions', 'Decisions'),
   ]
@@ -59,19 +58,15 @@ function panelLinks(call: string, hasSeveral: boolean): HeaderLink[] {
 
 const help: HeaderLink = { href: paths.help(), label: 'Help' }
 
-/**
- * What the head of a page offers: the links of the area, and the other desks beside Help. Where the panel's call has
- * several panels, also what stands between them.
- */
+/** What the head of a page offers: the links of the area, and the other desks beside Help. */
 export function headerLinks(
   area: Area,
   actor: Actor | null,
   panelCall: string | null,
-  hasSeveralPanels = false,
 ): { links: HeaderLink[]; asideLinks: HeaderLink[] } {
   const desks = desksOf(actor, panelCall)
   if (area === 'office' || area === 'chair') {
-    const links = area === 'office' ? [...officeLinks] : panelLinks(panelCall ?? '', hasSeveralPanels)
+    const links = area === 'office' ? [...officeLinks] : panelLinks(panelCall ?? '')
     return { links, asideLinks: [...desks.filter((desk) => desk.area !== area), help] }
   }
   return { links: [...desks, ...tools], asideLinks: [help] }

@@ -1,11 +1,11 @@
 import { ChartFrame } from '@/components/charts/ChartFrame'
-import { HoursBar } from '@/components/charts/HoursBar'
+import { DemandBar } from '@/components/charts/DemandBar'
 import type { SharingView } from '@/lib/domain/sharing/sharingView'
 import { countInWords, formatHoursFromSeconds, formatPercent } from '@/lib/format'
 
 const inHours = (seconds: number) => Math.round(seconds / 36) / 100
 
-/** What each panel asks of each telescope, as an outline, against its share, as the fill. */
+/** What each panel asks of each telescope, as a bar, against its share, as a tick. */
 export function DemandChart({ view }: { view: SharingView }) {
   const nameOf = (id: number) => view.panels.find((panel) => panel.id === id)?.name ?? ''
   const all = view.pools.flatMap((pool) => pool.panels)
@@ -13,7 +13,7 @@ export function DemandChart({ view }: { view: SharingView }) {
   const partOf = (seconds: number, whole: number) => (whole > 0 ? seconds / whole : 0)
   return (
     <ChartFrame
-      title="Hours asked (outline) and the panel’s share (filled)"
+      title="Hours asked (bar) and the panel’s share (tick)"
       fileName={`shares-call-${view.callNumber}`}
       numbers={{
         caption: `Demand and shares of call ${view.callNumber}`,
@@ -53,14 +53,13 @@ export function DemandChart({ view }: { view: SharingView }) {
                 {pool.panels.map((one) => (
                   <li
                     key={one.panelId}
-                    className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-4 gap-y-1 border-t border-rule py-2 sm:grid-cols-[9rem_auto_minmax(0,1fr)]"
+                    className="grid items-center gap-x-4 gap-y-1 border-t border-rule py-2 sm:grid-cols-[9rem_auto_minmax(0,1fr)]"
                   >
-                    <span className="max-sm:col-span-2">{nameOf(one.panelId)}</span>
-                    <HoursBar
-                      asked={one.askedSeconds / 3600}
-                      given={one.shareSeconds / 3600}
+                    <span>{nameOf(one.panelId)}</span>
+                    <DemandBar
+                      askedHours={one.askedSeconds / 3600}
+                      shareHours={one.shareSeconds / 3600}
                       maxHours={most}
-                      width={180}
                     />
                     <span className="text-muted">
                       <strong className="whitespace-nowrap text-ink">
