@@ -7,7 +7,13 @@ import { nightsPolicy } from '@/lib/domain/decisions/policyWords'
 import { readNights } from '@/lib/domain/decisions/readNights'
 import { isTried, trialText } from '@/lib/domain/decisions/trialSchema'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { chooseNightsAction, holdHoursAction, saveAwardAction, takePlanAction } from './actions'
+import {
+  chooseNightsAction,
+  holdHoursAction,
+  saveAwardAction,
+  setLeastAction,
+  takePlanAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Nights' }
 
@@ -16,6 +22,7 @@ const actions = {
   takePlan: takePlanAction,
   choose: chooseNightsAction,
   hold: holdHoursAction,
+  setLeast: setLeastAction,
 }
 
 export default async function NightsPage(props: PanelPageProps) {
