@@ -380,6 +380,17 @@ export interface InvoicesRow {
   created_at: Date
 }
 
+export interface LeastAwardsRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
 export interface LogbookRow {
   id: number
   at: Date
@@ -851,6 +862,18 @@ export interface ScoreEventsRow {
   created_at: Date
 }
 
+export interface ServiceWishesRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  least_seconds: number | null
+  visit_nights: number | null
+  visit_part: 'whole' | 'first' | 'second'
+  visit_together: 0 | 1
+  version: number
+  created_at: Date
+}
+
 export interface SessionsRow {
   id_hash: string
   person_id: number
@@ -1006,6 +1029,17 @@ export interface TimeTransfersRow {
   reason: string
   made_by: number | null
   created_at: Date
+}
+
+export interface VisitHalvesRow {
+  id: number
+  award_line_id: number
+  call_id: number
+  telescope_id: number
+  evening_date: string
+  half: 'first' | 'second'
+  seconds: number
+  holds: number | null
 }
 
 export interface WaiversRow {
@@ -1220,6 +1254,10 @@ declare module 'knex/types/tables.js' {
         | 'version'
         | 'created_at'
       >
+    >
+    least_awards: Knex.CompositeTableType<
+      LeastAwardsRow,
+      Insert<LeastAwardsRow, 'id' | 'superseded_at' | 'created_at'>
     >
     logbook: Knex.CompositeTableType<
       LogbookRow,
@@ -1451,6 +1489,13 @@ declare module 'knex/types/tables.js' {
       ScoreEventsRow,
       Insert<ScoreEventsRow, 'id' | 'scale_version' | 'half_points' | 'created_at'>
     >
+    service_wishes: Knex.CompositeTableType<
+      ServiceWishesRow,
+      Insert<
+        ServiceWishesRow,
+        'id' | 'least_seconds' | 'visit_nights' | 'visit_part' | 'visit_together' | 'version' | 'created_at'
+      >
+    >
     sessions: Knex.CompositeTableType<
       SessionsRow,
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
@@ -1533,6 +1578,7 @@ declare module 'knex/types/tables.js' {
       TimeTransfersRow,
       Insert<TimeTransfersRow, 'id' | 'observation_id' | 'share' | 'made_by' | 'created_at'>
     >
+    visit_halves: Knex.CompositeTableType<VisitHalvesRow, Insert<VisitHalvesRow, 'id' | 'holds'>>
     waivers: Knex.CompositeTableType<
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>
