@@ -51,6 +51,7 @@ export const actionAccess = {
   askQuestion: scientist,
   passToPanel: scientist,
   answerQuestion: investigator,
+  saveExpertise: reviewer,
   declareInterests: reviewer,
   saveScore: reviewer,
   saveReviewText: reviewer,
