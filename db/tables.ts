@@ -251,6 +251,15 @@ export interface EmailTokensRow {
   created_at: Date
 }
 
+export interface ExpertiseRow {
+  id: number
+  person_id: number
+  kind: 'category' | 'word'
+  term: string
+  level: number | null
+  created_at: Date
+}
+
 export interface FacilityRetirementsRow {
   id: number
   site_id: number | null
@@ -1187,6 +1196,7 @@ declare module 'knex/types/tables.js' {
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
+    expertise: Knex.CompositeTableType<ExpertiseRow, Insert<ExpertiseRow, 'id' | 'level' | 'created_at'>>
     facility_retirements: Knex.CompositeTableType<
       FacilityRetirementsRow,
       Insert<

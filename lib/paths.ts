@@ -71,6 +71,7 @@ export const paths = {
   assessmentReport: (request: number | string) => `/assessments/${part(String(request))}/report`,
 
   reviews: () => '/reviews',
+  expertise: () => '/reviews/expertise',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
   meeting: (callSlug: string) => `/reviews/meeting/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,

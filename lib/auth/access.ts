@@ -46,6 +46,7 @@ export const access = {
     '/assessments/[request]/report': scientist,
     '/reviews': reviewer,
     '/reviews/interests/[call]': reviewer,
+    '/reviews/expertise': reviewer,
     '/reviews/meeting/[call]': reviewer,
     '/reviews/[assignment]': reviewer,
     '/reviews/[assignment]/report': reviewer,

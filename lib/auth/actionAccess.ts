@@ -49,6 +49,7 @@ export const actionAccess = {
   askQuestion: scientist,
   passToPanel: scientist,
   answerQuestion: investigator,
+  saveExpertise: reviewer,
   declareInterests: reviewer,
   saveScore: reviewer,
   saveReviewText: reviewer,
