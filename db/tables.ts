@@ -251,6 +251,15 @@ export interface EmailTokensRow {
   created_at: Date
 }
 
+export interface ExpertiseRow {
+  id: number
+  person_id: number
+  kind: 'category' | 'word'
+  term: string
+  level: number | null
+  created_at: Date
+}
+
 export interface FacilityRetirementsRow {
   id: number
   site_id: number | null
@@ -380,6 +389,17 @@ export interface InvoicesRow {
   created_at: Date
 }
 
+export interface LeastAwardsRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
+  created_at: Date
+}
+
 export interface LogbookRow {
   id: number
   at: Date
@@ -407,6 +427,38 @@ export interface LogbookChecksRow {
 export interface LogbookHeadRow {
   id: number
   last_hash: string
+}
+
+export interface MergedEntriesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  ranking_id: number
+  place: number
+  used_share: number | null
+  is_near: 0 | 1
+}
+
+export interface MergedListsRow {
+  id: number
+  call_id: number
+  list_version: number
+  frozen_at: Date | null
+  made_by: number | null
+  superseded_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface MergeMovesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  from_place: number
+  to_place: number
+  reason: string
+  moved_by: number | null
+  created_at: Date
 }
 
 export interface ModeRecordsRow {
@@ -689,6 +741,7 @@ export interface ProposalPeopleRow {
   created_at: Date
   orcid: string | null
   is_supervisor: 0 | 1
+  version: number
 }
 
 export interface ProposalVersionsRow {
@@ -818,6 +871,18 @@ export interface ScoreEventsRow {
   created_at: Date
 }
 
+export interface ServiceWishesRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  least_seconds: number | null
+  visit_nights: number | null
+  visit_part: 'whole' | 'first' | 'second'
+  visit_together: 0 | 1
+  version: number
+  created_at: Date
+}
+
 export interface SessionsRow {
   id_hash: string
   person_id: number
@@ -825,6 +890,17 @@ export interface SessionsRow {
   expires_at: Date
   ended_at: Date | null
   user_agent: string
+  created_at: Date
+}
+
+export interface ShareRulesRow {
+  id: number
+  call_id: number
+  rule: 'hours' | 'proposals' | 'fixed'
+  percents: string | null
+  reason: string
+  made_by: number
+  superseded_at: Date | null
   created_at: Date
 }
 
@@ -962,6 +1038,17 @@ export interface TimeTransfersRow {
   reason: string
   made_by: number | null
   created_at: Date
+}
+
+export interface VisitHalvesRow {
+  id: number
+  award_line_id: number
+  call_id: number
+  telescope_id: number
+  evening_date: string
+  half: 'first' | 'second'
+  seconds: number
+  holds: number | null
 }
 
 export interface WaiversRow {
@@ -1109,6 +1196,7 @@ declare module 'knex/types/tables.js' {
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
+    expertise: Knex.CompositeTableType<ExpertiseRow, Insert<ExpertiseRow, 'id' | 'level' | 'created_at'>>
     facility_retirements: Knex.CompositeTableType<
       FacilityRetirementsRow,
       Insert<
@@ -1177,6 +1265,10 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
       >
     >
+    least_awards: Knex.CompositeTableType<
+      LeastAwardsRow,
+      Insert<LeastAwardsRow, 'id' | 'superseded_at' | 'created_at'>
+    >
     logbook: Knex.CompositeTableType<
       LogbookRow,
       Insert<LogbookRow, 'id' | 'person_id' | 'before_value' | 'after_value' | 'address'>
@@ -1186,6 +1278,15 @@ declare module 'knex/types/tables.js' {
       Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
+    merged_entries: Knex.CompositeTableType<MergedEntriesRow, Insert<MergedEntriesRow, 'id' | 'used_share'>>
+    merged_lists: Knex.CompositeTableType<
+      MergedListsRow,
+      Insert<MergedListsRow, 'id' | 'frozen_at' | 'made_by' | 'superseded_at' | 'version' | 'created_at'>
+    >
+    merge_moves: Knex.CompositeTableType<
+      MergeMovesRow,
+      Insert<MergeMovesRow, 'id' | 'moved_by' | 'created_at'>
+    >
     mode_records: Knex.CompositeTableType<
       ModeRecordsRow,
       Insert<
@@ -1335,6 +1436,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'orcid'
         | 'is_supervisor'
+        | 'version'
       >
     >
     proposal_versions: Knex.CompositeTableType<
@@ -1397,9 +1499,20 @@ declare module 'knex/types/tables.js' {
       ScoreEventsRow,
       Insert<ScoreEventsRow, 'id' | 'scale_version' | 'half_points' | 'created_at'>
     >
+    service_wishes: Knex.CompositeTableType<
+      ServiceWishesRow,
+      Insert<
+        ServiceWishesRow,
+        'id' | 'least_seconds' | 'visit_nights' | 'visit_part' | 'visit_together' | 'version' | 'created_at'
+      >
+    >
     sessions: Knex.CompositeTableType<
       SessionsRow,
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
+    >
+    share_rules: Knex.CompositeTableType<
+      ShareRulesRow,
+      Insert<ShareRulesRow, 'id' | 'percents' | 'superseded_at' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<
@@ -1475,6 +1588,7 @@ declare module 'knex/types/tables.js' {
       TimeTransfersRow,
       Insert<TimeTransfersRow, 'id' | 'observation_id' | 'share' | 'made_by' | 'created_at'>
     >
+    visit_halves: Knex.CompositeTableType<VisitHalvesRow, Insert<VisitHalvesRow, 'id' | 'holds'>>
     waivers: Knex.CompositeTableType<
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>

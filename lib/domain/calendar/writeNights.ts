@@ -2,12 +2,14 @@ import { awardedByTelescope, type CallTelescope } from '@/db/queries/callTelesco
 import { siteRecordAt } from '@/db/queries/facility'
 import { deleteNightBlocks, insertNightBlocks, nightBlocksOf } from '@/db/queries/nightBlocks'
 import type { CallsRow } from '@/db/tables'
+import { standingHalves } from '@/db/queries/visits'
 import { refuse } from '@/lib/errors'
-import { formatHoursFromSeconds } from '@/lib/format'
+import { formatCalendarDate, formatHoursFromSeconds } from '@/lib/format'
 import { darkSeconds } from '@/lib/science/sky'
 import type { NightBlock } from '../calls/nightBlock'
 import type { Context } from '../context'
 import { refuseOfferedTwice } from './refuseOfferedTwice'
+import { visitInTheWay } from '../visits/visitInTheWay'
 import type { NightPart } from './types'
 
 interface Change {
@@ -64,6 +66,16 @@ export async function writeNights(tx: Context, change: Change): Promise<NightsWr
     throw refuse.field(
       'mayTakePromised',
       `This takes ${formatHoursFromSeconds(taken)} of ${telescope.name} from time that is promised. Tick this if those it was promised to agree.`,
+    )
+  const visited = visitInTheWay(
+    (await standingHalves(tx.db, call.id)).filter(
+      ({ telescopeId, date }) => telescopeId === telescope.id && nights.has(date),
+    ),
+    after,
+  )
+  if (visited)
+    throw refuse.invalid(
+      `The ${visited.half} half of the night of ${formatCalendarDate(visited.date)} on ${telescope.name} is given to a visit. Nothing was changed.`,
     )
   await deleteNightBlocks(tx.db, call.id, telescope.id, [...nights.keys()])
   await insertNightBlocks(tx.db, call.id, after)
