@@ -10,9 +10,6 @@ export interface LostDispute {
   isSurplus: boolean
 }
 
-/** Days a fee that is asked for again has, unless the office says otherwise. */
-export const graceDaysOffered = 14
-
 /**
  * What the office may make of a lost dispute. Where all of a fee that was paid is gone, the fee is open again: it is
  * asked for, waived, or dropped with its proposal. Of part of a fee, or of money that settled none, the loss is taken.

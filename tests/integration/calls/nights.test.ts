@@ -180,7 +180,7 @@ describe('nights from a file', () => {
   })
 })
 
-// Seen to fail: without the look at other calls, and with a call that kept what it had given up.
+// Seen to fail: without the look at other calls.
 describe('a night that another call offers', () => {
   const offered = /^Call \d+ offers Telescope .* on the night of 10 July 2027 already\. /
 

@@ -33,7 +33,7 @@ beforeEach(async () => {
   billed = await makeBilled(db())
 })
 
-// Seen to fail: with the version that holds printed on every paper, and with the version that was read not compared.
+// Seen to fail: with one version printed on every paper, and with the version that was read not compared.
 describe('what invoices say', () => {
   it('stays as it was written, whatever the office writes afterwards', async () => {
     const { number } = await invoice()

@@ -31,7 +31,7 @@ beforeEach(async () => {
   name = row?.message_id.replace(/[<>]/g, '') ?? ''
 })
 
-// Seen to fail: with delays taken for refusals, with a report taken twice, and with a letter found by its reader alone.
+// Seen to fail: with delays taken for refusals, and with a report taken twice.
 describe('a letter that comes back later', () => {
   it('is found by its Message-ID, and its address is marked as at sending', async () => {
     expect(await take()).toBe('bounced')
