@@ -62,6 +62,21 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BillingRecordsRow {
+  id: number
+  record_version: number
+  name: string
+  address: string
+  tax_number: string
+  contact: string
+  account_holder: string
+  iban: string
+  bic: string
+  bank: string
+  saved_by: number | null
+  created_at: Date
+}
+
 export interface BulkLettersRow {
   id: number
   subject: string
@@ -180,6 +195,7 @@ export interface CreditNotesRow {
   refund_id: number | null
   credited_to: string
   address: string
+  billing_record_id: number | null
   amount_minor: number
   currency: string
   reason: string
@@ -218,6 +234,10 @@ export interface DisputesRow {
   reason: string
   state: 'open' | 'won' | 'lost'
   closed_at: Date | null
+  decision: 'ask-again' | 'waive' | 'withdraw' | 'accept' | null
+  decision_note: string
+  decided_by: number | null
+  decided_at: Date | null
   created_at: Date
 }
 
@@ -228,6 +248,15 @@ export interface EmailTokensRow {
   token_hash: string
   expires_at: Date
   used_at: Date | null
+  created_at: Date
+}
+
+export interface ExpertiseRow {
+  id: number
+  person_id: number
+  kind: 'category' | 'word'
+  term: string
+  level: number | null
   created_at: Date
 }
 
@@ -344,6 +373,7 @@ export interface InvoicesRow {
   fee_id: number
   institute: string
   address: string
+  billing_record_id: number | null
   purchase_order: string
   send_to: string
   amount_minor: number
@@ -356,6 +386,17 @@ export interface InvoicesRow {
   closed_by: number | null
   closed_at: Date | null
   version: number
+  created_at: Date
+}
+
+export interface LeastAwardsRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
   created_at: Date
 }
 
@@ -700,6 +741,7 @@ export interface ProposalPeopleRow {
   created_at: Date
   orcid: string | null
   is_supervisor: 0 | 1
+  version: number
 }
 
 export interface ProposalVersionsRow {
@@ -826,6 +868,18 @@ export interface ScoreEventsRow {
   scale_version: number
   round: 'before-discussion' | 'after-discussion'
   half_points: number | null
+  created_at: Date
+}
+
+export interface ServiceWishesRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  least_seconds: number | null
+  visit_nights: number | null
+  visit_part: 'whole' | 'first' | 'second'
+  visit_together: 0 | 1
+  version: number
   created_at: Date
 }
 
@@ -986,6 +1040,17 @@ export interface TimeTransfersRow {
   created_at: Date
 }
 
+export interface VisitHalvesRow {
+  id: number
+  award_line_id: number
+  call_id: number
+  telescope_id: number
+  evening_date: string
+  half: 'first' | 'second'
+  seconds: number
+  holds: number | null
+}
+
 export interface WaiversRow {
   id: number
   fee_id: number
@@ -1035,6 +1100,10 @@ declare module 'knex/types/tables.js' {
         AwardLinesRow,
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
+    >
+    billing_records: Knex.CompositeTableType<
+      BillingRecordsRow,
+      Insert<BillingRecordsRow, 'id' | 'tax_number' | 'saved_by' | 'created_at'>
     >
     bulk_letters: Knex.CompositeTableType<
       BulkLettersRow,
@@ -1087,7 +1156,10 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     credit_notes: Knex.CompositeTableType<
       CreditNotesRow,
-      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+      Insert<
+        CreditNotesRow,
+        'id' | 'invoice_id' | 'refund_id' | 'address' | 'billing_record_id' | 'created_at'
+      >
     >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
@@ -1108,12 +1180,23 @@ declare module 'knex/types/tables.js' {
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<
       DisputesRow,
-      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+      Insert<
+        DisputesRow,
+        | 'id'
+        | 'state'
+        | 'closed_at'
+        | 'decision'
+        | 'decision_note'
+        | 'decided_by'
+        | 'decided_at'
+        | 'created_at'
+      >
     >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
+    expertise: Knex.CompositeTableType<ExpertiseRow, Insert<ExpertiseRow, 'id' | 'level' | 'created_at'>>
     facility_retirements: Knex.CompositeTableType<
       FacilityRetirementsRow,
       Insert<
@@ -1170,6 +1253,7 @@ declare module 'knex/types/tables.js' {
       Insert<
         InvoicesRow,
         | 'id'
+        | 'billing_record_id'
         | 'purchase_order'
         | 'state'
         | 'asked_by'
@@ -1180,6 +1264,10 @@ declare module 'knex/types/tables.js' {
         | 'version'
         | 'created_at'
       >
+    >
+    least_awards: Knex.CompositeTableType<
+      LeastAwardsRow,
+      Insert<LeastAwardsRow, 'id' | 'superseded_at' | 'created_at'>
     >
     logbook: Knex.CompositeTableType<
       LogbookRow,
@@ -1348,6 +1436,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'orcid'
         | 'is_supervisor'
+        | 'version'
       >
     >
     proposal_versions: Knex.CompositeTableType<
@@ -1409,6 +1498,13 @@ declare module 'knex/types/tables.js' {
     score_events: Knex.CompositeTableType<
       ScoreEventsRow,
       Insert<ScoreEventsRow, 'id' | 'scale_version' | 'half_points' | 'created_at'>
+    >
+    service_wishes: Knex.CompositeTableType<
+      ServiceWishesRow,
+      Insert<
+        ServiceWishesRow,
+        'id' | 'least_seconds' | 'visit_nights' | 'visit_part' | 'visit_together' | 'version' | 'created_at'
+      >
     >
     sessions: Knex.CompositeTableType<
       SessionsRow,
@@ -1492,6 +1588,7 @@ declare module 'knex/types/tables.js' {
       TimeTransfersRow,
       Insert<TimeTransfersRow, 'id' | 'observation_id' | 'share' | 'made_by' | 'created_at'>
     >
+    visit_halves: Knex.CompositeTableType<VisitHalvesRow, Insert<VisitHalvesRow, 'id' | 'holds'>>
     waivers: Knex.CompositeTableType<
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>

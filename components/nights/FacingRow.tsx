@@ -49,6 +49,9 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
             {line.suggestedSeconds > 0 ? (
               <span>
                 <Hours line={line} seconds={line.suggestedSeconds} />
+                {line.suggestedEvenings ? (
+                  <span className="text-muted">, visit on {line.suggestedEvenings}</span>
+                ) : null}
                 {standsInWords(line) ? <span className="text-lamp">{standsInWords(line)}</span> : null}
               </span>
             ) : (

@@ -6,9 +6,9 @@ import type { PolicySummary } from '@/lib/domain/decisions/policySummary'
 import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
 
 const rules: Record<NightsPolicy, string> = {
-  rank: 'In turn, what must have time before the others, each takes what it asked, or as much as its targets can use of what is left, if that is not less than its least useful award: half of what it asked. Those above keep their hours and make room where they can.',
+  rank: 'Visits first, on dates of their own, down to the line. Then, in turn, what must have time before the others, each takes what it asked, or as much as its targets can use of what is left, if that is not less than its least useful award: what the chair set, else what the investigators say, else half of what was asked. Those above keep their hours and make room where they can.',
   merit:
-    'The awards, whole or in part, with the most merit times hours down to the line, merit being the raw mean; what must have time has its least at least. Then the others fill what remains, by rank.',
+    'Visits first, on dates of their own, down to the line. Then the awards, whole or in part, with the most merit times hours down to the line, merit being the raw mean; what must have time has its least at least. Then the others fill what remains, by rank.',
 }
 
 export interface PolicyCardProps {

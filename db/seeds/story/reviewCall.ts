@@ -5,6 +5,10 @@ import { suggestForPanel } from '../../../lib/domain/assignments/suggestForPanel
 import { declareInterests } from '../../../lib/domain/conflicts/declareInterests.ts'
 import { saveFormula } from '../../../lib/domain/rankings/saveFormula.ts'
 import type { SeededCall } from '../calls.ts'
+import { expertiseSchema } from '../../../lib/domain/expertise/schema.ts'
+import { categoryKey } from '../../../lib/domain/expertise/levels.ts'
+import { saveExpertise } from '../../../lib/domain/expertise/saveExpertise.ts'
+import { expertise } from '../expertiseData.ts'
 import { panel } from '../peopleData.ts'
 import type { SeedProposal } from './proposalData.ts'
 import type { Dice } from './random.ts'
@@ -67,6 +71,16 @@ export interface ReviewOptions {
   proposals: Map<string, SeedProposal>
 }
 
+/** Members of the panel say what they know, once for all calls. */
+async function sayWhatIsKnown(story: Teller): Promise<void> {
+  if (await story.db('expertise').first()) return
+  for (const [name, { levels, words }] of Object.entries(expertise)) {
+    const chosen = Object.entries(levels).map(([category, level]) => [categoryKey(category), String(level)])
+    const input = expertiseSchema.parse({ levels: Object.fromEntries(chosen), words: words.join(', ') })
+    await saveExpertise(await story.as(name), input)
+  }
+}
+
 /** The chair starts the review and assigns; reviewers declare, score and write. */
 export async function reviewCall(
   story: Teller,
@@ -83,6 +97,7 @@ export async function reviewCall(
     .then((row) => row ?? { slug: '' })
   await saveFormula(chair, { panelId: call.panelId, formula: 'mean - 0.2 * spread' })
   await startReview(chair, { callId: call.id })
+  await sayWhatIsKnown(story)
   for (const member of panel.slice(1))
     await declareInterests(await story.as(member.name), { callSlug: slug, names: [], wentThrough: true })
   // Dealt out without the solver: the marks below are drawn in the order of these pairs.

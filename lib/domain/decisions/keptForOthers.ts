@@ -8,6 +8,7 @@ import { binnedLine } from '../nights/binnedLine'
 import type { CallBins } from '../nights/callBins'
 import type { PanelDesk } from '../panels/openPanel'
 import { callOrder } from '../sharing/callOrder'
+import { dateOf, type VisitPlan } from '../visits/planVisits'
 import type { PlanTerms } from './planTerms'
 import { wantedLines } from './wantedLines'
 
@@ -25,6 +26,8 @@ export async function keptForOthers(
     bins: readonly NightBin[]
     /** Given to other panels, or to proposals of this one that the asker may not see. */
     standing: readonly BinnedLine[]
+    /** This panel's visits have their nights, which the season lacks already. */
+    visits: VisitPlan
   },
 ): Promise<BinnedLine[]> {
   const shared = await callOrder(db, desk.call.id)
@@ -45,7 +48,7 @@ export async function keptForOthers(
     .filter((id) => !['never', 'filler'].includes(choices.get(id)?.choice ?? ''))
     .map((id) =>
       wanted
-        .filter((line) => line.proposalId === id)
+        .filter((line) => line.proposalId === id && !dateOf(found.visits, line))
         .flatMap((line): BinnedLine[] => {
           const held = contents.get(id)
           const asked = {

@@ -45,7 +45,7 @@ type May<T, K extends keyof T> = Omit<T, K> & Partial<Pick<T, K>>
 
 /** A snapshot that may have been frozen before proposals had all they have now. */
 interface Thawed {
-  contents: Omit<May<ProposalContents, 'groups' | 'writings' | 'figures'>, 'targets'> & {
+  contents: Omit<May<ProposalContents, 'groups' | 'wishes' | 'writings' | 'figures'>, 'targets'> & {
     targets: May<Target, 'group' | 'opportunity' | 'spectrum'>[]
   }
   computation: Omit<May<ProposalComputation, 'groups'>, 'observations'> & {
@@ -61,7 +61,7 @@ function whole({ contents, computation, engineVersion }: Thawed): Snapshot {
   }))
   const observations = computation.observations.map((one) => ({ times: 1, carried: null, ...one }))
   return {
-    contents: { groups: [], writings: unwritten, figures: [], ...contents, targets },
+    contents: { groups: [], wishes: [], writings: unwritten, figures: [], ...contents, targets },
     computation: { groups: [], ...computation, observations },
     engineVersion,
   }

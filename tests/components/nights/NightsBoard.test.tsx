@@ -32,15 +32,17 @@ const line = (given: number, suggested: number): NightsLine => ({
   askedSeconds: 20 * hour,
   wholeSeconds: 20 * hour,
   leastSeconds: 10 * hour,
+  ...{ leastBy: 'half', leastReason: '', visit: null },
   possible: true,
   assessment: null,
   givenSeconds: given * hour,
   isReserve: false,
   service: 'queue',
   conditions: '',
+  ...{ evenings: '', suggestedEvenings: '' },
   suggestedSeconds: suggested * hour,
   standsSeconds: null,
-  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [] },
+  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [], nights: null },
 })
 const row = (rank: number, given: number, suggested: number): NightsRow => ({
   proposalId: rank,
@@ -80,6 +82,7 @@ const view = (...rows: NightsRow[]): NightsView => ({
       suggestedSeconds: 30 * hour,
       heldSeconds: 0,
       heldReason: '',
+      visitSeconds: 0,
       plannedSeconds: 27 * hour,
       bins: [{ half: 1, siderealFromH: 12, moon: 'dark', seconds: 34 * hour, usedSeconds: 30 * hour }],
     },
@@ -91,7 +94,8 @@ const takePlan = vi.fn(() => Promise.resolve({ ok: true as const, data: { awarde
 const save = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
 const choose = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
 const hold = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
-const actions = { save, takePlan, choose, hold }
+const setLeast = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
+const actions = { save, takePlan, choose, hold, setLeast }
 const show = (search = '', initial = before) =>
   render(
     <QueryClientProvider

@@ -10,7 +10,13 @@ import { isTried, trialText } from '@/lib/domain/decisions/trialSchema'
 import { readOrderState } from '@/lib/domain/sharing/readOrderState'
 import { paths } from '@/lib/paths'
 import { panelKey, type PanelPageProps } from '../panelKey'
-import { chooseNightsAction, holdHoursAction, saveAwardAction, takePlanAction } from './actions'
+import {
+  chooseNightsAction,
+  holdHoursAction,
+  saveAwardAction,
+  setLeastAction,
+  takePlanAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Nights' }
 
@@ -19,6 +25,7 @@ const actions = {
   takePlan: takePlanAction,
   choose: chooseNightsAction,
   hold: holdHoursAction,
+  setLeast: setLeastAction,
 }
 
 export default async function NightsPage(props: PanelPageProps) {
