@@ -27,6 +27,7 @@ import type { WithholdAction } from './CommentRow'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
 import { decisionColumns } from './decisionColumns'
+import { ReportLinks } from './ReportLinks'
 import { StatementForm } from './StatementForm'
 
 export interface DecisionsBoardProps {
@@ -128,6 +129,14 @@ export function DecisionsBoard({ initial, prepare, save, approve, withhold, rele
           </BarNote>
         )}
       </div>
+      {view.isFrozen ? (
+        <div className="mt-4">
+          <ReportLinks
+            pdf={paths.panelReportFile(view.callSlug, 'report.pdf', panelId)}
+            csv={paths.panelReportFile(view.callSlug, 'report.csv', panelId)}
+          />
+        </div>
+      ) : null}
       <SeasonsNote seasons={seasons} of="given" onOf={null} />
       <div className="mt-6">
         <DataTable

@@ -14,6 +14,7 @@ import { ApproveOthers } from './ApproveOthers'
 import { decisionColumns } from './decisionColumns'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
+import { ReportLinks } from './ReportLinks'
 
 /** The office as second person: what each panel prepared, read before it is approved. */
 export function OfficeDecisions({
@@ -44,6 +45,14 @@ export function OfficeDecisions({
             title={panel.name}
             aside={<ApproveOthers rows={panel.rows} panelId={panel.panelId} approve={approve} />}
           />
+          {panel.isFrozen ? (
+            <div className="mt-3">
+              <ReportLinks
+                pdf={paths.officeReportFile(view.callSlug, 'report.pdf', panel.panelId)}
+                csv={paths.officeReportFile(view.callSlug, 'report.csv', panel.panelId)}
+              />
+            </div>
+          ) : null}
           <div className="mt-4">
             <DataTable
               caption={`Decisions of ${panel.name}`}
