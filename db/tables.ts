@@ -145,6 +145,10 @@ export interface CallKindsRow {
   word_limit: number
   needs_student: 0 | 1
   figure_limit: number | null
+  target_limit: number | null
+  takes_awaited: 0 | 1
+  needs_cadence: 0 | 1
+  needs_last_night: 0 | 1
 }
 
 export interface CallModesRow {
@@ -1128,7 +1132,17 @@ declare module 'knex/types/tables.js' {
       CallKindsRow,
       Insert<
         CallKindsRow,
-        'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student' | 'figure_limit'
+        | 'id'
+        | 'closes_at'
+        | 'max_seconds'
+        | 'fee_minor'
+        | 'word_limit'
+        | 'needs_student'
+        | 'figure_limit'
+        | 'target_limit'
+        | 'takes_awaited'
+        | 'needs_cadence'
+        | 'needs_last_night'
       >
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
