@@ -80,6 +80,7 @@ export const actionAccess = {
   holdHours: chair,
   prepareDecisions: chair,
   saveStatement: chair,
+  openDecision: ['chair', 'office'],
   approveDecisions: ['chair', 'office'],
   withholdComment: chair,
   releaseDecisions: chair,
