@@ -52,6 +52,8 @@ export const actionAccess = {
   passToPanel: scientist,
   answerQuestion: investigator,
   saveExpertise: reviewer,
+  leaveReview: reviewer,
+  leaveTable: ['reviewer', 'chair'],
   declareInterests: reviewer,
   saveScore: reviewer,
   saveReviewText: reviewer,
