@@ -223,6 +223,14 @@ export interface DecisionsRow {
   approved_at: Date | null
 }
 
+export interface DecisionOpeningsRow {
+  id: number
+  decision_id: number
+  version: number
+  person_id: number
+  created_at: Date
+}
+
 export interface DemographicsRow {
   person_id: number
   purpose: string
@@ -1190,6 +1198,10 @@ declare module 'knex/types/tables.js' {
         | 'approved_version'
         | 'approved_at'
       >
+    >
+    decision_openings: Knex.CompositeTableType<
+      DecisionOpeningsRow,
+      Insert<DecisionOpeningsRow, 'id' | 'created_at'>
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<
