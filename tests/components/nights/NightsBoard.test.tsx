@@ -65,8 +65,8 @@ const view = (...rows: NightsRow[]): NightsView => ({
   hasRanking: true,
   policy: 'rank',
   policies: [
-    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, why: null },
-    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, why: null },
+    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, gap: null, why: null },
+    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, gap: 0.0012, why: null },
   ],
   line: 2,
   weather: { isRecorded: true, lostShare: 0.2 },
