@@ -62,6 +62,21 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BillingRecordsRow {
+  id: number
+  record_version: number
+  name: string
+  address: string
+  tax_number: string
+  contact: string
+  account_holder: string
+  iban: string
+  bic: string
+  bank: string
+  saved_by: number | null
+  created_at: Date
+}
+
 export interface BulkLettersRow {
   id: number
   subject: string
@@ -180,6 +195,7 @@ export interface CreditNotesRow {
   refund_id: number | null
   credited_to: string
   address: string
+  billing_record_id: number | null
   amount_minor: number
   currency: string
   reason: string
@@ -218,6 +234,10 @@ export interface DisputesRow {
   reason: string
   state: 'open' | 'won' | 'lost'
   closed_at: Date | null
+  decision: 'ask-again' | 'waive' | 'withdraw' | 'accept' | null
+  decision_note: string
+  decided_by: number | null
+  decided_at: Date | null
   created_at: Date
 }
 
@@ -228,6 +248,15 @@ export interface EmailTokensRow {
   token_hash: string
   expires_at: Date
   used_at: Date | null
+  created_at: Date
+}
+
+export interface ExpertiseRow {
+  id: number
+  person_id: number
+  kind: 'category' | 'word'
+  term: string
+  level: number | null
   created_at: Date
 }
 
@@ -344,6 +373,7 @@ export interface InvoicesRow {
   fee_id: number
   institute: string
   address: string
+  billing_record_id: number | null
   purchase_order: string
   send_to: string
   amount_minor: number
@@ -397,6 +427,38 @@ export interface LogbookChecksRow {
 export interface LogbookHeadRow {
   id: number
   last_hash: string
+}
+
+export interface MergedEntriesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  ranking_id: number
+  place: number
+  used_share: number | null
+  is_near: 0 | 1
+}
+
+export interface MergedListsRow {
+  id: number
+  call_id: number
+  list_version: number
+  frozen_at: Date | null
+  made_by: number | null
+  superseded_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface MergeMovesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  from_place: number
+  to_place: number
+  reason: string
+  moved_by: number | null
+  created_at: Date
 }
 
 export interface ModeRecordsRow {
@@ -679,6 +741,7 @@ export interface ProposalPeopleRow {
   created_at: Date
   orcid: string | null
   is_supervisor: 0 | 1
+  version: number
 }
 
 export interface ProposalVersionsRow {
@@ -827,6 +890,17 @@ export interface SessionsRow {
   expires_at: Date
   ended_at: Date | null
   user_agent: string
+  created_at: Date
+}
+
+export interface ShareRulesRow {
+  id: number
+  call_id: number
+  rule: 'hours' | 'proposals' | 'fixed'
+  percents: string | null
+  reason: string
+  made_by: number
+  superseded_at: Date | null
   created_at: Date
 }
 
@@ -1027,6 +1101,10 @@ declare module 'knex/types/tables.js' {
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
     >
+    billing_records: Knex.CompositeTableType<
+      BillingRecordsRow,
+      Insert<BillingRecordsRow, 'id' | 'tax_number' | 'saved_by' | 'created_at'>
+    >
     bulk_letters: Knex.CompositeTableType<
       BulkLettersRow,
       Insert<
@@ -1078,7 +1156,10 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     credit_notes: Knex.CompositeTableType<
       CreditNotesRow,
-      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+      Insert<
+        CreditNotesRow,
+        'id' | 'invoice_id' | 'refund_id' | 'address' | 'billing_record_id' | 'created_at'
+      >
     >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
@@ -1099,12 +1180,23 @@ declare module 'knex/types/tables.js' {
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<
       DisputesRow,
-      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+      Insert<
+        DisputesRow,
+        | 'id'
+        | 'state'
+        | 'closed_at'
+        | 'decision'
+        | 'decision_note'
+        | 'decided_by'
+        | 'decided_at'
+        | 'created_at'
+      >
     >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
       Insert<EmailTokensRow, 'id' | 'used_at' | 'created_at'>
     >
+    expertise: Knex.CompositeTableType<ExpertiseRow, Insert<ExpertiseRow, 'id' | 'level' | 'created_at'>>
     facility_retirements: Knex.CompositeTableType<
       FacilityRetirementsRow,
       Insert<
@@ -1161,6 +1253,7 @@ declare module 'knex/types/tables.js' {
       Insert<
         InvoicesRow,
         | 'id'
+        | 'billing_record_id'
         | 'purchase_order'
         | 'state'
         | 'asked_by'
@@ -1185,6 +1278,15 @@ declare module 'knex/types/tables.js' {
       Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
+    merged_entries: Knex.CompositeTableType<MergedEntriesRow, Insert<MergedEntriesRow, 'id' | 'used_share'>>
+    merged_lists: Knex.CompositeTableType<
+      MergedListsRow,
+      Insert<MergedListsRow, 'id' | 'frozen_at' | 'made_by' | 'superseded_at' | 'version' | 'created_at'>
+    >
+    merge_moves: Knex.CompositeTableType<
+      MergeMovesRow,
+      Insert<MergeMovesRow, 'id' | 'moved_by' | 'created_at'>
+    >
     mode_records: Knex.CompositeTableType<
       ModeRecordsRow,
       Insert<
@@ -1334,6 +1436,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'orcid'
         | 'is_supervisor'
+        | 'version'
       >
     >
     proposal_versions: Knex.CompositeTableType<
@@ -1406,6 +1509,10 @@ declare module 'knex/types/tables.js' {
     sessions: Knex.CompositeTableType<
       SessionsRow,
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
+    >
+    share_rules: Knex.CompositeTableType<
+      ShareRulesRow,
+      Insert<ShareRulesRow, 'id' | 'percents' | 'superseded_at' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<

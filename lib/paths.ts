@@ -4,10 +4,11 @@ const part = encodeURIComponent
 export type ProposalSection =
   'question' | 'targets' | 'cosmology' | 'observing' | 'feasibility' | 'people' | 'papers' | 'send'
 
-export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
+export type PanelPage =
+  'assignments' | 'progress' | 'discussion' | 'ranking' | 'between' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
-export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+export type OfficeCallPage = 'rules' | 'nights' | 'between' | 'figures' | 'preview'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
@@ -40,6 +41,10 @@ export const paths = {
     `/proposals/${part(reference)}/${section}`,
   proposalPaper: (reference: string, paper: number | string) =>
     `/proposals/${part(reference)}/papers/${part(String(paper))}`,
+  /** Where a document is sent to, and the one that replaces it after the proposal was sent. */
+  newPaper: (reference: string) => `/proposals/${part(reference)}/papers/new`,
+  paperReplacement: (reference: string) => `/proposals/${part(reference)}/papers/replacement`,
+  newFigure: (reference: string) => `/proposals/${part(reference)}/figures`,
   proposalFigure: (reference: string, figure: number | string, sha256: string) =>
     `/proposals/${part(reference)}/figures/${part(String(figure))}?v=${sha256.slice(0, 8)}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
@@ -66,6 +71,7 @@ export const paths = {
   assessmentReport: (request: number | string) => `/assessments/${part(String(request))}/report`,
 
   reviews: () => '/reviews',
+  expertise: () => '/reviews/expertise',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
   meeting: (callSlug: string) => `/reviews/meeting/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
@@ -102,6 +108,7 @@ export const paths = {
   officePersonData: (person: number) => `/office/people/${person}/data`,
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',
+  officeInvoicing: () => '/office/fees/invoicing',
   officeReconciliation: () => '/office/fees/reconciliation',
   newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
   retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>

@@ -9,11 +9,13 @@ import type { FeeView } from '@/lib/domain/fees/readFee'
 import type {
   AskForInvoiceForm,
   CancelInvoiceForm as CancelInput,
+  DecideDisputeForm,
   RecordTransferForm,
   RefundFeeForm,
   SettleInvoiceForm as SettleInput,
 } from '@/lib/domain/fees/schema'
 import { CancelInvoiceForm } from './CancelInvoiceForm'
+import { DisputeForm } from './DisputeForm'
 import { InvoiceForm } from './InvoiceForm'
 import { RefundForm } from './RefundForm'
 import { SettleInvoiceForm } from './SettleInvoiceForm'
@@ -25,6 +27,7 @@ export interface FeeDeeds {
   settle: FormAction<SettleInput, unknown>
   cancel: FormAction<CancelInput, { creditNote: string }>
   transfer: FormAction<RecordTransferForm, unknown>
+  dispute: FormAction<DecideDisputeForm, unknown>
 }
 
 type Deed = 'refund' | 'invoice' | 'settle' | 'cancel'
@@ -47,6 +50,14 @@ export function FeeActions({ fee, deeds }: { fee: FeeView; deeds: FeeDeeds }) {
   ]
   return (
     <div className="flex flex-col gap-5">
+      {fee.lostDispute ? (
+        <DisputeForm
+          lost={fee.lostDispute}
+          currency={fee.currency}
+          action={deeds.dispute}
+          onDone={() => done('The dispute is decided')}
+        />
+      ) : null}
       {fee.transfers.map((transfer) => (
         <TransferForm
           key={transfer.refundId}

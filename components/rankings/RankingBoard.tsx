@@ -89,7 +89,7 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
             />
           ) : null}
           <FormulaPanel view={view} action={actions.formula} />
-          <RankingChanges view={view} />
+          <RankingChanges changes={view.changes} />
           <LeniencyChart view={view} />
           <Agreement view={view} />
         </aside>

@@ -20,6 +20,7 @@ import { rowViews } from './rowViews'
 import { TargetTable } from './TargetTable'
 import type { TargetActions } from './targetActions'
 import { useTargetRows } from './useTargetRows'
+import { useUndoKey } from './useUndoKey'
 
 const columnIds = numberColumns.map(({ id }) => id)
 const shownFirst = numberColumns.filter((column) => column.shownFirst).map(({ id }) => id)
@@ -35,7 +36,8 @@ const monthName = (date: string) => formatCalendarDate(date, false).replace(/^\d
 
 /** The targets page: the table one types into, the file one drops, and what both come to. */
 export function TargetsEditor({ contents, computation, readOnly, actions }: TargetsEditorProps) {
-  const { places, typedContents, rowDeeds, begin, last, undo } = useTargetRows(contents, actions)
+  const { places, typedContents, rowDeeds, groupDeeds, begin, last, undo } = useTargetRows(contents, actions)
+  useUndoKey(() => void undo())
   const live = useLiveComputation(contents, computation, typedContents)
   const [shown, setShown] = useQueryState(
     'columns',
@@ -116,13 +118,12 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
             groups={groups}
             takesAwaited={takesAwaited}
             deeds={rowDeeds}
-            onUndo={() => void undo()}
           />
         )}
         {rows.length > 0 && readOnly === null ? (
           <p className="m-0 mt-2 text-caption text-muted max-sm:hidden">
             Arrows and Enter move through the cells. A block copied from a spreadsheet fills the cells from
-            the one it is pasted into; Ctrl Z, or ⌘ Z, takes the last change back.
+            the one it is pasted into; Ctrl Z, or ⌘ Z, takes the last change back, to cells, hours or groups.
           </p>
         ) : null}
       </div>
@@ -130,7 +131,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
         contents={contents}
         computed={live.groups}
         readOnly={readOnly !== null}
-        actions={actions}
+        actions={groupDeeds}
       />
       {readOnly ? null : (
         <div className="mt-10">

@@ -52,6 +52,12 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE g.given > COALESCE(o.offered, 0) - COALESCE(h.held, 0)`,
   ],
   [
+    'I3 two calls do not offer the same part of a night of a telescope, and none divides a night in parts that overlap',
+    `SELECT a.id FROM night_blocks a JOIN night_blocks b ON b.evening_date = a.evening_date AND b.telescope_id = a.telescope_id
+        AND b.id > a.id AND a.fraction_from < b.fraction_to AND b.fraction_from < a.fraction_to
+      WHERE a.call_id = b.call_id OR (a.use_for = 'science' AND b.use_for = 'science')`,
+  ],
+  [
     'I3 what is never to be given time is given none',
     `SELECT n.id FROM night_choices n JOIN decisions d ON d.proposal_id = n.proposal_id JOIN award_lines a ON a.decision_id = d.id
       WHERE n.choice = 'never' AND n.superseded_at IS NULL AND d.superseded_at IS NULL AND a.superseded_at IS NULL AND a.seconds > 0`,
@@ -81,6 +87,15 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
               - GREATEST(b.fraction_from, IF(v.half = 'first', 0, 0.5)))), 0) < 0.499`,
   ],
   [
+    'I3 a list of all panels keeps the order of each, and one stands for a call',
+    `SELECT a.id FROM merged_entries a JOIN merged_entries b ON b.list_id = a.list_id AND b.ranking_id = a.ranking_id AND b.place > a.place
+      JOIN ranking_entries x ON x.ranking_id = a.ranking_id AND x.proposal_id = a.proposal_id
+      JOIN ranking_entries y ON y.ranking_id = b.ranking_id AND y.proposal_id = b.proposal_id
+      WHERE x.place > y.place
+      UNION ALL SELECT call_id FROM merged_lists WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1
+      UNION ALL SELECT call_id FROM share_rules WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1`,
+  ],
+  [
     'I4 nobody with an interest holds an assignment or a score',
     `SELECT a.id FROM assignments a JOIN conflicts c ON c.person_id = a.person_id AND c.proposal_id = a.proposal_id
       WHERE c.severity = 'barred' AND c.until_at IS NULL AND a.withdrawn_at IS NULL`,
@@ -96,6 +111,10 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
         AND (approved_by IS NULL OR approved_by = changed_by OR approved_version <> version - 1)`,
   ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
+  [
+    'I5 a letter to somebody erased keeps the address only until it goes',
+    "SELECT id FROM outbox WHERE template = 'person-erased' AND state NOT IN ('queued', 'sending') AND to_email <> 'erased@erased.invalid'",
+  ],
   [
     'I5 no letter to many goes twice to one address',
     'SELECT bulk_letter_id FROM outbox WHERE bulk_letter_id IS NOT NULL GROUP BY bulk_letter_id, to_email HAVING COUNT(*) > 1',

@@ -32,6 +32,7 @@ export function investigator(id: number, more: Partial<Investigator> = {}): Inve
     isOrcidVerified: false,
     position: id,
     confirmedAt: new Date('2027-03-01T00:00:00Z'),
+    version: 1,
     ...more,
   }
 }

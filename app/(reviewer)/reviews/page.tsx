@@ -5,14 +5,18 @@ import { ReviewProgress } from '@/components/reviews/ReviewProgress'
 import { ReviewsTable } from '@/components/reviews/ReviewsTable'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
+import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
+import { readExpertise } from '@/lib/domain/expertise/readExpertise'
 import { readReviewLines } from '@/lib/domain/reviews/readReviewLines'
+import { paths } from '@/lib/paths'
 
 export const metadata: Metadata = { title: 'Reviews' }
 
 export default async function ReviewsPage() {
   const ctx = await openPage('/reviews')
   const calls = await readReviewLines(ctx)
+  const { hasStated } = await readExpertise(ctx)
   const lines = calls.flatMap((group) => group.lines)
   return (
     <Main>
@@ -20,6 +24,12 @@ export default async function ReviewsPage() {
         title="Your reviews"
         lead="Proposals come without names, and investigators never learn who read them."
       />
+      <p className="mt-3 mb-0 text-table text-muted">
+        {hasStated
+          ? 'You have said what you know best. '
+          : 'You have not said yet what you know best: chairs give proposals to readers who know the subject. '}
+        <TextLink href={paths.expertise()}>{hasStated ? 'Change it' : 'Say it'}</TextLink>
+      </p>
       <div className="mt-6 flex flex-col gap-8">
         {calls.map((group) =>
           group.hasDeclared ? (

@@ -10,10 +10,13 @@ import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import { connectedGroups } from '@/lib/panel/statistics'
 import { barredPairs } from '../conflicts/barredPairs'
 import type { ActingContext } from '../context'
+import { panelAffinity } from '../expertise/panelAffinity'
 import { openPanel } from '../panels/openPanel'
 import { interestInWords, whyNotReminded } from './rules'
 import type { AssignmentsView } from './assignmentsView'
 
+/** Two decimals are sent: more would say more than is known. */
+const rounded = (value: number | null) => (value === null ? null : Math.round(value * 100) / 100)
 const stateOf = (a: PanelAssignment) => (a.finishedAt ? 'finished' : a.begun ? 'begun' : 'to-read')
 
 /** Who reads what on a panel, and how far they are; proposals kept from the reader of this page are in no row and no count. */
@@ -33,11 +36,11 @@ export async function readAssignments(
     declarationsIn(ctx.db, call.id),
     lastReminders(ctx.db, panel.id),
   ])
-  const barred = await barredPairs(
-    ctx.db,
-    call.id,
-    members.map(({ personId }) => personId),
-  )
+  const people = members.map(({ personId }) => personId)
+  const [barred, affinity] = await Promise.all([
+    barredPairs(ctx.db, call.id, people),
+    panelAffinity(ctx.db, ids, people),
+  ])
   const standing = all.filter((a) => numbers.has(a.proposalId))
   return {
     panelId: panel.id,
@@ -64,6 +67,7 @@ export async function readAssignments(
             .map((pair) => [pair.personId, { personId: pair.personId, words: interestInWords(pair) }]),
         ).values(),
       ],
+      affinities: people.map((personId) => rounded(affinity.of(proposal.id, personId))),
     })),
     reviewers: members.map((member) => {
       const own = standing.filter((a) => a.personId === member.personId)
@@ -75,6 +79,7 @@ export async function readAssignments(
         name: member.name,
         mayReview: member.mayReview,
         hasDeclared: declared.has(member.personId),
+        hasStated: affinity.stated.has(member.personId),
         proposals: own.length,
         pages: own.reduce((sum, a) => sum + (pages.get(a.proposalId) ?? 0), 0),
         finished: own.length - open.length,

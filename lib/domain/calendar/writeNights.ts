@@ -8,6 +8,7 @@ import { formatCalendarDate, formatHoursFromSeconds } from '@/lib/format'
 import { darkSeconds } from '@/lib/science/sky'
 import type { NightBlock } from '../calls/nightBlock'
 import type { Context } from '../context'
+import { refuseOfferedTwice } from './refuseOfferedTwice'
 import { visitInTheWay } from '../visits/visitInTheWay'
 import type { NightPart } from './types'
 
@@ -17,6 +18,8 @@ interface Change {
   /** Evenings with what each becomes. */
   nights: ReadonlyMap<string, readonly NightPart[]>
   mayTakePromised: boolean
+  /** Where a refusal of a night is shown: the field it was typed in. */
+  field: 'from' | 'text'
 }
 
 const secondsOf = (blocks: readonly NightBlock[], useFor: NightBlock['useFor']) =>
@@ -29,7 +32,7 @@ export interface NightsWritten {
 
 /**
  * Writes what some nights of a telescope are for, dark time computed from the real sky. What is awarded cannot be
- * taken, and what is promised only when those it was promised to agree.
+ * taken, what is promised only when those it was promised to agree, and what another call offers not at all.
  */
 export async function writeNights(tx: Context, change: Change): Promise<NightsWritten> {
   const { call, telescope, nights } = change
@@ -44,6 +47,13 @@ export async function writeNights(tx: Context, change: Change): Promise<NightsWr
       darkSeconds: darkSeconds({ site, date: eveningDate, from: part.from, to: part.to }),
     })),
   )
+  await refuseOfferedTwice(tx, {
+    callId: call.id,
+    telescopes: [telescope],
+    blocks: after,
+    field: change.field,
+    before: change.field === 'text' ? 'Nothing was taken. ' : '',
+  })
   const offered = secondsOf(all, 'science') - secondsOf(before, 'science') + secondsOf(after, 'science')
   const awarded = (await awardedByTelescope(tx.db, call.id)).get(telescope.id) ?? 0
   if (offered < awarded)

@@ -7,9 +7,10 @@ import { binnedLine } from '../nights/binnedLine'
 import type { CallBins } from '../nights/callBins'
 import type { ReportContents } from '../observations/reportContents'
 import type { PanelDesk } from '../panels/openPanel'
-import type { VisitPlan } from '../visits/planVisits'
+import { dateOf, type VisitPlan } from '../visits/planVisits'
 import { isVisit } from '../visits/visitLines'
 import { arrangeAsked } from './arrangeAsked'
+import { keptForOthers } from './keptForOthers'
 import { meritOf } from './meritOf'
 import { planByMerit } from './planByMerit'
 import type { PlannedNights } from './planNights'
@@ -66,7 +67,9 @@ export async function divideQueue(
     const line = { proposal, instrument, telescope, seconds, least, possible }
     return [keptLine(binnedLine(line, held, season), terms.kept)]
   }
-  const standing = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const given = elsewhere.flatMap((line) => binned({ ...line, least: line.seconds, possible: true }))
+  const kept = await keptForOthers(ctx.db, desk, { season, terms, bins, standing: given, visits })
+  const standing = [...given, ...kept]
   const queued = order
     .filter((id) => !setAside.has(id))
     .map((id) => {
@@ -84,9 +87,6 @@ export async function divideQueue(
   const withoutQueue = new Set(found.plan.notGiven.map(({ proposal }) => proposal))
   return { bins, asked, standing, withoutQueue, ...found }
 }
-
-const dateOf = ({ dated }: VisitPlan, line: WantedLine) =>
-  dated.find(({ proposal, instrument }) => proposal === line.proposalId && instrument === line.instrumentId)
 
 /** A plan with the visits among what it gives. */
 function withDated(plan: BinnedPlan, { dated }: VisitPlan): BinnedPlan {

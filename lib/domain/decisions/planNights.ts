@@ -33,7 +33,7 @@ export interface PlannedNights {
   /** What may be planned with: the season's bins less weather and what is held back. */
   bins: NightBin[]
   asked: ArrangedAsked
-  /** Given by other panels, or to proposals that the asker may not see. */
+  /** Given by other panels, kept for them by the order of all panels, or given to proposals the asker may not see. */
   standing: BinnedLine[]
   policy: NightsPolicy
   /** Visits among what is given, without bins. */

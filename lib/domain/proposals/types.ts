@@ -21,6 +21,8 @@ export interface Investigator {
   isOrcidVerified: boolean
   position: number
   confirmedAt: Date | null
+  /** Raised by every change of what is said of the person; rights and order are not counted. */
+  version: number
 }
 
 export interface Brightness {

@@ -48,3 +48,10 @@ export async function planVisits(
   })
   return { asked, placed, dated, notPlaced: placed.notPlaced }
 }
+
+/** The visit of a line, if it has its dates. */
+export const dateOf = (
+  { dated }: Pick<VisitPlan, 'dated'>,
+  line: Pick<WantedLine, 'proposalId' | 'instrumentId'>,
+): DatedVisit | undefined =>
+  dated.find(({ proposal, instrument }) => proposal === line.proposalId && instrument === line.instrumentId)
