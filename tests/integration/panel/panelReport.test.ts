@@ -76,7 +76,7 @@ async function meet() {
     lines: [
       {
         ...{ instrumentId: call.instrumentId, hours: 30 * 3600, isReserve: false },
-        ...{ service: 'queue', conditions: 'dark time, seeing below 0.8 arcsec' },
+        ...{ service: 'queue', evenings: [], conditions: 'dark time, seeing below 0.8 arcsec' },
       },
     ],
   })
