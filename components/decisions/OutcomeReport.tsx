@@ -27,7 +27,7 @@ function AwardList({ decision }: { decision: Decision }) {
               {line.conditions ? <span className="block">{line.conditions}</span> : null}
             </>
           ),
-          value: formatHoursFromSeconds(line.seconds),
+          value: <span className="whitespace-nowrap">{formatHoursFromSeconds(line.seconds)}</span>,
         })),
         {
           term: 'Awarded',

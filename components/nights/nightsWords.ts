@@ -95,3 +95,12 @@ export function plannedInWords(
       : '.'
   return `${formatHoursFromSeconds(plannedSeconds)} to plan with: ${lost}${visits}${held}`
 }
+
+/** `, visit on 2027-05-03, one of two nights`: the nights suggested, and how many were asked for where these are fewer. */
+export function visitSuggestedInWords(line: Pick<NightsLine, 'suggestedEvenings' | 'visit'>): string {
+  const count = line.suggestedEvenings.split(', ').length
+  const asked = line.visit?.nights ?? count
+  const part =
+    count < asked ? `, ${countInWords(count, 'of', 'of')} ${countInWords(asked, 'night', 'nights')}` : ''
+  return `, visit on ${line.suggestedEvenings}${part}`
+}

@@ -117,10 +117,16 @@ async function planned(
   })
   const why = 'why' in solved ? solved.why : null
   const byMerit = 'why' in solved ? null : withDated(solved, visits)
+  const gap =
+    'why' in solved || solved.boundMeritHours <= 0
+      ? null
+      : Math.max(0, 1 - solved.meritHours / solved.boundMeritHours)
   const summarised = { rank: byRank, merit: byMerit }
   return {
     policy: policy === 'merit' && byMerit ? 'merit' : 'rank',
     plan: policy === 'merit' && byMerit ? byMerit : byRank,
-    policies: nightsPolicy.options.map((name) => summaryOf(name, summarised[name], { above, merit, why })),
+    policies: nightsPolicy.options.map((name) =>
+      summaryOf(name, summarised[name], { above, merit, gap: name === 'merit' ? gap : null, why }),
+    ),
   }
 }

@@ -65,8 +65,8 @@ const view = (...rows: NightsRow[]): NightsView => ({
   hasRanking: true,
   policy: 'rank',
   policies: [
-    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, why: null },
-    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, why: null },
+    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, gap: null, why: null },
+    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, gap: 0.0012, why: null },
   ],
   line: 2,
   weather: { isRecorded: true, lostShare: 0.2 },
@@ -166,7 +166,7 @@ describe('the nights', () => {
     const [name, text] = saved.mock.lastCall as [string, string]
     expect(name).toBe('nights-call-13.csv')
     expect(text.trim().split(/\r?\n/)).toHaveLength(2)
-    expect(text).toContain('13-002,Question 2,Aldous,SPINDLE,20,10,10,12')
+    expect(text).toContain('13-002,Question 2,Aldous,SPINDLE,20,10,,10,12')
     await userEvent.type(screen.getByRole('searchbox'), 'Question 3')
     expect(screen.queryAllByRole('rowheader')).toEqual([])
     await userEvent.click(screen.getByRole('button', { name: 'Show all' }))

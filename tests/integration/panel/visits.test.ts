@@ -123,8 +123,10 @@ describe('visits in the suggestion', () => {
     const second = await lineOf(p[1])
     expect(second?.whyNot).toMatchObject({ reason: 'nights-taken', nights: { least: 5 } })
     expect(second?.whyNot?.displaces.map(({ reviewNumber }) => reviewNumber)).toEqual([p[0].reviewNumber])
+    await wish(p[2], { nights: 1, part: 'whole', together: true })
+    expect((await lineOf(p[2]))?.suggestedSeconds).toBeGreaterThan(8 * h)
     await draw(1)
-    expect((await lineOf(p[2]))?.whyNot?.reason).toBe('below-line')
+    expect(await lineOf(p[2])).toMatchObject({ suggestedSeconds: 0, whyNot: { reason: 'below-line' } })
   })
 })
 
@@ -161,6 +163,7 @@ describe('visits that are given', () => {
     await block('2027-07-05', { use_for: 'engineering' })
     expect((await refused(give(p[0], '2027-07-05 second'))).fieldErrors).toHaveProperty([at])
     expect(eveningsTyped.safeParse('2027-13-01').success).toBe(false)
+    expect(eveningsTyped.safeParse('2027-02-30').success).toBe(false)
     expect(eveningsTyped.safeParse('2027-07-02 third').success).toBe(false)
   })
 
