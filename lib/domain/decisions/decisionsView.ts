@@ -19,6 +19,7 @@ export const decisionRow = z.object({
       instrument: z.string(),
       seconds: z.number(),
       isReserve: z.boolean(),
+      service: z.enum(['queue', 'visitor']),
       conditions: z.string(),
     }),
   ),

@@ -175,12 +175,12 @@ export function awardsSection({ rows }: ReportFacts): ReportSection {
         { head: 'Title', width: 180 },
         { head: 'Instrument', width: 70 },
         { head: 'Hours', width: 44, align: 'right' },
-        { head: 'As', width: 55 },
+        { head: 'How', width: 55 },
         { head: 'Conditions', width: 110 },
       ],
       rows: lines.map(({ ranked, line }) => [
         ...[ranked.reviewNumber, ranked.title, line.instrument, formatNumber(line.seconds / 3600, 1)],
-        ...[line.isReserve ? 'reserve' : 'award', line.conditions || 'none'],
+        ...[line.isReserve ? 'reserve' : line.service, line.conditions || 'none'],
       ]),
     },
   }
