@@ -4,10 +4,13 @@ const part = encodeURIComponent
 export type ProposalSection =
   'question' | 'targets' | 'cosmology' | 'observing' | 'feasibility' | 'people' | 'papers' | 'send'
 
-export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
+export type PanelPage =
+  'assignments' | 'progress' | 'discussion' | 'ranking' | 'between' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
-export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+export type OfficeCallPage = 'rules' | 'nights' | 'between' | 'figures' | 'preview'
+/** A form in which a panel's report is handed out. */
+type ReportFileName = 'report.pdf' | 'report.csv'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
@@ -70,6 +73,7 @@ export const paths = {
   assessmentReport: (request: number | string) => `/assessments/${part(String(request))}/report`,
 
   reviews: () => '/reviews',
+  expertise: () => '/reviews/expertise',
   interests: (callSlug: string) => `/reviews/interests/${part(callSlug)}`,
   meeting: (callSlug: string) => `/reviews/meeting/${part(callSlug)}`,
   review: (assignment: number | string) => `/reviews/${part(String(assignment))}`,
@@ -84,6 +88,8 @@ export const paths = {
 
   panelPlan: (callSlug: string, file: PlanFileName, panelId: number) =>
     `/panel/${part(callSlug)}/plan/${file}?panel=${panelId}`,
+  panelReportFile: (callSlug: string, file: ReportFileName, panelId: number) =>
+    `/panel/${part(callSlug)}/report/${file}?panel=${panelId}`,
   panelTeam: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
@@ -106,6 +112,7 @@ export const paths = {
   officePersonData: (person: number) => `/office/people/${person}/data`,
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',
+  officeInvoicing: () => '/office/fees/invoicing',
   officeReconciliation: () => '/office/fees/reconciliation',
   newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
   retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>
@@ -113,6 +120,8 @@ export const paths = {
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
+  officeReportFile: (slug: string, file: ReportFileName, panelId: number) =>
+    `/office/calls/${part(slug)}/report/${file}?panel=${panelId}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
   officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
   officeProposal: (slug: string, reference: string) =>

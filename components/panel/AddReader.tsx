@@ -2,7 +2,10 @@
 
 import { Plus } from 'lucide-react'
 import { Popover } from '@/components/ui/Popover'
+import { countInWords } from '@/lib/format'
 import type { AssignmentRow } from '@/lib/domain/assignments/assignmentsView'
+import { AffinityMark } from './AffinityMark'
+import { affinityOf } from './affinityOf'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { freeReviewers } from './freeReviewers'
 
@@ -10,7 +13,7 @@ export interface AddReaderProps extends Pick<AssignmentsTableProps, 'view' | 'on
   row: AssignmentRow
 }
 
-/** Adds a reader: who may, lightest load first; who may not, and why. */
+/** Adds a reader: who may, nearest to the subject first; who may not, and why. */
 export function AddReader({ view, row, onAdd }: AddReaderProps) {
   const free = freeReviewers(view, row)
   const has = (seat: 'first' | 'second') => row.readers.some((reader) => reader.seat === seat)
@@ -44,9 +47,14 @@ export function AddReader({ view, row, onAdd }: AddReaderProps) {
                 )
               }
             >
-              <span>{reviewer.name}</span>
-              <span className="text-muted">
-                {reviewer.proposals} proposals, {reviewer.pages} pages
+              <span>
+                {reviewer.name}
+                <span className="block text-caption text-muted">
+                  <AffinityMark affinity={affinityOf(view, row, reviewer.personId)} />
+                </span>
+              </span>
+              <span className="shrink-0 text-muted">
+                {countInWords(reviewer.proposals, 'proposal')}, {countInWords(reviewer.pages, 'page')}
               </span>
             </button>
           </li>

@@ -7,8 +7,10 @@ import { EmptyState } from '@/components/ui/EmptyState'
 import { TextLink } from '@/components/ui/TextLink'
 import type { Seat } from '@/lib/domain/assignments/schema'
 import type { AssignmentRow, AssignmentsView } from '@/lib/domain/assignments/assignmentsView'
+import { formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { AddReader } from './AddReader'
+import { meanAffinity } from './affinityOf'
 import type { AssignmentActions } from './assignmentActions'
 import { ReaderChip } from './ReaderChip'
 
@@ -49,6 +51,14 @@ export function AssignmentsTable(props: AssignmentsTableProps) {
       { id: 'title', head: 'Title', value: (row) => row.title },
       { id: 'pages', head: 'Pages', align: 'right', value: (row) => row.pages },
       { id: 'count', head: 'Readers', align: 'right', value: (row) => row.readers.length },
+      {
+        id: 'affinity',
+        head: 'Affinity',
+        unit: 'mean',
+        align: 'right',
+        value: (row) => meanAffinity(view, row),
+        cell: (row) => formatNumber(meanAffinity(view, row), 2),
+      },
       {
         id: 'readers',
         head: 'Who reads it',

@@ -5,6 +5,8 @@ import { classNames } from '@/components/ui/classNames'
 import { Popover } from '@/components/ui/Popover'
 import type { Seat } from '@/lib/domain/assignments/schema'
 import type { AssignmentRow } from '@/lib/domain/assignments/assignmentsView'
+import { AffinityMark } from './AffinityMark'
+import { affinityOf } from './affinityOf'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { ReplaceForm } from './ReplaceForm'
 
@@ -45,6 +47,9 @@ export function ReaderChip(props: ReaderChipProps) {
       <p className="m-0 font-semibold">{name}</p>
       <p className="m-0 text-muted">
         {seatWords[seat]} of {row.reviewNumber}, review {stateWords[state]}
+      </p>
+      <p className="m-0 text-muted">
+        Its subject: <AffinityMark affinity={affinityOf(view, row, personId)} />
       </p>
       <div className="mt-3 flex flex-wrap gap-2">
         {(['first', 'second', 'reader'] as const)

@@ -19,6 +19,11 @@ const columnsFor = (most: number): TableColumn<PanelReviewer>[] => [
     value: (row) => (row.mayReview ? (row.hasDeclared ? 'gone through' : 'not yet') : 'does not review'),
   },
   {
+    id: 'stated',
+    head: 'What they know',
+    value: (row) => (row.mayReview ? (row.hasStated ? 'said' : 'not yet') : ''),
+  },
+  {
     id: 'proposals',
     head: 'Proposals',
     align: 'right',

@@ -1,6 +1,7 @@
+import { affinityOf } from './affinityOf'
 import type { AssignmentRow, AssignmentsView, PanelReviewer } from '@/lib/domain/assignments/assignmentsView'
 
-/** Who may still be given a proposal, the lightest load first. */
+/** Who may still be given a proposal: nearest to its subject first, among equals the lightest load. */
 export function freeReviewers(view: AssignmentsView, row: AssignmentRow): PanelReviewer[] {
   const taken = new Set([
     ...row.readers.map((reader) => reader.personId),
@@ -8,5 +9,12 @@ export function freeReviewers(view: AssignmentsView, row: AssignmentRow): PanelR
   ])
   return view.reviewers
     .filter((reviewer) => reviewer.mayReview && !taken.has(reviewer.personId))
-    .sort((a, b) => a.pages - b.pages || a.number - b.number)
+    .map((reviewer) => ({ reviewer, affinity: affinityOf(view, row, reviewer.personId) ?? 0 }))
+    .sort(
+      (a, b) =>
+        b.affinity - a.affinity ||
+        a.reviewer.pages - b.reviewer.pages ||
+        a.reviewer.number - b.reviewer.number,
+    )
+    .map(({ reviewer }) => reviewer)
 }

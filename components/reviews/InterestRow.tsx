@@ -8,6 +8,7 @@ import { interestKinds } from './interestKinds'
 
 const found = {
   investigator: 'You: found by itself',
+  collaborator: 'Named with you on a proposal: found by itself',
   institute: 'Your institute: found by itself',
 } as const
 

@@ -1,3 +1,4 @@
+import type { Knex } from 'knex'
 import type { BarredPair, Judge, NamedInvestigator } from '../../lib/domain/conflicts/types.ts'
 import type { Database } from '../client.ts'
 import { utcNow } from '../utcNow.ts'
@@ -5,12 +6,53 @@ import { utcNow } from '../utcNow.ts'
 const sentStates = ['submitted', 'under-review', 'awarded', 'reserve', 'declined'] as const
 
 /** Everyone named on the sent proposals of a call: as they were when it was sent, and as they are named now. */
-export async function namedInCall(db: Database, callId: number): Promise<NamedInvestigator[]> {
+export function namedInCall(db: Database, callId: number): Promise<NamedInvestigator[]> {
+  return namedOn(db, (proposals) => proposals.where('p.call_id', callId))
+}
+
+/**
+ * Everyone on the sent proposals of recent calls that name one of these people: of the `calls` that opened last before
+ * this one closed.
+ */
+export async function namedBefore(
+  db: Database,
+  callId: number,
+  personIds: readonly number[],
+  calls: number,
+): Promise<NamedInvestigator[]> {
+  const recent = await db('calls')
+    .whereNot({ id: callId })
+    .where('opens_at', '<=', db('calls').where({ id: callId }).select('closes_at'))
+    .orderBy([{ column: 'opens_at', order: 'desc' }, { column: 'id' }])
+    .limit(calls)
+    .select('id')
+  if (recent.length === 0) return []
+  const emails = db('people').whereIn('id', personIds).select('email')
+  const asSent = db('proposal_version_people as w')
+    .join('proposal_versions as x', 'x.id', 'w.proposal_version_id')
+    .whereIn('w.person_id', personIds)
+    .whereNull('x.superseded_at')
+    .select('x.proposal_id')
+  const asNamed = db('proposal_people')
+    .where((q) =>
+      q.whereIn('person_id', personIds).orWhere((w) => w.whereNull('person_id').whereIn('email', emails)),
+    )
+    .select('proposal_id')
+  const ids = recent.map(({ id }) => id)
+  return namedOn(db, (proposals) =>
+    proposals.whereIn('p.call_id', ids).andWhere((q) => q.whereIn('p.id', asSent).orWhereIn('p.id', asNamed)),
+  )
+}
+
+async function namedOn(
+  db: Database,
+  narrow: (proposals: Knex.QueryBuilder) => Knex.QueryBuilder,
+): Promise<NamedInvestigator[]> {
   const asSent = db('proposal_version_people as q')
     .join('proposal_versions as v', 'v.id', 'q.proposal_version_id')
     .join('proposals as p', 'p.id', 'v.proposal_id')
     .leftJoin('people as a', 'a.id', 'q.person_id')
-    .where('p.call_id', callId)
+    .modify((q) => void narrow(q))
     .whereIn('p.state', sentStates)
     .whereNull('v.superseded_at')
     .orderBy(['v.proposal_id', 'q.position'])
@@ -27,7 +69,7 @@ export async function namedInCall(db: Database, callId: number): Promise<NamedIn
     .leftJoin('people as a', (on) =>
       on.on('a.id', 'q.person_id').orOn((either) => either.onNull('q.person_id').on('a.email', 'q.email')),
     )
-    .where('p.call_id', callId)
+    .modify((q) => void narrow(q))
     .whereIn('p.state', sentStates)
     .orderBy(['q.proposal_id', 'q.position'])
     .select<NamedInvestigator[]>(

@@ -123,7 +123,7 @@ export async function erasePersonRows(db: Database, id: number, email: string): 
   const blankEmail = `erased-${id}@erased.invalid`
   await leaveDrafts(db, id)
   await blankLetters(db, id, email, blankEmail)
-  for (const table of ['sessions', 'email_tokens', 'demographics'] as const)
+  for (const table of ['sessions', 'email_tokens', 'demographics', 'expertise'] as const)
     await db(table).where({ person_id: id }).delete()
   await db('invitations').where({ email }).update({ email: blankEmail, name: nobody })
   await db('invitations')

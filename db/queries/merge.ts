@@ -117,6 +117,7 @@ async function dropDoubles(db: Database, keepId: number, goneId: number): Promis
     `DELETE g FROM conflicts g JOIN conflicts k
        ON k.proposal_id = g.proposal_id AND k.kind = g.kind AND k.source = g.source AND k.person_id = ?
       WHERE g.person_id = ?`,
+    'DELETE g FROM expertise g JOIN expertise k ON k.kind = g.kind AND k.term = g.term AND k.person_id = ? WHERE g.person_id = ?',
     'DELETE g FROM demographics g JOIN demographics k ON k.person_id = ? WHERE g.person_id = ?',
     `UPDATE role_grants g JOIN role_grants k ON k.role = g.role AND k.call_id <=> g.call_id
         AND k.panel_id <=> g.panel_id AND k.instrument_id <=> g.instrument_id AND k.revoked_at IS NULL

@@ -117,6 +117,9 @@ export const interestsData = (db: Database, id: number): Rows =>
     .where({ 'c.person_id': id, 'c.source': 'declared' })
     .distinct('k.number as call', 'c.kind', 'c.note', 'c.from_at', 'c.until_at')
 
+export const expertiseData = (db: Database, id: number): Rows =>
+  db('expertise').where({ person_id: id }).orderBy('id').select('kind', 'term', 'level', 'created_at')
+
 export const assessmentsData = (db: Database, id: number): Rows =>
   db('assessments as a')
     .join('assessment_requests as r', 'r.id', 'a.request_id')

@@ -146,7 +146,7 @@ async function seedRates(db: Database, callKindId: number, fullMinor: number): P
     })
 }
 
-async function seedCall(
+export async function seedCall(
   db: Database,
   facility: Facility,
   call: { number: number; dates: SeedCallDates; summary: string; isOpen?: true },

@@ -181,6 +181,7 @@ export const contents = (over: Partial<ProposalContents> = {}): ProposalContents
   modes: [slitMode],
   people: [],
   groups: [],
+  wishes: [],
   targets: [target()],
   constraintSets: [{ ...defaultConstraints, id: 31, version: 1 }],
   observations: [observation()],

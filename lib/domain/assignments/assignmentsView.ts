@@ -17,6 +17,8 @@ export const assignmentRow = z.object({
   pages: z.number(),
   readers: z.array(reader),
   interests: z.array(z.object({ personId: z.number(), words: z.string() })),
+  /** How well each reviewer of the view, in its order, knows the subject, 0 to 1; null for who has not said. */
+  affinities: z.array(z.number().nullable()),
 })
 export type AssignmentRow = z.output<typeof assignmentRow>
 
@@ -26,6 +28,7 @@ export const panelReviewer = z.object({
   name: z.string(),
   mayReview: z.boolean(),
   hasDeclared: z.boolean(),
+  hasStated: z.boolean(),
   proposals: z.number(),
   pages: z.number(),
   finished: z.number(),
@@ -48,6 +51,10 @@ export const assignmentsView = z.object({
   reviewsDueAt: z.string(),
   rows: z.array(assignmentRow),
   reviewers: z.array(panelReviewer),
+  /** Reviews that were left because of an interest, the newest first. */
+  recusals: z.array(
+    z.object({ reviewNumber: z.string(), name: z.string(), reason: z.string(), at: z.string() }),
+  ),
   /** How many groups of reviewers share no proposal with the others; one is what is wanted. */
   groups: z.number(),
 })

@@ -1,5 +1,6 @@
 import type { CallPhase } from '../calls/types'
-import type { BarredPair } from '../conflicts/types'
+import { RECENT_CALLS, type BarredPair } from '../conflicts/types'
+import { countInWords } from '@/lib/format'
 import type { ProposalState } from '../proposals/types'
 
 /**
@@ -7,6 +8,8 @@ import type { ProposalState } from '../proposals/types'
  * the panel where the investigators work.
  */
 export function interestInWords({ kind, source }: Pick<BarredPair, 'kind' | 'source'>): string {
+  if (source === 'matched' && kind === 'collaborator')
+    return `is named with one of its investigators on a proposal of this call or of the ${countInWords(RECENT_CALLS, 'call', 'calls')} before it`
   if (source === 'matched' || kind === 'investigator' || kind === 'institute')
     return 'has an interest in it, found by matching people and institutes'
   const words = {

@@ -1,11 +1,11 @@
 import type { Database } from '@/db/client'
-import { judgesOf, namedInCall, panelPeople, recordedConflicts } from '@/db/queries/conflicts'
+import { judgesOf, namedBefore, namedInCall, panelPeople, recordedConflicts } from '@/db/queries/conflicts'
 import { findConflicts } from './findConflicts'
-import type { BarredPair } from './types'
+import { RECENT_CALLS, type BarredPair } from './types'
 
 /**
- * Who may have nothing to do with which proposal of a call: interests on record, and those found by matching people
- * and institutes this very moment. Without `personIds`, of everyone on the call's panels.
+ * Who may have nothing to do with which proposal of a call: interests on record, and those found by matching people,
+ * institutes and the teams of recent proposals this very moment. Without `personIds`, of everyone on the call's panels.
  */
 export async function barredPairs(
   db: Database,
@@ -14,13 +14,14 @@ export async function barredPairs(
 ): Promise<BarredPair[]> {
   const ids = personIds ?? (await panelPeople(db, callId))
   if (ids.length === 0) return []
-  const [named, judges, recorded] = await Promise.all([
+  const [named, before, judges, recorded] = await Promise.all([
     namedInCall(db, callId),
+    namedBefore(db, callId, ids, RECENT_CALLS),
     judgesOf(db, ids),
     recordedConflicts(db, callId, ids),
   ])
   const pairs = new Map<string, BarredPair>()
-  for (const { personId, proposalId, kind, source } of [...recorded, ...findConflicts(named, judges)])
+  for (const { personId, proposalId, kind, source } of [...recorded, ...findConflicts(named, judges, before)])
     pairs.set(`${personId}:${proposalId}:${kind}:${source}`, { personId, proposalId, kind, source })
   return [...pairs.values()]
 }

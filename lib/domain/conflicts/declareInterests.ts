@@ -2,6 +2,7 @@ import { findCallBySlug } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
 import {
   judgesOf,
+  namedBefore,
   namedInCall,
   recordConflict,
   recordDeclaration,
@@ -17,6 +18,7 @@ import { interestsToRecord } from './interestsToRecord'
 import { listNames } from './listNames'
 import { canDeclareInterests } from './policy'
 import type { DeclareInterestsInput } from './schema'
+import { RECENT_CALLS } from './types'
 import { writeToLeaders } from './writeToLeaders'
 
 export interface Declared {
@@ -26,7 +28,8 @@ export interface Declared {
 }
 
 /**
- * Records what a reviewer said of the names of a call, finds the own proposals and those of the own institute, and
+ * Records what a reviewer said of the names of a call, finds the own proposals, those of
+ * people named with them on recent ones and those of the own institute, and
  * takes back every assignment they touch; whoever leads the panel is told. It may be said again later; what was
  * declared once stays.
  */
@@ -37,14 +40,15 @@ export function declareInterests(ctx: ActingContext, input: DeclareInterestsInpu
     authorize(canDeclareInterests(tx.actor, call, await databaseNow(tx.db)))
     const me = tx.actor.personId
     const assignments = await lockAssignmentsOf(tx.db, me, call.id)
-    const [named, judges, recorded] = await Promise.all([
+    const [named, before, judges, recorded] = await Promise.all([
       namedInCall(tx.db, call.id),
+      namedBefore(tx.db, call.id, [me], RECENT_CALLS),
       judgesOf(tx.db, [me]),
       recordedConflicts(tx.db, call.id, [me]),
     ])
     const judge = judges[0] ?? { personId: me, institutes: [] }
     const declared = recorded.filter(({ source }) => source === 'declared')
-    const listed = new Map(listNames(call.id, named, judge, declared).map((name) => [name.key, name]))
+    const listed = new Map(listNames(call.id, named, judge, declared, before).map((name) => [name.key, name]))
 
     const ticked = input.names.map(({ key, kind }) => {
       const name = listed.get(key)
@@ -58,7 +62,7 @@ export function declareInterests(ctx: ActingContext, input: DeclareInterestsInpu
     const again = [...listed.values()].flatMap(({ key, person, declaredAs }) =>
       declaredAs && !input.names.some((name) => name.key === key) ? [{ person, kind: declaredAs }] : [],
     )
-    const interests = interestsToRecord(judge, named, [...again, ...ticked])
+    const interests = interestsToRecord(judge, named, [...again, ...ticked], before)
     for (const interest of interests) await recordConflict(tx.db, interest)
     await recordDeclaration(tx.db, me, call.id)
 

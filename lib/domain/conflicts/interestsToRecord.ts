@@ -1,6 +1,6 @@
 import { findConflicts } from './findConflicts'
 import { noteOf } from './listNames'
-import type { NamedPerson } from './sameNames'
+import type { NamedPerson } from './samePeople'
 import type { BarredPair, DeclaredKind, Judge, NamedInvestigator } from './types'
 
 /** Rows that follow from a declaration: one for each proposal and kind, with every name that was ticked for it. */
@@ -8,6 +8,7 @@ export function interestsToRecord(
   judge: Judge,
   named: readonly NamedInvestigator[],
   ticked: readonly { person: NamedPerson; kind: DeclaredKind }[],
+  before: readonly NamedInvestigator[],
 ): (BarredPair & { note: string })[] {
   const declared = new Map<string, BarredPair & { note: string }>()
   for (const { person, kind } of ticked)
@@ -16,6 +17,6 @@ export function interestsToRecord(
       const note = [declared.get(key)?.note, noteOf(person)].filter(Boolean).join('; ')
       declared.set(key, { personId: judge.personId, proposalId, kind, source: 'declared', note })
     }
-  const matched = findConflicts(named, [judge]).map((pair) => ({ ...pair, note: '' }))
+  const matched = findConflicts(named, [judge], before).map((pair) => ({ ...pair, note: '' }))
   return [...declared.values(), ...matched]
 }

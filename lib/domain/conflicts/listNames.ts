@@ -1,5 +1,7 @@
 import { nameKey } from './nameKey'
-import { sameNames, type NamedPerson } from './sameNames'
+import { colleaguesOf } from './colleaguesOf'
+import { sameNames } from './sameNames'
+import type { NamedPerson } from './samePeople'
 import { fold } from './fold'
 import {
   declaredKinds,
@@ -16,28 +18,42 @@ export const noteOf = (person: Pick<NamedPerson, 'name' | 'institute'>) =>
 
 const isDeclared = (kind: InterestKind): kind is DeclaredKind => declaredKinds.some((known) => known === kind)
 
-/** The list of a call's names as one reviewer sees it: alphabetical, each name once, no proposals. */
+/**
+ * The list of a call's names as one reviewer sees it: alphabetical, each name once, no proposals. `before` are the
+ * teams of recent calls.
+ */
 export function listNames(
   callId: number,
   named: readonly NamedInvestigator[],
   judge: Judge,
   declared: readonly { kind: InterestKind; note: string }[],
+  before: readonly NamedInvestigator[],
 ): (ListedName & { person: NamedPerson })[] {
   const own = new Set(judge.institutes.map(fold).filter(Boolean))
-  const before = new Map<string, DeclaredKind>()
+  const saidBefore = new Map<string, DeclaredKind>()
   for (const { kind, note } of declared)
-    if (isDeclared(kind)) for (const name of note.split('; ')) before.set(name, kind)
+    if (isDeclared(kind)) for (const name of note.split('; ')) saidBefore.set(name, kind)
 
-  return sameNames(named).map((person) => ({
-    key: nameKey(callId, person.identity),
-    name: person.name,
-    institute: person.institute,
-    foundAs: person.personIds.has(judge.personId)
-      ? 'investigator'
-      : own.has(fold(person.institute))
-        ? 'institute'
-        : null,
-    declaredAs: before.get(noteOf(person)) ?? null,
-    person,
-  }))
+  const all = sameNames([...named, ...before])
+  const colleagues = colleaguesOf(judge.personId, all)
+  const inCall = new Set(named.map(({ proposalId }) => proposalId))
+  return all.flatMap((found) => {
+    const proposalIds = new Set([...found.proposalIds].filter((id) => inCall.has(id)))
+    if (proposalIds.size === 0) return []
+    const person = { ...found, proposalIds }
+    return {
+      key: nameKey(callId, person.identity),
+      name: person.name,
+      institute: person.institute,
+      foundAs: person.personIds.has(judge.personId)
+        ? 'investigator'
+        : colleagues.has(found)
+          ? 'collaborator'
+          : own.has(fold(person.institute))
+            ? 'institute'
+            : null,
+      declaredAs: saidBefore.get(noteOf(person)) ?? null,
+      person,
+    }
+  })
 }

@@ -1,13 +1,13 @@
 import { findCallBySlug } from '@/db/queries/calls'
 import { databaseNow } from '@/db/queries/clock'
-import { declarationOf, judgesOf, namedInCall, recordedConflicts } from '@/db/queries/conflicts'
+import { declarationOf, judgesOf, namedBefore, namedInCall, recordedConflicts } from '@/db/queries/conflicts'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { Call } from '../calls/types'
 import type { ActingContext } from '../context'
 import { listNames } from './listNames'
 import { canDeclareInterests } from './policy'
-import type { ListedName } from './types'
+import { RECENT_CALLS, type ListedName } from './types'
 
 export interface InterestsView {
   call: Pick<Call, 'slug' | 'number' | 'title' | 'reviewsDueAt'>
@@ -21,9 +21,10 @@ export async function readInterests(ctx: ActingContext, callSlug: string): Promi
   if (!call) throw refuse.notFound('call')
   authorize(canDeclareInterests(ctx.actor, call, await databaseNow(ctx.db)))
   const me = ctx.actor.personId
-  const [declaredAt, named, judges, recorded] = await Promise.all([
+  const [declaredAt, named, before, judges, recorded] = await Promise.all([
     declarationOf(ctx.db, me, call.id),
     namedInCall(ctx.db, call.id),
+    namedBefore(ctx.db, call.id, [me], RECENT_CALLS),
     judgesOf(ctx.db, [me]),
     recordedConflicts(ctx.db, call.id, [me]),
   ])
@@ -32,7 +33,7 @@ export async function readInterests(ctx: ActingContext, callSlug: string): Promi
   return {
     call: { slug: call.slug, number: call.number, title: call.title, reviewsDueAt: call.reviewsDueAt },
     declaredAt,
-    names: listNames(call.id, named, judge, declared).map(
+    names: listNames(call.id, named, judge, declared, before).map(
       ({ key, name, institute, foundAs, declaredAs }) => ({
         key,
         name,

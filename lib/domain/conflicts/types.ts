@@ -1,6 +1,13 @@
 export type InterestKind = 'investigator' | 'institute' | 'collaborator' | 'family' | 'rival' | 'other'
 
-/** Kinds a reviewer may declare; the other two are found by matching, too. */
+/** What is found by matching people and institutes, the weightiest first. */
+export const matchedKinds = ['investigator', 'collaborator', 'institute'] as const
+export type MatchedKind = (typeof matchedKinds)[number]
+
+/** Calls before the one in question on whose proposals a common name counts still: two years of two calls each. */
+export const RECENT_CALLS = 4
+
+/** Kinds a reviewer may declare. */
 export const declaredKinds = ['collaborator', 'institute', 'family', 'rival', 'other'] as const
 export type DeclaredKind = (typeof declaredKinds)[number]
 
@@ -33,8 +40,8 @@ export interface ListedName {
   key: string
   name: string
   institute: string
-  /** Found without being told: oneself, or the own institute. */
-  foundAs: 'investigator' | 'institute' | null
+  /** Found without being told: oneself, someone on a proposal with oneself, or the own institute. */
+  foundAs: MatchedKind | null
   /** Declared before. */
   declaredAs: DeclaredKind | null
 }

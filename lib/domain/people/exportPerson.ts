@@ -23,6 +23,7 @@ const sections = [
   ['scores', panel, held.scoresData],
   ['wordsOfReviews', panel, held.reviewTextsData],
   ['interestsYouDeclared', 'So that you are not asked to judge them.', held.interestsData],
+  ['whatYouSaidYouKnow', 'To find readers for proposals.', held.expertiseData],
   ['assessments', 'They decide on the time a proposal needs.', held.assessmentsData],
   ['waiversAsked', 'They belong to the accounts.', held.waiversData],
   ['lettersToYou', 'To show what was told, and when.', held.lettersData],

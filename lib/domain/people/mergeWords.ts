@@ -25,6 +25,7 @@ const words: Readonly<Record<string, string>> = {
   'role_grants.person_id': 'Roles',
   'conflicts.person_id': 'Interests',
   'interest_declarations.person_id': 'Declarations of interest',
+  'expertise.person_id': 'What they say they know',
   'assessments.assessed_by': 'Assessments',
   'outbox.person_id': 'Letters',
   'waivers.asked_by': 'Waivers asked for',

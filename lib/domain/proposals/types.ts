@@ -145,6 +145,24 @@ export interface Observation {
   version: number
 }
 
+/** The nights of a visit: how many, which half of each or the whole, and whether they follow one another. */
+export interface VisitWish {
+  nights: number
+  part: 'whole' | 'first' | 'second'
+  together: boolean
+}
+
+/** How time on an instrument is wished for. */
+export interface ServiceWish {
+  id: number
+  instrumentId: number
+  /** Least award that is of use; null for half of what is asked. */
+  leastSeconds: number | null
+  /** Null where observatory staff are to observe, in the queue. */
+  visit: VisitWish | null
+  version: number
+}
+
 export interface Paper {
   id: number
   kind: 'justification' | 'team-expertise'
@@ -228,6 +246,8 @@ export interface ProposalContents {
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]
+  /** None for an instrument of which nothing is said. */
+  wishes: ServiceWish[]
   papers: Paper[]
   writings: Writings
   figures: Figure[]

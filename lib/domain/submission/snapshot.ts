@@ -49,7 +49,7 @@ type KindAsks = 'targetLimit' | 'takesAwaited' | 'needsCadence' | 'needsLastNigh
 /** A snapshot that may have been frozen before proposals had all they have now. */
 interface Thawed {
   contents: Omit<
-    May<ProposalContents, 'groups' | 'writings' | 'figures'>,
+    May<ProposalContents, 'groups' | 'wishes' | 'writings' | 'figures'>,
     'targets' | 'constraintSets' | 'kind'
   > & {
     kind: May<CallKind, KindAsks>
@@ -74,7 +74,11 @@ function whole({ contents, computation, engineVersion }: Thawed): Snapshot {
   const constraintSets = contents.constraintSets.map((set) => ({ ...set, cadence: set.cadence ?? null }))
   const observations = computation.observations.map((one) => ({ times: 1, carried: null, ...one }))
   return {
-    contents: { groups: [], writings: unwritten, figures: [], ...contents, kind, constraintSets, targets },
+    contents: {
+      ...{ groups: [], wishes: [], writings: unwritten, figures: [] },
+      ...contents,
+      ...{ kind, constraintSets, targets },
+    },
     computation: { groups: [], ...computation, observations },
     engineVersion,
   }

@@ -2,6 +2,7 @@ import { ProgrammeBuilder } from '../solver/programmeBuilder'
 import type { Programme } from '../solver/types'
 import type { Candidate } from './candidatePairs'
 import type { Demand } from './demandOf'
+import { outsideCost } from './outsideCost'
 import { tieBreak } from './tieBreak'
 
 /** What does not change from one programme to the next. */
@@ -35,7 +36,7 @@ export function assignmentProgramme(desk: AssignmentDesk, question: Question): P
   const builder = new ProgrammeBuilder()
   const asksWorst = question.ask === 'worst'
   const isInteger = !asksWorst || question.isWhole
-  const most = Math.max(1, ...demands.map(({ wanted, standing }) => wanted + standing.length))
+  const pageCost = outsideCost(desk)
   const byProposal = new Map<number, number[]>()
   const byReviewer = new Map<number, number[]>()
   for (const { proposal, reviewer, affinity } of candidates) {
@@ -44,12 +45,17 @@ export function assignmentProgramme(desk: AssignmentDesk, question: Question): P
     listAt(byProposal, proposal).push(column)
     listAt(byReviewer, reviewer).push(column)
   }
-  const worst = builder.column({ objective: asksWorst ? 1 : 0, lower: 0, upper: most, isInteger: false })
+  const worst = builder.column({
+    objective: asksWorst ? 1 : 0,
+    lower: 0,
+    upper: pageCost - 1,
+    isInteger: false,
+  })
   const pagesOf = new Map(demands.map(({ proposal }) => [proposal.id, proposal.pages]))
   const pages = (column: number) => pagesOf.get(candidates[column]?.proposal ?? -1) ?? 0
   const outside: number[] = []
   for (const id of reviewers) {
-    const limits = { objective: -(most + 1), lower: 0, upper: Infinity, isInteger: false }
+    const limits = { objective: -pageCost, lower: 0, upper: Infinity, isInteger: false }
     const [below, above] = [builder.column(limits), builder.column(limits)]
     outside.push(below, above)
     const held = desk.standingPages.get(id) ?? 0

@@ -1,17 +1,14 @@
 import type { AssignmentDesk } from './assignmentProgramme'
+import type { Candidate } from './candidatePairs'
+import { startFrom } from './startFrom'
 
 /**
  * An assignment to start from where all readers are alike, as the columns of its programme: the proposal with the
  * fewest candidates first, then the longest, each to those with the fewest pages so far.
  */
-export function dealtOut({
-  demands,
-  candidates,
-  reviewers,
-  standingPages,
-  ...range
-}: AssignmentDesk): Float64Array {
-  const values = new Float64Array(candidates.length + 1 + 2 * reviewers.length)
+export function dealtOut(desk: AssignmentDesk): Float64Array {
+  const { demands, candidates, standingPages } = desk
+  const chosen = new Set<Candidate>()
   const columns = new Map<number, number[]>()
   for (const [column, { proposal }] of candidates.entries()) {
     const own = columns.get(proposal)
@@ -30,14 +27,11 @@ export function dealtOut({
   for (const { proposal, wanted } of order) {
     const own = [...(columns.get(proposal.id) ?? [])].sort((a, b) => load(a) - load(b) || a - b)
     for (const column of own.slice(0, wanted)) {
-      values[column] = 1
-      loads.set(candidates[column]?.reviewer ?? -1, load(column) + proposal.pages)
+      const candidate = candidates[column]
+      if (!candidate) continue
+      chosen.add(candidate)
+      loads.set(candidate.reviewer, load(column) + proposal.pages)
     }
   }
-  for (const [i, id] of reviewers.entries()) {
-    const pages = loads.get(id) ?? 0
-    values[candidates.length + 1 + 2 * i] = Math.max(0, range.leastPages - pages)
-    values[candidates.length + 2 + 2 * i] = Math.max(0, pages - range.mostPages)
-  }
-  return values
+  return startFrom(desk, chosen)
 }

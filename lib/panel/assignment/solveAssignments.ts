@@ -3,6 +3,8 @@ import type { OpenedDesk } from './assignmentDesk'
 import { assignmentProgramme } from './assignmentProgramme'
 import { dealtOut } from './dealtOut'
 import { describeOutcome, type Outcome } from './describeOutcome'
+import { outsideCost } from './outsideCost'
+import { solveLarge } from './solveLarge'
 import type { OptimalInput } from './optimalTypes'
 
 export interface AssignmentSolution {
@@ -15,6 +17,7 @@ export interface AssignmentSolution {
 
 /** Shares of the bound on the worst affinity that are tried one after the other. */
 const FLOORS = [1, 0.99, 0.95, 0.8, 0]
+const LARGE_FLOORS = [0.99, 0.9, 0]
 /** Keeps a floor from being missed by rounding alone. */
 const ROUNDING = 1e-7
 
@@ -25,6 +28,7 @@ export async function solveSum(
   solve: Solve,
   question: { floor: number; mostOutside: number; cuts: readonly ReadonlySet<number>[]; seconds: number },
 ): Promise<{ outcome: Outcome; sumBound: number } | { why: string }> {
+  if (!desk.isSmall && !desk.areAlike) return solveLarge(desk, affinity, solve, question)
   const programme = assignmentProgramme(desk, { ask: 'sum', ...question })
   // Where only loads matter, branch and bound finds them late and dealing out finds them at once.
   if (desk.areAlike && question.cuts.length === 0) programme.start = dealtOut(desk)
@@ -37,16 +41,13 @@ export async function solveSum(
   const chosen = desk.candidates.filter((_, column) => (values[column] ?? 0) > 0.5)
   const outcome = describeOutcome(chosen, desk.demands, desk.reviewers, desk, affinity)
   const standing = [...desk.standingAffinity.values()].reduce((sum, one) => sum + one, 0)
-  return { outcome, sumBound: answer.bound + costOf(desk) * outcome.outsidePages + standing }
+  return { outcome, sumBound: answer.bound + outsideCost(desk) * outcome.outsidePages + standing }
 }
-
-/** What a page outside the range costs in a programme. */
-const costOf = ({ demands }: OpenedDesk) =>
-  1 + Math.max(1, ...demands.map(({ wanted, standing }) => wanted + standing.length))
 
 /**
  * The worst-served proposal first, then the sum. On a small panel the first is settled in whole readers; on a large one
- * the linear relaxation bounds it, and the sum is solved with that bound demanded of each proposal, or a little less.
+ * the linear relaxation bounds it, and the sum is solved with that bound demanded of each proposal, or a little less:
+ * nearly all of it where reviewers differ, as whole readers are then found from the relaxation.
  */
 export async function solveAssignments(
   desk: OpenedDesk,
@@ -73,7 +74,7 @@ export async function solveAssignments(
   let best: AssignmentSolution | null = null
   let why = 'The solver found no assignment.'
   let seconds = input.seconds * 0.6
-  for (const share of FLOORS) {
+  for (const share of desk.isSmall || desk.areAlike ? FLOORS : LARGE_FLOORS) {
     const floor = Math.max(0, share * worst - ROUNDING)
     const given = share === 0 ? seconds : seconds * 0.6
     seconds -= given
@@ -83,7 +84,7 @@ export async function solveAssignments(
       continue
     }
     if (best && best.outcome.outsidePages <= found.outcome.outsidePages) continue
-    const worstBound = bound + costOf(desk) * found.outcome.outsidePages
+    const worstBound = bound + outsideCost(desk) * found.outcome.outsidePages
     best = { outcome: found.outcome, floor, worstBound, sumBound: found.sumBound }
     if (isExact || found.outcome.outsidePages <= Math.ceil(outsidePages - ROUNDING)) break
   }

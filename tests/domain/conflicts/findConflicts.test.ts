@@ -39,4 +39,39 @@ describe('findConflicts', () => {
     expect(found.map(({ proposalId, kind }) => [proposalId, kind])).toEqual(expected)
     expect(found.every(({ personId, source }) => personId === 7 && source === 'matched')).toBe(true)
   })
+
+  it.each([
+    [
+      'a proposal of someone named with the judge in this call',
+      [named(1, 7, 'X'), named(1, 8, 'Y'), named(2, 8, 'Y')],
+      [],
+      [
+        [1, 'investigator'],
+        [2, 'collaborator'],
+      ],
+    ],
+    ['or in a call before', [named(2, 8, 'Y')], [named(9, 7, 'X'), named(9, 8, 'Y')], [[2, 'collaborator']]],
+    [
+      'without an account, by name and institute',
+      [named(2, null, 'Ý')],
+      [named(9, 7, 'X'), named(9, null, 'y')],
+      [[2, 'collaborator']],
+    ],
+    [
+      'not whoever is named with that colleague',
+      [named(3, 10, 'Z')],
+      [named(9, 7, 'X'), named(9, 8, 'Y'), named(8, 8, 'Y'), named(8, 10, 'Z')],
+      [],
+    ],
+    [
+      'it weighs more than the institute',
+      [named(2, 8, 'Institute of Deep Fields')],
+      [named(9, 7, 'X'), named(9, 8, 'Y')],
+      [[2, 'collaborator']],
+    ],
+    ['past proposals themselves are no part of the call', [], [named(9, 7, 'X'), named(9, 8, 'Y')], []],
+  ] as const)('%s', (_, people, before, expected) => {
+    const found = findConflicts(people, [judge], before)
+    expect(found.map(({ proposalId, kind }) => [proposalId, kind])).toEqual(expected)
+  })
 })

@@ -114,6 +114,12 @@ describe('assignments', () => {
         expect(interestInWords({ kind, source })).toMatch(/found by matching people and institutes/)
   })
 
+  it('tells of a common proposal, and how far back it looks', () => {
+    expect(interestInWords({ kind: 'collaborator', source: 'matched' })).toBe(
+      'is named with one of its investigators on a proposal of this call or of the four calls before it',
+    )
+  })
+
   it.each([
     [0, null, false],
     [2, null, true],
@@ -240,7 +246,7 @@ describe('awards', () => {
       panelId: 1,
       proposalId: 1,
       version: 0,
-      lines: [{ instrumentId: 1, hours, isReserve: false, service: 'queue', conditions: '' }],
+      lines: [{ instrumentId: 1, hours, isReserve: false, service: 'queue', evenings: '', conditions: '' }],
     })
     expect(result.success ? result.data.lines[0]?.hours : null).toBe(seconds)
   })

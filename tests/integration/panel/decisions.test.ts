@@ -4,6 +4,7 @@ import { timeBalance } from '@/db/queries/timeLedger'
 import type { Actor } from '@/lib/domain/actor'
 import { startReview } from '@/lib/domain/assignments/startReview'
 import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
+import { openDecision } from '@/lib/domain/decisions/openDecision'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { readNights } from '@/lib/domain/decisions/readNights'
@@ -42,6 +43,7 @@ const give = async (
         hours: hours * h,
         isReserve: more.isReserve ?? false,
         service: 'queue',
+        evenings: [],
         conditions: more.conditions ?? '',
       },
     ],
@@ -60,12 +62,12 @@ const release = (typed = String(call.callNumber), who: Actor = call.chair) =>
   releaseDecisions(call.as(who), { panelId: call.panelId, typed })
 const approve = async (who: Actor = call.deputy) => {
   const { rows } = await readDecisions(call.as(call.deputy), key())
-  return approveDecisions(call.as(who), {
-    panelId: call.panelId,
-    decisions: rows
-      .filter((row) => row.isPrepared)
-      .map(({ proposalId, version }) => ({ proposalId, version })),
-  })
+  const decisions = rows
+    .filter((row) => row.isPrepared)
+    .map(({ proposalId, version }) => ({ proposalId, version }))
+  const { panelId } = call
+  for (const decision of decisions) await openDecision(call.as(who), { panelId, ...decision })
+  return approveDecisions(call.as(who), { panelId, decisions })
 }
 const lines = () =>
   db()('award_lines').whereNull('superseded_at').orderBy('id').select('seconds', 'is_reserve')
@@ -142,8 +144,8 @@ describe('hours', () => {
       conditions: '',
       isReserve: false,
     }
-    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h + 1 })).toBe(false)
-    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h })).toBe(true)
+    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h + 1 })).toBeNull()
+    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h })).toBeGreaterThan(0)
   })
 
   it('beyond what was asked, or on what is not possible, are refused', async () => {
@@ -175,6 +177,7 @@ describe('hours', () => {
           hours: h,
           isReserve: false,
           service: 'queue' as const,
+          evenings: [],
           conditions: '',
         },
       ],

@@ -7,7 +7,8 @@ import { PageTitle } from '@/components/ui/PageTitle'
 import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readInterests } from '@/lib/domain/conflicts/readInterests'
-import { formatUtc } from '@/lib/format'
+import { RECENT_CALLS } from '@/lib/domain/conflicts/types'
+import { countInWords, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { declareInterestsAction } from './actions'
 
@@ -28,6 +29,10 @@ export default async function InterestsPage({ params }: { params: Promise<{ call
         title="With whom do you have an interest?"
         lead={`All ${view.names.length} investigators of call ${view.call.number}, in alphabetical order. The list does not say who stands on what. You review nothing that a ticked name stands on.`}
       />
+      <p className="mt-3 text-table text-muted">
+        Found by itself: you, whoever is named with you on a proposal of this call or of the{' '}
+        {countInWords(RECENT_CALLS, 'call', 'calls')} before it, and your institute.
+      </p>
       {view.declaredAt ? (
         <p className="mt-3 text-table text-muted">
           You went through it last on {formatUtc(view.declaredAt)}. What you ticked then stays; tick what is
