@@ -30,7 +30,7 @@ const heads: readonly { head: string; unit?: string; right?: boolean; computed?:
 export function ObservationTable(props: ObservationTableProps) {
   const { contents, computation, readOnly, onTyped, save, onRemove } = props
   return (
-    <TableFrame caption="Observations" phone="cards">
+    <TableFrame caption="Observations" phone="cards" isTyped>
       <thead role="rowgroup">
         <tr role="row">
           {heads.map(({ head, unit, right, computed }) => (

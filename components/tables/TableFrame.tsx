@@ -6,6 +6,8 @@ export interface TableFrameProps {
   phone: 'cards' | 'scroll'
   /** Set for a long table that scrolls within its frame, its head held: how many rows it has in all. */
   rowCount?: number
+  /** Set for a table that one types into: a key then paints one row. */
+  isTyped?: boolean
   frame?: Ref<HTMLDivElement>
   children: ReactNode
 }
@@ -14,7 +16,7 @@ export interface TableFrameProps {
  * The table element in a frame that scrolls sideways where it must. The roles are said aloud because cards on phones
  * are made by CSS `display`, which would take a table's own meaning away.
  */
-export function TableFrame({ caption, phone, rowCount, frame, children }: TableFrameProps) {
+export function TableFrame({ caption, phone, rowCount, isTyped, frame, children }: TableFrameProps) {
   return (
     <div
       ref={frame}
@@ -23,7 +25,11 @@ export function TableFrame({ caption, phone, rowCount, frame, children }: TableF
       aria-label={`${caption}, scrolls sideways where it is wider than the screen`}
       tabIndex={0}
     >
-      <table role="table" aria-rowcount={rowCount} className={`data-table data-table-${phone}`}>
+      <table
+        role="table"
+        aria-rowcount={rowCount}
+        className={classNames('data-table', `data-table-${phone}`, isTyped && 'table-typed')}
+      >
         <caption className="sr-only">{caption}</caption>
         {children}
       </table>

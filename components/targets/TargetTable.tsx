@@ -49,7 +49,7 @@ export function TargetTable(whole: TargetTableWholeProps) {
   const grouped = rows.filter(({ target }) => target.group !== null).length
 
   return (
-    <TableFrame caption="Targets" phone="cards">
+    <TableFrame caption="Targets" phone="cards" isTyped>
       <thead role="rowgroup">
         <tr role="row">
           <th role="columnheader" scope="col">
