@@ -38,6 +38,8 @@ const config = {
     proxyClientMaxBodySize: '26mb',
   },
   headers: async () => [{ source: '/:path*', headers }],
+  // A file opened in a tab of its own has no page to name its icon, so the browser asks for this.
+  rewrites: async () => [{ source: '/favicon.ico', destination: '/favicon.svg' }],
 }
 
 export default config

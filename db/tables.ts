@@ -62,6 +62,21 @@ export interface AwardLinesRow {
   created_at: Date
 }
 
+export interface BillingRecordsRow {
+  id: number
+  record_version: number
+  name: string
+  address: string
+  tax_number: string
+  contact: string
+  account_holder: string
+  iban: string
+  bic: string
+  bank: string
+  saved_by: number | null
+  created_at: Date
+}
+
 export interface BulkLettersRow {
   id: number
   subject: string
@@ -130,6 +145,10 @@ export interface CallKindsRow {
   word_limit: number
   needs_student: 0 | 1
   figure_limit: number | null
+  target_limit: number | null
+  takes_awaited: 0 | 1
+  needs_cadence: 0 | 1
+  needs_last_night: 0 | 1
 }
 
 export interface CallModesRow {
@@ -180,6 +199,7 @@ export interface CreditNotesRow {
   refund_id: number | null
   credited_to: string
   address: string
+  billing_record_id: number | null
   amount_minor: number
   currency: string
   reason: string
@@ -226,6 +246,10 @@ export interface DisputesRow {
   reason: string
   state: 'open' | 'won' | 'lost'
   closed_at: Date | null
+  decision: 'ask-again' | 'waive' | 'withdraw' | 'accept' | null
+  decision_note: string
+  decided_by: number | null
+  decided_at: Date | null
   created_at: Date
 }
 
@@ -361,6 +385,7 @@ export interface InvoicesRow {
   fee_id: number
   institute: string
   address: string
+  billing_record_id: number | null
   purchase_order: string
   send_to: string
   amount_minor: number
@@ -373,6 +398,17 @@ export interface InvoicesRow {
   closed_by: number | null
   closed_at: Date | null
   version: number
+  created_at: Date
+}
+
+export interface LeastAwardsRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  seconds: number
+  reason: string
+  made_by: number
+  superseded_at: Date | null
   created_at: Date
 }
 
@@ -403,6 +439,38 @@ export interface LogbookChecksRow {
 export interface LogbookHeadRow {
   id: number
   last_hash: string
+}
+
+export interface MergedEntriesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  ranking_id: number
+  place: number
+  used_share: number | null
+  is_near: 0 | 1
+}
+
+export interface MergedListsRow {
+  id: number
+  call_id: number
+  list_version: number
+  frozen_at: Date | null
+  made_by: number | null
+  superseded_at: Date | null
+  version: number
+  created_at: Date
+}
+
+export interface MergeMovesRow {
+  id: number
+  list_id: number
+  proposal_id: number
+  from_place: number
+  to_place: number
+  reason: string
+  moved_by: number | null
+  created_at: Date
 }
 
 export interface ModeRecordsRow {
@@ -685,6 +753,7 @@ export interface ProposalPeopleRow {
   created_at: Date
   orcid: string | null
   is_supervisor: 0 | 1
+  version: number
 }
 
 export interface ProposalVersionsRow {
@@ -814,6 +883,18 @@ export interface ScoreEventsRow {
   created_at: Date
 }
 
+export interface ServiceWishesRow {
+  id: number
+  proposal_id: number
+  instrument_id: number
+  least_seconds: number | null
+  visit_nights: number | null
+  visit_part: 'whole' | 'first' | 'second'
+  visit_together: 0 | 1
+  version: number
+  created_at: Date
+}
+
 export interface SessionsRow {
   id_hash: string
   person_id: number
@@ -821,6 +902,17 @@ export interface SessionsRow {
   expires_at: Date
   ended_at: Date | null
   user_agent: string
+  created_at: Date
+}
+
+export interface ShareRulesRow {
+  id: number
+  call_id: number
+  rule: 'hours' | 'proposals' | 'fixed'
+  percents: string | null
+  reason: string
+  made_by: number
+  superseded_at: Date | null
   created_at: Date
 }
 
@@ -960,6 +1052,17 @@ export interface TimeTransfersRow {
   created_at: Date
 }
 
+export interface VisitHalvesRow {
+  id: number
+  award_line_id: number
+  call_id: number
+  telescope_id: number
+  evening_date: string
+  half: 'first' | 'second'
+  seconds: number
+  holds: number | null
+}
+
 export interface WaiversRow {
   id: number
   fee_id: number
@@ -1010,6 +1113,10 @@ declare module 'knex/types/tables.js' {
         'id' | 'observation_id' | 'service' | 'conditions' | 'is_reserve' | 'superseded_at' | 'created_at'
       >
     >
+    billing_records: Knex.CompositeTableType<
+      BillingRecordsRow,
+      Insert<BillingRecordsRow, 'id' | 'tax_number' | 'saved_by' | 'created_at'>
+    >
     bulk_letters: Knex.CompositeTableType<
       BulkLettersRow,
       Insert<
@@ -1033,7 +1140,17 @@ declare module 'knex/types/tables.js' {
       CallKindsRow,
       Insert<
         CallKindsRow,
-        'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student' | 'figure_limit'
+        | 'id'
+        | 'closes_at'
+        | 'max_seconds'
+        | 'fee_minor'
+        | 'word_limit'
+        | 'needs_student'
+        | 'figure_limit'
+        | 'target_limit'
+        | 'takes_awaited'
+        | 'needs_cadence'
+        | 'needs_last_night'
       >
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
@@ -1061,7 +1178,10 @@ declare module 'knex/types/tables.js' {
     counters: Knex.CompositeTableType<CountersRow, Insert<CountersRow, 'last_number'>>
     credit_notes: Knex.CompositeTableType<
       CreditNotesRow,
-      Insert<CreditNotesRow, 'id' | 'invoice_id' | 'refund_id' | 'address' | 'created_at'>
+      Insert<
+        CreditNotesRow,
+        'id' | 'invoice_id' | 'refund_id' | 'address' | 'billing_record_id' | 'created_at'
+      >
     >
     decisions: Knex.CompositeTableType<
       DecisionsRow,
@@ -1086,7 +1206,17 @@ declare module 'knex/types/tables.js' {
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<
       DisputesRow,
-      Insert<DisputesRow, 'id' | 'state' | 'closed_at' | 'created_at'>
+      Insert<
+        DisputesRow,
+        | 'id'
+        | 'state'
+        | 'closed_at'
+        | 'decision'
+        | 'decision_note'
+        | 'decided_by'
+        | 'decided_at'
+        | 'created_at'
+      >
     >
     email_tokens: Knex.CompositeTableType<
       EmailTokensRow,
@@ -1149,6 +1279,7 @@ declare module 'knex/types/tables.js' {
       Insert<
         InvoicesRow,
         | 'id'
+        | 'billing_record_id'
         | 'purchase_order'
         | 'state'
         | 'asked_by'
@@ -1160,6 +1291,10 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
       >
     >
+    least_awards: Knex.CompositeTableType<
+      LeastAwardsRow,
+      Insert<LeastAwardsRow, 'id' | 'superseded_at' | 'created_at'>
+    >
     logbook: Knex.CompositeTableType<
       LogbookRow,
       Insert<LogbookRow, 'id' | 'person_id' | 'before_value' | 'after_value' | 'address'>
@@ -1169,6 +1304,15 @@ declare module 'knex/types/tables.js' {
       Insert<LogbookChecksRow, 'id' | 'checked_by' | 'fault'>
     >
     logbook_head: Knex.CompositeTableType<LogbookHeadRow, Insert<LogbookHeadRow, never>>
+    merged_entries: Knex.CompositeTableType<MergedEntriesRow, Insert<MergedEntriesRow, 'id' | 'used_share'>>
+    merged_lists: Knex.CompositeTableType<
+      MergedListsRow,
+      Insert<MergedListsRow, 'id' | 'frozen_at' | 'made_by' | 'superseded_at' | 'version' | 'created_at'>
+    >
+    merge_moves: Knex.CompositeTableType<
+      MergeMovesRow,
+      Insert<MergeMovesRow, 'id' | 'moved_by' | 'created_at'>
+    >
     mode_records: Knex.CompositeTableType<
       ModeRecordsRow,
       Insert<
@@ -1318,6 +1462,7 @@ declare module 'knex/types/tables.js' {
         | 'created_at'
         | 'orcid'
         | 'is_supervisor'
+        | 'version'
       >
     >
     proposal_versions: Knex.CompositeTableType<
@@ -1380,9 +1525,20 @@ declare module 'knex/types/tables.js' {
       ScoreEventsRow,
       Insert<ScoreEventsRow, 'id' | 'scale_version' | 'half_points' | 'created_at'>
     >
+    service_wishes: Knex.CompositeTableType<
+      ServiceWishesRow,
+      Insert<
+        ServiceWishesRow,
+        'id' | 'least_seconds' | 'visit_nights' | 'visit_part' | 'visit_together' | 'version' | 'created_at'
+      >
+    >
     sessions: Knex.CompositeTableType<
       SessionsRow,
       Insert<SessionsRow, 'ended_at' | 'user_agent' | 'created_at'>
+    >
+    share_rules: Knex.CompositeTableType<
+      ShareRulesRow,
+      Insert<ShareRulesRow, 'id' | 'percents' | 'superseded_at' | 'created_at'>
     >
     sites: Knex.CompositeTableType<SitesRow, Insert<SitesRow, 'id'>>
     site_records: Knex.CompositeTableType<
@@ -1458,6 +1614,7 @@ declare module 'knex/types/tables.js' {
       TimeTransfersRow,
       Insert<TimeTransfersRow, 'id' | 'observation_id' | 'share' | 'made_by' | 'created_at'>
     >
+    visit_halves: Knex.CompositeTableType<VisitHalvesRow, Insert<VisitHalvesRow, 'id' | 'holds'>>
     waivers: Knex.CompositeTableType<
       WaiversRow,
       Insert<WaiversRow, 'id' | 'state' | 'decided_by' | 'decision_note' | 'decided_at' | 'created_at'>

@@ -16,6 +16,8 @@ const settings = z.object({
   STRIPE_API_BASE: httpUrl.optional(),
   SMTP_URL: z.url({ protocol: /^smtps?$/ }),
   MAIL_FROM: z.string().min(3),
+  /** Proves that a report about a letter comes from our mail server; without it none is taken. */
+  MAIL_REPORT_SECRET: z.string().min(32).optional(),
   NEXTAUTH_URL: httpUrl,
   NEXTAUTH_SECRET: z.string().min(32),
   INBOX_URL: httpUrl.optional(),

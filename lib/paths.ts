@@ -4,10 +4,13 @@ const part = encodeURIComponent
 export type ProposalSection =
   'question' | 'targets' | 'cosmology' | 'observing' | 'feasibility' | 'people' | 'papers' | 'send'
 
-export type PanelPage = 'assignments' | 'progress' | 'discussion' | 'ranking' | 'nights' | 'decisions'
+export type PanelPage =
+  'assignments' | 'progress' | 'discussion' | 'ranking' | 'between' | 'nights' | 'decisions'
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
-export type OfficeCallPage = 'rules' | 'nights' | 'figures' | 'preview'
+export type OfficeCallPage = 'rules' | 'nights' | 'between' | 'figures' | 'preview'
+/** A form in which a panel's report is handed out. */
+type ReportFileName = 'report.pdf' | 'report.csv'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
@@ -40,6 +43,10 @@ export const paths = {
     `/proposals/${part(reference)}/${section}`,
   proposalPaper: (reference: string, paper: number | string) =>
     `/proposals/${part(reference)}/papers/${part(String(paper))}`,
+  /** Where a document is sent to, and the one that replaces it after the proposal was sent. */
+  newPaper: (reference: string) => `/proposals/${part(reference)}/papers/new`,
+  paperReplacement: (reference: string) => `/proposals/${part(reference)}/papers/replacement`,
+  newFigure: (reference: string) => `/proposals/${part(reference)}/figures`,
   proposalFigure: (reference: string, figure: number | string, sha256: string) =>
     `/proposals/${part(reference)}/figures/${part(String(figure))}?v=${sha256.slice(0, 8)}`,
   proposalSent: (reference: string) => `/proposals/${part(reference)}/sent`,
@@ -81,6 +88,8 @@ export const paths = {
 
   panelPlan: (callSlug: string, file: PlanFileName, panelId: number) =>
     `/panel/${part(callSlug)}/plan/${file}?panel=${panelId}`,
+  panelReportFile: (callSlug: string, file: ReportFileName, panelId: number) =>
+    `/panel/${part(callSlug)}/report/${file}?panel=${panelId}`,
   panelTeam: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
@@ -103,6 +112,7 @@ export const paths = {
   officePersonData: (person: number) => `/office/people/${person}/data`,
   officeFee: (reference: string) => `/office/fees?fee=${part(reference)}`,
   officeLedger: () => '/office/fees/ledger',
+  officeInvoicing: () => '/office/fees/invoicing',
   officeReconciliation: () => '/office/fees/reconciliation',
   newRecord: (kind: 'sites' | 'telescopes' | 'instruments' | 'modes') => `/office/facility/${kind}/new`,
   retirement: (kind: 'site' | 'telescope' | 'instrument' | 'mode', slug: string) =>
@@ -110,6 +120,8 @@ export const paths = {
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
+  officeReportFile: (slug: string, file: ReportFileName, panelId: number) =>
+    `/office/calls/${part(slug)}/report/${file}?panel=${panelId}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
   officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
   officeProposal: (slug: string, reference: string) =>

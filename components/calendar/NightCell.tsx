@@ -1,9 +1,12 @@
 import { classNames } from '@/components/ui/classNames'
+import type { NightElsewhere } from '@/lib/domain/calendar/nightElsewhere'
 import type { CalendarNight } from '@/lib/domain/calendar/types'
 
 interface NightCellProps {
   night: CalendarNight
   instruments: readonly { id: number; name: string }[]
+  /** What other calls offer of it. */
+  elsewhere: readonly NightElsewhere[]
   label: string
   chosen: boolean
   tabbable: boolean
@@ -19,7 +22,15 @@ const looks = {
 } as const
 
 /** A night in the calendar: its parts from evening to morning, the initial of a mounted instrument, the Moon above. */
-export function NightCell({ night, instruments, label, chosen, tabbable, onChoose }: NightCellProps) {
+export function NightCell({
+  night,
+  instruments,
+  elsewhere,
+  label,
+  chosen,
+  tabbable,
+  onChoose,
+}: NightCellProps) {
   return (
     <button
       type="button"
@@ -38,6 +49,14 @@ export function NightCell({ night, instruments, label, chosen, tabbable, onChoos
         className="absolute inset-x-px top-0 bg-muted"
         style={{ height: `${Math.round(night.moonLit * 4)}px` }}
       />
+      {elsewhere.map((one) => (
+        <span
+          key={one.from}
+          aria-hidden="true"
+          className="absolute bottom-0 z-10 h-1 bg-lamp"
+          style={{ left: `${one.from * 100}%`, width: `${(one.to - one.from) * 100}%` }}
+        />
+      ))}
       <span aria-hidden="true" className="relative block h-full w-full border border-dashed border-rule">
         {night.parts.map((part) => (
           <span

@@ -12,7 +12,7 @@ export interface ChosenNights {
 }
 
 interface NightGridProps {
-  telescope: Pick<TelescopeCalendar, 'name' | 'nights' | 'instruments'>
+  telescope: Pick<TelescopeCalendar, 'name' | 'nights' | 'instruments' | 'elsewhere'>
   chosen: ChosenNights | null
   /** `extend`: from the nights chosen before to this one. */
   onChoose: (date: string, extend: boolean) => void
@@ -27,7 +27,7 @@ const shortName = new Intl.DateTimeFormat('en-GB', { month: 'short', year: '2-di
  * Shift they choose a stretch.
  */
 export function NightGrid({ telescope, chosen, onChoose }: NightGridProps) {
-  const { name, nights, instruments } = telescope
+  const { name, nights, instruments, elsewhere } = telescope
   const frame = useRef<HTMLDivElement>(null)
   const months = [...new Set(nights.map(({ date }) => date.slice(0, 7)))]
   const isChosen = (date: string) => chosen !== null && date >= chosen.from && date <= chosen.to
@@ -72,7 +72,8 @@ export function NightGrid({ telescope, chosen, onChoose }: NightGridProps) {
                       <NightCell
                         night={night}
                         instruments={instruments}
-                        label={nightWords(night, instruments)}
+                        elsewhere={elsewhere.filter(({ eveningDate }) => eveningDate === night.date)}
+                        label={nightWords(night, instruments, elsewhere)}
                         chosen={isChosen(night.date)}
                         tabbable={night.date === home}
                         onChoose={(extend) => onChoose(night.date, extend)}

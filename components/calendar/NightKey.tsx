@@ -4,6 +4,7 @@ const entries = [
   { words: 'science in this call, with the initial of a mounted instrument', look: 'bg-accent' },
   { words: 'engineering', look: 'border border-edge', style: { background: hatched } },
   { words: 'promised before', look: 'border border-edge bg-tint' },
+  { words: 'science in another call: a line below', look: 'border-b-4 border-lamp' },
   { words: 'for nothing', look: 'border border-dashed border-edge' },
 ] as const
 

@@ -12,6 +12,7 @@ import { Button } from '@/components/ui/Button'
 import { setNightsSchema } from '@/lib/domain/calendar/schema'
 import type { CalendarNight, TelescopeCalendar } from '@/lib/domain/calendar/types'
 import type { ChosenNights } from './NightGrid'
+import { OfferedElsewhere } from './OfferedElsewhere'
 import { PartFields } from './PartFields'
 
 export type NightsInput = z.input<typeof setNightsSchema>
@@ -84,6 +85,7 @@ export function NightsForm({ call, telescope, chosen, action }: NightsFormProps)
           Add a part
         </Button>
       </fieldset>
+      <OfferedElsewhere telescope={telescope} />
       <CheckboxField
         name="mayTakePromised"
         label="Promised time may be taken"

@@ -1,3 +1,4 @@
+import type { NightElsewhere } from '@/lib/domain/calendar/nightElsewhere'
 import type { CalendarNight } from '@/lib/domain/calendar/types'
 import { formatCalendarDate, formatHoursFromSeconds, formatPercent } from '@/lib/format'
 
@@ -7,6 +8,7 @@ const short = { science: 'science', engineering: 'engineering', promised: 'promi
 export function nightWords(
   night: CalendarNight,
   instruments: readonly { id: number; name: string }[],
+  elsewhere: readonly NightElsewhere[] = [],
 ): string {
   const parts = night.parts.map(({ useFor, darkSeconds, instrumentId, note }) => {
     const instrument = instruments.find(({ id }) => id === instrumentId)?.name
@@ -14,5 +16,11 @@ export function nightWords(
     return `${short[useFor]}, ${formatHoursFromSeconds(darkSeconds)}${also ? ` (${also})` : ''}`
   })
   const what = parts.length > 0 ? parts.join('; ') : 'for nothing'
-  return `${formatCalendarDate(night.date)}: ${what}; Moon ${formatPercent(night.moonLit)} lit`
+  const calls = [
+    ...new Set(
+      elsewhere.filter(({ eveningDate }) => eveningDate === night.date).map((one) => one.callNumber),
+    ),
+  ]
+  const others = calls.map((number) => `; offered by call ${number}`).join('')
+  return `${formatCalendarDate(night.date)}: ${what}; Moon ${formatPercent(night.moonLit)} lit${others}`
 }

@@ -7,6 +7,7 @@ import type { FormAction } from '@/components/forms/actionFormTypes'
 import { NumberField } from '@/components/forms/NumberField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
+import { CallChoice } from '@/components/office/CallChoice'
 import { useCallForm } from '@/components/office/useCallForm'
 import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
@@ -23,6 +24,12 @@ interface CriteriaFormProps {
 const most = 12
 const parts = (weight: string | undefined) => (/^\d+$/.test((weight ?? '').trim()) ? Number(weight) : 0)
 
+/** All of them in a line each: their order counts, so that they are chosen together. */
+const said = (_: string, value: unknown): string =>
+  (value as z.input<typeof saveCriteriaSchema>['criteria'])
+    .map(({ title, prompt, weight }) => `${title}, weight ${weight}: ${prompt}`)
+    .join('\n')
+
 /** What proposals are judged by: words, a question to the reviewer, and the weight, with its share of the whole. */
 export function CriteriaForm({ call, criteria, action }: CriteriaFormProps) {
   const handle = useCallForm({
@@ -33,6 +40,7 @@ export function CriteriaForm({ call, criteria, action }: CriteriaFormProps) {
       criteria: criteria.map(({ title, prompt, weight }) => ({ title, prompt, weight: String(weight) })),
     },
     done: 'The criteria are saved',
+    compared: { criteria: 'Criteria' },
   })
   const { control } = handle.form
   const { fields, append, remove, move } = useFieldArray({ control, name: 'criteria' })
@@ -41,6 +49,7 @@ export function CriteriaForm({ call, criteria, action }: CriteriaFormProps) {
   const share = (index: number) => (whole > 0 ? parts(typed[index]?.weight) / whole : 0)
   return (
     <ActionForm form={handle} label="What proposals are judged by">
+      <CallChoice comparison={handle.comparison} say={said} />
       <ol className="plain-list">
         {fields.map((field, index) => (
           <li key={field.id} className="border-t border-rule py-4 last:border-b">

@@ -6,6 +6,7 @@ import type { FormAction } from '@/components/forms/actionFormTypes'
 import { NumberField } from '@/components/forms/NumberField'
 import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
+import { CallChoice } from '@/components/office/CallChoice'
 import { useCallForm } from '@/components/office/useCallForm'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { savePanelSchema } from '@/lib/domain/calls/rulesSchema'
@@ -33,10 +34,12 @@ export function PanelForm({ call, panel, action, onClose }: PanelFormProps) {
       quorum: String(panel?.quorum ?? 3),
     },
     done: panel ? `${panel.name} is saved` : 'The panel is added',
+    compared: { name: 'Name', quorum: 'Quorum' },
     onDone: onClose,
   })
   return (
     <ActionForm form={form} label={panel ? panel.name : 'A new panel'}>
+      <CallChoice comparison={form.comparison} />
       <div className="grid gap-x-8 gap-y-6 sm:grid-cols-2">
         <TextField name="name" label="Name" />
         <NumberField name="quorum" label="Quorum" whole help="Members needed to decide." />

@@ -18,6 +18,11 @@ const columns: readonly TableColumn<PossibleNight>[] = [
   { id: 'telescope', head: 'Telescope', value: ({ telescope }) => telescope },
   { id: 'instruments', head: 'Instrument', value: ({ instruments }) => formatList(instruments) },
   {
+    id: 'whose',
+    head: 'Night',
+    value: ({ isVisit }) => (isVisit ? 'of your visit' : 'possible'),
+  },
+  {
     id: 'from',
     head: 'Dark from',
     unit: 'UTC',
@@ -55,7 +60,7 @@ export function AwardedNightsTable({
     <section className="mt-10">
       <SectionHeading
         title="Nights it may be observed on"
-        aside="Nights of the call on which a target is usable. Which of them it is, is decided under the sky."
+        aside="The nights of a visit are yours. Of the others of the call on which a target is usable, the sky decides which it is."
       />
       {nights.length === 0 ? (
         <p className="mt-3 text-muted">No night of the call suits it. Write to the office.</p>

@@ -27,6 +27,7 @@ import type { WithholdAction } from './CommentRow'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
 import { decisionColumns } from './decisionColumns'
+import { ReportLinks } from './ReportLinks'
 import { nextToOpen } from './unopened'
 import type { OpenAction } from './useOpening'
 import { useShownDecision } from './useShownDecision'
@@ -133,6 +134,14 @@ export function DecisionsBoard(props: DecisionsBoardProps) {
           </BarNote>
         )}
       </div>
+      {view.isFrozen ? (
+        <div className="mt-4">
+          <ReportLinks
+            pdf={paths.panelReportFile(view.callSlug, 'report.pdf', panelId)}
+            csv={paths.panelReportFile(view.callSlug, 'report.csv', panelId)}
+          />
+        </div>
+      ) : null}
       <SeasonsNote seasons={seasons} of="given" onOf={null} />
       <div className="mt-6">
         <DataTable

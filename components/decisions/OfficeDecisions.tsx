@@ -13,6 +13,7 @@ import { ApproveOthers } from './ApproveOthers'
 import { decisionColumns } from './decisionColumns'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
+import { ReportLinks } from './ReportLinks'
 import { nextToOpen } from './unopened'
 import type { OpenAction } from './useOpening'
 import { useShownDecision } from './useShownDecision'
@@ -50,6 +51,14 @@ export function OfficeDecisions({
               <ApproveOthers rows={panel.rows} panelId={panel.panelId} approve={approve} onShow={show} />
             }
           />
+          {panel.isFrozen ? (
+            <div className="mt-3">
+              <ReportLinks
+                pdf={paths.officeReportFile(view.callSlug, 'report.pdf', panel.panelId)}
+                csv={paths.officeReportFile(view.callSlug, 'report.csv', panel.panelId)}
+              />
+            </div>
+          ) : null}
           <div className="mt-4">
             <DataTable
               caption={`Decisions of ${panel.name}`}

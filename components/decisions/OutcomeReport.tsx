@@ -23,10 +23,11 @@ function AwardList({ decision }: { decision: Decision }) {
               {line.instrument}, {line.telescope}
               {line.isReserve ? ', in reserve' : ''}
               {line.service === 'visitor' ? ', visitor' : ', queue'}
+              {line.evenings ? <span className="block">{line.evenings}</span> : null}
               {line.conditions ? <span className="block">{line.conditions}</span> : null}
             </>
           ),
-          value: formatHoursFromSeconds(line.seconds),
+          value: <span className="whitespace-nowrap">{formatHoursFromSeconds(line.seconds)}</span>,
         })),
         {
           term: 'Awarded',

@@ -1,5 +1,6 @@
 'use client'
 
+import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import type { FormAction } from '@/components/forms/actionFormTypes'
@@ -9,11 +10,13 @@ import type { FeeView } from '@/lib/domain/fees/readFee'
 import type {
   AskForInvoiceForm,
   CancelInvoiceForm as CancelInput,
+  DecideDisputeForm,
   RecordTransferForm,
   RefundFeeForm,
   SettleInvoiceForm as SettleInput,
 } from '@/lib/domain/fees/schema'
 import { CancelInvoiceForm } from './CancelInvoiceForm'
+import { DisputeForm } from './DisputeForm'
 import { InvoiceForm } from './InvoiceForm'
 import { RefundForm } from './RefundForm'
 import { SettleInvoiceForm } from './SettleInvoiceForm'
@@ -25,6 +28,7 @@ export interface FeeDeeds {
   settle: FormAction<SettleInput, unknown>
   cancel: FormAction<CancelInput, { creditNote: string }>
   transfer: FormAction<RecordTransferForm, unknown>
+  dispute: FormAction<DecideDisputeForm, unknown>
 }
 
 type Deed = 'refund' | 'invoice' | 'settle' | 'cancel'
@@ -32,11 +36,14 @@ type Deed = 'refund' | 'invoice' | 'settle' | 'cancel'
 /** What the office can do about a fee as it stands; one form open at a time. */
 export function FeeActions({ fee, deeds }: { fee: FeeView; deeds: FeeDeeds }) {
   const router = useRouter()
+  const queries = useQueryClient()
   const [open, setOpen] = useState<Deed | null>(null)
   const done = (words: string) => {
     setOpen(null)
     showToast(words)
     router.refresh()
+    // The table beside it asks for its rows itself.
+    void queries.invalidateQueries({ queryKey: ['office-proposals', fee.callSlug] })
   }
   const invoice = fee.openInvoice
   const choices: [Deed, string, boolean][] = [
@@ -47,6 +54,14 @@ export function FeeActions({ fee, deeds }: { fee: FeeView; deeds: FeeDeeds }) {
   ]
   return (
     <div className="flex flex-col gap-5">
+      {fee.lostDispute ? (
+        <DisputeForm
+          lost={fee.lostDispute}
+          currency={fee.currency}
+          action={deeds.dispute}
+          onDone={() => done('The dispute is decided')}
+        />
+      ) : null}
       {fee.transfers.map((transfer) => (
         <TransferForm
           key={transfer.refundId}

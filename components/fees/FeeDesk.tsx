@@ -50,7 +50,11 @@ export function FeeDesk({ fee, deeds }: { fee: FeeView; deeds: FeeDeeds }) {
             </TextLink>
           ))}
         </p>
-        <FeeActions key={`${fee.state}-${fee.givenBackMinor}`} fee={fee} deeds={deeds} />
+        <FeeActions
+          key={`${fee.state}-${fee.givenBackMinor}-${fee.lostDispute?.disputeId ?? ''}`}
+          fee={fee}
+          deeds={deeds}
+        />
       </div>
     </Panel>
   )

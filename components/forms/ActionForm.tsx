@@ -22,7 +22,14 @@ export function ActionForm<Input extends FieldValues, Output>({
   return (
     <FormProvider {...handle.form}>
       <ActionFormContext value={{ id: handle.id, busy: handle.busy }}>
-        <form noValidate aria-label={label} onSubmit={handle.submit} className="flex flex-col gap-6">
+        {/* Were it ever sent without our code, post keeps what was typed, a password too, out of the address. */}
+        <form
+          method="post"
+          noValidate
+          aria-label={label}
+          onSubmit={handle.submit}
+          className="flex flex-col gap-6"
+        >
           <ErrorSummary failure={handle.failure} attempt={handle.attempt} />
           {children}
         </form>

@@ -5,7 +5,7 @@ import { formatBytes } from '@/lib/format'
 export interface FileSending {
   /** From 0 to 1. */
   share: number
-  /** What is being done: `64 %, looking for names`. */
+  /** What is being done: `3.2 MB of 12.4 MB sent`. */
   words: string
   onStop?: () => void
 }
@@ -20,10 +20,14 @@ export function FileRow({ file, sending }: { file: File; sending: FileSending | 
       </p>
       {sending ? (
         <div className="mt-1.5">
-          <ProgressBar share={sending.share} label={`Sending ${file.name}`} />
-          <p className="m-0 mt-1.5 flex gap-3">
+          <ProgressBar share={sending.share} label={`Sending ${file.name}`} valueText={sending.words} />
+          <p className="m-0 mt-1.5 flex items-center gap-3">
             <span>{sending.words}</span>
-            {sending.onStop ? <LinkLikeButton onClick={sending.onStop}>Stop</LinkLikeButton> : null}
+            {sending.onStop ? (
+              <LinkLikeButton onClick={sending.onStop} aria-label={`Stop sending ${file.name}`}>
+                Stop
+              </LinkLikeButton>
+            ) : null}
           </p>
         </div>
       ) : null}

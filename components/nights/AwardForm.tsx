@@ -39,6 +39,7 @@ export function AwardForm({ row, view, save, onSaved, onLeave, children }: Award
         hours: typed(line.givenSeconds),
         isReserve: line.isReserve,
         service: line.service,
+        evenings: line.evenings || line.suggestedEvenings,
         conditions: line.conditions,
       })),
     },
@@ -60,6 +61,9 @@ export function AwardForm({ row, view, save, onSaved, onLeave, children }: Award
             line={line}
             index={index}
             telescope={view.telescopes.find(({ id }) => id === line.telescopeId)}
+            onEvenings={(text) =>
+              form.form.setValue(`lines.${index}.evenings`, text, { shouldValidate: true })
+            }
             onFill={(seconds) =>
               form.form.setValue(`lines.${index}.hours`, typed(seconds), { shouldValidate: true })
             }

@@ -1,18 +1,22 @@
 'use client'
 
+import { useWatch } from 'react-hook-form'
 import { CheckboxField } from '@/components/forms/CheckboxField'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
 import { Button } from '@/components/ui/Button'
 import type { NightsLine, NightsView } from '@/lib/domain/decisions/nightsView'
+import { visitInWords } from '@/lib/domain/wishes/visitWords'
 import { formatHoursFromSeconds } from '@/lib/format'
+import { leastByWords } from './nightsWords'
 
 export interface AwardLineProps {
   line: NightsLine
   index: number
   telescope: NightsView['telescopes'][number] | undefined
   onFill: (seconds: number) => void
+  onEvenings: (text: string) => void
 }
 
 const services = [
@@ -21,7 +25,8 @@ const services = [
 ]
 
 /** One instrument of an award. */
-export function AwardLine({ line, index, telescope, onFill }: AwardLineProps) {
+export function AwardLine({ line, index, telescope, onFill, onEvenings }: AwardLineProps) {
+  const isVisit = useWatch({ name: `lines.${index}.service` }) === 'visitor'
   const others = (telescope?.givenSeconds ?? 0) - (line.isReserve ? 0 : line.givenSeconds)
   const left = (telescope?.offeredSeconds ?? 0) - others
   const asked =
@@ -35,14 +40,38 @@ export function AwardLine({ line, index, telescope, onFill }: AwardLineProps) {
       <p className="mt-0 mb-3 text-table">
         <strong>{line.instrument}</strong>{' '}
         <span className="text-muted">
-          {asked}; {formatHoursFromSeconds(line.leastSeconds)} is the least of use;{' '}
-          {formatHoursFromSeconds(Math.max(0, left))} left on {line.telescope}
+          {asked}; {formatHoursFromSeconds(line.leastSeconds)} is the least of use{leastByWords[line.leastBy]}
+          ; {formatHoursFromSeconds(Math.max(0, left))} left on {line.telescope}
+          {line.visit ? `; they wish for a visit of ${visitInWords(line.visit)}` : null}
         </span>
       </p>
       <div className="flex flex-wrap items-end gap-x-6 gap-y-4">
-        <NumberField name={`lines.${index}.hours`} label="Hours" unit="h" offReason={off} />
+        {isVisit ? (
+          <div className="w-full max-w-prose">
+            <TextField
+              name={`lines.${index}.evenings`}
+              label="Evenings of the visit"
+              help="Year-month-day with commas between, “first” or “second” behind a date for half of its night. The hours follow from them."
+              offReason={off}
+            />
+          </div>
+        ) : (
+          <NumberField name={`lines.${index}.hours`} label="Hours" unit="h" offReason={off} />
+        )}
         <div className="flex gap-2 pb-1">
-          {line.possible
+          {isVisit && line.possible ? (
+            <>
+              {line.suggestedEvenings ? (
+                <Button look="secondary" size="small" onClick={() => onEvenings(line.suggestedEvenings)}>
+                  As suggested
+                </Button>
+              ) : null}
+              <Button look="secondary" size="small" onClick={() => onEvenings('')}>
+                None
+              </Button>
+            </>
+          ) : null}
+          {line.possible && !isVisit
             ? (
                 [
                   ['Whole', line.wholeSeconds],

@@ -4,7 +4,7 @@ import { Tag } from '@/components/ui/Tag'
 import { choiceMarks } from '@/lib/domain/decisions/choiceWords'
 import type { NightsLine } from '@/lib/domain/decisions/nightsView'
 import type { ShownRow } from './nightsColumns'
-import { hoursOf, standsInWords, termsInWords, whyNotInWords } from './nightsWords'
+import { hoursOf, standsInWords, termsInWords, visitSuggestedInWords, whyNotInWords } from './nightsWords'
 import { OutlookMark } from './OutlookMark'
 
 export interface FacingRowProps {
@@ -49,6 +49,9 @@ export function FacingRow({ row, mostHours, firstTelescope, isOpen, onOpen }: Fa
             {line.suggestedSeconds > 0 ? (
               <span>
                 <Hours line={line} seconds={line.suggestedSeconds} />
+                {line.suggestedEvenings ? (
+                  <span className="text-muted">{visitSuggestedInWords(line)}</span>
+                ) : null}
                 {standsInWords(line) ? <span className="text-lamp">{standsInWords(line)}</span> : null}
               </span>
             ) : (

@@ -12,6 +12,7 @@ import { ChoiceForm } from './ChoiceForm'
 import { FacingHead } from './FacingHead'
 import { FacingKey } from './FacingKey'
 import { FacingRow } from './FacingRow'
+import { LeastForms } from './LeastForms'
 import { NightsCsv } from './NightsCsv'
 import type { NightsActions } from './nightsActions'
 import { nightsChips, nightsColumns } from './nightsColumns'
@@ -22,7 +23,7 @@ export interface FacingTableProps {
   openId: number | null
   /** Null where nothing can be given any more. */
   onOpen: ((proposalId: number | null) => void) | null
-  actions: Pick<NightsActions, 'save' | 'choose'>
+  actions: Pick<NightsActions, 'save' | 'choose' | 'setLeast'>
   outlookOf: Seasons['outlookOf']
   onSaved: () => void
   onTry: (proposalId: number, choice: ChoiceOrRank) => void
@@ -87,6 +88,7 @@ export function FacingTable(props: FacingTableProps) {
                       onSaved={onSaved}
                       onLeave={() => onOpen?.(null)}
                     >
+                      <LeastForms row={row} panelId={view.panelId} setLeast={actions.setLeast} />
                       <ChoiceForm
                         row={row}
                         panelId={view.panelId}

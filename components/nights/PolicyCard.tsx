@@ -3,12 +3,20 @@ import { KeyFigure } from '@/components/ui/KeyFigure'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { policyNames, type NightsPolicy } from '@/lib/domain/decisions/policyWords'
 import type { PolicySummary } from '@/lib/domain/decisions/policySummary'
-import { formatHoursFromSeconds, formatNumber } from '@/lib/format'
+import { formatHoursFromSeconds, formatNumber, formatPercent } from '@/lib/format'
 
 const rules: Record<NightsPolicy, string> = {
-  rank: 'In turn, what must have time before the others, each takes what it asked, or as much as its targets can use of what is left, if that is not less than its least useful award: half of what it asked. Those above keep their hours and make room where they can.',
+  rank: 'Visits first, on dates of their own, down to the line. Then, in turn, what must have time before the others, each takes what it asked, or as much as its targets can use of what is left, if that is not less than its least useful award: what the chair set, else what the investigators say, else half of what was asked. Those above keep their hours and make room where they can.',
   merit:
-    'The awards, whole or in part, with the most merit times hours down to the line, merit being the raw mean; what must have time has its least at least. Then the others fill what remains, by rank.',
+    'Visits first, on dates of their own, down to the line. Then the awards, whole or in part, with the most merit times hours down to the line, merit being the raw mean; what must have time has its least at least. Then the others fill what remains, by rank.',
+}
+
+/** Behind a figure: how far from what no plan can exceed. */
+function gapInWords(gap: number | null): string {
+  if (gap === null) return ''
+  return gap < 5e-5
+    ? '; no plan of the queue has more'
+    : `; no plan of the queue has ${formatPercent(gap, 2)} more`
 }
 
 export interface PolicyCardProps {
@@ -41,7 +49,10 @@ export function PolicyCard({ summary, offeredSeconds, isShown, onShow, children 
             value={formatHoursFromSeconds(summary.seconds)}
             label={`of ${formatHoursFromSeconds(offeredSeconds)} on offer`}
           />
-          <KeyFigure value={formatNumber(summary.meritHours, 0)} label="merit × hours, down to the line" />
+          <KeyFigure
+            value={formatNumber(summary.meritHours, 0)}
+            label={`merit × hours, down to the line${gapInWords(summary.gap)}`}
+          />
         </div>
       ) : (
         <p className="m-0 text-table">No plan was found: {summary.why}</p>

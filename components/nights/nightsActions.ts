@@ -12,6 +12,7 @@ export type SaveAwardAction = (input: {
     hours: string
     isReserve: boolean
     service: 'queue' | 'visitor'
+    evenings: string
     conditions: string
   }[]
 }) => Promise<ActionResult<void>>
@@ -37,10 +38,19 @@ export type HoldHoursAction = (input: {
   reason: string
 }) => Promise<ActionResult<void>>
 
+export type SetLeastAction = (input: {
+  panelId: number
+  proposalId: number
+  instrumentId: number
+  hours: string
+  reason: string
+}) => Promise<ActionResult<void>>
+
 /** What the chair may do on the page of nights. */
 export interface NightsActions {
   save: SaveAwardAction
   takePlan: TakePlanAction
   choose: ChooseNightsAction
   hold: HoldHoursAction
+  setLeast: SetLeastAction
 }

@@ -15,6 +15,7 @@ import { paths } from '@/lib/paths'
 import { AddObservations } from './AddObservations'
 import { ConstraintSets } from './ConstraintSets'
 import type { ObservationActions } from './observationActions'
+import { ServiceWishes } from './ServiceWishes'
 import { ObservationTable } from './ObservationTable'
 import { useLiveComputation } from './useLiveComputation'
 
@@ -143,6 +144,9 @@ export function ObservingEditor({ contents, computation, readOnly, note, actions
             </div>
           ) : null}
         </section>
+        {contents.observations.length > 0 ? (
+          <ServiceWishes contents={contents} readOnly={readOnly !== null} save={actions.saveWish} />
+        ) : null}
       </div>
     </>
   )

@@ -6,7 +6,8 @@ import type { saveAskedTimesSchema } from '@/lib/domain/observations/saveAskedTi
 import type { saveConstraintSetSchema } from '@/lib/domain/observations/saveConstraintSet'
 import type { saveObservationSchema } from '@/lib/domain/observations/saveObservation'
 import type { ObservationRow } from '@/lib/domain/observations/schema'
-import type { ConstraintSet, Observation } from '@/lib/domain/proposals/types'
+import type { saveWishSchema } from '@/lib/domain/wishes/schema'
+import type { ConstraintSet, Observation, ServiceWish } from '@/lib/domain/proposals/types'
 
 type Action<S extends z.ZodType, R> = (input: z.input<S>) => Promise<ActionResult<R>>
 
@@ -16,5 +17,6 @@ export interface ObservationActions {
   save: Action<typeof saveObservationSchema, Observation>
   ask: Action<typeof saveAskedTimesSchema, { id: number; version: number; askedSeconds: number }[]>
   remove: Action<typeof removeObservationSchema, { row: ObservationRow }>
+  saveWish: Action<typeof saveWishSchema, ServiceWish>
   saveConstraints: Action<typeof saveConstraintSetSchema, ConstraintSet>
 }

@@ -1,6 +1,6 @@
 import { DateTimeField } from '@/components/forms/DateTimeField'
 
-const fields = [
+export const callDateFields = [
   ['opensAt', 'Opens'],
   ['closesAt', 'Proposals close'],
   ['graceUntil', 'Fees settled by'],
@@ -14,7 +14,7 @@ const fields = [
 export function CallDateFields({ utcOffsetHours }: { utcOffsetHours?: number }) {
   return (
     <div className="grid gap-x-8 gap-y-6 xl:grid-cols-2">
-      {fields.map(([name, label]) => (
+      {callDateFields.map(([name, label]) => (
         <DateTimeField key={name} name={name} label={label} utcOffsetHours={utcOffsetHours} />
       ))}
     </div>

@@ -7,7 +7,9 @@ import { TextAreaField } from '@/components/forms/TextAreaField'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { saveDatesSchema } from '@/lib/domain/calls/schema'
 import type { Call } from '@/lib/domain/calls/types'
-import { CallDateFields } from './CallDateFields'
+import { formatUtcInstant } from '@/lib/format'
+import { CallChoice } from './CallChoice'
+import { callDateFields, CallDateFields } from './CallDateFields'
 import { useCallForm } from './useCallForm'
 
 type Input = z.input<typeof saveDatesSchema>
@@ -22,6 +24,11 @@ interface DatesFormProps {
 
 // Whole seconds: the date field shows no finer, and a deadline set by closing keeps its milliseconds in the database.
 const typed = (at: Date) => at.toISOString()
+const compared = Object.fromEntries(callDateFields)
+const said = (_: string, value: unknown) =>
+  Number.isNaN(Date.parse(String(value)))
+    ? String(value) || 'none'
+    : formatUtcInstant(new Date(String(value)))
 
 /** The dates of a call; a deadline that has passed cannot be moved. */
 export function DatesForm({ call, utcOffsetHours, isOpen, action }: DatesFormProps) {
@@ -41,10 +48,12 @@ export function DatesForm({ call, utcOffsetHours, isOpen, action }: DatesFormPro
       lettersAt: typed(call.lettersAt),
     },
     done: 'Dates saved',
+    compared,
     cleared: { why: '' },
   })
   return (
     <ActionForm form={form}>
+      <CallChoice comparison={form.comparison} say={said} />
       <CallDateFields utcOffsetHours={utcOffsetHours} />
       {isOpen ? (
         <TextAreaField

@@ -6,6 +6,7 @@ import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextField } from '@/components/forms/TextField'
 import { feeScheduleSchema, type FeeScheduleForm as Form } from '@/lib/domain/calls/feeScheduleSchema'
 import type { Call, CallKind, FeeRate } from '@/lib/domain/calls/types'
+import { CallChoice } from './CallChoice'
 import { typedFees } from './typedFees'
 import { useCallForm } from './useCallForm'
 
@@ -35,9 +36,20 @@ export function FeeScheduleForm({ call, kinds, rates, action }: FeeScheduleFormP
       kinds: kinds.map((kind) => typedFees(kind, rates, call.currency)),
     },
     done: 'Fees saved',
+    compared: { currency: 'Currency', kinds: 'Amounts' },
   })
+  const said = (field: string, value: unknown): string =>
+    field === 'kinds'
+      ? (value as Form['kinds'])
+          .map((row) => {
+            const title = kinds.find(({ id }) => id === row.kindId)?.title ?? 'A kind that is gone'
+            return `${title}: ${columns.map(({ name, label }) => `${label.toLowerCase()} ${row[name]}`).join(', ')}`
+          })
+          .join('\n')
+      : String(value) || 'none'
   return (
     <ActionForm form={handle} label="Fees of the call">
+      <CallChoice comparison={handle.comparison} say={said} />
       <TextField
         name="currency"
         label="Currency"

@@ -8,16 +8,19 @@ import { panelNumber } from '@/lib/domain/panels/schema'
 export interface PanelSwitchProps {
   /** The panels of the call that the reader leads, the one shown without asking first. */
   panels: readonly { id: number; name: string }[]
+  /** Where the call's panels share their time; null where it has one panel. */
+  between?: string | null
 }
 
 /**
  * From one panel to another of the same call, staying on the page. What else the address holds (the order of a table,
- * the proposal that is open) belongs to the panel one leaves, and stays behind.
+ * the proposal that is open) belongs to the panel one leaves, and stays behind. At the right, what stands between the panels of the call.
  */
-export function PanelSwitch({ panels }: PanelSwitchProps) {
+export function PanelSwitch({ panels, between = null }: PanelSwitchProps) {
   const pathname = usePathname()
   const asked = panelNumber.safeParse(useSearchParams().get('panel'))
-  if (panels.length < 2) return null
+  if (panels.length < 2 && between === null) return null
+  const isBetween = between !== null && pathname === between
   const current = asked.success ? asked.data : panels[0]?.id
   return (
     <nav aria-label="Panels you lead" className="px-gutter">
@@ -25,15 +28,17 @@ export function PanelSwitch({ panels }: PanelSwitchProps) {
         <span aria-hidden="true" className="flex items-center text-caption text-muted">
           Panel
         </span>
-        <ul className="plain-list flex items-stretch gap-6 overflow-x-auto overflow-y-hidden">
+        <ul className="plain-list flex min-w-0 items-stretch gap-6 overflow-x-auto overflow-y-hidden">
           {panels.map(({ id, name }) => (
             <li key={id} className="flex">
               <Link
                 href={`${pathname}?panel=${id}`}
-                aria-current={id === current ? 'page' : undefined}
+                aria-current={id === current && !isBetween ? 'page' : undefined}
                 className={classNames(
                   'flex items-center whitespace-nowrap no-underline hover:text-ink focus-visible:-outline-offset-3',
-                  id === current ? 'border-b-2 border-ink pt-0.5 font-semibold text-ink' : 'text-muted',
+                  id === current && !isBetween
+                    ? 'border-b-2 border-ink pt-0.5 font-semibold text-ink'
+                    : 'text-muted',
                 )}
               >
                 {name}
@@ -41,6 +46,18 @@ export function PanelSwitch({ panels }: PanelSwitchProps) {
             </li>
           ))}
         </ul>
+        {between ? (
+          <Link
+            href={asked.success ? `${between}?panel=${asked.data}` : between}
+            aria-current={isBetween ? 'page' : undefined}
+            className={classNames(
+              'ml-auto flex items-center whitespace-nowrap no-underline hover:text-ink focus-visible:-outline-offset-3',
+              isBetween ? 'border-b-2 border-ink pt-0.5 font-semibold text-ink' : 'text-muted',
+            )}
+          >
+            Between panels
+          </Link>
+        ) : null}
       </div>
     </nav>
   )

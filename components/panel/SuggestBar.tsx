@@ -5,6 +5,7 @@ import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { Panel } from '@/components/ui/Panel'
 import { suggestionWords, type SuggestedPairs } from '@/lib/domain/assignments/suggestionWords'
+import { mostReaders } from '@/lib/domain/assignments/mostReaders'
 import { countInWords } from '@/lib/format'
 
 export interface SuggestBarProps {
@@ -19,7 +20,7 @@ export interface SuggestBarProps {
 /** Asks for a suggestion and, once it is there, shows what it comes to before anything is assigned. */
 export function SuggestBar({ quorum, suggestion, busy, onSuggest, onAssign, onLeave }: SuggestBarProps) {
   const id = useId()
-  const [each, setEach] = useState(String(quorum))
+  const [each, setEach] = useState(String(Math.min(quorum, mostReaders)))
   if (suggestion) {
     const { pairs } = suggestion
     return (
@@ -28,7 +29,9 @@ export function SuggestBar({ quorum, suggestion, busy, onSuggest, onAssign, onLe
           <p className="m-0 max-w-prose text-table">
             {pairs.length > 0
               ? `${countInWords(pairs.length, 'assignment', 'assignments', true)}, none where there is an interest. Each reviewer gets one letter.`
-              : 'Nothing is missing: every proposal has the readers asked for, or nobody is left who may read it.'}
+              : suggestion.short.length > 0
+                ? 'Nobody can be suggested: whoever reviews for this panel has an interest in what still lacks readers, or reads it already.'
+                : 'Nothing is missing: every proposal has the readers asked for.'}
           </p>
           <p className="mt-2 mb-0 max-w-prose text-table">{suggestionWords(suggestion)}</p>
           <div className="mt-4 flex flex-wrap items-center gap-5">

@@ -1,7 +1,6 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ActionResult } from '@/lib/actions/result'
-import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 import type { Paper } from '@/lib/domain/proposals/types'
 import { countInWords, formatBytes, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
@@ -17,7 +16,6 @@ export interface PaperSlotProps {
   paper: Paper | null
   /** Null for those who only look. */
   actions: {
-    upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
     remove: (input: { reference: string; kind: Paper['kind'] }) => Promise<ActionResult<unknown>>
   } | null
 }
@@ -53,11 +51,10 @@ export function PaperSlot({ reference, kind, title, help, pageLimit, paper, acti
       {actions ? (
         <div className="mt-3">
           <PaperUpload
-            reference={reference}
+            to={paths.newPaper(reference)}
             kind={kind}
             label={paper ? 'Put another in its place' : 'The file'}
             help={help}
-            upload={actions.upload}
           />
         </div>
       ) : null}

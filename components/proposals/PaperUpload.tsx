@@ -1,31 +1,27 @@
 'use client'
 
+import { z } from 'zod'
 import { SendFile } from '@/components/forms/SendFile'
-import type { ActionResult } from '@/lib/actions/result'
 import { maxPaperBytes } from '@/lib/domain/papers/limits'
-import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 
 export interface PaperUploadProps {
-  reference: string
+  /** Where it is sent to. */
+  to: string
   kind: 'justification' | 'team-expertise'
   label: string
   help: string
-  upload: (form: FormData) => Promise<ActionResult<UploadedPaper>>
 }
 
-const words = {
-  deed: 'looking it through',
-  lostWords: 'The file did not get through. Nothing was changed.',
-  doneWords: ({ fileName }: UploadedPaper) => `${fileName} is kept`,
-}
+const reply = z.object({ fileName: z.string() })
 
 /** Takes a PDF of a proposal. */
-export function PaperUpload({ reference, kind, label, help, upload }: PaperUploadProps) {
+export function PaperUpload({ to, kind, label, help }: PaperUploadProps) {
   return (
     <SendFile
-      {...words}
-      {...{ id: kind, label, help, upload }}
-      fields={{ reference, kind }}
+      {...{ id: kind, to, label, help, reply }}
+      fields={{ kind }}
+      deed="looking it through"
+      doneWords={({ fileName }) => `${fileName} is kept`}
       endings={['.pdf']}
       maxBytes={maxPaperBytes}
     />

@@ -22,7 +22,7 @@ export function PersonTools({ reference, person, isFirst, isLast, actions }: Per
   const { busy, run } = useDeed()
   const move = (by: -1 | 1) => () => run(() => actions.move({ reference, id: person.id, by }))
   return (
-    <div className="flex flex-wrap items-center gap-3 text-table" aria-busy={busy || undefined}>
+    <div className="flex flex-wrap items-center gap-3 self-start text-table" aria-busy={busy || undefined}>
       <select
         aria-label={`What ${person.name} may do`}
         value={person.access}

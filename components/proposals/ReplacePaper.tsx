@@ -1,18 +1,16 @@
 import { BarNote } from '@/components/ui/BarNote'
-import type { ActionResult } from '@/lib/actions/result'
 import type { PaperRepair } from '@/lib/domain/papers/repairTypes'
-import type { UploadedPaper } from '@/lib/domain/papers/uploadPaper'
 import { formatUtcInstant } from '@/lib/format'
+import { paths } from '@/lib/paths'
 import { PaperUpload } from './PaperUpload'
 
 interface ReplacePaperProps {
   reference: string
   repair: PaperRepair
-  replace: (form: FormData) => Promise<ActionResult<UploadedPaper>>
 }
 
 /** A paper of a sent proposal that the office has opened: why, until when, and the place for the right file. */
-export function ReplacePaper({ reference, repair, replace }: ReplacePaperProps) {
+export function ReplacePaper({ reference, repair }: ReplacePaperProps) {
   const what = repair.kind === 'justification' ? 'justification' : 'document on the team'
   return (
     <section className="mb-10">
@@ -27,11 +25,10 @@ export function ReplacePaper({ reference, repair, replace }: ReplacePaperProps) 
       </BarNote>
       <div className="mt-4">
         <PaperUpload
-          reference={reference}
+          to={paths.paperReplacement(reference)}
           kind={repair.kind}
           label={`The right ${what}`}
           help="A PDF of at most 20 MB. It becomes a new version at once, and cannot be replaced again."
-          upload={replace}
         />
       </div>
     </section>

@@ -1,6 +1,7 @@
 import { observationCellNames } from '@/components/observations/observationCellNames'
 import { cellNames } from '@/components/targets/cellNames'
 import { groupLabels } from '@/components/targets/groups/groupLabels'
+import { wishLabels } from '@/components/observations/wishLabels'
 import { conditionLabels } from '@/components/observations/conditionLabels'
 import type { ThingKind } from '@/lib/domain/proposals/history/thingsOf'
 import { cosmologyLabels } from './cosmologyLabels'
@@ -13,6 +14,7 @@ export const thingNames: Readonly<Record<ThingKind, string>> = {
   cosmology: '',
   conditions: 'Conditions',
   observation: 'Observation',
+  wish: 'Wishes for',
   person: '',
   paper: '',
   figure: 'Figure',
@@ -26,6 +28,7 @@ export const changedFieldNames: Readonly<Record<ThingKind, Readonly<Record<strin
   cosmology: cosmologyLabels,
   conditions: conditionLabels,
   observation: observationCellNames,
+  wish: wishLabels,
   person: {
     name: 'Name',
     institute: 'Institute',

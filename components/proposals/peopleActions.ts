@@ -10,6 +10,7 @@ export interface PeopleActions {
   describe: Act<{
     reference: string
     id: number
+    version: number
     institute: string
     orcid: string
     isStudent: boolean

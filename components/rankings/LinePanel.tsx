@@ -31,6 +31,8 @@ export function LinePanel({ view, busy, onMove }: LinePanelProps) {
           </>
         ) : view.scores === 0 ? (
           'There is no score yet: where it falls follows from the hours alone.'
+        ) : view.rows.every((row) => row.chance === null) ? (
+          'There are too few scores to tell how sure it is: where it falls follows from the hours alone.'
         ) : (
           'No proposal is in doubt: the scores decide who stands above the line.'
         )}

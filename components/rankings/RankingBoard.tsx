@@ -62,7 +62,9 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
           <BarNote tone="lamp">
             {view.owed > 0
               ? `Reviews are still coming in: ${countInWords(view.owed, 'is', 'are')} owed. The order is that of the raw means so far; places are moved and the line drawn once the ranking has begun.`
-              : 'The order is that of the raw means. Places are moved and the line drawn once the ranking has begun.'}
+              : view.scores === 0
+                ? 'No review is finished yet, so there is nothing to rank by: the order means nothing.'
+                : 'The order is that of the raw means. Places are moved and the line drawn once the ranking has begun.'}
           </BarNote>
         </div>
       ) : null}
@@ -87,7 +89,7 @@ export function RankingBoard({ initial, actions }: RankingBoardProps) {
             />
           ) : null}
           <FormulaPanel view={view} action={actions.formula} />
-          <RankingChanges view={view} />
+          <RankingChanges changes={view.changes} />
           <LeniencyChart view={view} />
           <Agreement view={view} />
         </aside>

@@ -38,10 +38,6 @@ export function TypedCell(props: TypedCellProps) {
       autoComplete="off"
       spellCheck={false}
       placeholder={placeholder}
-      // Nothing typed since: an undo then means the table, not the text.
-      onFocus={(event) => {
-        event.currentTarget.dataset.entered = event.currentTarget.value
-      }}
       onKeyDown={(event) => {
         if (event.key === 'Escape') resetField(name)
         moveBetweenCells(event)

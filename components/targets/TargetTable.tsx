@@ -7,7 +7,7 @@ import {
   useTable,
   type ColumnDef,
 } from '@tanstack/react-table'
-import { useMemo, type KeyboardEvent } from 'react'
+import { useMemo } from 'react'
 import { TableFrame } from '@/components/tables/TableFrame'
 import { VerdictMark } from '@/components/ui/VerdictMark'
 import { countInWords, formatNumber } from '@/lib/format'
@@ -23,27 +23,16 @@ const definitions: ColumnDef<typeof features, RowView, unknown>[] = numberColumn
   helper.accessor((view): unknown => (view.computed ? column.value(view.computed) : null), { id: column.id }),
 )
 
-/** The usual keys take back what was done to the table, once nothing is typed in the cell that its own undo could. */
-function undoKey(event: KeyboardEvent<HTMLElement>, undo: () => void): void {
-  const isUndo = (event.ctrlKey || event.metaKey) && !event.shiftKey && event.key.toLowerCase() === 'z'
-  const cell = event.target
-  if (!isUndo || !(cell instanceof HTMLInputElement) || cell.dataset.entered !== cell.value) return
-  event.preventDefault()
-  undo()
-}
-
 export interface TargetTableWholeProps extends Omit<TargetTableProps, 'columns'> {
   shown: readonly NumberColumnId[]
   totals: Pick<ProposalComputation, 'askedSeconds' | 'neededSeconds' | 'verdict'>
   maxAirmass: number
   months: string
-  /** Takes the last change to the table back. */
-  onUndo: () => void
 }
 
 /** The table of targets: typed cells at the left, computed ones tinted, hours and verdict at the right. */
 export function TargetTable(whole: TargetTableWholeProps) {
-  const { shown, totals, maxAirmass, months, onUndo, ...props } = whole
+  const { shown, totals, maxAirmass, months, ...props } = whole
   const columnVisibility = useMemo(
     () => Object.fromEntries(numberColumns.map(({ id }) => [id, shown.includes(id)])),
     [shown],
@@ -99,7 +88,7 @@ export function TargetTable(whole: TargetTableWholeProps) {
           </th>
         </tr>
       </thead>
-      <tbody role="rowgroup" onKeyDown={(event) => undoKey(event, onUndo)}>
+      <tbody role="rowgroup">
         {rows.map((view, index) => (
           <TargetTableRow
             reference={props.reference}

@@ -7,7 +7,6 @@ import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { formatCalendarDate } from '@/lib/format'
-import { takesOpportunities } from '@/lib/domain/calls/rules'
 import { comparisonOf } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
@@ -20,6 +19,7 @@ import { rowViews } from './rowViews'
 import { TargetTable } from './TargetTable'
 import type { TargetActions } from './targetActions'
 import { useTargetRows } from './useTargetRows'
+import { useUndoKey } from './useUndoKey'
 
 const columnIds = numberColumns.map(({ id }) => id)
 const shownFirst = numberColumns.filter((column) => column.shownFirst).map(({ id }) => id)
@@ -35,7 +35,8 @@ const monthName = (date: string) => formatCalendarDate(date, false).replace(/^\d
 
 /** The targets page: the table one types into, the file one drops, and what both come to. */
 export function TargetsEditor({ contents, computation, readOnly, actions }: TargetsEditorProps) {
-  const { places, typedContents, rowDeeds, begin, last, undo } = useTargetRows(contents, actions)
+  const { places, typedContents, rowDeeds, groupDeeds, begin, last, undo } = useTargetRows(contents, actions)
+  useUndoKey(() => void undo())
   const live = useLiveComputation(contents, computation, typedContents)
   const [shown, setShown] = useQueryState(
     'columns',
@@ -52,7 +53,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
   }, [rows.length])
 
   const { cosmologyName, engineVersion } = live
-  const takesAwaited = takesOpportunities(contents.kind)
+  const takesAwaited = contents.kind.takesAwaited
   const { seasonFrom, seasonTo } = contents.call
   const fullBar = Math.max(
     1,
@@ -116,13 +117,12 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
             groups={groups}
             takesAwaited={takesAwaited}
             deeds={rowDeeds}
-            onUndo={() => void undo()}
           />
         )}
         {rows.length > 0 && readOnly === null ? (
           <p className="m-0 mt-2 text-caption text-muted max-sm:hidden">
             Arrows and Enter move through the cells. A block copied from a spreadsheet fills the cells from
-            the one it is pasted into; Ctrl Z, or ⌘ Z, takes the last change back.
+            the one it is pasted into; Ctrl Z, or ⌘ Z, takes the last change back, to cells, hours or groups.
           </p>
         ) : null}
       </div>
@@ -130,7 +130,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
         contents={contents}
         computed={live.groups}
         readOnly={readOnly !== null}
-        actions={actions}
+        actions={groupDeeds}
       />
       {readOnly ? null : (
         <div className="mt-10">

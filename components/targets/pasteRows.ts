@@ -6,7 +6,7 @@ import { countInWords, formatList } from '@/lib/format'
 import type { RowPlace } from './rowViews'
 import { spreadCells, type PastedCell } from './spreadCells'
 import type { TargetActions } from './targetActions'
-import type { UndoStep } from './useTargetUndo'
+import type { UndoStep } from './undoSteps'
 
 /** What the table may do to a row from outside. */
 export interface RowHandle {
@@ -20,7 +20,7 @@ interface Latest {
   places: readonly RowPlace[]
   typed: Readonly<Record<string, TargetRow>>
   actions: Pick<TargetActions, 'change'>
-  remember: (step: UndoStep) => void
+  remember: (step: UndoStep) => unknown
 }
 
 export interface PasteInto extends Latest {
@@ -94,6 +94,7 @@ export async function pasteRows(
     data.added.length > 0 ? `${countInWords(data.added.length, 'row')} added` : '',
   ].filter(Boolean)
   into.remember({
+    kind: 'rows',
     words: formatList(said),
     rows: data.changed.map((target, index) => ({
       id: target.id,

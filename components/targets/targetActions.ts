@@ -7,9 +7,9 @@ import type { importTargetsSchema } from '@/lib/domain/targets/importTargets'
 import type { removeTargetSchema } from '@/lib/domain/targets/removeTarget'
 import type { reorderTargetsSchema } from '@/lib/domain/targets/reorderTargets'
 import type { saveTargetSchema } from '@/lib/domain/targets/saveTarget'
-import type { removeGroupSchema } from '@/lib/domain/targetGroups/removeGroup'
-import type { saveGroupSchema } from '@/lib/domain/targetGroups/saveGroup'
-import type { Target, TargetGroup } from '@/lib/domain/proposals/types'
+import type { RemovedGroup, removeGroupSchema } from '@/lib/domain/targetGroups/removeGroup'
+import type { SavedGroup, saveGroupSchema } from '@/lib/domain/targetGroups/saveGroup'
+import type { Target } from '@/lib/domain/proposals/types'
 
 type Action<S extends z.ZodType, R> = (input: z.input<S>) => Promise<ActionResult<R>>
 
@@ -22,7 +22,7 @@ export interface TargetActions {
   restore: Action<typeof removeTargetSchema, { id: number }>
   reorder: Action<typeof reorderTargetsSchema, void>
   importRows: Action<typeof importTargetsSchema, { added: number; present: number }>
-  saveGroup: Action<typeof saveGroupSchema, TargetGroup>
-  removeGroup: Action<typeof removeGroupSchema, { name: string }>
+  saveGroup: Action<typeof saveGroupSchema, SavedGroup>
+  removeGroup: Action<typeof removeGroupSchema, RemovedGroup>
   ask: Action<typeof saveAskedTimesSchema, { id: number; version: number; askedSeconds: number }[]>
 }

@@ -7,6 +7,9 @@ import type { ActionResult } from '@/lib/actions/result'
 import type { ProposalContents, Target } from '@/lib/domain/proposals/types'
 import { targetRow } from '@/lib/domain/targets/rules'
 import type { TargetRow } from '@/lib/domain/targets/schema'
+import { changeWords } from './changeWords'
+import { useRememberedGroups } from './groups/useRememberedGroups'
+import { hoursStep } from './hoursStep'
 import { livedTarget, sameRow } from './livedTarget'
 import type { RowPlace } from './rowViews'
 import type { TargetActions } from './targetActions'
@@ -59,13 +62,13 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
   }, [places, contents])
 
   const handleOf = (id: number) => handles.current.get(keys.get(id) ?? `kept-${id}`)
-  const { last, remember, undo } = useTargetUndo(reference, actions.change, (result, removed) => {
-    for (const target of result.changed)
+  const { last, remember, undo } = useTargetUndo(reference, actions, ({ changed, removed }) => {
+    for (const target of changed)
       handleOf(target.id)?.adopt({ row: targetRow(target), version: target.version })
     const gone = new Set(removed.map((id) => keys.get(id)))
     setBegun((before) => before.filter((key) => !gone.has(key)))
   })
-  const latest = useLatest({ places, typed, actions, remember })
+  const latest = useLatest({ places, typed, actions, remember, contents })
 
   const onTyped = useCallback((key: string, row: TargetRow) => {
     setTyped((before) =>
@@ -82,7 +85,8 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
         const result = await now.actions.save({ reference, id, version, row })
         if (result.ok && before)
           now.remember({
-            words: result.data.name,
+            kind: 'rows',
+            words: changeWords(targetRow(before), row),
             rows: [{ id, before: targetRow(before), version: result.data.version }],
             added: [],
           })
@@ -93,7 +97,7 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
         const { id: own, version: first, name } = result.data
         ids.current.set(key, own)
         setKeys((before) => new Map(before).set(own, key))
-        now.remember({ words: `${name} added`, rows: [], added: [{ id: own, version: first }] })
+        now.remember({ kind: 'rows', words: `${name} added`, rows: [], added: [{ id: own, version: first }] })
       }
       return result
     },
@@ -149,7 +153,15 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
     [latest, reference],
   )
 
-  const ask = useCallback<TargetActions['ask']>((input) => latest.current.actions.ask(input), [latest])
+  const ask = useCallback<TargetActions['ask']>(
+    async (input) => {
+      const now = latest.current
+      const result = await now.actions.ask(input)
+      if (result.ok) now.remember(hoursStep(now.contents, result.data))
+      return result
+    },
+    [latest],
+  )
   const onReady = useCallback((key: string, handle: RowHandle | null) => {
     if (handle) handles.current.set(key, handle)
     else handles.current.delete(key)
@@ -159,5 +171,6 @@ export function useTargetRows(contents: ProposalContents, actions: TargetActions
     () => ({ onTyped, onSave, onRemove, onMove, onPaste, onReady, ask }),
     [onTyped, onSave, onRemove, onMove, onPaste, onReady, ask],
   )
-  return { places, typedContents, rowDeeds, begin, last, undo }
+  const groupDeeds = useRememberedGroups(contents, actions, { remember, undo })
+  return { places, typedContents, rowDeeds, groupDeeds, begin, last, undo }
 }

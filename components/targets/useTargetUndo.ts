@@ -1,67 +1,69 @@
 'use client'
 
-import { useRef, useState } from 'react'
+import { useCallback, useRef, useState } from 'react'
 import { showToast } from '@/components/ui/showToast'
-import type { TargetRow } from '@/lib/domain/targets/schema'
-import type { ChangedTargets } from '@/lib/domain/targets/changeTargets'
+import { takeBack, type TakenBack } from './takeBack'
 import type { TargetActions } from './targetActions'
-
-/** One change made here: rows as they were, with the version that the change gave them, and rows that it added. */
-export interface UndoStep {
-  words: string
-  rows: { id: number; before: TargetRow; version: number }[]
-  added: { id: number; version: number }[]
-}
+import { rebased, type UndoStep } from './undoSteps'
+import { useLatest } from './useLatest'
 
 const longest = 100
 
 /**
- * The changes made to the table in this window, newest last, and taking the newest back. A row that somebody changed
- * since is not touched: the whole step is then refused.
+ * The changes made to targets, hours and groups in this window, newest last, and taking the newest back. What somebody
+ * changed since is not touched: the whole step is then refused.
  */
 export function useTargetUndo(
   reference: string,
-  change: TargetActions['change'],
-  onUndone: (result: ChangedTargets, removed: number[]) => void,
+  actions: Pick<TargetActions, 'change' | 'ask' | 'saveGroup' | 'removeGroup'>,
+  onUndone: (taken: TakenBack) => void,
 ) {
-  const [steps, setSteps] = useState<readonly UndoStep[]>([])
-  const busy = useRef(false)
+  const steps = useRef<readonly { key: number; step: UndoStep }[]>([])
+  const [last, setLast] = useState<string | null>(null)
+  const nextKey = useRef(0)
+  const isBusy = useRef(false)
+  const latest = useLatest({ actions, onUndone })
 
-  const remember = (step: UndoStep) => setSteps((before) => [...before, step].slice(-longest))
+  const keep = useCallback((next: typeof steps.current) => {
+    steps.current = next.slice(-longest)
+    setLast(next.at(-1)?.step.words ?? null)
+  }, [])
 
-  const undo = async () => {
-    const step = steps.at(-1)
-    if (!step || busy.current) return
-    busy.current = true
-    const changed = step.rows.map(({ id, version, before }) => ({ id, version, row: before }))
-    const result = await change({ reference, changed, added: [], removed: step.added }).catch(() => null)
-    busy.current = false
-    if (!result) return showToast('The observatory did not answer. Nothing was taken back.')
-    const rest = (versions: ReadonlyMap<number, number>) =>
-      setSteps((before) =>
-        before
-          .filter((one) => one !== step)
-          .map((one) => ({
-            ...one,
-            rows: one.rows.map((row) => ({ ...row, version: versions.get(row.id) ?? row.version })),
-            added: one.added.map((row) => ({ ...row, version: versions.get(row.id) ?? row.version })),
-          })),
-      )
-    if (!result.ok) {
-      rest(new Map())
-      return showToast(
-        result.stale
-          ? `${result.stale.changedBy} changed this since. Nothing was taken back.`
-          : `Nothing was taken back. ${result.message}`,
-      )
-    }
-    rest(new Map(result.data.changed.map(({ id, version }) => [id, version])))
-    onUndone(
-      result.data,
-      step.added.map(({ id }) => id),
-    )
-    showToast(`Taken back: ${step.words}`)
-  }
+  /** Remembers a change; gives the key by which this very one can be taken back. */
+  const remember = useCallback(
+    (step: UndoStep): number => {
+      const key = nextKey.current++
+      keep([...steps.current, { key, step }])
+      return key
+    },
+    [keep],
+  )
 
-  return { last: steps.at(-1)?.words ?? null, remember, undo }
+  /** Takes the newest change back, or the one with this key if it is still to be taken back. */
+  const undo = useCallback(
+    async (which?: number) => {
+      const found =
+        which === undefined ? steps.current.at(-1) : steps.current.find(({ key }) => key === which)
+      if (!found || isBusy.current) return
+      isBusy.current = true
+      const result = await takeBack(latest.current.actions, reference, found.step).catch(() => null)
+      isBusy.current = false
+      if (!result) return showToast('The observatory did not answer. Nothing was taken back.')
+      const others = steps.current.filter(({ key }) => key !== found.key)
+      if (!result.ok) {
+        keep(others)
+        return showToast(
+          result.stale
+            ? `${result.stale.changedBy} changed this since. Nothing was taken back.`
+            : `Nothing was taken back. ${Object.values(result.fieldErrors)[0] ?? result.message}`,
+        )
+      }
+      keep(others.map(({ key, step }) => ({ key, step: rebased(step, result.data) })))
+      latest.current.onUndone(result.data)
+      showToast(`Taken back: ${found.step.words}`)
+    },
+    [reference, keep, latest],
+  )
+
+  return { last, remember, undo }
 }

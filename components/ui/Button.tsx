@@ -13,6 +13,8 @@ export interface ButtonProps extends Omit<ComponentProps<'button'>, 'className' 
   busy?: boolean
   /** The verb while busy, `Sending`. */
   busyWord?: string
+  /** True until the page is alive: not to be pressed yet, though it looks as it will. */
+  asleep?: boolean
   /** Why it cannot be pressed, in words that stand beside it. Turns the button off. */
   offReason?: string | null
   children: ReactNode
@@ -25,6 +27,7 @@ export function Button({
   full = false,
   busy = false,
   busyWord,
+  asleep = false,
   offReason,
   children,
   onClick,
@@ -38,6 +41,7 @@ export function Button({
     <button
       {...rest}
       type={idle && type === 'submit' ? 'button' : type}
+      disabled={asleep}
       aria-disabled={idle || undefined}
       aria-busy={busy || undefined}
       aria-describedby={off ? reasonId : rest['aria-describedby']}

@@ -68,7 +68,6 @@ export function FigureList({ most, reference, figures, actions }: FigureListProp
                         reference={reference}
                         figureId={figure.id}
                         label="Another picture in its place"
-                        upload={actions.upload}
                       />
                     </div>
                   </>
@@ -87,7 +86,6 @@ export function FigureList({ most, reference, figures, actions }: FigureListProp
             figureId={null}
             label={figures.length === 0 ? 'A picture' : 'One more picture'}
             help={`PNG or JPEG of at most ${formatBytes(maxFigureBytes)}; ${countInWords(most, 'figure')} at most. It is drawn anew: place, camera and other notes in the file are left behind.`}
-            upload={actions.upload}
           />
         </div>
       ) : null}

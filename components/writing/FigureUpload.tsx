@@ -1,8 +1,11 @@
 'use client'
 
+import { z } from 'zod'
 import { SendFile } from '@/components/forms/SendFile'
 import { maxFigureBytes } from '@/lib/domain/writings/limits'
-import type { FigureActions } from './figureActions'
+import { paths } from '@/lib/paths'
+
+const reply = z.object({ fileName: z.string(), label: z.string() })
 
 export interface FigureUploadProps {
   reference: string
@@ -10,18 +13,17 @@ export interface FigureUploadProps {
   figureId: number | null
   label: string
   help?: string
-  upload: FigureActions['upload']
 }
 
 /** Takes a picture of the justification. */
-export function FigureUpload({ reference, figureId, label, help, upload }: FigureUploadProps) {
+export function FigureUpload({ reference, figureId, label, help }: FigureUploadProps) {
   return (
     <SendFile
-      {...{ label, help, upload }}
+      {...{ label, help, reply }}
       id={`figure-${figureId ?? 'new'}`}
-      fields={{ reference, figureId: figureId ?? '' }}
+      to={paths.newFigure(reference)}
+      fields={{ figureId: figureId ?? '' }}
       deed="drawing it anew"
-      lostWords="The picture did not get through. Nothing was changed."
       doneWords={(kept) => `${kept.fileName} is kept as ${kept.label}`}
       endings={['.png', '.jpg', '.jpeg']}
       maxBytes={maxFigureBytes}

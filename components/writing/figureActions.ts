@@ -1,10 +1,8 @@
 import type { ActionResult } from '@/lib/actions/result'
 import type { Saved } from '@/lib/domain/proposals/writeProposal'
-import type { UploadedFigure } from '@/lib/domain/writings/uploadFigure'
 
 /** What can be done with figures; the page gives it to those who may. */
 export interface FigureActions {
-  upload: (form: FormData) => Promise<ActionResult<UploadedFigure>>
   save: (input: {
     reference: string
     id: number

@@ -7,7 +7,7 @@ export interface OutsideAward {
   seconds: number
 }
 
-/** What standing lines give in a call to all but some proposals, reserve not counted. */
+/** What standing lines give in the queue of a call to all but some proposals; no reserve, and no visits, which have dates. */
 export async function awardsOutside(
   db: Database,
   callId: number,
@@ -17,7 +17,7 @@ export async function awardsOutside(
     .join('decisions as d', 'd.id', 'a.decision_id')
     .join('proposals as p', 'p.id', 'd.proposal_id')
     .join('instruments as i', 'i.id', 'a.instrument_id')
-    .where({ 'p.call_id': callId, 'a.is_reserve': 0 })
+    .where({ 'p.call_id': callId, 'a.is_reserve': 0, 'a.service': 'queue' })
     .whereNotIn('p.id', proposalIds)
     .whereNull('d.superseded_at')
     .whereNull('a.superseded_at')

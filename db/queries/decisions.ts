@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
 import type { AwardLinesRow, DecisionsRow } from '../tables.ts'
+import { releaseHalves } from './visits.ts'
 
 const now = (db: Database) => db.raw('UTC_TIMESTAMP(3)') as unknown as Date
 
@@ -101,8 +102,9 @@ export async function standingAwards(db: Database, proposalIds: readonly number[
   return rows.map((row) => ({ ...row, isReserve: Boolean(row.isReserve) }))
 }
 
-/** Retires the lines of a decision; they stay on record. */
+/** Retires the lines of a decision, and gives the nights of their visits back; they stay on record. */
 export async function supersedeAwards(db: Database, decisionId: number): Promise<void> {
+  await releaseHalves(db, decisionId)
   await db('award_lines')
     .where({ decision_id: decisionId })
     .whereNull('superseded_at')
@@ -135,9 +137,9 @@ export interface NewAward {
 
 /**
  * Gives time, unless the telescope's science hours of the call, less those held back, would then be exceeded: the same promise that the
- * invariants check, held by the statement itself. False when nothing was given.
+ * invariants check, held by the statement itself. Its key; null when nothing was given.
  */
-export async function insertAward(db: Database, callId: number, award: NewAward): Promise<boolean> {
+export async function insertAward(db: Database, callId: number, award: NewAward): Promise<number | null> {
   const [result] = (await db.raw(
     `INSERT INTO award_lines (decision_id, instrument_id, seconds, service, conditions, is_reserve)
      SELECT ?, i.id, ?, ?, ?, ? FROM instruments i
@@ -163,8 +165,8 @@ export async function insertAward(db: Database, callId: number, award: NewAward)
       callId,
       callId,
     ],
-  )) as [{ affectedRows: number }]
-  return result.affectedRows === 1
+  )) as [{ affectedRows: number; insertId: number }]
+  return result.affectedRows === 1 ? result.insertId : null
 }
 
 export interface ToDecide {

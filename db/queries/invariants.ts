@@ -52,14 +52,48 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
       WHERE g.given > COALESCE(o.offered, 0) - COALESCE(h.held, 0)`,
   ],
   [
+    'I3 two calls do not offer the same part of a night of a telescope, and none divides a night in parts that overlap',
+    `SELECT a.id FROM night_blocks a JOIN night_blocks b ON b.evening_date = a.evening_date AND b.telescope_id = a.telescope_id
+        AND b.id > a.id AND a.fraction_from < b.fraction_to AND b.fraction_from < a.fraction_to
+      WHERE a.call_id = b.call_id OR (a.use_for = 'science' AND b.use_for = 'science')`,
+  ],
+  [
     'I3 what is never to be given time is given none',
     `SELECT n.id FROM night_choices n JOIN decisions d ON d.proposal_id = n.proposal_id JOIN award_lines a ON a.decision_id = d.id
       WHERE n.choice = 'never' AND n.superseded_at IS NULL AND d.superseded_at IS NULL AND a.superseded_at IS NULL AND a.seconds > 0`,
   ],
   [
-    'I3 one choice stands for a proposal, and one time held back on a telescope of a call',
+    'I3 one choice stands for a proposal, one time held back on a telescope of a call, one least for an instrument',
     `SELECT proposal_id FROM night_choices WHERE superseded_at IS NULL GROUP BY proposal_id HAVING COUNT(*) > 1
-      UNION ALL SELECT telescope_id FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id HAVING COUNT(*) > 1`,
+      UNION ALL SELECT telescope_id FROM held_hours WHERE superseded_at IS NULL GROUP BY call_id, telescope_id HAVING COUNT(*) > 1
+      UNION ALL SELECT proposal_id FROM least_awards WHERE superseded_at IS NULL GROUP BY proposal_id, instrument_id HAVING COUNT(*) > 1`,
+  ],
+  [
+    'I3 a visit has the hours of its halves of nights, and holds them while it stands and no longer',
+    `SELECT a.id FROM award_lines a JOIN decisions d ON d.id = a.decision_id LEFT JOIN visit_halves v ON v.award_line_id = a.id
+      WHERE a.service = 'visitor' OR v.id IS NOT NULL
+      GROUP BY a.id
+     HAVING MAX(a.seconds) <> COALESCE(SUM(v.seconds), 0)
+         OR COALESCE(SUM(v.holds), 0) <> MAX(a.superseded_at IS NULL AND d.superseded_at IS NULL) * COUNT(v.id)`,
+  ],
+  [
+    'I3 no visit stands on a half of a night that is not science with its instrument',
+    `SELECT v.id FROM visit_halves v JOIN award_lines a ON a.id = v.award_line_id
+       LEFT JOIN night_blocks b ON b.call_id = v.call_id AND b.telescope_id = v.telescope_id AND b.evening_date = v.evening_date
+        AND b.use_for = 'science' AND (b.instrument_id IS NULL OR b.instrument_id = a.instrument_id)
+      WHERE v.holds = 1
+      GROUP BY v.id
+     HAVING COALESCE(SUM(GREATEST(0, LEAST(b.fraction_to, IF(v.half = 'first', 0.5, 1))
+              - GREATEST(b.fraction_from, IF(v.half = 'first', 0, 0.5)))), 0) < 0.499`,
+  ],
+  [
+    'I3 a list of all panels keeps the order of each, and one stands for a call',
+    `SELECT a.id FROM merged_entries a JOIN merged_entries b ON b.list_id = a.list_id AND b.ranking_id = a.ranking_id AND b.place > a.place
+      JOIN ranking_entries x ON x.ranking_id = a.ranking_id AND x.proposal_id = a.proposal_id
+      JOIN ranking_entries y ON y.ranking_id = b.ranking_id AND y.proposal_id = b.proposal_id
+      WHERE x.place > y.place
+      UNION ALL SELECT call_id FROM merged_lists WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1
+      UNION ALL SELECT call_id FROM share_rules WHERE superseded_at IS NULL GROUP BY call_id HAVING COUNT(*) > 1`,
   ],
   [
     'I4 nobody with an interest holds an assignment or a score',
@@ -77,6 +111,10 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
         AND (approved_by IS NULL OR approved_by = changed_by OR approved_version <> version - 1)`,
   ],
   ['I5 a letter called sent has a time', "SELECT id FROM outbox WHERE state = 'sent' AND sent_at IS NULL"],
+  [
+    'I5 a letter to somebody erased keeps the address only until it goes',
+    "SELECT id FROM outbox WHERE template = 'person-erased' AND state NOT IN ('queued', 'sending') AND to_email <> 'erased@erased.invalid'",
+  ],
   [
     'I5 no letter to many goes twice to one address',
     'SELECT bulk_letter_id FROM outbox WHERE bulk_letter_id IS NOT NULL GROUP BY bulk_letter_id, to_email HAVING COUNT(*) > 1',
@@ -113,7 +151,7 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     'I9 only a kind of proposal that takes it waits for a target, and then says all of it',
     `SELECT t.id FROM targets t JOIN proposals p ON p.id = t.proposal_id JOIN call_kinds k ON k.id = p.call_kind_id
       WHERE t.opportunity_class IS NOT NULL
-        AND (k.kind <> 'opportunity' OR t.opportunity_trigger IS NULL OR t.opportunity_reaction_s IS NULL OR t.opportunity_count IS NULL)`,
+        AND (k.takes_awaited = 0 OR t.opportunity_trigger IS NULL OR t.opportunity_reaction_s IS NULL OR t.opportunity_count IS NULL)`,
   ],
 ]
 

@@ -7,6 +7,7 @@ export interface NewInvoice {
   feeId: number
   institute: string
   address: string
+  billingRecordId: number
   purchaseOrder: string
   sendTo: string
   amountMinor: number
@@ -21,6 +22,7 @@ export async function insertInvoice(db: Database, invoice: NewInvoice): Promise<
     fee_id: invoice.feeId,
     institute: invoice.institute,
     address: invoice.address,
+    billing_record_id: invoice.billingRecordId,
     purchase_order: invoice.purchaseOrder,
     send_to: invoice.sendTo,
     amount_minor: invoice.amountMinor,
@@ -73,6 +75,7 @@ export interface NewCreditNote {
   refundId: number | null
   creditedTo: string
   address: string
+  billingRecordId: number | null
   amountMinor: number
   currency: string
   reason: string
@@ -86,6 +89,7 @@ export async function insertCreditNote(db: Database, note: NewCreditNote): Promi
     refund_id: note.refundId,
     credited_to: note.creditedTo,
     address: note.address,
+    billing_record_id: note.billingRecordId,
     amount_minor: note.amountMinor,
     currency: note.currency,
     reason: note.reason.slice(0, 300),

@@ -39,11 +39,11 @@ export async function feeBooks(db: Database): Promise<FeeBook[]> {
         [
           sum("e.movement LIKE 'billed:%' AND e.account = 'receivable'", 'billed'),
           sum(
-            "e.movement LIKE 'paid:%' AND e.account = 'provider' OR e.movement LIKE 'settled:%' AND e.account = 'bank'",
+            "e.movement LIKE 'paid:%' AND e.account = 'provider' OR e.movement LIKE 'settled:%' AND e.account = 'bank' OR e.movement LIKE 'paid-after-all:%' AND e.account = 'provider' OR e.movement LIKE 'dispute-decided:%' AND e.account = 'lost'",
             'paid',
           ),
           sum("e.account = 'waived'", 'waived'),
-          sum("e.movement REGEXP '^(lapsed|cancelled):' AND e.account = 'income'", 'dropped'),
+          sum("e.movement REGEXP '^(lapsed|cancelled|dispute-decided):' AND e.account = 'income'", 'dropped'),
           sum("e.movement LIKE 'refunded:%' AND e.account = 'owed-back'", 'back'),
           sum("e.account IN ('disputed', 'lost')", 'disputed'),
           sum("e.account = 'firm-fees'", 'firm_fees'),

@@ -1,5 +1,6 @@
 import type { Database } from '../client.ts'
-import type { DecisionsRow, FeesRow, ProposalsRow, WaiversRow } from '../tables.ts'
+import type { DecisionsRow, ProposalsRow } from '../tables.ts'
+import { moneyOfLetter, type LetterMoney } from './letterMoney.ts'
 
 export interface CaseLine {
   reference: string
@@ -16,7 +17,7 @@ export const letterCases = (db: Database, limit: number): Promise<CaseLine[]> =>
     .limit(limit)
     .select({ reference: 'p.reference', title: 'p.title', state: 'p.state', call: 'c.number' })
 
-export interface LetterCase {
+export interface LetterCase extends LetterMoney {
   reference: string
   title: string
   reviewNumber: string | null
@@ -26,15 +27,6 @@ export interface LetterCase {
   call: { number: number; title: string; slug: string; closesAt: Date; reviewsDueAt: Date }
   chair: string | null
   version: { number: number; arrivedAt: Date; sha256: string } | null
-  fee: { amountMinor: number; currency: string; dueAt: Date; state: FeesRow['state'] } | null
-  receipt: {
-    number: string
-    amountMinor: number
-    currency: string
-    cardLast4: string | null
-    paidAt: Date
-  } | null
-  waiver: { reason: string; state: WaiversRow['state']; note: string; askedBy: string } | null
   decision: {
     outcome: DecisionsRow['outcome']
     lines: { instrument: string; seconds: number; isReserve: boolean; conditions: string }[]
@@ -65,43 +57,6 @@ async function decisionOf(db: Database, proposalId: number): Promise<LetterCase[
   return {
     outcome: decision.outcome,
     lines: lines.map(({ reserve, ...line }) => ({ ...line, isReserve: reserve === 1 })),
-  }
-}
-
-async function moneyOf(
-  db: Database,
-  proposalId: number,
-): Promise<Pick<LetterCase, 'fee' | 'receipt' | 'waiver'>> {
-  const fee = await db('fees').where({ proposal_id: proposalId }).first()
-  if (!fee) return { fee: null, receipt: null, waiver: null }
-  const [receipt, waiver] = await Promise.all([
-    db('receipts as r')
-      .join('payments as p', 'p.id', 'r.payment_id')
-      .where('r.fee_id', fee.id)
-      .whereNotNull('p.succeeded_at')
-      .orderBy('r.id', 'desc')
-      .first<LetterCase['receipt'] | undefined>({
-        number: 'r.number',
-        amountMinor: 'p.amount_minor',
-        currency: 'p.currency',
-        cardLast4: 'p.card_last4',
-        paidAt: 'p.succeeded_at',
-      }),
-    db('waivers as w')
-      .join('people as a', 'a.id', 'w.asked_by')
-      .where('w.fee_id', fee.id)
-      .orderBy('w.id', 'desc')
-      .first<LetterCase['waiver'] | undefined>({
-        reason: 'w.reason',
-        state: 'w.state',
-        note: 'w.decision_note',
-        askedBy: 'a.name',
-      }),
-  ])
-  return {
-    fee: { amountMinor: fee.amount_minor, currency: fee.currency, dueAt: fee.due_at, state: fee.state },
-    receipt: orNull(receipt),
-    waiver: orNull(waiver),
   }
 }
 
@@ -154,7 +109,7 @@ export async function findLetterCase(db: Database, reference: string): Promise<L
       .where({ proposal_id: proposal.id })
       .orderBy('version_number', 'desc')
       .first({ number: 'version_number', arrivedAt: 'arrived_at', sha256: 'snapshot_sha256' }),
-    moneyOf(db, proposal.id),
+    moneyOfLetter(db, proposal.id),
     decisionOf(db, proposal.id),
     questionOf(db, proposal.id),
     db('panel_members as m')

@@ -58,13 +58,20 @@ export async function entriesOf(
   }))
 }
 
-/** Who changed a subject last; null when nobody has. */
+/**
+ * Who changed a subject last; null when nobody has. With `about`, who did one of these things last to the part of it
+ * that has this name, among its newest 200 entries.
+ */
 export async function lastChangeOf(
   db: Database,
   subjectKind: string,
   subjectId: string,
+  about?: { actions: readonly string[]; name: string },
 ): Promise<SubjectEntry | null> {
-  return (await entriesOf(db, subjectKind, subjectId, 1))[0] ?? null
+  const entries = await entriesOf(db, subjectKind, subjectId, about ? 200 : 1)
+  const isAbout = ({ action, after }: SubjectEntry) =>
+    !about || (about.actions.includes(action) && (after as { name?: unknown } | null)?.name === about.name)
+  return entries.find(isAbout) ?? null
 }
 
 export interface LogbookLine {

@@ -17,6 +17,8 @@ const feeWithBooks = `SELECT f.id, f.state, f.amount_minor AS amount,
       WHERE COALESCE(p.fee_id, i.fee_id) = f.id AND r.state = 'created' AND r.is_surplus = 0), 0) AS fee_back_waiting,
     COALESCE((SELECT SUM(d.amount_minor) FROM disputes d JOIN payments p ON p.id = d.payment_id WHERE p.fee_id = f.id AND d.state = 'open'), 0) AS held,
     COALESCE((SELECT SUM(d.amount_minor) FROM disputes d JOIN payments p ON p.id = d.payment_id WHERE p.fee_id = f.id AND d.state = 'lost'), 0) AS gone,
+    COALESCE((SELECT SUM(d.amount_minor) FROM disputes d JOIN payments p ON p.id = d.payment_id
+      WHERE p.fee_id = f.id AND d.state = 'lost' AND d.decision IN ('ask-again', 'waive', 'withdraw')), 0) AS reopened,
     COALESCE(e.receivable, 0) AS receivable, COALESCE(e.invoiced, 0) AS invoiced, COALESCE(e.provider, 0) AS provider,
     COALESCE(e.bank, 0) AS bank, COALESCE(e.owed_back, 0) AS owed_back, COALESCE(e.refunds, 0) AS refunds,
     COALESCE(e.disputed, 0) AS disputed, COALESCE(e.lost, 0) AS lost, COALESCE(e.firm_fees, 0) AS firm_fees,
@@ -41,9 +43,9 @@ export const promisesOfMoney: readonly (readonly [name: string, sql: string])[] 
   [
     'I2 a paid fee was paid once, whatever was given back of it since; another fee was not paid',
     books(
-      `(state IN ('paid', 'refunded') AND paid + settled - surplus <> amount)
+      `(state IN ('paid', 'refunded') AND paid + settled - surplus - reopened <> amount)
         OR (state = 'paid' AND fee_back >= amount) OR (state = 'refunded' AND fee_back = 0) OR fee_back > amount
-        OR (state NOT IN ('paid', 'refunded') AND paid + settled - surplus <> 0)`,
+        OR (state NOT IN ('paid', 'refunded') AND paid + settled - surplus - reopened <> 0)`,
     ),
   ],
   [
@@ -68,8 +70,8 @@ export const promisesOfMoney: readonly (readonly [name: string, sql: string])[] 
   [
     'I2 what the books hold at firm and bank is what payments, refunds and disputes leave',
     books(
-      `provider + disputed + lost + firm_fees <> paid - back_by_card OR bank <> settled - back_by_bank
-        OR disputed <> held OR lost <> gone OR firm_fees < 0`,
+      `provider + disputed + lost + firm_fees <> paid - reopened - back_by_card OR bank <> settled - back_by_bank
+        OR disputed <> held OR lost <> gone - reopened OR firm_fees < 0`,
     ),
   ],
   [
@@ -81,6 +83,10 @@ export const promisesOfMoney: readonly (readonly [name: string, sql: string])[] 
     books(
       `-income <> IF(state IN ('lapsed', 'cancelled'), 0, amount) OR waived <> IF(state = 'waived', amount, 0)`,
     ),
+  ],
+  [
+    'I2 only a lost dispute is decided, by somebody or nobody any more, and then at a time',
+    `SELECT id FROM disputes WHERE (decision IS NULL) <> (decided_at IS NULL) OR (decision IS NOT NULL AND state = 'open')`,
   ],
   ['I2 receipt numbers have no gaps', noGaps('receipts')],
   ['I2 invoice numbers have no gaps', noGaps('invoices')],

@@ -64,3 +64,33 @@ export async function replaceHeld(
       made_by: given.by,
     })
 }
+
+export interface StandingLeast {
+  proposalId: number
+  instrumentId: number
+  seconds: number
+  reason: string
+}
+
+/** Least useful awards the chair has set. */
+export async function standingLeasts(db: Database, proposalIds: readonly number[]): Promise<StandingLeast[]> {
+  const rows = await db('least_awards').whereIn('proposal_id', proposalIds).whereNull('superseded_at')
+  return rows.map(({ proposal_id, instrument_id, seconds, reason }) => ({
+    ...{ proposalId: proposal_id, instrumentId: instrument_id },
+    ...{ seconds, reason },
+  }))
+}
+
+/** Puts a least useful award in the place of the one that stands; 0 takes that back. */
+export async function replaceLeast(db: Database, given: StandingLeast & { by: number }): Promise<void> {
+  const which = { proposal_id: given.proposalId, instrument_id: given.instrumentId }
+  await db('least_awards')
+    .where(which)
+    .whereNull('superseded_at')
+    .update({ superseded_at: now(db) })
+  if (given.seconds > 0)
+    await db('least_awards').insert({
+      ...which,
+      ...{ seconds: given.seconds, reason: given.reason, made_by: given.by },
+    })
+}

@@ -54,7 +54,8 @@ interface Row {
 /** Money that came and went by fee, as the books have it. */
 const moneyByFee = (db: Database) =>
   db.raw(`(SELECT fee_id,
-      SUM(IF(movement LIKE 'paid:%' AND account = 'provider' OR movement LIKE 'settled:%' AND account = 'bank', amount_minor, 0)) AS paid,
+      SUM(IF(movement LIKE 'paid:%' AND account = 'provider' OR movement LIKE 'settled:%' AND account = 'bank'
+        OR movement LIKE 'paid-after-all:%' AND account = 'provider' OR movement LIKE 'dispute-decided:%' AND account = 'lost', amount_minor, 0)) AS paid,
       -SUM(IF(movement LIKE 'refunded:%' AND account IN ('provider', 'bank'), amount_minor, 0)) AS refunded,
       SUM(IF(account = 'disputed', amount_minor, 0)) AS disputed, SUM(IF(account = 'lost', amount_minor, 0)) AS lost
     FROM money_entries GROUP BY fee_id) AS e`)

@@ -74,7 +74,17 @@ export async function claimLetters(db: Database, limit: number, holdSeconds: num
   })
 }
 
-export async function markSent(db: Database, id: number): Promise<void> {
+/** What is left of a letter whose reader is forgotten. */
+const forgotten = {
+  to_email: 'erased@erased.invalid',
+  to_name: 'Erased person',
+  subject: 'To an erased person',
+  text_body: '',
+  html_body: '',
+}
+
+/** `forget`: blots out at once whom it went to and what it said. */
+export async function markSent(db: Database, id: number, forget = false): Promise<void> {
   await db('outbox')
     .where({ id })
     .update({
@@ -83,6 +93,20 @@ export async function markSent(db: Database, id: number): Promise<void> {
       attempts: db.raw('attempts + 1') as unknown as number,
       claimed_until: null,
       last_error: null,
+      ...(forget ? forgotten : {}),
+    })
+}
+
+/** Gives a letter up that cannot go, and blots out whom it was for and what it said. */
+export async function giveUpAndForget(db: Database, id: number): Promise<void> {
+  await db('outbox')
+    .where({ id })
+    .update({
+      state: 'cancelled',
+      attempts: db.raw('attempts + 1') as unknown as number,
+      claimed_until: null,
+      last_error: null,
+      ...forgotten,
     })
 }
 
@@ -101,6 +125,26 @@ export async function markFailed(
       last_error: outcome.error.slice(0, 300),
       next_attempt_at: utcIn(db, outcome.waitSeconds),
     })
+}
+
+/** The letter that was sent under one of these Message-IDs, locked. */
+export async function lockLetterOf(db: Database, messageIds: readonly string[]): Promise<OutboxRow | null> {
+  if (messageIds.length === 0) return null
+  return (
+    (await db('outbox')
+      .whereIn('message_id', [...messageIds])
+      .forUpdate()
+      .first()) ?? null
+  )
+}
+
+/** Keeps what a mail server said of a letter after it had taken it, and what becomes of the letter. */
+export async function markReported(
+  db: Database,
+  id: number,
+  outcome: { said: string; state: 'sent' | 'parked' | 'bounced' },
+): Promise<void> {
+  await db('outbox').where({ id }).update({ state: outcome.state, last_error: outcome.said })
 }
 
 /** Letters, the newest first, without their texts. */

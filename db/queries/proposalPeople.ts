@@ -25,6 +25,7 @@ function investigatorOf(row: NamedRow): Investigator {
     isOrcidVerified: row.account_orcid !== null && row.account_orcid_verified_at !== null,
     position: row.position,
     confirmedAt: row.confirmed_at,
+    version: row.version,
   }
 }
 
@@ -83,36 +84,56 @@ export async function insertInvestigator(db: Database, given: NewInvestigator): 
 export interface InvestigatorChanges {
   role?: Investigator['role']
   access?: Investigator['access']
-  isStudent?: boolean
-  isSupervisor?: boolean
-  orcid?: string | null
   position?: number
-  personId?: number
-  name?: string
-  institute?: string
-  confirmedAt?: Date
 }
 
+/** Rights and order, in which each choice stands alone: the last one holds. */
 export async function updateInvestigator(
   db: Database,
   id: number,
-  changes: InvestigatorChanges,
+  { role, access, position }: InvestigatorChanges,
 ): Promise<void> {
-  const { role, access, isStudent, isSupervisor, orcid, position, personId, name, institute, confirmedAt } =
-    changes
   await db('proposal_people')
     .where({ id })
     .update({
       ...(role ? { role } : {}),
       ...(access ? { access } : {}),
-      ...(isStudent === undefined ? {} : { is_student: isStudent ? 1 : 0 }),
-      ...(isSupervisor === undefined ? {} : { is_supervisor: isSupervisor ? 1 : 0 }),
-      ...(orcid === undefined ? {} : { orcid }),
       ...(position === undefined ? {} : { position }),
-      ...(personId ? { person_id: personId } : {}),
-      ...(name ? { name } : {}),
-      ...(institute === undefined ? {} : { institute }),
-      ...(confirmedAt ? { confirmed_at: confirmedAt } : {}),
+    })
+}
+
+/** Writes what is said of someone who still has the version read; false when another change was first. */
+export async function updateDescription(
+  db: Database,
+  person: { id: number; version: number },
+  said: Pick<Investigator, 'institute' | 'orcid' | 'isStudent' | 'isSupervisor'>,
+): Promise<boolean> {
+  const changed = await db('proposal_people')
+    .where({ id: person.id, version: person.version })
+    .update({
+      institute: said.institute,
+      orcid: said.orcid,
+      is_student: said.isStudent ? 1 : 0,
+      is_supervisor: said.isSupervisor ? 1 : 0,
+      version: person.version + 1,
+    })
+  return changed > 0
+}
+
+/** Someone named agrees; the name and the institute are a new version of what is said of them. */
+export async function confirmInvestigator(
+  db: Database,
+  id: number,
+  own: { personId: number; name: string; institute: string; confirmedAt: Date },
+): Promise<void> {
+  await db('proposal_people')
+    .where({ id })
+    .update({
+      person_id: own.personId,
+      name: own.name,
+      institute: own.institute,
+      confirmed_at: own.confirmedAt,
+      version: db.raw('version + 1') as never,
     })
 }
 

@@ -37,8 +37,9 @@ function dates(anchor: Date, closesIn: number, seasonStart: Date): SeedCallDates
   }
 }
 
-/** Dates of the three calls around the day the demonstration is first started. Seasons follow one another. */
+/** Dates of the calls around the day the demonstration is first started. Seasons follow one another. */
 export function callDates(anchor: Date): {
+  earlier: SeedCallDates
   decided: SeedCallDates
   inReview: SeedCallDates
   open: SeedCallDates
@@ -46,6 +47,7 @@ export function callDates(anchor: Date): {
   const closesInReview = -30
   const reviewSeason = monthStart(at(anchor, closesInReview + 75, 0), 1)
   return {
+    earlier: dates(anchor, -397, monthStart(reviewSeason, -12)),
     decided: dates(anchor, -214, monthStart(reviewSeason, -6)),
     inReview: dates(anchor, closesInReview, reviewSeason),
     open: dates(anchor, 14, monthStart(reviewSeason, 6)),

@@ -1,5 +1,6 @@
 import type { ObjectStore } from '../../lib/services/storage/ObjectStore.ts'
 import type { Database } from '../client.ts'
+import { seedBilling } from './billing.ts'
 import { seedCalls } from './calls.ts'
 import { seedFacility } from './facility.ts'
 import { seedPeople } from './people.ts'
@@ -20,6 +21,7 @@ export async function seedDemo(db: Database, anchor: Date, services: SeedService
   await db.transaction(async (trx) => {
     const facility = await seedFacility(trx)
     const people = await seedPeople(trx)
+    await seedBilling(trx)
     const calls = await seedCalls(trx, facility, anchor)
     await seedRoles(trx, people, facility.instrumentIds, Object.values(calls))
     const payments = pastPayments()

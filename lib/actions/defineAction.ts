@@ -13,6 +13,7 @@ import type { Actor } from '@/lib/domain/actor'
 import type { Context } from '@/lib/domain/context'
 import { stampArrival } from '@/lib/domain/submission/stampArrival'
 import { refuse } from '@/lib/errors'
+import { plainForm } from '@/lib/http/plainForm'
 import { services } from '@/lib/services/services'
 import { failure } from './failure'
 import { fieldErrorsOf } from '@/lib/fieldErrorsOf'
@@ -65,7 +66,7 @@ export function defineAction<N extends ActionName, S extends z.ZodType, R>(
           spec.limit.points,
           spec.limit.seconds,
         )
-      const result = spec.schema.safeParse(input instanceof FormData ? plain(input) : input)
+      const result = spec.schema.safeParse(input instanceof FormData ? plainForm(input) : input)
       if (!result.success) {
         const fieldErrors = fieldErrorsOf(result.error)
         throw refuse.invalid('Something here needs mending.', fieldErrors)
@@ -81,14 +82,4 @@ export function defineAction<N extends ActionName, S extends z.ZodType, R>(
     if (target) redirect(target)
     return { ok: true, data }
   }
-}
-
-function plain(form: FormData): Record<string, unknown> {
-  const object: Record<string, unknown> = Object.create(null)
-  for (const key of new Set(form.keys())) {
-    if (key.startsWith('$')) continue
-    const values = form.getAll(key)
-    object[key] = values.length > 1 ? values : values[0]
-  }
-  return object
 }

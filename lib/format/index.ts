@@ -1,6 +1,7 @@
 export { countInWords } from './countInWords'
 export { csvCell } from './csvCell'
 export { csvRows, csvText, type CsvValue } from './csvText'
+export { formatAccount } from './formatAccount'
 export { formatAmount } from './formatAmount'
 export { formatAtSite } from './formatAtSite'
 export { formatBytes } from './formatBytes'

@@ -16,6 +16,7 @@ import { log } from '@/lib/log'
 import { asRefusal } from './asRefusal'
 import { problem } from './problem'
 import { readBody } from './readBody'
+import { readForm } from './readForm'
 import { requireMediaType } from './requireMediaType'
 
 type ActorOf<N extends RouteName> = (typeof access)['routes'][N] extends 'anyone' ? Actor | null : Actor
@@ -26,6 +27,7 @@ interface RouteSpec<
   P extends z.ZodType | undefined,
   Q extends z.ZodType | undefined,
   B extends z.ZodType | undefined,
+  F extends z.ZodType | undefined,
 > {
   /** Row of the access matrix: method and path. */
   name: N
@@ -33,6 +35,8 @@ interface RouteSpec<
   query?: Q
   /** Schema of a JSON body; a body of another media type is refused unread. */
   body?: B
+  /** Schema of a multipart form, files among its fields. */
+  form?: F
   /** Media type of a body that is not JSON. */
   accepts?: string
   /** Largest body, bytes; 1 MB unless told. */
@@ -42,7 +46,14 @@ interface RouteSpec<
   failure?: (error: unknown, requestId: string) => Response
   run: (
     ctx: Context & { readonly actor: ActorOf<N> },
-    input: { params: Parsed<P>; query: Parsed<Q>; body: Parsed<B>; request: NextRequest; text: string },
+    input: {
+      params: Parsed<P>
+      query: Parsed<Q>
+      body: Parsed<B>
+      form: Parsed<F>
+      request: NextRequest
+      text: string
+    },
   ) => Promise<Response | object>
 }
 
@@ -59,8 +70,9 @@ export function defineRoute<
   P extends z.ZodType | undefined = undefined,
   Q extends z.ZodType | undefined = undefined,
   B extends z.ZodType | undefined = undefined,
+  F extends z.ZodType | undefined = undefined,
 >(
-  spec: RouteSpec<N, P, Q, B>,
+  spec: RouteSpec<N, P, Q, B, F>,
 ): (request: NextRequest, route: { params: Promise<unknown> }) => Promise<Response> {
   return async (request, route) => {
     const facts = await requestFacts()
@@ -79,13 +91,15 @@ export function defineRoute<
           spec.limit.seconds,
         )
 
-      const accepts = spec.body ? 'application/json' : spec.accepts
+      const accepts = spec.body ? 'application/json' : spec.form ? 'multipart/form-data' : spec.accepts
       if (isWrite && accepts) requireMediaType(request, accepts)
-      const text = isWrite ? await readBody(request, spec.maxBytes ?? 1_000_000) : ''
+      const bytes = isWrite ? await readBody(request, spec.maxBytes ?? 1_000_000) : Buffer.alloc(0)
+      const text = spec.form ? '' : bytes.toString('utf8')
       const input = {
         params: parse(spec.params as P, await route.params),
         query: parse(spec.query as Q, Object.fromEntries(request.nextUrl.searchParams)),
         body: spec.body ? parse(spec.body as B, json(text)) : (undefined as Parsed<B>),
+        form: spec.form ? parse(spec.form as F, await readForm(request, bytes)) : (undefined as Parsed<F>),
         request,
         text,
       }

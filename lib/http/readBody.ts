@@ -1,13 +1,15 @@
 import { refuse } from '../errors'
 
-/** The body as text, given up as soon as it grows past the limit. */
-export async function readBody(request: Request, maxBytes: number): Promise<string> {
+/** The body, given up as soon as it grows past the limit. */
+export async function readBody(request: Request, maxBytes: number): Promise<Buffer<ArrayBuffer>> {
   const reader = request.body?.getReader()
-  if (!reader) return ''
+  if (!reader) return Buffer.alloc(0)
   const chunks: Uint8Array[] = []
   let size = 0
   for (;;) {
-    const { done, value } = await reader.read()
+    const { done, value } = await reader.read().catch(() => {
+      throw refuse.invalid('The body broke off.')
+    })
     if (done) break
     size += value.byteLength
     if (size > maxBytes) {
@@ -16,5 +18,5 @@ export async function readBody(request: Request, maxBytes: number): Promise<stri
     }
     chunks.push(value)
   }
-  return Buffer.concat(chunks).toString('utf8')
+  return Buffer.concat(chunks)
 }

@@ -1,7 +1,8 @@
 import { addressFailed, addressWorks } from '@/db/queries/addresses'
-import { claimLetters, markFailed, markSent } from '@/db/queries/outbox'
+import { claimLetters, giveUpAndForget, markFailed, markSent } from '@/db/queries/outbox'
 import type { Database } from '@/db/client'
 import { LetterRefused } from '@/lib/services/mail/LetterRefused'
+import { isForgottenOnceSent } from '@/lib/domain/outbox/rules'
 import { renderPaper } from '@/lib/domain/fees/renderPaper'
 import type { Mail } from '@/lib/services/mail/Mail'
 
@@ -37,12 +38,17 @@ export async function relayLetters(db: Database, mail: Mail): Promise<RelayRepor
         html: letter.html_body,
         attachments: letter.attachment === null ? [] : [await renderPaper(db, letter.attachment)],
       })
-      await markSent(db, letter.id)
+      await markSent(db, letter.id, isForgottenOnceSent(letter.template))
       await addressWorks(db, letter.to_email)
       report.sent += 1
     } catch (error) {
       const said = error instanceof Error ? error.message : String(error)
       const next = stateAfter(error, letter.attempts + 1)
+      if (next !== 'queued' && isForgottenOnceSent(letter.template)) {
+        await giveUpAndForget(db, letter.id)
+        report[next] += 1
+        continue
+      }
       await markFailed(db, letter.id, {
         error: said,
         waitSeconds: Math.min(longestWaitSeconds, 5 * 2 ** letter.attempts),

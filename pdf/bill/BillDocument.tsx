@@ -16,6 +16,8 @@ export interface BillData {
   line: string
   amount: string
   vat: string
+  /** The account it is paid to; none on a credit note. */
+  pay: readonly FactRow[]
   closing: readonly string[]
 }
 
@@ -47,6 +49,14 @@ export function BillDocument({ data }: { data: BillData }) {
           ]}
         />
         <Total amount={data.amount} />
+        {data.pay.length > 0 ? (
+          <View style={{ width: 330, marginTop: 26 }}>
+            <Words base={size.section} style={{ fontWeight: 600, marginBottom: 8 }}>
+              Pay to
+            </Words>
+            <FactRows rows={data.pay} />
+          </View>
+        ) : null}
         {data.closing.map((words) => (
           <Words key={words} base={size.text} style={{ marginTop: 14, lineHeight: size.textLeading }}>
             {words}

@@ -56,7 +56,7 @@ reportText(
 
 const begun = performance.now()
 const input = { asked, line: asked.length, bins, standing: [], merit }
-const byMerit = await mostMeritInBins(input, solveInWorker, { seconds: 60, relativeGap: 0.005 })
+const byMerit = await mostMeritInBins(input, solveInWorker, { seconds: 60, relativeGap: 0.001 })
 reportText(
   'the same for most merit',
   sayTime((performance.now() - begun) / 1000),

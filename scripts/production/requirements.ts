@@ -55,6 +55,11 @@ export const optional: readonly Requirement[] = [
     check: (value) => (/^\d+(\.\d+)?$/.test(value) ? null : 'is not a number of seconds'),
   },
   {
+    name: 'MAIL_REPORT_SECRET',
+    purpose: 'lets the mail server report letters that come back later',
+    check: strongSecret,
+  },
+  {
     name: 'PORT',
     purpose: 'the port to serve on (3000)',
     check: (value) =>

@@ -30,7 +30,7 @@ function show(
   const no = async () => ({ ok: false as const, kind: 'invalid' as const, message: 'no', fieldErrors: {} })
   const saveGroup = vi.fn<TargetActions['saveGroup']>(async () => ({
     ok: true,
-    data: { ...group, version: 3 },
+    data: { ...group, version: 3, moved: [] },
   }))
   const save = vi.fn<TargetActions['save']>(async () => ({ ok: true, data: target({ version: 2 }) }))
   const others = {

@@ -34,9 +34,12 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
   [
     'the chair',
     'edda@velm.example',
-    ['assignments', 'progress', 'ranking', 'discussion', 'nights', 'decisions'].map(
-      (page) => `/panel/call-13/${page}`,
-    ),
+    [
+      ...['assignments', 'progress', 'ranking', 'discussion', 'nights', 'decisions'].map(
+        (page) => `/panel/call-13/${page}`,
+      ),
+      '/panel/call-11/between',
+    ],
   ],
   [
     'the office',
@@ -47,6 +50,7 @@ const views: readonly (readonly [role: string, email: string | null, paths: read
       'calls/call-14/rules',
       'calls/call-14/nights',
       'calls/call-13/figures',
+      'calls/call-11/between',
       'calls/call-14/preview',
       'facility',
       'facility/sites/quillon-ridge',

@@ -63,6 +63,27 @@ describe('most merit above the line', () => {
     expect(plan.notGiven).toMatchObject([{ proposal: 1, reason: 'not-possible' }])
   })
 
+  it('begins with whom the ranking gives time, and ends where it should all the same', async () => {
+    const asked = [
+      [line(1, [part(10, { 0: 10 })], { least: 8 * h })],
+      [line(2, [part(5, { 0: 10 })])],
+      [line(3, [part(5, { 0: 10 })])],
+    ]
+    const merit = new Map([1, 2, 3].map((proposal) => [proposal, 7 + proposal / 10]))
+    let begun: number[] = []
+    const input = { asked, line: 3, bins: [bin(10)], standing: [], merit }
+    const plan = await mostMeritInBins(
+      input,
+      (programme, asked_) => {
+        begun = [...(programme.start ?? [])].filter((_, at) => programme.isInteger[at] === 1)
+        return solveInWorker(programme, asked_)
+      },
+      limits,
+    )
+    expect(begun).toEqual([1, 0, 0])
+    expect('why' in plan ? plan.why : hours(plan)).toEqual({ 2: 5, 3: 5 })
+  })
+
   it('passes on why the solver has no answer', async () => {
     const none = async () => ({ status: 'failed' as const, values: null, why: 'Gone.' })
     const input = {

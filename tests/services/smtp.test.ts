@@ -41,7 +41,7 @@ afterEach(async () => {
   rmSync(folder, { recursive: true })
 })
 
-// Seen to fail: with every 5xx taken for a refused address.
+// Seen to fail: with every 5xx taken for a refused address, and with no name in the envelope.
 describe('mail by SMTP', () => {
   it('knows an address that is refused for good, by its mailbox or by the switch', async () => {
     expect(await send('no-such-mailbox@harrow.example')).toBe('address')
@@ -54,6 +54,20 @@ describe('mail by SMTP', () => {
   it.each(['4xx', '5xx'] as const)('blames nobody for %s before the address was named', async (mode) => {
     fault.set(mode, 1)
     expect(await send('ines@harrow.example')).toBe('may pass')
+  })
+
+  it('names the letter in the envelope, for whoever sends it back later', async () => {
+    const seen: unknown[] = []
+    // A server with the extension of RFC 3461; to one without it nothing is said.
+    server.options.hideDSN = false
+    server.onData = (stream, session, done) => {
+      const { dsn } = session.envelope as { dsn?: { envid: string; ret: string } }
+      const rcpt = session.envelope.rcptTo[0] as { dsn?: { notify: string[] } } | undefined
+      seen.push(dsn?.envid, dsn?.ret, rcpt?.dsn?.notify)
+      stream.resume().once('end', () => done())
+    }
+    expect(await send('ines@harrow.example')).toBe('taken')
+    expect(seen).toEqual(['one@test', 'HDRS', ['FAILURE', 'DELAY']])
   })
 
   it('tells a letter that was not wanted from an address', () => {

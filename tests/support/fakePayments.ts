@@ -23,7 +23,8 @@ export interface FakePayments extends Payments {
   expire(sessionId: string): void
   /** Somebody gives money back on the firm's own pages. */
   refundByHand(sessionId: string, amountMinor: number): void
-  dispute(sessionId: string, status: DisputeState['status']): void
+  /** Over all that was paid unless told. */
+  dispute(sessionId: string, status: DisputeState['status'], amountMinor?: number): void
   /** What the next refunds come to, until told otherwise. */
   refundsTurn: RefundState['status']
 }
@@ -75,13 +76,13 @@ export function fakePayments(): FakePayments {
       const made = { refundId, key: null, amountMinor, status: 'succeeded' as const, failure: null }
       refunds.set(refundId, { ...made, paymentId: find(sessionId).paymentId ?? '' })
     },
-    dispute: (sessionId, status) => {
+    dispute: (sessionId, status, amountMinor) => {
       const session = find(sessionId)
       const paymentId = session.paymentId ?? ''
       const [known] = disputes.get(paymentId) ?? []
       const disputeId = known?.disputeId ?? `dp_${tag}_${(count += 1)}`
       const facts = { reason: 'fraudulent', status, firmFeeMinor: 2000 }
-      disputes.set(paymentId, [{ disputeId, amountMinor: session.amountMinor, ...facts }])
+      disputes.set(paymentId, [{ disputeId, amountMinor: amountMinor ?? session.amountMinor, ...facts }])
     },
     createCheckout: (request) =>
       reach('payments:create-checkout', () => {

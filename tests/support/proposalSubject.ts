@@ -32,6 +32,7 @@ export function investigator(id: number, more: Partial<Investigator> = {}): Inve
     isOrcidVerified: false,
     position: id,
     confirmedAt: new Date('2027-03-01T00:00:00Z'),
+    version: 1,
     ...more,
   }
 }
@@ -78,6 +79,10 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       feeMinor: 12_000,
       panelId: 1,
       needsStudent: false,
+      targetLimit: null,
+      takesAwaited: false,
+      needsCadence: false,
+      needsLastNight: false,
     },
     people: [
       investigator(1, { role: 'pi' }),

@@ -6,7 +6,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { showToast } from '@/components/ui/showToast'
 import type { GroupComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents, TargetGroup } from '@/lib/domain/proposals/types'
-import { groupAnchor, groupRow } from '@/lib/domain/targetGroups/rules'
+import { groupAnchor } from '@/lib/domain/targetGroups/rules'
 import { GroupLine } from '@/components/observations/GroupLine'
 import type { TargetActions } from '../targetActions'
 import { GroupForm } from './GroupForm'
@@ -28,16 +28,8 @@ export function TargetGroups({ contents, computed, readOnly, actions }: TargetGr
   const shared = { reference, targets, save: actions.saveGroup, onDone: () => setOpen(null) }
 
   const remove = async (group: TargetGroup) => {
-    const row = groupRow(group, targets)
     const result = await actions.removeGroup({ reference, id: group.id })
-    if (!result.ok) return showToast(result.message)
-    showToast(`Group ${group.name} taken out; its targets stay`, {
-      undo: () => {
-        void actions.saveGroup({ reference, id: null, version: 0, group: row }).then((back) => {
-          if (!back.ok) showToast(Object.values(back.fieldErrors)[0] ?? back.message)
-        })
-      },
-    })
+    if (!result.ok) showToast(result.message)
   }
 
   if (readOnly && groups.length === 0) return null

@@ -2,6 +2,7 @@ import type { ObjectStore } from '../../../lib/services/storage/ObjectStore.ts'
 import type { Database } from '../../client.ts'
 import type { Facility, SeededCall } from '../calls.ts'
 import { afterPayments } from './afterPayments.ts'
+import { culminating } from './culminating.ts'
 import { decideCall } from './decideCall.ts'
 import { byRule, decided, inReview, open, type SeedProposal } from './proposalData.ts'
 import type { PastPayments } from './pastPayments.ts'
@@ -9,6 +10,7 @@ import { dice, type Dice } from './random.ts'
 import { reviewCall } from './reviewCall.ts'
 import { settleFees } from './settleFees.ts'
 import { teller, type Teller } from './teller.ts'
+import { tellTwoPanels } from './tellTwoPanels.ts'
 import { writeProposal } from './writeProposal.ts'
 
 const day = 86_400_000
@@ -17,13 +19,6 @@ interface Calls {
   decided: SeededCall
   inReview: SeededCall
   open: SeededCall
-}
-
-/** Hours of right ascension that culminate in the dark of a season beginning in this month. */
-function culminating(seasonFrom: string): [number, number] {
-  const month = Number(seasonFrom.slice(5, 7)) - 1
-  const middle = (6.6 + 2 * month + 6) % 24
-  return [middle - 4, middle + 4]
 }
 
 async function writeAll(
@@ -86,6 +81,8 @@ export async function tellStory(
     begunAt: ago(4 - index),
     sentAt: index === 0 ? null : ago(1),
   }))
+  // A teller with dice of its own, last: keys and numbers of the rest stay as they are.
+  await tellTwoPanels(db, world, services)
 
   await db.raw('SET SESSION timestamp = DEFAULT')
   // Letters of the past were sent in the past: the inbox of the demonstration begins empty.

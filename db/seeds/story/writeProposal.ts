@@ -164,10 +164,11 @@ export async function writeProposal(
 async function nameStudent(lead: Awaited<ReturnType<Teller['as']>>, reference: string): Promise<void> {
   const [student] = (await readContents(lead.db, reference)).people
   if (!student) return
-  const { id, institute } = student
+  const { id, institute, version } = student
   await describeInvestigator(lead, {
     reference,
     id,
+    version,
     institute,
     orcid: '',
     isStudent: true,

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { panelKeySchema, rowKey } from '../panels/schema'
+import { mostReaders } from './mostReaders'
 
 export const seats = ['first', 'second', 'reader'] as const
 export type Seat = (typeof seats)[number]
@@ -40,11 +41,14 @@ export const moveSchema = panelKeySchema.extend({
 })
 export type MoveInput = z.output<typeof moveSchema>
 
+const upTo = `Readers are a whole number up to ${mostReaders}.`
+
 export const suggestSchema = panelKeySchema.extend({
   each: z
     .string()
     .trim()
-    .regex(/^(\d|1[0-4])$/, 'Readers are a whole number up to 14.')
+    .regex(/^\d{1,2}$/, upTo)
+    .refine((text) => Number(text) <= mostReaders, upTo)
     .transform(Number)
     .refine((each) => each > 0, 'At least one reader.'),
 })

@@ -32,11 +32,14 @@ export async function importNights(
       const before: Record<string, unknown> = {}
       const after: Record<string, unknown> = {}
       count = 0
-      for (const [telescopeId, nights] of read.nights) {
+      // In one order, so that two files cannot wait for each other's telescope.
+      for (const [telescopeId, nights] of [...read.nights].sort(([a], [b]) => a - b)) {
         const telescope = telescopes.find(({ id }) => id === telescopeId)
         if (!telescope) continue
         const { mayTakePromised } = input
-        const logged = nightsLogged(await writeNights(tx, { call, telescope, nights, mayTakePromised }))
+        const logged = nightsLogged(
+          await writeNights(tx, { call, telescope, nights, mayTakePromised, field: 'text' }),
+        )
         before[telescope.slug] = logged.before
         after[telescope.slug] = { nights: nights.size, ...logged.after }
         count += nights.size

@@ -2,6 +2,7 @@ import { findCallBySlug } from '@/db/queries/calls'
 import { awardedByTelescope, telescopesOfSite } from '@/db/queries/callTelescopes'
 import { siteRecordAt } from '@/db/queries/facility'
 import { nightBlocksOf } from '@/db/queries/nightBlocks'
+import { nightsElsewhere } from '@/db/queries/nightsElsewhere'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { mayManageCalls } from '../calls/policy'
@@ -22,12 +23,16 @@ export async function readCalendar(ctx: Context, slug: string): Promise<NightCal
     nightBlocksOf(ctx.db, call.id),
     awardedByTelescope(ctx.db, call.id),
   ])
+  const season = { from: call.seasonFrom, to: call.seasonTo, exceptCallId: call.id }
+  const elsewhere = await Promise.all(
+    telescopes.map(({ id }) => nightsElsewhere(ctx.db, { telescopeId: id, ...season })),
+  )
   const { grid } = readSeason(site, call.seasonFrom, call.seasonTo)
   const { number, title, version, seasonFrom, seasonTo } = call
   return {
     call: { number, slug, title, version, seasonFrom, seasonTo },
     whyNot: whyNightsStay(call.stage),
-    telescopes: telescopes.map(({ id, name, instruments }) => {
+    telescopes: telescopes.map(({ id, name, instruments }, index) => {
       const own = blocks.filter(({ telescopeId }) => telescopeId === id)
       const nights = grid.nights.map(({ night }) => ({
         date: night.date,
@@ -49,6 +54,7 @@ export async function readCalendar(ctx: Context, slug: string): Promise<NightCal
         name,
         instruments,
         nights,
+        elsewhere: elsewhere[index] ?? [],
         halves: halfMonths(nights),
         total: useTotals(nights),
         awardedSeconds: awarded.get(id) ?? 0,

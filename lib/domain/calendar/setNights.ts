@@ -41,7 +41,9 @@ export function setNights(ctx: ActingContext, input: Input): Promise<void> {
       if (problem) throw refuse.invalid(problem)
       const nights = new Map(eveningsBetween(input.from, input.to).map((date) => [date, input.parts]))
       const { mayTakePromised } = input
-      const logged = nightsLogged(await writeNights(tx, { call, telescope, nights, mayTakePromised }))
+      const logged = nightsLogged(
+        await writeNights(tx, { call, telescope, nights, mayTakePromised, field: 'from' }),
+      )
       const which = { telescope: telescope.slug, from: input.from, to: input.to }
       return { before: { ...which, ...logged.before }, after: { ...which, ...logged.after } }
     },

@@ -1,5 +1,6 @@
 import type { NightUse } from '../calls/nightUseList'
 import type { Call } from '../calls/types'
+import type { NightElsewhere } from './nightElsewhere'
 
 /** A part of a night as it is set: fractions of the dark time, what it is for, and the instrument mounted. */
 export interface NightPart {
@@ -44,6 +45,8 @@ export interface TelescopeCalendar {
   name: string
   instruments: { id: number; name: string }[]
   nights: CalendarNight[]
+  /** What other calls offer of these nights. */
+  elsewhere: NightElsewhere[]
   halves: HalfMonth[]
   total: UseTotals
   /** Awarded in the call on its instruments, reserves apart: what science time cannot fall below. */

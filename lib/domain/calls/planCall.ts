@@ -1,12 +1,14 @@
 import type { z } from 'zod'
 import { copyCallRules, insertCall } from '@/db/queries/callChanges'
 import { findCallBySlug, listCalls } from '@/db/queries/calls'
+import { telescopesOfSite } from '@/db/queries/callTelescopes'
 import { databaseNow } from '@/db/queries/clock'
 import { siteRecordAt } from '@/db/queries/facility'
 import { insertNightBlocks, nightBlocksOf } from '@/db/queries/nightBlocks'
 import { lockOpenCalls } from '@/db/queries/retirements'
 import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
+import { refuseOfferedTwice } from '../calendar/refuseOfferedTwice'
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
@@ -52,6 +54,12 @@ export async function planCall(
     await copyCallRules(tx.db, pattern.id, id, input.seasonTo)
     const site = await siteRecordAt(tx.db, pattern.siteId, input.seasonFrom)
     const blocks = nightsLike(await nightBlocksOf(tx.db, pattern.id), site, input.seasonFrom, input.seasonTo)
+    await refuseOfferedTwice(tx, {
+      callId: id,
+      telescopes: await telescopesOfSite(tx.db, pattern.siteId),
+      blocks,
+      field: 'seasonFrom',
+    })
     await insertNightBlocks(tx.db, id, blocks)
     await writeLogbook(tx, {
       action: 'call.plan',

@@ -1,21 +1,16 @@
 import { givenByTelescope, insertAward, standingAwards, supersedeAwards } from '@/db/queries/decisions'
 import { heldTime, standingChoices } from '@/db/queries/nightTerms'
+import { insertHalves } from '@/db/queries/visits'
 import { offeredTime } from '@/db/queries/panel'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
 import type { PanelDesk } from '../panels/openPanel'
 import { offeredByTelescope } from '../rankings/offered'
+import { withHalves } from '../visits/withHalves'
+import type { GivenLine } from './givenLine'
 import { draftDecision } from './draftDecision'
 import { outcomeOf, overAwards } from './rules'
 import type { WantedLine } from './wantedLines'
-
-export interface GivenLine {
-  instrumentId: number
-  seconds: number
-  isReserve: boolean
-  service: 'queue' | 'visitor'
-  conditions: string
-}
 
 /** What is free on each telescope of the call, less what is held back, the proposal's own lines not counted. */
 async function leftOnOffer(tx: ActingContext, desk: PanelDesk, proposalId: number) {
@@ -37,11 +32,12 @@ export async function giveLines(
   given: { proposalId: number; version: number; lines: readonly GivenLine[] },
 ): Promise<void> {
   const own = wanted.filter((line) => line.proposalId === given.proposalId)
-  const lines = given.lines.map((line, index) => {
+  const asked = given.lines.map((line, index) => {
     const ask = own.find((one) => one.instrumentId === line.instrumentId)
     if (!ask) throw refuse.field(`lines.${index}.hours`, 'This instrument was not asked for.')
-    return { ...ask, ...line, most: Math.max(ask.askedSeconds, ask.wholeSeconds) }
+    return { ...ask, ...line }
   })
+  const lines = await withHalves(tx, desk, given.proposalId, asked)
   const choice = (await standingChoices(tx.db, [given.proposalId])).get(given.proposalId)
   if (choice?.choice === 'never' && lines.some((line) => line.seconds > 0))
     throw refuse.closed(`It is never to be given time: ${choice.reason} Give it back to its rank first.`)
@@ -59,7 +55,9 @@ export async function giveLines(
     if (line.seconds === 0) continue
     const { instrumentId, seconds, service, conditions, isReserve } = line
     const award = { decisionId, instrumentId, seconds, service, conditions, isReserve }
-    if (!(await insertAward(tx.db, desk.call.id, award)))
+    const id = await insertAward(tx.db, desk.call.id, award)
+    if (id === null)
       throw refuse.field(`lines.${index}.hours`, `This is more than is left on offer on ${line.telescope}.`)
+    if (line.halves.length > 0) await insertHalves(tx.db, desk.call.id, id, line.halves)
   }
 }

@@ -27,10 +27,13 @@ export interface GivenRun {
   line: BinnedLine
 }
 
-/** What stands given, by rank, fillers behind it and what is in reserve last; shared among targets as it was asked. */
+/**
+ * What stands given in the queue, by rank, fillers behind it and what is in reserve last; shared among targets as it was
+ * asked. Visits have dates of their own.
+ */
 export async function givenRuns(
   db: Database,
-  planned: Pick<PlannedNights, 'order' | 'season' | 'bins' | 'terms'>,
+  planned: Pick<PlannedNights, 'season' | 'bins' | 'terms'> & { order: readonly number[] },
 ): Promise<GivenRun[]> {
   const { order, season, bins, terms } = planned
   const [awards, contents] = await Promise.all([standingAwards(db, order), standingContents(db, order)])
@@ -40,7 +43,7 @@ export async function givenRuns(
     (isFiller(award.proposalId) ? order.length : 0) +
     (award.isReserve ? 2 * order.length : 0)
   return [...awards]
-    .filter(({ seconds }) => seconds > 0)
+    .filter(({ seconds, service }) => seconds > 0 && service === 'queue')
     .sort((a, b) => turn(a) - turn(b))
     .flatMap((award) => {
       const { proposalId, instrumentId: instrument, telescopeId: telescope, seconds } = award

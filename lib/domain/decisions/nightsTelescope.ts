@@ -32,13 +32,27 @@ export function nightsTelescope(
     ),
     givenSeconds: sum((line) => (line.isReserve ? 0 : line.givenSeconds)),
     suggestedSeconds: sum((line) => line.suggestedSeconds),
+    visitSeconds: (planned?.visits.dated ?? []).reduce(
+      (total, visit) => total + (visit.telescope === id ? visit.seconds : 0),
+      0,
+    ),
     bins: season.bins.flatMap(({ telescope, half, siderealFromH, moon, seconds }, index) => {
       if (telescope !== id) return []
       const usedSeconds = (planned?.plan.given ?? []).reduce(
         (total, { laid }) => total + (laid.get(index) ?? 0),
         0,
       )
-      return [{ half, siderealFromH, moon, seconds: Math.round(seconds * offered), usedSeconds }]
+      // What the visits suggested take of the bin, for themselves.
+      const visitSeconds = seconds - (planned?.season.bins[index]?.seconds ?? seconds)
+      return [
+        {
+          half,
+          siderealFromH,
+          moon,
+          seconds: Math.round(seconds * offered),
+          usedSeconds: usedSeconds + visitSeconds,
+        },
+      ]
     }),
   }
 }

@@ -14,6 +14,13 @@ const nightsLine = z.object({
   /** What it truly takes, where assessed; else as asked. */
   wholeSeconds: z.number(),
   leastSeconds: z.number(),
+  /** Whose least it is, and why where the chair set it. */
+  leastBy: z.enum(['chair', 'investigators', 'half']),
+  leastReason: z.string(),
+  /** The nights of a visit it wishes for; null for the queue. */
+  visit: z
+    .object({ nights: z.number(), part: z.enum(['whole', 'first', 'second']), together: z.boolean() })
+    .nullable(),
   possible: z.boolean(),
   assessment: z
     .object({ verdict: z.enum(['accepted', 'change', 'not-possible']), reason: z.string() })
@@ -22,15 +29,29 @@ const nightsLine = z.object({
   isReserve: z.boolean(),
   service: z.enum(['queue', 'visitor']),
   conditions: z.string(),
+  /** Of a visit, as they are typed: the nights that stand given, and those suggested. Empty in the queue. */
+  evenings: z.string(),
+  suggestedEvenings: z.string(),
   suggestedSeconds: z.number(),
   /** What it gives as things stand, while something else is tried. */
   standsSeconds: z.number().nullable(),
   /** Why the suggestion gives nothing: the seconds found when its turn came, and who would lose if it came first. */
   whyNot: z
     .object({
-      reason: z.enum(['not-possible', 'not-usable', 'too-little-left', 'set-aside', 'never']),
+      reason: z.enum([
+        'not-possible',
+        'not-usable',
+        'too-little-left',
+        'set-aside',
+        'never',
+        'below-line',
+        'no-nights',
+        'nights-taken',
+      ]),
       left: z.number(),
       displaces: z.array(z.object({ reviewNumber: z.string(), seconds: z.number() })),
+      /** Of a visit: the most nights it would find alone, and the fewest of use. */
+      nights: z.object({ most: z.number(), least: z.number() }).nullable(),
     })
     .nullable(),
 })
@@ -89,7 +110,9 @@ export const nightsView = z.object({
       /** Held back for the director and targets of opportunity, and what for. */
       heldSeconds: z.number(),
       heldReason: z.string(),
-      /** What may be planned with: on offer, less weather and what is held back. */
+      /** Suggested to visits, on dates of their own. */
+      visitSeconds: z.number(),
+      /** What may be planned with in the queue: on offer, less visits, weather and what is held back. */
       plannedSeconds: z.number(),
       /** Dark time on offer by sidereal time and moonlight, with what the suggestion lays there. */
       bins: z.array(nightsBin),

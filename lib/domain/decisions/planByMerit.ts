@@ -4,8 +4,8 @@ import type { Solve } from '@/lib/panel/solver/types'
 import { solveInWorker } from '@/lib/services/solver/solveInWorker'
 import { boundedMap } from '../observations/boundedMap'
 
-/** Half a per cent is far finer than any demand is known. */
-const limits = { seconds: 20, relativeGap: 0.005 }
+/** A tenth of a per cent is far finer than any demand is known. */
+const limits = { seconds: 20, relativeGap: 0.001 }
 
 const kept = boundedMap<Promise<MeritPlan | { why: string }>>(16)
 

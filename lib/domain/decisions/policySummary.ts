@@ -8,6 +8,8 @@ export const policySummary = z.object({
   awarded: z.number(),
   seconds: z.number(),
   meritHours: z.number(),
+  /** How far from what no plan can exceed, as a share; null where the rule is met exactly. */
+  gap: z.number().nullable(),
   /** Why there is no plan, where there is none. */
   why: z.string().nullable(),
 })
@@ -16,7 +18,12 @@ export type PolicySummary = z.output<typeof policySummary>
 export function summaryOf(
   policy: NightsPolicy,
   plan: BinnedPlan | null,
-  found: { above: ReadonlySet<number>; merit: ReadonlyMap<number, number>; why: string | null },
+  found: {
+    above: ReadonlySet<number>
+    merit: ReadonlyMap<number, number>
+    gap: number | null
+    why: string | null
+  },
 ): PolicySummary {
   const given = plan?.given ?? []
   return {
@@ -26,6 +33,7 @@ export function summaryOf(
     meritHours: given
       .filter(({ proposal }) => found.above.has(proposal))
       .reduce((sum, { proposal, seconds }) => sum + ((found.merit.get(proposal) ?? 0) * seconds) / 3600, 0),
+    gap: plan ? found.gap : null,
     why: plan ? null : found.why,
   }
 }

@@ -16,6 +16,8 @@ export interface GivenLine {
   instrument: string
   seconds: number
   isReserve: boolean
+  /** A visit has nights of its own. */
+  service?: 'queue' | 'visitor'
 }
 
 export interface PossibleNight {
@@ -30,6 +32,8 @@ export interface PossibleNight {
   instruments: string[]
   /** Hours that some target is usable in the whole night, the most of any. */
   usableHours: number
+  /** Its visit’s own night, not one of many it may be observed on. */
+  isVisit: boolean
 }
 
 /** Less than this in a night is no use: setting up alone takes a good part of it. */
@@ -54,7 +58,9 @@ export function possibleNights(given: {
   usable: ReadonlyMap<number, readonly number[]>
 }): PossibleNight[] {
   const { blocks, nights, usable } = given
-  const lines = given.lines.filter(({ isReserve, seconds }) => !isReserve && seconds > 0)
+  const lines = given.lines.filter(
+    ({ isReserve, seconds, service }) => !isReserve && seconds > 0 && service !== 'visitor',
+  )
   return blocks.flatMap((block) => {
     const index = nights.findIndex(({ date }) => date === block.eveningDate)
     const night = nights[index]
@@ -77,6 +83,7 @@ export function possibleNights(given: {
         from,
         to,
         instruments: fitting.map(({ instrument }) => instrument),
+        isVisit: false,
         usableHours: Math.max(...fitting.map((line) => usable.get(line.instrumentId)?.[index] ?? 0)),
       },
     ]

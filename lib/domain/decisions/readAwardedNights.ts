@@ -1,11 +1,14 @@
 import { standingAwards, standingDecisions, type StandingAward } from '@/db/queries/decisions'
 import { scienceBlocks } from '@/db/queries/nights'
+import { standingHalves } from '@/db/queries/visits'
 import { readSnapshot } from '@/db/queries/versions'
 import type { Context } from '../context'
 import { conditionsOf } from '../observations/rules'
 import { seasonVisibility } from '../observations/seasonVisibility'
 import { skyTargetOf } from '../observations/skyTargetOf'
 import type { ProposalContents } from '../proposals/types'
+import { blocksLessHalves } from '../visits/blocksLessHalves'
+import { visitNights } from '../visits/visitNights'
 import { possibleNights, type PossibleNight } from './possibleNights'
 
 export interface AwardedNights {
@@ -59,7 +62,16 @@ export async function readAwardedNights(
   if (!decisions.get(proposal.id)?.released_at || !version) return null
   const { contents } = version.snapshot
   const { call, site } = contents
-  const blocks = await scienceBlocks(ctx.db, call.id)
+  const [blocks, halves] = await Promise.all([
+    scienceBlocks(ctx.db, call.id),
+    standingHalves(ctx.db, call.id),
+  ])
   const { nights } = seasonVisibility(site, { from: call.seasonFrom, to: call.seasonTo, maxAirmass: 2 }, [])
-  return { lines, nights: possibleNights({ lines, blocks, nights, usable: usableHours(contents) }) }
+  const usable = usableHours(contents)
+  const inQueue = possibleNights({ lines, blocks: blocksLessHalves(blocks, halves), nights, usable })
+  const own = halves.filter(({ proposalId }) => proposalId === proposal.id)
+  return {
+    lines,
+    nights: [...inQueue, ...visitNights(own, { lines, nights, usable })].sort((a, b) => +a.from - +b.from),
+  }
 }

@@ -2,10 +2,13 @@ import { standingAwards, standingDecisions } from '@/db/queries/decisions'
 import { standingChoices } from '@/db/queries/nightTerms'
 import { offeredTime } from '@/db/queries/panel'
 import { currentRanking } from '@/db/queries/rankings'
+import { standingHalves } from '@/db/queries/visits'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import type { ActingContext } from '../context'
 import { callBins } from '../nights/callBins'
 import { openPanel } from '../panels/openPanel'
+import { eveningsText } from '../visits/readEvenings'
+import { visitKey, whyNotVisits } from '../visits/whyNotVisits'
 import { nightsTelescope } from './nightsTelescope'
 import type { NightsRow, NightsView } from './nightsView'
 import { planNights, type PlannedNights } from './planNights'
@@ -39,15 +42,17 @@ export async function readNights(
   const blocks = await offeredTime(ctx.db, desk.call.id)
   const planned = ranking ? await planNights(ctx, desk, ranking, { policy, trial, sideBySide: true }) : null
   const stands = ranking && trial ? await planNights(ctx, desk, ranking, { policy }) : null
-  const season = planned?.season ?? (await callBins(ctx.db, desk.call))
+  const season = planned?.whole ?? (await callBins(ctx.db, desk.call))
   const order = planned?.order ?? []
-  const [heads, awards, decisions, choices] = await Promise.all([
+  const [heads, awards, halves, decisions, choices] = await Promise.all([
     snapshotHeads(ctx.db, order),
     standingAwards(ctx.db, order),
+    standingHalves(ctx.db, desk.call.id),
     standingDecisions(ctx.db, order),
     standingChoices(ctx.db, order),
   ])
   const numberOf = (id: number) => desk.proposals.find((proposal) => proposal.id === id)?.reviewNumber ?? ''
+  const whyVisits = planned ? await whyNotVisits(planned, numberOf) : null
   const rows = order.map((id, index): NightsRow => ({
     proposalId: id,
     reviewNumber: numberOf(id),
@@ -68,9 +73,19 @@ export async function readNights(
           isReserve: given?.isReserve ?? false,
           service: given?.service ?? 'queue',
           conditions: given?.conditions ?? '',
+          evenings: eveningsText(
+            halves.filter((half) => half.proposalId === id && half.instrumentId === line.instrumentId),
+          ),
+          suggestedEvenings: eveningsText(
+            planned?.visits.dated.find(
+              (visit) => visit.proposal === id && visit.instrument === line.instrumentId,
+            )?.halves ?? [],
+          ),
           suggestedSeconds: secondsIn(planned, id, line.instrumentId),
           standsSeconds: stands ? secondsIn(stands, id, line.instrumentId) : null,
-          whyNot: planned ? whyNotGiven(planned, id, line.instrumentId, numberOf) : null,
+          whyNot:
+            whyVisits?.get(visitKey(id, line.instrumentId)) ??
+            (planned ? whyNotGiven(planned, id, line.instrumentId, numberOf) : null),
         }
       }),
   }))

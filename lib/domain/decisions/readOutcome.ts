@@ -1,8 +1,10 @@
+import { halvesOfProposal } from '@/db/queries/visits'
 import { panelTexts } from '@/db/queries/panelTexts'
 import { standingAwards, standingDecisions, type StandingAward } from '@/db/queries/decisions'
 import { assessedLines, requestLines } from '@/db/queries/panel'
 import { authorize } from '@/lib/auth/authorize'
 import type { ActingContext } from '../context'
+import { withEvenings } from '../visits/withEvenings'
 import { mayReadProposal } from '../proposals/policy'
 import { readContents } from '../proposals/readContents'
 import type { ProposalState } from '../proposals/types'
@@ -21,7 +23,8 @@ export interface OutcomeView {
     outcome: Outcome
     releasedAt: Date
     statement: string
-    lines: StandingAward[]
+    /** Each with the nights of its visit in words; empty in the queue. */
+    lines: (StandingAward & { evenings: string })[]
     askedSeconds: number
     /**
      * Comments of the reviewers, unsigned and in no order that tells who wrote them; without those that were withheld,
@@ -53,8 +56,9 @@ export async function readOutcome(ctx: ActingContext, reference: string): Promis
     lettersAt: call.lettersAt,
   }
   if (!decision?.released_at) return { ...base, decision: null }
-  const [lines, asked, assessed, texts] = await Promise.all([
+  const [lines, halves, asked, assessed, texts] = await Promise.all([
     standingAwards(ctx.db, [id]),
+    halvesOfProposal(ctx.db, id),
     requestLines(ctx.db, [id]),
     assessedLines(ctx.db, [id]),
     panelTexts(ctx.db, [id]),
@@ -65,7 +69,7 @@ export async function readOutcome(ctx: ActingContext, reference: string): Promis
       outcome: decision.outcome,
       releasedAt: decision.released_at,
       statement: decision.statement,
-      lines,
+      lines: withEvenings(lines, halves),
       askedSeconds: asked.reduce((sum, line) => sum + line.askedSeconds, 0),
       comments: texts
         .filter((text) => text.audience === 'investigators' && text.withheldReason === null)

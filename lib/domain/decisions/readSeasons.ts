@@ -1,6 +1,8 @@
 import { currentRanking } from '@/db/queries/rankings'
 import { refuse } from '@/lib/errors'
 import { laidAwards } from '@/lib/panel/nights/laidAwards'
+import { givenSeason } from '../visits/givenVisits'
+import { visitsToRun } from '../visits/visitsToRun'
 import type { ActingContext } from '../context'
 import { openPanel } from '../panels/openPanel'
 import { givenRuns, suggestedLines } from './linesToRun'
@@ -32,9 +34,10 @@ export async function readSeasons(
   if (!ranking) throw refuse.closed('Begin the ranking first.')
   const trial = isTried(key.trial) ? key.trial : undefined
   const planned = await planNights(ctx, desk, ranking, { policy: key.policy, trial })
-  const { season, terms, bins, standing } = planned
-  const lines =
-    key.of === 'given' ? (await givenRuns(ctx.db, planned)).map(({ line }) => line) : suggestedLines(planned)
+  const { standing } = planned
+  const given = key.of === 'given' ? await givenSeason(ctx.db, desk.call, planned.order, trial) : null
+  const { season, terms, bins } = given ?? planned
+  const lines = given ? (await givenRuns(ctx.db, given)).map(({ line }) => line) : suggestedLines(planned)
   const { awards, standingSeconds } = laidAwards(lines, bins, standing)
   const first = Date.parse(desk.call.seasonFrom)
   const pieces = [...season.pieces]
@@ -47,12 +50,16 @@ export async function readSeasons(
       const night = Math.round((Date.parse(date) - first) / dayMs)
       return open > 0.1 ? [[night, bin, Number(open.toFixed(1))]] : []
     })
+  const visits = visitsToRun(given ? given.visits : planned.visits.dated, {
+    seasonFrom: desk.call.seasonFrom,
+    firstBin: bins.length,
+  })
   return {
     hasWeather: season.weather !== null || trial?.lostPercent !== undefined,
     lost: terms.weather.lost,
     persistence: terms.weather.persistence,
-    pieces,
-    awards: awards.map(({ proposal, instrument, parts }) => ({
+    pieces: [...pieces, ...visits.pieces],
+    awards: [...awards, ...visits.awards].map(({ proposal, instrument, parts }) => ({
       proposalId: proposal,
       instrumentId: instrument,
       parts: parts.map(({ seconds, laid, share }) => ({

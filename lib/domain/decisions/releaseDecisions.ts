@@ -8,6 +8,7 @@ import {
   standingDecisions,
   undecidedIn,
 } from '@/db/queries/decisions'
+import { standingHalves } from '@/db/queries/visits'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import { refuse } from '@/lib/errors'
 import { paths } from '@/lib/paths'
@@ -16,6 +17,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { decisionLetter } from '../outbox/letters/decision'
 import { queueLetter } from '../outbox/queueLetter'
+import { withEvenings } from '../visits/withEvenings'
 import { approvableOf } from './approvableOf'
 import { isApproved } from './approval'
 import { moveTimeFor } from './moveTimeFor'
@@ -47,7 +49,7 @@ export function releaseDecisions(ctx: ActingContext, input: ReleaseInput): Promi
       }).length,
     })
     if (why) throw refuse.closed(why)
-    const awards = await standingAwards(tx.db, ids)
+    const awards = withEvenings(await standingAwards(tx.db, ids), await standingHalves(tx.db, desk.call.id))
     const heads = await snapshotHeads(tx.db, ids)
     for (const proposal of waiting) {
       const decision = decisions.get(proposal.proposalId)

@@ -24,7 +24,9 @@ export function saveAward(ctx: ActingContext, input: AwardInput): Promise<void> 
       action: 'decision.award',
       subject: { kind: 'proposal', id: proposal.reviewNumber },
       actingAs: 'chair',
-      before: before.map(({ instrumentId, seconds, isReserve }) => ({ instrumentId, seconds, isReserve })),
+      before: before.map(({ instrumentId, seconds, isReserve, service }) => ({
+        ...{ instrumentId, seconds, isReserve, service },
+      })),
       after: lines,
     })
   })

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { panelKeySchema, panelQuery, rowKey } from '../panels/schema'
+import { eveningsTyped } from '../visits/readEvenings'
 import { choiceOrRank } from './choiceWords'
 import { nightsPolicy } from './policyWords'
 import { trialSchema, trialText } from './trialSchema'
@@ -24,6 +25,8 @@ export const awardSchema = panelKeySchema.extend({
         hours: hoursAsSeconds,
         isReserve: z.boolean(),
         service: z.enum(['queue', 'visitor']),
+        /** The nights of a visit; its hours follow from them. */
+        evenings: eveningsTyped,
         conditions: z.string().trim().max(300, 'At most 300 characters.'),
       }),
     )
@@ -57,6 +60,15 @@ export const heldSchema = panelKeySchema.extend({
   reason: given,
 })
 export type HeldInput = z.output<typeof heldSchema>
+
+/** The least useful award of one instrument of a proposal; no hours give it back to the investigators. */
+export const leastSchema = panelKeySchema.extend({
+  proposalId: rowKey,
+  instrumentId: rowKey,
+  hours: hoursAsSeconds,
+  reason: given,
+})
+export type LeastInput = z.output<typeof leastSchema>
 
 export const prepareSchema = panelKeySchema
 

@@ -7,16 +7,18 @@ import {
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
-import { giveLines, type GivenLine } from './giveLines'
+import { eveningsText } from '../visits/readEvenings'
+import { giveLines } from './giveLines'
+import type { GivenLine } from './givenLine'
 import { openDecisions } from './openDecisions'
 import { planNights, type PlannedNights } from './planNights'
 import { policyNames } from './policyWords'
 import type { PlanInput } from './schema'
 import { takeTrial } from './takeTrial'
 
-/** What a plan gives a proposal; service and conditions stay as they were. */
+/** What a plan gives a proposal; conditions stay as they were. */
 function plannedLines(
-  { plan, terms }: PlannedNights,
+  { plan, terms, visits }: PlannedNights,
   kept: readonly StandingAward[],
   proposalId: number,
 ): GivenLine[] {
@@ -25,11 +27,13 @@ function plannedLines(
     .filter((line) => line.proposal === proposalId)
     .map(({ instrument, seconds }) => {
       const old = kept.find((line) => line.proposalId === proposalId && line.instrumentId === instrument)
+      const visit = visits.dated.find((one) => one.proposal === proposalId && one.instrument === instrument)
       return {
         instrumentId: instrument,
         seconds,
         isReserve: false,
-        service: old?.service ?? 'queue',
+        service: visit ? ('visitor' as const) : ('queue' as const),
+        evenings: visit?.halves ?? [],
         conditions: old?.conditions || (isFiller ? 'bright time' : ''),
       }
     })
@@ -64,6 +68,9 @@ export function takePlan(ctx: ActingContext, input: PlanInput): Promise<{ awarde
         policy: policyNames[policy],
         ...(trial ? { trial, reason } : {}),
         given: plan.given.map(({ laid: _laid, parts: _parts, ...line }) => line),
+        visits: planned.visits.dated.map(({ proposal, instrument, halves }) => ({
+          ...{ proposal, instrument, evenings: eveningsText(halves) },
+        })),
       },
     })
     return { awarded: new Set(plan.given.map((line) => line.proposal)).size }

@@ -9,15 +9,15 @@ export function whyNotGiven(
   instrumentId: number,
   numberOf: (proposalId: number) => string,
 ): NightsLine['whyNot'] {
-  if (planned.setAside.has(proposalId)) return { reason: 'set-aside', left: 0, displaces: [] }
+  if (planned.setAside.has(proposalId)) return { reason: 'set-aside', left: 0, displaces: [], nights: null }
   if (planned.terms.choices.get(proposalId)?.choice === 'never')
-    return { reason: 'never', left: 0, displaces: [] }
+    return { reason: 'never', left: 0, displaces: [], nights: null }
   const not = planned.plan.notGiven.find(
     (one) => one.proposal === proposalId && one.instrument === instrumentId,
   )
   if (!not) return null
   const { reason, found: left } = not
-  if (reason !== 'too-little-left') return { reason, left, displaces: [] }
+  if (reason !== 'too-little-left') return { reason, left, displaces: [], nights: null }
   const { asked, bins, standing } = planned
   const lost = new Map<number, number>()
   for (const one of whyNotInBins(asked.inTurn, bins, standing, proposalId)?.displaced ?? [])
@@ -25,5 +25,5 @@ export function whyNotGiven(
   const displaces = [...lost].flatMap(([id, seconds]) =>
     seconds > 0 ? [{ reviewNumber: numberOf(id), seconds }] : [],
   )
-  return { reason, left, displaces }
+  return { reason, left, displaces, nights: null }
 }

@@ -10,6 +10,7 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { disputeTold } from '../outbox/letters/disputeTold'
 import { queueLetter } from '../outbox/queueLetter'
 import { readContents } from '../proposals/readContents'
+import { wonAfterAll } from './wonAfterAll'
 
 /**
  * Brings the disputes about a payment to what the firm says of them: opened, the amount is set apart; won, it comes
@@ -29,7 +30,8 @@ export async function applyDisputes(
     const id = known?.id ?? (await open(tx, fee, payment, state))
     const before = known?.state ?? 'open'
     const isEnd = before === 'open' ? state.status !== 'open' : before === 'lost' && state.status === 'won'
-    if (isEnd) await end(tx, fee, id, before, state)
+    if (isEnd && known?.decision && known.decision !== 'accept') await wonAfterAll(tx, fee, known)
+    else if (isEnd) await end(tx, fee, id, before, state)
     await chargeForIt(tx, fee, id, state)
     if (known && !isEnd) continue
     await tell(tx, fee, state, id)

@@ -1,3 +1,4 @@
+import { billingRecord } from '@/db/queries/billing'
 import { databaseNow } from '@/db/queries/clock'
 import { latestWaiver, lockFeeOf, updateFee } from '@/db/queries/fees'
 import { insertInvoice } from '@/db/queries/invoices'
@@ -6,6 +7,7 @@ import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import { paths } from '@/lib/paths'
 import { holds } from '../actor'
+import { payTo } from '../billing/payTo'
 import type { ActingContext } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
@@ -41,6 +43,12 @@ export async function askForInvoice(
     const why = whyNoInvoice(fee.state, waiver?.state === 'asked')
     if (why) throw refuse.closed(why)
 
+    const billing = await billingRecord(tx.db)
+    if (!billing)
+      throw refuse.closed(
+        'The office has not said yet where invoices are paid to. Write to it, and name the reference.',
+      )
+
     const dueAt = invoiceDueAt(await databaseNow(tx.db))
     const number = await drawPaperNumber(tx, 'invoices')
     const money = { amountMinor: fee.amount_minor, currency: fee.currency }
@@ -49,6 +57,7 @@ export async function askForInvoice(
       ...addressed,
       ...money,
       number,
+      billingRecordId: billing.id,
       feeId: fee.id,
       dueAt,
       askedBy: tx.actor.personId,
@@ -62,7 +71,15 @@ export async function askForInvoice(
       from: 'receivable',
       to: 'invoiced',
     })
-    const facts = { ...addressed, ...money, number, dueAt, reference, title: contents.title }
+    const facts = {
+      ...addressed,
+      ...money,
+      payTo: payTo(billing.facts),
+      number,
+      dueAt,
+      reference,
+      title: contents.title,
+    }
     const url = `${tx.request.origin}${paths.proposalSent(reference)}`
     const readers = [
       ...contents.people.filter(({ role }) => role === 'pi'),

@@ -1,5 +1,5 @@
 import { databaseNow } from '@/db/queries/clock'
-import { findFee, lockFee, setDueAt, updateFee } from '@/db/queries/fees'
+import { lockFee, updateFee } from '@/db/queries/fees'
 import { findInvoice } from '@/db/queries/invoices'
 import { moveMoney } from '@/db/queries/moneyLedger'
 import type { FeesRow } from '@/db/tables'
@@ -10,6 +10,7 @@ import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { readContents } from '../proposals/readContents'
 import { dueAgainAt } from './invoiceRules'
+import { oweAgain } from './oweAgain'
 import { mayHandleFees } from './policy'
 import { takeBackInvoice } from './takeBackInvoice'
 
@@ -34,7 +35,9 @@ export async function cancelInvoice(
       throw refuse.closed(`Invoice ${known.number} is ${known.state} already. Load the page again.`)
     const contents = await readContents(tx.db, fee.proposal_id)
     const creditNote = await takeBackInvoice(tx, fee, contents, input.reason)
-    await (input.then === 'due' ? oweAgain(tx, fee) : drop(tx, fee))
+    await (input.then === 'due'
+      ? oweAgain(tx, fee, dueAgainAt(fee.due_at, await databaseNow(tx.db)))
+      : drop(tx, fee))
     await writeLogbook(tx, {
       action: 'fee.cancel-invoice',
       subject: { kind: 'proposal', id: contents.reference },
@@ -44,12 +47,6 @@ export async function cancelInvoice(
     })
     return { creditNote }
   })
-}
-
-async function oweAgain(tx: ActingContext, fee: FeesRow): Promise<void> {
-  await updateFee(tx.db, fee, 'due')
-  const standing = await findFee(tx.db, fee.id)
-  if (standing) await setDueAt(tx.db, standing, dueAgainAt(fee.due_at, await databaseNow(tx.db)))
 }
 
 async function drop(tx: ActingContext, fee: FeesRow): Promise<void> {

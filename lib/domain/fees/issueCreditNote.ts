@@ -1,3 +1,4 @@
+import { billingRecord } from '@/db/queries/billing'
 import { insertCreditNote } from '@/db/queries/invoices'
 import type { FeesRow, InvoicesRow } from '@/db/tables'
 import { paths } from '@/lib/paths'
@@ -30,6 +31,7 @@ export async function issueCreditNote(tx: Context, wish: CreditNoteWish): Promis
     refundId: wish.refundId,
     creditedTo: invoice?.institute ?? wish.payer,
     address: invoice?.address ?? '',
+    billingRecordId: (await billingRecord(tx.db))?.id ?? null,
     amountMinor: wish.amountMinor,
     currency: fee.currency,
     reason: wish.reason,

@@ -10,6 +10,13 @@ const factsOf = (value: unknown): Facts =>
 const text = (value: unknown): string =>
   typeof value === 'string' || typeof value === 'number' ? String(value) : ''
 
+const disputeWords: Record<string, string> = {
+  'ask-again': 'Lost dispute: the fee is asked for again',
+  waive: 'Lost dispute: the fee is waived',
+  withdraw: 'Lost dispute: the proposal is withdrawn',
+  accept: 'Lost dispute: the loss is taken',
+}
+
 type Told = readonly [words: string, tone?: FeeEvent['tone']]
 
 /** What each entry of the logbook means for a fee; a sentence of the amount, the numbers and the reason given. */
@@ -50,6 +57,9 @@ const told: Record<string, (after: Facts, before: Facts, amount: string) => Told
       : after.state === 'won'
         ? [`Dispute over ${amount} won`, 'settled']
         : [`Dispute over ${amount} lost`, 'refused'],
+  'fee.decide-dispute': (after, _, amount) => [
+    `${disputeWords[text(after.decision)] ?? 'Dispute decided'}, ${amount}: ${text(after.note)}`,
+  ],
   'fee.remind': () => ['Reminder written'],
   'fee.reconcile': (after) => [
     `Held against the firm’s list: ${text(after.repaired) || text(after.difference)}`,

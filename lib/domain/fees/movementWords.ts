@@ -31,6 +31,8 @@ const kinds: Record<string, string> = {
   disputed: 'disputed',
   'dispute-won': 'dispute won',
   'dispute-lost': 'dispute lost',
+  'dispute-decided': 'lost dispute decided',
+  'paid-after-all': 'dispute won after all',
   'dispute-charge': 'firm’s charge for a dispute',
 }
 

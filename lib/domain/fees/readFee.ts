@@ -12,8 +12,10 @@ import { authorize } from '@/lib/auth/authorize'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
 import { readContents } from '../proposals/readContents'
+import type { DisputeDecision } from './disputeRules'
 import { feeEvents, type FeeEvent } from './feeEvents'
 import { isOverdue } from './invoiceRules'
+import { lostDisputeOf } from './lostDisputeOf'
 import { mayHandleFees } from './policy'
 import { refundFrom, sourcesOf } from './refundRules'
 
@@ -34,6 +36,8 @@ export interface FeeView {
   /** What a single refund may give back at most. */
   refundableMinor: number
   isDisputed: boolean
+  /** A dispute that was lost, and what the office may make of it; null once it is decided. */
+  lostDispute: { disputeId: number; amountMinor: number; choices: DisputeDecision[] } | null
   receipt: string | null
   /** The invoice that is open. */
   openInvoice: { number: string; institute: string; dueAt: Date; isOverdue: boolean } | null
@@ -75,7 +79,9 @@ export async function readFee(ctx: ActingContext, reference: string): Promise<Fe
     ...invoices.flatMap(({ number }) => [`invoice:${number}`, `settled:${number}`]),
     ...notes.map(({ number }) => `credit-note:${number}`),
     ...refunds.map(({ id }) => `refund-failed:${id}`),
-    ...disputes.flatMap(({ id }) => ['open', 'won', 'lost'].map((state) => `dispute-${state}:${id}`)),
+    ...disputes.flatMap(({ id }) =>
+      ['open', 'won', 'lost', 'decided'].map((state) => `dispute-${state}:${id}`),
+    ),
   ]
   return {
     reference,
@@ -91,6 +97,7 @@ export async function readFee(ctx: ActingContext, reference: string): Promise<Fe
     dueAt: fee.due_at,
     givenBackMinor: sources.reduce((sum, { givenBackMinor }) => sum + givenBackMinor, 0),
     refundableMinor: refundFrom(sources)?.leftMinor ?? 0,
+    lostDispute: await lostDisputeOf(ctx, { disputes, fee, proposalState: contents.state }),
     isDisputed: disputes.some(({ state }) => state === 'open'),
     receipt: receipt?.number ?? null,
     openInvoice: open

@@ -1,12 +1,13 @@
 import { createElement } from 'react'
+import { billingRecordOf } from '@/db/queries/billing'
 import { findCreditNote, findInvoice, findInvoiceById } from '@/db/queries/invoices'
 import { findFee } from '@/db/queries/fees'
 import type { Database } from '@/db/client'
 import { refuse } from '@/lib/errors'
 import { formatDayWithYear, formatMoney } from '@/lib/format'
-import { officeAddress, officeBank } from '@/lib/office'
 import { BillDocument, type BillData } from '@/pdf/bill/BillDocument'
 import { render } from '@/pdf/render'
+import { accountRows, issuerWords } from '../billing/onPaper'
 import { readContents } from '../proposals/readContents'
 
 /**
@@ -26,6 +27,7 @@ async function invoiceData(db: Database, number: string): Promise<BillData> {
   const invoice = await findInvoice(db, number)
   if (!invoice) throw refuse.notFound('invoice')
   const { line, observatory } = await subjectOf(db, invoice.fee_id)
+  const billing = await billingRecordOf(db, invoice.billing_record_id)
   return {
     observatory,
     kind: 'Invoice',
@@ -39,7 +41,8 @@ async function invoiceData(db: Database, number: string): Promise<BillData> {
     line,
     amount: formatMoney(invoice.amount_minor, invoice.currency),
     vat: formatMoney(0, invoice.currency),
-    closing: [`Pay to: ${officeBank}. Name ${number}.`, `Questions: ${officeAddress}.`],
+    pay: billing ? accountRows(billing.facts, number) : [],
+    closing: issuerWords(billing?.facts ?? null),
   }
 }
 
@@ -48,6 +51,7 @@ async function creditNoteData(db: Database, number: string): Promise<BillData> {
   if (!note) throw refuse.notFound('credit note')
   const invoice = note.invoice_id === null ? null : await findInvoiceById(db, note.invoice_id)
   const { line, observatory } = await subjectOf(db, note.fee_id)
+  const billing = await billingRecordOf(db, note.billing_record_id)
   return {
     observatory,
     kind: 'Credit note',
@@ -62,11 +66,12 @@ async function creditNoteData(db: Database, number: string): Promise<BillData> {
     line,
     amount: formatMoney(note.amount_minor, note.currency),
     vat: formatMoney(0, note.currency),
+    pay: [],
     closing: [
       note.refund_id === null
         ? 'The invoice is taken back: nothing is to be paid on it.'
         : 'This amount has been given back the way it was paid.',
-      `Questions: ${officeAddress}.`,
+      ...issuerWords(billing?.facts ?? null),
     ],
   }
 }

@@ -93,6 +93,20 @@ export const cancelInvoiceSchema = z.object({
 
 export type CancelInvoiceForm = z.input<typeof cancelInvoiceSchema>
 
+export const decideDisputeSchema = z.object({
+  disputeId: z.number().int().positive(),
+  decision: z.enum(['ask-again', 'waive', 'withdraw', 'accept'], 'Say what becomes of the fee.'),
+  graceDays: z
+    .string()
+    .trim()
+    .regex(/^\d{1,2}$/, 'Give whole days.')
+    .transform(Number)
+    .refine((days) => days >= 1 && days <= 60, 'Between 1 and 60 days.'),
+  note: reason,
+})
+
+export type DecideDisputeForm = z.input<typeof decideDisputeSchema>
+
 export const remindOwingSchema = z.object({ slug: z.string().min(1).max(60) })
 
 export const recordTransferSchema = z.object({

@@ -76,16 +76,30 @@ function rowOf(part: PlannedPart, callNumber: number): Partial<Record<Column, Cs
   }
 }
 
+/** A row for each night of a visit, at its own time: it cannot be moved, and its observers choose their targets. */
+function nightRows(part: PlannedPart, callNumber: number): Partial<Record<Column, CsvValue>>[] {
+  return part.pieces.map(({ from, to, seconds, fromEvening }) => ({
+    ...rowOf(part, callNumber),
+    obs_id: `${part.number}-visit-${part.instrumentId}-${fromEvening}`,
+    t_min: mjd(from),
+    t_max: mjd(to),
+    t_plan_exptime: seconds,
+    category: 'Fixed',
+    priority: 2,
+    execution_status: 'Scheduled',
+  }))
+}
+
 /**
- * The night plan with the column names, types and units of ObsLocTAP 1.0. Nothing is scheduled yet: every row is Planned
- * within a window, and what is known only once it is observed stays empty.
+ * The night plan with the column names, types and units of ObsLocTAP 1.0. The queue is not scheduled yet: its rows are
+ * Planned within a window, those of visits Scheduled on their nights. What is known only once it is observed stays empty.
  */
 export function obsPlanCsv({ callNumber, parts }: NightPlan): string {
   return csvText(
     columns,
-    parts.map((part) => {
-      const row = rowOf(part, callNumber)
-      return columns.map((column) => row[column])
+    parts.flatMap((part) => {
+      const rows = part.observationId === null ? nightRows(part, callNumber) : [rowOf(part, callNumber)]
+      return rows.map((row) => columns.map((column) => row[column]))
     }),
   )
 }

@@ -5,13 +5,13 @@ import type { PlannedNights } from '../decisions/planNights'
 import { observationsOn } from '../nights/observationsOn'
 import type { PlannedPart, PlannedPiece } from './types'
 
-type Facts = Pick<PlannedPart, 'number' | 'title' | 'rank'>
+export type PartFacts = Pick<PlannedPart, 'number' | 'title' | 'rank'>
 
 /** What is given, target by target, with the bins it is laid in. */
 export function partsOf(
   runs: readonly GivenRun[],
   planned: Pick<PlannedNights, 'season' | 'bins' | 'terms'> & { standing: readonly BinnedLine[] },
-  factsOf: (proposalId: number) => Facts,
+  factsOf: (proposalId: number) => PartFacts,
 ): PlannedPart[] {
   const { season, bins, terms, standing } = planned
   const { awards } = laidAwards(
@@ -27,7 +27,7 @@ export function partsOf(
     const [fromEvening, toEvening] = [first.date, last.date]
     return [
       {
-        ...{ fromEvening, toEvening, siderealFromH, moon, seconds },
+        ...{ fromEvening, toEvening, siderealFromH, moon, seconds, ofNight: null },
         from: new Date(first.from),
         to: new Date(last.to),
       },

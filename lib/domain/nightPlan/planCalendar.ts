@@ -1,4 +1,9 @@
-import ical, { ICalCalendarMethod, ICalEventStatus, ICalEventTransparency } from 'ical-generator'
+import ical, {
+  ICalCalendarMethod,
+  ICalEventStatus,
+  ICalEventTransparency,
+  type ICalCalendar,
+} from 'ical-generator'
 import { formatHoursFromSeconds } from '@/lib/format'
 import { halfOf } from '../nights/halfOf'
 import type { NightPlan, PlannedPart } from './types'
@@ -31,8 +36,31 @@ function byHalf(parts: readonly PlannedPart[]): HalfPlan[] {
   return [...halves.values()].sort((a, b) => a.half - b.half)
 }
 
+/** An event for each night of a visit, at its own time: nobody else has the telescope then. */
+function addVisit(
+  calendar: ICalCalendar,
+  plan: NightPlan,
+  part: PlannedPart,
+  { origin, url }: { origin: string; url: string },
+): void {
+  const { number, title, instrument, telescope, instrumentId, conditions, pieces } = part
+  for (const { fromEvening, ofNight, from, to } of pieces)
+    calendar.createEvent({
+      id: `plan-${plan.callSlug}-${number}-${instrumentId}-visit-${fromEvening}@${new URL(origin).hostname}`,
+      sequence: plan.version,
+      start: from,
+      end: to,
+      status: ICalEventStatus.CONFIRMED,
+      transparency: ICalEventTransparency.OPAQUE,
+      summary: `${number}: visit, ${instrument} on ${telescope}${ofNight === 'whole' ? '' : `, ${ofNight}`}`,
+      description: [title, ...(conditions ? [`Conditions: ${conditions}.`] : [])].join('\n'),
+      url,
+    })
+}
+
 /**
- * The night plan as an iCalendar file (RFC 5545): an event for each award on an instrument in each half-month. An event
+ * The night plan as an iCalendar file (RFC 5545): an event for each award on an instrument in each half-month, and for
+ * each night of a visit. An event
  * keeps its id and its sequence rises with the decisions, so that loading the file again moves it.
  */
 export function planCalendar(plan: NightPlan, { origin, url }: { origin: string; url: string }): string {
@@ -40,7 +68,7 @@ export function planCalendar(plan: NightPlan, { origin, url }: { origin: string;
   calendar.method(ICalCalendarMethod.PUBLISH)
   const keyOf = ({ number, instrumentId }: PlannedPart) => `${number}-${instrumentId}`
   for (const award of new Set(plan.parts.map(keyOf))) {
-    const parts = plan.parts.filter((part) => keyOf(part) === award)
+    const parts = plan.parts.filter((part) => keyOf(part) === award && part.observationId !== null)
     for (const { half, fromEvening, toEvening, seconds, parts: own } of byHalf(parts)) {
       const [first] = own
       if (!first) continue
@@ -65,6 +93,8 @@ export function planCalendar(plan: NightPlan, { origin, url }: { origin: string;
       })
     }
   }
+  for (const part of plan.parts)
+    if (part.observationId === null) addVisit(calendar, plan, part, { origin, url })
   // Section 3.1: the last line ends like the others, which the library leaves to us.
   return `${calendar.toString().trimEnd()}\r\n`
 }

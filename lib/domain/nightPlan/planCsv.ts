@@ -16,6 +16,7 @@ const head = [
   'Conditions',
   'First evening',
   'Last evening',
+  'Of the night',
   'Sidereal time from (h)',
   'Moonlight',
   'Hours',
@@ -25,7 +26,7 @@ const degrees = (deg: number | null | undefined) =>
   deg === null || deg === undefined ? undefined : Number(deg.toFixed(7))
 const hours = (seconds: number) => Number((seconds / 3600).toFixed(3))
 
-/** The night plan as a file: a line for each bin a target is laid in, and one without a bin for what finds no place. */
+/** The night plan as a file: a line for each bin a target is laid in and each night of a visit, and one without a bin for what finds no place. */
 export function planCsv({ parts }: NightPlan): string {
   return csvText(
     head,
@@ -43,11 +44,11 @@ export function planCsv({ parts }: NightPlan): string {
       ]
       const left = part.seconds - part.pieces.reduce((sum, { seconds }) => sum + seconds, 0)
       return [
-        ...part.pieces.map(({ fromEvening, toEvening, siderealFromH, moon, seconds }) => [
+        ...part.pieces.map(({ fromEvening, toEvening, ofNight, siderealFromH, moon, seconds }) => [
           ...own,
-          ...[fromEvening, toEvening, siderealFromH, moon, hours(seconds)],
+          ...[fromEvening, toEvening, ofNight ?? '', siderealFromH, moon, hours(seconds)],
         ]),
-        ...(left >= 1 ? [[...own, '', '', '', '', hours(left)]] : []),
+        ...(left >= 1 ? [[...own, '', '', '', '', '', hours(left)]] : []),
       ]
     }),
   )

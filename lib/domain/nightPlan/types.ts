@@ -8,6 +8,8 @@ export interface PlannedPiece {
   siderealFromH: number
   moon: 'dark' | 'grey' | 'bright'
   seconds: number
+  /** Which of its night a visit has; null in the queue. */
+  ofNight: 'whole' | 'first half' | 'second half' | null
   /** First and last moment of such time. */
   from: Date
   to: Date
@@ -25,7 +27,8 @@ export interface PlannedPart {
   instrumentId: number
   instrument: string
   mode: { name: string; fromA: number; toA: number; resolvingPower: number | null } | null
-  observationId: number
+  /** Null for a visit, whose observers choose among their targets. */
+  observationId: number | null
   target: { name: string; raDeg: number | null; decDeg: number | null } | null
   service: 'queue' | 'visitor'
   conditions: string

@@ -3,9 +3,12 @@ import { siteRecordAt } from '@/db/queries/facility'
 import { scienceNights } from '@/db/queries/scienceNights'
 import type { Call } from '../calls/types'
 import type { SiteWeather } from '../facility/types'
+import { seasonVisibility } from '../observations/seasonVisibility'
 import { seasonBins, type SeasonBins } from './seasonBins'
 
 export interface CallBins extends SeasonBins {
+  /** First and last dark moment of each evening, milliseconds. */
+  dark: ReadonlyMap<string, readonly [from: number, to: number]>
   /** As the site's record says; null where it says nothing. */
   weather: SiteWeather | null
 }
@@ -17,5 +20,11 @@ export async function callBins(db: Database, call: Call): Promise<CallBins> {
     scienceNights(db, call.id),
   ])
   const season = seasonBins(site, { from: call.seasonFrom, to: call.seasonTo }, nights)
-  return { ...season, weather: site.weather ?? null }
+  const evenings = seasonVisibility(site, { from: call.seasonFrom, to: call.seasonTo, maxAirmass: 2 }, [])
+  const dark = new Map(
+    evenings.nights.flatMap(({ date, darkFrom, darkTo }) =>
+      darkFrom && darkTo ? [[date, [+darkFrom, +darkTo] as const] as const] : [],
+    ),
+  )
+  return { ...season, dark, weather: site.weather ?? null }
 }

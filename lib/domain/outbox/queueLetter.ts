@@ -3,6 +3,7 @@ import { insertLetter } from '@/db/queries/outbox'
 import type { Context } from '../context'
 import type { Letter } from './letter'
 import { renderLetter } from './renderLetter'
+import { isForgottenOnceSent } from './rules'
 
 export interface Addressee {
   personId: number | null
@@ -22,7 +23,11 @@ export async function queueLetter(
   const { text, html } = renderLetter(letter)
   const domain = new URL(tx.request.origin).hostname
   await insertLetter(tx.db, {
-    dedupeKey: `${cause}:${to.email.toLowerCase()}`.slice(0, 120),
+    // Written once by its cause alone, so that no address is left in the key.
+    dedupeKey: (isForgottenOnceSent(letter.template) ? cause : `${cause}:${to.email.toLowerCase()}`).slice(
+      0,
+      120,
+    ),
     messageId: `<${randomBytes(16).toString('hex')}@${domain}>`,
     template: letter.template,
     personId: to.personId,

@@ -1,5 +1,5 @@
 import { findPerson } from '@/db/queries/people'
-import { updateInvestigator } from '@/db/queries/proposalPeople'
+import { confirmInvestigator } from '@/db/queries/proposalPeople'
 import { touchProposal } from '@/db/queries/proposals'
 import { authorize } from '@/lib/auth/authorize'
 import type { Context } from '../context'
@@ -16,7 +16,7 @@ export async function confirmMembership(ctx: Context, input: { reference: string
     const own = investigatorRow(actor, subject)
     if (!own || own.confirmedAt) return
     const person = await findPerson(tx.db, actor.personId)
-    await updateInvestigator(tx.db, own.id, {
+    await confirmInvestigator(tx.db, own.id, {
       personId: actor.personId,
       name: actor.name,
       institute: own.institute || (person?.institute_text ?? ''),

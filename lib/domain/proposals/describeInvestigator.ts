@@ -1,15 +1,20 @@
 import type { z } from 'zod'
-import { updateInvestigator } from '@/db/queries/proposalPeople'
+import { updateDescription } from '@/db/queries/proposalPeople'
 import { touchProposal } from '@/db/queries/proposals'
 import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { changedFields } from './changedFields'
+import { descriptionFormOf } from './descriptionForm'
 import { namedInvestigator } from './namedInvestigator'
 import { openForManaging } from './openProposal'
 import type { describeInvestigatorSchema } from './peopleSchema'
+import { staleProposal } from './staleProposal'
 
-/** Changes what is said of someone named: institute, ORCID iD, student, supervisor. */
+/**
+ * Changes what is said of someone named: institute, ORCID iD, student, supervisor. Refused over a version that is no
+ * longer the newest, unless all of it stands there already.
+ */
 export async function describeInvestigator(
   ctx: Context,
   input: z.output<typeof describeInvestigatorSchema>,
@@ -30,7 +35,11 @@ export async function describeInvestigator(
       after,
     )
     if (!changed) return
-    await updateInvestigator(tx.db, person.id, after)
+    if (person.version !== input.version || !(await updateDescription(tx.db, person, after)))
+      throw await staleProposal(tx, { ...row, version: person.version }, descriptionFormOf(person), {
+        actions: ['people.describe', 'people.agree'],
+        name: person.name,
+      })
     await touchProposal(tx.db, row.id)
     await writeLogbook(tx, {
       action: 'people.describe',

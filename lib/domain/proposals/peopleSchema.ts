@@ -44,7 +44,11 @@ export const investigatorDetailsSchema = z.object({
 })
 
 export const addInvestigatorSchema = newInvestigatorSchema.extend({ reference })
-export const describeInvestigatorSchema = investigatorDetailsSchema.extend({ reference, id })
+export const describeInvestigatorSchema = investigatorDetailsSchema.extend({
+  reference,
+  id,
+  version: z.number().int().positive(),
+})
 export const investigatorSchema = z.object({ reference, id })
 export const accessSchema = z.object({ reference, id, access })
 export const moveSchema = z.object({ reference, id, by: z.union([z.literal(-1), z.literal(1)]) })

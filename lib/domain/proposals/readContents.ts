@@ -8,6 +8,7 @@ import { investigatorsOf } from '@/db/queries/proposalPeople'
 import { findProposal } from '@/db/queries/proposals'
 import { groupsOf } from '@/db/queries/targetGroups'
 import { targetsOf } from '@/db/queries/targets'
+import { wishesOf } from '@/db/queries/wishes'
 import { writingsOf } from '@/db/queries/writings'
 import type { ProposalsRow } from '@/db/tables'
 import { refuse } from '@/lib/errors'
@@ -38,19 +39,31 @@ export async function contentsOf(db: Database, row: ProposalsRow): Promise<Propo
   const [call, kinds] = await Promise.all([findCall(db, row.call_id), callKinds(db, row.call_id)])
   const kind = kinds.find(({ id }) => id === row.call_kind_id)
   if (!call || !kind) throw refuse.integrity('The call of this proposal is not complete.')
-  const [site, modes, people, groups, targets, constraintSets, observations, papers, writings, figures] =
-    await Promise.all([
-      siteRecordAt(db, call.siteId, call.seasonFrom),
-      modeRecordsOnOffer(db, call.id, call.seasonFrom),
-      investigatorsOf(db, row.id),
-      groupsOf(db, row.id),
-      targetsOf(db, row.id),
-      constraintSetsOf(db, row.id),
-      observationsOf(db, row.id),
-      papersOf(db, row.id),
-      writingsOf(db, row.id),
-      figuresOf(db, row.id),
-    ])
+  const [
+    site,
+    modes,
+    people,
+    groups,
+    targets,
+    constraintSets,
+    observations,
+    wishes,
+    papers,
+    writings,
+    figures,
+  ] = await Promise.all([
+    siteRecordAt(db, call.siteId, call.seasonFrom),
+    modeRecordsOnOffer(db, call.id, call.seasonFrom),
+    investigatorsOf(db, row.id),
+    groupsOf(db, row.id),
+    targetsOf(db, row.id),
+    constraintSetsOf(db, row.id),
+    observationsOf(db, row.id),
+    wishesOf(db, row.id),
+    papersOf(db, row.id),
+    writingsOf(db, row.id),
+    figuresOf(db, row.id),
+  ])
   return {
     id: row.id,
     reference: row.reference,
@@ -74,6 +87,7 @@ export async function contentsOf(db: Database, row: ProposalsRow): Promise<Propo
     targets,
     constraintSets,
     observations,
+    wishes,
     papers,
     writings,
     figures,

@@ -21,6 +21,8 @@ export interface Investigator {
   isOrcidVerified: boolean
   position: number
   confirmedAt: Date | null
+  /** Raised by every change of what is said of the person; rights and order are not counted. */
+  version: number
 }
 
 export interface Brightness {
@@ -124,6 +126,8 @@ export interface ConstraintSet {
   transparency: 'photometric' | 'clear' | 'thin-cloud'
   dateFrom: string | null
   dateTo: string | null
+  /** How often it is repeated, in words: `every 4 to 6 nights, ten times`; null for once. */
+  cadence: string | null
   version: number
 }
 
@@ -138,6 +142,24 @@ export interface Observation {
   feature: string | null
   featureRestA: number | null
   askedSeconds: number
+  version: number
+}
+
+/** The nights of a visit: how many, which half of each or the whole, and whether they follow one another. */
+export interface VisitWish {
+  nights: number
+  part: 'whole' | 'first' | 'second'
+  together: boolean
+}
+
+/** How time on an instrument is wished for. */
+export interface ServiceWish {
+  id: number
+  instrumentId: number
+  /** Least award that is of use; null for half of what is asked. */
+  leastSeconds: number | null
+  /** Null where observatory staff are to observe, in the queue. */
+  visit: VisitWish | null
   version: number
 }
 
@@ -224,6 +246,8 @@ export interface ProposalContents {
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]
+  /** None for an instrument of which nothing is said. */
+  wishes: ServiceWish[]
   papers: Paper[]
   writings: Writings
   figures: Figure[]

@@ -36,14 +36,14 @@ function addNights(calendar: ICalCalendar, { sent, origin, awarded }: CalendarFa
       sequence: contents.version,
       start: night.from,
       end: night.to,
-      // The call has the night; who observes on it is decided under the sky.
-      status: ICalEventStatus.TENTATIVE,
-      transparency: ICalEventTransparency.TRANSPARENT,
-      summary: `${reference}: may be observed, ${night.instruments.join(' and ')} on the ${night.telescope}`,
+      // The call has the night; who observes on it is decided under the sky, but for a visit's own.
+      status: night.isVisit ? ICalEventStatus.CONFIRMED : ICalEventStatus.TENTATIVE,
+      transparency: night.isVisit ? ICalEventTransparency.OPAQUE : ICalEventTransparency.TRANSPARENT,
+      summary: `${reference}: ${night.isVisit ? 'your visit' : 'may be observed'}, ${night.instruments.join(' and ')} on the ${night.telescope}`,
       description: [
         contents.title,
         `Dark time of call ${call.number} on the ${night.telescope}, evening of ${formatCalendarDate(night.eveningDate)}. A target is usable for up to ${formatQuantity(night.usableHours, 1, 'h')}.`,
-        `Awarded in all: ${hours?.join(', ')}. The night is not assigned to you alone.`,
+        `Awarded in all: ${hours?.join(', ')}. ${night.isVisit ? 'The night is yours.' : 'The night is not assigned to you alone.'}`,
       ].join('\n'),
       url: `${origin}${paths.proposalOutcome(reference)}`,
     })

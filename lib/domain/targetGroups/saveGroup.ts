@@ -11,6 +11,7 @@ import { staleProposal } from '../proposals/staleProposal'
 import type { TargetGroup } from '../proposals/types'
 import { groupRow } from './groupRow'
 import { chosenTargets, requireFreeGroupName, requireGroupRoom } from './groupRules'
+import { backSchema, releaseTargets } from './releaseTargets'
 import { groupSchema } from './schema'
 
 export const saveGroupSchema = z.object({
@@ -19,12 +20,16 @@ export const saveGroupSchema = z.object({
   id: z.number().int().positive().nullable(),
   version: z.number().int().nonnegative(),
   group: groupSchema,
+  back: backSchema,
 })
+
+/** A group as kept, and the targets that came into it or left it, with their new versions. */
+export type SavedGroup = TargetGroup & { moved: { id: number; version: number }[] }
 
 export type SaveGroupInput = z.output<typeof saveGroupSchema>
 
 /** Saves the name, the rule and the targets of a group, or makes a new one. A target stands in one group at most. */
-export async function saveGroup(ctx: Context, input: SaveGroupInput): Promise<TargetGroup> {
+export async function saveGroup(ctx: Context, input: SaveGroupInput): Promise<SavedGroup> {
   return inTransaction(ctx, async (tx) => {
     const { row } = await openForEditing(tx, input.reference)
     const [groups, targets] = [await groupsOf(tx.db, row.id), await targetsOf(tx.db, row.id)]
@@ -47,7 +52,7 @@ export async function saveGroup(ctx: Context, input: SaveGroupInput): Promise<Ta
     const out = had.filter((target) => !chosen.includes(target))
     const isRenamed = before !== null && before.name !== values.name
     const into = chosen.filter((target) => isRenamed || !had.includes(target))
-    await putInGroup(tx.db, ids(out), null)
+    await releaseTargets(tx, groups, out, input.back)
     await putInGroup(tx.db, ids(into), id)
     await touchProposal(tx.db, row.id)
     await writeLogbook(tx, {
@@ -57,7 +62,8 @@ export async function saveGroup(ctx: Context, input: SaveGroupInput): Promise<Ta
       before: before ? { group: before, names: names(had) } : undefined,
       after: { group: values, names: names(chosen) },
     })
-    return { ...values, id, version: before ? before.version + 1 : 1 }
+    const moved = [...out, ...into].map((target) => ({ id: target.id, version: target.version + 1 }))
+    return { ...values, id, version: before ? before.version + 1 : 1, moved }
   })
 }
 

@@ -42,6 +42,8 @@ export const uploadFigureSchema = z.object({
     .string()
     .regex(/^\d{0,9}$/)
     .transform((text) => (text === '' ? null : Number(text))),
+  /** Sent before, and its answer lost: it may be kept already. */
+  again: z.literal('yes').optional(),
   file: z.instanceof(File, { message: 'Choose a picture.' }),
   sha256: z.string().regex(/^[0-9a-f]{64}$/, 'The browser did not say what it sent. Try again.'),
   sizeBytes: z

@@ -52,6 +52,10 @@ export async function uploadFigure(ctx: Context, input: UploadFigureInput): Prom
   return inTransaction(ctx, async (tx) => {
     const { row, figures, standing } = await demandRoom(tx, input)
     const sha256 = createHash('sha256').update(picture.bytes).digest('hex')
+    const kept = input.again
+      ? figures.find((figure) => figure.sha256 === sha256 && figure.fileName === fileName)
+      : undefined
+    if (kept && !standing) return { figureId: kept.id, label: kept.label, fileName }
     const objectId = await insertStoredObject(tx.db, {
       key,
       sha256,

@@ -45,10 +45,15 @@ export async function mostMeritInBins(
   // A solver has no answer to a programme of nothing.
   if (chosenAmong.length === 0)
     return { ...byRankInBins(asked, bins, standing), meritHours: 0, boundMeritHours: 0 }
+  // Merit falls with rank: whom the ranking gives time is close to the best already.
+  const begun = new Set(byRankInBins(asked, bins, standing).given.map(({ proposal }) => proposal))
   const programme = new NightsProgramme(bins, standing)
   const placed = chosenAmong.map((lines) => {
     const proposal = lines[0]?.proposal ?? 0
-    return programme.choose(lines, isAbove.has(proposal) ? (merit.get(proposal) ?? 0) : 0, must.has(proposal))
+    return programme.choose(lines, isAbove.has(proposal) ? (merit.get(proposal) ?? 0) : 0, {
+      isForced: must.has(proposal),
+      isBegun: begun.has(proposal),
+    })
   })
   const answer = await solve(programme.build(), limits)
   if (answer.values === null) return { why: answer.why }

@@ -15,6 +15,8 @@ export interface PlacedLine {
 export class NightsProgramme {
   private readonly programme = new ProgrammeBuilder()
   private readonly inBin: number[][]
+  /** Columns of proposals that a known plan gives time. */
+  private readonly begun: number[] = []
 
   constructor(
     private readonly bins: readonly NightBin[],
@@ -28,10 +30,18 @@ export class NightsProgramme {
     }
   }
 
-  /** A proposal that gets time on all its lines, each between its least and its whole, or none: a column of 0 or 1. */
-  choose(lines: readonly BinnedLine[], gainAnHour: number, isForced = false): PlacedLine[] {
+  /**
+   * A proposal that gets time on all its lines, each between its least and its whole, or none: a column of 0 or 1. The
+   * solver begins with those that are `isBegun`.
+   */
+  choose(
+    lines: readonly BinnedLine[],
+    gainAnHour: number,
+    { isForced = false, isBegun = false }: { isForced?: boolean; isBegun?: boolean } = {},
+  ): PlacedLine[] {
     const lower = isForced ? 1 : 0
     const isIn = this.programme.column({ objective: 0, lower, upper: 1, isInteger: true })
+    if (isBegun || isForced) this.begun.push(isIn)
     return lines.map((line) => {
       const parts = line.parts.map((part) => this.part(part, gainAnHour, 0, part.seconds / hour))
       const all = parts.flat().map((column) => [column, 1] as const)
@@ -49,7 +59,12 @@ export class NightsProgramme {
         (this.inBin[at] ?? []).map((column) => [column, 1] as const),
       ),
     )
-    return this.programme.build()
+    const programme = this.programme.build()
+    if (this.begun.length === 0) return programme
+    // Hours are left to the solver: it lays them by a linear programme once it knows who has any.
+    const start = new Float64Array(programme.objective.length)
+    for (const column of this.begun) start[column] = 1
+    return { ...programme, start }
   }
 
   /** A part laid at a gain an hour; the sum of its hours lies between `least` and `most`. */

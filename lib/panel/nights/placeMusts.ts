@@ -32,7 +32,7 @@ async function fit(musts: Musts, season: Season): Promise<{ placed: Musts } | { 
   // In turn each may take its whole; only where that leaves another short must they share.
   if (musts.every((lines) => given.has(proposalOf(lines)))) return { placed: musts }
   const programme = new NightsProgramme(bins, standing)
-  const placed = musts.map((lines, at) => programme.choose(lines, musts.length - at, true))
+  const placed = musts.map((lines, at) => programme.choose(lines, musts.length - at, { isForced: true }))
   const answer = await solve(programme.build(), limits)
   if (!answer.values) return answer.status === 'infeasible' ? null : { why: answer.why }
   const { values } = answer

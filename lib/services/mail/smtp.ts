@@ -28,6 +28,12 @@ export function smtpMail(settings: { url: string; from: string }): Mail {
             content: Buffer.from(bytes),
             contentType: 'application/pdf',
           })),
+          // Whoever fails to deliver it later names it so (RFC 3461), where the server can.
+          dsn: {
+            id: letter.messageId.replace(/[<>]/g, ''),
+            return: 'headers',
+            notify: ['failure', 'delay'],
+          },
           headers: { 'Auto-Submitted': 'auto-generated' },
           disableFileAccess: true,
           disableUrlAccess: true,

@@ -39,7 +39,7 @@ const view = (): OfficeDecisionsView => ({
   callSlug: 'call-13',
   phase: 'ranking',
   lettersAt: '2027-06-01T12:00:00Z',
-  panels: [{ panelId: 7, name: 'The panel', rows }],
+  panels: [{ panelId: 7, name: 'The panel', isFrozen: true, rows }],
 })
 const approve = vi.fn(async () => ({ ok: true as const, data: { approved: rows.length } }))
 const opened = vi.fn(async ({ proposalId }: { proposalId: number }) => {

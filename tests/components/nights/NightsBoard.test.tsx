@@ -32,15 +32,17 @@ const line = (given: number, suggested: number): NightsLine => ({
   askedSeconds: 20 * hour,
   wholeSeconds: 20 * hour,
   leastSeconds: 10 * hour,
+  ...{ leastBy: 'half', leastReason: '', visit: null },
   possible: true,
   assessment: null,
   givenSeconds: given * hour,
   isReserve: false,
   service: 'queue',
   conditions: '',
+  ...{ evenings: '', suggestedEvenings: '' },
   suggestedSeconds: suggested * hour,
   standsSeconds: null,
-  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [] },
+  whyNot: suggested > 0 ? null : { reason: 'too-little-left', left: 4 * hour, displaces: [], nights: null },
 })
 const row = (rank: number, given: number, suggested: number): NightsRow => ({
   proposalId: rank,
@@ -63,8 +65,8 @@ const view = (...rows: NightsRow[]): NightsView => ({
   hasRanking: true,
   policy: 'rank',
   policies: [
-    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, why: null },
-    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, why: null },
+    { policy: 'rank', awarded: 2, seconds: 30 * hour, meritHours: 210, gap: null, why: null },
+    { policy: 'merit', awarded: 2, seconds: 32 * hour, meritHours: 230, gap: 0.0012, why: null },
   ],
   line: 2,
   weather: { isRecorded: true, lostShare: 0.2 },
@@ -80,6 +82,7 @@ const view = (...rows: NightsRow[]): NightsView => ({
       suggestedSeconds: 30 * hour,
       heldSeconds: 0,
       heldReason: '',
+      visitSeconds: 0,
       plannedSeconds: 27 * hour,
       bins: [{ half: 1, siderealFromH: 12, moon: 'dark', seconds: 34 * hour, usedSeconds: 30 * hour }],
     },
@@ -91,7 +94,8 @@ const takePlan = vi.fn(() => Promise.resolve({ ok: true as const, data: { awarde
 const save = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
 const choose = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
 const hold = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
-const actions = { save, takePlan, choose, hold }
+const setLeast = vi.fn(() => Promise.resolve({ ok: true as const, data: undefined }))
+const actions = { save, takePlan, choose, hold, setLeast }
 const show = (search = '', initial = before) =>
   render(
     <QueryClientProvider
@@ -162,7 +166,7 @@ describe('the nights', () => {
     const [name, text] = saved.mock.lastCall as [string, string]
     expect(name).toBe('nights-call-13.csv')
     expect(text.trim().split(/\r?\n/)).toHaveLength(2)
-    expect(text).toContain('13-002,Question 2,Aldous,SPINDLE,20,10,10,12')
+    expect(text).toContain('13-002,Question 2,Aldous,SPINDLE,20,10,,10,12')
     await userEvent.type(screen.getByRole('searchbox'), 'Question 3')
     expect(screen.queryAllByRole('rowheader')).toEqual([])
     await userEvent.click(screen.getByRole('button', { name: 'Show all' }))

@@ -64,6 +64,21 @@ describe('the switch between panels', () => {
     show('', panels.slice(0, 1))
     expect(screen.queryByRole('navigation')).toBeNull()
   })
+
+  it('leads from one panel of several to what stands between them, and keeps the panel of the address', () => {
+    query = 'panel=2'
+    render(<PanelSwitch panels={panels.slice(0, 1)} between="/panel/call-13/between" />)
+    expect(screen.getByRole('link', { name: 'Between panels' }).getAttribute('href')).toBe(
+      '/panel/call-13/between?panel=2',
+    )
+    expect(marked()).toEqual(['Distant universe'])
+  })
+
+  it('marks what stands between them while one is there, and no panel', () => {
+    query = ''
+    render(<PanelSwitch panels={panels} between="/panel/call-13/ranking" />)
+    expect(marked()).toEqual(['Between panels'])
+  })
 })
 
 describe('the links of the head', () => {

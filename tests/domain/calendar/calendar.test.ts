@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { nightMove } from '@/components/calendar/nightMove'
 import { calendarCsv } from '@/lib/domain/calendar/calendarFileView'
+import { offeredTwiceWords } from '@/lib/domain/calendar/offeredTwiceWords'
 import { halfMonths } from '@/lib/domain/calendar/halfMonths'
 import { partsProblem } from '@/lib/domain/calendar/partsProblem'
 import { readCalendarCsv } from '@/lib/domain/calendar/readCalendarCsv'
@@ -81,6 +82,7 @@ const aldous: TelescopeCalendar = {
   name: 'Aldous',
   instruments,
   nights,
+  elsewhere: [],
   halves: [],
   total,
   awardedSeconds: 0,
@@ -174,4 +176,34 @@ it.each([
     date: new Date(Date.UTC(2027, 7, 15 + i)).toISOString().slice(0, 10),
   }))
   expect(nightMove(all, date, key)).toBe(to)
+})
+
+// Seen to fail: with ends that only touch counted as the same part, and with engineering counted as offered.
+describe('a night of another call', () => {
+  const elsewhere = [
+    { eveningDate: '2027-07-10', from: 0, to: 0.5, callNumber: 15 },
+    { eveningDate: '2027-07-12', from: 0, to: 1, callNumber: 16 },
+  ]
+  const on = (eveningDate: string, from: number, to: number, over: Partial<NightPart> = {}) => ({
+    ...part(from, to, over),
+    eveningDate,
+  })
+  const said = (...parts: ReturnType<typeof on>[]) => offeredTwiceWords('Fennel 1.5 m', parts, elsewhere)
+
+  it.each([
+    ['the other half', on('2027-07-10', 0.5, 1), null],
+    ['another night', on('2027-07-11', 0, 1), null],
+    ['engineering there', on('2027-07-10', 0, 1, { useFor: 'engineering' }), null],
+    [
+      'a moment of it',
+      on('2027-07-10', 0.499, 1),
+      'Call 15 offers Fennel 1.5 m on the night of 10 July 2027 already. A part of a night is offered by one call.',
+    ],
+  ])('%s', (_, one, sentence) => expect(said(one)).toBe(sentence))
+
+  it('is named first of several', () => {
+    expect(said(on('2027-07-12', 0, 1), on('2027-07-10', 0, 1))).toMatch(
+      /^Call 15 offers .* 10 July 2027 already, and one more night of these\. /,
+    )
+  })
 })

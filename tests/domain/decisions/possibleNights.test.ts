@@ -49,6 +49,7 @@ describe('nights on which awarded time may be observed', () => {
         from: new Date('2027-07-01T23:00:00Z'),
         to: new Date('2027-07-02T09:00:00Z'),
         instruments: ['SPINDLE'],
+        isVisit: false,
         usableHours: 5.5,
       },
     ])

@@ -19,6 +19,7 @@ const piece = (
   toEvening: to.slice(0, 10),
   siderealFromH: 4,
   moon: 'dark',
+  ofNight: null,
   seconds,
   from: new Date(from),
   to: new Date(to),

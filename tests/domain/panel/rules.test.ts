@@ -246,7 +246,7 @@ describe('awards', () => {
       panelId: 1,
       proposalId: 1,
       version: 0,
-      lines: [{ instrumentId: 1, hours, isReserve: false, service: 'queue', conditions: '' }],
+      lines: [{ instrumentId: 1, hours, isReserve: false, service: 'queue', evenings: '', conditions: '' }],
     })
     expect(result.success ? result.data.lines[0]?.hours : null).toBe(seconds)
   })

@@ -10,6 +10,7 @@ import { useRolledBackDatabase } from '../../support/database'
 import { memoryStore } from '../../support/memoryStore'
 import { refused } from '../../support/refused'
 import { makeScenario, type Scenario } from '../../support/scenario'
+import { makeCall } from '../../support/scenario/call'
 import { sendIn } from '../../support/sendIn'
 
 // Seen to fail: with awarded time left out of the guard, and with nights outside the stretch cleared.
@@ -141,6 +142,16 @@ describe('nights from a file', () => {
   const take = async (text: string, mayTakePromised = false) =>
     importNights(office, { slug: scenario.callSlug, version: await version(), text, mayTakePromised })
 
+  it('may not overlap themselves, in whatever order', async () => {
+    const { name } = await telescope()
+    const lines = [`${name},2027-07-20,0.4,1,engineering`, `${name},2027-07-20,0,0.5,science`]
+    for (const ordered of [lines, lines.toReversed()]) {
+      const refusal = await refused(take(['telescope,evening,from,to,use', ...ordered].join('\n')))
+      expect(refusal.fieldErrors.text).toMatch(/^Nothing was taken\. Line 3: Two parts of a night overlap/)
+    }
+    expect((await telescope()).nights.every(({ parts }) => parts.length === 1)).toBe(true)
+  })
+
   it('become what it says; others stay; written out and taken back they are the same', async () => {
     const name = (await telescope()).name
     const head = 'telescope,evening,from,to,use'
@@ -166,5 +177,61 @@ describe('nights from a file', () => {
     )
     expect(refusal.fieldErrors.text).toMatch(/^Nothing was taken. Line 3: 2027-09-20 is no night/)
     expect((await telescope()).nights.every(({ parts }) => parts.length === 1)).toBe(true)
+  })
+})
+
+// Seen to fail: without the look at other calls, and with a call that kept what it had given up.
+describe('a night that another call offers', () => {
+  const offered = /^Call \d+ offers Telescope .* on the night of 10 July 2027 already\. /
+
+  /** A later call of the same telescope, over a season that contains July, with no nights in July of its own. */
+  async function later() {
+    const { callId, callSlug } = await makeCall(db(), `${scenario.tag}b`, scenario, { month: '2027-08' })
+    await db()('calls').where({ id: callId }).update({ season_from: '2027-07-01' })
+    const setTo = async (parts: NightPart[], evening = '2027-07-10') => {
+      const row = await db()('calls').where({ id: callId }).first('version')
+      const on = { slug: callSlug, version: row?.version ?? 0, telescopeId: scenario.telescopeId }
+      await setNights(office, { ...on, from: evening, to: evening, parts, mayTakePromised: false })
+    }
+    return { callId, callSlug, setTo }
+  }
+
+  it('is refused where it is set, and free once that call gives it up', async () => {
+    const { callId, setTo } = await later()
+    const refusal = await refused(setTo([whole]))
+    expect(refusal.fieldErrors.from).toMatch(offered)
+    expect(refusal.fieldErrors.from).toContain(`Call ${scenario.callNumber} `)
+    const july = () => db()('night_blocks').where({ call_id: callId, evening_date: '2027-07-10' })
+    expect(await july()).toEqual([])
+    await setTo([{ ...whole, useFor: 'engineering' }])
+    await setTo([])
+
+    await set('2027-07-10', '2027-07-10', [{ ...whole, to: 0.5 }])
+    expect((await refused(setTo([whole]))).fieldErrors.from).toMatch(offered)
+    await setTo([{ ...whole, from: 0.5 }])
+    expect((await refused(set('2027-07-10', '2027-07-10', [whole]))).fieldErrors.from).toMatch(/already/)
+    await set('2027-07-10', '2027-07-10', [])
+    await setTo([whole])
+    expect(await july()).toMatchObject([{ use_for: 'science', fraction_to: '1.000' }])
+  })
+
+  it('is refused in a file, all of it, and shown in the calendar', async () => {
+    const { callId, callSlug } = await later()
+    const { name } = await telescope()
+    const row = await db()('calls').where({ id: callId }).first('version')
+    const text = `telescope,evening,from,to,use\n${name},2027-08-02,0,1,none\n${name},2027-07-10,0,1,science`
+    const on = { slug: callSlug, version: row?.version ?? 0, mayTakePromised: false }
+    const refusal = await refused(importNights(office, { ...on, text }))
+    expect(refusal.fieldErrors.text).toMatch(/^Nothing was taken\. Call \d+ offers .* 10 July 2027 already/)
+    expect(await db()('night_blocks').where({ call_id: callId, evening_date: '2027-08-02' })).toHaveLength(1)
+    const { telescopes } = await readCalendar(office, callSlug)
+    const { elsewhere } = telescopes.find(({ id }) => id === scenario.telescopeId) ?? expect.fail('none')
+    expect(elsewhere).toHaveLength(31)
+    expect(elsewhere[0]).toEqual({
+      eveningDate: '2027-07-01',
+      from: 0,
+      to: 1,
+      callNumber: scenario.callNumber,
+    })
   })
 })

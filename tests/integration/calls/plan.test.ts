@@ -77,6 +77,12 @@ it('plans a call after an earlier one: rules, panels, instruments and the patter
 
   expect((await refused(readCall(testContext(db(), scenario.pi), slug))).kind).toBe('not-found')
   expect((await refused(previewCall(testContext(db(), scenario.pi), slug))).kind).toBe('forbidden')
+  const again = await refused(
+    planCall(office, { ...wanted, seasonFrom: '2027-10-31', seasonTo: '2027-11-05' }),
+  )
+  expect(again.fieldErrors.seasonFrom).toMatch(
+    new RegExp(`^Call ${after.call.number} offers .* on the night of 31 October 2027 already`),
+  )
   const past = { ...wanted, opensAt: new Date('2020-01-01'), closesAt: new Date('2020-02-01') }
   expect((await refused(planCall(office, past))).fieldErrors.closesAt).toMatch(/lies in the past/)
 })

@@ -96,7 +96,14 @@ describe('a second person', () => {
       proposalId: first.id,
       version: (await rowOf(first.id)).version,
       lines: [
-        { instrumentId: call.instrumentId, hours: 3600, isReserve: false, service: 'queue', conditions: '' },
+        {
+          instrumentId: call.instrumentId,
+          hours: 3600,
+          isReserve: false,
+          service: 'queue',
+          evenings: [],
+          conditions: '',
+        },
       ],
     })
     expect(await state()).toBe('changed')

@@ -43,6 +43,7 @@ const give = async (
         hours: hours * h,
         isReserve: more.isReserve ?? false,
         service: 'queue',
+        evenings: [],
         conditions: more.conditions ?? '',
       },
     ],
@@ -143,8 +144,8 @@ describe('hours', () => {
       conditions: '',
       isReserve: false,
     }
-    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h + 1 })).toBe(false)
-    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h })).toBe(true)
+    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h + 1 })).toBeNull()
+    expect(await insertAward(db(), call.callId, { ...award, seconds: 60 * h })).toBeGreaterThan(0)
   })
 
   it('beyond what was asked, or on what is not possible, are refused', async () => {
@@ -176,6 +177,7 @@ describe('hours', () => {
           hours: h,
           isReserve: false,
           service: 'queue' as const,
+          evenings: [],
           conditions: '',
         },
       ],

@@ -42,7 +42,7 @@ const give = async (proposal: PanelProposalMade, hours: number) => {
   const line = { instrumentId: call.instrumentId, hours: hours * h, isReserve: false, conditions: '' }
   return saveAward(call.as(call.chair), {
     ...{ panelId: call.panelId, proposalId: proposal.id, version: row?.decisionVersion ?? 0 },
-    lines: [{ ...line, service: 'queue' }],
+    lines: [{ ...line, service: 'queue', evenings: [] }],
   })
 }
 const chosen = () =>

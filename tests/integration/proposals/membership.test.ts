@@ -12,6 +12,7 @@ import { endLeadOffer } from '@/lib/domain/proposals/endLeadOffer'
 import { offerLead } from '@/lib/domain/proposals/offerLead'
 import { readProposal } from '@/lib/domain/proposals/readProposal'
 import { removeInvestigator } from '@/lib/domain/proposals/removeInvestigator'
+import { setAccess } from '@/lib/domain/proposals/setAccess'
 import { readSent } from '@/lib/domain/submission/readSent'
 import { testContext } from '../../support/context'
 import { useRolledBackDatabase } from '../../support/database'
@@ -42,6 +43,16 @@ const add = (more: Partial<Parameters<typeof addInvestigator>[1]> = {}) =>
     isStudent: false,
     isSupervisor: false,
     ...more,
+  })
+const added = async () => {
+  await add()
+  return named(newcomer.name)
+}
+const deputise = async () =>
+  setAccess(as(scenario.pi), {
+    reference: scenario.reference,
+    id: (await named('Odo Pellering')).id,
+    access: 'deputy',
   })
 const lastEntry = async (action: string) => {
   const row = await db()('logbook')
@@ -133,10 +144,9 @@ describe('somebody without an account', () => {
 describe('what is said of somebody named', () => {
   it('is changed, with how it was in the logbook', async () => {
     await add({ orcid: '0000-0002-1825-0097' })
-    const { id } = await named(newcomer.name)
+    const { id, version } = await named(newcomer.name)
     await describeInvestigator(as(scenario.pi), {
-      reference: scenario.reference,
-      id,
+      ...{ reference: scenario.reference, id, version },
       institute: 'Winterhalt Institute',
       orcid: '0000-0002-1825-0097',
       isStudent: true,
@@ -165,11 +175,55 @@ describe('what is said of somebody named', () => {
     expect((await named('Odo Pellering')).isOrcidVerified).toBe(true)
   })
 
+  // Seen to fail: with the version not compared, and with whoever touched the proposal last named as the other.
+  it('is not overwritten by whoever opened it before the other saved', async () => {
+    const nils = await added()
+    const input = { reference: scenario.reference, id: nils.id, version: nils.version, orcid: '' }
+    const mine = { ...input, institute: 'Overmoor Institute', isStudent: true, isSupervisor: false }
+    const theirs = { ...input, institute: 'Winterhalt Institute', isStudent: false, isSupervisor: false }
+    await deputise()
+    await describeInvestigator(as(scenario.coInvestigator), theirs)
+    // Rights and order are no part of it, nor is what somebody else changes of another person.
+    await setAccess(as(scenario.pi), { reference: scenario.reference, id: nils.id, access: 'read' })
+    const pi = await named('Maren Sollvik')
+    await describeInvestigator(as(scenario.pi), { ...mine, id: pi.id, version: pi.version })
+    const refusal = await refused(describeInvestigator(as(scenario.pi), mine))
+    expect(refusal.stale).toMatchObject({
+      changedBy: 'Odo Pellering',
+      version: nils.version + 1,
+      theirs: { institute: 'Winterhalt Institute', orcid: '', isStudent: false, isSupervisor: false },
+    })
+    expect(await named(newcomer.name)).toMatchObject({ institute: 'Winterhalt Institute', isStudent: false })
+    await describeInvestigator(as(scenario.pi), { ...mine, version: nils.version + 1 })
+    expect(await named(newcomer.name)).toMatchObject({ institute: 'Overmoor Institute', isStudent: true })
+  })
+
+  it('need not be chosen again where both said the same', async () => {
+    const { id, version } = await added()
+    const said = { institute: 'Overmoor Institute', orcid: '', isStudent: true, isSupervisor: false }
+    const input = { reference: scenario.reference, id, version, ...said }
+    await describeInvestigator(as(scenario.pi), input)
+    await describeInvestigator(as(scenario.pi), input)
+    expect((await named(newcomer.name)).version).toBe(version + 1)
+  })
+
+  it('is stale once the person agreed, whose name it then is', async () => {
+    await add()
+    await opened()
+    const { id, version } = await named(newcomer.name)
+    await confirmMembership(as(await newcomerActor()), { reference: scenario.reference })
+    const said = { institute: 'Elsewhere', orcid: '', isStudent: false, isSupervisor: false }
+    const stale = describeInvestigator(as(scenario.pi), {
+      ...{ reference: scenario.reference, id, version },
+      ...said,
+    })
+    expect((await refused(stale)).stale).toMatchObject({ changedBy: 'Nils O. Overmoor' })
+  })
+
   it('is not for an editor', async () => {
-    const { id, institute } = await named('Maren Sollvik')
+    const { id, version, institute } = await named('Maren Sollvik')
     const input = {
-      reference: scenario.reference,
-      id,
+      ...{ reference: scenario.reference, id, version },
       institute,
       orcid: '',
       isStudent: true,

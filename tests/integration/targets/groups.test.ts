@@ -102,6 +102,25 @@ describe('groups of targets', () => {
     expect(await groupsByTarget()).toEqual(['A', 'B', null])
   })
 
+  // Seen to fail: with the version left out of taking out, and with targets left in no group.
+  it('are taken back whole: what came in goes where it was, and only over what was saved', async () => {
+    const [first = '', second = '', third = ''] = await three()
+    const versions = async () => new Map((await targets()).map(({ id, version }) => [id, version]))
+    const a = await save({ name: 'A', targetIds: [first, second] })
+    const b = await save({ name: 'B', targetIds: [second, third] })
+    const now = await versions()
+    expect(b.moved.map(({ id }) => id)).toEqual([Number(second), Number(third)])
+    for (const { id, version } of b.moved) expect(now.get(id)).toBe(version)
+    const input = { reference: scenario.reference, id: b.id, version: b.version }
+    const back = [{ targetId: Number(second), groupId: a.id }]
+    await save({ name: 'B', targetIds: [second, third], rule: 'backup' }, b, as(scenario.coInvestigator))
+    expect((await refused(removeGroup(ctx, { ...input, back }))).stale?.changedBy).toBe('Odo Pellering')
+    const { moved } = await removeGroup(ctx, { ...input, version: b.version + 1, back })
+    expect(await groupsByTarget()).toEqual(['A', 'A', null])
+    const after = await versions()
+    for (const { id, version } of moved) expect(after.get(id)).toBe(version)
+  })
+
   it('keep names apart, and take only what is there', async () => {
     await save({ targetIds: [String(scenario.targetId)] })
     const again = await refused(save({ name: ' pair', targetIds: [String(scenario.targetId)] }))
@@ -241,7 +260,7 @@ describe('what is awaited', () => {
   })
 
   it('is kept, sent without a position, and asked for once a trigger', async () => {
-    await db()('call_kinds').where({ id: scenario.kindId }).update({ kind: 'opportunity' })
+    await db()('call_kinds').where({ id: scenario.kindId }).update({ takes_awaited: 1 })
     const [own] = await targets()
     if (!own) throw new Error('the scenario has no target')
     const row = targetRowSchema.parse({ ...targetRow(own), ra: '', dec: '', ...awaited })

@@ -1,4 +1,5 @@
 import type { Database } from '@/db/client'
+import { makeBilling } from './billing'
 import type { ScenarioFacility } from './facility'
 
 export interface ScenarioCallOptions {
@@ -8,6 +9,8 @@ export interface ScenarioCallOptions {
   opensAt?: Date
   closesAt?: Date
   graceUntil?: Date
+  /** Month of its nights, of 31 days; two calls of one telescope cannot have the same. */
+  month?: string
   stage?: 'planned' | 'published' | 'review' | 'ranking' | 'decided' | 'archived'
 }
 
@@ -41,6 +44,7 @@ export async function makeCall(
   const last = await db('calls').max({ number: 'number' }).first()
   const callNumber = Number(last?.number ?? 100) + 1
   const callSlug = `call-${tag}`
+  const month = options.month ?? '2027-07'
   const closesAt = options.closesAt ?? inDays(10)
   const graceUntil = options.graceUntil ?? new Date(closesAt.getTime() + 14 * day)
   const [callId = 0] = await db('calls').insert({
@@ -50,8 +54,8 @@ export async function makeCall(
     summary: 'One month of nights on one telescope.',
     site_id: facility.siteId,
     stage: options.stage ?? 'published',
-    season_from: '2027-07-01',
-    season_to: '2027-07-31',
+    season_from: `${month}-01`,
+    season_to: `${month}-31`,
     opens_at: options.opensAt ?? inDays(-10),
     closes_at: closesAt,
     grace_until: graceUntil,
@@ -61,6 +65,7 @@ export async function makeCall(
     letters_at: inDays(67),
     currency: options.currency === undefined ? 'EUR' : options.currency,
   })
+  await makeBilling(db)
   const [panelId = 0] = await db('panels').insert({
     call_id: callId,
     name: 'Galaxies and cosmology',
@@ -92,7 +97,7 @@ export async function makeCall(
     await db('night_blocks').insert({
       call_id: callId,
       telescope_id: facility.telescopeId,
-      evening_date: `2027-07-${String(night).padStart(2, '0')}`,
+      evening_date: `${month}-${String(night).padStart(2, '0')}`,
       use_for: 'science',
       dark_seconds: 39_600,
     })

@@ -3,6 +3,7 @@
 import { defineAction } from '@/lib/actions/defineAction'
 import { askForInvoice } from '@/lib/domain/fees/askForInvoice'
 import { cancelInvoice } from '@/lib/domain/fees/cancelInvoice'
+import { decideDispute } from '@/lib/domain/fees/decideDispute'
 import { decideWaiver } from '@/lib/domain/fees/decideWaiver'
 import { recordTransfer } from '@/lib/domain/fees/recordTransfer'
 import { remindOwing } from '@/lib/domain/fees/remindOwing'
@@ -10,6 +11,7 @@ import { refundFee } from '@/lib/domain/fees/refundFee'
 import {
   askForInvoiceSchema,
   cancelInvoiceSchema,
+  decideDisputeSchema,
   decideWaiverSchema,
   recordTransferSchema,
   refundFeeSchema,
@@ -20,6 +22,13 @@ import { settleInvoice } from '@/lib/domain/fees/settleInvoice'
 import { paths } from '@/lib/paths'
 
 const feePages = () => [paths.office('fees'), paths.officeLedger()]
+
+export const decideDisputeAction = defineAction({
+  name: 'decideDispute',
+  schema: decideDisputeSchema,
+  run: decideDispute,
+  revalidate: feePages,
+})
 
 export const decideWaiverAction = defineAction({
   name: 'decideWaiver',

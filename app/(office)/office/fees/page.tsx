@@ -2,6 +2,7 @@ import type { Metadata } from 'next'
 import { FeeBeside } from '@/components/fees/FeeBeside'
 import { FeeDesk } from '@/components/fees/FeeDesk'
 import { RemindButton } from '@/components/fees/RemindButton'
+import { UndecidedDisputes } from '@/components/fees/UndecidedDisputes'
 import { FeesOfCall } from '@/components/office/FeesOfCall'
 import { Main } from '@/components/layout/Main'
 import { EmptyState } from '@/components/ui/EmptyState'
@@ -11,10 +12,12 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readFee } from '@/lib/domain/fees/readFee'
 import { readFeesOfCall } from '@/lib/domain/fees/readFeesOfCall'
+import { readUndecided } from '@/lib/domain/fees/readUndecided'
 import { formatMoney, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import {
   cancelInvoiceAction,
+  decideDisputeAction,
   decideWaiverAction,
   recordTransferAction,
   refundFeeAction,
@@ -29,6 +32,7 @@ const deeds = {
   settle: settleInvoiceAction,
   cancel: cancelInvoiceAction,
   transfer: recordTransferAction,
+  dispute: decideDisputeAction,
 }
 
 export const metadata: Metadata = { title: 'Fees' }
@@ -43,6 +47,7 @@ export default async function OfficeFeesPage({
   const opened = [asked.fee].flat()[0] ?? null
   const fee = opened === null ? null : await orNotFound(readFee(ctx, opened))
   const view = await readFeesOfCall(ctx, [asked.call].flat()[0] ?? fee?.callSlug ?? null)
+  const undecided = await readUndecided(ctx)
   if (!view)
     return (
       <Main>
@@ -77,10 +82,14 @@ export default async function OfficeFeesPage({
             ))}
             <TextLink href={paths.officeLedger()}>Ledger</TextLink>
             <TextLink href={paths.officeReconciliation()}>Books and firm</TextLink>
+            <TextLink href={paths.officeInvoicing()}>What invoices say</TextLink>
             <RemindButton slug={call.slug} count={owing} action={remindOwingAction} />
           </>
         }
       />
+      <div className="mt-6">
+        <UndecidedDisputes disputes={undecided} />
+      </div>
       <div className="mt-6">
         {fee ? <FeeBeside fee={<FeeDesk fee={fee} deeds={deeds} />}>{table}</FeeBeside> : table}
       </div>

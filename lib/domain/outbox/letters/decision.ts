@@ -6,7 +6,13 @@ export interface DecisionNews {
   reference: string
   title: string
   outcome: 'awarded' | 'reserve' | 'declined'
-  lines: readonly { instrument: string; seconds: number; isReserve: boolean; conditions: string }[]
+  lines: readonly {
+    instrument: string
+    seconds: number
+    isReserve: boolean
+    conditions: string
+    evenings?: string
+  }[]
 }
 
 const sentence = {
@@ -31,7 +37,12 @@ export function decisionLetter(to: { name: string }, news: DecisionNews, url: st
       (line) =>
         [
           line.instrument,
-          [formatHoursFromSeconds(line.seconds), line.isReserve ? 'in reserve' : '', line.conditions]
+          [
+            formatHoursFromSeconds(line.seconds),
+            line.isReserve ? 'in reserve' : '',
+            line.evenings ? `visitor, ${line.evenings}` : '',
+            line.conditions,
+          ]
             .filter(Boolean)
             .join(', '),
         ] as const,

@@ -1,5 +1,4 @@
 import { formatDayWithYear, formatMoney } from '@/lib/format'
-import { officeBank } from '@/lib/office'
 import type { Letter } from '../letter'
 
 /** An invoice, to the institute that is to pay it and to whoever leads the proposal. */
@@ -13,6 +12,8 @@ export function invoiceIssued(facts: {
   amountMinor: number
   currency: string
   dueAt: Date
+  /** Where it is paid to, on one line. */
+  payTo: string
   url: string
 }): Letter {
   const amount = formatMoney(facts.amountMinor, facts.currency)
@@ -22,7 +23,7 @@ export function invoiceIssued(facts: {
     greeting: `Dear ${facts.name},`,
     paragraphs: [
       `The fee for “${facts.title}” goes to ${facts.institute} by invoice; it is attached. While the invoice is open, the proposal stays in.`,
-      `Pay to: ${officeBank}. Name the number of the invoice.`,
+      `Pay to: ${facts.payTo}. Name the number of the invoice.`,
     ],
     facts: [
       ['Invoice', facts.number],

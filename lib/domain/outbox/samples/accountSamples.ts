@@ -1,9 +1,11 @@
 import { paths } from '@/lib/paths'
+import { whatStays } from '../../people/erasureWords'
 import { accountExists } from '../letters/accountExists'
 import { confirmAddress } from '../letters/confirmAddress'
 import { erasureAsked } from '../letters/erasureAsked'
 import { invitationLetter } from '../letters/invitation'
 import { passwordChanged } from '../letters/passwordChanged'
+import { personErased } from '../letters/personErased'
 import { resetPasswordLetter } from '../letters/resetPassword'
 import { roleGiven } from '../letters/roleGiven'
 import type { LetterSample } from './letterSample'
@@ -63,5 +65,22 @@ export const accountSamples: readonly LetterSample[] = [
     title: 'Somebody asks to be erased; to the office',
     build: ({ of, clerk, origin }) =>
       erasureAsked({ name: clerk, asks: of.lead, url: origin + paths.office('people') }),
+  },
+  {
+    template: 'person-erased',
+    title: 'Somebody was erased; to the address as it was',
+    build: ({ of }) => {
+      const kept = {
+        sentProposals: of.version ? 1 : 0,
+        reviews: 0,
+        assessments: 0,
+        fees: of.fee ? 1 : 0,
+        deeds: 0,
+      }
+      return personErased({
+        name: of.lead,
+        stays: whatStays(kept).map(({ what, why }) => `${what}. ${why}`),
+      })
+    },
   },
 ]

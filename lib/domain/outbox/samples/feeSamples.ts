@@ -1,5 +1,6 @@
 import { paths } from '@/lib/paths'
 import { feeReceipt } from '../letters/feeReceipt'
+import { feeReminder } from '../letters/feeReminder'
 import { proposalLapsed } from '../letters/proposalLapsed'
 import { waiverAsked } from '../letters/waiverAsked'
 import { waiverDecided } from '../letters/waiverDecided'
@@ -20,6 +21,21 @@ export const feeSamples: readonly LetterSample[] = [
             ...of.receipt,
             meaning: 'settles the fee',
             url: origin + paths.proposalReceipt(of.reference),
+          }),
+  },
+  {
+    template: 'fee-reminder',
+    title: 'A fee is still owed, a few days before it lapses',
+    build: ({ of, origin }) =>
+      of.fee === null
+        ? null
+        : feeReminder({
+            name: of.lead,
+            reference: of.reference,
+            title: of.title,
+            callNumber: of.call.number,
+            ...of.fee,
+            url: origin + paths.proposalSent(of.reference),
           }),
   },
   {

@@ -13,6 +13,8 @@ export interface SampleFacts {
 /** A letter of the product, to be tried on a real proposal. */
 export interface LetterSample {
   template: string
+  /** The name the letter itself has, where another letter has the same. */
+  sentAs?: string
   /** When it is sent, and to whom. */
   title: string
   /** Null where the proposal has nothing this letter could tell. */

@@ -1,4 +1,5 @@
 import { paths } from '@/lib/paths'
+import { paperReplacedForReader } from '../letters/paperReplacedForReader'
 import { readerLost } from '../letters/readerLost'
 import { reviewReminder } from '../letters/reviewReminder'
 import { reviewsAssigned } from '../letters/reviewsAssigned'
@@ -56,6 +57,14 @@ export const panelSamples: readonly LetterSample[] = [
             dueAt: of.call.reviewsDueAt,
             url: origin + paths.panel(of.call.slug, 'assignments'),
           }),
+  },
+  {
+    template: 'paper-replaced',
+    title: 'A justification was replaced; to its reviewers',
+    build: ({ of, origin }) =>
+      of.reviewNumber === null || of.chair === null
+        ? null
+        : paperReplacedForReader({ name: of.chair, reviewNumber: of.reviewNumber }, origin + paths.reviews()),
   },
   {
     template: 'staff-answer',

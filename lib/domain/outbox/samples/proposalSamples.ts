@@ -6,6 +6,7 @@ import { decisionLetter } from '../letters/decision'
 import { leadOffered } from '../letters/leadOffered'
 import { leadTaken } from '../letters/leadTaken'
 import { namedOnProposal } from '../letters/namedOnProposal'
+import { paperReplaced } from '../letters/paperReplaced'
 import { repairOpened } from '../letters/repairOpened'
 import { proposalSent } from '../letters/proposalSent'
 import { proposalWithdrawn } from '../letters/proposalWithdrawn'
@@ -133,6 +134,25 @@ export const proposalSamples: readonly LetterSample[] = [
             fee: of.fee,
             url: origin + paths.proposalSent(of.reference),
           }),
+  },
+  {
+    template: 'proposal-sent-again',
+    sentAs: 'proposal-sent',
+    title: 'A paper was replaced; to everyone named',
+    build: ({ of, origin }) =>
+      of.version === null
+        ? null
+        : paperReplaced(
+            {
+              name: of.lead,
+              reference: of.reference,
+              fileName: 'justification.pdf',
+              versionNumber: of.version.number,
+              arrivedAt: of.version.arrivedAt,
+              sha256: of.version.sha256,
+            },
+            origin + paths.proposalSent(of.reference),
+          ),
   },
   {
     template: 'proposal-withdrawn',

@@ -1,6 +1,7 @@
 import { accountSamples } from './accountSamples'
 import { feeSamples } from './feeSamples'
 import type { LetterSample } from './letterSample'
+import { paperSamples } from './paperSamples'
 import { panelSamples } from './panelSamples'
 import { proposalSamples } from './proposalSamples'
 
@@ -9,5 +10,6 @@ export const letterSamples: readonly LetterSample[] = [
   ...accountSamples,
   ...proposalSamples,
   ...feeSamples,
+  ...paperSamples,
   ...panelSamples,
 ]

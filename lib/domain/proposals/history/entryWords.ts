@@ -147,6 +147,12 @@ export const entryWords: Readonly<Record<string, Words>> = {
   },
   'observation.remove': ({ before }, names) => `Took ${observed(before, names)} off`,
   'observation.ask': askedWords,
+  'wish.save': ({ after }) => {
+    const nights = textAt(after, 'wish', 'nights')
+    return textAt(after, 'wish', 'service') === 'visitor'
+      ? `Wished for a visit, nights: ${nights ?? ''}`
+      : 'Changed how time on an instrument is wished for'
+  },
   'constraints.save': ({ after }) => `Changed the conditions ${quoted(textAt(after, 'set', 'name') ?? '')}`,
   'fee.pay': () => 'The fee was paid',
   'fee.ask-waiver': () => 'Asked for the fee to be waived',

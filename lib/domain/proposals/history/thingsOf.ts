@@ -2,6 +2,7 @@ import { formatList, formatNumber } from '@/lib/format'
 import { constraintRow } from '../../observations/constraintSchema'
 import { observationRow } from '../../observations/observationRow'
 import { groupRow } from '../../targetGroups/groupRow'
+import { wishRow } from '../../wishes/wishRow'
 import { targetRow } from '../../targets/targetRow'
 import { cosmologyFormOf } from '../cosmologyForm'
 import type { ProposalContents } from '../types'
@@ -13,6 +14,7 @@ export const thingKinds = [
   'cosmology',
   'conditions',
   'observation',
+  'wish',
   'person',
   'paper',
   'figure',
@@ -52,6 +54,15 @@ function groupsOf({ groups, targets }: ProposalContents): Thing[] {
   })
 }
 
+function wishesOf({ wishes, modes }: ProposalContents): Thing[] {
+  return wishes.map((wish) => ({
+    id: wish.id,
+    name:
+      modes.find(({ instrument }) => instrument.id === wish.instrumentId)?.instrument.name ?? 'an instrument',
+    fields: worded(wishRow(wish)),
+  }))
+}
+
 /** Everything a proposal holds, by kind. */
 export function thingsOf(contents: ProposalContents): Record<ThingKind, Thing[]> {
   const { title, category, cosmology, targets, constraintSets, people, papers, figures } = contents
@@ -73,6 +84,7 @@ export function thingsOf(contents: ProposalContents): Record<ThingKind, Thing[]>
       fields: worded(constraintRow(set)),
     })),
     observation: observationsOf(contents),
+    wish: wishesOf(contents),
     person: people.map((person) => ({
       ...{ id: person.id, name: person.name },
       fields: {

@@ -4,7 +4,8 @@ import { defineAction } from '@/lib/actions/defineAction'
 import { chooseNights } from '@/lib/domain/decisions/chooseNights'
 import { holdHours } from '@/lib/domain/decisions/holdHours'
 import { saveAward } from '@/lib/domain/decisions/saveAward'
-import { awardSchema, choiceSchema, heldSchema, planSchema } from '@/lib/domain/decisions/schema'
+import { awardSchema, choiceSchema, heldSchema, leastSchema, planSchema } from '@/lib/domain/decisions/schema'
+import { setLeast } from '@/lib/domain/decisions/setLeast'
 import { takePlan } from '@/lib/domain/decisions/takePlan'
 
 export const saveAwardAction = defineAction({ name: 'saveAward', schema: awardSchema, run: saveAward })
@@ -18,3 +19,5 @@ export const chooseNightsAction = defineAction({
 })
 
 export const holdHoursAction = defineAction({ name: 'holdHours', schema: heldSchema, run: holdHours })
+
+export const setLeastAction = defineAction({ name: 'setLeast', schema: leastSchema, run: setLeast })

@@ -6,6 +6,8 @@ import { removeObservation, removeObservationSchema } from '@/lib/domain/observa
 import { saveAskedTimes, saveAskedTimesSchema } from '@/lib/domain/observations/saveAskedTimes'
 import { saveConstraintSet, saveConstraintSetSchema } from '@/lib/domain/observations/saveConstraintSet'
 import { saveObservation, saveObservationSchema } from '@/lib/domain/observations/saveObservation'
+import { saveWish } from '@/lib/domain/wishes/saveWish'
+import { saveWishSchema } from '@/lib/domain/wishes/schema'
 import { paths } from '@/lib/paths'
 
 const page = (_: unknown, { reference }: { reference: string }) =>
@@ -43,5 +45,12 @@ export const saveConstraintSetAction = defineAction({
   name: 'saveConstraintSet',
   schema: saveConstraintSetSchema,
   run: saveConstraintSet,
+  revalidate: page,
+})
+
+export const saveWishAction = defineAction({
+  name: 'saveWish',
+  schema: saveWishSchema,
+  run: saveWish,
   revalidate: page,
 })

@@ -14,6 +14,7 @@ import {
   removeObservationAction,
   saveConstraintSetAction,
   saveObservationAction,
+  saveWishAction,
 } from './actions'
 
 export const metadata: Metadata = { title: 'Observing' }
@@ -34,6 +35,7 @@ export default async function ObservingPage({ params }: { params: Promise<{ refe
           ask: askForAction,
           remove: removeObservationAction,
           saveConstraints: saveConstraintSetAction,
+          saveWish: saveWishAction,
         }}
       />
       <SectionFoot

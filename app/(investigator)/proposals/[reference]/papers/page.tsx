@@ -24,17 +24,13 @@ import {
   moveFigureAction,
   removeFigureAction,
   removePaperAction,
-  replacePaperAction,
   saveFigureAction,
   saveWritingAction,
-  uploadFigureAction,
-  uploadPaperAction,
 } from './actions'
 
 export const metadata: Metadata = { title: 'Papers' }
 
 const figures = {
-  upload: uploadFigureAction,
   save: saveFigureAction,
   move: moveFigureAction,
   remove: removeFigureAction,
@@ -50,14 +46,14 @@ export default async function PapersPage({ params }: { params: Promise<{ referen
   const recognised = await readGiveaways(ctx, contents)
   const paperOf = (which: 'justification' | 'team-expertise') =>
     papers.find((paper) => paper.kind === which) ?? null
-  const actions = readOnly ? null : { upload: uploadPaperAction, remove: removePaperAction }
+  const actions = readOnly ? null : { remove: removePaperAction }
   return (
     <Main>
       <PageTitle title="Papers" lead="The justification, written here or as a PDF, and who you are." />
       <div className="mt-6">
         <ReadOnlyNote reason={readOnly} />
         {repairs.map((repair) => (
-          <ReplacePaper key={repair.id} reference={reference} repair={repair} replace={replacePaperAction} />
+          <ReplacePaper key={repair.id} reference={reference} repair={repair} />
         ))}
         <CarriedHere reference={reference} section="papers" />
         <Justification

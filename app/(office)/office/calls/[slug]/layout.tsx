@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import { SectionLinks } from '@/components/layout/SectionLinks'
 import { openPage } from '@/lib/auth/openPage'
+import { hasSeveralPanels } from '@/lib/domain/panels/hasSeveralPanels'
 import { paths } from '@/lib/paths'
 
 /** What the office does about one call, a page each. */
@@ -11,8 +12,9 @@ export default async function OfficeCallLayout({
   children: ReactNode
   params: Promise<{ slug: string }>
 }) {
-  await openPage('/office/calls/[slug]')
+  const ctx = await openPage('/office/calls/[slug]')
   const { slug } = await params
+  const isShared = await hasSeveralPanels(ctx, slug)
   return (
     <>
       <SectionLinks
@@ -21,6 +23,7 @@ export default async function OfficeCallLayout({
           { href: paths.officeCall(slug), label: 'Call' },
           { href: paths.officeCallPage(slug, 'rules'), label: 'Rules' },
           { href: paths.officeCallPage(slug, 'nights'), label: 'Night calendar' },
+          ...(isShared ? [{ href: paths.officeCallPage(slug, 'between'), label: 'Between panels' }] : []),
           { href: paths.officeCallPage(slug, 'figures'), label: 'Figures' },
           { href: paths.officeCallPage(slug, 'preview'), label: 'Preview' },
         ]}

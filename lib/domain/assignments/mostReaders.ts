@@ -1,0 +1,2 @@
+/** The most readers that may be asked for each proposal. */
+export const mostReaders = 14
