@@ -35,7 +35,7 @@ export function OnTable({
           .map((line) => `${line.instrument} ${formatHoursFromSeconds(line.seconds)}`)
           .join(', ')}
       </p>
-      <p className="mt-2 mb-0 text-table">
+      <div className="mt-2 text-table">
         <StepAside
           reviewNumber={proposal.reviewNumber}
           then="Your screen goes blank for it at once; a review of yours no longer counts."
@@ -44,7 +44,7 @@ export function OnTable({
           }
           onDone={() => void client.invalidateQueries({ queryKey: ['panel'] })}
         />
-      </p>
+      </div>
       <div className="mt-6 grid gap-x-16 gap-y-8 lg:grid-cols-2">
         <section>
           <SectionHeading dense title="Scores" />

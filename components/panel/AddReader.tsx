@@ -8,6 +8,7 @@ import { AffinityMark } from './AffinityMark'
 import { affinityOf } from './affinityOf'
 import type { AssignmentsTableProps } from './AssignmentsTable'
 import { freeReviewers } from './freeReviewers'
+import { nextSeat } from './nextSeat'
 
 export interface AddReaderProps extends Pick<AssignmentsTableProps, 'view' | 'onAdd'> {
   row: AssignmentRow
@@ -16,8 +17,6 @@ export interface AddReaderProps extends Pick<AssignmentsTableProps, 'view' | 'on
 /** Adds a reader: who may, nearest to the subject first; who may not, and why. */
 export function AddReader({ view, row, onAdd }: AddReaderProps) {
   const free = freeReviewers(view, row)
-  const has = (seat: 'first' | 'second') => row.readers.some((reader) => reader.seat === seat)
-  const seat = has('first') ? (has('second') ? 'reader' : 'second') : 'first'
   const nameOf = (personId: number) =>
     view.reviewers.find((reviewer) => reviewer.personId === personId)?.name ?? ''
   return (
@@ -42,7 +41,7 @@ export function AddReader({ view, row, onAdd }: AddReaderProps) {
               className="flex min-h-8 w-full items-baseline justify-between gap-4 border-t border-rule py-1 text-left hover:bg-wash max-sm:min-h-11"
               onClick={() =>
                 onAdd(
-                  { proposalId: row.proposalId, personId: reviewer.personId, seat },
+                  { proposalId: row.proposalId, personId: reviewer.personId, seat: nextSeat(row) },
                   `${reviewer.name} reads ${row.reviewNumber}`,
                 )
               }

@@ -7,13 +7,22 @@ import { Button } from '@/components/ui/Button'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { showToast } from '@/components/ui/showToast'
+import type { Seat } from '@/lib/domain/assignments/schema'
 import type { SuggestedPairs } from '@/lib/domain/assignments/suggestionWords'
-import { assignmentsView, type AssignmentsView } from '@/lib/domain/assignments/assignmentsView'
+import {
+  assignmentsView,
+  type AssignmentRow,
+  type AssignmentsView,
+} from '@/lib/domain/assignments/assignmentsView'
 import { countInWords } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { AssignmentsTable } from './AssignmentsTable'
 import type { AssignmentActions } from './assignmentActions'
+import { DragReaders } from './DragReaders'
+import type { DraggedReader } from './dragTypes'
+import { nextSeat } from './nextSeat'
 import { ReviewerLoads } from './ReviewerLoads'
+import { ReviewerStrip } from './ReviewerStrip'
 import { SuggestBar } from './SuggestBar'
 import { useDeed } from './useDeed'
 
@@ -47,6 +56,25 @@ export function AssignmentsBoard({ initial, actions }: AssignmentsBoardProps) {
         showToast(words, { undo: undoAssign(assignmentIds) })
       },
     )
+
+  const drop = ({ personId, name, from }: DraggedReader, row: AssignmentRow) => {
+    const pair = { proposalId: row.proposalId, personId, seat: nextSeat(row) }
+    const words = `${name} reads ${row.reviewNumber}`
+    if (!from) return assign(`add-${row.proposalId}-${personId}`, [pair], words)
+    const left = data.rows.find(({ proposalId }) => proposalId === from.proposalId)
+    const seat =
+      left?.readers.find(({ assignmentId }) => assignmentId === from.assignmentId)?.seat ?? 'reader'
+    const move = (assignmentId: number, proposalId: number, to: Seat) => () =>
+      actions.move({ panelId, assignmentId, proposalId, seat: to })
+    deed(
+      `move-${from.assignmentId}`,
+      move(from.assignmentId, row.proposalId, pair.seat),
+      ({ assignmentId }) =>
+        showToast(`${words}, no longer ${from.reviewNumber}`, {
+          undo: () => deed('undo', move(assignmentId, from.proposalId, seat)),
+        }),
+    )
+  }
 
   return (
     <>
@@ -96,28 +124,32 @@ export function AssignmentsBoard({ initial, actions }: AssignmentsBoardProps) {
           onLeave={() => setSuggestion(null)}
         />
       ) : null}
-      <div className="mt-6">
-        <AssignmentsTable
-          view={data}
-          canAssign={canAssign}
-          suggested={suggestion?.pairs ?? []}
-          onAdd={(pair, words) => assign(`add-${pair.proposalId}-${pair.personId}`, [pair], words)}
-          onTakeOff={(pair, assignmentId, words) =>
-            deed(
-              `take-off-${assignmentId}`,
-              () => actions.takeOff({ panelId, assignmentIds: [assignmentId] }),
-              () =>
-                showToast(words, {
-                  undo: () => deed(`undo-${assignmentId}`, () => actions.assign({ panelId, pairs: [pair] })),
-                }),
-            )
-          }
-          onSeat={(assignmentId, seat) =>
-            deed(`seat-${assignmentId}-${seat}`, () => actions.changeSeat({ panelId, assignmentId, seat }))
-          }
-          replace={actions.replace}
-        />
-      </div>
+      <DragReaders view={data} onDrop={drop}>
+        {canAssign ? <ReviewerStrip view={data} /> : null}
+        <div className="mt-6">
+          <AssignmentsTable
+            view={data}
+            canAssign={canAssign}
+            suggested={suggestion?.pairs ?? []}
+            onAdd={(pair, words) => assign(`add-${pair.proposalId}-${pair.personId}`, [pair], words)}
+            onTakeOff={(pair, assignmentId, words) =>
+              deed(
+                `take-off-${assignmentId}`,
+                () => actions.takeOff({ panelId, assignmentIds: [assignmentId] }),
+                () =>
+                  showToast(words, {
+                    undo: () =>
+                      deed(`undo-${assignmentId}`, () => actions.assign({ panelId, pairs: [pair] })),
+                  }),
+              )
+            }
+            onSeat={(assignmentId, seat) =>
+              deed(`seat-${assignmentId}-${seat}`, () => actions.changeSeat({ panelId, assignmentId, seat }))
+            }
+            replace={actions.replace}
+          />
+        </div>
+      </DragReaders>
       <section className="mt-10">
         <SectionHeading title="Loads" aside="Pages are those of the justifications." />
         <div className="mt-4">

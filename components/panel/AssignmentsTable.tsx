@@ -12,6 +12,7 @@ import { paths } from '@/lib/paths'
 import { AddReader } from './AddReader'
 import { meanAffinity } from './affinityOf'
 import type { AssignmentActions } from './assignmentActions'
+import { DropPlace } from './DropPlace'
 import { ReaderChip } from './ReaderChip'
 
 type Pair = { proposalId: number; personId: number; seat: Seat }
@@ -67,7 +68,7 @@ export function AssignmentsTable(props: AssignmentsTableProps) {
         wide: true,
         value: (row) => row.readers.map((reader) => nameOf(reader.personId)).join(', '),
         cell: (row) => (
-          <span className="inline-flex flex-wrap items-center gap-1.5">
+          <DropPlace view={view} row={row}>
             {[...row.readers]
               .sort((a, b) => order.indexOf(a.seat) - order.indexOf(b.seat))
               .map((reader) => (
@@ -90,7 +91,7 @@ export function AssignmentsTable(props: AssignmentsTableProps) {
                 </span>
               ))}
             {props.canAssign ? <AddReader row={row} {...props} /> : null}
-          </span>
+          </DropPlace>
         ),
       },
     ]

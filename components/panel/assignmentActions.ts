@@ -10,6 +10,12 @@ export interface AssignmentActions {
   assign: (input: { panelId: number; pairs: Pair[] }) => Promise<ActionResult<{ assignmentIds: number[] }>>
   takeOff: (input: { panelId: number; assignmentIds: number[] }) => Promise<ActionResult<{ taken: number }>>
   changeSeat: (input: { panelId: number; assignmentId: number; seat: Seat }) => Promise<ActionResult<void>>
+  move: (input: {
+    panelId: number
+    assignmentId: number
+    proposalId: number
+    seat: Seat
+  }) => Promise<ActionResult<{ assignmentId: number }>>
   replace: (input: {
     panelId: number
     assignmentId: number

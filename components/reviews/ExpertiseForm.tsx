@@ -7,7 +7,7 @@ import { SubmitButton } from '@/components/forms/SubmitButton'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { showToast } from '@/components/ui/showToast'
-import { categoryKey, levelWords } from '@/lib/domain/expertise/levels'
+import { categoryKey, levelWords } from '@/lib/domain/expertise/levelWords'
 import { expertiseSchema, MOST_WORDS, type ExpertiseValues } from '@/lib/domain/expertise/schema'
 import { categories } from '@/lib/domain/proposals/categories'
 

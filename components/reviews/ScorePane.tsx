@@ -1,9 +1,8 @@
-import type { FormAction } from '@/components/forms/actionFormTypes'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ReviewDesk } from '@/lib/domain/reviews/readReviewDesk'
 import { formatDay } from '@/lib/format'
 import { paths } from '@/lib/paths'
-import { StepAside } from './StepAside'
+import { LeaveReview, type LeaveReviewAction } from './LeaveReview'
 import { ScoreSheet } from './ScoreSheet'
 import type { SheetActions } from './sheetTypes'
 
@@ -11,7 +10,7 @@ export interface ScorePaneProps {
   desk: ReviewDesk
   nextHref: string | null
   actions: SheetActions
-  leave: FormAction<{ assignmentId: number; kind: string; reason: string }, unknown>
+  leave: LeaveReviewAction
 }
 
 /** The right of the desk: the sheet stays in sight while the packet scrolls. */
@@ -33,13 +32,13 @@ export function ScorePane({ desk, nextHref, actions, leave }: ScorePaneProps) {
           nextHref={nextHref}
           actions={actions}
         />
-        <p className="mt-5 text-table">
-          <StepAside
+        <div className="mt-5 text-table">
+          <LeaveReview
+            assignmentId={assignmentId}
             reviewNumber={desk.proposal.reviewNumber ?? ''}
-            then="You are barred from it at once, and your review no longer counts."
-            leave={(values) => leave({ assignmentId, ...values })}
+            action={leave}
           />
-        </p>
+        </div>
         {declaredAt ? (
           <p className="mt-5 text-caption text-muted">
             You declared your interests on {formatDay(declaredAt)}, from the list of all names.

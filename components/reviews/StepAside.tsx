@@ -47,7 +47,7 @@ function StepAsideForm({ then, leave, onDone, onLeave }: StepAsideProps & { onLe
   })
   return (
     <>
-      <p className="mt-2">{then} This is not taken back by you.</p>
+      <p className="mt-2 mb-5">{then} You cannot take this back.</p>
       <ActionForm form={form} label="Your interest">
         <SelectField name="kind" label="What kind" placeholder="Choose a kind" options={interestKinds} />
         <TextField name="reason" label="Why" help="The chair reads it: name nobody." />

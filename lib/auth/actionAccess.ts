@@ -61,6 +61,7 @@ export const actionAccess = {
   assignReviewers: chair,
   takeOffReviewers: chair,
   changeSeat: chair,
+  moveReader: chair,
   replaceReviewer: chair,
   suggestAssignments: chair,
   remindReviewer: chair,

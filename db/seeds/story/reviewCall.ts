@@ -6,7 +6,7 @@ import { declareInterests } from '../../../lib/domain/conflicts/declareInterests
 import { saveFormula } from '../../../lib/domain/rankings/saveFormula.ts'
 import type { SeededCall } from '../calls.ts'
 import { expertiseSchema } from '../../../lib/domain/expertise/schema.ts'
-import { categoryKey } from '../../../lib/domain/expertise/levels.ts'
+import { categoryKey } from '../../../lib/domain/expertise/levelWords.ts'
 import { saveExpertise } from '../../../lib/domain/expertise/saveExpertise.ts'
 import { expertise } from '../expertiseData.ts'
 import { panel } from '../peopleData.ts'

@@ -33,6 +33,14 @@ export const replaceSchema = panelKeySchema.extend({
 })
 export type ReplaceInput = z.output<typeof replaceSchema>
 
+/** A reader goes from one proposal to another. */
+export const moveSchema = panelKeySchema.extend({
+  assignmentId: rowKey,
+  proposalId: rowKey,
+  seat: z.enum(seats),
+})
+export type MoveInput = z.output<typeof moveSchema>
+
 const upTo = `Readers are a whole number up to ${mostReaders}.`
 
 export const suggestSchema = panelKeySchema.extend({

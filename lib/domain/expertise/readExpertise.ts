@@ -2,7 +2,7 @@ import { expertiseOf } from '@/db/queries/expertise'
 import { authorize } from '@/lib/auth/authorize'
 import type { ActingContext } from '../context'
 import { categories } from '../proposals/categories'
-import { categoryKey } from './levels'
+import { categoryKey } from './levelWords'
 import { mayStateExpertise } from './policy'
 import type { ExpertiseValues } from './schema'
 

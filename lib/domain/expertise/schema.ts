@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { fold } from '../conflicts/fold'
 import { categories } from '../proposals/categories'
-import { categoryKey } from './levels'
+import { categoryKey } from './levelWords'
 
 export const MOST_WORDS = 12
 const LONGEST = 40

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it } from 'vitest'
 import { assignReviewers } from '@/lib/domain/assignments/assignReviewers'
 import { readAssignments } from '@/lib/domain/assignments/readAssignments'
 import { remindReviewer } from '@/lib/domain/assignments/remindReviewer'
+import { moveReader } from '@/lib/domain/assignments/moveReader'
 import { replaceReviewer } from '@/lib/domain/assignments/replaceReviewer'
 import { changeSeat } from '@/lib/domain/assignments/changeSeat'
 import { startReview } from '@/lib/domain/assignments/startReview'
@@ -36,6 +37,51 @@ const bar = (who: Actor, proposal: PanelProposalMade, kind: 'collaborator' | 'ot
     source: 'declared',
     from_at: new Date(Date.now() - 1000),
   })
+
+describe('moving a reader', () => {
+  const move = (assignmentId: number, to: PanelProposalMade) =>
+    moveReader(call.as(call.chair), {
+      panelId: call.panelId,
+      assignmentId,
+      proposalId: to.id,
+      seat: 'second',
+    })
+  const readersOf = async (proposal: PanelProposalMade) => {
+    const { rows } = await readAssignments(call.as(call.chair), { callSlug: call.callSlug })
+    return rows.find(({ proposalId }) => proposalId === proposal.id)?.readers ?? []
+  }
+
+  it('gives one and takes the other, and back within a minute without a second letter', async () => {
+    const [reader] = call.reviewers
+    const { assignmentIds } = await give(one, reader)
+    const { assignmentId } = await move(assignmentIds[0] ?? 0, two)
+    expect(await readersOf(one)).toEqual([])
+    expect(await readersOf(two)).toMatchObject([{ personId: reader.personId, seat: 'second' }])
+    expect(await letters(reader, 'reviews-assigned')).toHaveLength(2)
+    await move(assignmentId, one)
+    expect(await readersOf(two)).toEqual([])
+    expect(await readersOf(one)).toHaveLength(1)
+    expect(await letters(reader, 'reviews-assigned')).toHaveLength(2)
+  })
+
+  it('changes nothing where there is an interest, where they read it, or once it is finished', async () => {
+    const [reader, other] = call.reviewers
+    const { assignmentIds } = await give(one, reader)
+    const { assignmentIds: second } = await give(one, other)
+    await give(two, other)
+    await bar(reader, two)
+    await expect(move(assignmentIds[0] ?? 0, two)).rejects.toMatchObject({
+      fieldErrors: { proposalId: expect.stringMatching(/declared an interest/) },
+    })
+    await expect(move(second[0] ?? 0, two)).rejects.toMatchObject({
+      fieldErrors: { proposalId: 'This reviewer reads it already.' },
+    })
+    const finished = await call.review(one, call.reviewers[2], 14)
+    await expect(move(finished, two)).rejects.toMatchObject({ kind: 'closed' })
+    expect(await readersOf(one)).toHaveLength(3)
+    expect(await readersOf(two)).toHaveLength(1)
+  })
+})
 
 describe('assigning', () => {
   it('gives the proposal, writes one letter by review number and a logbook row', async () => {

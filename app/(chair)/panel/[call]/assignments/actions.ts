@@ -3,9 +3,11 @@
 import { defineAction } from '@/lib/actions/defineAction'
 import { assignReviewers } from '@/lib/domain/assignments/assignReviewers'
 import { changeSeat } from '@/lib/domain/assignments/changeSeat'
+import { moveReader } from '@/lib/domain/assignments/moveReader'
 import { replaceReviewer } from '@/lib/domain/assignments/replaceReviewer'
 import {
   assignSchema,
+  moveSchema,
   replaceSchema,
   seatSchema,
   startReviewSchema,
@@ -31,6 +33,8 @@ export const assignReviewersAction = defineAction({
 export const takeOffAction = defineAction({ name: 'takeOffReviewers', schema: takeOffSchema, run: takeOff })
 
 export const changeSeatAction = defineAction({ name: 'changeSeat', schema: seatSchema, run: changeSeat })
+
+export const moveReaderAction = defineAction({ name: 'moveReader', schema: moveSchema, run: moveReader })
 
 export const replaceReviewerAction = defineAction({
   name: 'replaceReviewer',

@@ -8,6 +8,7 @@ import { panelKey, type PanelPageProps } from '../panelKey'
 import {
   assignReviewersAction,
   changeSeatAction,
+  moveReaderAction,
   replaceReviewerAction,
   startReviewAction,
   suggestAction,
@@ -29,6 +30,7 @@ export default async function AssignmentsPage(props: PanelPageProps) {
           assign: assignReviewersAction,
           takeOff: takeOffAction,
           changeSeat: changeSeatAction,
+          move: moveReaderAction,
           replace: replaceReviewerAction,
           suggest: suggestAction,
         }}
