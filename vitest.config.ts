@@ -19,6 +19,8 @@ export default defineConfig({
           name: 'unit',
           include: ['tests/{science,panel,domain,format,writing,pdf,app,services,scripts}/**/*.test.ts'],
           environment: 'node',
+          // A guard against a test that hangs, not a measure: on a busy machine a property of a thousand cases takes seconds.
+          testTimeout: 30_000,
         },
       },
       {

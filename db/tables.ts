@@ -145,6 +145,10 @@ export interface CallKindsRow {
   word_limit: number
   needs_student: 0 | 1
   figure_limit: number | null
+  target_limit: number | null
+  takes_awaited: 0 | 1
+  needs_cadence: 0 | 1
+  needs_last_night: 0 | 1
 }
 
 export interface CallModesRow {
@@ -217,6 +221,14 @@ export interface DecisionsRow {
   approved_by: number | null
   approved_version: number | null
   approved_at: Date | null
+}
+
+export interface DecisionOpeningsRow {
+  id: number
+  decision_id: number
+  version: number
+  person_id: number
+  created_at: Date
 }
 
 export interface DemographicsRow {
@@ -1128,7 +1140,17 @@ declare module 'knex/types/tables.js' {
       CallKindsRow,
       Insert<
         CallKindsRow,
-        'id' | 'closes_at' | 'max_seconds' | 'fee_minor' | 'word_limit' | 'needs_student' | 'figure_limit'
+        | 'id'
+        | 'closes_at'
+        | 'max_seconds'
+        | 'fee_minor'
+        | 'word_limit'
+        | 'needs_student'
+        | 'figure_limit'
+        | 'target_limit'
+        | 'takes_awaited'
+        | 'needs_cadence'
+        | 'needs_last_night'
       >
     >
     call_modes: Knex.CompositeTableType<CallModesRow, Insert<CallModesRow, 'id'>>
@@ -1176,6 +1198,10 @@ declare module 'knex/types/tables.js' {
         | 'approved_version'
         | 'approved_at'
       >
+    >
+    decision_openings: Knex.CompositeTableType<
+      DecisionOpeningsRow,
+      Insert<DecisionOpeningsRow, 'id' | 'created_at'>
     >
     demographics: Knex.CompositeTableType<DemographicsRow, Insert<DemographicsRow, 'created_at'>>
     disputes: Knex.CompositeTableType<

@@ -9,6 +9,8 @@ export type PanelPage =
 export type OfficePage = 'calls' | 'facility' | 'people' | 'fees' | 'mail' | 'logbook'
 
 export type OfficeCallPage = 'rules' | 'nights' | 'between' | 'figures' | 'preview'
+/** A form in which a panel's report is handed out. */
+type ReportFileName = 'report.pdf' | 'report.csv'
 /** A form in which a night plan is handed out. */
 export type PlanFileName = 'nights.csv' | 'obsplan.csv' | 'nights.ics'
 
@@ -86,6 +88,8 @@ export const paths = {
 
   panelPlan: (callSlug: string, file: PlanFileName, panelId: number) =>
     `/panel/${part(callSlug)}/plan/${file}?panel=${panelId}`,
+  panelReportFile: (callSlug: string, file: ReportFileName, panelId: number) =>
+    `/panel/${part(callSlug)}/report/${file}?panel=${panelId}`,
   panelTeam: (callSlug: string, reviewNumber: string) =>
     `/panel/${part(callSlug)}/teams/${part(reviewNumber)}`,
   panelReport: (callSlug: string, reviewNumber: string) =>
@@ -116,6 +120,8 @@ export const paths = {
   facilityRecord: (kind: 'sites' | 'telescopes' | 'modes', slug: string) =>
     `/office/facility/${kind}/${part(slug)}`,
   officePlan: (slug: string, file: PlanFileName) => `/office/calls/${part(slug)}/plan/${file}`,
+  officeReportFile: (slug: string, file: ReportFileName, panelId: number) =>
+    `/office/calls/${part(slug)}/report/${file}?panel=${panelId}`,
   officeCall: (slug: string) => `/office/calls/${part(slug)}`,
   officeCallPage: (slug: string, page: OfficeCallPage) => `/office/calls/${part(slug)}/${page}`,
   officeProposal: (slug: string, reference: string) =>

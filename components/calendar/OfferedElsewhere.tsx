@@ -1,6 +1,6 @@
 'use client'
 
-import { useWatch } from 'react-hook-form'
+import { useFormState, useWatch } from 'react-hook-form'
 import type { z } from 'zod'
 import { BarNote } from '@/components/ui/BarNote'
 import { offeredTwiceWords } from '@/lib/domain/calendar/offeredTwiceWords'
@@ -10,6 +10,7 @@ import type { TelescopeCalendar } from '@/lib/domain/calendar/types'
 /** Says before anything is sent that another call offers one of the nights chosen for science. */
 export function OfferedElsewhere({ telescope }: { telescope: TelescopeCalendar }) {
   const { from = '', to = '', parts = [] } = useWatch<z.input<typeof setNightsSchema>>()
+  const { errors } = useFormState<z.input<typeof setNightsSchema>>()
   const nights = telescope.nights.filter(({ date }) => date >= from && date <= to)
   const wanted = nights.flatMap(({ date }) =>
     parts.map((part) => ({
@@ -20,7 +21,8 @@ export function OfferedElsewhere({ telescope }: { telescope: TelescopeCalendar }
     })),
   )
   const sentence = offeredTwiceWords(telescope.name, wanted, telescope.elsewhere)
-  return sentence ? (
+  // Once it was refused it stands at its field.
+  return sentence && !errors.from ? (
     <BarNote tone="lamp">
       <p className="m-0">{sentence}</p>
     </BarNote>

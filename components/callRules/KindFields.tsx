@@ -3,6 +3,7 @@ import { DateTimeField } from '@/components/forms/DateTimeField'
 import { NumberField } from '@/components/forms/NumberField'
 import { SelectField, type SelectOption } from '@/components/forms/SelectField'
 import { TextField } from '@/components/forms/TextField'
+import { mostTargets } from '@/lib/domain/targets/limits'
 import { maxFigures } from '@/lib/domain/writings/limits'
 import { countInWords } from '@/lib/format'
 import { kindOptions } from './kindNames'
@@ -37,11 +38,33 @@ export function KindFields({ panels, utcOffsetHours }: { panels: SelectOption[];
           help={`Empty for ${countInWords(maxFigures, 'figure')}, the most there can be.`}
         />
         <NumberField name="abstractLimit" label="Abstract, characters" whole />
+        <NumberField
+          name="targetLimit"
+          label="Targets"
+          whole
+          optional
+          help={`Empty for ${countInWords(mostTargets, 'target')}, the most there can be.`}
+        />
       </div>
       <CheckboxField
         name="needsStudent"
         label="Must name a student and a supervisor"
         help="Both have agreed before it can be sent."
+      />
+      <CheckboxField
+        name="needsCadence"
+        label="Must say how often"
+        help="Each set of conditions that is used says how often its observations are repeated."
+      />
+      <CheckboxField
+        name="needsLastNight"
+        label="Must say by when"
+        help="Each set of conditions that is used names a last evening, and nights after it are not counted."
+      />
+      <CheckboxField
+        name="takesAwaited"
+        label="May name what is awaited"
+        help="A target without a position, with what triggers it."
       />
       <DateTimeField
         name="closesAt"

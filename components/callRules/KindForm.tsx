@@ -41,6 +41,10 @@ function valuesOf(kind: CallKind | null, panels: SelectOption[]) {
     abstractLimit: typed(kind?.abstractLimit ?? 1500),
     maxHours: typed(kind?.maxSeconds ? Math.round(kind.maxSeconds / 360) / 10 : null),
     needsStudent: kind?.needsStudent ?? false,
+    targetLimit: typed(kind?.targetLimit),
+    takesAwaited: kind?.takesAwaited ?? false,
+    needsCadence: kind?.needsCadence ?? false,
+    needsLastNight: kind?.needsLastNight ?? false,
     panelId: typed(kind?.panelId) || (panels[0]?.value ?? ''),
   }
 }

@@ -2,6 +2,7 @@
 
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
+import { askWords } from '@/components/calls/askWords'
 import { limitWords } from '@/components/calls/limitWords'
 import type { FormAction } from '@/components/forms/actionFormTypes'
 import { noteOwnSave } from '@/components/office/ownSaves'
@@ -25,7 +26,7 @@ type Kind = CallRulesView['kinds'][number]
 function factsOf(kind: Kind, panel: string): string {
   const hours = kind.maxSeconds === null ? 'any hours' : `at most ${formatHoursFromSeconds(kind.maxSeconds)}`
   const own = kind.closesAt ? `; closes ${formatUtcWithYear(kind.closesAt)}` : ''
-  return `${limitWords(kind)}, an abstract of ${formatNumber(kind.abstractLimit, 0)} characters, ${hours}; judged by ${panel}${own}; ${countInWords(kind.proposals, 'proposal')} begun or sent`
+  return `${limitWords(kind)}, an abstract of ${formatNumber(kind.abstractLimit, 0)} characters, ${hours}${askWords(kind)}; judged by ${panel}${own}; ${countInWords(kind.proposals, 'proposal')} begun or sent`
 }
 
 /** The kinds of proposal a call takes, each with its limits. */

@@ -2,6 +2,7 @@ import { SectionHeading } from '@/components/ui/SectionHeading'
 import { priceWords } from '@/components/fees/priceWords'
 import type { CallCriterion, CallKind, FeeRate } from '@/lib/domain/calls/types'
 import { formatHoursFromSeconds, formatUtc } from '@/lib/format'
+import { askWords } from './askWords'
 import { CriteriaList } from './CriteriaList'
 import { limitWords } from './limitWords'
 
@@ -26,6 +27,7 @@ export function CallRules({ kinds, criteria, rates, currency, graceUntil }: Call
             <span className="block text-table text-muted">
               {limitWords(kind)}
               {kind.maxSeconds ? `, at most ${formatHoursFromSeconds(kind.maxSeconds)}` : ''}
+              {askWords(kind)}
               {currency ? `, ${priceWords(kind, rates, currency)}` : ''}
               {kind.closesAt ? `, closes ${formatUtc(kind.closesAt)}` : ''}
             </span>

@@ -2,6 +2,7 @@
 
 import { useDeed } from '@/components/panel/useDeed'
 import { Button } from '@/components/ui/Button'
+import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
 import type { ActionResult } from '@/lib/actions/result'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
@@ -13,6 +14,7 @@ export interface ApprovalNoteProps {
   row: DecisionRow
   panelId: number
   approve: ApproveAction
+  onNext: (() => void) | null
 }
 
 const words = (row: DecisionRow) => {
@@ -24,7 +26,7 @@ const words = (row: DecisionRow) => {
 }
 
 /** Who stands behind a decision beside whoever prepared it, and the button of the second person. */
-export function ApprovalNote({ row, panelId, approve }: ApprovalNoteProps) {
+export function ApprovalNote({ row, panelId, approve, onNext }: ApprovalNoteProps) {
   const { busy, deed } = useDeed()
   return (
     <div>
@@ -36,8 +38,8 @@ export function ApprovalNote({ row, panelId, approve }: ApprovalNoteProps) {
           <Button
             look="secondary"
             size="small"
-            busy={busy === 'approve'}
-            busyWord="Approving"
+            busy={busy === 'approve' || !row.isOpened}
+            busyWord={row.isOpened ? 'Approving' : 'Opening'}
             onClick={() =>
               deed(
                 'approve',
@@ -50,6 +52,11 @@ export function ApprovalNote({ row, panelId, approve }: ApprovalNoteProps) {
           </Button>
         </div>
       )}
+      {onNext ? (
+        <p className="mt-3 mb-0">
+          <LinkLikeButton onClick={onNext}>Open the next to read</LinkLikeButton>
+        </p>
+      ) : null}
     </div>
   )
 }

@@ -1,21 +1,29 @@
+'use client'
+
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import type { ReactNode } from 'react'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { ApprovalNote, type ApproveAction } from './ApprovalNote'
 import { CommentRow, type WithholdAction } from './CommentRow'
 import { FlagList } from './FlagList'
+import { useOpening, type OpenAction } from './useOpening'
 
 export interface DecisionDetailProps {
   row: DecisionRow
   panelId: number
   approve: ApproveAction
+  openDecision: OpenAction
+  /** Goes on to the next one not opened; null where this was the last. */
+  onNext: (() => void) | null
   withhold: WithholdAction | null
   /** The statement, read or edited. */
   children: ReactNode
 }
 
 /** One decision opened: its words with what deserves a second look, the comments beside, and who approved it. */
-export function DecisionDetail({ row, panelId, approve, withhold, children }: DecisionDetailProps) {
+export function DecisionDetail(props: DecisionDetailProps) {
+  const { row, panelId, approve, openDecision, onNext, withhold, children } = props
+  useOpening(row, panelId, openDecision)
   return (
     <div className="grid gap-x-16 gap-y-8 py-2 lg:grid-cols-[minmax(0,1fr)_24rem]">
       <div className="min-w-0">
@@ -31,7 +39,7 @@ export function DecisionDetail({ row, panelId, approve, withhold, children }: De
         <section>
           <SectionHeading dense title="Second person" />
           <div className="mt-2">
-            <ApprovalNote row={row} panelId={panelId} approve={approve} />
+            <ApprovalNote row={row} panelId={panelId} approve={approve} onNext={onNext} />
           </div>
         </section>
         <section>

@@ -2,7 +2,7 @@
 
 import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
-import { useMemo, useState } from 'react'
+import { useMemo } from 'react'
 import type { SaveStatementAction } from '@/components/panel/discussionActions'
 import { sentenceOf, useDeed } from '@/components/panel/useDeed'
 import { usePanelPath } from '@/components/panel/usePanelPath'
@@ -27,6 +27,10 @@ import type { WithholdAction } from './CommentRow'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
 import { decisionColumns } from './decisionColumns'
+import { ReportLinks } from './ReportLinks'
+import { nextToOpen } from './unopened'
+import type { OpenAction } from './useOpening'
+import { useShownDecision } from './useShownDecision'
 import { StatementForm } from './StatementForm'
 
 export interface DecisionsBoardProps {
@@ -34,12 +38,14 @@ export interface DecisionsBoardProps {
   prepare: (input: { panelId: number }) => Promise<ActionResult<{ prepared: number }>>
   save: SaveStatementAction
   approve: ApproveAction
+  openDecision: OpenAction
   withhold: WithholdAction
   release: (input: { panelId: number; typed: string }) => Promise<ActionResult<{ released: number }>>
 }
 
 /** Three steps: prepare each decision, have a second person approve it, then make all of them known at once. */
-export function DecisionsBoard({ initial, prepare, save, approve, withhold, release }: DecisionsBoardProps) {
+export function DecisionsBoard(props: DecisionsBoardProps) {
+  const { initial, prepare, save, approve, openDecision, withhold, release } = props
   const { data: view = initial } = useTableQuery({
     key: ['panel', 'decisions', initial.panelId],
     url: `${paths.api.table('panel-decisions')}?call=${initial.callSlug}&panel=${initial.panelId}`,
@@ -50,14 +56,14 @@ export function DecisionsBoard({ initial, prepare, save, approve, withhold, rele
   const { busy, deed } = useDeed()
   const panelPath = usePanelPath(view.callSlug)
   const router = useRouter()
-  const [open, setOpen] = useState<number | null>(null)
+  const { open, setOpen, show } = useShownDecision()
   const { panelId, rows } = view
   const seasons = useSeasons({
     ...{ callSlug: view.callSlug, panelId, of: 'given' },
     isOn: view.hasRanking && rows.some(({ lines }) => lines.length > 0),
   })
   const { outlookOf } = seasons
-  const columns = useMemo(() => decisionColumns(open, setOpen, outlookOf), [open, outlookOf])
+  const columns = useMemo(() => decisionColumns(open, setOpen, outlookOf), [open, setOpen, outlookOf])
   const count = (outcome: string) => rows.filter((row) => row.outcome === outcome).length
   const prepared = rows.filter((row) => row.isPrepared).length
   const canPrepare =
@@ -99,7 +105,7 @@ export function DecisionsBoard({ initial, prepare, save, approve, withhold, rele
               >
                 {prepared > 0 ? 'Prepare them again' : 'Prepare decisions'}
               </Button>
-              <ApproveOthers rows={rows} panelId={panelId} approve={approve} />
+              <ApproveOthers rows={rows} panelId={panelId} approve={approve} onShow={show} />
               <ConfirmTyped
                 trigger="Make them known …"
                 triggerProps={{ look: 'primary', size: 'regular', offReason: view.whyNot }}
@@ -128,6 +134,14 @@ export function DecisionsBoard({ initial, prepare, save, approve, withhold, rele
           </BarNote>
         )}
       </div>
+      {view.isFrozen ? (
+        <div className="mt-4">
+          <ReportLinks
+            pdf={paths.panelReportFile(view.callSlug, 'report.pdf', panelId)}
+            csv={paths.panelReportFile(view.callSlug, 'report.csv', panelId)}
+          />
+        </div>
+      ) : null}
       <SeasonsNote seasons={seasons} of="given" onOf={null} />
       <div className="mt-6">
         <DataTable
@@ -152,6 +166,8 @@ export function DecisionsBoard({ initial, prepare, save, approve, withhold, rele
                 row={row}
                 panelId={panelId}
                 approve={approve}
+                openDecision={openDecision}
+                onNext={nextToOpen(rows, row.proposalId, show)}
                 withhold={canPrepare ? withhold : null}
               >
                 <StatementForm

@@ -1,6 +1,5 @@
 'use client'
 
-import { useState } from 'react'
 import { DataTable } from '@/components/tables/DataTable'
 import { useTableQuery } from '@/components/tables/useTableQuery'
 import { EmptyState } from '@/components/ui/EmptyState'
@@ -14,14 +13,20 @@ import { ApproveOthers } from './ApproveOthers'
 import { decisionColumns } from './decisionColumns'
 import { DecisionDetail } from './DecisionDetail'
 import { flagsOf } from './flagsOf'
+import { ReportLinks } from './ReportLinks'
+import { nextToOpen } from './unopened'
+import type { OpenAction } from './useOpening'
+import { useShownDecision } from './useShownDecision'
 
 /** The office as second person: what each panel prepared, read before it is approved. */
 export function OfficeDecisions({
   initial,
   approve,
+  openDecision,
 }: {
   initial: OfficeDecisionsView
   approve: ApproveAction
+  openDecision: OpenAction
 }) {
   const { data: view = initial } = useTableQuery({
     key: ['panel', 'office-decisions', initial.callSlug],
@@ -29,7 +34,7 @@ export function OfficeDecisions({
     schema: officeDecisionsView,
     initialData: initial,
   })
-  const [open, setOpen] = useState<number | null>(null)
+  const { open, setOpen, show } = useShownDecision()
   const rows = view.panels.flatMap((panel) => panel.rows)
   const approved = rows.filter((row) => row.approval === 'approved').length
   return (
@@ -42,8 +47,18 @@ export function OfficeDecisions({
         <section key={panel.panelId} className="mt-10">
           <SectionHeading
             title={panel.name}
-            aside={<ApproveOthers rows={panel.rows} panelId={panel.panelId} approve={approve} />}
+            aside={
+              <ApproveOthers rows={panel.rows} panelId={panel.panelId} approve={approve} onShow={show} />
+            }
           />
+          {panel.isFrozen ? (
+            <div className="mt-3">
+              <ReportLinks
+                pdf={paths.officeReportFile(view.callSlug, 'report.pdf', panel.panelId)}
+                csv={paths.officeReportFile(view.callSlug, 'report.csv', panel.panelId)}
+              />
+            </div>
+          ) : null}
           <div className="mt-4">
             <DataTable
               caption={`Decisions of ${panel.name}`}
@@ -60,7 +75,14 @@ export function OfficeDecisions({
               selectedId={open === null ? null : String(open)}
               detail={(row) =>
                 row.proposalId === open ? (
-                  <DecisionDetail row={row} panelId={panel.panelId} approve={approve} withhold={null}>
+                  <DecisionDetail
+                    row={row}
+                    panelId={panel.panelId}
+                    approve={approve}
+                    openDecision={openDecision}
+                    onNext={nextToOpen(panel.rows, row.proposalId, show)}
+                    withhold={null}
+                  >
                     <p className="m-0 max-w-prose [overflow-wrap:anywhere] whitespace-pre-line">
                       {row.statement || 'No statement was written.'}
                     </p>

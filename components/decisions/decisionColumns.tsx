@@ -6,6 +6,7 @@ import { formatNumber } from '@/lib/format'
 import { chanceColumn } from './chanceColumn'
 import { flagsOf } from './flagsOf'
 import { OutcomeMark } from './OutcomeMark'
+import { decisionButtonId, needsOpening } from './unopened'
 
 const given = (row: DecisionRow) => row.lines.reduce((sum, line) => sum + line.seconds, 0) / 3600
 
@@ -36,9 +37,10 @@ export function decisionColumns(
       cell: (row) => (
         <button
           type="button"
+          id={decisionButtonId(row.proposalId)}
           aria-expanded={open === row.proposalId}
           onClick={() => onOpen(open === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} font-semibold whitespace-nowrap max-sm:min-h-11`}
+          className={`${linkClasses} scroll-mt-24 font-semibold whitespace-nowrap max-sm:min-h-11`}
         >
           {row.reviewNumber}
         </button>
@@ -121,6 +123,7 @@ export function decisionColumns(
         ) : (
           <span className="font-semibold text-lamp">
             {row.approval === 'changed' ? 'changed since' : 'not yet'}
+            {needsOpening(row) ? ', not opened' : ''}
           </span>
         ),
     },

@@ -9,7 +9,7 @@ import { PageTitle } from '@/components/ui/PageTitle'
 import type { TableView } from '@/lib/domain/discussions/tableView'
 import { countInWords } from '@/lib/format'
 import { paths } from '@/lib/paths'
-import type { PresenceAction, ScoreAgainAction } from './meetingActions'
+import type { LeaveTableAction, PresenceAction, ScoreAgainAction } from './meetingActions'
 import { OnTable } from './OnTable'
 import { useMeeting } from './useMeeting'
 
@@ -17,10 +17,11 @@ export interface MeetingBoardProps {
   initial: TableView
   presence: PresenceAction
   scoreAgain: ScoreAgainAction
+  leaveTable: LeaveTableAction
 }
 
 /** A member's place at the meeting: what is discussed now, or nothing at all where they have an interest. */
-export function MeetingBoard({ initial, presence, scoreAgain }: MeetingBoardProps) {
+export function MeetingBoard({ initial, presence, scoreAgain, leaveTable }: MeetingBoardProps) {
   const view = useMeeting(initial)
   const { busy, deed } = useDeed()
   const { me } = view
@@ -54,7 +55,12 @@ export function MeetingBoard({ initial, presence, scoreAgain }: MeetingBoardProp
             </p>
           </BarNote>
         ) : view.status === 'now' ? (
-          <OnTable key={view.proposal?.proposalId} view={view} scoreAgain={scoreAgain} />
+          <OnTable
+            key={view.proposal?.proposalId}
+            view={view}
+            scoreAgain={scoreAgain}
+            leaveTable={leaveTable}
+          />
         ) : (
           <EmptyState
             title="Nothing is discussed at the moment"

@@ -5,7 +5,7 @@ import { BarNote } from '@/components/ui/BarNote'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import type { TableView } from '@/lib/domain/discussions/tableView'
 import { countInWords } from '@/lib/format'
-import type { DiscussAction, PresenceAction, ScoreAgainAction } from './meetingActions'
+import type { DiscussAction, LeaveTableAction, PresenceAction, ScoreAgainAction } from './meetingActions'
 import { OnTable } from './OnTable'
 import { PresenceList } from './PresenceList'
 import { useMeeting } from './useMeeting'
@@ -15,10 +15,11 @@ export interface TableBarProps {
   discuss: DiscussAction
   presence: PresenceAction
   scoreAgain: ScoreAgainAction
+  leaveTable: LeaveTableAction
 }
 
 /** For whoever leads the panel: who is here, what is on the table, and how the scores move. */
-export function TableBar({ initial, discuss, presence, scoreAgain }: TableBarProps) {
+export function TableBar({ initial, discuss, presence, scoreAgain, leaveTable }: TableBarProps) {
   const view = useMeeting(initial)
   const { busy, deed } = useDeed()
   const clear = () => deed('clear', () => discuss({ panelId: view.panelId, proposalId: null }))
@@ -41,7 +42,12 @@ export function TableBar({ initial, discuss, presence, scoreAgain }: TableBarPro
       ) : null}
       {view.status === 'now' ? (
         <div className="border-t-4 border-lamp bg-surface p-5">
-          <OnTable key={view.proposal?.proposalId} view={view} scoreAgain={scoreAgain} />
+          <OnTable
+            key={view.proposal?.proposalId}
+            view={view}
+            scoreAgain={scoreAgain}
+            leaveTable={leaveTable}
+          />
           <p className="mt-4 mb-0 text-table">
             <LinkLikeButton onClick={clear}>
               {busy === 'clear' ? 'Clearing the table …' : 'The discussion is over: clear the table'}

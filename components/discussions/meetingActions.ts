@@ -1,3 +1,4 @@
+import type { FormAction } from '@/components/forms/actionFormTypes'
 import type { ActionResult } from '@/lib/actions/result'
 
 export type PresenceAction = (input: {
@@ -10,6 +11,11 @@ export type DiscussAction = (input: {
   panelId: number
   proposalId: number | null
 }) => Promise<ActionResult<void>>
+
+export type LeaveTableAction = FormAction<
+  { panelId: number; proposalId: number; kind: string; reason: string },
+  { isCleared: boolean }
+>
 
 export type ScoreAgainAction = (input: {
   assignmentId: number

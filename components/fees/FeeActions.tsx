@@ -1,5 +1,6 @@
 'use client'
 
+import { useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import type { FormAction } from '@/components/forms/actionFormTypes'
@@ -35,11 +36,14 @@ type Deed = 'refund' | 'invoice' | 'settle' | 'cancel'
 /** What the office can do about a fee as it stands; one form open at a time. */
 export function FeeActions({ fee, deeds }: { fee: FeeView; deeds: FeeDeeds }) {
   const router = useRouter()
+  const queries = useQueryClient()
   const [open, setOpen] = useState<Deed | null>(null)
   const done = (words: string) => {
     setOpen(null)
     showToast(words)
     router.refresh()
+    // The table beside it asks for its rows itself.
+    void queries.invalidateQueries({ queryKey: ['office-proposals', fee.callSlug] })
   }
   const invoice = fee.openInvoice
   const choices: [Deed, string, boolean][] = [

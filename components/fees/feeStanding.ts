@@ -3,9 +3,13 @@ import { formatMoney, formatUtc } from '@/lib/format'
 
 /** How a fee stands, in a few words and the colour they are written in. */
 export function feeStanding(
-  fee: Pick<FeeView, 'state' | 'dueAt' | 'givenBackMinor' | 'currency' | 'isDisputed' | 'openInvoice'>,
+  fee: Pick<
+    FeeView,
+    'state' | 'dueAt' | 'givenBackMinor' | 'currency' | 'isDisputed' | 'openInvoice' | 'lostDispute'
+  >,
 ): { words: string; className: string } {
   if (fee.isDisputed) return { words: 'disputed with the bank', className: 'text-not-feasible' }
+  if (fee.lostDispute) return { words: 'taken back by the bank', className: 'text-not-feasible' }
   switch (fee.state) {
     case 'due':
       return { words: `owed by ${formatUtc(fee.dueAt)}`, className: 'text-lamp' }

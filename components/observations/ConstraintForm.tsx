@@ -14,6 +14,7 @@ import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { showToast } from '@/components/ui/showToast'
 import { constraintRow, defaultConstraints } from '@/lib/domain/observations/rules'
 import { constraintSchema } from '@/lib/domain/observations/constraintSchema'
+import type { CallKind } from '@/lib/domain/calls/types'
 import type { SiteRecord } from '@/lib/domain/facility/types'
 import type { ConstraintSet } from '@/lib/domain/proposals/types'
 import { formatNumber } from '@/lib/format'
@@ -23,6 +24,8 @@ import { conditionLabels } from './conditionLabels'
 export interface ConstraintFormProps {
   reference: string
   site: SiteRecord
+  /** What the kind of proposal asks of conditions. */
+  kind: Pick<CallKind, 'title' | 'needsCadence' | 'needsLastNight'>
   seasonFrom: string
   seasonTo: string
   /** Null makes a new set. */
@@ -46,7 +49,7 @@ const formSchema = z.object({ set: constraintSchema })
 
 /** The poorest conditions one accepts, in plain fields: what is computed is planned for just these. */
 export function ConstraintForm(props: ConstraintFormProps) {
-  const { reference, site, seasonFrom, seasonTo, set, save, onDone } = props
+  const { reference, site, kind, seasonFrom, seasonTo, set, save, onDone } = props
   const opened = useOpenedOver({
     version: set?.version ?? 0,
     values: constraintRow(set ?? { ...defaultConstraints, name: 'Other conditions' }),
@@ -101,7 +104,20 @@ export function ConstraintForm(props: ConstraintFormProps) {
             width="medium"
             help={`The season runs from ${seasonFrom} to ${seasonTo}.`}
           />
-          <TextField name="set.dateTo" label="Not after the evening of" optional width="medium" />
+          <TextField
+            name="set.dateTo"
+            label="Not after the evening of"
+            optional={!kind.needsLastNight}
+            help={kind.needsLastNight ? `${kind.title}: say by when it is needed.` : undefined}
+            width="medium"
+          />
+          <TextField
+            name="set.cadence"
+            label="How often"
+            optional={!kind.needsCadence}
+            help={`${kind.needsCadence ? `${kind.title}: say how it is repeated` : 'Empty for once'}, as every 4 to 6 nights, ten times.`}
+            maxLength={120}
+          />
         </div>
       </div>
       <div className="flex flex-wrap items-center gap-5">

@@ -18,11 +18,12 @@ export interface ConstraintSetsProps {
 /** The conditions asked for: each set as a sentence that opens to its fields. */
 export function ConstraintSets({ contents, readOnly, save }: ConstraintSetsProps) {
   const [open, setOpen] = useState<number | 'new' | null>(null)
-  const { constraintSets, observations, site, call, reference } = contents
+  const { constraintSets, observations, site, call, kind, reference } = contents
   const close = () => setOpen(null)
   const shared = {
     reference,
     site,
+    kind,
     seasonFrom: call.seasonFrom,
     seasonTo: call.seasonTo,
     save,

@@ -8,4 +8,5 @@ export const conditionLabels = {
   transparency: 'Poorest sky',
   dateFrom: 'Not before the evening of',
   dateTo: 'Not after the evening of',
+  cadence: 'How often',
 }

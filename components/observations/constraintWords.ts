@@ -9,5 +9,5 @@ export function constraintWords(set: Omit<ConstraintSet, 'id' | 'version'>): str
   const { dateFrom, dateTo } = set
   const from = dateFrom ? ` from ${formatCalendarDate(dateFrom)}` : ''
   const to = dateTo ? ` to ${formatCalendarDate(dateTo)}` : ''
-  return `airmass to ${formatNumber(set.maxAirmass, 1)}, an image of ${formatNumber(set.imageQualityArcsec, 1)}″ or better, ${moons[set.moon]}, no nearer than ${formatNumber(set.minMoonSeparationDeg)}°, ${skies[set.transparency]}${from}${to}.`
+  return `airmass to ${formatNumber(set.maxAirmass, 1)}, an image of ${formatNumber(set.imageQualityArcsec, 1)}″ or better, ${moons[set.moon]}, no nearer than ${formatNumber(set.minMoonSeparationDeg)}°, ${skies[set.transparency]}${from}${to}${set.cadence ? `, ${set.cadence}` : ''}.`
 }

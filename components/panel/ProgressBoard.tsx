@@ -13,6 +13,7 @@ import { assignmentsView, type AssignmentsView } from '@/lib/domain/assignments/
 import { countInWords, formatPercent, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { ProposalProgress } from './ProposalProgress'
+import { RecusalsTable } from './RecusalsTable'
 import { ReviewerProgress } from './ReviewerProgress'
 import { useDeed } from './useDeed'
 import { usePanelPath } from './usePanelPath'
@@ -87,6 +88,14 @@ export function ProgressBoard({ initial, remind }: ProgressBoardProps) {
           <ProposalProgress view={data} />
         </div>
       </section>
+      {data.recusals.length > 0 ? (
+        <section className="mt-10">
+          <SectionHeading title="Left with an interest" aside="What was scored there does not count." />
+          <div className="mt-4">
+            <RecusalsTable view={data} />
+          </div>
+        </section>
+      ) : null}
     </>
   )
 }

@@ -1,3 +1,4 @@
+import { askWords } from '@/components/calls/askWords'
 import type { OpenKind } from '@/lib/domain/proposals/readOpenKinds'
 import { countInWords, formatHoursFromSeconds, formatMoneyShort, formatUtc } from '@/lib/format'
 
@@ -8,5 +9,5 @@ export function kindWords({ call, kind, deadline }: OpenKind): string {
     call.currency && kind.feeMinor > 0
       ? `, a fee of up to ${formatMoneyShort(kind.feeMinor, call.currency)}`
       : ''
-  return `${most}${countInWords(kind.pageLimit, 'page')} of justification${fee}, closes ${formatUtc(deadline)}`
+  return `${most}${countInWords(kind.pageLimit, 'page')} of justification${askWords(kind)}${fee}, closes ${formatUtc(deadline)}`
 }

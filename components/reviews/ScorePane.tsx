@@ -1,7 +1,9 @@
+import type { FormAction } from '@/components/forms/actionFormTypes'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ReviewDesk } from '@/lib/domain/reviews/readReviewDesk'
 import { formatDay } from '@/lib/format'
 import { paths } from '@/lib/paths'
+import { StepAside } from './StepAside'
 import { ScoreSheet } from './ScoreSheet'
 import type { SheetActions } from './sheetTypes'
 
@@ -9,10 +11,11 @@ export interface ScorePaneProps {
   desk: ReviewDesk
   nextHref: string | null
   actions: SheetActions
+  leave: FormAction<{ assignmentId: number; kind: string; reason: string }, unknown>
 }
 
 /** The right of the desk: the sheet stays in sight while the packet scrolls. */
-export function ScorePane({ desk, nextHref, actions }: ScorePaneProps) {
+export function ScorePane({ desk, nextHref, actions, leave }: ScorePaneProps) {
   const { assignmentId, version, finishedAt, declaredAt, call, sheet, shut, mayReopen } = desk
   return (
     <div className="h-full border-rule lg:border-l">
@@ -30,6 +33,13 @@ export function ScorePane({ desk, nextHref, actions }: ScorePaneProps) {
           nextHref={nextHref}
           actions={actions}
         />
+        <p className="mt-5 text-table">
+          <StepAside
+            reviewNumber={desk.proposal.reviewNumber ?? ''}
+            then="You are barred from it at once, and your review no longer counts."
+            leave={(values) => leave({ assignmentId, ...values })}
+          />
+        </p>
         {declaredAt ? (
           <p className="mt-5 text-caption text-muted">
             You declared your interests on {formatDay(declaredAt)}, from the list of all names.

@@ -7,7 +7,6 @@ import { Button } from '@/components/ui/Button'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
 import { formatCalendarDate } from '@/lib/format'
-import { takesOpportunities } from '@/lib/domain/calls/rules'
 import { comparisonOf } from '@/lib/domain/observations/rules'
 import type { ProposalComputation } from '@/lib/domain/observations/types'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
@@ -54,7 +53,7 @@ export function TargetsEditor({ contents, computation, readOnly, actions }: Targ
   }, [rows.length])
 
   const { cosmologyName, engineVersion } = live
-  const takesAwaited = takesOpportunities(contents.kind)
+  const takesAwaited = contents.kind.takesAwaited
   const { seasonFrom, seasonTo } = contents.call
   const fullBar = Math.max(
     1,

@@ -25,8 +25,8 @@ export function ShareBar({ parts, label }: { parts: readonly ShareBarPart[]; lab
               ['--share' as string]: `${(100 * part.amount) / most}%`,
             }}
           />
-          <dd className="m-0 mt-1 text-strip font-semibold">{part.value}</dd>
-          <dt className="text-caption text-muted">{part.label}</dt>
+          <dd className="m-0 mt-1 pr-3 text-strip font-semibold">{part.value}</dd>
+          <dt className="pr-3 text-caption text-muted">{part.label}</dt>
         </div>
       ))}
     </dl>

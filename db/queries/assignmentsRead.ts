@@ -68,7 +68,7 @@ export async function lockAssignmentsOf(
   return standingAssignments(db, personId, callId)
 }
 
-/** Takes an assignment back and keeps the recusal as an event of its own. */
+/** Takes an assignment back and keeps the recusal as an event of its own: given anew, the assignment would forget it. */
 export async function withdrawAssignment(db: Database, id: number, reason: string): Promise<void> {
   await db('assignments')
     .where({ id })

@@ -12,6 +12,7 @@ interface SentRow {
   abstract: string | null
   text: string | null
   figures: number | null
+  targets: number
   askedSeconds: string | null
 }
 
@@ -27,9 +28,10 @@ export async function sentSizes(db: Database, callId: number): Promise<SentSize[
       abstract: value('$.contents.abstract'),
       text: value('$.contents.writings.justification.text'),
       figures: db.raw("JSON_LENGTH(v.snapshot, '$.contents.figures')"),
+      targets: db.raw("JSON_LENGTH(v.snapshot, '$.contents.targets')"),
       askedSeconds: value('$.computation.askedSeconds'),
     })) as SentRow[]
-  return rows.map(({ kindId, panelId, pages, abstract, text, figures, askedSeconds }) => {
+  return rows.map(({ kindId, panelId, pages, abstract, text, figures, targets, askedSeconds }) => {
     const isWritten = pages === null
     return {
       kindId,
@@ -37,6 +39,7 @@ export async function sentSizes(db: Database, callId: number): Promise<SentSize[
       pages: pages ?? 0,
       words: isWritten ? countWords(parseText(text ?? '')) : 0,
       figures: isWritten ? (figures ?? 0) : 0,
+      targets,
       abstractLength: [...(abstract ?? '')].length,
       askedSeconds: Number(askedSeconds ?? 0),
     }
@@ -53,6 +56,17 @@ export async function proposalsByKind(db: Database, callId: number): Promise<Map
   return new Map(rows.map(({ kindId, count }) => [kindId, Number(count)]))
 }
 
+/** How many proposals of a kind, drafts with them, name a target that is awaited. */
+export async function proposalsAwaiting(db: Database, kindId: number): Promise<number> {
+  const row = (await db('targets as t')
+    .join('proposals as p', 'p.id', 't.proposal_id')
+    .where('p.call_kind_id', kindId)
+    .whereNotNull('t.opportunity_class')
+    .countDistinct({ count: 'p.id' })
+    .first()) as { count: number | string } | undefined
+  return Number(row?.count ?? 0)
+}
+
 export type KindChange = Pick<
   CallKindsRow,
   | 'kind'
@@ -65,6 +79,10 @@ export type KindChange = Pick<
   | 'max_seconds'
   | 'panel_id'
   | 'needs_student'
+  | 'target_limit'
+  | 'takes_awaited'
+  | 'needs_cadence'
+  | 'needs_last_night'
 >
 
 export async function insertKind(db: Database, callId: number, kind: KindChange): Promise<number> {

@@ -54,6 +54,10 @@ function kindOf(row: CallKindsRow): CallKind {
     feeMinor: row.fee_minor,
     panelId: row.panel_id,
     needsStudent: row.needs_student === 1,
+    targetLimit: row.target_limit,
+    takesAwaited: row.takes_awaited === 1,
+    needsCadence: row.needs_cadence === 1,
+    needsLastNight: row.needs_last_night === 1,
   }
 }
 

@@ -4,7 +4,8 @@ export interface OwedFee {
   feeId: number
   closesAt: Date
   dueAt: Date
-  billedAt: Date
+  /** Since when it is owed: since it was billed, its invoice was taken back, or a lost dispute was decided. */
+  owedSince: Date
 }
 
 /**
@@ -23,7 +24,10 @@ export async function feesToRemind(db: Database, callId?: number): Promise<OwedF
   const rows = await (callId === undefined ? all : all.where('c.id', callId)).select(
     'f.id',
     'f.due_at',
-    'f.created_at',
+    db.raw(`GREATEST(f.created_at,
+      COALESCE((SELECT MAX(i.closed_at) FROM invoices i WHERE i.fee_id = f.id AND i.state = 'cancelled'), f.created_at),
+      COALESCE((SELECT MAX(d.decided_at) FROM disputes d JOIN payments y ON y.id = d.payment_id WHERE y.fee_id = f.id), f.created_at)
+    ) AS owed_since`),
     'k.closes_at as kind_closes_at',
     'c.closes_at',
   )
@@ -31,6 +35,6 @@ export async function feesToRemind(db: Database, callId?: number): Promise<OwedF
     feeId: row.id,
     closesAt: row.kind_closes_at ?? row.closes_at,
     dueAt: row.due_at,
-    billedAt: row.created_at,
+    owedSince: row.owed_since,
   }))
 }

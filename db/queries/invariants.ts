@@ -151,7 +151,7 @@ const promises: readonly (readonly [name: string, sql: string])[] = [
     'I9 only a kind of proposal that takes it waits for a target, and then says all of it',
     `SELECT t.id FROM targets t JOIN proposals p ON p.id = t.proposal_id JOIN call_kinds k ON k.id = p.call_kind_id
       WHERE t.opportunity_class IS NOT NULL
-        AND (k.kind <> 'opportunity' OR t.opportunity_trigger IS NULL OR t.opportunity_reaction_s IS NULL OR t.opportunity_count IS NULL)`,
+        AND (k.takes_awaited = 0 OR t.opportunity_trigger IS NULL OR t.opportunity_reaction_s IS NULL OR t.opportunity_count IS NULL)`,
   ],
 ]
 

@@ -29,6 +29,7 @@ function constraintSetOf(row: ConstraintSetsRow): ConstraintSet {
     transparency: row.transparency,
     dateFrom: row.date_from,
     dateTo: row.date_to,
+    cadence: row.cadence,
     version: row.version,
   }
 }
@@ -108,6 +109,7 @@ const constraintColumns = (values: ConstraintSetValues) => ({
   transparency: values.transparency,
   date_from: values.dateFrom,
   date_to: values.dateTo,
+  cadence: values.cadence,
 })
 
 export async function insertConstraintSet(

@@ -46,8 +46,40 @@ const kinds = [
     abstract_limit: 1500,
     max_seconds: 40 * 3600,
     fee_minor: 12_000,
+    takes_awaited: 1,
   },
 ] as const
+
+/** Kinds that the open call takes for the first time. */
+const newKinds = [
+  {
+    kind: 'monitoring',
+    title: 'Monitoring',
+    page_limit: 3,
+    word_limit: 1500,
+    abstract_limit: 1500,
+    max_seconds: 60 * 3600,
+    fee_minor: 12_000,
+    target_limit: 12,
+    needs_cadence: 1,
+  },
+  {
+    kind: 'discretion',
+    title: 'Director’s discretion',
+    page_limit: 2,
+    word_limit: 800,
+    figure_limit: 2,
+    abstract_limit: 1000,
+    max_seconds: 10 * 3600,
+    fee_minor: 0,
+    target_limit: 3,
+    needs_last_night: 1,
+  },
+] as const
+
+/** What cannot wait is taken after the others have closed, up to four days before assessments are due. */
+const lateUntil = ({ assessments_due_at }: SeedCallDates) =>
+  new Date(assessments_due_at.getTime() - 4 * 24 * 3_600_000)
 
 export interface SeededCall {
   id: number
@@ -117,7 +149,7 @@ async function seedRates(db: Database, callKindId: number, fullMinor: number): P
 export async function seedCall(
   db: Database,
   facility: Facility,
-  call: { number: number; dates: SeedCallDates; summary: string },
+  call: { number: number; dates: SeedCallDates; summary: string; isOpen?: true },
 ): Promise<SeededCall> {
   const [callId] = (await db('calls').insert({
     number: call.number,
@@ -133,8 +165,14 @@ export async function seedCall(
     number,
   ]
   const kindIds = new Map<string, number>()
-  for (const kind of kinds) {
-    const [id] = (await db('call_kinds').insert({ ...kind, call_id: callId, panel_id: panelId })) as [number]
+  for (const kind of call.isOpen ? [...kinds, ...newKinds] : kinds) {
+    const closes_at = kind.kind === 'discretion' ? lateUntil(call.dates) : null
+    const [id] = (await db('call_kinds').insert({
+      ...kind,
+      closes_at,
+      call_id: callId,
+      panel_id: panelId,
+    })) as [number]
     kindIds.set(kind.kind, id)
     await seedRates(db, id, kind.fee_minor)
   }
@@ -158,6 +196,6 @@ export async function seedCalls(
   return {
     decided: await seedCall(db, facility, { number: 12, dates: dates.decided, summary }),
     inReview: await seedCall(db, facility, { number: 13, dates: dates.inReview, summary }),
-    open: await seedCall(db, facility, { number: 14, dates: dates.open, summary }),
+    open: await seedCall(db, facility, { number: 14, dates: dates.open, summary, isOpen: true }),
   }
 }

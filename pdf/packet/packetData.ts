@@ -1,5 +1,11 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
-import { formatHoursFromSeconds, formatList, formatNights, formatNumber } from '@/lib/format'
+import {
+  formatCalendarDate,
+  formatHoursFromSeconds,
+  formatList,
+  formatNights,
+  formatNumber,
+} from '@/lib/format'
 import type { FactRow } from '../parts/FactRows'
 import { cosmologyLine } from './cosmologyLine'
 import type { PacketData } from './packetTypes'
@@ -37,6 +43,11 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
     {
       term: 'Image, zenith',
       value: unique(sets.map((set) => `${formatNumber(set.imageQualityArcsec, 1)}″ or better`)),
+    },
+    { term: 'How often', value: unique(sets.flatMap(({ cadence }) => cadence ?? [])) },
+    {
+      term: 'Needed by',
+      value: unique(sets.flatMap(({ dateTo }) => (dateTo ? formatCalendarDate(dateTo) : []))),
     },
     { term: 'Cosmology', value: cosmology.parameters.name },
     { term: 'Checks', value: `${computation.checksClear} of ${computation.checksTotal} clear` },

@@ -79,6 +79,10 @@ export function subjectWith(more: Partial<ProposalSubject> = {}): ProposalSubjec
       feeMinor: 12_000,
       panelId: 1,
       needsStudent: false,
+      targetLimit: null,
+      takesAwaited: false,
+      needsCadence: false,
+      needsLastNight: false,
     },
     people: [
       investigator(1, { role: 'pi' }),

@@ -3,8 +3,10 @@ import { Main } from '@/components/layout/Main'
 import { DeclareFirst } from '@/components/reviews/DeclareFirst'
 import { ReviewProgress } from '@/components/reviews/ReviewProgress'
 import { ReviewsTable } from '@/components/reviews/ReviewsTable'
+import { ScaleUseChart } from '@/components/reviews/ScaleUseChart'
 import { EmptyState } from '@/components/ui/EmptyState'
 import { PageTitle } from '@/components/ui/PageTitle'
+import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import { openPage } from '@/lib/auth/openPage'
 import { readExpertise } from '@/lib/domain/expertise/readExpertise'
@@ -39,6 +41,16 @@ export default async function ReviewsPage() {
           ),
         )}
         {lines.length > 0 ? <ReviewsTable initial={{ lines }} /> : null}
+        {calls.some(({ scale }) => scale?.own.some((count) => count > 0)) ? (
+          <section>
+            <SectionHeading title="Your use of the scale" aside="Scores of each criterion, 0 to 10." />
+            <div className="mt-4 grid gap-x-16 gap-y-8 md:grid-cols-2">
+              {calls.map(({ call, scale }) =>
+                scale ? <ScaleUseChart key={call.slug} scale={scale} callNumber={call.number} /> : null,
+              )}
+            </div>
+          </section>
+        ) : null}
         {calls.length === 0 ? (
           <EmptyState title="Nothing is assigned to you">
             The chair assigns proposals once a call has closed. You are told by letter.

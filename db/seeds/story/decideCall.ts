@@ -1,4 +1,5 @@
 import { approveDecisions } from '../../../lib/domain/decisions/approveDecisions.ts'
+import { openDecision } from '../../../lib/domain/decisions/openDecision.ts'
 import { prepareDecisions } from '../../../lib/domain/decisions/prepareDecisions.ts'
 import { releaseDecisions } from '../../../lib/domain/decisions/releaseDecisions.ts'
 import { takePlan } from '../../../lib/domain/decisions/takePlan.ts'
@@ -28,7 +29,9 @@ export async function decideCall(story: Teller, call: SeededCall): Promise<void>
     .where({ 'p.panel_id': call.panelId })
     .whereNull('d.superseded_at')
     .select('d.proposal_id as proposalId', 'd.version')
-  await approveDecisions(await story.as('Maud Ferrisay'), { ...key, decisions: decided })
+  const office = await story.as('Maud Ferrisay')
+  for (const decision of decided) await openDecision(office, { ...key, ...decision })
+  await approveDecisions(office, { ...key, decisions: decided })
   await story.at(call.dates.letters_at)
   await releaseDecisions(chair, { ...key, typed: String(call.number) })
 }

@@ -2,7 +2,10 @@ import { approveDecisions } from '../../../lib/domain/decisions/approveDecisions
 import { prepareDecisions } from '../../../lib/domain/decisions/prepareDecisions.ts'
 import { releaseDecisions } from '../../../lib/domain/decisions/releaseDecisions.ts'
 import { takePlan } from '../../../lib/domain/decisions/takePlan.ts'
+import { discussNow } from '../../../lib/domain/discussions/discussNow.ts'
+import { setPresence } from '../../../lib/domain/discussions/setPresence.ts'
 import { freezeRanking } from '../../../lib/domain/rankings/freezeRanking.ts'
+import { readRanking } from '../../../lib/domain/rankings/readRanking.ts'
 import { startRanking } from '../../../lib/domain/rankings/startRanking.ts'
 import { bringTogether } from '../../../lib/domain/sharing/bringTogether.ts'
 import { freezeMerged } from '../../../lib/domain/sharing/freezeMerged.ts'
@@ -13,13 +16,35 @@ import type { Teller } from './teller.ts'
 import { seatsOfTwo } from './twoPanelsRoles.ts'
 
 const hour = 3_600_000
+const minute = 60_000
 const slug = 'call-11'
+
+/** Everyone comes, the first two proposals that all may hear are talked over, and everyone leaves. */
+async function discuss(story: Teller, chairName: string, panelId: number): Promise<void> {
+  const chair = await story.as(chairName)
+  const members = await story.db('panel_members').where({ panel_id: panelId }).select('person_id')
+  const note = async (isPresent: boolean) => {
+    for (const { person_id } of members) await setPresence(chair, { panelId, personId: person_id, isPresent })
+  }
+  const began = await story.db('rankings').where({ panel_id: panelId }).max({ at: 'created_at' }).first()
+  const begunAt = (began?.at as Date | undefined)?.getTime() ?? 0
+  await note(true)
+  const { rows } = await readRanking(chair, { callSlug: slug, panelId })
+  for (const [index, { proposalId }] of rows.slice(0, 2).entries()) {
+    await story.at(new Date(begunAt + (index * 20 + 5) * minute))
+    await discussNow(chair, { panelId, proposalId })
+  }
+  await story.at(new Date(begunAt + 50 * minute))
+  await discussNow(chair, { panelId, proposalId: null })
+  await note(false)
+}
 
 async function rankAndFreeze(story: Teller, chairName: string, panelId: number): Promise<void> {
   const chair = await story.as(chairName)
   await startRanking(chair, { panelId })
   const ranking = await story.db('rankings').where({ panel_id: panelId }).whereNull('superseded_at').first()
   if (!ranking) throw new Error('the ranking was not started')
+  await discuss(story, chairName, panelId)
   await freezeRanking(chair, { panelId, rankingId: ranking.id, version: ranking.version })
 }
 

@@ -4,6 +4,7 @@ import type { Giveaway, Place, SourceName } from './types'
 const whole: Readonly<Record<SourceName, string>> = {
   title: 'in the title',
   abstract: 'in the abstract',
+  conditions: 'in the conditions',
   text: 'in the text',
   captions: 'in the captions',
   references: 'in the references',

@@ -40,7 +40,10 @@ const documentSources = ({ pages, properties }: PdfText): Source[] => [
 /** By what the investigators could be recognised in everything reviewers read of a proposal. */
 export async function readGiveaways(
   ctx: Pick<Context, 'storage'>,
-  contents: Pick<ProposalContents, 'title' | 'abstract' | 'writings' | 'figures' | 'papers' | 'people'>,
+  contents: Pick<
+    ProposalContents,
+    'constraintSets' | 'title' | 'abstract' | 'writings' | 'figures' | 'papers' | 'people'
+  >,
 ): Promise<Recognised> {
   const paper = contents.papers.find(({ kind }) => kind === 'justification')
   const text = paper ? await textOf(ctx, paper) : null

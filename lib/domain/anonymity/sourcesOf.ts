@@ -8,10 +8,18 @@ const lines = (name: SourceName, text: string): Source => ({
 
 /** What reviewers read of a proposal, but for its document: the written parts only where no document stands. */
 export function sourcesOf(
-  contents: Pick<ProposalContents, 'title' | 'abstract' | 'writings' | 'figures' | 'papers'>,
+  contents: Pick<
+    ProposalContents,
+    'title' | 'abstract' | 'constraintSets' | 'writings' | 'figures' | 'papers'
+  >,
 ): Source[] {
-  const { title, abstract, writings, figures, papers } = contents
-  const head: Source[] = [{ name: 'title', parts: [{ at: null, text: title }] }, lines('abstract', abstract)]
+  const { title, abstract, constraintSets, writings, figures, papers } = contents
+  const said = constraintSets.flatMap(({ cadence }) => (cadence ? [{ at: null, text: cadence }] : []))
+  const head: Source[] = [
+    { name: 'title', parts: [{ at: null, text: title }] },
+    lines('abstract', abstract),
+    ...(said.length > 0 ? [{ name: 'conditions' as const, parts: said }] : []),
+  ]
   if (papers.some(({ kind }) => kind === 'justification')) return head
   return [
     ...head,

@@ -1,4 +1,5 @@
-export type SourceName = 'title' | 'abstract' | 'text' | 'captions' | 'references' | 'document' | 'properties'
+export type SourceName =
+  'title' | 'abstract' | 'conditions' | 'text' | 'captions' | 'references' | 'document' | 'properties'
 
 /** A text that reviewers read, in its parts: lines, pages, captions. `at` counts them from 1; null where there is one. */
 export interface Source {

@@ -51,6 +51,10 @@ export const assignmentsView = z.object({
   reviewsDueAt: z.string(),
   rows: z.array(assignmentRow),
   reviewers: z.array(panelReviewer),
+  /** Reviews that were left because of an interest, the newest first. */
+  recusals: z.array(
+    z.object({ reviewNumber: z.string(), name: z.string(), reason: z.string(), at: z.string() }),
+  ),
   /** How many groups of reviewers share no proposal with the others; one is what is wanted. */
   groups: z.number(),
 })

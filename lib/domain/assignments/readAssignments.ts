@@ -6,6 +6,7 @@ import {
   type PanelAssignment,
 } from '@/db/queries/assignments'
 import { panelMembers } from '@/db/queries/panel'
+import { recusalsOf } from '@/db/queries/recusals'
 import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import { connectedGroups } from '@/lib/panel/statistics'
 import { barredPairs } from '../conflicts/barredPairs'
@@ -28,13 +29,14 @@ export async function readAssignments(
   const { call, panel } = desk
   const ids = desk.proposals.map(({ id }) => id)
   const numbers = new Map(desk.proposals.map(({ id, reviewNumber }) => [id, reviewNumber]))
-  const [heads, pages, members, all, declared, reminded] = await Promise.all([
+  const [heads, pages, members, all, declared, reminded, left] = await Promise.all([
     snapshotHeads(ctx.db, ids),
     pagesToRead(ctx.db, ids),
     panelMembers(ctx.db, panel.id),
     panelAssignments(ctx.db, panel.id),
     declarationsIn(ctx.db, call.id),
     lastReminders(ctx.db, panel.id),
+    recusalsOf(ctx.db, panel.id),
   ])
   const people = members.map(({ personId }) => personId)
   const [barred, affinity] = await Promise.all([
@@ -87,6 +89,10 @@ export async function readAssignments(
         remindedAt: last?.toISOString() ?? null,
         whyNotReminded: whyNotReminded(open.length, last, desk.now),
       }
+    }),
+    recusals: left.flatMap(({ proposalId, name, reason, at }) => {
+      const reviewNumber = numbers.get(proposalId)
+      return reviewNumber === undefined ? [] : [{ reviewNumber, name, reason, at: at.toISOString() }]
     }),
     groups: connectedGroups(standing.map((a) => ({ proposal: a.proposalId, reviewer: a.personId }))).length,
   }

@@ -7,7 +7,7 @@ export const accountRows = (facts: BillingFacts, number: string): { term: string
   { term: 'IBAN', value: formatAccount(facts.iban) },
   { term: 'BIC', value: facts.bic },
   { term: 'Bank', value: facts.bank },
-  { term: 'Name', value: number },
+  { term: 'To be named', value: number },
 ]
 
 /** Who wrote a paper, at its foot. */

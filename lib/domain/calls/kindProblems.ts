@@ -7,7 +7,16 @@ import type { CallKind, CallPanel } from './types'
 
 type Wanted = Pick<
   z.output<typeof saveKindSchema>,
-  'kind' | 'closesAt' | 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxHours' | 'panelId'
+  | 'kind'
+  | 'closesAt'
+  | 'pageLimit'
+  | 'wordLimit'
+  | 'figureLimit'
+  | 'targetLimit'
+  | 'abstractLimit'
+  | 'maxHours'
+  | 'panelId'
+  | 'takesAwaited'
 >
 
 interface Known {
@@ -16,6 +25,8 @@ interface Known {
   kinds: readonly Pick<CallKind, 'id' | 'kind'>[]
   panels: readonly Pick<CallPanel, 'id'>[]
   sent: readonly SentSize[]
+  /** Proposals of this kind, drafts with them, that name something awaited. */
+  awaiting: number
   call: Pick<CallsRow, 'stage' | 'opens_at' | 'closes_at' | 'assessments_due_at'>
   now: Date
 }
@@ -39,6 +50,13 @@ function panelProblem(wanted: Wanted, { was, panels, sent }: Known): string | nu
   return `${went} when sent, and ${elsewhere.length === 1 ? 'stays' : 'stay'} there.`
 }
 
+/** What is awaited and stands in a proposal, begun or sent, cannot be forbidden afterwards. */
+function awaitedProblem(wanted: Wanted, { awaiting }: Known): string | null {
+  return wanted.takesAwaited || awaiting === 0
+    ? null
+    : `${countInWords(awaiting, 'proposal', 'proposals', true)} of this kind ${awaiting === 1 ? 'names a target' : 'name targets'} that ${awaiting === 1 ? 'is' : 'are'} awaited.`
+}
+
 /** What is wrong with a kind as it is wanted, by field; nothing where it can be. */
 export function kindProblems(wanted: Wanted, known: Known): Record<string, string> {
   const { was, kinds, sent } = known
@@ -48,6 +66,7 @@ export function kindProblems(wanted: Wanted, known: Known): Record<string, strin
     ...brokenLimits(limits, own),
     closesAt: deadlineProblem(wanted, known),
     panelId: panelProblem(wanted, known),
+    takesAwaited: awaitedProblem(wanted, known),
     kind: kinds.some(({ id, kind }) => kind === wanted.kind && id !== was?.id)
       ? 'The call has this kind already.'
       : null,

@@ -25,6 +25,3 @@ export function takesProposals(
 ): boolean {
   return call.stage === 'published' && arrivedAt >= call.opensAt && arrivedAt < deadline
 }
-
-/** Whether a kind of proposal may ask for what is awaited and has no position yet. */
-export const takesOpportunities = (kind: Pick<CallKind, 'kind'>): boolean => kind.kind === 'opportunity'

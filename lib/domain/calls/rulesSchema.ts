@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { mostTargets } from '../targets/limits'
 import { maxFigures } from '../writings/limits'
 import { kindKeys } from './kindKeyList'
 import { moment } from './moment'
@@ -39,6 +40,12 @@ export const saveKindSchema = z.object({
   panelId: key,
   /** Must name a student and a supervisor who have agreed. */
   needsStudent: z.boolean(),
+  targetLimit: typedWholeOrNone('Targets', 1, mostTargets),
+  /** May ask for what is awaited and has no position yet. */
+  takesAwaited: z.boolean(),
+  /** Must say how often, and by when, each observation is wanted. */
+  needsCadence: z.boolean(),
+  needsLastNight: z.boolean(),
 })
 
 export const removeKindSchema = z.object({ ...onCall, kindId: z.number().int().positive() })

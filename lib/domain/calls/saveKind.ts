@@ -1,7 +1,7 @@
 import type { z } from 'zod'
 import { callKinds } from '@/db/queries/calls'
 import { callPanels } from '@/db/queries/callPanels'
-import { insertKind, sentSizes, updateKind, type KindChange } from '@/db/queries/callRules'
+import { insertKind, proposalsAwaiting, sentSizes, updateKind, type KindChange } from '@/db/queries/callRules'
 import { refuse } from '@/lib/errors'
 import type { ActingContext } from '../context'
 import { changeCall } from './changeCall'
@@ -24,6 +24,10 @@ const rowOf = (input: Input): KindChange => ({
   max_seconds: input.maxHours === null ? null : Math.round(input.maxHours * 3600),
   panel_id: input.panelId,
   needs_student: input.needsStudent ? 1 : 0,
+  target_limit: input.targetLimit,
+  takes_awaited: input.takesAwaited ? 1 : 0,
+  needs_cadence: input.needsCadence ? 1 : 0,
+  needs_last_night: input.needsLastNight ? 1 : 0,
 })
 
 const logged = (kind: CallKind) => ({
@@ -37,6 +41,10 @@ const logged = (kind: CallKind) => ({
   maxSeconds: kind.maxSeconds,
   panelId: kind.panelId,
   needsStudent: kind.needsStudent,
+  targetLimit: kind.targetLimit,
+  takesAwaited: kind.takesAwaited,
+  needsCadence: kind.needsCadence,
+  needsLastNight: kind.needsLastNight,
 })
 
 /**
@@ -57,7 +65,8 @@ export function saveKind(ctx: ActingContext, input: Input): Promise<void> {
       ])
       const was = kinds.find(({ id }) => id === input.kindId) ?? null
       if (input.kindId !== null && !was) throw refuse.notFound('kind of proposal')
-      const problems = kindProblems(input, { was, kinds, panels, sent, call, now })
+      const awaiting = was ? await proposalsAwaiting(tx.db, was.id) : 0
+      const problems = kindProblems(input, { was, kinds, panels, sent, awaiting, call, now })
       if (Object.keys(problems).length > 0) throw refuse.invalid('Something here needs mending.', problems)
       const id = was?.id ?? (await insertKind(tx.db, call.id, rowOf(input)))
       if (was) await updateKind(tx.db, id, rowOf(input))

@@ -11,6 +11,7 @@ export interface SentSize {
   /** Of one written here, and its figures; else 0. */
   words: number
   figures: number
+  targets: number
   /** Characters. */
   abstractLength: number
   askedSeconds: number
@@ -19,10 +20,13 @@ export interface SentSize {
 /** Limits are typed in tenths of an hour: the least that is not below. */
 const tenthUp = (seconds: number) => Math.ceil(seconds / 360) * 360
 
-type Limits = Pick<CallKind, 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxSeconds'>
+type Limits = Pick<
+  CallKind,
+  'pageLimit' | 'wordLimit' | 'figureLimit' | 'targetLimit' | 'abstractLimit' | 'maxSeconds'
+>
 
 const measures: readonly [
-  field: 'pageLimit' | 'wordLimit' | 'figureLimit' | 'abstractLimit' | 'maxHours',
+  field: 'pageLimit' | 'wordLimit' | 'figureLimit' | 'targetLimit' | 'abstractLimit' | 'maxHours',
   limit: (limits: Limits) => number | null,
   size: (sent: SentSize) => number,
   words: (size: number) => string,
@@ -30,6 +34,7 @@ const measures: readonly [
   ['pageLimit', (k) => k.pageLimit, (s) => s.pages, (n) => countInWords(n, 'page')],
   ['wordLimit', (k) => k.wordLimit, (s) => s.words, (n) => `${formatNumber(n, 0)} words`],
   ['figureLimit', (k) => k.figureLimit, (s) => s.figures, (n) => countInWords(n, 'figure')],
+  ['targetLimit', (k) => k.targetLimit, (s) => s.targets, (n) => countInWords(n, 'target')],
   [
     'abstractLimit',
     (k) => k.abstractLimit,

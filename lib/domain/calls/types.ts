@@ -32,6 +32,14 @@ export interface CallKind {
   panelId: number
   /** Must name a student and a supervisor, both of whom have agreed. */
   needsStudent: boolean
+  /** Targets it may name; null for as many as a proposal holds. */
+  targetLimit: number | null
+  /** May ask for what is awaited and has no position yet. */
+  takesAwaited: boolean
+  /** Must say how often each observation is repeated. */
+  needsCadence: boolean
+  /** Must say by when each observation is needed. */
+  needsLastNight: boolean
 }
 
 export interface CallPanel {

@@ -1,4 +1,10 @@
-import { countInWords, formatHoursFromSeconds, formatMoneyShort, formatNumber } from '@/lib/format'
+import {
+  countInWords,
+  formatHoursFromSeconds,
+  formatList,
+  formatMoneyShort,
+  formatNumber,
+} from '@/lib/format'
 import { categories } from '../proposals/categories'
 import type { ProposalContents } from '../proposals/types'
 import type { CarriedNote } from './types'
@@ -18,6 +24,26 @@ function notesOnKind(old: ProposalContents, now: ProposalContents): CarriedNote[
       section: 'people',
       sentence: `“${now.kind.title}” names a student and a supervisor.`,
       todo: 'Say who they are.',
+    })
+  const says = [
+    now.kind.needsCadence && !old.kind.needsCadence ? 'how often' : '',
+    now.kind.needsLastNight && !old.kind.needsLastNight ? 'by when' : '',
+  ].filter(Boolean)
+  if (says.length > 0)
+    notes.push({
+      section: 'observing',
+      sentence: `“${now.kind.title}” says ${formatList(says)} each target is to be observed.`,
+      todo: 'Say it with the conditions.',
+    })
+  const most = now.kind.targetLimit
+  if (most !== null && most !== old.kind.targetLimit)
+    notes.push({
+      section: 'targets',
+      sentence: `“${now.kind.title}” names at most ${countInWords(most, 'target')}.`,
+      todo:
+        now.targets.length > most
+          ? `Take out ${countInWords(now.targets.length - most, 'target')}.`
+          : 'Yours fit.',
     })
   return notes
 }

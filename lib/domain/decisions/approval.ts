@@ -24,7 +24,7 @@ export function approvalState(decision: Approvable): 'waits' | 'changed' | 'appr
   return decision.approvedBy === null ? 'waits' : 'changed'
 }
 
-/** Why this person cannot approve a decision; null when they can. */
+/** Why this person may not stand behind a decision; null when they may, once they have opened it. */
 export function whyNotApproved(decision: Approvable, personId: number): string | null {
   if (decision.isReleased) return 'This decision has been made known; it stands.'
   if (decision.statement.trim() === '') return 'It is not prepared yet: it needs a statement.'

@@ -1,5 +1,5 @@
 import { panelAssignments } from '@/db/queries/assignments'
-import { namesOf } from '@/db/queries/approvals'
+import { namesOf, openedAsTheyStand } from '@/db/queries/approvals'
 import { judgesOf } from '@/db/queries/conflicts'
 import { standingAwards, standingDecisions } from '@/db/queries/decisions'
 import { panelMembers, type PanelProposal } from '@/db/queries/panel'
@@ -60,6 +60,11 @@ export async function decisionRows(ctx: ActingContext, panel: DecidedPanel): Pro
     panelScores(ctx, panel.callId, assignments),
   ])
   const means = new Map(rawScores(scores).map((one) => [one.proposal, one.mean]))
+  const opened = await openedAsTheyStand(
+    ctx.db,
+    [...decisions.values()].map((decision) => decision.id),
+    ctx.actor.personId,
+  )
   const approvers = await namesOf(
     ctx.db,
     [...decisions.values()].flatMap((decision) => decision.approved_by ?? []),
@@ -100,6 +105,7 @@ export async function decisionRows(ctx: ActingContext, panel: DecidedPanel): Pro
       whyNotApproved: approvable
         ? whyNotApproved(approvable, ctx.actor.personId)
         : 'It is not prepared yet: it needs a statement.',
+      isOpened: decision !== undefined && opened.has(decision.id),
     }
   })
 }

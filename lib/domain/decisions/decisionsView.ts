@@ -44,6 +44,8 @@ export const decisionRow = z.object({
   approvedBy: z.string().nullable(),
   /** Why its reader cannot approve it; null when they can. */
   whyNotApproved: z.string().nullable(),
+  /** Whether its reader has opened it as it stands. */
+  isOpened: z.boolean(),
 })
 export type DecisionRow = z.output<typeof decisionRow>
 

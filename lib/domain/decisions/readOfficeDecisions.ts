@@ -25,6 +25,7 @@ export async function readOfficeDecisions(ctx: ActingContext, slug: string): Pro
     panels.push({
       panelId: panel.id,
       name: panel.name,
+      isFrozen: Boolean(ranking?.frozen_at),
       rows: await decisionRows(ctx, { callId: call.id, panelId: panel.id, proposals, hidden, ranking }),
     })
   }

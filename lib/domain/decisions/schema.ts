@@ -88,6 +88,13 @@ export const releaseSchema = panelKeySchema.extend({
 })
 export type ReleaseInput = z.output<typeof releaseSchema>
 
+/** A decision opened, at the version that was shown. */
+export const openSchema = panelKeySchema.extend({
+  proposalId: rowKey,
+  version: z.number().int().positive(),
+})
+export type OpenInput = z.output<typeof openSchema>
+
 /** What is approved, each at the version that was read. */
 export const approveSchema = panelKeySchema.extend({
   decisions: z

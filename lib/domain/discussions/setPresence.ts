@@ -24,7 +24,7 @@ export function setPresence(ctx: ActingContext, input: PresenceInput): Promise<v
       action: 'panel.presence',
       subject: { kind: 'person', id: input.personId },
       actingAs: leads ? 'chair' : 'reviewer',
-      after: { isPresent: input.isPresent },
+      after: { panelId: input.panelId, isPresent: input.isPresent },
     })
   })
 }

@@ -10,6 +10,7 @@ const names: Record<string, string> = {
   'waiver-decided': 'Answer about the waiver',
   'fee-reminder': 'Reminder',
   'fee-dispute': 'Word of the dispute',
+  'dispute-decided': 'Word of the decision',
   'refund-failed': 'Word of the failed refund',
   'proposal-lapsed': 'Word of the lapse',
 }

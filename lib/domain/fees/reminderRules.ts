@@ -12,21 +12,21 @@ export const reminderPoints = [
 
 export type ReminderName = (typeof reminderPoints)[number]['name']
 
-export interface OwedSince {
+export interface OwedFeeMoments {
   closesAt: Date
   dueAt: Date
-  billedAt: Date
+  owedSince: Date
 }
 
 /**
- * The reminder to write now: the last moment that has come since the fee was billed. Those before it are passed over,
+ * The reminder to write now: the last moment that has come since the fee is owed. Those before it are passed over,
  * so that a job that stood still writes once; nothing is written once the grace is over.
  */
-export function reminderFor(owed: OwedSince, now: Date): ReminderName | null {
+export function reminderFor(owed: OwedFeeMoments, now: Date): ReminderName | null {
   if (now >= owed.dueAt) return null
   const come = reminderPoints
     .map(({ name, of, hours }) => ({ name, at: owed[of].getTime() + hours * hourMs }))
-    .filter(({ at }) => at <= now.getTime() && at > owed.billedAt.getTime())
+    .filter(({ at }) => at <= now.getTime() && at > owed.owedSince.getTime())
     .sort((a, b) => a.at - b.at)
   return come.at(-1)?.name ?? null
 }

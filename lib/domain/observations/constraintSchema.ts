@@ -36,6 +36,10 @@ export const constraintSchema = z
     transparency: z.enum(['photometric', 'clear', 'thin-cloud']),
     dateFrom: evening,
     dateTo: evening,
+    cadence: z
+      .string()
+      .transform((text) => text.replace(/\s+/g, ' ').trim() || null)
+      .refine((text) => text === null || [...text].length <= 120, 'At most 120 characters.'),
   })
   .transform(({ imageQuality, minMoonSeparation, ...rest }): Conditions => ({
     ...rest,
@@ -60,5 +64,6 @@ export function constraintRow(set: Conditions): ConstraintRow {
     transparency: set.transparency,
     dateFrom: set.dateFrom ?? '',
     dateTo: set.dateTo ?? '',
+    cadence: set.cadence ?? '',
   }
 }

@@ -10,4 +10,5 @@ export const defaultConstraints: Omit<ConstraintSet, 'id' | 'version'> = {
   transparency: 'clear',
   dateFrom: null,
   dateTo: null,
+  cadence: null,
 }

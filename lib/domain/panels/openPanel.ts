@@ -23,6 +23,9 @@ export interface PanelDesk {
   hidden: ReadonlySet<number>
 }
 
+/** A panel opened for reading alone, by someone with or without a seat on it. */
+export type ReadPanel = Omit<PanelDesk, 'panel' | 'others'> & { panel: Omit<LedPanel, 'seat'> }
+
 /** Which panel: the one named, else the first of the call the person leads. */
 export type PanelKey = { callSlug: string; panelId?: number } | { panelId: number; lock: true }
 

@@ -126,6 +126,8 @@ export interface ConstraintSet {
   transparency: 'photometric' | 'clear' | 'thin-cloud'
   dateFrom: string | null
   dateTo: string | null
+  /** How often it is repeated, in words: `every 4 to 6 nights, ten times`; null for once. */
+  cadence: string | null
   version: number
 }
 

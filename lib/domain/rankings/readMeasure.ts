@@ -3,7 +3,7 @@ import { callCriteria } from '@/db/queries/calls'
 import { panelFormula } from '@/db/queries/panelFormula'
 import { readFormula } from '@/lib/panel/formula/readFormula'
 import type { ActingContext } from '../context'
-import type { PanelDesk } from '../panels/openPanel'
+import type { ReadPanel } from '../panels/openPanel'
 import { whyFormulaIsFixed } from '../panels/stages'
 import type { Standing } from './certainty'
 import { formulaValues } from './formulaValues'
@@ -20,7 +20,7 @@ export interface Measure {
 /** The panel's own measure of the proposals its reader sees, from their finished reviews. */
 export async function readMeasure(
   ctx: ActingContext,
-  desk: PanelDesk,
+  desk: ReadPanel,
   assignments: readonly PanelAssignment[],
   standings: ReadonlyMap<number, Standing>,
 ): Promise<Measure> {

@@ -11,10 +11,10 @@ import { snapshotHeads } from '@/db/queries/snapshotHeads'
 import { lineByHours } from '@/lib/panel/nights/lineByHours'
 import { rawScores } from '@/lib/panel/statistics'
 import type { ActingContext } from '../context'
-import { openPanel } from '../panels/openPanel'
+import { openPanel, type ReadPanel } from '../panels/openPanel'
+import { panelOffer } from '../sharing/panelOffer'
 import { certainty, draws } from './certainty'
 import { changesBetween } from './changesBetween'
-import { offeredByTelescope } from './offered'
 import { visibleLine, visibleOrder } from './order'
 import { readMeasure } from './readMeasure'
 import { panelScores } from './panelScores'
@@ -28,7 +28,11 @@ export async function readRanking(
   ctx: ActingContext,
   key: { callSlug: string; panelId?: number },
 ): Promise<RankingView> {
-  const desk = await openPanel(ctx, key)
+  return rankingOf(ctx, await openPanel(ctx, key))
+}
+
+/** The same of a panel that was opened already. */
+export async function rankingOf(ctx: ActingContext, desk: ReadPanel): Promise<RankingView> {
   const { call, panel, hidden } = desk
   const ids = desk.proposals.map(({ id }) => id)
   const numbers = new Map(desk.proposals.map(({ id, reviewNumber }) => [id, reviewNumber]))
@@ -44,7 +48,7 @@ export async function readRanking(
   const own = assignments.filter((a) => numbers.has(a.proposalId))
   const scores = await panelScores(ctx, call.id, own)
   const numberOf = new Map(members.map(({ personId, number }) => [personId, number]))
-  const offered = offeredByTelescope(blocks)
+  const offered = await panelOffer(ctx.db, call.id, panel.id)
   const linesOf = (id: number) => lines.filter((line) => line.proposalId === id)
   const entries = ranking ? await rankingEntries(ctx.db, ranking.id) : []
   const full = entries.map((entry) => entry.proposal_id)

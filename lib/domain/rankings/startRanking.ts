@@ -1,5 +1,5 @@
 import { moveStage, panelAssignments } from '@/db/queries/assignments'
-import { offeredTime, panelProposals, requestLines } from '@/db/queries/panel'
+import { panelProposals, requestLines } from '@/db/queries/panel'
 import { allPanelsRanked, currentRanking, insertRanking } from '@/db/queries/rankings'
 import { refuse } from '@/lib/errors'
 import { lineByHours } from '@/lib/panel/nights/lineByHours'
@@ -10,11 +10,11 @@ import { writeLogbook } from '../logbook/writeLogbook'
 import { openPanel } from '../panels/openPanel'
 import type { PanelKeyInput } from '../panels/schema'
 import { whyNotStartRanking } from '../panels/stages'
-import { offeredByTelescope } from './offered'
+import { panelOffer } from '../sharing/panelOffer'
 import { panelScores } from './panelScores'
 
 /**
- * Begins a panel's ranking: all its proposals by raw mean, those without a review last, the line where the hours end.
+ * Begins a panel's ranking: all its proposals by raw mean, those without a review last, the line where its hours end.
  * The call goes on to its ranking stage when every panel has begun.
  */
 export function startRanking(ctx: ActingContext, input: PanelKeyInput): Promise<void> {
@@ -46,7 +46,7 @@ export function startRanking(ctx: ActingContext, input: PanelKeyInput): Promise<
             possible: true,
           })),
       ),
-      offeredByTelescope(await offeredTime(tx.db, desk.call.id)),
+      await panelOffer(tx.db, desk.call.id, desk.panel.id),
     )
     await insertRanking(tx.db, {
       panelId: desk.panel.id,

@@ -4,6 +4,7 @@ import { databaseNow } from '@/db/queries/clock'
 import { declarationOf, lastLateArrival } from '@/db/queries/conflicts'
 import { standingScores } from '@/db/queries/reviews'
 import { modeNames, snapshotHeads } from '@/db/queries/snapshotHeads'
+import { callPhase } from '../calls/rules'
 import type { Call, CallCriterion } from '../calls/types'
 import { barredFrom } from '../conflicts/barredPairs'
 import { declarationHolds } from '../conflicts/policy'
@@ -11,7 +12,8 @@ import type { ActingContext } from '../context'
 import { instrumentWords } from './instrumentWords'
 import { canSeeReview } from './policy'
 import { reviewState, weightedMean } from './rules'
-import type { ReviewLine } from './types'
+import { readScaleUse } from './readScaleUse'
+import type { ReviewLine, ScaleUse } from './types'
 
 export interface ReviewsOfCall {
   call: Pick<Call, 'slug' | 'number' | 'title' | 'reviewsDueAt' | 'panelMeetsAt'>
@@ -20,6 +22,8 @@ export interface ReviewsOfCall {
   /** Shown before the declaration, when nothing else is. */
   assigned: number
   lines: ReviewLine[]
+  /** Null before the declaration. */
+  scale: ScaleUse | null
   now: Date
 }
 
@@ -106,6 +110,7 @@ export async function readReviewLines(ctx: ActingContext): Promise<ReviewsOfCall
       hasDeclared,
       assigned: assignments.length,
       now,
+      scale: hasDeclared ? await readScaleUse(ctx, callPhase(call, now), assignments, barred) : null,
       lines: hasDeclared ? await linesOf(ctx, { call, hasDeclared, assignments }) : [],
     })
   }

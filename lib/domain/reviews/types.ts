@@ -35,3 +35,12 @@ export interface ReviewLine {
   state: ReviewState
   dueAt: string
 }
+
+/** Scores by half point, 21 counts. */
+export interface ScaleUse {
+  own: number[]
+  /** The other readers of the panel together; null where they are not shown. */
+  others: number[] | null
+  /** Why not; empty where they are. */
+  whyAlone: string
+}

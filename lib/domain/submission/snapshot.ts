@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto'
 import type { ObservationComputation, ProposalComputation } from '../observations/types.ts'
-import type { ProposalContents, Target } from '../proposals/types.ts'
+import type { CallKind } from '../calls/types.ts'
+import type { ConstraintSet, ProposalContents, Target } from '../proposals/types.ts'
 import { unwritten } from '../proposals/unwritten.ts'
 
 /** A proposal as it was sent: what it said, what was computed from it, and by which engine. */
@@ -43,9 +44,16 @@ const moments = new Set([
 
 type May<T, K extends keyof T> = Omit<T, K> & Partial<Pick<T, K>>
 
+type KindAsks = 'targetLimit' | 'takesAwaited' | 'needsCadence' | 'needsLastNight'
+
 /** A snapshot that may have been frozen before proposals had all they have now. */
 interface Thawed {
-  contents: Omit<May<ProposalContents, 'groups' | 'wishes' | 'writings' | 'figures'>, 'targets'> & {
+  contents: Omit<
+    May<ProposalContents, 'groups' | 'wishes' | 'writings' | 'figures'>,
+    'targets' | 'constraintSets' | 'kind'
+  > & {
+    kind: May<CallKind, KindAsks>
+    constraintSets: May<ConstraintSet, 'cadence'>[]
     targets: May<Target, 'group' | 'opportunity' | 'spectrum'>[]
   }
   computation: Omit<May<ProposalComputation, 'groups'>, 'observations'> & {
@@ -59,9 +67,18 @@ function whole({ contents, computation, engineVersion }: Thawed): Snapshot {
     ...{ group: null, opportunity: null, spectrum: null },
     ...target,
   }))
+  // A kind that took what is awaited before that was asked of it did so by what it named.
+  const takesAwaited = targets.some(({ opportunity }) => opportunity !== null)
+  const asks = { targetLimit: null, takesAwaited, needsCadence: false, needsLastNight: false }
+  const kind = { ...asks, ...contents.kind }
+  const constraintSets = contents.constraintSets.map((set) => ({ ...set, cadence: set.cadence ?? null }))
   const observations = computation.observations.map((one) => ({ times: 1, carried: null, ...one }))
   return {
-    contents: { groups: [], wishes: [], writings: unwritten, figures: [], ...contents, targets },
+    contents: {
+      ...{ groups: [], wishes: [], writings: unwritten, figures: [] },
+      ...contents,
+      ...{ kind, constraintSets, targets },
+    },
     computation: { groups: [], ...computation, observations },
     engineVersion,
   }

@@ -15,7 +15,8 @@ import type { Target } from '../proposals/types'
 import { keptValues } from './keptValues'
 import { targetRowSchema } from './schema'
 import { targetRow } from './targetRow'
-import { mostTargets, nameKey, nextPosition, requireRoom } from './targetRules'
+import { mostTargets } from './limits'
+import { nameKey, nextPosition, requireRoom } from './targetRules'
 
 const id = z.number().int().positive()
 

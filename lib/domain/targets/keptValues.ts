@@ -1,5 +1,4 @@
 import { refuse } from '@/lib/errors'
-import { takesOpportunities } from '../calls/rules'
 import type { CallKind } from '../calls/types'
 import type { TargetGroup } from '../proposals/types'
 import { knownGroup } from '../targetGroups/groupRules'
@@ -12,10 +11,10 @@ import type { TargetValues } from './types'
  */
 export function keptValues(
   values: TargetValues,
-  { kind, groups }: { kind: Pick<CallKind, 'kind' | 'title'>; groups: readonly TargetGroup[] },
+  { kind, groups }: { kind: Pick<CallKind, 'takesAwaited' | 'title'>; groups: readonly TargetGroup[] },
   at: string,
 ): TargetValues {
-  if (values.opportunity && !takesOpportunities(kind))
+  if (values.opportunity && !kind.takesAwaited)
     throw refuse.field(
       `${at}.event`,
       `A proposal of the kind “${kind.title}” takes no targets of opportunity: leave this empty.`,

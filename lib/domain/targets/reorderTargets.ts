@@ -6,7 +6,8 @@ import type { Context } from '../context'
 import { inTransaction } from '../inTransaction'
 import { writeLogbook } from '../logbook/writeLogbook'
 import { openForEditing } from '../proposals/openProposal'
-import { inOrder, mostTargets } from './targetRules'
+import { mostTargets } from './limits'
+import { inOrder } from './targetRules'
 
 export const reorderTargetsSchema = z.object({
   reference: z.string().max(10),

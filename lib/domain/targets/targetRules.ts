@@ -1,9 +1,7 @@
 import { refuse } from '@/lib/errors'
 import type { Target } from '../proposals/types'
+import { mostTargets } from './limits'
 import type { TargetValues } from './types'
-
-/** The most targets one proposal holds. */
-export const mostTargets = 500
 
 /** Names tell targets apart: compared as the database does, without case. */
 export const nameKey = (name: string): string => name.trim().normalize('NFC').toLocaleLowerCase('en-GB')

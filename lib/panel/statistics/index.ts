@@ -6,3 +6,4 @@ export { chanceAbove, rankDraws, rankQuantile, type RankDistribution } from './r
 export { rawScores, type RawScore } from './rawScores'
 export type { Leniency, LeniencyTest, Merit, MeritFit, Score } from './types'
 export { weightedScore } from './weightedScore'
+export { scaleUse } from './scaleUse'

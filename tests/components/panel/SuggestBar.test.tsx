@@ -12,7 +12,7 @@ const shown = (quorum: number, suggestion: SuggestedPairs | null) =>
       {...{ quorum, suggestion, busy: null, onSuggest: nothing, onAssign: nothing, onLeave: nothing }}
     />,
   )
-const none = { pairs: [], loads: null, known: null, best: { why: 'No solver was asked.' } }
+const none = { pairs: [], loads: null, best: { why: 'No solver was asked.' }, known: null }
 
 describe('a suggestion of readers', () => {
   it('begins with the quorum, no more than can be asked for', () => {

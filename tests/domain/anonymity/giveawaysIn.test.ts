@@ -4,6 +4,7 @@ import { ownWork } from '@/lib/domain/anonymity/ownWork'
 import { placesWords } from '@/lib/domain/anonymity/placesWords'
 import { sourcesOf } from '@/lib/domain/anonymity/sourcesOf'
 import type { Source } from '@/lib/domain/anonymity/types'
+import { defaultConstraints } from '@/lib/domain/observations/rules'
 import { unwritten } from '@/lib/domain/proposals/unwritten'
 
 const people = [
@@ -96,6 +97,7 @@ describe('what is looked through', () => {
   const contents = {
     title: 'A title',
     abstract: 'one\ntwo',
+    constraintSets: [],
     writings: { ...unwritten, justification: { text: 'a\nb', version: 1 } },
     figures: [],
     papers: [],
@@ -120,6 +122,11 @@ describe('what is looked through', () => {
       uploadedAt: new Date(),
     }
     expect(sourcesOf({ ...contents, papers: [paper] }).map(({ name }) => name)).toEqual(['title', 'abstract'])
+    const set = { ...defaultConstraints, id: 1, version: 1, cadence: 'every night, as Marrowby did' }
+    expect(sourcesOf({ ...contents, constraintSets: [set] })[2]).toEqual({
+      name: 'conditions',
+      parts: [{ at: null, text: 'every night, as Marrowby did' }],
+    })
     expect(sourcesOf(contents)[2]?.parts).toEqual([
       { at: 1, text: 'a' },
       { at: 2, text: 'b' },

@@ -1,7 +1,7 @@
 import { expect, it } from 'vitest'
 import { eveningsBetween } from '@/lib/domain/calls/evenings'
 import { movedDates } from '@/lib/domain/calls/movedDates'
-import { planCallSchema } from '@/lib/domain/calls/schema'
+import { planCallSchema, saveDatesSchema } from '@/lib/domain/calls/schema'
 
 // Seen to fail: moved by nights in place of weeks.
 
@@ -45,4 +45,22 @@ it.each([
   const result = planCallSchema.safeParse({ from: 'call-14', ...movedDates(call), [field]: value })
   const found = result.error?.issues.find(({ path }) => path[0] === field)?.message
   expect(found).toBe(sentence)
+})
+
+it.each([
+  ['opensAt', '2026-12-15T22:00:00Z', 'closesAt', 'The deadline must come after the opening.'],
+  ['closesAt', '2026-10-18T11:59:00Z', 'closesAt', 'The deadline must come after the opening.'],
+  [
+    'reviewsDueAt',
+    '2026-12-15T21:00:00Z',
+    'reviewsDueAt',
+    'The due date of reviews must come after the deadline.',
+  ],
+] as const)('does not let %s become %s in a call that is planned', (field, value, at, sentence) => {
+  const { seasonFrom: _, seasonTo: __, ...dates } = call
+  const typed = Object.fromEntries(Object.entries(dates).map(([name, date]) => [name, date.toISOString()]))
+  const on = { slug: 'call-14', version: 3, why: '' }
+  expect(saveDatesSchema.safeParse({ ...on, ...typed }).success).toBe(true)
+  const result = saveDatesSchema.safeParse({ ...on, ...typed, [field]: value })
+  expect(result.error?.issues.find(({ path }) => path[0] === at)?.message).toBe(sentence)
 })

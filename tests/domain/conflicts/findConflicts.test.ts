@@ -40,7 +40,6 @@ describe('findConflicts', () => {
     expect(found.every(({ personId, source }) => personId === 7 && source === 'matched')).toBe(true)
   })
 
-  // Tried: giving colleagues of recent calls no interest fails the second row, taking a colleague's colleague for one the fourth.
   it.each([
     [
       'a proposal of someone named with the judge in this call',

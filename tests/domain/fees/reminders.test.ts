@@ -4,7 +4,7 @@ import { reminderFor } from '@/lib/domain/fees/reminderRules'
 const owed = {
   closesAt: new Date('2027-03-31T22:00:00Z'),
   dueAt: new Date('2027-04-14T22:00:00Z'),
-  billedAt: new Date('2027-03-20T12:00:00Z'),
+  owedSince: new Date('2027-03-20T12:00:00Z'),
 }
 const at = (text: string) => new Date(text)
 
@@ -26,7 +26,7 @@ describe('the reminder of a fee', () => {
   })
 
   it('passes over what came before the fee was billed', () => {
-    const late = { ...owed, billedAt: at('2027-03-31T20:00:00Z') }
+    const late = { ...owed, owedSince: at('2027-03-31T20:00:00Z') }
     expect(reminderFor(late, at('2027-03-31T21:00:00Z'))).toBeNull()
     expect(reminderFor(late, at('2027-04-01T22:00:00Z'))).toBe('deadline+24h')
   })

@@ -138,7 +138,7 @@ describe('the verdict by groups', () => {
     [
       'neither position nor trigger where something may',
       contents({
-        kind: { ...contents().kind, kind: 'opportunity' },
+        kind: { ...contents().kind, takesAwaited: true },
         targets: [target({ raDeg: null, decDeg: null })],
       }),
       'Give the position of 3C 273, or say what triggers it.',

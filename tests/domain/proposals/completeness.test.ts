@@ -209,6 +209,42 @@ describe('what bars a proposal from being sent', () => {
       computed('feasible', { askedSeconds: 7200 }),
       [],
     ],
+    [
+      'more targets than the kind takes',
+      {
+        kind: { ...base.kind, targetLimit: 1 },
+        targets: [target(), target({ id: 12, name: 'Second', need: 'optional' })],
+      },
+      computed(),
+      ['Two targets are named; this kind of proposal may name one.'],
+    ],
+    [
+      'conditions that do not say how often, of a kind that asks it',
+      { kind: { ...base.kind, needsCadence: true } },
+      computed(),
+      ['Conditions: say how often it is repeated.'],
+    ],
+    [
+      'conditions that say neither how often nor by when',
+      { kind: { ...base.kind, needsCadence: true, needsLastNight: true } },
+      computed(),
+      [
+        'Conditions: say how often it is repeated.',
+        'Conditions: say by when it is needed, as the last evening.',
+      ],
+    ],
+    [
+      'conditions that say both, beside some that nothing uses',
+      {
+        kind: { ...base.kind, needsCadence: true, needsLastNight: true },
+        constraintSets: base.constraintSets.flatMap((set) => [
+          { ...set, cadence: 'every 4 nights', dateTo: '2027-09-01' },
+          { ...set, id: 99, name: 'Unused' },
+        ]),
+      },
+      computed(),
+      [],
+    ],
     ['a verdict of marginal', {}, computed('marginal'), []],
     [
       'a verdict of not feasible, unanswered',

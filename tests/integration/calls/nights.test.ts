@@ -142,6 +142,16 @@ describe('nights from a file', () => {
   const take = async (text: string, mayTakePromised = false) =>
     importNights(office, { slug: scenario.callSlug, version: await version(), text, mayTakePromised })
 
+  it('may not overlap themselves, in whatever order', async () => {
+    const { name } = await telescope()
+    const lines = [`${name},2027-07-20,0.4,1,engineering`, `${name},2027-07-20,0,0.5,science`]
+    for (const ordered of [lines, lines.toReversed()]) {
+      const refusal = await refused(take(['telescope,evening,from,to,use', ...ordered].join('\n')))
+      expect(refusal.fieldErrors.text).toMatch(/^Nothing was taken\. Line 3: Two parts of a night overlap/)
+    }
+    expect((await telescope()).nights.every(({ parts }) => parts.length === 1)).toBe(true)
+  })
+
   it('become what it says; others stay; written out and taken back they are the same', async () => {
     const name = (await telescope()).name
     const head = 'telescope,evening,from,to,use'

@@ -80,6 +80,10 @@ describe('an invoice to an institute', () => {
   it.each([
     [{ amount: '119.00' }, 'The invoice is for EUR\u00A0120.00'],
     [{ amount: '-120' }, 'never negative'],
+    [{ amount: '120.005' }, 'two decimals'],
+    [{ amount: '0' }, 'The invoice is for'],
+    [{ amount: '240' }, 'The invoice is for'],
+    [{ amount: 'USD 120' }, 'in EUR, not in USD'],
     [{ paidOn: '2999-01-01' }, 'has not come yet'],
     [{ paidOn: '2020-01-01' }, 'before the invoice was written'],
   ])('is not settled by %o', async (over, words) => {

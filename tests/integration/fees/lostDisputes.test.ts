@@ -5,6 +5,7 @@ import { lapseFees } from '@/lib/domain/fees/lapseFees'
 import { readFee } from '@/lib/domain/fees/readFee'
 import { readUndecided } from '@/lib/domain/fees/readUndecided'
 import { reconcilePayments } from '@/lib/domain/fees/reconcilePayments'
+import { remindByClock } from '@/lib/domain/fees/remindOwing'
 import { refundFee } from '@/lib/domain/fees/refundFee'
 import { decideDisputeSchema } from '@/lib/domain/fees/schema'
 import { makeBilled, type Billed } from '../../support/billed'
@@ -93,6 +94,11 @@ describe('a lost dispute', () => {
     const days = ((fee?.due_at.getTime() ?? 0) - Date.now()) / 86_400_000
     expect(days).toBeGreaterThan(9.9)
     expect(days).toBeLessThan(10.1)
+    // A deadline long past is no reason to remind at once of what was asked for a moment ago.
+    await db()('calls')
+      .where({ id: billed.scenario.callId })
+      .update({ closes_at: new Date(Date.now() - 10 * 86_400_000) })
+    expect(await remindByClock({ ...billed.ctx, actor: null })).toBe(0)
     const [letter] = await letters()
     expect(letter?.to_email).toBe(billed.scenario.pi.email)
     expect(letter?.text_body).toContain('The office writes: The card was stolen.')

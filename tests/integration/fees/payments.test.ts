@@ -61,11 +61,15 @@ describe('paying a fee', () => {
     expect(await billed.rows()).toMatchObject({ fee: 'due', payments: ['expired', 'open'] })
   })
 
-  it('does not take another amount for the fee', async () => {
+  it.each([
+    ['another amount', { amountMinor: 1 }],
+    ['more', { amountMinor: 12_001 }],
+    ['another currency', { currency: 'USD' }],
+  ])('does not take %s for the fee', async (_, over) => {
     const id = await billed.open()
     billed.payments.pay(id)
     const session = billed.payments.sessions.get(id)
-    if (session) billed.payments.sessions.set(id, { ...session, amountMinor: 1 })
+    if (session) billed.payments.sessions.set(id, { ...session, ...over })
     await confirm()
     expect(await billed.rows()).toMatchObject({ fee: 'due', payments: ['open'], receipts: 0 })
   })

@@ -186,6 +186,15 @@ describe('inviting', () => {
     expect(await db()('invitations').where({ name: 'Tove Ashlund' })).toEqual([])
   })
 
+  it('an address whose account has the role there already is refused, and nothing is written', async () => {
+    await ask(scenario.stranger.email)
+    const before = await db()('outbox').count({ n: '*' })
+    const refusal = await refused(ask(scenario.stranger.email))
+    expect(JSON.stringify([refusal.message, refusal.fieldErrors])).toContain('has this role there already')
+    expect((await rolesOf(scenario.stranger.personId)).filter((role) => role === 'reviewer')).toHaveLength(1)
+    expect(await db()('outbox').count({ n: '*' })).toEqual(before)
+  })
+
   it('a new address writes one letter, and the role keeps the end it was given', async () => {
     const untilAt = inHours(48)
     expect(await ask('tove@ashlund.example', { untilAt })).toMatchObject({ outcome: 'invited' })

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it } from 'vitest'
 import type { Actor } from '@/lib/domain/actor'
 import { startReview } from '@/lib/domain/assignments/startReview'
 import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
+import { openDecision } from '@/lib/domain/decisions/openDecision'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { readOfficeDecisions } from '@/lib/domain/decisions/readOfficeDecisions'
@@ -28,16 +29,17 @@ const rowOf = async (id: number, who: Actor = call.chair) => {
   if (!row) throw new Error('the decision is not shown')
   return row
 }
-const approve = async (who: Actor, ids = [first.id]) =>
-  approveDecisions(call.as(who), {
-    panelId: call.panelId,
-    decisions: await Promise.all(
-      ids.map(async (proposalId) => ({
-        proposalId,
-        version: (await rowOf(proposalId, call.deputy)).version,
-      })),
-    ),
-  })
+const versions = async (ids: readonly number[]) => {
+  const { rows } = await readDecisions(call.as(call.deputy), key())
+  return rows.flatMap(({ proposalId, version }) =>
+    ids.includes(proposalId) ? [{ proposalId, version }] : [],
+  )
+}
+const approve = async (who: Actor, ids = [first.id]) => {
+  const decisions = await versions(ids)
+  for (const decision of decisions) await openDecision(call.as(who), { panelId: call.panelId, ...decision })
+  return approveDecisions(call.as(who), { panelId: call.panelId, decisions })
+}
 const state = async () => (await rowOf(first.id)).approval
 const rewrite = async (statement: string, who: Actor = call.chair) =>
   saveStatement(call.as(who), {
@@ -127,6 +129,32 @@ describe('a second person', () => {
       }),
     ).rejects.toMatchObject({ kind: 'stale' })
     expect(await state()).toBe('waits')
+  })
+
+  it('approves nothing while one of several was not opened as it stands', async () => {
+    const { panelId } = call
+    const ids = call.proposals.map(({ id }) => id)
+    const office = call.as(call.office)
+    const all = async () => approveDecisions(office, { panelId, decisions: await versions(ids) })
+    await expect(all()).rejects.toMatchObject({
+      kind: 'closed',
+      message: /not opened .* and .* as they stand/,
+    })
+    for (const decision of await versions(ids)) await openDecision(office, { panelId, ...decision })
+    await rewrite('The hours suffice, and the sample is what decided.')
+    await expect(all()).rejects.toMatchObject({
+      message: expect.stringContaining(`You have not opened ${first.reviewNumber} as it stands`),
+    })
+    expect(await state()).toBe('waits')
+    expect((await rowOf(first.id)).isOpened).toBe(false)
+
+    const [stale] = await versions([first.id])
+    await expect(
+      openDecision(office, { panelId, proposalId: first.id, version: (stale?.version ?? 0) - 1 }),
+    ).rejects.toMatchObject({ kind: 'stale' })
+    for (const decision of await versions([first.id]))
+      for (const _ of [1, 2]) await openDecision(office, { panelId, ...decision })
+    expect(await all()).toEqual({ approved: 2 })
   })
 
   it('who changes it, leaves the approval to the first', async () => {

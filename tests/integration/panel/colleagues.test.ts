@@ -52,7 +52,6 @@ async function together(people: readonly Actor[]): Promise<PanelCall> {
   return past
 }
 
-// Seen to fail with the teams of this call left out of the matching.
 describe('a reviewer named with an investigator on another proposal of the call', () => {
   beforeEach(() => name(two.id, call.reviewers[0]))
   beforeEach(() => name(two.id, one.pi))
@@ -121,7 +120,6 @@ describe('a chair and a member of the office named with an investigator', () => 
 })
 
 describe('how far back it looks', () => {
-  // Seen to fail with one call more, and with one less.
   it('counts the four calls that opened last before this one closed, and none that opened since', async () => {
     const past = await together([call.reviewers[0], one.pi])
     const sees = () => barredFrom(db(), call.reviewers[0].personId, call.callId)

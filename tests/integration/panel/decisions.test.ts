@@ -4,6 +4,7 @@ import { timeBalance } from '@/db/queries/timeLedger'
 import type { Actor } from '@/lib/domain/actor'
 import { startReview } from '@/lib/domain/assignments/startReview'
 import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
+import { openDecision } from '@/lib/domain/decisions/openDecision'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { readNights } from '@/lib/domain/decisions/readNights'
@@ -61,12 +62,12 @@ const release = (typed = String(call.callNumber), who: Actor = call.chair) =>
   releaseDecisions(call.as(who), { panelId: call.panelId, typed })
 const approve = async (who: Actor = call.deputy) => {
   const { rows } = await readDecisions(call.as(call.deputy), key())
-  return approveDecisions(call.as(who), {
-    panelId: call.panelId,
-    decisions: rows
-      .filter((row) => row.isPrepared)
-      .map(({ proposalId, version }) => ({ proposalId, version })),
-  })
+  const decisions = rows
+    .filter((row) => row.isPrepared)
+    .map(({ proposalId, version }) => ({ proposalId, version }))
+  const { panelId } = call
+  for (const decision of decisions) await openDecision(call.as(who), { panelId, ...decision })
+  return approveDecisions(call.as(who), { panelId, decisions })
 }
 const lines = () =>
   db()('award_lines').whereNull('superseded_at').orderBy('id').select('seconds', 'is_reserve')

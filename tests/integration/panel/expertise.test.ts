@@ -60,7 +60,6 @@ describe('saying what one knows', () => {
 })
 
 describe('affinity', () => {
-  // Seen to fail with every affinity taken as one.
   it('decides who is suggested, and what cannot be met is said', async () => {
     const [first, second, third] = call.reviewers
     expect((await suggested()).words).toMatch(/no reviewer has said what they know, so the loads decide/)

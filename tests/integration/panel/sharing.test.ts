@@ -3,6 +3,8 @@ import type { Actor } from '@/lib/domain/actor'
 import { readNights } from '@/lib/domain/decisions/readNights'
 import { takePlan } from '@/lib/domain/decisions/takePlan'
 import { moveInRanking } from '@/lib/domain/rankings/moveInRanking'
+import { readRanking } from '@/lib/domain/rankings/readRanking'
+import { startRanking } from '@/lib/domain/rankings/startRanking'
 import { bringTogether } from '@/lib/domain/sharing/bringTogether'
 import { freezeMerged } from '@/lib/domain/sharing/freezeMerged'
 import { moveInMerged } from '@/lib/domain/sharing/moveInMerged'
@@ -172,6 +174,15 @@ describe('the lists as one', () => {
     expect((await view()).pools[0]?.panels.map((one) => one.shareSeconds)).toEqual([0, 0])
     expect(await order()).toEqual(['A1', 'B1', 'A2', 'B2', 'A3', 'A4'])
   })
+})
+
+it('the line of a panel is drawn where its share ends', async () => {
+  for (const proposal of call.first) await call.review(proposal, call.reviewers[0], 14)
+  await startRanking(call.as(call.chair), { panelId: call.panelId })
+  const found = await readRanking(call.as(call.chair), { callSlug: call.callSlug })
+  // 30 + 30 hours fit 68.75, 20 more do not.
+  expect(found.line).toBe(2)
+  expect(found.telescopes).toMatchObject([{ offeredSeconds: 68.75 * h, askedSeconds: 60 * h }])
 })
 
 describe('the nights', () => {

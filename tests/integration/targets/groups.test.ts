@@ -260,7 +260,7 @@ describe('what is awaited', () => {
   })
 
   it('is kept, sent without a position, and asked for once a trigger', async () => {
-    await db()('call_kinds').where({ id: scenario.kindId }).update({ kind: 'opportunity' })
+    await db()('call_kinds').where({ id: scenario.kindId }).update({ takes_awaited: 1 })
     const [own] = await targets()
     if (!own) throw new Error('the scenario has no target')
     const row = targetRowSchema.parse({ ...targetRow(own), ra: '', dec: '', ...awaited })

@@ -1,6 +1,8 @@
 'use server'
 
 import { defineAction } from '@/lib/actions/defineAction'
+import { leaveReview } from '@/lib/domain/recusals/leaveReview'
+import { leaveReviewSchema } from '@/lib/domain/recusals/schema'
 import { finishReview } from '@/lib/domain/reviews/finishReview'
 import { reopenReview } from '@/lib/domain/reviews/reopenReview'
 import { saveReviewText } from '@/lib/domain/reviews/saveReviewText'
@@ -36,4 +38,12 @@ export const reopenReviewAction = defineAction({
   schema: reviewKeySchema,
   run: reopenReview,
   revalidate: (_, { assignmentId }) => [paths.review(assignmentId), paths.reviews()],
+})
+
+export const leaveReviewAction = defineAction({
+  name: 'leaveReview',
+  schema: leaveReviewSchema,
+  run: leaveReview,
+  revalidate: () => paths.reviews(),
+  redirectTo: () => paths.reviews(),
 })

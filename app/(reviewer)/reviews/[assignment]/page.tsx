@@ -14,7 +14,13 @@ import { readReviewDesk } from '@/lib/domain/reviews/readReviewDesk'
 import { assignmentKey } from '@/lib/domain/reviews/schema'
 import { paths } from '@/lib/paths'
 import { cosmologyPresets } from '@/lib/science/cosmology'
-import { finishReviewAction, reopenReviewAction, saveReviewTextAction, saveScoreAction } from './actions'
+import {
+  finishReviewAction,
+  leaveReviewAction,
+  reopenReviewAction,
+  saveReviewTextAction,
+  saveScoreAction,
+} from './actions'
 
 export const metadata: Metadata = { title: 'Review' }
 
@@ -80,6 +86,7 @@ export default async function ReviewPage({ params }: { params: Promise<{ assignm
               content: (
                 <ScorePane
                   desk={desk}
+                  leave={leaveReviewAction}
                   nextHref={next ? paths.review(next.assignmentId) : null}
                   actions={{
                     saveScore: saveScoreAction,

@@ -4,6 +4,7 @@ import type { ProposalComputation } from '../../observations/types'
 import { groupOf } from '../../observations/groupOf'
 import { needOf } from '../../observations/needOf'
 import type { ProposalContents, TargetGroup } from '../types'
+import { conditionsLacking } from './conditions'
 import type { Finding, Missing } from './finding'
 
 function words({ observations, modes }: ProposalContents): string {
@@ -59,5 +60,7 @@ export function observingFinding(contents: ProposalContents, computation: Propos
         `${formatHoursFromSeconds(computation.askedSeconds)} are asked; this kind of proposal may ask for ${formatHoursFromSeconds(kind.maxSeconds)}.`,
       ),
     )
+  absent.push(...conditionsLacking(contents, href))
+  missing.push(...conditionsLacking(contents, href))
   return { begun: true, detail: words(contents), missing, wrong: missing.length > absent.length }
 }

@@ -2,7 +2,6 @@ import { countInWords, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import type { ProposalComputation } from '../../observations/types'
 import { needOf } from '../../observations/needOf'
-import { takesOpportunities } from '../../calls/rules'
 import type { ProposalContents } from '../types'
 import { groupsLacking } from './groups'
 import type { Finding, Missing } from './finding'
@@ -15,7 +14,7 @@ function redshifts(values: number[]): string {
 
 /** What is awaited has no position yet, where the kind of proposal takes such targets. */
 const positionWanted = ({ kind }: ProposalContents, name: string) =>
-  takesOpportunities(kind)
+  kind.takesAwaited
     ? `Give the position of ${name}, or say what triggers it.`
     : `Give the position of ${name}.`
 
@@ -41,6 +40,11 @@ export function targetsFinding(contents: ProposalContents, computation: Proposal
     const refusal = computation.targets.find(({ targetId }) => targetId === target.id)?.refusal
     return refusal ? [at(target.id, `${target.name}: ${refusal}`)] : []
   })
+  const most = contents.kind.targetLimit
+  if (most !== null && targets.length > most) {
+    const sentence = `${countInWords(targets.length, 'target', 'targets', true)} are named; this kind of proposal may name ${countInWords(most, '', '').trim()}.`
+    missing.push({ section: 'targets', field: null, sentence, href })
+  }
   missing.push(...groupsLacking(contents, href))
   const required = targets.filter((target) => needOf(target, contents.groups) === 'required').length
   const z = targets.flatMap(({ redshift }) => (redshift === null ? [] : [redshift]))

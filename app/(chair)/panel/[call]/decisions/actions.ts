@@ -2,11 +2,13 @@
 
 import { defineAction } from '@/lib/actions/defineAction'
 import { approveDecisions } from '@/lib/domain/decisions/approveDecisions'
+import { openDecision } from '@/lib/domain/decisions/openDecision'
 import { prepareDecisions } from '@/lib/domain/decisions/prepareDecisions'
 import { releaseDecisions } from '@/lib/domain/decisions/releaseDecisions'
 import { saveStatement } from '@/lib/domain/decisions/saveStatement'
 import {
   approveSchema,
+  openSchema,
   prepareSchema,
   releaseSchema,
   statementSchema,
@@ -43,4 +45,10 @@ export const withholdCommentAction = defineAction({
   name: 'withholdComment',
   schema: withholdSchema,
   run: withholdComment,
+})
+
+export const openDecisionAction = defineAction({
+  name: 'openDecision',
+  schema: openSchema,
+  run: openDecision,
 })

@@ -7,6 +7,7 @@ import { readDecisions } from '@/lib/domain/decisions/readDecisions'
 import { panelKey, type PanelPageProps } from '../panelKey'
 import {
   approveDecisionsAction,
+  openDecisionAction,
   prepareDecisionsAction,
   releaseDecisionsAction,
   saveStatementAction,
@@ -26,6 +27,7 @@ export default async function DecisionsPage(props: PanelPageProps) {
         prepare={prepareDecisionsAction}
         save={saveStatementAction}
         approve={approveDecisionsAction}
+        openDecision={openDecisionAction}
         withhold={withholdCommentAction}
         release={releaseDecisionsAction}
       />

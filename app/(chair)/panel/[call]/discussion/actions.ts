@@ -4,6 +4,8 @@ import { defineAction } from '@/lib/actions/defineAction'
 import { saveStatement } from '@/lib/domain/decisions/saveStatement'
 import { discussNow } from '@/lib/domain/discussions/discussNow'
 import { discussSchema, presenceSchema } from '@/lib/domain/discussions/schema'
+import { leaveTable } from '@/lib/domain/recusals/leaveTable'
+import { leaveTableSchema } from '@/lib/domain/recusals/schema'
 import { scoreAgain } from '@/lib/domain/discussions/scoreAgain'
 import { setPresence } from '@/lib/domain/discussions/setPresence'
 import { consensusSchema, setAsideSchema } from '@/lib/domain/rankings/schema'
@@ -35,4 +37,10 @@ export const scoreAgainAction = defineAction({
   schema: saveScoreSchema,
   run: scoreAgain,
   limit: { points: 240, seconds: 60 },
+})
+
+export const leaveTableAction = defineAction({
+  name: 'leaveTable',
+  schema: leaveTableSchema,
+  run: leaveTable,
 })

@@ -19,6 +19,7 @@ import {
   discussNowAction,
   notePresenceAction,
   saveConsensusAction,
+  leaveTableAction,
   scoreAgainAction,
   setAsideAction,
 } from './actions'
@@ -54,6 +55,7 @@ export default async function DiscussionPage(props: PanelPageProps) {
           discuss={discussNowAction}
           presence={notePresenceAction}
           scoreAgain={scoreAgainAction}
+          leaveTable={leaveTableAction}
         />
       ) : null}
       {open ? (

@@ -5,7 +5,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readTable } from '@/lib/domain/discussions/readTable'
 import { panelNumber } from '@/lib/domain/panels/schema'
-import { scoreAgainAction, setPresenceAction } from './actions'
+import { leaveTableAction, scoreAgainAction, setPresenceAction } from './actions'
 
 export const metadata: Metadata = { title: 'The meeting' }
 
@@ -23,7 +23,12 @@ export default async function MeetingPage({ params, searchParams }: Props) {
   )
   return (
     <Main>
-      <MeetingBoard initial={view} presence={setPresenceAction} scoreAgain={scoreAgainAction} />
+      <MeetingBoard
+        initial={view}
+        presence={setPresenceAction}
+        scoreAgain={scoreAgainAction}
+        leaveTable={leaveTableAction}
+      />
     </Main>
   )
 }

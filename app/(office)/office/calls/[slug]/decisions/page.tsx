@@ -6,7 +6,7 @@ import { openPage } from '@/lib/auth/openPage'
 import { orNotFound } from '@/lib/auth/orNotFound'
 import { readOfficeDecisions } from '@/lib/domain/decisions/readOfficeDecisions'
 import { paths } from '@/lib/paths'
-import { approveAsOfficeAction } from './actions'
+import { approveAsOfficeAction, openAsOfficeAction } from './actions'
 
 export const metadata: Metadata = { title: 'Decisions' }
 
@@ -23,7 +23,7 @@ export default async function OfficeDecisionsPage({ params }: { params: Promise<
           { label: 'Decisions' },
         ]}
       />
-      <OfficeDecisions initial={view} approve={approveAsOfficeAction} />
+      <OfficeDecisions initial={view} approve={approveAsOfficeAction} openDecision={openAsOfficeAction} />
     </Main>
   )
 }

@@ -1,0 +1,2 @@
+/** The most targets one proposal holds. */
+export const mostTargets = 500
