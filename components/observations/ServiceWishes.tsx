@@ -3,7 +3,7 @@
 import { useState } from 'react'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import { observationsOn } from '@/lib/domain/nights/observationsOn'
+import { observationsOn } from '@/lib/domain/assessments/rules'
 import type { ProposalContents, ServiceWish } from '@/lib/domain/proposals/types'
 import { visitInWords } from '@/lib/domain/wishes/visitWords'
 import { formatHoursFromSeconds } from '@/lib/format'
@@ -29,7 +29,7 @@ export function ServiceWishes({ contents, readOnly, save }: ServiceWishesProps) 
   const [open, setOpen] = useState<number | null>(null)
   const instruments = new Map(contents.modes.map(({ instrument }) => [instrument.id, instrument]))
   const used = [...instruments.values()].flatMap((instrument) => {
-    const own = observationsOn(contents, instrument.id)
+    const own = observationsOn(contents.observations, contents.modes, instrument.id)
     const asked = own.reduce((sum, { askedSeconds }) => sum + askedSeconds, 0)
     return own.length > 0 ? [{ instrument, asked }] : []
   })

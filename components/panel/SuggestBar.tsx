@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/Button'
 import { LinkLikeButton } from '@/components/ui/LinkLikeButton'
 import { Panel } from '@/components/ui/Panel'
 import { suggestionWords, type SuggestedPairs } from '@/lib/domain/assignments/suggestionWords'
-import { mostReaders } from '@/lib/domain/assignments/mostReaders'
+import { mostReaders } from '@/lib/domain/assignments/limits'
 import { countInWords } from '@/lib/format'
 
 export interface SuggestBarProps {

@@ -1,3 +1,4 @@
+import type { VisitWish } from '../../../lib/domain/proposals/types.ts'
 import type { SeedMode } from '../facilityData.ts'
 
 export interface SeedProposal {
@@ -17,6 +18,8 @@ export interface SeedProposal {
   kind?: 'large' | 'thesis' | 'opportunity'
   /** All targets in a group of which at least so many are wanted; the last of them never rises. */
   group?: { name: string; atLeast: number }
+  /** Its investigators wish to observe themselves. */
+  visit?: VisitWish
   /** What is awaited in place of targets with positions. */
   awaited?: { name: string; event: string; trigger: string; reactionHours: number; triggers: number }
 }
@@ -75,19 +78,23 @@ export const inReview: readonly SeedProposal[] = [
     46,
     8.4,
   ),
-  p(
-    'The reddest hosts of supernovae at z = 1',
-    passing,
-    'Oda Kestrelsen',
-    ['Rhea Aldanmarsh'],
-    'lantern-z',
-    null,
-    [0.9, 1.1],
-    [22.4, 23.2],
-    2,
-    30,
-    8.2,
-  ),
+  {
+    ...p(
+      'The reddest hosts of supernovae at z = 1',
+      passing,
+      'Oda Kestrelsen',
+      ['Rhea Aldanmarsh'],
+      'lantern-z',
+      null,
+      [0.9, 1.1],
+      [22.4, 23.2],
+      2,
+      30,
+      8.2,
+    ),
+    // Nights of the call lie apart, so a visit in a row would find none.
+    visit: { nights: 2, part: 'first', together: false },
+  },
   p(
     'Lyman-α halos of quiet galaxies at z = 2.4',
     high,

@@ -8,6 +8,7 @@ import { markSectionDone } from '../../../lib/domain/proposals/markSectionDone.t
 import { saveQuestion } from '../../../lib/domain/proposals/saveQuestion.ts'
 import { saveQuestionSchema, sections } from '../../../lib/domain/proposals/schema.ts'
 import { readContents } from '../../../lib/domain/proposals/readContents.ts'
+import { instrumentsUsed } from '../../../lib/domain/submission/rules.ts'
 import { saveGroup } from '../../../lib/domain/targetGroups/saveGroup.ts'
 import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
 import { targetRowSchema, type TargetRow } from '../../../lib/domain/targets/schema.ts'
@@ -18,6 +19,7 @@ import { addObservation } from '../../../lib/domain/observations/addObservation.
 import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
 import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
 import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
+import { saveWish } from '../../../lib/domain/wishes/saveWish.ts'
 import { restLines } from '../../../lib/science/light/index.ts'
 import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
 import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
@@ -135,6 +137,7 @@ export async function writeProposal(
     })
   if (seed.group) await makeGroup(lead, reference, seed.group)
   await askForHours(lead, reference, seed, facility)
+  if (seed.visit) await wishForVisit(lead, reference, seed.visit)
   const hours = computeProposal(await readContents(lead.db, reference)).askedSeconds / 3600
   await saveQuestion(
     lead,
@@ -187,6 +190,16 @@ async function makeGroup(
     ...{ reference, id: null, version: 0 },
     group: { ...group, targetIds: targets.map(({ id }) => id) },
   })
+}
+
+async function wishForVisit(
+  lead: Awaited<ReturnType<Teller['as']>>,
+  reference: string,
+  visit: NonNullable<SeedProposal['visit']>,
+): Promise<void> {
+  const { modes: offered, observations } = await readContents(lead.db, reference)
+  for (const instrumentId of instrumentsUsed({ modes: offered, observations }))
+    await saveWish(lead, { reference, instrumentId, version: 0, wish: { leastSeconds: null, visit } })
 }
 
 /** One observation a target, deep enough to need the hours the proposal is about. */

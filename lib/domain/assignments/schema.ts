@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { panelKeySchema, rowKey } from '../panels/schema'
-import { mostReaders } from './mostReaders'
+import { mostReaders } from './limits'
 
 export const seats = ['first', 'second', 'reader'] as const
 export type Seat = (typeof seats)[number]

@@ -24,6 +24,8 @@ export async function whyNotChosen(
   if (choice !== 'must') return null
   const impossible = planned.wanted.find((line) => line.proposalId === id && !line.possible)
   if (impossible) return `${impossible.instrument} was assessed as not possible for ${reviewNumber}.`
+  if (planned.visits.notPlaced.some(({ proposal }) => proposal === id))
+    return `${reviewNumber} must be given time, but its visit finds no nights that suit it and that nobody before it has.`
   const { conflict } = planned.asked
   return conflict.length > 0 ? conflictInWords(conflict.map(numberOf)) : null
 }

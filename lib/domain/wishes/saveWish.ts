@@ -12,7 +12,7 @@ import { openForEditing } from '../proposals/openProposal'
 import { staleProposal } from '../proposals/staleProposal'
 import type { ServiceWish } from '../proposals/types'
 import type { SaveWishInput } from './schema'
-import { wishRow } from './wishRow'
+import { wishRow } from './wishForm'
 
 /** Says how a proposal wishes to be given time on one of its instruments: the least of use, in the queue or on a visit. */
 export function saveWish(ctx: Context, input: SaveWishInput): Promise<ServiceWish> {

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it } from 'vitest'
 import { standingHalves } from '@/db/queries/visits'
 import { startReview } from '@/lib/domain/assignments/startReview'
 import { setNights } from '@/lib/domain/calendar/setNights'
+import { chooseNights } from '@/lib/domain/decisions/chooseNights'
 import { readAwardedNights } from '@/lib/domain/decisions/readAwardedNights'
 import { readNights } from '@/lib/domain/decisions/readNights'
 import { readOutcome } from '@/lib/domain/decisions/readOutcome'
@@ -127,6 +128,28 @@ describe('visits in the suggestion', () => {
     expect((await lineOf(p[2]))?.suggestedSeconds).toBeGreaterThan(8 * h)
     await draw(1)
     expect(await lineOf(p[2])).toMatchObject({ suggestedSeconds: 0, whyNot: { reason: 'below-line' } })
+  })
+})
+
+describe('visits of proposals that must be given time', () => {
+  const choose = (proposal: PanelProposalMade) =>
+    chooseNights(call.as(call.chair), {
+      ...{ panelId: call.panelId, proposalId: proposal.id, choice: 'must' },
+      reason: 'The director has promised these nights.',
+    })
+
+  it('come first, below the line too', async () => {
+    await wish(p[0], { nights: 9, part: 'whole', together: true })
+    await wish(p[2], { nights: 6, part: 'whole', together: true })
+    await draw(1)
+    await choose(p[2])
+    expect((await lineOf(p[2]))?.suggestedEvenings.split(', ')).toHaveLength(6)
+    expect(await lineOf(p[0])).toMatchObject({ suggestedSeconds: 0, whyNot: { reason: 'nights-taken' } })
+  })
+
+  it('cannot be laid down where no night suits them', async () => {
+    await wish(p[2], { nights: 30, part: 'whole', together: true })
+    expect((await refused(choose(p[2]))).fieldErrors['choice']).toMatch(/its visit finds no nights/)
   })
 })
 
