@@ -11,7 +11,7 @@ import { TextAreaField } from '@/components/forms/TextAreaField'
 import { useActionForm } from '@/components/forms/useActionForm'
 import { showToast } from '@/components/ui/showToast'
 import { openRepairSchema } from '@/lib/domain/papers/repairSchema'
-import type { Paper } from '@/lib/domain/proposals/types'
+import type { Paper } from '@/lib/domain/proposals/writingTypes'
 
 interface RepairFormProps {
   reference: string

@@ -1,7 +1,7 @@
 import { SectionHeading } from '@/components/ui/SectionHeading'
 import { TextLink } from '@/components/ui/TextLink'
 import type { ActionResult } from '@/lib/actions/result'
-import type { Paper } from '@/lib/domain/proposals/types'
+import type { Paper } from '@/lib/domain/proposals/writingTypes'
 import { countInWords, formatBytes, formatUtc } from '@/lib/format'
 import { paths } from '@/lib/paths'
 import { PaperUpload } from './PaperUpload'

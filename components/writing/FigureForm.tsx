@@ -6,7 +6,7 @@ import { TextAreaField } from '@/components/forms/TextAreaField'
 import { TextField } from '@/components/forms/TextField'
 import { StaleChoice } from '@/components/proposals/StaleChoice'
 import { useAutosavedForm } from '@/components/proposals/useAutosavedForm'
-import type { Figure } from '@/lib/domain/proposals/types'
+import type { Figure } from '@/lib/domain/proposals/writingTypes'
 import { figureWordsSchema } from '@/lib/domain/writings/schema'
 import type { FigureActions } from './figureActions'
 

@@ -1,4 +1,4 @@
-import type { Figure } from '@/lib/domain/proposals/types'
+import type { Figure } from '@/lib/domain/proposals/writingTypes'
 import { maxFigureBytes } from '@/lib/domain/writings/limits'
 import { countInWords, formatBytes, formatNumber } from '@/lib/format'
 import { paths } from '@/lib/paths'

@@ -6,7 +6,7 @@ import { TakeInFile } from '@/components/forms/TakeInFile'
 import { TextAreaField } from '@/components/forms/TextAreaField'
 import { StaleChoice } from '@/components/proposals/StaleChoice'
 import { useAutosavedForm } from '@/components/proposals/useAutosavedForm'
-import type { Writing } from '@/lib/domain/proposals/types'
+import type { Writing } from '@/lib/domain/proposals/writingTypes'
 import { writingSchema } from '@/lib/domain/writings/schema'
 import type { SaveWriting } from './TextForm'
 

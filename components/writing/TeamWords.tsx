@@ -1,6 +1,6 @@
 import { BarNote } from '@/components/ui/BarNote'
 import { SectionHeading } from '@/components/ui/SectionHeading'
-import type { Writing } from '@/lib/domain/proposals/types'
+import type { Writing } from '@/lib/domain/proposals/writingTypes'
 import { maxTeamWords } from '@/lib/domain/writings/limits'
 import { formatNumber } from '@/lib/format'
 import { TextForm, type SaveWriting } from './TextForm'

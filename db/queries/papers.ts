@@ -1,4 +1,4 @@
-import type { Paper } from '../../lib/domain/proposals/types.ts'
+import type { Paper } from '../../lib/domain/proposals/writingTypes.ts'
 import type { Database } from '../client.ts'
 import { utcNow } from '../utcNow.ts'
 

@@ -13,18 +13,14 @@ import { saveGroup } from '../../../lib/domain/targetGroups/saveGroup.ts'
 import { addTarget } from '../../../lib/domain/targets/addTarget.ts'
 import { targetRowSchema, type TargetRow } from '../../../lib/domain/targets/schema.ts'
 import { emptyTargetRow } from '../../../lib/domain/targets/targetRow.ts'
-import { defaultConstraints } from '../../../lib/domain/observations/defaultConstraints.ts'
-import { saveConstraintSet } from '../../../lib/domain/observations/saveConstraintSet.ts'
-import { addObservation } from '../../../lib/domain/observations/addObservation.ts'
 import { computeProposal } from '../../../lib/domain/observations/computeProposal.ts'
-import { saveObservation } from '../../../lib/domain/observations/saveObservation.ts'
-import { observationRowSchema } from '../../../lib/domain/observations/schema.ts'
 import { saveWish } from '../../../lib/domain/wishes/saveWish.ts'
 import { restLines } from '../../../lib/science/light/index.ts'
 import { submitProposal } from '../../../lib/domain/submission/submitProposal.ts'
 import { formatDeclination, formatRightAscension } from '../../../lib/format/sexagesimal.ts'
 import type { SeededCall } from '../calls.ts'
 import type { Facility } from '../calls.ts'
+import { askForHours, faintFrom } from './askForHours.ts'
 import { justify } from './justify.ts'
 import type { SeedProposal } from './proposalData.ts'
 import type { Dice } from './random.ts'
@@ -98,9 +94,6 @@ function targetRow(seed: SeedProposal, chance: Dice, raHours: [number, number], 
   }
   return targetRowSchema.parse(row)
 }
-
-/** Magnitude from which a source counts as faint. */
-const faintFrom = 20
 
 /** Writes a proposal from its first line as its investigators would, and sends it unless it is to stay a draft. */
 export async function writeProposal(
@@ -200,57 +193,4 @@ async function wishForVisit(
   const { modes: offered, observations } = await readContents(lead.db, reference)
   for (const instrumentId of instrumentsUsed({ modes: offered, observations }))
     await saveWish(lead, { reference, instrumentId, version: 0, wish: { leastSeconds: null, visit } })
-}
-
-/** One observation a target, deep enough to need the hours the proposal is about. */
-async function askForHours(
-  lead: Awaited<ReturnType<Teller['as']>>,
-  reference: string,
-  seed: SeedProposal,
-  facility: Facility,
-): Promise<void> {
-  const modeId = facility.modeIds.get(seed.mode) ?? 0
-  const isFaint = seed.magnitude[0] >= faintFrom
-  const set = { ...defaultConstraints, ...(isFaint ? { name: 'Dark time', moon: 'dark' as const } : {}) }
-  const { id: constraintSetId } = await saveConstraintSet(lead, { reference, id: null, version: 0, set })
-  const row = (targetId: number, wantedSnr: number, askedHours: number) =>
-    observationRowSchema.parse({
-      targetId,
-      modeId,
-      constraintSetId,
-      wantedSnr: wantedSnr.toFixed(1),
-      snrPer: seed.line ? 'resolution-element' : 'image',
-      feature: seed.line ?? '',
-      ownName: '',
-      ownRestA: '',
-      askedHours: askedHours.toFixed(1),
-    })
-  const each = (seed.hours / seed.targets) * 3600
-  const { targets } = await readContents(lead.db, reference)
-  for (const target of targets) {
-    let wanted = 10
-    let observation = await addObservation(lead, { reference, row: row(target.id, wanted, each / 3600) })
-    const save = async (askedHours: number) => {
-      const change = { reference, id: observation.id, version: observation.version }
-      observation = await saveObservation(lead, { ...change, row: row(target.id, wanted, askedHours) })
-    }
-    let possible = 0
-    for (let round = 0; round < 9; round += 1) {
-      const computed = computeProposal(await readContents(lead.db, reference))
-      const needed = computed.observations.find((one) => one.observationId === observation.id)?.neededSeconds
-      if (needed && (round > 5 || Math.abs(needed / each - 1) < 0.2)) {
-        // Whoever needs more than the proposal is about asks for that much and no more.
-        await save(Math.ceil(Math.min(needed, 1.2 * each) / 360) / 10)
-        break
-      }
-      if (needed) {
-        possible = wanted
-        wanted *= Math.min(4, Math.max(0.4, Math.sqrt(each / needed)))
-      } else {
-        // The sky's own residue forbids this depth: go back towards one that can be reached.
-        wanted = possible > 0 ? (round > 5 ? possible : (possible + wanted) / 2) : wanted * 0.6
-      }
-      await save(each / 3600)
-    }
-  }
 }

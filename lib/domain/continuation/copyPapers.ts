@@ -3,7 +3,7 @@ import { Refusal } from '@/lib/errors'
 import type { Context } from '../context'
 import { newObjectKey } from '../objects/objectKey'
 import { storedBytes } from '../papers/storedBytes'
-import type { Paper } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 
 export interface CopiedPaper {
   paper: Paper

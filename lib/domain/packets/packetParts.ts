@@ -1,6 +1,6 @@
 import type { Context } from '../context'
 import { storedBytes } from '../papers/storedBytes'
-import type { Figure } from '../proposals/types'
+import type { Figure } from '../proposals/writingTypes'
 import type { PacketParts } from './makePacket'
 
 interface Stored {

@@ -1,5 +1,5 @@
 import type { CallKind } from '../calls/types'
-import type { Paper } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 
 /** The largest document taken, in bytes: 20 MB. */
 export const maxPaperBytes = 20_000_000

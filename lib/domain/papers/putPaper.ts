@@ -1,7 +1,7 @@
 import { insertPaper, supersedePapers } from '@/db/queries/papers'
 import { insertStoredObject } from '@/db/queries/storedObjects'
 import type { Context } from '../context'
-import type { Paper } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 import type { ReceivedFile } from './receiveFile'
 
 /** Writes the rows of a document just received; the one of its kind that stood is superseded, and kept. */

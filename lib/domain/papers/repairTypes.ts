@@ -1,4 +1,4 @@
-import type { Paper } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 
 /** A paper of a sent proposal, opened by the office for one replacement. */
 export interface PaperRepair {

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
-import type { Paper } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 
 /** The bytes of a stored document, checked against the fingerprint taken when it was kept. */
 export async function storedBytes(

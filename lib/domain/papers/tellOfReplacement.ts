@@ -4,7 +4,8 @@ import type { Context } from '../context'
 import { paperReplaced } from '../outbox/letters/paperReplaced'
 import { paperReplacedForReader } from '../outbox/letters/paperReplacedForReader'
 import { queueLetter } from '../outbox/queueLetter'
-import type { Paper, ProposalContents } from '../proposals/types'
+import type { ProposalContents } from '../proposals/types'
+import type { Paper } from '../proposals/writingTypes'
 import type { Submission } from '../submission/freezeVersion'
 
 /** Confirms the new version to everyone named on it, and tells its reviewers, by review number, to read again. */

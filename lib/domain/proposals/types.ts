@@ -1,5 +1,6 @@
 import type { Call, CallKind } from '../calls/types'
 import type { ModeRecord, SiteRecord } from '../facility/types'
+import type { Figure, Paper, Writings } from './writingTypes'
 
 export type ProposalState =
   'draft' | 'submitted' | 'under-review' | 'awarded' | 'reserve' | 'declined' | 'withdrawn' | 'lapsed'
@@ -161,45 +162,6 @@ export interface ServiceWish {
   /** Null where observatory staff are to observe, in the queue. */
   visit: VisitWish | null
   version: number
-}
-
-export interface Paper {
-  id: number
-  kind: 'justification' | 'team-expertise'
-  fileName: string
-  pages: number
-  sizeBytes: number
-  sha256: string
-  objectKey: string
-  uploadedAt: Date
-}
-
-export type WritingPart = 'justification' | 'references' | 'team'
-
-/** A text written here; version 0 when nothing was ever written. */
-export interface Writing {
-  text: string
-  version: number
-}
-
-/** The justification (Markdown with TeX), its references (BibTeX), and the words on the team. */
-export type Writings = Record<WritingPart, Writing>
-
-export interface Figure {
-  id: number
-  /** What the text calls it: `[@fig:label]`. */
-  label: string
-  caption: string
-  fileName: string
-  widthPx: number
-  heightPx: number
-  /** From 1. */
-  position: number
-  version: number
-  sizeBytes: number
-  sha256: string
-  objectKey: string
-  contentType: 'image/png' | 'image/jpeg'
 }
 
 export interface ChosenCosmology {

@@ -1,4 +1,4 @@
-import type { Writings } from './types'
+import type { Writings } from './writingTypes'
 
 const none = { text: '', version: 0 } as const
 

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import { countWords } from '@/lib/writing/countWords'
 import { parseText } from '@/lib/writing/parseText'
-import type { WritingPart } from '../proposals/types'
+import type { WritingPart } from '../proposals/writingTypes'
 import { readBibtex } from './readBibtex'
 
 /** What the logbook keeps of a text, which itself is kept in the versions that were sent. */

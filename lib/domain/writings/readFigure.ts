@@ -6,7 +6,7 @@ import { refuse } from '@/lib/errors'
 import type { Context } from '../context'
 import { storedBytes } from '../papers/storedBytes'
 import { mayReadProposal } from '../proposals/policy'
-import type { Figure } from '../proposals/types'
+import type { Figure } from '../proposals/writingTypes'
 
 /** The picture of a figure that stands, for the investigators of its proposal and the office. */
 export async function readFigure(

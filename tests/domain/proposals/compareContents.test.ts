@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { compareContents } from '@/lib/domain/proposals/history/compareContents'
-import type { Figure, ProposalContents, TargetGroup } from '@/lib/domain/proposals/types'
+import type { ProposalContents, TargetGroup } from '@/lib/domain/proposals/types'
+import type { Figure } from '@/lib/domain/proposals/writingTypes'
 import { contents, target } from '../../support/contents'
 
 const before = contents()

@@ -4,7 +4,8 @@ import { compareTexts, type Difference } from '@/lib/writing/compareTexts'
 import type { ActingContext } from '../../context'
 import type { ProposalComputation } from '../../observations/types'
 import { mayReadProposal } from '../policy'
-import type { ProposalContents, WritingPart } from '../types'
+import type { ProposalContents } from '../types'
+import type { WritingPart } from '../writingTypes'
 import { compareContents, type ThingChange } from './compareContents'
 
 type Sums = Pick<ProposalComputation, 'askedSeconds' | 'neededSeconds' | 'verdict'>
