@@ -8,7 +8,7 @@ export function ChangeList({ changes, now }: { changes: readonly Change[]; now: 
       {changes.map((change, index) => (
         <li
           key={`${change.at}-${index}`}
-          className="grid grid-cols-[5.5rem_minmax(0,1fr)] gap-x-2 border-t border-rule py-2"
+          className="grid grid-cols-[7rem_minmax(0,1fr)] gap-x-2 border-t border-rule py-2"
         >
           <time dateTime={change.at} className="text-muted">
             {changeTime(new Date(change.at), now)}

@@ -142,7 +142,7 @@ it('keeps what is awaited with its row, and says that nothing can be told of its
   const user = userEvent.setup()
   const opportunity = { event: 'Kilonova', trigger: 'A burst', reactionSeconds: 7200, triggers: 3 }
   const awaited = target({ opportunity, raTyped: '', decTyped: '', raDeg: null, decDeg: null })
-  const kind = { ...contents().kind, kind: 'opportunity' }
+  const kind = { ...contents().kind, takesAwaited: true }
   const { save } = show({}, contents({ kind, targets: [awaited] }))
   expect(screen.getByText(/No position yet: when it is up cannot be judged/)).toBeDefined()
   expect(screen.getByText('each of 3')).toBeDefined()

@@ -149,5 +149,5 @@ export function checksWords(computation: ProposalComputation): string {
   const first = computation.observations
     .flatMap(({ checks }) => checks)
     .find(({ verdict }) => verdict !== 'feasible')
-  return first ? `${count}; ${first.why}` : count
+  return first ? `${count}. ${first.why}` : count
 }
