@@ -1,4 +1,5 @@
 import { approveDecisions } from '../../../lib/domain/decisions/approveDecisions.ts'
+import { openDecision } from '../../../lib/domain/decisions/openDecision.ts'
 import { prepareDecisions } from '../../../lib/domain/decisions/prepareDecisions.ts'
 import { releaseDecisions } from '../../../lib/domain/decisions/releaseDecisions.ts'
 import { takePlan } from '../../../lib/domain/decisions/takePlan.ts'
@@ -91,7 +92,9 @@ export async function decideTwoPanels(story: Teller, call: TwoPanelsCall): Promi
       .where({ 'p.panel_id': panelId })
       .whereNull('d.superseded_at')
       .select('d.proposal_id as proposalId', 'd.version')
-    await approveDecisions(await story.as('Maud Ferrisay'), { panelId, decisions })
+    const office = await story.as('Maud Ferrisay')
+    for (const decision of decisions) await openDecision(office, { panelId, ...decision })
+    await approveDecisions(office, { panelId, decisions })
   }
   await story.at(call.dates.letters_at)
   for (const [panelId, name] of panels)
