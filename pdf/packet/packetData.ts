@@ -1,4 +1,5 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
+import { wishLines } from '@/lib/domain/wishes/wishLines'
 import {
   formatCalendarDate,
   formatHoursFromSeconds,
@@ -27,6 +28,7 @@ export function seasonWords(from: string, to: string): string {
 
 function factsOf(proposal: AnonymousProposal): FactRow[] {
   const { computation, modes, constraintSets, observations, cosmology } = proposal
+  const wishes = wishLines(proposal)
   const sets = constraintSets.filter(({ id }) => observations.some((o) => o.constraintSetId === id))
   const unique = (values: readonly string[]) => formatList([...new Set(values)])
   return [
@@ -39,6 +41,18 @@ function factsOf(proposal: AnonymousProposal): FactRow[] {
     { term: 'Instrument', value: unique(modes.map(({ instrument }) => instrument.name)) },
     { term: 'Asked', value: formatHoursFromSeconds(computation.askedSeconds), bold: true },
     { term: 'Needed', value: formatHoursFromSeconds(computation.neededSeconds), bold: true },
+    {
+      term: 'Visit',
+      value: formatList(
+        wishes.flatMap(({ instrument, visit }) => (visit ? [`${visit} with ${instrument}`] : [])),
+      ),
+    },
+    {
+      term: 'Of use from',
+      value: formatList(
+        wishes.flatMap(({ instrument, least }) => (least ? [`${least} of ${instrument}`] : [])),
+      ),
+    },
     { term: 'Moon', value: unique(sets.map((set) => moons[set.moon])) },
     {
       term: 'Image, zenith',

@@ -1,6 +1,7 @@
 import type { ProposalContents } from '../proposals/types'
 import { notesOnModes } from './notesOnModes'
 import { notesOnRules } from './notesOnRules'
+import { notesOnWriting } from './notesOnWriting'
 import type { CarriedNote } from './types'
 
 /** Papers that came along, or did not, and people who are asked anew. */
@@ -41,7 +42,10 @@ function notesOnPapersAndPeople(old: ProposalContents, now: ProposalContents): C
  * note goes when its cause is mended, and all of a section's go when the author calls that section done.
  */
 export function carriedNotes(old: ProposalContents, now: ProposalContents): CarriedNote[] {
-  return [...notesOnRules(old, now), ...notesOnModes(old, now), ...notesOnPapersAndPeople(old, now)].filter(
-    ({ section }) => !now.sectionsDone.includes(section),
-  )
+  return [
+    ...notesOnRules(old, now),
+    ...notesOnModes(old, now),
+    ...notesOnPapersAndPeople(old, now),
+    ...notesOnWriting(old, now),
+  ].filter(({ section }) => !now.sectionsDone.includes(section))
 }

@@ -1,11 +1,10 @@
 import { insertConstraintSet, insertObservation } from '@/db/queries/observations'
-import { insertPaper } from '@/db/queries/papers'
-import { insertStoredObject } from '@/db/queries/storedObjects'
+import { insertGroup, putInGroup } from '@/db/queries/targetGroups'
 import { insertTarget } from '@/db/queries/targets'
+import { insertWish } from '@/db/queries/wishes'
 import type { ActingContext } from '../context'
 import type { Call } from '../calls/types'
 import type { ConstraintSet, ProposalContents } from '../proposals/types'
-import type { CopiedPaper } from './copyPapers'
 
 /** Dates of an earlier season mean nothing in this one. */
 export function datesIn(
@@ -16,11 +15,11 @@ export function datesIn(
   return isOutside ? { dateFrom: null, dateTo: null } : { dateFrom, dateTo }
 }
 
-/** Writes targets, conditions, observations and documents of an earlier proposal into a new one. */
+/** Writes targets with their groups, conditions, observations and wishes of an earlier proposal into a new one. */
 export async function carryContents(
   tx: ActingContext,
   old: ProposalContents,
-  into: { proposalId: number; call: Call; papers: readonly CopiedPaper[] },
+  into: { proposalId: number; call: Call },
 ): Promise<void> {
   const { proposalId } = into
   const targets = new Map<number, number>()
@@ -37,22 +36,15 @@ export async function carryContents(
     if (targetId === undefined || constraintSetId === undefined) continue
     await insertObservation(tx.db, proposalId, { ...observation, targetId, constraintSetId })
   }
-  for (const { paper, key } of into.papers) {
-    const { sha256, sizeBytes, kind, fileName, pages } = paper
-    const objectId = await insertStoredObject(tx.db, {
-      key,
-      sha256,
-      sizeBytes,
-      contentType: 'application/pdf',
-      purpose: 'paper',
-    })
-    await insertPaper(tx.db, {
-      proposalId,
-      objectId,
-      kind,
-      fileName,
-      pages,
-      uploadedBy: tx.actor.personId,
-    })
+  for (const { id: _id, version: _version, ...group } of old.groups) {
+    const members = old.targets.filter((target) => target.group === group.name)
+    const groupId = await insertGroup(tx.db, proposalId, group)
+    await putInGroup(
+      tx.db,
+      members.flatMap(({ id }) => targets.get(id) ?? []),
+      groupId,
+    )
   }
+  for (const { instrumentId, leastSeconds, visit } of old.wishes)
+    await insertWish(tx.db, proposalId, instrumentId, { leastSeconds, visit })
 }

@@ -19,7 +19,8 @@ import { contentsOf, readContents } from '../proposals/readContents'
 import type { ProposalContents } from '../proposals/types'
 import { carryContents } from './carryContents'
 import { carryPeople } from './carryPeople'
-import { copyPapers } from './copyPapers'
+import { carryWriting } from './carryWriting'
+import { copyFiles } from './copyFiles'
 import { mayContinue } from './policy'
 import type { continueSchema } from './schema'
 
@@ -66,7 +67,8 @@ export async function continueProposal(
   const before = await readContents(ctx.db, input.reference)
   authorize(mayContinue(ctx.actor, before))
   await openKind(ctx, before, input.kindId)
-  const papers = await copyPapers(ctx, before.papers)
+  const papers = await copyFiles(ctx, before.papers, () => 'application/pdf')
+  const figures = await copyFiles(ctx, before.figures, ({ contentType }) => contentType)
 
   return inTransaction(ctx, async (tx) => {
     const row = await findProposal(tx.db, before.id)
@@ -101,7 +103,8 @@ export async function continueProposal(
       createdBy: tx.actor.personId,
     })
     await carryPeople(tx, old.people, { id, reference, title: old.title, call, kind, now })
-    await carryContents(tx, old, { proposalId: id, call, papers })
+    await carryContents(tx, old, { proposalId: id, call })
+    await carryWriting(tx, old, { proposalId: id, papers, figures })
     await writeLogbook(tx, {
       action: 'proposal.continue',
       subject: { kind: 'proposal', id: reference },

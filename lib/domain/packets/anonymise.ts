@@ -2,7 +2,14 @@ import type { Reference } from '@/lib/writing/references'
 import type { Call } from '../calls/types'
 import type { ModeRecord, SiteRecord } from '../facility/types'
 import type { ProposalComputation } from '../observations/types'
-import type { ChosenCosmology, ConstraintSet, Observation, Target, TargetGroup } from '../proposals/types'
+import type {
+  ChosenCosmology,
+  ConstraintSet,
+  Observation,
+  ServiceWish,
+  Target,
+  TargetGroup,
+} from '../proposals/types'
 import type { Snapshot } from '../submission/snapshot'
 import { readBibtex } from '../writings/readBibtex'
 
@@ -27,6 +34,8 @@ export interface AnonymousProposal {
   targets: Target[]
   constraintSets: ConstraintSet[]
   observations: Observation[]
+  /** How time is wished for, by instrument. */
+  wishes: ServiceWish[]
   /** Pages of the justification; null when none is attached. */
   justification: { pages: number } | null
   /** The justification written here; null when a document stands in its place, or nothing is written. */
@@ -82,6 +91,7 @@ export function anonymise({ contents, computation, engineVersion }: Snapshot): A
     targets: contents.targets,
     constraintSets: contents.constraintSets,
     observations: contents.observations,
+    wishes: contents.wishes,
     justification: justification ? { pages: justification.pages } : null,
     written: writtenOf(contents),
     computation,

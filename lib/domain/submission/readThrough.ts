@@ -7,6 +7,7 @@ import { needOf } from '../observations/needOf'
 import type { ProposalComputation } from '../observations/types'
 import { leftOut, namedOnSending } from '../proposals/namedOnSending'
 import type { ProposalContents } from '../proposals/types'
+import { wishLines, type WishLine } from '../wishes/wishLines'
 import { leftOutWords } from './leftOutWords'
 
 export interface ReadThroughRow {
@@ -76,6 +77,9 @@ function observingWords({ observations, modes, constraintSets }: ProposalContent
   return [...instruments, `S/N ${formatList(snr)}`, ...skies].join('; ')
 }
 
+const wishWords = ({ visit, least }: WishLine) =>
+  `${visit ? `a visit of ${visit}` : 'in the queue'}${least ? `; of use from ${least}` : ''}`
+
 /** Everything a proposal says, in the order its questions are asked, each row with the page that changes it. */
 export function readThrough(
   contents: ProposalContents,
@@ -119,7 +123,13 @@ export function readThrough(
         row('Cosmology', 'cosmology', cosmologyWords(contents)),
       ],
     },
-    { question: 'What must be measured?', rows: [row('Observing', 'observing', observingWords(contents))] },
+    {
+      question: 'What must be measured?',
+      rows: [
+        row('Observing', 'observing', observingWords(contents)),
+        ...wishLines(contents).map((line) => row(line.instrument, 'observing', wishWords(line))),
+      ],
+    },
     {
       question: 'Can it be done?',
       rows: [

@@ -75,3 +75,21 @@ describe('magnitudes that were carried', () => {
     expect(dataOf({}).carried).toEqual([expect.stringContaining('taken as flat in f_ν')])
   })
 })
+
+// Seen to fail with the wish of an instrument nobody asks for told too.
+describe('how time is wished for', () => {
+  const { instrument } = slitMode
+  const visit = { nights: 3, part: 'first', together: true } as const
+  const wish = { id: 1, instrumentId: instrument.id, leastSeconds: 5400, visit, version: 1 }
+  const valueOf = (over: Partial<ProposalContents>, term: string) =>
+    dataOf(over).facts.find((fact) => fact.term === term)?.value
+
+  it('is told with the facts, where something is said', () => {
+    const over = { wishes: [wish, { ...wish, id: 2, instrumentId: instrument.id + 99 }] }
+    expect(valueOf(over, 'Visit')).toBe(`three first halves of nights in a row with ${instrument.name}`)
+    expect(valueOf(over, 'Of use from')).toMatch(new RegExp(`^1\\.5.h of ${instrument.name}$`))
+    expect(valueOf({ wishes: [] }, 'Visit')).toBeUndefined()
+    expect(valueOf({ wishes: [{ ...wish, visit: null }] }, 'Visit')).toBeUndefined()
+    expect(valueOf({ wishes: [wish], observations: [] }, 'Visit')).toBeUndefined()
+  })
+})

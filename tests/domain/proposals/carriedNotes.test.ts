@@ -45,6 +45,24 @@ describe('what is not as it was in the earlier call', () => {
     expect(sentences[1]).toContain('The record of the Aldous has changed from version 1 to 2.')
   })
 
+  it('is a text that came along, its limit, and a figure that did not', () => {
+    const writings = { ...base.writings, justification: { text: 'Ice as in [@fig:ice].', version: 1 } }
+    const ice = { label: 'ice' } as (typeof base.figures)[number]
+    const before = { ...old, papers: [], writings, figures: [ice] }
+    const kind = { ...base.kind, wordLimit: 2 }
+    const after = now({ papers: [], writings, figures: [], kind })
+    const notes = said(after, before)
+    expect(notes).toEqual([
+      'papers: The justification is the one written for call 13. Read it through: season, hours and results may have moved on since.',
+      expect.stringMatching(
+        /^papers: A justification written here has at most 2 words in this call; it was .* Shorten it by /,
+      ),
+      'papers: The figure “ice” of call 13 is not here, and the text names it. Add it anew.',
+    ])
+    expect(said({ ...after, kind: base.kind, figures: [ice] }, before)).toHaveLength(1)
+    expect(said(now({ papers: [], figures: [] }), { ...before, writings: base.writings })).toEqual([])
+  })
+
   it('is a kind that is gone, and limits that shrank, with by how much', () => {
     const kind = {
       ...base.kind,

@@ -1,5 +1,11 @@
+import { createHash } from 'node:crypto'
 import { beforeEach, describe, expect, it } from 'vitest'
+import { insertFigure } from '@/db/queries/figures'
 import { findProposal } from '@/db/queries/proposals'
+import { insertStoredObject } from '@/db/queries/storedObjects'
+import { insertGroup, putInGroup } from '@/db/queries/targetGroups'
+import { insertWish } from '@/db/queries/wishes'
+import { putWriting } from '@/db/queries/writings'
 import type { Actor } from '@/lib/domain/actor'
 import { continueProposal } from '@/lib/domain/continuation/continueProposal'
 import { readContinuation } from '@/lib/domain/continuation/readContinuation'
@@ -43,7 +49,8 @@ beforeEach(async () => {
   next = await makeCall(db(), `${scenario.tag}b`, scenario, { month: '2028-01' })
 })
 
-// Seen to fail: without the programme, with people agreed at once, with the object shared, and without the lock's check.
+// Seen to fail: without the programme, with people agreed at once, with the object shared, without the lock's check,
+// and with the groups, the texts or the wishes left behind.
 describe('carrying a proposal on', () => {
   it('begins a draft of the same programme with all that it said', async () => {
     const { reference } = await carryOn()
@@ -96,6 +103,49 @@ describe('carrying a proposal on', () => {
       [was, is].map(({ papers }) => storedBytes(as(scenario.pi), papers[0] ?? { objectKey: '', sha256: '' })),
     )
     expect(Buffer.from(bytes[1] ?? [])).toEqual(Buffer.from(bytes[0] ?? []))
+  })
+
+  it('brings the texts, figures, groups and wishes along, each the new proposal’s own', async () => {
+    const { id, targets, modes } = await contents(scenario.reference)
+    const text = 'Why ice forms so early, see [@fig:ice].'
+    await putWriting(db(), { proposalId: id, part: 'justification', text, version: 0 })
+    await putWriting(db(), { proposalId: id, part: 'team', text: 'Two of us built it.', version: 0 })
+    const groupId = await insertGroup(db(), id, {
+      ...{ name: 'Ice', rule: 'at-least', atLeast: 1, hoursFor: 'at-least' },
+    })
+    await putInGroup(db(), [targets[0]?.id ?? 0], groupId)
+    const instrumentId = modes[0]?.instrument.id ?? 0
+    const wish = { leastSeconds: 5400, visit: { nights: 2, part: 'first', together: false } } as const
+    await insertWish(db(), id, instrumentId, wish)
+    const bytes = new TextEncoder().encode('a picture')
+    const sha256 = createHash('sha256').update(bytes).digest('hex')
+    await storage.put('old-figure', bytes, 'image/png')
+    const stored = { key: 'old-figure', sha256, sizeBytes: bytes.length, contentType: 'image/png' }
+    const objectId = await insertStoredObject(db(), { ...stored, purpose: 'figure' })
+    const drawn = {
+      label: 'ice',
+      caption: 'Ice.',
+      fileName: 'ice.png',
+      widthPx: 40,
+      heightPx: 30,
+      position: 1,
+    }
+    await insertFigure(db(), { proposalId: id, objectId, ...drawn })
+
+    const { reference } = await carryOn()
+    const [was, is] = [await contents(scenario.reference), await contents(reference)]
+    expect(is.writings).toEqual(was.writings)
+    expect(is.figures).toMatchObject([{ ...drawn, sha256, version: 1 }])
+    expect(is.figures[0]?.objectKey).not.toBe('old-figure')
+    expect(is.groups.map((group) => ({ ...group, id: 0 }))).toEqual(
+      was.groups.map((group) => ({ ...group, id: 0 })),
+    )
+    expect(is.groups[0]?.id).not.toBe(groupId)
+    expect(is.targets[0]?.group).toBe('Ice')
+    expect(is.wishes).toMatchObject([{ instrumentId, ...wish, version: 1 }])
+    expect(
+      await db()('targets').where({ group_id: groupId, proposal_id: is.id }).count({ n: '*' }).first(),
+    ).toEqual({ n: 0 })
   })
 
   it('asks for the paper anew where the store does not give it', async () => {
