@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { refuse } from '@/lib/errors'
+import { isCalendarDay } from '../calendarDay'
 import { exactly } from './exactly'
 
 const number = z.number('This is a number.')
@@ -42,8 +43,4 @@ export function requireOwnIds(targets: readonly { id: string }[]): void {
 
 export const evening = z
   .string('An evening date is written as 2027-07-01.')
-  .refine(
-    (text) =>
-      /^\d{4}-\d{2}-\d{2}$/.test(text) && new Date(`${text}T00:00:00Z`).toJSON()?.slice(0, 10) === text,
-    'An evening date is written as 2027-07-01.',
-  )
+  .refine(isCalendarDay, 'An evening date is written as 2027-07-01.')

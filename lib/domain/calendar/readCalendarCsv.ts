@@ -1,5 +1,6 @@
 import type { CallTelescope } from '@/db/queries/callTelescopes'
 import { formatList } from '@/lib/format'
+import { isCalendarDay } from '../calendarDay'
 import { nightUses, type NightUse } from '../calls/nightUseList'
 import { delimiterOf, readRecords } from '../targets/csv'
 import { calendarHeads } from './calendarFileView'
@@ -35,8 +36,7 @@ function readLine(
   if (!telescope)
     return `there is no telescope “${line.telescope}”; ${formatList(telescopes.map(({ name }) => name))} ${telescopes.length === 1 ? 'is' : 'are'} there`
   const date = line.evening
-  if (!/^\d{4}-\d{2}-\d{2}$/.test(date) || Number.isNaN(Date.parse(date)))
-    return `“${date}” is no evening; give it as year-month-day`
+  if (!isCalendarDay(date)) return `“${date}” is no evening; give it as year-month-day`
   if (date < season.from || date > season.to)
     return `${date} is no night of this call, which runs from ${season.from} to ${season.to}`
   if (same(line.use, 'none')) return { telescope, date, part: null }

@@ -1,12 +1,8 @@
 import { z } from 'zod'
+import { calendarDay } from '../calendarDay'
 import { nightUses } from '../calls/nightUseList'
 
 const onCall = { slug: z.string().min(1).max(60), version: z.number().int().positive() }
-
-const evening = z
-  .string()
-  .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give a date as year-month-day.')
-  .refine((text) => !Number.isNaN(Date.parse(text)), 'There is no such day.')
 
 const fraction = z
   .string()
@@ -32,8 +28,8 @@ const part = z.object({
 export const setNightsSchema = z.object({
   ...onCall,
   telescopeId: z.number().int().positive(),
-  from: evening,
-  to: evening,
+  from: calendarDay,
+  to: calendarDay,
   parts: z.array(part).max(12, 'A night has at most twelve parts.'),
   /** Those it was promised to agree that it is taken. */
   mayTakePromised: z.boolean(),

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { calendarDay } from '../calendarDay'
 import { moment } from './moment'
 
 const dateNames = {
@@ -52,13 +53,8 @@ export const saveDatesSchema = z
   })
   .superRefine(inOrder)
 
-const evening = z
-  .string()
-  .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give a date as year-month-day.')
-  .refine((text) => !Number.isNaN(Date.parse(text)), 'There is no such day.')
-
 export const planCallSchema = z
-  .object({ from: z.string().min(1).max(60), seasonFrom: evening, seasonTo: evening, ...dates })
+  .object({ from: z.string().min(1).max(60), seasonFrom: calendarDay, seasonTo: calendarDay, ...dates })
   .superRefine(inOrder)
   .superRefine((value, context) => {
     if (value.seasonFrom > value.seasonTo)

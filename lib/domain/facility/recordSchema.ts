@@ -1,14 +1,12 @@
 import { z } from 'zod'
+import { isCalendarDay } from '../calendarDay'
 
 /** First evening a version holds for, `2027-03-01`. */
 export const firstEvening = z
   .string()
   .trim()
   .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give the first evening as year-month-day.')
-  .refine((text) => {
-    const at = new Date(`${text}T00:00:00Z`)
-    return !Number.isNaN(at.getTime()) && at.toISOString().startsWith(text)
-  }, 'There is no such day.')
+  .refine(isCalendarDay, 'There is no such day.')
   .refine((text) => text >= '2000-01-01' && text < '2100-01-01', 'An evening lies between 2000 and 2099.')
 
 /** What every new version of a record says besides its facts. */

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { calendarDay } from '../calendarDay'
 
 const reference = z
   .string()
@@ -34,14 +35,6 @@ const oneLine = (limit: number, missing: string, long: string) =>
   z.string().trim().min(1, missing).max(limit, long)
 
 const reason = oneLine(300, 'Say why, in a sentence.', 'Keep the reason below 300 characters.')
-
-const day = z
-  .string()
-  .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give a date as year-month-day.')
-  .refine((text) => {
-    const at = new Date(`${text}T00:00:00Z`)
-    return !Number.isNaN(at.getTime()) && at.toISOString().startsWith(text)
-  }, 'There is no such day.')
 
 const amount = oneLine(20, 'Give the amount.', 'This is not an amount.')
 
@@ -79,7 +72,7 @@ export type AskForInvoiceForm = z.input<typeof askForInvoiceSchema>
 export const settleInvoiceSchema = z.object({
   number: billNumber,
   amount,
-  paidOn: day,
+  paidOn: calendarDay,
   bankReference: oneLine(140, 'Give the reference on the statement.', 'Keep it below 140 characters.'),
 })
 

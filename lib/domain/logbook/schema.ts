@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { isCalendarDay } from '../calendarDay'
 
 /** One row of the logbook in the office's table. */
 export const logbookRow = z.object({
@@ -19,7 +20,7 @@ const short = z.string().trim().max(80, 'At most 80 characters can be looked for
 const day = z
   .string()
   .trim()
-  .refine((text) => text === '' || z.iso.date().safeParse(text).success, 'A day is written as 2027-03-31.')
+  .refine((text) => text === '' || isCalendarDay(text), 'A day is written as 2027-03-31.')
   .optional()
 
 /** What narrows the logbook: everything optional, an empty text is nothing. */

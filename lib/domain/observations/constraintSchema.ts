@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { isCalendarDay } from '../calendarDay'
 import { typedNumber } from '../targets/typedNumber'
 import type { Conditions } from './seasonOf'
 
@@ -14,9 +15,7 @@ const evening = z
   .trim()
   .transform((text, ctx): string | null => {
     if (text === '') return null
-    const at = new Date(`${text}T00:00:00Z`)
-    const isReal = /^\d{4}-\d{2}-\d{2}$/.test(text) && at.toJSON()?.slice(0, 10) === text
-    if (isReal) return text
+    if (isCalendarDay(text)) return text
     ctx.addIssue({ code: 'custom', message: 'Write an evening as 2027-07-14.' })
     return z.NEVER
   })

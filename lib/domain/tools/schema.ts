@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { parseDeclination, parseRightAscension } from '@/lib/science/sky'
+import { isCalendarDay } from '../calendarDay'
 import { numberBetween, readable } from './texts'
 
 const DAY_MS = 86_400_000
@@ -8,9 +9,7 @@ const MOST_NIGHTS = 400
 
 /** An evening as the calendar writes it: 2027-08-01. */
 const evening = readable((text) => {
-  const isDate = /^\d{4}-\d{2}-\d{2}$/.test(text) && !Number.isNaN(Date.parse(`${text}T00:00:00Z`))
-  const isKept = isDate && new Date(`${text}T00:00:00Z`).toISOString().startsWith(text)
-  if (!isKept) return { ok: false, message: 'Write a date as 2027-08-01.' }
+  if (!isCalendarDay(text)) return { ok: false, message: 'Write a date as 2027-08-01.' }
   const year = Number(text.slice(0, 4))
   return year >= 1900 && year <= 2100
     ? { ok: true }

@@ -1,16 +1,11 @@
 import { z } from 'zod'
+import { isCalendarDay } from '../calendarDay'
 import type { NightHalf } from './types'
 
 export type EveningHalf = Pick<NightHalf, 'date' | 'half'>
 
 const entry = /^(\d{4}-\d{2}-\d{2})(?:\s+(first|second))?$/
 const halfNames = ['first', 'second'] as const
-
-/** Whether there is such a day: 30 February would be read as 2 March. */
-function isDay(date: string): boolean {
-  const at = new Date(`${date}T00:00:00Z`)
-  return date !== '' && !Number.isNaN(at.getTime()) && at.toISOString().startsWith(date)
-}
 
 /** Evenings as typed, a comma between them, `first` or `second` behind one for half of its night. */
 export const eveningsTyped = z
@@ -22,7 +17,7 @@ export const eveningsTyped = z
     for (const typed of text.split(/[,;\n]/).map((one) => one.trim())) {
       if (typed === '') continue
       const [, date = '', half] = entry.exec(typed) ?? []
-      if (!isDay(date)) {
+      if (!isCalendarDay(date)) {
         ctx.addIssue({
           code: 'custom',
           message: `Give evenings as year-month-day with commas between them: “${typed.slice(0, 40)}” is none.`,
