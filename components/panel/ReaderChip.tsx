@@ -43,7 +43,7 @@ export function ReaderChip(props: ReaderChipProps) {
             from: { assignmentId, proposalId: row.proposalId, reviewNumber: row.reviewNumber },
           }}
           label={`Move ${name} from ${row.reviewNumber} to another proposal`}
-          className="inline-flex items-center border-r border-rule px-0.5 text-muted hover:bg-wash max-md:hidden"
+          className="inline-flex min-h-6 w-6 items-center justify-center border-r border-rule text-muted hover:bg-wash max-md:hidden"
         >
           <GripVertical size={12} aria-hidden="true" />
         </DragHandle>
