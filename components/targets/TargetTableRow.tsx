@@ -100,7 +100,8 @@ function Row(props: TargetTableRowProps) {
           isWrong && 'is-attention',
         )}
       >
-        <td role="cell" className="w-7 text-muted max-sm:!hidden">
+        {/* As wide as with the bar of a row that is wrong: else one such row would set all the others anew. */}
+        <td role="cell" className="text-muted max-sm:!hidden sm:min-w-13">
           {number}
         </td>
         <th role="rowheader" scope="row" className="min-w-36">
