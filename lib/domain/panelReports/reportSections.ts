@@ -108,7 +108,7 @@ export function greySection({ ranking }: ReportFacts): ReportSection {
   return {
     heading: 'The grey zone',
     note: zone
-      ? `${formatList(grey)}, between ranks ${zone.first} and ${zone.last}, belong above the line with 20 to 80 chances in 100: the scores did not decide, the panel did.`
+      ? `${formatList(grey)}, ${zone.first === zone.last ? `rank ${zone.first}` : `between ranks ${zone.first} and ${zone.last}`}, ${grey.length === 1 ? 'belongs' : 'belong'} above the line with 20 to 80 chances in 100: the scores did not decide, the panel did.`
       : 'No proposal belongs above the line with 20 to 80 chances in 100: the scores decided.',
   }
 }
