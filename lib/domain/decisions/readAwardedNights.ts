@@ -32,6 +32,7 @@ function usableHours(contents: ProposalContents) {
         to: call.seasonTo,
         maxAirmass: conditionsOf(contents, observation).maxAirmass,
         twilightLimitDeg: mode.twilightLimitDeg,
+        telescope: mode.telescope,
       },
       [sky],
     )

@@ -24,6 +24,7 @@ export function windowsOf(
       to: contents.call.seasonTo,
       maxAirmass,
       twilightLimitDeg: mode?.twilightLimitDeg,
+      telescope: mode?.telescope,
       moon: { ...moonClassLimits[moonClass(moon)], minSeparationDeg: minMoonSeparationDeg },
     },
     [sky],
