@@ -1,5 +1,5 @@
 import type { AnonymousProposal } from '@/lib/domain/packets/anonymise'
-import { wishLines } from '@/lib/domain/wishes/wishLines'
+import type { WishLine } from '@/lib/domain/wishes/wishLines'
 import {
   formatCalendarDate,
   formatHoursFromSeconds,
@@ -26,9 +26,8 @@ export function seasonWords(from: string, to: string): string {
   return name(from) === name(to) ? `${name(from)} ${startYear}` : `${name(from)} to ${name(to)} ${startYear}`
 }
 
-function factsOf(proposal: AnonymousProposal): FactRow[] {
+function factsOf(proposal: AnonymousProposal, wishes: readonly WishLine[]): FactRow[] {
   const { computation, modes, constraintSets, observations, cosmology } = proposal
-  const wishes = wishLines(proposal)
   const sets = constraintSets.filter(({ id }) => observations.some((o) => o.constraintSetId === id))
   const unique = (values: readonly string[]) => formatList([...new Set(values)])
   return [
@@ -102,7 +101,7 @@ function carriedLines({ computation, targets }: AnonymousProposal): string[] {
 /** What a packet says, from a proposal without names; names are added by whoever may read them. */
 export function packetData(
   proposal: AnonymousProposal,
-  given: Pick<PacketData, 'label' | 'people' | 'rules'> & { required: number },
+  given: Pick<PacketData, 'label' | 'people' | 'rules'> & { required: number; wishes: readonly WishLine[] },
 ): PacketData {
   const { computation, call } = proposal
   return {
@@ -113,7 +112,7 @@ export function packetData(
     abstract: proposal.abstract,
     category: proposal.category,
     people: given.people,
-    facts: factsOf(proposal),
+    facts: factsOf(proposal, given.wishes),
     magnitudeHead: magnitudeHead(proposal),
     rows: targetRows(proposal),
     total: {

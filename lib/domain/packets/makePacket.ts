@@ -9,6 +9,7 @@ import { render } from '@/pdf/render'
 import { renderWritten } from '@/pdf/writing/renderWritten'
 import type { Snapshot } from '../submission/snapshot'
 import { needOf } from '../observations/needOf'
+import { wishLines } from '../wishes/wishLines'
 import { anonymise } from './anonymise'
 import { packetRules } from './packetRules'
 
@@ -38,7 +39,10 @@ function contentOf(input: PacketInput) {
   const proposal = anonymise(input.snapshot)
   const { targets, groups } = proposal
   const required = targets.filter((target) => needOf(target, groups) === 'required').length
-  return packetData(proposal, { label: labelOf(input), people, required, rules: packetRules(proposal) })
+  return packetData(proposal, {
+    ...{ label: labelOf(input), people, required },
+    ...{ rules: packetRules(proposal), wishes: wishLines(proposal) },
+  })
 }
 
 /** Hash of everything that goes into a packet: the same in gives the same packet, and its fingerprint. */

@@ -5,6 +5,7 @@ import { anonymise } from '@/lib/domain/packets/anonymise'
 import { packetRules } from '@/lib/domain/packets/packetRules'
 import type { Snapshot } from '@/lib/domain/submission/snapshot'
 import type { ProposalContents } from '@/lib/domain/proposals/types'
+import { wishLines } from '@/lib/domain/wishes/wishLines'
 import { packetData } from '@/pdf/packet/packetData'
 import { PacketDocument } from '@/pdf/packet/PacketDocument'
 import { render } from '@/pdf/render'
@@ -17,7 +18,7 @@ function dataOf(over: Partial<ProposalContents>) {
   const snapshot = { contents: whole, computation, engineVersion: computation.engineVersion } as Snapshot
   const proposal = anonymise(snapshot)
   const given = { label: '14-083', people: [], required: whole.targets.length }
-  return packetData(proposal, { ...given, rules: packetRules(proposal) })
+  return packetData(proposal, { ...given, rules: packetRules(proposal), wishes: wishLines(proposal) })
 }
 
 const law = { kind: 'power-law', index: -0.5, indexError: null } as const
