@@ -2,6 +2,7 @@
 
 import { useEffect, useRef, useState } from 'react'
 import type { UseFormRegisterReturn } from 'react-hook-form'
+import { typedInto } from './typedInto'
 
 /**
  * Keeps what was typed into a field before the page was alive: taking the page over writes a long text back as it was
@@ -32,14 +33,4 @@ export function useTypedEarly(id: string, take: (text: string) => void) {
       field.ref(element)
     },
   })
-}
-
-const ticked = new Set(['checkbox', 'radio', 'file'])
-
-/** What stands in a field of text, where it differs from what the server sent; the element still knows that. */
-function typedInto(element: Element | null): string | null {
-  const isText =
-    element instanceof HTMLTextAreaElement ||
-    (element instanceof HTMLInputElement && !ticked.has(element.type))
-  return isText && element.value !== element.defaultValue ? element.value : null
 }

@@ -7,7 +7,7 @@ import { classNames } from '@/components/ui/classNames'
 import { firstValues, LONGEST_PASTE } from '@/lib/domain/tools/yardstick/firstValues'
 import { MOST_ROWS } from '@/lib/domain/tools/yardstick/parseRedshifts'
 import { formatNumber } from '@/lib/format'
-import { earlyMark } from './useTypedEarly'
+import { earlyMark } from './useListTypedEarly'
 
 export interface LedgerAreaProps {
   label: string

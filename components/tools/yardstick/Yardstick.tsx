@@ -12,7 +12,7 @@ import { Numbers } from './Numbers'
 import { OwnParameters } from './OwnParameters'
 import { RightColumn } from './RightColumn'
 import { SideColumn } from './SideColumn'
-import { useTypedEarly } from './useTypedEarly'
+import { useListTypedEarly } from './useListTypedEarly'
 import { redshiftsFor, useYardstickState } from './useYardstickState'
 
 export interface YardstickProps {
@@ -33,9 +33,7 @@ const modes = [
 /** Redshifts in, distances and times out: computed here as one types, by the engine the server uses. */
 export function Yardstick({ initial, troubles }: YardstickProps) {
   const { state, change } = useYardstickState(initial)
-  useTypedEarly(initial.mode === 'inverse' ? initial.values : initial.z, (text) =>
-    change(initial.mode === 'inverse' ? { values: text } : { z: text }),
-  )
+  useListTypedEarly((text) => change(initial.mode === 'inverse' ? { values: text } : { z: text }))
   // Typing goes first; tables and plots follow when there is time.
   const deferred = useDeferredValue(state)
   const chosen = useMemo(() => chosenUniverses(deferred.cosmologies), [deferred.cosmologies])
