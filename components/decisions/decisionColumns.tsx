@@ -1,6 +1,6 @@
 import type { Seasons } from '@/components/nights/useSeasons'
+import { reviewNumberColumn } from '@/components/panel/reviewNumberColumn'
 import type { TableColumn } from '@/components/tables/tableColumn'
-import { linkClasses } from '@/components/ui/linkClasses'
 import type { DecisionRow } from '@/lib/domain/decisions/decisionsView'
 import { formatNumber } from '@/lib/format'
 import { chanceColumn } from './chanceColumn'
@@ -29,23 +29,7 @@ export function decisionColumns(
         </>
       ),
     },
-    {
-      id: 'number',
-      head: 'Review',
-      unit: 'number',
-      value: (row) => row.reviewNumber,
-      cell: (row) => (
-        <button
-          type="button"
-          id={decisionButtonId(row.proposalId)}
-          aria-expanded={open === row.proposalId}
-          onClick={() => onOpen(open === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} scroll-mt-24 font-semibold whitespace-nowrap max-sm:min-h-11`}
-        >
-          {row.reviewNumber}
-        </button>
-      ),
-    },
+    reviewNumberColumn(open, onOpen, decisionButtonId),
     { id: 'title', head: 'Title', value: (row) => row.title },
     {
       id: 'outcome',

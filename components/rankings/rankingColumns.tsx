@@ -1,7 +1,7 @@
 import { ChanceBar } from '@/components/charts/ChanceBar'
 import { RankInterval } from '@/components/charts/RankInterval'
+import { reviewNumberColumn } from '@/components/panel/reviewNumberColumn'
 import type { TableColumn } from '@/components/tables/tableColumn'
-import { linkClasses } from '@/components/ui/linkClasses'
 import { isGrey } from '@/lib/domain/rankings/rules'
 import type { RankingRow } from '@/lib/domain/rankings/rankingView'
 import { ABSENT, formatNumber, formatSigned } from '@/lib/format'
@@ -71,22 +71,7 @@ export function rankingColumns(input: RankingColumnsInput): TableColumn<RankingR
         </>
       ),
     },
-    {
-      id: 'number',
-      head: 'Review',
-      unit: 'number',
-      value: (row) => row.reviewNumber,
-      cell: (row) => (
-        <button
-          type="button"
-          aria-expanded={selected === row.proposalId}
-          onClick={() => onSelect(selected === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} font-semibold whitespace-nowrap max-sm:min-h-11`}
-        >
-          {row.reviewNumber}
-        </button>
-      ),
-    },
+    reviewNumberColumn(selected, onSelect),
     {
       id: 'title',
       head: 'Title',

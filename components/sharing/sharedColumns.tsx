@@ -1,6 +1,6 @@
 import { UsedBar } from '@/components/charts/UsedBar'
+import { reviewNumberColumn } from '@/components/panel/reviewNumberColumn'
 import type { TableColumn } from '@/components/tables/tableColumn'
-import { linkClasses } from '@/components/ui/linkClasses'
 import type { SharedRow } from '@/lib/domain/sharing/sharingView'
 import { formatNumber } from '@/lib/format'
 
@@ -21,22 +21,7 @@ export function sharedColumns(
         </>
       ),
     },
-    {
-      id: 'number',
-      head: 'Review',
-      unit: 'number',
-      value: (row) => row.reviewNumber,
-      cell: (row) => (
-        <button
-          type="button"
-          aria-expanded={selected === row.proposalId}
-          onClick={() => onSelect(selected === row.proposalId ? null : row.proposalId)}
-          className={`${linkClasses} font-semibold whitespace-nowrap max-sm:min-h-11`}
-        >
-          {row.reviewNumber}
-        </button>
-      ),
-    },
+    reviewNumberColumn(selected, onSelect),
     { id: 'title', head: 'Title', value: (row) => row.title },
     { id: 'panel', head: 'Panel', value: (row) => row.panel },
     { id: 'rank', head: 'Rank', unit: 'in its panel', align: 'right', value: (row) => row.rank },
